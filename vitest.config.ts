@@ -1,0 +1,37 @@
+import react from '@vitejs/plugin-react';
+import { defineConfig } from 'vitest/config';
+
+const root = import.meta.dirname;
+
+// The wrong zone on purpose: code that forgets the household's time zone fails here and not at somebody's pool.
+const env = { TZ: 'Asia/Kathmandu' };
+
+export default defineConfig({
+  resolve: { alias: { '@': root, 'server-only': `${root}/tests/support/empty.ts` } },
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: 'unit',
+          env,
+          include: ['tests/**/*.test.ts'],
+          exclude: ['tests/e2e/**', 'tests/bench/**', '**/node_modules/**'],
+          setupFiles: ['tests/support/seed.ts'],
+          globalSetup: ['tests/support/base-database.ts'],
+        },
+      },
+      {
+        extends: true,
+        plugins: [react()],
+        test: {
+          name: 'component',
+          env,
+          environment: 'jsdom',
+          include: ['tests/**/*.test.tsx'],
+          setupFiles: ['tests/support/seed.ts', 'tests/support/dom.ts'],
+        },
+      },
+    ],
+  },
+});
