@@ -1,0 +1,86 @@
+import { z } from 'zod';
+import { bandSchema, checkSchema, factSchema, needSchema, weekPlanSchema } from './plan';
+import { planDoseSchema } from './plan-dose';
+import { surfaces } from './pool';
+import { recordedReadingSchema } from './reading';
+import { calendarDaySchema, instantSchema, wallIntervalSchema } from './time';
+import { verdictSchema } from './verdict';
+
+export const roles = ['owner', 'caretaker', 'viewer'] as const;
+export type Role = (typeof roles)[number];
+export const unitSystems = ['us', 'metric'] as const;
+
+const sheetDaySchema = z.object({
+  day: calendarDaySchema,
+  /** First instants of this day and of the next: 23, 24 or 25 hours apart. */
+  startsAt: instantSchema,
+  endsAt: instantSchema,
+  sunrise: instantSchema.nullable(),
+  sunset: instantSchema.nullable(),
+  /** UV on the water for each hour of the day, share of the reference sun times sky and exposure. */
+  sun: z.array(z.number()),
+  rain: z.number(),
+  swimmerHours: z.number(),
+});
+
+/** Hour by hour: what is known or promised of the water. One entry for each instant in `hours`. */
+export const sheetCurveSchema = z.object({
+  hours: z.array(instantSchema),
+  freeChlorine: bandSchema.extend({ lowestLevel: z.array(z.number()), swimLimit: z.array(z.number()) }),
+  pH: bandSchema,
+  cyanuricAcid: bandSchema,
+});
+export type SheetCurve = z.infer<typeof sheetCurveSchema>;
+
+/** Everything the week sheet shows, at one moment. */
+export const weekSheetSchema = z.object({
+  now: instantSchema,
+  household: z.object({
+    name: z.string(),
+    timeZone: z.string(),
+    unitSystem: z.enum(unitSystems),
+    locale: z.string(),
+    demo: z.boolean(),
+  }),
+  me: z.object({ id: z.string(), name: z.string(), role: z.enum(roles), handlesChemicals: z.boolean() }),
+  pool: z.object({
+    volume: z.number(),
+    surface: z.enum(surfaces),
+    swimLimit: z.number(),
+    swimLimitSetBy: z.string().nullable(),
+    swimHours: wallIntervalSchema,
+    stabilizerBand: z.tuple([z.number(), z.number()]),
+    recordOnly: z.boolean(),
+  }),
+  days: z.array(sheetDaySchema).length(7),
+  verdict: verdictSchema,
+  /** Behind now: what the plans of their time promised. Null before the first plan. */
+  behind: sheetCurveSchema.nullable(),
+  /** From the newest plan's reading to its end. */
+  ahead: sheetCurveSchema.nullable(),
+  plan: z
+    .object({
+      id: z.uuid(),
+      version: z.number().int(),
+      createdAt: instantSchema,
+      takenAt: instantSchema,
+      endsAt: instantSchema,
+      /** The plan no longer fits what is known (reading over its age, or replanning failed). */
+      stale: z.boolean(),
+      reasons: z.array(factSchema),
+      cautions: z.array(factSchema),
+      broken: weekPlanSchema.shape.broken,
+      needs: z.array(needSchema),
+      alternatives: weekPlanSchema.shape.alternatives,
+      cost: weekPlanSchema.shape.cost,
+      openSwimShare: z.number().nullable(),
+    })
+    .nullable(),
+  /** Set when planning failed: what the person is told, with the id under which it was logged. */
+  planProblem: z.object({ code: z.string(), errorId: z.string() }).nullable(),
+  lastReading: recordedReadingSchema.nullable(),
+  readings: z.array(recordedReadingSchema),
+  doses: z.array(planDoseSchema),
+  checks: z.array(checkSchema.extend({ done: z.boolean() })),
+});
+export type WeekSheet = z.infer<typeof weekSheetSchema>;
