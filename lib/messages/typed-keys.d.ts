@@ -1,0 +1,8 @@
+import type { Catalogue } from './catalogue';
+
+declare module 'next-intl' {
+  interface AppConfig {
+    Locale: 'en';
+    Messages: Catalogue;
+  }
+}
