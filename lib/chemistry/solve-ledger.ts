@@ -1,0 +1,123 @@
+import { ionicStrengthOf } from './activity';
+import { balanceCarbonate, type CarbonateBalance } from './carbonate-balance';
+import { balanceChlorine, type ChlorineBalance } from './chlorine-balance';
+import { constantsAt, type EquilibriumConstants } from './equilibrium-constants';
+import { CHLORINE_MILLIGRAMS_PER_MOLE } from './molar-masses';
+import type { ChlorineSpecies, Ledger, ModelChoice } from './water';
+
+/**
+ * What a ledger is at equilibrium. An integrator keeps one and hands it back: each solve starts from the last.
+ * Chlorine in mg/L as Cl2, carbon dioxide in mol/L.
+ */
+export type LedgerState = {
+  pH: number;
+  hypochlorousAcid: number;
+  hypochlorite: number;
+  cyanurateBound: number;
+  carbonDioxide: number;
+  /** [CO2] - [CO2] in equilibrium with air: what drives gas exchange. */
+  carbonDioxideExcess: number;
+};
+
+/** A state to start from. */
+export function newLedgerState(pH = 7.5): LedgerState {
+  return {
+    pH,
+    hypochlorousAcid: 0,
+    hypochlorite: 0,
+    cyanurateBound: 0,
+    carbonDioxide: 0,
+    carbonDioxideExcess: 0,
+  };
+}
+
+/** Wider than any water: the solver must not fail on a wild dose, only its caller may refuse the answer. */
+export const LOWEST_PH = -2;
+export const HIGHEST_PH = 16;
+const MOST_STEPS = 200;
+const PH_TOLERANCE = 1e-9;
+
+// Working space of a solve, filled anew by each; nothing is carried from one call to the next.
+const chlorine: ChlorineBalance = { hypochlorousAcid: 0, hypochlorite: 0, alkalinity: 0, slope: 0, drift: 0 };
+const carbonate: CarbonateBalance = { carbonDioxide: 0, alkalinity: 0, slope: 0 };
+
+/** The constants a ledger needs at its own temperature and dissolved solids. */
+export function constantsOfLedger(ledger: Ledger, choice?: ModelChoice): EquilibriumConstants {
+  return constantsAt(ledger.temperature, ionicStrengthOf(ledger.dissolvedSolids), choice);
+}
+
+/**
+ * Solves a ledger for pH and writes the equilibrium into `state`; starts from the state's pH and HOCl.
+ *
+ * Root in pH of
+ *   A = [HCO3-] + 2[CO3--] + [CaHCO3+] + 2[CaCO3] + [OH-] - [H+] + [OCl-] + [H2Cy-] + 2[HCy--] + 3[Cy---]
+ *     + [HClCy-] + 2[ClCy--] + [Cl2Cy-] + [B(OH)4-]
+ * whose right side rises strictly with pH at constant totals, so there is one root. Newton with the exact slope, kept
+ * inside a bracket that only shrinks, bisecting whenever it would leave it; within 1e-9 of pH. No input check.
+ */
+export function solveLedger(ledger: Ledger, constants: EquilibriumConstants, state: LedgerState): void {
+  const k = constants.carbonate;
+  const totalChlorine = ledger.freeChlorine / CHLORINE_MILLIGRAMS_PER_MOLE;
+  let low = LOWEST_PH;
+  let high = HIGHEST_PH;
+  let pH = state.pH;
+  let acidGuess = state.hypochlorousAcid / CHLORINE_MILLIGRAMS_PER_MOLE;
+  for (let step = 0; step < MOST_STEPS; step += 1) {
+    const h = Math.exp(-Math.LN10 * pH);
+    balanceChlorine(h, totalChlorine, ledger.cyanurate, constants.chlorine, acidGuess, chlorine);
+    balanceCarbonate(h, ledger.inorganicCarbon, ledger.calcium, k, carbonate);
+    const hydroxide = k.hydroxide / h;
+    const proton = k.proton * h;
+    const borateRatio = k.tetraborate / h;
+    const tetraborate = (ledger.borate * borateRatio) / (1 + borateRatio);
+    const excess = carbonate.alkalinity + chlorine.alkalinity + hydroxide - proton + tetraborate - ledger.alkalinity;
+    const slope = chlorine.slope + carbonate.slope - hydroxide - proton - tetraborate / (1 + borateRatio);
+    if (excess > 0) high = pH;
+    else low = pH;
+    let next = pH + excess / (slope * Math.LN10);
+    if (!(next > low && next < high) && Math.abs(next - pH) > PH_TOLERANCE) next = (low + high) / 2;
+    const change = next - pH;
+    acidGuess = chlorine.hypochlorousAcid * Math.exp(-Math.LN10 * change * chlorine.drift);
+    pH = next;
+    if (Math.abs(change) <= PH_TOLERANCE) break;
+  }
+  state.pH = pH;
+  state.hypochlorousAcid = chlorine.hypochlorousAcid * CHLORINE_MILLIGRAMS_PER_MOLE;
+  state.hypochlorite = chlorine.hypochlorite * CHLORINE_MILLIGRAMS_PER_MOLE;
+  state.cyanurateBound = Math.max(0, ledger.freeChlorine - state.hypochlorousAcid - state.hypochlorite);
+  state.carbonDioxide = carbonate.carbonDioxide;
+  state.carbonDioxideExcess = carbonate.carbonDioxide - k.carbonDioxideInAir;
+}
+
+/**
+ * pH of a ledger. Give a near `guess` and the constants when you hold them: two or three steps then do. No input check.
+ */
+export function pHOfLedger(ledger: Ledger, guess = 7.5, constants = constantsOfLedger(ledger)): number {
+  const state = newLedgerState(guess);
+  solveLedger(ledger, constants, state);
+  return state.pH;
+}
+
+/** Free chlorine by form at a given pH, mg/L as Cl2. No input check. */
+export function speciesOfLedger(ledger: Ledger, pH: number, constants = constantsOfLedger(ledger)): ChlorineSpecies {
+  const total = ledger.freeChlorine / CHLORINE_MILLIGRAMS_PER_MOLE;
+  balanceChlorine(Math.exp(-Math.LN10 * pH), total, ledger.cyanurate, constants.chlorine, 0, chlorine);
+  return speciesOf(ledger.freeChlorine, chlorine);
+}
+
+/** The three forms from a solved balance; bound is what is left, so that they add up exactly. */
+export function speciesOf(freeChlorine: number, balance: ChlorineBalance): ChlorineSpecies {
+  const hypochlorousAcid = balance.hypochlorousAcid * CHLORINE_MILLIGRAMS_PER_MOLE;
+  const hypochlorite = balance.hypochlorite * CHLORINE_MILLIGRAMS_PER_MOLE;
+  return {
+    hypochlorousAcid,
+    hypochlorite,
+    cyanurateBound: Math.max(0, freeChlorine - hypochlorousAcid - hypochlorite),
+  };
+}
+
+/** [CO2] - [CO2] in equilibrium with air (log pCO2 -3.38) at a given pH, mol/L. No input check. */
+export function carbonDioxideExcess(ledger: Ledger, pH: number, constants = constantsOfLedger(ledger)): number {
+  balanceCarbonate(Math.exp(-Math.LN10 * pH), ledger.inorganicCarbon, ledger.calcium, constants.carbonate, carbonate);
+  return carbonate.carbonDioxide - constants.carbonate.carbonDioxideInAir;
+}
