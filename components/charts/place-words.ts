@@ -1,0 +1,66 @@
+/** A rectangle in pixels, from its upper left corner. */
+export type Box = { x: number; y: number; width: number; height: number };
+export type Anchor = 'start' | 'middle' | 'end';
+export type WordLine = { text: string; size: number; weight: 'plain' | 'bold' | 'display' };
+
+/** Words for a place in a chart: where they may stand, the best place first. `y` is the top of the first line. */
+export type Words = {
+  id: string;
+  lines: WordLine[];
+  places: { x: number; y: number; anchor: Anchor }[];
+  /** Left out when every place is taken; other words then stand at their first place all the same. */
+  mayBeLeftOut?: true;
+};
+export type PlacedWords = Words & { x: number; y: number; anchor: Anchor };
+
+const LINE_GAP = 2.5;
+/** Mean width of a character as a share of its size, measured on the two fonts; a little wide on purpose. */
+const characterWidth = { plain: 0.47, bold: 0.51, display: 0.53 } as const;
+
+/**
+ * Places words so that none covers other words, a mark or the curve. In the order given: what stands first chooses first.
+ */
+export function placeWords(words: readonly Words[], taken: readonly Box[], bounds: Box): PlacedWords[] {
+  const placed: PlacedWords[] = [];
+  const occupied = [...taken];
+  for (const candidate of words) {
+    const free = candidate.places.find((place) => {
+      const box = boxOf(candidate.lines, place);
+      return holds(bounds, box) && !occupied.some((other) => overlap(box, other));
+    });
+    const place = free ?? (candidate.mayBeLeftOut ? undefined : candidate.places[0]);
+    if (place === undefined) continue;
+    placed.push({ ...candidate, ...place });
+    occupied.push(boxOf(candidate.lines, place));
+  }
+  return placed;
+}
+
+/** Room that lines of words take at a place. */
+export function boxOf(lines: readonly WordLine[], { x, y, anchor }: { x: number; y: number; anchor: Anchor }): Box {
+  const width = Math.max(...lines.map(({ text, size, weight }) => text.length * size * characterWidth[weight]));
+  const left = anchor === 'start' ? x : anchor === 'end' ? x - width : x - width / 2;
+  return { x: left, y, width, height: heightOf(lines) };
+}
+
+export function heightOf(lines: readonly WordLine[]): number {
+  return lines.reduce((height, { size }) => height + size, 0) + LINE_GAP * (lines.length - 1);
+}
+
+/** Baseline of each line below the top of the first. */
+export function baselinesOf(lines: readonly WordLine[]): number[] {
+  return lines.map((line, index) => heightOf(lines.slice(0, index + 1)) - line.size * 0.2);
+}
+
+function overlap(a: Box, b: Box): boolean {
+  return a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
+}
+
+function holds(outer: Box, inner: Box): boolean {
+  return (
+    inner.x >= outer.x &&
+    inner.y >= outer.y &&
+    inner.x + inner.width <= outer.x + outer.width &&
+    inner.y + inner.height <= outer.y + outer.height
+  );
+}
