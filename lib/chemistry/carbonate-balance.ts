@@ -8,6 +8,8 @@ export type CarbonateBalance = {
   alkalinity: number;
   /** d alkalinity / d ln h at constant C_T and calcium, eq/L; never positive. */
   slope: number;
+  /** Charge per carbon: d ln [CO2] / d ln h at constant totals, but for the few per cent in calcium pairs. */
+  drift: number;
 };
 
 /** Positive root of a z^2 + b z = c with a, c >= 0, without losing digits to cancellation. */
@@ -30,8 +32,9 @@ export function balanceCarbonate(
   k: CarbonateConstants,
   out: CarbonateBalance,
 ): void {
-  const s = (h * h) / k.carbonate;
-  const b = (k.bicarbonate * h) / k.carbonate;
+  const ratio = h / k.carbonate;
+  const s = h * ratio;
+  const b = k.bicarbonate * ratio;
   const pairOne = k.calciumBicarbonate * b;
   const q = pairOne + k.calciumCarbonate;
   const d = s + b + 1;
@@ -46,14 +49,16 @@ export function balanceCarbonate(
   out.alkalinity = ofCarbon;
   if (inorganicCarbon <= 0) {
     out.slope = 0;
+    out.drift = 0;
     return;
   }
+  const charge = ofCarbon / inorganicCarbon;
   const squares = bicarbonate + 4 * z + singlePair + 4 * doublePair;
-  const ofCalcium = singlePair + 2 * doublePair;
   const pairs = singlePair + doublePair;
-  const shared = ofCalcium - (pairs * ofCarbon) / inorganicCarbon;
+  const shared = singlePair + 2 * doublePair - pairs * charge;
   const spread = calcium - (pairs * pairs) / inorganicCarbon;
-  out.slope = -(squares - (ofCarbon * ofCarbon) / inorganicCarbon) + (spread > 0 ? (shared * shared) / spread : 0);
+  out.drift = charge;
+  out.slope = ofCarbon * charge - squares + (spread > 0 ? (shared * shared) / spread : 0);
 }
 
 /** [CO3--] and [Ca++] in mol/L, and C_T, of a given carbonate alkalinity (eq/L, >= 0) at a given activity of H+. */

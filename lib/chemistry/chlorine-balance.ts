@@ -16,6 +16,9 @@ export type ChlorineBalance = {
 
 const MOST_STEPS = 200;
 
+/** Newton doubles the right digits: a step this small (relative) leaves an error near its square. */
+const LAST_STEP = 1e-6;
+
 /**
  * [HOCl] from both mass balances. With D = p0 + p1 x + p2 x^2 + p3 x^3 (cyanurate carrying 0 to 3 chlorine, each over
  * [H3Cy]) the bound chlorine is cyanurate * x D'(x) / D(x), so
@@ -50,19 +53,16 @@ function solveHypochlorousAcid(
     const one = p1 * x;
     const two = p2 * x * x;
     const three = p3 * x * x * x;
-    const all = p0 + one + two + three;
-    const mean = (one + 2 * two + 3 * three) / all;
+    const share = 1 / (p0 + one + two + three);
+    const mean = (one + 2 * two + 3 * three) * share;
     const excess = f * x + cyanurate * mean - chlorine;
     if (excess > 0) high = x;
     else low = x;
-    const steepness = f * x + cyanurate * ((one + 4 * two + 9 * three) / all - mean * mean);
-    let next = x - (x * excess) / steepness;
-    if (!(next > low && next < high)) {
-      if (Math.abs(next - x) <= 1e-12 * x) return x;
-      next = low > 0 ? Math.sqrt(low * high) : 0.1 * high;
-    }
-    if (Math.abs(next - x) <= 1e-9 * x) return next;
-    x = next;
+    const steepness = f * x + cyanurate * ((one + 4 * two + 9 * three) * share - mean * mean);
+    const next = x - (x * excess) / steepness;
+    if (Math.abs(next - x) <= LAST_STEP * x) return next;
+    if (next > low && next < high) x = next;
+    else x = low > 0 ? Math.sqrt(low * high) : 0.1 * high;
   }
   return x;
 }
@@ -112,8 +112,9 @@ export function balanceChlorine(
   const ll = y * x * (p1 + x * (4 * p2 + 9 * x * k.three0)) + x + hypochlorite;
   const la = chargeOne + 2 * chargeTwo + hypochlorite;
   out.alkalinity = a + hypochlorite;
-  const shared = la - (l * a) / cyanurate;
+  const charge = a / cyanurate;
+  const shared = la - l * charge;
   const spread = ll - (l * l) / cyanurate;
   out.drift = spread > 0 ? shared / spread : 0;
-  out.slope = -(aa - (a * a) / cyanurate) + shared * out.drift;
+  out.slope = a * charge - aa + shared * out.drift;
 }

@@ -1,4 +1,5 @@
 import { WaterRangeError } from '@/lib/errors';
+import { measuredRange } from '@/lib/schemas/measured-range';
 
 import type { WaterAnalysis } from './water';
 
@@ -6,15 +7,9 @@ export type Range = readonly [low: number, high: number];
 
 /** What the water model permits. Inside, a fit may be extrapolated; the docstring of the constant says how far it holds. */
 export const PERMITTED = {
-  temperature: [-2, 60],
-  freeChlorine: [0, 200],
-  combinedChlorine: [0, 50],
-  totalAlkalinity: [0, 1000],
-  calciumHardness: [0, 2000],
-  cyanuricAcid: [0, 500],
+  ...measuredRange,
   dissolvedSolids: [0, 30000],
   borate: [0, 100],
-  pH: [5, 10.5],
 } as const satisfies Record<keyof WaterAnalysis, Range>;
 
 /** Speciation at a given pH needs no alkalinity, so it may look further; so may the water after a wild dose. */

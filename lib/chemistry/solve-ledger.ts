@@ -35,11 +35,13 @@ export function newLedgerState(pH = 7.5): LedgerState {
 export const LOWEST_PH = -2;
 export const HIGHEST_PH = 16;
 const MOST_STEPS = 200;
-const PH_TOLERANCE = 1e-9;
+
+/** Newton doubles the right digits: a step of pH this small leaves an error near its square. */
+const LAST_STEP = 1e-4;
 
 // Working space of a solve, filled anew by each; nothing is carried from one call to the next.
 const chlorine: ChlorineBalance = { hypochlorousAcid: 0, hypochlorite: 0, alkalinity: 0, slope: 0, drift: 0 };
-const carbonate: CarbonateBalance = { carbonDioxide: 0, alkalinity: 0, slope: 0 };
+const carbonate: CarbonateBalance = { carbonDioxide: 0, alkalinity: 0, slope: 0, drift: 0 };
 
 /** The constants a ledger needs at its own temperature and dissolved solids. */
 export function constantsOfLedger(ledger: Ledger, choice?: ModelChoice): EquilibriumConstants {
@@ -62,31 +64,41 @@ export function solveLedger(ledger: Ledger, constants: EquilibriumConstants, sta
   let high = HIGHEST_PH;
   let pH = state.pH;
   let acidGuess = state.hypochlorousAcid / CHLORINE_MILLIGRAMS_PER_MOLE;
+  let change = 0;
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const h = Math.exp(-Math.LN10 * pH);
+    const r = 1 / h;
     balanceChlorine(h, totalChlorine, ledger.cyanurate, constants.chlorine, acidGuess, chlorine);
     balanceCarbonate(h, ledger.inorganicCarbon, ledger.calcium, k, carbonate);
-    const hydroxide = k.hydroxide / h;
+    const hydroxide = k.hydroxide * r;
     const proton = k.proton * h;
-    const borateRatio = k.tetraborate / h;
-    const tetraborate = (ledger.borate * borateRatio) / (1 + borateRatio);
+    const borateShare = 1 / (1 + k.tetraborate * r);
+    const tetraborate = ledger.borate * (1 - borateShare);
     const excess = carbonate.alkalinity + chlorine.alkalinity + hydroxide - proton + tetraborate - ledger.alkalinity;
-    const slope = chlorine.slope + carbonate.slope - hydroxide - proton - tetraborate / (1 + borateRatio);
+    const slope = chlorine.slope + carbonate.slope - hydroxide - proton - tetraborate * borateShare;
     if (excess > 0) high = pH;
     else low = pH;
-    let next = pH + excess / (slope * Math.LN10);
-    if (!(next > low && next < high) && Math.abs(next - pH) > PH_TOLERANCE) next = (low + high) / 2;
-    const change = next - pH;
-    acidGuess = chlorine.hypochlorousAcid * Math.exp(-Math.LN10 * change * chlorine.drift);
-    pH = next;
-    if (Math.abs(change) <= PH_TOLERANCE) break;
+    const next = pH + excess / (slope * Math.LN10);
+    change = -Math.LN10 * (next - pH);
+    if (Math.abs(next - pH) <= LAST_STEP) {
+      pH = next;
+      break;
+    }
+    if (next > low && next < high) {
+      pH = next;
+      acidGuess = chlorine.hypochlorousAcid * (1 + change * chlorine.drift);
+    } else {
+      pH = (low + high) / 2;
+      acidGuess = 0;
+    }
   }
+  // The balances stand at the pH before the last step: carry them along to first order.
   state.pH = pH;
-  state.hypochlorousAcid = chlorine.hypochlorousAcid * CHLORINE_MILLIGRAMS_PER_MOLE;
-  state.hypochlorite = chlorine.hypochlorite * CHLORINE_MILLIGRAMS_PER_MOLE;
+  state.hypochlorousAcid = chlorine.hypochlorousAcid * (1 + change * chlorine.drift) * CHLORINE_MILLIGRAMS_PER_MOLE;
+  state.hypochlorite = chlorine.hypochlorite * (1 + change * (chlorine.drift - 1)) * CHLORINE_MILLIGRAMS_PER_MOLE;
   state.cyanurateBound = Math.max(0, ledger.freeChlorine - state.hypochlorousAcid - state.hypochlorite);
-  state.carbonDioxide = carbonate.carbonDioxide;
-  state.carbonDioxideExcess = carbonate.carbonDioxide - k.carbonDioxideInAir;
+  state.carbonDioxide = carbonate.carbonDioxide * (1 + change * carbonate.drift);
+  state.carbonDioxideExcess = state.carbonDioxide - k.carbonDioxideInAir;
 }
 
 /**
