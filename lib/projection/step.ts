@@ -1,0 +1,164 @@
+import type { Ledger, LedgerState } from '@/lib/chemistry';
+import { CHLORINE_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
+import type { Parameters } from './parameters';
+
+/** Loss of each form of chlorine under the reference sun [1/h]. Source: Nowell and Hoigne 1992, Water Research 26:593. */
+const HYPOCHLOROUS_ACID_PHOTOLYSIS = 0.72;
+const HYPOCHLORITE_PHOTOLYSIS = 4.32;
+/** How quickly water takes the active light away [1/m]. */
+const LIGHT_ATTENUATION = 0.15;
+const SHARE_BECOMING_COMBINED = 0.2;
+/** Loss of combined chlorine, open and under a cover [1/h]; practice. */
+const COMBINED_LOSS_OPEN = 0.3 / 24;
+const COMBINED_LOSS_COVERED = 0.1 / 24;
+const CARBON_DIOXIDE_UNDER_COVER = 0.3;
+
+/** What acts on the water in one step, means over it; see Forcing. */
+export type Acting = {
+  sun: number;
+  covered: number;
+  evaporation: number;
+  rain: number;
+  swimmers: number;
+  temperature: number;
+};
+
+/** What slow tablets release in one step, for each hour: chlorine [mg/L/h], cyanurate [mol/L/h], solids [mg/L/h]. */
+export type TabletRelease = { chlorine: number; cyanurate: number; solids: number };
+
+/** What comes in when water is topped up. */
+export type FillWater = Pick<Ledger, 'alkalinity' | 'inorganicCarbon' | 'calcium' | 'dissolvedSolids'>;
+
+/** Where the chlorine went [mg/L]: the sums over all steps. Dosed + released = used + combined + carried out + what is there. */
+export type ChlorineAccount = { dosed: number; released: number; usedUp: number; combined: number; carriedOut: number };
+
+/** Rates of one step; all but the last two hold through it, those come from the water's state. */
+export type StepRates = {
+  swimmerDemand: number;
+  combinedLoss: number;
+  /** Pool water leaving and fill water entering, as shares of the volume [1/h]. */
+  outflow: number;
+  inflow: number;
+  release: TabletRelease;
+  /** First-order loss of free chlorine to sun and dark demand [1/h]. */
+  chlorineLoss: number;
+  /** Inorganic carbon leaving as CO2 [mol/L/h]. */
+  carbonLoss: number;
+};
+
+/**
+ * Mean of the light over the depth, as a share of that at the surface: D = (1 - exp(-K d)) / (K d).
+ *
+ * @param depth mean depth [m], above 0
+ */
+export function lightThroughDepth(depth: number): number {
+  const optical = LIGHT_ATTENUATION * depth;
+  return -Math.expm1(-optical) / optical;
+}
+
+/**
+ * The rates that hold through a step. Water: evaporation is topped up with fill water; rain takes the place of top-up and,
+ * beyond evaporation, overflows; what swimmers carry out and leaks is replaced by fill water.
+ */
+export function ratesOf(acting: Acting, release: TabletRelease, parameters: Parameters, depth: number): StepRates {
+  const replaced = (acting.swimmers * parameters.waterPerSwimmerHour) / 1000 + parameters.leak / 24;
+  const topUp = acting.evaporation - acting.rain;
+  return {
+    swimmerDemand: (acting.swimmers * parameters.chlorinePerSwimmerHour) / parameters.volume,
+    combinedLoss: COMBINED_LOSS_OPEN + acting.covered * (COMBINED_LOSS_COVERED - COMBINED_LOSS_OPEN),
+    outflow: replaced / parameters.volume + Math.max(0, -topUp) / depth,
+    inflow: replaced / parameters.volume + Math.max(0, topUp) / depth,
+    release,
+    chlorineLoss: 0,
+    carbonLoss: 0,
+  };
+}
+
+/** Puts the rates that follow from the water's state into `rates`. */
+export function rateState(
+  rates: StepRates,
+  state: LedgerState,
+  freeChlorine: number,
+  acting: Acting,
+  parameters: Parameters,
+  depth: number,
+): void {
+  const sun = acting.sun * parameters.sunStrength * lightThroughDepth(depth);
+  const underSun =
+    HYPOCHLOROUS_ACID_PHOTOLYSIS * state.hypochlorousAcid +
+    HYPOCHLORITE_PHOTOLYSIS * state.hypochlorite +
+    parameters.boundPhotolysis * state.cyanurateBound;
+  const dark = parameters.darkDemand * 2 ** ((acting.temperature - 27) / 10);
+  rates.chlorineLoss = dark + (freeChlorine > 1e-12 ? (sun * underSun) / freeChlorine : 0);
+  const transfer = parameters.carbonDioxideTransfer * (1 - acting.covered * (1 - CARBON_DIOXIDE_UNDER_COVER));
+  rates.carbonLoss = (transfer / depth) * state.carbonDioxideExcess;
+}
+
+/**
+ * Moves a ledger on by `hours` at constant rates. Free chlorine follows
+ *
+ *     dC/dt = release - demand - (k + outflow) C
+ *
+ * exactly; it never falls below 0 (swimmers then find none). What is used up takes alkalinity with it, 1 mol for 1 mol;
+ * the share that becomes combined does not. Conserved quantities follow their dilution exactly.
+ */
+export function moveOn(
+  ledger: Ledger,
+  rates: StepRates,
+  fill: FillWater,
+  hours: number,
+  account?: ChlorineAccount,
+): void {
+  const before = ledger.freeChlorine;
+  const released = rates.release.chlorine * hours;
+  const loss = rates.chlorineLoss + rates.outflow;
+  const kept = Math.exp(-loss * hours);
+  const filled = loss > 1e-12 ? (1 - kept) / loss : hours;
+  const after = Math.max(0, before * kept + (rates.release.chlorine - rates.swimmerDemand) * filled);
+  const gone = before + released - after;
+  const bySwimmers = Math.min(rates.swimmerDemand * hours, gone);
+  const firstOrder = gone - bySwimmers;
+  const carriedOut = loss > 0 ? (firstOrder * rates.outflow) / loss : 0;
+  const combined = SHARE_BECOMING_COMBINED * bySwimmers;
+  const usedUp = gone - combined - carriedOut;
+  ledger.freeChlorine = after;
+  if (account) {
+    account.released += released;
+    account.usedUp += usedUp;
+    account.combined += combined;
+    account.carriedOut += carriedOut;
+  }
+
+  const combinedLoss = rates.combinedLoss + rates.outflow;
+  const combinedKept = Math.exp(-combinedLoss * hours);
+  ledger.combinedChlorine =
+    ledger.combinedChlorine * combinedKept +
+    (combined / hours) * (combinedLoss > 1e-12 ? (1 - combinedKept) / combinedLoss : hours);
+
+  const left = Math.exp(-rates.outflow * hours);
+  const entered = rates.inflow * (rates.outflow > 1e-12 ? (1 - left) / rates.outflow : hours);
+  ledger.alkalinity = ledger.alkalinity * left + fill.alkalinity * entered - usedUp / CHLORINE_MILLIGRAMS_PER_MOLE;
+  ledger.inorganicCarbon = Math.max(
+    0,
+    ledger.inorganicCarbon * left + fill.inorganicCarbon * entered - rates.carbonLoss * hours,
+  );
+  ledger.calcium = ledger.calcium * left + fill.calcium * entered;
+  ledger.dissolvedSolids =
+    ledger.dissolvedSolids * left + fill.dissolvedSolids * entered + rates.release.solids * hours;
+  ledger.cyanurate = ledger.cyanurate * left + rates.release.cyanurate * hours;
+  ledger.borate *= left;
+}
+
+/** Replaces a share of the water by fill water at once (backwash). */
+export function replaceWater(ledger: Ledger, share: number, fill: FillWater, account?: ChlorineAccount): void {
+  const left = 1 - share;
+  if (account) account.carriedOut += ledger.freeChlorine * share;
+  ledger.freeChlorine *= left;
+  ledger.combinedChlorine *= left;
+  ledger.cyanurate *= left;
+  ledger.borate *= left;
+  ledger.alkalinity = ledger.alkalinity * left + fill.alkalinity * share;
+  ledger.inorganicCarbon = ledger.inorganicCarbon * left + fill.inorganicCarbon * share;
+  ledger.calcium = ledger.calcium * left + fill.calcium * share;
+  ledger.dissolvedSolids = ledger.dissolvedSolids * left + fill.dissolvedSolids * share;
+}
