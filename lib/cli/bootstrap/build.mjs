@@ -1,0 +1,37 @@
+import { readFileSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { buildStamp } from './build-stamp.mjs';
+import { runStep } from './child.mjs';
+import { inRoot, say } from './place.mjs';
+import { Refusal } from './refusal.mjs';
+import { serverOf } from './serving.mjs';
+
+export const nextProgram = inRoot('node_modules/next/dist/bin/next');
+
+/** Builds the production server unless the build that stands there is of these very sources. Call it under the lock. */
+export async function buildIfStale(folder, { force = false } = {}) {
+  const wanted = buildStamp();
+  const stamp = inRoot(folder, 'wadewell-stamp');
+  if (!force && isBuilt(folder) && readOrNothing(stamp) === wanted) return;
+  const server = serverOf(folder);
+  if (server !== undefined) {
+    throw new Refusal(`The sources have changed, and process ${server} still serves the old build: stop it first.`);
+  }
+  say('Building, which takes about half a minute.');
+  await runStep(process.execPath, [nextProgram, 'build'], 'The build did not succeed; the reason stands above.', {
+    env: { ...process.env, NODE_ENV: 'production', NEXT_DIST_DIR: folder, NEXT_TELEMETRY_DISABLED: '1' },
+    stdio: ['ignore', process.stderr, process.stderr],
+  });
+  // Next.js empties the folder before it builds, so a stamp stands only beside a build that was finished.
+  writeFileSync(stamp, wanted);
+}
+
+const isBuilt = (folder) => readOrNothing(join(inRoot(folder), 'BUILD_ID')) !== undefined;
+
+function readOrNothing(file) {
+  try {
+    return readFileSync(file, 'utf8');
+  } catch {
+    return undefined;
+  }
+}

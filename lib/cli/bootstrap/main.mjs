@@ -1,0 +1,69 @@
+import { existsSync } from 'node:fs';
+import { constants } from 'node:os';
+import { buildIfStale } from './build.mjs';
+import { runNode, typescriptEnvironment, typescriptLoader } from './child.mjs';
+import { ensureChromium } from './chromium.mjs';
+import { ensureDependencies } from './dependencies.mjs';
+import { withLock } from './lock.mjs';
+import { inRoot, productFolder, say, testFolder } from './place.mjs';
+import { Interruption, Refusal } from './refusal.mjs';
+import { dev, start } from './serve.mjs';
+import { test, verify } from './suite.mjs';
+
+const commands = { start, dev, build, test, verify, plan, bench, shots };
+
+/** Runs one command; its exit code becomes ours. */
+export async function run(name, args) {
+  const command = Object.hasOwn(commands, name ?? '') ? commands[name] : undefined;
+  if (command === undefined) {
+    say(`There is no command "${name ?? ''}". There are: ${Object.keys(commands).join(', ')}.`);
+    process.exitCode = 2;
+    return;
+  }
+  try {
+    const code = await command(args);
+    if (code !== undefined) process.exitCode = code;
+  } catch (problem) {
+    process.exitCode = exitCodeFor(problem);
+  }
+}
+
+function exitCodeFor(problem) {
+  if (problem instanceof Interruption) return 128 + constants.signals[problem.signal];
+  say(problem instanceof Refusal ? problem.message : problem.stack);
+  return 1;
+}
+
+async function build(args) {
+  await ensureDependencies();
+  await withLock('build', () => buildIfStale(productFolder(), { force: args.includes('--force') }));
+}
+
+async function plan(args) {
+  await ensureDependencies();
+  // npm moves to the project's folder; a scenario is named from where the person stands.
+  const cwd = process.env.npm_lifecycle_event === 'plan' ? process.env.INIT_CWD : process.cwd();
+  return runTypescript('lib/cli/plan.ts', args, { cwd });
+}
+
+async function bench(args) {
+  await ensureDependencies();
+  return runTypescript('tests/bench/run.ts', args);
+}
+
+/** Pictures of every page, from the build that the end-to-end tests use. */
+async function shots(args) {
+  await ensureDependencies();
+  const CHROMIUM_PATH = await ensureChromium();
+  await withLock('build', () => buildIfStale(testFolder));
+  return runTypescript('lib/cli/shots.ts', args, { env: { CHROMIUM_PATH, NEXT_DIST_DIR: testFolder } });
+}
+
+async function runTypescript(file, args, { cwd, env } = {}) {
+  if (!existsSync(inRoot(file))) throw new Refusal(`${file} is missing from this copy of the project.`);
+  const { code } = await runNode([...typescriptLoader, inRoot(file), ...args], {
+    cwd,
+    env: { ...process.env, ...typescriptEnvironment, ...env },
+  });
+  return code;
+}

@@ -1,0 +1,123 @@
+import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { nextProgram } from './build.mjs';
+import { typescriptEnvironment, typescriptLoader } from './child.mjs';
+import { countEndToEnd, countVitest, oneCheck } from './counting.mjs';
+import { inRoot, testFolder, workFolder } from './place.mjs';
+
+/**
+ * The stages of a test run.
+ *
+ * @typedef {object} Stage
+ * @property {string} name
+ * @property {number} minutes after which each of its programs is ended
+ * @property {() => void} [prepare] runs first
+ * @property {string[][]} programs arguments for Node.js; they run one after the other until one fails
+ * @property {Record<string, string>} [env] added to the environment of its programs
+ * @property {boolean} [needsChromium]
+ * @property {boolean} [live] its output is shown as it comes
+ * @property {(line: string) => boolean} [shows] lines worth reading even when all went well
+ * @property {(outcome: { succeeded: boolean, lines: string[] }) => { passed: number, failed: number }} count
+ */
+
+const program = (path) => inRoot('node_modules', path);
+
+export const lint = {
+  name: 'lint',
+  minutes: 5,
+  programs: [[program('eslint/bin/eslint.js'), '.', '--max-warnings', '0']],
+  count: oneCheck,
+};
+
+export const formatting = {
+  name: 'formatting',
+  minutes: 3,
+  programs: [[program('prettier/bin/prettier.cjs'), '--check', '--log-level', 'warn', '.']],
+  count: oneCheck,
+};
+
+const typesConfig = join(workFolder, 'tsconfig.types.json');
+const typesSettings = {
+  extends: '../tsconfig.json',
+  include: ['../next-env.d.ts', '../**/*.ts', '../**/*.tsx', `../${testFolder}/types/**/*.ts`],
+  exclude: ['../node_modules', '../data'],
+  compilerOptions: { tsBuildInfoFile: './types.tsbuildinfo' },
+};
+
+/** Checked with the routes' own types, which Next.js writes; tsconfig.json leaves them out, for they go stale. */
+export const types = {
+  name: 'types',
+  minutes: 5,
+  prepare: () => writeFileSync(typesConfig, JSON.stringify(typesSettings)),
+  programs: [
+    [nextProgram, 'typegen'],
+    [program('typescript/bin/tsc'), '--noEmit', '--project', typesConfig],
+  ],
+  env: { NEXT_DIST_DIR: testFolder },
+  count: oneCheck,
+};
+
+const cruised = [
+  'app',
+  'components',
+  'db',
+  'lib',
+  'tests',
+  'proxy.ts',
+  'instrumentation.ts',
+  'instrumentation-client.ts',
+].filter((path) => existsSync(inRoot(path)));
+
+export const boundaries = {
+  name: 'boundaries',
+  minutes: 3,
+  programs: [
+    // The rules read their list of packages from a TypeScript file.
+    [
+      ...typescriptLoader,
+      program('dependency-cruiser/bin/dependency-cruise.mjs'),
+      ...['--config', inRoot('.dependency-cruiser.mjs'), '--output-type', 'err-long'],
+      ...cruised,
+    ],
+  ],
+  env: typescriptEnvironment,
+  count: oneCheck,
+};
+
+export const unit = vitestProject('unit', 9);
+export const component = vitestProject('component', 5);
+
+function vitestProject(name, minutes) {
+  const report = join(workFolder, `vitest-${name}.json`);
+  return {
+    name,
+    minutes,
+    prepare: () => rmSync(report, { force: true }),
+    programs: [
+      [
+        program('vitest/vitest.mjs'),
+        ...['run', '--project', name, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`],
+      ],
+    ],
+    shows: (line) => /^\s*(reference|seed):|^\s+(Test Files|Tests) /.test(line),
+    count: (outcome) => countVitest(outcome, () => JSON.parse(readFileSync(report, 'utf8'))),
+  };
+}
+
+export const build = {
+  name: 'build',
+  minutes: 6,
+  programs: [[inRoot('lib/cli/bootstrap.mjs'), 'build']],
+  env: { NEXT_DIST_DIR: testFolder },
+  count: oneCheck,
+};
+
+export const endToEnd = {
+  name: 'end to end',
+  minutes: 10,
+  needsChromium: true,
+  live: true,
+  programs: [[...typescriptLoader, inRoot('tests/e2e/run.ts')]],
+  env: { NEXT_DIST_DIR: testFolder, ...typescriptEnvironment },
+  count: countEndToEnd,
+};
