@@ -1,0 +1,58 @@
+import 'server-only';
+import { and, asc, eq, gt, isNull, lte, or } from 'drizzle-orm';
+import type { DatabaseOrTransaction } from '@/db/client';
+import { households, memberships, people, pools } from '@/db/schema';
+import type { ProvenHouseholdId, SystemScope } from '@/lib/schemas/scope';
+
+export async function insertMembership(
+  db: DatabaseOrTransaction,
+  _scope: SystemScope,
+  membership: typeof memberships.$inferInsert,
+): Promise<void> {
+  await db.insert(memberships).values(membership);
+}
+
+/** The households a signed-in person may enter now, oldest membership first. Only the gate and the person's own list ask. */
+export async function listValidMemberships(db: DatabaseOrTransaction, personId: string, now: Date) {
+  return db
+    .select({
+      membershipId: memberships.id,
+      role: memberships.role,
+      handlesChemicals: memberships.handlesChemicals,
+      safetyCardReadAt: memberships.safetyCardReadAt,
+      personName: people.name,
+      household: households,
+      poolCompletedAt: pools.completedAt,
+    })
+    .from(memberships)
+    .innerJoin(households, eq(households.id, memberships.householdId))
+    .innerJoin(people, eq(people.id, memberships.personId))
+    .innerJoin(pools, eq(pools.householdId, memberships.householdId))
+    .where(
+      and(
+        eq(memberships.personId, personId),
+        lte(memberships.validFrom, now),
+        or(isNull(memberships.validUntil), gt(memberships.validUntil, now)),
+        or(isNull(households.expiresAt), gt(households.expiresAt, now)),
+      ),
+    )
+    .orderBy(asc(memberships.validFrom), asc(memberships.id));
+}
+
+/** Marks a member as one who handles chemicals, with the moment the safety card was read; null takes the mark away. */
+export async function markHandlesChemicals(
+  db: DatabaseOrTransaction,
+  {
+    householdId,
+    membershipId,
+    cardReadAt,
+  }: Record<'householdId', ProvenHouseholdId> & {
+    membershipId: string;
+    cardReadAt: Date | null;
+  },
+): Promise<void> {
+  await db
+    .update(memberships)
+    .set(cardReadAt === null ? { handlesChemicals: false } : { handlesChemicals: true, safetyCardReadAt: cardReadAt })
+    .where(and(eq(memberships.householdId, householdId), eq(memberships.id, membershipId)));
+}

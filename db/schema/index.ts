@@ -1,0 +1,13 @@
+export { auditTrail } from './audit-trail';
+export { households } from './households';
+export { memberships } from './memberships';
+export { people } from './people';
+export { doseEvents, planDoses } from './plan-doses';
+export { planFailures, plans } from './plans';
+export { pools } from './pools';
+export { preferences } from './preferences';
+export { rateLimits } from './rate-limits';
+export { readings, readingValues, readingVersions } from './readings';
+export { sessions } from './sessions';
+export { shelfProducts } from './shelf-products';
+export { weekDays } from './week-days';

@@ -1,0 +1,20 @@
+import { sql } from 'drizzle-orm';
+import { check, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+
+export const people = sqliteTable(
+  'people',
+  {
+    id: text('id').primaryKey(),
+    name: text('name').notNull(),
+    /** Lower case; null for the visitor of a demo copy, who has no account. */
+    email: text('email').unique(),
+    /** Argon2id in its PHC text form. */
+    passwordHash: text('password_hash'),
+    createdAt: integer('created_at', { mode: 'timestamp_ms' }).notNull(),
+  },
+  (table) => [
+    check('people_email_goes_with_password', sql`(${table.email} is null) = (${table.passwordHash} is null)`),
+    check('people_email_is_normalised', sql`${table.email} = lower(trim(${table.email}))`),
+    check('people_name_has_length', sql`length(${table.name}) between 1 and 80`),
+  ],
+);

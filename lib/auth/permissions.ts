@@ -1,0 +1,44 @@
+import { AppError } from '@/lib/errors';
+import type { Role } from '@/lib/schemas/week-sheet';
+
+type Rule = { roles: readonly Role[]; handlesChemicals?: true; otherwise: string };
+
+const everyone = ['owner', 'caretaker', 'viewer'] as const;
+const carers = ['owner', 'caretaker'] as const;
+const owners = ['owner'] as const;
+
+const onlyOwners = 'Only an owner of this household can change that.';
+const onlyCarers = 'You can look at this household, but not change it.';
+
+/** What each role may do, in one table; what is refused is said in words. */
+const rules = {
+  look: { roles: everyone, otherwise: 'You cannot see this household.' },
+  'change-household': { roles: owners, otherwise: onlyOwners },
+  'change-pool': { roles: owners, otherwise: onlyOwners },
+  'change-preferences': { roles: owners, otherwise: onlyOwners },
+  'change-shelf': { roles: owners, otherwise: 'Only an owner can add or remove products. You can count what is left.' },
+  'count-stock': { roles: carers, otherwise: onlyCarers },
+  'enter-tests': { roles: carers, otherwise: onlyCarers },
+  'correct-any-test': { roles: owners, otherwise: 'Only an owner can correct the tests of others.' },
+  'change-week-ahead': { roles: carers, otherwise: onlyCarers },
+  plan: { roles: carers, otherwise: onlyCarers },
+  'read-safety-card': { roles: carers, otherwise: onlyCarers },
+  'tick-doses': {
+    roles: carers,
+    handlesChemicals: true,
+    otherwise: 'Only members who handle chemicals, and have read the safety card this season, can tick doses.',
+  },
+} as const satisfies Record<string, Rule>;
+
+export type Permission = keyof typeof rules;
+export type Asker = { role: Role; handlesChemicals: boolean };
+
+export function may(asker: Asker, permission: Permission): boolean {
+  const rule: Rule = rules[permission];
+  return rule.roles.includes(asker.role) && (!rule.handlesChemicals || asker.handlesChemicals);
+}
+
+/** Error: `not-allowed`, with the reason in words. */
+export function assertMay(asker: Asker, permission: Permission): void {
+  if (!may(asker, permission)) throw new AppError('not-allowed', rules[permission].otherwise);
+}

@@ -1,0 +1,96 @@
+import { basename, isAbsolute, join } from 'node:path';
+import { z } from 'zod';
+
+/** The folder that the server was started in: the root of the project. */
+const root = process.cwd();
+
+/** Never used by `npm start`, which makes a secret of its own before anything is served. */
+const developmentSecret = 'development only, not a secret: a production start refuses to run without its own';
+
+const optional = (value: string | undefined) => (value === '' ? undefined : value);
+
+const environmentSchema = z
+  .object({
+    NODE_ENV: z.enum(['development', 'production', 'test']).default('development'),
+    PORT: z.coerce.number().int().min(1).max(65535).default(3000),
+    APP_ORIGIN: z
+      .url({ protocol: /^https?$/, error: 'APP_ORIGIN is an address such as https://pool.example' })
+      .optional(),
+    DATABASE_URL: z.string().optional(),
+    DATABASE_AUTH_TOKEN: z.string().optional(),
+    WADEWELL_SECRET: z.string().min(32, 'WADEWELL_SECRET has 32 characters at least').optional(),
+    TEST_CLOCK: z.iso
+      .datetime({ offset: true, error: 'TEST_CLOCK is an instant such as 2026-07-05T19:00:00-04:00' })
+      .optional(),
+  })
+  .superRefine((values, context) => {
+    if (values.NODE_ENV === 'production' && values.WADEWELL_SECRET === undefined)
+      context.addIssue({
+        code: 'custom',
+        path: ['WADEWELL_SECRET'],
+        message: 'WADEWELL_SECRET is missing: `npm start` writes one into .env.local',
+      });
+    if (values.TEST_CLOCK !== undefined && !basename(databaseUrlOf(values.DATABASE_URL)).includes('test'))
+      context.addIssue({
+        code: 'custom',
+        path: ['TEST_CLOCK'],
+        message: 'TEST_CLOCK is for tests: it is refused unless the name of the database file contains "test"',
+      });
+  });
+
+export type Environment = {
+  production: boolean;
+  development: boolean;
+  port: number;
+  /** Origin that people type, without a slash at the end; decides cookie and security headers. */
+  origin: string;
+  /** Whether that origin speaks https. */
+  secure: boolean;
+  databaseUrl: string;
+  databaseAuthToken: string | undefined;
+  secret: string;
+  /** Milliseconds to add to the wall clock. */
+  clockOffset: number;
+};
+
+/** Reads an environment; throws one line per problem. */
+export function readEnvironment(variables: Readonly<Record<string, string | undefined>>): Environment {
+  const given = Object.fromEntries(Object.entries(variables).map(([name, value]) => [name, optional(value)]));
+  const parsed = environmentSchema.safeParse(given);
+  if (!parsed.success) throw new Error(parsed.error.issues.map(({ message }) => message).join('\n'));
+  const { NODE_ENV, PORT, APP_ORIGIN, DATABASE_URL, DATABASE_AUTH_TOKEN, WADEWELL_SECRET, TEST_CLOCK } = parsed.data;
+  const origin = new URL(APP_ORIGIN ?? `http://127.0.0.1:${PORT}`).origin;
+  return {
+    production: NODE_ENV === 'production',
+    development: NODE_ENV === 'development',
+    port: PORT,
+    origin,
+    secure: origin.startsWith('https:'),
+    databaseUrl: databaseUrlOf(DATABASE_URL),
+    databaseAuthToken: DATABASE_AUTH_TOKEN,
+    secret: WADEWELL_SECRET ?? developmentSecret,
+    // The clock of a test ticks on from the start of the process, the same in every bundle of it.
+    clockOffset: TEST_CLOCK === undefined ? 0 : Date.parse(TEST_CLOCK) - performance.timeOrigin,
+  };
+}
+
+/** A file is named by its absolute path, so that every process opens the same one. */
+function databaseUrlOf(value: string | undefined): string {
+  if (value === undefined) return `file:${join(root, 'data', 'wadewell.db')}`;
+  const path = value.startsWith('file:') ? value.slice('file:'.length) : undefined;
+  if (path === undefined || isAbsolute(path)) return value;
+  return `file:${join(root, path)}`;
+}
+
+let known: Environment | undefined;
+
+/** The environment of this process, read at the first call: the build imports every file and has no secret. */
+export function environment(): Environment {
+  known ??= readEnvironment(process.env);
+  return known;
+}
+
+/** What time it is. The only place that reads the wall clock; everything below is handed the answer. */
+export function now(): Date {
+  return new Date(Date.now() + environment().clockOffset);
+}
