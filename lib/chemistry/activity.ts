@@ -15,6 +15,14 @@ export function ionicStrengthOf(dissolvedSolids: number): number {
 }
 
 /**
+ * Activity of water by Raoult's law for a salt of two ions: 1 - 0.017 * 2 I, as PHREEQC (USGS) has it. A tenth of a per
+ * cent, but it enters HOCl once for each chlorine that leaves cyanurate.
+ */
+export function waterActivity(ionicStrength: number): number {
+  return 1 - 0.034 * ionicStrength;
+}
+
+/**
  * Dielectric constant of water at `celsius`; 87.740 - 0.40008 t + 9.398e-4 t^2 - 1.410e-6 t^3.
  * Range 0 to 100 deg C. Source: Malmberg & Maryott 1956, J. Res. Natl. Bur. Stand. 56:1.
  */

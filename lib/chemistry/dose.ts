@@ -1,6 +1,6 @@
 import { analysisOf, ledgerOf } from './ledger';
 import { CHLORINE_MILLIGRAMS_PER_MOLE } from './molar-masses';
-import { requireInRange, type Range } from './ranges';
+import { requireAboveZero, requireInRange, type Range } from './ranges';
 import { SUBSTANCES, type DoseContents, type Substance } from './substances';
 import type { Ledger, ModelChoice, WaterAnalysis } from './water';
 
@@ -28,7 +28,7 @@ const MOST_ALKALI = 30;
 export function requireProduct(product: DosedProduct): void {
   const facts = SUBSTANCES[product.substance];
   if (product.strength !== undefined) {
-    requireInRange('strength', product.strength, [Number.MIN_VALUE, facts.pureStrength]);
+    requireAboveZero('strength', product.strength, facts.pureStrength);
   }
   if (product.alkali !== undefined) {
     requireInRange('alkali', product.alkali, [0, facts.alkali === undefined ? 0 : MOST_ALKALI]);

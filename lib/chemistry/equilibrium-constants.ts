@@ -1,4 +1,4 @@
-import { activityCoefficients, KELVIN_AT_ZERO, type ActivityCoefficients } from './activity';
+import { activityCoefficients, KELVIN_AT_ZERO, type ActivityCoefficients, waterActivity } from './activity';
 import { cyanurateConstants } from './cyanurate-constants';
 import {
   boricAcidDissociation,
@@ -61,13 +61,14 @@ function powerOfTen(exponent: number): number {
 function chlorineFactors(
   kelvin: number,
   gamma: ActivityCoefficients,
+  water: number,
   choice: ModelChoice | undefined,
 ): ChlorineConstants {
   const set = cyanurateConstants(kelvin, choice?.constants);
   const { neutral, single, double, triple } = gamma;
   const anion = set.firstAcid * neutral;
-  const one = (anion * neutral) / set.oneHydrolysis;
-  const two = (one * neutral) / set.twoHydrolysis;
+  const one = (anion * neutral) / (set.oneHydrolysis * water);
+  const two = (one * neutral) / (set.twoHydrolysis * water);
   return {
     hypochlorite: (powerOfTen(hypochlorousAcidDissociation(kelvin)) * neutral) / single,
     none1: anion / single,
@@ -78,7 +79,7 @@ function chlorineFactors(
     one2: (one * set.oneChlorineBase) / double,
     two0: two / (set.twoChlorineAcid * neutral),
     two1: two / single,
-    three0: two / (set.twoChlorineAcid * set.threeHydrolysis),
+    three0: two / (set.twoChlorineAcid * set.threeHydrolysis * water),
   };
 }
 
@@ -105,7 +106,7 @@ export function chlorineConstantsAt(
   choice?: ModelChoice,
 ): ChlorineConstants {
   const gamma = activityCoefficients(temperature, ionicStrength, choice?.activity);
-  return chlorineFactors(temperature + KELVIN_AT_ZERO, gamma, choice);
+  return chlorineFactors(temperature + KELVIN_AT_ZERO, gamma, waterActivity(ionicStrength), choice);
 }
 
 /**
@@ -115,7 +116,10 @@ export function chlorineConstantsAt(
 export function constantsAt(temperature: number, ionicStrength: number, choice?: ModelChoice): EquilibriumConstants {
   const kelvin = temperature + KELVIN_AT_ZERO;
   const gamma = activityCoefficients(temperature, ionicStrength, choice?.activity);
-  return { chlorine: chlorineFactors(kelvin, gamma, choice), carbonate: carbonateFactors(kelvin, gamma) };
+  return {
+    chlorine: chlorineFactors(kelvin, gamma, waterActivity(ionicStrength), choice),
+    carbonate: carbonateFactors(kelvin, gamma),
+  };
 }
 
 /** log10 of the ion activity product constant of calcite over concentrations: Ksp / gamma2^2. */

@@ -1,6 +1,6 @@
 import { KELVIN_AT_ZERO } from './activity';
 import { MOLAR_MASS } from './molar-masses';
-import { PERMITTED, requireInRange } from './ranges';
+import { PERMITTED, requireAboveZero, requireInRange } from './ranges';
 import { SUBSTANCES } from './substances';
 
 /** Free lye of stored liquid, mol/L: about 0.3 to 0.4 % by weight, as makers add it to keep the liquid alive. */
@@ -38,7 +38,7 @@ export function hypochloriteHalfLife(strength: number, celsius: number): number 
  */
 export function storedHypochloriteStrength(stored: { strength: number; temperature: number; days: number }): number {
   const { strength, temperature, days } = stored;
-  requireInRange('strength', strength, [Number.MIN_VALUE, SUBSTANCES['sodium-hypochlorite'].pureStrength]);
+  requireAboveZero('strength', strength, SUBSTANCES['sodium-hypochlorite'].pureStrength);
   requireInRange('temperature', temperature, PERMITTED.temperature);
   requireInRange('days', days, [0, 36525]);
   return strength / (1 + days / hypochloriteHalfLife(strength, temperature));

@@ -22,6 +22,11 @@ export function requireInRange(field: string, value: number, range: Range): void
   if (!(value >= range[0] && value <= range[1])) throw new WaterRangeError(field, value, range[0], range[1]);
 }
 
+/** @throws WaterRangeError unless 0 < value <= high. */
+export function requireAboveZero(field: string, value: number, high: number): void {
+  if (!(value > 0 && value <= high)) throw new WaterRangeError(field, value, 0, high);
+}
+
 /**
  * Checks every field of an analysis.
  * @throws WaterRangeError naming the first field outside its permitted range.

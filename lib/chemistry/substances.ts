@@ -1,17 +1,8 @@
+import type { substances } from '@/lib/schemas/shelf-product';
+
 import { MOLAR_MASS } from './molar-masses';
 
-export type Substance =
-  | 'trichlor'
-  | 'dichlor'
-  | 'calcium-hypochlorite'
-  | 'sodium-hypochlorite'
-  | 'hydrochloric-acid'
-  | 'sodium-bisulfate'
-  | 'sodium-bicarbonate'
-  | 'sodium-carbonate'
-  | 'calcium-chloride'
-  | 'cyanuric-acid'
-  | 'sodium-thiosulfate';
+export type Substance = (typeof substances)[number];
 
 /** What a dose brings into the water; per unit of amount or in all, as the function that returns it says. */
 export type DoseContents = {
