@@ -1,21 +1,34 @@
 import '@fontsource-variable/atkinson-hyperlegible-next/index.css';
 import '@fontsource-variable/fraunces/full.css';
+import '@fontsource-variable/fraunces/full-italic.css';
 import './globals.css';
-import type { Metadata } from 'next';
+import type { Metadata, Viewport } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { connection } from 'next/server';
+import { UiProvider } from '@/components/ui/ui-provider';
+import { Providers } from '@/lib/client/providers';
+import { ClientMessages } from '@/lib/messages/client-messages';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('common');
   return { title: { default: t('productName'), template: `%s · ${t('productName')}` }, description: t('description') };
 }
 
+export const viewport: Viewport = { width: 'device-width', initialScale: 1, colorScheme: 'light dark' };
+
 export default async function RootLayout({ children }: { children: React.ReactNode }) {
   // Every page is made per request: a page made at build time would carry no nonce and its scripts would be refused.
   await connection();
+  const t = await getTranslations('common');
   return (
     <html lang="en">
-      <body>{children}</body>
+      <body>
+        <ClientMessages>
+          <Providers>
+            <UiProvider closeLabel={t('close')}>{children}</UiProvider>
+          </Providers>
+        </ClientMessages>
+      </body>
     </html>
   );
 }

@@ -1,6 +1,30 @@
+import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
+import { DrawnSheet } from '@/components/start/drawn-sheet';
+import { Hero } from '@/components/start/hero';
+import { LandingFoot } from '@/components/start/landing-foot';
+import { ScopeTable } from '@/components/start/scope-table';
+import { ThreeReasons } from '@/components/start/three-reasons';
+import { YourWeek } from '@/components/start/your-week';
+import { DoubleRule } from '@/components/ui/double-rule';
 
-export default async function LandingPage() {
-  const t = await getTranslations('common');
-  return <h1 className="font-display-soft text-landing">{t('productName')}</h1>;
+export async function generateMetadata(): Promise<Metadata> {
+  const t = await getTranslations('start.landing');
+  return { title: { absolute: t('title') } };
+}
+
+export default function LandingPage() {
+  return (
+    <div className="mx-auto max-w-sheet px-margin">
+      <Hero />
+      <DoubleRule className="hidden md:block" />
+      <div className="grid gap-x-7.5 border-t-todo border-ink md:border-t-0 lg:grid-cols-[1fr_var(--spacing-margin-column)]">
+        <DrawnSheet />
+        <YourWeek />
+      </div>
+      <ThreeReasons />
+      <ScopeTable />
+      <LandingFoot />
+    </div>
+  );
 }

@@ -3,6 +3,7 @@
 import { useId } from 'react';
 import { buttonClass, type ButtonSize, type ButtonVariant } from './button-class';
 import { Spinner } from './spinner';
+import { useHydrated } from './use-hydrated';
 
 export type ButtonProps = Omit<React.ComponentProps<'button'>, 'disabled'> & {
   variant?: ButtonVariant;
@@ -23,6 +24,7 @@ export type ButtonProps = Omit<React.ComponentProps<'button'>, 'disabled'> & {
 export function Button(props: ButtonProps) {
   const { variant, size, wide, busy, offReason, offReasonId, className, children, onClick, type, ...rest } = props;
   const ownReasonId = useId();
+  const hydrated = useHydrated();
   const off = offReason !== undefined || offReasonId !== undefined;
   const inert = off || busy !== undefined;
   const reasonId = offReason === undefined ? offReasonId : ownReasonId;
@@ -31,6 +33,8 @@ export function Button(props: ButtonProps) {
     <button
       {...rest}
       type={type ?? 'button'}
+      // Sent before React listens, a form would leave the page and lose what was typed.
+      disabled={type === 'submit' && !hydrated}
       className={buttonClass({ variant, size, off, wide, className })}
       aria-disabled={inert || undefined}
       aria-busy={busy === undefined ? undefined : true}

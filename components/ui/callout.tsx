@@ -45,23 +45,16 @@ export function Callout({ severity, word, title, children, actions, className }:
   );
 }
 
-/** A caution of one sentence between hairlines; the severity word still comes first. */
-export function InlineStop({
-  word,
-  children,
-  className,
-}: {
-  word: string;
-  children: React.ReactNode;
-  className?: string;
-}) {
+/** A caution of one sentence. The severity word comes first: `<StopWord>Stop.</StopWord> Never ...`. */
+export function InlineStop({ children, className }: { children: React.ReactNode; className?: string }) {
   return (
     <div className={classNames('flex gap-2.5 text-body', className)}>
       <OctagonAlert aria-hidden="true" className="mt-px size-5.5 shrink-0 text-terra-ink" />
-      <p>
-        <strong className="font-severity text-terra-ink">{`${word}. `}</strong>
-        {children}
-      </p>
+      <p>{children}</p>
     </div>
   );
+}
+
+export function StopWord({ children }: { children: React.ReactNode }) {
+  return <strong className="font-severity text-terra-ink">{children}</strong>;
 }

@@ -1,0 +1,26 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import { emergencyCard } from '@/components/navigation/places';
+import { Button } from '@/components/ui/button';
+import { buttonClass } from '@/components/ui/button-class';
+
+/** A page that could not be made. The emergency card is a plain link, so that it loads anew and works without this page. */
+export default function PageProblem({ reset }: { error: Error & { digest?: string }; reset: () => void }) {
+  const t = useTranslations('problems');
+  const common = useTranslations('common');
+  return (
+    <div role="alert" className="mx-auto max-w-sheet px-margin py-12">
+      <h1 className="font-display-soft text-headline">{t('pageTitle')}</h1>
+      <p className="mt-2 mb-6 max-w-reading text-body">{t('pageWords')}</p>
+      <div className="flex flex-wrap gap-2.5">
+        <Button variant="primary" onClick={reset}>
+          {common('tryAgain')}
+        </Button>
+        <a href={emergencyCard} className={buttonClass({})}>
+          {t('emergencyCard')}
+        </a>
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,31 @@
+import type { Metadata } from 'next';
+import { getTranslations } from 'next-intl/server';
+import Link from 'next/link';
+import { connection } from 'next/server';
+import { SignedOutBar } from '@/components/navigation/signed-out-bar';
+import { contentId, SkipLink } from '@/components/navigation/skip-link';
+import { buttonClass } from '@/components/ui/button-class';
+
+export async function generateMetadata(): Promise<Metadata> {
+  const t = await getTranslations('problems');
+  return { title: t('notFoundTitle') };
+}
+
+export default async function NotFound() {
+  // Made per request like every page, so that it carries the nonce.
+  await connection();
+  const t = await getTranslations('problems');
+  return (
+    <>
+      <SkipLink />
+      <SignedOutBar />
+      <main id={contentId} tabIndex={-1} className="mx-auto max-w-sheet px-margin py-12 outline-none">
+        <h1 className="font-display-soft text-headline">{t('notFoundTitle')}</h1>
+        <p className="mt-2 mb-6 max-w-reading text-body">{t('notFoundWords')}</p>
+        <Link href="/" className={buttonClass({ variant: 'primary' })}>
+          {t('backToStart')}
+        </Link>
+      </main>
+    </>
+  );
+}

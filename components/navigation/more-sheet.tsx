@@ -1,0 +1,57 @@
+'use client';
+
+import { ChevronRight, CircleQuestionMark } from 'lucide-react';
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import { Avatar } from '@/components/ui/avatar';
+import { Sheet } from '@/components/ui/sheet';
+import { ringOf } from './faces';
+import type { HouseholdFrame } from './member';
+import { emergencyCard } from './places';
+import { SignOutButton } from './sign-out-button';
+
+export type MoreSheetProps = { frame: HouseholdFrame; open: boolean; onOpenChange: (open: boolean) => void };
+
+/** Everything that has no tab of its own: trouble first, then the places, then who you are. */
+export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
+  const t = useTranslations('navigation');
+  return (
+    <Sheet open={open} onOpenChange={onOpenChange} title={t('moreTitle')} closeLabel={t('closeMore')} aboveTabs>
+      <div className="mx-4 border-t border-rule pt-2.25 pb-1">
+        <p className="text-[14.5px] leading-[19px] text-ink-2">{t('trouble')}</p>
+        <div className="flex flex-wrap gap-x-5">
+          <TroubleLink href={emergencyCard}>{t('emergencyCard')}</TroubleLink>
+          <TroubleLink href="/help/safety">{t('keepingSafe')}</TroubleLink>
+        </div>
+      </div>
+      <Link href="/help" className="mx-4 flex min-h-17 items-center gap-3 border-t border-rule">
+        <CircleQuestionMark aria-hidden="true" className="size-5.75 shrink-0" />
+        <span className="min-w-0 flex-1">
+          <b className="block font-display text-[19px] leading-[23px] font-section">{t('help')}</b>
+          <span className="block text-[14.5px] leading-[19px] text-ink-2">{t('helpFact')}</span>
+        </span>
+        <ChevronRight aria-hidden="true" className="size-5 shrink-0 text-ink-3" />
+      </Link>
+      <div className="mx-4 flex min-h-14 items-center justify-between gap-3 border-t border-ink text-[15px] leading-5">
+        <span className="inline-flex min-w-0 items-center gap-2.25">
+          <Avatar name={frame.you.name} ring={ringOf[frame.you.role]} />
+          <span className="min-w-0 truncate">
+            {t('youAre', { name: frame.you.name, role: t(`role.${frame.you.role}`) })}
+          </span>
+        </span>
+        <SignOutButton />
+      </div>
+    </Sheet>
+  );
+}
+
+function TroubleLink({ href, children }: { href: string; children: React.ReactNode }) {
+  return (
+    <Link
+      href={href}
+      className="inline-flex min-h-11 items-center text-[15.5px] leading-5 font-emphasis underline decoration-1 underline-offset-[3px]"
+    >
+      {children}
+    </Link>
+  );
+}

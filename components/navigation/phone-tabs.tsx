@@ -1,0 +1,61 @@
+'use client';
+
+import { Ellipsis } from 'lucide-react';
+import Link from 'next/link';
+import { usePathname } from 'next/navigation';
+import { useTranslations } from 'next-intl';
+import { useState } from 'react';
+import { classNames } from '@/components/ui/class-names';
+import type { HouseholdFrame } from './member';
+import { MoreSheet } from './more-sheet';
+import { isCurrent, weeklyPlaces } from './places';
+
+const tab =
+  'relative -mt-px flex h-tabs cursor-pointer flex-col items-center justify-center gap-1 border-t-[3px] text-[13.5px] leading-4';
+
+/** The bar at the foot of a phone. More stays marked in every place it led to. */
+export function PhoneTabs({ frame }: { frame: HouseholdFrame }) {
+  const t = useTranslations('navigation');
+  const path = usePathname();
+  // Open for one address only, so that going somewhere closes it.
+  const [openAt, setOpenAt] = useState<string | null>(null);
+  const open = openAt === path;
+  const elsewhere = !weeklyPlaces.some(({ href }) => isCurrent(href, path));
+  const look = (current: boolean) =>
+    classNames(tab, current ? 'border-ink font-strong text-ink' : 'border-transparent text-ink-2');
+
+  return (
+    <>
+      <MoreSheet frame={frame} open={open} onOpenChange={(next) => setOpenAt(next ? path : null)} />
+      <nav
+        aria-label={t('places')}
+        className="fixed inset-x-0 bottom-0 z-25 grid auto-cols-fr grid-flow-col border-t border-ink bg-paper-lift md:hidden print:hidden"
+      >
+        {weeklyPlaces.map(({ href, shortName, Icon }) => {
+          const current = !open && isCurrent(href, path);
+          return (
+            <Link
+              key={href}
+              href={href}
+              aria-current={isCurrent(href, path) ? 'page' : undefined}
+              className={look(current)}
+            >
+              <Icon aria-hidden="true" className="size-5.75" />
+              {t(shortName)}
+            </Link>
+          );
+        })}
+        <button
+          type="button"
+          aria-haspopup="dialog"
+          aria-expanded={open}
+          className={look(open || elsewhere)}
+          onClick={() => setOpenAt(open ? null : path)}
+        >
+          <Ellipsis aria-hidden="true" className="size-5.75" />
+          {t('more')}
+        </button>
+      </nav>
+    </>
+  );
+}

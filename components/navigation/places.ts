@@ -1,0 +1,18 @@
+import { CalendarDays, TestTubeDiagonal } from 'lucide-react';
+
+/**
+ * The places that exist today, in the order of a week. A place is added here when its pages are; a name that led nowhere
+ * would be worse than no name.
+ */
+export const weeklyPlaces = [
+  { href: '/week', name: 'week', shortName: 'weekShort', Icon: CalendarDays },
+  { href: '/test', name: 'test', shortName: 'testShort', Icon: TestTubeDiagonal },
+] as const;
+
+export const emergencyCard = '/help/emergency';
+
+/** Is this address, or one below it, where we are? The emergency card has a name of its own beside Help. */
+export function isCurrent(href: string, path: string): boolean {
+  if (href === '/help' && path.startsWith(emergencyCard)) return false;
+  return path === href || path.startsWith(`${href}/`);
+}

@@ -1,0 +1,56 @@
+import { Siren } from 'lucide-react';
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import { buttonClass } from '@/components/ui/button-class';
+import { DoubleRule } from '@/components/ui/double-rule';
+import { BarLink } from './bar-link';
+import { BrandMark } from './brand-mark';
+import { emergencyCard } from './places';
+import { SirenLink } from './siren-link';
+
+/** The bar before anyone has signed in: words only on a desk, mark and siren on a phone. */
+export function SignedOutBar() {
+  const t = useTranslations('navigation');
+  const common = useTranslations('common');
+  return (
+    <header>
+      <div className="mx-auto flex h-15 max-w-sheet items-center gap-5 px-margin md:h-13.5 lg:gap-7.5">
+        <Link href="/" className="inline-flex min-h-11 items-center gap-2.5 font-display text-brand">
+          <BrandMark />
+          {common('productName')}
+        </Link>
+        <nav aria-label={t('places')} className="ml-3 hidden gap-6 md:flex">
+          <BarLink href="/help/safety">{t('keepingSafe')}</BarLink>
+          <Link
+            href="/#for-your-pool"
+            className="inline-flex min-h-11 items-center text-[15px] leading-5 whitespace-nowrap text-ink-2 hover:text-ink"
+          >
+            {t('forYourPool')}
+          </Link>
+          <BarLink href="/help">{t('help')}</BarLink>
+        </nav>
+        <nav aria-label={t('setUp')} className="ml-auto flex items-center gap-3 md:gap-6">
+          <span className="hidden md:inline">
+            <BarLink href={emergencyCard} loud>
+              <Siren aria-hidden="true" className="size-4.25" />
+              {t('emergency')}
+            </BarLink>
+          </span>
+          <span className="md:hidden">
+            <SirenLink />
+          </span>
+          <Link
+            href="/sign-in"
+            className="inline-flex min-h-11 items-center text-[16px] leading-5 underline decoration-1 underline-offset-[3px] md:text-[15px]"
+          >
+            {t('signIn')}
+          </Link>
+          <Link href="/sign-up" className={buttonClass({ size: 'small', className: 'hidden md:inline-flex' })}>
+            {t('signUp')}
+          </Link>
+        </nav>
+      </div>
+      <DoubleRule className="mx-margin md:hidden" />
+    </header>
+  );
+}

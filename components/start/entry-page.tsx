@@ -1,0 +1,15 @@
+import { DoubleRule } from '@/components/ui/double-rule';
+
+/** The page round a form that opens a door. */
+export function EntryPage({ title, lead, children }: { title: string; lead: string; children: React.ReactNode }) {
+  return (
+    <div className="mx-auto max-w-sheet px-margin">
+      <DoubleRule className="hidden md:block" />
+      <div className="mx-auto max-w-form pt-6 pb-16 md:pt-12">
+        <h1 className="font-display-soft text-headline">{title}</h1>
+        <p className="mt-1 mb-6 text-body text-ink-2">{lead}</p>
+        {children}
+      </div>
+    </div>
+  );
+}

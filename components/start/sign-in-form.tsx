@@ -1,0 +1,60 @@
+'use client';
+
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import { textLink } from '@/components/ui/text-link';
+import { Button } from '@/components/ui/button';
+import { ProblemState } from '@/components/ui/problem-state';
+import { TextField } from '@/components/ui/text-field';
+import { signIn } from '@/lib/client/session';
+import { looksLikeEmail } from './email-shape';
+import { PasswordField } from './password-field';
+import { useEntryForm } from './use-entry-form';
+
+const fields = ['email', 'password'] as const;
+
+export function SignInForm() {
+  const t = useTranslations('start.signIn');
+  const form = useTranslations('start.form');
+  const { problems, failure, busy, forgive, submit } = useEntryForm(
+    fields,
+    ({ email, password }) => ({
+      ...(looksLikeEmail(email) ? {} : { email: email.trim() === '' ? form('empty') : form('emailShape') }),
+      ...(password === '' ? { password: form('empty') } : {}),
+    }),
+    ({ email, password }) => signIn({ email: email.trim(), password }),
+  );
+  return (
+    <form method="post" noValidate onSubmit={submit} className="grid gap-5">
+      {failure === undefined ? null : <ProblemState title={failure} />}
+      <TextField
+        label={t('email')}
+        name="email"
+        type="email"
+        autoComplete="email"
+        inputMode="email"
+        problem={problems.email}
+        onChange={() => forgive('email')}
+      />
+      <PasswordField
+        label={t('password')}
+        name="password"
+        autoComplete="current-password"
+        problem={problems.password}
+        onChange={() => forgive('password')}
+      />
+      <Button type="submit" variant="primary" size="large" wide busy={busy ? t('busy') : undefined}>
+        {t('submit')}
+      </Button>
+      <p className="text-body">
+        {t.rich('noSheet', {
+          link: (words) => (
+            <Link href="/sign-up" className={textLink}>
+              {words}
+            </Link>
+          ),
+        })}
+      </p>
+    </form>
+  );
+}

@@ -1,0 +1,104 @@
+'use client';
+
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import { textLink } from '@/components/ui/text-link';
+import { useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { ProblemState } from '@/components/ui/problem-state';
+import { Segments } from '@/components/ui/segments';
+import { TextField } from '@/components/ui/text-field';
+import { useHydrated } from '@/components/ui/use-hydrated';
+import { browserTimeZone, signUp, type SignUp } from '@/lib/client/session';
+import { looksLikeEmail } from './email-shape';
+import { PasswordField } from './password-field';
+import { useEntryForm } from './use-entry-form';
+
+const fields = ['name', 'email', 'password', 'householdName'] as const;
+
+export function SignUpForm({ likelyUnits }: { likelyUnits: SignUp['unitSystem'] }) {
+  const t = useTranslations('start.signUp');
+  const form = useTranslations('start.form');
+  const [unitSystem, setUnitSystem] = useState(likelyUnits);
+  const hydrated = useHydrated();
+  const { problems, failure, busy, forgive, submit } = useEntryForm(
+    fields,
+    ({ name, email, password, householdName }) => ({
+      ...(name.trim() === '' ? { name: form('empty') } : {}),
+      ...(looksLikeEmail(email) ? {} : { email: email.trim() === '' ? form('empty') : form('emailShape') }),
+      ...(password === '' ? { password: form('empty') } : {}),
+      ...(householdName.trim() === '' ? { householdName: form('empty') } : {}),
+    }),
+    ({ name, email, password, householdName }) =>
+      signUp({
+        name: name.trim(),
+        email: email.trim(),
+        password,
+        householdName: householdName.trim(),
+        timeZone: browserTimeZone(),
+        unitSystem,
+        locale: navigator.language,
+      }),
+  );
+  return (
+    <form method="post" noValidate onSubmit={submit} className="grid gap-5">
+      {failure === undefined ? null : <ProblemState title={failure} />}
+      <TextField
+        label={t('name')}
+        hint={t('nameHint')}
+        name="name"
+        autoComplete="given-name"
+        problem={problems.name}
+        onChange={() => forgive('name')}
+      />
+      <TextField
+        label={t('email')}
+        hint={t('emailHint')}
+        name="email"
+        type="email"
+        autoComplete="email"
+        inputMode="email"
+        problem={problems.email}
+        onChange={() => forgive('email')}
+      />
+      <PasswordField
+        label={t('password')}
+        hint={t('passwordHint')}
+        name="password"
+        autoComplete="new-password"
+        problem={problems.password}
+        onChange={() => forgive('password')}
+      />
+      <TextField
+        label={t('householdName')}
+        hint={t('householdNameHint')}
+        name="householdName"
+        autoComplete="off"
+        problem={problems.householdName}
+        onChange={() => forgive('householdName')}
+      />
+      <Segments
+        label={t('units')}
+        hint={hydrated ? t('timeZone', { zone: browserTimeZone() }) : undefined}
+        choices={[
+          { value: 'metric', label: t('metric'), detail: t('metricNote') },
+          { value: 'us', label: t('us'), detail: t('usNote') },
+        ]}
+        value={unitSystem}
+        onChange={setUnitSystem}
+      />
+      <Button type="submit" variant="primary" size="large" wide busy={busy ? t('busy') : undefined}>
+        {t('submit')}
+      </Button>
+      <p className="text-body">
+        {t.rich('haveSheet', {
+          link: (words) => (
+            <Link href="/sign-in" className={textLink}>
+              {words}
+            </Link>
+          ),
+        })}
+      </p>
+    </form>
+  );
+}

@@ -1,0 +1,5 @@
+import { config } from 'zod/v4/core';
+
+// zod compiles its schemas with `new Function` unless told not to; the content security policy refuses that and reports it.
+// This file runs before any page's own code, so before the first schema is made.
+config({ jitless: true });

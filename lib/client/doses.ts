@@ -1,0 +1,31 @@
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import type { DoseTick } from '@/lib/schemas/plan-dose';
+import { weekSheetSchema } from '@/lib/schemas/week-sheet';
+import { fetchJson } from './fetch-json';
+import { weekKeys } from './week';
+
+export type SentTick = { doseId: string; tick: DoseTick };
+
+/**
+ * Says what became of a dose. The reply is the whole sheet with its new plan, so the curve moves at once; a sheet of
+ * another week only goes stale. Never held back while offline: the caller keeps what could not be sent.
+ *
+ * @param start the week on the screen, as it was asked for
+ */
+export function useTickDose(start: string | undefined) {
+  const queryClient = useQueryClient();
+  return useMutation({
+    mutationKey: ['tick-dose'],
+    networkMode: 'always',
+    mutationFn: ({ doseId, tick }: SentTick) =>
+      fetchJson(`/api/doses/${doseId}/ticks`, weekSheetSchema, { method: 'POST', body: tick }),
+    onSuccess: async (sheet) => {
+      const shown = weekKeys.starting(start);
+      // A refetch that set out before the tick would bring the old sheet back.
+      await queryClient.cancelQueries({ queryKey: weekKeys.all });
+      const known = queryClient.getQueryData<typeof sheet>(shown);
+      if (known === undefined || known.days[0]?.day === sheet.days[0]?.day) queryClient.setQueryData(shown, sheet);
+      await queryClient.invalidateQueries({ queryKey: weekKeys.all, refetchType: 'none' });
+    },
+  });
+}

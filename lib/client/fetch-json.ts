@@ -1,0 +1,107 @@
+import type { ErrorCode, FieldProblem } from '@/lib/errors';
+
+/** What can go wrong with a request, seen from the browser: the server's own codes, no answer at all, or a bug. */
+export type RequestProblemCode = ErrorCode | 'no-connection' | 'unexpected';
+
+export class RequestProblem extends Error {
+  readonly code: RequestProblemCode;
+  /** One per field, worded for the person who typed it. */
+  readonly problems: readonly FieldProblem[];
+
+  constructor(
+    code: RequestProblemCode,
+    message: string,
+    problems: readonly FieldProblem[] = [],
+    options?: ErrorOptions,
+  ) {
+    super(message, options);
+    this.name = new.target.name;
+    this.code = code;
+    this.problems = problems;
+  }
+
+  /** The words for one field, or undefined when that field is fine. */
+  at(path: string): string | undefined {
+    return this.problems.find((problem) => problem.path === path)?.message;
+  }
+}
+
+export type JsonRequest = {
+  method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
+  body?: unknown;
+  signal?: AbortSignal;
+};
+
+/** Anything that checks a reply and returns it typed; the zod schemas of lib/schemas do. */
+export type ReplyParser<Reply> = { parse(value: unknown): Reply };
+
+const PATIENCE_MS = 20_000;
+
+/** Sends JSON, checks the reply, and turns every failure into a RequestProblem. */
+export async function fetchJson<Reply>(
+  address: string,
+  reply: ReplyParser<Reply>,
+  { method = 'GET', body, signal }: JsonRequest = {},
+): Promise<Reply> {
+  const patience = AbortSignal.timeout(PATIENCE_MS);
+  const response = await fetch(address, {
+    method,
+    headers:
+      body === undefined
+        ? { accept: 'application/json' }
+        : { accept: 'application/json', 'content-type': 'application/json' },
+    signal: signal === undefined ? patience : AbortSignal.any([signal, patience]),
+    ...(body === undefined ? {} : { body: JSON.stringify(body) }),
+  }).catch((cause: unknown) => {
+    // A request that the caller gave up is not a problem to show.
+    if (signal?.aborted) throw cause;
+    throw new RequestProblem('no-connection', `No answer from ${address}`, [], { cause });
+  });
+
+  const answer: unknown = response.status === 204 ? undefined : await response.json().catch(() => undefined);
+  if (!response.ok) throw problemOf(answer, address, response.status);
+  try {
+    return reply.parse(answer);
+  } catch (cause) {
+    throw new RequestProblem('unexpected', `The reply of ${address} has an unknown form`, [], { cause });
+  }
+}
+
+function problemOf(answer: unknown, address: string, status: number): RequestProblem {
+  if (isRecord(answer) && isRecord(answer.error) && isErrorCode(answer.error.code)) {
+    const { code, message, problems } = answer.error;
+    return new RequestProblem(
+      code,
+      typeof message === 'string' ? message : `${address} answered ${status}`,
+      Array.isArray(problems) ? problems.filter(isFieldProblem) : [],
+    );
+  }
+  return new RequestProblem('unexpected', `${address} answered ${status}`);
+}
+
+/** Complete by construction: the compiler asks for every code of lib/errors. */
+const errorCodes: Record<ErrorCode, true> = {
+  'invalid-input': true,
+  'signed-out': true,
+  'wrong-sign-in': true,
+  'not-allowed': true,
+  'not-found': true,
+  conflict: true,
+  'too-many-requests': true,
+  'water-out-of-range': true,
+  'target-unreachable': true,
+  'plan-refused': true,
+  'engine-busy': true,
+};
+
+function isErrorCode(value: unknown): value is ErrorCode {
+  return typeof value === 'string' && Object.hasOwn(errorCodes, value);
+}
+
+function isRecord(value: unknown): value is Record<string, unknown> {
+  return typeof value === 'object' && value !== null;
+}
+
+function isFieldProblem(value: unknown): value is FieldProblem {
+  return isRecord(value) && typeof value.path === 'string' && typeof value.message === 'string';
+}

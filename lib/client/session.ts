@@ -1,0 +1,57 @@
+import { fetchJson, type ReplyParser } from './fetch-json';
+
+export type SignIn = { email: string; password: string };
+
+export type SignUp = {
+  name: string;
+  email: string;
+  password: string;
+  householdName: string;
+  /** The browser's IANA zone: the pool is nearly always where it is described from. */
+  timeZone: string;
+  unitSystem: 'metric' | 'us';
+  locale: string;
+};
+
+/** Where to go after signing in or up: an address of our own, never another site's. */
+const whereNext: ReplyParser<{ next: string }> = {
+  parse(value) {
+    const next = typeof value === 'object' && value !== null && 'next' in value ? value.next : undefined;
+    if (typeof next !== 'string' || !/^\/(?!\/)/.test(next))
+      throw new TypeError('The reply names no address of our own');
+    return { next };
+  },
+};
+
+/** The zone this browser lives in. */
+export function browserTimeZone(): string {
+  // eslint-disable-next-line no-restricted-syntax -- it is asked for its name, nothing is formatted
+  return Intl.DateTimeFormat().resolvedOptions().timeZone;
+}
+
+const nothing: ReplyParser<undefined> = { parse: () => undefined };
+
+export function signIn(entry: SignIn): Promise<{ next: string }> {
+  return fetchJson('/api/sign-in', whereNext, { method: 'POST', body: entry });
+}
+
+export function signUp(entry: SignUp): Promise<{ next: string }> {
+  return fetchJson('/api/sign-up', whereNext, { method: 'POST', body: entry });
+}
+
+export async function signOut(): Promise<void> {
+  await fetchJson('/api/sign-out', nothing, { method: 'POST' });
+}
+
+/** Opens a private copy of the demo household; the cookie comes with the reply. */
+export async function lookRound(): Promise<void> {
+  await fetchJson('/api/look-round', nothing, { method: 'POST' });
+}
+
+/**
+ * Leaves by loading the page anew and not by a soft navigation: who is signed in has changed, so nothing that was kept
+ * in memory for the one before may be shown to the next.
+ */
+export function leaveFor(address: string): void {
+  window.location.assign(address);
+}
