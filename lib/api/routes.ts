@@ -1,0 +1,97 @@
+import 'server-only';
+import type { z } from 'zod';
+import type { Permission } from '@/lib/auth/permissions';
+import { assertMay } from '@/lib/auth/permissions';
+import {
+  type HouseholdVisit,
+  householdVisitOf,
+  type OpenVisit,
+  openVisit,
+  signedInOf,
+  type Visit,
+} from '@/lib/auth/visit';
+import type { SignedIn } from '@/lib/auth/sessions';
+import { checkInput } from '@/lib/schemas/problems';
+import { readJson } from './read-body';
+import { invalidInput, jsonReply, problemReply } from './replies';
+import { assertSameOrigin } from './same-origin';
+
+/** What Next.js hands a route beside the request. */
+type Segment = { params: Promise<Record<string, string | string[] | undefined>> };
+export type Handler = (request: Request, segment?: Segment) => Promise<Response>;
+
+/**
+ * What may come in, what goes out, and which service. `input` is read from the body, in a GET from the query; `params`
+ * from the path. The reply is parsed as well, so that a new column of a table cannot leak.
+ */
+export type RouteOf<Context, Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType> = {
+  input?: Input;
+  params?: Params;
+  reply: Reply;
+  handle: (context: Context, input: z.output<Input>, params: z.output<Params>) => Promise<z.input<Reply>>;
+};
+
+/** A visit of somebody who is signed in, whichever household it is about. */
+export type PersonVisit = Visit & { signedIn: SignedIn };
+
+/** For anybody: signing up, signing in. */
+export function publicRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
+  route: RouteOf<Visit, Input, Params, Reply>,
+): Handler {
+  return answering(route, (visit) => Promise.resolve(visit));
+}
+
+/** For whoever is signed in, in no household in particular. */
+export function personRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
+  route: RouteOf<PersonVisit, Input, Params, Reply>,
+): Handler {
+  return answering(route, (visit) => Promise.resolve(Object.assign(visit, { signedIn: signedInOf(visit) })));
+}
+
+/**
+ * For members of a household. `may` is checked before anything that was sent is looked at; the service checks again what
+ * it needs, because it has other callers.
+ */
+export function householdRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
+  route: RouteOf<HouseholdVisit, Input, Params, Reply> & { may: Permission },
+): Handler {
+  return answering(route, async (visit) => {
+    const household = await householdVisitOf(visit);
+    assertMay(household.access, route.may);
+    return household;
+  });
+}
+
+function answering<Context, Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
+  route: RouteOf<Context, Input, Params, Reply>,
+  contextOf: (visit: OpenVisit) => Promise<Context>,
+): Handler {
+  return async (request, segment) => {
+    try {
+      assertSameOrigin(request);
+      const visit = await openVisit(request.headers);
+      const context = await contextOf(visit);
+      const params = checked(route.params, (await segment?.params) ?? {});
+      const input = checked(route.input, route.input && (await sent(request)));
+      const reply = jsonReply(route.reply.parse(await route.handle(context, input, params)));
+      for (const cookie of visit.cookies) reply.headers.append('set-cookie', cookie);
+      return reply;
+    } catch (error) {
+      return problemReply(error, { method: request.method, path: new URL(request.url).pathname });
+    }
+  };
+}
+
+function sent(request: Request): Promise<unknown> {
+  return request.method === 'GET'
+    ? Promise.resolve(Object.fromEntries(new URL(request.url).searchParams))
+    : readJson(request);
+}
+
+/** A route that names no schema gets nothing, whatever was sent. */
+function checked<Schema extends z.ZodType>(schema: Schema | undefined, value: unknown): z.output<Schema> {
+  if (!schema) return undefined as z.output<Schema>;
+  const checkedValue = checkInput(schema, value);
+  if (!checkedValue.sound) throw invalidInput(checkedValue.problems);
+  return checkedValue.value;
+}

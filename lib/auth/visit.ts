@@ -1,0 +1,81 @@
+import 'server-only';
+import { createHmac } from 'node:crypto';
+import { type Database, database } from '@/db/client';
+import { environment, now as wallClock } from '@/lib/env';
+import { AppError } from '@/lib/errors';
+import { type HouseholdAccess, proveHousehold } from './household-access';
+import { type SignedIn, sessionsOf } from './sessions';
+
+/** One request, as services that know no household see it. */
+export type Visit = {
+  db: Database;
+  now: Date;
+  /** Who is signed in on this device; null for nobody. */
+  signedIn: SignedIn | null;
+  /** Signs a person in on this device, in place of whoever was. */
+  enter(personId: string, householdId: string | null): Promise<void>;
+  /** Signs out on this device. */
+  leave(): Promise<void>;
+  /** Names something that is counted, such as an e-mail or the address of the visitor, without giving it away. */
+  keyOf(what: string, value: string): string;
+  /** Network address, as far as it can be known. */
+  address: string;
+};
+
+/** What a service of a household is handed. */
+export type HouseholdVisit = { db: Database; access: HouseholdAccess; now: Date };
+
+/** A visit with the cookies it wants to set, for whoever writes the reply. */
+export type OpenVisit = Visit & { readonly cookies: readonly string[] };
+
+type Surroundings = { db: Database; now: Date; secure: boolean; secret: string };
+
+/** Looks at the headers of a request, once: who is asking, and from where. */
+export async function openVisit(
+  headers: Headers,
+  { db, now, secure, secret }: Surroundings = surroundings(),
+): Promise<OpenVisit> {
+  const sessions = sessionsOf(db, { secure, secret });
+  const found = await sessions.find(headers.get('cookie'));
+  const cookies = found?.prolonged ? [found.prolonged] : [];
+  const visit = {
+    db,
+    now,
+    cookies,
+    signedIn: found?.signedIn ?? null,
+    // A proxy in front appends the address it saw. Without one this can be what the visitor claims, so nothing that
+    // matters relies on it alone: sign-in is also limited by e-mail.
+    address: headers.get('x-forwarded-for')?.split(',').at(-1)?.trim() ?? 'unknown',
+    keyOf: (what: string, value: string) =>
+      `${what} ${createHmac('sha256', secret).update(`${what} ${value}`).digest('base64url')}`,
+    async enter(personId: string, householdId: string | null) {
+      if (visit.signedIn) await sessions.end(visit.signedIn.sessionId);
+      const started = await sessions.start(personId, householdId);
+      visit.signedIn = started.signedIn;
+      cookies.splice(0, cookies.length, started.cookie);
+    },
+    async leave() {
+      cookies.splice(0, cookies.length, await sessions.end(visit.signedIn?.sessionId ?? null));
+      visit.signedIn = null;
+    },
+  };
+  return visit;
+}
+
+function surroundings(): Surroundings {
+  const { secure, secret } = environment();
+  return { db: database(), now: wallClock(), secure, secret };
+}
+
+/** Error: `signed-out` when nobody is signed in. */
+export function signedInOf({ signedIn }: Visit): SignedIn {
+  if (!signedIn) throw new AppError('signed-out', 'You are signed out. Sign in, then try again.');
+  return signedIn;
+}
+
+/** The household that this visit is about, proven now. Errors: `signed-out`, `not-allowed`. */
+export async function householdVisitOf(visit: Visit): Promise<HouseholdVisit> {
+  const { personId, householdId } = signedInOf(visit);
+  const { db, now } = visit;
+  return { db, now, access: await proveHousehold(db, { personId, householdId, now }) };
+}

@@ -1,0 +1,69 @@
+import { z } from 'zod';
+import { isTimeZone } from '@/lib/calendar/wall-time';
+import { timeZoneSchema } from './time';
+import { unitSystems } from './week-sheet';
+
+export const personNameSchema = z
+  .string({ error: 'Write your name.' })
+  .trim()
+  .min(1, 'Write your name.')
+  .max(80, 'Keep the name under 80 characters.');
+
+export const householdNameSchema = z
+  .string({ error: 'Write what you call the pool or the house.' })
+  .trim()
+  .min(1, 'Write what you call the pool or the house.')
+  .max(80, 'Keep the name under 80 characters.');
+
+export const knownTimeZoneSchema = timeZoneSchema.refine(isTimeZone, 'Choose a time zone such as America/New_York.');
+export const localeSchema = z
+  .string()
+  .max(35)
+  .regex(/^[A-Za-z]{2,3}(-[A-Za-z0-9]{1,8})*$/, 'Choose a language such as en-US.');
+export const unitSystemSchema = z.enum(unitSystems, { error: 'Choose metric or US units.' });
+
+/** One spelling for one address, so that nobody has two accounts by a capital letter. */
+const emailSchema = z
+  .string({ error: 'Write your e-mail address.' })
+  .normalize('NFKC')
+  .trim()
+  .toLowerCase()
+  .max(254, 'Write an e-mail address like ines@pool.example.')
+  .regex(/^[^\s@]+@[^\s@]+\.[^\s@]+$/, 'Write an e-mail address like ines@pool.example.');
+
+export const shortestPassword = 10;
+/** Longer ones only cost time to digest. */
+const longestPassword = 200;
+
+export const signUpSchema = z.strictObject({
+  name: personNameSchema,
+  email: emailSchema,
+  password: z
+    .string({ error: 'Choose a password.' })
+    .min(
+      shortestPassword,
+      `Use at least ${shortestPassword} characters. A few words in a row are easy to keep in mind.`,
+    )
+    .max(longestPassword, `Use at most ${longestPassword} characters.`),
+  householdName: householdNameSchema,
+  timeZone: knownTimeZoneSchema,
+  unitSystem: unitSystemSchema,
+  locale: localeSchema,
+});
+export type SignUp = z.output<typeof signUpSchema>;
+
+export const signInSchema = z.strictObject({
+  email: emailSchema,
+  password: z
+    .string({ error: 'Write your password.' })
+    .min(1, 'Write your password.')
+    .max(longestPassword, `A password has at most ${longestPassword} characters.`),
+});
+export type SignIn = z.output<typeof signInSchema>;
+
+/** Where somebody who just came in goes next: an address of our own. */
+export const enteredSchema = z.object({ next: z.string().startsWith('/') });
+export type Entered = z.output<typeof enteredSchema>;
+
+export const doneSchema = z.object({ done: z.literal(true) });
+export type Done = z.output<typeof doneSchema>;

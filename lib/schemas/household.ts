@@ -1,0 +1,37 @@
+import { z } from 'zod';
+import { householdNameSchema, knownTimeZoneSchema, localeSchema, unitSystemSchema } from './account';
+import { roles } from './week-sheet';
+
+/** One of the households that a person belongs to. */
+export const householdSummarySchema = z.object({
+  id: z.string(),
+  name: z.string(),
+  role: z.enum(roles),
+  timeZone: z.string(),
+  unitSystem: unitSystemSchema,
+  locale: z.string(),
+  demo: z.boolean(),
+  /** The one that this device looks at. */
+  current: z.boolean(),
+  /** Whether its first run is finished. */
+  poolCompleted: z.boolean(),
+});
+export const householdListSchema = z.array(householdSummarySchema);
+export type HouseholdList = z.output<typeof householdListSchema>;
+
+export const chosenHouseholdSchema = z.strictObject({ householdId: z.string().min(1).max(64) });
+
+/** What is left out stays as it is. */
+export const householdChangesSchema = z.strictObject({
+  name: householdNameSchema.optional(),
+  timeZone: knownTimeZoneSchema.optional(),
+  unitSystem: unitSystemSchema.optional(),
+  locale: localeSchema.optional(),
+});
+export type HouseholdChanges = z.output<typeof householdChangesSchema>;
+
+/** That the person is an adult and has just read the safety card. */
+export const safetyCardSchema = z.strictObject({
+  adult: z.literal(true, { error: 'Only an adult handles chemicals.' }),
+  read: z.literal(true, { error: 'Read the safety card to its end first.' }),
+});
