@@ -50,8 +50,12 @@ export function amountToReach(
     target.quantity === 'pH'
       ? litres * perLitreToReachPH(ledger, contents, target.value, choice)
       : (litres * (target.value - now)) / risePerUnit(contents, target.quantity);
-  const removable = contents.freeChlorine < 0 ? (litres * chlorineMolesIn(ledger)) / -contents.freeChlorine : Infinity;
-  if (!(amount > 0 && amount <= removable * (1 + ALREADY_THERE) && amount < Infinity)) {
+  // What removes chlorine works no further than there is chlorine; the search for a pH has seen to that itself.
+  const most =
+    target.quantity !== 'pH' && contents.freeChlorine < 0
+      ? (litres * chlorineMolesIn(ledger) * (1 + ALREADY_THERE)) / -contents.freeChlorine
+      : Number.MAX_VALUE;
+  if (!(amount > 0 && amount <= most)) {
     throw new UnreachableTargetError(target.quantity, target.value, product.substance);
   }
   return amount;

@@ -16,6 +16,9 @@ export type ChlorineBalance = {
 
 const MOST_STEPS = 200;
 
+/** mol/L. */
+const TRACE = 1e-25;
+
 /** Newton doubles the right digits: a step this small (relative) leaves an error near its square. */
 const LAST_STEP = 1e-6;
 
@@ -26,7 +29,7 @@ const LAST_STEP = 1e-6;
  *   f x + cyanurate * x D'(x) / D(x) = chlorine,    f = 1 + [OCl-]/[HOCl]
  *
  * whose left side rises strictly with x from 0: there is one root, in (0, chlorine / f]. Newton, kept inside a bracket
- * that only shrinks, bisecting whenever it would leave it.
+ * that only shrinks; it bisects instead whenever a step would leave the bracket or is not half as long as the last.
  */
 function solveHypochlorousAcid(
   chlorine: number,
@@ -40,6 +43,8 @@ function solveHypochlorousAcid(
 ): number {
   let high = chlorine / f;
   if (cyanurate <= 0 || chlorine <= 0) return high;
+  // So little that no cyanurate carries two: exact to the last digit, and the squares below would underflow.
+  if (chlorine < TRACE) return (chlorine * p0) / (f * p0 + cyanurate * p1);
   let low = 0;
   let x = guess;
   if (!(x > low && x < high)) {
@@ -49,6 +54,7 @@ function solveHypochlorousAcid(
     x = linear >= 0 ? (2 * chlorine * p0) / (linear + root) : (root - linear) / (2 * f * p1);
     if (!(x < high)) x = high / 2;
   }
+  let before = Infinity;
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const one = p1 * x;
     const two = p2 * x * x;
@@ -59,10 +65,17 @@ function solveHypochlorousAcid(
     if (excess > 0) high = x;
     else low = x;
     const steepness = f * x + cyanurate * ((one + 4 * two + 9 * three) * share - mean * mean);
-    const next = x - (x * excess) / steepness;
-    if (Math.abs(next - x) <= LAST_STEP * x) return next;
-    if (next > low && next < high) x = next;
-    else x = low > 0 ? Math.sqrt(low * high) : 0.1 * high;
+    const towards = (x * excess) / steepness;
+    const size = Math.abs(towards);
+    const next = x - towards;
+    if (size <= LAST_STEP * x) return next;
+    if (next > low && next < high && size <= before / 2) {
+      x = next;
+      before = size;
+    } else {
+      x = low > 0 ? Math.sqrt(low * high) : 0.1 * high;
+      before = high - low;
+    }
   }
   return x;
 }

@@ -55,7 +55,8 @@ export function constantsOfLedger(ledger: Ledger, choice?: ModelChoice): Equilib
  *   A = [HCO3-] + 2[CO3--] + [CaHCO3+] + 2[CaCO3] + [OH-] - [H+] + [OCl-] + [H2Cy-] + 2[HCy--] + 3[Cy---]
  *     + [HClCy-] + 2[ClCy--] + [Cl2Cy-] + [B(OH)4-]
  * whose right side rises strictly with pH at constant totals, so there is one root. Newton with the exact slope, kept
- * inside a bracket that only shrinks, bisecting whenever it would leave it; within 1e-9 of pH. No input check.
+ * inside a bracket that only shrinks; it bisects instead whenever a step would leave the bracket or is not half as long
+ * as the one before (between two buffers Newton can swing to and fro). Within 1e-8 of pH. No input check.
  */
 export function solveLedger(ledger: Ledger, constants: EquilibriumConstants, state: LedgerState): void {
   const k = constants.carbonate;
@@ -65,6 +66,7 @@ export function solveLedger(ledger: Ledger, constants: EquilibriumConstants, sta
   let pH = state.pH;
   let acidGuess = state.hypochlorousAcid / CHLORINE_MILLIGRAMS_PER_MOLE;
   let change = 0;
+  let before = Infinity;
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const h = Math.exp(-Math.LN10 * pH);
     const r = 1 / h;
@@ -78,17 +80,21 @@ export function solveLedger(ledger: Ledger, constants: EquilibriumConstants, sta
     const slope = chlorine.slope + carbonate.slope - hydroxide - proton - tetraborate * borateShare;
     if (excess > 0) high = pH;
     else low = pH;
-    const next = pH + excess / (slope * Math.LN10);
-    change = -Math.LN10 * (next - pH);
-    if (Math.abs(next - pH) <= LAST_STEP) {
+    const towards = excess / (slope * Math.LN10);
+    const size = Math.abs(towards);
+    const next = pH + towards;
+    change = -Math.LN10 * towards;
+    if (size <= LAST_STEP) {
       pH = next;
       break;
     }
-    if (next > low && next < high) {
+    if (next > low && next < high && size <= before / 2) {
       pH = next;
+      before = size;
       acidGuess = chlorine.hypochlorousAcid * (1 + change * chlorine.drift);
     } else {
       pH = (low + high) / 2;
+      before = high - low;
       acidGuess = 0;
     }
   }

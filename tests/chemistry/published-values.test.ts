@@ -16,7 +16,7 @@ import {
   type Substance,
   SUBSTANCES,
   type Target,
-  useUpChlorine,
+  useUpChlorine as afterUseOf,
   type WaterAnalysis,
 } from '@/lib/chemistry';
 import {
@@ -113,7 +113,7 @@ function perChlorine(
 ) {
   const amount = amountToReach(basis, 1, { substance }, { quantity: 'freeChlorine', value: 1 });
   const dosed = addDose(basis, 1, { substance, amount });
-  return (used ? useUpChlorine(dosed, 1) : dosed)[quantity] - basis[quantity];
+  return (used ? afterUseOf(dosed, 1) : dosed)[quantity] - basis[quantity];
 }
 
 /** Water of the acid rows: 26.7 deg C (80 deg F), ionic strength 0.025, soft. */

@@ -1,5 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { addDose, aerateToEquilibrium, type Dose, useUpChlorine, type WaterAnalysis } from '@/lib/chemistry';
+import {
+  addDose,
+  aerateToEquilibrium,
+  type Dose,
+  useUpChlorine as afterUseOf,
+  type WaterAnalysis,
+} from '@/lib/chemistry';
 import { ErrorReport, referenceRows, type ReferenceRow } from './reference-table';
 
 // Sources: tests/reference/dosing-ph.csv and chlorine-use.csv, made with PHREEQC 3.8.8 (USGS): one dose into closed,
@@ -70,7 +76,7 @@ describe('water after a dose, against PHREEQC', () => {
       const amount = row.number('fc_dosed');
       const before = waterOf(row);
       const dosed = product === 'none' ? before : addDose(before, 1, doseOf(product, amount));
-      const used = useUpChlorine(dosed, amount);
+      const used = afterUseOf(dosed, amount);
       const id = `${row.text('id')} ${product}`;
       expect(Math.abs(use.note('ph_dosed', dosed.pH - row.number('ph_dosed'))), id).toBeLessThanOrEqual(0.015);
       expect(Math.abs(use.note('ph_used', used.pH - row.number('ph_used'))), id).toBeLessThanOrEqual(0.015);
