@@ -110,7 +110,7 @@ export default {
     },
     transitionDuration: { tick: '120ms', expand: '200ms', morph: '240ms' },
     extend: {
-      spacing: { margin: 'var(--page-margin)', tabs: '72px', gutter: '118px', 'margin-column': '326px' },
+      spacing: { margin: 'var(--page-margin)', tabs: '72px' },
       maxWidth: { sheet: '1440px', reading: '44rem', form: '27rem' },
     },
   },

@@ -3,7 +3,7 @@ import { getTranslations } from 'next-intl/server';
 import { DrawnSheet } from '@/components/start/drawn-sheet';
 import { Hero } from '@/components/start/hero';
 import { LandingFoot } from '@/components/start/landing-foot';
-import { ScopeTable } from '@/components/start/scope-table';
+import { ScopeList } from '@/components/start/scope-list';
 import { ThreeReasons } from '@/components/start/three-reasons';
 import { YourWeek } from '@/components/start/your-week';
 import { DoubleRule } from '@/components/ui/double-rule';
@@ -18,12 +18,12 @@ export default function LandingPage() {
     <div className="mx-auto max-w-sheet px-margin">
       <Hero />
       <DoubleRule className="hidden md:block" />
-      <div className="grid gap-x-7.5 border-t-todo border-ink md:border-t-0 lg:grid-cols-[1fr_var(--spacing-margin-column)]">
+      <div className="grid gap-x-7.5 border-t-todo border-ink md:border-t-0 lg:grid-cols-[1fr_326px]">
         <DrawnSheet />
         <YourWeek />
       </div>
       <ThreeReasons />
-      <ScopeTable />
+      <ScopeList />
       <LandingFoot />
     </div>
   );

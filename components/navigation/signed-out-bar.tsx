@@ -41,13 +41,15 @@ export function SignedOutBar() {
           </span>
           <Link
             href="/sign-in"
-            className="inline-flex min-h-11 items-center text-[16px] leading-5 underline decoration-1 underline-offset-[3px] md:text-[15px]"
+            className="inline-flex min-h-11 items-center whitespace-nowrap text-[16px] leading-5 underline decoration-1 underline-offset-[3px] md:text-[15px]"
           >
             {t('signIn')}
           </Link>
-          <Link href="/sign-up" className={buttonClass({ size: 'small', className: 'hidden md:inline-flex' })}>
-            {t('signUp')}
-          </Link>
+          <span className="hidden md:inline">
+            <Link href="/sign-up" className={buttonClass({ size: 'small' })}>
+              {t('signUp')}
+            </Link>
+          </span>
         </nav>
       </div>
       <DoubleRule className="mx-margin md:hidden" />

@@ -17,7 +17,7 @@ const heightAt = (hour: number) => drawnWeek[hour]?.height ?? 0;
 export function DrawnChlorine({ days }: { days: readonly string[] }) {
   const t = useTranslations('start.reading');
   return (
-    <div className="relative h-64 border-t border-rule-2 sm:h-72" role="img" aria-label={t('picture')}>
+    <div className="relative h-64 border-t border-rule-2 md:h-72" role="img" aria-label={t('picture')}>
       <svg className="absolute inset-0 size-full" viewBox="0 0 100 100" preserveAspectRatio="none" aria-hidden="true">
         <rect x="0" y={down(1)} width="100" height={down(0) - down(1)} className="fill-water-2" />
         {nights.map(({ from, to }) => (

@@ -17,18 +17,18 @@ export function DrawnSheet() {
         </h2>
         <p className="text-small text-ink-2">{t('note')}</p>
       </div>
-      <div className="sm:grid sm:grid-cols-[var(--spacing-gutter)_1fr]">
-        <div className="hidden sm:block" />
-        <div className="hidden grid-cols-7 sm:grid" aria-hidden="true">
+      <div className="md:grid md:grid-cols-[118px_1fr]">
+        <div className="hidden md:block" />
+        <div className="hidden grid-cols-7 md:grid" aria-hidden="true">
           {days.map((day) => (
             <p key={day} className="border-l border-rule py-1.5 pl-2.5 font-display text-name">
               {day}
             </p>
           ))}
         </div>
-        <p className="flex items-baseline justify-between pb-1.5 sm:block sm:border-t sm:border-rule-2 sm:pt-3.5">
+        <p className="flex items-baseline justify-between pb-1.5 md:block md:border-t md:border-rule-2 md:pt-3.5">
           <b className="block max-w-24 font-display text-name text-teal-ink">{t('chlorine')}</b>
-          <span className="block text-fine text-ink-2 sm:mt-0.5">{t('chlorineNote')}</span>
+          <span className="block text-fine text-ink-2 md:mt-0.5">{t('chlorineNote')}</span>
         </p>
         <DrawnChlorine days={days} />
         <DrawnToDo days={days} />

@@ -19,17 +19,17 @@ export function DrawnToDo({ days }: { days: readonly string[] }) {
   ];
   return (
     <>
-      <p className="border-t-todo border-ink pt-3 sm:border-b sm:border-b-ink">
+      <p className="border-t-todo border-ink pt-3 md:border-b md:border-b-ink">
         <b className="block font-display text-name">{t('doList')}</b>
         <span className="mt-0.5 block pr-3 text-fine text-ink-2">{t('doListNote')}</span>
       </p>
-      <ol className="border-b border-ink sm:grid sm:grid-cols-7 sm:border-t-todo">
+      <ol className="border-b border-ink md:grid md:grid-cols-7 md:border-t-todo">
         {tasks.map((task, index) => (
           <li
             key={days[index]}
-            className="grid grid-cols-[6.5rem_1fr] items-baseline border-t border-rule py-2.5 text-small first:border-t-0 sm:block sm:border-t-0 sm:border-l sm:py-3 sm:pr-1.5 sm:pl-2.5"
+            className="grid grid-cols-[6.5rem_1fr] items-baseline border-t border-rule py-2.5 text-small first:border-t-0 md:block md:border-t-0 md:border-l md:py-3 md:pr-1.5 md:pl-2.5"
           >
-            <span className="font-display text-name sm:sr-only">{days[index]}</span>
+            <span className="font-display text-name md:sr-only">{days[index]}</span>
             <span className="min-w-0">
               {task.when === undefined ? null : <span className="block text-fine text-ink-2">{task.when}</span>}
               <b

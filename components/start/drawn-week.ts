@@ -8,14 +8,14 @@ const sunset = 21;
 
 /** Hours of the evening doses (Wednesday and Friday) and how far each lifts the line. */
 export const drawnDoses = [
-  { hour: 2 * 24 + 20, lift: 0.5 },
-  { hour: 4 * 24 + 20, lift: 0.36 },
+  { hour: 2 * 24 + 20, lift: 0.42 },
+  { hour: 4 * 24 + 20, lift: 0.3 },
 ] as const;
 
 /** The quick check before Saturday's swim narrows the range again. */
 export const drawnCheck = 5 * 24 + 9;
 
-const startHeight = 0.72;
+const startHeight = 0.7;
 const lossPerDay = 0.155;
 
 export type DrawnPoint = { hour: number; height: number; low: number; high: number };

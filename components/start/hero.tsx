@@ -8,7 +8,7 @@ import { LookRoundButton } from './look-round-button';
 export function Hero() {
   const t = useTranslations('start.landing');
   return (
-    <div className="grid md:border-t md:border-rule lg:grid-cols-[1fr_var(--spacing-margin-column)]">
+    <div className="grid md:border-t md:border-rule lg:grid-cols-[1fr_326px]">
       <div className="pt-5.5 lg:py-11 lg:pr-10">
         <h1 className="font-display-soft text-landing text-balance">
           <span className="block">{t('headline')}</span>

@@ -19,15 +19,15 @@ const pools = [
 ] as const;
 
 const signs: Record<Answer, React.ReactNode> = {
-  all: <Check aria-hidden="true" className="size-5" />,
-  part: <Minus aria-hidden="true" className="size-5" />,
-  none: <X aria-hidden="true" className="size-5" />,
+  all: <Check aria-hidden="true" className="mt-px size-5 shrink-0" />,
+  part: <Minus aria-hidden="true" className="mt-px size-5 shrink-0" />,
+  none: <X aria-hidden="true" className="mt-px size-5 shrink-0" />,
 };
 
 export const scopeAnchor = 'for-your-pool';
 
 /** Which pools the sheet is for. The words answer; the sign before them only repeats it. */
-export function ScopeTable() {
+export function ScopeList() {
   const t = useTranslations('start.scope');
   return (
     <section id={scopeAnchor} aria-labelledby="scope-title" className="border-t-todo border-ink pt-5 pb-6">
@@ -38,33 +38,17 @@ export function ScopeTable() {
           </h2>
           <p className="mt-1.5 max-w-reading text-[16px] leading-[23px] text-pretty md:text-[15.5px]">{t('lead')}</p>
         </div>
-        <table className="mt-4 w-full border-collapse text-left text-body md:mt-0">
-          <thead>
-            <tr className="border-b border-ink text-small text-ink-2">
-              <th scope="col" className="w-2/5 py-2 pr-4 font-text">
-                {t('poolColumn')}
-              </th>
-              <th scope="col" className="py-2 font-text">
-                {t('answerColumn')}
-              </th>
-            </tr>
-          </thead>
-          <tbody>
-            {pools.map(({ pool, answer }) => (
-              <tr key={pool} className="border-b border-rule align-top">
-                <th scope="row" className="py-2.5 pr-4 font-strong">
-                  {t(pool)}
-                </th>
-                <td className="py-2.5">
-                  <span className="flex gap-2.5">
-                    {signs[answer]}
-                    <span className="min-w-0 flex-1">{t(`${pool}Answer`)}</span>
-                  </span>
-                </td>
-              </tr>
-            ))}
-          </tbody>
-        </table>
+        <dl className="mt-4 border-t border-ink text-body md:mt-0">
+          {pools.map(({ pool, answer }) => (
+            <div key={pool} className="border-b border-rule py-2.5 sm:grid sm:grid-cols-[2fr_3fr] sm:gap-4">
+              <dt className="font-strong">{t(pool)}</dt>
+              <dd className="mt-0.5 flex gap-2.5 sm:mt-0">
+                {signs[answer]}
+                <span className="min-w-0 flex-1">{t(`${pool}Answer`)}</span>
+              </dd>
+            </div>
+          ))}
+        </dl>
       </div>
     </section>
   );
