@@ -15,7 +15,9 @@ export async function buildIfStale(folder, { force = false } = {}) {
   if (!force && isBuilt(folder) && readOrNothing(stamp) === wanted) return;
   const server = serverOf(folder);
   if (server !== undefined) {
-    throw new Refusal(`The sources have changed, and process ${server} still serves the old build: stop it first.`);
+    throw new Refusal(
+      `A new build is due, and process ${server} still serves the one that stands there: stop it first.`,
+    );
   }
   say('Building, which takes about half a minute.');
   await runStep(process.execPath, [nextProgram, 'build'], 'The build did not succeed; the reason stands above.', {
