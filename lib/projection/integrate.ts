@@ -34,6 +34,7 @@ export type Course = {
   pH: Float64Array;
   /** The water after the last step, and what is left in the feeder at the end. */
   end: Ledger;
+  endPH: number;
   loads: TabletLoad[];
   account: ChlorineAccount;
 };
@@ -60,6 +61,7 @@ export function integrateWeek(
     ledgers: [],
     pH: new Float64Array(Math.floor(forcing.steps / stepsPerHour) + 1),
     end: ledger,
+    endPH: 0,
     loads,
     account,
   };
@@ -95,6 +97,7 @@ export function integrateWeek(
       course.pH[step / stepsPerHour] = state.pH;
       course.ledgers.push({ ...ledger });
     }
+    course.endPH = state.pH;
     if (step === forcing.steps) break;
 
     const to = from + forcing.stepHours * MILLISECONDS_PER_HOUR;

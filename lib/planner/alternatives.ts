@@ -1,0 +1,89 @@
+import { dayOf } from '@/lib/calendar/household-day';
+import { seriesOf } from '@/lib/projection';
+import type { Alternative } from '@/lib/schemas/plan';
+import { lowestLevel } from '@/lib/standards/limits';
+import type { PlanContext } from './context';
+import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
+import { emptyDraft, visitsOf } from './draft';
+import { plannedDoses } from './planned-doses';
+import type { Options } from './products';
+import type { Response } from './response';
+import { searchPlan, type SearchSpace } from './search';
+
+const MEMBERS = 16;
+
+/** The best week with each form alone: what the household gives up or gains against the plan's mix. */
+export function alternativesOf(
+  context: PlanContext,
+  response: Response,
+  space: Pick<SearchSpace, 'evenings' | 'visits'>,
+  options: Options,
+): Alternative[] {
+  const only = (kind: Alternative['kind']): Evaluated | null => {
+    if (kind === 'tablets')
+      return options.tablets
+        ? searchPlan(context, response, { ...space, tablets: options.tablets, fast: [null], rounds: 0 })
+        : null;
+    const fast = options.fast.filter(({ form }) => form === kind);
+    return fast.length > 0 ? searchPlan(context, response, { ...space, tablets: null, fast, rounds: 0 }) : null;
+  };
+  return (['tablets', 'granular', 'liquid'] as const).map((kind) => {
+    const found = only(kind);
+    return alternativeOf(kind, found ?? nothing(context, space), found !== null, context);
+  });
+}
+
+function nothing(context: PlanContext, space: Pick<SearchSpace, 'evenings' | 'visits'>): Evaluated {
+  const choice = { ...space, tablets: null, fast: null };
+  return evaluate(emptyDraft(choice), choice, context, context.members.slice(0, MEMBERS));
+}
+
+function alternativeOf(
+  kind: Alternative['kind'],
+  found: Evaluated,
+  possible: boolean,
+  context: PlanContext,
+): Alternative {
+  const { draft, choice, median, cost } = found;
+  const doses = plannedDoses(draft, choice, context);
+  const water = seriesOf(median);
+  const { swimLimit } = context.scenario.pool;
+  const hoursOutside = water.freeChlorine.filter((level, hour) => {
+    const lowest = lowestLevel(water.cyanuricAcid[hour]!, stabilizedIn(draft, context));
+    return level < lowest || (context.swimHour[hour] === true && level > swimLimit);
+  }).length;
+  return {
+    kind,
+    feasible: possible && hoursOutside === 0,
+    doses,
+    money: moneyOf(draft, choice),
+    visits: visitsOf(draft),
+    swing: swingOf(water.freeChlorine, context),
+    stabilizer: water.cyanuricAcid.at(-1)! - water.cyanuricAcid[0]!,
+    hardness: water.calciumHardness.at(-1)! - water.calciumHardness[0]!,
+    kilograms: doses.reduce((sum, dose) => sum + kilogramsOf(dose, choice), 0),
+    hoursOutside,
+    total: cost.total,
+  };
+}
+
+/** Mean over the days of the difference between highest and lowest free chlorine [mg/L]. */
+function swingOf(freeChlorine: readonly number[], { hours, scenario }: PlanContext): number {
+  const days = new Map<string, { low: number; high: number }>();
+  hours.forEach((hour, index) => {
+    const day = dayOf(hour, scenario.pool.timeZone);
+    const level = freeChlorine[index]!;
+    const seen = days.get(day) ?? { low: level, high: level };
+    days.set(day, { low: Math.min(seen.low, level), high: Math.max(seen.high, level) });
+  });
+  const swings = [...days.values()].map(({ low, high }) => high - low);
+  return swings.reduce((sum, swing) => sum + swing, 0) / swings.length;
+}
+
+/** Density of liquid hypochlorite [kg/L]. */
+const LIQUID_DENSITY = 1.2;
+
+function kilogramsOf(dose: Alternative['doses'][number], { tablets }: Evaluated['choice']): number {
+  if (dose.unit === 'tablet') return (dose.amount * (tablets?.tabletMass ?? 0)) / 1000;
+  return (dose.amount / 1000) * (dose.unit === 'mL' ? LIQUID_DENSITY : 1);
+}

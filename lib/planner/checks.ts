@@ -1,0 +1,64 @@
+import { addDays, dayOf, type CalendarDay } from '@/lib/calendar/household-day';
+import { toOffsetIso, wallToInstant } from '@/lib/calendar/wall-time';
+import { MILLISECONDS_PER_HOUR, HOURS_IN_PLAN } from '@/lib/projection/forcing';
+import type { PlannedDose } from '@/lib/schemas/dose';
+import type { PlanProjection, WeekPlan } from '@/lib/schemas/plan';
+import { codeMinimum, limits } from '@/lib/standards/limits';
+import type { CheckReason } from './codes';
+import type { PlanContext } from './context';
+
+type Check = WeekPlan['checks'][number];
+
+/**
+ * Tests that the week asks for: a quick check before the first swim hour of a swim day when the last test would be over
+ * 48 h old, one on the first morning on which the likely range reaches the code minimum, one on the morning after a halved
+ * first dose, and the full test that makes the next plan.
+ */
+export function checksOf(
+  projection: PlanProjection,
+  doses: readonly PlannedDose[],
+  context: PlanContext,
+  stabilized: boolean,
+): Check[] {
+  const { scenario, start, now } = context;
+  const { pool, week } = scenario;
+  const checks: { at: number; kind: Check['kind']; reason: CheckReason }[] = [];
+  const morning = (day: CalendarDay) => wallToInstant(day, pool.swimHours.from, pool.timeZone).instant;
+  const endsAt = start.takenAt + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR;
+  const first = dayOf(start.takenAt, pool.timeZone);
+  const lowFrom = firstHourAtMinimum(projection, context, stabilized);
+  const halved = doses.find(({ reason }) => reason === 'first-dose-halved');
+
+  let lastTest = start.takenAt;
+  for (let index = 0; index < 8; index++) {
+    const day = addDays(first, index);
+    const at = morning(day);
+    if (at <= lastTest || at < now || at >= endsAt) continue;
+    const age = (at - lastTest) / MILLISECONDS_PER_HOUR;
+    const swims = (week.swimmerHours[index] ?? 0) > 0;
+    const nextMorning = morning(addDays(day, 1));
+    const afterHalved = halved && Date.parse(halved.at) < at && Date.parse(halved.at) >= lastTest;
+    const low = lowFrom !== null && lowFrom < nextMorning && lastTest === start.takenAt;
+    const reason: CheckReason | null = afterHalved
+      ? 'after-halved-dose'
+      : swims && age > limits.verdictReadingAge.value
+        ? 'swim-day-after-two-days'
+        : low
+          ? 'band-reaches-code-minimum'
+          : null;
+    if (!reason) continue;
+    checks.push({ at, kind: 'quick', reason });
+    lastTest = at;
+  }
+  checks.push({ at: endsAt, kind: 'full', reason: 'next-week' });
+  return checks.map((check) => ({ ...check, at: toOffsetIso(check.at, pool.timeZone) }));
+}
+
+function firstHourAtMinimum(
+  { freeChlorine, cyanuricAcid }: PlanProjection,
+  { hours }: PlanContext,
+  stabilized: boolean,
+) {
+  const index = freeChlorine.p10.findIndex((value, hour) => value < codeMinimum(cyanuricAcid.p50[hour]!, stabilized));
+  return index < 0 ? null : hours[index]!;
+}

@@ -1,0 +1,64 @@
+/** Every code a plan can carry; the words for each stand in lib/messages. */
+export const doseReasons = ['slow-supply', 'closes-gap', 'quick-raise', 'first-dose-halved'] as const;
+export type DoseReason = (typeof doseReasons)[number];
+
+export const checkReasons = [
+  'swim-day-after-two-days',
+  'band-reaches-code-minimum',
+  'after-halved-dose',
+  'next-week',
+] as const;
+export type CheckReason = (typeof checkReasons)[number];
+
+export const limitCodes = [
+  'code-minimum',
+  'lowest-level',
+  'swim-limit',
+  'free-chlorine-maximum',
+  'pH-low',
+  'pH-high',
+  'stabilizer-too-high-for-swim-limit',
+] as const;
+export type LimitCode = (typeof limitCodes)[number];
+
+export const reasonCodes = [
+  /** First sentences when the week cannot be kept in range. */
+  'replace-water-first',
+  'few-open-hours',
+  /** Why tablets, how many, or why none. */
+  'tablets-carry',
+  'no-tablets-stabilizer-high',
+  'no-tablets-stabilizer-unknown',
+  'no-tablets-pH-low',
+  'no-tablets-feeder',
+  'no-tablets-on-shelf',
+  'no-tablets-better-without',
+  /** Why this fast product, or why none. */
+  'fast-closes-gap',
+  'nothing-fast-needed',
+  'no-fast-on-shelf',
+  /** What was compared. */
+  'cheaper-than',
+  'lowest-level-follows-stabilizer',
+] as const;
+export type ReasonCode = (typeof reasonCodes)[number];
+
+export const cautionCodes = [
+  'pH-out-of-range',
+  'combined-chlorine-high',
+  'label-way-unknown',
+  'liquid-past-half-strength',
+  'liquid-age-unknown',
+  'feeder-ingredient-other',
+  'granules-not-for-surface',
+  'stock-short',
+  'dose-after-dark',
+  'volume-estimated',
+  'free-chlorine-over-swim-limit',
+  'hardness-outside-surface-range',
+  'water-values-assumed',
+] as const;
+export type CautionCode = (typeof cautionCodes)[number];
+
+export const needCodes = ['reading-too-old', 'never-measured'] as const;
+export type NeedCode = (typeof needCodes)[number];

@@ -1,0 +1,67 @@
+import { dayOf } from '@/lib/calendar/household-day';
+import { intervalsOfDay, parseInstant } from '@/lib/calendar/wall-time';
+import { hoursFrom, settingOf } from '@/lib/projection';
+import { ensembleOf, type Member } from '@/lib/projection/ensemble';
+import type { WeekDose } from '@/lib/projection/events';
+import { type Forcing, prepareForcing } from '@/lib/projection/forcing';
+import type { CourseSetting } from '@/lib/projection/integrate';
+import type { Scenario } from '@/lib/schemas/scenario';
+import { ledgerOf } from '@/lib/chemistry';
+import { weekDoseOf } from './given-doses';
+import { type StartingWater, startingWater } from './starting-water';
+
+/** What every candidate plan of one scenario shares. */
+export type PlanContext = {
+  scenario: Scenario;
+  now: number;
+  start: StartingWater;
+  given: readonly WeekDose[];
+  forcing: Forcing;
+  /** The pool with every parameter at its median, and the ensemble around it. */
+  median: Member;
+  members: readonly Member[];
+  setting: CourseSetting;
+  hours: readonly number[];
+  /** Whether somebody may swim at each of the hours. */
+  swimHour: readonly boolean[];
+  /** Whether stabilized products have been used, so that the higher code minimum holds. */
+  stabilizedProductUsed: boolean;
+};
+
+/**
+ * Readies a scenario: the water at its newest reading, what acts on it, the ensemble.
+ *
+ * Errors: invalid-input for a given dose that cannot be reckoned with; WaterRangeError for water that cannot be.
+ */
+export function contextOf(scenario: Scenario): PlanContext {
+  const { pool, shelf } = scenario;
+  const given = scenario.given.map((dose, index) => weekDoseOf(dose, `given[${index}]`, shelf, pool));
+  const start = startingWater(scenario, given);
+  const forcing = prepareForcing(pool, start.takenAt, scenario.week, start.water.temperature);
+  const setting = settingOf(pool, start.water.temperature, scenario.parameters);
+  const hours = hoursFrom(start.takenAt);
+  return {
+    scenario,
+    now: scenario.now === undefined ? start.takenAt : Math.max(start.takenAt, parseInstant(scenario.now)!),
+    start,
+    given,
+    forcing,
+    median: { start: { ledger: ledgerOf(start.water), loads: start.loads }, setting },
+    members: ensembleOf(start.water, start.errors, start.loads, setting),
+    setting,
+    hours,
+    swimHour: swimHours(scenario, hours),
+    stabilizedProductUsed: given.some((dose) => dose.kind === 'tablets') || start.loads.length > 0,
+  };
+}
+
+/** Whether each instant [ms] lies in the household's swim hours, both ends included. */
+export function swimHours({ pool }: Pick<Scenario, 'pool'>, hours: readonly number[]): boolean[] {
+  const cache = new Map<string, ReturnType<typeof intervalsOfDay>>();
+  return hours.map((hour) => {
+    const day = dayOf(hour, pool.timeZone);
+    const intervals = cache.get(day) ?? intervalsOfDay([pool.swimHours], day, pool.timeZone);
+    cache.set(day, intervals);
+    return intervals.some(({ from, to }) => hour >= from && hour <= to);
+  });
+}

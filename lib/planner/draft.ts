@@ -1,0 +1,53 @@
+import { type WeekDose, weekDose } from '@/lib/projection/events';
+import type { PlanContext } from './context';
+import type { Evening } from './evenings';
+import type { FastOption, TabletOption } from './products';
+
+/** One candidate: how many tablets on which evening, and how many measures of one fast product on each evening. */
+export type Draft = {
+  tablets: number;
+  tabletEvening: number;
+  fast: FastOption | null;
+  measures: readonly number[];
+};
+
+/** What a search may use. */
+export type Choice = {
+  evenings: readonly Evening[];
+  tablets: TabletOption | null;
+  fast: FastOption | null;
+  visits: number;
+};
+
+export const emptyDraft = (choice: Choice): Draft => ({
+  tablets: 0,
+  tabletEvening: 0,
+  fast: choice.fast,
+  measures: choice.evenings.map(() => 0),
+});
+
+/** The doses of a draft as the projection takes them, after what was given. */
+export function weekDosesOf(draft: Draft, choice: Choice, context: PlanContext): WeekDose[] {
+  const { volume } = context.scenario.pool;
+  const doses: WeekDose[] = [...context.given];
+  const { tablets, fast } = choice;
+  if (draft.tablets > 0 && tablets) {
+    const { tabletMass, strength } = tablets;
+    const at = choice.evenings[draft.tabletEvening]!.at;
+    doses.push({ at, kind: 'tablets', load: { tabletMass, strength, count: draft.tablets, erodedShare: 0 } });
+  }
+  draft.measures.forEach((measures, evening) => {
+    if (measures === 0 || !fast) return;
+    const { at } = choice.evenings[evening]!;
+    doses.push(weekDose(at, fast.dose(measures * fast.measure, at), volume));
+  });
+  return doses;
+}
+
+export function fastEvenings(draft: Draft): number {
+  return draft.measures.filter((measures) => measures > 0).length;
+}
+
+export function visitsOf(draft: Draft): number {
+  return fastEvenings(draft) + (draft.tablets > 0 ? 1 : 0);
+}

@@ -1,0 +1,151 @@
+import { dayOf } from '@/lib/calendar/household-day';
+import { toOffsetIso } from '@/lib/calendar/wall-time';
+import { analysisAt, type CourseBand } from '@/lib/projection';
+import { integrateWeek } from '@/lib/projection/integrate';
+import type { GivenDose } from '@/lib/schemas/dose';
+import type { WeekPlan } from '@/lib/schemas/plan';
+import type { Scenario } from '@/lib/schemas/scenario';
+import { alternativesOf } from './alternatives';
+import { assertSafePlan } from './assert-safe-plan';
+import { checksOf } from './checks';
+import { contextOf, type PlanContext } from './context';
+import { evaluate, type Evaluated, stabilizedIn } from './cost';
+import { doseEvenings } from './evenings';
+import { cautionsOf, reasonsOf } from './explain';
+import { halveFirstDose } from './first-dose';
+import { weekDoseOf } from './given-doses';
+import { brokenLimits, openSwimShare } from './limits-broken';
+import { needsOf } from './needs';
+import { plannedDoses } from './planned-doses';
+import { projectionOf } from './projection-of';
+import { optionsOf } from './products';
+import { responseOf } from './response';
+import { searchPlan } from './search';
+import { ENGINE_VERSION } from './version';
+
+export { assertSafePlan } from './assert-safe-plan';
+export { ENGINE_VERSION } from './version';
+export type { CourseBand };
+
+/**
+ * The week's plan: which form of chlorine, how much, which evening, for 168 h from the newest reading.
+ *
+ * Minimises the whole cost over the ensemble (see `weights`) under the safety constraints; when nothing keeps the range it
+ * is the least bad plan and `broken` says which limit, when, by how much. Deterministic.
+ *
+ * Errors: invalid-input for a given dose of an unknown product; WaterRangeError for water that cannot be; plan-refused
+ * when the safety net finds a fault in the result.
+ */
+export function planWeek(scenario: Scenario): WeekPlan {
+  const { blocking, wanted } = needsOf(scenario);
+  if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
+  const context = contextOf(scenario);
+  const options = optionsOf(scenario, context.start);
+  const evenings = doseEvenings(scenario.pool, context.start.takenAt, context.now);
+  const visits = Math.max(0, scenario.preferences.visits - visitsGiven(context));
+  const response = responseOf(context, evenings, options.tablets);
+  const space = {
+    evenings,
+    visits,
+    tablets: options.tablets,
+    fast: options.fast.length > 0 ? options.fast : [null],
+    rounds: 4,
+  };
+  const found = searchPlan(context, response, space);
+  const { draft, halvedEvening } = halveFirstDose(found.draft, scenario);
+  const best = evaluate(draft, found.choice, context, context.members);
+
+  const stabilized = stabilizedIn(draft, context);
+  const doses = plannedDoses(draft, best.choice, context, halvedEvening);
+  const projection = projectionOf(best.courses, best.median, context, stabilized);
+  const broken = brokenLimits(projection, context, stabilized);
+  const openShare = openSwimShare(projection, context);
+  const plan: WeekPlan = {
+    ...frame(context),
+    projection,
+    doses,
+    checks: checksOf(projection, doses, context, stabilized),
+    endOfWeek: endOf(best),
+    cost: best.cost,
+    alternatives: alternativesOf(context, response, { evenings, visits }, options),
+    openSwimShare: openShare,
+    broken,
+    reasons: reasonsOf(doses, options, broken, openShare, context),
+    cautions: cautionsOf(doses, options, best.choice, context),
+    needs: wanted,
+  };
+  assertSafePlan(scenario, plan);
+  return plan;
+}
+
+/** Projects the scenario's own `doses` and plans nothing: bands, broken limits and the end of the week for them. */
+export function projectScenario(scenario: Scenario): WeekPlan {
+  const { blocking, wanted } = needsOf(scenario);
+  if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
+  const base = contextOf(scenario);
+  const doses = (scenario.doses ?? []).map((dose, index) =>
+    weekDoseOf(
+      { at: dose.at, product: dose.product ?? '', amount: dose.amount, unit: dose.unit } satisfies GivenDose,
+      `doses[${index}]`,
+      scenario.shelf,
+      scenario.pool,
+    ),
+  );
+  const stabilized = base.stabilizedProductUsed || doses.some(({ kind }) => kind === 'tablets');
+  const everything = [...base.given, ...doses];
+  const run = ({ start, setting }: PlanContext['median']) => integrateWeek(base.forcing, start, everything, setting);
+  const median = run(base.median);
+  const projection = projectionOf(base.members.map(run), median, base, stabilized);
+  return {
+    ...frame(base),
+    projection,
+    doses: [],
+    checks: [],
+    endOfWeek: analysisAt(median.end, median.endPH),
+    cost: null,
+    alternatives: [],
+    openSwimShare: openSwimShare(projection, base),
+    broken: brokenLimits(projection, base, stabilized),
+    reasons: [],
+    cautions: [],
+    needs: wanted,
+  };
+}
+
+function frame({ start, hours, scenario }: PlanContext) {
+  return {
+    engineVersion: ENGINE_VERSION,
+    takenAt: toOffsetIso(start.takenAt, scenario.pool.timeZone),
+    hours: hours.map((hour) => new Date(hour).toISOString()),
+  };
+}
+
+function endOf({ median }: Evaluated) {
+  return analysisAt(median.end, median.endPH);
+}
+
+function planWithout(scenario: Scenario, needs: WeekPlan['needs']): WeekPlan {
+  const newest = [scenario.reading].flat().reduce((a, b) => (Date.parse(b.takenAt) > Date.parse(a.takenAt) ? b : a));
+  return {
+    engineVersion: ENGINE_VERSION,
+    takenAt: newest.takenAt,
+    hours: [],
+    projection: null,
+    doses: [],
+    checks: [],
+    endOfWeek: null,
+    cost: null,
+    alternatives: [],
+    openSwimShare: null,
+    broken: [],
+    reasons: [],
+    cautions: [],
+    needs,
+  };
+}
+
+/** Evenings already used: days since the reading on which something was given. */
+function visitsGiven({ given, start, scenario }: PlanContext): number {
+  const since = given.filter(({ at }) => at >= start.takenAt);
+  return new Set(since.map(({ at }) => dayOf(at, scenario.pool.timeZone))).size;
+}

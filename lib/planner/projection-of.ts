@@ -1,0 +1,32 @@
+import { bandOfCourses, seriesOf } from '@/lib/projection';
+import type { Course } from '@/lib/projection/integrate';
+import type { PlanProjection } from '@/lib/schemas/plan';
+import { lowestLevel } from '@/lib/standards/limits';
+import type { PlanContext } from './context';
+
+/** The projection as a plan promises it: bands, limits and the median run, hour by hour. */
+export function projectionOf(
+  courses: readonly Course[],
+  median: Course,
+  { scenario }: PlanContext,
+  stabilized: boolean,
+): PlanProjection {
+  const { freeChlorine, pH, cyanuricAcid } = bandOfCourses(courses);
+  const run = seriesOf(median);
+  return {
+    freeChlorine: {
+      ...freeChlorine,
+      lowestLevel: cyanuricAcid.p50.map((stabilizer) => lowestLevel(stabilizer, stabilized)),
+      swimLimit: cyanuricAcid.p50.map(() => scenario.pool.swimLimit),
+    },
+    pH,
+    cyanuricAcid,
+    median: {
+      freeChlorine: run.freeChlorine,
+      pH: run.pH,
+      cyanuricAcid: run.cyanuricAcid,
+      calciumHardness: run.calciumHardness,
+      totalAlkalinity: run.totalAlkalinity,
+    },
+  };
+}
