@@ -13,7 +13,7 @@ export type LiquidBottle = {
 /**
  * Strength of liquid chlorine on a day [trade %], by {@link storedHypochloriteStrength}. A day before it was bought
  * counts as that day: it was never stronger than its label. Colder than the water model knows counts as -2 degrees C,
- * which loses a little more than the truth and under 1 % a season.
+ * which loses a little more than the truth, under 2 % in half a year.
  * Errors: WaterRangeError for a strength that is no strength or a place above 60 degrees C; `invalid-input` for what is
  * no day. Uncertainty: metals and light make real bottles weaker; how long the shop kept it is not known.
  */
