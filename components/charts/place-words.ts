@@ -1,21 +1,28 @@
 /** A rectangle in pixels, from its upper left corner. */
 export type Box = { x: number; y: number; width: number; height: number };
 export type Anchor = 'start' | 'middle' | 'end';
-export type WordLine = { text: string; size: number; weight: 'plain' | 'bold' | 'display' };
+export type Place = { x: number; y: number; anchor: Anchor };
+
+export type Weight = 'plain' | 'bold' | 'figure' | 'italic';
+export type Run = { text: string; size: number; weight: Weight };
+/** One line of words; its runs follow each other on one baseline. */
+export type WordLine = Run[];
 
 /** Words for a place in a chart: where they may stand, the best place first. `y` is the top of the first line. */
 export type Words = {
   id: string;
   lines: WordLine[];
-  places: { x: number; y: number; anchor: Anchor }[];
+  places: Place[];
+  /** The colour of the ground they stand on, for their halo. */
+  ground?: 'water';
   /** Left out when every place is taken; other words then stand at their first place all the same. */
   mayBeLeftOut?: true;
 };
-export type PlacedWords = Words & { x: number; y: number; anchor: Anchor };
+export type PlacedWords = Words & Place;
 
 const LINE_GAP = 2.5;
 /** Mean width of a character as a share of its size, measured on the two fonts; a little wide on purpose. */
-const characterWidth = { plain: 0.47, bold: 0.51, display: 0.53 } as const;
+const characterWidth: Record<Weight, number> = { plain: 0.47, bold: 0.51, figure: 0.55, italic: 0.47 };
 
 /**
  * Places words so that none covers other words, a mark or the curve. In the order given: what stands first chooses first.
@@ -37,19 +44,27 @@ export function placeWords(words: readonly Words[], taken: readonly Box[], bound
 }
 
 /** Room that lines of words take at a place. */
-export function boxOf(lines: readonly WordLine[], { x, y, anchor }: { x: number; y: number; anchor: Anchor }): Box {
-  const width = Math.max(...lines.map(({ text, size, weight }) => text.length * size * characterWidth[weight]));
+export function boxOf(lines: readonly WordLine[], { x, y, anchor }: Place): Box {
+  const width = Math.max(...lines.map(widthOf));
   const left = anchor === 'start' ? x : anchor === 'end' ? x - width : x - width / 2;
   return { x: left, y, width, height: heightOf(lines) };
 }
 
+export function widthOf(line: WordLine): number {
+  return line.reduce((width, { text, size, weight }) => width + text.length * size * characterWidth[weight], 0);
+}
+
 export function heightOf(lines: readonly WordLine[]): number {
-  return lines.reduce((height, { size }) => height + size, 0) + LINE_GAP * (lines.length - 1);
+  return lines.reduce((height, line) => height + sizeOf(line), 0) + LINE_GAP * (lines.length - 1);
 }
 
 /** Baseline of each line below the top of the first. */
 export function baselinesOf(lines: readonly WordLine[]): number[] {
-  return lines.map((line, index) => heightOf(lines.slice(0, index + 1)) - line.size * 0.2);
+  return lines.map((line, index) => heightOf(lines.slice(0, index + 1)) - sizeOf(line) * 0.2);
+}
+
+function sizeOf(line: WordLine): number {
+  return Math.max(...line.map(({ size }) => size));
 }
 
 function overlap(a: Box, b: Box): boolean {

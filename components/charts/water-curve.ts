@@ -80,22 +80,24 @@ function cut(points: WaterPoint[], { from, to }: TimeAxis): WaterPoint[] {
 }
 
 /**
- * The course with the foot of each jump put in. Values stand at full hours and already hold what was given up to then, so
- * a dose at 19:45 shows first at 20:00; a straight line from 19:00 would rise before anything was poured.
+ * The curve with each jump where it belongs. Values stand at full hours and already hold what was given up to then, so a
+ * dose at 19:45 shows first at 20:00; a straight line from 19:00 would rise before anything was poured. Up to the dose the
+ * hour before it holds, from then on the next one, as in the swim verdict.
  */
-export function withFeet(points: readonly WaterPoint[], doses: readonly number[]): WaterPoint[] {
-  const feet = doses.flatMap((at) => footOf(points, at) ?? []);
-  return [...points, ...feet]
-    .map((point, order) => ({ point, order: feet.includes(point) ? -1 : order }))
-    .sort((a, b) => a.point.at - b.point.at || a.order - b.order)
-    .map(({ point }) => point);
+export function withJumps(points: readonly WaterPoint[], doses: readonly number[]): WaterPoint[] {
+  return points.flatMap((point, index) => {
+    const before = points[index - 1];
+    if (before === undefined) return [point];
+    const poured = doses.filter((at) => at > before.at && at <= point.at);
+    if (poured.length === 0) return [point];
+    const at = Math.min(...poured);
+    return [{ ...before, at }, ...(at < point.at ? [{ ...point, at }] : []), point];
+  });
 }
 
-/** The water just before a dose: the last full hour before it, as it then stood. */
+/** The foot of the jump that a dose makes: the water just before it. */
 export function footOf(points: readonly WaterPoint[], doseAt: number): WaterPoint | undefined {
-  const index = points.findLastIndex(({ at }) => at < doseAt);
-  const before = points[index];
-  return before && index + 1 < points.length ? { ...before, at: doseAt } : undefined;
+  return points.find(({ at }) => at === doseAt) ?? waterAt(points, doseAt);
 }
 
 function between(before: WaterPoint, after: WaterPoint, at: number): WaterPoint {

@@ -1,0 +1,54 @@
+'use client';
+
+import type { ReactNode } from 'react';
+import { Area, ReferenceLine } from 'recharts';
+import { type ChartRow, waterOf } from './chart-rows';
+import { LaneChart, type LaneTime, layer, still } from './lane-chart';
+import { WAVES } from './patterns';
+import { type ChartTest, TestMarks } from './test-marks';
+import { ticksOf, type ValueAxis } from './value-axis';
+import { Curve, type Limit, LimitLines, LowestLevelLine } from './water-lines';
+
+type Props = {
+  time: LaneTime;
+  value: ValueAxis;
+  rows: ChartRow[];
+  limits: readonly Limit[];
+  tests: readonly ChartTest[];
+  label: string;
+  notes: ReactNode;
+  thicker?: number;
+};
+
+/** Free chlorine between the lowest level and the swim limit. */
+export function ChlorineChart(props: Props) {
+  const { time, value, rows, limits, tests, label, notes, thicker = 0 } = props;
+  return (
+    <LaneChart time={time} value={value} rows={rows} label={label} notes={notes}>
+      {['water', 'waves'].map((fill) => (
+        <Area
+          key={fill}
+          {...still}
+          dataKey={goodRange}
+          className="text-water-2"
+          stroke="none"
+          fill={fill === 'water' ? 'currentColor' : WAVES}
+          fillOpacity={1}
+          zIndex={layer.water}
+        />
+      ))}
+      {ticksOf(value).map((figure) => (
+        <ReferenceLine key={figure} y={figure} className="text-rule" stroke="currentColor" zIndex={layer.grid} />
+      ))}
+      <LimitLines limits={limits} axis={value} />
+      <LowestLevelLine axis={value} />
+      <Curve quantity="freeChlorine" thicker={thicker} />
+      <TestMarks tests={tests} />
+    </LaneChart>
+  );
+}
+
+function goodRange(row: ChartRow): [number, number] | undefined {
+  const water = waterOf(row);
+  return water && water.lowestLevel < water.swimLimit ? [water.lowestLevel, water.swimLimit] : undefined;
+}

@@ -1,0 +1,48 @@
+'use client';
+
+import { Check, Minus } from 'lucide-react';
+import { useTranslations } from 'next-intl';
+import { Button } from '@/components/ui/button';
+import type { PlanDose } from '@/lib/schemas/plan-dose';
+import type { Tick } from './use-tick';
+import { mayUndo, tickBar } from './dose-state';
+import { useSheet } from './sheet-context';
+import { instantOf } from './sheet-times';
+import { useDoseWords } from './use-dose-words';
+import { useTimes } from './use-times';
+
+/** What became of a dose, and for ten minutes the way back. */
+export function DoneDose({ dose, tick }: { dose: PlanDose; tick: Tick }) {
+  const t = useTranslations('doses');
+  const { sheet, picture } = useSheet();
+  const words = useDoseWords();
+  const times = useTimes();
+  const undo = mayUndo(dose, picture.now) && tickBar(sheet.me) === undefined;
+  return (
+    <>
+      <p className="flex items-center gap-2 font-emphasis">
+        {dose.status === 'skipped' ? (
+          <Minus aria-hidden="true" className="size-5" />
+        ) : (
+          <Check aria-hidden="true" className="size-5" />
+        )}
+        {dose.status === 'skipped' ? words.skippedBy(dose) : words.doneBy(dose)}
+      </p>
+      {dose.status === 'changed' && <p className="text-small text-ink-2">{words.changed(dose)}</p>}
+      {undo && (
+        <>
+          <Button
+            wide
+            onClick={() => void tick.send({ action: 'undo' })}
+            busy={tick.busy === 'undo' ? t('action.undoBusy') : undefined}
+          >
+            {t('action.undo')}
+          </Button>
+          <p className="text-small text-ink-2">
+            {t('done.undoUntil', { time: times.clock(instantOf(dose.undoUntil ?? '')) })}
+          </p>
+        </>
+      )}
+    </>
+  );
+}

@@ -1,0 +1,37 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import type { PlanDose } from '@/lib/schemas/plan-dose';
+import { bold } from './bold';
+import { bucketLitres, pumpHours } from './dose-state';
+import { useDoseWords } from './use-dose-words';
+import { useUnits } from './use-units';
+
+const numbers = ['1', '2', '3', '4', '5', '6'] as const;
+
+/** The six steps of one dose with its own numbers, in the order in which they keep people safe. */
+export function DoseSteps({ dose, columns = false }: { dose: PlanDose; columns?: boolean }) {
+  const t = useTranslations('doses');
+  const words = useDoseWords();
+  const units = useUnits();
+  const text = dose.substance === 'cyanuric-acid' ? 'stabilizer-bag' : dose.steps;
+  const figures = {
+    hours: pumpHours(dose) ?? 0,
+    litres: units.bucket(bucketLitres(dose)),
+    substance: dose.substance,
+    after: words.afterwards(dose),
+    b: bold,
+  };
+  return (
+    <ol className={`grid gap-x-7 text-[15.5px] leading-[21px] md:text-body ${columns ? 'md:grid-cols-2' : ''}`}>
+      {numbers.map((number) => (
+        <li key={number} className="grid grid-cols-[22px_minmax(0,1fr)] border-t border-rule py-1.25 first:border-t-0">
+          <span aria-hidden="true" className="font-display font-control text-ink-2">
+            {number}
+          </span>
+          <span>{t.rich(`steps.${text}.${number}`, figures)}</span>
+        </li>
+      ))}
+    </ol>
+  );
+}

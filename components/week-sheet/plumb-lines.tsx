@@ -1,0 +1,47 @@
+'use client';
+
+import { doseFoot } from '@/components/charts/dose-marks';
+import { isOn, xOf } from '@/components/charts/time-axis';
+import { type ValueAxis, yOf } from '@/components/charts/value-axis';
+import type { CurveQuantity } from '@/components/charts/water-curve';
+import { chartDoses } from './chart-input';
+import { laneHeight } from './lane';
+import { useSheet } from './sheet-context';
+import { useDoseWords } from './use-dose-words';
+
+const tops: Record<CurveQuantity, number> = {
+  freeChlorine: laneHeight.head + laneHeight.sun,
+  pH: laneHeight.head + laneHeight.sun + laneHeight.chlorine + laneHeight.highLow,
+  cyanuricAcid: laneHeight.head + laneHeight.sun + laneHeight.chlorine + laneHeight.highLow + laneHeight.pH,
+};
+const foot = tops.cyanuricAcid + laneHeight.stabilizer;
+
+/** From the to-do lane up through the lanes to the curve that each dose lifts: drawn out once it is given. */
+export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQuantity, ValueAxis> }) {
+  const { sheet, picture } = useSheet();
+  const doses = chartDoses(sheet.doses, useDoseWords());
+  return (
+    <svg
+      width={width}
+      height={foot}
+      viewBox={`0 0 ${width} ${foot}`}
+      aria-hidden="true"
+      className="pointer-events-none absolute top-0 left-[var(--gutter)] stroke-ink"
+    >
+      {doses.map((dose) => {
+        const level = doseFoot(picture.points, dose);
+        if (dose.moves === undefined || level === undefined || !isOn(picture.axis, dose.at)) return null;
+        const x = xOf(picture.axis, width, dose.at);
+        const top = tops[dose.moves] + yOf(axes[dose.moves], level);
+        return (
+          <path
+            key={dose.id}
+            d={`M${x} ${foot}V${top}`}
+            strokeWidth="1.1"
+            strokeDasharray={dose.given ? 'none' : '2 3'}
+          />
+        );
+      })}
+    </svg>
+  );
+}

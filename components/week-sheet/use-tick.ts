@@ -1,0 +1,60 @@
+'use client';
+
+import { useRef, useState } from 'react';
+import { useTickDose } from '@/lib/client/doses';
+import { RequestProblem } from '@/lib/client/fetch-json';
+import { forgetTick, keepTick } from '@/lib/client/unsent-ticks';
+import type { DoseTick, PlanDose } from '@/lib/schemas/plan-dose';
+import { useClock } from './clock-context';
+import { useSheet } from './sheet-context';
+
+export type Intention = { action: 'claim' | 'given' | 'skipped' | 'undo' } | { action: 'changed'; amount: number };
+
+/**
+ * Says what became of a dose. The id of a tick is made once for each intention: pressing twice, or again after a failure,
+ * is still the same tick. What gets no answer is kept on the device.
+ */
+export function useTick(dose: PlanDose) {
+  const { sheet, start } = useSheet();
+  const clock = useClock();
+  const mutation = useTickDose(start);
+  const intention = useRef<{ key: string; tick: DoseTick } | undefined>(undefined);
+  const [busy, setBusy] = useState<Intention['action'] | undefined>(undefined);
+  const [problem, setProblem] = useState<unknown>(undefined);
+
+  const send = async (wanted: Intention) => {
+    if (busy !== undefined) return false;
+    // After the dose or its plan has changed, the same words are another intention.
+    const key = JSON.stringify([wanted, dose.status, dose.planVersion]);
+    if (intention.current?.key !== key)
+      intention.current = { key, tick: { ...wanted, id: crypto.randomUUID(), planVersion: dose.planVersion } };
+    const { tick } = intention.current;
+    setBusy(wanted.action);
+    setProblem(undefined);
+    try {
+      await mutation.mutateAsync({ doseId: dose.id, tick });
+      intention.current = undefined;
+      forgetTick(sheet.me.id, tick.id);
+      return true;
+    } catch (cause) {
+      setProblem(cause);
+      const unheard = cause instanceof RequestProblem && cause.code === 'no-connection';
+      // 'I am adding it now' is worth nothing later.
+      if (unheard && tick.action !== 'claim')
+        keepTick(sheet.me.id, { doseId: dose.id, tick: pressedAt(tick, clock()) });
+      return false;
+    } finally {
+      setBusy(undefined);
+    }
+  };
+
+  return { send, busy, problem };
+}
+
+/** A tick that arrives late still says when the product went in. */
+function pressedAt(tick: DoseTick, instant: number): DoseTick {
+  if (tick.action !== 'given' && tick.action !== 'changed') return tick;
+  return { ...tick, at: new Date(instant).toISOString() };
+}
+
+export type Tick = ReturnType<typeof useTick>;

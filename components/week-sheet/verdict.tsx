@@ -1,0 +1,56 @@
+'use client';
+
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import { buttonClass } from '@/components/ui/button-class';
+import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
+import { bold } from './bold';
+import { useSheet } from './sheet-context';
+import { useVerdictWords } from './use-verdict-words';
+import { WaterNow } from './water-now';
+
+/** The swim verdict: the first line of the page. A Fine needs no frame and always has its standing line. */
+export function Verdict() {
+  const t = useTranslations('verdict');
+  const { sheet } = useSheet();
+  const { state, headline, reasons } = useVerdictWords();
+  if (sheet.verdict.state === 'fine')
+    return (
+      <section data-verdict="fine">
+        <h1 className="font-display-soft text-verdict text-balance">{headline}</h1>
+        <WaterNow>
+          <Standing />
+        </WaterNow>
+      </section>
+    );
+  const [first, ...others] = reasons;
+  return (
+    <VerdictFrame state={sheet.verdict.state} word={state} headline={headline}>
+      {first && <p className="text-pretty">{first.words}</p>}
+      {others.length > 0 && (
+        <ul className="mt-1 grid list-disc gap-0.5 pl-4.5 text-small text-ink-2">
+          {others.map(({ code, words }) => (
+            <li key={code}>{words}</li>
+          ))}
+        </ul>
+      )}
+      {sheet.verdict.state !== 'stay-out' && (
+        <Link href="/test" className={buttonClass({ size: 'small', className: 'mt-3' })}>
+          {t('quickCheck')}
+        </Link>
+      )}
+      <WaterNow />
+    </VerdictFrame>
+  );
+}
+
+function Standing() {
+  const t = useTranslations('verdict');
+  const { sheet } = useSheet();
+  return (
+    <div className="mt-2.5 grid gap-1.5 md:mt-2">
+      <StandingLine className="md:text-small">{t.rich('standing', { b: bold })}</StandingLine>
+      {sheet.verdict.adviseDailyCheck && <p className="text-small text-ink-2">{t('dailyCheck')}</p>}
+    </div>
+  );
+}
