@@ -91,6 +91,15 @@ describe('instant to wall clock', () => {
   });
 });
 
+describe('the moment of a change', () => {
+  it('belongs to the new time, whatever was asked before', () => {
+    const change = at('2026-03-08T07:00:00Z');
+    expect(wallClock(change - 1, 'America/New_York').hour).toBe(1);
+    expect(wallClock(change, 'America/New_York').hour).toBe(3);
+    expect(wallClock(change - 1, 'America/New_York').hour).toBe(1);
+  });
+});
+
 describe('text to instant', () => {
   it.each([
     ['2026-07-05T19:00:00-04:00', 1_783_292_400_000],
@@ -150,6 +159,14 @@ describe('daily wall-clock intervals as instants', () => {
     expect(intervalsOfDay(intervals, '2026-07-05', zone)).toEqual([
       { from: at('2026-07-05T12:00:00Z'), to: at('2026-07-05T20:00:00Z') },
     ]);
+  });
+
+  it('joins intervals that only touch', () => {
+    const halves = [
+      { from: '08:00', to: '12:00' },
+      { from: '12:00', to: '16:00' },
+    ];
+    expect(intervalsOfDay(halves, '2026-07-05', zone)).toHaveLength(1);
   });
 
   it.each([

@@ -146,6 +146,7 @@ describe('the reading itself', () => {
     expect(swimVerdict(measured(3, 7.9)).reasons).toEqual([
       { code: 'ph-above-range', value: 7.9, limit: 7.8, measured: true },
     ]);
+    expect(swimVerdict(measured(1.9, 7.5, now - HOUR)).state).toBe('stay-out');
     expect(swimVerdict(measured(1.9, 7.5, now - HOUR - 1)).state).toBe('fine');
   });
 

@@ -99,10 +99,13 @@ describe('an hour in which a dose goes in', () => {
     ]);
   });
 
-  it('and a dose on the full hour belongs to that hour', () => {
+  it('and a dose on the full hour belongs to that hour: straight lines from there on', () => {
     const onTheHour = { ...input, waits: [{ from: now + HOUR, until: now + 1.25 * HOUR }] };
     const justBefore = swimVerdict({ ...onTheHour, now: now + HOUR - 1 });
     expect(justBefore.reasons.map(({ code }) => code)).toEqual(['chlorine-under-lowest-level']);
+    const later = swimVerdict({ ...onTheHour, now: now + 1.5 * HOUR });
+    expect(later.reasons).toMatchObject([{ code: 'chlorine-over-swim-limit' }]);
+    expect(later.reasons[0]?.value).toBeCloseTo(4.2, 9);
   });
 });
 
@@ -188,6 +191,12 @@ describe('daily check', () => {
       readings: { freeChlorine: { value: 3, takenAt: at }, pH: { value: 7.5, takenAt: at } },
     };
     expect(swimVerdict(input)).toMatchObject({ state: 'fine', adviseDailyCheck: advise });
+  });
+
+  it('goes by the older of the two readings', () => {
+    const chlorine = { value: 3, takenAt };
+    const pH = { value: 7.5, takenAt: now - 30 * HOUR };
+    expect(swimVerdict({ ...withReadings({ freeChlorine: chlorine, pH }), swimDay: true }).adviseDailyCheck).toBe(true);
   });
 
   it('is said only under a fine', () => {
