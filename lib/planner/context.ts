@@ -1,10 +1,10 @@
 import { dayOf } from '@/lib/calendar/household-day';
 import { intervalsOfDay, parseInstant } from '@/lib/calendar/wall-time';
-import { hoursFrom, settingOf } from '@/lib/projection';
+import { analysisAt, hoursFrom, settingOf } from '@/lib/projection';
 import { ensembleOf, type Member } from '@/lib/projection/ensemble';
 import type { WeekDose } from '@/lib/projection/events';
 import { type Forcing, prepareForcing } from '@/lib/projection/forcing';
-import type { CourseSetting } from '@/lib/projection/integrate';
+import { type CourseSetting, integrateWeek } from '@/lib/projection/integrate';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { ledgerOf } from '@/lib/chemistry';
 import { weekDoseOf } from './given-doses';
@@ -21,6 +21,8 @@ export type PlanContext = {
   median: Member;
   members: readonly Member[];
   setting: CourseSetting;
+  /** The end of a median week in which nothing more goes in: what a plan's own drift is measured from. */
+  undosedEnd: { cyanuricAcid: number; calciumHardness: number };
   hours: readonly number[];
   /** Whether somebody may swim at each of the hours. */
   swimHour: readonly boolean[];
@@ -40,13 +42,16 @@ export function contextOf(scenario: Scenario): PlanContext {
   const forcing = prepareForcing(pool, start.takenAt, scenario.week, start.water.temperature);
   const setting = settingOf(pool, start.water.temperature, scenario.parameters);
   const hours = hoursFrom(start.takenAt);
+  const median: Member = { start: { ledger: ledgerOf(start.water), loads: start.loads }, setting };
+  const undosed = integrateWeek(forcing, median.start, given, setting);
   return {
     scenario,
     now: scenario.now === undefined ? start.takenAt : Math.max(start.takenAt, parseInstant(scenario.now)!),
     start,
     given,
     forcing,
-    median: { start: { ledger: ledgerOf(start.water), loads: start.loads }, setting },
+    median,
+    undosedEnd: analysisAt(undosed.end, undosed.endPH),
     members: ensembleOf(start.water, start.errors, start.loads, setting),
     setting,
     hours,

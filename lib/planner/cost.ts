@@ -35,8 +35,8 @@ function costOf(draft: Draft, choice: Choice, median: Course, courses: readonly 
     visits: preferences.evenings * weights.visit * visitsOf(draft),
     shortfall: preferences.steadiness * risk.shortfall,
     excess: preferences.steadiness * risk.excess,
-    stabilizer: stabilizerPrice(first.cyanuricAcid, water.cyanuricAcid.at(-1)!, context),
-    hardness: hardnessPrice(first.calciumHardness, water.calciumHardness.at(-1)!, context),
+    stabilizer: stabilizerPrice(water.cyanuricAcid.at(-1)!, context),
+    hardness: hardnessPrice(water.calciumHardness.at(-1)!, context),
     pH: pHPrice(first, water.pH, water.totalAlkalinity.at(-1)!, context),
   };
   return { ...cost, total: Object.values(cost).reduce((sum, each) => sum + each, 0) };
@@ -87,18 +87,24 @@ function awayFrom([low, high]: readonly [number, number], at: number): number {
   return Math.min(1, Math.max(0, (at - aim) / (high - aim)));
 }
 
-/** Undoing a rise of stabilizer: the replacement water that takes it out again, as far as it leads away from the band. */
-export function stabilizerPrice(from: number, to: number, { scenario }: Pick<PlanContext, 'scenario'>): number {
+/** Undoing the plan's own rise of stabilizer: the replacement water that takes it out again, as far as it leads away from the band. */
+export function stabilizerPrice(
+  to: number,
+  { scenario, undosedEnd }: Pick<PlanContext, 'scenario' | 'undosedEnd'>,
+): number {
   const { pool, driftPrices } = scenario;
-  const rise = Math.max(0, to - from);
+  const rise = Math.max(0, to - undosedEnd.cyanuricAcid);
   const each = driftPrices.stabilizer ?? (weights.water * pool.volume) / Math.max(20, to);
   return rise * each * awayFrom(pool.stabilizerBand, to);
 }
 
 /** The same for hardness; fill water that is hard itself takes little out, so each step weighs more. */
-export function hardnessPrice(from: number, to: number, { scenario }: Pick<PlanContext, 'scenario'>): number {
+export function hardnessPrice(
+  to: number,
+  { scenario, undosedEnd }: Pick<PlanContext, 'scenario' | 'undosedEnd'>,
+): number {
   const { pool, driftPrices } = scenario;
-  const rise = Math.max(0, to - from);
+  const rise = Math.max(0, to - undosedEnd.calciumHardness);
   const fill = pool.fillWater.calciumHardness;
   const each = driftPrices.hardness ?? (weights.water * pool.volume) / Math.max(20, to - fill);
   return rise * each * awayFrom(surfaceRanges[pool.surface].calciumHardness, Math.max(to, fill));

@@ -104,8 +104,8 @@ export function responseOf(context: PlanContext, evenings: Choice['evenings'], t
       preferences.money * moneyOf(draft, choice) +
       preferences.evenings * weights.visit * visitsOf(draft) +
       preferences.steadiness * (risk.shortfall + risk.excess) +
-      stabilizerPrice(first.cyanuricAcid, cyanuricAcid, context) +
-      hardnessPrice(first.calciumHardness, hardness, context) +
+      stabilizerPrice(cyanuricAcid, context) +
+      hardnessPrice(hardness, context) +
       pHPrice(first, pH, totalAlkalinity, context)
     );
   };

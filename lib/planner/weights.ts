@@ -21,7 +21,7 @@ export const weights = {
   /** Bicarbonate that brings 10 mg/L of alkalinity back to one m3: 17 g. */
   alkalinityPerCubicMetre: 0.04,
   /** One m3 of replacement water, drain and fill. */
-  water: 1,
+  water: 2.5,
 } as const;
 
 /** Prices where the shelf names none, per kg of solid or litre of liquid. */
