@@ -92,11 +92,12 @@ describe('instant to wall clock', () => {
 });
 
 describe('the moment of a change', () => {
-  it('belongs to the new time, whatever was asked before', () => {
-    const change = at('2026-03-08T07:00:00Z');
-    expect(wallClock(change - 1, 'America/New_York').hour).toBe(1);
-    expect(wallClock(change, 'America/New_York').hour).toBe(3);
-    expect(wallClock(change - 1, 'America/New_York').hour).toBe(1);
+  it('belongs to the new time, also when the hour before was asked first', () => {
+    // A zone that no other test here has asked about: its stretches are looked up in this order.
+    const change = at('2026-03-08T08:00:00Z');
+    expect(wallClock(change - 1, 'America/Chicago').hour).toBe(1);
+    expect(wallClock(change, 'America/Chicago').hour).toBe(3);
+    expect(wallClock(change - 1, 'America/Chicago').hour).toBe(1);
   });
 });
 
