@@ -1,8 +1,8 @@
 import 'server-only';
-import { eq, lt } from 'drizzle-orm';
+import { eq } from 'drizzle-orm';
 import type { DatabaseOrTransaction } from '@/db/client';
 import { sessions } from '@/db/schema';
-import type { ProvenHouseholdId, SystemScope } from '@/lib/schemas/scope';
+import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 
 /** From now on this device looks at this household. */
 export async function chooseSessionHousehold(
@@ -11,8 +11,4 @@ export async function chooseSessionHousehold(
   householdId: ProvenHouseholdId,
 ): Promise<void> {
   await db.update(sessions).set({ householdId }).where(eq(sessions.id, sessionId));
-}
-
-export async function deleteExpiredSessions(db: DatabaseOrTransaction, _scope: SystemScope, now: Date): Promise<void> {
-  await db.delete(sessions).where(lt(sessions.expiresAt, Math.floor(now.getTime() / 1000)));
 }

@@ -23,6 +23,7 @@ export type Sessions = {
   start(personId: string, householdId: string | null): Promise<{ signedIn: SignedIn; cookie: string }>;
   /** @returns the cookie that forgets the session */
   end(sessionId: string | null): Promise<string>;
+  deleteExpired(): Promise<void>;
 };
 
 const tokenShape = /^[a-z2-7]{40}$/;
@@ -67,6 +68,7 @@ export function sessionsOf(db: Database, { secure, secret }: { secure: boolean; 
       if (sessionId !== null) await lucia.invalidateSession(sessionId);
       return lucia.createBlankSessionCookie().serialize();
     },
+    deleteExpired: () => lucia.deleteExpiredSessions(),
   };
 }
 

@@ -38,3 +38,5 @@ export const stockCountSchema = z.strictObject({
     .min(0, 'Write 0 or more.')
     .max(1e7, 'That is more than a shelf holds.'),
 });
+
+export const productPathSchema = z.strictObject({ productId: z.string().min(1).max(64) });

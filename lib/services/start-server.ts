@@ -1,0 +1,19 @@
+import 'server-only';
+import { database } from '@/db/client';
+import { prepareDatabase } from '@/db/migrate';
+import { deleteExpiredRateLimits } from '@/db/queries/rate-limits';
+import { sessionsOf } from '@/lib/auth/sessions';
+import { systemScope } from '@/lib/auth/system-scope';
+import { environment, now as wallClock } from '@/lib/env';
+import { log } from '@/lib/log';
+
+/** Brings the database up to date and clears away what has run out; the server answers nobody before. */
+export async function startServer(): Promise<void> {
+  const db = database();
+  const now = wallClock();
+  const surroundings = environment();
+  const copy = await prepareDatabase(db, surroundings.databaseUrl, now);
+  if (copy !== null) log().info({ copy }, 'the database was copied before it was migrated');
+  await sessionsOf(db, surroundings).deleteExpired();
+  await deleteExpiredRateLimits(db, systemScope('clean-up'), now);
+}

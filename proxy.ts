@@ -1,0 +1,32 @@
+import { NextResponse, type NextRequest } from 'next/server';
+import { apiHeaders, pageHeaders, pagePolicy, transportHeaders } from '@/lib/api/headers';
+import { environment } from '@/lib/env';
+
+/** The headers of every reply. A page gets a policy of its own with a fresh nonce, so every page is made per request. */
+export function proxy(request: NextRequest): NextResponse {
+  const surroundings = environment();
+  const transport = transportHeaders(surroundings);
+  const { pathname } = request.nextUrl;
+  if (pathname === '/api' || pathname.startsWith('/api/'))
+    return withHeaders(NextResponse.next(), { ...apiHeaders, ...transport });
+
+  const policy = pagePolicy(btoa(crypto.randomUUID()), surroundings);
+  const headers = new Headers(request.headers);
+  // Next.js reads the nonce for its own scripts out of the policy on the request.
+  headers.set('content-security-policy', policy);
+  return withHeaders(NextResponse.next({ request: { headers } }), {
+    ...pageHeaders,
+    ...transport,
+    'content-security-policy': policy,
+  });
+}
+
+function withHeaders(response: NextResponse, headers: Record<string, string>): NextResponse {
+  for (const [name, value] of Object.entries(headers)) response.headers.set(name, value);
+  return response;
+}
+
+// Everything but what the build and public/ serve as files. No request gets by for saying that it only prefetches.
+export const config = {
+  matcher: ['/((?!_next/static/|_next/image/|.*\\.(?:png|svg|ico|webmanifest|txt|js|woff2)$).*)'],
+};
