@@ -80,8 +80,16 @@ function solveHypochlorousAcid(
   return x;
 }
 
+/** [HOCl] alone, mol/L: all that speciation at a given pH needs. Arguments as in {@link balanceChlorine}. */
+export function hypochlorousAcidAt(h: number, chlorine: number, cyanurate: number, k: ChlorineConstants): number {
+  const r = 1 / h;
+  const p0 = 1 + r * (k.none1 + r * (k.none2 + r * k.none3));
+  const p1 = k.one0 + r * (k.one1 + r * k.one2);
+  return solveHypochlorousAcid(chlorine, cyanurate, 1 + k.hypochlorite * r, p0, p1, k.two0 + k.two1 * r, k.three0, 0);
+}
+
 /**
- * Free chlorine and cyanurate at a given activity of H+.
+ * Free chlorine and cyanurate at a given activity of H+, with what a solver for pH needs.
  * @param h activity of H+; @param chlorine total free chlorine, mol/L; @param cyanurate total cyanurate, mol/L.
  * @param guess [HOCl] to start from, mol/L; 0 when there is none.
  */

@@ -1,6 +1,7 @@
 import { ionicStrengthOf } from './activity';
 import { balanceCarbonate, type CarbonateBalance } from './carbonate-balance';
 import { balanceChlorine, type ChlorineBalance } from './chlorine-balance';
+import { speciesAt } from './chlorine-species';
 import { constantsAt, type EquilibriumConstants } from './equilibrium-constants';
 import { CHLORINE_MILLIGRAMS_PER_MOLE } from './molar-masses';
 import type { ChlorineSpecies, Ledger, ModelChoice } from './water';
@@ -118,20 +119,7 @@ export function pHOfLedger(ledger: Ledger, guess = 7.5, constants = constantsOfL
 
 /** Free chlorine by form at a given pH, mg/L as Cl2. No input check. */
 export function speciesOfLedger(ledger: Ledger, pH: number, constants = constantsOfLedger(ledger)): ChlorineSpecies {
-  const total = ledger.freeChlorine / CHLORINE_MILLIGRAMS_PER_MOLE;
-  balanceChlorine(Math.exp(-Math.LN10 * pH), total, ledger.cyanurate, constants.chlorine, 0, chlorine);
-  return speciesOf(ledger.freeChlorine, chlorine);
-}
-
-/** The three forms from a solved balance; bound is what is left, so that they add up exactly. */
-export function speciesOf(freeChlorine: number, balance: ChlorineBalance): ChlorineSpecies {
-  const hypochlorousAcid = balance.hypochlorousAcid * CHLORINE_MILLIGRAMS_PER_MOLE;
-  const hypochlorite = balance.hypochlorite * CHLORINE_MILLIGRAMS_PER_MOLE;
-  return {
-    hypochlorousAcid,
-    hypochlorite,
-    cyanurateBound: Math.max(0, freeChlorine - hypochlorousAcid - hypochlorite),
-  };
+  return speciesAt(pH, ledger.freeChlorine, ledger.cyanurate, constants.chlorine);
 }
 
 /** [CO2] - [CO2] in equilibrium with air (log pCO2 -3.38) at a given pH, mol/L. No input check. */
