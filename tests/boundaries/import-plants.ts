@@ -81,7 +81,7 @@ export const importPlants: { rule: string; wrong: Plant; right: Plant }[] = [
     right: plant('db/queries/plans.ts', '@/lib/schemas/target'),
   },
   {
-    rule: 'errors-and-env-at-the-bottom',
+    rule: 'errors-env-and-log-at-the-bottom',
     wrong: plant('lib/env.ts', '@/lib/services/target'),
     right: plant('lib/errors.ts', '@/lib/schemas/target'),
   },
@@ -140,6 +140,11 @@ export const importPlants: { rule: string; wrong: Plant; right: Plant }[] = [
     rule: 'sessions-at-home',
     wrong: plant('lib/services/sign-up.ts', '@node-rs/argon2'),
     right: plant('lib/auth/password.ts', '@node-rs/argon2'),
+  },
+  {
+    rule: 'log-at-home',
+    wrong: plant('lib/services/keep-log.ts', 'pino'),
+    right: plant('lib/log.ts', 'pino'),
   },
   {
     rule: 'next-at-home',

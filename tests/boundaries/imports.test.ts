@@ -14,7 +14,8 @@ const mayImport: Record<string, string[]> = {
   schemas: ['units', 'calendar', 'standards'],
   chemistry: ['units', 'calendar', 'standards', 'schemas'],
   sun: ['units', 'calendar', 'standards', 'schemas'],
-  storage: ['units', 'calendar', 'standards', 'schemas'],
+  // How fast liquid chlorine weakens is a law of chemistry, what that does to a bottle is storage.
+  storage: ['units', 'calendar', 'standards', 'schemas', 'chemistry'],
   projection: ['units', 'calendar', 'standards', 'schemas', 'chemistry', 'sun', 'storage'],
   learning: ['units', 'calendar', 'standards', 'schemas', 'chemistry', 'sun', 'storage', 'projection'],
   planner: ['units', 'calendar', 'standards', 'schemas', 'chemistry', 'sun', 'storage', 'projection'],

@@ -23,7 +23,19 @@ const topLevel = [
 const made = ['node_modules', 'data', 'coverage', 'next-env.d.ts'];
 
 const lib = [
-  ...['errors.ts', 'env.ts', 'units', 'calendar', 'standards', 'schemas', 'chemistry', 'sun', 'storage', 'projection'],
+  ...[
+    'errors.ts',
+    'env.ts',
+    'log.ts',
+    'units',
+    'calendar',
+    'standards',
+    'schemas',
+    'chemistry',
+    'sun',
+    'storage',
+    'projection',
+  ],
   ...['learning', 'planner', 'situations', 'season', 'verdict', 'services', 'engine-worker', 'auth', 'mail', 'push'],
   ...['weather', 'api', 'client', 'messages', 'cli', 'docs'],
 ];
