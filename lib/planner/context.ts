@@ -26,6 +26,8 @@ export type PlanContext = {
   hours: readonly number[];
   /** Whether somebody may swim at each of the hours. */
   swimHour: readonly boolean[];
+  /** The swim limit at each hour [mg/L]; infinite while nobody may swim. */
+  swimCeiling: Float64Array;
   /** Whether stabilized products have been used, so that the higher code minimum holds. */
   stabilizedProductUsed: boolean;
 };
@@ -42,6 +44,7 @@ export function contextOf(scenario: Scenario): PlanContext {
   const forcing = prepareForcing(pool, start.takenAt, scenario.week, start.water.temperature);
   const setting = settingOf(pool, start.water.temperature, scenario.parameters);
   const hours = hoursFrom(start.takenAt);
+  const swimHour = swimHours(scenario, hours);
   const median: Member = { start: { ledger: ledgerOf(start.water), loads: start.loads }, setting };
   const undosed = integrateWeek(forcing, median.start, given, setting);
   return {
@@ -55,7 +58,8 @@ export function contextOf(scenario: Scenario): PlanContext {
     members: ensembleOf(start.water, start.errors, start.loads, setting),
     setting,
     hours,
-    swimHour: swimHours(scenario, hours),
+    swimHour,
+    swimCeiling: Float64Array.from(swimHour, (swims) => (swims ? pool.swimLimit : Infinity)),
     stabilizedProductUsed: given.some((dose) => dose.kind === 'tablets') || start.loads.length > 0,
   };
 }

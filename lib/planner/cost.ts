@@ -26,9 +26,10 @@ export function evaluate(draft: Draft, choice: Choice, context: PlanContext, mem
 function costOf(draft: Draft, choice: Choice, median: Course, courses: readonly Course[], context: PlanContext): Cost {
   const { preferences } = context.scenario;
   const water = seriesOf(median);
-  const lowest = water.cyanuricAcid.map((stabilizer) => lowestLevel(stabilizer, stabilizedIn(draft, context)));
-  const all = courses.map((course) => course.ledgers.map((ledger) => ledger.freeChlorine));
-  const risk = riskOf(all, water.freeChlorine, lowest, context);
+  const stabilized = stabilizedIn(draft, context);
+  const lowest = Float64Array.from(water.cyanuricAcid, (stabilizer) => lowestLevel(stabilizer, stabilized));
+  const chlorineOf = (course: Course) => Float64Array.from(course.ledgers, ({ freeChlorine }) => freeChlorine);
+  const risk = riskOf(courses.map(chlorineOf), chlorineOf(median), lowest, context);
   const first = context.start.water;
   const cost = {
     money: preferences.money * moneyOf(draft, choice),
@@ -51,34 +52,48 @@ export function moneyOf(draft: Draft, { tablets, fast }: Choice): number {
   return draft.tablets * (tablets?.price ?? 0) + measures * (fast?.measurePrice ?? 0);
 }
 
-/** Weighted shortfall and excess of rows of free chlorine, one for each member, and of the median. */
+/**
+ * Weighted shortfall and excess of rows of free chlorine, one for each member, and of the median.
+ *
+ * @param lowest lowest level at each hour [mg/L]
+ */
 export function riskOf(
-  rows: readonly ArrayLike<number>[],
-  median: ArrayLike<number>,
-  lowest: readonly number[],
-  { swimHour, scenario }: Pick<PlanContext, 'swimHour' | 'scenario'>,
+  rows: readonly Float64Array[],
+  median: Float64Array,
+  lowest: Float64Array,
+  { swimCeiling, swimHour }: Pick<PlanContext, 'swimCeiling' | 'swimHour'>,
 ): { shortfall: number; excess: number } {
-  const { swimLimit } = scenario.pool;
+  const risk = { shortfall: 0, excess: 0 };
+  for (const row of rows)
+    addRisk(risk, row, lowest, swimCeiling, weights.shortfall / rows.length, weights.excess / rows.length);
+  addRisk(risk, median, lowest, swimCeiling, weights.medianShortfall, weights.medianExcess);
+  for (let hour = 0; hour < median.length; hour++) {
+    if (!swimHour[hour]) continue;
+    if (median[hour]! < lowest[hour]!) risk.shortfall += weights.closedSwimHour;
+    else if (median[hour]! > swimCeiling[hour]!) risk.excess += weights.closedSwimHour;
+  }
+  return risk;
+}
+
+function addRisk(
+  risk: { shortfall: number; excess: number },
+  row: Float64Array,
+  lowest: Float64Array,
+  ceiling: Float64Array,
+  under: number,
+  over: number,
+): void {
   const maximum = limits.freeChlorineMaximum.value;
   let shortfall = 0;
   let excess = 0;
-  const perMember = 1 / Math.max(1, rows.length);
-  const add = (row: ArrayLike<number>, under: number, over: number) => {
-    for (let hour = 1; hour < row.length; hour++) {
-      const value = row[hour]!;
-      if (value < lowest[hour]!) shortfall += under * (lowest[hour]! - value);
-      if (swimHour[hour] && value > swimLimit) excess += over * (value - swimLimit);
-      if (value > maximum) excess += 10 * over * (value - maximum);
-    }
-  };
-  for (const row of rows) add(row, weights.shortfall * perMember, weights.excess * perMember);
-  add(median, weights.medianShortfall, weights.medianExcess);
-  for (let hour = 0; hour < median.length; hour++) {
-    if (!swimHour[hour]) continue;
-    if (median[hour]! < lowest[hour]!) shortfall += weights.closedSwimHour;
-    else if (median[hour]! > swimLimit) excess += weights.closedSwimHour;
+  for (let hour = 1; hour < row.length; hour++) {
+    const value = row[hour]!;
+    if (value < lowest[hour]!) shortfall += lowest[hour]! - value;
+    else if (value > ceiling[hour]!) excess += value - ceiling[hour]!;
+    if (value > maximum) excess += weights.overMaximum * (value - maximum);
   }
-  return { shortfall, excess };
+  risk.shortfall += under * shortfall;
+  risk.excess += over * excess;
 }
 
 /** How much of a rise leads away from a band: nothing up to two thirds of it (30 to 50 of 30 to 60), all from its end on. */

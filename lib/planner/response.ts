@@ -12,7 +12,7 @@ import { type FastOption, riseOfFast, type TabletOption } from './products';
 import { weights } from './weights';
 
 /** Members that screening looks at; finalists are projected in full. */
-const SCREENING_MEMBERS = 8;
+const SCREENING_MEMBERS = 6;
 const TABLET_EVENINGS = 2;
 const PROBE_RISE = 2;
 
@@ -125,7 +125,9 @@ function lowestLevels(
 ) {
   const rise = tablets > 0 ? tablets * answers[tabletEvening]!.cyanuricAcid : 0;
   const last = base.cyanuricAcid.length - 1;
-  return base.cyanuricAcid.map((stabilizer, hour) => lowestLevel(stabilizer + (rise * hour) / last, stabilized));
+  return Float64Array.from(base.cyanuricAcid, (stabilizer, hour) =>
+    lowestLevel(stabilizer + (rise * hour) / last, stabilized),
+  );
 }
 
 /** Hardness that the granules of a draft add [mg/L as CaCO3]. */

@@ -12,6 +12,8 @@ export const weights = {
   /** One mg/L over the swim limit for one hour in which somebody may swim: expected, and for the median. */
   excess: 0.15,
   medianExcess: 1,
+  /** How many times heavier each mg/L over 10 weighs, at any hour. */
+  overMaximum: 10,
   /** One swim hour in which the median is under the lowest level or over the swim limit: nobody may go in. */
   closedSwimHour: 0.4,
   /** Each 0.1 of pH outside 7.2 to 7.8 for one hour, median. */
