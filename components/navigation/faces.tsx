@@ -1,9 +1,9 @@
 import { useTranslations } from 'next-intl';
 import { Avatar, type AvatarRing } from '@/components/ui/avatar';
-import type { FramePerson, FrameRole } from './member';
+import type { FramePerson } from './member';
 
 /** The ring of a face, by role. */
-export const ringOf: Record<FrameRole, AvatarRing> = { owner: 'solid', caretaker: 'line', viewer: 'dashed' };
+export const ringOf: Record<FramePerson['role'], AvatarRing> = { owner: 'solid', caretaker: 'line', viewer: 'dashed' };
 
 /** At most this many faces fit beside the siren of a phone. */
 const SHOWN = 3;

@@ -1,6 +1,6 @@
 'use client';
 
-import { ChevronRight, CircleQuestionMark } from 'lucide-react';
+import { ChevronRight, CircleQuestionMark, type LucideIcon, Waves } from 'lucide-react';
 import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
@@ -24,14 +24,8 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
           <TroubleLink href="/help/safety">{t('keepingSafe')}</TroubleLink>
         </div>
       </div>
-      <Link href="/help" className="mx-4 flex min-h-17 items-center gap-3 border-t border-rule">
-        <CircleQuestionMark aria-hidden="true" className="size-5.75 shrink-0" />
-        <span className="min-w-0 flex-1">
-          <b className="block font-display text-[19px] leading-[23px] font-section">{t('help')}</b>
-          <span className="block text-[14.5px] leading-[19px] text-ink-2">{t('helpFact')}</span>
-        </span>
-        <ChevronRight aria-hidden="true" className="size-5 shrink-0 text-ink-3" />
-      </Link>
+      <MorePlace href="/pool" Icon={Waves} name={t('pool')} fact={t('poolFact')} />
+      <MorePlace href="/help" Icon={CircleQuestionMark} name={t('help')} fact={t('helpFact')} />
       <div className="mx-4 flex min-h-14 items-center justify-between gap-3 border-t border-ink text-[15px] leading-5">
         <span className="inline-flex min-w-0 items-center gap-2.25">
           <Avatar name={frame.you.name} ring={ringOf[frame.you.role]} />
@@ -42,6 +36,21 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
         <SignOutButton />
       </div>
     </Sheet>
+  );
+}
+
+type MorePlaceProps = { href: string; Icon: LucideIcon; name: string; fact: string };
+
+function MorePlace({ href, Icon, name, fact }: MorePlaceProps) {
+  return (
+    <Link href={href} className="mx-4 flex min-h-17 items-center gap-3 border-t border-rule">
+      <Icon aria-hidden="true" className="size-5.75 shrink-0" />
+      <span className="min-w-0 flex-1">
+        <b className="block font-display text-[19px] leading-[23px] font-section">{name}</b>
+        <span className="block text-[14.5px] leading-[19px] text-ink-2">{fact}</span>
+      </span>
+      <ChevronRight aria-hidden="true" className="size-5 shrink-0 text-ink-3" />
+    </Link>
   );
 }
 

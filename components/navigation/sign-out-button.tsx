@@ -4,7 +4,7 @@ import { useMutation } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
 import { classNames } from '@/components/ui/class-names';
 import { useToast } from '@/components/ui/toast';
-import { useProblemWords } from '@/lib/client/problem-words';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { leaveFor, signOut } from '@/lib/client/session';
 
 export function SignOutButton({ className }: { className?: string }) {

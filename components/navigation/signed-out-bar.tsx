@@ -3,13 +3,20 @@ import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
 import { DoubleRule } from '@/components/ui/double-rule';
+import { textLink } from '@/components/ui/text-link';
 import { BarLink } from './bar-link';
 import { BrandMark } from './brand-mark';
 import { emergencyCard } from './places';
+import { SignOutButton } from './sign-out-button';
 import { SirenLink } from './siren-link';
 
-/** The bar before anyone has signed in: words only on a desk, mark and siren on a phone. */
-export function SignedOutBar() {
+const doorLink = 'inline-flex min-h-11 items-center text-[16px] leading-5 whitespace-nowrap md:text-[15px]';
+
+/**
+ * The bar before the door: words only on a desk, mark and siren on a phone. Whoever is signed in already, but not inside a
+ * household's pages, finds the way to the sheet and out.
+ */
+export function SignedOutBar({ signedIn = false }: { signedIn?: boolean }) {
   const t = useTranslations('navigation');
   const common = useTranslations('common');
   return (
@@ -39,16 +46,17 @@ export function SignedOutBar() {
           <span className="md:hidden">
             <SirenLink />
           </span>
-          <Link
-            href="/sign-in"
-            className="inline-flex min-h-11 items-center whitespace-nowrap text-[16px] leading-5 underline decoration-1 underline-offset-[3px] md:text-[15px]"
-          >
-            {t('signIn')}
+          <Link href={signedIn ? '/week' : '/sign-in'} className={`${doorLink} ${textLink}`}>
+            {signedIn ? t('toYourSheet') : t('signIn')}
           </Link>
           <span className="hidden md:inline">
-            <Link href="/sign-up" className={buttonClass({ size: 'small' })}>
-              {t('signUp')}
-            </Link>
+            {signedIn ? (
+              <SignOutButton className="text-[15px] leading-5" />
+            ) : (
+              <Link href="/sign-up" className={buttonClass({ size: 'small' })}>
+                {t('signUp')}
+              </Link>
+            )}
           </span>
         </nav>
       </div>

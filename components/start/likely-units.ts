@@ -1,4 +1,4 @@
-import type { SignUp } from '@/lib/client/session';
+import type { SignUp } from '@/lib/schemas/account';
 
 /**
  * Which measures to offer first, from the languages a browser asks for ("en-US,en;q=0.9"): US measures where the first

@@ -3,7 +3,7 @@
 import { useMutation } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
 import { Button, type ButtonProps } from '@/components/ui/button';
-import { useProblemWords } from '@/lib/client/problem-words';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { leaveFor, lookRound } from '@/lib/client/session';
 
 /** Opens a private copy of the demo household and goes to its week. */

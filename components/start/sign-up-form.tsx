@@ -9,14 +9,17 @@ import { ProblemState } from '@/components/ui/problem-state';
 import { Segments } from '@/components/ui/segments';
 import { TextField } from '@/components/ui/text-field';
 import { useHydrated } from '@/components/ui/use-hydrated';
-import { browserTimeZone, signUp, type SignUp } from '@/lib/client/session';
+import { browserTimeZone, signUp } from '@/lib/client/session';
+import type { SignUp } from '@/lib/schemas/account';
 import { looksLikeEmail } from './email-shape';
 import { PasswordField } from './password-field';
 import { useEntryForm } from './use-entry-form';
 
 const fields = ['name', 'email', 'password', 'householdName'] as const;
 
-export function SignUpForm({ likelyUnits }: { likelyUnits: SignUp['unitSystem'] }) {
+export type SignUpFormProps = { likelyUnits: SignUp['unitSystem']; shortestPassword: number };
+
+export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
   const t = useTranslations('start.signUp');
   const form = useTranslations('start.form');
   const [unitSystem, setUnitSystem] = useState(likelyUnits);
@@ -63,7 +66,7 @@ export function SignUpForm({ likelyUnits }: { likelyUnits: SignUp['unitSystem'] 
       />
       <PasswordField
         label={t('password')}
-        hint={t('passwordHint')}
+        hint={t('passwordHint', { count: shortestPassword })}
         name="password"
         autoComplete="new-password"
         problem={problems.password}

@@ -3,7 +3,7 @@
 import { useTranslations } from 'next-intl';
 import { useRef, useState } from 'react';
 import { RequestProblem } from '@/lib/client/fetch-json';
-import { useProblemWords } from '@/lib/client/problem-words';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { leaveFor } from '@/lib/client/session';
 
 type Problems<Field extends string> = Partial<Record<Field, string>>;

@@ -1,15 +1,31 @@
 import common from './en/common.json';
 import doses from './en/doses.json';
+import firstRun from './en/first-run.json';
 import help from './en/help.json';
 import navigation from './en/navigation.json';
+import pool from './en/pool.json';
 import problems from './en/problems.json';
+import readings from './en/readings.json';
 import start from './en/start.json';
 import units from './en/units.json';
 import verdict from './en/verdict.json';
 import week from './en/week.json';
 
 /** Every word of the product, one namespace a file. A new file is added here and is then typed and served everywhere. */
-export const catalogue = { common, doses, help, navigation, problems, start, units, verdict, week };
+export const catalogue = {
+  common,
+  doses,
+  'first-run': firstRun,
+  help,
+  navigation,
+  pool,
+  problems,
+  readings,
+  start,
+  units,
+  verdict,
+  week,
+};
 
 export type Catalogue = typeof catalogue;
 export type Namespace = keyof Catalogue;

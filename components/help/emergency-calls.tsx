@@ -1,0 +1,60 @@
+import { Flame, Phone, PhoneCall } from 'lucide-react';
+import { useTranslations } from 'next-intl';
+import { buttonClass } from '@/components/ui/button-class';
+import { textLink } from '@/components/ui/text-link';
+import { type EmergencyCountry, emergencyNumbers } from '@/lib/standards/emergency-numbers';
+
+const dialled = (number: string) => `tel:${number.replace(/[^0-9+]/g, '')}`;
+
+/** Whom to call, one tap each. Where a number is not certain, words stand in its place. */
+export function EmergencyCalls({ country, chooseHref }: { country: EmergencyCountry; chooseHref: string }) {
+  const t = useTranslations('help.emergency');
+  const { emergency, poison } = emergencyNumbers(country);
+  const call = (variant: 'terra' | 'outline', className?: string) =>
+    buttonClass({ variant, size: 'large', className: `justify-start min-h-14.5 ${className ?? ''}` });
+  return (
+    <div>
+      {emergency === null ? (
+        <p className="border-due border-ink bg-paper-lift px-4 py-3 text-field font-strong">{t('localEmergency')}</p>
+      ) : (
+        <div className="grid grid-cols-2 gap-2.5">
+          <a href={dialled(emergency)} className={call('terra', 'col-span-2')}>
+            <PhoneCall aria-hidden="true" className="size-5.5 shrink-0" />
+            <Named name={t('callEmergency')} number={emergency} />
+          </a>
+          {poison === null ? null : (
+            <a href={dialled(poison)} className={call('outline')}>
+              <Phone aria-hidden="true" className="size-5.5 shrink-0" />
+              <Named name={t('poisonCentre')} number={poison} />
+            </a>
+          )}
+          <a href={dialled(emergency)} className={call('outline', poison === null ? 'col-span-2' : '')}>
+            <Flame aria-hidden="true" className="size-5.5 shrink-0" />
+            <Named name={t('fireService')} number={emergency} />
+          </a>
+        </div>
+      )}
+      {poison === null ? <p className="mt-2.5 text-body">{t('poisonOnLabel')}</p> : null}
+      <p className="mt-2.5 text-small text-ink-2">
+        {t.rich('numbersFor', {
+          country: t(`country.${country}`),
+          link: (words) => (
+            <a href={chooseHref} className={`${textLink} inline-flex min-h-11 items-center text-ink print:hidden`}>
+              {words}
+            </a>
+          ),
+        })}
+      </p>
+    </div>
+  );
+}
+
+/** The number stands in words too: a card on paper cannot be tapped, and a borrowed phone is dialled by hand. */
+function Named({ name, number }: { name: string; number: string }) {
+  return (
+    <span className="min-w-0 text-left">
+      <span className="block">{name}</span>
+      <span className="block text-label font-text">{number}</span>
+    </span>
+  );
+}

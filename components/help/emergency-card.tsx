@@ -1,0 +1,35 @@
+import { useTranslations } from 'next-intl';
+import type { EmergencyCountry } from '@/lib/standards/emergency-numbers';
+import { CountryList } from './country-list';
+import { EmergencyCalls } from './emergency-calls';
+import { FirstAid } from './first-aid';
+import { HelpHead } from './help-head';
+import { LeaveFrame } from './leave-frame';
+import { PrintButton } from './print-button';
+import { SpillList } from './spill-list';
+
+const countriesId = 'countries';
+
+/** People first, then call: everything on one page, one tap from everywhere, also without an account. */
+export function EmergencyCard({ country }: { country: EmergencyCountry }) {
+  const t = useTranslations('help.emergency');
+  const common = useTranslations('common');
+  return (
+    <div className="mx-auto max-w-sheet px-margin pb-10">
+      <HelpHead headline={t('headline')} lead={t('lead')} aside={<PrintButton label={common('print')} />} />
+      <div className="md:grid md:grid-cols-[1fr_1.25fr] md:gap-x-9 md:pt-4">
+        <div className="space-y-4">
+          <EmergencyCalls country={country} chooseHref={`#${countriesId}`} />
+          <LeaveFrame />
+        </div>
+        <div className="mt-3 md:mt-0">
+          <FirstAid />
+          <SpillList />
+        </div>
+      </div>
+      <p className="mt-2 border-t border-ink pt-2.5 text-body font-strong">{t('after')}</p>
+      <p className="mt-1 text-small text-ink-2">{t('ground')}</p>
+      <CountryList id={countriesId} current={country} />
+    </div>
+  );
+}

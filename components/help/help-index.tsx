@@ -1,0 +1,49 @@
+import { ChevronRight } from 'lucide-react';
+import { useTranslations } from 'next-intl';
+import Link from 'next/link';
+import { emergencyCard } from '@/components/navigation/places';
+import { scopeAnchor } from '@/components/start/scope-list';
+import { HelpHead } from './help-head';
+
+/** The help that exists today, trouble first, and what no sheet can know. */
+export function HelpIndex() {
+  const t = useTranslations('help');
+  const pages = [
+    { href: emergencyCard, name: t('emergency.title'), note: t('index.emergencyNote') },
+    { href: '/help/safety', name: t('index.safety'), note: t('index.safetyNote') },
+    { href: `/#${scopeAnchor}`, name: t('index.scope'), note: t('index.scopeNote') },
+  ];
+  const unknowns = [t('cannot.see'), t('cannot.label'), t('cannot.measure'), t('cannot.body')];
+  return (
+    <div className="mx-auto max-w-sheet px-margin pb-10">
+      <HelpHead headline={t('title')} lead={t('lead')} />
+      <div className="md:grid md:grid-cols-2 md:gap-x-9 md:pt-2">
+        <ul>
+          {pages.map(({ href, name, note }) => (
+            <li key={href}>
+              <Link href={href} className="flex min-h-17 items-center gap-3 border-t border-rule py-2">
+                <span className="min-w-0 flex-1">
+                  <b className="block font-display text-section">{name}</b>
+                  <span className="block text-small text-ink-2">{note}</span>
+                </span>
+                <ChevronRight aria-hidden="true" className="size-5 shrink-0 text-ink-3" />
+              </Link>
+            </li>
+          ))}
+        </ul>
+        <section aria-labelledby="cannot" className="border-t border-rule py-3.5">
+          <h2 id="cannot" className="font-display text-section">
+            {t('cannot.title')}
+          </h2>
+          <ul className="mt-1.5 space-y-2 text-body">
+            {unknowns.map((words) => (
+              <li key={words} className="border-l-stop border-ink pl-3">
+                {words}
+              </li>
+            ))}
+          </ul>
+        </section>
+      </div>
+    </div>
+  );
+}
