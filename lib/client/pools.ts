@@ -1,8 +1,11 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import { doneSchema } from '@/lib/schemas/account';
 import { type SetupAnswer, type SetupState, setupStateSchema } from '@/lib/schemas/pool-profile';
+import type { UnitSystem } from '@/lib/units/unit';
 import { fetchJson } from './fetch-json';
+import { weekKeys } from './week';
 
 const setupKey = ['pool'] as const;
 
@@ -21,7 +24,15 @@ export function useSaveSetup() {
     mutationFn: (answer: SetupAnswer) => fetchJson('/api/pool', setupStateSchema, { method: 'PUT', body: answer }),
     onSuccess: async (state: SetupState) => {
       client.setQueryData(setupKey, state);
-      await client.invalidateQueries({ queryKey: ['week'] });
+      await client.invalidateQueries({ queryKey: weekKeys.all });
     },
+  });
+}
+
+/** The household's measures. What is typed meanwhile is carried over on the device, so nothing waits for the answer. */
+export function useSaveUnitSystem() {
+  return useMutation({
+    mutationFn: (unitSystem: UnitSystem) =>
+      fetchJson('/api/households', doneSchema, { method: 'PATCH', body: { unitSystem } }),
   });
 }

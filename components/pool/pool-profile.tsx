@@ -1,0 +1,86 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { useTranslations } from 'next-intl';
+import { Button } from '@/components/ui/button';
+import { DoubleRule } from '@/components/ui/double-rule';
+import { ProblemState } from '@/components/ui/problem-state';
+import { Skeleton } from '@/components/ui/skeleton';
+import { useHydrated } from '@/components/ui/use-hydrated';
+import { setupOptions } from '@/lib/client/pools';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
+import { shelfOptions } from '@/lib/client/shelf-products';
+import type { SetupState } from '@/lib/schemas/pool-profile';
+import { ProfileRows } from './profile-rows';
+import { SavedDrawing } from './saved-drawing';
+import { type PoolHousehold, PoolSettingProvider, usePoolSetting } from './setting';
+import { useProfileRows } from './use-profile-rows';
+import { useVolumeWords } from './volume-words';
+
+/** The pool as it was described: drawn where it was measured, and each part open for correction. */
+export function PoolProfile({ household }: { household: PoolHousehold }) {
+  const t = useTranslations('first-run');
+  const common = useTranslations('common');
+  const words = useProblemWords();
+  const hydrated = useHydrated();
+  const setup = useQuery(setupOptions());
+  if (setup.isError && setup.data === undefined)
+    return (
+      <ProblemState
+        className="mx-margin my-8"
+        title={t('notLoaded')}
+        action={<Button onClick={() => void setup.refetch()}>{common('tryAgain')}</Button>}
+      >
+        {words(setup.error)}
+      </ProblemState>
+    );
+  if (!hydrated || setup.data === undefined)
+    return <Skeleton label={common('loading')} className="mx-margin my-8 h-72" />;
+  return (
+    <PoolSettingProvider household={household} place="profile">
+      <Profile state={setup.data} />
+    </PoolSettingProvider>
+  );
+}
+
+function Profile({ state }: { state: SetupState }) {
+  const t = useTranslations('pool');
+  const { mayChange, system, name } = usePoolSetting();
+  const volumes = useVolumeWords();
+  const { data: shelf = [] } = useQuery(shelfOptions());
+  const { profile } = state;
+  const parts = useProfileRows({ profile, shelf });
+  const drawing = profile.size?.how === 'measured' ? profile.size : undefined;
+  const volume = profile.volume === null ? undefined : volumes.inSystem(profile.volume, system);
+  return (
+    <div className="mx-auto max-w-sheet pb-8">
+      <div className="px-margin pt-3 pb-3.5 md:border-t md:border-rule">
+        <h1 className="font-display-soft text-headline">
+          {volume === undefined ? t('profile.title') : t('profile.headline', { name, volume })}
+        </h1>
+        <p className="font-display text-lead text-pretty">{t(mayChange ? 'profile.lead' : 'profile.leadLooking')}</p>
+      </div>
+      <DoubleRule className="mx-margin" />
+      <div className="grid gap-x-7.5 px-margin pt-2 lg:grid-cols-[minmax(0,1fr)_420px]">
+        <div className="min-w-0 pt-2">
+          {drawing === undefined ? (
+            <p className="border border-dashed border-rule-2 p-6 text-body text-ink-2">{t('profile.notDrawn')}</p>
+          ) : (
+            <SavedDrawing size={drawing} />
+          )}
+        </div>
+        <div className="min-w-0">
+          {parts.map(({ step, rows }) => (
+            <ProfileRows
+              key={step}
+              step={step}
+              title={t(`profile.part.${step}`)}
+              rows={rows}
+              change={mayChange ? t('profile.change') : undefined}
+            />
+          ))}
+        </div>
+      </div>
+    </div>
+  );
+}
