@@ -22,7 +22,7 @@ const programs = {
       fs.writeFileSync(folder + '/BUILD_ID', '1');
     }
     if (command === 'start') {
-      const server = require('node:http').createServer((request, reply) => reply.end(process.env.APP_ORIGIN));
+      const server = require('node:http').createServer((request, reply) => reply.end(process.env.NODE_ENV + ' ' + process.env.PORT));
       server.listen(Number(rest[rest.indexOf('-p') + 1]), rest[rest.indexOf('-H') + 1]);
       process.on('SIGTERM', () => process.exit(143));
       process.on('SIGINT', () => process.exit(130));

@@ -128,7 +128,7 @@ describe('start', () => {
     const ended = finish(child);
     await waitFor(child, `Look round without an account: http://127.0.0.1:${port}/ and press 'Look round'`);
     const reply = await fetch(`http://127.0.0.1:${port}/api/health`);
-    expect(await reply.text()).toBe(`http://127.0.0.1:${port}`);
+    expect(await reply.text()).toBe(`production ${port}`);
     expect(project.read('.env.local')).toMatch(/^WADEWELL_SECRET=[\w-]{43}\n$/);
     expect(statSync(project.path('.env.local')).mode & 0o777).toBe(0o600);
     expect(project.has('data')).toBe(true);
@@ -143,7 +143,7 @@ describe('start', () => {
   });
 
   it('keeps what stands in .env.local and does not build twice', async () => {
-    project.write('.env.local', 'WADEWELL_SECRET=ours\nAPP_ORIGIN=https://pool.example');
+    project.write('.env.local', 'WADEWELL_SECRET=ours\nSMTP_URL=smtp://127.0.0.1');
     for (let time = 0; time < 2; time += 1) {
       const child = project.start(['start'], { env: { PORT: `${port}` } });
       const ended = finish(child);
@@ -151,7 +151,7 @@ describe('start', () => {
       child.kill('SIGTERM');
       expect((await ended).code).toBe(0);
     }
-    expect(project.read('.env.local')).toBe('WADEWELL_SECRET=ours\nAPP_ORIGIN=https://pool.example');
+    expect(project.read('.env.local')).toBe('WADEWELL_SECRET=ours\nSMTP_URL=smtp://127.0.0.1');
     expect(project.calls().filter((call) => call === 'next build')).toHaveLength(1);
   });
 

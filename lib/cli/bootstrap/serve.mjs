@@ -3,7 +3,6 @@ import { setTimeout as wait } from 'node:timers/promises';
 import { buildIfStale, nextProgram } from './build.mjs';
 import { runNode } from './child.mjs';
 import { ensureDependencies } from './dependencies.mjs';
-import { serverEnvironment } from './env-files.mjs';
 import { withLock } from './lock.mjs';
 import { inRoot, productFolder, say } from './place.mjs';
 import { ensurePortIsFree, host, wantedPort } from './port.mjs';
@@ -40,12 +39,11 @@ async function prepare() {
 
 async function serve(command, port, variables) {
   const address = `http://${host}:${port}`;
-  const origin = serverEnvironment().APP_ORIGIN ? {} : { APP_ORIGIN: address };
   // Asked again: installing and building may have taken minutes.
   await ensurePortIsFree(port);
   let running = true;
   const { code, stoppedBy } = await runNode([nextProgram, ...command, '-H', host, '-p', String(port)], {
-    env: { ...process.env, ...variables, ...origin, PORT: String(port), NEXT_TELEMETRY_DISABLED: '1' },
+    env: { ...process.env, ...variables, PORT: String(port), NEXT_TELEMETRY_DISABLED: '1' },
     onStart: (server) => {
       server.once('exit', () => (running = false));
       announce(address, () => running);
