@@ -11,7 +11,20 @@ import { ClientMessages } from '@/lib/messages/client-messages';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('common');
-  return { title: { default: t('productName'), template: `%s · ${t('productName')}` }, description: t('description') };
+  return {
+    title: { default: t('productName'), template: `%s · ${t('productName')}` },
+    description: t('description'),
+    manifest: '/manifest.webmanifest',
+    icons: {
+      icon: [
+        { url: '/favicon.ico', sizes: '32x32' },
+        { url: '/icon.svg', type: 'image/svg+xml' },
+      ],
+      apple: '/apple-touch-icon.png',
+    },
+    // Amounts and dates are not phone numbers.
+    formatDetection: { telephone: false },
+  };
 }
 
 export const viewport: Viewport = { width: 'device-width', initialScale: 1, colorScheme: 'light dark' };
