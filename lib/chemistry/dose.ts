@@ -85,10 +85,14 @@ export function addDoseToLedger(ledger: Ledger, volume: number, dose: Dose): Led
   return after;
 }
 
-/** The ledger after `amount` mg/L of chlorine (as Cl2) is used up, in place: HOCl -> H+ + Cl- + 1/2 O2. No check. */
+/**
+ * The ledger after `amount` mg/L of chlorine (as Cl2) is used up, in place: HOCl -> H+ + Cl- + 1/2 O2. Never more than
+ * there is. No input check.
+ */
 export function useUpInLedger(ledger: Ledger, amount: number): void {
-  ledger.freeChlorine = Math.max(0, ledger.freeChlorine - amount);
-  ledger.alkalinity -= amount / CHLORINE_MILLIGRAMS_PER_MOLE;
+  const used = Math.min(amount, ledger.freeChlorine);
+  ledger.freeChlorine -= used;
+  ledger.alkalinity -= used / CHLORINE_MILLIGRAMS_PER_MOLE;
 }
 
 /**
@@ -119,6 +123,6 @@ export function useUpChlorine(water: WaterAnalysis, amount: number, choice?: Mod
   const ledger = ledgerOf(water, choice);
   // Chlorine dosed and then used up comes back rounded: the last nanogram is not an error.
   if (!(amount >= 0 && amount <= water.freeChlorine + 1e-9)) requireInRange('amount', amount, [0, water.freeChlorine]);
-  useUpInLedger(ledger, Math.min(amount, water.freeChlorine));
+  useUpInLedger(ledger, amount);
   return analysisOf(ledger, choice);
 }

@@ -95,10 +95,12 @@ describe('the solver behind an integrator', () => {
     expect(ledger).toEqual(ledgerOf(water));
   });
 
-  it('more than is there is not used up', () => {
+  it('never uses up more than is there, nor makes its acid', () => {
     const ledger = ledgerOf({ ...water, freeChlorine: 0.5 });
-    takeOut(ledger, 0.5);
+    const { alkalinity } = ledger;
+    takeOut(ledger, 2);
     expect(ledger.freeChlorine).toBe(0);
+    expect(alkalinity - ledger.alkalinity).toBeCloseTo(0.5 / 70_906, 12);
   });
 
   it('permits what the forms permit', () => {
