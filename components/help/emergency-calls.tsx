@@ -17,8 +17,8 @@ export function EmergencyCalls({ country, chooseHref }: { country: EmergencyCoun
       {emergency === null ? (
         <p className="border-due border-ink bg-paper-lift px-4 py-3 text-field font-strong">{t('localEmergency')}</p>
       ) : (
-        <div className="grid grid-cols-2 gap-2.5">
-          <a href={dialled(emergency)} className={call('terra', 'col-span-2')}>
+        <div className="grid gap-2.5 sm:grid-cols-2">
+          <a href={dialled(emergency)} className={call('terra', 'sm:col-span-2')}>
             <PhoneCall aria-hidden="true" className="size-5.5 shrink-0" />
             <Named name={t('callEmergency')} number={emergency} />
           </a>
@@ -28,7 +28,7 @@ export function EmergencyCalls({ country, chooseHref }: { country: EmergencyCoun
               <Named name={t('poisonCentre')} number={poison} />
             </a>
           )}
-          <a href={dialled(emergency)} className={call('outline', poison === null ? 'col-span-2' : '')}>
+          <a href={dialled(emergency)} className={call('outline', poison === null ? 'sm:col-span-2' : '')}>
             <Flame aria-hidden="true" className="size-5.5 shrink-0" />
             <Named name={t('fireService')} number={emergency} />
           </a>

@@ -17,15 +17,15 @@ export function EmergencyCard({ country }: { country: EmergencyCountry }) {
   return (
     <div className="mx-auto max-w-sheet px-margin pb-10">
       <HelpHead headline={t('headline')} lead={t('lead')} aside={<PrintButton label={common('print')} />} />
-      <div className="md:grid md:grid-cols-[1fr_1.25fr] md:gap-x-9 md:pt-4">
+      <div className="md:grid md:grid-cols-2 md:grid-rows-[auto_1fr] md:gap-x-9 md:gap-y-6 md:pt-4">
         <div className="space-y-4">
           <EmergencyCalls country={country} chooseHref={`#${countriesId}`} />
           <LeaveFrame />
         </div>
-        <div className="mt-3 md:mt-0">
+        <div className="mt-3 md:row-span-2 md:mt-0">
           <FirstAid />
-          <SpillList />
         </div>
+        <SpillList />
       </div>
       <p className="mt-2 border-t border-ink pt-2.5 text-body font-strong">{t('after')}</p>
       <p className="mt-1 text-small text-ink-2">{t('ground')}</p>

@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/button';
 
 export function PrintButton({ label }: { label: string }) {
   return (
-    <span className="print:hidden">
+    <span className="hidden md:inline print:hidden">
       <Button size="small" onClick={() => window.print()}>
         <Printer aria-hidden="true" className="size-4.5" />
         {label}

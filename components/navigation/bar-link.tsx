@@ -5,11 +5,18 @@ import { usePathname } from 'next/navigation';
 import { classNames } from '@/components/ui/class-names';
 import { isCurrent } from './places';
 
-export type BarLinkProps = { href: string; children: React.ReactNode; loud?: boolean };
+export type BarLinkProps = {
+  href: string;
+  children: React.ReactNode;
+  loud?: boolean;
+  /** Marked only at this very address, not at those below it. */
+  exact?: boolean;
+};
 
 /** A place in the bar of a desk: the current one is underlined in ink and heavier. */
-export function BarLink({ href, children, loud = false }: BarLinkProps) {
-  const current = isCurrent(href, usePathname());
+export function BarLink({ href, children, loud = false, exact = false }: BarLinkProps) {
+  const path = usePathname();
+  const current = exact ? path === href : isCurrent(href, path);
   return (
     <Link
       href={href}

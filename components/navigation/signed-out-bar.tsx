@@ -28,13 +28,10 @@ export function SignedOutBar({ signedIn = false }: { signedIn?: boolean }) {
         </Link>
         <nav aria-label={t('places')} className="ml-3 hidden gap-6 md:flex">
           <BarLink href="/help/safety">{t('keepingSafe')}</BarLink>
-          <Link
-            href="/#for-your-pool"
-            className="inline-flex min-h-11 items-center text-[15px] leading-5 whitespace-nowrap text-ink-2 hover:text-ink"
-          >
-            {t('forYourPool')}
-          </Link>
-          <BarLink href="/help">{t('help')}</BarLink>
+          <BarLink href="/#for-your-pool">{t('forYourPool')}</BarLink>
+          <BarLink href="/help" exact>
+            {t('help')}
+          </BarLink>
         </nav>
         <nav aria-label={t('setUp')} className="ml-auto flex items-center gap-3 md:gap-6">
           <span className="hidden md:inline">

@@ -18,8 +18,8 @@ export function DrawnChlorine({ days }: { days: readonly string[] }) {
   const t = useTranslations('start.reading');
   return (
     <div className="relative h-64 border-t border-rule-2 md:h-72" role="img" aria-label={t('picture')}>
+      <GoodRange />
       <svg className="absolute inset-0 size-full" viewBox="0 0 100 100" preserveAspectRatio="none" aria-hidden="true">
-        <rect x="0" y={down(1)} width="100" height={down(0) - down(1)} className="fill-water-2" />
         {nights.map(({ from, to }) => (
           <rect
             key={from}
@@ -82,6 +82,26 @@ export function DrawnChlorine({ days }: { days: readonly string[] }) {
       <Words hour={26} height={0.16}>
         <i className="font-display text-[16px] text-teal-ink italic">{t('goodRange')}</i>
       </Words>
+    </div>
+  );
+}
+
+/** Water between the limits, with engraved waves that keep their size at every width. */
+function GoodRange() {
+  return (
+    <div
+      className="absolute inset-x-0 bg-water-2"
+      style={{ top: `${down(1)}%`, height: `${down(0) - down(1)}%` }}
+      aria-hidden="true"
+    >
+      <svg className="size-full">
+        <defs>
+          <pattern id="drawn-waves" width="36" height="11" patternUnits="userSpaceOnUse">
+            <path d="M0 5.5q4.5 -3 9 0t9 0t9 0t9 0" className="fill-none stroke-wave" strokeWidth="0.7" />
+          </pattern>
+        </defs>
+        <rect width="100%" height="100%" fill="url(#drawn-waves)" />
+      </svg>
     </div>
   );
 }

@@ -27,7 +27,7 @@ export function DrawnSheet() {
           ))}
         </div>
         <p className="flex items-baseline justify-between pb-1.5 md:block md:border-t md:border-rule-2 md:pt-3.5">
-          <b className="block max-w-24 font-display text-name text-teal-ink">{t('chlorine')}</b>
+          <b className="block font-display md:max-w-24 text-name text-teal-ink">{t('chlorine')}</b>
           <span className="block text-fine text-ink-2 md:mt-0.5">{t('chlorineNote')}</span>
         </p>
         <DrawnChlorine days={days} />

@@ -27,7 +27,7 @@ export function DrawnToDo({ days }: { days: readonly string[] }) {
         {tasks.map((task, index) => (
           <li
             key={days[index]}
-            className="grid grid-cols-[6.5rem_1fr] items-baseline border-t border-rule py-2.5 text-small first:border-t-0 md:block md:border-t-0 md:border-l md:py-3 md:pr-1.5 md:pl-2.5"
+            className="grid grid-cols-[7.25rem_1fr] items-baseline border-t border-rule py-2.5 text-small first:border-t-0 md:block md:border-t-0 md:border-l md:py-3 md:pr-1.5 md:pl-2.5"
           >
             <span className="font-display text-name md:sr-only">{days[index]}</span>
             <span className="min-w-0">

@@ -45,8 +45,8 @@ function drawWeek(): DrawnPoint[] {
 }
 
 /** The drawing reaches this far above the swim limit and below the lowest level. */
-const top = 1.75;
-const bottom = -1.05;
+const top = 1.7;
+const bottom = -0.8;
 
 /** Share of the width, in per cent. */
 export const across = (hour: number) => round((hour / weekHours) * 100);
