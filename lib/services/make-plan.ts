@@ -1,0 +1,55 @@
+import 'server-only';
+import { sharedEngine } from '@/lib/engine-worker/shared-engine';
+import { ENGINE_VERSION } from '@/lib/planner/version';
+import type { WeekPlan } from '@/lib/schemas/plan';
+import { identityOf } from './plan-identity';
+import type { WeekSnapshot } from './week-snapshot';
+
+const MINUTE = 60_000;
+
+/** Name of what a plan is made from: the engine's version and the whole snapshot. */
+export function inputHashOf(snapshot: WeekSnapshot): string {
+  return identityOf({ engineVersion: ENGINE_VERSION, snapshot });
+}
+
+/** The plan for a snapshot, made in the engine's thread. Rejects as `Engine.run` does. */
+export async function makePlan(snapshot: WeekSnapshot, now: Date): Promise<WeekPlan> {
+  if (snapshot.zeroDoubt) return planOnHold(snapshot, snapshot.zeroDoubt);
+  const { scenario, task } = snapshot;
+  return task === 'project'
+    ? sharedEngine().run('project', { ...scenario, doses: [] })
+    : sharedEngine().run('plan', { ...scenario, now: earliestDose(snapshot, now).toISOString() });
+}
+
+/** Nothing is planned before now, nor in the hour of a dose that somebody decided against. */
+export function earliestDose({ skipped }: WeekSnapshot, now: Date): Date {
+  const afterSkipped = skipped.map((at) => Date.parse(at) + MINUTE);
+  return new Date(Math.max(now.getTime(), ...afterSkipped));
+}
+
+/** Nothing is added on the strength of a reading that may mean none or far too much: the next test decides. */
+function planOnHold({ scenario }: WeekSnapshot, { doubt, takenAt }: NonNullable<WeekSnapshot['zeroDoubt']>): WeekPlan {
+  const newest = [scenario.reading].flat()[0];
+  return {
+    engineVersion: ENGINE_VERSION,
+    takenAt: newest?.takenAt ?? takenAt,
+    hours: [],
+    projection: null,
+    doses: [],
+    checks: [],
+    endOfWeek: null,
+    cost: null,
+    alternatives: [],
+    openSwimShare: null,
+    broken: [],
+    reasons: [],
+    cautions: [],
+    needs: [
+      {
+        code: doubt === 'open' ? 'false-zero-open' : 'chlorine-bleached-test',
+        quantity: 'freeChlorine',
+        since: takenAt,
+      },
+    ],
+  };
+}

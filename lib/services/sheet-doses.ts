@@ -1,0 +1,103 @@
+import 'server-only';
+import type { DatabaseOrTransaction } from '@/db/client';
+import { listOvertakenDoseIds } from '@/db/queries/overtaken-doses';
+import { findDose, listDoses, type StoredDose } from '@/db/queries/plan-doses';
+import type { PoolRow } from '@/db/queries/pools';
+import type { ShelfProductRow } from '@/db/queries/shelf-products';
+import { toOffsetIso } from '@/lib/calendar/wall-time';
+import { pumpUntil } from '@/lib/projection/events';
+import type { WeekPlan } from '@/lib/schemas/plan';
+import type { PlanDose } from '@/lib/schemas/plan-dose';
+import type { ProvenHouseholdId } from '@/lib/schemas/scope';
+import { limits } from '@/lib/standards/limits';
+import { claimLasts } from './dose-state';
+import { swimWaitUntil } from './swim-wait';
+
+const HOUR = 3_600_000;
+/** How long whoever ticked may take it back with one tap. */
+export const undoWindow = 10 * 60_000;
+
+/**
+ * The doses that count between two instants: those of the current plan, what was ticked of earlier ones, and what was due
+ * and open when a newer plan took over. Until a reading has seen the water, such a dose may be in it.
+ */
+export async function countingDoses(
+  db: DatabaseOrTransaction,
+  {
+    householdId,
+    from,
+    until,
+    lastReading,
+  }: { householdId: ProvenHouseholdId; from: Date; until: Date; lastReading: Date | null },
+): Promise<StoredDose[]> {
+  const doses = await listDoses(db, { householdId, from, until });
+  const overtaken = await listOvertakenDoseIds(db, { householdId, since: lastReading ?? from });
+  for (const id of overtaken) {
+    const dose = await findDose(db, householdId, id);
+    if (dose && dose.at >= from && dose.at < until) doses.push(dose);
+  }
+  return doses.sort((a, b) => a.at.getTime() - b.at.getTime());
+}
+
+type Around = {
+  plan: WeekPlan | null;
+  shelf: readonly ShelfProductRow[];
+  feederKind: PoolRow['feederKind'];
+  timeZone: string;
+  now: Date;
+};
+
+/** A dose as the sheet shows it: which steps, and the hours that follow from when it goes in or went in. */
+export function sheetDose(dose: StoredDose, { plan, shelf, feederKind, timeZone, now }: Around): PlanDose {
+  const iso = (instant: number) => toOffsetIso(instant, timeZone);
+  const at = dose.at.getTime();
+  const poured = dose.givenAt?.getTime() ?? at;
+  const labelWay = shelf.find(({ id }) => id === dose.productId)?.labelWay ?? null;
+  const isTablet = dose.form === 'tablet';
+  return {
+    id: dose.id,
+    planId: dose.planId,
+    planVersion: dose.planVersion,
+    at: iso(at),
+    product: dose.productId,
+    productName: dose.productName,
+    toBuy: dose.toBuy,
+    substance: dose.substance,
+    form: dose.form,
+    amount: dose.amount,
+    unit: dose.unit,
+    rise: dose.rise,
+    ...(dose.effect === null ? {} : { effect: dose.effect }),
+    reason: dose.reason,
+    labelWay,
+    steps: stepsOf(dose, labelWay, feederKind),
+    status: dose.status,
+    tickFrom: iso(tickFrom(dose)),
+    pumpUntil: isTablet ? null : iso(pumpUntil(poured, dose.rise)),
+    waitUntil: iso(swimWaitUntil(dose, poured, plan)),
+    givenAt: dose.givenAt === null ? null : iso(poured),
+    givenAmount: dose.givenAmount,
+    doneBy: dose.doneByName,
+    recordedBy: dose.recordedByName,
+    claimedBy: claimLasts(dose, now) ? dose.claimedByName : null,
+    undoUntil: dose.tickedAt === null ? null : iso(dose.tickedAt.getTime() + undoWindow),
+  };
+}
+
+/** From when a dose may be ticked [ms]: earlier the card only shows its steps. */
+export function tickFrom({ at }: Pick<StoredDose, 'at'>): number {
+  return at.getTime() - limits.tickBeforeDose.value * HOUR;
+}
+
+function stepsOf(
+  { form, substance }: Pick<StoredDose, 'form' | 'substance'>,
+  labelWay: PlanDose['labelWay'],
+  feederKind: PoolRow['feederKind'],
+): PlanDose['steps'] {
+  if (form === 'tablet') return feederKind === 'floating' ? 'tablets-floating' : 'tablets-inline';
+  if (substance === 'hydrochloric-acid' || substance === 'sodium-bisulfate') return 'acid';
+  if (form === 'liquid') return 'liquid';
+  if (substance === 'calcium-hypochlorite' || substance === 'dichlor')
+    return labelWay === 'broadcast' ? 'granules-broadcast' : 'granules-dissolve';
+  return 'companion-dissolve';
+}

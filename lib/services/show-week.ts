@@ -1,0 +1,138 @@
+import 'server-only';
+import { listPlans, type StoredPlan } from '@/db/queries/plans';
+import { findPool } from '@/db/queries/pools';
+import { listReadings } from '@/db/queries/readings';
+import { listShelfProducts } from '@/db/queries/shelf-products';
+import { listWeekDays } from '@/db/queries/week-days';
+import { firstWeekday } from '@/lib/calendar/first-weekday';
+import { addDays, type CalendarDay, dayOf, startOfDay, weekOf } from '@/lib/calendar/household-day';
+import { toOffsetIso } from '@/lib/calendar/wall-time';
+import { assertMay } from '@/lib/auth/permissions';
+import { AppError } from '@/lib/errors';
+import type { Pool } from '@/lib/schemas/pool';
+import type { WeekQuery } from '@/lib/schemas/week-query';
+import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import { limits } from '@/lib/standards/limits';
+import type { ServiceContext } from './context';
+import { enginePool } from './engine-pool';
+import { zeroDoubtOf } from './false-zero';
+import { planWeek, type PlanProblem } from './plan-week';
+import { recordedReading } from './recorded-reading';
+import { sheetChecks } from './sheet-checks';
+import { curveAhead, curveBehind } from './sheet-curves';
+import { sheetDays } from './sheet-days';
+import { countingDoses, sheetDose } from './sheet-doses';
+import { sheetVerdict } from './sheet-verdict';
+import { DAYS_OF_A_PLAN } from './week-ahead';
+
+const DAY = 86_400_000;
+const readingsCountFor = 60 * DAY;
+
+/**
+ * Everything the week sheet shows of the week that holds a day, by the household's first weekday. The verdict is that of
+ * now, whichever week is shown. A plan that no longer fits its inputs, or an older engine's, is made again first.
+ *
+ * Error: `conflict` while the pool is not described.
+ */
+export async function showWeek(context: ServiceContext, query: WeekQuery = {}): Promise<WeekSheet> {
+  const { db, access, now } = context;
+  const { householdId, timeZone } = access;
+  assertMay(access, 'look');
+  const found = await findPool(db, householdId);
+  const pool = found && enginePool(found.pool, timeZone);
+  if (!found || !pool) throw new AppError('conflict', 'Describe the pool first; then there is a week to show.');
+
+  const { plan, problem } = await planWeek(context);
+  const today = dayOf(now.getTime(), timeZone);
+  const days = weekOf(query.start ?? today, firstWeekday(access.locale));
+  const shown = spanOf(days, timeZone);
+  const readings = await listReadings(db, {
+    householdId,
+    from: new Date(Math.min(now.getTime() - readingsCountFor, shown.from.getTime())),
+    until: new Date(Math.max(now.getTime() + DAY, shown.until.getTime())),
+  });
+  const last = readings[0] ?? null;
+  const plans = await listPlans(db, { householdId, ...shown });
+  const shelf = await listShelfProducts(db, householdId);
+  const around = { plan: plan?.result ?? null, shelf, feederKind: found.pool.feederKind, timeZone, now };
+  // The verdict asks for the doses around now, the sheet for those of the week it shows.
+  const reach = new Date(now.getTime() - DAYS_OF_A_PLAN * DAY);
+  const doses = await countingDoses(db, {
+    householdId,
+    from: new Date(Math.min(reach.getTime(), shown.from.getTime())),
+    until: new Date(Math.max(now.getTime() + DAYS_OF_A_PLAN * DAY, shown.until.getTime())),
+    lastReading: last?.takenAt ?? null,
+  });
+  const bothForms = doses.map((stored) => ({ stored, shown: sheetDose(stored, around) }));
+  const firstDay = dayOf(Math.min(last?.takenAt.getTime() ?? now.getTime(), shown.from.getTime()), timeZone);
+  const lastDay = addDays(today > (days[6] ?? today) ? today : (days[6] ?? today), DAYS_OF_A_PLAN);
+  const said = await listWeekDays(db, { householdId, from: firstDay, until: lastDay });
+  const chlorineReading = readings.find(({ values }) => values.freeChlorine !== undefined);
+  const zeroDoubt = chlorineReading ? await zeroDoubtOf(db, householdId, chlorineReading) : null;
+
+  return {
+    now: toOffsetIso(now.getTime(), timeZone),
+    household: {
+      name: access.householdName,
+      timeZone,
+      unitSystem: access.unitSystem,
+      locale: access.locale,
+      demo: access.demo,
+    },
+    me: { id: access.personId, name: access.personName, role: access.role, handlesChemicals: access.handlesChemicals },
+    pool: sheetPool(pool, found.pool.recordOnly, found.swimLimitSetBy),
+    days: sheetDays(days, said, pool),
+    verdict: sheetVerdict({
+      ...{ now: now.getTime(), pool, readings, zeroDoubt, doses: bothForms, days: said },
+      plan: problem ? null : plan,
+    }),
+    behind: curveBehind(plans, shown.from.getTime(), Math.min(now.getTime(), shown.until.getTime())),
+    ahead: curveAhead(plan),
+    plan: sheetPlan(plan, problem, timeZone, now),
+    planProblem: problem,
+    lastReading: last && recordedReading(last, timeZone),
+    readings: readings
+      .filter(({ takenAt }) => takenAt >= shown.from && takenAt < shown.until)
+      .map((reading) => recordedReading(reading, timeZone)),
+    doses: bothForms.filter(({ stored }) => isShown(stored.givenAt ?? stored.at, shown)).map((dose) => dose.shown),
+    checks: sheetChecks(plan, readings, timeZone),
+  };
+}
+
+type Span = { from: Date; until: Date };
+
+function spanOf(days: readonly CalendarDay[], timeZone: string): Span {
+  const first = days[0] ?? '';
+  return { from: new Date(startOfDay(first, timeZone)), until: new Date(startOfDay(addDays(first, 7), timeZone)) };
+}
+
+function isShown(instant: Date, { from, until }: Span): boolean {
+  return instant >= from && instant < until;
+}
+
+/** The usual limit is the label's; a higher one stands beside the name of who set it. */
+function sheetPool(pool: Pool, recordOnly: boolean, setBy: string | null): WeekSheet['pool'] {
+  const { volume, surface, swimLimit, swimHours, stabilizerBand } = pool;
+  const swimLimitSetBy = swimLimit > limits.swimLimitDefault.value ? setBy : null;
+  return { volume, surface, swimLimit, swimLimitSetBy, swimHours, stabilizerBand, recordOnly };
+}
+
+function sheetPlan(
+  plan: StoredPlan | null,
+  problem: PlanProblem | null,
+  timeZone: string,
+  now: Date,
+): WeekSheet['plan'] {
+  if (!plan) return null;
+  const iso = (instant: Date) => toOffsetIso(instant.getTime(), timeZone);
+  const { reasons, cautions, broken, needs, alternatives, cost, openSwimShare } = plan.result;
+  return {
+    id: plan.id,
+    version: plan.version,
+    createdAt: iso(plan.createdAt),
+    takenAt: iso(plan.takenAt),
+    endsAt: iso(plan.endsAt),
+    stale: problem !== null || now >= plan.endsAt,
+    ...{ reasons, cautions, broken, needs, alternatives, cost, openSwimShare },
+  };
+}
