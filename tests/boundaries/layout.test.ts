@@ -17,7 +17,6 @@ const topLevel = [
     'eslint.config.mjs',
     'package-lock.json',
   ],
-  'knip.json',
 ];
 /** Made by the tools and ignored by git. */
 const made = ['node_modules', 'data', 'coverage', 'next-env.d.ts'];
