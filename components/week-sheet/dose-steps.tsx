@@ -18,7 +18,7 @@ export function DoseSteps({ dose, columns = false }: { dose: PlanDose; columns?:
   const figures = {
     hours: pumpHours(dose) ?? 0,
     litres: units.bucket(bucketLitres(dose)),
-    substance: dose.substance,
+    heats: dose.substance === 'calcium-chloride' ? 'yes' : 'no',
     after: words.afterwards(dose),
     b: bold,
   };
