@@ -1,0 +1,26 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import Link from 'next/link';
+import { Button } from '@/components/ui/button';
+import { buttonClass } from '@/components/ui/button-class';
+import { UnsentTests } from './unsent-tests';
+
+/** No connection: the test is on this device, and said to be. */
+export function KeptOnDevice({ onAgain }: { onAgain: () => void }) {
+  const t = useTranslations('readings.kept');
+  return (
+    <div className="mx-auto grid max-w-reading gap-3.5 px-margin py-6">
+      <h1 className="font-display-soft text-board">{t('title')}</h1>
+      <p className="text-body">{t('words')}</p>
+      <p className="border-t-stop border-b border-ink bg-paper-lift px-3.5 py-3 text-body font-strong">{t('swim')}</p>
+      <UnsentTests />
+      <div className="flex flex-wrap gap-2.5">
+        <Link href="/week" className={buttonClass({ variant: 'primary' })}>
+          {t('seeWeek')}
+        </Link>
+        <Button onClick={onAgain}>{t('again')}</Button>
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,77 @@
+'use client';
+
+import { X } from 'lucide-react';
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import { useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { Segments } from '@/components/ui/segments';
+import { useReadingSetting } from './reading-setting';
+import type { TestDraft } from './test-draft';
+import type { TestTime } from './test-time';
+import { TimeFields } from './time-fields';
+import { useTimeWords } from './use-time-words';
+
+/** Which test it is, when it was taken and by whom. */
+export function TestHead({
+  draft,
+  change,
+  now,
+  time,
+}: {
+  draft: TestDraft;
+  change: (part: Partial<TestDraft>) => void;
+  now: number;
+  time: TestTime;
+}) {
+  const t = useTranslations('readings');
+  const times = useTimeWords();
+  const { personName } = useReadingSetting();
+  const [changing, setChanging] = useState(draft.time !== null);
+  return (
+    <header className="px-margin">
+      <div className="flex min-h-15.5 items-center gap-1 border-b-stop border-ink md:min-h-18">
+        <Link href="/week" aria-label={t('close')} className="-ml-3 flex size-12 items-center justify-center">
+          <X aria-hidden="true" className="size-5.5" />
+        </Link>
+        <div className="min-w-0 flex-1">
+          <h1 className="font-display text-[20px] leading-6 font-section md:font-display-soft md:text-headline">
+            {t(`kind.${draft.kind}`)}
+          </h1>
+          <p className="text-small text-ink-2">
+            {t('takenBy', { when: times.dayAndTime(time.takenAt ?? now), name: personName })}
+          </p>
+        </div>
+        <Button variant="quiet" aria-expanded={changing} onClick={() => setChanging(!changing)}>
+          {t('time.change')}
+        </Button>
+      </div>
+      <div className="pt-3">
+        {changing ? (
+          <TimeFields
+            time={draft.time}
+            now={now}
+            problem={time.problem}
+            onChange={(next) => {
+              change({ time: next });
+              if (next === null) setChanging(false);
+            }}
+          />
+        ) : null}
+        <Segments
+          size="small"
+          hideLabel
+          label={t('kind.label')}
+          choices={(['full', 'quick'] as const).map((kind) => ({
+            value: kind,
+            label: t(`kind.${kind}`),
+            detail: t(`kind.${kind}Note`),
+          }))}
+          value={draft.kind}
+          onChange={(kind) => change({ kind })}
+          className="md:max-w-form"
+        />
+      </div>
+    </header>
+  );
+}
