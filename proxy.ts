@@ -26,7 +26,6 @@ function withHeaders(response: NextResponse, headers: Record<string, string>): N
   return response;
 }
 
-// Everything but what the build and public/ serve as files. No request gets by for saying that it only prefetches.
-export const config = {
-  matcher: ['/((?!_next/static/|_next/image/|.*\\.(?:png|svg|ico|webmanifest|txt|js|woff2)$).*)'],
-};
+// Everything but what the build serves, and the service worker, whose own rules its reply would set: a file that is not
+// there is answered by a page as well. No request gets by for saying that it only prefetches.
+export const config = { matcher: ['/((?!_next/static/|sw\\.js$).*)'] };

@@ -8,6 +8,7 @@ const shared = globalThis as { wadewellLog?: Logger };
 export function log(): Logger {
   shared.wadewellLog ??= pino({
     name: 'wadewell',
+    serializers: { err: (error: unknown) => withoutParameters(pino.stdSerializers.err(asError(error))) },
     redact: { paths: ['*.password', '*.passwordHash', '*.email', '*.cookie', '*.token'], censor: '[left out]' },
   });
   return shared.wadewellLog;
@@ -18,4 +19,15 @@ export function logFault(error: unknown, about: Record<string, unknown>): string
   const errorId = randomUUID();
   log().error({ ...about, errorId, err: error }, 'fault');
   return errorId;
+}
+
+/** A failed query carries the values it was called with: e-mail addresses, notes, hashes. None of them is logged. */
+export function withoutParameters<Told extends { message: string; stack: string }>(told: Told) {
+  const cut = (text: string) => text.replace(/\nparams:[\s\S]*?(?=\n\s+at |\ncaused by:|$)/g, '');
+  const { type, code } = { type: undefined, code: undefined, ...told };
+  return { type, code, message: cut(told.message), stack: cut(told.stack) };
+}
+
+function asError(error: unknown): Error {
+  return error instanceof Error ? error : new Error(String(error));
 }

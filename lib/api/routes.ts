@@ -83,7 +83,7 @@ function answering<Context, Input extends z.ZodType, Params extends z.ZodType, R
 }
 
 function sent(request: Request): Promise<unknown> {
-  return request.method === 'GET'
+  return ['GET', 'HEAD'].includes(request.method)
     ? Promise.resolve(Object.fromEntries(new URL(request.url).searchParams))
     : readJson(request);
 }

@@ -1,7 +1,9 @@
 import 'server-only';
 import { database } from '@/db/client';
 import { prepareDatabase } from '@/db/migrate';
+import { deleteExpiredDemoCopies } from '@/db/queries/households';
 import { deleteExpiredRateLimits } from '@/db/queries/rate-limits';
+import { inWriteTransaction } from '@/db/write';
 import { sessionsOf } from '@/lib/auth/sessions';
 import { systemScope } from '@/lib/auth/system-scope';
 import { environment, now as wallClock } from '@/lib/env';
@@ -15,5 +17,7 @@ export async function startServer(): Promise<void> {
   const copy = await prepareDatabase(db, surroundings.databaseUrl, now);
   if (copy !== null) log().info({ copy }, 'the database was copied before it was migrated');
   await sessionsOf(db, surroundings).deleteExpired();
-  await deleteExpiredRateLimits(db, systemScope('clean-up'), now);
+  const scope = systemScope('clean-up');
+  await deleteExpiredRateLimits(db, scope, now);
+  await inWriteTransaction(db, (tx) => deleteExpiredDemoCopies(tx, scope, now));
 }
