@@ -1,4 +1,4 @@
-import { Flame, Phone, PhoneCall } from 'lucide-react';
+import { Flame, type LucideIcon, Phone, PhoneCall } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
 import { textLink } from '@/components/ui/text-link';
@@ -10,28 +10,15 @@ const dialled = (number: string) => `tel:${number.replace(/[^0-9+]/g, '')}`;
 export function EmergencyCalls({ country, chooseHref }: { country: EmergencyCountry; chooseHref: string }) {
   const t = useTranslations('help.emergency');
   const { emergency, poison } = emergencyNumbers(country);
-  const call = (variant: 'terra' | 'outline', className?: string) =>
-    buttonClass({ variant, size: 'large', className: `justify-start min-h-14.5 ${className ?? ''}` });
   return (
     <div>
       {emergency === null ? (
         <p className="border-due border-ink bg-paper-lift px-4 py-3 text-field font-strong">{t('localEmergency')}</p>
       ) : (
         <div className="grid gap-2.5 sm:grid-cols-2">
-          <a href={dialled(emergency)} className={call('terra', 'sm:col-span-2')}>
-            <PhoneCall aria-hidden="true" className="size-5.5 shrink-0" />
-            <Named name={t('callEmergency')} number={emergency} />
-          </a>
-          {poison === null ? null : (
-            <a href={dialled(poison)} className={call('outline')}>
-              <Phone aria-hidden="true" className="size-5.5 shrink-0" />
-              <Named name={t('poisonCentre')} number={poison} />
-            </a>
-          )}
-          <a href={dialled(emergency)} className={call('outline', poison === null ? 'sm:col-span-2' : '')}>
-            <Flame aria-hidden="true" className="size-5.5 shrink-0" />
-            <Named name={t('fireService')} number={emergency} />
-          </a>
+          <CallButton Icon={PhoneCall} name={t('callEmergency')} number={emergency} variant="terra" wide />
+          {poison === null ? null : <CallButton Icon={Phone} name={t('poisonCentre')} number={poison} />}
+          <CallButton Icon={Flame} name={t('fireService')} number={emergency} wide={poison === null} />
         </div>
       )}
       {poison === null ? <p className="mt-2.5 text-body">{t('poisonOnLabel')}</p> : null}
@@ -49,12 +36,29 @@ export function EmergencyCalls({ country, chooseHref }: { country: EmergencyCoun
   );
 }
 
+type CallButtonProps = {
+  Icon: LucideIcon;
+  name: string;
+  number: string;
+  variant?: 'terra' | 'outline';
+  wide?: boolean;
+};
+
 /** The number stands in words too: a card on paper cannot be tapped, and a borrowed phone is dialled by hand. */
-function Named({ name, number }: { name: string; number: string }) {
+function CallButton({ Icon, name, number, variant = 'outline', wide = false }: CallButtonProps) {
+  const t = useTranslations('help.emergency');
+  const look = buttonClass({
+    variant,
+    size: 'large',
+    className: `justify-start min-h-14.5 ${wide ? 'sm:col-span-2' : ''}`,
+  });
   return (
-    <span className="min-w-0 text-left">
-      <span className="block">{name}</span>
-      <span className="block text-label font-text">{number}</span>
-    </span>
+    <a href={dialled(number)} aria-label={t('dial', { name, number })} className={look}>
+      <Icon aria-hidden="true" className="size-5.5 shrink-0" />
+      <span className="min-w-0 text-left">
+        <span className="block">{name}</span>
+        <span className="block text-label font-text">{number}</span>
+      </span>
+    </a>
   );
 }

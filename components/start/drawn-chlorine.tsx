@@ -76,10 +76,10 @@ export function DrawnChlorine({ days }: { days: readonly string[] }) {
       <Words hour={3} height={0.83}>
         <b className="font-strong text-ink">{t('tested')}</b>
       </Words>
-      <Words hour={drawnCheck} height={0.22} centred>
+      <Words hour={drawnCheck + 2} height={0.1}>
         <b className="font-strong text-ink">{t('quickCheck')}</b>
       </Words>
-      <Words hour={26} height={0.16}>
+      <Words hour={4} height={0.14}>
         <i className="font-display text-[16px] text-teal-ink italic">{t('goodRange')}</i>
       </Words>
     </div>
@@ -132,12 +132,12 @@ function TestDot() {
   return <span className="block size-2.75 rounded-full border-[1.8px] border-ink bg-paper-lift" />;
 }
 
-type WordsProps = { hour: number; height: number; centred?: boolean; children: React.ReactNode };
+type WordsProps = { hour: number; height: number; children: React.ReactNode };
 
-function Words({ hour, height, centred = false, children }: WordsProps) {
+function Words({ hour, height, children }: WordsProps) {
   return (
     <span
-      className={`absolute -translate-y-1/2 text-chart whitespace-nowrap ${centred ? '-translate-x-1/2' : ''}`}
+      className="absolute -translate-y-1/2 text-chart whitespace-nowrap"
       style={{ left: `${across(hour)}%`, top: `${down(height)}%` }}
     >
       {children}

@@ -13,7 +13,7 @@ export function LookRoundButton({ size = 'normal' }: Pick<ButtonProps, 'size'>) 
   const looking = useMutation({ mutationFn: lookRound, onSuccess: () => leaveFor('/week') });
   const busy = looking.isPending || looking.isSuccess;
   return (
-    <>
+    <div>
       <Button size={size} wide busy={busy ? t('lookingRound') : undefined} onClick={() => looking.mutate()}>
         {t('lookRound')}
       </Button>
@@ -22,6 +22,6 @@ export function LookRoundButton({ size = 'normal' }: Pick<ButtonProps, 'size'>) 
           {words(looking.error)}
         </p>
       ) : null}
-    </>
+    </div>
   );
 }

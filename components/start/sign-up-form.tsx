@@ -82,7 +82,7 @@ export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
       />
       <Segments
         label={t('units')}
-        hint={hydrated ? t('timeZone', { zone: browserTimeZone() }) : undefined}
+        hint={hydrated ? t('timeZone', { zone: browserTimeZone().replaceAll('_', ' ') }) : undefined}
         choices={[
           { value: 'metric', label: t('metric'), detail: t('metricNote') },
           { value: 'us', label: t('us'), detail: t('usNote') },

@@ -14,6 +14,10 @@ const weeks = [0, 1].map((week) => {
   }));
 });
 
+/** Room above the first point for the widest range. */
+const headroom = 12;
+const height = 100;
+
 const shown = (figure: number) => Math.round(figure * 10) / 10;
 
 export function TestFigure() {
@@ -21,7 +25,12 @@ export function TestFigure() {
   return (
     <figure>
       <div className="relative h-22" role="img" aria-label={t('testPicture')}>
-        <svg viewBox="0 0 100 92" preserveAspectRatio="none" aria-hidden="true" className="absolute inset-0 size-full">
+        <svg
+          viewBox={`0 ${-headroom} 100 ${height}`}
+          preserveAspectRatio="none"
+          aria-hidden="true"
+          className="absolute inset-0 size-full"
+        >
           {weeks.map((points, week) => (
             <g key={week}>
               <path
@@ -45,7 +54,7 @@ export function TestFigure() {
           <span
             key={index}
             className="absolute h-5 w-0 -translate-x-1/2 -translate-y-1/2 border-l-[1.6px] border-ink before:absolute before:top-1/2 before:left-0 before:size-2.75 before:-translate-x-[6.3px] before:-translate-y-1/2 before:rounded-full before:border-[1.8px] before:border-ink before:bg-paper-lift"
-            style={{ left: `${1 + index * 49}%`, top: `${(y / 92) * 100}%` }}
+            style={{ left: `${1 + index * 49}%`, top: `${((y + headroom) / height) * 100}%` }}
           />
         ))}
         <b className="absolute bottom-0 left-[54%] text-chart font-strong">{t('testCorrects')}</b>

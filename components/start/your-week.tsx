@@ -10,7 +10,7 @@ export function YourWeek() {
       <h2 id="your-week" className="font-display text-section">
         {t('title')}
       </h2>
-      <ol className="mt-2.5">
+      <ol className="mt-2.5 md:grid md:grid-cols-2 md:gap-x-7.5 lg:block">
         {parts.map((part, index) => (
           <li key={part} className="grid grid-cols-[26px_1fr] border-t border-rule py-3">
             <span aria-hidden="true" className="font-display text-name text-ink-2">
