@@ -8,8 +8,7 @@ import { households } from './households';
 import { people } from './people';
 import { plans } from './plans';
 
-export const doseActions = ['claim', 'given', 'changed', 'skipped', 'undo'] as const;
-export type DoseAction = (typeof doseActions)[number];
+const doseActions = ['claim', 'given', 'changed', 'skipped', 'undo'] as const;
 
 /** The doses of a stored plan, as they stand now; how they came to stand so is in dose_events. */
 export const planDoses = sqliteTable(

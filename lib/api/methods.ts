@@ -2,7 +2,7 @@ import 'server-only';
 import { jsonReply } from './replies';
 import type { Handler } from './routes';
 
-export const methodNames = ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const;
+const methodNames = ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const;
 type Method = (typeof methodNames)[number];
 
 /** A route answers every method: the ones it has, and the rest with 405 and the list of those. */

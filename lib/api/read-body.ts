@@ -2,7 +2,7 @@ import 'server-only';
 import { RequestRefusal } from './replies';
 
 /** What a form or a device sends is small; more is a mistake or an attack. */
-export const largestBody = 64 * 1024;
+const largestBody = 64 * 1024;
 
 /** The JSON that a request carries. Errors: 413, 415, and 422 for what is no JSON. */
 export async function readJson(request: Request, most = largestBody): Promise<unknown> {

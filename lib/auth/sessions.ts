@@ -29,7 +29,7 @@ export type Sessions = {
 const tokenShape = /^[a-z2-7]{40}$/;
 
 /** Cookies by origin: over https they are bound to the host and never sent in the clear; plain http can have neither. */
-export function sessionCookieName(secure: boolean): string {
+function sessionCookieName(secure: boolean): string {
   return secure ? '__Host-wadewell' : 'wadewell';
 }
 

@@ -3,7 +3,7 @@ import { isTimeZone } from '@/lib/calendar/wall-time';
 import { timeZoneSchema } from './time';
 import { unitSystems } from './week-sheet';
 
-export const personNameSchema = z
+const personNameSchema = z
   .string({ error: 'Write your name.' })
   .trim()
   .min(1, 'Write your name.')

@@ -3,7 +3,7 @@ import { householdNameSchema, knownTimeZoneSchema, localeSchema, unitSystemSchem
 import { roles } from './week-sheet';
 
 /** One of the households that a person belongs to. */
-export const householdSummarySchema = z.object({
+const householdSummarySchema = z.object({
   id: z.string(),
   name: z.string(),
   role: z.enum(roles),

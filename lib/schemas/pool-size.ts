@@ -73,8 +73,6 @@ const floorSchema = z.discriminatedUnion(
   ],
   { error: 'Choose how the floor runs.' },
 );
-export type PoolOutlineAnswer = z.output<typeof outlineSchema>;
-export type PoolFloorAnswer = z.output<typeof floorSchema>;
 
 /** Measures of the water, not of the basin [m]. */
 const measuredSizeSchema = z

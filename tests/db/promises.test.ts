@@ -200,6 +200,19 @@ describe('what was written down', () => {
   });
 });
 
+describe('a tick', () => {
+  it('stays as it was sent', async () => {
+    const db = freshDatabase();
+    const { householdId } = await aHousehold(db);
+    const dose = aDose();
+    await storePlan(db, householdId, [dose]);
+    await db.run(
+      sql`INSERT INTO dose_events (id, household_id, dose_id, action, status_from, status_to, plan_version_seen, created_at) VALUES ('t', ${householdId}, ${dose.id}, 'skipped', 'planned', 'skipped', 1, 1)`,
+    );
+    expect(await reasonOf(db.run(sql`UPDATE dose_events SET status_to = 'given'`))).toMatch(/append-only/);
+  });
+});
+
 describe('preferences', () => {
   it('are the usual ones until the household chose, and its own from then on', async () => {
     const db = freshDatabase();
