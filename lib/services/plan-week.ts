@@ -9,6 +9,7 @@ import { ENGINE_VERSION } from '@/lib/planner/version';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { Database } from '@/db/client';
 import { inputHashOf, makePlan } from './make-plan';
+import { sharedRun } from './shared-run';
 import { storePlan } from './store-plan';
 import { loadWeekSnapshot, type WeekSnapshot } from './week-snapshot';
 
@@ -34,7 +35,11 @@ const passingFaultCountsFor = 60_000;
  * Plans that are asked for at once may come in any order: one is stored only while what it was made from still stands,
  * otherwise it is made again. A fault costs a plan and nothing else: the old one stays, with the id of the fault.
  */
-export async function planWeek(context: PlanningContext): Promise<PlanOutcome> {
+export function planWeek(context: PlanningContext): Promise<PlanOutcome> {
+  return sharedRun(context.access.householdId, () => bringUpToDate(context));
+}
+
+async function bringUpToDate(context: PlanningContext): Promise<PlanOutcome> {
   for (let attempt = 0; attempt < tries; attempt++) {
     const outcome = await tryToPlan(context);
     if (outcome) return outcome;

@@ -1,11 +1,12 @@
 import { randomUUID } from 'node:crypto';
-import type { Database } from '@/db/client';
+import { sql } from 'drizzle-orm';
+import { type Database, openDatabase } from '@/db/client';
 import { type PoolChanges, updatePool } from '@/db/queries/pools';
 import { saveShelfProduct, type ShelfProductValues } from '@/db/queries/shelf-products';
 import type { HouseholdAccess } from '@/lib/auth/household-access';
 import type { NewReading } from '@/lib/schemas/reading';
 import type { ServiceContext } from '@/lib/services/context';
-import { aHousehold } from './test-database';
+import { aHousehold, freshFile } from './test-database';
 
 /** Sunday evening, midsummer: when the household of these tests tests its water. */
 export const sundayEvening = new Date('2026-07-05T23:00:00Z');
@@ -99,4 +100,11 @@ export function aFullTest(takenAt: Date = sundayEvening, overrides: Partial<NewR
     look: 'clear',
     ...overrides,
   };
+}
+
+/** A private copy of a database as it stands, for a test that goes on from there. */
+export async function copyOf(db: Database): Promise<Database> {
+  const file = freshFile();
+  await db.run(sql`VACUUM INTO ${file}`);
+  return openDatabase(`file:${file}`);
 }
