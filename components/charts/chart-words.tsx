@@ -8,9 +8,10 @@ const weights: Record<Weight, string> = {
 };
 
 /** Words over a chart, each with a halo of its ground, so that a line under them does not strike them out. */
-export function ChartWords({ words, figure = 'text-ink' }: { words: readonly PlacedWords[]; figure?: string }) {
-  return words.map(({ id, lines, x, y, anchor, ground }) => {
+export function ChartWords({ words }: { words: readonly PlacedWords[] }) {
+  return words.map(({ id, lines, x, y, anchor, ground, tone }) => {
     const baselines = baselinesOf(lines);
+    const figure = tone === 'teal' ? 'text-teal-ink' : 'text-ink';
     const halo = ground === 'water' ? 'stroke-water-2' : 'stroke-paper';
     return (
       <g key={id} className={`[paint-order:stroke] [stroke-linejoin:round] [stroke-width:4px] ${halo} ${figure}`}>

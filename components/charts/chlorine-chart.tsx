@@ -16,15 +16,16 @@ type Props = {
   limits: readonly Limit[];
   tests: readonly ChartTest[];
   label: string;
+  readout: (row: ChartRow) => string;
   notes: ReactNode;
   thicker?: number;
 };
 
 /** Free chlorine between the lowest level and the swim limit. */
 export function ChlorineChart(props: Props) {
-  const { time, value, rows, limits, tests, label, notes, thicker = 0 } = props;
+  const { time, value, rows, limits, tests, label, readout, notes, thicker = 0 } = props;
   return (
-    <LaneChart time={time} value={value} rows={rows} label={label} notes={notes}>
+    <LaneChart time={time} value={value} rows={rows} label={label} readout={readout} notes={notes}>
       {['water', 'waves'].map((fill) => (
         <Area
           key={fill}
@@ -37,7 +38,7 @@ export function ChlorineChart(props: Props) {
           zIndex={layer.water}
         />
       ))}
-      {ticksOf(value).map((figure) => (
+      {ticksOf(value, 36).map((figure) => (
         <ReferenceLine key={figure} y={figure} className="text-rule" stroke="currentColor" zIndex={layer.grid} />
       ))}
       <LimitLines limits={limits} axis={value} />

@@ -4,6 +4,7 @@ import type { ChartDose } from './chart-doses';
 import type { ChartRow } from './chart-rows';
 import { ChartWords } from './chart-words';
 import { ChlorineChart } from './chlorine-chart';
+import { dayWords } from './day-words';
 import { DoseCircles, MeetingMark, NowDot, SwimHours } from './dose-marks';
 import type { LaneTime } from './lane-chart';
 import { LikelyLeader } from './likely-leader';
@@ -17,6 +18,8 @@ import type { Limit } from './water-lines';
 import { takenBoxes, type WeekPhrases, weekWords } from './week-words';
 
 export type ChlorineLaneProps = {
+  /** Seven days on a desk, or one day on a phone. */
+  span: 'week' | 'day';
   time: LaneTime;
   value: ValueAxis;
   rows: ChartRow[];
@@ -30,17 +33,20 @@ export type ChlorineLaneProps = {
   planEndsAt: number | undefined;
   phrases: WeekPhrases;
   label: string;
+  readout: (row: ChartRow) => string;
 };
 
-/** The week's free chlorine with everything that is said about it. */
+/** Free chlorine with everything that is said about it. */
 export function ChlorineLane(props: ChlorineLaneProps) {
-  const { time, value, rows, points, limits, swimLimit, swimHours, doses, tests, planEndsAt, phrases, label } = props;
+  const { span, time, value, rows, points, limits, swimLimit, swimHours, doses, tests, planEndsAt, phrases } = props;
   const { axis, width, now } = time;
   const geometry = { axis, width, value, points, now, limit: swimLimit, doses, tests, planEndsAt };
   const bounds: Box = { x: 0, y: 0, width, height: value.height };
-  const words = placeWords(weekWords(phrases, geometry), takenBoxes(geometry), bounds);
+  const wanted = span === 'week' ? weekWords(phrases, geometry) : dayWords(phrases, geometry);
+  const words = placeWords(wanted, takenBoxes(geometry), bounds);
   const ground = { axis, width, value };
   const levelNow = isOn(axis, now) ? waterAt(points, now)?.freeChlorine.middle : undefined;
+  const { meets } = phrases;
   return (
     <ChlorineChart
       time={time}
@@ -48,13 +54,15 @@ export function ChlorineLane(props: ChlorineLaneProps) {
       rows={rows}
       limits={limits}
       tests={tests}
-      label={label}
+      label={props.label}
+      readout={props.readout}
+      thicker={span === 'day' ? 0.4 : 0}
       notes={
         <NotesLayer width={width} height={value.height}>
           <SwimHours {...ground} hours={swimHours} limit={swimLimit} />
           <LikelyLeader {...ground} words={words.find(({ id }) => id === 'likely')} points={points} />
-          <ChartWords words={words} figure="text-teal-ink" />
-          {phrases.meets && <MeetingMark {...ground} at={phrases.meets.at} meets={phrases.meets.value} />}
+          <ChartWords words={words} />
+          {meets && isOn(axis, meets.at) && <MeetingMark {...ground} at={meets.at} meets={meets.value} />}
           <DoseCircles {...ground} doses={doses} points={points} quantity="freeChlorine" />
           {levelNow !== undefined && <NowDot {...ground} at={now} level={levelNow} />}
         </NotesLayer>

@@ -1,7 +1,7 @@
 'use client';
 
 import type { ReactNode } from 'react';
-import { ComposedChart, ReferenceArea, ReferenceLine, XAxis, YAxis } from 'recharts';
+import { ComposedChart, ReferenceArea, ReferenceLine, Tooltip, XAxis, YAxis } from 'recharts';
 import type { ChartRow } from './chart-rows';
 import { isOn, type Stretch, type TimeAxis } from './time-axis';
 import type { ValueAxis } from './value-axis';
@@ -15,10 +15,18 @@ type Props = {
   rows: ChartRow[];
   /** One sentence that says what the curve shows. */
   label: string;
+  /** What is said of one hour under the pointer. */
+  readout: (row: ChartRow) => string;
   children: ReactNode;
   /** Words and marks over the chart. */
   notes?: ReactNode;
 };
+
+function Readout({ row, readout }: { row: ChartRow | undefined; readout: (row: ChartRow) => string }) {
+  return row ? (
+    <p className="rounded bg-ink px-2 py-1 text-chart whitespace-nowrap text-on-ink">{readout(row)}</p>
+  ) : null;
+}
 
 /** Order of what lies over what; water at the bottom, marks on top. */
 export const layer = {
@@ -39,7 +47,7 @@ export const still = { isAnimationActive: false, activeDot: false, type: 'linear
  * A chart that fills its lane from edge to edge. Without margins an instant has the same x in every lane, and the plain
  * lanes between the charts can place theirs by the same share.
  */
-export function LaneChart({ time, value, rows, label, children, notes }: Props) {
+export function LaneChart({ time, value, rows, label, readout, children, notes }: Props) {
   const { axis, width, nights, now, syncId } = time;
   return (
     <div className="relative text-ink" style={{ width, height: value.height }}>
@@ -68,6 +76,11 @@ export function LaneChart({ time, value, rows, label, children, notes }: Props) 
             />
           ))}
           {children}
+          <Tooltip
+            isAnimationActive={false}
+            cursor={{ stroke: 'currentColor', strokeWidth: 1, strokeDasharray: '2 3' }}
+            content={({ payload }) => <Readout row={payload[0]?.payload} readout={readout} />}
+          />
           {isOn(axis, now) && <ReferenceLine x={now} stroke="currentColor" strokeWidth={1.6} zIndex={layer.now} />}
         </ComposedChart>
       </div>

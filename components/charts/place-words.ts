@@ -15,6 +15,10 @@ export type Words = {
   places: Place[];
   /** The colour of the ground they stand on, for their halo. */
   ground?: 'water';
+  /** The colour of their figures; ink when left out. */
+  tone?: 'teal';
+  /** Room above their left end that a leader line needs, free of other words. */
+  leader?: { width: number; height: number };
   /** Left out when every place is taken; other words then stand at their first place all the same. */
   mayBeLeftOut?: true;
 };
@@ -33,7 +37,8 @@ export function placeWords(words: readonly Words[], taken: readonly Box[], bound
   for (const candidate of words) {
     const free = candidate.places.find((place) => {
       const box = boxOf(candidate.lines, place);
-      return holds(bounds, box) && !occupied.some((other) => overlap(box, other));
+      if (!holds(bounds, box) || occupied.some((other) => overlap(box, other))) return false;
+      return candidate.leader === undefined || !crossesWords(box, candidate.leader, placed);
     });
     const place = free ?? (candidate.mayBeLeftOut ? undefined : candidate.places[0]);
     if (place === undefined) continue;
@@ -69,6 +74,15 @@ function sizeOf(line: WordLine): number {
 
 function overlap(a: Box, b: Box): boolean {
   return a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
+}
+
+function crossesWords(
+  { x, y }: Box,
+  leader: { width: number; height: number },
+  placed: readonly PlacedWords[],
+): boolean {
+  const room = { x, y: y - leader.height, ...leader };
+  return placed.some(({ lines, ...place }) => overlap(room, boxOf(lines, place)));
 }
 
 function holds(outer: Box, inner: Box): boolean {

@@ -27,6 +27,7 @@ export type QuantityLaneProps = {
   tests: readonly ChartTest[];
   phrases: { now: string | undefined; end: string | undefined; tests: Record<string, string> };
   label: string;
+  readout: (row: ChartRow) => string;
 };
 
 /** pH or stabilizer in a low lane of their own. */
@@ -41,6 +42,7 @@ export function QuantityLane(props: QuantityLaneProps) {
       value={value}
       rows={rows}
       label={label}
+      readout={props.readout}
       notes={
         <NotesLayer width={width} height={value.height}>
           <ChartWords words={words} />

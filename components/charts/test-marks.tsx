@@ -23,38 +23,35 @@ export function TestMarks({ tests, radius = 4.6 }: { tests: readonly ChartTest[]
       ? []
       : [{ at, value: (between.low + between.high) / 2, spread: (between.high - between.low) / 2 }],
   );
+  // A Scatter without points of its own would take those of the chart.
   return (
     <>
-      <Scatter
-        data={dots}
-        dataKey="value"
-        shape={({ cx, cy }: ScatterShapeProps) => (
-          <circle cx={cx} cy={cy} r={radius} className="fill-paper-lift stroke-ink" strokeWidth="1.8" />
-        )}
-        isAnimationActive={false}
-        zIndex={layer.test}
-      >
-        <ErrorBar
-          dataKey="spread"
-          direction="y"
-          width={3}
-          stroke="currentColor"
-          strokeWidth={1.3}
+      {dots.length > 0 && (
+        <Scatter
+          data={dots}
+          dataKey="value"
+          shape={({ cx, cy }: ScatterShapeProps) => (
+            <circle cx={cx} cy={cy} r={radius} className="fill-paper-lift stroke-ink" strokeWidth="1.8" />
+          )}
           isAnimationActive={false}
-          zIndex={layer.test - 1}
-        />
-      </Scatter>
-      <Scatter data={bars} dataKey="value" shape={() => <g />} isAnimationActive={false} zIndex={layer.test}>
-        <ErrorBar
-          dataKey="spread"
-          direction="y"
-          width={5}
-          stroke="currentColor"
-          strokeWidth={1.5}
-          isAnimationActive={false}
-          zIndex={layer.test - 1}
-        />
-      </Scatter>
+          zIndex={layer.test}
+        >
+          <ErrorBar {...whisker} width={3} strokeWidth={1.3} />
+        </Scatter>
+      )}
+      {bars.length > 0 && (
+        <Scatter data={bars} dataKey="value" shape={() => <g />} isAnimationActive={false} zIndex={layer.test}>
+          <ErrorBar {...whisker} width={5} strokeWidth={1.5} />
+        </Scatter>
+      )}
     </>
   );
 }
+
+const whisker = {
+  dataKey: 'spread',
+  direction: 'y',
+  stroke: 'currentColor',
+  isAnimationActive: false,
+  zIndex: layer.test - 1,
+} as const;

@@ -38,6 +38,9 @@ const GAIN = 18;
 const NOW = 25;
 /** Room that the hatch of a limit takes on its far side. */
 const HATCH = 8;
+const SWIM_BRACKET = 8;
+/** Room for the line from the words about the likely range up to it. */
+const LEADER = { width: 44, height: 90 };
 /** Lines above the limit: the gains next to it, the limit's own words at the top. */
 const TOP_MARGIN = 4;
 
@@ -59,8 +62,8 @@ export function weekWords(phrases: WeekPhrases, geometry: WeekGeometry): Words[]
   ];
 }
 
-/** What no words may cover: the likely range, hour by hour, and the marks of tests and doses. */
-export function takenBoxes({ axis, width, value, points, doses, tests }: WeekGeometry): Box[] {
+/** What no words may cover: the likely range, hour by hour, the limits, and the marks of tests and doses. */
+export function takenBoxes({ axis, width, value, points, limit, doses, tests }: WeekGeometry): Box[] {
   const band = points.slice(0, -1).flatMap((point, index) => {
     const next = points[index + 1];
     if (next === undefined) return [];
@@ -80,7 +83,14 @@ export function takenBoxes({ axis, width, value, points, doses, tests }: WeekGeo
     const y = yOf(value, water.freeChlorine.middle);
     return [around(xOf(axis, width, at), y - 10, y + 10, 10)];
   });
-  return [...band, ...measured, ...circles];
+  const limitLine = { x: 0, y: yOf(value, limit) - HATCH + 1, width, height: HATCH + SWIM_BRACKET };
+  const lowestLine = points.slice(0, -1).flatMap((point, index) => {
+    const next = points[index + 1];
+    if (next === undefined) return [];
+    const x = xOf(axis, width, point.at);
+    return [{ x, y: yOf(value, point.lowestLevel), width: xOf(axis, width, next.at) - x, height: HATCH - 1 }];
+  });
+  return [...band, ...measured, ...circles, limitLine, ...lowestLine];
 }
 
 function around(x: number, top: number, bottom: number, half: number): Box {
@@ -98,7 +108,14 @@ function nowWords({ now: phrase }: WeekPhrases, geometry: WeekGeometry): Words[]
     { x: x - 9, y: TOP_MARGIN, anchor: 'end' },
     { x: x + 9, y: TOP_MARGIN, anchor: 'start' },
   ];
-  return [{ id: 'now', lines: [[run(`${phrase.words} `, 'bold'), run(phrase.figure, 'figure', NOW)]], places: sides }];
+  return [
+    {
+      id: 'now',
+      lines: [[run(`${phrase.words} `, 'bold'), run(phrase.figure, 'figure', NOW)]],
+      places: sides,
+      tone: 'teal',
+    },
+  ];
 }
 
 function gainWords(geometry: WeekGeometry): Words[] {
@@ -166,10 +183,13 @@ function meetingWords({ meets }: WeekPhrases, { axis, width, value }: WeekGeomet
   if (meets === undefined) return [];
   const x = xOf(axis, width, meets.at);
   const y = yOf(value, meets.value);
-  const places = [y + 14, y - 44, y + 32].flatMap((top): Place[] => [
-    { x: x - 8, y: top, anchor: 'end' },
-    { x: x + 8, y: top, anchor: 'start' },
-  ]);
+  const aside = [8, 40, 80, 130, 190];
+  const places = [y + 14, y + 32, y + 50, y - 44].flatMap((top) =>
+    aside.flatMap((gap): Place[] => [
+      { x: x + gap, y: top, anchor: 'start' },
+      { x: x - gap, y: top, anchor: 'end' },
+    ]),
+  );
   return [{ id: 'meets', lines: [[run(meets.words[0], 'bold')], [run(meets.words[1])]], places }];
 }
 
@@ -192,7 +212,15 @@ function likelyWords({ likely }: WeekPhrases, geometry: WeekGeometry): Words[] {
   const places = everyQuarter(width)
     .reverse()
     .map((x): Place => ({ x, y, anchor: 'start' }));
-  return [{ id: 'likely', lines, places: [{ x: width * 0.58, y, anchor: 'start' }, ...places], mayBeLeftOut: true }];
+  return [
+    {
+      id: 'likely',
+      lines,
+      places: [{ x: width * 0.58, y, anchor: 'start' }, ...places],
+      leader: LEADER,
+      mayBeLeftOut: true,
+    },
+  ];
 }
 
 function promisedWords({ promised }: WeekPhrases, { axis, width, value, points, now }: WeekGeometry): Words[] {

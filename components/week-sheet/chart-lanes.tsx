@@ -13,9 +13,12 @@ import { useChlorinePhrases, useQuantityPhrases } from './use-chart-phrases';
 import { useDoseWords } from './use-dose-words';
 import { useUnits } from './use-units';
 
-const LazyChlorineLane = dynamic(() => import('@/components/charts/chlorine-lane').then((part) => part.ChlorineLane), {
-  ssr: false,
-});
+export const LazyChlorineLane = dynamic(
+  () => import('@/components/charts/chlorine-lane').then((part) => part.ChlorineLane),
+  {
+    ssr: false,
+  },
+);
 const LazyQuantityLane = dynamic(() => import('@/components/charts/quantity-lane').then((part) => part.QuantityLane), {
   ssr: false,
 });
@@ -59,6 +62,7 @@ export function ChlorineWeekLane({ width, value }: LaneProps) {
       {width > 0 && (
         <LazyChlorineLane
           {...phrases}
+          span="week"
           time={time}
           value={value}
           rows={picture.rows}

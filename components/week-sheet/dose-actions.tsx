@@ -4,7 +4,7 @@ import { Check, Eye, Hand, UserRound } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
-import { useProblemWords } from '@/lib/client/problem-words';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { bold } from './bold';

@@ -5,7 +5,7 @@ const tones = { ink: 'text-ink', teal: 'text-teal-ink', plum: 'text-plum-ink', o
 /** A lane's name in the gutter, with what its figures mean. */
 export function LaneName({ name, note, tone = 'ink' }: { name: string; note: string; tone?: keyof typeof tones }) {
   return (
-    <div className="pt-1.25 pr-6">
+    <div className="pt-1.25 pr-5">
       <p className={`font-display text-name ${tones[tone]}`}>{name}</p>
       <p className="mt-px text-figure text-ink-2">{note}</p>
     </div>

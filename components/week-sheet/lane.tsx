@@ -41,3 +41,14 @@ export function Nights({ axis, nights }: { axis: TimeAxis; nights: readonly Stre
     <div key={night.from} aria-hidden="true" className="absolute inset-y-0 bg-night" style={placeOf(axis, night)} />
   ));
 }
+
+/** The line of now through a lane that is not a chart; `left` as a share of its width. */
+export function NowRule({ left }: { left: number }) {
+  return (
+    <div
+      aria-hidden="true"
+      className="absolute inset-y-0 border-l-[1.6px] border-ink"
+      style={{ left: `calc(${left * 100}% - 0.8px)` }}
+    />
+  );
+}

@@ -14,12 +14,20 @@ const tops: Record<CurveQuantity, number> = {
   pH: laneHeight.head + laneHeight.sun + laneHeight.chlorine + laneHeight.highLow,
   cyanuricAcid: laneHeight.head + laneHeight.sun + laneHeight.chlorine + laneHeight.highLow + laneHeight.pH,
 };
+const figures = { top: tops.pH - laneHeight.highLow, bottom: tops.pH };
+const FIGURES_WIDTH = 96;
 const foot = tops.cyanuricAcid + laneHeight.stabilizer;
 
 /** From the to-do lane up through the lanes to the curve that each dose lifts: drawn out once it is given. */
 export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQuantity, ValueAxis> }) {
   const { sheet, picture } = useSheet();
   const doses = chartDoses(sheet.doses, useDoseWords());
+  // Like the line of now, a plumb line breaks for the high and low figures at the left of each column.
+  const crossesFigures = (x: number) =>
+    picture.days.some(({ from }) => {
+      const left = xOf(picture.axis, width, from);
+      return x > left && x < left + FIGURES_WIDTH;
+    });
   return (
     <svg
       width={width}
@@ -36,7 +44,9 @@ export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQ
         return (
           <path
             key={dose.id}
-            d={`M${x} ${foot}V${top}`}
+            d={
+              crossesFigures(x) ? `M${x} ${foot}V${figures.bottom}M${x} ${figures.top}V${top}` : `M${x} ${foot}V${top}`
+            }
             strokeWidth="1.1"
             strokeDasharray={dose.given ? 'none' : '2 3'}
           />

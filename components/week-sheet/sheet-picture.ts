@@ -1,6 +1,13 @@
 import { type ChartRow, rowsOf } from '@/components/charts/chart-rows';
 import type { Stretch, TimeAxis } from '@/components/charts/time-axis';
-import { courseOf, pointsOf, type WaterPoint, wholeCourse, withJumps } from '@/components/charts/water-curve';
+import {
+  courseOf,
+  pointsOf,
+  type WaterCourse,
+  type WaterPoint,
+  wholeCourse,
+  withJumps,
+} from '@/components/charts/water-curve';
 import type { Limit } from '@/components/charts/water-lines';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { doseInstant } from './dose-state';
@@ -28,8 +35,7 @@ export function pictureOf(sheet: WeekSheet): SheetPicture {
   const days = daysOf(sheet);
   const axis = axisOf(days);
   const now = instantOf(sheet.now);
-  const jumps = sheet.doses.filter(({ form, status }) => form !== 'tablet' && status !== 'skipped').map(doseInstant);
-  const course = courseOf(withJumps(pointsOf(sheet.behind), jumps), withJumps(pointsOf(sheet.ahead), jumps), now, axis);
+  const course = courseOn(sheet, axis);
   const points = wholeCourse(course);
   const swimHours = swimHoursOf(days, sheet);
   return {
@@ -44,6 +50,13 @@ export function pictureOf(sheet: WeekSheet): SheetPicture {
     planEndsAt: sheet.plan ? instantOf(sheet.plan.endsAt) : undefined,
     meeting: meetingOf(course.ahead, swimHours),
   };
+}
+
+/** Both curves of a sheet on an axis, with the jumps of its doses where they belong. */
+export function courseOn(sheet: WeekSheet, axis: TimeAxis): WaterCourse {
+  const jumps = sheet.doses.filter(({ form, status }) => form !== 'tablet' && status !== 'skipped').map(doseInstant);
+  const [behind, ahead] = [sheet.behind, sheet.ahead].map((curve) => withJumps(pointsOf(curve), jumps));
+  return courseOf(behind ?? [], ahead ?? [], instantOf(sheet.now), axis);
 }
 
 /** The limit as it held hour by hour; where no curve says, the household's limit of today. */

@@ -2,17 +2,16 @@
 
 import { useTranslations } from 'next-intl';
 import { isOn, shareOf } from '@/components/charts/time-axis';
-import { Lane, Nights, placeOf } from './lane';
+import { Lane, Nights, NowRule, placeOf } from './lane';
 import { LaneName } from './lane-name';
 import { useSheet } from './sheet-context';
 import type { SheetDay } from './sheet-times';
+import { SunBars } from './sun-bars';
 import { SwimmerHeads } from './swimmer-heads';
 import { useUnits } from './use-units';
 
-const HOUR = 3_600_000;
 /** The line on which the sun bars stand, from the top of the lane [px]. */
 const BASE = 47;
-const TALLEST = 36;
 
 /** Sun on the water hour by hour, rain, and who is expected in it. */
 export function SunLane() {
@@ -27,12 +26,7 @@ export function SunLane() {
           <DayOfSun key={day.day} day={day} />
         ))}
         <div className="absolute inset-x-0 border-t border-rule-2" style={{ top: BASE }} />
-        {isOn(axis, now) && (
-          <div
-            className="absolute inset-y-0 w-0 border-l-[1.6px] border-ink"
-            style={{ left: `calc(${shareOf(axis, now) * 100}% - 0.8px)` }}
-          />
-        )}
+        {isOn(axis, now) && <NowRule left={shareOf(axis, now)} />}
       </div>
     </Lane>
   );
@@ -45,34 +39,16 @@ function DayOfSun({ day }: { day: SheetDay }) {
   const fullSun = day.sun.reduce((sum, share) => sum + share, 0);
   return (
     <div className="absolute inset-y-0" style={placeOf(picture.axis, day)}>
-      {day.sun.map((share, hour) => (
-        <SunBar key={hour} day={day} at={day.from + hour * HOUR} share={share} />
-      ))}
+      <SunBars day={day} base={BASE} tallest={36} width={2.4} />
       <span className="absolute top-1.5 left-2.25 text-figure text-ink-2">
         {t('fullSun', { hours: units.number(fullSun, 1) })}
       </span>
       {day.rain >= 0.5 && (
         <span className="absolute top-1.5 right-2.25 text-figure text-ink-2">
-          {t('rain', { amount: units.quantity(day.rain, 'rain') })}
+          {t('rain', { amount: units.rain(day.rain) })}
         </span>
       )}
       <SwimmerHeads day={day} top={BASE} />
     </div>
-  );
-}
-
-function SunBar({ day, at, share }: { day: SheetDay; at: number; share: number }) {
-  const { picture } = useSheet();
-  if (share < 0.03) return null;
-  const past = at + HOUR / 2 < picture.now;
-  return (
-    <span
-      className={`absolute w-[2.4px] bg-ink ${past ? 'opacity-[.82]' : 'opacity-[.56]'}`}
-      style={{
-        left: `calc(${shareOf(day, at + HOUR / 2) * 100}% - 1.2px)`,
-        top: BASE - share * TALLEST,
-        height: share * TALLEST,
-      }}
-    />
   );
 }

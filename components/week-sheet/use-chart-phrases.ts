@@ -3,7 +3,8 @@
 import { useTranslations } from 'next-intl';
 import type { ChlorineLaneProps } from '@/components/charts/chlorine-lane';
 import type { QuantityLaneProps } from '@/components/charts/quantity-lane';
-import { waterAt } from '@/components/charts/water-curve';
+import type { ChartRow } from '@/components/charts/chart-rows';
+import { type CurveQuantity, waterAt } from '@/components/charts/water-curve';
 import { wallTimeText } from '@/lib/calendar/format';
 import { capitalised } from './capitalised';
 import { useSheet } from './sheet-context';
@@ -14,12 +15,13 @@ import { useUnits } from './use-units';
 const DAY = 86_400_000;
 
 /** What is written into the chlorine lane, and its sentence. */
-export function useChlorinePhrases(): Pick<ChlorineLaneProps, 'phrases' | 'label'> {
+export function useChlorinePhrases(): Pick<ChlorineLaneProps, 'phrases' | 'label' | 'readout'> {
   const t = useTranslations('week.chart');
   const { sheet, picture } = useSheet();
   const times = useTimes();
   const units = useUnits();
   const testWords = useTestWords();
+  const readout = useReadout('freeChlorine');
   const { pool, household } = sheet;
   const { points, now, meeting } = picture;
   const water = waterAt(points, now);
@@ -43,6 +45,7 @@ export function useChlorinePhrases(): Pick<ChlorineLaneProps, 'phrases' | 'label
   const which = meeting?.limit === 'swim-limit' ? 'meetsHigh' : 'meetsLow';
   return {
     label,
+    readout,
     phrases: {
       limit: [
         pool.swimLimitSetBy === null ? t('limit', { limit }) : t('limitPerson', { limit, name: pool.swimLimitSetBy }),
@@ -84,11 +87,29 @@ function useTestWords(): Record<string, string[]> {
   return Object.fromEntries(words);
 }
 
+/** What is said of one hour under the pointer; ahead it is a part of a day, never minutes. */
+function useReadout(quantity: CurveQuantity): (row: ChartRow) => string {
+  const t = useTranslations('week.chart');
+  const times = useTimes();
+  const units = useUnits();
+  return ({ at, behind, ahead }) => {
+    const likely = (behind ?? ahead)?.[quantity];
+    if (likely === undefined) return '';
+    const level = (value: number) => units.figure(value, quantity);
+    return t(behind ? 'readoutBehind' : 'readout', {
+      when: capitalised(times.partAt(at)),
+      value: level(likely.middle),
+      low: level(likely.low),
+      high: level(likely.high),
+    });
+  };
+}
+
 /** What is written into the lane of pH or stabilizer, and its sentence. */
 export function useQuantityPhrases(
   quantity: 'pH' | 'cyanuricAcid',
   keep: readonly [number, number],
-): Pick<QuantityLaneProps, 'phrases' | 'label'> {
+): Pick<QuantityLaneProps, 'phrases' | 'label' | 'readout'> {
   const t = useTranslations('week');
   const { sheet, picture } = useSheet();
   const times = useTimes();
@@ -96,10 +117,12 @@ export function useQuantityPhrases(
   const name = t(quantity === 'pH' ? 'lane.pH' : 'lane.stabilizer');
   const level = (value: number) => units.figure(value, quantity);
   const range = { low: level(keep[0]), high: level(keep[1]) };
+  const readout = useReadout(quantity);
   const [first, last] = [picture.points[0], picture.points.at(-1)];
   if (first === undefined || last === undefined)
     return {
       label: t('chart.quantityEmpty', { name, ...range }),
+      readout,
       phrases: { now: undefined, end: undefined, tests: {} },
     };
   const [from, to] = [first[quantity].middle, last[quantity].middle];
@@ -115,6 +138,7 @@ export function useQuantityPhrases(
   });
   return {
     label: t('chart.quantityLabel', { name, from: level(from), to: level(to), ...range }),
+    readout,
     phrases: {
       now: water && isStabilizer ? t('chart.valueNow', { value: level(water[quantity].middle) }) : undefined,
       end:

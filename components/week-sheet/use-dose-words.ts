@@ -35,6 +35,9 @@ export function useDoseWords() {
       const until = times.clock(instantOf(dose.pumpUntil));
       return t(lastLight ? 'when.lastLightPump' : 'when.aboutPump', { time, until });
     },
+    /** "Pump on until 23:40." */
+    pump: ({ pumpUntil }: PlanDose) =>
+      pumpUntil === null ? undefined : t('pump', { time: times.clock(instantOf(pumpUntil)) }),
     /** "Nobody in until the morning." */
     afterwards: (dose: PlanDose) => {
       if (dose.steps === 'tablets-inline') return t('after.tablets');

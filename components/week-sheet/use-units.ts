@@ -4,6 +4,7 @@ import { useTranslations } from 'next-intl';
 import type { DoseUnit } from '@/lib/schemas/dose';
 import { formatNumber, formatQuantity, type Written } from '@/lib/units/format';
 import type { Quantity } from '@/lib/units/quantity';
+import { convert } from '@/lib/units/unit';
 import { useSheet } from './sheet-context';
 
 /** Figures of the household's units in words. */
@@ -33,6 +34,13 @@ export function useUnits() {
     /** "95 g", "1.2 kg", "8 fl oz"; whole tablets are only counted. */
     amount: (value: number, unit: DoseUnit) =>
       unit === 'tablet' ? number(value) : quantity(value, unit === 'g' ? 'mass' : 'liquidVolume'),
+    /** What is to be carried home, from kilograms: never in grams or ounces. */
+    weightToCarry: (kilograms: number) => {
+      const unitCode = unitSystem === 'us' ? 'lb' : 'kg';
+      return t(unitCode, { value: number(convert(kilograms, 'kg', unitCode), 1) });
+    },
+    /** Rain, from millimetres. */
+    rain: (millimetres: number) => quantity(millimetres / 1000, 'rain'),
     /** Water for a bucket, from litres. */
     bucket: (litres: number) => quantity(litres * 1000, 'liquidVolume'),
   };

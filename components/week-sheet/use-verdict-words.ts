@@ -47,7 +47,7 @@ export function useVerdictWords() {
       part: typeof end === 'number' ? times.partAfter(end) : '',
       hours: Math.floor(number),
       limitHours: units.number(typeof limit === 'number' ? limit : 0, 0),
-      rain: units.quantity(number, 'rain'),
+      rain: units.rain(number),
     };
   };
 

@@ -17,7 +17,7 @@ export function Verdict() {
   if (sheet.verdict.state === 'fine')
     return (
       <section data-verdict="fine">
-        <h1 className="font-display-soft text-verdict text-balance">{headline}</h1>
+        <h1 className="font-display-soft text-verdict text-balance md:text-wrap">{headline}</h1>
         <WaterNow>
           <Standing />
         </WaterNow>

@@ -22,7 +22,7 @@ export function useUnsentTicks(personId: string): readonly SentTick[] {
 }
 
 export function unsentTicks(personId: string): readonly SentTick[] {
-  const text = localStorage.getItem(keyOf(personId)) ?? '[]';
+  const text = stored(personId);
   const known = cache.get(personId);
   if (known?.text === text) return known.ticks;
   const ticks = storedSchema.safeParse(parsed(text)).data ?? nothing;
@@ -30,10 +30,10 @@ export function unsentTicks(personId: string): readonly SentTick[] {
   return ticks;
 }
 
-/** Keeps a tick; the same tick once only. */
-export function keepTick(personId: string, sent: SentTick): void {
+/** Keeps a tick, the same one once only. @returns whether the device took it: a private window may refuse */
+export function keepTick(personId: string, sent: SentTick): boolean {
   const others = unsentTicks(personId).filter(({ tick }) => tick.id !== sent.tick.id);
-  store(personId, [...others, sent]);
+  return store(personId, [...others, sent]);
 }
 
 export function forgetTick(personId: string, tickId: string): void {
@@ -43,9 +43,22 @@ export function forgetTick(personId: string, tickId: string): void {
   );
 }
 
-function store(personId: string, ticks: readonly SentTick[]): void {
-  localStorage.setItem(keyOf(personId), JSON.stringify(ticks));
+function store(personId: string, ticks: readonly SentTick[]): boolean {
+  try {
+    window.localStorage.setItem(keyOf(personId), JSON.stringify(ticks));
+  } catch {
+    return false;
+  }
   listeners.forEach((listener) => listener());
+  return true;
+}
+
+function stored(personId: string): string {
+  try {
+    return window.localStorage.getItem(keyOf(personId)) ?? '[]';
+  } catch {
+    return '[]';
+  }
 }
 
 function listen(listener: () => void): () => void {

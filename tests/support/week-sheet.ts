@@ -62,8 +62,12 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
       takenAt: iso(takenAt),
       endsAt: iso(takenAt + 168 * HOUR),
       stale: false,
-      reasons: [],
-      cautions: [],
+      reasons: [
+        { code: 'lowest-level-follows-stabilizer', stabilizer: 43, lowestLevel: 2.15 },
+        { code: 'tablets-carry', tablets: 3, rise: 4.2, stabilizer: 4.1 },
+        { code: 'fast-closes-gap', form: 'granular', evenings: 4, rise: 2.65 },
+      ],
+      cautions: [{ code: 'water-values-assumed', quantity: 'calciumHardness', value: 220 }],
       broken: [],
       needs: [],
       alternatives: theAlternatives(),
@@ -75,9 +79,9 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
     readings,
     doses,
     checks: [
-      { at: iso(at(3, '19:00')), kind: 'quick', reason: 'before-swim-day', done: false },
-      { at: iso(at(5, '10:00')), kind: 'quick', reason: 'before-swim-day', done: false },
-      { at: iso(at(6, '19:00')), kind: 'full', reason: 'week-ends', done: false },
+      { at: iso(at(3, '19:00')), kind: 'quick', reason: 'swim-day-after-two-days', done: false },
+      { at: iso(at(5, '10:00')), kind: 'quick', reason: 'swim-day-after-two-days', done: false },
+      { at: iso(at(6, '19:00')), kind: 'full', reason: 'next-week', done: false },
     ],
     ...overrides,
   };
@@ -120,7 +124,7 @@ function toyWater(takenAt: number, hours: number, timeZone: string, doses: reado
     if (index > 0) {
       const local = (new Date(at).getTime() / HOUR + (timeZone === 'Europe/Paris' ? 2 : 0)) % 24;
       const sun = sunAt(local, 6, 20.7);
-      chlorine += 0.012 - chlorine * (0.004 + 0.034 * sun);
+      chlorine += 0.034 - chlorine * (0.005 + 0.0285 * sun);
       for (const dose of doses) {
         const poured = Date.parse(dose.givenAt ?? dose.at);
         if (dose.form !== 'tablet' && dose.status !== 'skipped' && poured > at - HOUR && poured <= at)
@@ -176,7 +180,7 @@ export function aDose(number: number, at: number, iso: Iso, overrides: Partial<P
     amount: 95,
     unit: 'g',
     rise: 0.9,
-    reason: 'hold-lowest-level',
+    reason: 'closes-gap',
     labelWay: 'dissolve',
     steps: 'granules-dissolve',
     status: 'planned',
@@ -213,7 +217,7 @@ function theDoses(at: At, iso: Iso, now: number): PlanDose[] {
     amount: 3,
     unit: 'tablet',
     rise: 4.2,
-    reason: 'tablets-carry-the-week',
+    reason: 'slow-supply',
     labelWay: 'feeder-only',
     steps: 'tablets-inline',
     pumpUntil: null,

@@ -1,0 +1,71 @@
+'use client';
+
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import type { PlanDose } from '@/lib/schemas/plan-dose';
+import { bold } from './bold';
+import type { Check } from './checks';
+import { DoneReading } from './done-reading';
+import { DoseActions } from './dose-actions';
+import { DoseReason } from './dose-reason';
+import { nextDose } from './dose-state';
+import { DoseSteps } from './dose-steps';
+import { useSheet } from './sheet-context';
+import { instantOf } from './sheet-times';
+import type { ToDoItem } from './to-do-items';
+import { useCheckReason } from './use-check-reason';
+import { useDoseWords } from './use-dose-words';
+import { useTimes } from './use-times';
+
+/** What is to be done and was done on a day, as a list on a phone. */
+export function DayItems({ items }: { items: readonly ToDoItem[] }) {
+  return (
+    <ul className="grid gap-3">
+      {items.map((item) => (
+        <li key={`${item.kind} ${item.at}`}>
+          {item.kind === 'dose' && <ListedDose dose={item.dose} />}
+          {item.kind === 'check' && <ListedCheck check={item.check} />}
+          {item.kind === 'reading' && <DoneReading reading={item.reading} />}
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+/** The dose that is next has its own box at the top; here it is only named. */
+function ListedDose({ dose }: { dose: PlanDose }) {
+  const { sheet } = useSheet();
+  const words = useDoseWords();
+  const isNext = nextDose(sheet.doses)?.id === dose.id;
+  const isOpen = dose.status === 'planned';
+  return (
+    <div className="grid gap-1.5">
+      <p>
+        <b>{words.amountAndProduct(dose)}</b>
+        {isOpen && <span className="block text-small text-ink-2">{words.hourOf(dose, { pump: true })}</span>}
+      </p>
+      {isOpen && !isNext && (
+        <>
+          <DoseReason dose={dose} />
+          <DoseSteps dose={dose} />
+        </>
+      )}
+      {!isNext && <DoseActions dose={dose} />}
+    </div>
+  );
+}
+
+function ListedCheck({ check }: { check: Check }) {
+  const t = useTranslations('week');
+  const times = useTimes();
+  const reason = useCheckReason(check);
+  return (
+    <p>
+      {t.rich('check.by', { kind: t(`check.${check.kind}`), time: times.clock(instantOf(check.at)), b: bold })}
+      <span className="block text-small text-ink-2">{reason}</span>
+      <Link href="/test" className="inline-flex min-h-11 items-center underline decoration-1 underline-offset-3">
+        {t('next.enter')}
+      </Link>
+    </p>
+  );
+}

@@ -1,0 +1,32 @@
+'use client';
+
+import { ChartPatterns } from '@/components/charts/patterns';
+import { Colophon } from './colophon';
+import { FourWays } from './four-ways';
+import { NextDoses } from './next-doses';
+import { PoolFacts } from './pool-facts';
+import { RestOfWeek } from './rest-of-week';
+import { SheetTables } from './sheet-tables';
+import { StopLine } from './stop-line';
+import { Today } from './today';
+import { WhyThisMix } from './why-this-mix';
+
+/** The day first: what to do next, the Stop, today's water, then the rest of the week. */
+export function PhoneSheet() {
+  return (
+    <div className="px-margin pb-6">
+      <ChartPatterns />
+      <NextDoses />
+      <StopLine className="mt-3.5 border-y border-rule py-3" />
+      <Today />
+      <RestOfWeek />
+      <div className="mt-5.5 grid gap-4">
+        <WhyThisMix />
+        <FourWays />
+        <SheetTables />
+        <Colophon />
+        <PoolFacts />
+      </div>
+    </div>
+  );
+}

@@ -1,0 +1,113 @@
+'use client';
+
+import { Hand } from 'lucide-react';
+import { useTranslations } from 'next-intl';
+import { useState } from 'react';
+import { TickBox } from '@/components/ui/tick-box';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
+import { useUnsentTicks } from '@/lib/client/unsent-ticks';
+import type { PlanDose } from '@/lib/schemas/plan-dose';
+import { DoneLine } from './done-line';
+import { DoseDialog } from './dose-dialog';
+import { mayUndo, momentOf, tickBar } from './dose-state';
+import { useSheet } from './sheet-context';
+import { useDoseWords } from './use-dose-words';
+import { useTick } from './use-tick';
+
+/** A dose in its column: what, how much, when; once it is due, the box to tick. */
+export function ToDoDose({ dose }: { dose: PlanDose }) {
+  const { picture } = useSheet();
+  const moment = momentOf(dose, picture.now);
+  return moment === 'done' || moment === 'skipped' ? <DoneToDo dose={dose} /> : <OpenToDo dose={dose} />;
+}
+
+function DoneToDo({ dose }: { dose: PlanDose }) {
+  const t = useTranslations('doses');
+  const { sheet, picture } = useSheet();
+  const words = useDoseWords();
+  const [open, setOpen] = useState(false);
+  const skipped = dose.status === 'skipped';
+  return (
+    <div>
+      <DoneLine
+        what={words.amountAndProduct(dose)}
+        who={skipped ? words.skippedBy(dose) : words.doneBy(dose)}
+        skipped={skipped}
+      />
+      {mayUndo(dose, picture.now) && tickBar(sheet.me) === undefined && (
+        <StepsLink onPress={() => setOpen(true)}>{t('action.undo')}</StepsLink>
+      )}
+      <DoseDialog dose={dose} open={open} onOpenChange={setOpen} />
+    </div>
+  );
+}
+
+function OpenToDo({ dose }: { dose: PlanDose }) {
+  const t = useTranslations('doses');
+  const { sheet, picture } = useSheet();
+  const words = useDoseWords();
+  const [open, setOpen] = useState(false);
+  const moment = momentOf(dose, picture.now);
+  const ticks = moment !== 'ahead' && tickBar(sheet.me) === undefined;
+  return (
+    <div className="flex flex-col last:flex-1">
+      {dose.claimedBy !== null && (
+        <p className="mb-1 flex items-center gap-1 text-chart font-strong">
+          <Hand aria-hidden="true" className="size-4" />
+          {dose.claimedBy === sheet.me.name ? t('claimed.self') : t('claimed.other', { name: dose.claimedBy })}
+        </p>
+      )}
+      <p className="mb-0.5 text-fine text-ink-2">{words.hourOf(dose, { pump: false })}</p>
+      <p className="font-display text-[25px] leading-[27px] font-headline tracking-dose">{words.amountOf(dose)}</p>
+      <p className="text-[13.5px] leading-[17px] font-strong">{words.productOf(dose)}</p>
+      <p className="mt-1.25 text-fine text-ink-2">
+        {dose.pumpUntil !== null && <>{words.pump(dose)} </>}
+        {words.afterwards(dose)}
+      </p>
+      <div className="mt-auto pt-1">
+        {ticks && <TickHere dose={dose} />}
+        <StepsLink onPress={() => setOpen(true)}>{t(ticks ? 'action.stepsAndMore' : 'action.steps')}</StepsLink>
+      </div>
+      <DoseDialog dose={dose} open={open} onOpenChange={setOpen} />
+    </div>
+  );
+}
+
+/** One tap marks the dose as added; the way back stays open for ten minutes. */
+function TickHere({ dose }: { dose: PlanDose }) {
+  const t = useTranslations('doses');
+  const { sheet } = useSheet();
+  const { send, busy, problem } = useTick(dose);
+  const problemWords = useProblemWords();
+  const waiting = useUnsentTicks(sheet.me.id).some(({ doseId }) => doseId === dose.id);
+  if (waiting) return <p className="text-fine font-emphasis">{t('unsent.card')}</p>;
+  return (
+    <>
+      {dose.claimedBy === null && (
+        <StepsLink onPress={() => void send({ action: 'claim' })}>
+          {t(busy === 'claim' ? 'action.claimBusy' : 'action.claim')}
+        </StepsLink>
+      )}
+      <TickBox
+        label={
+          <span className="text-small font-emphasis">{t(busy === 'given' ? 'action.givenBusy' : 'action.given')}</span>
+        }
+        checked={busy === 'given'}
+        onChange={() => void send({ action: 'given' })}
+        {...(problem === undefined ? {} : { problem: problemWords(problem) })}
+      />
+    </>
+  );
+}
+
+function StepsLink({ onPress, children }: { onPress: () => void; children: React.ReactNode }) {
+  return (
+    <button
+      type="button"
+      onClick={onPress}
+      className="inline-flex min-h-6 cursor-pointer items-center text-left text-small font-emphasis underline decoration-1 underline-offset-3 pointer-coarse:min-h-11"
+    >
+      {children}
+    </button>
+  );
+}

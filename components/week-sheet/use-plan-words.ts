@@ -1,0 +1,104 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import type { CautionCode, LimitCode, ReasonCode } from '@/lib/planner/codes';
+import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import { limits } from '@/lib/standards/limits';
+import type { Quantity } from '@/lib/units/quantity';
+import { besideLimit } from './beside-limit';
+import { capitalised } from './capitalised';
+import { useSheet } from './sheet-context';
+import { instantOf } from './sheet-times';
+import { useTimes } from './use-times';
+import { useUnits } from './use-units';
+
+type Plan = NonNullable<WeekSheet['plan']>;
+type Fact = Plan['reasons'][number];
+export type Sentence = { code: string; words: string };
+
+/** How the figures of a fact are written, by their names. */
+const quantities: Record<string, Quantity> = {
+  stabilizer: 'cyanuricAcid',
+  upper: 'cyanuricAcid',
+  closesAt: 'cyanuricAcid',
+  lowestLevel: 'freeChlorine',
+  freeChlorine: 'freeChlorine',
+  rise: 'freeChlorine',
+  combinedChlorine: 'combinedChlorine',
+  pH: 'pH',
+  calciumHardness: 'calciumHardness',
+  low: 'calciumHardness',
+  high: 'calciumHardness',
+};
+
+/** Why the plan is as it is, what to mind, and what it does not keep, in sentences. A code without words is left out. */
+export function usePlanWords(plan: Plan): { reasons: Sentence[]; cautions: Sentence[]; broken: Sentence[] } {
+  const t = useTranslations('week.why');
+  const { sheet } = useSheet();
+  const times = useTimes();
+  const units = useUnits();
+  const isReason = (code: string): code is ReasonCode => t.has(`reason.${code as ReasonCode}`);
+  const isCaution = (code: string): code is CautionCode => t.has(`caution.${code as CautionCode}`);
+  const isLimit = (code: string): code is LimitCode => t.has(`limit.${code as LimitCode}`);
+
+  const productName = (id: unknown) =>
+    sheet.doses.find(({ product }) => product !== null && product === id)?.productName ?? t('someProduct');
+  const count = (value: unknown) => (typeof value === 'number' ? value : 0);
+  const figures = (fact: Fact) => {
+    const written = Object.entries(quantities).map(([name, quantity]) => [
+      name,
+      units.figure(count(fact[name]), quantity),
+    ]);
+    const assumed = isAssumable(fact.quantity) ? fact.quantity : undefined;
+    return {
+      ...Object.fromEntries(written),
+      stabilizerRise: units.number(count(fact.stabilizer), 1),
+      swimLimit: units.number(count(fact.swimLimit)),
+      pHLow: units.figure(limits.pHRangeLow.value, 'pH'),
+      pHHigh: units.figure(limits.pHRangeHigh.value, 'pH'),
+      combinedAct: units.number(limits.combinedChlorineAct.value),
+      index: units.signed(count(fact.index), 1),
+      share: units.number(count(fact.share) * 100, 0),
+      volume: units.quantity(count(fact.volume), 'volume'),
+      tablets: count(fact.tablets),
+      evenings: count(fact.evenings),
+      visits: count(fact.visits),
+      form: isForm(fact.form) ? t(`form.${fact.form}`) : '',
+      product: productName(fact.product),
+      quantity: assumed ? t(`quantity.${assumed}`) : '',
+      value: assumed ? units.figure(count(fact.value), assumed) : '',
+    };
+  };
+
+  const broken = plan.broken.flatMap(({ limit, at, value, bound }): Sentence[] => {
+    if (!isLimit(limit)) return [];
+    const stabilizer = limit === 'stabilizer-too-high-for-swim-limit';
+    const both = stabilizer
+      ? { value: units.number(value, 0), limit: units.number(bound, 0) }
+      : besideLimit(value, bound, sheet.household.locale);
+    const when = capitalised(times.partAt(instantOf(at)));
+    return [{ code: limit, words: t(`limit.${limit}`, { when, value: both.value, bound: both.limit }) }];
+  });
+
+  return {
+    reasons: plan.reasons.flatMap((fact) =>
+      isReason(fact.code) ? [{ code: fact.code, words: t(`reason.${fact.code}`, figures(fact)) }] : [],
+    ),
+    cautions: plan.cautions.flatMap((fact, index) =>
+      isCaution(fact.code) ? [{ code: `${fact.code} ${index}`, words: t(`caution.${fact.code}`, figures(fact)) }] : [],
+    ),
+    broken,
+  };
+}
+
+const assumable = ['totalAlkalinity', 'calciumHardness', 'cyanuricAcid'] as const;
+
+function isAssumable(quantity: unknown): quantity is (typeof assumable)[number] {
+  return assumable.some((known) => known === quantity);
+}
+
+const forms = ['granular', 'liquid', 'tablet', 'other'] as const;
+
+function isForm(form: unknown): form is (typeof forms)[number] {
+  return forms.some((known) => known === form);
+}

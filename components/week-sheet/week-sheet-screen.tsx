@@ -1,0 +1,65 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { useTranslations } from 'next-intl';
+import { Button } from '@/components/ui/button';
+import { ProblemState } from '@/components/ui/problem-state';
+import { Skeleton } from '@/components/ui/skeleton';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
+import { weekSheet } from '@/lib/client/week';
+import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import { ClockProvider } from './clock-context';
+import { DeskSheet } from './desk-sheet';
+import { FirstTest } from './first-test';
+import { Masthead } from './masthead';
+import { NotRefreshed } from './not-refreshed';
+import { PhoneSheet } from './phone-sheet';
+import { SheetProvider, useSheet } from './sheet-context';
+import { SheetStates } from './sheet-states';
+import { instantOf } from './sheet-times';
+import { UnsentNotice } from './unsent-notice';
+import { useIsPhone } from './use-is-phone';
+
+/** The week sheet, fetched and kept fresh. `initial`: what the server knew when it made the page. */
+export function WeekSheetScreen({ start, initial }: { start?: string | undefined; initial?: WeekSheet | undefined }) {
+  const t = useTranslations('week');
+  const common = useTranslations('common');
+  const problemWords = useProblemWords();
+  const query = useQuery({ ...weekSheet(start), ...(initial === undefined ? {} : { initialData: initial }) });
+  if (query.data === undefined) {
+    if (query.isError)
+      return (
+        <ProblemState
+          className="m-margin"
+          title={t('notLoaded')}
+          action={<Button onClick={() => void query.refetch()}>{common('tryAgain')}</Button>}
+        >
+          {problemWords(query.error)}
+        </ProblemState>
+      );
+    return <Skeleton label={t('loading')} className="m-margin h-96" />;
+  }
+  return (
+    <ClockProvider now={instantOf(query.data.now)} receivedAt={query.dataUpdatedAt}>
+      <SheetProvider sheet={query.data} start={start}>
+        {query.isError && <NotRefreshed />}
+        <Masthead />
+        <div className="mx-margin grid gap-3 empty:hidden sm:my-3">
+          <UnsentNotice />
+          <SheetStates />
+        </div>
+        <SheetBody />
+      </SheetProvider>
+    </ClockProvider>
+  );
+}
+
+function SheetBody() {
+  const t = useTranslations('week');
+  const { sheet } = useSheet();
+  const isPhone = useIsPhone();
+  if (sheet.lastReading === null) return <FirstTest />;
+  // Which of the two it will be is only known in the browser; until then the page keeps its place.
+  if (isPhone === undefined) return <Skeleton label={t('loadingChart')} className="m-margin h-96" />;
+  return isPhone ? <PhoneSheet /> : <DeskSheet />;
+}
