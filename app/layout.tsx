@@ -32,13 +32,12 @@ export const viewport: Viewport = { width: 'device-width', initialScale: 1, colo
 export default async function RootLayout({ children }: { children: React.ReactNode }) {
   // Every page is made per request: a page made at build time would carry no nonce and its scripts would be refused.
   await connection();
-  const t = await getTranslations('common');
   return (
     <html lang="en">
       <body>
         <ClientMessages>
           <Providers>
-            <UiProvider closeLabel={t('close')}>{children}</UiProvider>
+            <UiProvider>{children}</UiProvider>
           </Providers>
         </ClientMessages>
       </body>

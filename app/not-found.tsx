@@ -5,6 +5,7 @@ import { connection } from 'next/server';
 import { SignedOutBar } from '@/components/navigation/signed-out-bar';
 import { contentId, SkipLink } from '@/components/navigation/skip-link';
 import { buttonClass } from '@/components/ui/button-class';
+import { findHousehold } from '@/lib/auth/page-gate';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('problems');
@@ -14,11 +15,11 @@ export async function generateMetadata(): Promise<Metadata> {
 export default async function NotFound() {
   // Made per request like every page, so that it carries the nonce.
   await connection();
-  const t = await getTranslations('problems');
+  const [t, visit] = await Promise.all([getTranslations('problems'), findHousehold()]);
   return (
     <>
       <SkipLink />
-      <SignedOutBar />
+      <SignedOutBar signedIn={visit !== null} />
       <main id={contentId} tabIndex={-1} className="mx-auto max-w-sheet px-margin py-12 outline-none">
         <h1 className="font-display-soft text-headline">{t('notFoundTitle')}</h1>
         <p className="mt-2 mb-6 max-w-reading text-body">{t('notFoundWords')}</p>

@@ -28,8 +28,8 @@ export function BarLink({ href, children, loud = false, exact = false }: BarLink
     >
       <span
         className={classNames(
-          'inline-flex items-center gap-1.5 border-b-due py-1.5',
-          current ? 'border-ink' : 'border-transparent',
+          'inline-flex items-center gap-1.5 border-y-due border-t-transparent py-1.5',
+          current ? 'border-b-ink' : 'border-b-transparent',
         )}
       >
         {children}

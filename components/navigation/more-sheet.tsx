@@ -33,7 +33,7 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
             {t('youAre', { name: frame.you.name, role: t(`role.${frame.you.role}`) })}
           </span>
         </span>
-        <SignOutButton />
+        <SignOutButton problem="above" />
       </div>
     </Sheet>
   );

@@ -3,34 +3,39 @@
 import { useMutation } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
 import { classNames } from '@/components/ui/class-names';
-import { useToast } from '@/components/ui/toast';
+import { textLink } from '@/components/ui/text-link';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { leaveFor, signOut } from '@/lib/client/session';
 
-export function SignOutButton({ className }: { className?: string }) {
+/** At the foot of a phone the words of a problem stand above the button, in a bar below it. */
+export type SignOutButtonProps = { className?: string; problem?: 'above' | 'below' };
+
+export function SignOutButton({ className, problem = 'below' }: SignOutButtonProps) {
   const t = useTranslations('navigation');
   const words = useProblemWords();
-  const showToast = useToast();
-  const leaving = useMutation({
-    mutationFn: signOut,
-    onSuccess: () => leaveFor('/'),
-    onError: (problem) => showToast({ title: words(problem) }),
-  });
+  const leaving = useMutation({ mutationFn: signOut, onSuccess: () => leaveFor('/') });
   // Once it went through, the next page is on its way: the button stays busy until then.
   const busy = leaving.isPending || leaving.isSuccess;
   return (
-    <button
-      type="button"
-      aria-disabled={busy || undefined}
-      className={classNames(
-        'min-h-11 cursor-pointer whitespace-nowrap underline decoration-1 underline-offset-[3px]',
-        className,
-      )}
-      onClick={() => {
-        if (!busy) leaving.mutate();
-      }}
-    >
-      {busy ? t('signingOut') : t('signOut')}
-    </button>
+    <span className={classNames('relative', className)}>
+      <button
+        type="button"
+        aria-disabled={busy || undefined}
+        className={`min-h-11 cursor-pointer whitespace-nowrap ${textLink}`}
+        onClick={() => {
+          if (!busy) leaving.mutate();
+        }}
+      >
+        {busy ? t('signingOut') : t('signOut')}
+      </button>
+      {leaving.isError ? (
+        <span
+          role="alert"
+          className={`absolute right-0 z-10 w-64 border-due border-ink bg-paper-lift p-3 text-small font-emphasis text-terra-ink ${problem === 'above' ? 'bottom-full' : 'top-full'}`}
+        >
+          {words(leaving.error)}
+        </span>
+      ) : null}
+    </span>
   );
 }

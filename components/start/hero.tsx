@@ -11,8 +11,9 @@ export function Hero() {
     <div className="grid md:border-t md:border-rule lg:grid-cols-[1fr_326px]">
       <div className="pt-5.5 lg:py-11 lg:pr-10">
         <h1 className="font-display-soft text-landing">
-          <span className="block">{t('headline')}</span>
-          <span className="block">{t('headlineSecond')}</span>
+          {t('headline')}
+          <br />
+          {t('headlineSecond')}
         </h1>
         <p className="mt-3 max-w-[880px] font-display text-sentence text-pretty md:mt-4.5">{t('sentence')}</p>
       </div>

@@ -11,7 +11,10 @@ export type ToastMessage = {
   stays?: number;
 };
 
-/** Short news that needs no answer, such as "Ticked", with a way back. Errors at a field stand at the field. */
+/**
+ * Short news that needs no answer, such as "Ticked", with a way back. Errors at a field stand at the field. It stands
+ * round the pages that use it, not round all of them: it is 26 kB.
+ */
 export function ToastProvider({ children, closeLabel }: { children: React.ReactNode; closeLabel: string }) {
   return (
     <Toast.Provider timeout={8000}>

@@ -10,7 +10,7 @@ export function Surroundings({ children }: { children: React.ReactNode }) {
   return (
     <NextIntlClientProvider locale="en" timeZone="UTC" messages={catalogue} onError={fail}>
       <QueryClientProvider client={client}>
-        <UiProvider closeLabel="Close">{children}</UiProvider>
+        <UiProvider>{children}</UiProvider>
       </QueryClientProvider>
     </NextIntlClientProvider>
   );

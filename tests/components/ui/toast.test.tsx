@@ -1,8 +1,7 @@
 import { render, screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { expect, it, vi } from 'vitest';
-import { useToast } from '@/components/ui/toast';
-import { UiProvider } from '@/components/ui/ui-provider';
+import { ToastProvider, useToast } from '@/components/ui/toast';
 
 it('tells the news with a way back, and goes when it is closed', async () => {
   const undo = vi.fn();
@@ -20,9 +19,9 @@ it('tells the news with a way back, and goes when it is closed', async () => {
     );
   }
   render(
-    <UiProvider closeLabel="Close">
+    <ToastProvider closeLabel="Close">
       <Tick />
-    </UiProvider>,
+    </ToastProvider>,
   );
   await userEvent.click(screen.getByRole('button', { name: 'Tick' }));
   expect((await screen.findAllByText('Ticked')).length).toBeGreaterThan(0);
