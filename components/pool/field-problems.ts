@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import type { FieldProblem } from '@/lib/errors';
+import { AppError, type FieldProblem } from '@/lib/errors';
 import { checkInput } from '@/lib/schemas/problems';
 
 /** The words for each field that is not fine yet, by its path in the answers ("outline.length"). */
@@ -12,10 +12,16 @@ export function checkAnswers<Schema extends z.ZodType>(
   schema: Schema,
   answers: unknown,
 ): { answers: z.output<Schema>; problems: FieldProblems } | { answers: undefined; problems: FieldProblems } {
-  const checked = checkInput(schema, answers);
-  return checked.sound
-    ? { answers: checked.value, problems: noProblems }
-    : { answers: undefined, problems: byField(checked.problems) };
+  try {
+    const checked = checkInput(schema, answers);
+    return checked.sound
+      ? { answers: checked.value, problems: noProblems }
+      : { answers: undefined, problems: byField(checked.problems) };
+  } catch (error) {
+    // Measures that make no pool are refused by the geometry itself, with a problem at each of them.
+    if (error instanceof AppError) return { answers: undefined, problems: byField(error.problems) };
+    throw error;
+  }
 }
 
 function byField(problems: readonly FieldProblem[]): FieldProblems {

@@ -53,7 +53,7 @@ export function MeasureFields({
           value={draft[field]}
           onChange={(event) => change({ [field]: event.target.value })}
           unit={unitName(lengthUnit(draft.system))}
-          problem={problems[path]}
+          problem={problems[path] ?? problems[field]}
         />
       ))}
     </div>

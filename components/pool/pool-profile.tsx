@@ -10,7 +10,7 @@ import { useHydrated } from '@/components/ui/use-hydrated';
 import { setupOptions } from '@/lib/client/pools';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { shelfOptions } from '@/lib/client/shelf-products';
-import type { SetupState } from '@/lib/schemas/pool-profile';
+import type { SetupState, SetupStep } from '@/lib/schemas/pool-profile';
 import { ProfileRows } from './profile-rows';
 import { SavedDrawing } from './saved-drawing';
 import { type PoolHousehold, PoolSettingProvider, usePoolSetting } from './setting';
@@ -52,6 +52,15 @@ function Profile({ state }: { state: SetupState }) {
   const parts = useProfileRows({ profile, shelf });
   const drawing = profile.size?.how === 'measured' ? profile.size : undefined;
   const volume = profile.volume === null ? undefined : volumes.inSystem(profile.volume, system);
+  const part = ({ step, rows }: (typeof parts)[number]) => (
+    <ProfileRows
+      key={step}
+      step={step}
+      title={t(`profile.part.${step}`)}
+      rows={rows}
+      change={mayChange ? t('profile.change') : undefined}
+    />
+  );
   return (
     <div className="mx-auto max-w-sheet pb-8">
       <div className="px-margin pt-3 pb-3.5 md:border-t md:border-rule">
@@ -64,23 +73,21 @@ function Profile({ state }: { state: SetupState }) {
       <div className="grid gap-x-7.5 px-margin pt-2 lg:grid-cols-[minmax(0,1fr)_420px]">
         <div className="min-w-0 pt-2">
           {drawing === undefined ? (
-            <p className="border border-dashed border-rule-2 p-6 text-body text-ink-2">{t('profile.notDrawn')}</p>
+            <p className="mb-4 border border-dashed border-rule-2 p-6 text-body text-ink-2">{t('profile.notDrawn')}</p>
           ) : (
             <SavedDrawing size={drawing} />
           )}
+          <div className="grid gap-x-7.5 border-t border-rule sm:grid-cols-2">{parts.filter(isWide).map(part)}</div>
         </div>
-        <div className="min-w-0">
-          {parts.map(({ step, rows }) => (
-            <ProfileRows
-              key={step}
-              step={step}
-              title={t(`profile.part.${step}`)}
-              rows={rows}
-              change={mayChange ? t('profile.change') : undefined}
-            />
-          ))}
+        <div className="min-w-0 border-t border-rule lg:border-t-0">
+          {parts.filter((one) => !isWide(one)).map(part)}
         </div>
       </div>
     </div>
   );
+}
+
+/** Stands below the drawing, where there is room for two columns. */
+function isWide({ step }: { step: SetupStep }): boolean {
+  return step === 'water' || step === 'shelf';
 }

@@ -162,7 +162,7 @@ function strengthOf({ substance, strength, basis }: ProductDraft): number | unde
   const printed = parseDecimal(strength);
   if (printed === undefined || substance === null || substance === 'other') return printed;
   if (factsOf(substance).strength === 'liquid-chlorine')
-    return basis === null ? undefined : Math.round(tradePercentOf(printed, basis) * 100) / 100;
+    return basis === null ? printed : Math.round(tradePercentOf(printed, basis) * 100) / 100;
   const strongest = strongestOf(substance);
   return printed > strongest && printed <= strongest + roundingOfLabels ? strongest : printed;
 }

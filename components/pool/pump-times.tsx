@@ -1,6 +1,6 @@
 'use client';
 
-import { Plus } from 'lucide-react';
+import { Plus, X } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
 import { hoursText } from './sun-hours';
@@ -46,10 +46,11 @@ export function PumpTimes({ pump, onChange }: { pump: Times; onChange: (pump: Ti
           </div>
           <Button
             variant="quiet"
+            className="-mr-1.5 size-11"
             aria-label={t('remove', { number: index + 1 })}
             onClick={() => onChange(pump.filter((_, at) => at !== index))}
           >
-            {t('removeShort')}
+            <X aria-hidden="true" className="size-5 shrink-0" />
           </Button>
         </div>
       ))}

@@ -94,14 +94,16 @@ export function ScopeStep({ state }: { state: SetupState }) {
       <InlineStop className="border-t border-ink py-3">
         {t.rich('stop', { stop: (words) => <StopWord>{words}</StopWord> })}
       </InlineStop>
-      <Segments
-        className="border-t border-rule pt-3 pb-4"
-        label={t('kind.question')}
-        choices={poolKinds.map((kind) => ({ value: kind, label: t(`kind.${kind}`) }))}
-        value={draft.kind}
-        onChange={(kind) => change({ kind })}
-        problem={problems.kind}
-      />
+      <div className="border-t border-rule pt-3 pb-4">
+        <Segments
+          label={t('kind.question')}
+          choices={poolKinds.map((kind) => ({ value: kind, label: t(`kind.${kind}`) }))}
+          value={draft.kind}
+          onChange={(kind) => change({ kind })}
+          hint={t('kind.note')}
+          problem={problems.kind}
+        />
+      </div>
       <fieldset className="border-t border-rule pt-3 pb-2">
         <legend className="sr-only">{t('limits')}</legend>
         <p aria-hidden="true" className="text-label font-strong">

@@ -29,7 +29,7 @@ export function ShelfList({
         {products.map((product) => (
           <li
             key={product.id}
-            className="grid grid-cols-[30px_1fr_auto] items-center gap-x-2 border-t border-rule py-2.5 first:border-t-0"
+            className="grid grid-cols-[30px_1fr_auto] items-center gap-x-2 border-t border-rule pt-2.5 pb-1 first:border-t-0"
           >
             <IngredientMark substance={product.substance} form={product.form} />
             <span className="min-w-0">
@@ -39,27 +39,25 @@ export function ShelfList({
                 <span className="block text-small font-emphasis text-ochre-ink">{t('noWay')}</span>
               ) : null}
             </span>
-            <span className="text-right">
-              <span className="block font-display text-name font-headline">{words.left(product)}</span>
-              {onEdit === undefined ? null : (
-                <span className="flex justify-end">
-                  <Button
-                    variant="quiet"
-                    onClick={() => onEdit(product)}
-                    aria-label={t('changeOne', { name: words.name(product) })}
-                  >
-                    {t('change')}
-                  </Button>
-                  <Button
-                    variant="quiet"
-                    onClick={() => setLeaving(product)}
-                    aria-label={t('removeOne', { name: words.name(product) })}
-                  >
-                    {t('remove')}
-                  </Button>
-                </span>
-              )}
-            </span>
+            <span className="font-display text-name font-headline">{words.left(product)}</span>
+            {onEdit === undefined ? null : (
+              <span className="col-start-2 -ml-1.5 flex gap-3">
+                <Button
+                  variant="quiet"
+                  onClick={() => onEdit(product)}
+                  aria-label={t('changeOne', { name: words.name(product) })}
+                >
+                  {t('change')}
+                </Button>
+                <Button
+                  variant="quiet"
+                  onClick={() => setLeaving(product)}
+                  aria-label={t('removeOne', { name: words.name(product) })}
+                >
+                  {t('remove')}
+                </Button>
+              </span>
+            )}
           </li>
         ))}
       </ul>

@@ -41,7 +41,10 @@ export function ShelfStep() {
       step="shelf"
       title={t('title')}
       lead={t('lead')}
-      result={{ figure: t('count', { count: products.length }), words: t('result', { usable }) }}
+      result={{
+        figure: t('count', { count: products.length }),
+        words: t('result', { usable, count: products.length }),
+      }}
       next={t('next')}
       onNext={() => send({ step: 'shelf' })}
       busy={busy}

@@ -43,7 +43,9 @@ export function SizeStep({ state }: { state: SetupState }) {
 
   const { answers, problems: all } = checkAnswers(poolSizeSchema, sizeAnswersOf(draft));
   const question = unitQuestionOf(draft);
-  const water = answers && waterOf(answers);
+  // Shown as soon as it is known, also while it is not said yet whether it is a guess.
+  const known = checkAnswers(poolSizeSchema, sizeAnswersOf({ ...draft, sure: draft.sure ?? false })).answers;
+  const water = known && waterOf(known);
   // "Yes, that is the unit" about what no pool can hold is answered at once, not only on Next.
   const problems: FieldProblems = tried
     ? all

@@ -10,56 +10,75 @@ import type { SetupStep } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';
 import { addressOf, rulerPart, rulerParts, stepBefore } from './step-order';
 
-/** Where one is and the way back; on a phone with the ruler of five parts. */
+/** Where one is and the way back. */
 export function StepHeader({ step }: { step: SetupStep }) {
+  const { place } = usePoolSetting();
+  return place === 'profile' ? <BackToProfile /> : <FirstRunHeader step={step} />;
+}
+
+/** In the first run there is nothing else on the page; on a phone the ruler of five parts stands below. */
+function FirstRunHeader({ step }: { step: SetupStep }) {
   const t = useTranslations('first-run');
   const common = useTranslations('common');
-  const { place, name } = usePoolSetting();
+  const { name } = usePoolSetting();
   const part = rulerPart[step];
   const before = stepBefore(step);
-  const back = place === 'profile' ? '/pool' : before === undefined ? '/' : addressOf(before, 'first-run');
   const first = part === 0;
-  const where = place === 'profile' ? t('correcting') : first ? t('beforeYouStart') : t('setUp');
   const count = first ? t('scopeCount') : t('partOf', { part, parts: rulerParts });
   return (
     <header>
       <div className="grid min-h-14.5 grid-cols-[48px_1fr_auto] items-center pr-2 pl-1 md:hidden">
-        <Link href={back} aria-label={t('back')} className="flex size-12 items-center justify-center">
+        <Link
+          href={before === undefined ? '/' : addressOf(before, 'first-run')}
+          aria-label={t('back')}
+          className="flex size-12 items-center justify-center"
+        >
           <ArrowLeft aria-hidden="true" className="size-5.5" />
         </Link>
-        <span className="truncate font-display text-name">{where}</span>
+        <span className="truncate font-display text-name">{first ? t('beforeYouStart') : t('setUp')}</span>
         <span className="flex items-center gap-1">
-          {place === 'profile' ? null : <span className="text-small text-ink-2">{count}</span>}
+          <span className="text-small text-ink-2">{count}</span>
           <SirenLink />
         </span>
       </div>
-      {place === 'profile' ? null : (
-        <div className="px-margin md:hidden">
-          <ProgressRuler
-            parts={rulerParts}
-            current={part}
-            label={first ? t('scopeCount') : t('progress', { part, parts: rulerParts })}
-          />
-        </div>
-      )}
+      <div className="px-margin md:hidden">
+        <ProgressRuler
+          parts={rulerParts}
+          current={part}
+          label={first ? t('scopeCount') : t('progress', { part, parts: rulerParts })}
+        />
+      </div>
       <div className="hidden h-13.5 items-center gap-6.5 px-margin md:flex">
         <span className="inline-flex items-center gap-2.5 font-display text-brand">
           <BrandMark />
           {common('productName')}
         </span>
-        <span className="min-w-0 truncate text-[15px] leading-5 text-ink-2">
-          {place === 'profile' ? t('correctingPool', { name }) : t('settingUp', { name })}
-        </span>
+        <span className="min-w-0 truncate text-[15px] leading-5 text-ink-2">{t('settingUp', { name })}</span>
         <span className="ml-auto flex items-center gap-3">
           <SirenLink />
           <Link
-            href={place === 'profile' ? '/pool' : '/'}
+            href="/"
             className="inline-flex min-h-11 items-center text-[15px] leading-5 underline decoration-1 underline-offset-[3px]"
           >
-            {place === 'profile' ? t('leaveProfile') : t('goOnLater')}
+            {t('goOnLater')}
           </Link>
         </span>
       </div>
     </header>
+  );
+}
+
+function BackToProfile() {
+  const t = useTranslations('first-run');
+  return (
+    <p className="px-margin">
+      <Link
+        href="/pool"
+        className="inline-flex min-h-12 items-center gap-2 text-body underline decoration-1 underline-offset-[3px]"
+      >
+        <ArrowLeft aria-hidden="true" className="size-5" />
+        {t('leaveProfile')}
+      </Link>
+    </p>
   );
 }

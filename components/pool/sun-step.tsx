@@ -64,15 +64,16 @@ export function SunStep({ state }: { state: SetupState }) {
         <SunHours day={day} span={span} onChange={(next) => change({ span: next })} />
         <p className="mt-1 text-small text-ink-2">{day === undefined ? t('sunNeedsPlace') : t('sunNote')}</p>
       </fieldset>
-      <Segments
-        className="mt-4 border-t border-rule pt-3"
-        label={t('cover.label')}
-        choices={covers.map((cover) => ({ value: cover, label: t(`cover.${cover}`) }))}
-        value={draft.cover}
-        onChange={(cover) => change({ cover })}
-        hint={t('cover.note')}
-        problem={problems.cover}
-      />
+      <div className="mt-4 border-t border-rule pt-3">
+        <Segments
+          label={t('cover.label')}
+          choices={covers.map((cover) => ({ value: cover, label: t(`cover.${cover}`) }))}
+          value={draft.cover}
+          onChange={(cover) => change({ cover })}
+          hint={t('cover.note')}
+          problem={problems.cover}
+        />
+      </div>
       <div className="mt-4 border-t border-rule pt-1.5">
         <TickBox
           name="waterFeatures"

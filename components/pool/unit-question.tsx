@@ -51,7 +51,7 @@ export function UnitQuestion({
             <Button variant="primary" wide onClick={() => onLikelier(likelier.unit)}>
               {t('yes', facts)}
             </Button>
-            <Button wide onClick={onConfirm} className="bg-paper-lift">
+            <Button wide onClick={onConfirm} className="bg-paper-lift!">
               {t('no', facts)}
             </Button>
           </>

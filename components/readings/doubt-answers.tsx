@@ -45,11 +45,11 @@ export function DoubtAnswers({ doubt, onLikely, onConfirm, onClear }: DoubtAnswe
       <div className="mt-2 flex flex-wrap gap-2 pl-7">
         {offer}
         {doubt.kind === 'unlikely' ? (
-          <Button className="bg-paper-lift" onClick={onConfirm}>
+          <Button className="bg-paper-lift!" onClick={onConfirm}>
             {t('confirm', { value: words.figure(doubt.value, doubt.quantity) })}
           </Button>
         ) : (
-          <Button className="bg-paper-lift" onClick={onClear}>
+          <Button className="bg-paper-lift!" onClick={onClear}>
             {t('leaveTotal')}
           </Button>
         )}

@@ -49,7 +49,7 @@ export function FalseZero({
                 key={value}
                 variant={answer === value ? 'primary' : 'outline'}
                 aria-pressed={answer === value}
-                className={answer === value ? '' : 'bg-paper-lift'}
+                className={answer === value ? '' : 'bg-paper-lift!'}
                 onClick={() => onAnswer(answer === value ? null : value)}
               >
                 {t(`answer.${value}`)}

@@ -1,7 +1,7 @@
 import { classNames } from '@/components/ui/class-names';
 
 type Props = Omit<React.ComponentProps<'text'>, 'className'> & {
-  weight?: 'plain' | 'figure' | 'name' | 'title';
+  weight?: keyof typeof weights;
   /** What lies behind the words, so that no line runs through them. */
   ground?: keyof typeof grounds;
   anchor?: 'start' | 'middle' | 'end';
@@ -11,6 +11,7 @@ const weights = {
   plain: 'fill-ink-2 text-chart',
   figure: 'fill-ink text-chart font-strong',
   name: 'fill-teal-ink font-display text-name font-headline',
+  smallName: 'fill-teal-ink text-chart font-strong',
   title: 'fill-ink font-display text-name',
 };
 

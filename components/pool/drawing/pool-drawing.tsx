@@ -33,7 +33,8 @@ export function PoolDrawing({ pool, figures, label, words, onPull }: PoolDrawing
   const right = large ? 100 : 76;
   const top = large ? 64 : 46;
   const across = breadth(pool);
-  const scale = Math.min((width - left - right) / pool.length, (large ? 300 : 170) / across);
+  // Never less than can be seen, while the page is still finding its width.
+  const scale = Math.max(3, Math.min((width - left - right) / pool.length, (large ? 300 : 170) / across));
   const w = pool.length * scale;
   const h = across * scale;
   const x = left + Math.max(0, (width - left - right - w) / 2);
@@ -97,12 +98,12 @@ export function PoolDrawing({ pool, figures, label, words, onPull }: PoolDrawing
             bare={!large}
           />
         )}
-        {words === undefined ? null : (
+        {words === undefined || pool.shallow * scale < 20 ? null : (
           <DrawingText
             x={px(x + w / 2)}
-            y={px(surface + Math.min(34, (pool.shallow * scale) / 2 + 10))}
+            y={px(surface + Math.min(34, (pool.shallow * scale) / 2 + (large ? 10 : 7)))}
             anchor="middle"
-            weight="name"
+            weight={large ? 'name' : 'smallName'}
             ground="water"
           >
             {words}
