@@ -67,7 +67,7 @@ export function SunHours({
               <path
                 key={hour}
                 d={`M${px(place(hour + 0.125))} ${height}v${px((-weight / strongest) * (height - 16))}`}
-                className="stroke-ink"
+                className="fill-none stroke-ink"
                 strokeWidth={lit ? 5 : 1.4}
                 opacity={lit ? 0.82 : 0.6}
               />
