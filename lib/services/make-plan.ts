@@ -7,9 +7,9 @@ import type { WeekSnapshot } from './week-snapshot';
 
 const MINUTE = 60_000;
 
-/** Name of what a plan is made from: the engine's version and the whole snapshot. */
-export function inputHashOf(snapshot: WeekSnapshot): string {
-  return identityOf({ engineVersion: ENGINE_VERSION, snapshot });
+/** Name of what a plan is made from: the engine's version and the snapshot; a row's own id makes no difference to it. */
+export function inputHashOf({ readingId: _id, ...inputs }: WeekSnapshot): string {
+  return identityOf({ engineVersion: ENGINE_VERSION, inputs });
 }
 
 /** The plan for a snapshot, made in the engine's thread. Rejects as `Engine.run` does. */
