@@ -4,38 +4,36 @@ import type { Alternative } from '@/lib/schemas/plan';
 import { lowestLevel } from '@/lib/standards/limits';
 import type { PlanContext } from './context';
 import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
-import { emptyDraft, visitsOf } from './draft';
+import { type Choice, emptyDraft, visitsOf } from './draft';
 import { plannedDoses } from './planned-doses';
 import type { Options } from './products';
 import type { Response } from './response';
-import { searchPlan, type SearchSpace } from './search';
-
-const MEMBERS = 16;
+import { quickPlan } from './search';
 
 /** The best week with each form alone: what the household gives up or gains against the plan's mix. */
 export function alternativesOf(
   context: PlanContext,
   response: Response,
-  space: Pick<SearchSpace, 'evenings' | 'visits'>,
+  choice: Choice,
   options: Options,
 ): Alternative[] {
+  const without: Choice = { ...choice, tablets: null };
   const only = (kind: Alternative['kind']): Evaluated | null => {
-    if (kind === 'tablets')
-      return options.tablets
-        ? searchPlan(context, response, { ...space, tablets: options.tablets, fast: [null], rounds: 0 })
-        : null;
+    if (kind === 'tablets') return options.tablets ? quickPlan(context, response, { choice, fast: [null] }) : null;
     const fast = options.fast.filter(({ form }) => form === kind);
-    return fast.length > 0 ? searchPlan(context, response, { ...space, tablets: null, fast, rounds: 0 }) : null;
+    return fast.length > 0 ? quickPlan(context, response, { choice: without, fast }) : null;
   };
   return (['tablets', 'granular', 'liquid'] as const).map((kind) => {
     const found = only(kind);
-    return alternativeOf(kind, found ?? nothing(context, space), found !== null, context);
+    const nothing = () =>
+      evaluate(
+        emptyDraft(without),
+        without,
+        context,
+        context.searchMembers.map(({ member }) => member),
+      );
+    return alternativeOf(kind, found ?? nothing(), found !== null, context);
   });
-}
-
-function nothing(context: PlanContext, space: Pick<SearchSpace, 'evenings' | 'visits'>): Evaluated {
-  const choice = { ...space, tablets: null, fast: null };
-  return evaluate(emptyDraft(choice), choice, context, context.members.slice(0, MEMBERS));
 }
 
 function alternativeOf(
@@ -68,7 +66,7 @@ function alternativeOf(
 }
 
 /** Mean over the days of the difference between highest and lowest free chlorine [mg/L]. */
-function swingOf(freeChlorine: readonly number[], { hours, scenario }: PlanContext): number {
+function swingOf(freeChlorine: ArrayLike<number>, { hours, scenario }: PlanContext): number {
   const days = new Map<string, { low: number; high: number }>();
   hours.forEach((hour, index) => {
     const day = dayOf(hour, scenario.pool.timeZone);

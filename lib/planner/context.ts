@@ -1,14 +1,19 @@
 import { dayOf } from '@/lib/calendar/household-day';
 import { intervalsOfDay, parseInstant } from '@/lib/calendar/wall-time';
-import { analysisAt, hoursFrom, settingOf } from '@/lib/projection';
+import { hoursFrom, settingOf } from '@/lib/projection';
 import { ensembleOf, type Member } from '@/lib/projection/ensemble';
 import type { WeekDose } from '@/lib/projection/events';
 import { type Forcing, prepareForcing } from '@/lib/projection/forcing';
-import { type CourseSetting, integrateWeek } from '@/lib/projection/integrate';
+import { type Course, integrateWeek } from '@/lib/projection/integrate';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { ledgerOf } from '@/lib/chemistry';
 import { weekDoseOf } from './given-doses';
 import { type StartingWater, startingWater } from './starting-water';
+
+const SEARCH_MEMBERS = 12;
+
+/** A member with its week in which nothing more goes in. */
+export type Undosed = { member: Member; undosed: Course };
 
 /** What every candidate plan of one scenario shares. */
 export type PlanContext = {
@@ -20,9 +25,10 @@ export type PlanContext = {
   /** The pool with every parameter at its median, and the ensemble around it. */
   median: Member;
   members: readonly Member[];
-  setting: CourseSetting;
-  /** The end of a median week in which nothing more goes in: what a plan's own drift is measured from. */
-  undosedEnd: { cyanuricAcid: number; calciumHardness: number };
+  /** Those that a search projects: they stand for all in how fast they lose chlorine. */
+  searchMembers: readonly Undosed[];
+  /** The median's week in which nothing more goes in: what a plan's own drift is measured from. */
+  undosed: Course;
   hours: readonly number[];
   /** Whether somebody may swim at each of the hours. */
   swimHour: readonly boolean[];
@@ -46,7 +52,8 @@ export function contextOf(scenario: Scenario): PlanContext {
   const hours = hoursFrom(start.takenAt);
   const swimHour = swimHours(scenario, hours);
   const median: Member = { start: { ledger: ledgerOf(start.water), loads: start.loads }, setting };
-  const undosed = integrateWeek(forcing, median.start, given, setting);
+  const members = ensembleOf(start.water, start.errors, start.loads, setting);
+  const undosed = (member: Member) => integrateWeek(forcing, member.start, given, member.setting);
   return {
     scenario,
     now: scenario.now === undefined ? start.takenAt : Math.max(start.takenAt, parseInstant(scenario.now)!),
@@ -54,14 +61,25 @@ export function contextOf(scenario: Scenario): PlanContext {
     given,
     forcing,
     median,
-    undosedEnd: analysisAt(undosed.end, undosed.endPH),
-    members: ensembleOf(start.water, start.errors, start.loads, setting),
-    setting,
+    members,
+    searchMembers: spread(members.map((member) => ({ member, undosed: undosed(member) }))),
+    undosed: undosed(median),
     hours,
     swimHour,
     swimCeiling: Float64Array.from(swimHour, (swims) => (swims ? pool.swimLimit : Infinity)),
     stabilizedProductUsed: given.some((dose) => dose.kind === 'tablets') || start.loads.length > 0,
   };
+}
+
+/** A few members that stand for all: evenly spread over their order by the chlorine that is left to them. */
+function spread(all: readonly Undosed[]): Undosed[] {
+  const ordered = all.map((each) => ({ each, mean: meanChlorine(each.undosed) })).sort((a, b) => a.mean - b.mean);
+  const place = (index: number) => Math.floor(((index + 0.5) * ordered.length) / SEARCH_MEMBERS);
+  return Array.from({ length: SEARCH_MEMBERS }, (_, index) => ordered[place(index)]!.each);
+}
+
+function meanChlorine({ hourly }: Course): number {
+  return hourly.freeChlorine.reduce((sum, level) => sum + level, 0) / hourly.freeChlorine.length;
 }
 
 /** Whether each instant [ms] lies in the household's swim hours, both ends included. */

@@ -1,3 +1,4 @@
+import { CYANURIC_ACID_MILLIGRAMS_PER_MOLE, HARDNESS_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import { type Course, integrateWeek } from '@/lib/projection/integrate';
 import type { Member } from '@/lib/projection/ensemble';
 import { seriesOf } from '@/lib/projection';
@@ -28,8 +29,7 @@ function costOf(draft: Draft, choice: Choice, median: Course, courses: readonly 
   const water = seriesOf(median);
   const stabilized = stabilizedIn(draft, context);
   const lowest = Float64Array.from(water.cyanuricAcid, (stabilizer) => lowestLevel(stabilizer, stabilized));
-  const chlorineOf = (course: Course) => Float64Array.from(course.ledgers, ({ freeChlorine }) => freeChlorine);
-  const risk = riskOf(courses.map(chlorineOf), chlorineOf(median), lowest, context);
+  const risk = riskOf(levelsOf([median, ...courses]), lowest, context);
   const first = context.start.water;
   const cost = {
     money: preferences.money * moneyOf(draft, choice),
@@ -47,53 +47,55 @@ export function stabilizedIn(draft: Draft, context: PlanContext): boolean {
   return context.stabilizedProductUsed || draft.tablets > 0;
 }
 
-export function moneyOf(draft: Draft, { tablets, fast }: Choice): number {
-  const measures = draft.measures.reduce((sum, each) => sum + each, 0);
-  return draft.tablets * (tablets?.price ?? 0) + measures * (fast?.measurePrice ?? 0);
+export function moneyOf({ tablets, fast, measures }: Draft, choice: Choice): number {
+  const count = measures.reduce((sum, each) => sum + each, 0);
+  return tablets * (choice.tablets?.price ?? 0) + count * (fast?.measurePrice ?? 0);
+}
+
+/** Free chlorine of courses [mg/L], hour by hour, the courses side by side: [hour * courses + course]. */
+export function levelsOf(courses: readonly Course[]): Float64Array {
+  const levels = new Float64Array((courses[0]?.pH.length ?? 0) * courses.length);
+  courses.forEach(({ hourly }, course) =>
+    hourly.freeChlorine.forEach((level, hour) => (levels[hour * courses.length + course] = level)),
+  );
+  return levels;
 }
 
 /**
- * Weighted shortfall and excess of rows of free chlorine, one for each member, and of the median.
+ * Weighted shortfall and excess of the median, which comes first, and of the members after it, laid out as by
+ * {@link levelsOf}: expected over the members, and again for the median.
  *
  * @param lowest lowest level at each hour [mg/L]
  */
 export function riskOf(
-  rows: readonly Float64Array[],
-  median: Float64Array,
+  levels: Float64Array,
   lowest: Float64Array,
   { swimCeiling, swimHour }: Pick<PlanContext, 'swimCeiling' | 'swimHour'>,
 ): { shortfall: number; excess: number } {
+  const courses = levels.length / lowest.length;
+  const each = 1 / Math.max(1, courses - 1);
+  const maximum = limits.freeChlorineMaximum.value;
   const risk = { shortfall: 0, excess: 0 };
-  for (const row of rows)
-    addRisk(risk, row, lowest, swimCeiling, weights.shortfall / rows.length, weights.excess / rows.length);
-  addRisk(risk, median, lowest, swimCeiling, weights.medianShortfall, weights.medianExcess);
-  for (let hour = 0; hour < median.length; hour++) {
-    if (!swimHour[hour]) continue;
-    if (median[hour]! < lowest[hour]!) risk.shortfall += weights.closedSwimHour;
-    else if (median[hour]! > swimCeiling[hour]!) risk.excess += weights.closedSwimHour;
+  for (let hour = 1; hour < lowest.length; hour++) {
+    const [least, most] = [lowest[hour]!, swimCeiling[hour]!];
+    let under = 0;
+    let over = 0;
+    for (let at = hour * courses + 1, end = (hour + 1) * courses; at < end; at++) {
+      const level = levels[at]!;
+      if (level < least) under += least - level;
+      else if (level > most) over += level - most;
+      if (level > maximum) over += weights.overMaximum * (level - maximum);
+    }
+    risk.shortfall += weights.shortfall * each * under;
+    risk.excess += weights.excess * each * over;
+
+    const median = levels[hour * courses]!;
+    const closed = swimHour[hour] ? weights.closedSwimHour : 0;
+    if (median < least) risk.shortfall += weights.medianShortfall * (least - median) + closed;
+    else if (median > most) risk.excess += weights.medianExcess * (median - most) + closed;
+    if (median > maximum) risk.excess += weights.medianExcess * weights.overMaximum * (median - maximum);
   }
   return risk;
-}
-
-function addRisk(
-  risk: { shortfall: number; excess: number },
-  row: Float64Array,
-  lowest: Float64Array,
-  ceiling: Float64Array,
-  under: number,
-  over: number,
-): void {
-  const maximum = limits.freeChlorineMaximum.value;
-  let shortfall = 0;
-  let excess = 0;
-  for (let hour = 1; hour < row.length; hour++) {
-    const value = row[hour]!;
-    if (value < lowest[hour]!) shortfall += lowest[hour]! - value;
-    else if (value > ceiling[hour]!) excess += value - ceiling[hour]!;
-    if (value > maximum) excess += weights.overMaximum * (value - maximum);
-  }
-  risk.shortfall += under * shortfall;
-  risk.excess += over * excess;
 }
 
 /** How much of a rise leads away from a band: nothing up to two thirds of it (30 to 50 of 30 to 60), all from its end on. */
@@ -103,23 +105,17 @@ function awayFrom([low, high]: readonly [number, number], at: number): number {
 }
 
 /** Undoing the plan's own rise of stabilizer: the replacement water that takes it out again, as far as it leads away from the band. */
-export function stabilizerPrice(
-  to: number,
-  { scenario, undosedEnd }: Pick<PlanContext, 'scenario' | 'undosedEnd'>,
-): number {
+export function stabilizerPrice(to: number, { scenario, undosed }: Pick<PlanContext, 'scenario' | 'undosed'>): number {
   const { pool, driftPrices } = scenario;
-  const rise = Math.max(0, to - undosedEnd.cyanuricAcid);
+  const rise = Math.max(0, to - undosed.end.cyanurate * CYANURIC_ACID_MILLIGRAMS_PER_MOLE);
   const each = driftPrices.stabilizer ?? (weights.water * pool.volume) / Math.max(20, to);
   return rise * each * awayFrom(pool.stabilizerBand, to);
 }
 
 /** The same for hardness; fill water that is hard itself takes little out, so each step weighs more. */
-export function hardnessPrice(
-  to: number,
-  { scenario, undosedEnd }: Pick<PlanContext, 'scenario' | 'undosedEnd'>,
-): number {
+export function hardnessPrice(to: number, { scenario, undosed }: Pick<PlanContext, 'scenario' | 'undosed'>): number {
   const { pool, driftPrices } = scenario;
-  const rise = Math.max(0, to - undosedEnd.calciumHardness);
+  const rise = Math.max(0, to - undosed.end.calcium * HARDNESS_MILLIGRAMS_PER_MOLE);
   const fill = pool.fillWater.calciumHardness;
   const each = driftPrices.hardness ?? (weights.water * pool.volume) / Math.max(20, to - fill);
   return rise * each * awayFrom(surfaceRanges[pool.surface].calciumHardness, Math.max(to, fill));

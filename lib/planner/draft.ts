@@ -11,26 +11,25 @@ export type Draft = {
   measures: readonly number[];
 };
 
-/** What a search may use. */
-export type Choice = {
-  evenings: readonly Evening[];
-  tablets: TabletOption | null;
-  fast: FastOption | null;
-  visits: number;
-};
+/** What the drafts of a search may use: evenings, how many of them, and tablets. */
+export type Choice = { evenings: readonly Evening[]; visits: number; tablets: TabletOption | null };
 
-export const emptyDraft = (choice: Choice): Draft => ({
-  tablets: 0,
-  tabletEvening: 0,
-  fast: choice.fast,
-  measures: choice.evenings.map(() => 0),
-});
+export function emptyDraft({ evenings }: Choice): Draft {
+  return { tablets: 0, tabletEvening: 0, fast: null, measures: evenings.map(() => 0) };
+}
+
+/** Tells drafts apart. */
+export function keyOf({ tablets, tabletEvening, fast, measures }: Draft): string {
+  const evening = tablets > 0 ? tabletEvening : 0;
+  return `${tablets} ${evening} ${fast?.product.id ?? ''} ${measures.join()}`;
+}
 
 /** The doses of a draft as the projection takes them, after what was given. */
 export function weekDosesOf(draft: Draft, choice: Choice, context: PlanContext): WeekDose[] {
   const { volume } = context.scenario.pool;
   const doses: WeekDose[] = [...context.given];
-  const { tablets, fast } = choice;
+  const { tablets } = choice;
+  const { fast } = draft;
   if (draft.tablets > 0 && tablets) {
     const { tabletMass, strength } = tablets;
     const at = choice.evenings[draft.tabletEvening]!.at;

@@ -10,6 +10,7 @@ import { assertSafePlan } from './assert-safe-plan';
 import { checksOf } from './checks';
 import { contextOf, type PlanContext } from './context';
 import { evaluate, type Evaluated, stabilizedIn } from './cost';
+import type { Choice } from './draft';
 import { doseEvenings } from './evenings';
 import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
@@ -43,20 +44,15 @@ export function planWeek(scenario: Scenario): WeekPlan {
   const options = optionsOf(scenario, context.start);
   const evenings = doseEvenings(scenario.pool, context.start.takenAt, context.now);
   const visits = Math.max(0, scenario.preferences.visits - visitsGiven(context));
-  const response = responseOf(context, evenings, options.tablets);
-  const space = {
-    evenings,
-    visits,
-    tablets: options.tablets,
-    fast: options.fast.length > 0 ? options.fast : [null],
-    rounds: 4,
-  };
-  const found = searchPlan(context, response, space);
+  const choice: Choice = { evenings, visits, tablets: options.tablets };
+  const response = responseOf(context, choice);
+  const fast = options.fast.length > 0 ? options.fast : [null];
+  const found = searchPlan(context, response, { choice, fast });
   const { draft, halvedEvening } = halveFirstDose(found.draft, scenario);
-  const best = evaluate(draft, found.choice, context, context.members);
+  const best = draft === found.draft ? found : evaluate(draft, choice, context, context.members);
 
   const stabilized = stabilizedIn(draft, context);
-  const doses = plannedDoses(draft, best.choice, context, halvedEvening);
+  const doses = plannedDoses(draft, choice, context, halvedEvening);
   const projection = projectionOf(best.courses, best.median, context, stabilized);
   const broken = brokenLimits(projection, context, stabilized);
   const openShare = openSwimShare(projection, context);
@@ -67,11 +63,11 @@ export function planWeek(scenario: Scenario): WeekPlan {
     checks: checksOf(projection, doses, context, stabilized),
     endOfWeek: endOf(best),
     cost: best.cost,
-    alternatives: alternativesOf(context, response, { evenings, visits }, options),
+    alternatives: alternativesOf(context, response, choice, options),
     openSwimShare: openShare,
     broken,
     reasons: reasonsOf(doses, options, broken, openShare, context),
-    cautions: cautionsOf(doses, options, best.choice, context),
+    cautions: cautionsOf(doses, options, choice, context),
     needs: wanted,
   };
   assertSafePlan(scenario, plan);

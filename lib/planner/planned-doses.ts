@@ -13,11 +13,12 @@ const QUICK_RAISE = 2.5;
 /** The doses of a draft as a plan names them, in order of time; `halvedEvening` is that of a halved first dose. */
 export function plannedDoses(
   draft: Draft,
-  { tablets, fast, evenings }: Choice,
+  { tablets, evenings }: Choice,
   { scenario }: PlanContext,
   halvedEvening: number | null = null,
 ): PlannedDose[] {
   const { pool } = scenario;
+  const { fast } = draft;
   const isoAt = (evening: number) => toOffsetIso(evenings[evening]!.at, pool.timeZone);
   const doses: PlannedDose[] = [];
   if (draft.tablets > 0 && tablets) {

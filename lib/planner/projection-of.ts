@@ -22,11 +22,11 @@ export function projectionOf(
     pH,
     cyanuricAcid,
     median: {
-      freeChlorine: run.freeChlorine,
-      pH: run.pH,
-      cyanuricAcid: run.cyanuricAcid,
-      calciumHardness: run.calciumHardness,
-      totalAlkalinity: run.totalAlkalinity,
+      freeChlorine: Array.from(run.freeChlorine),
+      pH: Array.from(run.pH),
+      cyanuricAcid: Array.from(run.cyanuricAcid),
+      calciumHardness: Array.from(run.calciumHardness),
+      totalAlkalinity: Array.from(run.totalAlkalinity),
     },
   };
 }

@@ -1,180 +1,120 @@
 import type { PlanContext } from './context';
 import { evaluate, type Evaluated } from './cost';
-import { type Choice, type Draft, emptyDraft, visitsOf } from './draft';
-import type { FastOption, TabletOption } from './products';
-import type { Response } from './response';
+import { type Choice, type Draft, keyOf } from './draft';
+import { allowed, descend, fastMoves, mostMeasures, type Move, tabletMoves } from './moves';
+import type { FastOption } from './products';
+import { remember } from './remember';
+import type { Correction, Response } from './response';
+import { screen, type Screened } from './screen';
 
-const FINALISTS = 6;
-const FINALISTS_OF_ONE_START = 2;
-const FINALIST_MEMBERS = 16;
-const MOST_TABLET_COUNTS = 9;
-/** Up to so many fast evenings every choice of evenings is tried; more are added one by one. */
-const EVENINGS_TRIED_IN_FULL = 3;
-const FIRST_GUESS_RISE = 1.4;
+/** How many drafts of the screening are brought to where no single change helps, for each product. */
+const SKETCHES = 8;
+/** How many are projected in full: the best few, and the best with each count of tablets among the next. */
+const FINALISTS = 3;
+const MOST_FINALISTS = 6;
+/** How many changes of the best plan are projected in full in each round, and how many rounds there are at most. */
+const CHANGES = 3;
+const ROUNDS = 5;
 const IMPROVEMENT = 1e-6;
+/** Plans this near to the best are compared over the whole ensemble. */
+const NEAR = 1.03;
+const RIVALS = 3;
 
-/** What a search is free to choose. */
-export type SearchSpace = {
-  evenings: Choice['evenings'];
-  visits: number;
-  /** Null leaves the form out; a form that must be used is the only one given. */
-  tablets: TabletOption | null;
-  fast: readonly (FastOption | null)[];
-  /** How often a finalist is moved measure by measure to where no single change helps. */
-  rounds: number;
-};
-
-type Screened = { draft: Draft; choice: Choice; cost: number };
+/** The fast products that a search may use, cheapest first; null where there is none. */
+export type SearchSpace = { choice: Choice; fast: readonly (FastOption | null)[] };
 
 /**
- * The best plan found: for every count of tablets, evening to load them, choice of evenings and fast product the amounts
- * are brought to where no single change helps on the linear response; the best few are projected in full and moved measure
- * by measure. Deterministic; ties go to the plan found first, which has fewer tablets and earlier evenings.
+ * The best plan found, projected over the whole ensemble. Screening by the quick model with the cheapest fast product gives
+ * drafts for every count of tablets; each is brought to where no single change helps, for every product; the best few are
+ * projected in full. The quick model is then corrected to agree with the best of them and asked for changes that help, as
+ * long as one does in full. Deterministic; ties go to the draft found first, which has fewer tablets and earlier evenings.
  */
-export function searchPlan(context: PlanContext, response: Response, space: SearchSpace): Evaluated {
-  const screened = space.fast.flatMap((fast) => {
-    const choice: Choice = { evenings: space.evenings, tablets: space.tablets, fast, visits: space.visits };
-    return tabletStarts(choice, response).flatMap((start) => screen(start, choice, response));
-  });
-  screened.sort((a, b) => a.cost - b.cost);
-  const members = context.members.slice(0, FINALIST_MEMBERS);
-  const finalists = screened
-    .slice(0, space.rounds > 0 ? FINALISTS : 1)
-    .map(({ draft, choice }) => evaluate(draft, choice, context, members));
-  let best = cheapest(finalists);
-  for (let round = 0; round < space.rounds; round++) {
-    const near = neighbours(best.draft, best.choice, response).map((draft) =>
-      evaluate(draft, best.choice, context, members),
-    );
-    const better = cheapest([best, ...near]);
-    if (better === best) break;
-    best = better;
+export function searchPlan(context: PlanContext, response: Response, { choice, fast }: SearchSpace): Evaluated {
+  const members = context.searchMembers.map(({ member }) => member);
+  const tried = new Map<string, Evaluated>();
+  const inFull = remember((draft: Draft) => {
+    const evaluated = evaluate(draft, choice, context, members);
+    tried.set(keyOf(draft), evaluated);
+    return evaluated;
+  }, keyOf);
+
+  let best = cheapest(
+    finalistsOf(draftsOf(response, { choice, fast }), MOST_FINALISTS).map(({ draft }) => inFull(draft)),
+  );
+  for (let round = 0; round < ROUNDS; round++) {
+    const changes = changesOf(best.draft, choice, response, response.correctionAt(best));
+    const next = cheapest([best, ...changes.map(inFull)]);
+    if (next === best) break;
+    best = next;
   }
-  return best;
+  const rivals = [...tried.values()]
+    .filter(({ cost }) => cost.total <= NEAR * best.cost.total)
+    .sort((a, b) => a.cost.total - b.cost.total)
+    .slice(0, RIVALS);
+  return cheapest(rivals.map(({ draft }) => evaluate(draft, choice, context, context.members)));
+}
+
+/** The best plan by the quick model alone, projected over the search's members. */
+export function quickPlan(context: PlanContext, response: Response, space: SearchSpace): Evaluated {
+  const members = context.searchMembers.map(({ member }) => member);
+  return evaluate(draftsOf(response, space)[0]!.draft, space.choice, context, members);
+}
+
+/** Drafts at which no single change helps, cheapest first by the quick model. */
+function draftsOf(response: Response, { choice, fast }: SearchSpace): Screened[] {
+  const sketches = inOrder(screen(fast[0] ?? null, choice, response)).slice(0, SKETCHES);
+  const drafts = fast.flatMap((product) =>
+    sketches.map(({ draft }) => improve(withProduct(draft, product, response), choice, response)),
+  );
+  return inOrder(drafts);
+}
+
+function inOrder(drafts: readonly Screened[]): Screened[] {
+  const distinct = new Map(drafts.map((screened) => [keyOf(screened.draft), screened]));
+  return [...distinct.values()].sort((a, b) => a.cost - b.cost);
+}
+
+function finalistsOf(drafts: readonly Screened[], most: number): Screened[] {
+  const counts = new Set<number>();
+  const firstOfCount = drafts.filter(({ draft }) => !counts.has(draft.tablets) && counts.add(draft.tablets));
+  return [...new Set([...drafts.slice(0, FINALISTS), ...firstOfCount])].slice(0, most);
 }
 
 function cheapest(plans: readonly Evaluated[]): Evaluated {
   return plans.reduce((least, each) => (each.cost.total < least.cost.total - IMPROVEMENT ? each : least));
 }
 
-/** Drafts with every count of tablets on every evening they may be loaded, and nothing fast yet. */
-function tabletStarts(choice: Choice, { tabletEvenings }: Response): Draft[] {
-  const none = emptyDraft(choice);
-  const most = choice.tablets?.most ?? 0;
-  if (most === 0 || choice.visits === 0 || tabletEvenings === 0) return [none];
-  const step = Math.max(1, Math.ceil(most / MOST_TABLET_COUNTS));
-  const starts = [none];
-  for (let tablets = step; tablets <= most; tablets += step)
-    for (let tabletEvening = 0; tabletEvening < tabletEvenings; tabletEvening++)
-      starts.push({ ...none, tablets, tabletEvening });
-  return starts;
+/** Every move that a draft allows, and what it has to keep to. */
+function movesOf(draft: Draft, choice: Choice, response: Response) {
+  const most = mostMeasures(draft.fast, draft.fast ? response.measureRises(draft.fast) : draft.measures);
+  const moves: Move[] = [...(draft.fast ? fastMoves(choice, most) : []), ...tabletMoves(response)];
+  return { moves, fits: (each: Draft) => allowed(each, choice, most) };
 }
 
-/** The best few sets of fast doses to go with these tablets, by the linear response. */
-function screen(start: Draft, choice: Choice, response: Response): Screened[] {
-  const cost = (draft: Draft) => response.cost(draft, choice);
-  const found: Screened[] = [{ draft: start, choice, cost: cost(start) }];
-  const { fast } = choice;
-  if (!fast) return found;
-  const rises = response.measureRises(fast);
-  const most = mostMeasures(fast, rises);
-  const guess = rises.map((rise, evening) =>
-    Math.min(most[evening]!, Math.max(1, Math.round(FIRST_GUESS_RISE / rise))),
+/** Brings a draft to where no single change helps by the quick model. */
+function improve(draft: Draft, choice: Choice, response: Response, correction?: Correction): Screened {
+  const { moves, fits } = movesOf(draft, choice, response);
+  return descend(draft, moves, fits, (each) => response.cost(each, correction));
+}
+
+/** The likeliest single changes of a draft, and where the quick model would bring it. */
+function changesOf(draft: Draft, choice: Choice, response: Response, correction: Correction): Draft[] {
+  const { moves, fits } = movesOf(draft, choice, response);
+  const single = moves
+    .map((move) => move(draft))
+    .filter((each) => each !== draft && fits(each))
+    .map((each) => ({ draft: each, cost: response.cost(each, correction) }));
+  const likeliest = inOrder(single).slice(0, CHANGES);
+  return [...likeliest, improve(draft, choice, response, correction)].map((each) => each.draft);
+}
+
+/** The same rises with another product, in its measures. */
+function withProduct(draft: Draft, fast: FastOption | null, response: Response): Draft {
+  if (draft.fast === fast || !draft.fast || !fast) return draft;
+  const [from, to] = [response.measureRises(draft.fast), response.measureRises(fast)];
+  const most = mostMeasures(fast, to);
+  const measures = draft.measures.map((count, evening) =>
+    Math.min(most[evening]!, Math.round((count * from[evening]!) / to[evening]!)),
   );
-  for (const evenings of choicesOfEvenings(start, choice)) {
-    const measures = start.measures.map((_, evening) => (evenings.includes(evening) ? guess[evening]! : 0));
-    found.push({ ...descend({ ...start, measures }, choice, fast, most, cost, evenings), choice });
-  }
-  found.sort((a, b) => a.cost - b.cost);
-  return found
-    .slice(0, FINALISTS_OF_ONE_START)
-    .map(({ draft }) => ({ ...descend(draft, choice, fast, most, cost, freeEvenings(start)), choice }));
-}
-
-/** Every choice of up to so many evenings that the visits allow, the tablets' own left out. */
-function choicesOfEvenings(start: Draft, choice: Choice): number[][] {
-  const free = freeEvenings(start);
-  const most = Math.min(EVENINGS_TRIED_IN_FULL, choice.visits - visitsOf(start));
-  let sets: number[][] = [[]];
-  const all: number[][] = [];
-  for (let size = 1; size <= most; size++) {
-    sets = sets.flatMap((set) =>
-      free.filter((evening) => evening > (set.at(-1) ?? -1)).map((evening) => [...set, evening]),
-    );
-    all.push(...sets);
-  }
-  return all;
-}
-
-/** Evenings on which nothing else goes in. */
-function freeEvenings({ measures, tablets, tabletEvening }: Draft): number[] {
-  return measures.map((_, evening) => evening).filter((evening) => tablets === 0 || evening !== tabletEvening);
-}
-
-/** Changes the amount of one evening at a time (0 takes it out) until no change helps. */
-function descend(
-  start: Draft,
-  choice: Choice,
-  fast: FastOption,
-  most: readonly number[],
-  cost: (draft: Draft) => number,
-  evenings: readonly number[],
-): { draft: Draft; cost: number } {
-  let best = start;
-  let least = cost(best);
-  for (let improved = true; improved;) {
-    improved = false;
-    for (const evening of evenings) {
-      for (const measures of amountsToTry(best.measures[evening]!, most[evening]!)) {
-        const draft = withMeasures(best, evening, measures);
-        if (visitsOf(draft) > choice.visits || overStock(draft, fast)) continue;
-        const total = cost(draft);
-        if (total >= least - IMPROVEMENT) continue;
-        [best, least, improved] = [draft, total, true];
-      }
-    }
-  }
-  return { draft: best, cost: least };
-}
-
-function amountsToTry(now: number, most: number): number[] {
-  const far = Math.max(2, Math.ceil(most / 6));
-  const near = [0, now - far, now - 1, now + 1, now + far, ...(now === 0 ? [2, 3, Math.ceil(most / 3)] : [])];
-  return near.filter((count) => count !== now && count >= 0 && count <= most);
-}
-
-/** Most measures on each evening under the evening's cap. */
-function mostMeasures(fast: FastOption, rises: readonly number[]): number[] {
-  return rises.map((rise) => Math.floor(fast.capRise / rise + 1e-9));
-}
-
-function overStock({ measures }: Draft, { stock, measure }: FastOption): boolean {
-  return measures.reduce((sum, each) => sum + each, 0) * measure > stock;
-}
-
-function withMeasures(draft: Draft, evening: number, measures: number): Draft {
-  return { ...draft, measures: draft.measures.map((each, index) => (index === evening ? measures : each)) };
-}
-
-/** One tablet or one measure more or less, and each dose an evening earlier or later. */
-function neighbours(draft: Draft, choice: Choice, response: Response): Draft[] {
-  const near: Draft[] = [];
-  for (const tablets of [draft.tablets - 1, draft.tablets + 1])
-    if (tablets >= 0 && tablets <= (choice.tablets?.most ?? 0) && draft.measures[draft.tabletEvening] === 0)
-      near.push({ ...draft, tablets });
-  const { fast } = choice;
-  if (fast) {
-    const most = mostMeasures(fast, response.measureRises(fast));
-    draft.measures.forEach((measures, evening) => {
-      if (measures === 0) return;
-      for (const count of [measures - 1, measures + 1])
-        if (count <= most[evening]!) near.push(withMeasures(draft, evening, count));
-      for (const other of [evening - 1, evening + 1]) {
-        const free = draft.measures[other] === 0 && !(draft.tablets > 0 && other === draft.tabletEvening);
-        if (free && measures <= most[other]!) near.push(withMeasures(withMeasures(draft, evening, 0), other, measures));
-      }
-    });
-    return near.filter((each) => visitsOf(each) <= choice.visits && !overStock(each, fast));
-  }
-  return near.filter((each) => visitsOf(each) <= choice.visits);
+  return { ...draft, fast, measures };
 }

@@ -1,4 +1,3 @@
-import type { InstantInterval } from '@/lib/calendar/wall-time';
 import { contentsPerUnit, type Dose, type DoseContents } from '@/lib/chemistry';
 import { CHLORINE_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import { limits } from '@/lib/standards/limits';
@@ -36,9 +35,4 @@ export function riseOf(contents: DoseContents, amount: number, volume: number): 
 export function pumpUntil(at: number, rise: number): number {
   const hours = rise > limits.largeDose.value ? limits.pumpAfterLargeDose.value : limits.pumpAfterDose.value;
   return at + hours * MILLISECONDS_PER_HOUR;
-}
-
-/** While the pump runs because of doses, whatever its timer says; tablets ask for nothing. */
-export function pumpOverrides(doses: readonly WeekDose[]): InstantInterval[] {
-  return doses.flatMap((dose) => (dose.kind === 'dose' ? [{ from: dose.at, to: dose.pumpUntil }] : []));
 }

@@ -118,9 +118,9 @@ export function prepareForcing(
 }
 
 /** Adds `value` to each step in proportion to its overlap with the interval. */
-function addShare(
+export function addShare(
   into: Float64Array,
-  { startsAt, stepHours, steps }: Forcing,
+  { startsAt, stepHours, steps }: Pick<Forcing, 'startsAt' | 'stepHours' | 'steps'>,
   interval: InstantInterval,
   value: number,
 ) {

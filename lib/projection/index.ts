@@ -13,7 +13,7 @@ import { type WeekAhead, weekAheadSchema } from '@/lib/schemas/week-ahead';
 import { ensembleOf, type ParameterSigmas } from './ensemble';
 import { type WeekDose, weekDose } from './events';
 import { prepareForcing, HOURS_IN_PLAN, MILLISECONDS_PER_HOUR } from './forcing';
-import { type Course, type CourseSetting, integrateWeek } from './integrate';
+import { type Course, type CourseSetting, integrateWeek, ledgerAt } from './integrate';
 import { parametersOf } from './parameters';
 import { type Band, bandOf } from './quantiles';
 import type { ReadingErrors } from './reading-error';
@@ -78,7 +78,7 @@ export function projectWeek(
   );
   return {
     hours: hoursFrom(startsAt),
-    water: course.ledgers.map((ledger, hour) => analysisAt(ledger, course.pH[hour]!)),
+    water: Array.from(course.pH, (pH, hour) => analysisAt(ledgerAt(course, hour), pH)),
   };
 }
 
@@ -121,14 +121,14 @@ export function bandOfCourses(courses: readonly Course[]): CourseBand {
 }
 
 /** One course as series in the units of readings. */
-export function seriesOf(course: Course) {
-  const { ledgers, pH } = course;
+export function seriesOf({ hourly, pH }: Course) {
+  const times = (factor: number) => (value: number) => value * factor;
   return {
-    freeChlorine: ledgers.map((ledger) => ledger.freeChlorine),
-    pH: Array.from(pH),
-    cyanuricAcid: ledgers.map((ledger) => ledger.cyanurate * CYANURIC_ACID_MILLIGRAMS_PER_MOLE),
-    totalAlkalinity: ledgers.map((ledger) => ledger.alkalinity * ALKALINITY_MILLIGRAMS_PER_EQUIVALENT),
-    calciumHardness: ledgers.map((ledger) => ledger.calcium * HARDNESS_MILLIGRAMS_PER_MOLE),
+    freeChlorine: hourly.freeChlorine,
+    pH,
+    cyanuricAcid: hourly.cyanurate.map(times(CYANURIC_ACID_MILLIGRAMS_PER_MOLE)),
+    totalAlkalinity: hourly.alkalinity.map(times(ALKALINITY_MILLIGRAMS_PER_EQUIVALENT)),
+    calciumHardness: hourly.calcium.map(times(HARDNESS_MILLIGRAMS_PER_MOLE)),
   };
 }
 

@@ -7,18 +7,20 @@ import {
   newLedgerState,
   solveLedger,
 } from '@/lib/chemistry';
-import { pumpOverrides, type WeekDose } from './events';
+import type { WeekDose } from './events';
 import { type Forcing, MILLISECONDS_PER_HOUR } from './forcing';
 import type { Parameters } from './parameters';
+import { pumpShares } from './pump';
 import {
   type Acting,
   type ChlorineAccount,
   type FillWater,
+  holdRates,
+  lightThroughDepth,
   moveOn,
-  ratesOf,
+  newStepRates,
   rateState,
   replaceWater,
-  type TabletRelease,
 } from './step';
 import { erode, type TabletLoad } from './tablets';
 
@@ -28,9 +30,12 @@ export type CourseStart = { ledger: Ledger; loads: readonly TabletLoad[] };
 /** The pool's part in a course. */
 export type CourseSetting = { depth: number; fillWater: FillWater; floater: boolean; parameters: Parameters };
 
-/** The water at every full hour from the start. Ledgers share one shape, so reading a series of a quantity is cheap. */
+/** Every quantity of a ledger hour by hour, in its units. */
+export type LedgerSeries = Record<keyof Ledger, Float64Array>;
+
+/** The water at every full hour from the start. */
 export type Course = {
-  ledgers: Ledger[];
+  hourly: LedgerSeries;
   pH: Float64Array;
   /** The water after the last step, and what is left in the feeder at the end. */
   end: Ledger;
@@ -55,11 +60,14 @@ export function integrateWeek(
   const { parameters, depth, fillWater } = setting;
   const { stepsPerHour } = forcing;
   const ledger = { ...start.ledger };
+  const half = { ...start.ledger };
+  const body = { depth, light: lightThroughDepth(depth) };
   const loads = start.loads.map((load) => ({ ...load }));
   const account = { dosed: 0, released: 0, usedUp: 0, combined: 0, carriedOut: 0 };
+  const hours = Math.floor(forcing.steps / stepsPerHour) + 1;
   const course: Course = {
-    ledgers: [],
-    pH: new Float64Array(Math.floor(forcing.steps / stepsPerHour) + 1),
+    hourly: newSeries(hours),
+    pH: new Float64Array(hours),
     end: ledger,
     endPH: 0,
     loads,
@@ -95,7 +103,7 @@ export function integrateWeek(
     solveLedger(ledger, constants, state);
     if (step % stepsPerHour === 0) {
       course.pH[step / stepsPerHour] = state.pH;
-      course.ledgers.push({ ...ledger });
+      keep(course.hourly, step / stepsPerHour, ledger);
     }
     course.endPH = state.pH;
     if (step === forcing.steps) break;
@@ -106,7 +114,8 @@ export function integrateWeek(
       const hours = (cut - at) / MILLISECONDS_PER_HOUR;
       const running = setting.floater ? hours : pump[step]! * hours;
       const release = erode(loads, running, hours, parameters);
-      advance(ledger, state, constants, acting, release, hours, setting, account);
+      holdRates(rates, acting, release, parameters, body);
+      advance(ledger, half, state, constants, hours, setting, account);
       if (cut < to) {
         happen(cut);
         solveLedger(ledger, constants, state);
@@ -117,30 +126,86 @@ export function integrateWeek(
   return course;
 }
 
+function newSeries(hours: number): LedgerSeries {
+  const series = () => new Float64Array(hours);
+  return {
+    freeChlorine: series(),
+    combinedChlorine: series(),
+    cyanurate: series(),
+    alkalinity: series(),
+    inorganicCarbon: series(),
+    calcium: series(),
+    borate: series(),
+    dissolvedSolids: series(),
+    temperature: series(),
+  };
+}
+
+function keep(hourly: LedgerSeries, hour: number, ledger: Ledger): void {
+  hourly.freeChlorine[hour] = ledger.freeChlorine;
+  hourly.combinedChlorine[hour] = ledger.combinedChlorine;
+  hourly.cyanurate[hour] = ledger.cyanurate;
+  hourly.alkalinity[hour] = ledger.alkalinity;
+  hourly.inorganicCarbon[hour] = ledger.inorganicCarbon;
+  hourly.calcium[hour] = ledger.calcium;
+  hourly.borate[hour] = ledger.borate;
+  hourly.dissolvedSolids[hour] = ledger.dissolvedSolids;
+  hourly.temperature[hour] = ledger.temperature;
+}
+
+/** The ledger of a course at one of its hours. */
+export function ledgerAt({ hourly }: Course, hour: number): Ledger {
+  return {
+    freeChlorine: hourly.freeChlorine[hour]!,
+    combinedChlorine: hourly.combinedChlorine[hour]!,
+    cyanurate: hourly.cyanurate[hour]!,
+    alkalinity: hourly.alkalinity[hour]!,
+    inorganicCarbon: hourly.inorganicCarbon[hour]!,
+    calcium: hourly.calcium[hour]!,
+    borate: hourly.borate[hour]!,
+    dissolvedSolids: hourly.dissolvedSolids[hour]!,
+    temperature: hourly.temperature[hour]!,
+  };
+}
+
+// Working space of a step, filled anew by each; nothing is carried from one call to the next.
+const rates = newStepRates();
 const midway = newLedgerState();
 
-/** One step by the midpoint rule: `state` is the equilibrium at its beginning. */
+/** One step by the midpoint rule: `state` is the equilibrium at its beginning; `half` is room for the ledger midway. */
 function advance(
   ledger: Ledger,
+  half: Ledger,
   state: LedgerState,
   constants: EquilibriumConstants,
-  acting: Acting,
-  release: TabletRelease,
   hours: number,
-  { parameters, depth, fillWater }: CourseSetting,
+  { parameters, fillWater }: CourseSetting,
   account: ChlorineAccount,
 ): void {
-  const rates = ratesOf(acting, release, parameters, depth);
-  rateState(rates, state, ledger.freeChlorine, acting, parameters, depth);
-  const half = { ...ledger };
+  rateState(rates, state, ledger.freeChlorine, parameters.boundPhotolysis);
+  copyLedger(ledger, half);
   moveOn(half, rates, fillWater, hours / 2);
-  Object.assign(midway, state);
+  midway.pH = state.pH;
+  midway.hypochlorousAcid = state.hypochlorousAcid;
   solveLedger(half, constants, midway);
-  rateState(rates, midway, half.freeChlorine, acting, parameters, depth);
+  rateState(rates, midway, half.freeChlorine, parameters.boundPhotolysis);
   moveOn(ledger, rates, fillWater, hours, account);
 }
 
-function actingIn(forcing: Forcing, step: number): Acting {
+function copyLedger(from: Ledger, to: Ledger): void {
+  to.freeChlorine = from.freeChlorine;
+  to.combinedChlorine = from.combinedChlorine;
+  to.cyanurate = from.cyanurate;
+  to.alkalinity = from.alkalinity;
+  to.inorganicCarbon = from.inorganicCarbon;
+  to.calcium = from.calcium;
+  to.borate = from.borate;
+  to.dissolvedSolids = from.dissolvedSolids;
+  to.temperature = from.temperature;
+}
+
+/** What acts on the water in a step of the week. */
+export function actingIn(forcing: Forcing, step: number): Acting {
   return {
     sun: forcing.sun[step]!,
     covered: forcing.covered[step]!,
@@ -159,24 +224,4 @@ function eventsOf(forcing: Forcing, doses: readonly WeekDose[]): (WeekDose | Bac
   return [...doses, ...backwashes]
     .filter(({ at }) => at >= forcing.startsAt && at <= endsAt)
     .sort((a, b) => a.at - b.at);
-}
-
-/** Share of each step in which the pump runs, by its timer or because of a dose. */
-function pumpShares(forcing: Forcing, doses: readonly WeekDose[]): Float64Array {
-  const overrides = pumpOverrides(doses);
-  if (overrides.length === 0) return forcing.pump;
-  const shares = forcing.pump.slice();
-  const length = forcing.stepHours * MILLISECONDS_PER_HOUR;
-  for (const { from, to } of overrides) {
-    const first = Math.max(0, Math.floor((from - forcing.startsAt) / length));
-    for (let step = first; step < forcing.steps; step++) {
-      const stepFrom = forcing.startsAt + step * length;
-      if (stepFrom >= to) break;
-      const overlap = (Math.min(to, stepFrom + length) - Math.max(from, stepFrom)) / length;
-      // The timer may run in the same part of the step: the union lies between the larger and the sum; both cut a step
-      // only at its edges in practice, and a step the pump half runs stays at most full.
-      shares[step] = Math.min(1, Math.max(shares[step]!, forcing.pump[step]! + overlap * (1 - forcing.pump[step]!)));
-    }
-  }
-  return shares;
 }

@@ -1,4 +1,4 @@
-import type { Ledger, LedgerState } from '@/lib/chemistry';
+import type { ChlorineSpecies, Ledger, LedgerState } from '@/lib/chemistry';
 import { CHLORINE_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import type { Parameters } from './parameters';
 
@@ -34,6 +34,11 @@ export type ChlorineAccount = { dosed: number; released: number; usedUp: number;
 
 /** Rates of one step; all but the last two hold through it, those come from the water's state. */
 export type StepRates = {
+  /** The part of the reference sun's light that acts on the water, mean over its depth [1]. */
+  light: number;
+  darkDemand: number;
+  /** Speed at which CO2 leaves, over the depth [1/h]. */
+  carbonTransfer: number;
   swimmerDemand: number;
   combinedLoss: number;
   /** Pool water leaving and fill water entering, as shares of the volume [1/h]. */
@@ -56,42 +61,66 @@ export function lightThroughDepth(depth: number): number {
   return -Math.expm1(-optical) / optical;
 }
 
-/**
- * The rates that hold through a step. Water: evaporation is topped up with fill water; rain takes the place of top-up and,
- * beyond evaporation, overflows; what swimmers carry out and leaks is replaced by fill water.
- */
-export function ratesOf(acting: Acting, release: TabletRelease, parameters: Parameters, depth: number): StepRates {
-  const replaced = (acting.swimmers * parameters.waterPerSwimmerHour) / 1000 + parameters.leak / 24;
-  const topUp = acting.evaporation - acting.rain;
+export const noRelease: TabletRelease = { chlorine: 0, cyanurate: 0, solids: 0 };
+
+/** Rates to be filled by {@link holdRates} and {@link rateState}. */
+export function newStepRates(): StepRates {
   return {
-    swimmerDemand: (acting.swimmers * parameters.chlorinePerSwimmerHour) / parameters.volume,
-    combinedLoss: COMBINED_LOSS_OPEN + acting.covered * (COMBINED_LOSS_COVERED - COMBINED_LOSS_OPEN),
-    outflow: replaced / parameters.volume + Math.max(0, -topUp) / depth,
-    inflow: replaced / parameters.volume + Math.max(0, topUp) / depth,
-    release,
+    light: 0,
+    darkDemand: 0,
+    carbonTransfer: 0,
+    swimmerDemand: 0,
+    combinedLoss: 0,
+    outflow: 0,
+    inflow: 0,
+    release: noRelease,
     chlorineLoss: 0,
     carbonLoss: 0,
   };
 }
 
-/** Puts the rates that follow from the water's state into `rates`. */
-export function rateState(
+/**
+ * Puts the rates that hold through a step into `rates`. Water: evaporation is topped up with fill water; rain takes the
+ * place of top-up and, beyond evaporation, overflows; what swimmers carry out and leaks is replaced by fill water.
+ */
+export function holdRates(
   rates: StepRates,
-  state: LedgerState,
-  freeChlorine: number,
   acting: Acting,
+  release: TabletRelease,
   parameters: Parameters,
-  depth: number,
+  pool: { depth: number; light: number },
 ): void {
-  const sun = acting.sun * parameters.sunStrength * lightThroughDepth(depth);
-  const underSun =
-    HYPOCHLOROUS_ACID_PHOTOLYSIS * state.hypochlorousAcid +
-    HYPOCHLORITE_PHOTOLYSIS * state.hypochlorite +
-    parameters.boundPhotolysis * state.cyanurateBound;
-  const dark = parameters.darkDemand * 2 ** ((acting.temperature - 27) / 10);
-  rates.chlorineLoss = dark + (freeChlorine > 1e-12 ? (sun * underSun) / freeChlorine : 0);
+  const replaced = (acting.swimmers * parameters.waterPerSwimmerHour) / 1000 + parameters.leak / 24;
+  const topUp = acting.evaporation - acting.rain;
   const transfer = parameters.carbonDioxideTransfer * (1 - acting.covered * (1 - CARBON_DIOXIDE_UNDER_COVER));
-  rates.carbonLoss = (transfer / depth) * state.carbonDioxideExcess;
+  rates.light = acting.sun * parameters.sunStrength * pool.light;
+  rates.darkDemand = parameters.darkDemand * 2 ** ((acting.temperature - 27) / 10);
+  rates.carbonTransfer = transfer / pool.depth;
+  rates.swimmerDemand = (acting.swimmers * parameters.chlorinePerSwimmerHour) / parameters.volume;
+  rates.combinedLoss = COMBINED_LOSS_OPEN + acting.covered * (COMBINED_LOSS_COVERED - COMBINED_LOSS_OPEN);
+  rates.outflow = replaced / parameters.volume + Math.max(0, -topUp) / pool.depth;
+  rates.inflow = replaced / parameters.volume + Math.max(0, topUp) / pool.depth;
+  rates.release = release;
+}
+
+/**
+ * Free chlorine that the reference sun destroys in water of these species [mg/L/h].
+ *
+ * @param boundPhotolysis k_B [1/h]
+ */
+export function lossUnderSun(species: ChlorineSpecies, boundPhotolysis: number): number {
+  return (
+    HYPOCHLOROUS_ACID_PHOTOLYSIS * species.hypochlorousAcid +
+    HYPOCHLORITE_PHOTOLYSIS * species.hypochlorite +
+    boundPhotolysis * species.cyanurateBound
+  );
+}
+
+/** Puts the rates that follow from the water's state into `rates`. */
+export function rateState(rates: StepRates, state: LedgerState, freeChlorine: number, boundPhotolysis: number): void {
+  const underSun = lossUnderSun(state, boundPhotolysis);
+  rates.chlorineLoss = rates.darkDemand + (freeChlorine > 1e-12 ? (rates.light * underSun) / freeChlorine : 0);
+  rates.carbonLoss = rates.carbonTransfer * state.carbonDioxideExcess;
 }
 
 /**
@@ -135,7 +164,7 @@ export function moveOn(
     ledger.combinedChlorine * combinedKept +
     (combined / hours) * (combinedLoss > 1e-12 ? (1 - combinedKept) / combinedLoss : hours);
 
-  const left = Math.exp(-rates.outflow * hours);
+  const left = rates.outflow > 0 ? Math.exp(-rates.outflow * hours) : 1;
   const entered = rates.inflow * (rates.outflow > 1e-12 ? (1 - left) / rates.outflow : hours);
   ledger.alkalinity = ledger.alkalinity * left + fill.alkalinity * entered - usedUp / CHLORINE_MILLIGRAMS_PER_MOLE;
   ledger.inorganicCarbon = Math.max(
