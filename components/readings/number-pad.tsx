@@ -26,7 +26,7 @@ export function NumberPad({
   const characters = ['1', '2', '3', '4', '5', '6', '7', '8', '9', decimalSign, '0'];
   const stay = (event: React.PointerEvent) => event.preventDefault();
   return (
-    <div role="group" aria-label={t('label')} className="mt-3.5 grid grid-cols-3 gap-1.75">
+    <div role="group" aria-label={t('label')} className="grid grid-cols-3 gap-1.75">
       {characters.map((character) => (
         <button
           key={character}

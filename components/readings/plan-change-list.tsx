@@ -9,7 +9,14 @@ import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { PlanChange } from './plan-changes';
 
 /** The visits that changed: what was planned, struck through, and what is planned now. */
-export function PlanChangeList({ changes }: { changes: readonly PlanChange[] }) {
+export function PlanChangeList({
+  changes,
+  first,
+}: {
+  changes: readonly PlanChange[];
+  /** There was no plan before: nothing is struck through. */
+  first: boolean;
+}) {
   const t = useTranslations('readings.saved');
   const times = useTimes();
   const words = useDoseWords();
@@ -27,8 +34,12 @@ export function PlanChangeList({ changes }: { changes: readonly PlanChange[] }) 
             <div>
               <p className="text-label text-ink-2">{t('visit', { day: times.weekday(at), time: times.clock(at) })}</p>
               <p className="flex flex-wrap items-center gap-x-2.25 font-display text-[19px] leading-[25px] font-section">
-                <s className="font-lead text-ink-2 decoration-[1.5px]">{said(before)}</s>
-                <ArrowRight aria-label={t('becomes')} className="size-4.5" />
+                {first ? null : (
+                  <>
+                    <s className="font-lead text-ink-2 decoration-[1.5px]">{said(before)}</s>
+                    <ArrowRight aria-label={t('becomes')} className="size-4.5" />
+                  </>
+                )}
                 <span>{said(after)}</span>
               </p>
             </div>

@@ -1,7 +1,8 @@
 import { useTranslations } from 'next-intl';
-import type { Measured } from '@/lib/schemas/reading';
+import type { RecordedReading } from '@/lib/schemas/reading';
 import type { MeasuredQuantity } from '@/lib/schemas/measured-range';
-import { middleOf } from './entered';
+import { middleOf, type Value } from './entered';
+import type { EntryQuantity } from './quantities';
 import { useValueWords } from './use-value-words';
 
 const order = [
@@ -18,16 +19,18 @@ const order = [
 export function useReadingWords() {
   const t = useTranslations('readings');
   const words = useValueWords();
-  return (values: Measured): { measured: string; missing: string } => {
+  return ({ method, values }: Pick<RecordedReading, 'method' | 'values'>): { measured: string; missing: string } => {
+    const said = (value: Value, quantity: EntryQuantity) =>
+      method === 'strip' || typeof value !== 'number' ? words.printed(value, quantity) : words.value(value, quantity);
     const measured = order.flatMap((quantity) => {
       const value = values[quantity];
       if (value === undefined) return [];
       if (quantity !== 'combinedChlorine')
-        return [t('saved.one', { name: t(`quantity.${quantity}`), value: words.value(value, quantity) })];
+        return [t('saved.one', { name: t(`quantity.${quantity}`), value: said(value, quantity) })];
       return [
         middleOf(value) === 0
           ? t('saved.combinedNone')
-          : t('saved.one', { name: t('saved.combined'), value: words.value(value, 'totalChlorine') }),
+          : t('saved.one', { name: t('saved.combined'), value: said(value, 'totalChlorine') }),
       ];
     });
     const missing = order

@@ -32,11 +32,10 @@ export type SavedTestProps = {
 /** After saving: the swim state first, then what changed in the plan. */
 export function SavedTest({ reading, week, before, onCorrect, children }: SavedTestProps) {
   const t = useTranslations('readings.saved');
-  const method = useTranslations('readings.method');
   const times = useTimeWords();
   const takenAt = parseInstant(reading.takenAt) ?? 0;
   const words = useReadingWords();
-  const { measured, missing } = words(reading.values);
+  const { measured, missing } = words(reading);
   return (
     <div className="mx-auto grid max-w-reading gap-4 px-margin pt-3 pb-6">
       <header className="border-b-stop border-ink pb-2.5">
@@ -45,7 +44,7 @@ export function SavedTest({ reading, week, before, onCorrect, children }: SavedT
           {t('by', {
             when: times.dayAndTime(takenAt),
             name: reading.recordedBy ?? reading.doneBy ?? '',
-            method: method(reading.method),
+            method: t(`method.${reading.method}`),
           })}
         </p>
       </header>
@@ -114,10 +113,10 @@ function Changes({ doses, before }: { doses: readonly PlanDose[]; before: readon
       <h2 className="font-display text-section">{t(first ? 'firstPlan' : 'changes')}</h2>
       <p className="text-body text-ink-2">
         {changed.length === 0
-          ? t(kept === 0 ? 'nothingPlanned' : 'nothingChanged', { kept })
-          : t('changed', { count: changed.length, kept })}
+          ? t(kept === 0 ? 'nothingPlanned' : 'nothingChanged')
+          : t(first ? 'firstCount' : 'changed', { count: changed.length, kept })}
       </p>
-      <PlanChangeList changes={changed} />
+      <PlanChangeList changes={changed} first={first} />
       {toBuy ? null : <p className="border-t border-ink pt-3 text-body font-emphasis">{t('nothingToBuy')}</p>}
     </section>
   );

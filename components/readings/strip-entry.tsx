@@ -61,7 +61,7 @@ export function StripEntry({
                   aside={
                     value === undefined
                       ? t(quantity === 'cyanuricAcid' ? 'strip.tubeDecides' : 'notMeasured')
-                      : words.value(value, quantity)
+                      : words.printed(value, quantity)
                   }
                   steps={steps}
                   value={read}
@@ -82,7 +82,7 @@ export function StripEntry({
           <Sigma aria-hidden="true" className="mt-px size-4.75 shrink-0 text-ink" />
           {middleOf(combined) === 0
             ? t('combined.none')
-            : t('combined.some', { value: words.value(combined, 'totalChlorine') })}
+            : t('combined.some', { value: words.printed(combined, 'totalChlorine') })}
         </p>
       )}
       <Button variant="quiet" className="mt-0.5" onClick={() => setEditing(true)}>

@@ -6,6 +6,7 @@ import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Segments } from '@/components/ui/segments';
+import { useIsPhone } from '@/components/week-sheet/use-is-phone';
 import { useKept } from '@/lib/client/device-store';
 import type { PlannedWeek } from '@/lib/client/readings';
 import { type NewReading, readingMethods, waterLooks } from '@/lib/schemas/reading';
@@ -13,7 +14,7 @@ import { bottleSchema, firstBottle } from './bottle';
 import { doubtsOf } from './doubts';
 import { asked, enteredOf } from './entered';
 import { FalseZero } from './false-zero';
-import { KitEntry } from './kit-entry';
+import { KitPad } from './kit-pad';
 import { newReadingOf } from './new-reading';
 import { quickQuantities, type EntryQuantity } from './quantities';
 import { useReadingSetting } from './reading-setting';
@@ -69,6 +70,8 @@ export function TestForm({ draft, change, now, readNow, week, onSave, busy, prob
     onSave(newReadingOf({ draft, entered, takenAt, timeZone, zeroAnswer: answer === 'later' ? null : answer }));
   };
 
+  // On a phone a kit is typed with keys of our own; they take the place of the bar below while a field is open.
+  const ownKeys = useIsPhone() === true && draft.method === 'drop-kit';
   const fields = (names: readonly EntryQuantity[]) => ({
     quantities: names,
     draft,
@@ -121,10 +124,13 @@ export function TestForm({ draft, change, now, readNow, week, onSave, busy, prob
                 </p>
               ) : null}
             </>
-          ) : draft.method === 'drop-kit' ? (
-            <KitEntry {...fields(quantities)} typing={typing} />
           ) : (
-            <ValueFields {...fields(quantities)} />
+            <>
+              {draft.method === 'drop-kit' ? (
+                <p className="pb-2.5 text-small text-ink-2">{t(ownKeys ? 'kit.phoneNote' : 'kit.note')}</p>
+              ) : null}
+              <ValueFields {...fields(quantities)} ownKeys={ownKeys} />
+            </>
           )}
           {zero === undefined ? null : (
             <FalseZero
@@ -156,16 +162,22 @@ export function TestForm({ draft, change, now, readNow, week, onSave, busy, prob
           )}
         </div>
       </div>
-      <SaveBar
-        left={
-          draft.method === 'strip'
-            ? t('save.pads', { read, all: pads.length })
-            : t('save.values', { read, all: pads.length })
-        }
-        label={t(draft.correcting ? 'save.correct' : draft.kind === 'quick' ? 'save.quick' : 'save.full')}
-        busy={busy ? t('save.busy') : undefined}
-        offReason={offReason()}
-      />
+      {ownKeys && typing !== null ? (
+        <div className="sticky bottom-tabs z-10 border-t border-ink bg-paper px-margin pt-2 pb-2.5">
+          <KitPad current={typing} quantities={quantities} draft={draft} change={change} />
+        </div>
+      ) : (
+        <SaveBar
+          left={
+            draft.method === 'strip'
+              ? t('save.pads', { read, all: pads.length })
+              : t('save.values', { read, all: pads.length })
+          }
+          label={t(draft.correcting ? 'save.correct' : draft.kind === 'quick' ? 'save.quick' : 'save.full')}
+          busy={busy ? t('save.busy') : undefined}
+          offReason={offReason()}
+        />
+      )}
     </form>
   );
 }
@@ -183,8 +195,8 @@ function SaveBar({
 }) {
   const t = useTranslations('readings.save');
   return (
-    <div className="sticky bottom-tabs z-10 border-t border-ink bg-paper-lift px-margin pt-2.5 pb-3 md:bottom-0 md:mx-margin md:bg-paper md:px-0">
-      <p className="mb-2 flex justify-between gap-3 text-small text-ink-2">
+    <div className="sticky bottom-tabs z-10 border-t border-ink bg-paper-lift px-margin pt-2.5 pb-3 md:bottom-0 md:mx-margin md:flex md:items-center md:gap-4.5 md:bg-paper md:px-0">
+      <p className="mb-2 flex flex-1 justify-between gap-3 text-small text-ink-2 md:mb-0">
         <span>{left}</span>
         <span id="save-reason" className="text-right">
           {offReason ?? t('untouched')}
@@ -194,7 +206,7 @@ function SaveBar({
         type="submit"
         variant="primary"
         size="large"
-        className="w-full md:w-auto"
+        className="w-full md:min-h-11 md:w-auto"
         busy={busy}
         {...(offReason === undefined ? {} : { offReasonId: 'save-reason' })}
       >

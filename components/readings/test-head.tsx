@@ -30,12 +30,12 @@ export function TestHead({
   const [changing, setChanging] = useState(draft.time !== null);
   return (
     <header className="px-margin">
-      <div className="flex min-h-15.5 items-center gap-1 border-b-stop border-ink md:min-h-18">
+      <div className="flex min-h-15.5 items-center gap-1 border-b-stop border-ink py-1.5 md:min-h-18">
         <Link href="/week" aria-label={t('close')} className="-ml-3 flex size-12 items-center justify-center">
           <X aria-hidden="true" className="size-5.5" />
         </Link>
         <div className="min-w-0 flex-1">
-          <h1 className="font-display text-[20px] leading-6 font-section md:font-display-soft md:text-headline">
+          <h1 className="font-display text-[20px] leading-6 font-section md:font-display-soft md:text-headline md:leading-10.5">
             {t(`kind.${draft.kind}`)}
           </h1>
           <p className="text-small text-ink-2">
@@ -65,7 +65,6 @@ export function TestHead({
           choices={(['full', 'quick'] as const).map((kind) => ({
             value: kind,
             label: t(`kind.${kind}`),
-            detail: t(`kind.${kind}Note`),
           }))}
           value={draft.kind}
           onChange={(kind) => change({ kind })}

@@ -2,7 +2,7 @@ import { useTranslations } from 'next-intl';
 import { asInterval, type Value } from './entered';
 import { type EntryQuantity, typedUnit } from './quantities';
 import { useReadingSetting } from './reading-setting';
-import { writtenValue } from './typed-value';
+import { textOf, writtenValue } from './typed-value';
 
 /** Values of a test in words, in the household's units. */
 export function useValueWords() {
@@ -17,15 +17,13 @@ export function useValueWords() {
     unit: (quantity: EntryQuantity) =>
       quantity === 'pH' ? '' : units(typedUnit(quantity, unitSystem), { value: '' }).trim(),
     figure,
-    /** "3.0 mg/L", "between 1 and 3 mg/L". */
-    value: (value: Value, quantity: EntryQuantity) => {
+    /** "3.0 mg/L". */
+    value: (value: number, quantity: EntryQuantity) => withUnit(figure(value, quantity), quantity),
+    /** As it is printed on a bottle: "3 mg/L", "between 1 and 3 mg/L". */
+    printed: (value: Value, quantity: EntryQuantity) => {
       const { low, high } = asInterval(value);
-      return withUnit(
-        low === high
-          ? figure(low, quantity)
-          : t('between', { low: figure(low, quantity), high: figure(high, quantity) }),
-        quantity,
-      );
+      const step = (value: number) => textOf(value, quantity, unitSystem, locale);
+      return withUnit(low === high ? step(low) : t('between', { low: step(low), high: step(high) }), quantity);
     },
   };
 }

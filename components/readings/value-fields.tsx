@@ -48,7 +48,11 @@ export function ValueFields({ quantities, draft, change, doubts, onTyping, ownKe
               enterKeyHint="next"
               {...(wrong ? { problem: doubtWords(doubt) } : text === '' ? { hint: t('notMeasured') } : {})}
               onChange={(event) => write(event.target.value)}
-              onFocus={() => onTyping(quantity)}
+              onFocus={(event) => {
+                onTyping(quantity);
+                // Our own keys cover the foot of the page.
+                if (ownKeys) event.target.scrollIntoView({ block: 'center' });
+              }}
               onBlur={() => onTyping(null)}
               onKeyDown={(event) => {
                 if (event.key !== 'Enter') return;

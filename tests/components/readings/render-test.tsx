@@ -65,6 +65,9 @@ export function fill(name: string, text: string) {
   fireEvent.blur(input);
 }
 
+// A simulated browser lays nothing out, so it has nothing to scroll.
+Element.prototype.scrollIntoView = () => undefined;
+
 /** A page as wide as a desk, or as narrow as a phone. */
 export function screenOf(size: 'desk' | 'phone') {
   vi.stubGlobal('matchMedia', (query: string) => ({

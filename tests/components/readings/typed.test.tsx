@@ -1,4 +1,4 @@
-import { fireEvent, screen, waitFor, within } from '@testing-library/react';
+import { act, fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { afterEach, beforeEach, expect, it, vi } from 'vitest';
 import { fakeTestServer } from './fake-test-server';
 import { field, fill, freshSheet, openTest, save, screenOf, user } from './render-test';
@@ -103,8 +103,10 @@ it('moves on by itself on a phone, with keys of its own', async () => {
   await openTest(sheet);
   await byKit();
   expect(field('Free chlorine')).toHaveAttribute('inputmode', 'none');
-  field('Free chlorine').focus();
+  expect(screen.queryByRole('group', { name: 'Number keys' })).toBeNull();
+  act(() => field('Free chlorine').focus());
   const pad = within(screen.getByRole('group', { name: 'Number keys' }));
+  expect(screen.queryByRole('button', { name: 'Save test' })).toBeNull();
   for (const name of ['3', 'decimal sign', '0']) fireEvent.click(pad.getByRole('button', { name }));
   expect(field('Free chlorine')).toHaveValue('3.0');
   await waitFor(() => expect(field('pH')).toHaveFocus());
@@ -113,6 +115,8 @@ it('moves on by itself on a phone, with keys of its own', async () => {
   await waitFor(() => expect(field('Total chlorine')).toHaveFocus());
   fireEvent.click(pad.getByRole('button', { name: 'Next' }));
   await waitFor(() => expect(field('Total alkalinity')).toHaveFocus());
+  act(() => field('Total alkalinity').blur());
+  expect(save()).toBeInTheDocument();
 });
 
 it('writes a US household’s temperature in its own degrees and sends it in ours', async () => {
