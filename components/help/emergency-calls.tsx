@@ -15,7 +15,7 @@ export function EmergencyCalls({ country, chooseHref }: { country: EmergencyCoun
       {emergency === null ? (
         <p className="border-due border-ink bg-paper-lift px-4 py-3 text-field font-strong">{t('localEmergency')}</p>
       ) : (
-        <div className="grid gap-2.5 sm:grid-cols-2">
+        <div className="grid gap-2.5 sm:grid-cols-2 print:grid-cols-1">
           <CallButton Icon={PhoneCall} name={t('callEmergency')} number={emergency} variant="terra" wide />
           {poison === null ? null : <CallButton Icon={Phone} name={t('poisonCentre')} number={poison} />}
           <CallButton Icon={Flame} name={t('fireService')} number={emergency} wide={poison === null} />
@@ -50,7 +50,7 @@ function CallButton({ Icon, name, number, variant = 'outline', wide = false }: C
   const look = buttonClass({
     variant,
     size: 'large',
-    className: `justify-start min-h-14.5 ${wide ? 'sm:col-span-2' : ''}`,
+    className: `justify-start min-h-14.5 print:min-h-0 print:py-1 ${wide ? 'sm:col-span-2 print:col-span-1' : ''}`,
   });
   return (
     <a href={dialled(number)} aria-label={t('dial', { name, number })} className={look}>

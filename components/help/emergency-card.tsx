@@ -15,14 +15,14 @@ export function EmergencyCard({ country }: { country: EmergencyCountry }) {
   const t = useTranslations('help.emergency');
   const common = useTranslations('common');
   return (
-    <div className="mx-auto max-w-sheet px-margin pb-10">
+    <div className="mx-auto max-w-sheet px-margin pb-10 print:pb-0">
       <HelpHead headline={t('headline')} lead={t('lead')} aside={<PrintButton label={common('print')} />} />
-      <div className="md:grid md:grid-cols-2 md:grid-rows-[auto_1fr] md:gap-x-9 md:gap-y-6 md:pt-4">
+      <div className="md:grid md:grid-cols-2 md:grid-rows-[auto_1fr] md:gap-x-9 md:gap-y-6 md:pt-4 print:grid print:grid-cols-2 print:grid-rows-[auto_1fr] print:gap-x-6 print:gap-y-4 print:pt-3">
         <div className="space-y-4">
           <EmergencyCalls country={country} chooseHref={`#${countriesId}`} />
           <LeaveFrame />
         </div>
-        <div className="mt-3 md:row-span-2 md:mt-0">
+        <div className="mt-3 md:row-span-2 md:mt-0 print:row-span-2 print:mt-0">
           <FirstAid />
         </div>
         <SpillList />

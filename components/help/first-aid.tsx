@@ -29,7 +29,7 @@ export function FirstAid() {
       {bodies.map(({ Icon, title, steps }) => (
         <section
           key={title}
-          className="grid break-inside-avoid grid-cols-[46px_1fr] border-t border-rule py-3.5 first:border-t-0 md:first:pt-0"
+          className="grid break-inside-avoid grid-cols-[46px_1fr] border-t border-rule py-3.5 first:border-t-0 md:first:pt-0 print:py-2 print:first:pt-0"
         >
           <Icon aria-hidden="true" className="mt-px size-7" />
           <div>

@@ -20,7 +20,7 @@ export function SignedOutBar({ signedIn = false }: { signedIn?: boolean }) {
   const t = useTranslations('navigation');
   const common = useTranslations('common');
   return (
-    <header>
+    <header className="print:hidden">
       <div className="mx-auto flex h-15 max-w-sheet items-center gap-5 px-margin md:h-13.5 lg:gap-7.5">
         <Link href="/" className="inline-flex min-h-11 items-center gap-2.5 font-display text-brand">
           <BrandMark />

@@ -11,7 +11,7 @@ const variants: Record<ButtonVariant, string> = {
   outline: 'border-ink bg-transparent text-ink hover:bg-paper-lift',
   quiet:
     'border-transparent bg-transparent text-ink underline decoration-1 underline-offset-[3px] hover:decoration-2 focus-visible:no-underline',
-  terra: 'border-terra-button bg-terra-button text-on-terra hover:border-terra-ink',
+  terra: 'border-terra-button bg-terra-button text-on-terra hover:border-terra-ink print:border-ink',
 };
 
 const sizes: Record<ButtonSize, string> = {
