@@ -22,7 +22,7 @@ export async function makePlan(snapshot: WeekSnapshot, now: Date): Promise<WeekP
 }
 
 /** Nothing is planned before now, nor in the hour of a dose that somebody decided against. */
-export function earliestDose({ skipped }: WeekSnapshot, now: Date): Date {
+function earliestDose({ skipped }: WeekSnapshot, now: Date): Date {
   const afterSkipped = skipped.map((at) => Date.parse(at) + MINUTE);
   return new Date(Math.max(now.getTime(), ...afterSkipped));
 }
@@ -47,7 +47,8 @@ function planOnHold({ scenario }: WeekSnapshot, { doubt, takenAt }: NonNullable<
     needs: [
       {
         code: doubt === 'open' ? 'false-zero-open' : 'chlorine-bleached-test',
-        quantity: 'freeChlorine',
+        // Not a measurement that is missing: one that is in doubt.
+        quantity: 'false-zero',
         since: takenAt,
       },
     ],

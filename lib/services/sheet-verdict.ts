@@ -47,7 +47,7 @@ export function sheetVerdict(ground: VerdictGround): WeekSheet['verdict'] {
   };
 }
 
-export function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
+function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
   const { now, pool, readings, zeroDoubt, plan, doses } = ground;
   const freeChlorine = newest(readings, 'freeChlorine');
   const pH = newest(readings, 'pH');

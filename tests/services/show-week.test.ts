@@ -4,14 +4,16 @@ import { findCurrentPlan } from '@/db/queries/plans';
 import { updateHousehold } from '@/db/queries/households';
 import { updatePool } from '@/db/queries/pools';
 import { setStock } from '@/db/queries/shelf-products';
+import type { StoredReading } from '@/db/queries/readings';
 import { saveWeekDay } from '@/db/queries/week-days';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { weekSheetSchema } from '@/lib/schemas/week-sheet';
 import type { ServiceContext } from '@/lib/services/context';
 import { recordReading } from '@/lib/services/record-reading';
+import { sheetChecks } from '@/lib/services/sheet-checks';
 import { showWeek } from '@/lib/services/show-week';
 import { planWith } from '@/tests/support/engine';
-import { aFullTest, aPoolHousehold, at, hoursLater } from '@/tests/support/pool-household';
+import { aFullTest, aPoolHousehold, at, copyOf, hoursLater } from '@/tests/support/pool-household';
 import { freshDatabase } from '@/tests/support/test-database';
 
 planWith();
@@ -166,14 +168,43 @@ describe('showWeek with a plan', { timeout: 60_000 }, () => {
     expect(replanned.doses.some(({ at: hour }) => Date.parse(hour) === due.getTime())).toBe(true);
   });
 
-  it('marks a check as done by a later reading', async () => {
-    const fresh = freshDatabase();
-    const other = await aPoolHousehold(fresh);
-    await recordReading(other, aFullTest());
-    const before = await showWeek(other);
-    const full = before.checks.find(({ kind }) => kind === 'full');
+  it('wants a test after much rain, and after a day of many swimmers', async () => {
+    const fresh = await copyOf(db);
+    const other = { ...owner, db: fresh };
+    const { householdId } = owner.access;
+    await saveWeekDay(fresh, { householdId, day: '2026-07-06', values: { rainMillimetres: 30 } });
+    await saveWeekDay(fresh, { householdId, day: '2026-07-07', values: { swimmerHours: 40 } });
+    // Sunday 23:00 UTC is 19:00 there: no rain yet; by Monday noon half of it has fallen.
+    expect(codesOf(await showWeek(other))).not.toContain('much-rain');
+    expect(codesOf(await showWeek(at(other, hoursLater(17))))).toContain('much-rain');
+    // Tuesday, 21:00: 40 swimmer-hours in 75.7 m3 are more than one in 4 m3.
+    const evening = codesOf(await showWeek(at(other, hoursLater(50))));
+    expect(evening).toContain('many-swimmers');
+  });
+
+  it('asks for the full test that ends the plan', async () => {
+    const full = (await showWeek(owner)).checks.find(({ kind }) => kind === 'full');
     expect(full?.done).toBe(false);
     expect(Date.parse(full?.at ?? '')).toBe(hoursLater(168).getTime());
+  });
+
+  it('counts a check as done by a test on its day or after it, a full one only by a full test', async () => {
+    const plan = (await findCurrentPlan(db, owner.access.householdId))!;
+    const checks = [
+      { at: '2026-07-08T10:00:00-04:00', kind: 'quick' as const, reason: 'swim-day-after-two-days' },
+      { at: '2026-07-09T19:00:00-04:00', kind: 'full' as const, reason: 'next-week' },
+    ];
+    const withChecks = { ...plan, result: { ...plan.result, checks } };
+    const done = (takenAt: string, kind: 'quick' | 'full') => {
+      const reading = { takenAt: new Date(takenAt), kind } as StoredReading;
+      return sheetChecks(withChecks, [reading], owner.access.timeZone).map((check) => check.done);
+    };
+    expect(done('2026-07-07T20:00:00-04:00', 'full')).toEqual([false, false]);
+    expect(done('2026-07-08T07:00:00-04:00', 'quick')).toEqual([true, false]);
+    expect(done('2026-07-09T08:00:00-04:00', 'quick')).toEqual([true, false]);
+    expect(done('2026-07-09T08:00:00-04:00', 'full')).toEqual([true, true]);
+    // The test that the plan was made of.
+    expect(done(plan.takenAt.toISOString(), 'full')).toEqual([false, false]);
   });
 });
 

@@ -3,7 +3,7 @@ import { beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { Database } from '@/db/client';
 import { listGivenDoses } from '@/db/queries/plan-doses';
 import { findCurrentPlan } from '@/db/queries/plans';
-import { findShelfProduct, setStock } from '@/db/queries/shelf-products';
+import { deleteShelfProduct, findShelfProduct, setStock } from '@/db/queries/shelf-products';
 import { auditTrail, doseEvents, plans } from '@/db/schema';
 import type { HouseholdAccess } from '@/lib/auth/household-access';
 import type { DoseTick, PlanDose } from '@/lib/schemas/plan-dose';
@@ -177,6 +177,16 @@ describe('tickDose', { timeout: 60_000 }, () => {
     (await listGivenDoses(db, { householdId: owner.access.householdId, from: hoursLater(-1), until: hoursLater(400) }))
       .length;
 
+  it('still knows what went in when its product has left the shelf', async () => {
+    await tickDose(at(owner, due), dose.id, said({ action: 'given' }));
+    const before = (await showWeek(at(owner, due))).ahead?.freeChlorine.p50;
+    await deleteShelfProduct(db, owner.access.householdId, 'gran');
+    const after = await showWeek(at(owner, minutes(5, due)));
+    expect(after.planProblem).toBeNull();
+    const hour = Math.ceil((due.getTime() - owner.now.getTime()) / 3_600_000) + 1;
+    expect(after.ahead?.freeChlorine.p50[hour]).toBeCloseTo(before?.[hour] ?? 0, 9);
+  });
+
   it('plans a skipped dose no more for its hour', async () => {
     const sheet = await tickDose(at(owner, minutes(-60, due)), dose.id, said({ action: 'skipped' }));
     expect(sheet.doses.find(({ id }) => id === dose.id)?.status).toBe('skipped');
@@ -200,6 +210,13 @@ describe('two ticks of one dose', { timeout: 60_000 }, () => {
     await recordReading(at(owner, nextDay), aFullTest(nextDay));
     const codes = (await showWeek(at(owner, nextDay))).verdict.reasons.map(({ code }) => code);
     expect(codes).not.toContain('suspected-double-dose');
+  });
+
+  it('in the same moment are both on record', async () => {
+    const other = await another('caretaker');
+    await Promise.all([owner, other].map((who) => tickDose(at(who, due), dose.id, said({ action: 'given' }))));
+    expect((await showWeek(at(owner, due))).verdict.reasons[0]?.code).toBe('suspected-double-dose');
+    expect(await db.$count(doseEvents)).toBe(2);
   });
 
   it('by one person are one tick', async () => {

@@ -9,7 +9,7 @@ import type { ServiceContext } from '@/lib/services/context';
 import { aHousehold, freshFile } from './test-database';
 
 /** Sunday evening, midsummer: when the household of these tests tests its water. */
-export const sundayEvening = new Date('2026-07-05T23:00:00Z');
+const sundayEvening = new Date('2026-07-05T23:00:00Z');
 export const hoursLater = (hours: number, from = sundayEvening) => new Date(from.getTime() + hours * 3_600_000);
 
 /** The pool that the design of the engine shows, as the profile stores it. */
