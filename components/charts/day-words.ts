@@ -1,4 +1,4 @@
-import type { Place, Run, Weight, Words } from './place-words';
+import { type Place, type Run, type Weight, widthOf, type Words } from './place-words';
 import { isOn, xOf } from './time-axis';
 import { yOf } from './value-axis';
 import { waterAt } from './water-curve';
@@ -45,13 +45,13 @@ function limitWords({ limitShort }: WeekPhrases, { width, value, limit }: WeekGe
   return { id: 'limit', lines: [[run(limitShort, 'bold')]], places };
 }
 
-function lowestWords({ lowest }: WeekPhrases, { axis, value, points, now }: WeekGeometry): Words[] {
+function lowestWords(phrases: WeekPhrases, { axis, width, value, points, now }: WeekGeometry): Words[] {
   const level = (waterAt(points, now) ?? points[0])?.lowestLevel;
   if (level === undefined || !isOn(axis, now)) return [];
   const y = yOf(value, level) + HATCH + 2;
-  return [
-    { id: 'lowest', lines: [[run(lowest)]], places: [y, y + 14].map((top) => ({ x: 6, y: top, anchor: 'start' })) },
-  ];
+  const oneLine = [[run(phrases.lowest)]];
+  const lines = widthOf(oneLine[0] ?? []) < width - 12 ? oneLine : phrases.lowestParts.map((part) => [run(part)]);
+  return [{ id: 'lowest', lines, places: [y, y + 14].map((top) => ({ x: 6, y: top, anchor: 'start' })) }];
 }
 
 function swimHoursWords({ swimHoursShort }: WeekPhrases, { width, value, limit }: WeekGeometry): Words[] {

@@ -1,9 +1,8 @@
+import { leaderEnd } from './leader-end';
 import type { PlacedWords } from './place-words';
-import { type TimeAxis, xOf } from './time-axis';
+import type { TimeAxis } from './time-axis';
 import { type ValueAxis, yOf } from './value-axis';
-import { waterAt, type WaterPoint } from './water-curve';
-
-const HOUR = 3_600_000;
+import type { WaterPoint } from './water-curve';
 
 type Props = {
   words: PlacedWords | undefined;
@@ -15,12 +14,9 @@ type Props = {
 
 /** The curved line from the words about the likely range up to its lower edge. */
 export function LikelyLeader({ words, points, axis, width, value }: Props) {
-  if (words === undefined) return null;
-  const startsAt = axis.from + ((words.x + 14) / width) * (axis.to - axis.from);
-  const endsAt = startsAt + 3 * HOUR;
-  const edge = waterAt(points, endsAt)?.freeChlorine.low;
-  if (edge === undefined) return null;
-  const [fromX, toX] = [xOf(axis, width, startsAt), xOf(axis, width, endsAt)];
+  const leader = words && leaderEnd({ axis, width, points }, words.x);
+  if (words === undefined || leader === undefined) return null;
+  const { fromX, toX, edge } = leader;
   const [fromY, toY] = [words.y - 4, yOf(value, edge) + 3];
   const bend = (fromY - toY) / 2;
   return (

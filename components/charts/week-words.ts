@@ -4,6 +4,7 @@ import type { ChartTest } from './test-marks';
 import { isOn, type TimeAxis, xOf } from './time-axis';
 import { type ValueAxis, yOf } from './value-axis';
 import { footOf, waterAt, type WaterPoint } from './water-curve';
+import { leaderEnd } from './leader-end';
 
 /** What stands in the chlorine lane, already in words of the page's language. */
 export type WeekPhrases = {
@@ -12,6 +13,8 @@ export type WeekPhrases = {
   limitShort: string;
   swimHoursShort: string;
   lowest: string;
+  /** The same in two lines for a narrow page. */
+  lowestParts: [string, string];
   goodRange: string;
   likely: [string, string];
   now: { words: string; figure: string } | undefined;
@@ -50,9 +53,9 @@ const run = (text: string, weight: Weight = 'plain', size = CHART): Run => ({ te
 export function weekWords(phrases: WeekPhrases, geometry: WeekGeometry): Words[] {
   return [
     ...nowWords(phrases, geometry),
+    limitWords(phrases, geometry),
     ...gainWords(geometry),
     ...testWords(phrases, geometry),
-    limitWords(phrases, geometry),
     ...lowestWords(phrases, geometry),
     ...meetingWords(phrases, geometry),
     ...planEndWords(phrases, geometry),
@@ -205,22 +208,15 @@ function planEndWords({ planEnds }: WeekPhrases, { axis, width, value, planEndsA
   return [{ id: 'plan ends', lines: [[run(planEnds[0], 'bold')], [run(planEnds[1])]], places }];
 }
 
-function likelyWords({ likely }: WeekPhrases, geometry: WeekGeometry): Words[] {
-  const { width, value } = geometry;
+function likelyWords({ likely }: WeekPhrases, { axis, width, value, points }: WeekGeometry): Words[] {
   const lines = likely.map((text) => [run(text)]);
   const y = yOf(value, 0.6) - 2 * CHART;
-  const places = everyQuarter(width)
-    .reverse()
+  // Only under the curve: the leader has to end at it.
+  const underCurve = (x: number) => leaderEnd({ axis, width, points }, x) !== undefined;
+  const places = [width * 0.58, ...everyQuarter(width).reverse()]
+    .filter(underCurve)
     .map((x): Place => ({ x, y, anchor: 'start' }));
-  return [
-    {
-      id: 'likely',
-      lines,
-      places: [{ x: width * 0.58, y, anchor: 'start' }, ...places],
-      leader: LEADER,
-      mayBeLeftOut: true,
-    },
-  ];
+  return places.length === 0 ? [] : [{ id: 'likely', lines, places, leader: LEADER, mayBeLeftOut: true }];
 }
 
 function promisedWords({ promised }: WeekPhrases, { axis, width, value, points, now }: WeekGeometry): Words[] {

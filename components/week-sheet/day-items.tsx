@@ -8,7 +8,7 @@ import type { Check } from './checks';
 import { DoneReading } from './done-reading';
 import { DoseActions } from './dose-actions';
 import { DoseReason } from './dose-reason';
-import { nextDose } from './dose-state';
+import { mayUndo, nextDose } from './dose-state';
 import { DoseSteps } from './dose-steps';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
@@ -32,11 +32,11 @@ export function DayItems({ items }: { items: readonly ToDoItem[] }) {
   );
 }
 
-/** The dose that is next has its own box at the top; here it is only named. */
+/** The dose that is next, and one that can still be undone, have their box at the top; here they are only named. */
 function ListedDose({ dose }: { dose: PlanDose }) {
-  const { sheet } = useSheet();
+  const { sheet, picture } = useSheet();
   const words = useDoseWords();
-  const isNext = nextDose(sheet.doses)?.id === dose.id;
+  const onTop = nextDose(sheet.doses)?.id === dose.id || mayUndo(dose, picture.now, sheet.me);
   const isOpen = dose.status === 'planned';
   return (
     <div className="grid gap-1.5">
@@ -44,13 +44,13 @@ function ListedDose({ dose }: { dose: PlanDose }) {
         <b>{words.amountAndProduct(dose)}</b>
         {isOpen && <span className="block text-small text-ink-2">{words.hourOf(dose, { pump: true })}</span>}
       </p>
-      {isOpen && !isNext && (
+      {isOpen && !onTop && (
         <>
           <DoseReason dose={dose} />
           <DoseSteps dose={dose} />
         </>
       )}
-      {!isNext && <DoseActions dose={dose} />}
+      {!onTop && <DoseActions dose={dose} />}
     </div>
   );
 }

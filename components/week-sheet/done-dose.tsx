@@ -5,7 +5,7 @@ import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { Tick } from './use-tick';
-import { mayUndo, tickBar } from './dose-state';
+import { mayUndo } from './dose-state';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useDoseWords } from './use-dose-words';
@@ -17,7 +17,7 @@ export function DoneDose({ dose, tick }: { dose: PlanDose; tick: Tick }) {
   const { sheet, picture } = useSheet();
   const words = useDoseWords();
   const times = useTimes();
-  const undo = mayUndo(dose, picture.now) && tickBar(sheet.me) === undefined;
+  const undo = mayUndo(dose, picture.now, sheet.me);
   return (
     <>
       <p className="flex items-center gap-2 font-emphasis">

@@ -4,7 +4,6 @@ import { Check, Eye, Hand, UserRound } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
-import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { bold } from './bold';
@@ -16,12 +15,13 @@ import { instantOf } from './sheet-times';
 import { SkipDose } from './skip-dose';
 import { type Tick, useTick } from './use-tick';
 import { useTimes } from './use-times';
+import { useTickProblem } from './use-tick-problem';
 
 /** What this person may do about a dose at this moment, or why they may not. */
 export function DoseActions({ dose }: { dose: PlanDose }) {
   const t = useTranslations('doses');
   const { sheet, picture } = useSheet();
-  const problemWords = useProblemWords();
+  const problemWords = useTickProblem();
   const tick = useTick(dose);
   const waiting = useUnsentTicks(sheet.me.id).some(({ doseId }) => doseId === dose.id);
   const moment = momentOf(dose, picture.now);
@@ -68,6 +68,15 @@ function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {
         </Button>
       ) : (
         <ClaimedBy name={dose.claimedBy} />
+      )}
+      {dose.claimedBy === sheet.me.name && (
+        <Button
+          wide
+          onClick={() => void tick.send({ action: 'undo' })}
+          busy={tick.busy === 'undo' ? t('action.undoBusy') : undefined}
+        >
+          {t('action.unclaim')}
+        </Button>
       )}
       <Button
         wide

@@ -22,8 +22,10 @@ export function effectiveAmount(dose: PlanDose): number {
   return dose.givenAmount ?? dose.amount;
 }
 
-export function mayUndo(dose: PlanDose, now: number): boolean {
-  return dose.undoUntil !== null && now < instantOf(dose.undoUntil);
+/** Whether this person may take a tick back: their own, or as an owner anybody's, for ten minutes. */
+export function mayUndo(dose: PlanDose, now: number, me: WeekSheet['me']): boolean {
+  if (dose.undoUntil === null || now >= instantOf(dose.undoUntil) || tickBar(me) !== undefined) return false;
+  return me.role === 'owner' || dose.recordedBy === me.name;
 }
 
 /** Why somebody may read the steps but not tick; undefined when they may. */

@@ -14,7 +14,7 @@ export function DoseSteps({ dose, columns = false }: { dose: PlanDose; columns?:
   const t = useTranslations('doses');
   const words = useDoseWords();
   const units = useUnits();
-  const text = dose.substance === 'cyanuric-acid' ? 'stabilizer-bag' : dose.steps;
+  const text = textOf(dose);
   const figures = {
     hours: pumpHours(dose) ?? 0,
     litres: units.bucket(bucketLitres(dose)),
@@ -34,4 +34,10 @@ export function DoseSteps({ dose, columns = false }: { dose: PlanDose; columns?:
       ))}
     </ol>
   );
+}
+
+/** Two products go in another way than the others of their kind: dry acid is dissolved, stabilizer hangs in a bag. */
+function textOf({ substance, steps }: PlanDose) {
+  if (substance === 'cyanuric-acid') return 'stabilizer-bag';
+  return substance === 'sodium-bisulfate' ? 'dry-acid' : steps;
 }

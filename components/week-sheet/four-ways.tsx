@@ -18,7 +18,7 @@ export function FourWays() {
   const rows = burdenRows(sheet);
   if (rows.length === 0) return null;
   return (
-    <section className="border-b border-rule pt-3.5 pb-3">
+    <section className="pb-3 lg:border-b lg:border-rule lg:pt-3.5">
       <h2 className="mb-1 font-display text-section">{t('title')}</h2>
       <PictureOrTable
         sentence={t('sentence')}
@@ -55,8 +55,8 @@ function Comparison({ rows }: { rows: readonly BurdenRow[] }) {
         ))}
       </ul>
       {rows.map((row) => (
-        <div key={row.burden} className="grid h-8.75 grid-cols-[minmax(0,1fr)_110px_72px] items-center">
-          <span className="text-[13.5px] leading-4 whitespace-nowrap">{t(row.burden)}</span>
+        <div key={row.burden} className="grid min-h-8.75 grid-cols-[minmax(0,1fr)_110px_56px] items-center gap-x-2">
+          <span className="text-[13.5px] leading-4">{t(row.burden)}</span>
           <Track row={row} width={110} />
           <span className="text-right text-[13.5px] leading-4 font-strong whitespace-nowrap">
             {row.values.mix === undefined ? null : valueOf(row.burden, row.values.mix)}

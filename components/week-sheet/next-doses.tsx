@@ -22,7 +22,7 @@ export function NextDoses() {
   return (
     <>
       {sheet.doses
-        .filter((dose) => mayUndo(dose, picture.now))
+        .filter((dose) => mayUndo(dose, picture.now, sheet.me))
         .map((dose) => (
           <JustDone key={dose.id} dose={dose} />
         ))}

@@ -18,14 +18,15 @@ export function PoolFacts() {
       <p className="font-display-soft text-[25px] leading-[30px] font-section">{household.name}</p>
       {first !== undefined && last !== undefined && (
         <p className="mt-1.25 text-[15px] leading-5 font-control">
-          {t('weekOf', {
-            range: dayRange(first, last, household.locale, t('rangeJoiner')),
-            year: last.slice(0, 4),
-          })}
+          {dayRange(first, last, household.locale, t('rangeJoiner'))}
         </p>
       )}
       <p className="mt-1.25 text-small text-ink-2">
-        {t('poolFacts', { volume: units.quantity(pool.volume, 'volume'), surface: t(`surface.${pool.surface}`) })}
+        {t('poolFacts', {
+          year: last?.slice(0, 4) ?? '',
+          volume: units.quantity(pool.volume, 'volume'),
+          surface: t(`surface.${pool.surface}`),
+        })}
       </p>
       <WeekNavigation />
     </section>

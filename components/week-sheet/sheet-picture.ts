@@ -24,6 +24,7 @@ export type SheetPicture = {
   /** Behind and ahead in one, in the order of time. */
   points: WaterPoint[];
   swimLimits: Limit[];
+  /** Undefined while there is no plan that could be drawn. */
   planEndsAt: number | undefined;
   /** The first hour ahead at which the water is expected to meet a limit. */
   meeting: Meeting | undefined;
@@ -47,7 +48,7 @@ export function pictureOf(sheet: WeekSheet): SheetPicture {
     rows: rowsOf(course),
     points,
     swimLimits: swimLimitsOf(points, sheet.pool.swimLimit, axis),
-    planEndsAt: sheet.plan ? instantOf(sheet.plan.endsAt) : undefined,
+    planEndsAt: sheet.plan && sheet.ahead ? instantOf(sheet.plan.endsAt) : undefined,
     meeting: meetingOf(course.ahead, swimHours),
   };
 }

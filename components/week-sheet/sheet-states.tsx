@@ -27,7 +27,8 @@ export function SheetStates() {
 
 function PlanProblem({ problem: { code, errorId } }: { problem: NonNullable<WeekSheet['planProblem']> }) {
   const t = useTranslations('week.state');
-  const known = code === 'plan-refused' || code === 'engine-busy' ? code : 'unexpected';
+  const known =
+    code === 'plan-refused' || code === 'engine-busy' || code === 'water-out-of-range' ? code : 'unexpected';
   return (
     <ProblemState title={t('problemTitle')}>{t('problem', { why: t(`planProblem.${known}`), errorId })}</ProblemState>
   );

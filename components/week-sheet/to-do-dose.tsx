@@ -4,7 +4,6 @@ import { Hand } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { TickBox } from '@/components/ui/tick-box';
-import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { DoneLine } from './done-line';
@@ -13,44 +12,49 @@ import { mayUndo, momentOf, tickBar } from './dose-state';
 import { useSheet } from './sheet-context';
 import { useDoseWords } from './use-dose-words';
 import { useTick } from './use-tick';
+import { useTickProblem } from './use-tick-problem';
 
-/** A dose in its column: what, how much, when; once it is due, the box to tick. */
+/** A dose in its column: what, how much, when; once it is due, the box to tick. Its dialog stays open over a tick. */
 export function ToDoDose({ dose }: { dose: PlanDose }) {
   const { picture } = useSheet();
-  const moment = momentOf(dose, picture.now);
-  return moment === 'done' || moment === 'skipped' ? <DoneToDo dose={dose} /> : <OpenToDo dose={dose} />;
-}
-
-function DoneToDo({ dose }: { dose: PlanDose }) {
-  const t = useTranslations('doses');
-  const { sheet, picture } = useSheet();
-  const words = useDoseWords();
   const [open, setOpen] = useState(false);
-  const skipped = dose.status === 'skipped';
+  const moment = momentOf(dose, picture.now);
+  const Line = moment === 'done' || moment === 'skipped' ? DoneToDo : OpenToDo;
   return (
-    <div>
-      <DoneLine
-        what={words.amountAndProduct(dose)}
-        who={skipped ? words.skippedBy(dose) : words.doneBy(dose)}
-        skipped={skipped}
-      />
-      {mayUndo(dose, picture.now) && tickBar(sheet.me) === undefined && (
-        <StepsLink onPress={() => setOpen(true)}>{t('action.undo')}</StepsLink>
-      )}
+    <div className="flex flex-col last:flex-1">
+      <Line dose={dose} onOpen={() => setOpen(true)} />
       <DoseDialog dose={dose} open={open} onOpenChange={setOpen} />
     </div>
   );
 }
 
-function OpenToDo({ dose }: { dose: PlanDose }) {
+type LineProps = { dose: PlanDose; onOpen: () => void };
+
+function DoneToDo({ dose, onOpen }: LineProps) {
   const t = useTranslations('doses');
   const { sheet, picture } = useSheet();
   const words = useDoseWords();
-  const [open, setOpen] = useState(false);
+  const skipped = dose.status === 'skipped';
+  return (
+    <>
+      <DoneLine
+        what={words.amountAndProduct(dose)}
+        who={skipped ? words.skippedBy(dose) : words.doneBy(dose)}
+        skipped={skipped}
+      />
+      {mayUndo(dose, picture.now, sheet.me) && <StepsLink onPress={onOpen}>{t('action.undo')}</StepsLink>}
+    </>
+  );
+}
+
+function OpenToDo({ dose, onOpen }: LineProps) {
+  const t = useTranslations('doses');
+  const { sheet, picture } = useSheet();
+  const words = useDoseWords();
   const moment = momentOf(dose, picture.now);
   const ticks = moment !== 'ahead' && tickBar(sheet.me) === undefined;
   return (
-    <div className="flex flex-col last:flex-1">
+    <>
       {dose.claimedBy !== null && (
         <p className="mb-1 flex items-center gap-1 text-chart font-strong">
           <Hand aria-hidden="true" className="size-4" />
@@ -66,10 +70,9 @@ function OpenToDo({ dose }: { dose: PlanDose }) {
       </p>
       <div className="mt-auto pt-1">
         {ticks && <TickHere dose={dose} />}
-        <StepsLink onPress={() => setOpen(true)}>{t(ticks ? 'action.stepsAndMore' : 'action.steps')}</StepsLink>
+        <StepsLink onPress={onOpen}>{t(ticks ? 'action.stepsAndMore' : 'action.steps')}</StepsLink>
       </div>
-      <DoseDialog dose={dose} open={open} onOpenChange={setOpen} />
-    </div>
+    </>
   );
 }
 
@@ -78,7 +81,7 @@ function TickHere({ dose }: { dose: PlanDose }) {
   const t = useTranslations('doses');
   const { sheet } = useSheet();
   const { send, busy, problem } = useTick(dose);
-  const problemWords = useProblemWords();
+  const problemWords = useTickProblem();
   const waiting = useUnsentTicks(sheet.me.id).some(({ doseId }) => doseId === dose.id);
   if (waiting) return <p className="text-fine font-emphasis">{t('unsent.card')}</p>;
   return (

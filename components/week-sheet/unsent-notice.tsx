@@ -6,10 +6,10 @@ import { Button } from '@/components/ui/button';
 import { Callout } from '@/components/ui/callout';
 import { type SentTick, useTickDose } from '@/lib/client/doses';
 import { RequestProblem } from '@/lib/client/fetch-json';
-import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { forgetTick, useUnsentTicks } from '@/lib/client/unsent-ticks';
 import { useSheet } from './sheet-context';
 import { useDoseWords } from './use-dose-words';
+import { useTickProblem } from './use-tick-problem';
 
 /** Ticks that did not reach the server: kept here, sent by themselves when the connection is back, never silently. */
 export function UnsentNotice() {
@@ -23,7 +23,7 @@ function UnsentTick({ sent }: { sent: SentTick }) {
   const common = useTranslations('common');
   const { sheet, start } = useSheet();
   const words = useDoseWords();
-  const problemWords = useProblemWords();
+  const problemWords = useTickProblem();
   const { mutateAsync } = useTickDose(start);
   const [sending, setSending] = useState(false);
   const [problem, setProblem] = useState<unknown>(undefined);

@@ -54,6 +54,7 @@ export function useChlorinePhrases(): Pick<ChlorineLaneProps, 'phrases' | 'label
       limitShort: t('limitShort', { limit }),
       swimHoursShort: t('swimHoursShort', swimHours),
       lowest: t('lowest', { lowest }),
+      lowestParts: [t('lowestShort', { lowest }), t('lowestWhy')],
       goodRange: t('goodRange'),
       likely: [t('likely1'), t('likely2')],
       now: water && { words: t('now', { time: times.clock(now) }), figure: level(water.freeChlorine.middle) },

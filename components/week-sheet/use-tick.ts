@@ -1,6 +1,6 @@
 'use client';
 
-import { useRef, useState } from 'react';
+import { useEffect, useRef } from 'react';
 import { useTickDose } from '@/lib/client/doses';
 import { RequestProblem } from '@/lib/client/fetch-json';
 import { forgetTick, keepTick } from '@/lib/client/unsent-ticks';
@@ -17,44 +17,42 @@ export type Intention = { action: 'claim' | 'given' | 'skipped' | 'undo' } | { a
 export function useTick(dose: PlanDose) {
   const { sheet, start } = useSheet();
   const clock = useClock();
-  const mutation = useTickDose(start);
+  const { mutateAsync, isPending, variables, error } = useTickDose(start);
   const intention = useRef<{ key: string; tick: DoseTick } | undefined>(undefined);
-  const [busy, setBusy] = useState<Intention['action'] | undefined>(undefined);
-  const [problem, setProblem] = useState<unknown>(undefined);
+  const sending = useRef(false);
+  // The second press of a double click may come before the page shows what the first one did: the next sheet does.
+  useEffect(() => {
+    sending.current = false;
+  }, [sheet]);
 
-  const send = async (wanted: Intention) => {
-    if (busy !== undefined) return false;
+  const send = async (wanted: Intention): Promise<void> => {
+    if (sending.current || isPending) return;
+    sending.current = true;
     // After the dose or its plan has changed, the same words are another intention.
     const key = JSON.stringify([wanted, dose.status, dose.planVersion]);
     if (intention.current?.key !== key)
       intention.current = { key, tick: { ...wanted, id: crypto.randomUUID(), planVersion: dose.planVersion } };
     const { tick } = intention.current;
-    setBusy(wanted.action);
-    setProblem(undefined);
     try {
-      await mutation.mutateAsync({ doseId: dose.id, tick });
+      await mutateAsync({ doseId: dose.id, tick });
       intention.current = undefined;
       forgetTick(sheet.me.id, tick.id);
-      return true;
     } catch (cause) {
-      setProblem(cause);
+      sending.current = false;
       const unheard = cause instanceof RequestProblem && cause.code === 'no-connection';
       // 'I am adding it now' is worth nothing later.
       if (unheard && tick.action !== 'claim')
         keepTick(sheet.me.id, { doseId: dose.id, tick: pressedAt(tick, clock()) });
-      return false;
-    } finally {
-      setBusy(undefined);
     }
   };
 
-  return { send, busy, problem };
+  return { send, busy: isPending ? variables.tick.action : undefined, problem: error ?? undefined };
 }
+
+export type Tick = ReturnType<typeof useTick>;
 
 /** A tick that arrives late still says when the product went in. */
 function pressedAt(tick: DoseTick, instant: number): DoseTick {
   if (tick.action !== 'given' && tick.action !== 'changed') return tick;
   return { ...tick, at: new Date(instant).toISOString() };
 }
-
-export type Tick = ReturnType<typeof useTick>;

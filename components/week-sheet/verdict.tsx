@@ -34,12 +34,18 @@ export function Verdict() {
           ))}
         </ul>
       )}
+      <WaterNow framed />
       {sheet.verdict.state !== 'stay-out' && (
-        <Link href="/test" className={buttonClass({ size: 'small', className: 'mt-3' })}>
-          {t('quickCheck')}
+        <Link
+          href="/test"
+          className={buttonClass({
+            variant: sheet.verdict.state === 'test-first' ? 'primary' : 'outline',
+            className: 'mt-3 mb-1',
+          })}
+        >
+          {t(sheet.lastReading === null ? 'enterTest' : 'quickCheck')}
         </Link>
       )}
-      <WaterNow />
     </VerdictFrame>
   );
 }

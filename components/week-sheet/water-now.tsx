@@ -12,13 +12,13 @@ import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
 import { useUnits } from './use-units';
 
-/** What is known of the water at this moment: level, likely range, age of the last reading. */
-export function WaterNow({ children }: { children?: React.ReactNode }) {
+/** What is known of the water at this moment: level, likely range, age of the last reading. Framed, it is the smaller print. */
+export function WaterNow({ framed = false, children }: { framed?: boolean; children?: React.ReactNode }) {
   const { sheet, picture } = useSheet();
   const water = waterAt(picture.points, picture.now);
   return (
     <>
-      {water && <Level />}
+      {water && <Level framed={framed} />}
       {/* On a phone the standing line comes before the likely range, on a desk after it. */}
       <div className="flex flex-col md:flex-col-reverse">
         {children}
@@ -31,7 +31,7 @@ export function WaterNow({ children }: { children?: React.ReactNode }) {
   );
 }
 
-function Level() {
+function Level({ framed }: { framed: boolean }) {
   const t = useTranslations('week.water');
   const { sheet, picture } = useSheet();
   const units = useUnits();
@@ -45,7 +45,7 @@ function Level() {
   const check = nextCheck(sheet.checks);
   const when = check && times.partAt(instantOf(check.at));
   return (
-    <p className="mt-1.5 font-display text-lead text-pretty md:mt-0">
+    <p className={framed ? 'mt-1.5 text-body text-pretty' : 'mt-1.5 font-display text-lead text-pretty md:mt-0'}>
       {t(side, {
         value: units.quantity(level, 'freeChlorine'),
         lowest: units.figure(water.lowestLevel, 'freeChlorine'),

@@ -11,9 +11,9 @@ export function WhyThisMix() {
   const t = useTranslations('week.why');
   const { plan } = useSheet().sheet;
   return (
-    <section className="border-b border-rule pb-3">
+    <section className="pb-3 lg:border-b lg:border-rule">
       <h2 className="mb-1.5 font-display text-section">{t('title')}</h2>
-      {plan === null ? <p className="text-ink-2">{t('none')}</p> : <Reasons plan={plan} />}
+      {plan === null || plan.cost === null ? <p className="text-ink-2">{t('none')}</p> : <Reasons plan={plan} />}
     </section>
   );
 }

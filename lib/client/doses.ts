@@ -1,14 +1,14 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import type { DoseTick } from '@/lib/schemas/plan-dose';
 import { weekSheetSchema } from '@/lib/schemas/week-sheet';
-import { fetchJson } from './fetch-json';
+import { fetchJson, RequestProblem } from './fetch-json';
 import { weekKeys } from './week';
 
 export type SentTick = { doseId: string; tick: DoseTick };
 
 /**
- * Says what became of a dose. The reply is the whole sheet with its new plan, so the curve moves at once; a sheet of
- * another week only goes stale. Never held back while offline: the caller keeps what could not be sent.
+ * Says what became of a dose. The reply is the whole sheet of the dose's week with its new plan, so the curve moves at once;
+ * where another week is on the screen, that is fetched again. Never held back while offline: the caller keeps what could not be sent.
  *
  * @param start the week on the screen, as it was asked for
  */
@@ -24,8 +24,14 @@ export function useTickDose(start: string | undefined) {
       // A refetch that set out before the tick would bring the old sheet back.
       await queryClient.cancelQueries({ queryKey: weekKeys.all });
       const known = queryClient.getQueryData<typeof sheet>(shown);
-      if (known === undefined || known.days[0]?.day === sheet.days[0]?.day) queryClient.setQueryData(shown, sheet);
-      await queryClient.invalidateQueries({ queryKey: weekKeys.all, refetchType: 'none' });
+      const isShown = known === undefined || known.days[0]?.day === sheet.days[0]?.day;
+      await queryClient.invalidateQueries({ queryKey: weekKeys.all, refetchType: isShown ? 'none' : 'active' });
+      if (isShown) queryClient.setQueryData(shown, sheet);
     },
+    // Somebody was first, or the plan has moved on: what is on the screen is no longer true.
+    onError: (problem) =>
+      problem instanceof RequestProblem && problem.code === 'conflict'
+        ? queryClient.invalidateQueries({ queryKey: weekKeys.all })
+        : undefined,
   });
 }

@@ -76,7 +76,7 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
     },
     planProblem: null,
     lastReading: readings.at(-1) ?? null,
-    readings,
+    readings: readings.filter(({ takenAt: taken }) => Date.parse(taken) >= startOfDay(start, timeZone)),
     doses,
     checks: [
       { at: iso(at(3, '19:00')), kind: 'quick', reason: 'swim-day-after-two-days', done: false },
