@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { poolFloors, poolShapes, type PoolSizeAnswer, volumeUnits } from '@/lib/schemas/pool-size';
 import { formatForInput } from '@/lib/units/format';
-import { parseDecimal, parseQuantity } from '@/lib/units/parse';
+import { parseQuantity, parseVolume } from '@/lib/units/parse';
 import { fromInside, toInside, type UnitSystem } from '@/lib/units/unit';
 import { likelyUnitMistake, type UnitQuestion, type VolumeUnit } from '@/lib/units/unit-mistake';
 
@@ -117,7 +117,7 @@ export function sizeAnswersOf(draft: SizeDraft): unknown {
     const meanDepth = metres('meanDepth');
     return {
       how: 'entered',
-      volume: parseDecimal(draft.volume),
+      volume: parseVolume(draft.volume),
       unit: draft.unit,
       sure: draft.sure ?? undefined,
       unitConfirmed: isConfirmed(draft),
@@ -141,7 +141,7 @@ function floorOf({ floor }: SizeDraft, metres: (field: LengthField) => number | 
 
 /** The question to ask back about the unit of a typed volume; undefined when there is none, or it was answered. */
 export function unitQuestionOf(draft: SizeDraft): (UnitQuestion & { likelier: object; value: number }) | undefined {
-  const value = parseDecimal(draft.volume);
+  const value = parseVolume(draft.volume);
   if (draft.how !== 'entered' || value === undefined || value <= 0 || isConfirmed(draft)) return undefined;
   const question = likelyUnitMistake(value, draft.unit);
   return question?.likelier && { ...question, likelier: question.likelier, value };

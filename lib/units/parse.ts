@@ -29,3 +29,16 @@ export function parseQuantity<Q extends Quantity>(
   const value = parseDecimal(text);
   return value === undefined ? undefined : toInside(value, unit);
 }
+
+/** "18,000", "18.000", "18 000": digits in groups of three. */
+const grouped = /^\d{1,3}(?:([.,\u0020\u00a0\u202f'\u2019])\d{3})(?:\1\d{3})*$/;
+
+/**
+ * The volume of a pool as people write it. Here a comma or point before three digits groups thousands, since nobody knows
+ * a pool to a thousandth: "18,000" is eighteen thousand, "18,5" and "18.50" are a fraction. Whoever did mean 18 m3 is asked
+ * back, because no garden pool holds 18,000.
+ */
+export function parseVolume(text: string): number | undefined {
+  const typed = text.trim();
+  return parseDecimal(grouped.test(typed) ? typed.replace(/\D/g, '') : typed);
+}
