@@ -79,7 +79,8 @@ function databaseUrlOf(value: string | undefined): string {
   if (value === undefined) return `file:${join(root, 'data', 'wadewell.db')}`;
   const path = value.startsWith('file:') ? value.slice('file:'.length) : undefined;
   if (path === undefined || isAbsolute(path)) return value;
-  return `file:${join(root, path)}`;
+  // Not a source of the build: without the mark the bundler would take in the whole project folder.
+  return `file:${join(/*turbopackIgnore: true*/ root, path)}`;
 }
 
 let known: Environment | undefined;

@@ -8,6 +8,7 @@ import { sessionsOf } from '@/lib/auth/sessions';
 import { systemScope } from '@/lib/auth/system-scope';
 import { environment, now as wallClock } from '@/lib/env';
 import { log } from '@/lib/log';
+import { keepDemoFresh } from './keep-demo-fresh';
 
 /** Brings the database up to date and clears away what has run out; the server answers nobody before. */
 export async function startServer(): Promise<void> {
@@ -20,4 +21,5 @@ export async function startServer(): Promise<void> {
   const scope = systemScope('clean-up');
   await deleteExpiredRateLimits(db, scope, now);
   await inWriteTransaction(db, (tx) => deleteExpiredDemoCopies(tx, scope, now));
+  keepDemoFresh(db, wallClock);
 }
