@@ -50,7 +50,7 @@ export function checksOf(
     checks.push({ at, kind: 'quick', reason });
     lastTest = at;
   }
-  checks.push({ at: endsAt, kind: 'full', reason: 'next-week' });
+  checks.push({ at: Math.max(endsAt, now), kind: 'full', reason: 'next-week' });
   return checks.map((check) => ({ ...check, at: toOffsetIso(check.at, pool.timeZone) }));
 }
 

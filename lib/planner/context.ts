@@ -5,7 +5,9 @@ import { ensembleOf, type Member } from '@/lib/projection/ensemble';
 import type { WeekDose } from '@/lib/projection/events';
 import { type Forcing, prepareForcing } from '@/lib/projection/forcing';
 import { type Course, integrateWeek } from '@/lib/projection/integrate';
+import { bandOf } from '@/lib/projection/quantiles';
 import type { Scenario } from '@/lib/schemas/scenario';
+import { limits } from '@/lib/standards/limits';
 import { ledgerOf } from '@/lib/chemistry';
 import { weekDoseOf } from './given-doses';
 import { type StartingWater, startingWater } from './starting-water';
@@ -34,6 +36,8 @@ export type PlanContext = {
   swimHour: readonly boolean[];
   /** The swim limit at each hour [mg/L]; infinite while nobody may swim. */
   swimCeiling: Float64Array;
+  /** From when on [ms] the likely range stays at or under 10 mg/L by itself: nothing goes in before. */
+  belowMaximumFrom: number;
   /** Whether stabilized products have been used, so that the higher code minimum holds. */
   stabilizedProductUsed: boolean;
 };
@@ -54,6 +58,7 @@ export function contextOf(scenario: Scenario): PlanContext {
   const median: Member = { start: { ledger: ledgerOf(start.water), loads: start.loads }, setting };
   const members = ensembleOf(start.water, start.errors, start.loads, setting);
   const undosed = (member: Member) => integrateWeek(forcing, member.start, given, member.setting);
+  const all = members.map((member) => ({ member, undosed: undosed(member) }));
   return {
     scenario,
     now: scenario.now === undefined ? start.takenAt : Math.max(start.takenAt, parseInstant(scenario.now)!),
@@ -62,13 +67,28 @@ export function contextOf(scenario: Scenario): PlanContext {
     forcing,
     median,
     members,
-    searchMembers: spread(members.map((member) => ({ member, undosed: undosed(member) }))),
+    searchMembers: spread(all),
+    belowMaximumFrom: belowMaximumFrom(all, hours),
     undosed: undosed(median),
     hours,
     swimHour,
     swimCeiling: Float64Array.from(swimHour, (swims) => (swims ? pool.swimLimit : Infinity)),
-    stabilizedProductUsed: given.some((dose) => dose.kind === 'tablets') || start.loads.length > 0,
+    stabilizedProductUsed: start.loads.length > 0 || given.some(bringsStabilizer),
   };
+}
+
+/** Trichlor and dichlor bring chlorine and stabilizer together. */
+function bringsStabilizer(dose: WeekDose): boolean {
+  return dose.kind === 'tablets' || (dose.contents.freeChlorine > 0 && dose.contents.cyanurate > 0);
+}
+
+/** The instant after which the 90th percentile of free chlorine is never over the maximum; infinite when it never is. */
+function belowMaximumFrom(all: readonly Undosed[], hours: readonly number[]): number {
+  const { value: maximum } = limits.freeChlorineMaximum;
+  const rows = all.map(({ undosed }) => undosed.hourly.freeChlorine);
+  if (rows.every((row) => row.every((level) => level <= maximum))) return -Infinity;
+  const last = bandOf(rows).p90.findLastIndex((level) => level > maximum);
+  return last < 0 ? -Infinity : (hours[last + 1] ?? Infinity);
 }
 
 /** A few members that stand for all: evenly spread over their order by the chlorine that is left to them. */
@@ -82,13 +102,13 @@ function meanChlorine({ hourly }: Course): number {
   return hourly.freeChlorine.reduce((sum, level) => sum + level, 0) / hourly.freeChlorine.length;
 }
 
-/** Whether each instant [ms] lies in the household's swim hours, both ends included. */
+/** Whether each instant [ms] lies in the household's swim hours; their end is no longer one of them. */
 export function swimHours({ pool }: Pick<Scenario, 'pool'>, hours: readonly number[]): boolean[] {
   const cache = new Map<string, ReturnType<typeof intervalsOfDay>>();
   return hours.map((hour) => {
     const day = dayOf(hour, pool.timeZone);
     const intervals = cache.get(day) ?? intervalsOfDay([pool.swimHours], day, pool.timeZone);
     cache.set(day, intervals);
-    return intervals.some(({ from, to }) => hour >= from && hour <= to);
+    return intervals.some(({ from, to }) => hour >= from && hour < to);
   });
 }

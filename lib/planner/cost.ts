@@ -6,7 +6,7 @@ import type { Cost } from '@/lib/schemas/plan';
 import { limits, lowestLevel } from '@/lib/standards/limits';
 import { surfaceRanges } from '@/lib/standards/surface-ranges';
 import type { PlanContext } from './context';
-import { type Choice, type Draft, visitsOf, weekDosesOf } from './draft';
+import { type Choice, type Draft, measuresToBuy, visitsOf, weekDosesOf } from './draft';
 import { weights } from './weights';
 
 export type Evaluated = { draft: Draft; choice: Choice; median: Course; courses: Course[]; cost: Cost };
@@ -33,7 +33,7 @@ function costOf(draft: Draft, choice: Choice, median: Course, courses: readonly 
   const first = context.start.water;
   const cost = {
     money: preferences.money * moneyOf(draft, choice),
-    visits: preferences.evenings * weights.visit * visitsOf(draft),
+    visits: preferences.evenings * troubleOf(draft),
     shortfall: preferences.steadiness * risk.shortfall,
     excess: preferences.steadiness * risk.excess,
     stabilizer: stabilizerPrice(water.cyanuricAcid.at(-1)!, context),
@@ -50,6 +50,11 @@ export function stabilizedIn(draft: Draft, context: PlanContext): boolean {
 export function moneyOf({ tablets, fast, measures }: Draft, choice: Choice): number {
   const count = measures.reduce((sum, each) => sum + each, 0);
   return tablets * (choice.tablets?.price ?? 0) + count * (fast?.measurePrice ?? 0);
+}
+
+/** The price of going to the pool, and to the shop. */
+export function troubleOf(draft: Draft): number {
+  return weights.visit * visitsOf(draft) + (measuresToBuy(draft) > 0 ? weights.errand : 0);
 }
 
 /** Free chlorine of courses [mg/L], hour by hour, the courses side by side: [hour * courses + course]. */

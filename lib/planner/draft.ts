@@ -47,6 +47,13 @@ export function fastEvenings(draft: Draft): number {
   return draft.measures.filter((measures) => measures > 0).length;
 }
 
+/** Measures beyond what the shelf holds of the fast product: they have to be bought. */
+export function measuresToBuy({ fast, measures }: Draft): number {
+  if (!fast) return 0;
+  const held = Math.floor(fast.stock / fast.measure + 1e-9);
+  return Math.max(0, measures.reduce((sum, each) => sum + each, 0) - held);
+}
+
 export function visitsOf(draft: Draft): number {
   return fastEvenings(draft) + (draft.tablets > 0 ? 1 : 0);
 }

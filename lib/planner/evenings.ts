@@ -1,18 +1,25 @@
-import { addDays, dayOf, type CalendarDay } from '@/lib/calendar/household-day';
-import { wallToInstant } from '@/lib/calendar/wall-time';
+import { addDays, dayOf, startOfDay, type CalendarDay } from '@/lib/calendar/household-day';
+import { intervalsOfDay, wallToInstant } from '@/lib/calendar/wall-time';
+import type { WeekDose } from '@/lib/projection/events';
 import { MILLISECONDS_PER_HOUR, HOURS_IN_PLAN } from '@/lib/projection/forcing';
 import type { Pool } from '@/lib/schemas/pool';
+import { limits } from '@/lib/standards/limits';
 import { daylightOf } from '@/lib/sun/daylight';
+import type { PlanContext } from './context';
 
 const QUARTER_HOUR = MILLISECONDS_PER_HOUR / 4;
-const BEFORE_SUNSET = MILLISECONDS_PER_HOUR;
+const LAST_LIGHT_BEFORE_SUNSET = MILLISECONDS_PER_HOUR;
+const SWIM_WAIT = limits.swimAfterDose.value * MILLISECONDS_PER_HOUR;
+/** Nobody is asked to wait longer than this for the last swimmer. */
+const LONGEST_WAIT = 12 * MILLISECONDS_PER_HOUR;
 
 /** An evening on which something may go in. */
 export type Evening = { day: CalendarDay; at: number; afterDark: boolean };
 
 /**
- * The dose hour of each day of the plan: 60 minutes before sunset rounded to a quarter hour, and never before the last
- * swim hour is over (nothing goes in while somebody may swim). Where the sun does not set, the end of the swim hours.
+ * The dose hour of each day of the plan: 60 minutes before sunset rounded to a quarter hour; where that falls into the swim
+ * hours or less than the waiting time before them, a quarter hour after they end: nothing goes in while somebody may swim.
+ * Where the sun does not set, noon takes the place of that hour. A day on which swimming never stops has none.
  *
  * @param takenAt first instant of the plan [ms]
  * @param now     nothing is planned before it [ms]
@@ -20,21 +27,41 @@ export type Evening = { day: CalendarDay; at: number; afterDark: boolean };
 export function doseEvenings(pool: Pool, takenAt: number, now: number): Evening[] {
   const endsAt = takenAt + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR;
   const evenings: Evening[] = [];
-  for (let day = dayOf(takenAt, pool.timeZone); evenings.length < 8; day = addDays(day, 1)) {
-    const { at, sunset } = doseHour(pool, day);
-    if (at >= endsAt) break;
-    if (at >= now && at >= takenAt) evenings.push({ day, at, afterDark: sunset !== null && at > sunset });
+  for (let day = dayOf(takenAt, pool.timeZone); startOfDay(day, pool.timeZone) < endsAt; day = addDays(day, 1)) {
+    const hour = doseHour(pool, day);
+    if (hour && hour.at < endsAt && hour.at >= now && hour.at >= takenAt) evenings.push({ day, ...hour });
   }
   return evenings;
 }
 
-function doseHour(pool: Pool, day: CalendarDay): { at: number; sunset: number | null } {
+/**
+ * The evenings that a plan may use: none while the likely range is over 10 mg/L by itself, none on a day on which chlorine
+ * was given, none within the gap between acid and chlorine of anything given.
+ */
+export function openEvenings({ scenario, start, now, given, belowMaximumFrom }: PlanContext): Evening[] {
+  const { pool } = scenario;
+  const gap = limits.acidToChlorineGap.value * MILLISECONDS_PER_HOUR;
+  const chlorineDays = new Set(given.filter(bringsChlorine).map(({ at }) => dayOf(at, pool.timeZone)));
+  return doseEvenings(pool, start.takenAt, now).filter(
+    ({ day, at }) =>
+      at >= belowMaximumFrom && !chlorineDays.has(day) && given.every((dose) => Math.abs(dose.at - at) >= gap),
+  );
+}
+
+function bringsChlorine(dose: WeekDose): boolean {
+  return dose.kind === 'tablets' || dose.contents.freeChlorine > 0;
+}
+
+function doseHour(pool: Pool, day: CalendarDay): Omit<Evening, 'day'> | undefined {
   const noon = wallToInstant(day, '12:00', pool.timeZone).instant;
   const { sunset } = daylightOf(noon, pool.latitude, pool.longitude);
-  const swimEnd = wallToInstant(day, pool.swimHours.to, pool.timeZone).instant;
-  if (sunset === null) return { at: swimEnd, sunset };
-  const lastLight = Math.round((sunset - BEFORE_SUNSET) / QUARTER_HOUR) * QUARTER_HOUR;
-  const swimStart = wallToInstant(day, pool.swimHours.from, pool.timeZone).instant;
-  const swimming = lastLight >= swimStart && lastLight < swimEnd;
-  return { at: swimming ? swimEnd : lastLight, sunset };
+  const lastLight =
+    sunset === null ? noon : Math.round((sunset - LAST_LIGHT_BEFORE_SUNSET) / QUARTER_HOUR) * QUARTER_HOUR;
+  const swimming = [addDays(day, -1), day, addDays(day, 1)].flatMap((each) =>
+    intervalsOfDay([pool.swimHours], each, pool.timeZone),
+  );
+  let at = lastLight;
+  for (const { from, to } of swimming) if (at > from - SWIM_WAIT && at <= to) at = to + QUARTER_HOUR;
+  if (at - lastLight > LONGEST_WAIT) return undefined;
+  return { at, afterDark: sunset !== null && at > sunset };
 }

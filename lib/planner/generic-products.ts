@@ -1,27 +1,14 @@
-import { type ShelfProduct, shelfProductSchema } from '@/lib/schemas/shelf-product';
-import { assumedPrice } from './weights';
+import { type ShelfProduct, shelfProductSchema, type substances } from '@/lib/schemas/shelf-product';
+import { genericProducts } from '@/lib/standards/generic-products';
 
-const generic = (product: object): ShelfProduct => shelfProductSchema.parse({ stock: 1e6, ...product });
-
-/** What a shop sells, for a dose or a comparison that the shelf has no product for: such a dose is marked to buy. */
-export const genericGranules = generic({
-  id: 'generic-granules',
-  form: 'granular',
-  substance: 'calcium-hypochlorite',
-  strength: 65,
-  labelWay: 'dissolve',
-  measure: 50,
-  pricePerKg: assumedPrice.perKilogram,
-});
-export const genericLiquid = generic({
-  id: 'generic-liquid',
-  form: 'liquid',
-  substance: 'sodium-hypochlorite',
-  strength: 12.5,
-  measure: 250,
-  pricePerLitre: assumedPrice.perLitre,
-});
+/** What a shop sells of a substance, as a product that there is enough of: its doses are marked to buy. */
+export const generic = Object.fromEntries(
+  Object.entries(genericProducts).map(([substance, product]) => [
+    substance,
+    shelfProductSchema.parse({ substance, stock: 1e6, ...product }),
+  ]),
+) as Record<(typeof substances)[number], ShelfProduct>;
 
 export function isGeneric(product: ShelfProduct): boolean {
-  return product === genericGranules || product === genericLiquid;
+  return product.substance !== 'other' && generic[product.substance] === product;
 }

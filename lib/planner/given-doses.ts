@@ -1,41 +1,64 @@
 import { parseInstant } from '@/lib/calendar/wall-time';
-import type { Substance } from '@/lib/chemistry';
 import { AppError } from '@/lib/errors';
 import { type WeekDose, weekDose } from '@/lib/projection/events';
-import type { GivenDose } from '@/lib/schemas/dose';
+import type { DoseUnit } from '@/lib/schemas/dose';
 import type { Pool } from '@/lib/schemas/pool';
-import type { ShelfProduct } from '@/lib/schemas/shelf-product';
-import { liquidStrength } from './products';
+import type { ShelfProduct, substances } from '@/lib/schemas/shelf-product';
+import { generic } from './generic-products';
+import { liquidStrength, tabletFacts } from './product-facts';
+
+/** A dose as somebody names it: of a product on the shelf, or of a substance that has to be bought. */
+export type NamedDose = {
+  at: string;
+  product?: string | null | undefined;
+  substance?: (typeof substances)[number] | undefined;
+  amount: number;
+  unit: DoseUnit;
+};
 
 /**
- * A dose of a shelf product as the projection takes it: liquid at its strength on that day.
+ * A named dose as the projection takes it: liquid at its strength on that day, what has to be bought at usual strength.
  *
  * Errors: invalid-input with the dose's path for a product that is not on the shelf, cannot be reckoned with, or is
  * counted in another unit.
  */
-export function weekDoseOf(given: GivenDose, path: string, shelf: readonly ShelfProduct[], pool: Pool): WeekDose {
+export function weekDoseOf(named: NamedDose, path: string, shelf: readonly ShelfProduct[], pool: Pool): WeekDose {
   const problem = (field: string, message: string) =>
     new AppError('invalid-input', message, { problems: [{ path: `${path}.${field}`, message }] });
-  const product = shelf.find(({ id }) => id === given.product);
-  if (!product) throw problem('product', `No product "${given.product}" is on the shelf.`);
+  const product = productOf(named, shelf);
+  if (!product)
+    throw problem(
+      'product',
+      (named.product ?? null) === null
+        ? 'Name a product of the shelf, or a substance.'
+        : `No product "${named.product}" is on the shelf.`,
+    );
   if (product.substance === 'other')
     throw problem('product', 'A blend cannot be reckoned with: its contents are not known.');
-  const at = parseInstant(given.at)!;
+  const at = parseInstant(named.at)!;
   const unit = product.form === 'tablet' ? 'tablet' : product.form === 'liquid' ? 'mL' : 'g';
-  if (given.unit !== unit) throw problem('unit', `This product is counted in ${unit}.`);
+  if (named.unit !== unit) throw problem('unit', `This product is counted in ${unit}.`);
+  const { substance, alkali } = product;
   if (product.form === 'tablet') {
-    const tabletMass = product.tabletMass ?? 227;
-    return {
-      at,
-      kind: 'tablets',
-      load: { tabletMass, count: given.amount, strength: product.strength ?? 90, erodedShare: 0 },
-    };
+    const { tabletMass, strength } = tabletFacts(product);
+    return { at, kind: 'tablets', load: { tabletMass, count: named.amount, strength, erodedShare: 0 } };
   }
-  const substance: Substance = product.substance;
+  const hypochlorite = substance === 'sodium-hypochlorite' || substance === 'calcium-hypochlorite';
   const strength =
     substance === 'sodium-hypochlorite' ? liquidStrength(product, pool.timeZone)(at).strength : product.strength;
-  const dose = { substance, amount: given.amount, ...(strength === undefined ? {} : { strength }) };
-  const alkali =
-    substance === 'sodium-hypochlorite' || substance === 'calcium-hypochlorite' ? { alkali: product.alkali } : {};
-  return weekDose(at, { ...dose, ...alkali }, pool.volume);
+  return weekDose(
+    at,
+    {
+      substance,
+      amount: named.amount,
+      ...(strength === undefined ? {} : { strength }),
+      ...(hypochlorite ? { alkali } : {}),
+    },
+    pool.volume,
+  );
+}
+
+function productOf({ product, substance }: NamedDose, shelf: readonly ShelfProduct[]): ShelfProduct | undefined {
+  if ((product ?? null) !== null) return shelf.find(({ id }) => id === product);
+  return substance && generic[substance];
 }

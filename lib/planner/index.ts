@@ -2,16 +2,15 @@ import { dayOf } from '@/lib/calendar/household-day';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { analysisAt, type CourseBand } from '@/lib/projection';
 import { integrateWeek } from '@/lib/projection/integrate';
-import type { GivenDose } from '@/lib/schemas/dose';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { alternativesOf } from './alternatives';
-import { assertSafePlan } from './assert-safe-plan';
+import { assertSafePlan } from './safety/assert-safe-plan';
 import { checksOf } from './checks';
 import { contextOf, type PlanContext } from './context';
-import { evaluate, type Evaluated, stabilizedIn } from './cost';
+import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import type { Choice } from './draft';
-import { doseEvenings } from './evenings';
+import { openEvenings } from './evenings';
 import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
 import { weekDoseOf } from './given-doses';
@@ -24,7 +23,7 @@ import { responseOf } from './response';
 import { searchPlan } from './search';
 import { ENGINE_VERSION } from './version';
 
-export { assertSafePlan } from './assert-safe-plan';
+export { assertSafePlan } from './safety/assert-safe-plan';
 export { ENGINE_VERSION } from './version';
 export type { CourseBand };
 
@@ -41,10 +40,12 @@ export function planWeek(scenario: Scenario): WeekPlan {
   const { blocking, wanted } = needsOf(scenario);
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
   const context = contextOf(scenario);
-  const options = optionsOf(scenario, context.start);
-  const evenings = doseEvenings(scenario.pool, context.start.takenAt, context.now);
-  const visits = Math.max(0, scenario.preferences.visits - visitsGiven(context));
-  const choice: Choice = { evenings, visits, tablets: options.tablets };
+  const options = optionsOf(context);
+  const choice: Choice = {
+    evenings: openEvenings(context),
+    visits: Math.max(0, scenario.preferences.visits - visitsGiven(context)),
+    tablets: options.tablets,
+  };
   const response = responseOf(context, choice);
   const fast = options.fast.length > 0 ? options.fast : [null];
   const found = searchPlan(context, response, { choice, fast });
@@ -56,6 +57,8 @@ export function planWeek(scenario: Scenario): WeekPlan {
   const projection = projectionOf(best.courses, best.median, context, stabilized);
   const broken = brokenLimits(projection, context, stabilized);
   const openShare = openSwimShare(projection, context);
+  const alternatives = alternativesOf(context, response, choice, options);
+  const explained = { doses, choice, options, alternatives, broken, openShare, money: moneyOf(draft, choice) };
   const plan: WeekPlan = {
     ...frame(context),
     projection,
@@ -63,11 +66,11 @@ export function planWeek(scenario: Scenario): WeekPlan {
     checks: checksOf(projection, doses, context, stabilized),
     endOfWeek: endOf(best),
     cost: best.cost,
-    alternatives: alternativesOf(context, response, choice, options),
+    alternatives,
     openSwimShare: openShare,
     broken,
-    reasons: reasonsOf(doses, options, broken, openShare, context),
-    cautions: cautionsOf(doses, options, choice, context),
+    reasons: reasonsOf(explained, context),
+    cautions: cautionsOf(explained, context),
     needs: wanted,
   };
   assertSafePlan(scenario, plan);
@@ -80,12 +83,7 @@ export function projectScenario(scenario: Scenario): WeekPlan {
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
   const base = contextOf(scenario);
   const doses = (scenario.doses ?? []).map((dose, index) =>
-    weekDoseOf(
-      { at: dose.at, product: dose.product ?? '', amount: dose.amount, unit: dose.unit } satisfies GivenDose,
-      `doses[${index}]`,
-      scenario.shelf,
-      scenario.pool,
-    ),
+    weekDoseOf(dose, `doses[${index}]`, scenario.shelf, scenario.pool),
   );
   const stabilized = base.stabilizedProductUsed || doses.some(({ kind }) => kind === 'tablets');
   const everything = [...base.given, ...doses];

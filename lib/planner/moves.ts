@@ -54,17 +54,12 @@ export function mostMeasures(fast: FastOption | null, rises: readonly number[]):
   return rises.map((rise) => (fast ? Math.floor(fast.capRise / rise + 1e-9) : 0));
 }
 
-/** Whether a draft keeps to visits, caps, stock and one product in a visit. */
+/** Whether a draft keeps to visits, caps and one product in a visit. */
 export function allowed(draft: Draft, choice: Choice, most: readonly number[]): boolean {
-  const { tablets, tabletEvening, measures, fast } = draft;
+  const { tablets, tabletEvening, measures } = draft;
   if (tablets < 0 || tablets > (choice.tablets?.most ?? 0) || visitsOf(draft) > choice.visits) return false;
   if (tablets > 0 && measures[tabletEvening]! > 0) return false;
-  let total = 0;
-  for (let evening = 0; evening < measures.length; evening++) {
-    if (measures[evening]! < 0 || measures[evening]! > most[evening]!) return false;
-    total += measures[evening]!;
-  }
-  return !fast || total * fast.measure <= fast.stock;
+  return measures.every((each, evening) => each >= 0 && each <= most[evening]!);
 }
 
 /** Makes moves as long as one of them makes the draft cheaper. */

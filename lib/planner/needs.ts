@@ -1,4 +1,5 @@
 import { parseInstant } from '@/lib/calendar/wall-time';
+import { HOURS_IN_PLAN, MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { limits } from '@/lib/standards/limits';
@@ -23,10 +24,15 @@ export function needsOf(scenario: Scenario): { blocking: Need[]; wanted: Need[] 
     const days = (now - parseInstant(since)!) / MILLISECONDS_PER_DAY;
     return days > limits.planReadingAge.value ? [{ code: 'reading-too-old' satisfies NeedCode, quantity, since }] : [];
   });
-  const stabilizer = newest('cyanuricAcid');
-  const wanted: Need[] =
-    stabilizer === undefined
-      ? [{ code: 'never-measured' satisfies NeedCode, quantity: 'cyanuricAcid', since: null }]
-      : [];
+  const wanted: Need[] = [];
+  if (newest('cyanuricAcid') === undefined)
+    wanted.push({ code: 'never-measured' satisfies NeedCode, quantity: 'cyanuricAcid', since: null });
+  // The week of the newest reading is over: there is no evening left to plan.
+  if (now >= last + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR)
+    wanted.push({
+      code: 'reading-too-old' satisfies NeedCode,
+      quantity: 'freeChlorine',
+      since: newest('freeChlorine') ?? null,
+    });
   return { blocking, wanted };
 }

@@ -1,5 +1,6 @@
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { contentsPerUnit } from '@/lib/chemistry';
+import { CYANURIC_ACID_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import { riseOf } from '@/lib/projection/events';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { PlanContext } from './context';
@@ -10,7 +11,12 @@ import { riseOfFast } from './products';
 
 const QUICK_RAISE = 2.5;
 
-/** The doses of a draft as a plan names them, in order of time; `halvedEvening` is that of a halved first dose. */
+/**
+ * The doses of a draft as a plan names them, in order of time. From the dose on that the shelf no longer holds, they are
+ * marked to buy.
+ *
+ * @param halvedEvening that of a halved first dose
+ */
 export function plannedDoses(
   draft: Draft,
   { tablets, evenings }: Choice,
@@ -24,32 +30,33 @@ export function plannedDoses(
   if (draft.tablets > 0 && tablets) {
     const { product, tabletMass, strength } = tablets;
     const contents = contentsPerUnit({ substance: 'trichlor', strength });
+    const mass = draft.tablets * tabletMass;
+    const stabilizer = (contents.cyanurate * mass * CYANURIC_ACID_MILLIGRAMS_PER_MOLE) / (pool.volume * 1000);
     doses.push({
       at: isoAt(draft.tabletEvening),
-      product: isGeneric(product) ? null : product.id,
-      toBuy: isGeneric(product),
+      product: product.id,
+      toBuy: false,
       substance: 'trichlor',
       form: 'tablet',
       amount: draft.tablets,
       unit: 'tablet',
-      rise: riseOf(contents, draft.tablets * tabletMass, pool.volume),
-      effect: {
-        quantity: 'cyanuricAcid',
-        change: (contents.cyanurate * draft.tablets * tabletMass * 129.074) / pool.volume,
-      },
+      rise: riseOf(contents, mass, pool.volume),
+      effect: { quantity: 'cyanuricAcid', change: stabilizer },
       reason: (halvedEvening === draft.tabletEvening ? 'first-dose-halved' : 'slow-supply') satisfies DoseReason,
     });
   }
+  let used = 0;
   draft.measures.forEach((measures, evening) => {
     if (measures === 0 || !fast) return;
     const amount = measures * fast.measure;
+    used += amount;
     const rise = riseOfFast(fast, amount, evenings[evening]!.at, pool.volume);
     const usual: DoseReason = rise >= QUICK_RAISE ? 'quick-raise' : 'closes-gap';
     const reason: DoseReason = evening === halvedEvening ? 'first-dose-halved' : usual;
     doses.push({
       at: isoAt(evening),
       product: isGeneric(fast.product) ? null : fast.product.id,
-      toBuy: isGeneric(fast.product),
+      toBuy: isGeneric(fast.product) || used > fast.stock + 1e-9,
       substance: fast.substance,
       form: fast.form,
       amount,

@@ -1,6 +1,6 @@
-import { dayOf } from '@/lib/calendar/household-day';
-import type { Dose } from '@/lib/chemistry';
-import { contentsPerUnit } from '@/lib/chemistry';
+import { parseInstant } from '@/lib/calendar/wall-time';
+import { contentsPerUnit, type Dose } from '@/lib/chemistry';
+import { CHLORINE_MILLIGRAMS_PER_MOLE, CYANURIC_ACID_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import { riseOf } from '@/lib/projection/events';
 import type { Fact } from '@/lib/schemas/plan';
 import type { Pool } from '@/lib/schemas/pool';
@@ -8,11 +8,15 @@ import type { Scenario } from '@/lib/schemas/scenario';
 import type { ProductForm, ShelfProduct } from '@/lib/schemas/shelf-product';
 import { fastChlorineCap, LIQUID_STRENGTH_SHARE, TABLETS_NEED_PH, tabletCap } from '@/lib/standards/caps';
 import { dissolveFirstSurfaces } from '@/lib/standards/surface-ranges';
-import { strengthOnDay } from '@/lib/storage/liquid-strength';
 import type { CautionCode, ReasonCode } from './codes';
-import { genericGranules, genericLiquid } from './generic-products';
+import type { PlanContext } from './context';
+import { generic } from './generic-products';
+import { liquidStrength, priceOf, tabletFacts } from './product-facts';
 import type { StartingWater } from './starting-water';
-import { assumedPrice } from './weights';
+
+const HOUR = 3_600_000;
+/** Chlorine that comes with 1 g of stabilizer from trichlor [g]. */
+const CHLORINE_PER_STABILIZER = (3 * CHLORINE_MILLIGRAMS_PER_MOLE) / CYANURIC_ACID_MILLIGRAMS_PER_MOLE;
 
 /** Tablets that may be planned, and how many at most. */
 export type TabletOption = { product: ShelfProduct; tabletMass: number; strength: number; most: number; price: number };
@@ -36,17 +40,21 @@ export type Options = {
   tablets: TabletOption | null;
   /** Why there are none, when there are none. */
   noTablets: Extract<ReasonCode, `no-tablets-${string}`> | null;
+  /** The cheapest chlorine first. */
   fast: FastOption[];
   cautions: Fact[];
 };
 
 /** What the shelf, the feeder, the labels and the water let a plan use (safety constraints only; the rest is cost). */
-export function optionsOf(scenario: Scenario, start: StartingWater): Options {
+export function optionsOf(context: Pick<PlanContext, 'scenario' | 'start' | 'now'>): Options {
+  const { scenario, start } = context;
   const cautions: Fact[] = [];
   const caution = (code: CautionCode, figures: Omit<Fact, 'code'> = {}) => cautions.push({ code, ...figures });
   const owned = scenario.shelf.flatMap((product) => fastOption(product, scenario, start, caution) ?? []);
-  const fast = owned.length > 0 ? owned : somethingToBuy(scenario, start);
-  const tablets = tabletOption(scenario, start, fast.length > 0, caution);
+  const fast = (owned.length > 0 ? owned : somethingToBuy(scenario, start)).sort(
+    (a, b) => pricePerRise(a, start.takenAt) - pricePerRise(b, start.takenAt),
+  );
+  const tablets = tabletOption(context, fast.length > 0, caution);
   return typeof tablets === 'string'
     ? { tablets: null, noTablets: tablets, fast, cautions }
     : { tablets, noTablets: null, fast, cautions };
@@ -54,24 +62,32 @@ export function optionsOf(scenario: Scenario, start: StartingWater): Options {
 
 /** Where the shelf holds no fast chlorine that may be planned, one to buy takes its place, unless the household avoids it. */
 function somethingToBuy(scenario: Scenario, start: StartingWater): FastOption[] {
-  const offered = [genericLiquid, genericGranules].flatMap(
+  const offered = [generic['sodium-hypochlorite'], generic['calcium-hypochlorite']].flatMap(
     (product) => fastOption(product, scenario, start, () => {}) ?? [],
   );
   return offered.slice(0, 1);
 }
 
+function pricePerRise(option: FastOption, at: number): number {
+  return option.measurePrice / contentsPerUnit(option.dose(option.measure, at)).freeChlorine / option.measure;
+}
+
 type Caution = (code: CautionCode, figures?: Omit<Fact, 'code'>) => void;
 
 function tabletOption(
-  { pool, shelf, preferences, given }: Scenario,
-  start: StartingWater,
+  { scenario, start, now }: Pick<PlanContext, 'scenario' | 'start' | 'now'>,
   anotherForm: boolean,
   caution: Caution,
 ): TabletOption | Exclude<Options['noTablets'], null> {
+  const { pool, shelf, preferences } = scenario;
   const product = shelf.find(
-    (each) => each.form === 'tablet' && each.substance === 'trichlor' && !avoided(each, preferences.avoid),
+    (each) =>
+      each.form === 'tablet' &&
+      each.substance === 'trichlor' &&
+      each.stock >= tabletFacts(each).tabletMass &&
+      !avoided(each, preferences.avoid),
   );
-  if (!product || product.stock <= 0) return 'no-tablets-on-shelf';
+  if (!product) return 'no-tablets-on-shelf';
   if (pool.feeder.kind === 'none') return 'no-tablets-feeder';
   if (pool.feeder.ingredient !== 'trichlor') {
     caution('feeder-ingredient-other', { product: product.id });
@@ -80,37 +96,49 @@ function tabletOption(
   if (start.measuredAt.cyanuricAcid === undefined) return 'no-tablets-stabilizer-unknown';
   if (start.water.cyanuricAcid > pool.stabilizerBand[1] && anotherForm) return 'no-tablets-stabilizer-high';
   if (start.water.pH < TABLETS_NEED_PH) return 'no-tablets-pH-low';
-  const tabletMass = product.tabletMass ?? 227;
-  const strength = product.strength ?? 90;
-  const inFeeder = start.loads.reduce((sum, load) => sum + load.count, 0);
+  const { tabletMass, strength } = tabletFacts(product);
+  const price = (priceOf(product) * tabletMass) / 1000;
+  const inFeeder = start.loads.reduce((sum, load) => sum + (load.erodedShare < 1 ? load.count : 0), 0);
   const most = Math.min(
-    mostTablets(pool.volume, tabletMass, strength) - tabletsGiven(given, shelf, start.takenAt),
-    Math.max(0, pool.feeder.capacity - inFeeder),
+    mostTablets(pool.volume, { tabletMass, strength }, tabletsGiven(scenario, now - tabletCap.countedFor * HOUR)),
+    pool.feeder.capacity - inFeeder - tabletsGiven(scenario, start.takenAt).count,
     Math.floor(product.stock / tabletMass + 1e-9),
   );
-  return { product, tabletMass, strength, most: Math.max(0, most), price: (priceOf(product) * tabletMass) / 1000 };
+  return { product, tabletMass, strength, most: Math.max(0, most), price };
 }
+
+type Tablets = { count: number; mass: number; chlorine: number };
 
 /**
- * Most whole tablets in a week: one of 200 to 230 g for 18 m3 of water, and 6 mg/L of stabilizer in all.
+ * Most whole tablets beside those already given this week: in all one of 230 g for 18 m3 of water, and 6 mg/L of
+ * stabilizer.
  *
- * @param volume     m3
- * @param tabletMass g
- * @param strength   available chlorine [%]
+ * @param volume m3
+ * @param tablet mass [g], available chlorine [%]
+ * @param given  tablets of this week: mass and chlorine [g]
  */
-export function mostTablets(volume: number, tabletMass: number, strength: number): number {
-  const byVolume = (volume / tabletCap.waterPerTablet) * (tabletCap.tabletMass / tabletMass);
-  const contents = contentsPerUnit({ substance: 'trichlor', strength });
-  const stabilizerPerTablet = (contents.cyanurate * tabletMass * 129.074) / volume;
-  return Math.floor(Math.min(byVolume, tabletCap.stabilizerRise / stabilizerPerTablet) + 1e-9);
+export function mostTablets(
+  volume: number,
+  { tabletMass, strength }: { tabletMass: number; strength: number },
+  given: Pick<Tablets, 'mass' | 'chlorine'> = { mass: 0, chlorine: 0 },
+): number {
+  const mass = (volume / tabletCap.waterPerTablet) * tabletCap.tabletMass - given.mass;
+  const chlorine = tabletCap.stabilizerRise * volume * CHLORINE_PER_STABILIZER - given.chlorine;
+  return Math.max(0, Math.floor(Math.min(mass / tabletMass, chlorine / ((tabletMass * strength) / 100)) + 1e-9));
 }
 
-/** Whole tablets already given since the plan's reading. */
-function tabletsGiven(given: Scenario['given'], shelf: readonly ShelfProduct[], takenAt: number): number {
-  const isTablet = (id: string) => shelf.find((product) => product.id === id)?.form === 'tablet';
-  return given
-    .filter(({ at, product }) => Date.parse(at) >= takenAt && isTablet(product))
-    .reduce((sum, { amount }) => sum + amount, 0);
+/** Tablets given since an instant [ms]. */
+function tabletsGiven({ given, shelf }: Pick<Scenario, 'given' | 'shelf'>, since: number): Tablets {
+  const sum: Tablets = { count: 0, mass: 0, chlorine: 0 };
+  for (const { at, product: id, amount } of given) {
+    const product = shelf.find((each) => each.id === id);
+    if (product?.form !== 'tablet' || parseInstant(at)! < since) continue;
+    const { tabletMass, strength } = tabletFacts(product);
+    sum.count += amount;
+    sum.mass += amount * tabletMass;
+    sum.chlorine += (amount * tabletMass * strength) / 100;
+  }
+  return sum;
 }
 
 function fastOption(
@@ -174,27 +202,9 @@ function granulesAllowed(product: ShelfProduct, pool: Pool, caution: Caution): b
   return true;
 }
 
-/** Strength of a bottle at an instant [ms]: trade %, and what share of the label's that is. */
-export function liquidStrength(product: ShelfProduct, timeZone: string) {
-  const labelled = product.strength ?? 12.5;
-  return (at: number) => {
-    const { boughtOn, storedAt } = product;
-    if (boughtOn === undefined) return { strength: labelled, share: 1 };
-    const strength = strengthOnDay({ strength: labelled, boughtOn, storedAt }, dayOf(at, timeZone));
-    return { strength, share: strength / labelled };
-  };
-}
-
 /** Free chlorine that an amount of a fast product adds at an instant [mg/L]. */
 export function riseOfFast(option: FastOption, amount: number, at: number, volume: number): number {
   return riseOf(contentsPerUnit(option.dose(amount, at)), amount, volume);
-}
-
-/** Price per kg or litre. */
-export function priceOf(product: ShelfProduct): number {
-  return product.form === 'liquid'
-    ? (product.pricePerLitre ?? assumedPrice.perLitre)
-    : (product.pricePerKg ?? assumedPrice.perKilogram);
 }
 
 function avoided(product: ShelfProduct, avoid: readonly string[]): boolean {

@@ -13,13 +13,13 @@ import {
   riskOf,
   stabilizedIn,
   stabilizerPrice,
+  troubleOf,
 } from './cost';
-import { type Choice, type Draft, visitsOf } from './draft';
+import type { Choice, Draft } from './draft';
 import { type FastOption, riseOfFast } from './products';
 import { quickLevels } from './quick-levels';
 import { remember } from './remember';
 import { sideEffectsOf } from './side-effects';
-import { weights } from './weights';
 
 /** What quick levels are off by. */
 export type Correction = Float64Array;
@@ -76,7 +76,7 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
     const end = effects.endOf(draft, measureRises);
     return (
       preferences.money * moneyOf(draft, choice) +
-      preferences.evenings * weights.visit * visitsOf(draft) +
+      preferences.evenings * troubleOf(draft) +
       preferences.steadiness * (risk.shortfall + risk.excess) +
       stabilizerPrice(end.cyanuricAcid, context) +
       hardnessPrice(calciumWithout + calciumOf(draft, evenings, pool.volume), context) +

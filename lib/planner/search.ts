@@ -1,3 +1,4 @@
+import { belowMaximum, lowered } from './below-maximum';
 import type { PlanContext } from './context';
 import { evaluate, type Evaluated } from './cost';
 import { type Choice, type Draft, keyOf } from './draft';
@@ -24,7 +25,7 @@ const RIVALS = 3;
 export type SearchSpace = { choice: Choice; fast: readonly (FastOption | null)[] };
 
 /**
- * The best plan found, projected over the whole ensemble. Screening by the quick model with the cheapest fast product gives
+ * The best plan found, projected over the whole ensemble and kept below the maximum. Screening by the quick model with the cheapest fast product gives
  * drafts for every count of tablets; each is brought to where no single change helps, for every product; the best few are
  * projected in full. The quick model is then corrected to agree with the best of them and asked for changes that help, as
  * long as one does in full. Deterministic; ties go to the draft found first, which has fewer tablets and earlier evenings.
@@ -50,8 +51,10 @@ export function searchPlan(context: PlanContext, response: Response, { choice, f
   const rivals = [...tried.values()]
     .filter(({ cost }) => cost.total <= NEAR * best.cost.total)
     .sort((a, b) => a.cost.total - b.cost.total)
-    .slice(0, RIVALS);
-  return cheapest(rivals.map(({ draft }) => evaluate(draft, choice, context, context.members)));
+    .slice(0, RIVALS)
+    .map(({ draft }) => evaluate(draft, choice, context, context.members));
+  const safe = rivals.filter((rival) => belowMaximum(rival, choice, context));
+  return safe.length > 0 ? cheapest(safe) : lowered(cheapest(rivals), choice, context);
 }
 
 /** The best plan by the quick model alone, projected over the search's members. */

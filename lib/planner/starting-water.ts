@@ -17,6 +17,7 @@ import { type MeasuredQuantity, measuredQuantities } from '@/lib/schemas/measure
 import type { Reading } from '@/lib/schemas/reading';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { weekAheadSchema } from '@/lib/schemas/week-ahead';
+import { tabletFacts } from './product-facts';
 
 const MILLISECONDS_PER_DAY = 24 * MILLISECONDS_PER_HOUR;
 
@@ -53,8 +54,8 @@ export function startingWater(scenario: Scenario, given: readonly WeekDose[]): S
   const measuredAt: StartingWater['measuredAt'] = {};
   const errors = {} as ReadingErrors;
   const { pool } = scenario;
-  const tablet = scenario.shelf.find(({ form, substance }) => form === 'tablet' && substance === 'trichlor');
-  const loaded = loadOfMass(pool.feeder.loaded, tablet?.tabletMass ?? 227, tablet?.strength ?? 90);
+  const tablet = tabletFacts(scenario.shelf.find(({ form }) => form === 'tablet') ?? {});
+  const loaded = loadOfMass(pool.feeder.loaded, tablet.tabletMass, tablet.strength);
 
   const blank: WaterAnalysis = {
     freeChlorine: 0,
@@ -113,7 +114,8 @@ function carryForward(scenario: Scenario, from: Carried, at: number, to: number,
   const { pool, parameters } = scenario;
   const usual = weekAheadSchema.parse({});
   const forcing = prepareForcing(pool, at, usual, from.water.temperature, { hours });
-  const between = given.filter((dose) => dose.at > at && dose.at < to);
+  // What went in at the instant of a reading counts as after it, here as in the week ahead.
+  const between = given.filter((dose) => dose.at >= at && dose.at < to);
   const setting = settingOf(pool, from.water.temperature, parameters);
   const course = integrateWeek(forcing, { ledger: ledgerOf(from.water), loads: from.loads }, between, setting);
   return { water: analysisAt(course.end, course.endPH), loads: course.loads };
@@ -126,9 +128,8 @@ function loadsBefore(
   scenario: Scenario,
   loaded: readonly TabletLoad[],
 ): readonly TabletLoad[] {
-  const earlier = given.filter((dose) => dose.kind === 'tablets' && dose.at < at);
-  const oldest = earlier.reduce((least, dose) => Math.min(least, dose.at), at);
-  if (oldest >= at) return [...loaded, ...earlier.flatMap((dose) => (dose.kind === 'tablets' ? [dose.load] : []))];
+  const oldest = Math.min(at, ...given.filter(({ kind }) => kind === 'tablets').map((dose) => dose.at));
+  // Erosion asks only for the pump's hours: any water does.
   const water: WaterAnalysis = {
     freeChlorine: 2,
     pH: 7.5,
@@ -137,7 +138,7 @@ function loadsBefore(
     cyanuricAcid: 30,
     temperature: 26,
   };
-  return [...loaded, ...carryForward(scenario, { water, loads: [] }, oldest - 1, at, given).loads];
+  return [...loaded, ...carryForward(scenario, { water, loads: [] }, oldest, at, given).loads];
 }
 
 function requireConsistent(water: WaterAnalysis): void {

@@ -6,6 +6,8 @@
 export const weights = {
   /** One evening on which something goes in. */
   visit: 1.5,
+  /** Having to shop for more than the shelf holds. */
+  errand: 3,
   /** One mg/L under the lowest level for one hour: expected over the ensemble, and again for its median. */
   shortfall: 0.25,
   medianShortfall: 1.5,
@@ -25,6 +27,3 @@ export const weights = {
   /** One m3 of replacement water, drain and fill. */
   water: 2.5,
 } as const;
-
-/** Prices where the shelf names none, per kg of solid or litre of liquid. */
-export const assumedPrice = { perKilogram: 8, perLitre: 1.5 } as const;

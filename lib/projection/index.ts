@@ -6,7 +6,7 @@ import {
   CYANURIC_ACID_MILLIGRAMS_PER_MOLE,
   HARDNESS_MILLIGRAMS_PER_MOLE,
 } from '@/lib/chemistry/molar-masses';
-import { AppError } from '@/lib/errors';
+import { AppError, WaterRangeError } from '@/lib/errors';
 import type { Pool } from '@/lib/schemas/pool';
 import type { ParameterOverrides } from '@/lib/schemas/scenario';
 import { type WeekAhead, weekAheadSchema } from '@/lib/schemas/week-ahead';
@@ -32,15 +32,31 @@ export type ProjectedDose =
 
 export type ProjectionOptions = { stepsPerHour?: number };
 
-/** The settings of a pool's courses: depth, fill water, floater or not, parameters. */
+/**
+ * The settings of a pool's courses: depth, fill water, floater or not, parameters.
+ *
+ * Errors: invalid-input for fill water whose alkalinity cannot carry its pH.
+ */
 export function settingOf(pool: Pool, temperature: number, overrides?: ParameterOverrides): CourseSetting {
-  const fill = ledgerOf({ freeChlorine: 0, cyanuricAcid: 0, temperature, ...pool.fillWater });
   return {
     depth: pool.meanDepth,
-    fillWater: fill,
+    fillWater: fillLedger(pool, temperature),
     floater: pool.feeder.kind === 'floating',
     parameters: parametersOf(pool, overrides),
   };
+}
+
+function fillLedger({ fillWater }: Pool, temperature: number): Ledger {
+  try {
+    return ledgerOf({ freeChlorine: 0, cyanuricAcid: 0, temperature, ...fillWater });
+  } catch (cause) {
+    if (!(cause instanceof WaterRangeError)) throw cause;
+    const message = `Fill water of pH ${fillWater.pH} cannot have so little alkalinity.`;
+    throw new AppError('invalid-input', message, {
+      cause,
+      problems: [{ path: 'pool.fillWater.totalAlkalinity', message }],
+    });
+  }
 }
 
 /**

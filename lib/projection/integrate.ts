@@ -83,7 +83,8 @@ export function integrateWeek(
     for (; next < events.length && events[next]!.at <= instant; next++) {
       const event = events[next]!;
       if (event.kind === 'tablets') loads.push({ ...event.load });
-      else if (event.kind === 'backwash') replaceWater(ledger, event.volume / parameters.volume, fillWater, account);
+      else if (event.kind === 'backwash')
+        replaceWater(ledger, Math.min(1, event.volume / parameters.volume), fillWater, account);
       else {
         const before = ledger.freeChlorine;
         addContents(ledger, parameters.volume, event.contents, event.amount);

@@ -98,6 +98,11 @@ export const limits = {
     unit: 'hours',
     source: { kind: 'practice', text: 'a dose is ticked at its time, not in the morning' },
   },
+  swimAfterDose: {
+    value: 4,
+    unit: 'hours',
+    source: { kind: 'practice', text: 'no public source found; the label comes first' },
+  },
   pumpAfterDose: {
     value: 4,
     unit: 'hours',

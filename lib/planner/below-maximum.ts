@@ -1,0 +1,33 @@
+import { bandOf } from '@/lib/projection/quantiles';
+import { limits } from '@/lib/standards/limits';
+import type { PlanContext } from './context';
+import { evaluate, type Evaluated } from './cost';
+import type { Choice, Draft } from './draft';
+
+/** Whether the likely range stays at or under 10 mg/L from the first dose of a plan on. Nothing to add keeps to it. */
+export function belowMaximum({ draft, courses }: Evaluated, { evenings }: Choice, { hours }: PlanContext): boolean {
+  const used = evenings.filter((_, evening) => usesEvening(draft, evening));
+  const first = Math.min(...used.map(({ at }) => at));
+  const { value: maximum } = limits.freeChlorineMaximum;
+  const rows = courses.map(({ hourly }) => hourly.freeChlorine);
+  if (rows.every((row) => row.every((level) => level <= maximum))) return true;
+  return bandOf(rows).p90.every((level, hour) => hours[hour]! < first || level <= maximum);
+}
+
+/** Takes measures out of a plan, of the largest dose first, then tablets, until it stays below the maximum. */
+export function lowered(plan: Evaluated, choice: Choice, context: PlanContext): Evaluated {
+  let next = plan;
+  while (!belowMaximum(next, choice, context)) next = evaluate(less(next.draft), choice, context, context.members);
+  return next;
+}
+
+function less(draft: Draft): Draft {
+  const most = Math.max(...draft.measures);
+  if (most === 0) return { ...draft, tablets: draft.tablets - 1 };
+  const largest = draft.measures.indexOf(most);
+  return { ...draft, measures: draft.measures.map((each, evening) => (evening === largest ? each - 1 : each)) };
+}
+
+function usesEvening({ tablets, tabletEvening, measures }: Draft, evening: number): boolean {
+  return measures[evening]! > 0 || (tablets > 0 && evening === tabletEvening);
+}

@@ -1,0 +1,26 @@
+import { dayOf } from '@/lib/calendar/household-day';
+import type { ShelfProduct } from '@/lib/schemas/shelf-product';
+import { strengthOnDay } from '@/lib/storage/liquid-strength';
+import { generic } from './generic-products';
+
+/** Mass [g] and available chlorine [%] of a tablet, the usual ones where the label was not copied. */
+export function tabletFacts({ tabletMass, strength }: Pick<ShelfProduct, 'tabletMass' | 'strength'>) {
+  return { tabletMass: tabletMass ?? 227, strength: strength ?? 90 };
+}
+
+/** Strength of a bottle at an instant [ms]: trade %, and what share of the label's that is. */
+export function liquidStrength(product: ShelfProduct, timeZone: string) {
+  const labelled = product.strength ?? 12.5;
+  return (at: number) => {
+    const { boughtOn, storedAt } = product;
+    if (boughtOn === undefined) return { strength: labelled, share: 1 };
+    const strength = strengthOnDay({ strength: labelled, boughtOn, storedAt }, dayOf(at, timeZone));
+    return { strength, share: strength / labelled };
+  };
+}
+
+/** Price per kg or litre; the usual one where the shelf names none. */
+export function priceOf({ form, substance, pricePerKg, pricePerLitre }: ShelfProduct): number {
+  const usual = substance === 'other' ? undefined : generic[substance];
+  return (form === 'liquid' ? (pricePerLitre ?? usual?.pricePerLitre) : (pricePerKg ?? usual?.pricePerKg)) ?? 0;
+}
