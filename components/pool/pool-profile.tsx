@@ -77,7 +77,9 @@ function Profile({ state }: { state: SetupState }) {
           ) : (
             <SavedDrawing size={drawing} />
           )}
-          <div className="grid gap-x-7.5 border-t border-rule sm:grid-cols-2">{parts.filter(isWide).map(part)}</div>
+          <div className="grid gap-x-7.5 border-t border-rule sm:grid-cols-2 sm:*:border-t-0">
+            {parts.filter(isWide).map(part)}
+          </div>
         </div>
         <div className="min-w-0 border-t border-rule lg:border-t-0">
           {parts.filter((one) => !isWide(one)).map(part)}

@@ -2,9 +2,11 @@
 
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
+import { Callout } from '@/components/ui/callout';
 import { Segments } from '@/components/ui/segments';
 import type { SetupState } from '@/lib/schemas/pool-profile';
 import { poolSizeSchema, waterOf } from '@/lib/schemas/pool-size';
+import { scopeOf } from '@/lib/schemas/pool-scope';
 import { formatQuantityIn } from '@/lib/units/format';
 import { EnteredSize } from './entered-size';
 import { checkAnswers, type FieldProblems, focusFirstProblem, noProblems } from './field-problems';
@@ -64,6 +66,8 @@ export function SizeStep({ state }: { state: SetupState }) {
     water?.meanDepth === undefined || draft.how === 'entered'
       ? undefined
       : t('drawing.average', { depth: units(lengthUnit(system), { value: metres(water.meanDepth) }) });
+
+  const reasons = water === undefined ? [] : scopeOf(null, water.volume).reasons;
 
   const how = (
     <Segments
@@ -127,6 +131,20 @@ export function SizeStep({ state }: { state: SetupState }) {
           </div>
         </div>
       )}
+      {question !== undefined || reasons.length === 0 ? null : (
+        <SmallPool tiny={reasons.includes('under-2-cubic-metres')} />
+      )}
     </StepFrame>
+  );
+}
+
+/** What a small pool means, said before it is saved (care rules, part 1). */
+function SmallPool({ tiny }: { tiny: boolean }) {
+  const t = useTranslations('pool.size');
+  const common = useTranslations('common');
+  return (
+    <Callout severity={tiny ? 'stop' : 'note'} word={common(tiny ? 'stop' : 'note')} className="mt-4 max-w-form">
+      {t(tiny ? 'tinyNote' : 'smallNote')}
+    </Callout>
   );
 }

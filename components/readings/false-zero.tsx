@@ -14,13 +14,13 @@ export function FalseZero({
   expected,
   answer,
   onAnswer,
-  later = true,
+  standsAlone = true,
 }: {
   expected: ZeroQuestion['expected'];
   answer: Answer;
   onAnswer: (answer: Answer) => void;
-  /** Whether it may be put off. */
-  later?: boolean;
+  /** Before a test is saved it may be put off, and says itself what holds; afterwards the verdict stands above it. */
+  standsAlone?: boolean;
 }) {
   const t = useTranslations('readings.zero');
   const words = useValueWords();
@@ -56,7 +56,7 @@ export function FalseZero({
               </Button>
             ))}
           </div>
-          {later ? (
+          {standsAlone ? (
             <Button
               variant="quiet"
               aria-pressed={answer === 'later'}
@@ -67,20 +67,28 @@ export function FalseZero({
           ) : null}
         </div>
       </div>
-      <div
-        role="status"
-        className="mt-4 border-t-stop border-b border-ink bg-paper-lift px-3.5 py-3 text-body"
-        data-zero-state={answer ?? 'open'}
-      >
-        <p className="flex items-center gap-2 text-label font-strong">
-          <TestTubeDiagonal aria-hidden="true" className="size-5" />
-          {t(`state.${answer ?? 'open'}.word`)}
-        </p>
-        <p className="mt-1 mb-0.5 font-display text-[25px] leading-[30px] font-headline">
-          {t(`state.${answer ?? 'open'}.headline`)}
-        </p>
-        <p>{t(`state.${answer ?? 'open'}.note`)}</p>
-      </div>
+      {standsAlone ? <ZeroState answer={answer} /> : null}
     </section>
+  );
+}
+
+/** What holds for swimming and dosing while the question is open, and after each answer. */
+function ZeroState({ answer }: { answer: Answer }) {
+  const t = useTranslations('readings.zero');
+  return (
+    <div
+      role="status"
+      className="mt-4 border-t-stop border-b border-ink bg-paper-lift px-3.5 py-3 text-body"
+      data-zero-state={answer ?? 'open'}
+    >
+      <p className="flex items-center gap-2 text-label font-strong">
+        <TestTubeDiagonal aria-hidden="true" className="size-5" />
+        {t(`state.${answer ?? 'open'}.word`)}
+      </p>
+      <p className="mt-1 mb-0.5 font-display text-[25px] leading-[30px] font-headline">
+        {t(`state.${answer ?? 'open'}.headline`)}
+      </p>
+      <p>{t(`state.${answer ?? 'open'}.note`)}</p>
+    </div>
   );
 }

@@ -1,8 +1,10 @@
 'use client';
 
+import { isUsual } from './likely-typo';
 import { NumberPad } from './number-pad';
 import type { EntryQuantity } from './quantities';
 import type { TestDraft } from './test-draft';
+import { typedValue } from './typed-value';
 import { fieldId, focusAfter } from './value-fields';
 
 /** The keys for the field that is being filled; a complete figure moves on by itself. */
@@ -18,9 +20,15 @@ export function KitPad({
   change: (part: Partial<TestDraft>) => void;
 }) {
   const text = draft.typed[current] ?? '';
+  const moveOn = (typed: string) => {
+    const value = typed === '' ? undefined : typedValue(typed, current, draft.system);
+    // A doubtful figure is left instead: its question has to be seen before the next one is filled.
+    if (typed === '' || (value !== undefined && isUsual(current, value))) focusAfter(quantities, current);
+    else document.getElementById(fieldId(current))?.blur();
+  };
   const write = (next: string) => {
     change({ typed: { ...draft.typed, [current]: next } });
-    if (isComplete(current, next)) focusAfter(quantities, current);
+    if (isComplete(current, next)) moveOn(next);
     else document.getElementById(fieldId(current))?.focus();
   };
   return (
@@ -28,7 +36,7 @@ export function KitPad({
       onDigit={(character) => write(text + character)}
       onDelete={() => write(text.slice(0, -1))}
       onClear={() => write('')}
-      onNext={() => focusAfter(quantities, current)}
+      onNext={() => moveOn(text)}
     />
   );
 }

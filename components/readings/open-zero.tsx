@@ -26,7 +26,7 @@ export function OpenZero({
       <FalseZero
         expected={undefined}
         answer={null}
-        later={false}
+        standsAlone={false}
         onAnswer={(answer) => {
           if (answer === null || answer === 'later' || correct.isPending) return;
           correct.mutate({ ...asNewReading(reading), zeroAnswer: answer }, { onSuccess: onAnswered });

@@ -60,13 +60,15 @@ export function SavedTest({ reading, week, before, onCorrect, children }: SavedT
           <Changes doses={week.doses} before={before} />
         </SheetProvider>
       )}
-      <p className="border-t border-rule pt-3 text-body">
-        <span className="mr-2">{t.rich('entered', { values: measured, b: bold })}</span>
-        {missing === '' ? null : <span className="mr-2">{t('missing', { names: missing })}</span>}
-        <Button variant="quiet" onClick={onCorrect}>
+      <div className="border-t border-rule pt-3 text-body">
+        <p>
+          <span className="mr-1">{t.rich('entered', { values: measured, b: bold })}</span>
+          {missing === '' ? null : <span>{t('missing', { names: missing })}</span>}
+        </p>
+        <Button variant="quiet" className="-ml-1.5" onClick={onCorrect}>
           {t('correct')}
         </Button>
-      </p>
+      </div>
       <div className="sticky bottom-tabs border-t border-ink bg-paper-lift py-3 md:static md:border-t-0 md:bg-transparent">
         <Link
           href="/week"

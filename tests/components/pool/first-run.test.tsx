@@ -105,6 +105,13 @@ it('stops under 2 m3: empty after every day of use', async () => {
   expect(screen.getByText(/empty it after every day of use/)).toBeInTheDocument();
 });
 
+it('says before saving that a pool under 10 m3 is kept for the record only', async () => {
+  fakePoolServer(setupAnswers.slice(0, 1));
+  await openStep('size');
+  fill('Volume', '8,5');
+  expect(screen.getByText(/Wadewell keeps readings and cautions. No tablets, no plan./)).toBeInTheDocument();
+});
+
 it('goes on with a salt generator, which is kept for the record only', async () => {
   const server = fakePoolServer();
   await openStep('scope');

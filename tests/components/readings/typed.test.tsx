@@ -119,6 +119,18 @@ it('moves on by itself on a phone, with keys of its own', async () => {
   expect(save()).toBeInTheDocument();
 });
 
+it('does not move on past a figure that cannot be right', async () => {
+  screenOf('phone');
+  fakeTestServer(sheet);
+  await openTest(sheet);
+  await byKit();
+  act(() => field('pH').focus());
+  const pad = within(screen.getByRole('group', { name: 'Number keys' }));
+  for (const name of ['7', '5', 'Next']) fireEvent.click(pad.getByRole('button', { name }));
+  expect(field('pH')).toHaveAccessibleDescription(/Did you mean 7.5\?/);
+  expect(field('Total chlorine')).not.toHaveFocus();
+});
+
 it('writes a US household’s temperature in its own degrees and sends it in ours', async () => {
   const server = fakeTestServer(sheet);
   await openTest(sheet, { unitSystem: 'us' });
