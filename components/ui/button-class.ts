@@ -3,8 +3,7 @@ import { classNames } from './class-names';
 export type ButtonVariant = 'primary' | 'outline' | 'quiet' | 'terra';
 export type ButtonSize = 'small' | 'normal' | 'large';
 
-const shared =
-  'inline-flex items-center justify-center gap-2 rounded border-control text-control text-center cursor-pointer select-none';
+const shared = 'inline-flex items-center justify-center gap-2 rounded border-control text-center select-none';
 
 const variants: Record<ButtonVariant, string> = {
   primary: 'border-ink bg-ink text-on-ink hover:bg-ink-2 hover:border-ink-2',
@@ -16,12 +15,14 @@ const variants: Record<ButtonVariant, string> = {
 
 const sizes: Record<ButtonSize, string> = {
   // 36 px where a fine pointer is at hand, the full target where it is a finger.
-  small: 'min-h-9 pointer-coarse:min-h-11 px-3 text-label font-control',
-  normal: 'min-h-11 px-4',
-  large: 'min-h-13 px-5 text-field font-control',
+  small: 'min-h-9 pointer-coarse:min-h-11 text-label font-control',
+  normal: 'min-h-11 text-control',
+  large: 'min-h-13 text-field font-control',
 };
 
-const off = 'border-dashed border-rule-2 bg-transparent text-ink-3 cursor-not-allowed';
+const padding: Record<ButtonSize, string> = { small: 'px-3', normal: 'px-4', large: 'px-5' };
+
+const off = 'border-dashed border-rule-2 bg-transparent text-ink-3';
 
 /** The look of a button, for whatever element is one: `<Link className={buttonClass({ variant: 'primary' })}>`. */
 export function buttonClass(look: {
@@ -36,7 +37,8 @@ export function buttonClass(look: {
     shared,
     sizes[size],
     look.off ? off : variants[variant],
-    variant === 'quiet' && 'px-1.5',
+    look.off ? 'cursor-not-allowed' : 'cursor-pointer',
+    variant === 'quiet' ? 'px-1.5' : padding[size],
     look.wide && 'w-full',
     look.className,
   );

@@ -25,7 +25,13 @@ export function PictureOrTable({ sentence, picture, table, seeTable, seePicture,
         {sentence}
       </figcaption>
       {asTable ? <FigureAsTable sentence={sentence} table={table} /> : picture}
-      <Button variant="quiet" size="small" aria-pressed={asTable} onClick={() => setAsTable(!asTable)}>
+      <Button
+        variant="quiet"
+        size="small"
+        className="-ml-1.5"
+        aria-pressed={asTable}
+        onClick={() => setAsTable(!asTable)}
+      >
         {asTable ? seePicture : seeTable}
       </Button>
     </figure>
