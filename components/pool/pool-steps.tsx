@@ -74,21 +74,14 @@ function OpenStep({ state, step, place }: { state: SetupState; step: SetupStep; 
   const stopped = stop !== undefined && changing !== state;
   const ahead = !isOpen(step, state);
 
-  useEffect(() => {
-    if (!stopped && ahead && state.nextStep !== null) router.replace(addressOf(state.nextStep, place));
-  }, [stopped, ahead, state.nextStep, place, router]);
+  // The stop stands on the step whose answer it is about: there "Change an answer" only has to open it.
+  const where = stopped ? stop : ahead ? state.nextStep : step;
 
-  if (stopped)
-    return (
-      <ScopeStop
-        decision={state.decision}
-        place={place}
-        onChange={() => {
-          setChanging(state);
-          if (stop !== step) router.push(addressOf(stop, place));
-        }}
-      />
-    );
+  useEffect(() => {
+    if (where !== null && where !== step) router.replace(addressOf(where, place));
+  }, [where, step, place, router]);
+
+  if (stopped) return <ScopeStop decision={state.decision} place={place} onChange={() => setChanging(state)} />;
   if (ahead) return null;
   switch (step) {
     case 'scope':
