@@ -12,7 +12,7 @@ type IngredientFacts = {
 };
 
 /** Active ingredients as labels print them, those of chlorine first. The words stand in the messages. */
-export const ingredients = {
+const ingredients = {
   trichlor: { forms: ['tablet', 'granular'], strength: 'available-chlorine', asksLabelWay: true },
   'calcium-hypochlorite': { forms: ['granular', 'tablet'], strength: 'available-chlorine', asksLabelWay: true },
   'sodium-hypochlorite': { forms: ['liquid'], strength: 'liquid-chlorine', asksLabelWay: false },

@@ -15,7 +15,7 @@ export const labelDraftSchema = z.object({
 export type LabelDraft = z.infer<typeof labelDraftSchema>;
 
 /** When most families swim, until this one says otherwise. */
-export const usualSwimHours = { from: 10, to: 20 };
+const usualSwimHours = { from: 10, to: 20 };
 
 export const emptyLabel: LabelDraft = { swimLimit: null, ...usualSwimHours };
 

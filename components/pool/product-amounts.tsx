@@ -4,7 +4,7 @@ import { useTranslations } from 'next-intl';
 import { NumberTextField } from '@/components/ui/number-text-field';
 import { TextField } from '@/components/ui/text-field';
 import { productUnits } from './product-draft';
-import type { ProductFieldsProps } from './product-form';
+import type { ProductFieldsProps } from './product-fields';
 
 /** How much is left, what one tablet weighs, the measure kept for it, what it cost, when it was bought. */
 export function ProductAmounts({ draft, change, problems }: ProductFieldsProps) {

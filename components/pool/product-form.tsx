@@ -14,17 +14,12 @@ import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { useSaveProduct } from '@/lib/client/shelf-products';
 import { householdProductSchema } from '@/lib/schemas/household-product';
 import { labelWays } from '@/lib/schemas/shelf-product';
-import { checkAnswers, type FieldProblems, focusFirstProblem, noProblems } from './field-problems';
+import { checkAnswers, focusFirstProblem, noProblems } from './field-problems';
 import { factsOf, ingredientNames } from './ingredients';
-import { missingOf, type ProductDraft, productAnswersOf } from './product-draft';
+import { missingOf, productAnswersOf } from './product-draft';
+import type { ProductFieldsProps } from './product-fields';
 import { ProductStrength } from './product-strength';
 import { ProductAmounts } from './product-amounts';
-
-export type ProductFieldsProps = {
-  draft: ProductDraft;
-  change: (part: Partial<ProductDraft>) => void;
-  problems: FieldProblems;
-};
 
 /** One product, copied from its label. */
 export function ProductForm({

@@ -6,7 +6,7 @@ import { RadioRows } from '@/components/ui/radio-rows';
 import { liquidStrengthBases } from '@/lib/storage/label-strength';
 import { factsOf } from './ingredients';
 import { tradeStrength } from './product-draft';
-import type { ProductFieldsProps } from './product-form';
+import type { ProductFieldsProps } from './product-fields';
 import { usePoolSetting } from './setting';
 
 /** How strong it is as printed; "10 %" of a liquid may mean four things, so it is asked which. */

@@ -6,16 +6,7 @@ import { fromInside, toInside, type UnitSystem } from '@/lib/units/unit';
 import { likelyUnitMistake, type UnitQuestion, type VolumeUnit } from '@/lib/units/unit-mistake';
 
 /** Lengths as they are typed: metres, or feet with decimals. */
-export const lengthFields = [
-  'meanDepth',
-  'length',
-  'width',
-  'secondWidth',
-  'diameter',
-  'depth',
-  'shallow',
-  'deep',
-] as const;
+const lengthFields = ['meanDepth', 'length', 'width', 'secondWidth', 'diameter', 'depth', 'shallow', 'deep'] as const;
 export type LengthField = (typeof lengthFields)[number];
 
 export const sizeDraftSchema = z.object({

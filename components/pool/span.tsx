@@ -5,7 +5,7 @@ import { DrawingText } from './drawing/drawing-text';
 import { px } from './drawing/outline-path';
 import { useWidth } from './drawing/use-width';
 
-export type SpanEnd = 'from' | 'to';
+type SpanEnd = 'from' | 'to';
 
 export type SpanProps = {
   /** Hours of the wall clock, 0 to 24; `from` after `to` runs over midnight. */

@@ -15,7 +15,7 @@ import { usePoolSetting } from './setting';
 import { UnitSwitch } from './unit-switch';
 
 /** What the answers so far come to: a figure and what it is, above the one main button. */
-export type RunningResult = { figure?: string | undefined; words: string };
+type RunningResult = { figure?: string | undefined; words: string };
 
 export type StepFrameProps = {
   step: SetupStep;

@@ -60,7 +60,7 @@ export function placeText(latitude: number, longitude: number, locale: string) {
 }
 
 /** Typed degrees to a tenth, negative in the south and west. */
-export function placeOf({ latitude, north, longitude, east }: SunDraft) {
+function placeOf({ latitude, north, longitude, east }: SunDraft) {
   const degrees = (text: string, positive: boolean) => {
     const value = parseDecimal(text);
     return value === undefined ? undefined : (Math.round(value * 10) / 10) * (positive ? 1 : -1);

@@ -3,8 +3,7 @@ import { parseDecimal } from '@/lib/units/parse';
 import { type PadQuantity, padQuantities, permitted } from './quantities';
 
 /** One pad of the strip with the steps printed for it on the bottle. */
-export const padSchema = z.object({ quantity: z.enum(padQuantities), steps: z.array(z.number()).min(2) });
-export type Pad = z.infer<typeof padSchema>;
+const padSchema = z.object({ quantity: z.enum(padQuantities), steps: z.array(z.number()).min(2) });
 
 /** The pads of one bottle of strips, from the top of the strip down. Kept on the device: the bottle stands beside it. */
 export const bottleSchema = z.array(padSchema).min(1);

@@ -1,5 +1,4 @@
 import { measuredRange } from '@/lib/schemas/measured-range';
-import type { UnitOfQuantity } from '@/lib/units/quantity';
 import type { UnitSystem } from '@/lib/units/unit';
 
 /** What a test asks for. Total chlorine is asked because strips and kits show it; used-up chlorine is worked out. */
@@ -66,10 +65,3 @@ export function typedUnit(quantity: EntryQuantity, system: UnitSystem) {
   if (quantity === 'temperature') return system === 'metric' ? ('degC' as const) : ('degF' as const);
   return system === 'metric' ? ('mg/L' as const) : ('ppm' as const);
 }
-
-/** The quantity of lib/units that a value is parsed and written as. */
-export function unitQuantity(quantity: EntryQuantity) {
-  return quantity === 'totalChlorine' ? ('freeChlorine' as const) : quantity;
-}
-
-export type TypedUnit = UnitOfQuantity<'freeChlorine' | 'pH' | 'temperature'>;

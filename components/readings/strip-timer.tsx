@@ -5,7 +5,7 @@ import { useTranslations } from 'next-intl';
 import { useEffect, useState } from 'react';
 import { Button } from '@/components/ui/button';
 
-export const stripSeconds = 15;
+const stripSeconds = 15;
 const radius = 20;
 const around = 2 * Math.PI * radius;
 

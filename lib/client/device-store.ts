@@ -35,16 +35,11 @@ export function writeKept(name: string, value: unknown): boolean {
  * @param name what it is kept under; belongs to one household
  * @param kept checks what was kept by an earlier version
  */
-export function useKept<Kept>(
-  name: string,
-  kept: KeptParser<Kept>,
-  initial: () => Kept,
-): [Kept, (next: Kept) => void, () => void] {
+export function useKept<Kept>(name: string, kept: KeptParser<Kept>, initial: () => Kept): [Kept, (next: Kept) => void] {
   const [value, setValue] = useState<Kept>(() => readKept(name, kept) ?? initial());
   const change = (next: Kept) => {
     setValue(next);
     writeKept(name, next);
   };
-  const forget = () => writeKept(name, undefined);
-  return [value, change, forget];
+  return [value, change];
 }

@@ -18,23 +18,6 @@ export type Measure = 'length' | 'width' | 'secondWidth' | 'shallow' | 'deep';
 /** Stands in the drawing, dotted, until the tape measure has been there [m]. */
 export const placeholder: Record<Measure, number> = { length: 8, width: 4, secondWidth: 4, shallow: 1.2, deep: 1.8 };
 
-export function drawnPool(outline: PoolOutline, floor: PoolFloor): DrawnPool {
-  const depths =
-    floor.floor === 'flat' ? { shallow: floor.depth, deep: floor.depth } : { shallow: floor.shallow, deep: floor.deep };
-  return { shape: outline.shape, ...widthsOf(outline), floor: floor.floor, ...depths };
-}
-
-function widthsOf(outline: PoolOutline): { length: number; width: number; secondWidth: number } {
-  switch (outline.shape) {
-    case 'round':
-      return { length: outline.diameter, width: outline.diameter, secondWidth: outline.diameter };
-    case 'freeform':
-      return { length: outline.length, width: outline.widthA, secondWidth: outline.widthB };
-    default:
-      return { length: outline.length, width: outline.width, secondWidth: outline.width };
-  }
-}
-
 /** Greatest width seen from above [m]. */
 export function breadth({ shape, width, secondWidth }: DrawnPool): number {
   return shape === 'freeform' ? Math.max(width, secondWidth) : width;

@@ -2,7 +2,7 @@ import { type DrawnPool, floorLine } from './drawn-pool';
 import { px } from './outline-path';
 
 /** How far the earth reaches beyond the walls, and how thick it is drawn [px]. */
-export const earth = { beside: 30, thick: 13 };
+const earth = { beside: 30, thick: 13 };
 /** From the edge of the pool down to the water [px]. */
 export const freeboard = 9;
 
