@@ -1,20 +1,11 @@
+import type { Entered, SignIn, SignUp } from '@/lib/schemas/account';
 import { fetchJson, type ReplyParser } from './fetch-json';
 
-export type SignIn = { email: string; password: string };
-
-export type SignUp = {
-  name: string;
-  email: string;
-  password: string;
-  householdName: string;
-  /** The browser's IANA zone: the pool is nearly always where it is described from. */
-  timeZone: string;
-  unitSystem: 'metric' | 'us';
-  locale: string;
-};
-
-/** Where to go after signing in or up: an address of our own, never another site's. */
-const whereNext: ReplyParser<{ next: string }> = {
+/**
+ * Where to go after signing in or up: an address of our own, never another site's. Checked by hand, because the schema
+ * would bring all of zod to the start page.
+ */
+const whereNext: ReplyParser<Entered> = {
   parse(value) {
     const next = typeof value === 'object' && value !== null && 'next' in value ? value.next : undefined;
     if (typeof next !== 'string' || !/^\/(?!\/)/.test(next))
@@ -31,11 +22,11 @@ export function browserTimeZone(): string {
 
 const nothing: ReplyParser<undefined> = { parse: () => undefined };
 
-export function signIn(entry: SignIn): Promise<{ next: string }> {
+export function signIn(entry: SignIn): Promise<Entered> {
   return fetchJson('/api/sign-in', whereNext, { method: 'POST', body: entry });
 }
 
-export function signUp(entry: SignUp): Promise<{ next: string }> {
+export function signUp(entry: SignUp): Promise<Entered> {
   return fetchJson('/api/sign-up', whereNext, { method: 'POST', body: entry });
 }
 
