@@ -1,5 +1,21 @@
+import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
+import { headers } from './journeys/headers';
+import { lookRound } from './journeys/look-round';
+import { looks } from './journeys/looks';
+import { measures } from './journeys/measures';
+import { measuring } from './journeys/measuring';
+import { scope } from './journeys/scope';
 import type { Journey } from './support/journey';
 
 /** Every journey of a run, the long ones first. */
-export const journeys: readonly Journey[] = [firstWeek];
+export const journeys: readonly Journey[] = [
+  lookRound,
+  ...looks,
+  firstWeek,
+  ...clockChanges,
+  measures,
+  scope,
+  headers,
+  measuring,
+];

@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { Page } from 'playwright-core';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import { borrowSession } from '../support/enter';
 import {
   addProduct,
   answerLabel,
@@ -19,7 +20,7 @@ import type { Journey, Stage } from '../support/journey';
 import { fullTest, sundayEvening, weekOf } from '../support/households';
 import { Person } from '../support/person';
 import type { Server } from '../support/server';
-import { apart, curves, drawnCurves, readSheet } from '../support/sheet';
+import { apart, curves, drawnCurves, quantitiesDrawn, readSheet } from '../support/sheet';
 import { until } from '../support/waiting';
 import { pattern, words } from '../support/words';
 
@@ -31,21 +32,18 @@ export const firstWeek: Journey = {
   seconds: 200,
   async run(stage) {
     const server = await stage.server({ name: 'first-week', clock: sundayEvening });
-    const { page, context } = await stage.visitor(server, 'Ines', { width: 1440, height: 1000 });
+    const visitor = await stage.visitor(server, 'Ines', { width: 1440, height: 1000 });
+    const { page } = visitor;
     const ines = new Person(server);
-    /** The browser's own session, used without the browser. */
-    const borrowSession = async () => {
-      ines.cookie = (await context.cookies()).map(({ name, value }) => `${name}=${value}`).join('; ');
-    };
     const sheet = () => ines.must<WeekSheet>('GET', '/api/week');
 
     await describeEverything(stage, page);
     await enterFullTest(stage, page);
-    await borrowSession();
+    await borrowSession(visitor, ines);
 
     await page.goto('/week');
-    await page.locator(curves).first().waitFor();
-    stage.equal('three curves ahead', (await page.locator(curves).count()) >= 3, true);
+    await page.locator(curves).first().waitFor({ state: 'attached' });
+    stage.equal('three curves', await quantitiesDrawn(page), ['freeChlorine', 'pH', 'stabilizer']);
     const planned = await sheet();
     stage.check('the plan has a dose at least', planned.doses.length > 0, planned.plan);
     await stage.part('verdict, standing line and chart are words', () => readSheet(stage, page, planned));
@@ -71,8 +69,8 @@ export const firstWeek: Journey = {
     await page.getByLabel(words('start.signIn.password'), { exact: true }).fill(account.password);
     await page.getByRole('button', { name: words('start.signIn.submit') }).click();
     await page.waitForURL('**/week');
-    await page.locator(curves).first().waitFor();
-    await borrowSession();
+    await page.locator(curves).first().waitFor({ state: 'attached' });
+    await borrowSession(visitor, ines);
     stage.equal('signed in again, all is as it was', stateOf(await sheet()), stateOf(after));
 
     await stage.part('a crash right after a save', () => crash(stage, server, ines));
@@ -107,7 +105,7 @@ async function becomes(stage: Stage, what: string, dose: PlanDose, status: strin
 
 async function openWeek(page: Page): Promise<void> {
   await page.goto('/week');
-  await page.locator(curves).first().waitFor();
+  await page.locator(curves).first().waitFor({ state: 'attached' });
 }
 
 /** One tap, and the way back. */
@@ -155,7 +153,7 @@ async function otherAmount(stage: Stage, page: Page, planned: PlanDose, sheet: S
   stage.check('the curve follows', apart(before, after) > 3, apart(before, after));
 
   await page.reload();
-  await page.locator(curves).first().waitFor();
+  await page.locator(curves).first().waitFor({ state: 'attached' });
   const reloaded = apart(after, await drawnCurves(page));
   stage.check('after a reload the curves are as they were', reloaded < 1, reloaded);
   stage.equal('and the dose too', sameDose(await sheet(), planned)?.status, 'changed');

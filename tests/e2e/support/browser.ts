@@ -26,6 +26,8 @@ export type VisitorOptions = {
   timeZone?: string;
   locale?: string;
   theme?: 'light' | 'dark';
+  /** A finger instead of a mouse. */
+  touch?: boolean;
 };
 
 /** One person with a browser of their own, and everything the browser complained about. */
@@ -41,7 +43,8 @@ export class Visitor {
   ) {}
 
   static async open(browser: Browser, server: Server, name: string, options: VisitorOptions = {}): Promise<Visitor> {
-    const { width = 1280, height = 900, timeZone = 'America/New_York', locale = 'en-US', theme = 'light' } = options;
+    const { width = 1280, height = 900, timeZone = 'America/New_York', locale = 'en-US' } = options;
+    const { theme = 'light', touch = false } = options;
     const context = await browser.newContext({
       baseURL: server.address,
       viewport: { width, height },
@@ -49,8 +52,12 @@ export class Visitor {
       locale,
       colorScheme: theme,
       reducedMotion: 'reduce',
+      hasTouch: touch,
+      isMobile: touch,
     });
     context.setDefaultTimeout(15_000);
+    // The loader of TypeScript marks functions by their names, also those that run in the page.
+    await context.addInitScript('globalThis.__name ??= (named) => named');
     // A refused policy is reported to nobody unless somebody listens before the page's own code runs.
     await context.addInitScript(() => {
       document.addEventListener('securitypolicyviolation', (event) => {

@@ -64,17 +64,24 @@ export const granules = {
   pricePerKg: 7.5,
 };
 
-/** Answers the first run without a browser, as far as the pool is in scope. */
+type Step = keyof typeof usualAnswers;
+
+/** Answers some steps of the first run without a browser. */
+export async function describeSteps(person: Person, steps: readonly Step[], answers: Answers = {}): Promise<void> {
+  for (const step of steps) {
+    const usual = usualAnswers[step];
+    await person.must('PUT', '/api/pool', {
+      step,
+      ...(usual === undefined ? {} : { answers: { ...usual, ...answers[step] } }),
+    });
+  }
+}
+
+/** A pool that is in scope, described to the end, with slow tablets and granules on the shelf. */
 export async function describePool(person: Person, answers: Answers = {}): Promise<void> {
   for (const product of [slowTablets, granules])
     await person.must('POST', '/api/shelf-products', { ...product, id: randomUUID() });
-  for (const [step, usual] of Object.entries(usualAnswers)) {
-    const given = answers[step as keyof typeof usualAnswers];
-    await person.must('PUT', '/api/pool', {
-      step,
-      ...(usual === undefined ? {} : { answers: { ...usual, ...given } }),
-    });
-  }
+  await describeSteps(person, ['scope', 'size', 'lining', 'sun', 'water', 'shelf', 'label'], answers);
 }
 
 /** A full test of good water. */

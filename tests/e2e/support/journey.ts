@@ -85,7 +85,6 @@ export class Stage {
 }
 
 export function wordsOf(problem: unknown): string {
-  // eslint-disable-next-line no-control-regex -- Playwright colours its messages
   return problem instanceof Error
     ? `${problem.stack ?? problem.message}`.replace(/\u001b\[\d+m/g, '')
     : String(problem);

@@ -2,8 +2,24 @@ import type { Page } from 'playwright-core';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import type { Stage } from './journey';
 
-/** The drawn curves of the week sheet. */
+/** The lines that are drawn in the charts of the week sheet: the curves, and the limits, which run level. */
 export const curves = 'path.recharts-line-curve';
+
+/** The colours in which the three curves are drawn, by what they show. */
+const strokes = { freeChlorine: 'rgb(14, 124, 134)', pH: 'rgb(107, 76, 122)', stabilizer: 'rgb(174, 126, 34)' };
+
+/** Which of the three quantities have a curve of more than a few hours on a light page. */
+export async function quantitiesDrawn(page: Page): Promise<string[]> {
+  const drawn = await page.locator(curves).evaluateAll((found) =>
+    found.map((path) => ({
+      stroke: getComputedStyle(path).stroke,
+      points: (path.getAttribute('d') ?? '').split(/[ML]/).length,
+    })),
+  );
+  return Object.entries(strokes)
+    .filter(([, colour]) => drawn.some(({ stroke, points }) => stroke === colour && points > 24))
+    .map(([quantity]) => quantity);
+}
 
 type Point = { x: number; y: number };
 

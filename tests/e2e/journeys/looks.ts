@@ -1,0 +1,49 @@
+import { randomUUID } from 'node:crypto';
+import { lookAt, widths } from '../looks/look-at';
+import { firstRun, signedIn, signedOut, type View } from '../looks/pages';
+import { enterAs } from '../support/enter';
+import { describeSteps, slowTablets, sundayEvening } from '../support/households';
+import type { Journey, Stage } from '../support/journey';
+import { Person } from '../support/person';
+import type { Server } from '../support/server';
+
+/** Colours, type, overlaps, cut text and accessibility of every page, and a picture of each. */
+export const looks: readonly Journey[] = [
+  looking('looks: signed out', signedOut, async () => undefined),
+  looking('looks: first run', firstRun, async (server) => {
+    const person = new Person(server);
+    await person.signUp();
+    await describeSteps(person, ['scope', 'size', 'lining', 'sun', 'water', 'shelf']);
+    await person.must('POST', '/api/shelf-products', { ...slowTablets, id: randomUUID() });
+    return person;
+  }),
+  looking('looks: signed in', signedIn, async (server) => {
+    const person = new Person(server);
+    await person.must('POST', '/api/look-round');
+    return person;
+  }),
+];
+
+function looking(
+  name: string,
+  views: readonly View[],
+  enter: (server: Server) => Promise<Person | undefined>,
+): Journey {
+  return {
+    name,
+    seconds: 240,
+    async run(stage: Stage) {
+      const server = await stage.server({ name: name.replace(/\W+/g, '-'), clock: sundayEvening });
+      const person = await enter(server);
+      for (const width of widths) {
+        const touch = width === 390;
+        const visitor = await stage.visitor(server, `${name} at ${width}`, { width, touch });
+        if (person) await enterAs(visitor, person);
+        for (const view of views) {
+          if (view.missing) visitor.expect(/404/);
+          await stage.part(`${view.name} at ${width}`, () => lookAt(stage, visitor.page, view, width));
+        }
+      }
+    },
+  };
+}

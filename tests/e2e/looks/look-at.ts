@@ -1,0 +1,74 @@
+import { AxeBuilder } from '@axe-core/playwright';
+import { join } from 'node:path';
+import type { Page } from 'playwright-core';
+import type { Stage } from '../support/journey';
+import { shotsFolder } from '../support/place';
+import { boxFaults, sidewaysScroll } from './boxes';
+import { foreignColours } from './colours';
+import { foreignFonts } from './fonts';
+import type { View } from './pages';
+import type { Theme } from './tokens';
+
+export const widths = [1440, 768, 390] as const;
+const heights = { 1440: 1000, 768: 1024, 390: 844 } as const;
+
+/** Everything that a machine can tell about how one page looks at one width, in both themes. */
+export async function lookAt(stage: Stage, page: Page, view: View, width: (typeof widths)[number]): Promise<void> {
+  const here = (what: string) => `${view.name} at ${width}: ${what}`;
+  await page.setViewportSize({ width, height: heights[width] });
+  await page.goto(view.path);
+  await page.waitForLoadState('networkidle');
+  await view.prepare?.(page);
+  // A pointer that rests on something, or a field that is being typed in, would be measured in that state.
+  await page.mouse.move(0, 0);
+
+  for (const theme of ['light', 'dark'] as const satisfies readonly Theme[]) {
+    await inTheme(page, theme);
+    stage.none(here(`only colours of the tokens, ${theme}`), await settledColours(page, theme));
+    // What dark changes are colours, and those are the same at every width.
+    if (theme === 'light' || width === 1440)
+      stage.none(here(`nothing that axe objects to, ${theme}`), await violations(page));
+    await page.screenshot({ path: join(shotsFolder, `${view.name}-${width}-${theme}.png`), fullPage: true });
+  }
+  stage.none(here('only the two families, loaded'), await foreignFonts(page));
+  const { overlaps, clipped, small } = await boxFaults(page);
+  stage.none(here('no box over another'), overlaps);
+  stage.none(here('no text cut off'), clipped);
+  stage.none(here('room for a finger'), small);
+  if (width !== 390) return;
+  await page.setViewportSize({ width: 320, height: 700 });
+  stage.equal(`${view.name} at 320: no sideways scroll`, await sidewaysScroll(page), 0);
+}
+
+/** Puts the lights on or out, and waits until the page has been drawn so. */
+async function inTheme(page: Page, theme: Theme): Promise<void> {
+  await page.emulateMedia({ colorScheme: theme });
+  await page.waitForFunction(
+    (wanted) =>
+      matchMedia(`(prefers-color-scheme: ${wanted})`).matches &&
+      getComputedStyle(document.documentElement).colorScheme === wanted,
+    theme,
+  );
+  await page.evaluate(
+    () => new Promise((drawn) => requestAnimationFrame(() => requestAnimationFrame(() => setTimeout(drawn, 30)))),
+  );
+}
+
+/** Measured again when something was found: it may have been on its way from one colour to another. */
+async function settledColours(page: Page, theme: Theme): Promise<string[]> {
+  const found = await foreignColours(page, theme);
+  if (found.length === 0) return found;
+  await page.waitForTimeout(300);
+  return foreignColours(page, theme);
+}
+
+async function violations(page: Page): Promise<string[]> {
+  const { violations: found } = await new AxeBuilder({ page }).analyze();
+  return found.map(
+    ({ id, nodes }) =>
+      `${id}: ${nodes
+        .map(({ html }) => html.slice(0, 140))
+        .slice(0, 3)
+        .join(' | ')}`,
+  );
+}

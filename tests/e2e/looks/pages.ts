@@ -1,0 +1,120 @@
+import type { Page } from 'playwright-core';
+import { choice } from '../support/first-run';
+import { curves } from '../support/sheet';
+import { pattern, words } from '../support/words';
+
+/** A page, or a state of one, as somebody sees it. */
+export type View = {
+  name: string;
+  path: string;
+  /** What has to be pressed first, and what has to be there before it is looked at. */
+  prepare?: (page: Page) => Promise<void>;
+  /** Not found on purpose. */
+  missing?: true;
+};
+
+const shows = (text: string | RegExp) => async (page: Page) => {
+  await page.getByText(text).first().waitFor();
+};
+
+export const signedOut: readonly View[] = [
+  { name: 'landing', path: '/' },
+  { name: 'sign-in', path: '/sign-in' },
+  { name: 'sign-up', path: '/sign-up' },
+  {
+    name: 'sign-up-refused',
+    path: '/sign-up',
+    async prepare(page) {
+      await page.getByRole('button', { name: words('start.signUp.submit') }).click();
+      await page.getByText(words('start.form.empty')).first().waitFor();
+    },
+  },
+  { name: 'help', path: '/help' },
+  { name: 'emergency', path: '/help/emergency' },
+  { name: 'safety', path: '/help/safety' },
+  { name: 'not-found', path: '/there-is-no-such-page', missing: true },
+];
+
+/** For somebody in the middle of the first run, with all steps open. */
+export const firstRun: readonly View[] = [
+  { name: 'first-run-scope', path: '/first-run/scope', prepare: shows(words('pool.scope.title')) },
+  { name: 'first-run-size', path: '/first-run/size', prepare: shows(words('pool.size.title')) },
+  {
+    name: 'first-run-size-doubt',
+    path: '/first-run/size',
+    async prepare(page) {
+      await page.getByLabel(words('pool.size.volume'), { exact: true }).fill('18000');
+      await page
+        .getByRole('button', { name: pattern('pool.size.doubt.no') })
+        .first()
+        .waitFor();
+    },
+  },
+  {
+    name: 'first-run-size-drawn',
+    path: '/first-run/size',
+    async prepare(page) {
+      await choice(page, words('pool.size.how.measured')).click();
+      await page.getByLabel(words('pool.size.measure.length'), { exact: true }).fill('10');
+      await page.getByLabel(words('pool.size.measure.width'), { exact: true }).fill('5');
+      await page.getByLabel(words('pool.size.measure.shallow'), { exact: true }).fill('1.1');
+      await page.getByLabel(words('pool.size.measure.deep'), { exact: true }).fill('1.9');
+    },
+  },
+  { name: 'first-run-lining', path: '/first-run/lining', prepare: shows(words('pool.lining.title')) },
+  { name: 'first-run-sun', path: '/first-run/sun', prepare: shows(words('pool.sun.title')) },
+  { name: 'first-run-water', path: '/first-run/water', prepare: shows(words('pool.water.title')) },
+  { name: 'first-run-shelf', path: '/first-run/shelf', prepare: shows(words('pool.shelf.title')) },
+  {
+    name: 'first-run-product',
+    path: '/first-run/shelf',
+    async prepare(page) {
+      const first = page.getByRole('button', { name: words('pool.shelf.addFirst') });
+      await first.or(page.getByRole('button', { name: words('pool.shelf.addAnother') })).click();
+      await page.getByRole('region', { name: words('pool.product.title') }).waitFor();
+    },
+  },
+  { name: 'first-run-label', path: '/first-run/label', prepare: shows(words('pool.label.title')) },
+];
+
+const testForm = (method: 'strip' | 'drop-kit' | 'slip') => async (page: Page) => {
+  await choice(page, words('readings.kind.full')).first().click();
+  await choice(page, words(`readings.method.${method}`)).click();
+};
+
+/** For a member of a household whose week is full. */
+export const signedIn: readonly View[] = [
+  {
+    name: 'week',
+    path: '/week',
+    async prepare(page) {
+      await page.locator(curves).first().waitFor({ state: 'attached' });
+    },
+  },
+  {
+    name: 'week-tables',
+    path: '/week',
+    async prepare(page) {
+      await page.locator(curves).first().waitFor({ state: 'attached' });
+      for (const summary of await page.locator('summary').all()) await summary.click();
+    },
+  },
+  { name: 'test-strip', path: '/test', prepare: testForm('strip') },
+  { name: 'test-kit', path: '/test', prepare: testForm('drop-kit') },
+  {
+    name: 'test-doubts',
+    path: '/test',
+    async prepare(page) {
+      await testForm('drop-kit')(page);
+      await page.locator('#value-freeChlorine').fill('0');
+      await page.locator('#value-pH').fill('74');
+      await page.locator('#value-totalAlkalinity').fill('700');
+      await page.locator('#value-calciumHardness').fill('many');
+      await page.locator('#value-calciumHardness').blur();
+      await page.getByText(words('readings.zero.title')).waitFor();
+    },
+  },
+  { name: 'pool', path: '/pool' },
+  { name: 'pool-sun', path: '/pool/sun', prepare: shows(words('pool.sun.title')) },
+  { name: 'help-signed-in', path: '/help' },
+];
