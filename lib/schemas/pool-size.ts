@@ -77,10 +77,14 @@ const floorSchema = z.discriminatedUnion(
 /** Measures of the water, not of the basin [m]. */
 const measuredSizeSchema = z
   .strictObject({ how: z.literal('measured'), outline: outlineSchema, floor: floorSchema })
-  .refine(({ outline, floor }) => isPossible(poolSize(outline, floor).volume), {
-    path: ['outline'],
-    message: 'No garden pool is that big. Check the measures.',
-  });
+  // A floor that is refused for itself has no volume to check.
+  .refine(
+    ({ outline, floor }) => !floorSchema.safeParse(floor).success || isPossible(poolSize(outline, floor).volume),
+    {
+      path: ['outline'],
+      message: 'No garden pool is that big. Check the measures.',
+    },
+  );
 
 export const poolSizeSchema = z.discriminatedUnion('how', [enteredSizeSchema, measuredSizeSchema], {
   error: 'Say whether you know the volume or measure the pool.',

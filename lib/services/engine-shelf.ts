@@ -39,7 +39,7 @@ export function goneProducts(
 /** Strength that shops sell most [% available chlorine, trade %, % by weight]. */
 const usualStrength: Partial<Record<GivenDose['substance'], number>> = {
   trichlor: 90,
-  dichlor: 56,
+  dichlor: 55.4,
   'calcium-hypochlorite': 65,
   'sodium-hypochlorite': 12.5,
   'hydrochloric-acid': 31.45,

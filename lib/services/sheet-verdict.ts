@@ -65,7 +65,7 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
     swimDay: isSwimDay(ground),
     limits: limitsNow(ground),
     readings: {
-      ...(freeChlorine ? { freeChlorine: zeroDoubt === 'bleached' ? bleached(freeChlorine) : freeChlorine } : {}),
+      ...(freeChlorine ? countedChlorine(freeChlorine, zeroDoubt) : {}),
       ...(pH ? { pH } : {}),
       ...(combinedChlorine ? { combinedChlorine } : {}),
     },
@@ -105,9 +105,11 @@ function newest(readings: readonly StoredReading[], quantity: MeasuredQuantity):
   return reading && value !== undefined ? { value: middleOf(value), takenAt: reading.takenAt.getTime() } : undefined;
 }
 
-/** The colour flashed and vanished: what was read as none is more than the test can show. */
-function bleached(reading: MeasuredValue): MeasuredValue {
-  return { ...reading, value: Math.max(reading.value, 2 * limits.freeChlorineMaximum.value) };
+/** A zero that may be far too much counts for nothing until it is answered; when the colour flashed it is too much. */
+function countedChlorine(reading: MeasuredValue, doubt: ZeroDoubt): { freeChlorine?: MeasuredValue } {
+  if (doubt === 'open') return {};
+  if (doubt !== 'bleached') return { freeChlorine: reading };
+  return { freeChlorine: { ...reading, value: Math.max(reading.value, 2 * limits.freeChlorineMaximum.value) } };
 }
 
 /** Where stabilizer was never measured the higher minimum holds: nobody knows that the water is free of it. */

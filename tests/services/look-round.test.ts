@@ -88,9 +88,9 @@ describe('the demo household', { timeout: 240_000 }, () => {
     expect(sheet.planProblem).toBeNull();
     expect(sheet.ahead?.hours).toHaveLength(169);
     expect(sheet.behind?.hours.length).toBeGreaterThan(48);
-    expect(sheet.doses.some(({ status }) => status === 'given')).toBe(true);
     expect(sheet.verdict.reasons.map(({ code }) => code)).not.toContain('due-dose-open');
     const week = await showWeek(context, { start: addDays(today, -7) });
+    expect([...week.doses, ...sheet.doses].some(({ status }) => status === 'given')).toBe(true);
     // Each plan counts its hours from its own test, so that a day with a new plan may have one less.
     expect(week.behind?.hours.length).toBeGreaterThan(160);
   });
