@@ -23,11 +23,13 @@ export function lowered(plan: Evaluated, choice: Choice, context: PlanContext): 
 
 function less(draft: Draft): Draft {
   const most = Math.max(...draft.measures);
-  if (most === 0) return { ...draft, tablets: draft.tablets - 1 };
-  const largest = draft.measures.indexOf(most);
-  return { ...draft, measures: draft.measures.map((each, evening) => (evening === largest ? each - 1 : each)) };
+  const oneLess = (counts: readonly number[]) => {
+    const largest = counts.indexOf(Math.max(...counts));
+    return counts.map((each, evening) => (evening === largest ? each - 1 : each));
+  };
+  return most > 0 ? { ...draft, measures: oneLess(draft.measures) } : { ...draft, tablets: oneLess(draft.tablets) };
 }
 
-function usesEvening({ tablets, tabletEvening, measures }: Draft, evening: number): boolean {
-  return measures[evening]! > 0 || (tablets > 0 && evening === tabletEvening);
+function usesEvening({ tablets, measures }: Draft, evening: number): boolean {
+  return measures[evening]! > 0 || tablets[evening]! > 0;
 }

@@ -6,7 +6,7 @@ import type { Cost } from '@/lib/schemas/plan';
 import { limits, lowestLevel } from '@/lib/standards/limits';
 import { surfaceRanges } from '@/lib/standards/surface-ranges';
 import type { PlanContext } from './context';
-import { type Choice, type Draft, measuresToBuy, visitsOf, weekDosesOf } from './draft';
+import { type Choice, type Draft, measuresToBuy, sumOf, visitsOf, weekDosesOf } from './draft';
 import { weights } from './weights';
 
 export type Evaluated = { draft: Draft; choice: Choice; median: Course; courses: Course[]; cost: Cost };
@@ -44,12 +44,11 @@ function costOf(draft: Draft, choice: Choice, median: Course, courses: readonly 
 }
 
 export function stabilizedIn(draft: Draft, context: PlanContext): boolean {
-  return context.stabilizedProductUsed || draft.tablets > 0;
+  return context.stabilizedProductUsed || sumOf(draft.tablets) > 0;
 }
 
 export function moneyOf({ tablets, fast, measures }: Draft, choice: Choice): number {
-  const count = measures.reduce((sum, each) => sum + each, 0);
-  return tablets * (choice.tablets?.price ?? 0) + count * (fast?.measurePrice ?? 0);
+  return sumOf(tablets) * (choice.tablets?.price ?? 0) + sumOf(measures) * (fast?.measurePrice ?? 0);
 }
 
 /** The price of going to the pool, and to the shop. */

@@ -32,16 +32,21 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
   if (closed)
     reason('replace-water-first', { stabilizer: closed.value, closesAt: closed.bound, swimLimit: pool.swimLimit });
   if (openShare < FEW_OPEN_HOURS) reason('few-open-hours', { share: openShare, visits: preferences.visits });
-  const tablets = doses.find(({ form }) => form === 'tablet');
-  const stabilized = context.stabilizedProductUsed || tablets !== undefined;
+  const tablets = doses.filter(({ form }) => form === 'tablet');
+  const stabilized = context.stabilizedProductUsed || tablets.length > 0;
+  const sum = (each: (dose: PlannedDose) => number) => tablets.reduce((total, dose) => total + each(dose), 0);
   reason('lowest-level-follows-stabilizer', {
     stabilizer: water.cyanuricAcid,
     lowestLevel: lowestLevel(water.cyanuricAcid, stabilized),
   });
 
   const free = choice.evenings.length > 0 && choice.visits > 0;
-  if (tablets)
-    reason('tablets-carry', { tablets: tablets.amount, rise: tablets.rise, stabilizer: tablets.effect?.change ?? 0 });
+  if (tablets.length > 0)
+    reason('tablets-carry', {
+      tablets: sum(({ amount }) => amount),
+      rise: sum(({ rise }) => rise),
+      stabilizer: sum(({ effect }) => effect?.change ?? 0),
+    });
   else if (options.noTablets)
     reason(options.noTablets, { stabilizer: water.cyanuricAcid, upper: pool.stabilizerBand[1], pH: water.pH });
   else if (free) reason('no-tablets-better-without');
@@ -52,7 +57,7 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
     reason('fast-closes-gap', {
       form: product.form,
       evenings: fast.length,
-      rise: fast.reduce((sum, { rise }) => sum + rise, 0),
+      rise: fast.reduce((total, { rise }) => total + rise, 0),
     });
   else if (options.fast.length === 0) reason('no-fast-on-shelf');
   else if (free) reason('nothing-fast-needed');

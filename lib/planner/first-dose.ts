@@ -1,5 +1,5 @@
 import type { Scenario } from '@/lib/schemas/scenario';
-import type { Draft } from './draft';
+import { type Draft, keyOf } from './draft';
 
 /**
  * Halves the first dose of a pool whose volume was only estimated and into which nothing has gone yet: half, then test
@@ -11,14 +11,9 @@ export function halveFirstDose(
 ): { draft: Draft; halvedEvening: number | null } {
   const whole = { draft, halvedEvening: null };
   if (!pool.volumeEstimated || given.length > 0) return whole;
-  const fastEvening = draft.measures.findIndex((measures) => measures > 0);
-  const tabletsFirst = draft.tablets > 0 && (fastEvening < 0 || draft.tabletEvening < fastEvening);
-  const half = (count: number) => Math.max(1, Math.floor(count / 2));
-  if (tabletsFirst)
-    return draft.tablets === 1
-      ? whole
-      : { draft: { ...draft, tablets: half(draft.tablets) }, halvedEvening: draft.tabletEvening };
-  if (fastEvening < 0 || draft.measures[fastEvening] === 1) return whole;
-  const measures = draft.measures.map((each, evening) => (evening === fastEvening ? half(each) : each));
-  return { draft: { ...draft, measures }, halvedEvening: fastEvening };
+  const first = draft.measures.findIndex((measures, evening) => measures > 0 || draft.tablets[evening]! > 0);
+  const half = (counts: readonly number[]) =>
+    counts.map((count, evening) => (evening === first && count > 1 ? Math.floor(count / 2) : count));
+  const halved = { ...draft, tablets: half(draft.tablets), measures: half(draft.measures) };
+  return keyOf(halved) === keyOf(draft) ? whole : { draft: halved, halvedEvening: first };
 }

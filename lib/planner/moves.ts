@@ -1,6 +1,5 @@
-import { type Choice, type Draft, visitsOf } from './draft';
+import { type Choice, type Draft, sumOf, visitsOf } from './draft';
 import type { FastOption } from './products';
-import type { Response } from './response';
 
 /** One way to change a draft; the same draft when it does not apply. */
 export type Move = (draft: Draft) => Draft;
@@ -24,29 +23,56 @@ export function fastMoves(choice: Choice, most: readonly number[]): Move[] {
   return [...amounts, ...shifts];
 }
 
-/** One tablet more or fewer, and each other evening on which they may be loaded. */
-export function tabletMoves({ tabletEvenings }: Response): Move[] {
-  const counts = [-1, 1].map((by): Move => (draft) => ({ ...draft, tablets: draft.tablets + by }));
-  const evenings = Array.from({ length: tabletEvenings }, (_, tabletEvening): Move => {
-    return (draft) =>
-      draft.tablets > 0 && draft.tabletEvening !== tabletEvening ? { ...draft, tabletEvening } : draft;
-  });
-  return [...counts, ...evenings];
+/** Tablets are loaded once and at most once more. */
+const MOST_LOADINGS = 2;
+
+/** One tablet more or fewer on an evening, a loading or a tablet to another evening, tablets in place of a fast dose. */
+export function tabletMoves({ evenings, tablets }: Choice): Move[] {
+  if (!tablets || tablets.most === 0) return [];
+  const all = evenings.map((_, evening) => evening);
+  const pairs = all.flatMap((from) => all.filter((to) => to !== from).map((to) => [from, to] as const));
+  return [
+    ...all.flatMap((evening) => [-1, 1].map((by) => withTablets(evening, (now) => now + by))),
+    ...pairs.flatMap(([from, to]): Move[] => [
+      (draft) => (draft.tablets[to] === 0 ? carryTablets(draft, from, to, Infinity) : draft),
+      (draft) => (draft.tablets[from]! > 1 ? carryTablets(draft, from, to, 1) : draft),
+    ]),
+    ...all.map((evening): Move => {
+      const load = withTablets(evening, (now) => now + 1);
+      const empty = withMeasures(evening, () => 0);
+      return (draft) => (draft.measures[evening]! > 0 ? load(empty(draft)) : draft);
+    }),
+  ];
+}
+
+function withTablets(evening: number, change: (now: number) => number): Move {
+  return (draft) => ({ ...draft, tablets: changed(draft.tablets, evening, change(draft.tablets[evening]!)) });
+}
+
+function carryTablets(draft: Draft, from: number, to: number, count: number): Draft {
+  return draft.tablets[from] === 0 ? draft : { ...draft, tablets: carried(draft.tablets, from, to, count) };
+}
+
+function changed(counts: readonly number[], evening: number, count: number): number[] {
+  return counts.map((each, index) => (index === evening ? count : each));
+}
+
+/** Up to so many from one evening to another. */
+function carried(counts: readonly number[], from: number, to: number, count: number): number[] {
+  const moved = Math.min(count, counts[from]!);
+  return counts.map((each, evening) => each + (evening === from ? -moved : evening === to ? moved : 0));
 }
 
 function withMeasures(evening: number, change: (now: number) => number): Move {
   return (draft) => {
     const now = draft.measures[evening]!;
     const then = change(now);
-    if (then === now) return draft;
-    return { ...draft, measures: draft.measures.map((each, index) => (index === evening ? then : each)) };
+    return then === now ? draft : { ...draft, measures: changed(draft.measures, evening, then) };
   };
 }
 
 function carry(draft: Draft, from: number, to: number, count: number): Draft {
-  const carried = Math.min(count, draft.measures[from]!);
-  const by = (evening: number) => (evening === from ? -carried : evening === to ? carried : 0);
-  return { ...draft, measures: draft.measures.map((each, evening) => each + by(evening)) };
+  return { ...draft, measures: carried(draft.measures, from, to, count) };
 }
 
 /** Most measures on each evening under the evening's cap. */
@@ -56,10 +82,15 @@ export function mostMeasures(fast: FastOption | null, rises: readonly number[]):
 
 /** Whether a draft keeps to visits, caps and one product in a visit. */
 export function allowed(draft: Draft, choice: Choice, most: readonly number[]): boolean {
-  const { tablets, tabletEvening, measures } = draft;
-  if (tablets < 0 || tablets > (choice.tablets?.most ?? 0) || visitsOf(draft) > choice.visits) return false;
-  if (tablets > 0 && measures[tabletEvening]! > 0) return false;
-  return measures.every((each, evening) => each >= 0 && each <= most[evening]!);
+  const { tablets, measures } = draft;
+  if (visitsOf(draft) > choice.visits || sumOf(tablets) > (choice.tablets?.most ?? 0)) return false;
+  let loadings = 0;
+  for (let evening = 0; evening < measures.length; evening++) {
+    const [count, each] = [tablets[evening]!, measures[evening]!];
+    if (count < 0 || each < 0 || each > most[evening]! || (count > 0 && each > 0)) return false;
+    if (count > 0) loadings++;
+  }
+  return loadings <= MOST_LOADINGS;
 }
 
 /** Makes moves as long as one of them makes the draft cheaper. */

@@ -27,24 +27,24 @@ export function plannedDoses(
   const { fast } = draft;
   const isoAt = (evening: number) => toOffsetIso(evenings[evening]!.at, pool.timeZone);
   const doses: PlannedDose[] = [];
-  if (draft.tablets > 0 && tablets) {
+  draft.tablets.forEach((count, evening) => {
+    if (count === 0 || !tablets) return;
     const { product, tabletMass, strength } = tablets;
     const contents = contentsPerUnit({ substance: 'trichlor', strength });
-    const mass = draft.tablets * tabletMass;
-    const stabilizer = (contents.cyanurate * mass * CYANURIC_ACID_MILLIGRAMS_PER_MOLE) / (pool.volume * 1000);
+    const stabilizer = contents.cyanurate * count * tabletMass * CYANURIC_ACID_MILLIGRAMS_PER_MOLE;
     doses.push({
-      at: isoAt(draft.tabletEvening),
+      at: isoAt(evening),
       product: product.id,
       toBuy: false,
       substance: 'trichlor',
       form: 'tablet',
-      amount: draft.tablets,
+      amount: count,
       unit: 'tablet',
-      rise: riseOf(contents, mass, pool.volume),
-      effect: { quantity: 'cyanuricAcid', change: stabilizer },
-      reason: (halvedEvening === draft.tabletEvening ? 'first-dose-halved' : 'slow-supply') satisfies DoseReason,
+      rise: riseOf(contents, count * tabletMass, pool.volume),
+      effect: { quantity: 'cyanuricAcid', change: stabilizer / (pool.volume * 1000) },
+      reason: (halvedEvening === evening ? 'first-dose-halved' : 'slow-supply') satisfies DoseReason,
     });
-  }
+  });
   let used = 0;
   draft.measures.forEach((measures, evening) => {
     if (measures === 0 || !fast) return;

@@ -1,10 +1,9 @@
-import type { TabletLoad } from '@/lib/projection/tablets';
 import { weekDose } from '@/lib/projection/events';
 import { pumpShares } from '@/lib/projection/pump';
 import type { PlanContext } from './context';
-import type { Choice, Draft } from './draft';
+import { type Choice, type Draft, sumOf } from './draft';
 import type { FastOption } from './products';
-import { hourOf, type QuickMember, quickWeek } from './quick-week';
+import { type AddedTablets, hourOf, type QuickMember, quickWeek } from './quick-week';
 import { remember } from './remember';
 
 /** Free chlorine of a draft, laid out as in QuickWeek. The same memory at every call: read it before the next. */
@@ -32,23 +31,25 @@ export function quickLevels(
     return differences(pumpShares(forcing, [...given, small]), pump);
   });
 
-  const loadOf = (count: number): TabletLoad => {
-    const { tabletMass, strength } = tablets!;
-    return { tabletMass, strength, count, erodedShare: 0 };
-  };
+  const loadsOf = ({ tablets: counts }: Draft): AddedTablets[] =>
+    counts.flatMap((count, evening) => {
+      if (count === 0 || !tablets) return [];
+      const { tabletMass, strength } = tablets;
+      return [{ load: { tabletMass, strength, count, erodedShare: 0 }, from: hours[evening]! }];
+    });
   const inFeeder = start.loads.length > 0 || given.some(({ kind }) => kind === 'tablets');
   const sourceOf = remember(
-    ({ tablets: count, tabletEvening, measures }: Draft) => {
+    (draft: Draft) => {
       const shares = pump.slice();
-      measures.forEach((each, evening) => {
+      draft.measures.forEach((each, evening) => {
         if (each > 0) for (const { hour, by } of pumpedOn[evening]!) shares[hour]! += by;
       });
-      return quick.sourceOf(count > 0 ? { load: loadOf(count), from: hours[tabletEvening]! } : null, shares);
+      return quick.sourceOf(loadsOf(draft), shares);
     },
-    ({ tablets: count, tabletEvening, measures }) => {
+    ({ tablets: counts, measures }) => {
       // Without tablets nothing hangs on the pump.
-      if (count === 0 && !inFeeder) return 0;
-      return measures.reduce((key, each) => key * 2 + Math.min(1, each), 1 + count * evenings.length + tabletEvening);
+      if (sumOf(counts) === 0 && !inFeeder) return '';
+      return counts.map((count, evening) => (measures[evening]! > 0 ? '+' : count)).join();
     },
   );
 
@@ -61,7 +62,7 @@ export function quickLevels(
       for (let evening = 0; evening < hours.length; evening++)
         rises[hours[evening]!]! += draft.measures[evening]! * each[evening]!;
     }
-    quick.run(rises, sourceOf(draft), draft.tablets, levels);
+    quick.run(rises, sourceOf(draft), sumOf(draft.tablets), levels);
     return levels;
   };
 }

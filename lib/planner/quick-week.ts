@@ -14,7 +14,7 @@ export type AddedTablets = { load: TabletLoad; from: number };
 /** A few members at once. Series stand hour by hour, the members side by side: [hour * members + member]. */
 export type QuickWeek = {
   /** What tablets release less what swimmers take [mg/L/h]; `pump` is its share of each hour. */
-  sourceOf: (tablets: AddedTablets | null, pump: Float64Array) => Float64Array;
+  sourceOf: (tablets: readonly AddedTablets[], pump: Float64Array) => Float64Array;
   /**
    * Free chlorine at every hour [mg/L] into `levels`.
    *
@@ -78,7 +78,7 @@ export function quickWeek(context: PlanContext, quickMembers: readonly QuickMemb
         for (const dose of context.given)
           if (dose.kind === 'tablets' && dose.at >= forcing.startsAt)
             addRelease(source, { load: dose.load, from: hourOf(dose.at, forcing) }, pump, member, index, members);
-        if (tablets) addRelease(source, tablets, pump, member, index, members);
+        for (const added of tablets) addRelease(source, added, pump, member, index, members);
       });
       return source;
     },

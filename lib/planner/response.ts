@@ -15,7 +15,7 @@ import {
   stabilizerPrice,
   troubleOf,
 } from './cost';
-import type { Choice, Draft } from './draft';
+import { type Choice, type Draft, sumOf, tabletDose } from './draft';
 import { type FastOption, riseOfFast } from './products';
 import { quickLevels } from './quick-levels';
 import { remember } from './remember';
@@ -31,8 +31,6 @@ export type Response = {
   /** Over every second search member: for a first look at many drafts. */
   roughCost: (draft: Draft) => number;
   correctionAt: (evaluated: Evaluated) => Correction;
-  /** On how many evenings, from the first on, tablets may be loaded. */
-  tabletEvenings: number;
   /** Free chlorine that one measure adds on each evening [mg/L]. */
   measureRises: (fast: FastOption) => readonly number[];
 };
@@ -67,7 +65,7 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
       const last = stabilizer.length - 1;
       return stabilizer.map((value, hour) => lowestLevel(value + (rise * hour) / last, stabilized));
     },
-    ({ tablets, tabletEvening }) => tablets * evenings.length + tabletEvening,
+    ({ tablets }) => tablets.join(),
   );
   const calciumWithout = undosed.end.calcium * HARDNESS_MILLIGRAMS_PER_MOLE;
 
@@ -84,7 +82,6 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
     );
   };
   return {
-    tabletEvenings: effects.tabletEvenings,
     measureRises,
     roughCost: (draft) => costAt(draft, roughLevels(draft)),
     cost: (draft, correction) => {
@@ -108,15 +105,13 @@ function withTablets(
 ): Course | null {
   const at = evenings[0]?.at;
   if (!tablets || tablets.most === 0 || at === undefined) return null;
-  const { tabletMass, strength } = tablets;
-  const load = { tabletMass, strength, count, erodedShare: 0 };
-  return integrateWeek(forcing, start, [...given, { at, kind: 'tablets', load }], setting);
+  return integrateWeek(forcing, start, [...given, tabletDose(tablets, count, at)], setting);
 }
 
 /** Hardness that the granules of a draft add [mg/L as CaCO3]. */
 function calciumOf({ fast, measures }: Draft, evenings: Choice['evenings'], volume: number): number {
   if (!fast || fast.form !== 'granular') return 0;
-  const amount = measures.reduce((total, each) => total + each, 0) * fast.measure;
+  const amount = sumOf(measures) * fast.measure;
   if (amount === 0) return 0;
   const contents = contentsPerUnit(fast.dose(amount, evenings[0]!.at));
   return (contents.calcium * amount * HARDNESS_MILLIGRAMS_PER_MOLE) / (volume * 1000);

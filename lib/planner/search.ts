@@ -1,7 +1,7 @@
 import { belowMaximum, lowered } from './below-maximum';
 import type { PlanContext } from './context';
 import { evaluate, type Evaluated } from './cost';
-import { type Choice, type Draft, keyOf } from './draft';
+import { type Choice, type Draft, keyOf, sumOf } from './draft';
 import { allowed, descend, fastMoves, mostMeasures, type Move, tabletMoves } from './moves';
 import type { FastOption } from './products';
 import { remember } from './remember';
@@ -10,16 +10,17 @@ import { screen, type Screened } from './screen';
 
 /** How many drafts of the screening are brought to where no single change helps, for each product. */
 const SKETCHES = 8;
+const QUICK_SKETCHES = 3;
 /** How many are projected in full: the best few, and the best with each count of tablets among the next. */
 const FINALISTS = 3;
-const MOST_FINALISTS = 6;
+const MOST_FINALISTS = 5;
 /** How many changes of the best plan are projected in full in each round, and how many rounds there are at most. */
-const CHANGES = 3;
+const CHANGES = 2;
 const ROUNDS = 5;
 const IMPROVEMENT = 1e-6;
 /** Plans this near to the best are compared over the whole ensemble. */
-const NEAR = 1.03;
-const RIVALS = 3;
+const NEAR = 1.02;
+const RIVALS = 2;
 
 /** The fast products that a search may use, cheapest first; null where there is none. */
 export type SearchSpace = { choice: Choice; fast: readonly (FastOption | null)[] };
@@ -40,7 +41,7 @@ export function searchPlan(context: PlanContext, response: Response, { choice, f
   }, keyOf);
 
   let best = cheapest(
-    finalistsOf(draftsOf(response, { choice, fast }), MOST_FINALISTS).map(({ draft }) => inFull(draft)),
+    finalistsOf(draftsOf(response, { choice, fast }, SKETCHES), MOST_FINALISTS).map(({ draft }) => inFull(draft)),
   );
   for (let round = 0; round < ROUNDS; round++) {
     const changes = changesOf(best.draft, choice, response, response.correctionAt(best));
@@ -60,16 +61,16 @@ export function searchPlan(context: PlanContext, response: Response, { choice, f
 /** The best plan by the quick model alone, projected over the search's members. */
 export function quickPlan(context: PlanContext, response: Response, space: SearchSpace): Evaluated {
   const members = context.searchMembers.map(({ member }) => member);
-  return evaluate(draftsOf(response, space)[0]!.draft, space.choice, context, members);
+  return evaluate(draftsOf(response, space, QUICK_SKETCHES)[0]!.draft, space.choice, context, members);
 }
 
 /** Drafts at which no single change helps, cheapest first by the quick model. */
-function draftsOf(response: Response, { choice, fast }: SearchSpace): Screened[] {
-  const sketches = inOrder(screen(fast[0] ?? null, choice, response)).slice(0, SKETCHES);
+function draftsOf(response: Response, { choice, fast }: SearchSpace, most: number): Screened[] {
+  const sketches = inOrder(screen(fast[0] ?? null, choice, response)).slice(0, most);
   const drafts = fast.flatMap((product) =>
-    sketches.map(({ draft }) => improve(withProduct(draft, product, response), choice, response)),
+    sketches.map(({ draft }) => improve(withProduct(draft, product, response), choice, response, response.roughCost)),
   );
-  return inOrder(drafts);
+  return inOrder(drafts.map(({ draft }) => ({ draft, cost: response.cost(draft) })));
 }
 
 function inOrder(drafts: readonly Screened[]): Screened[] {
@@ -79,7 +80,9 @@ function inOrder(drafts: readonly Screened[]): Screened[] {
 
 function finalistsOf(drafts: readonly Screened[], most: number): Screened[] {
   const counts = new Set<number>();
-  const firstOfCount = drafts.filter(({ draft }) => !counts.has(draft.tablets) && counts.add(draft.tablets));
+  const firstOfCount = drafts.filter(
+    ({ draft }) => !counts.has(sumOf(draft.tablets)) && counts.add(sumOf(draft.tablets)),
+  );
   return [...new Set([...drafts.slice(0, FINALISTS), ...firstOfCount])].slice(0, most);
 }
 
@@ -90,25 +93,26 @@ function cheapest(plans: readonly Evaluated[]): Evaluated {
 /** Every move that a draft allows, and what it has to keep to. */
 function movesOf(draft: Draft, choice: Choice, response: Response) {
   const most = mostMeasures(draft.fast, draft.fast ? response.measureRises(draft.fast) : draft.measures);
-  const moves: Move[] = [...(draft.fast ? fastMoves(choice, most) : []), ...tabletMoves(response)];
+  const moves: Move[] = [...(draft.fast ? fastMoves(choice, most) : []), ...tabletMoves(choice)];
   return { moves, fits: (each: Draft) => allowed(each, choice, most) };
 }
 
-/** Brings a draft to where no single change helps by the quick model. */
-function improve(draft: Draft, choice: Choice, response: Response, correction?: Correction): Screened {
+/** Brings a draft to where no single change helps. */
+function improve(draft: Draft, choice: Choice, response: Response, cost: (draft: Draft) => number): Screened {
   const { moves, fits } = movesOf(draft, choice, response);
-  return descend(draft, moves, fits, (each) => response.cost(each, correction));
+  return descend(draft, moves, fits, cost);
 }
 
 /** The likeliest single changes of a draft, and where the quick model would bring it. */
 function changesOf(draft: Draft, choice: Choice, response: Response, correction: Correction): Draft[] {
   const { moves, fits } = movesOf(draft, choice, response);
+  const cost = (each: Draft) => response.cost(each, correction);
   const single = moves
     .map((move) => move(draft))
     .filter((each) => each !== draft && fits(each))
-    .map((each) => ({ draft: each, cost: response.cost(each, correction) }));
+    .map((each) => ({ draft: each, cost: cost(each) }));
   const likeliest = inOrder(single).slice(0, CHANGES);
-  return [...likeliest, improve(draft, choice, response, correction)].map((each) => each.draft);
+  return [...likeliest, improve(draft, choice, response, cost)].map((each) => each.draft);
 }
 
 /** The same rises with another product, in its measures. */

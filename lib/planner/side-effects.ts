@@ -3,20 +3,17 @@ import { ALKALINITY_MILLIGRAMS_PER_EQUIVALENT, CYANURIC_ACID_MILLIGRAMS_PER_MOLE
 import { riseOf, type WeekDose, weekDose } from '@/lib/projection/events';
 import { type Course, integrateWeek } from '@/lib/projection/integrate';
 import type { PlanContext } from './context';
-import type { Choice, Draft } from './draft';
+import { type Choice, type Draft, tabletDose } from './draft';
 import type { FastOption } from './products';
 
 /** What a week does to the median's pH by hour, and what it ends with [mg/L]; or by how much one unit moves them. */
 export type SideEffect = { pH: Float64Array; totalAlkalinity: number; cyanuricAcid: number };
 
 export type SideEffects = {
-  /** On how many evenings, from the first on, tablets may be loaded. */
-  tabletEvenings: number;
   /** The median's pH by hour in a draft's week, and what it ends with. The same memory at every call. */
   endOf: (draft: Draft, measureRises: (fast: FastOption) => readonly number[]) => SideEffect;
 };
 
-const TABLET_EVENINGS = 2;
 /** Size of the dose that the answer to fast chlorine is measured with [mg/L]. */
 const PROBE_RISE = 2;
 
@@ -36,11 +33,8 @@ export function sideEffectsOf(context: PlanContext, { evenings, tablets }: Choic
     };
   };
   const count = Math.max(1, Math.round((tablets?.most ?? 0) / 2));
-  const tabletEvenings = tablets && tablets.most > 0 ? evenings.slice(0, TABLET_EVENINGS) : [];
-  const ofTablet = tabletEvenings.map(({ at }) => {
-    const { tabletMass, strength } = tablets!;
-    return answerTo({ at, kind: 'tablets', load: { tabletMass, strength, count, erodedShare: 0 } }, count);
-  });
+  const ofTablet =
+    tablets && tablets.most > 0 ? evenings.map(({ at }) => answerTo(tabletDose(tablets, count, at), count)) : [];
   const liquid = { substance: 'sodium-hypochlorite', strength: 12.5 } as const;
   const amount = PROBE_RISE / riseOf(contentsPerUnit(liquid), 1, scenario.pool.volume);
   const ofFast = evenings.map(({ at }) =>
@@ -49,15 +43,15 @@ export function sideEffectsOf(context: PlanContext, { evenings, tablets }: Choic
 
   const sum: SideEffect = { pH: undosed.pH.slice(), totalAlkalinity: 0, cyanuricAcid: 0 };
   return {
-    tabletEvenings: tabletEvenings.length,
-    endOf: ({ tablets: tabletCount, tabletEvening, fast, measures }, measureRises) => {
+    endOf: ({ tablets: counts, fast, measures }, measureRises) => {
       sum.pH.set(undosed.pH);
       sum.totalAlkalinity = undosed.totalAlkalinity;
       sum.cyanuricAcid = undosed.cyanuricAcid;
-      if (tabletCount > 0) add(sum, ofTablet[tabletEvening]!, tabletCount);
       const rises = fast ? measureRises(fast) : [];
-      for (let evening = 0; evening < measures.length; evening++)
+      for (let evening = 0; evening < measures.length; evening++) {
+        if (counts[evening]! > 0) add(sum, ofTablet[evening]!, counts[evening]!);
         if (measures[evening]! > 0) add(sum, ofFast[evening]!, measures[evening]! * rises[evening]!);
+      }
       return sum;
     },
   };

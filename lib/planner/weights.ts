@@ -24,6 +24,6 @@ export const weights = {
   pHPerCubicMetre: 0.016,
   /** Bicarbonate that brings 10 mg/L of alkalinity back to one m3: 17 g. */
   alkalinityPerCubicMetre: 0.04,
-  /** One m3 of replacement water, drain and fill. */
-  water: 2.5,
+  /** One m3 of replacement water from the tap. */
+  water: 1.5,
 } as const;

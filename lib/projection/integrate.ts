@@ -191,6 +191,9 @@ function advance(
   solveLedger(half, constants, midway);
   rateState(rates, midway, half.freeChlorine, parameters.boundPhotolysis);
   moveOn(ledger, rates, fillWater, hours, account);
+  // The next solve starts from where the water was heading: one step of it then does.
+  state.pH = 2 * midway.pH - state.pH;
+  state.hypochlorousAcid = Math.max(0, 2 * midway.hypochlorousAcid - state.hypochlorousAcid);
 }
 
 function copyLedger(from: Ledger, to: Ledger): void {
