@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { covers, feederIngredients, feederKinds, surfaces } from './pool';
 import { readingMethods } from './reading';
-import { timeZoneSchema, wallIntervalSchema } from './time';
+import { knownTimeZoneSchema } from './account';
+import { wallIntervalSchema } from './time';
 import { poolSizeSchema } from './pool-size';
 
 /** The parts of the first run in their order: scope, five short steps, and what the label says. */
@@ -48,7 +49,7 @@ export const sunAndPlaceSchema = z.strictObject({
   placeName: z.string().trim().max(80, 'Keep the name of the town under 80 characters.').optional(),
   latitude: degrees(90, 'latitude'),
   longitude: degrees(180, 'longitude'),
-  timeZone: timeZoneSchema,
+  timeZone: knownTimeZoneSchema,
   sunExposure: z.number({ error: 'Say how much sun the pool gets.' }).min(0).max(1),
   cover: z.enum(covers, { error: 'Say which cover the pool has, or none.' }),
   waterFeatures: yesOrNo,
