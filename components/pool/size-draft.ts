@@ -101,7 +101,7 @@ function rounded(metres: number, system: UnitSystem, locale: string): string {
   return formatForInput(toInside(hundredths, unit), 'length', unit, locale);
 }
 
-/** What the fields say, as the schema of the answers wants it; an empty field is undefined. */
+/** What the fields say, as the schema of the answers wants it; what is no number becomes NaN, which it refuses in words. */
 export function sizeAnswersOf(draft: SizeDraft): unknown {
   const metres = (field: LengthField) => parseQuantity(draft[field], 'length', lengthUnit(draft.system));
   if (draft.how === 'entered') {
@@ -112,7 +112,7 @@ export function sizeAnswersOf(draft: SizeDraft): unknown {
       unit: draft.unit,
       sure: draft.sure ?? undefined,
       unitConfirmed: isConfirmed(draft),
-      ...(draft.meanDepth.trim() === '' ? {} : { meanDepth }),
+      ...(draft.meanDepth.trim() === '' ? {} : { meanDepth: meanDepth ?? Number.NaN }),
     };
   }
   return { how: 'measured', outline: outlineOf(draft, metres), floor: floorOf(draft, metres) };
