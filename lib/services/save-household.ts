@@ -14,6 +14,7 @@ export async function saveHousehold(context: ServiceContext, changes: HouseholdC
   assertMay(access, 'change-household');
   const { householdId, personId } = access;
   const given = Object.fromEntries(Object.entries(changes).filter(([, value]) => value !== undefined));
+  if (Object.keys(given).length === 0) return { done: true };
   await inWriteTransaction(db, async (tx) => {
     await updateHousehold(tx, householdId, given);
     await writeAudit(tx, { householdId, personId, at: now, action: 'save-household', detail: given });
