@@ -1,3 +1,5 @@
+import { badForms } from './journeys/bad-forms';
+import { badRequests } from './journeys/bad-requests';
 import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
 import { headers } from './journeys/headers';
@@ -13,6 +15,8 @@ export const journeys: readonly Journey[] = [
   lookRound,
   ...looks,
   firstWeek,
+  badForms,
+  badRequests,
   ...clockChanges,
   measures,
   scope,
