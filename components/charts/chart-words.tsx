@@ -16,7 +16,7 @@ export function ChartWords({ words }: { words: readonly PlacedWords[] }) {
     return (
       <g key={id} className={`[paint-order:stroke] [stroke-linejoin:round] [stroke-width:4px] ${halo} ${figure}`}>
         {lines.map((line, index) => (
-          <text key={line[0]?.text} x={x} y={y + (baselines[index] ?? 0)} textAnchor={anchor}>
+          <text key={line[0]?.text} className="fill-ink" x={x} y={y + (baselines[index] ?? 0)} textAnchor={anchor}>
             {line.map(({ text, size, weight }) => (
               <tspan key={text} fontSize={size} className={weights[weight]}>
                 {text}

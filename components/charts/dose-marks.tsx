@@ -47,6 +47,7 @@ export function MeetingMark({ at, meets, axis, width, value }: Ground & { at: nu
     <path
       d="M-4.5 -4.5l9 9m0 -9l-9 9"
       transform={`translate(${xOf(axis, width, at)} ${yOf(value, meets)})`}
+      fill="none"
       className="stroke-terra-ink"
       strokeWidth="2.4"
       strokeLinecap="round"

@@ -16,7 +16,7 @@ export function ChartPatterns() {
           patternTransform="rotate(-45)"
           className="text-ink"
         >
-          <path d="M0 3H6" stroke="currentColor" strokeWidth="1.1" />
+          <path d="M0 3H6" fill="none" stroke="currentColor" strokeWidth="1.1" />
         </pattern>
         <pattern id="chart-waves" width="36" height="11" patternUnits="userSpaceOnUse" className="text-wave">
           <path d="M0 5.5q4.5 -3 9 0t9 0t9 0t9 0" fill="none" stroke="currentColor" strokeWidth="0.7" />

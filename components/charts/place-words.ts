@@ -1,6 +1,6 @@
 /** A rectangle in pixels, from its upper left corner. */
 export type Box = { x: number; y: number; width: number; height: number };
-export type Anchor = 'start' | 'middle' | 'end';
+type Anchor = 'start' | 'middle' | 'end';
 export type Place = { x: number; y: number; anchor: Anchor };
 
 export type Weight = 'plain' | 'bold' | 'figure' | 'italic';
@@ -59,7 +59,7 @@ export function widthOf(line: WordLine): number {
   return line.reduce((width, { text, size, weight }) => width + text.length * size * characterWidth[weight], 0);
 }
 
-export function heightOf(lines: readonly WordLine[]): number {
+function heightOf(lines: readonly WordLine[]): number {
   return lines.reduce((height, line) => height + sizeOf(line), 0) + LINE_GAP * (lines.length - 1);
 }
 

@@ -7,11 +7,11 @@ import { ChartWords } from './chart-words';
 import { DoseCircles } from './dose-marks';
 import { LaneChart, type LaneTime, layer } from './lane-chart';
 import { NotesLayer } from './notes-layer';
-import { type Place, placeWords, type Words } from './place-words';
+import { type Box, type Place, placeWords, type Words } from './place-words';
 import { type ChartTest, TestMarks } from './test-marks';
 import { isOn, xOf } from './time-axis';
 import { type ValueAxis, yOf } from './value-axis';
-import { type CurveQuantity, waterAt, type WaterPoint } from './water-curve';
+import { type CurveQuantity, type Likely, waterAt, type WaterPoint } from './water-curve';
 import { Curve, type Limit, LimitLines } from './water-lines';
 
 export type QuantityLaneProps = {
@@ -34,7 +34,7 @@ export type QuantityLaneProps = {
 export function QuantityLane(props: QuantityLaneProps) {
   const { quantity, time, value, rows, points, keep, limits, doses, tests, label } = props;
   const { axis, width } = time;
-  const taken = bandBoxes(props);
+  const taken = takenBoxes(props);
   const words = placeWords(wordsOf(props), taken, { x: 0, y: 0, width, height: value.height });
   return (
     <LaneChart
@@ -60,40 +60,47 @@ export function QuantityLane(props: QuantityLaneProps) {
   );
 }
 
-function bandBoxes({ quantity, time: { axis, width }, value, points, tests }: QuantityLaneProps) {
-  const band = points.slice(0, -1).flatMap((point, index) => {
+/** In a lane this low, words may stand on the likely range, but not on its middle, a limit or a test. */
+function takenBoxes({ quantity, time: { axis, width }, value, points, limits, tests }: QuantityLaneProps): Box[] {
+  const middles = points.slice(0, -1).flatMap((point, index) => {
     const next = points[index + 1];
     if (next === undefined) return [];
     const x = xOf(axis, width, point.at);
-    const y = yOf(value, Math.max(point[quantity].high, next[quantity].high));
-    const bottom = yOf(value, Math.min(point[quantity].low, next[quantity].low));
-    return [{ x, y, width: xOf(axis, width, next.at) - x, height: bottom - y }];
+    const [here, there] = [yOf(value, point[quantity].middle), yOf(value, next[quantity].middle)];
+    return [
+      { x, y: Math.min(here, there) - 2, width: xOf(axis, width, next.at) - x, height: Math.abs(here - there) + 4 },
+    ];
   });
+  const hatches = limits.map((limit) => ({ x: 0, y: yOf(value, limit.value) - 7, width, height: 8 }));
   const dots = tests.map(({ at, value: level, spread, between }) => {
     const top = yOf(value, between?.high ?? level + spread);
     const bottom = yOf(value, between?.low ?? level - spread);
     return { x: xOf(axis, width, at) - 6, y: top, width: 12, height: bottom - top };
   });
-  return [...band, ...dots];
+  return [...middles, ...hatches, ...dots];
 }
 
 function wordsOf({ quantity, time: { axis, width, now }, value, points, tests, phrases }: QuantityLaneProps): Words[] {
   const line = (text: string) => [[{ text, size: 12.5, weight: 'bold' as const }]];
-  const aboveAndBelow = (x: number, level: number, anchor: Place['anchor']): Place[] =>
-    [yOf(value, level) + 8, yOf(value, level) - 21, 2, value.height - 15].map((y) => ({ x, y, anchor }));
+  const aboveAndBelow = (x: number, { low, middle, high }: Likely, anchor: Place['anchor']): Place[] =>
+    [yOf(value, low) + 5, yOf(value, high) - 17, yOf(value, middle) + 4, yOf(value, middle) - 16].map((y) => ({
+      x,
+      y,
+      anchor,
+    }));
   const last = points.at(-1);
   const end = last &&
     phrases.end !== undefined && {
       id: 'end',
       lines: line(phrases.end),
-      places: aboveAndBelow(xOf(axis, width, last.at) - 5, last[quantity].low, 'end'),
+      places: aboveAndBelow(xOf(axis, width, last.at) - 5, last[quantity], 'end'),
     };
   const level = isOn(axis, now) ? waterAt(points, now)?.[quantity] : undefined;
   const current = level &&
     phrases.now !== undefined && {
       id: 'now',
       lines: line(phrases.now),
-      places: aboveAndBelow(xOf(axis, width, now) + 6, level.low, 'start'),
+      places: aboveAndBelow(xOf(axis, width, now) + 6, level, 'start'),
     };
   const measured = tests.flatMap(({ id, at, value: tested, spread, between }) => {
     const text = phrases.tests[id];

@@ -6,7 +6,7 @@ import { cutTo, isOn, type Stretch, type TimeAxis, xOf } from './time-axis';
 import { type ValueAxis, valueAxis, yOf } from './value-axis';
 import type { WaterPoint } from './water-curve';
 
-export const sparkSize = { width: 96, height: 42 } as const;
+const sparkSize = { width: 96, height: 42 } as const;
 
 /** The scale that all small pictures of a week share, so that their days can be compared. */
 export function sparkAxis(points: readonly WaterPoint[], limit: number): ValueAxis {
@@ -64,7 +64,7 @@ export function Spark({ axis, value, points, nights, limit, doses }: Props) {
         );
       })}
       <rect x="0" y={limitY - 4} width={width} height="4" fill={HATCH} opacity="0.5" />
-      <path d={`M0 ${limitY}H${width}`} className="stroke-ink" strokeWidth="1" />
+      <path d={`M0 ${limitY}H${width}`} fill="none" className="stroke-ink" strokeWidth="1" />
       {within.length > 1 && (
         <g fill="none">
           <path d={`M${lowest}`} className="stroke-ink" strokeWidth="1" />

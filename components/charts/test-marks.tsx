@@ -51,6 +51,7 @@ export function TestMarks({ tests, radius = 4.6 }: { tests: readonly ChartTest[]
 const whisker = {
   dataKey: 'spread',
   direction: 'y',
+  fill: 'none',
   stroke: 'currentColor',
   isAnimationActive: false,
   zIndex: layer.test - 1,

@@ -128,10 +128,10 @@ function gainWords(geometry: WeekGeometry): Words[] {
     if (gain === undefined || moves !== 'freeChlorine' || !isOn(axis, at)) return [];
     const x = xOf(axis, width, at);
     const places: Place[] = [
-      { x: x + 2, y, anchor: 'end' },
-      { x: x - 2, y, anchor: 'start' },
-      { x: x + 2, y: TOP_MARGIN, anchor: 'end' },
-      { x: x - 2, y: TOP_MARGIN, anchor: 'start' },
+      { x: x - 3, y, anchor: 'end' },
+      { x: x + 4, y, anchor: 'start' },
+      { x: x - 3, y: TOP_MARGIN, anchor: 'end' },
+      { x: x + 4, y: TOP_MARGIN, anchor: 'start' },
     ];
     return [
       { id: `gain ${id}`, lines: [[run(gain, 'figure', GAIN)], [run(words)]], places, mayBeLeftOut: true as const },

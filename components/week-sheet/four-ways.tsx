@@ -71,7 +71,7 @@ function Comparison({ rows }: { rows: readonly BurdenRow[] }) {
 function Track({ row, width }: { row: BurdenRow; width: number }) {
   return (
     <svg width={width} height="35" viewBox={`0 0 ${width} 35`} aria-hidden="true">
-      <path d={`M0 17.5H${width}`} className="stroke-rule-2" strokeWidth="1" />
+      <path d={`M0 17.5H${width}`} fill="none" className="stroke-rule-2" strokeWidth="1" />
       {placeMarks(row, width).map(({ mix, x }) => (
         <g key={mix} transform={`translate(${x} 17.5)`}>
           <circle r="8.5" className="fill-paper" />

@@ -2,7 +2,7 @@ import type { Mark } from '@/components/charts/product-glyph';
 import type { Alternative } from '@/lib/schemas/plan';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 
-export const burdens = ['money', 'visits', 'swing', 'stabilizer', 'hardness', 'kilograms'] as const;
+const burdens = ['money', 'visits', 'swing', 'stabilizer', 'hardness', 'kilograms'] as const;
 export type Burden = (typeof burdens)[number];
 export type Mix = Alternative['kind'] | 'mix';
 

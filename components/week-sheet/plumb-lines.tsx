@@ -47,6 +47,7 @@ export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQ
             d={
               crossesFigures(x) ? `M${x} ${foot}V${figures.bottom}M${x} ${figures.top}V${top}` : `M${x} ${foot}V${top}`
             }
+            fill="none"
             strokeWidth="1.1"
             strokeDasharray={dose.given ? 'none' : '2 3'}
           />

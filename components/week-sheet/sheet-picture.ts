@@ -30,7 +30,7 @@ export type SheetPicture = {
   meeting: Meeting | undefined;
 };
 
-export type Meeting = { at: number; value: number; limit: 'lowest-level' | 'swim-limit' };
+type Meeting = { at: number; value: number; limit: 'lowest-level' | 'swim-limit' };
 
 export function pictureOf(sheet: WeekSheet): SheetPicture {
   const days = daysOf(sheet);

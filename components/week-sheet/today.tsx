@@ -21,7 +21,8 @@ export function Today() {
 
 function TodayOf({ day }: { day: SheetDay }) {
   const t = useTranslations('week');
-  const { sheet } = useSheet();
+  const { sheet, picture } = useSheet();
+  const planned = picture.planEndsAt !== undefined && day.from < picture.planEndsAt;
   const items = toDoOf(day, sheet);
   const nothingToAdd = !items.some((item) => item.kind === 'dose' && item.dose.status === 'planned');
   return (
@@ -40,7 +41,7 @@ function TodayOf({ day }: { day: SheetDay }) {
       {nothingToAdd && (
         <p className="flex gap-2.5 border-b border-ink py-3 font-strong">
           <Coffee aria-hidden="true" className="mt-0.5 size-5.25" />
-          {t('phone.nothingToday')}
+          {t(planned ? 'phone.nothingToday' : 'lane.noPlanDay')}
         </p>
       )}
     </section>

@@ -127,7 +127,9 @@ export function useQuantityPhrases(
       phrases: { now: undefined, end: undefined, tests: {} },
     };
   const [from, to] = [first[quantity].middle, last[quantity].middle];
-  const perDay = ((to - from) / (last.at - first.at)) * DAY;
+  // What was promised before now may have been set right by a test: the rate is that of what is ahead.
+  const since = waterAt(picture.points, picture.now) ?? first;
+  const perDay = last.at > since.at ? ((to - since[quantity].middle) / (last.at - since.at)) * DAY : 0;
   const end = { value: level(to), day: times.weekday(last.at - 1) };
   const water = waterAt(picture.points, picture.now);
   const isStabilizer = quantity === 'cyanuricAcid';

@@ -2,6 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { addDays, daysBetween } from '@/lib/calendar/household-day';
+import { intervalsOfDay, wallToInstant } from '@/lib/calendar/wall-time';
 import { nextPart } from '@/lib/calendar/part-of-day';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { doseInstant, effectiveAmount, isLastLight } from './dose-state';
@@ -42,8 +43,11 @@ export function useDoseWords() {
     afterwards: (dose: PlanDose) => {
       if (dose.steps === 'tablets-inline') return t('after.tablets');
       const free = nextPart(instantOf(dose.waitUntil), household.timeZone);
-      const nextMorning = addDays(times.dayOf(instantOf(dose.at)), 1);
-      if (free.part === 'morning' && free.day === nextMorning) return t('after.morning');
+      const doseDay = times.dayOf(instantOf(dose.at));
+      const morning = wallToInstant(addDays(doseDay, 1), '06:00', household.timeZone).instant;
+      const lastSwim = intervalsOfDay([sheet.pool.swimHours], doseDay, household.timeZone).at(-1)?.to ?? morning;
+      // Once the swim hours are over nobody goes in before the next day's, however early the wait ends.
+      if (free.startsAt >= Math.min(lastSwim, morning) && free.startsAt <= morning) return t('after.morning');
       return t('after.part', { when: times.partAfter(instantOf(dose.waitUntil)) });
     },
     /** "Due tomorrow". */

@@ -5,7 +5,7 @@ import { useTranslations } from 'next-intl';
 import { waterAt } from '@/components/charts/water-curve';
 import { ageOf } from '@/lib/calendar/age';
 import { bold } from './bold';
-import { nextCheck } from './checks';
+import { type Check, nextCheck } from './checks';
 import { capitalised } from './capitalised';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
@@ -35,7 +35,6 @@ function Level({ framed }: { framed: boolean }) {
   const t = useTranslations('week.water');
   const { sheet, picture } = useSheet();
   const units = useUnits();
-  const times = useTimes();
   const { pool } = sheet;
   const water = waterAt(picture.points, picture.now);
   if (water === undefined) return null;
@@ -43,7 +42,6 @@ function Level({ framed }: { framed: boolean }) {
   const side = level < water.lowestLevel ? 'under' : level > water.swimLimit ? 'over' : 'between';
   const setBy = pool.swimLimitSetBy === null ? t('label') : t('person', { name: pool.swimLimitSetBy });
   const check = nextCheck(sheet.checks);
-  const when = check && times.partAt(instantOf(check.at));
   return (
     <p className={framed ? 'mt-1.5 text-body text-pretty' : 'mt-1.5 font-display text-lead text-pretty md:mt-0'}>
       {t(side, {
@@ -52,11 +50,22 @@ function Level({ framed }: { framed: boolean }) {
         limit: units.number(water.swimLimit),
         setBy,
       })}
-      {when !== undefined && sheet.verdict.state === 'fine' && (
-        <> {t(check?.kind === 'full' ? 'wantsFull' : 'wantsQuick', { when: capitalised(when) })}</>
-      )}
+      {check && sheet.verdict.state === 'fine' && <CheckWanted check={check} />}
     </p>
   );
+}
+
+function CheckWanted({ check: { at, kind } }: { check: Check }) {
+  const t = useTranslations('week.water');
+  const { picture } = useSheet();
+  const times = useTimes();
+  const instant = instantOf(at);
+  const when = times.partAt(instant);
+  const sentence =
+    instant < picture.now
+      ? t(kind === 'full' ? 'openFull' : 'openQuick', { when })
+      : t(kind === 'full' ? 'wantsFull' : 'wantsQuick', { when: capitalised(when) });
+  return <> {sentence}</>;
 }
 
 function LikelyRange() {

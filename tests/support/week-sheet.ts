@@ -166,7 +166,7 @@ type At = (day: number, time: string) => number;
 type Iso = (instant: number) => string;
 
 /** A dose of granules one evening, planned; everything may be overridden. */
-export function aDose(number: number, at: number, iso: Iso, overrides: Partial<PlanDose> = {}): PlanDose {
+function aDose(number: number, at: number, iso: Iso, overrides: Partial<PlanDose> = {}): PlanDose {
   return {
     id: idOf(100 + number),
     planId,

@@ -77,7 +77,7 @@ describe('words of the chlorine lane', () => {
     const shape = geometry(58, 910);
     const words = weekWords(phrases, shape).find(({ id }) => id === 'gain 2')!;
     expect(words.lines.flat().map(({ text }) => text)).toEqual(['+0.9', '95 g granules']);
-    expect(words.places[0]!.x).toBeCloseTo(xOf(axis, 910, shape.doses[2]!.at) + 2, 9);
+    expect(words.places[0]!.x).toBeCloseTo(xOf(axis, 910, shape.doses[2]!.at) - 3, 9);
     expect(waterAt(shape.points, shape.doses[2]!.at)).toBeDefined();
   });
 });

@@ -62,6 +62,23 @@ describe('a dose that is not due yet', () => {
   });
 });
 
+describe('how long nobody goes in', () => {
+  const at = '2026-07-09T17:15:00+02:00';
+
+  it.each([
+    // Swim hours end at 20:00: a wait that ends after them lasts till the morning, however early the evening.
+    { waitUntil: '2026-07-09T21:15:00+02:00', words: /Nobody in until the morning\./ },
+    { waitUntil: '2026-07-09T19:10:00+02:00', words: /Nobody in until the morning\./ },
+    { waitUntil: '2026-07-09T17:20:00+02:00', words: /Nobody in until Thursday evening\./ },
+    { waitUntil: '2026-07-10T13:10:00+02:00', words: /Nobody in until Friday afternoon\./ },
+  ])('$waitUntil', async ({ waitUntil, words }) => {
+    const others = aWeekSheet().doses.filter(({ id }) => id === thursday);
+    const sheet = withDose({ ...aWeekSheet(), doses: others }, { at, waitUntil });
+    await showSheet(sheet);
+    expect(screen.getByText(words)).toBeInTheDocument();
+  });
+});
+
 describe('ticking', () => {
   it('marks a dose as added with one tap, and the sheet follows the new plan', async () => {
     const before = dueNow();

@@ -6,7 +6,7 @@ import type { DoseTick } from '@/lib/schemas/plan-dose';
 import { type WeekSheet, weekSheetSchema } from '@/lib/schemas/week-sheet';
 import { renderWithWords } from '../../support/with-words';
 
-export type SentTick = { address: string; tick: DoseTick };
+type SentTick = { address: string; tick: DoseTick };
 /** What the server answers to a tick: a sheet, an error with its status, or no answer at all. */
 export type TickAnswer = WeekSheet | { status: number; code: string; message: string } | 'no answer';
 
