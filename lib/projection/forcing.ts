@@ -26,8 +26,9 @@ export type Forcing = {
   stepHours: number;
   stepsPerHour: number;
   steps: number;
-  /** sky * exposure * cover * (sin e / sin 66.4 deg)^2.42 [1]. */
+  /** sky * exposure * cover * (sin e / sin 66.4 deg)^2.42 [1], and the same for equal parts of each step. */
   sun: Float64Array;
+  sunParts: Float64Array;
   /** Share of the step in which the pump runs by its own timer [1]. */
   pump: Float64Array;
   /** Share of the step in which the cover lies [1]. */
@@ -71,6 +72,7 @@ export function prepareForcing(
     stepsPerHour,
     steps,
     sun: series(),
+    sunParts: new Float64Array(steps * partsOf(stepHours)),
     pump: series(),
     covered: series(),
     evaporation: series(),
@@ -81,7 +83,7 @@ export function prepareForcing(
     backwashes: [],
   };
   const passes = coverPasses[pool.cover];
-  const sunThrough = sunUnder(pool, startsAt, endsAt, steps);
+  const sunThrough = sunUnder(pool, startsAt, endsAt, forcing.sunParts.length);
 
   let day = dayOf(startsAt, pool.timeZone);
   for (let index = 0; startOfDay(day, pool.timeZone) < endsAt; index++, day = addDays(day, 1)) {
@@ -110,6 +112,8 @@ export function prepareForcing(
         forcing.backwashes.push({ at: instant, volume: Math.min(once(week.backwash), pool.volume) });
     }
   }
+  const parts = partsOf(stepHours);
+  forcing.sunParts.forEach((part, index) => (forcing.sun[Math.floor(index / parts)]! += part / parts));
   for (let step = 0; step < steps; step++) {
     const covered = forcing.covered[step]!;
     forcing.evaporation[step]! *= 1 - covered * (1 - passes.evaporation);
@@ -143,12 +147,26 @@ function outside(whole: InstantInterval, inner: readonly InstantInterval[]): Ins
   return gaps;
 }
 
-type SunSamples = { instants: number[]; weights: number[]; perStep: number };
+/** Into how many parts a step is cut for the sun. */
+function partsOf(stepHours: number): number {
+  return Math.max(1, Math.round(SUN_SAMPLES_PER_HOUR * stepHours));
+}
 
-function sunUnder(pool: Pool, startsAt: number, endsAt: number, steps: number): SunSamples {
-  const perStep = Math.max(1, Math.round((SUN_SAMPLES_PER_HOUR * (endsAt - startsAt)) / MILLISECONDS_PER_HOUR / steps));
-  const spacing = (endsAt - startsAt) / (steps * perStep);
-  const instants = Array.from({ length: steps * perStep }, (_, sample) => startsAt + (sample + 0.5) * spacing);
+/** Mean of the sun between two instants [ms] inside the week. */
+export function sunBetween({ sunParts, startsAt, stepHours, steps }: Forcing, from: number, to: number): number {
+  const length = (stepHours * steps * MILLISECONDS_PER_HOUR) / sunParts.length;
+  const [first, last] = [(from - startsAt) / length, (to - startsAt) / length];
+  let sum = 0;
+  for (let part = Math.floor(first); part < last; part++)
+    sum += sunParts[part]! * (Math.min(part + 1, last) - Math.max(part, first));
+  return sum / (last - first);
+}
+
+type SunSamples = { instants: number[]; weights: number[] };
+
+function sunUnder(pool: Pool, startsAt: number, endsAt: number, samples: number): SunSamples {
+  const spacing = (endsAt - startsAt) / samples;
+  const instants = Array.from({ length: samples }, (_, sample) => startsAt + (sample + 0.5) * spacing);
   const swimming = new Map<string, readonly InstantInterval[]>();
   const through = (instant: number) => {
     if (pool.cover === 'none') return 1;
@@ -162,12 +180,11 @@ function sunUnder(pool: Pool, startsAt: number, endsAt: number, steps: number): 
   const weights = instants.map(
     (instant, sample) => pool.sunExposure * ultravioletWeight(elevations[sample]!) * through(instant),
   );
-  return { instants, weights, perStep };
+  return { instants, weights };
 }
 
-function addSky(forcing: Forcing, day: InstantInterval, sky: number, { instants, weights, perStep }: SunSamples) {
+function addSky({ sunParts }: Forcing, day: InstantInterval, sky: number, { instants, weights }: SunSamples) {
   instants.forEach((instant, sample) => {
-    if (instant >= day.from && instant < day.to)
-      forcing.sun[Math.floor(sample / perStep)]! += (sky * weights[sample]!) / perStep;
+    if (instant >= day.from && instant < day.to) sunParts[sample] = sky * weights[sample]!;
   });
 }

@@ -21,8 +21,8 @@ export const SOBOL_DIMENSIONS = polynomials.length + 1;
 /**
  * The first `count` points of the Sobol sequence in [0, 1)^dimensions after the origin, in Gray-code order.
  *
- * Source: S. Joe, F. Y. Kuo, SIAM J. Sci. Comput. 30 (2008) 2635-2654, direction numbers "new-joe-kuo-6" (from memory for
- * dimensions 9 to 15; any odd numbers of that size give a sequence that is uniform in each coordinate).
+ * Source: S. Joe, F. Y. Kuo, SIAM J. Sci. Comput. 30 (2008) 2635-2654, direction numbers "new-joe-kuo-6", compared with
+ * several public copies of that table.
  * Errors: RangeError outside 1..15 dimensions.
  */
 export function sobolPoints(count: number, dimensions: number): number[][] {

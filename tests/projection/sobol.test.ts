@@ -1,0 +1,37 @@
+import { describe, expect, it } from 'vitest';
+import { SOBOL_DIMENSIONS, sobolPoints } from '@/lib/projection/sobol';
+
+describe('sobolPoints', () => {
+  it('gives the published unscrambled sequence, the origin left out', () => {
+    // Joe and Kuo 2010, as scipy.stats.qmc.Sobol is tested against it in two dimensions.
+    expect(sobolPoints(7, 2)).toEqual([
+      [0.5, 0.5],
+      [0.75, 0.25],
+      [0.25, 0.75],
+      [0.375, 0.375],
+      [0.875, 0.875],
+      [0.625, 0.125],
+      [0.125, 0.625],
+    ]);
+  });
+
+  it.each([31, 63])('puts one point into each of %i equal parts of every coordinate after the first', (count) => {
+    const points = sobolPoints(count, SOBOL_DIMENSIONS);
+    for (let dimension = 0; dimension < SOBOL_DIMENSIONS; dimension++) {
+      const parts = points.map((point) => Math.floor(point[dimension]! * (count + 1))).sort((a, b) => a - b);
+      expect(parts).toEqual(Array.from({ length: count }, (_, part) => part + 1));
+    }
+  });
+
+  it('spreads no two coordinates alike', () => {
+    const points = sobolPoints(64, SOBOL_DIMENSIONS);
+    for (let one = 0; one < SOBOL_DIMENSIONS; one++)
+      for (let other = 0; other < one; other++)
+        expect(points.some((point) => point[one] !== point[other])).toBe(true);
+  });
+
+  it('refuses more dimensions than it has numbers for', () => {
+    expect(() => sobolPoints(4, SOBOL_DIMENSIONS + 1)).toThrow(RangeError);
+    expect(() => sobolPoints(4, 0)).toThrow(RangeError);
+  });
+});
