@@ -60,7 +60,8 @@ function Needs({ needs, hasDoses }: { needs: NonNullable<WeekSheet['plan']>['nee
   const { locale } = useSheet().sheet.household;
   const times = useTimes();
   const known = (quantity: string): quantity is MeasuredQuantity => t.has(`quantity.${quantity as MeasuredQuantity}`);
-  const words = needs.flatMap(({ quantity, since }) => {
+  const words = needs.flatMap(({ code, quantity, since }) => {
+    if (code === 'false-zero-open' || code === 'chlorine-bleached-test') return [t(`zero.${code}`)];
     if (!known(quantity)) return [];
     if (quantity === 'cyanuricAcid' && hasDoses) return [t('stabilizerNever')];
     const name = t(`quantity.${quantity}`);

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
+import { WaitingTests } from '@/components/readings/waiting-tests';
 import { WeekSheetScreen } from '@/components/week-sheet/week-sheet-screen';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { AppError } from '@/lib/errors';
@@ -15,6 +16,7 @@ export async function generateMetadata(): Promise<Metadata> {
 /** The sheet comes with the page, so that the swim verdict is the first thing to be seen. */
 export default async function WeekPage({ searchParams }: { searchParams: Promise<{ start?: string | string[] }> }) {
   const visit = await requireHousehold();
+  const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem } = visit.access;
   const asked = calendarDaySchema.safeParse((await searchParams).start);
   const start = asked.success ? asked.data : undefined;
   const initial = await showWeek(visit, start === undefined ? {} : { start }).catch((problem: unknown) => {
@@ -23,7 +25,10 @@ export default async function WeekPage({ searchParams }: { searchParams: Promise
     throw problem;
   });
   return (
-    <ClientMessages namespaces={['week', 'verdict', 'doses', 'units']}>
+    <ClientMessages namespaces={['week', 'verdict', 'doses', 'units', 'readings']}>
+      <WaitingTests
+        household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
+      />
       <WeekSheetScreen start={start} initial={initial} />
     </ClientMessages>
   );
