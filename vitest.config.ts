@@ -6,6 +6,9 @@ const root = import.meta.dirname;
 // The wrong zone on purpose: code that forgets the household's time zone fails here and not at somebody's pool.
 const env = { TZ: 'Asia/Kathmandu' };
 
+// The suite shares two cores with a build: a test that is slow there is not a test that hangs.
+const patience = { testTimeout: 30_000, hookTimeout: 60_000 };
+
 export default defineConfig({
   resolve: { alias: { '@': root, 'server-only': `${root}/tests/support/empty.ts` } },
   test: {
@@ -15,6 +18,7 @@ export default defineConfig({
         test: {
           name: 'unit',
           env,
+          ...patience,
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/e2e/**', 'tests/bench/**', '**/node_modules/**'],
           setupFiles: ['tests/support/seed.ts'],
@@ -27,6 +31,7 @@ export default defineConfig({
         test: {
           name: 'component',
           env,
+          ...patience,
           environment: 'jsdom',
           include: ['tests/**/*.test.tsx'],
           setupFiles: ['tests/support/seed.ts', 'tests/support/dom.ts'],
