@@ -22,7 +22,7 @@ export default defineConfig({
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/e2e/**', 'tests/bench/**', '**/node_modules/**'],
           setupFiles: ['tests/support/seed.ts'],
-          globalSetup: ['tests/support/base-database.ts'],
+          globalSetup: ['tests/support/base-database.ts', 'tests/support/print-seed.ts'],
         },
       },
       {

@@ -1,5 +1,4 @@
 import fc from 'fast-check';
+import { propertySeed } from './property-seed';
 
-/** One seed for all property tests of a run, printed so that a failure can be replayed: PROPERTY_SEED=... npm test */
-const seed = process.env.PROPERTY_SEED === undefined ? 20261201 : Number(process.env.PROPERTY_SEED);
-fc.configureGlobal({ seed, verbose: fc.VerbosityLevel.Verbose });
+fc.configureGlobal({ seed: propertySeed, verbose: fc.VerbosityLevel.Verbose });
