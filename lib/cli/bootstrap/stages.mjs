@@ -24,14 +24,14 @@ const program = (path) => inRoot('node_modules', path);
 
 export const lint = {
   name: 'lint',
-  minutes: 5,
+  minutes: 10,
   programs: [[program('eslint/bin/eslint.js'), '.', '--max-warnings', '0']],
   count: oneCheck,
 };
 
 export const formatting = {
   name: 'formatting',
-  minutes: 3,
+  minutes: 5,
   programs: [[program('prettier/bin/prettier.cjs'), '--check', '--log-level', 'warn', '.']],
   count: oneCheck,
 };
@@ -47,7 +47,7 @@ const typesSettings = {
 /** Checked with the routes' own types, which Next.js writes; tsconfig.json leaves them out, for they go stale. */
 export const types = {
   name: 'types',
-  minutes: 5,
+  minutes: 10,
   prepare: () => writeFileSync(typesConfig, JSON.stringify(typesSettings)),
   programs: [
     [nextProgram, 'typegen'],
@@ -70,7 +70,7 @@ const cruised = [
 
 export const boundaries = {
   name: 'boundaries',
-  minutes: 3,
+  minutes: 5,
   programs: [
     // The rules read their list of packages from a TypeScript file.
     [
@@ -84,8 +84,8 @@ export const boundaries = {
   count: oneCheck,
 };
 
-export const unit = vitestProject('unit', 9);
-export const component = vitestProject('component', 5);
+export const unit = vitestProject('unit', 15);
+export const component = vitestProject('component', 15);
 
 function vitestProject(name, minutes) {
   const report = join(workFolder, `vitest-${name}.json`);
@@ -106,7 +106,7 @@ function vitestProject(name, minutes) {
 
 export const build = {
   name: 'build',
-  minutes: 6,
+  minutes: 10,
   programs: [[inRoot('lib/cli/bootstrap.mjs'), 'build']],
   env: { NEXT_DIST_DIR: testFolder },
   count: oneCheck,
@@ -114,7 +114,7 @@ export const build = {
 
 export const endToEnd = {
   name: 'end to end',
-  minutes: 10,
+  minutes: 20,
   needsChromium: true,
   live: true,
   programs: [[...typescriptLoader, inRoot('tests/e2e/run.ts')]],
