@@ -3,6 +3,7 @@ import { join } from 'node:path';
 import type { Page } from 'playwright-core';
 import type { Stage } from '../support/journey';
 import { shotsFolder } from '../support/place';
+import { until } from '../support/waiting';
 import { boxFaults, sidewaysScroll } from './boxes';
 import { foreignColours } from './colours';
 import { foreignFonts } from './fonts';
@@ -28,7 +29,7 @@ export async function lookAt(stage: Stage, page: Page, view: View, width: (typeo
     // What dark changes are colours, and those are the same at every width.
     if (theme === 'light' || width === 1440)
       stage.none(here(`nothing that axe objects to, ${theme}`), await violations(page));
-    await page.screenshot({ path: join(shotsFolder, `${view.name}-${width}-${theme}.png`), fullPage: true });
+    await picture(page, `${view.name}-${width}-${theme}`);
   }
   stage.none(here('only the two families, loaded'), await foreignFonts(page));
   const { overlaps, clipped, small } = await boxFaults(page);
@@ -37,7 +38,19 @@ export async function lookAt(stage: Stage, page: Page, view: View, width: (typeo
   stage.none(here('room for a finger'), small);
   if (width !== 390) return;
   await page.setViewportSize({ width: 320, height: 700 });
+  // Charts draw themselves anew for the narrower screen.
+  await until(async () => (await sidewaysScroll(page)) === 0, { seconds: 3 });
   stage.equal(`${view.name} at 320: no sideways scroll`, await sidewaysScroll(page), 0);
+}
+
+/** The whole page in one picture: as tall as its content, so that what sticks to the foot of the screen stands at its foot. */
+async function picture(page: Page, name: string): Promise<void> {
+  const screen = page.viewportSize();
+  if (screen === null) return;
+  const height = await page.evaluate(() => document.documentElement.scrollHeight);
+  await page.setViewportSize({ ...screen, height: Math.max(screen.height, height) });
+  await page.screenshot({ path: join(shotsFolder, `${name}.png`) });
+  await page.setViewportSize(screen);
 }
 
 /** Puts the lights on or out, and waits until the page has been drawn so. */
