@@ -26,8 +26,7 @@ describe('sobolPoints', () => {
   it('spreads no two coordinates alike', () => {
     const points = sobolPoints(64, SOBOL_DIMENSIONS);
     for (let one = 0; one < SOBOL_DIMENSIONS; one++)
-      for (let other = 0; other < one; other++)
-        expect(points.some((point) => point[one] !== point[other])).toBe(true);
+      for (let other = 0; other < one; other++) expect(points.some((point) => point[one] !== point[other])).toBe(true);
   });
 
   it('refuses more dimensions than it has numbers for', () => {

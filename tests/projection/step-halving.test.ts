@@ -105,11 +105,11 @@ describe('halving the step of an hour', () => {
         }),
         { maxLength: 3 },
       ),
-      loads: fc.constantFrom([], [three]),
+      loads: fc.constantFrom<TabletLoad[]>([], [three]),
     });
     fc.assert(
       fc.property(anyCase, (theCase) => {
-        const { freeChlorine, pH } = difference(theCase as Case);
+        const { freeChlorine, pH } = difference(theCase);
         expect(freeChlorine).toBeLessThan(0.02);
         expect(pH).toBeLessThan(0.005);
       }),
