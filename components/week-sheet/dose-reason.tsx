@@ -10,8 +10,9 @@ export function DoseReason({ dose }: { dose: PlanDose }) {
   const known = (code: string): code is Code => t.has(`reason.${code as Code}`);
   return (
     <p className="text-small text-ink-2">
-      {dose.productName === null || dose.toBuy ? t('toBuy') : t('from', { name: dose.productName })}
-      {known(dose.reason) && <> {t(`reason.${dose.reason}`)}</>}
+      {dose.toBuy && <>{t('toBuy')} </>}
+      {!dose.toBuy && dose.productName !== null && <>{t('from', { name: dose.productName })} </>}
+      {known(dose.reason) && t(`reason.${dose.reason}`)}
     </p>
   );
 }

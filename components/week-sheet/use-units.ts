@@ -41,7 +41,10 @@ export function useUnits() {
     },
     /** Rain, from millimetres. */
     rain: (millimetres: number) => quantity(millimetres / 1000, 'rain'),
-    /** Water for a bucket, from litres. */
-    bucket: (litres: number) => quantity(litres * 1000, 'liquidVolume'),
+    /** Water for a bucket, from litres: whole ones, and never less than was asked for. */
+    bucket: (litres: number) => {
+      const unitCode = unitSystem === 'us' ? 'us-gal-poured' : 'L-poured';
+      return t(unitCode, { value: number(Math.ceil(convert(litres, 'L-poured', unitCode)), 0) });
+    },
   };
 }

@@ -23,7 +23,7 @@ export const planDoseSchema = plannedDoseSchema.extend({
   planId: z.uuid(),
   planVersion: z.number().int(),
   status: z.enum(doseStatuses),
-  /** Label of the product as the household knows it; null when it has to be bought. */
+  /** What the household calls the product; null when it has no name, or has to be bought. */
   productName: z.string().nullable(),
   labelWay: z.enum(labelWays).nullable(),
   steps: z.enum(stepTexts),

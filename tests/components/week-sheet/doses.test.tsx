@@ -50,14 +50,20 @@ describe('a dose that is not due yet', () => {
     expect(within(dialog).queryByRole('button', { name: 'Mark as added' })).not.toBeInTheDocument();
   });
 
+  it('says that a product has to be bought only where it has, and not where it merely has no name', async () => {
+    const { user } = await showSheet(withDose(aWeekSheet(), { productName: null, toBuy: false }));
+    await user.click(screen.getAllByRole('button', { name: 'See the steps' })[0]!);
+    expect(await screen.findByRole('dialog', { name: '95 g granules' })).not.toHaveTextContent('To buy');
+  });
+
   it('takes more water for more granules, and gives both in the household’s units', async () => {
     const sheet = withDose(aWeekSheet(), { amount: 680 });
     sheet.household = { ...sheet.household, unitSystem: 'us', locale: 'en-US' };
     const { user } = await showSheet(sheet);
     await user.click(screen.getAllByRole('button', { name: 'See the steps' })[0]!);
     const dialog = await screen.findByRole('dialog', { name: '1.5 lb granules' });
-    // 680 g are three times 300 g begun: 45 L, 11.89 US gallons.
-    expect(within(dialog).getAllByRole('listitem')[2]).toHaveTextContent('11.89 US gal of water');
+    // 680 g are three times 300 g begun: 45 L, 11.89 US gallons, and a bucket is filled to the next whole one.
+    expect(within(dialog).getAllByRole('listitem')[2]).toHaveTextContent('12 US gal of water');
     expect(dialog).toHaveTextContent('about 7:40 PM');
   });
 });
