@@ -1,14 +1,17 @@
 import { formatNumber } from '@/lib/units/format';
 
+/** As many decimals as tell two different figures apart; finer than the last nobody measures. */
+const decimals = [1, 2, 3, 4] as const;
+
 /**
- * A value and the limit it is held against, with one decimal, or with two where one would make them look equal: "2.2,
+ * A value and the limit it is held against, with one decimal, or with as many more as they need not to look equal: "2.2,
  * under 2.2" explains nothing.
  */
 export function besideLimit(value: number, limit: number, locale: string): { value: string; limit: string } {
-  const written = (decimals: number) => ({
-    value: formatNumber(value, { decimals, locale }),
-    limit: formatNumber(limit, { decimals, locale }),
-  });
-  const short = written(1);
-  return short.value === short.limit ? written(2) : short;
+  const written = decimals.map((places) => ({
+    value: formatNumber(value, { decimals: places, locale }),
+    limit: formatNumber(limit, { decimals: places, locale }),
+  }));
+  const apart = written.find((pair) => pair.value !== pair.limit);
+  return apart ?? written[0] ?? { value: '', limit: '' };
 }
