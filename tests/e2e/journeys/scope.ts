@@ -95,6 +95,8 @@ async function salt(stage: Stage, server: Server): Promise<void> {
   await enterAs(visitor, person);
   await page.goto('/week');
   await page.getByText(words('week.state.recordOnlyTitle')).waitFor();
+  // The foot of the sheet is drawn once the browser knows its own width.
+  await page.getByText('Never let two different pool products touch').first().waitFor();
   const text = await page.locator('main').innerText();
   stage.check(
     'salt: nothing on the sheet tells an amount to add',

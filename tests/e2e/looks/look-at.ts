@@ -39,7 +39,7 @@ export async function lookAt(stage: Stage, page: Page, view: View, width: (typeo
   if (width !== 390) return;
   await page.setViewportSize({ width: 320, height: 700 });
   // Charts draw themselves anew for the narrower screen.
-  await until(async () => (await sidewaysScroll(page)) === 0, { seconds: 3 });
+  await until(async () => (await sidewaysScroll(page)) === 0, { seconds: 15 });
   stage.equal(`${view.name} at 320: no sideways scroll`, await sidewaysScroll(page), 0);
 }
 

@@ -96,7 +96,8 @@ export const signedIn: readonly View[] = [
     path: '/week',
     async prepare(page) {
       await page.locator(curves).first().waitFor({ state: 'attached' });
-      for (const summary of await page.locator('summary').all()) await summary.click();
+      await page.getByRole('button', { name: words('week.table.days'), exact: true }).click();
+      await page.getByRole('region').locator('table').first().waitFor();
     },
   },
   { name: 'test-strip', path: '/test', prepare: testForm('strip') },
