@@ -84,8 +84,6 @@ const end = (plan: WeekPlan) => plan.endOfWeek!;
 const width = (plan: WeekPlan) => plan.projection!.freeChlorine.p90[1]! - plan.projection!.freeChlorine.p10[1]!;
 const tablets = (plan: WeekPlan) =>
   plan.doses.filter(({ form }) => form === 'tablet').reduce((sum, { amount }) => sum + amount, 0);
-const fastRise = (plan: WeekPlan) =>
-  plan.doses.filter(({ form }) => form !== 'tablet').reduce((sum, { rise }) => sum + rise, 0);
 const hoursOf = (plan: WeekPlan) => plan.doses.map(({ at }) => at.slice(11, 16));
 
 const threeTablets: Change = (s) =>
