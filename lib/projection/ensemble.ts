@@ -4,7 +4,7 @@ import { measuredRange } from '@/lib/schemas/measured-range';
 import type { CourseSetting, CourseStart } from './integrate';
 import { normalQuantile } from './normal';
 import { type LearnableParameter, type Parameters, priorSigma } from './parameters';
-import { type ReadingErrors, uncertainQuantities } from './reading-error';
+import { type ReadingErrors, type UncertainQuantity, uncertainQuantities } from './reading-error';
 import { sobolPoints } from './sobol';
 import type { TabletLoad } from './tablets';
 
@@ -16,7 +16,25 @@ export type Member = { start: CourseStart; setting: CourseSetting };
 /** How uncertain each learnable parameter is: sigma of its logarithm. */
 export type ParameterSigmas = Partial<Record<LearnableParameter, number>>;
 
-const parameterNames = Object.keys(priorSigma) as LearnableParameter[];
+/** What each coordinate of a point stands for. The first ones are spread best: what chlorine hangs on most comes first. */
+const coordinates = [
+  'sunStrength',
+  'freeChlorine',
+  'darkDemand',
+  'cyanuricAcid',
+  'tabletLife',
+  'volume',
+  'boundPhotolysis',
+  'pH',
+  'chlorinePerSwimmerHour',
+  'carbonDioxideTransfer',
+  'totalAlkalinity',
+  'waterPerSwimmerHour',
+  'calciumHardness',
+] as const satisfies readonly (LearnableParameter | UncertainQuantity)[];
+
+/** Fixed digital shifts: multiples of the golden ratio, whose digits have no pattern. */
+const shifts = coordinates.map((_, coordinate) => Math.imul(coordinate + 1, 0x9e3779b9) >>> 0);
 
 /**
  * The ensemble: the same Sobol points for every candidate plan, so that plans differ and luck does not. Parameters are
@@ -33,21 +51,22 @@ export function ensembleOf(
   setting: CourseSetting,
   { size = ENSEMBLE_SIZE, sigmas = priorSigma }: { size?: number; sigmas?: ParameterSigmas } = {},
 ): Member[] {
-  const points = sobolPoints(size, parameterNames.length + uncertainQuantities.length);
-  return points.map((point) => {
-    const deviation = (coordinate: number) => normalQuantile(point[coordinate]!);
+  return sobolPoints(size, coordinates.length, shifts).map((point) => {
     const parameters: Parameters = { ...setting.parameters };
-    parameterNames.forEach((name, coordinate) => {
-      parameters[name] *= Math.exp((sigmas[name] ?? priorSigma[name]) * deviation(coordinate));
-    });
     const drawn = { ...water };
-    uncertainQuantities.forEach((quantity, index) => {
-      const [low, high] = measuredRange[quantity];
-      const value = water[quantity] + errors[quantity] * deviation(parameterNames.length + index);
-      drawn[quantity] = Math.min(high, Math.max(low, value));
+    coordinates.forEach((name, coordinate) => {
+      const deviation = normalQuantile(point[coordinate]!);
+      if (isReading(name)) {
+        const [low, high] = measuredRange[name];
+        drawn[name] = Math.min(high, Math.max(low, water[name] + errors[name] * deviation));
+      } else parameters[name] *= Math.exp((sigmas[name] ?? priorSigma[name]) * deviation);
     });
     return { start: { ledger: ledgerOfDrawn(drawn, water), loads }, setting: { ...setting, parameters } };
   });
+}
+
+function isReading(name: (typeof coordinates)[number]): name is UncertainQuantity {
+  return (uncertainQuantities as readonly string[]).includes(name);
 }
 
 function ledgerOfDrawn(drawn: WaterAnalysis, read: WaterAnalysis) {

@@ -23,8 +23,8 @@ export type Parameters = {
 };
 
 /**
- * Sigma of the natural logarithm of each parameter's log-normal prior. The order is that of the ensemble's coordinates.
- * A leak has no prior: it is 0 until somebody finds one.
+ * Sigma of the natural logarithm of each parameter's log-normal prior. A leak has no prior: it is 0 until somebody finds
+ * one.
  */
 export const priorSigma = {
   boundPhotolysis: 0.5,

@@ -1,6 +1,6 @@
 import type { Interval, ReadingMethod } from '@/lib/schemas/reading';
 
-/** The quantities whose error belongs to the ensemble, in the order of its coordinates. */
+/** The quantities whose error belongs to the ensemble. */
 export const uncertainQuantities = [
   'freeChlorine',
   'pH',

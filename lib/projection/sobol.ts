@@ -19,22 +19,25 @@ const polynomials: readonly (readonly [degree: number, coefficients: number, ini
 export const SOBOL_DIMENSIONS = polynomials.length + 1;
 
 /**
- * The first `count` points of the Sobol sequence in [0, 1)^dimensions after the origin, in Gray-code order.
+ * The first `count` points of the Sobol sequence in [0, 1)^dimensions, the origin first, in Gray-code order.
  *
+ * @param shifts for each coordinate a whole number from 0 to 2^32 - 1 that its binary digits are added to without carry:
+ *   a digital shift keeps the points' even spread and takes them out of the corner of the cube
  * Source: S. Joe, F. Y. Kuo, SIAM J. Sci. Comput. 30 (2008) 2635-2654, direction numbers "new-joe-kuo-6", compared with
- * several public copies of that table.
+ * several public copies of that table. Digital shifts: C. Lemieux, Monte Carlo and Quasi-Monte Carlo Sampling, 2009.
  * Errors: RangeError outside 1..15 dimensions.
  */
-export function sobolPoints(count: number, dimensions: number): number[][] {
+export function sobolPoints(count: number, dimensions: number, shifts: readonly number[] = []): number[][] {
   if (!(dimensions >= 1 && dimensions <= SOBOL_DIMENSIONS)) throw new RangeError(`1 to ${SOBOL_DIMENSIONS} dimensions`);
   const directions = Array.from({ length: dimensions }, (_, dimension) => directionNumbers(dimension));
-  const state = new Uint32Array(dimensions);
+  const state = Uint32Array.from(directions, (_, dimension) => shifts[dimension] ?? 0);
   return Array.from({ length: count }, (_, index) => {
-    const lowestZeroBit = 31 - Math.clz32(~index & (index + 1));
-    return Array.from(state, (_, dimension) => {
-      state[dimension] = state[dimension]! ^ directions[dimension]![lowestZeroBit]!;
-      return state[dimension]! / 2 ** 32;
-    });
+    if (index > 0) {
+      const lowestZeroBit = 31 - Math.clz32(~(index - 1) & index);
+      for (let dimension = 0; dimension < dimensions; dimension++)
+        state[dimension]! ^= directions[dimension]![lowestZeroBit]!;
+    }
+    return Array.from(state, (digits) => digits / 2 ** 32);
   });
 }
 

@@ -2,9 +2,10 @@ import { describe, expect, it } from 'vitest';
 import { SOBOL_DIMENSIONS, sobolPoints } from '@/lib/projection/sobol';
 
 describe('sobolPoints', () => {
-  it('gives the published unscrambled sequence, the origin left out', () => {
-    // Joe and Kuo 2010, as scipy.stats.qmc.Sobol is tested against it in two dimensions.
-    expect(sobolPoints(7, 2)).toEqual([
+  it('gives the published unscrambled sequence', () => {
+    // Joe and Kuo 2010, as scipy.stats.qmc.Sobol(2, scramble=False) is tested against it.
+    expect(sobolPoints(8, 2)).toEqual([
+      [0, 0],
       [0.5, 0.5],
       [0.75, 0.25],
       [0.25, 0.75],
@@ -15,11 +16,17 @@ describe('sobolPoints', () => {
     ]);
   });
 
-  it.each([31, 63])('puts one point into each of %i equal parts of every coordinate after the first', (count) => {
-    const points = sobolPoints(count, SOBOL_DIMENSIONS);
+  const shifts = Array.from({ length: SOBOL_DIMENSIONS }, (_, dimension) => (dimension * 0x1234567 + 0x89abcdef) >>> 0);
+
+  it.each([
+    [32, []],
+    [64, []],
+    [64, shifts],
+  ])('puts one of %i points into each of as many equal parts of every coordinate', (count, shift) => {
+    const points = sobolPoints(count, SOBOL_DIMENSIONS, shift);
     for (let dimension = 0; dimension < SOBOL_DIMENSIONS; dimension++) {
-      const parts = points.map((point) => Math.floor(point[dimension]! * (count + 1))).sort((a, b) => a - b);
-      expect(parts).toEqual(Array.from({ length: count }, (_, part) => part + 1));
+      const parts = points.map((point) => Math.floor(point[dimension]! * count)).sort((a, b) => a - b);
+      expect(parts).toEqual(Array.from({ length: count }, (_, part) => part));
     }
   });
 
