@@ -14,7 +14,8 @@ export function SheetTables() {
   const [shown, setShown] = useState<Table | undefined>(undefined);
   const id = useId();
   return (
-    <section>
+    // Never wider than the page: the tables scroll within themselves.
+    <section className="min-w-0">
       <p className="flex flex-wrap items-center gap-x-3 text-fine text-ink-2">
         <span>{t('see')}</span>
         {tables.map((table) => (
