@@ -28,7 +28,7 @@ export function needsOf(scenario: Scenario): { blocking: Need[]; wanted: Need[] 
   if (newest('cyanuricAcid') === undefined)
     wanted.push({ code: 'never-measured' satisfies NeedCode, quantity: 'cyanuricAcid', since: null });
   // The week of the newest reading is over: there is no evening left to plan.
-  if (now >= last + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR)
+  if (blocking.length === 0 && now >= last + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR)
     wanted.push({
       code: 'reading-too-old' satisfies NeedCode,
       quantity: 'freeChlorine',
