@@ -1,5 +1,5 @@
 import { addDays, dayOf, type CalendarDay } from '@/lib/calendar/household-day';
-import { toOffsetIso, wallToInstant } from '@/lib/calendar/wall-time';
+import { intervalsOfDay, toOffsetIso, wallToInstant } from '@/lib/calendar/wall-time';
 import { MILLISECONDS_PER_HOUR, HOURS_IN_PLAN } from '@/lib/projection/forcing';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { PlanProjection, WeekPlan } from '@/lib/schemas/plan';
@@ -10,9 +10,9 @@ import type { PlanContext } from './context';
 type Check = WeekPlan['checks'][number];
 
 /**
- * Tests that the week asks for: a quick check before the first swim hour of a swim day when the last test would be over
- * 48 h old, one on the first morning on which the likely range reaches the code minimum, one on the morning after a halved
- * first dose, and the full test that makes the next plan.
+ * Tests that the week asks for: a quick check before the first swim hour of a swim day on which the last test would come to
+ * be over 48 h old, one on the first morning on which the likely range reaches the code minimum, one on the morning after a
+ * halved first dose, and the full test that makes the next plan.
  */
 export function checksOf(
   projection: PlanProjection,
@@ -34,7 +34,8 @@ export function checksOf(
     const day = addDays(first, index);
     const at = morning(day);
     if (at <= lastTest || at < now || at >= endsAt) continue;
-    const age = (at - lastTest) / MILLISECONDS_PER_HOUR;
+    const swimmingEnds = intervalsOfDay([pool.swimHours], day, pool.timeZone).at(-1)?.to ?? at;
+    const age = (swimmingEnds - lastTest) / MILLISECONDS_PER_HOUR;
     const swims = (week.swimmerHours[index] ?? 0) > 0;
     const nextMorning = morning(addDays(day, 1));
     const afterHalved = halved && Date.parse(halved.at) < at && Date.parse(halved.at) >= lastTest;
