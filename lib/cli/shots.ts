@@ -6,7 +6,8 @@ import { join } from 'node:path';
  * while they measure how the pages look, so this runs that part of them and nothing else.
  */
 const run = join(import.meta.dirname, '../../tests/e2e/run.ts');
-const child = spawn(process.execPath, [...process.execArgv, run, 'looks:', ...process.argv.slice(2)], {
+const asked = process.argv.slice(2);
+const child = spawn(process.execPath, [...process.execArgv, run, ...(asked.length > 0 ? asked : ['looks:'])], {
   stdio: 'inherit',
 });
 for (const signal of ['SIGINT', 'SIGTERM'] as const) process.on(signal, () => child.kill(signal));

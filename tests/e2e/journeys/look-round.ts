@@ -20,7 +20,7 @@ export const lookRound: Journey = {
   // It measures how long somebody waits.
   alone: true,
   async run(stage) {
-    const server = await stage.server({ name: 'look-round', clock: morning });
+    const server = await stage.server({ name: 'look-round', clock: morning, fresh: true });
     // The demo of the day is made when the server starts; whoever comes in that very moment waits for it.
     await new Person(server).must('POST', '/api/look-round');
     const first = await look(stage, server, 'first visitor');
@@ -37,7 +37,7 @@ export const lookRound: Journey = {
     const seen = await history(second.person);
     stage.equal('a second visitor sees nothing of it', seen, untouched);
 
-    const elsewhere = await stage.server({ name: 'look-round-again', clock: eveningOfThatDay });
+    const elsewhere = await stage.server({ name: 'look-round-again', clock: eveningOfThatDay, fresh: true });
     const other = new Person(elsewhere);
     await other.must('POST', '/api/look-round');
     stage.equal('the same day gives the same rows on another server', await history(other), untouched);

@@ -36,6 +36,7 @@ export async function lookAt(stage: Stage, page: Page, view: View, width: (typeo
   stage.none(here('no box over another'), overlaps);
   stage.none(here('no text cut off'), clipped);
   stage.none(here('room for a finger'), small);
+  stage.equal(here('no sideways scroll'), await sidewaysScroll(page), 0);
   if (width !== 390) return;
   await page.setViewportSize({ width: 320, height: 700 });
   // Charts draw themselves anew for the narrower screen.

@@ -73,6 +73,8 @@ export async function addProduct(
     way: 'feeder-only' | 'dissolve';
   },
 ): Promise<void> {
+  // The button moves down when the shelf is drawn.
+  await page.waitForLoadState('networkidle');
   const first = page.getByRole('button', { name: words('pool.shelf.addFirst') });
   await first.or(page.getByRole('button', { name: words('pool.shelf.addAnother') })).click();
   const form = page.getByRole('region', { name: words('pool.product.title') });

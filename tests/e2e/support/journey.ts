@@ -2,6 +2,7 @@ import type { Browser } from 'playwright-core';
 import { join } from 'node:path';
 import { Visitor, type VisitorOptions } from './browser';
 import { shotsFolder } from './place';
+import { seededDatabase } from './seeded';
 import { Server, type ServerOptions } from './server';
 
 export type Journey = {
@@ -55,7 +56,8 @@ export class Stage {
   }
 
   async server(options: ServerOptions): Promise<Server> {
-    const server = await Server.start(options);
+    const seed = options.fresh ? undefined : await seededDatabase(options.clock);
+    const server = await Server.start(options, seed);
     this.#servers.push(server);
     return server;
   }

@@ -1,5 +1,5 @@
 import { type ChildProcess, spawn } from 'node:child_process';
-import { appendFileSync, rmSync, writeFileSync } from 'node:fs';
+import { appendFileSync, copyFileSync, rmSync, writeFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { join } from 'node:path';
 import { buildFolder, inRoot, root, runFolder } from './place';
@@ -12,6 +12,8 @@ export type ServerOptions = {
   clock: string;
   /** The address that people type, where it is not the one that is listened on. */
   origin?: string;
+  /** Starts without any database, and makes its demo household beside the first requests. */
+  fresh?: boolean;
 };
 
 /** The wrong zone on purpose: a server that tells hours by its own machine is caught. */
@@ -30,12 +32,14 @@ export class Server {
     readonly port: number,
   ) {
     this.address = `http://127.0.0.1:${port}`;
-    this.databaseFile = join(runFolder, `test-${options.name}.db`);
+    this.databaseFile = databaseFileOf(options.name);
   }
 
-  static async start(options: ServerOptions): Promise<Server> {
+  /** @param seed the database to start from a copy of */
+  static async start(options: ServerOptions, seed?: string): Promise<Server> {
     const server = new Server(options, await freePort());
     for (const suffix of ['', '-wal', '-shm']) rmSync(server.databaseFile + suffix, { force: true });
+    if (seed !== undefined) copyFileSync(seed, server.databaseFile);
     writeFileSync(server.logFile, '');
     await server.#run(options.clock);
     return server;
@@ -122,6 +126,9 @@ export class Server {
     clearTimeout(lingering);
   }
 }
+
+/** The name says that it is a test's: nothing else may have its clock set. */
+export const databaseFileOf = (name: string): string => join(runFolder, `test-${name}.db`);
 
 function freePort(): Promise<number> {
   return new Promise((resolve, reject) => {
