@@ -1,8 +1,8 @@
 import { randomUUID } from 'node:crypto';
 import { lookAt, widths } from '../looks/look-at';
-import { firstRun, signedIn, signedOut, type View } from '../looks/pages';
+import { due, firstRun, recordOnly, signedIn, signedOut, stopped, untested, type View } from '../looks/pages';
 import { enterAs } from '../support/enter';
-import { describeSteps, slowTablets, sundayEvening } from '../support/households';
+import { describePool, describeSteps, fullTest, slowTablets, sundayEvening } from '../support/households';
 import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
 import type { Server } from '../support/server';
@@ -22,7 +22,31 @@ export const looks: readonly Journey[] = [
     await person.must('POST', '/api/look-round');
     return person;
   }),
+  looking('looks: a dose is due', due, async (server) => {
+    const person = await household(server);
+    await person.must('POST', '/api/readings', fullTest(sundayEvening));
+    return person;
+  }),
+  looking('looks: out of scope', stopped, async (server) => {
+    const person = new Person(server);
+    await person.signUp();
+    await describeSteps(person, ['scope'], { scope: { system: 'bromine', roofed: true } });
+    return person;
+  }),
+  looking('looks: nothing tested', untested, (server) => household(server)),
+  looking('looks: record only', recordOnly, async (server) => {
+    const person = await household(server, { scope: { system: 'salt-generator' } });
+    await person.must('POST', '/api/readings', fullTest(sundayEvening));
+    return person;
+  }),
 ];
+
+async function household(server: Server, answers?: Parameters<typeof describePool>[1]): Promise<Person> {
+  const person = new Person(server);
+  await person.signUp();
+  await describePool(person, answers);
+  return person;
+}
 
 function looking(
   name: string,

@@ -119,3 +119,59 @@ export const signedIn: readonly View[] = [
   { name: 'pool-sun', path: '/pool/sun', prepare: shows(words('pool.sun.title')) },
   { name: 'help-signed-in', path: '/help' },
 ];
+
+/** For somebody whose pool is out of scope. */
+export const stopped: readonly View[] = [
+  { name: 'first-run-stop', path: '/first-run/scope', prepare: shows(words('first-run.stopTitle')) },
+];
+
+/** For a household that has described its pool and tested nothing yet. */
+export const untested: readonly View[] = [
+  { name: 'week-first', path: '/week', prepare: shows(words('week.state.firstTitle')) },
+];
+
+/** For a household whose pool makes its chlorine from salt. */
+export const recordOnly: readonly View[] = [
+  { name: 'week-record-only', path: '/week', prepare: shows(words('week.state.recordOnlyTitle')) },
+];
+
+const dueDose = async (page: Page) => {
+  await page.getByText(words('doses.action.given'), { exact: true }).first().waitFor();
+};
+
+/** For a household in whose week a dose is due now. */
+export const due: readonly View[] = [
+  { name: 'week-due', path: '/week', prepare: dueDose },
+  {
+    name: 'week-steps',
+    path: '/week',
+    async prepare(page) {
+      await dueDose(page);
+      // A phone shows the steps on the page itself.
+      const steps = page.getByRole('button', { name: words('doses.action.stepsAndMore') }).first();
+      if (await steps.isVisible()) await steps.click();
+    },
+  },
+  {
+    name: 'more',
+    path: '/week',
+    async prepare(page) {
+      await dueDose(page);
+      const more = page.getByRole('button', { name: words('navigation.more'), exact: true });
+      if (await more.isVisible()) await more.click();
+    },
+  },
+  {
+    name: 'test-saved',
+    path: '/test?kind=quick',
+    async prepare(page) {
+      await choice(page, words('readings.kind.quick')).first().click();
+      await choice(page, words('readings.method.drop-kit')).click();
+      await page.locator('#value-freeChlorine').fill('2.7');
+      await page.locator('#value-pH').fill('7.5');
+      await page.locator('#value-pH').blur();
+      await page.getByRole('button', { name: words('readings.save.quick') }).click();
+      await page.getByText(words('readings.saved.title')).waitFor();
+    },
+  },
+];
