@@ -14,7 +14,7 @@ export function belowMaximum({ draft, courses }: Evaluated, { evenings }: Choice
   return bandOf(rows).p90.every((level, hour) => hours[hour]! < first || level <= maximum);
 }
 
-/** Takes measures out of a plan, of the largest dose first, then tablets, until it stays below the maximum. */
+/** Takes a fifth of the largest dose out of a plan, in the end tablets, until it stays below the maximum. */
 export function lowered(plan: Evaluated, choice: Choice, context: PlanContext): Evaluated {
   let next = plan;
   while (!belowMaximum(next, choice, context)) next = evaluate(less(next.draft), choice, context, context.members);
@@ -23,11 +23,11 @@ export function lowered(plan: Evaluated, choice: Choice, context: PlanContext): 
 
 function less(draft: Draft): Draft {
   const most = Math.max(...draft.measures);
-  const oneLess = (counts: readonly number[]) => {
+  const smaller = (counts: readonly number[]) => {
     const largest = counts.indexOf(Math.max(...counts));
-    return counts.map((each, evening) => (evening === largest ? each - 1 : each));
+    return counts.map((each, evening) => (evening === largest ? each - Math.ceil(each / 5) : each));
   };
-  return most > 0 ? { ...draft, measures: oneLess(draft.measures) } : { ...draft, tablets: oneLess(draft.tablets) };
+  return most > 0 ? { ...draft, measures: smaller(draft.measures) } : { ...draft, tablets: smaller(draft.tablets) };
 }
 
 function usesEvening({ tablets, measures }: Draft, evening: number): boolean {

@@ -4,21 +4,25 @@ import type { FastOption } from './products';
 /** One way to change a draft; the same draft when it does not apply. */
 export type Move = (draft: Draft) => Draft;
 
-const IMPROVEMENT = 1e-6;
+/** Less than a tenth of a hundredth of the currency is no improvement. */
+const IMPROVEMENT = 1e-3;
+/** An evening's cap is divided into at most so many steps, however small the measure: an eighth of a mg/L each. */
+const STEPS_OF_A_CAP = 32;
 
 /** More or fewer measures on an evening, a dose to another evening, one measure from one dose to another. */
 export function fastMoves(choice: Choice, most: readonly number[]): Move[] {
   const evenings = choice.evenings.map((_, evening) => evening);
+  const step = Math.max(1, Math.round(Math.max(0, ...most) / STEPS_OF_A_CAP));
   const far = Math.max(2, Math.ceil(Math.max(0, ...most) / 6));
   const amounts = evenings.flatMap((evening) => [
     withMeasures(evening, () => 0),
-    ...[-far, -1, 1, far].map((by) => withMeasures(evening, (now) => now + by)),
+    ...[-far, -step, step, far].map((by) => withMeasures(evening, (now) => now + by)),
     withMeasures(evening, (now) => (now === 0 ? Math.ceil(most[evening]! / 3) : now)),
   ]);
   const pairs = evenings.flatMap((from) => evenings.filter((to) => to !== from).map((to) => [from, to] as const));
   const shifts = pairs.flatMap(([from, to]): Move[] => [
     (draft) => (draft.measures[from]! > 0 && draft.measures[to] === 0 ? carry(draft, from, to, Infinity) : draft),
-    (draft) => (draft.measures[from]! > 1 && draft.measures[to]! > 0 ? carry(draft, from, to, 1) : draft),
+    (draft) => (draft.measures[from]! > step && draft.measures[to]! > 0 ? carry(draft, from, to, step) : draft),
   ]);
   return [...amounts, ...shifts];
 }
@@ -29,10 +33,11 @@ const MOST_LOADINGS = 2;
 /** One tablet more or fewer on an evening, a loading or a tablet to another evening, tablets in place of a fast dose. */
 export function tabletMoves({ evenings, tablets }: Choice): Move[] {
   if (!tablets || tablets.most === 0) return [];
+  const far = Math.max(2, Math.ceil(tablets.most / 6));
   const all = evenings.map((_, evening) => evening);
   const pairs = all.flatMap((from) => all.filter((to) => to !== from).map((to) => [from, to] as const));
   return [
-    ...all.flatMap((evening) => [-1, 1].map((by) => withTablets(evening, (now) => now + by))),
+    ...all.flatMap((evening) => [-far, -1, 1, far].map((by) => withTablets(evening, (now) => now + by))),
     ...pairs.flatMap(([from, to]): Move[] => [
       (draft) => (draft.tablets[to] === 0 ? carryTablets(draft, from, to, Infinity) : draft),
       (draft) => (draft.tablets[from]! > 1 ? carryTablets(draft, from, to, 1) : draft),
