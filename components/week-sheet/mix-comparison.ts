@@ -13,14 +13,13 @@ export type BurdenRow = { burden: Burden; values: Partial<Record<Mix, number>> }
 
 export function burdenRows(sheet: WeekSheet): BurdenRow[] {
   const { plan } = sheet;
-  if (plan === null) return [];
+  if (!plan?.mix) return [];
+  const { mix } = plan;
   const possible = plan.alternatives.filter(isPossible);
-  const own = valuesOfMix(sheet);
   return burdens
     .map((burden) => {
       const others = possible.map((alternative) => [alternative.kind, alternative[burden]] as const);
-      const mix = own[burden];
-      return { burden, values: Object.fromEntries(mix === undefined ? others : [...others, ['mix', mix] as const]) };
+      return { burden, values: { ...Object.fromEntries(others), mix: mix[burden] } };
     })
     .filter(({ values }) => Object.keys(values).length > 1);
 }
@@ -28,16 +27,6 @@ export function burdenRows(sheet: WeekSheet): BurdenRow[] {
 /** A way without any dose could not be planned from this shelf. */
 export function isPossible({ feasible, doses }: Alternative): boolean {
   return feasible || doses.length > 0;
-}
-
-/** What the reply tells of this week's mix: its price, and the stabilizer that its own curve gains. */
-function valuesOfMix({ plan, ahead }: WeekSheet): Partial<Record<Burden, number>> {
-  const stabilizer = ahead?.cyanuricAcid.p50 ?? [];
-  const [first, last] = [stabilizer[0], stabilizer.at(-1)];
-  return {
-    ...(plan?.cost ? { money: plan.cost.money } : {}),
-    ...(first === undefined || last === undefined ? {} : { stabilizer: last - first }),
-  };
 }
 
 export type PlacedMark = { mix: Mix; x: number };

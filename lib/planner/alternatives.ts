@@ -1,5 +1,6 @@
 import { dayOf } from '@/lib/calendar/household-day';
 import { seriesOf } from '@/lib/projection';
+import type { PlannedDose } from '@/lib/schemas/dose';
 import type { Alternative } from '@/lib/schemas/plan';
 import { lowestLevel } from '@/lib/standards/limits';
 import type { PlanContext } from './context';
@@ -42,8 +43,13 @@ function alternativeOf(
   possible: boolean,
   context: PlanContext,
 ): Alternative {
-  const { draft, choice, median, cost } = found;
-  const doses = plannedDoses(draft, choice, context);
+  const doses = plannedDoses(found.draft, found.choice, context);
+  const burden = burdenOf(found, doses, context);
+  return { kind, feasible: possible && burden.hoursOutside === 0, doses, ...burden, total: found.cost.total };
+}
+
+/** What a week asks of the household and leaves in the water, by the median. */
+export function burdenOf({ draft, choice, median }: Evaluated, doses: readonly PlannedDose[], context: PlanContext) {
   const water = seriesOf(median);
   const { swimLimit } = context.scenario.pool;
   const hoursOutside = water.freeChlorine.filter((level, hour) => {
@@ -51,9 +57,6 @@ function alternativeOf(
     return level < lowest || (context.swimHour[hour] === true && level > swimLimit);
   }).length;
   return {
-    kind,
-    feasible: possible && hoursOutside === 0,
-    doses,
     money: moneyOf(draft, choice),
     visits: visitsOf(draft),
     swing: swingOf(water.freeChlorine, context),
@@ -61,7 +64,6 @@ function alternativeOf(
     hardness: water.calciumHardness.at(-1)! - water.calciumHardness[0]!,
     kilograms: doses.reduce((sum, dose) => sum + kilogramsOf(dose, choice), 0),
     hoursOutside,
-    total: cost.total,
   };
 }
 
@@ -81,7 +83,7 @@ function swingOf(freeChlorine: ArrayLike<number>, { hours, scenario }: PlanConte
 /** Density of liquid hypochlorite [kg/L]. */
 const LIQUID_DENSITY = 1.2;
 
-function kilogramsOf(dose: Alternative['doses'][number], { tablets }: Evaluated['choice']): number {
+function kilogramsOf(dose: PlannedDose, { tablets }: Evaluated['choice']): number {
   if (dose.unit === 'tablet') return (dose.amount * (tablets?.tabletMass ?? 0)) / 1000;
   return (dose.amount / 1000) * (dose.unit === 'mL' ? LIQUID_DENSITY : 1);
 }

@@ -4,7 +4,7 @@ import { analysisAt, type CourseBand } from '@/lib/projection';
 import { integrateWeek } from '@/lib/projection/integrate';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
-import { alternativesOf } from './alternatives';
+import { alternativesOf, burdenOf } from './alternatives';
 import { assertSafePlan } from './safety/assert-safe-plan';
 import { checksOf } from './checks';
 import { contextOf, type PlanContext } from './context';
@@ -66,6 +66,7 @@ export function planWeek(scenario: Scenario): WeekPlan {
     checks: checksOf(projection, doses, context, stabilized),
     endOfWeek: endOf(best),
     cost: best.cost,
+    mix: burdenOf(best, doses, context),
     alternatives,
     openSwimShare: openShare,
     broken,
@@ -97,6 +98,7 @@ export function projectScenario(scenario: Scenario): WeekPlan {
     checks: [],
     endOfWeek: analysisAt(median.end, median.endPH),
     cost: null,
+    mix: null,
     alternatives: [],
     openSwimShare: openSwimShare(projection, base),
     broken: brokenLimits(projection, base, stabilized),
@@ -129,6 +131,7 @@ function planWithout(scenario: Scenario, needs: WeekPlan['needs']): WeekPlan {
     checks: [],
     endOfWeek: null,
     cost: null,
+    mix: null,
     alternatives: [],
     openSwimShare: null,
     broken: [],

@@ -51,10 +51,8 @@ export const costSchema = z.object({
 });
 export type Cost = z.infer<typeof costSchema>;
 
-export const alternativeSchema = z.object({
-  kind: z.enum(['tablets', 'granular', 'liquid']),
-  feasible: z.boolean(),
-  doses: z.array(plannedDoseSchema),
+/** What a way of getting through the week asks of the household and leaves in the water. */
+export const burdenSchema = z.object({
   money: z.number(),
   visits: z.number(),
   /** Mean difference of a day's highest and lowest free chlorine [mg/L]. */
@@ -62,8 +60,15 @@ export const alternativeSchema = z.object({
   /** Change over the week [mg/L]. */
   stabilizer: z.number(),
   hardness: z.number(),
+  /** Weight to carry [kg]. */
   kilograms: z.number(),
   hoursOutside: z.number(),
+});
+
+export const alternativeSchema = burdenSchema.extend({
+  kind: z.enum(['tablets', 'granular', 'liquid']),
+  feasible: z.boolean(),
+  doses: z.array(plannedDoseSchema),
   total: z.number(),
 });
 export type Alternative = z.infer<typeof alternativeSchema>;
@@ -89,6 +94,8 @@ export const weekPlanSchema = z.object({
   checks: z.array(checkSchema),
   endOfWeek: waterAnalysisSchema.nullable(),
   cost: costSchema.nullable(),
+  /** The plan's own burdens, beside those of each form alone. */
+  mix: burdenSchema.nullable().default(null),
   alternatives: z.array(alternativeSchema),
   openSwimShare: z.number().nullable(),
   broken: z.array(brokenSchema),

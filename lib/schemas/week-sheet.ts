@@ -71,6 +71,7 @@ export const weekSheetSchema = z.object({
       cautions: z.array(factSchema),
       broken: weekPlanSchema.shape.broken,
       needs: z.array(needSchema),
+      mix: weekPlanSchema.shape.mix,
       alternatives: weekPlanSchema.shape.alternatives,
       cost: weekPlanSchema.shape.cost,
       openSwimShare: z.number().nullable(),

@@ -39,6 +39,7 @@ function planOnHold({ scenario }: WeekSnapshot, { doubt, takenAt }: NonNullable<
     checks: [],
     endOfWeek: null,
     cost: null,
+    mix: null,
     alternatives: [],
     openSwimShare: null,
     broken: [],

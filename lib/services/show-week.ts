@@ -125,7 +125,7 @@ function sheetPlan(
 ): WeekSheet['plan'] {
   if (!plan) return null;
   const iso = (instant: Date) => toOffsetIso(instant.getTime(), timeZone);
-  const { reasons, cautions, broken, needs, alternatives, cost, openSwimShare } = plan.result;
+  const { reasons, cautions, broken, needs, mix, alternatives, cost, openSwimShare } = plan.result;
   return {
     id: plan.id,
     version: plan.version,
@@ -133,6 +133,6 @@ function sheetPlan(
     takenAt: iso(plan.takenAt),
     endsAt: iso(plan.endsAt),
     stale: problem !== null || now >= plan.endsAt,
-    ...{ reasons, cautions, broken, needs, alternatives, cost, openSwimShare },
+    ...{ reasons, cautions, broken, needs, mix, alternatives, cost, openSwimShare },
   };
 }

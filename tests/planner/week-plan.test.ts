@@ -277,6 +277,26 @@ describe('outcomes of common practice', () => {
     expect(liquid!.kilograms).toBeGreaterThan(granular!.kilograms);
   });
 
+  it('carries its own burdens beside them, each counted from its doses and its curve', () => {
+    const { mix, doses, cost, projection, hours } = base;
+    const { freeChlorine, cyanuricAcid, calciumHardness } = projection!.median;
+    expect(mix!.money).toBeCloseTo(cost!.money, 9);
+    expect(mix!.visits).toBe(new Set(doses.map(({ at }) => at)).size);
+    expect(mix!.stabilizer).toBeCloseTo(cyanuricAcid.at(-1)! - cyanuricAcid[0]!, 9);
+    expect(mix!.hardness).toBeCloseTo(calciumHardness.at(-1)! - calciumHardness[0]!, 9);
+    const kilogramsPer = { tablet: products.tabs.tabletMass / 1000, g: 0.001, mL: 0.0012 };
+    expect(mix!.kilograms).toBeCloseTo(
+      doses.reduce((sum, { amount, unit }) => sum + amount * kilogramsPer[unit], 0),
+      9,
+    );
+    const days = hours.map((hour) => dayOf(Date.parse(hour), zone));
+    const swings = [...new Set(days)].map((day) => {
+      const levels = freeChlorine.filter((_, hour) => days[hour] === day);
+      return Math.max(...levels) - Math.min(...levels);
+    });
+    expect(mix!.swing).toBeCloseTo(swings.reduce((sum, swing) => sum + swing, 0) / swings.length, 9);
+  });
+
   it('says that a form is not feasible when there is none', () => {
     const { alternatives } = planWeek(scenarioOf({ shelf: [products.liq] }));
     expect(alternatives.find(({ kind }) => kind === 'granular')).toMatchObject({

@@ -61,6 +61,7 @@ export const aPlan = (readingId: string, overrides: Partial<NewPlan> = {}): NewP
     checks: [],
     endOfWeek: null,
     cost: null,
+    mix: null,
     alternatives: [],
     openSwimShare: null,
     broken: [],

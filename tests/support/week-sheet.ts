@@ -70,6 +70,7 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
       cautions: [{ code: 'water-values-assumed', quantity: 'calciumHardness', value: 220 }],
       broken: [],
       needs: [],
+      mix: { money: 13.4, visits: 5, swing: 1.3, stabilizer: 4.1, hardness: 3, kilograms: 0.95, hoursOutside: 0 },
       alternatives: theAlternatives(),
       cost: { money: 13.4, visits: 4, shortfall: 0.2, excess: 0, stabilizer: 1.1, hardness: 0.3, pH: 0.1, total: 19.1 },
       openSwimShare: 1,
