@@ -4,9 +4,9 @@ import { PERMITTED, requireAboveZero, requireInRange } from './ranges';
 import { SUBSTANCES } from './substances';
 
 /** Free lye of stored liquid, mol/L: about 0.3 to 0.4 % by weight, as makers add it to keep the liquid alive. */
-const EXCESS_LYE = 0.1;
+export const EXCESS_LYE = 0.1;
 const SECONDS_PER_DAY = 86400;
-const GAS_CONSTANT = 8.314;
+export const GAS_CONSTANT = 8.314;
 
 /**
  * Second-order rate constant of hypochlorite in its own strong solution, 1/(mol/L s):

@@ -52,14 +52,14 @@ function weighed(strength: number, molarMass: number): number {
   return strength / 100 / molarMass;
 }
 
-const CYANURATE_OF_DICHLOR = 219.95;
-const THIOSULFATE_ANHYDROUS_SHARE = 158.11 / 248.18;
+export const CYANURATE_OF_DICHLOR = 219.95;
+export const THIOSULFATE_ANHYDROUS_SHARE = 158.11 / 248.18;
 
 /** Mass of sodium thiosulfate pentahydrate per mass of chlorine removed: AWWA field value (sources.md 4.3, 4.4). */
 export const THIOSULFATE_PER_CHLORINE = 1.9;
 
 /** Density of the liquid that free NaOH is counted in, g/mL. */
-const LIQUID_HYPOCHLORITE_DENSITY = 1.2;
+export const LIQUID_HYPOCHLORITE_DENSITY = 1.2;
 
 /** Density of hydrochloric acid, g/mL, of weight per cent: 1.160 at 31.45 %. */
 export function hydrochloricAcidDensity(strength: number): number {

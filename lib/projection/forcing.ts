@@ -10,7 +10,7 @@ export const MILLISECONDS_PER_HOUR = 3_600_000;
 const SUN_SAMPLES_PER_HOUR = 4;
 
 /** Share of the sun that passes, and of the evaporation that is left, under each cover. */
-const coverPasses = {
+export const coverPasses = {
   none: { sun: 1, evaporation: 1 },
   floating: { sun: 0.3, evaporation: 0.1 },
   opaque: { sun: 0, evaporation: 0.05 },

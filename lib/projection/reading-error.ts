@@ -13,7 +13,7 @@ export type UncertainQuantity = (typeof uncertainQuantities)[number];
 type MethodError = { relative: number } | { absolute: number };
 
 /** One sigma of a value by method. Assumptions; what is published on kits and strips lies in the same range. */
-const methodError: Record<UncertainQuantity, Record<ReadingMethod, MethodError>> = {
+export const methodError: Record<UncertainQuantity, Record<ReadingMethod, MethodError>> = {
   freeChlorine: { strip: { relative: 0.3 }, 'drop-kit': { relative: 0.1 }, slip: { relative: 0.1 } },
   pH: { strip: { absolute: 0.2 }, 'drop-kit': { absolute: 0.1 }, slip: { absolute: 0.1 } },
   totalAlkalinity: { strip: { absolute: 20 }, 'drop-kit': { absolute: 10 }, slip: { absolute: 10 } },
@@ -21,11 +21,11 @@ const methodError: Record<UncertainQuantity, Record<ReadingMethod, MethodError>>
   cyanuricAcid: { strip: { relative: 0.25 }, 'drop-kit': { absolute: 15 }, slip: { absolute: 10 } },
 };
 
-const LEAST_FREE_CHLORINE_ERROR = 0.2;
-const WIDTHS_OF_INTERVAL = 3.5;
+export const LEAST_FREE_CHLORINE_ERROR = 0.2;
+export const WIDTHS_OF_INTERVAL = 3.5;
 
 /** What a value becomes less certain by in a day of being carried forward [its unit]; practice. */
-const growthPerDay: Record<UncertainQuantity, number> = {
+export const growthPerDay: Record<UncertainQuantity, number> = {
   freeChlorine: 0.3,
   pH: 0.03,
   totalAlkalinity: 1,

@@ -3,15 +3,15 @@ import { CHLORINE_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import type { Parameters } from './parameters';
 
 /** Loss of each form of chlorine under the reference sun [1/h]. Source: Nowell and Hoigne 1992, Water Research 26:593. */
-const HYPOCHLOROUS_ACID_PHOTOLYSIS = 0.72;
-const HYPOCHLORITE_PHOTOLYSIS = 4.32;
+export const HYPOCHLOROUS_ACID_PHOTOLYSIS = 0.72;
+export const HYPOCHLORITE_PHOTOLYSIS = 4.32;
 /** How quickly water takes the active light away [1/m]. */
-const LIGHT_ATTENUATION = 0.15;
-const SHARE_BECOMING_COMBINED = 0.2;
+export const LIGHT_ATTENUATION = 0.15;
+export const SHARE_BECOMING_COMBINED = 0.2;
 /** Loss of combined chlorine, open and under a cover [1/h]; practice. */
-const COMBINED_LOSS_OPEN = 0.3 / 24;
-const COMBINED_LOSS_COVERED = 0.1 / 24;
-const CARBON_DIOXIDE_UNDER_COVER = 0.3;
+export const COMBINED_LOSS_OPEN = 0.3 / 24;
+export const COMBINED_LOSS_COVERED = 0.1 / 24;
+export const CARBON_DIOXIDE_UNDER_COVER = 0.3;
 
 /** What acts on the water in one step, means over it; see Forcing. */
 export type Acting = {

@@ -15,10 +15,10 @@ export const liquidStrengthBases = [
 export type LiquidStrengthBasis = (typeof liquidStrengthBases)[number];
 
 /** g of available chlorine that 1 g of sodium hypochlorite counts as: 70.906 / 74.442. */
-const AVAILABLE_PER_HYPOCHLORITE = 70.906 / 74.442;
+export const AVAILABLE_PER_HYPOCHLORITE = 70.906 / 74.442;
 
 /** Rise of the density [g/mL] for each per cent of sodium hypochlorite by weight. */
-const DENSITY_RISE = 0.0152;
+export const DENSITY_RISE = 0.0152;
 
 /**
  * Strength of liquid chlorine in trade per cent, g Cl2 per 100 mL, as the shelf keeps it.

@@ -1,6 +1,6 @@
 /** The sun at which the photolysis rates of Nowell & Hoigne 1992 were measured: summer noon at 47 degrees north. */
-const REFERENCE_ELEVATION = 66.4;
-const EXPONENT = 2.42;
+export const REFERENCE_ELEVATION = 66.4;
+export const ULTRAVIOLET_EXPONENT = 2.42;
 const radians = Math.PI / 180;
 const reference = Math.sin(REFERENCE_ELEVATION * radians);
 
@@ -13,5 +13,5 @@ const reference = Math.sin(REFERENCE_ELEVATION * radians);
  * Source: Madronich 2007, Photochem. Photobiol. 83:1537, for the exponent of the UV index.
  */
 export function ultravioletWeight(elevation: number): number {
-  return elevation <= 0 ? 0 : (Math.sin(elevation * radians) / reference) ** EXPONENT;
+  return elevation <= 0 ? 0 : (Math.sin(elevation * radians) / reference) ** ULTRAVIOLET_EXPONENT;
 }
