@@ -14,8 +14,8 @@ const shape = /^\d{4}-\d{2}-\d{2}$/;
  */
 export function epochDayOf(day: CalendarDay): number {
   const milliseconds = shape.test(day) ? Date.parse(`${day}T00:00:00Z`) : Number.NaN;
-  // Some engines read "2026-02-30" as 2 March, so the way back has to give the same text.
-  if (Number.isNaN(milliseconds) || dayOfEpochDay(milliseconds / MILLISECONDS_PER_DAY) !== day)
+  // Some engines read "2026-02-30" as 2 March, so the way back has to give the same date.
+  if (Number.isNaN(milliseconds) || new Date(milliseconds).getUTCDate() !== Number(day.slice(8)))
     throw new AppError('invalid-input', `"${day}" is not a calendar day.`);
   return milliseconds / MILLISECONDS_PER_DAY;
 }

@@ -1,6 +1,5 @@
-import * as PlainDate from 'temporal-polyfill/fns/PlainDate';
-import { AppError } from '@/lib/errors';
 import { type CalendarDay, dayOfEpochDay, epochDayOf, isCalendarDay, MILLISECONDS_PER_DAY } from './epoch-day';
+import { readLocalTime } from './local-time';
 import { zoneStretch } from './zone-offset';
 
 export { type CalendarDay, isCalendarDay };
@@ -16,7 +15,12 @@ export type Weekday = 1 | 2 | 3 | 4 | 5 | 6 | 7;
  * Errors: `invalid-input` for an unknown zone or a number that is no instant.
  */
 export function dayOf(instant: number, timeZone: string): CalendarDay {
-  return dayOfEpochDay(Math.floor((instant + zoneStretch(instant, timeZone).offset) / MILLISECONDS_PER_DAY));
+  return dayOfEpochDay(epochDayAt(instant, timeZone));
+}
+
+/** The number of that day, see `epochDayOf`. */
+export function epochDayAt(instant: number, timeZone: string): number {
+  return Math.floor((instant + zoneStretch(instant, timeZone).offset) / MILLISECONDS_PER_DAY);
 }
 
 /**
@@ -27,13 +31,13 @@ export function dayOf(instant: number, timeZone: string): CalendarDay {
  * Errors: `invalid-input` for an unknown zone or what is no day.
  */
 export function startOfDay(day: CalendarDay, timeZone: string): number {
-  epochDayOf(day);
-  const [year, month, date] = day.split('-').map(Number) as [number, number, number];
-  try {
-    return PlainDate.toZonedDateTime(PlainDate.create(year, month, date), timeZone).epochMilliseconds;
-  } catch (cause) {
-    throw new AppError('invalid-input', `"${timeZone}" is not a time zone this machine knows.`, { cause });
-  }
+  return startOfEpochDay(epochDayOf(day), timeZone);
+}
+
+/** The same for a day given by its number, see `epochDayOf`. */
+export function startOfEpochDay(epochDay: number, timeZone: string): number {
+  const { earlier, gap } = readLocalTime(epochDay * MILLISECONDS_PER_DAY, timeZone);
+  return gap ?? earlier;
 }
 
 /** Hours between a day's start and the next day's: 24, or 23 and 25 where clocks change (23.5 and 24.5 on Lord Howe). */

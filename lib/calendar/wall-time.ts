@@ -1,7 +1,7 @@
-import * as PlainDateTime from 'temporal-polyfill/fns/PlainDateTime';
 import { AppError } from '@/lib/errors';
-import { addDays, type CalendarDay, startOfDay } from './household-day';
-import { epochDayOf } from './epoch-day';
+import { type CalendarDay, epochDayOf, MILLISECONDS_PER_DAY } from './epoch-day';
+import { startOfEpochDay } from './household-day';
+import { type LocalReading, readLocalTime } from './local-time';
 import { isTimeZone, zoneStretch } from './zone-offset';
 
 export { isTimeZone };
@@ -22,8 +22,8 @@ const wallShape = /^([01]\d|2[0-3]):([0-5]\d)$/;
  * Errors: `invalid-input` for what is no day, no time of day or no zone.
  */
 export function wallToInstant(day: CalendarDay, time: WallTime, timeZone: string): { instant: number; exact: boolean } {
-  const { earlier, later, compatible } = readings(day, time, timeZone);
-  return { instant: compatible, exact: earlier === later };
+  const { earlier, later, gap } = readingOf(epochDayOf(day), time, timeZone);
+  return { instant: gap === undefined ? earlier : later, exact: earlier === later };
 }
 
 /** What calendar and clock show at an instant; `hourOfDay` with its fraction, seconds included. */
@@ -83,45 +83,48 @@ export function intervalsOfDay(
   day: CalendarDay,
   timeZone: string,
 ): InstantInterval[] {
-  const bounds = { from: startOfDay(day, timeZone), to: startOfDay(addDays(day, 1), timeZone) };
-  const pieces = [addDays(day, -1), day]
-    .flatMap((start) => intervals.map((interval) => instantsOf(interval, start, timeZone)))
-    .map(({ from, to }) => ({ from: Math.max(from, bounds.from), to: Math.min(to, bounds.to) }))
-    .filter(({ from, to }) => from < to)
-    .sort((a, b) => a.from - b.from);
-  const joined: InstantInterval[] = [];
-  for (const piece of pieces) {
-    const last = joined.at(-1);
-    if (last && piece.from <= last.to) last.to = Math.max(last.to, piece.to);
-    else joined.push(piece);
-  }
-  return joined;
+  return intervalsOfEpochDay(intervals, epochDayOf(day), timeZone);
 }
 
-function instantsOf({ from, to }: WallInterval, day: CalendarDay, timeZone: string): InstantInterval {
-  const lastDay = to > from ? day : addDays(day, 1);
-  const start = readings(day, from, timeZone);
-  const end = readings(lastDay, to, timeZone);
+/** The same for a day given by its number, see `epochDayOf`. */
+export function intervalsOfEpochDay(
+  intervals: readonly WallInterval[],
+  epochDay: number,
+  timeZone: string,
+): InstantInterval[] {
+  const [dayFrom, dayTo] = [startOfEpochDay(epochDay, timeZone), startOfEpochDay(epochDay + 1, timeZone)];
+  const pieces: InstantInterval[] = [];
+  for (let start = epochDay - 1; start <= epochDay; start++) {
+    for (const interval of intervals) {
+      const { from, to } = instantsOf(interval, start, timeZone);
+      if (from < dayTo && to > dayFrom) pieces.push({ from: Math.max(from, dayFrom), to: Math.min(to, dayTo) });
+    }
+  }
+  return joined(pieces);
+}
+
+/** The same stretches of time without overlaps, in order; those that touch become one. */
+export function joined(intervals: readonly InstantInterval[]): InstantInterval[] {
+  const whole: InstantInterval[] = [];
+  for (const { from, to } of [...intervals].sort((a, b) => a.from - b.from)) {
+    const last = whole.at(-1);
+    if (last && from <= last.to) last.to = Math.max(last.to, to);
+    else whole.push({ from, to });
+  }
+  return whole;
+}
+
+function instantsOf({ from, to }: WallInterval, epochDay: number, timeZone: string): InstantInterval {
+  const start = readingOf(epochDay, from, timeZone);
+  const end = readingOf(to > from ? epochDay : epochDay + 1, to, timeZone);
   return { from: start.gap ?? start.earlier, to: end.gap ?? end.later };
 }
 
-/** Every way to read a wall time of a day: `gap` is the moment of the change when the clocks skip it. */
-function readings(day: CalendarDay, time: WallTime, timeZone: string) {
+function readingOf(epochDay: number, time: WallTime, timeZone: string): LocalReading {
   const [, hour, minute] = wallShape.exec(time) ?? [];
   if (hour === undefined || minute === undefined)
     throw new AppError('invalid-input', `"${time}" is not a time of day like 19:40.`);
-  if (!isTimeZone(timeZone))
-    throw new AppError('invalid-input', `"${timeZone}" is not a time zone this machine knows.`);
-  epochDayOf(day);
-  const [year, month, date] = day.split('-').map(Number) as [number, number, number];
-  const plain = PlainDateTime.create(year, month, date, Number(hour), Number(minute));
-  const read = (disambiguation: 'earlier' | 'later' | 'compatible') =>
-    PlainDateTime.toZonedDateTime(plain, timeZone, { disambiguation }).epochMilliseconds;
-  const earlier = read('earlier');
-  const later = read('later');
-  const skipped = earlier !== later && wallTimeOf(earlier, timeZone) !== time;
-  const gap = skipped ? zoneStretch(earlier, timeZone).until : undefined;
-  return { earlier, later, compatible: read('compatible'), gap };
+  return readLocalTime(epochDay * MILLISECONDS_PER_DAY + (Number(hour) * 60 + Number(minute)) * 60_000, timeZone);
 }
 
 function twoDigits(value: number): string {

@@ -17,8 +17,7 @@ const known = new Map<string, ZoneStretch[]>();
  */
 export function zoneStretch(instant: number, timeZone: string): ZoneStretch {
   const stretches = known.get(timeZone) ?? [];
-  const hit = stretches.find(({ from, until }) => instant >= from && instant < until);
-  if (hit) return hit;
+  for (const stretch of stretches) if (instant >= stretch.from && instant < stretch.until) return stretch;
   const found = lookUp(instant, timeZone);
   // The latest answer stands first: the next question is nearly always about the same weeks.
   known.set(timeZone, [found, ...stretches]);
@@ -27,21 +26,15 @@ export function zoneStretch(instant: number, timeZone: string): ZoneStretch {
 
 function lookUp(instant: number, timeZone: string): ZoneStretch {
   if (!(Math.abs(instant) <= 8.64e15)) throw new AppError('invalid-input', `${instant} is not an instant.`);
-  // One nanosecond past it, or a change that falls exactly on the instant would not count as a previous one.
-  const moment = zonedDateTime(BigInt(Math.floor(instant)) * 1_000_000n + 1n, timeZone);
+  if (!isTimeZone(timeZone))
+    throw new AppError('invalid-input', `"${timeZone}" is not a time zone this machine knows.`);
+  // One nanosecond past the instant, or a change that falls exactly on it would not count as a previous one.
+  const moment = ZonedDateTime.create(BigInt(Math.floor(instant)) * 1_000_000n + 1n, timeZone);
   return {
     from: ZonedDateTime.getTimeZoneTransition(moment, 'previous')?.epochMilliseconds ?? -Infinity,
     until: ZonedDateTime.getTimeZoneTransition(moment, 'next')?.epochMilliseconds ?? Infinity,
     offset: ZonedDateTime.offsetNanoseconds(moment) / 1e6,
   };
-}
-
-function zonedDateTime(nanoseconds: bigint, timeZone: string): ZonedDateTime.Record {
-  try {
-    return ZonedDateTime.create(nanoseconds, timeZone);
-  } catch (cause) {
-    throw new AppError('invalid-input', `"${timeZone}" is not a time zone this machine knows.`, { cause });
-  }
 }
 
 /** Whether this is the name of an IANA zone. A bare offset is none: it knows no summer time. */
