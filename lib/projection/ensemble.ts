@@ -1,6 +1,8 @@
 import { ledgerOf, type WaterAnalysis } from '@/lib/chemistry';
 import { WaterRangeError } from '@/lib/errors';
 import { measuredRange } from '@/lib/schemas/measured-range';
+import { type JointName, jointOrder } from '@/lib/schemas/posterior';
+import { choleskyFactor } from './cholesky';
 import type { CourseSetting, CourseStart } from './integrate';
 import { normalQuantile } from './normal';
 import { type LearnableParameter, type Parameters, priorSigma } from './parameters';
@@ -16,56 +18,73 @@ export type Member = { start: CourseStart; setting: CourseSetting };
 /** How uncertain each learnable parameter is: sigma of its logarithm. */
 export type ParameterSigmas = Partial<Record<LearnableParameter, number>>;
 
-/** What each coordinate of a point stands for. The first ones are spread best: what chlorine hangs on most comes first. */
-const coordinates = [
-  'sunStrength',
-  'freeChlorine',
-  'darkDemand',
-  'cyanuricAcid',
-  'tabletLife',
-  'volume',
-  'boundPhotolysis',
-  'pH',
-  'chlorinePerSwimmerHour',
-  'carbonDioxideTransfer',
-  'totalAlkalinity',
-  'waterPerSwimmerHour',
-  'calciumHardness',
-] as const satisfies readonly (LearnableParameter | UncertainQuantity)[];
-
 /** Fixed digital shifts: multiples of the golden ratio, whose digits have no pattern. */
-const shifts = coordinates.map((_, coordinate) => Math.imul(coordinate + 1, 0x9e3779b9) >>> 0);
+const shifts = jointOrder.map((_, coordinate) => Math.imul(coordinate + 1, 0x9e3779b9) >>> 0);
+
+export type EnsembleOptions = {
+  /** Number of members; the product's bands use 64. */
+  size?: number;
+  /** Sigmas of the parameters' logarithms; the prior's where left out. */
+  sigmas?: ParameterSigmas;
+  /**
+   * Joint covariance of the parameters' logarithms and the water, as a posterior carries it; it takes the place of
+   * `sigmas` and of the reading's errors, and belongs about the posterior's own medians and water.
+   */
+  covariance?: readonly (readonly number[])[];
+};
 
 /**
  * The ensemble: the same Sobol points for every candidate plan, so that plans differ and luck does not. Parameters are
  * log-normal about their medians, readings normal about what was read and held inside what the model permits. Where the
  * drawn alkalinity cannot carry the drawn pH, the read one is taken.
  *
- * @param size    number of members; the product's bands use 64
- * @param sigmas  of the logarithms; the prior's where left out
+ * Without a joint covariance all of them are independent. With one, point z becomes the deviation L z, L being its
+ * Cholesky factor: what a pool has taught of the sum of two losses holds, however little it says of each.
+ *
+ * Errors: RangeError for a covariance that is not positive definite.
  */
 export function ensembleOf(
   water: WaterAnalysis,
   errors: ReadingErrors,
   loads: readonly TabletLoad[],
   setting: CourseSetting,
-  { size = ENSEMBLE_SIZE, sigmas = priorSigma }: { size?: number; sigmas?: ParameterSigmas } = {},
+  { size = ENSEMBLE_SIZE, sigmas = priorSigma, covariance }: EnsembleOptions = {},
 ): Member[] {
-  return sobolPoints(size, coordinates.length, shifts).map((point) => {
+  const spread = covariance ? jointSpread(covariance) : independentSpread(errors, sigmas);
+  return sobolPoints(size, jointOrder.length, shifts).map((point) => {
+    const deviations = spread(point.map(normalQuantile));
     const parameters: Parameters = { ...setting.parameters };
     const drawn = { ...water };
-    coordinates.forEach((name, coordinate) => {
-      const deviation = normalQuantile(point[coordinate]!);
-      if (isReading(name)) {
+    jointOrder.forEach((name, coordinate) => {
+      const deviation = deviations[coordinate]!;
+      if (isQuantity(name)) {
         const [low, high] = measuredRange[name];
-        drawn[name] = Math.min(high, Math.max(low, water[name] + errors[name] * deviation));
-      } else parameters[name] *= Math.exp((sigmas[name] ?? priorSigma[name]) * deviation);
+        drawn[name] = Math.min(high, Math.max(low, water[name] + deviation));
+      } else parameters[name] *= Math.exp(deviation);
     });
     return { start: { ledger: ledgerOfDrawn(drawn, water), loads }, setting: { ...setting, parameters } };
   });
 }
 
-function isReading(name: (typeof coordinates)[number]): name is UncertainQuantity {
+type Spread = (normal: readonly number[]) => readonly number[];
+
+function independentSpread(errors: ReadingErrors, sigmas: ParameterSigmas): Spread {
+  const each = jointOrder.map((name) => (isQuantity(name) ? errors[name] : (sigmas[name] ?? priorSigma[name])));
+  return (normal) => normal.map((value, coordinate) => each[coordinate]! * value);
+}
+
+function jointSpread(covariance: readonly (readonly number[])[]): Spread {
+  const factor = choleskyFactor(covariance);
+  return (normal) =>
+    factor.map((row, coordinate) => {
+      let sum = 0;
+      for (let term = 0; term <= coordinate; term++) sum += row[term]! * normal[term]!;
+      return sum;
+    });
+}
+
+/** Whether a name of the joint order is one of the water, not a parameter. */
+export function isQuantity(name: JointName): name is UncertainQuantity {
   return (uncertainQuantities as readonly string[]).includes(name);
 }
 

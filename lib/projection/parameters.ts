@@ -1,3 +1,4 @@
+import type { LearnableParameter } from '@/lib/schemas/posterior';
 import type { ParameterOverrides } from '@/lib/schemas/scenario';
 
 /** What a week depends on beside the entered facts; rates per hour. */
@@ -35,9 +36,9 @@ export const priorSigma = {
   waterPerSwimmerHour: 0.5,
   carbonDioxideTransfer: 0.5,
   volume: 0.1,
-} as const satisfies Partial<Record<keyof Parameters, number>>;
+} as const satisfies Record<LearnableParameter, number>;
 
-export type LearnableParameter = keyof typeof priorSigma;
+export type { LearnableParameter };
 
 /**
  * The median parameters of a pool, with what is known better put in their place.

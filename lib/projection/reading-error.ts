@@ -1,14 +1,7 @@
+import { type UncertainQuantity, uncertainQuantities } from '@/lib/schemas/posterior';
 import type { Interval, ReadingMethod } from '@/lib/schemas/reading';
 
-/** The quantities whose error belongs to the ensemble. */
-export const uncertainQuantities = [
-  'freeChlorine',
-  'pH',
-  'totalAlkalinity',
-  'calciumHardness',
-  'cyanuricAcid',
-] as const;
-export type UncertainQuantity = (typeof uncertainQuantities)[number];
+export { type UncertainQuantity, uncertainQuantities };
 
 type MethodError = { relative: number } | { absolute: number };
 

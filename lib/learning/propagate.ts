@@ -1,0 +1,73 @@
+import { type Ledger, ledgerOf, type WaterAnalysis } from '@/lib/chemistry';
+import { WaterRangeError } from '@/lib/errors';
+import { analysisAt } from '@/lib/projection';
+import type { WeekDose } from '@/lib/projection/events';
+import { type Forcing, MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
+import { type Course, type CourseSetting, integrateWeek } from '@/lib/projection/integrate';
+import { measuredRange } from '@/lib/schemas/measured-range';
+import { type FilterState, uncertainQuantities } from '@/lib/schemas/posterior';
+import { drift } from './drift';
+import { feederAt, loadsAtLife } from './feeder';
+import { held, parametersAt, placeOf, waterAt } from './state';
+import { momentsOf, sigmaPoints } from './unscented';
+
+/** What lies between two readings: forces, doses, and the pool with its prior's medians. */
+export type Gap = { forcing: Forcing; doses: readonly WeekDose[]; setting: CourseSetting; to: number };
+
+/**
+ * Carries what is known from one reading to the next: every sigma point is a pool of its own whose water the projection
+ * takes through the gap; their mean and covariance are what is expected of the next reading.
+ *
+ * Errors: WaterRangeError where what was recorded brings a pool's water out of the model's range.
+ */
+export function propagate(state: FilterState, { forcing, doses, setting, to }: Gap): FilterState {
+  const inside = doses.filter(({ at }) => at >= state.at && at < to);
+  const points = sigmaPoints(state.mean, state.covariance);
+  const courses = points.map(({ at }) => {
+    const parameters = parametersAt(at, setting.parameters);
+    const ledger = ledgerNear(waterAt(at, state));
+    const loads = loadsAtLife(state.loads, parameters.tabletLife);
+    const course = integrateWeek(forcing, { ledger, loads }, inside, { ...setting, parameters });
+    const water = endOf(course);
+    for (const quantity of uncertainQuantities) at[placeOf[quantity]] = water[quantity];
+    return course;
+  });
+  const { mean, covariance } = momentsOf(points);
+  for (const quantity of uncertainQuantities) {
+    const [low, high] = measuredRange[quantity];
+    mean[placeOf[quantity]] = held(mean[placeOf[quantity]]!, low, high);
+  }
+  const middle = endOf(courses[0]!);
+  const next: FilterState = {
+    ...state,
+    at: to,
+    mean,
+    covariance,
+    combinedChlorine: held(middle.combinedChlorine ?? 0, 0, measuredRange.combinedChlorine[1]),
+    dissolvedSolids: held(middle.dissolvedSolids ?? 0, 0, 30000),
+    loads: feederAt(state.loads, inside, forcing.pumpIntervals, setting.floater, state.at, to),
+  };
+  drift(next, (to - state.at) / (24 * MILLISECONDS_PER_HOUR));
+  return next;
+}
+
+function endOf({ end, endPH }: Course): WaterAnalysis {
+  const water = analysisAt(end, endPH);
+  for (const quantity of uncertainQuantities)
+    if (!Number.isFinite(water[quantity]))
+      throw new WaterRangeError(quantity, water[quantity], measuredRange[quantity][0], measuredRange[quantity][1]);
+  return water;
+}
+
+/** Alkalinity beyond the least that a pH needs [mg/L as CaCO3]. */
+const A_TRACE = 0.01;
+
+/** The ledger of a water; where its alkalinity cannot carry its pH, with as much as it needs. */
+export function ledgerNear(water: WaterAnalysis): Ledger {
+  try {
+    return ledgerOf(water);
+  } catch (error) {
+    if (!(error instanceof WaterRangeError) || error.field !== 'totalAlkalinity') throw error;
+    return ledgerOf({ ...water, totalAlkalinity: error.low + A_TRACE });
+  }
+}
