@@ -1,9 +1,10 @@
-import { addDays, dayOf, startOfDay } from '@/lib/calendar/household-day';
-import { type InstantInterval, intervalsOfDay, wallToInstant } from '@/lib/calendar/wall-time';
+import { dayOfEpochDay } from '@/lib/calendar/epoch-day';
+import { epochDayAt, startOfEpochDay } from '@/lib/calendar/household-day';
+import { type InstantInterval, intervalsOfEpochDay, wallToInstant } from '@/lib/calendar/wall-time';
 import type { Pool } from '@/lib/schemas/pool';
 import type { WeekAhead } from '@/lib/schemas/week-ahead';
-import { solarElevations } from '@/lib/sun/elevation';
-import { ultravioletWeight } from '@/lib/sun/ultraviolet';
+import { sinesOfElevation } from '@/lib/sun/solar-position';
+import { ultravioletWeightOfSine } from '@/lib/sun/ultraviolet';
 
 export const HOURS_IN_PLAN = 168;
 export const MILLISECONDS_PER_HOUR = 3_600_000;
@@ -83,42 +84,61 @@ export function prepareForcing(
     backwashes: [],
   };
   const passes = coverPasses[pool.cover];
-  const sunThrough = sunUnder(pool, startsAt, endsAt, forcing.sunParts.length);
+  shine(forcing, pool);
 
-  let day = dayOf(startsAt, pool.timeZone);
-  for (let index = 0; startOfDay(day, pool.timeZone) < endsAt; index++, day = addDays(day, 1)) {
-    const whole = { from: startOfDay(day, pool.timeZone), to: startOfDay(addDays(day, 1), pool.timeZone) };
-    const dayHours = (whole.to - whole.from) / MILLISECONDS_PER_HOUR;
-    const swim = intervalsOfDay([pool.swimHours], day, pool.timeZone);
-    const swimHours = swim.reduce((sum, { from, to }) => sum + (to - from) / MILLISECONDS_PER_HOUR, 0);
-    const lasting = (values: readonly number[]) => values[index] ?? values.at(-1)!;
-    const once = (values: readonly number[]) => values[index] ?? 0;
-    const sky = lasting(week.sky);
-    const evaporation = lasting(week.evaporation) / 1000 / 24;
-
-    const running = intervalsOfDay(pool.pump, day, pool.timeZone);
+  const firstDay = epochDayAt(startsAt, pool.timeZone);
+  let whole = { from: 0, to: startOfEpochDay(firstDay, pool.timeZone) };
+  for (let index = 0; whole.to < endsAt; index++) {
+    const day = firstDay + index;
+    whole = { from: whole.to, to: startOfEpochDay(day + 1, pool.timeZone) };
+    const dayHours = hoursOf(whole);
+    const swim = intervalsOfEpochDay([pool.swimHours], day, pool.timeZone);
+    const swimHours = swim.reduce((sum, interval) => sum + hoursOf(interval), 0);
+    const running = intervalsOfEpochDay(pool.pump, day, pool.timeZone);
     forcing.pumpIntervals.push(...running);
     for (const interval of running) addShare(forcing.pump, forcing, interval, 1);
-    addShare(forcing.temperature, forcing, whole, week.waterTemperature ? lasting(week.waterTemperature) : temperature);
-    addShare(forcing.rain, forcing, whole, once(week.rain) / 1000 / dayHours);
-    for (const interval of swim) addShare(forcing.swimmers, forcing, interval, once(week.swimmerHours) / swimHours);
-    for (const interval of pool.cover === 'none' ? [] : outside(whole, swim))
+    addShare(
+      forcing.temperature,
+      forcing,
+      whole,
+      week.waterTemperature ? lasting(week.waterTemperature, index) : temperature,
+    );
+    addShare(forcing.rain, forcing, whole, once(week.rain, index) / 1000 / dayHours);
+    addShare(forcing.evaporation, forcing, whole, lasting(week.evaporation, index) / 1000 / 24);
+    for (const interval of swim)
+      addShare(forcing.swimmers, forcing, interval, once(week.swimmerHours, index) / swimHours);
+    dim(forcing, whole, lasting(week.sky, index));
+    for (const interval of pool.cover === 'none' ? [] : outside(whole, swim)) {
       addShare(forcing.covered, forcing, interval, 1);
-    addShare(forcing.evaporation, forcing, whole, evaporation);
-    addSky(forcing, whole, sky, sunThrough);
-    if (once(week.backwash) > 0) {
-      const { instant } = wallToInstant(day, '12:00', pool.timeZone);
+      dim(forcing, interval, passes.sun);
+    }
+    if (once(week.backwash, index) > 0) {
+      const { instant } = wallToInstant(dayOfEpochDay(day), '12:00', pool.timeZone);
       if (instant >= startsAt && instant < endsAt)
-        forcing.backwashes.push({ at: instant, volume: Math.min(once(week.backwash), pool.volume) });
+        forcing.backwashes.push({ at: instant, volume: Math.min(once(week.backwash, index), pool.volume) });
     }
   }
   const parts = partsOf(stepHours);
-  forcing.sunParts.forEach((part, index) => (forcing.sun[Math.floor(index / parts)]! += part / parts));
   for (let step = 0; step < steps; step++) {
-    const covered = forcing.covered[step]!;
-    forcing.evaporation[step]! *= 1 - covered * (1 - passes.evaporation);
+    for (let part = step * parts; part < (step + 1) * parts; part++) forcing.sun[step]! += forcing.sunParts[part]!;
+    forcing.sun[step]! /= parts;
+    forcing.evaporation[step]! *= 1 - forcing.covered[step]! * (1 - passes.evaporation);
   }
   return forcing;
+}
+
+/** What a day brings where the last one named stands for those after it. */
+function lasting(values: readonly number[], day: number): number {
+  return values[day] ?? values.at(-1)!;
+}
+
+/** What a day brings where nothing named means nothing. */
+function once(values: readonly number[], day: number): number {
+  return values[day] ?? 0;
+}
+
+function hoursOf({ from, to }: InstantInterval): number {
+  return (to - from) / MILLISECONDS_PER_HOUR;
 }
 
 /** Adds `value` to each step in proportion to its overlap with the interval. */
@@ -153,8 +173,9 @@ function partsOf(stepHours: number): number {
 }
 
 /** Mean of the sun between two instants [ms] inside the week. */
-export function sunBetween({ sunParts, startsAt, stepHours, steps }: Forcing, from: number, to: number): number {
-  const length = (stepHours * steps * MILLISECONDS_PER_HOUR) / sunParts.length;
+export function sunBetween(forcing: Forcing, from: number, to: number): number {
+  const { sunParts, startsAt } = forcing;
+  const length = partLength(forcing);
   const [first, last] = [(from - startsAt) / length, (to - startsAt) / length];
   let sum = 0;
   for (let part = Math.floor(first); part < last; part++)
@@ -162,29 +183,24 @@ export function sunBetween({ sunParts, startsAt, stepHours, steps }: Forcing, fr
   return sum / (last - first);
 }
 
-type SunSamples = { instants: number[]; weights: number[] };
-
-function sunUnder(pool: Pool, startsAt: number, endsAt: number, samples: number): SunSamples {
-  const spacing = (endsAt - startsAt) / samples;
-  const instants = Array.from({ length: samples }, (_, sample) => startsAt + (sample + 0.5) * spacing);
-  const swimming = new Map<string, readonly InstantInterval[]>();
-  const through = (instant: number) => {
-    if (pool.cover === 'none') return 1;
-    const day = dayOf(instant, pool.timeZone);
-    const intervals = swimming.get(day) ?? intervalsOfDay([pool.swimHours], day, pool.timeZone);
-    swimming.set(day, intervals);
-    const open = intervals.some(({ from, to }) => instant >= from && instant < to);
-    return open ? 1 : coverPasses[pool.cover].sun;
-  };
-  const elevations = solarElevations(instants, pool.latitude, pool.longitude);
-  const weights = instants.map(
-    (instant, sample) => pool.sunExposure * ultravioletWeight(elevations[sample]!) * through(instant),
-  );
-  return { instants, weights };
+/** Fills the sun's parts with the clear sky's UV at the middle of each, less what stands in the pool's sun. */
+function shine(forcing: Forcing, { latitude, longitude, sunExposure }: Pool): void {
+  const { sunParts, startsAt } = forcing;
+  const length = partLength(forcing);
+  const sines = sinesOfElevation(startsAt + length / 2, length, sunParts.length, latitude, longitude);
+  for (let part = 0; part < sines.length; part++) sunParts[part] = sunExposure * ultravioletWeightOfSine(sines[part]!);
 }
 
-function addSky({ sunParts }: Forcing, day: InstantInterval, sky: number, { instants, weights }: SunSamples) {
-  instants.forEach((instant, sample) => {
-    if (instant >= day.from && instant < day.to) sunParts[sample] = sky * weights[sample]!;
-  });
+/** Lets a share of the sun through in the parts whose middle lies in the interval. */
+function dim(forcing: Forcing, { from, to }: InstantInterval, share: number): void {
+  const { sunParts, startsAt } = forcing;
+  const length = partLength(forcing);
+  const end = Math.min(sunParts.length, Math.ceil((to - startsAt) / length - 0.5));
+  for (let part = Math.max(0, Math.ceil((from - startsAt) / length - 0.5)); part < end; part++)
+    sunParts[part]! *= share;
+}
+
+/** Length of one of the sun's parts [ms]. */
+function partLength({ sunParts, stepHours, steps }: Forcing): number {
+  return (stepHours * steps * MILLISECONDS_PER_HOUR) / sunParts.length;
 }

@@ -77,6 +77,8 @@ export function integrateWeek(
   const events = eventsOf(forcing, doses);
   const pump = pumpShares(forcing, doses);
   const state = newLedgerState();
+  heading.pH = 0;
+  heading.hypochlorousAcid = 0;
   let constants = constantsOfLedger(ledger);
   let next = 0;
 
@@ -171,9 +173,11 @@ export function ledgerAt({ hourly }: Course, hour: number): Ledger {
   };
 }
 
-// Working space of a step, filled anew by each; nothing is carried from one call to the next.
+// Working space of a step, filled anew by each course; nothing is carried from one call to the next.
 const rates = newStepRates();
 const midway = newLedgerState();
+/** How the water moved in the step before, for each hour: only a guess of where the next solve should start. */
+const heading = { pH: 0, hypochlorousAcid: 0 };
 
 /** A step over which the loss changes so much [mg/L] is taken as two, down to the shortest step [h]. */
 const LARGEST_BEND = 0.01;
@@ -194,8 +198,8 @@ function advance(
   const lossBefore = rates.chlorineLoss;
   copyLedger(ledger, half);
   moveOn(half, rates, fillWater, hours / 2);
-  midway.pH = state.pH;
-  midway.hypochlorousAcid = state.hypochlorousAcid;
+  midway.pH = state.pH + (heading.pH * hours) / 2;
+  midway.hypochlorousAcid = Math.max(0, state.hypochlorousAcid + (heading.hypochlorousAcid * hours) / 2);
   solveLedger(half, constants, midway);
   rateState(rates, midway, half.freeChlorine, parameters.boundPhotolysis);
   const bend = Math.abs(rates.chlorineLoss - lossBefore) * hours * ledger.freeChlorine;
@@ -206,9 +210,11 @@ function advance(
     return;
   }
   moveOn(ledger, rates, fillWater, hours, account);
+  heading.pH = (2 * (midway.pH - state.pH)) / hours;
+  heading.hypochlorousAcid = (2 * (midway.hypochlorousAcid - state.hypochlorousAcid)) / hours;
   // The next solve starts from where the water was heading: one step of it then does.
-  state.pH = 2 * midway.pH - state.pH;
-  state.hypochlorousAcid = Math.max(0, 2 * midway.hypochlorousAcid - state.hypochlorousAcid);
+  state.pH += heading.pH * hours;
+  state.hypochlorousAcid = Math.max(0, state.hypochlorousAcid + heading.hypochlorousAcid * hours);
 }
 
 function copyLedger(from: Ledger, to: Ledger): void {

@@ -1,4 +1,4 @@
-import type { InstantInterval } from '@/lib/calendar/wall-time';
+import { type InstantInterval, joined } from '@/lib/calendar/wall-time';
 import { addShare, type Forcing } from './forcing';
 import type { WeekDose } from './events';
 
@@ -12,17 +12,6 @@ export function pumpShares(forcing: Forcing, doses: readonly WeekDose[]): Float6
   const overrides = pumpOverrides(doses);
   if (overrides.length === 0) return forcing.pump;
   const shares = new Float64Array(forcing.steps);
-  for (const interval of union([...forcing.pumpIntervals, ...overrides])) addShare(shares, forcing, interval, 1);
+  for (const interval of joined([...forcing.pumpIntervals, ...overrides])) addShare(shares, forcing, interval, 1);
   return shares;
-}
-
-/** The same stretches of time without overlaps, in order. */
-function union(intervals: InstantInterval[]): InstantInterval[] {
-  const joined: InstantInterval[] = [];
-  for (const { from, to } of intervals.sort((a, b) => a.from - b.from)) {
-    const last = joined.at(-1);
-    if (last && from <= last.to) last.to = Math.max(last.to, to);
-    else joined.push({ from, to });
-  }
-  return joined;
 }

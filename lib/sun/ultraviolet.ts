@@ -13,5 +13,10 @@ const reference = Math.sin(REFERENCE_ELEVATION * radians);
  * Source: Madronich 2007, Photochem. Photobiol. 83:1537, for the exponent of the UV index.
  */
 export function ultravioletWeight(elevation: number): number {
-  return elevation <= 0 ? 0 : (Math.sin(elevation * radians) / reference) ** ULTRAVIOLET_EXPONENT;
+  return ultravioletWeightOfSine(Math.sin(elevation * radians));
+}
+
+/** The same from the sine of the elevation. */
+export function ultravioletWeightOfSine(sine: number): number {
+  return sine <= 0 ? 0 : (sine / reference) ** ULTRAVIOLET_EXPONENT;
 }

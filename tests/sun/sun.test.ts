@@ -2,7 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { daylightOf } from '@/lib/sun/daylight';
 import { solarElevation, solarElevations } from '@/lib/sun/elevation';
-import { ultravioletWeight } from '@/lib/sun/ultraviolet';
+import { sinesOfElevation, solarPosition } from '@/lib/sun/solar-position';
+import { ultravioletWeight, ultravioletWeightOfSine } from '@/lib/sun/ultraviolet';
 
 // The UV index rows of tests/reference/published-values.csv are checked in tests/chemistry/published-values.test.ts.
 
@@ -28,6 +29,55 @@ describe('elevation of the sun', () => {
     expect(elevations).toEqual(instants.map((instant) => solarElevation(instant, 28, -81.5)));
     expect(elevations[0]).toBeGreaterThan(65);
     expect(elevations[1]).toBeLessThan(-30);
+  });
+});
+
+describe('position of the sun over the turning Earth', () => {
+  it.each([
+    // Meeus 1998, Astronomical Algorithms, example 25.a: apparent declination -7.78507 degrees.
+    ['1992-10-13T00:00Z', -7.785],
+    // Reda & Andreas 2004, NREL/TP-560-34302, table A5.1: geocentric declination -9.31434 degrees.
+    ['2003-10-17T19:30:30Z', -9.314],
+  ])('%s: declination %d degrees', (instant, declination) => {
+    expect(Math.abs((solarPosition(at(instant)).declination * 180) / Math.PI - declination)).toBeLessThan(0.01);
+  });
+
+  it('hour angle of the worked example of the NREL solar position algorithm', () => {
+    // Table A5.1: local hour angle 11.105900 degrees at 105.1786 degrees west.
+    const { greenwichHourAngle } = solarPosition(at('2003-10-17T19:30:30Z'));
+    expect(Math.abs((greenwichHourAngle * 180) / Math.PI - 105.1786 - 11.1059)).toBeLessThan(0.01);
+  });
+
+  it.each([2001, 2026, 2049])(
+    'gives the UV weight of the fuller algorithm within 0.001, every quarter of an hour, %d',
+    (year) => {
+      const quarter = 15 * MINUTE;
+      let worst = 0;
+      for (const latitude of [-66, -35, 0, 28, 51.5, 69.6, 90])
+        for (let day = 0; day < 365; day += 28) {
+          const longitude = ((day * 47) % 360) - 180;
+          const from = Date.UTC(year, 0, 1 + day) + (day % 96) * quarter;
+          const instants = Array.from({ length: 7 * 96 }, (_, index) => from + index * quarter);
+          const sines = sinesOfElevation(from, quarter, instants.length, latitude, longitude);
+          solarElevations(instants, latitude, longitude).forEach((elevation, index) => {
+            const difference = ultravioletWeightOfSine(sines[index]!) - ultravioletWeight(elevation);
+            worst = Math.max(worst, Math.abs(difference));
+          });
+        }
+      expect(worst).toBeLessThan(0.001);
+    },
+  );
+
+  it('takes any spacing and any length', () => {
+    const from = at('2026-07-05T19:07Z');
+    const fine = sinesOfElevation(from, 7 * MINUTE, 400, 28, -81.5);
+    const coarse = sinesOfElevation(from, 21 * MINUTE, 134, 28, -81.5);
+    expect(Array.from(coarse)).toEqual(Array.from(coarse, (_, index) => expect.closeTo(fine[3 * index]!, 5) as number));
+    expect(sinesOfElevation(from, 7 * MINUTE, 1, 28, -81.5)).toHaveLength(1);
+    expect(sinesOfElevation(from, 3 * 24 * 60 * MINUTE, 3, 28, -81.5)[2]).toBeCloseTo(
+      sinesOfElevation(from + 6 * 24 * 60 * MINUTE, MINUTE, 1, 28, -81.5)[0]!,
+      9,
+    );
   });
 });
 
