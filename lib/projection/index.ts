@@ -92,10 +92,9 @@ export function projectWeek(
     weekDosesOf(doses, pool.volume),
     setting,
   );
-  return {
-    hours: hoursFrom(startsAt),
-    water: Array.from(course.pH, (pH, hour) => analysisAt(ledgerAt(course, hour), pH)),
-  };
+  const water: WaterAnalysis[] = [];
+  for (let hour = 0; hour < course.pH.length; hour++) water.push(analysisAt(ledgerAt(course, hour), course.pH[hour]!));
+  return { hours: hoursFrom(startsAt), water };
 }
 
 /**
@@ -165,7 +164,9 @@ export function analysisAt(ledger: Ledger, pH: number): WaterAnalysis {
 
 /** Every full hour from an instant [ms], the instant included. */
 export function hoursFrom(startsAt: number): number[] {
-  return Array.from({ length: HOURS_IN_PLAN + 1 }, (_, hour) => startsAt + hour * MILLISECONDS_PER_HOUR);
+  const hours: number[] = [];
+  for (let hour = 0; hour <= HOURS_IN_PLAN; hour++) hours.push(startsAt + hour * MILLISECONDS_PER_HOUR);
+  return hours;
 }
 
 function weekDosesOf(doses: readonly ProjectedDose[], volume: number): WeekDose[] {

@@ -77,6 +77,7 @@ export function integrateWeek(
   const events = eventsOf(forcing, doses);
   const pump = pumpShares(forcing, doses);
   const state = newLedgerState();
+  const acting = actingIn(forcing, 0);
   heading.pH = 0;
   heading.hypochlorousAcid = 0;
   let constants = constantsOfLedger(ledger);
@@ -98,7 +99,7 @@ export function integrateWeek(
 
   for (let step = 0; step <= forcing.steps; step++) {
     const from = forcing.startsAt + step * forcing.stepHours * MILLISECONDS_PER_HOUR;
-    const acting = actingIn(forcing, Math.min(step, forcing.steps - 1));
+    putActing(forcing, Math.min(step, forcing.steps - 1), acting);
     happen(from);
     if (acting.temperature !== ledger.temperature || step % (24 * stepsPerHour) === 0) {
       ledger.temperature = acting.temperature;
@@ -231,14 +232,17 @@ function copyLedger(from: Ledger, to: Ledger): void {
 
 /** What acts on the water in a step of the week. */
 export function actingIn(forcing: Forcing, step: number): Acting {
-  return {
-    sun: forcing.sun[step]!,
-    covered: forcing.covered[step]!,
-    evaporation: forcing.evaporation[step]!,
-    rain: forcing.rain[step]!,
-    swimmers: forcing.swimmers[step]!,
-    temperature: forcing.temperature[step]!,
-  };
+  return putActing(forcing, step, { sun: 0, covered: 0, evaporation: 0, rain: 0, swimmers: 0, temperature: 0 });
+}
+
+function putActing(forcing: Forcing, step: number, acting: Acting): Acting {
+  acting.sun = forcing.sun[step]!;
+  acting.covered = forcing.covered[step]!;
+  acting.evaporation = forcing.evaporation[step]!;
+  acting.rain = forcing.rain[step]!;
+  acting.swimmers = forcing.swimmers[step]!;
+  acting.temperature = forcing.temperature[step]!;
+  return acting;
 }
 
 type Backwash = { at: number; kind: 'backwash'; volume: number };

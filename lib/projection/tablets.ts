@@ -1,5 +1,5 @@
 import { CHLORINE_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
-import type { TabletRelease } from './step';
+import { noRelease, type TabletRelease } from './step';
 
 /** Tablets that went into a feeder together and erode alike. */
 export type TabletLoad = {
@@ -72,6 +72,7 @@ export function erode(
   hours: number,
   { tabletLife, volume }: { tabletLife: number; volume: number },
 ): TabletRelease {
+  if (loads.length === 0) return noRelease;
   let chlorineMass = 0;
   let mass = 0;
   for (const load of loads) {

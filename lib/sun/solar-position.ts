@@ -74,10 +74,15 @@ export function sinesOfElevation(
     const across = Math.cos(latitude * radians) * Math.cos(today.declination);
     const acrossPerStep = (Math.cos(latitude * radians) * Math.cos(next.declination) - across) / perDay;
     const hourAngle = today.greenwichHourAngle + longitude * radians;
+    // A cosine of evenly spaced angles follows from the two before it: cos(a + b) = 2 cos(b) cos(a) - cos(a - b).
+    const twiceTurn = 2 * Math.cos(perStep);
+    let cosine = Math.cos(hourAngle);
+    let cosineBefore = Math.cos(hourAngle - perStep);
     const last = Math.min(perDay, count - first);
-    for (let step = 0; step < last; step++)
-      sines[first + step] =
-        north + northPerStep * step + (across + acrossPerStep * step) * Math.cos(hourAngle + perStep * step);
+    for (let step = 0; step < last; step++) {
+      sines[first + step] = north + northPerStep * step + (across + acrossPerStep * step) * cosine;
+      [cosine, cosineBefore] = [twiceTurn * cosine - cosineBefore, cosine];
+    }
     today = next;
   }
   return sines;

