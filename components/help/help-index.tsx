@@ -8,9 +8,11 @@ import { HelpHead } from './help-head';
 /** The help that exists today, trouble first, and what no sheet can know. */
 export function HelpIndex() {
   const t = useTranslations('help');
+  const how = useTranslations('how');
   const pages = [
     { href: emergencyCard, name: t('emergency.title'), note: t('index.emergencyNote') },
     { href: '/help/safety', name: t('index.safety'), note: t('index.safetyNote') },
+    { href: '/help/how', name: how('title'), note: t('index.howNote') },
     { href: `/#${scopeAnchor}`, name: t('index.scope'), note: t('index.scopeNote') },
   ];
   const unknowns = [t('cannot.see'), t('cannot.label'), t('cannot.measure'), t('cannot.body')];

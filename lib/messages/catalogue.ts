@@ -2,6 +2,9 @@ import common from './en/common.json';
 import doses from './en/doses.json';
 import firstRun from './en/first-run.json';
 import help from './en/help.json';
+import how from './en/how.json';
+import howConstants from './en/how-constants.json';
+import howExamples from './en/how-examples.json';
 import navigation from './en/navigation.json';
 import pool from './en/pool.json';
 import problems from './en/problems.json';
@@ -17,6 +20,9 @@ export const catalogue = {
   doses,
   'first-run': firstRun,
   help,
+  how,
+  'how-constants': howConstants,
+  'how-examples': howExamples,
   navigation,
   pool,
   problems,

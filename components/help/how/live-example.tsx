@@ -1,0 +1,72 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import { useDeferredValue, useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { useHydrated } from '@/components/ui/use-hydrated';
+import { examples } from '@/lib/client/worked-out/examples/all-examples';
+import type { HowPage } from '@/lib/client/worked-out/how-page';
+import { ExampleFigures } from './example-figures';
+import { ExamplePicture } from './example-picture';
+import { Slider } from './slider';
+import { useWritten } from './use-written';
+
+/** Sliders over the very functions that work the week out. Without JavaScript it shows what follows from where they stand. */
+export function LiveExample({ page }: { page: HowPage }) {
+  const t = useTranslations('how-examples');
+  const written = useWritten();
+  const hydrated = useHydrated();
+  const example = examples[page];
+  const start = example?.inputs.map((input) => input.start) ?? [];
+  const [values, setValues] = useState<readonly number[]>(start);
+  const shown = useDeferredValue(values);
+  if (example === undefined) return null;
+  const worked = example.work(shown);
+  const moved = values.some((value, index) => value !== start[index]);
+  return (
+    <section aria-labelledby="example" className="border-t border-ink pt-3.5">
+      <div className="flex flex-wrap items-baseline justify-between gap-x-8">
+        <h2 id="example" className="font-display text-section">
+          {t('title')}
+        </h2>
+        <p className="text-small text-ink-2">
+          {t('lead')} <b className="font-strong">{t('notADose')}</b>
+        </p>
+      </div>
+      <noscript>
+        <p className="mt-1 text-small text-ink-2">{t('still')}</p>
+      </noscript>
+      <div className="mt-3 grid gap-x-8 gap-y-1 sm:grid-cols-2 lg:grid-cols-4">
+        {example.inputs.map((input, index) => {
+          const value = values[index] ?? input.start;
+          return (
+            <Slider
+              key={input.name}
+              label={t(
+                page === 'liquid-strength' && input.name === 'temperature'
+                  ? 'storedTemperature'
+                  : `input.${input.name}`,
+              )}
+              value={value}
+              written={written(value, input)}
+              low={input.low}
+              high={input.high}
+              step={input.step}
+              off={!hydrated}
+              onMove={(next) => setValues(values.map((old, at) => (at === index ? next : old)))}
+            />
+          );
+        })}
+      </div>
+      <ExampleFigures worked={worked} />
+      {worked.curve === undefined ? null : <ExamplePicture page={page} curve={worked.curve} />}
+      <p className="min-h-11">
+        {moved ? (
+          <Button variant="quiet" size="small" className="-ml-1.5" onClick={() => setValues(start)}>
+            {t('putBack')}
+          </Button>
+        ) : null}
+      </p>
+    </section>
+  );
+}

@@ -1,0 +1,21 @@
+/**
+ * Symbols as a book prints them, from a short notation: *x* is a quantity (italic), {_x} stands low, {^x} stands high.
+ * Plain text in the page, so that it can be copied, found and read out.
+ */
+export function Typeset({ notation }: { notation: string }) {
+  const parts = notation.split(/(\*[^*]+\*|\{[_^][^}]+\})/).filter((part) => part !== '');
+  return (
+    <span className="font-display">
+      {parts.map((part, index) => (
+        <Part key={index} part={part} />
+      ))}
+    </span>
+  );
+}
+
+function Part({ part }: { part: string }) {
+  if (part.startsWith('*')) return <i>{part.slice(1, -1)}</i>;
+  if (part.startsWith('{_')) return <sub className="text-[0.72em] leading-none">{part.slice(2, -1)}</sub>;
+  if (part.startsWith('{^')) return <sup className="text-[0.72em] leading-none">{part.slice(2, -1)}</sup>;
+  return part;
+}
