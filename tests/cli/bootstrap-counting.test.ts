@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { countEndToEnd, countVitest, oneCheck } from '@/lib/cli/bootstrap/counting.mjs';
+import { countBenchmarks, countEndToEnd, countVitest, oneCheck } from '@/lib/cli/bootstrap/counting.mjs';
 
 const file = (statuses: string[], status = 'passed') => ({
   status,
@@ -55,5 +55,14 @@ describe('the run in the browser', () => {
     expect(run(['ready', '12 passed, 0 failed'])).toEqual({ passed: 0, failed: 1 });
     expect(run(['E2E 9 passed, 0 failed'], false)).toEqual({ passed: 9, failed: 1 });
     expect(run(['E2E 0 passed, 0 failed'])).toEqual({ passed: 0, failed: 1 });
+  });
+});
+
+describe('the benchmarks', () => {
+  const run = (lines: string[], succeeded = true) => countBenchmarks({ succeeded, lines });
+
+  it('are counted piece by piece, by their own summary alone', () => {
+    expect(run(['E2E 1 passed, 0 failed', 'BENCH 8 passed, 1 failed'], false)).toEqual({ passed: 8, failed: 1 });
+    expect(run(['E2E 9 passed, 0 failed'])).toEqual({ passed: 0, failed: 1 });
   });
 });

@@ -24,10 +24,19 @@ export function countVitest({ succeeded }, readReport) {
 const hasFailedTest = (file) => file.assertionResults.some((test) => test.status === 'failed');
 
 /** The end-to-end run says how it went in its last line. */
-export function countEndToEnd({ succeeded, lines }) {
-  const said = lines.map((line) => /^E2E (\d+) passed, (\d+) failed$/.exec(line.trim())).findLast(Boolean);
-  if (!said) return { passed: 0, failed: 1 };
-  return blameTheRun(succeeded, { passed: Number(said[1]), failed: Number(said[2]) });
+export const countEndToEnd = countSaid('E2E');
+
+/** The benchmarks do the same: one for each piece. */
+export const countBenchmarks = countSaid('BENCH');
+
+/** Reads "WORD 3 passed, 1 failed". */
+function countSaid(word) {
+  const summary = new RegExp(`^${word} (\\d+) passed, (\\d+) failed$`);
+  return ({ succeeded, lines }) => {
+    const said = lines.map((line) => summary.exec(line.trim())).findLast(Boolean);
+    if (!said) return { passed: 0, failed: 1 };
+    return blameTheRun(succeeded, { passed: Number(said[1]), failed: Number(said[2]) });
+  };
 }
 
 /** A run that ended badly, or ran nothing, has failed even if each of its tests passed. */

@@ -2,7 +2,7 @@ import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { nextProgram } from './build.mjs';
 import { typescriptEnvironment, typescriptLoader } from './child.mjs';
-import { countEndToEnd, countVitest, oneCheck } from './counting.mjs';
+import { countBenchmarks, countEndToEnd, countVitest, oneCheck } from './counting.mjs';
 import { inRoot, testFolder, workFolder } from './place.mjs';
 
 /**
@@ -110,6 +110,15 @@ export const build = {
   programs: [[inRoot('lib/cli/bootstrap.mjs'), 'build']],
   env: { NEXT_DIST_DIR: testFolder },
   count: oneCheck,
+};
+
+/** Whether any piece of the engine has become slower than its committed ratio allows; one check for each piece. */
+export const benchmarks = {
+  name: 'benchmarks',
+  minutes: 5,
+  programs: [[...typescriptLoader, inRoot('tests/bench/run.ts'), '--check']],
+  env: typescriptEnvironment,
+  count: countBenchmarks,
 };
 
 export const endToEnd = {

@@ -6,8 +6,8 @@ import { withLock } from './lock.mjs';
 import * as stage from './stages.mjs';
 
 /**
- * `npm test`. Two cores: the stages of one lane run one after the other, the two lanes side by side, and the browser
- * has the machine to itself.
+ * `npm test`. Two cores: the stages of one lane run one after the other, the two lanes side by side; the benchmarks and
+ * the browser have the machine to themselves.
  */
 export function test() {
   return runSuite([
@@ -15,6 +15,7 @@ export function test() {
       [stage.build, stage.types, stage.component],
       [stage.lint, stage.formatting, stage.boundaries, stage.unit],
     ],
+    [[stage.benchmarks]],
     [[stage.endToEnd]],
   ]);
 }
