@@ -141,11 +141,12 @@ export function moveOn(
   const before = ledger.freeChlorine;
   const released = rates.release.chlorine * hours;
   const loss = rates.chlorineLoss + rates.outflow;
-  const kept = Math.exp(-loss * hours);
-  const filled = loss > 1e-12 ? (1 - kept) / loss : hours;
-  const after = Math.max(0, before * kept + (rates.release.chlorine - rates.swimmerDemand) * filled);
+  const faded = Math.expm1(-loss * hours);
+  const filled = loss > 0 ? -faded / loss : hours;
+  const after = Math.max(0, before + before * faded + (rates.release.chlorine - rates.swimmerDemand) * filled);
   const gone = before + released - after;
-  const bySwimmers = Math.min(rates.swimmerDemand * hours, gone);
+  // Where nothing goes, rounding may leave a little less than nothing.
+  const bySwimmers = Math.max(0, Math.min(rates.swimmerDemand * hours, gone));
   const firstOrder = gone - bySwimmers;
   const carriedOut = loss > 0 ? (firstOrder * rates.outflow) / loss : 0;
   const combined = SHARE_BECOMING_COMBINED * bySwimmers;
@@ -159,13 +160,13 @@ export function moveOn(
   }
 
   const combinedLoss = rates.combinedLoss + rates.outflow;
-  const combinedKept = Math.exp(-combinedLoss * hours);
-  ledger.combinedChlorine =
-    ledger.combinedChlorine * combinedKept +
-    (combined / hours) * (combinedLoss > 1e-12 ? (1 - combinedKept) / combinedLoss : hours);
+  const combinedFaded = Math.expm1(-combinedLoss * hours);
+  ledger.combinedChlorine +=
+    ledger.combinedChlorine * combinedFaded - ((combined / hours) * combinedFaded) / combinedLoss;
 
-  const left = rates.outflow > 0 ? Math.exp(-rates.outflow * hours) : 1;
-  const entered = rates.inflow * (rates.outflow > 1e-12 ? (1 - left) / rates.outflow : hours);
+  const out = rates.outflow > 0 ? Math.expm1(-rates.outflow * hours) : 0;
+  const left = 1 + out;
+  const entered = rates.inflow * (rates.outflow > 0 ? -out / rates.outflow : hours);
   ledger.alkalinity = ledger.alkalinity * left + fill.alkalinity * entered - usedUp / CHLORINE_MILLIGRAMS_PER_MOLE;
   ledger.inorganicCarbon = Math.max(
     0,
