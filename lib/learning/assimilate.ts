@@ -3,13 +3,14 @@ import type { FilterState } from '@/lib/schemas/posterior';
 import { hampelWeight, QUESTIONED_BELOW } from './hampel';
 import { parameterPlaces, placeOf } from './state';
 
-const QUANTILE_90 = 1.2815515655446004;
+/** Of the standard normal distribution. */
+export const QUANTILE_90 = 1.2815515655446004;
 /** Where a believed surprise comes to lie, in sigmas of what is expected after the expectation was loosened. */
 const BELIEVED_AT = 1.5;
 
-/** The band that a value was expected in [its unit]. */
+/** The band that a value was expected in [its unit]; nothing measured is below 0. */
 export function expectedBand(middle: number, sigma: number) {
-  return { p10: middle - QUANTILE_90 * sigma, p50: middle, p90: middle + QUANTILE_90 * sigma };
+  return { p10: Math.max(0, middle - QUANTILE_90 * sigma), p50: middle, p90: middle + QUANTILE_90 * sigma };
 }
 
 /**

@@ -5,17 +5,22 @@ import { parameterPlaces, placeOf, waterPlaces } from './state';
 /**
  * How long a pool takes to forget: trees grow, filters age, habits change. What was learnt returns to the prior with this
  * time constant [days]; an Ornstein-Uhlenbeck process about the prior, so that no gap makes a pool less known than one
- * that nobody ever measured. Assumption: about a tenth of what was learnt in a season of 100 days.
+ * that nobody ever measured. Assumption: a thirtieth of what was learnt in a season of 100 days. A pool that changes faster
+ * is noticed by its surprises, see `assimilate`.
  */
-const FORGETTING_DAYS = 1000;
+const FORGETTING_DAYS = 3000;
 
-/** Sigma that water gains in one day through what nobody writes down [its unit]; assumptions. */
+/**
+ * Sigma that water gains in one day through what nobody writes down [its unit]; assumptions. Small on purpose: on simulated
+ * pools, in which everything is written down, more would make ranges wider than they promise to be. Handfuls that nobody
+ * wrote down show as surprises.
+ */
 const unrecordedPerDay: Record<UncertainQuantity, number> = {
-  freeChlorine: 0.1,
-  pH: 0.02,
-  totalAlkalinity: 0.5,
-  calciumHardness: 0.7,
-  cyanuricAcid: 0.4,
+  freeChlorine: 0.03,
+  pH: 0.01,
+  totalAlkalinity: 0.3,
+  calciumHardness: 0.4,
+  cyanuricAcid: 0.3,
 };
 
 /** Chlorine of unrecorded doses is used up like any other: it adds up over no more than so many days. */

@@ -26,6 +26,7 @@ import { readingsInOrder } from './readings-in-order';
 import { placeOf } from './state';
 import { learnFromTabletsLeft } from './tablets-left';
 
+export { describeLearnt, type LearntDescription, type LearntParameter } from './describe-learnt';
 export type { DayConditions, PoolHistory, TabletsLeft } from './history';
 
 const MILLISECONDS_PER_DAY = 24 * MILLISECONDS_PER_HOUR;

@@ -14,8 +14,8 @@ export type SigmaPoint = { at: Float64Array; weight: number };
  *
  *     x0 = m,  x(i) = m +- sqrt(3) L e(i),  weights 1 - n / 3 and 1 / 6
  *
- * In covariances the middle point weighs 0 (beta = n / 3 - 2 + alpha^2): all weights are then >= 0, and what comes out is
- * a covariance whatever the function does.
+ * Among a dozen dimensions the middle point's weight is negative; {@link momentsOf} therefore takes covariances about what
+ * became of that point, which keeps them covariances whatever the function does (the modified form of 1997).
  *
  * Source: S. J. Julier, J. K. Uhlmann, Proc. SPIE 3068 (1997) 182-193; scaled form: E. A. Wan, R. van der Merwe, IEEE
  * AS-SPCC 2000, 153-158 (formulas from memory).
@@ -32,16 +32,17 @@ export function sigmaPoints(mean: readonly number[], covariance: readonly (reado
   return points;
 }
 
-/** Mean and covariance of points after a function has moved them. */
+/** Mean of points after a function has moved them, and covariance about where the first of them, the middle one, went. */
 export function momentsOf(points: readonly SigmaPoint[]): { mean: number[]; covariance: number[][] } {
-  const size = points[0]!.at.length;
+  const middle = points[0]!.at;
+  const size = middle.length;
   const mean = new Array<number>(size).fill(0);
   for (const { at, weight } of points) for (let row = 0; row < size; row++) mean[row]! += weight * at[row]!;
   const covariance = mean.map(() => new Array<number>(size).fill(0));
   for (const { at, weight } of points.slice(1))
     for (let row = 0; row < size; row++)
       for (let column = 0; column <= row; column++)
-        covariance[row]![column]! += weight * (at[row]! - mean[row]!) * (at[column]! - mean[column]!);
+        covariance[row]![column]! += weight * (at[row]! - middle[row]!) * (at[column]! - middle[column]!);
   for (let row = 0; row < size; row++)
     for (let column = 0; column < row; column++) covariance[column]![row] = covariance[row]![column]!;
   return { mean, covariance };

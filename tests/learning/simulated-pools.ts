@@ -10,9 +10,9 @@ import { type Parameters, parametersOf, priorSigma } from '@/lib/projection/para
 import { readingError, type UncertainQuantity, uncertainQuantities } from '@/lib/projection/reading-error';
 import { measuredRange } from '@/lib/schemas/measured-range';
 import type { Pool } from '@/lib/schemas/pool';
-import { type LearnableParameter, learnableParameters } from '@/lib/schemas/posterior';
+import { learnableParameters } from '@/lib/schemas/posterior';
 import type { Reading } from '@/lib/schemas/reading';
-import { weekAheadSchema } from '@/lib/schemas/week-ahead';
+import { type WeekAhead, weekAheadSchema } from '@/lib/schemas/week-ahead';
 import { aPool } from '../projection/pools';
 
 export const HOUR = 3_600_000;
@@ -170,5 +170,10 @@ function forcingOf(
   return prepareForcing(pool, at, weekAheadSchema.parse({ sky, swimmerHours, rain }), temperature);
 }
 
-/** The names of what a pool can teach, for tests that go through all. */
-export const taught: readonly LearnableParameter[] = learnableParameters;
+/** What the days after a reading brought, as the household wrote it down. */
+export function weekAfter({ pool, history }: SimulatedPool, reading: number): WeekAhead {
+  const first = dayOf(firstReading + reading * WEEK, pool.timeZone);
+  const each = (name: keyof DayConditions) =>
+    Array.from({ length: 8 }, (_, index) => history.days[addDays(first, index)]![name]!);
+  return weekAheadSchema.parse({ sky: each('sky'), swimmerHours: each('swimmerHours'), rain: each('rain') });
+}
