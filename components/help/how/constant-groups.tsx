@@ -1,24 +1,34 @@
+import { ChevronDown } from 'lucide-react';
 import { useLocale, useTranslations } from 'next-intl';
 import type { ListedConstant, ListedGroup } from '@/lib/client/worked-out/constants';
 import { formatNumber } from '@/lib/units/format';
 import { fewestDecimals } from './fewest-decimals';
+import { Typeset } from './typeset';
 
-/** Groups of constants, each figure with its source. */
-export function ConstantGroups({ groups }: { groups: readonly ListedGroup[] }) {
+const MANY = 4;
+
+/** Groups of constants, each figure with its source. `folded` closes the long ones; they open without any script. */
+export function ConstantGroups({ groups, folded = false }: { groups: readonly ListedGroup[]; folded?: boolean }) {
   const t = useTranslations('how-constants');
   return (
     <div>
       {groups.map((group) => (
-        <section key={group.id} aria-labelledby={group.id} className="border-t border-rule-2 py-3.5">
-          <h3 id={group.id} className="font-display text-name">
-            {t(`group.${group.id}`)}
-          </h3>
-          <ul className="mt-1">
+        <details
+          key={group.id}
+          id={group.id}
+          open={!folded || group.constants.length <= MANY}
+          className="group border-t border-rule-2"
+        >
+          <summary className="flex min-h-13 cursor-pointer list-none items-center justify-between gap-3 [&::-webkit-details-marker]:hidden">
+            <h3 className="font-display text-name">{t(`group.${group.id}`)}</h3>
+            <ChevronDown aria-hidden="true" className="size-5 shrink-0 text-ink-3 group-open:rotate-180" />
+          </summary>
+          <ul className="pb-2">
             {group.constants.map((constant) => (
               <ConstantRow key={constant.of} constant={constant} group={group} />
             ))}
           </ul>
-        </section>
+        </details>
       ))}
     </div>
   );
@@ -37,7 +47,9 @@ function ConstantRow({ constant, group }: { constant: ListedConstant; group: Lis
       <span>
         {t(`name.${constant.name}`)}
         {constant.formula === undefined ? null : (
-          <span className="block font-display text-small text-ink-2">{constant.formula}</span>
+          <span className="block text-small text-ink-2">
+            <Typeset notation={constant.formula} />
+          </span>
         )}
       </span>
       <span className="font-emphasis">{t(`unit.${constant.unit}`, { value })}</span>

@@ -1,8 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import type { Axis, Curve, Mark, Point } from '@/lib/client/worked-out/examples/curve';
-import { shareOf, pathOf } from './curve-path';
+import type { Axis, Curve, Level, Mark, Point } from '@/lib/client/worked-out/examples/curve';
+import { pathOf, percentOf, shareOf } from './curve-path';
+import { clearPlace } from './clear-place';
 import { LineWords } from './line-words';
 import { useWritten } from './use-written';
 
@@ -49,7 +50,7 @@ export function DrawnCurve({ curve }: { curve: Curve }) {
           ))}
         </svg>
         {curve.levels?.map((level) => (
-          <LevelLine key={level.name} level={level} up={up} />
+          <LevelLine key={level.name} level={level} curve={curve} />
         ))}
         <UpTicks up={up} />
         <LineWords curve={curve} />
@@ -63,19 +64,23 @@ function areaOf(low: readonly Point[], high: readonly Point[], across: Axis, up:
   return `${pathOf(high, across, up)}L${pathOf([...low].reverse(), across, up).slice(1)}Z`;
 }
 
-function LevelLine({ level, up }: { level: NonNullable<Curve['levels']>[number]; up: Axis }) {
+function LevelLine({ level, curve }: { level: Level; curve: Curve }) {
+  const { up } = curve;
   const t = useTranslations('how-examples');
   const written = useWritten();
   const above = level.forbidden !== 'below';
   return (
     <div
       className="absolute inset-x-0 border-t-[1.25px] border-ink"
-      style={{ top: `${100 * (1 - shareOf(level.at, up))}%` }}
+      style={{ top: percentOf(1 - shareOf(level.at, up)) }}
     >
       {level.forbidden === undefined ? null : (
         <span className={`absolute inset-x-0 h-1.5 bg-hatch-ink ${above ? 'bottom-px' : 'top-0'}`} />
       )}
-      <span className={`absolute left-2 bg-paper px-1 text-chart text-ink-2 ${above ? 'bottom-2' : 'top-2'}`}>
+      <span
+        className={`absolute px-2 text-chart whitespace-nowrap text-ink-2 ${above ? 'bottom-2' : 'top-2'}`}
+        style={{ left: percentOf(clearPlace(curve, level)) }}
+      >
         {t(`figure.${level.name}`)} {written(level.at, { ...up, decimals: Number.isInteger(level.at) ? 0 : 1 })}
       </span>
     </div>
@@ -88,7 +93,7 @@ function UpTicks({ up }: { up: Axis }) {
     <span
       key={tick}
       className="absolute -left-2 -translate-x-full -translate-y-1/2 text-figure whitespace-nowrap text-ink-2"
-      style={{ top: `${100 * (1 - shareOf(tick, up))}%` }}
+      style={{ top: percentOf(1 - shareOf(tick, up)) }}
     >
       {written(
         tick,
@@ -105,8 +110,8 @@ function AcrossTicks({ across }: { across: Axis }) {
       {across.ticks.map((tick, index) => (
         <span
           key={tick}
-          className="absolute top-1.5 -translate-x-1/2 text-figure whitespace-nowrap text-ink-2"
-          style={{ left: `${100 * shareOf(tick, across)}%` }}
+          className={`absolute top-1.5 text-figure whitespace-nowrap text-ink-2 ${index === across.ticks.length - 1 ? '-translate-x-full' : '-translate-x-1/2'}`}
+          style={{ left: percentOf(shareOf(tick, across)) }}
         >
           {written(
             tick,

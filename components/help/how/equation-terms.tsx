@@ -6,15 +6,18 @@ import { Typeset } from './typeset';
 export function EquationTerms({ equation, name }: { equation: Equation; name: string }) {
   const t = useTranslations('how');
   return (
-    <section aria-label={name} className="border-b border-rule-2 md:grid md:grid-cols-[110px_minmax(0,1fr)]">
-      <div className="hidden md:grid md:grid-rows-[1fr_auto]">
+    <section
+      aria-label={name}
+      className="border-b border-rule-2 md:grid md:grid-cols-[110px_minmax(0,1fr)] md:grid-rows-[1fr_auto]"
+    >
+      <div className="hidden md:row-span-2 md:grid md:grid-rows-subgrid">
         <p className="py-3">
           <b className="block font-display text-name">{t('inWords')}</b>
           <span className="text-small text-ink-2">{t('readAcross')}</span>
         </p>
         <p className="border-t border-rule py-3 font-display text-name">{t('inSymbols')}</p>
       </div>
-      <ol className="py-1 md:grid md:auto-cols-fr md:grid-flow-col md:grid-rows-[1fr_auto] md:py-0">
+      <ol className="py-1 md:row-span-2 md:grid md:auto-cols-auto md:grid-flow-col md:grid-rows-subgrid md:py-0">
         {equation.terms.map(({ sign, word, symbol }, index) => (
           <li
             key={index}

@@ -113,7 +113,7 @@ export const equations: Readonly<Record<HowPage, Equation>> = {
     terms: [
       { word: 'oneOfMany', symbol: '*x*{_i}' },
       { sign: '=', word: 'middle', symbol: '*x*' },
-      { sign: '×', word: 'nudge', symbol: 'e{^*σ* *z*{_i}}' },
+      { sign: '×', word: 'nudge', symbol: 'e{^*σz*}' },
     ],
     further: [`*i* = 1, 2, … ${n.pools}`],
   },

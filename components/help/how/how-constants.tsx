@@ -1,5 +1,6 @@
 import { useTranslations } from 'next-intl';
 import { constantGroups } from '@/lib/client/worked-out/constants';
+import { CareNote } from './care-note';
 import { ConstantGroups } from './constant-groups';
 import { HowFrame } from './how-frame';
 
@@ -8,6 +9,7 @@ export function HowConstants() {
   const t = useTranslations('how');
   return (
     <HowFrame current="constants" headline={t('sources.title')} lead={t('sources.lead')}>
+      <CareNote />
       <p className="max-w-reading py-3.5 text-body">{t('sources.marks')}</p>
       <ConstantGroups groups={constantGroups} />
     </HowFrame>

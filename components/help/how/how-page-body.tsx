@@ -4,6 +4,7 @@ import { constantGroups } from '@/lib/client/worked-out/constants';
 import { examples } from '@/lib/client/worked-out/examples/all-examples';
 import type { HowPage } from '@/lib/client/worked-out/how-page';
 import { textLink } from '@/components/ui/text-link';
+import { CareNote } from './care-note';
 import { ConstantGroups } from './constant-groups';
 import { EquationTerms } from './equation-terms';
 import { equations } from './equations';
@@ -30,10 +31,11 @@ export function HowPageBody({ page }: { page: HowPage }) {
             {t('constants')}
           </h2>
           <p className="mb-2 text-small text-ink-2">{t('constantsLead')}</p>
-          <ConstantGroups groups={groups} />
+          <ConstantGroups groups={groups} folded />
         </section>
       )}
-      <p className="mt-4 flex flex-wrap gap-x-6 border-t border-rule-2 pt-2 text-body">
+      <CareNote />
+      <p className="mt-2 flex flex-wrap gap-x-6 text-body">
         <Link href="/help/how/constants" className={`${textLink} inline-flex min-h-11 items-center`}>
           {t('allConstants')}
         </Link>

@@ -29,9 +29,14 @@ export function LiveExample({ page }: { page: HowPage }) {
         <h2 id="example" className="font-display text-section">
           {t('title')}
         </h2>
-        <p className="text-small text-ink-2">
+        <p className="flex-1 text-small text-ink-2">
           {t('lead')} <b className="font-strong">{t('notADose')}</b>
         </p>
+        {moved ? (
+          <Button variant="quiet" size="small" onClick={() => setValues(start)}>
+            {t('putBack')}
+          </Button>
+        ) : null}
       </div>
       <noscript>
         <p className="mt-1 text-small text-ink-2">{t('still')}</p>
@@ -60,13 +65,6 @@ export function LiveExample({ page }: { page: HowPage }) {
       </div>
       <ExampleFigures worked={worked} />
       {worked.curve === undefined ? null : <ExamplePicture page={page} curve={worked.curve} />}
-      <p className="min-h-11">
-        {moved ? (
-          <Button variant="quiet" size="small" className="-ml-1.5" onClick={() => setValues(start)}>
-            {t('putBack')}
-          </Button>
-        ) : null}
-      </p>
     </section>
   );
 }

@@ -2,10 +2,8 @@
 
 import { useTranslations } from 'next-intl';
 import { useId } from 'react';
-import type { Axis, Taken } from '@/lib/client/worked-out/examples/curve';
-import { shareOf } from './curve-path';
-
-const HIGHEST = 0.6;
+import { type Axis, roundHeight, type Taken } from '@/lib/client/worked-out/examples/curve';
+import { percentOf, shareOf } from './curve-path';
 
 /** What took chlorine in each hour, hung from a line: waves for the water, strokes for the sun, solid for swimmers. */
 export function TakenBars({ across, taken }: { across: Axis; taken: Taken }) {
@@ -14,7 +12,8 @@ export function TakenBars({ across, taken }: { across: Axis; taken: Taken }) {
   const fills = [`url(#${id}water)`, `url(#${id}sun)`, 'currentColor'];
   const strokes = ['stroke-teal', 'stroke-ink', 'stroke-ink'];
   const names = taken[0]?.parts.map(({ name }) => name) ?? [];
-  const width = (100 * 0.7) / taken.length;
+  const tallest = Math.max(...taken.map(({ parts }) => parts.reduce((sum, { value }) => sum + value, 0)));
+  const highest = roundHeight(tallest, [0.2, 0.4, 0.8, 1.6, 3.2]);
   return (
     <div className="ml-12 md:ml-14" aria-hidden="true">
       <p className="flex flex-wrap items-center gap-x-5 gap-y-0.5 border-b border-rule-2 pt-1 pb-1.5 text-chart">
@@ -45,10 +44,10 @@ export function TakenBars({ across, taken }: { across: Axis; taken: Taken }) {
             return value < 0.004 ? null : (
               <rect
                 key={`${at}${name}`}
-                x={`${100 * shareOf(at, across) + (100 * 0.15) / taken.length}%`}
-                width={`${width}%`}
-                y={`${(100 * from) / HIGHEST}%`}
-                height={`${(100 * value) / HIGHEST}%`}
+                x={percentOf(shareOf(at, across) + 0.15 / taken.length)}
+                width={percentOf(0.7 / taken.length)}
+                y={percentOf(from / highest)}
+                height={percentOf(value / highest)}
                 fill={fills[index]}
                 className={strokes[index]}
                 strokeWidth="1"

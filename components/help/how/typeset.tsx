@@ -15,7 +15,17 @@ export function Typeset({ notation }: { notation: string }) {
 
 function Part({ part }: { part: string }) {
   if (part.startsWith('*')) return <i>{part.slice(1, -1)}</i>;
-  if (part.startsWith('{_')) return <sub className="text-[0.72em] leading-none">{part.slice(2, -1)}</sub>;
-  if (part.startsWith('{^')) return <sup className="text-[0.72em] leading-none">{part.slice(2, -1)}</sup>;
+  if (part.startsWith('{_'))
+    return (
+      <sub className="text-[0.72em] leading-none">
+        <Typeset notation={part.slice(2, -1)} />
+      </sub>
+    );
+  if (part.startsWith('{^'))
+    return (
+      <sup className="text-[0.72em] leading-none">
+        <Typeset notation={part.slice(2, -1)} />
+      </sup>
+    );
   return part;
 }

@@ -44,7 +44,7 @@ export const productConstants = [
       unit: 'gPerMillilitre',
       of: 'chemistry/substances#hydrochloricAcidDensity',
       at: [SUBSTANCES['hydrochloric-acid'].defaultStrength],
-      formula: 'ρ = 1 + 0.00509 · strength',
+      formula: '*ρ* = 1 + 0.00509 · strength',
     },
     {
       name: 'liquidDensity',
@@ -82,7 +82,7 @@ export const productConstants = [
       unit: 'none',
       of: 'chemistry/hypochlorite-decay#hypochloriteDecayRate',
       at: [25, 4],
-      formula: 'k = 10^(0.149 I) · 2.083e10 T e^(−1.018e5/RT) e^(−56.5/R)',
+      formula: 'k = 10{^0.149 *I*} · 2.083 · 10{^10} *T* e{^−101800/(*R* *T*)} e{^−56.5/*R*}',
     },
     {
       name: 'gasConstant',

@@ -61,42 +61,42 @@ export const waterConstants = [
       'hypochlorousAcid',
       'published-constants',
       hypochlorousAcidDissociation,
-      'log K = −(3000/T − 10.0686 + 0.0253 T)',
+      'log K = −(3000/*T* − 10.0686 + 0.0253 *T*)',
       'logK',
     ),
   ]),
   group('cyanurate', ['chlorine-forms', 'stabilizer'], 'obrien1974', obrien),
   group('cyanurateLater', ['chlorine-forms'], 'wahman2019', [
-    fit('cyanuricAcidLater', 'cyanurate-constants', cyanuricAcidPK, 'pK = 1743/T + 1.12', 'pK', 'wahman2018'),
-    fit('twoHydrolysisLater', 'cyanurate-constants', dichlorocyanurateHydrolysisPK, 'pK = 2028/T − 2.15', 'pK'),
-    fit('oneHydrolysisLater', 'cyanurate-constants', chlorocyanurateHydrolysisPK, 'pK = 2229/T − 1.65', 'pK'),
+    fit('cyanuricAcidLater', 'cyanurate-constants', cyanuricAcidPK, 'pK = 1743/*T* + 1.12', 'pK', 'wahman2018'),
+    fit('twoHydrolysisLater', 'cyanurate-constants', dichlorocyanurateHydrolysisPK, 'pK = 2028/*T* − 2.15', 'pK'),
+    fit('oneHydrolysisLater', 'cyanurate-constants', chlorocyanurateHydrolysisPK, 'pK = 2229/*T* − 1.65', 'pK'),
   ]),
   group('carbonate', ['ph', 'alkalinity', 'calcium'], 'plummer1982', [
     carbonate(
       'carbonDioxideGas',
       carbonDioxideSolubility,
-      'log K = 108.3865 + 0.01985076 T − 6919.53/T − 40.45154 log T + 669365/T²',
+      'log K = 108.3865 + 0.01985076 *T* − 6919.53/*T* − 40.45154 log *T* + 669365/*T*²',
     ),
     carbonate(
       'carbonicAcidFirst',
       carbonicAcidFirstDissociation,
-      'log K = −356.3094 − 0.06091964 T + 21834.37/T + 126.8339 log T − 1684915/T²',
+      'log K = −356.3094 − 0.06091964 *T* + 21834.37/*T* + 126.8339 log *T* − 1684915/*T*²',
     ),
     carbonate(
       'carbonicAcidSecond',
       carbonicAcidSecondDissociation,
-      'log K = −107.8871 − 0.03252849 T + 5151.79/T + 38.92561 log T − 563713.9/T²',
+      'log K = −107.8871 − 0.03252849 *T* + 5151.79/*T* + 38.92561 log *T* − 563713.9/*T*²',
     ),
-    carbonate('calcite', calciteSolubility, 'log K = −171.9065 − 0.077993 T + 2839.319/T + 71.595 log T'),
+    carbonate('calcite', calciteSolubility, 'log K = −171.9065 − 0.077993 *T* + 2839.319/*T* + 71.595 log *T*'),
     carbonate(
       'calciumBicarbonate',
       calciumBicarbonatePairing,
-      'log K = 1209.12 + 0.31294 T − 34765.05/T − 478.782 log T',
+      'log K = 1209.12 + 0.31294 *T* − 34765.05/*T* − 478.782 log *T*',
     ),
     carbonate(
       'calciumCarbonatePair',
       calciumCarbonatePairing,
-      'log K = −1228.732 − 0.299444 T + 35512.75/T + 485.818 log T',
+      'log K = −1228.732 − 0.299444 *T* + 35512.75/*T* + 485.818 log *T*',
     ),
   ]),
   group('waterAndBorate', ['ph', 'alkalinity'], 'phreeqc', [
@@ -104,14 +104,14 @@ export const waterConstants = [
       'water',
       'published-constants',
       waterDissociation,
-      'log K = 293.29227 + 0.1360833 T − 10576.913/T − 123.73158 log T − 6.996455e-5 T²',
+      'log K = 293.29227 + 0.1360833 *T* − 10576.913/*T* − 123.73158 log *T* − 6.996455 · 10{^−5} *T*²',
       'logK',
     ),
     fit(
       'boricAcid',
       'published-constants',
       boricAcidDissociation,
-      'log K = −9.24 − 3.224 · 4184 / (8.31446 ln 10) · (1/T − 1/298.15)',
+      'log K = −9.24 − 3.224 · 4184 / (8.31446 ln 10) · (1/*T* − 1/298.15)',
       'logK',
     ),
     {
@@ -129,7 +129,7 @@ export const waterConstants = [
       unit: 'molesPerLitre',
       of: 'chemistry/activity#ionicStrengthOf',
       at: [DEFAULT_DISSOLVED_SOLIDS],
-      formula: 'I = 1.6e-5 · dissolved solids',
+      formula: '*I* = 1.6 · 10{^−5} · dissolved solids',
       source: 'ionic',
     },
     {
@@ -145,7 +145,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/activity#debyeHuckelCoefficient',
       at: [celsius],
-      formula: 'A = 1.82e6 (ε T)^−1.5, log γ = −A z² (√I / (1 + √I) − 0.3 I)',
+      formula: '*A* = 1.82 · 10{^6} (*ε* *T*){^−1.5}, log *γ* = −*A* z² (√*I* / (1 + √*I*) − 0.3 *I*)',
       source: 'stumm',
     },
     {
@@ -154,7 +154,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/activity#dielectricConstant',
       at: [celsius],
-      formula: 'ε = 87.74 − 0.40008 t + 9.398e-4 t² − 1.41e-6 t³',
+      formula: '*ε* = 87.74 − 0.40008 *t* + 9.398 · 10{^−4} *t*² − 1.41 · 10{^−6} *t*³',
       source: 'malmberg1956',
     },
     {
@@ -163,7 +163,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/activity#waterActivity',
       at: [ionicStrengthOf(DEFAULT_DISSOLVED_SOLIDS)],
-      formula: 'a = 1 − 0.034 I',
+      formula: '*a* = 1 − 0.034 *I*',
       source: 'phreeqc',
     },
     {
@@ -181,7 +181,7 @@ export const waterConstants = [
       unit: 'pH',
       of: 'chemistry/saturation#saturationPH',
       at: [1000, celsius, 300, 100],
-      formula: 'pHs = 9.3 + (log TDS − 1)/10 − 13.12 log(t + 273) + 34.55 − C − D',
+      formula: 'pHs = 9.3 + (log TDS − 1)/10 − 13.12 log(*t* + 273) + 34.55 − *C* − *D*',
     },
     {
       name: 'calciumFactor',
@@ -189,7 +189,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/saturation#calciumFactor',
       at: [300],
-      formula: 'C = log hardness − 0.4',
+      formula: '*C* = log hardness − 0.4',
     },
     {
       name: 'alkalinityFactor',
@@ -197,7 +197,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/saturation#alkalinityFactor',
       at: [100],
-      formula: 'D = log alkalinity',
+      formula: '*D* = log alkalinity',
     },
   ]),
   group(

@@ -36,8 +36,8 @@ export const combinedChlorineExample: Example<'combinedChlorine'> = {
         across: { low: 0, high: DAYS, unit: 'days', decimals: 0, ticks: ticksOf(0, DAYS, 1) },
         up: { low: 0, high: 3.5, unit: 'mg/L', decimals: 0, ticks: ticksOf(0, 3, 1) },
         lines: [
-          { name: 'combinedOpen', mark: 'chlorine', points: open },
-          { name: 'combinedCovered', mark: 'before', points: covered },
+          { name: 'inTheOpen', mark: 'chlorine', points: open },
+          { name: 'underCover', mark: 'before', points: covered },
         ],
         levels: [{ name: 'combinedAct', at: limits.combinedChlorineAct.value, forbidden: 'above' }],
       },

@@ -117,6 +117,8 @@ export type FigureName =
   | 'carriedOut'
   | 'combinedOpen'
   | 'combinedCovered'
+  | 'inTheOpen'
+  | 'underCover'
   | 'combinedAct'
   | 'halfRule'
   | 'tenTimesRule'
