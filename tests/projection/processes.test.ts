@@ -1,11 +1,20 @@
 import { describe, expect, it } from 'vitest';
-import { aerateToEquilibrium, chlorineSpecies, type WaterAnalysis } from '@/lib/chemistry';
+import {
+  aerateToEquilibrium,
+  carbonDioxideExcess,
+  chlorineSpecies,
+  ledgerOf,
+  type WaterAnalysis,
+} from '@/lib/chemistry';
 import { wallClock } from '@/lib/calendar/wall-time';
-import { type ProjectedDose, projectWeek, type TabletLoad } from '@/lib/projection';
+import { type ProjectedDose, projectWeek, settingOf, type TabletLoad } from '@/lib/projection';
+import { prepareForcing } from '@/lib/projection/forcing';
+import { integrateWeek } from '@/lib/projection/integrate';
 import { massLeft } from '@/lib/projection/tablets';
 import type { ParameterOverrides } from '@/lib/schemas/scenario';
 import type { WeekAhead } from '@/lib/schemas/week-ahead';
-import { aPool, everyDay, someWater, still, takenAt } from './pools';
+import { solarElevation } from '@/lib/sun/elevation';
+import { aPool, aWeek, everyDay, someWater, still, takenAt } from './pools';
 
 type Case = {
   pool?: Record<string, unknown>;
@@ -189,6 +198,59 @@ describe('carbon dioxide', () => {
   });
 });
 
+describe('the speed of carbon dioxide', () => {
+  it.each([
+    ['still water', {}, 0.009],
+    ['water features', { waterFeatures: true }, 0.025],
+  ])('through the surface of %s is k_g / d times what is too much', (_, pool, transfer) => {
+    const water = someWater({ combinedChlorine: 0, freeChlorine: 0 });
+    const after = inStillWater({ water, pool, parameters: { carbonDioxideTransfer: undefined, darkDemand: 0 } })
+      .water[1]!;
+    const [before, later] = [ledgerOf(water), ledgerOf(after)];
+    const excess = (carbonDioxideExcess(before, water.pH) + carbonDioxideExcess(later, after.pH)) / 2;
+    expect(before.inorganicCarbon - later.inorganicCarbon).toBeGreaterThan(0);
+    expect((before.inorganicCarbon - later.inorganicCarbon) / ((transfer / 1.5) * excess)).toBeCloseTo(1, 3);
+  });
+});
+
+describe('parameters', () => {
+  const dose: ProjectedDose = {
+    at: '2026-07-06T20:00:00-04:00',
+    substance: 'calcium-hypochlorite',
+    amount: 200,
+    strength: 65,
+  };
+
+  it('volume: what a dose adds is spread over the water there is', () => {
+    const rise = (volume: number) =>
+      inStillWater({ doses: [dose], parameters: { volume } }).water.at(-1)!.freeChlorine - 3;
+    expect(rise(60)).toBeCloseTo((200 * 0.65) / 60, 9);
+    expect(rise(60) / rise(90)).toBeCloseTo(1.5, 9);
+  });
+
+  const busy: Case = {
+    week: { swimmerHours: everyDay(10) },
+    loads: [tablet],
+    doses: [dose],
+    pool: { feeder: { kind: 'inline', ingredient: 'trichlor', capacity: 3 } },
+  };
+  it.each<[keyof ParameterOverrides, number]>([
+    ['boundPhotolysis', 0.006],
+    ['sunStrength', 1],
+    ['darkDemand', 0.1 / 24],
+    ['chlorinePerSwimmerHour', 2.5],
+    ['tabletLife', 48],
+    ['waterPerSwimmerHour', 8],
+    ['leak', 0],
+    ['carbonDioxideTransfer', 0.009],
+    ['volume', 75.7],
+  ])('%s: %d where nothing better is known, and it matters', (name, usual) => {
+    const end = (parameters: ParameterOverrides) => project({ ...busy, parameters }).water.at(-1)!;
+    expect(end({ [name]: usual })).toEqual(end({}));
+    expect(end({ [name]: usual === 0 ? 0.5 : 1.3 * usual })).not.toEqual(end({}));
+  });
+});
+
 describe('slow tablets', () => {
   const pump = [{ from: '08:00', to: '16:00' }];
 
@@ -293,6 +355,55 @@ describe('doses', () => {
 });
 
 describe('sun', () => {
+  const elevationSine = (instant: number) => Math.sin((solarElevation(instant, 28, -81.5) * Math.PI) / 180);
+
+  it.each([
+    ['none', 1],
+    ['floating', 0.3],
+    ['opaque', 0],
+  ])('under a cover (%s) is sky, exposure, cover and (sin e / sin 66.4 deg)^2.42', (cover, share) => {
+    const sky = [0.9, 0.2, 1, 0.5, 0.7, 0, 1];
+    const pool = aPool({ cover, sunExposure: 0.6, swimHours: { from: '12:00', to: '14:00' } });
+    const startsAt = Date.parse('2026-07-05T00:00:00-04:00');
+    const { sun } = prepareForcing(pool, startsAt, aWeek({ sky }), 27);
+    sun.forEach((found, hour) => {
+      const quarters = [7.5, 22.5, 37.5, 52.5].map((minute) =>
+        elevationSine(startsAt + hour * 3_600_000 + minute * 60_000),
+      );
+      const clear = quarters.map((sine) => (Math.max(0, sine) / Math.sin((66.4 * Math.PI) / 180)) ** 2.42);
+      const mean = clear.reduce((sum, each) => sum + each, 0) / 4;
+      const through = hour % 24 === 12 || hour % 24 === 13 ? 1 : share;
+      expect(Math.abs(found - 0.6 * sky[Math.floor(hour / 24)]! * through * mean)).toBeLessThan(0.001);
+    });
+  });
+
+  it('at its reference takes first-order shares of HOCl, OCl- and bound chlorine', () => {
+    const pool = aPool({ ...still.pool, meanDepth: 2 });
+    const light = (1 - Math.exp(-0.15 * 2)) / (0.15 * 2);
+    const HOURS = 1 / 50;
+    for (const cyanuricAcid of [0, 30, 90]) {
+      const water = someWater({ combinedChlorine: 0, cyanuricAcid });
+      const forcing = prepareForcing(pool, Date.parse(takenAt), aWeek(still.week), water.temperature, {
+        hours: HOURS,
+        stepsPerHour: 1 / HOURS,
+      });
+      forcing.sun.fill(1);
+      forcing.sunParts.fill(1);
+      const setting = settingOf(pool, water.temperature, {
+        ...still.parameters,
+        sunStrength: 0.25,
+        boundPhotolysis: 0.02,
+      });
+      const { end, endPH } = integrateWeek(forcing, { ledger: ledgerOf(water), loads: [] }, [], setting);
+      const perHour = ({ freeChlorine, pH }: { freeChlorine: number; pH: number }) => {
+        const { hypochlorousAcid, hypochlorite, cyanurateBound } = chlorineSpecies({ ...water, freeChlorine, pH });
+        return (0.25 * light * (0.72 * hypochlorousAcid + 4.32 * hypochlorite + 0.02 * cyanurateBound)) / freeChlorine;
+      };
+      const mean = (perHour(water) + perHour({ freeChlorine: end.freeChlorine, pH: endPH })) / 2;
+      expect(Math.log(water.freeChlorine / end.freeChlorine) / (mean * HOURS)).toBeCloseTo(1, 5);
+    }
+  });
+
   it('acts on each form by its own rate, through the depth', () => {
     const water = someWater({ combinedChlorine: 0 });
     const at = '2026-07-05T13:00:00-04:00';
