@@ -64,7 +64,7 @@ function update(
   for (let row = 0; row < mean.length; row++) {
     mean[row]! += share * along[row]! * surprise;
     for (let column = 0; column < mean.length; column++)
-      covariance[row]![column]! -= share * along[row]! * along[column]!;
+      covariance[row]![column]! -= share * (along[row]! * along[column]!);
   }
 }
 

@@ -6,6 +6,7 @@ import type { Reading } from '@/lib/schemas/reading';
 import { type FilterState, jointOrder, type Posterior, uncertainQuantities } from '@/lib/schemas/posterior';
 import { loadsAtLife } from './feeder';
 import { errorOf } from './measurement';
+import { possibleWater } from './possible-water';
 import { forEveryParameter, held, parametersAt, placeOf, waterAt } from './state';
 
 /** A learnt volume is used within this share of the entered one; beyond, the pool is to be measured again (care rules). */
@@ -19,7 +20,7 @@ export const VOLUME_REACH = 0.15;
  */
 export function posteriorOf(state: FilterState, reading: Reading, usual: Parameters): Posterior {
   const scale = jointOrder.map((name) => (isQuantity(name) ? 1 : priorSigma[name]));
-  const covariance = state.covariance.map((row, at) => row.map((value, other) => value * scale[at]! * scale[other]!));
+  const covariance = state.covariance.map((row, at) => row.map((value, other) => value * (scale[at]! * scale[other]!)));
   const parameters = parametersAt(state.mean, usual);
   const water = waterAt(state.mean, state);
   const questioned = uncertainQuantities.filter(
@@ -40,7 +41,7 @@ export function posteriorOf(state: FilterState, reading: Reading, usual: Paramet
     sigmas: forEveryParameter((name) => Math.sqrt(covariance[placeOf[name]]![placeOf[name]]!)),
     covariance,
     volumeBeyondReach: heldVolume(parameters.volume, usual.volume) !== parameters.volume,
-    water,
+    water: possibleWater(water),
     questioned,
     loads: loadsAtLife(state.loads, parameters.tabletLife).filter(({ erodedShare }) => erodedShare < 1),
     readingsThatCounted: { ...state.readingsThatCounted },

@@ -1,4 +1,4 @@
-import { type Ledger, ledgerOf, type WaterAnalysis } from '@/lib/chemistry';
+import { ledgerOf, type WaterAnalysis } from '@/lib/chemistry';
 import { WaterRangeError } from '@/lib/errors';
 import { analysisAt } from '@/lib/projection';
 import type { WeekDose } from '@/lib/projection/events';
@@ -7,6 +7,7 @@ import { type Course, type CourseSetting, integrateWeek } from '@/lib/projection
 import { measuredRange } from '@/lib/schemas/measured-range';
 import { type FilterState, uncertainQuantities } from '@/lib/schemas/posterior';
 import { drift } from './drift';
+import { possibleWater } from './possible-water';
 import { feederAt, loadsAtLife } from './feeder';
 import { held, parametersAt, placeOf, waterAt } from './state';
 import { momentsOf, sigmaPoints } from './unscented';
@@ -25,7 +26,7 @@ export function propagate(state: FilterState, { forcing, doses, setting, to }: G
   const points = sigmaPoints(state.mean, state.covariance);
   const courses = points.map(({ at }) => {
     const parameters = parametersAt(at, setting.parameters);
-    const ledger = ledgerNear(waterAt(at, state));
+    const ledger = ledgerOf(possibleWater(waterAt(at, state)));
     const loads = loadsAtLife(state.loads, parameters.tabletLife);
     const course = integrateWeek(forcing, { ledger, loads }, inside, { ...setting, parameters });
     const water = endOf(course);
@@ -57,17 +58,4 @@ function endOf({ end, endPH }: Course): WaterAnalysis {
     if (!Number.isFinite(water[quantity]))
       throw new WaterRangeError(quantity, water[quantity], measuredRange[quantity][0], measuredRange[quantity][1]);
   return water;
-}
-
-/** Alkalinity beyond the least that a pH needs [mg/L as CaCO3]. */
-const A_TRACE = 0.01;
-
-/** The ledger of a water; where its alkalinity cannot carry its pH, with as much as it needs. */
-export function ledgerNear(water: WaterAnalysis): Ledger {
-  try {
-    return ledgerOf(water);
-  } catch (error) {
-    if (!(error instanceof WaterRangeError) || error.field !== 'totalAlkalinity') throw error;
-    return ledgerOf({ ...water, totalAlkalinity: error.low + A_TRACE });
-  }
 }

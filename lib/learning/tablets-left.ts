@@ -47,7 +47,7 @@ export function learnFromTabletsLeft(
   for (let row = 0; row < mean.length; row++) {
     mean[row]! += (weight * along[row]! * (tablets - expected)) / total;
     for (let column = 0; column < mean.length; column++)
-      covariance[row]![column]! -= (weight * along[row]! * along[column]!) / total;
+      covariance[row]![column]! -= (weight / total) * (along[row]! * along[column]!);
   }
   return {
     kind: weight < QUESTIONED_BELOW ? 'questioned' : 'counted',

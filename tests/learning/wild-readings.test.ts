@@ -1,0 +1,99 @@
+import { describe, expect, it } from 'vitest';
+import { learnFrom } from '@/lib/learning';
+import { learnableParameters, type Posterior, type PosteriorStep } from '@/lib/schemas/posterior';
+import type { Reading } from '@/lib/schemas/reading';
+import { type SimulatedPool, simulatedPool } from './simulated-pools';
+
+const WILD = 7;
+const read = (pool: SimulatedPool, index: number) => pool.history.readings[index] as Reading & { freeChlorine: number };
+
+/** Pools whose eighth reading finds chlorine enough that four times as much, or none, is out of the question. */
+const pools = Array.from({ length: 60 }, (_, seed) => simulatedPool(4000 + seed, 10))
+  .filter((pool) => read(pool, WILD).freeChlorine > 1.8)
+  .slice(0, 8);
+
+/** What is learnt when reading `index` and those after it are changed. */
+function learnt(pool: SimulatedPool, changes: Record<number, (reading: Reading) => Reading>): PosteriorStep[] {
+  const readings = pool.history.readings.map((reading, index) => changes[index]?.(reading) ?? reading);
+  return learnFrom(null, { ...pool.history, readings });
+}
+
+/** How far the medians lie apart, in sigmas. */
+function distance(a: Posterior, b: Posterior): number {
+  return Math.max(
+    ...learnableParameters.map((name) => Math.abs(Math.log(a.medians[name] / b.medians[name])) / b.sigmas[name]),
+  );
+}
+
+const withoutChlorine = ({ freeChlorine: _, ...rest }: Reading): Reading => rest;
+const noteOf = (step: PosteriorStep, quantity = 'freeChlorine') =>
+  step.log.find((note) => 'quantity' in note && note.quantity === quantity);
+
+describe('one wild reading', () => {
+  it.each([
+    [
+      'four times what it was',
+      (reading: Reading) => ({ ...reading, freeChlorine: 4 * (reading.freeChlorine as number) }),
+    ],
+    ['nothing at all', (reading: Reading) => ({ ...reading, freeChlorine: 0 })],
+  ])('of %s is questioned, written down, and moves what was learnt little', (_, wild) => {
+    expect(pools).toHaveLength(8);
+    for (const pool of pools) {
+      const step = learnt(pool, { [WILD]: wild })[WILD]!;
+      const without = learnt(pool, { [WILD]: withoutChlorine })[WILD]!;
+      const note = noteOf(step);
+      expect(note).toMatchObject({ kind: 'questioned' });
+      if (note?.kind !== 'questioned') continue;
+      expect(note.weight).toBeLessThan(0.8);
+      expect(note.expected.p10).toBeLessThan(read(pool, WILD).freeChlorine + 1);
+      expect(distance(step.posterior, without.posterior)).toBeLessThan(0.6);
+      expect(step.posterior.questioned).toContain('freeChlorine');
+    }
+  });
+
+  it('does not spoil what comes after: the next reading counts in full', () => {
+    for (const pool of pools) {
+      const steps = learnt(pool, {
+        [WILD]: (reading) => ({ ...reading, freeChlorine: 4 * (reading.freeChlorine as number) }),
+      });
+      const untouched = learnt(pool, {});
+      expect(steps[WILD + 1]!.posterior.questioned).toEqual([]);
+      expect(distance(steps[WILD + 1]!.posterior, untouched[WILD + 1]!.posterior)).toBeLessThan(1);
+    }
+  });
+
+  it('stands on the sheet as it was read, as sure as the test is', () => {
+    const pool = pools[0]!;
+    const { posterior, state } = learnt(pool, { [WILD]: (reading) => ({ ...reading, freeChlorine: 14 }) })[WILD]!;
+    expect(posterior.water.freeChlorine).toBe(14);
+    expect(Math.sqrt(posterior.covariance[1]![1]!)).toBeCloseTo(1.4, 12);
+    expect(posterior.covariance[1]!.filter((value) => value !== 0)).toHaveLength(1);
+    expect(state.mean[1]!).toBeLessThan(8);
+  });
+});
+
+describe('a change that is real', () => {
+  it('of the stabilizer is questioned once and believed by the second reading', () => {
+    for (const pool of pools) {
+      const more = (reading: Reading) => ({ ...reading, cyanuricAcid: (reading.cyanuricAcid as number) + 120 });
+      const steps = learnt(pool, { 7: more, 8: more, 9: more });
+      expect(noteOf(steps[7]!, 'cyanuricAcid')).toMatchObject({ kind: 'questioned' });
+      expect(noteOf(steps[8]!, 'cyanuricAcid')).toMatchObject({ kind: 'believed', weight: 1 });
+      expect(noteOf(steps[9]!, 'cyanuricAcid')).toMatchObject({ kind: 'counted' });
+      const read = steps[8]!.posterior.water.cyanuricAcid - (pool.history.readings[8]!.cyanuricAcid as number);
+      expect(Math.abs(read - 120)).toBeLessThan(60);
+    }
+  });
+
+  it('of what the water uses up is learnt, not questioned for ever', () => {
+    for (const pool of pools.slice(0, 4)) {
+      // From the eighth reading on this pool keeps chlorine as if hardly anything used it.
+      const high = (reading: Reading) => ({ ...reading, freeChlorine: 14 });
+      const steps = learnt(pool, { 7: high, 8: high, 9: high });
+      expect(noteOf(steps[7]!)).toMatchObject({ kind: 'questioned' });
+      expect(noteOf(steps[8]!)).toMatchObject({ kind: 'believed' });
+      expect(Math.abs(steps[8]!.posterior.water.freeChlorine - 14)).toBeLessThan(3);
+      expect(steps[9]!.posterior.medians.darkDemand).toBeLessThan(steps[6]!.posterior.medians.darkDemand);
+    }
+  });
+});
