@@ -4,6 +4,7 @@
  */
 export const MOLAR_MASS = {
   chlorine: 70.906,
+  nitrogen: 14.007,
   calciumCarbonate: 100.087,
   cyanuricAcid: 129.074,
   boron: 10.81,

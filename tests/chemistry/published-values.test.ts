@@ -25,6 +25,11 @@ import {
   dichlorocyanurateHydrolysisPK,
   OBRIEN_1974,
 } from '@/lib/chemistry/cyanurate-constants';
+import {
+  breakpointArithmetic,
+  CHLORINE_PER_NITROGEN_AT_BREAKPOINT,
+  CHLORINE_PER_NITROGEN_IN_MONOCHLORAMINE,
+} from '@/lib/chemistry/breakpoint';
 import { hypochloriteHalfLife } from '@/lib/chemistry/hypochlorite-decay';
 import { alkalinityWithoutCarbonate, ledgerWithoutCarbon } from '@/lib/chemistry/ledger';
 import {
@@ -321,6 +326,10 @@ const answers: readonly [pattern: RegExp, answer: (of: Inputs, id: string) => nu
   ],
   [/^UVI-[\d.]+-300$/, (of) => ultravioletIndex(90 - Math.acos(of('cos_zenith')) / radians)],
   [/^UVI-[\d.]+-(Jun|Dec)$/, (of) => ultravioletIndex(noonElevation(of('lat'), of('day')))],
+  [/^BRK-THEORY$/, () => CHLORINE_PER_NITROGEN_AT_BREAKPOINT],
+  [/^BRK-MONO$/, () => CHLORINE_PER_NITROGEN_IN_MONOCHLORAMINE],
+  [/^BRK-CC$/, () => breakpointArithmetic(1).byStoichiometry],
+  [/^BRK-RULE$/, (of) => breakpointArithmetic(of('CC')).byFieldRule],
   [/^SOL-DEC-172$/, (of) => noonElevation(40, of('day')) + 40 - 90],
   [/^SOL-DEC-1$/, (of) => 90 - 40 - noonElevation(-40, of('day'))],
 ];
@@ -351,7 +360,7 @@ const notOurs: readonly [pattern: RegExp, reason: string][] = [
   [/^(UV|DEM|EVAP|DIL)-/, 'lib/projection'],
   [/^VOL-/, 'lib/units'],
   [/^(RNG|FEC|SAFE|FILT)-/, 'lib/standards and lib/situations'],
-  [/^BRK-/, 'help page only; the model has no breakpoint'],
+  [/^BRK-K1-25$/, 'kinetics of drinking water: the model has none'],
   [/^TEST-/, 'errors of reading methods: lib/projection'],
 ];
 
