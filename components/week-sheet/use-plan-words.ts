@@ -1,7 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import type { CautionCode, LimitCode, ReasonCode } from '@/lib/planner/codes';
+import type { CautionCode, CompanionReason, LimitCode, ReasonCode } from '@/lib/planner/codes';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { limits } from '@/lib/standards/limits';
 import type { Quantity } from '@/lib/units/quantity';
@@ -20,7 +20,7 @@ export type Sentence = { code: string; words: string };
 const quantities: Record<string, Quantity> = {
   stabilizer: 'cyanuricAcid',
   upper: 'cyanuricAcid',
-  closesAt: 'cyanuricAcid',
+  target: 'cyanuricAcid',
   lowestLevel: 'freeChlorine',
   freeChlorine: 'freeChlorine',
   rise: 'freeChlorine',
@@ -59,6 +59,10 @@ export function usePlanWords(plan: Plan): { reasons: Sentence[]; cautions: Sente
       combinedAct: units.number(limits.combinedChlorineAct.value),
       index: units.signed(count(fact.index), 1),
       share: units.number(count(fact.share) * 100, 0),
+      days: count(fact.days),
+      change: isMoved(fact.quantity) ? units.number(count(fact.change), decimalsOf[fact.quantity]) : '',
+      fall: units.number(-count(fact.change), decimalsOf.pH),
+      reason: waiting[String(fact.reason)] ?? 'other',
       volume: units.quantity(count(fact.volume), 'volume'),
       tablets: count(fact.tablets),
       evenings: count(fact.evenings),
@@ -96,6 +100,21 @@ const assumable = ['totalAlkalinity', 'calciumHardness', 'cyanuricAcid'] as cons
 function isAssumable(quantity: unknown): quantity is (typeof assumable)[number] {
   return assumable.some((known) => known === quantity);
 }
+
+/** What a dose beside chlorine moves, and to how many decimals it is told. */
+const decimalsOf = { pH: 1, totalAlkalinity: 0, calciumHardness: 0, cyanuricAcid: 0 } as const;
+
+function isMoved(quantity: unknown): quantity is keyof typeof decimalsOf {
+  return typeof quantity === 'string' && quantity in decimalsOf;
+}
+
+/** Keys of a message cannot hold hyphens. */
+const waiting: Record<string, string> = {
+  'lowers-pH': 'lowers',
+  'raises-pH': 'soda',
+  'raises-alkalinity': 'alkalinity',
+  'raises-hardness': 'hardness',
+} satisfies Partial<Record<CompanionReason, string>>;
 
 const forms = ['granular', 'liquid', 'tablet', 'other'] as const;
 

@@ -5,18 +5,25 @@ import type { PlannedDose } from '@/lib/schemas/dose';
 import type { PlanProjection, WeekPlan } from '@/lib/schemas/plan';
 import { codeMinimum, limits } from '@/lib/standards/limits';
 import type { CheckReason } from './codes';
+import type { Companion } from './companions/companion';
 import type { PlanContext } from './context';
 
 type Check = WeekPlan['checks'][number];
 
+/** Whether a quick check, which reads chlorine and pH, shows what a companion did. */
+function quickShows({ planned }: Companion): boolean {
+  return planned.effect?.quantity === 'pH';
+}
+
 /**
- * Tests that the week asks for: a quick check before the first swim hour of a swim day on which the last test would come to
+ * Tests that the week asks for: one when a companion dose shows, a quick check before the first swim hour of a swim day on which the last test would come to
  * be over 48 h old, one on the first morning on which the likely range reaches the code minimum, one on the morning after a
  * halved first dose, and the full test that makes the next plan.
  */
 export function checksOf(
   projection: PlanProjection,
   doses: readonly PlannedDose[],
+  companion: Companion | null,
   context: PlanContext,
   stabilized: boolean,
 ): Check[] {
@@ -30,6 +37,7 @@ export function checksOf(
   const halved = doses.find(({ reason }) => reason === 'first-dose-halved');
 
   let lastTest = start.takenAt;
+  let retested = false;
   for (let index = 0; index < 8; index++) {
     const day = addDays(first, index);
     const at = morning(day);
@@ -39,16 +47,20 @@ export function checksOf(
     const swims = (week.swimmerHours[index] ?? 0) > 0;
     const nextMorning = morning(addDays(day, 1));
     const afterHalved = halved && Date.parse(halved.at) < at && Date.parse(halved.at) >= lastTest;
+    const retest = companion && !retested && at >= companion.retestAt;
     const low = lowFrom !== null && lowFrom < nextMorning && lastTest === start.takenAt;
-    const reason: CheckReason | null = afterHalved
-      ? 'after-halved-dose'
-      : swims && age > limits.verdictReadingAge.value
-        ? 'swim-day-after-two-days'
-        : low
-          ? 'band-reaches-code-minimum'
-          : null;
+    const reason: CheckReason | null = retest
+      ? 'after-companion'
+      : afterHalved
+        ? 'after-halved-dose'
+        : swims && age > limits.verdictReadingAge.value
+          ? 'swim-day-after-two-days'
+          : low
+            ? 'band-reaches-code-minimum'
+            : null;
     if (!reason) continue;
-    checks.push({ at, kind: 'quick', reason });
+    if (retest) retested = true;
+    checks.push({ at, kind: retest && !quickShows(companion) ? 'full' : 'quick', reason });
     lastTest = at;
   }
   checks.push({ at: Math.max(endsAt, now), kind: 'full', reason: 'next-week' });

@@ -1,11 +1,31 @@
 /** Every code a plan can carry; the words for each stand in lib/messages. */
-export const doseReasons = ['slow-supply', 'closes-gap', 'quick-raise', 'first-dose-halved'] as const;
+export const companionReasons = [
+  'raises-alkalinity',
+  'lowers-pH',
+  'raises-pH',
+  'raises-hardness',
+  'raises-stabilizer',
+] as const;
+export type CompanionReason = (typeof companionReasons)[number];
+
+export function isCompanionReason(reason: string): reason is CompanionReason {
+  return companionReasons.some((each) => each === reason);
+}
+
+export const doseReasons = [
+  'slow-supply',
+  'closes-gap',
+  'quick-raise',
+  'first-dose-halved',
+  ...companionReasons,
+] as const;
 export type DoseReason = (typeof doseReasons)[number];
 
 export const checkReasons = [
   'swim-day-after-two-days',
   'band-reaches-code-minimum',
   'after-halved-dose',
+  'after-companion',
   'next-week',
 ] as const;
 export type CheckReason = (typeof checkReasons)[number];
@@ -40,6 +60,8 @@ export const reasonCodes = [
   /** What was compared. */
   'cheaper-than',
   'lowest-level-follows-stabilizer',
+  /** What goes in beside chlorine. */
+  ...companionReasons,
 ] as const;
 export type ReasonCode = (typeof reasonCodes)[number];
 
@@ -55,6 +77,8 @@ export const cautionCodes = [
   'dose-after-dark',
   'volume-estimated',
   'free-chlorine-over-swim-limit',
+  /** Something is needed beside chlorine and has to wait: for a test, or for a free evening. */
+  'companion-waits',
   'hardness-outside-surface-range',
   'water-values-assumed',
 ] as const;

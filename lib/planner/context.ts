@@ -22,6 +22,7 @@ export type PlanContext = {
   scenario: Scenario;
   now: number;
   start: StartingWater;
+  /** What went in, and what is to go in beside chlorine. */
   given: readonly WeekDose[];
   forcing: Forcing;
   /** The pool with every parameter at its median, and the ensemble around it. */
@@ -45,12 +46,14 @@ export type PlanContext = {
 /**
  * Readies a scenario: the water at its newest reading, what acts on it, the ensemble.
  *
+ * @param companion what is to go in beside chlorine
  * Errors: invalid-input for a given dose that cannot be reckoned with; WaterRangeError for water that cannot be.
  */
-export function contextOf(scenario: Scenario): PlanContext {
+export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext {
   const { pool, shelf } = scenario;
-  const given = scenario.given.map((dose, index) => weekDoseOf(dose, `given[${index}]`, shelf, pool));
-  const start = startingWater(scenario, given);
+  const history = scenario.given.map((dose, index) => weekDoseOf(dose, `given[${index}]`, shelf, pool));
+  const start = startingWater(scenario, history);
+  const given = companion ? [...history, companion] : history;
   const forcing = prepareForcing(pool, start.takenAt, scenario.week, start.water.temperature);
   const setting = settingOf(pool, start.water.temperature, scenario.parameters);
   const hours = hoursFrom(start.takenAt);

@@ -43,8 +43,11 @@ export function openEvenings({ scenario, start, now, given, belowMaximumFrom }: 
   const gap = limits.acidToChlorineGap.value * MILLISECONDS_PER_HOUR;
   const chlorineDays = new Set(given.filter(bringsChlorine).map(({ at }) => dayOf(at, pool.timeZone)));
   return doseEvenings(pool, start.takenAt, now).filter(
-    ({ day, at }) =>
-      at >= belowMaximumFrom && !chlorineDays.has(day) && given.every((dose) => Math.abs(dose.at - at) >= gap),
+    ({ at }) =>
+      at >= belowMaximumFrom &&
+      // A late evening may lie behind midnight.
+      !chlorineDays.has(dayOf(at, pool.timeZone)) &&
+      given.every((dose) => Math.abs(dose.at - at) >= gap),
   );
 }
 

@@ -3,15 +3,21 @@ import type { Alternative, BrokenLimit, Fact } from '@/lib/schemas/plan';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import { limits, lowestLevel } from '@/lib/standards/limits';
 import { surfaceRanges } from '@/lib/standards/surface-ranges';
-import type { CautionCode, ReasonCode } from './codes';
+import { type CautionCode, isCompanionReason, type ReasonCode } from './codes';
+import type { CompanionNeed } from './companions/need';
 import type { PlanContext } from './context';
 import type { Choice } from './draft';
 import type { Options } from './products';
+import { waterExchange } from './water-exchange';
 
 const FEW_OPEN_HOURS = 0.9;
 
 type Explained = {
   doses: readonly PlannedDose[];
+  /** Those of chlorine. */
+  chlorine: readonly PlannedDose[];
+  /** What is needed beside chlorine and has to wait. */
+  waiting: CompanionNeed | null;
   choice: Choice;
   options: Options;
   alternatives: readonly Alternative[];
@@ -23,16 +29,15 @@ type Explained = {
 
 /** Why this plan, as codes with their figures; what the person must know first comes first. */
 export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
-  const { doses, choice, options, broken, openShare } = plan;
+  const { doses, chlorine, choice, options, openShare } = plan;
   const reasons: Fact[] = [];
   const reason = (code: ReasonCode, figures: Omit<Fact, 'code'> = {}) => reasons.push({ code, ...figures });
   const { water } = context.start;
   const { pool, preferences } = context.scenario;
-  const closed = broken.find(({ limit }) => limit === 'stabilizer-too-high-for-swim-limit');
-  if (closed)
-    reason('replace-water-first', { stabilizer: closed.value, closesAt: closed.bound, swimLimit: pool.swimLimit });
+  const exchange = waterExchange(water.cyanuricAcid, pool);
+  if (exchange) reason('replace-water-first', { ...exchange });
   if (openShare < FEW_OPEN_HOURS) reason('few-open-hours', { share: openShare, visits: preferences.visits });
-  const tablets = doses.filter(({ form }) => form === 'tablet');
+  const tablets = chlorine.filter(({ form }) => form === 'tablet');
   const stabilized = context.stabilizedProductUsed || tablets.length > 0;
   const sum = (each: (dose: PlannedDose) => number) => tablets.reduce((total, dose) => total + each(dose), 0);
   reason('lowest-level-follows-stabilizer', {
@@ -51,7 +56,7 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
     reason(options.noTablets, { stabilizer: water.cyanuricAcid, upper: pool.stabilizerBand[1], pH: water.pH });
   else if (free) reason('no-tablets-better-without');
 
-  const fast = doses.filter(({ form }) => form !== 'tablet');
+  const fast = chlorine.filter(({ form }) => form !== 'tablet');
   const product = fast[0];
   if (product)
     reason('fast-closes-gap', {
@@ -61,6 +66,8 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
     });
   else if (options.fast.length === 0) reason('no-fast-on-shelf');
   else if (free) reason('nothing-fast-needed');
+  for (const { reason: why, effect } of doses)
+    if (effect && isCompanionReason(why)) reason(why, { quantity: effect.quantity, change: effect.change });
   if (cheapest(plan)) reason('cheaper-than');
   return reasons;
 }
@@ -72,7 +79,7 @@ function cheapest({ broken, alternatives, doses, money }: Explained): boolean {
 }
 
 /** What to mind with this water and this plan. */
-export function cautionsOf({ doses, options, choice }: Explained, context: PlanContext): Fact[] {
+export function cautionsOf({ doses, options, choice, waiting }: Explained, context: PlanContext): Fact[] {
   const cautions: Fact[] = [...options.cautions];
   const caution = (code: CautionCode, figures: Omit<Fact, 'code'> = {}) => cautions.push({ code, ...figures });
   const { start, scenario } = context;
@@ -84,6 +91,7 @@ export function cautionsOf({ doses, options, choice }: Explained, context: PlanC
     caution('combined-chlorine-high', { combinedChlorine: water.combinedChlorine ?? 0 });
   if (water.freeChlorine > pool.swimLimit)
     caution('free-chlorine-over-swim-limit', { freeChlorine: water.freeChlorine, swimLimit: pool.swimLimit });
+  if (waiting) caution('companion-waits', { reason: waiting.reason });
   const [low, high] = surfaceRanges[pool.surface].calciumHardness;
   if (start.measuredAt.calciumHardness !== undefined && (water.calciumHardness < low || water.calciumHardness > high))
     caution('hardness-outside-surface-range', {

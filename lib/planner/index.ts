@@ -2,11 +2,13 @@ import { dayOf } from '@/lib/calendar/household-day';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { analysisAt, type CourseBand } from '@/lib/projection';
 import { integrateWeek } from '@/lib/projection/integrate';
-import type { WeekPlan } from '@/lib/schemas/plan';
+import type { PlannedDose } from '@/lib/schemas/dose';
+import type { Cost, WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { alternativesOf, burdenOf } from './alternatives';
 import { assertSafePlan } from './safety/assert-safe-plan';
 import { checksOf } from './checks';
+import { type Companion, companionOf } from './companions/companion';
 import { contextOf, type PlanContext } from './context';
 import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import type { Choice } from './draft';
@@ -22,6 +24,7 @@ import { optionsOf } from './products';
 import { responseOf } from './response';
 import { searchPlan } from './search';
 import { ENGINE_VERSION } from './version';
+import { weights } from './weights';
 
 export { assertSafePlan } from './safety/assert-safe-plan';
 export { ENGINE_VERSION } from './version';
@@ -39,34 +42,32 @@ export type { CourseBand };
 export function planWeek(scenario: Scenario): WeekPlan {
   const { blocking, wanted } = needsOf(scenario);
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
-  const context = contextOf(scenario);
-  const options = optionsOf(context);
-  const choice: Choice = {
-    evenings: openEvenings(context),
-    visits: Math.max(0, scenario.preferences.visits - visitsGiven(context)),
-    tablets: options.tablets,
-  };
-  const response = responseOf(context, choice);
-  const fast = options.fast.length > 0 ? options.fast : [null];
-  const found = searchPlan(context, response, { choice, fast });
+  const chlorineAlone = searchWeek(contextOf(scenario));
+  const { companion, waiting, context: withIt } = companionOf(chlorineAlone.found, chlorineAlone);
+  const searched = withIt ? searchWeek(withIt) : chlorineAlone;
+  const { context, options, choice, response, found } = searched;
   const { draft, halvedEvening } = halveFirstDose(found.draft, scenario);
   const best = draft === found.draft ? found : evaluate(draft, choice, context, context.members);
 
   const stabilized = stabilizedIn(draft, context);
-  const doses = plannedDoses(draft, choice, context, halvedEvening);
+  const chlorine = plannedDoses(draft, choice, context, halvedEvening);
+  const doses = inOrder(companion ? [...chlorine, companion.planned] : chlorine);
   const projection = projectionOf(best.courses, best.median, context, stabilized);
   const broken = brokenLimits(projection, context, stabilized);
-  const openShare = openSwimShare(projection, context);
+  const openShare = openSwimShare(projection, doses, context);
   const alternatives = alternativesOf(context, response, choice, options);
-  const explained = { doses, choice, options, alternatives, broken, openShare, money: moneyOf(draft, choice) };
+  const explained = {
+    ...{ doses, chlorine, choice, options, alternatives, broken, openShare, waiting },
+    money: moneyOf(draft, choice),
+  };
   const plan: WeekPlan = {
     ...frame(context),
     projection,
     doses,
-    checks: checksOf(projection, doses, context, stabilized),
+    checks: checksOf(projection, doses, companion, context, stabilized),
     endOfWeek: endOf(best),
-    cost: best.cost,
-    mix: burdenOf(best, doses, context),
+    cost: withCompanion(best.cost, companion, scenario),
+    mix: burdenOf(best, chlorine, context),
     alternatives,
     openSwimShare: openShare,
     broken,
@@ -76,6 +77,31 @@ export function planWeek(scenario: Scenario): WeekPlan {
   };
   assertSafePlan(scenario, plan);
   return plan;
+}
+
+/** The best chlorine of a week, and what it was looked for with. */
+function searchWeek(context: PlanContext) {
+  const options = optionsOf(context);
+  const choice: Choice = {
+    evenings: openEvenings(context),
+    visits: Math.max(0, context.scenario.preferences.visits - visitsGiven(context)),
+    tablets: options.tablets,
+  };
+  const response = responseOf(context, choice);
+  const fast = options.fast.length > 0 ? options.fast : [null];
+  return { context, options, choice, response, found: searchPlan(context, response, { choice, fast }) };
+}
+
+function inOrder(doses: readonly PlannedDose[]): PlannedDose[] {
+  return doses.toSorted((a, b) => Date.parse(a.at) - Date.parse(b.at));
+}
+
+/** What the companion costs beside the chlorine: its product and its visit. */
+function withCompanion(cost: Cost, companion: Companion | null, { preferences }: Scenario): Cost {
+  if (!companion) return cost;
+  const money = preferences.money * companion.money;
+  const visit = preferences.evenings * weights.visit;
+  return { ...cost, money: cost.money + money, visits: cost.visits + visit, total: cost.total + money + visit };
 }
 
 /** Projects the scenario's own `doses` and plans nothing: bands, broken limits and the end of the week for them. */
@@ -100,7 +126,7 @@ export function projectScenario(scenario: Scenario): WeekPlan {
     cost: null,
     mix: null,
     alternatives: [],
-    openSwimShare: openSwimShare(projection, base),
+    openSwimShare: openSwimShare(projection, [], base),
     broken: brokenLimits(projection, base, stabilized),
     reasons: [],
     cautions: [],

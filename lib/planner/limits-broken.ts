@@ -1,4 +1,7 @@
+import { MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
+import type { PlannedDose } from '@/lib/schemas/dose';
 import type { BrokenLimit, PlanProjection } from '@/lib/schemas/plan';
+import { swimWaitHours } from '@/lib/standards/caps';
 import { codeMinimum, limits } from '@/lib/standards/limits';
 import type { PlanContext } from './context';
 import type { LimitCode } from './codes';
@@ -79,9 +82,17 @@ function stabilizerThatCloses({ start, scenario, hours }: PlanContext): BrokenLi
   return { limit, at: new Date(hours[0]!).toISOString(), value, bound, unit: 'mg/L' };
 }
 
-/** Share of the plan's swim hours in which the median keeps all of the verdict's limits. */
-export function openSwimShare(projection: PlanProjection, { swimHour }: Pick<PlanContext, 'swimHour'>): number {
+/** Share of the plan's swim hours in which the median keeps all of the verdict's limits and no dose asks to wait. */
+export function openSwimShare(
+  projection: PlanProjection,
+  doses: readonly PlannedDose[],
+  { swimHour, hours }: Pick<PlanContext, 'swimHour' | 'hours'>,
+): number {
   const { freeChlorine, pH } = projection;
+  const waits = doses.map(({ at, substance }) => {
+    const from = Date.parse(at);
+    return { from, to: from + (swimWaitHours[substance] ?? 0) * MILLISECONDS_PER_HOUR };
+  });
   let swim = 0;
   let open = 0;
   swimHour.forEach((swims, hour) => {
@@ -90,7 +101,8 @@ export function openSwimShare(projection: PlanProjection, { swimHour }: Pick<Pla
     const level = freeChlorine.p50[hour]!;
     const chlorineFits = level >= freeChlorine.lowestLevel[hour]! && level <= freeChlorine.swimLimit[hour]!;
     const pHFits = pH.p50[hour]! >= limits.pHRangeLow.value && pH.p50[hour]! <= limits.pHRangeHigh.value;
-    if (chlorineFits && pHFits) open++;
+    const waiting = waits.some(({ from, to }) => hours[hour]! >= from && hours[hour]! < to);
+    if (chlorineFits && pHFits && !waiting) open++;
   });
   return swim === 0 ? 1 : open / swim;
 }

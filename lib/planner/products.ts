@@ -207,6 +207,7 @@ export function riseOfFast(option: FastOption, amount: number, at: number, volum
   return riseOf(contentsPerUnit(option.dose(amount, at)), amount, volume);
 }
 
-function avoided(product: ShelfProduct, avoid: readonly string[]): boolean {
+/** Whether the household avoids a product, its form or its substance. */
+export function avoided(product: ShelfProduct, avoid: readonly string[]): boolean {
   return avoid.includes(product.id) || avoid.includes(product.form) || avoid.includes(product.substance);
 }

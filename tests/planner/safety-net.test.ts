@@ -66,6 +66,17 @@ const acid: PlannedDose = {
   amount: 200,
   unit: 'mL',
   rise: 0,
+  effect: { quantity: 'pH', change: -0.2 },
+};
+const bicarbonate: PlannedDose = {
+  ...granules,
+  product: null,
+  toBuy: true,
+  substance: 'sodium-bicarbonate',
+  form: 'other',
+  amount: 500,
+  rise: 0,
+  effect: { quantity: 'totalAlkalinity', change: 4 },
 };
 const of = (...doses: PlannedDose[]): WeekPlan => ({ ...plan, doses });
 const pool = (change: Partial<Scenario['pool']>): Scenario => ({ ...scenario, pool: { ...scenario.pool, ...change } });
@@ -88,6 +99,27 @@ const planted: [fault: string, scenario: Scenario, plan: WeekPlan][] = [
   ['a dose before now', { ...scenario, now: '2026-07-08T12:00:00-04:00' }, of(granules)],
   ['two products in one visit', scenario, of(granules, { ...tablets, at: '2026-07-07T20:45:00-04:00' })],
   ['acid beside chlorine', scenario, of(granules, { ...acid, at: '2026-07-07T23:30:00-04:00' })],
+  ['acid that lowers pH by 0.6', scenario, of({ ...acid, effect: { quantity: 'pH', change: -0.6 } })],
+  ['acid whose effect nobody reckoned', scenario, of({ ...acid, effect: undefined })],
+  [
+    'two doses beside chlorine',
+    scenario,
+    of({ ...acid, at: '2026-07-07T06:45:00-04:00' }, { ...bicarbonate, at: '2026-07-08T20:15:00-04:00' }),
+  ],
+  [
+    'calcium the day after bicarbonate',
+    {
+      ...scenario,
+      shelf: [...scenario.shelf, { ...scenario.shelf[2]!, id: 'bicarbonate', substance: 'sodium-bicarbonate' }],
+      given: [{ at: '2026-07-06T21:00:00-04:00', product: 'bicarbonate', amount: 500, unit: 'g' }],
+    },
+    of({ ...bicarbonate, substance: 'calcium-chloride', at: '2026-07-07T20:15:00-04:00' }),
+  ],
+  [
+    'soda in hard water',
+    { ...scenario, reading: { ...scenario.reading, calciumHardness: 400 } as Scenario['reading'] },
+    of({ ...bicarbonate, substance: 'sodium-carbonate' }),
+  ],
   ['tablets without a feeder', pool({ feeder: { ...scenario.pool.feeder, kind: 'none' } }), of(tablets)],
   ['tablets of another ingredient', pool({ feeder: { ...scenario.pool.feeder, ingredient: 'other' } }), of(tablets)],
   ['more tablets than the feeder holds', scenario, of({ ...tablets, amount: 4 })],

@@ -120,7 +120,13 @@ describe('what a plan says of its limits', () => {
     base,
     'stabilizer 88': planWeek(scenarioOf({ reading: { cyanuricAcid: 88 } })),
     'low pH': planWeek(scenarioOf({ reading: { pH: 7.1, freeChlorine: 0.5 } })),
-    'no stabilizer': planWeek(scenarioOf({ reading: { cyanuricAcid: 0 }, pool: { feeder: { kind: 'none' } } })),
+    'no stabilizer': planWeek(
+      scenarioOf({
+        reading: { cyanuricAcid: 0 },
+        pool: { feeder: { kind: 'none' } },
+        preferences: { avoid: ['cyanuric-acid'] },
+      }),
+    ),
   };
 
   it.each(Object.entries(plans))('stands in its projection: %s', (_, { broken, projection, hours }) => {
@@ -187,7 +193,11 @@ describe('what a plan says of its limits', () => {
 
   it('puts replacing water first where no level is both high and low enough', () => {
     const plan = plans['stabilizer 88'];
-    expect(plan.reasons[0]).toEqual({ code: 'replace-water-first', stabilizer: 88, closesAt: 70, swimLimit: 4 });
+    const { volume, days, ...exchange } = plan.reasons[0] as unknown as Record<string, number>;
+    expect(exchange).toEqual({ code: 'replace-water-first', stabilizer: 88, closesAt: 70, swimLimit: 4, target: 45 });
+    // A tenth of 1.5 m a day: 0.9^7 leaves 42 of 88, 0.9^6 still 47.
+    expect(days).toBe(7);
+    expect(volume).toBeCloseTo(7 * 7.57, 2);
     expect(plan.broken[0]!.limit).toBe('stabilizer-too-high-for-swim-limit');
     expect(Math.max(...plan.projection!.freeChlorine.swimLimit)).toBe(4);
   });

@@ -3,6 +3,7 @@ import type { PlannedDose } from '@/lib/schemas/dose';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { limits } from '@/lib/standards/limits';
+import { companionFaults } from './companion-faults';
 import { doseFaults } from './dose-faults';
 import { eveningFaults } from './evening-faults';
 import { tabletFaults } from './tablet-faults';
@@ -10,7 +11,8 @@ import { tabletFaults } from './tablet-faults';
 /**
  * The safety net: written without the search's own arithmetic, run after every plan, it refuses and never repairs.
  * Refused are: projected p90 above 10 mg/L once something is added; more than the caps of one evening or one week, what was
- * given counted in; chlorine within 4 h of acid; anything in swim hours or before now; two products in one visit; tablets
+ * given counted in; chlorine within 4 h of acid; two doses beside chlorine without a test between, calcium within a day of
+ * a carbonate, too much acid, soda in hard water; anything in swim hours or before now; two products in one visit; tablets
  * without a feeder of their ingredient or over its capacity; granules against their label or the surface; more than the
  * shelf holds unless marked to buy; a volume outside 1 to 1000 m3; figures that are not finite. The ways that a plan was
  * compared with are held to the same.
@@ -22,6 +24,7 @@ export function assertSafePlan(scenario: Scenario, plan: WeekPlan): void {
     ...figureFaults(scenario, plan),
     ...dosesFaults(plan.doses, scenario),
     ...projectionFaults(plan),
+    ...companionFaults(plan, scenario),
     ...plan.alternatives.flatMap(({ kind, doses }) =>
       dosesFaults(doses, scenario).map((fault) => `${fault} (${kind} alone)`),
     ),

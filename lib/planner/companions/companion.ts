@@ -1,0 +1,125 @@
+import { parseInstant, toOffsetIso } from '@/lib/calendar/wall-time';
+import { addDose } from '@/lib/chemistry';
+import { analysisAt } from '@/lib/projection';
+import { type WeekDose, weekDose } from '@/lib/projection/events';
+import { MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
+import { ledgerAt } from '@/lib/projection/integrate';
+import type { PlannedDose } from '@/lib/schemas/dose';
+import type { Scenario } from '@/lib/schemas/scenario';
+import type { ShelfProduct } from '@/lib/schemas/shelf-product';
+import { retestHours } from '@/lib/standards/companions';
+import { contextOf, type PlanContext } from '../context';
+import type { Evaluated } from '../cost';
+import { generic, isGeneric } from '../generic-products';
+import { priceOf } from '../product-facts';
+import { avoided, type Options } from '../products';
+import { sumOf } from '../draft';
+import { companionAmount } from './amount';
+import { momentOf } from './moment';
+import { type CompanionNeed, companionNeeds, type CompanionSubstance } from './need';
+
+/** A dose beside chlorine: how a plan names it, how the projection takes it, what it costs, and when to test again [ms]. */
+export type Companion = { planned: PlannedDose; dose: WeekDose; money: number; retestAt: number };
+
+export type CompanionOutcome = {
+  companion: Companion | null;
+  /** The week with it, ready to be searched again. */
+  context: PlanContext | null;
+  /** What the week needs and cannot have yet: no evening is left, or an earlier dose has not been tested. */
+  waiting: CompanionNeed | null;
+};
+
+/**
+ * The week's companion dose: one at most, with a test before the next (care rules, part 4).
+ *
+ * @param plan the week's best chlorine without it
+ */
+export function companionOf(
+  plan: Evaluated,
+  { context, options }: { context: PlanContext; options: Options },
+): CompanionOutcome {
+  const { scenario, start } = context;
+  const needs = companionNeeds({
+    pool: scenario.pool,
+    water: start.water,
+    pH: plan.median.pH,
+    measured: (quantity) => start.measuredAt[quantity] !== undefined,
+    tabletsLead: sumOf(plan.draft.tablets) > 0,
+    tabletsPossible: options.tablets !== null,
+  });
+  const none = { companion: null, context: null, waiting: needs[0] ?? null };
+  if (untested(context) || plan.choice.visits < 2) return none;
+  for (const need of needs) {
+    const companion = companionFor(need, plan, context);
+    const withIt = companion && contextOf(scenario, companion.dose);
+    // The pump runs for it, and may bring out more of the tablets than the water takes.
+    if (withIt && withIt.belowMaximumFrom <= companion.dose.at) return { companion, context: withIt, waiting: null };
+  }
+  return none;
+}
+
+function companionFor(need: CompanionNeed, plan: Evaluated, context: PlanContext): Companion | null {
+  const { scenario, start } = context;
+  const { pool } = scenario;
+  const product = productFor(need.substances, scenario);
+  if (!product) return null;
+  const at = momentOf(need, product.substance, plan, context);
+  if (at === null) return null;
+  const hour = Math.floor((at - start.takenAt) / MILLISECONDS_PER_HOUR);
+  const water = analysisAt(ledgerAt(plan.median, hour), plan.median.pH[hour]!);
+  const acid = need.reason === 'lowers-pH';
+  const amount = companionAmount(need, product, water, {
+    volume: pool.volume,
+    pHError: start.errors.pH,
+    halved: (pool.volumeEstimated && scenario.given.length === 0) || (acid && !everGiven(product.substance, scenario)),
+  });
+  if (amount === 0) return null;
+  const { substance } = product;
+  const dose = { substance, amount, ...(product.strength === undefined ? {} : { strength: product.strength }) };
+  const after = addDose(water, pool.volume, dose);
+  return {
+    planned: {
+      at: toOffsetIso(at, pool.timeZone),
+      product: isGeneric(product) ? null : product.id,
+      toBuy: isGeneric(product) || product.stock < amount,
+      substance,
+      form: product.form,
+      amount,
+      unit: product.form === 'liquid' ? 'mL' : 'g',
+      rise: 0,
+      effect: { quantity: need.quantity, change: after[need.quantity] - water[need.quantity] },
+      reason: need.reason,
+    },
+    dose: weekDose(at, dose, pool.volume),
+    money: (priceOf(product) * amount) / 1000,
+    retestAt: at + retestHours[substance] * MILLISECONDS_PER_HOUR,
+  };
+}
+
+type CompanionProduct = ShelfProduct & { substance: CompanionSubstance };
+
+/** What the shelf holds of any of the substances, else the usual one to buy. */
+function productFor(
+  substances: readonly CompanionSubstance[],
+  { shelf, preferences }: Scenario,
+): CompanionProduct | undefined {
+  const is = (product: ShelfProduct): product is CompanionProduct =>
+    substances.some((each) => each === product.substance);
+  const held = shelf.filter((product) => is(product) && product.stock > 0);
+  const offered = [...held, ...substances.map((substance) => generic[substance])];
+  return offered.filter(is).find((product) => !avoided(product, preferences.avoid));
+}
+
+/** Whether a companion has gone in since the water was last tested long enough after it. */
+function untested({ scenario, start }: PlanContext): boolean {
+  const newest = Math.max(start.measuredAt.pH ?? 0, start.measuredAt.totalAlkalinity ?? 0);
+  return scenario.given.some(({ at, product: id }) => {
+    const substance = scenario.shelf.find((product) => product.id === id)?.substance;
+    const hours = substance && retestHours[substance as CompanionSubstance];
+    return hours !== undefined && parseInstant(at)! + hours * MILLISECONDS_PER_HOUR > newest;
+  });
+}
+
+function everGiven(substance: CompanionSubstance, { given, shelf }: Scenario): boolean {
+  return given.some(({ product: id }) => shelf.find((product) => product.id === id)?.substance === substance);
+}

@@ -1,0 +1,157 @@
+import { describe, expect, it } from 'vitest';
+import { dayOf } from '@/lib/calendar/household-day';
+import { wallClock } from '@/lib/calendar/wall-time';
+import { addDose, type Substance } from '@/lib/chemistry';
+import { planWeek } from '@/lib/planner';
+import type { PlannedDose } from '@/lib/schemas/dose';
+import type { WeekPlan } from '@/lib/schemas/plan';
+import { type Changes, codesIn, fullTest, products, scenarioOf } from './scenarios';
+
+const HOUR = 3_600_000;
+const zone = 'America/New_York';
+const chlorines = ['trichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
+const companionsIn = ({ doses }: WeekPlan) => doses.filter(({ substance }) => !chlorines.includes(substance));
+const onlyCompanion = (plan: WeekPlan): PlannedDose => {
+  expect(companionsIn(plan)).toHaveLength(1);
+  return companionsIn(plan)[0]!;
+};
+const noFeeder = { pool: { feeder: { kind: 'none' } } } as const satisfies Changes;
+
+describe('beside chlorine', () => {
+  it('nothing goes in where the water is in order', () => {
+    expect(companionsIn(planWeek(scenarioOf()))).toEqual([]);
+  });
+
+  it('alkalinity is raised first, in whole measures up to the evening’s cap, with a full test the day after', () => {
+    const plan = planWeek(scenarioOf({ reading: { totalAlkalinity: 50, calciumHardness: 100, pH: 7.3 } }));
+    const dose = onlyCompanion(plan);
+    expect(dose).toMatchObject({ substance: 'sodium-bicarbonate', reason: 'raises-alkalinity', toBuy: true });
+    expect(dose.amount % 50).toBe(0);
+    // 34 g/m3: +20 mg/L at most.
+    expect(dose.amount).toBeLessThanOrEqual(34 * 75.7);
+    expect(dose.effect!.change).toBeGreaterThan(15);
+    expect(dose.effect!.change).toBeLessThanOrEqual(20.5);
+    const retest = plan.checks.find(({ reason }) => reason === 'after-companion')!;
+    expect(retest.kind).toBe('full');
+    expect(Date.parse(retest.at) - Date.parse(dose.at)).toBeGreaterThanOrEqual(24 * HOUR);
+    expect(codesIn(plan.reasons)).toContain('raises-alkalinity');
+  });
+
+  it('never shares an evening with chlorine', () => {
+    const plan = planWeek(
+      scenarioOf({ reading: { totalAlkalinity: 50, freeChlorine: 1 }, preferences: { visits: 7 } }),
+    );
+    const days = plan.doses.map(({ at }) => dayOf(Date.parse(at), zone));
+    expect(onlyCompanion(plan)).toBeDefined();
+    expect(new Set(days).size).toBe(days.length);
+    // Chlorine comes first while it is under the code minimum.
+    expect(chlorines).toContain(plan.doses[0]!.substance);
+  });
+
+  it('acid goes in at first light, 4 h from chlorine, half of its cap the first time, and pH falls by 0.4 at most', () => {
+    const plan = planWeek(scenarioOf({ reading: { pH: 8, totalAlkalinity: 100 } }));
+    const dose = onlyCompanion(plan);
+    expect(dose).toMatchObject({ substance: 'hydrochloric-acid', unit: 'mL', reason: 'lowers-pH' });
+    const { hourOfDay } = wallClock(Date.parse(dose.at), zone);
+    expect(hourOfDay).toBeGreaterThan(6);
+    expect(hourOfDay).toBeLessThan(8);
+    expect(dose.amount).toBeLessThanOrEqual((16 * 75.7) / 2);
+    expect(dose.effect!.change).toBeLessThan(-0.05);
+    expect(dose.effect!.change).toBeGreaterThanOrEqual(-0.4);
+    for (const other of plan.doses.filter((each) => each !== dose))
+      expect(Math.abs(Date.parse(other.at) - Date.parse(dose.at))).toBeGreaterThanOrEqual(4 * HOUR);
+    expect(plan.checks.find(({ reason }) => reason === 'after-companion')!.kind).toBe('quick');
+  });
+
+  it('acid that is known may go to its whole cap, and never takes the likely range under 7.2', () => {
+    const acid = {
+      id: 'acid',
+      form: 'liquid',
+      substance: 'hydrochloric-acid',
+      strength: 31.45,
+      measure: 100,
+      stock: 9000,
+    };
+    const changes = (method: 'strip' | 'drop-kit'): Changes => ({
+      shelf: [products.gran, acid],
+      reading: { pH: 8.1, totalAlkalinity: 120, method },
+      given: [{ at: '2026-07-01T07:00:00-04:00', product: 'acid', amount: 300, unit: 'mL' }],
+    });
+    const known = onlyCompanion(planWeek(scenarioOf(changes('drop-kit'))));
+    expect(known).toMatchObject({ product: 'acid', toBuy: false });
+    expect(known.amount).toBeGreaterThan((16 * 75.7) / 2);
+    expect(known.amount).toBeLessThanOrEqual(16 * 75.7);
+    const unsure = onlyCompanion(
+      planWeek(scenarioOf({ ...changes('strip'), reading: { ...changes('strip').reading, pH: 7.9 } })),
+    );
+    // A strip may be off by 0.2: 7.2 + 1.28 * 0.2 = 7.46 is as low as the middle may come.
+    expect(7.9 + unsure.effect!.change).toBeGreaterThan(7.45);
+  });
+
+  it('is what chemistry makes of it', () => {
+    const dose = onlyCompanion(planWeek(scenarioOf({ reading: { pH: 8, totalAlkalinity: 100 } })));
+    const water = { ...fullTest, freeChlorine: 3, combinedChlorine: 0.2, pH: 8, totalAlkalinity: 100 };
+    const after = addDose(water, 75.7, {
+      substance: dose.substance as Substance,
+      amount: dose.amount,
+      strength: 31.45,
+    });
+    expect(dose.effect!.change).toBeCloseTo(after.pH - 8, 1);
+  });
+
+  it('soda raises low pH, not in hard water', () => {
+    const low: Changes = { ...noFeeder, reading: { pH: 7, totalAlkalinity: 90 } };
+    const dose = onlyCompanion(planWeek(scenarioOf(low)));
+    expect(dose).toMatchObject({ substance: 'sodium-carbonate', reason: 'raises-pH' });
+    expect(dose.amount).toBeLessThanOrEqual(10 * 75.7);
+    const hard = planWeek(scenarioOf({ ...low, reading: { ...low.reading, calciumHardness: 350 } }));
+    expect(companionsIn(hard)).toEqual([]);
+  });
+
+  it('hardness is raised where the surface would give its own, and only when it was measured', () => {
+    const dose = onlyCompanion(planWeek(scenarioOf({ reading: { calciumHardness: 110 } })));
+    expect(dose).toMatchObject({ substance: 'calcium-chloride', reason: 'raises-hardness' });
+    expect(dose.effect!.change).toBeLessThanOrEqual(31);
+    expect(
+      companionsIn(planWeek(scenarioOf({ pool: { surface: 'vinyl' }, reading: { calciumHardness: 110 } }))),
+    ).toEqual([]);
+    const base = scenarioOf();
+    const { calciumHardness: _, ...unmeasured } = [base.reading].flat()[0]!;
+    expect(companionsIn(planWeek({ ...base, reading: unmeasured }))).toEqual([]);
+  });
+
+  it('stabilizer is raised only where no tablets can bring it', () => {
+    expect(companionsIn(planWeek(scenarioOf({ reading: { cyanuricAcid: 15 } })))).toEqual([]);
+    const dose = onlyCompanion(planWeek(scenarioOf({ ...noFeeder, reading: { cyanuricAcid: 15 } })));
+    expect(dose).toMatchObject({ substance: 'cyanuric-acid', reason: 'raises-stabilizer' });
+    expect(dose.effect!.change).toBeLessThanOrEqual(20.5);
+  });
+
+  it('waits for a test after the last such dose, and for an evening of its own', () => {
+    const shelf = [products.gran, { id: 'soda', form: 'other', substance: 'sodium-bicarbonate', stock: 5000 }];
+    const given = [{ at: '2026-07-05T18:00:00-04:00', product: 'soda', amount: 1000, unit: 'g' }];
+    const waits = planWeek(scenarioOf({ shelf, given, reading: { totalAlkalinity: 50 } }));
+    expect(companionsIn(waits)).toEqual([]);
+    expect(waits.cautions).toContainEqual({ code: 'companion-waits', reason: 'raises-alkalinity' });
+    const one = planWeek(scenarioOf({ reading: { totalAlkalinity: 50 }, preferences: { visits: 1 } }));
+    expect(companionsIn(one)).toEqual([]);
+    expect(codesIn(one.cautions)).toContain('companion-waits');
+  });
+
+  it('is halved in a pool whose volume is an estimate', () => {
+    const whole = onlyCompanion(planWeek(scenarioOf({ reading: { totalAlkalinity: 50 } })));
+    const half = onlyCompanion(
+      planWeek(scenarioOf({ pool: { volumeEstimated: true }, reading: { totalAlkalinity: 50 } })),
+    );
+    expect(half.amount).toBeLessThanOrEqual(whole.amount / 2);
+  });
+
+  it('counts in money and visits, and closes the swim hours of its waiting time', () => {
+    const plan = planWeek(scenarioOf({ reading: { pH: 8, totalAlkalinity: 100 } }));
+    const { cost } = plan;
+    const parts = Object.entries(cost!).filter(([part]) => part !== 'total');
+    expect(parts.reduce((sum, [, value]) => sum + value, 0)).toBeCloseTo(cost!.total, 9);
+    expect(cost!.visits).toBeGreaterThanOrEqual(1.5 * new Set(plan.doses.map(({ at }) => at)).size - 1e-9);
+    expect(new Set(plan.doses.map(({ at }) => at)).size).toBeLessThanOrEqual(3);
+  });
+});
