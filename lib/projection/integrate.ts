@@ -67,8 +67,7 @@ export function integrateWeek(
   const account = { dosed: 0, released: 0, usedUp: 0, combined: 0, carriedOut: 0 };
   const hours = Math.floor(forcing.steps / stepsPerHour) + 1;
   const course: Course = {
-    hourly: newSeries(hours),
-    pH: new Float64Array(hours),
+    ...newRows(hours),
     end: ledger,
     endPH: 0,
     loads,
@@ -132,18 +131,26 @@ export function integrateWeek(
   return course;
 }
 
-function newSeries(hours: number): LedgerSeries {
-  const series = () => new Float64Array(hours);
+/** The quantities of a ledger, and pH. */
+const ROWS = 10;
+
+/** Room for a course, in one block: asked of the system one by one, ten rows cost as much as ten hours of the course. */
+function newRows(hours: number): { hourly: LedgerSeries; pH: Float64Array } {
+  const block = new ArrayBuffer(ROWS * hours * Float64Array.BYTES_PER_ELEMENT);
+  const row = (index: number) => new Float64Array(block, index * hours * Float64Array.BYTES_PER_ELEMENT, hours);
   return {
-    freeChlorine: series(),
-    combinedChlorine: series(),
-    cyanurate: series(),
-    alkalinity: series(),
-    inorganicCarbon: series(),
-    calcium: series(),
-    borate: series(),
-    dissolvedSolids: series(),
-    temperature: series(),
+    hourly: {
+      freeChlorine: row(0),
+      combinedChlorine: row(1),
+      cyanurate: row(2),
+      alkalinity: row(3),
+      inorganicCarbon: row(4),
+      calcium: row(5),
+      borate: row(6),
+      dissolvedSolids: row(7),
+      temperature: row(8),
+    },
+    pH: row(9),
   };
 }
 

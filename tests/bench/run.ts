@@ -2,6 +2,7 @@ import { readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { parseArgs } from 'node:util';
 import { chemistryPieces } from './chemistry';
+import { learningPieces } from './learning';
 import type { Piece } from './piece';
 import { type Cost, costOf, referenceLoop } from './stopwatch';
 import { ALLOWED, type Ratios, verdictsOn } from './verdict';
@@ -15,7 +16,7 @@ const { values: asked } = parseArgs({
   options: { check: { type: 'boolean', default: false }, keep: { type: 'boolean', default: false } },
 });
 
-const pieces = [...chemistryPieces, ...weekPieces];
+const pieces = [...chemistryPieces, ...weekPieces, ...learningPieces];
 const committed = asked.check ? (JSON.parse(readFileSync(ratiosFile, 'utf8')) as Ratios) : {};
 
 console.log(`${referenceLoop.name}: ${inWords(costOf(referenceLoop).milliseconds)}`);
@@ -31,14 +32,15 @@ for (const piece of pieces) {
 if (asked.keep) keep(ratios);
 if (asked.check) check(ratios);
 
+/** What a check goes by is the best of up to three tries; what is kept for later checks, the middle of three. */
 function steadyCost(piece: Piece): Cost {
-  const bound = ALLOWED * (committed[piece.name] ?? Infinity);
-  let best = costOf(piece);
-  for (let attempt = 1; attempt < TRIES && best.multiple > bound; attempt++) {
-    const again = costOf(piece);
-    if (again.multiple < best.multiple) best = again;
+  const bound = asked.keep ? 0 : ALLOWED * (committed[piece.name] ?? Infinity);
+  const costs = [costOf(piece)];
+  while (costs.length < TRIES && costs[0]!.multiple > bound) {
+    costs.push(costOf(piece));
+    costs.sort((a, b) => a.multiple - b.multiple);
   }
-  return best;
+  return asked.keep ? costs[1]! : costs[0]!;
 }
 
 function keep(measured: Ratios): void {

@@ -43,8 +43,11 @@ export function costOf({ run }: Piece): Cost {
 /** Runs until the compiler has done its work; tells how many passes make a run long enough. */
 function warmUp(run: Piece['run']): number {
   timed(referenceLoop.run, 2);
-  for (let spent = 0; spent < 10 * LEAST_MILLISECONDS;) spent += timed(run, 1) + 0.01;
-  for (let passes = 1; ; passes *= 2) if (timed(run, passes) >= LEAST_MILLISECONDS) return passes;
+  let last = 0;
+  for (let spent = 0; spent < 10 * LEAST_MILLISECONDS; spent += last + 0.01) last = timed(run, 1);
+  let passes = 1;
+  for (; last < LEAST_MILLISECONDS; last = timed(run, passes)) passes *= 2;
+  return passes;
 }
 
 /** Processor time of this process [ms]. */

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import ratios from '@/tests/bench/ratios.json';
 import { chemistryPieces } from '@/tests/bench/chemistry';
+import { learningPieces } from '@/tests/bench/learning';
 import { costOf, median } from '@/tests/bench/stopwatch';
 import { verdictsOn } from '@/tests/bench/verdict';
 import { weekPieces } from '@/tests/bench/week';
@@ -23,7 +24,7 @@ describe('the check of benchmarks', () => {
   });
 
   it('has a ratio for every piece, and no other', () => {
-    const names = [...chemistryPieces, ...weekPieces].map(({ name }) => name);
+    const names = [...chemistryPieces, ...weekPieces, ...learningPieces].map(({ name }) => name);
     expect(Object.keys(ratios)).toEqual(names);
   });
 });
