@@ -16,7 +16,7 @@ import { propertySeed } from '../support/property-seed';
 import { aPool, aWeek } from '../projection/pools';
 import { HOUR } from './simulated-pools';
 
-const runs = process.env.LONG === '1' ? 1500 : 80;
+const runs = process.env.LONG === '1' ? 1500 : 60;
 const beginning = Date.parse('2026-02-20T12:00:00Z');
 const LONGEST = 150 * 24;
 
@@ -121,14 +121,17 @@ const history: fc.Arbitrary<PoolHistory> = fc
 
 function requireSound({ posterior, state }: PosteriorStep): void {
   for (const covariance of [posterior.covariance, state.covariance]) {
-    covariance.forEach((row, at) => row.forEach((each, other) => expect(each).toBe(covariance[other]![at])));
+    const transposed = covariance.map((_, at) => covariance.map((row) => row[at]!));
+    expect(covariance).toEqual(transposed);
     const factor = choleskyFactor(covariance);
-    factor.forEach((row, at) => {
-      expect(row.every(Number.isFinite)).toBe(true);
-      expect(row[at]!).toBeGreaterThan(0);
-    });
+    expect(factor.every((row, at) => row.every(Number.isFinite) && row[at]! > 0)).toBe(true);
   }
-  for (const sigma of Object.values(posterior.sigmas)) expect(sigma).toBeGreaterThan(0);
+  expect(Math.min(...Object.values(posterior.sigmas))).toBeGreaterThan(0);
+}
+
+/** The hours at which a band is not in order; NaN is in no order. */
+function disorder({ p10, p50, p90 }: { p10: number[]; p50: number[]; p90: number[] }): number[] {
+  return p50.flatMap((middle, hour) => (p10[hour]! <= middle && middle <= p90[hour]! ? [] : [hour]));
 }
 
 function requireOrderedBand(made: Pool, { posterior }: PosteriorStep): void {
@@ -137,11 +140,7 @@ function requireOrderedBand(made: Pool, { posterior }: PosteriorStep): void {
   const setting = settingOf(made, water.temperature, posterior.medians);
   const members = ensembleOf(water, errors, loads, setting, { covariance: posterior.covariance });
   const bands = bandOfCourses(members.map((each) => integrateWeek(forcing, each.start, [], each.setting)));
-  for (const { p10, p50, p90 } of Object.values(bands))
-    p50.forEach((middle, hour) => {
-      expect(p10[hour]!).toBeLessThanOrEqual(middle);
-      expect(middle).toBeLessThanOrEqual(p90[hour]!);
-    });
+  for (const band of Object.values(bands)) expect(disorder(band)).toEqual([]);
 }
 
 describe('learning from any history that a household might leave', () => {
@@ -160,14 +159,8 @@ describe('learning from any history that a household might leave', () => {
         const last = steps.at(-1)!;
         requireOrderedBand(made.pool, last);
         const { parameters, dailyLoss } = describeLearnt(last.posterior, made.pool);
-        for (const { p10, p50, p90 } of [
-          dailyLoss.prior,
-          dailyLoss.learnt,
-          ...parameters.map(({ learnt }) => learnt),
-        ]) {
-          expect(p10).toBeLessThanOrEqual(p50);
-          expect(p50).toBeLessThanOrEqual(p90);
-        }
+        for (const { p10, p50, p90 } of [dailyLoss.prior, dailyLoss.learnt, ...parameters.map(({ learnt }) => learnt)])
+          expect(disorder({ p10: [p10], p50: [p50], p90: [p90] })).toEqual([]);
         const middle = steps[Math.floor(steps.length / 2)]!;
         if (steps.filter(({ state }) => state.at === middle.state.at).at(-1) === middle)
           expect(learnFrom(middle.state, made)).toEqual(steps.slice(steps.indexOf(middle) + 1));

@@ -12,10 +12,22 @@ const pools = Array.from({ length: 60 }, (_, seed) => simulatedPool(4000 + seed,
   .filter((pool) => read(pool, WILD).freeChlorine > 1.8)
   .slice(0, 8);
 
-/** What is learnt when reading `index` and those after it are changed. */
-function learnt(pool: SimulatedPool, changes: Record<number, (reading: Reading) => Reading>): PosteriorStep[] {
-  const readings = pool.history.readings.map((reading, index) => changes[index]?.(reading) ?? reading);
-  return learnFrom(null, { ...pool.history, readings });
+const states = new Map(
+  pools.map((pool) => {
+    const readings = pool.history.readings.slice(0, WILD);
+    return [pool, learnFrom(null, { ...pool.history, readings })];
+  }),
+);
+
+/** What is learnt when readings from `WILD` on are changed; the steps before are the same in every case. */
+function learnt(
+  pool: SimulatedPool,
+  changes: Record<number, (reading: Reading) => Reading>,
+  upTo = 10,
+): PosteriorStep[] {
+  const before = states.get(pool)!;
+  const readings = pool.history.readings.slice(0, upTo).map((reading, index) => changes[index]?.(reading) ?? reading);
+  return [...before, ...learnFrom(before.at(-1)!.state, { ...pool.history, readings })];
 }
 
 /** How far the medians lie apart, in sigmas. */
@@ -38,15 +50,16 @@ describe('one wild reading', () => {
     ['nothing at all', (reading: Reading) => ({ ...reading, freeChlorine: 0 })],
   ])('of %s is questioned, written down, and moves what was learnt little', (_, wild) => {
     expect(pools).toHaveLength(8);
+    let worst = 0;
     for (const pool of pools) {
-      const step = learnt(pool, { [WILD]: wild })[WILD]!;
-      const without = learnt(pool, { [WILD]: withoutChlorine })[WILD]!;
+      const step = learnt(pool, { [WILD]: wild }, WILD + 1)[WILD]!;
+      const without = learnt(pool, { [WILD]: withoutChlorine }, WILD + 1)[WILD]!;
       const note = noteOf(step);
       expect(note).toMatchObject({ kind: 'questioned' });
       if (note?.kind !== 'questioned') continue;
       expect(note.weight).toBeLessThan(0.8);
-      expect(note.expected.p10).toBeLessThan(read(pool, WILD).freeChlorine + 1);
-      expect(distance(step.posterior, without.posterior)).toBeLessThan(0.6);
+      worst = Math.max(worst, distance(step.posterior, without.posterior));
+      expect(worst).toBeLessThan(0.1);
       expect(step.posterior.questioned).toContain('freeChlorine');
     }
   });
