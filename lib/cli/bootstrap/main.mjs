@@ -10,7 +10,7 @@ import { Interruption, Refusal } from './refusal.mjs';
 import { dev, start } from './serve.mjs';
 import { test, verify } from './suite.mjs';
 
-const commands = { start, dev, build, test, verify, plan, bench, shots };
+const commands = { start, dev, build, test, verify, plan, bench, mutants, shots };
 
 /** Runs one command; its exit code becomes ours. */
 export async function run(name, args) {
@@ -49,6 +49,12 @@ async function plan(args) {
 async function bench(args) {
   await ensureDependencies();
   return runTypescript('tests/bench/run.ts', args);
+}
+
+/** Plants faults in copies of the tree: each has to turn a test red. */
+async function mutants(args) {
+  await ensureDependencies();
+  return runTypescript('tests/mutants/run.ts', args);
 }
 
 /** Pictures of every page, from the build that the end-to-end tests use. */

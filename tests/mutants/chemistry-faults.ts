@@ -1,0 +1,231 @@
+import type { PlantedFault } from './planted-fault';
+
+const chlorine = ['tests/chemistry/reference-chlorine.test.ts', 'tests/chemistry/published-values.test.ts'];
+const calcite = ['tests/chemistry/reference-calcite.test.ts', 'tests/chemistry/published-values.test.ts'];
+const dosing = ['tests/chemistry/reference-dosing.test.ts', 'tests/chemistry/published-values.test.ts'];
+const published = ['tests/chemistry/published-values.test.ts'];
+
+const constants = 'lib/chemistry/published-constants.ts';
+const cyanurates = 'lib/chemistry/cyanurate-constants.ts';
+const substances = 'lib/chemistry/substances.ts';
+
+/** Faults in the water: constants, ions, stoichiometry. */
+export const chemistryFaults: readonly PlantedFault[] = [
+  {
+    file: constants,
+    find: '3000 / kelvin - 10.0686',
+    plant: '3000 / kelvin - 10.0786',
+    noticedBy: chlorine,
+    fault: 'constant of hypochlorous acid in its fourth digit',
+  },
+  {
+    file: constants,
+    find: '0.0253 * kelvin',
+    plant: '0.0254 * kelvin',
+    noticedBy: chlorine,
+    fault: 'temperature term of hypochlorous acid in its third digit',
+  },
+  {
+    file: constants,
+    find: '126.8339 * Math.log10(kelvin)',
+    plant: '126.7339 * Math.log10(kelvin)',
+    noticedBy: published,
+    fault: 'first constant of carbonic acid in its fourth digit',
+  },
+  {
+    file: constants,
+    find: '38.92561 * Math.log10(kelvin)',
+    plant: '38.93561 * Math.log10(kelvin)',
+    noticedBy: published,
+    fault: 'second constant of carbonic acid in its fourth digit',
+  },
+  {
+    file: constants,
+    find: '71.595 * Math.log10(kelvin)',
+    plant: '71.505 * Math.log10(kelvin)',
+    noticedBy: calcite,
+    fault: 'solubility of calcite in its fourth digit',
+  },
+  {
+    file: constants,
+    find: '669365 / (kelvin * kelvin)',
+    plant: '666365 / (kelvin * kelvin)',
+    noticedBy: ['tests/chemistry/reference-outgassing.test.ts', ...published],
+    fault: 'solubility of carbon dioxide in its third digit',
+  },
+  {
+    file: constants,
+    find: '123.73158 * Math.log10(kelvin)',
+    plant: '123.63158 * Math.log10(kelvin)',
+    noticedBy: published,
+    fault: 'dissociation of water in its fourth digit',
+  },
+  {
+    file: constants,
+    find: 'return -9.24 - (enthalpyOverGasConstant',
+    plant: 'return -9.42 - (enthalpyOverGasConstant',
+    noticedBy: published,
+    fault: 'two digits of the borate constant swapped',
+  },
+  {
+    file: cyanurates,
+    find: 'oneHydrolysis: 10 ** -5.62',
+    plant: 'oneHydrolysis: 10 ** -5.63',
+    noticedBy: chlorine,
+    fault: 'first hydrolysis of chlorinated stabilizer in its third digit',
+  },
+  {
+    file: cyanurates,
+    find: 'firstAcid: 10 ** -6.88',
+    plant: 'firstAcid: 10 ** -6.97',
+    noticedBy: chlorine,
+    fault: 'constant of the later set inside the earlier one',
+  },
+  {
+    file: cyanurates,
+    find: 'return 2028 / kelvin - 2.15',
+    plant: 'return 2029 / kelvin + 2.15',
+    noticedBy: chlorine,
+    fault: 'sign flipped in the later set',
+  },
+  {
+    file: 'lib/chemistry/activity.ts',
+    find: 'return 1.6e-5 * dissolvedSolids',
+    plant: 'return 2.5e-5 * dissolvedSolids',
+    noticedBy: chlorine,
+    fault: 'ionic strength of river water',
+  },
+  {
+    file: 'lib/chemistry/activity.ts',
+    find: '(root / (1 + root) - 0.3 * ionicStrength)',
+    plant: '(root / (1 + root) + 0.3 * ionicStrength)',
+    noticedBy: ['tests/chemistry/activity.test.ts', ...calcite],
+    fault: 'sign flipped in the Davies equation',
+  },
+  {
+    file: 'lib/chemistry/activity.ts',
+    find: '1.82e6 / (product * Math.sqrt(product))',
+    plant: '1.82e6 / product',
+    noticedBy: ['tests/chemistry/activity.test.ts'],
+    fault: 'a power lost in the Debye-Hückel coefficient',
+  },
+  {
+    file: 'lib/chemistry/carbonate-balance.ts',
+    find: 'const singlePair = free * pairOne * z;',
+    plant: 'const singlePair = 0 * free * pairOne * z;',
+    noticedBy: dosing,
+    fault: 'ion pair of calcium and bicarbonate dropped',
+  },
+  {
+    file: 'lib/chemistry/carbonate-balance.ts',
+    find: 'const ofCarbon = bicarbonate + 2 * z + singlePair + 2 * doublePair;',
+    plant: 'const ofCarbon = bicarbonate + z + singlePair + 2 * doublePair;',
+    noticedBy: dosing,
+    fault: 'carbonate counted with one charge',
+  },
+  {
+    file: 'lib/chemistry/chlorine-balance.ts',
+    find: 'const chargeOne = y * x * (b1 + 2 * b2);',
+    plant: 'const chargeOne = y * x * (b1 - 2 * b2);',
+    noticedBy: ['tests/chemistry/solver.test.ts', ...dosing],
+    fault: 'charge of a chlorinated stabilizer ion with the wrong sign',
+  },
+  {
+    file: 'lib/chemistry/saturation.ts',
+    find: 'Math.log10(species.calcium * species.carbonate) - solubility',
+    plant: 'Math.log10(species.calcium * species.carbonate) + solubility',
+    noticedBy: calcite,
+    fault: 'sign of the solubility flipped in the saturation index',
+  },
+  {
+    file: 'lib/chemistry/saturation.ts',
+    find: '-13.12 * Math.log10',
+    plant: '-13.21 * Math.log10',
+    noticedBy: [...published, 'tests/chemistry/reference-calcite.test.ts'],
+    fault: "two digits swapped in the handbook's temperature term",
+  },
+  {
+    file: substances,
+    find: 'const moles = chlorineMoles(strength) / 3;',
+    plant: 'const moles = chlorineMoles(strength) / 2;',
+    noticedBy: dosing,
+    fault: 'trichlor with two chlorines',
+  },
+  {
+    file: substances,
+    find: '        alkalinity: moles,\n        dissolvedSolids: moles * CYANURATE_OF_DICHLOR,',
+    plant: '        alkalinity: 0,\n        dissolvedSolids: moles * CYANURATE_OF_DICHLOR,',
+    noticedBy: dosing,
+    fault: 'dichlor as an acid and not as its sodium salt',
+  },
+  {
+    file: substances,
+    find: 'alkalinity: -moles, dissolvedSolids: moles * MOLAR_MASS.hydrogenChloride',
+    plant: 'alkalinity: moles, dissolvedSolids: moles * MOLAR_MASS.hydrogenChloride',
+    noticedBy: dosing,
+    fault: 'acid that raises alkalinity',
+  },
+  {
+    file: substances,
+    find: 'return 1 + 0.00509 * strength;',
+    plant: 'return 1;',
+    noticedBy: dosing,
+    fault: 'millilitres of acid taken for grams',
+  },
+  {
+    file: substances,
+    find: 'alkalinity: 2 * moles,\n        calcium: moles,',
+    plant: 'alkalinity: 2 * moles,\n        calcium: 2 * moles,',
+    noticedBy: dosing,
+    fault: 'granules with twice their calcium',
+  },
+  {
+    file: 'lib/chemistry/molar-masses.ts',
+    find: 'hydrogenChloride: 36.461,',
+    plant: 'hydrogenChloride: 36.641,',
+    noticedBy: ['tests/chemistry/molar-masses.test.ts'],
+    fault: 'two digits of a molar mass swapped',
+  },
+  {
+    file: 'lib/chemistry/dose.ts',
+    find: 'if (-chlorine > present) {',
+    plant: 'if (-chlorine > 2 * present) {',
+    noticedBy: ['tests/chemistry/laws.test.ts', 'tests/chemistry/range.test.ts', ...dosing],
+    fault: 'thiosulfate whose acid does not stop when the chlorine is gone',
+  },
+  {
+    file: 'lib/chemistry/dose.ts',
+    find: "requireInRange('volume', volume, PERMITTED_VOLUME);\n  return analysisOf(addDoseToLedger",
+    plant: 'return analysisOf(addDoseToLedger',
+    noticedBy: ['tests/chemistry/range.test.ts'],
+    fault: 'volume of a dose unchecked',
+  },
+  {
+    file: 'lib/chemistry/dose.ts',
+    find: 'const perLitre = amount / (volume * 1000);',
+    plant: 'const perLitre = amount / (volume * 3785.4);',
+    noticedBy: dosing,
+    fault: 'cubic metres taken for thousands of gallons',
+  },
+  {
+    file: 'lib/chemistry/aerate.ts',
+    find: 'if (carbonate + alkalinityWithoutCarbonate(ledger, h, constants) > ledger.alkalinity) high = middle;',
+    plant: 'if (carbonate > ledger.alkalinity) high = middle;',
+    noticedBy: ['tests/chemistry/reference-outgassing.test.ts'],
+    fault: 'stabilizer forgotten when carbon dioxide leaves',
+  },
+  {
+    file: 'lib/chemistry/hypochlorite-decay.ts',
+    find: '2.083e10 * kelvin * Math.exp(-1.018e5',
+    plant: '2.083e10 * kelvin * Math.exp(-1.028e5',
+    noticedBy: published,
+    fault: 'activation energy of stored liquid in its third digit',
+  },
+  {
+    file: 'lib/chemistry/hypochlorite-decay.ts',
+    find: 'return strength / (1 + days / hypochloriteHalfLife(strength, temperature));',
+    plant: 'return strength * (1 - days / hypochloriteHalfLife(strength, temperature));',
+    noticedBy: [...published, 'tests/storage/liquid-strength.test.ts'],
+    fault: 'liquid that weakens along a straight line, below nothing',
+  },
+];

@@ -1,0 +1,163 @@
+import type { PlantedFault } from './planted-fault';
+
+const verdict = ['tests/verdict/table.test.ts', 'tests/verdict/oracle.test.ts', 'tests/verdict/until.test.ts'];
+const net = ['tests/planner/safety-net.test.ts'];
+const rules = ['tests/standards/limits-and-care.test.ts'];
+
+/** Faults in limits, verdict and safety net: what keeps people out of the water and doses apart. */
+export const ruleFaults: readonly PlantedFault[] = [
+  {
+    file: 'lib/standards/limits.ts',
+    find: "codeMinimumStabilized: { value: 2, unit: 'mg/L'",
+    plant: "codeMinimumStabilized: { value: 1, unit: 'mg/L'",
+    noticedBy: rules,
+    fault: 'public minimum of plain water in stabilized water',
+  },
+  {
+    file: 'lib/standards/limits.ts',
+    find: '  stabilizerPerLowestLevel: {\n    value: 20,',
+    plant: '  stabilizerPerLowestLevel: {\n    value: 25,',
+    noticedBy: rules,
+    fault: 'lowest level at a twenty-fifth of the stabilizer',
+  },
+  {
+    file: 'lib/standards/limits.ts',
+    find: "pHHighest: { value: 8.0, unit: 'pH'",
+    plant: "pHHighest: { value: 8.2, unit: 'pH'",
+    noticedBy: rules,
+    fault: 'swimming allowed up to pH 8.2',
+  },
+  {
+    file: 'lib/standards/limits.ts',
+    find: '  return Math.max(\n    codeMinimum(',
+    plant: '  return Math.min(\n    codeMinimum(',
+    noticedBy: rules,
+    fault: 'the smaller of two minimums',
+  },
+  {
+    file: 'lib/standards/caps.ts',
+    find: "'calcium-hypochlorite': { value: 4, source: calculatedAmount },",
+    plant: "'calcium-hypochlorite': { value: 40, source: calculatedAmount },",
+    noticedBy: rules,
+    fault: 'cap of granules tenfold',
+  },
+  {
+    file: 'lib/standards/caps.ts',
+    find: "'hydrochloric-acid': { perCubicMetre: 16, strength: 31.45,",
+    plant: "'hydrochloric-acid': { perCubicMetre: 61, strength: 31.45,",
+    noticedBy: rules,
+    fault: 'two digits of the cap of acid swapped',
+  },
+  {
+    file: 'lib/storage/label-strength.ts',
+    find: 'DENSITY_RISE = 0.0152',
+    plant: 'DENSITY_RISE = 0.0125',
+    noticedBy: ['tests/storage/label-strength.test.ts'],
+    fault: 'two digits of a density swapped',
+  },
+  {
+    file: 'lib/storage/liquid-strength.ts',
+    find: 'days: Math.max(0, daysBetween(bottle.boughtOn, day)),',
+    plant: 'days: Math.abs(daysBetween(bottle.boughtOn, day)),',
+    noticedBy: ['tests/storage/liquid-strength.test.ts'],
+    fault: 'a bottle that ages before it is bought',
+  },
+  {
+    file: 'lib/storage/stay-apart.ts',
+    find: "  ['chlorine', 'chlorine', 'fire-or-explosion'],\n",
+    plant: '',
+    noticedBy: ['tests/storage/stay-apart.test.ts'],
+    fault: 'two chlorines allowed to stand together',
+  },
+  {
+    file: 'lib/verdict/reasons.ts',
+    find: "...firstOutside('chlorine-over-maximum', middles, 'over', () => maximum),",
+    plant: "...firstOutside('chlorine-over-maximum', middles, 'under', () => maximum),",
+    noticedBy: verdict,
+    fault: 'too much chlorine told as too little',
+  },
+  {
+    file: 'lib/verdict/reasons.ts',
+    find: 'const running = waits.filter(({ from, until }) => !(instant < from || instant >= until));',
+    plant: 'const running = waits.filter(({ from, until }) => !(instant < from || instant >= until - 3_600_000));',
+    noticedBy: verdict,
+    fault: 'a waiting time an hour too short',
+  },
+  {
+    file: 'lib/verdict/reasons.ts',
+    find: 'return age > limit ? [{ code: old, value: age, limit }] : [];',
+    plant: 'return age > 2 * limit ? [{ code: old, value: age, limit }] : [];',
+    noticedBy: verdict,
+    fault: 'a verdict on a test of four days ago',
+  },
+  {
+    file: 'lib/verdict/reasons.ts',
+    find: 'return volume / limits.waterPerSwimmerHour.value;',
+    plant: 'return volume * limits.waterPerSwimmerHour.value;',
+    noticedBy: verdict,
+    fault: 'a crowd that never ends the verdict',
+  },
+  {
+    file: 'lib/verdict/false-zero.ts',
+    find: 'reading.value < lowEdge / 2',
+    plant: 'reading.value < lowEdge / 20',
+    noticedBy: ['tests/verdict/false-zero.test.ts'],
+    fault: 'a false zero that is not asked about',
+  },
+  {
+    file: 'lib/verdict/index.ts',
+    find: "until: state === 'fine' ? Math.floor(from) : Math.ceil(from),",
+    plant: "until: (state === 'fine' ? Math.floor(from) : Math.ceil(from)) + 3_600_000,",
+    noticedBy: verdict,
+    fault: '"fine until" an hour too late',
+  },
+  {
+    file: 'lib/planner/safety/assert-safe-plan.ts',
+    find: 'if (!(pool.volume >= 1 && pool.volume <= 1000))',
+    plant: 'if (!(pool.volume >= 1))',
+    noticedBy: net,
+    fault: 'volume without its upper clamp',
+  },
+  {
+    file: 'lib/planner/safety/assert-safe-plan.ts',
+    find: 'value > limits.freeChlorineMaximum.value',
+    plant: 'value > 2 * limits.freeChlorineMaximum.value',
+    noticedBy: net,
+    fault: 'projected chlorine up to 20 mg/L let through',
+  },
+  {
+    file: 'lib/planner/safety/evening-faults.ts',
+    find: 'if (apart >= limits.acidToChlorineGap.value) return [];',
+    plant: 'if (apart >= 0) return [];',
+    noticedBy: net,
+    fault: 'chlorine right after acid let through',
+  },
+  {
+    file: 'lib/planner/safety/evening-faults.ts',
+    find: 'return planning && sum > 1 + ROUNDING ?',
+    plant: 'return planning && sum > 2 + ROUNDING ?',
+    noticedBy: net,
+    fault: 'twice the cap of an evening let through',
+  },
+  {
+    file: 'lib/planner/safety/tablet-faults.ts',
+    find: 'if (count > pool.feeder.capacity)',
+    plant: 'if (count > pool.feeder.capacity + 1)',
+    noticedBy: ['tests/planner/tablet-net.test.ts'],
+    fault: 'one tablet more than the feeder holds',
+  },
+  {
+    file: 'lib/planner/safety/dose-faults.ts',
+    find: 'if (swimming.some(({ from, to }) => at >= from && at < to))',
+    plant: 'if (swimming.some(({ from, to }) => at > to && at < from))',
+    noticedBy: net,
+    fault: 'doses in swim hours let through',
+  },
+  {
+    file: 'lib/planner/first-dose.ts',
+    find: 'count > 1 ? Math.floor(count / 2) : count',
+    plant: 'count > 1 ? Math.ceil(count) : count',
+    noticedBy: ['tests/planner/first-dose.test.ts'],
+    fault: 'first dose into a pool of estimated volume not halved',
+  },
+];
