@@ -1,7 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import { chlorineSpecies, type WaterAnalysis } from '@/lib/chemistry';
 import { projectWeek } from '@/lib/projection';
-import { lightThroughDepth, lossUnderSun } from '@/lib/projection/step';
+import {
+  HYPOCHLORITE_PHOTOLYSIS,
+  HYPOCHLOROUS_ACID_PHOTOLYSIS,
+  lightThroughDepth,
+  lossUnderSun,
+} from '@/lib/projection/step';
+import { referenceRows } from '../chemistry/reference-table';
 import { aPool, everyDay, someWater, still } from './pools';
 
 const midnight = '2026-07-05T00:00:00-04:00';
@@ -11,6 +17,43 @@ function halfLife(changes: Partial<WaterAnalysis>): number {
   const water = someWater({ combinedChlorine: 0, temperature: 25, dissolvedSolids: 0, ...changes });
   const perHour = lossUnderSun(chlorineSpecies(water), 0.006) / water.freeChlorine;
   return (60 * Math.LN2) / perHour;
+}
+
+const rows = referenceRows('published-values.csv');
+
+/** A row of tests/reference/published-values.csv; its source stands there. */
+function published(id: string) {
+  const row = rows.find((each) => each.text('id') === id)!;
+  return { expected: row.number('expected'), tolerance: row.number('tolerance') };
+}
+
+describe('published single values', () => {
+  const surfaceHalfLife = (pH: number) => halfLife({ pH, cyanuricAcid: 0 });
+  it.each<[string, () => number]>([
+    ['UV-KHOCL', () => HYPOCHLOROUS_ACID_PHOTOLYSIS / 3600],
+    ['UV-KOCL', () => HYPOCHLORITE_PHOTOLYSIS / 3600],
+    ['UV-T12-5', () => surfaceHalfLife(5)],
+    ['UV-MIX-7.0', () => surfaceHalfLife(7)],
+    ['UV-MIX-7.2', () => surfaceHalfLife(7.2)],
+    ['UV-MIX-7.5', () => surfaceHalfLife(7.5)],
+    ['UV-MIX-8.0', () => surfaceHalfLife(8)],
+    ['DIL-2', () => shareLeftAfterWeeks(20, 0.02)],
+  ])('%s', (id, found) => {
+    const { expected, tolerance } = published(id);
+    expect(Math.abs(found() - expected)).toBeLessThanOrEqual(tolerance);
+  });
+});
+
+/** Share of stabilizer left when each week a share of the water goes in a backwash. */
+function shareLeftAfterWeeks(weeks: number, replaced: number): number {
+  const pool = aPool(still.pool);
+  let stabilizer = 80;
+  for (let week = 0; week < weeks; week++) {
+    const start = { takenAt: midnight, water: someWater({ cyanuricAcid: stabilizer }) };
+    const backwash = [0, 0, 0, replaced * pool.volume, 0, 0, 0];
+    stabilizer = projectWeek(pool, start, { ...still.week, backwash }, [], still.parameters).water.at(-1)!.cyanuricAcid;
+  }
+  return stabilizer / 80;
 }
 
 describe('loss of chlorine to sunlight', () => {
