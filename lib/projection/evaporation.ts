@@ -24,10 +24,10 @@ const permitted = {
 } as const;
 
 /** 95 Btu/(h ft2 inHg), and 0.425 more for each ft/min of wind, in kW/(m2 kPa) and kW/(m2 kPa) for each m/s. */
-const STILL_AIR = 0.0885;
-const PER_WIND = 0.0779;
+export const STILL_AIR = 0.0885;
+export const PER_WIND = 0.0779;
 /** A pool that nobody stirs gives off less than the equation for open vessels. */
-const QUIET_POOL = 0.74;
+export const QUIET_POOL = 0.74;
 const SECONDS_PER_DAY = 86_400;
 
 /**

@@ -5,11 +5,12 @@ const WORDS = { wide: 0.24, high: 0.12 };
 const places = [0, 0.3, 0.5, 0.15, 0.65];
 
 /** Where along a level its words stand without lying on a line: at the left where that is free. */
-export function clearPlace({ across, up, lines }: Curve, level: Level): number {
+export function clearPlace({ across, up, lines, ranges = [] }: Curve, level: Level): number {
   const base = shareOf(level.at, up);
   const [from, to] = level.forbidden === 'below' ? [base - WORDS.high, base] : [base, base + WORDS.high];
+  const drawn = [...lines.map(({ points }) => points), ...ranges.flatMap(({ low, high }) => [low, high])];
   const isClear = (place: number) =>
-    lines.every(({ points }) =>
+    drawn.every((points) =>
       points.every(([x, y]) => {
         const [right, height] = [shareOf(x, across), shareOf(y, up)];
         return right < place || right > place + WORDS.wide || height < from || height > to;

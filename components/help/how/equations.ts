@@ -150,8 +150,8 @@ export const equations: Readonly<Record<HowPage, Equation>> = {
   evaporation: {
     terms: [
       { word: 'evaporates', symbol: '*E*' },
-      { sign: '=', word: 'drive', symbol: '(*p*{_w} − *p*{_a})' },
-      { sign: '×', word: 'wind', symbol: '*f*(*u*)' },
+      { sign: '=', word: 'wind', symbol: `${n.quietPool} (${n.stillAir} +\u00a0${n.perWind}\u00a0*v*)` },
+      { sign: '×', word: 'drive', symbol: '(*p*{_w} − *p*{_a})' },
       { sign: '/', word: 'heat', symbol: '*Y*' },
     ],
   },

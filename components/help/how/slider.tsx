@@ -22,12 +22,12 @@ export function Slider({ label, value, written, low, high, step, off, onMove }: 
   const id = useId();
   return (
     <div className="min-w-0 py-1">
-      <label htmlFor={id} className="flex items-baseline justify-between gap-2 text-body">
-        {label}
+      <div className="flex items-baseline justify-between gap-2 text-body">
+        <label htmlFor={id}>{label}</label>
         <output htmlFor={id} className="font-display text-[21px] leading-[26px] font-headline whitespace-nowrap">
           {written}
         </output>
-      </label>
+      </div>
       <div className="relative">
         <svg
           className="pointer-events-none absolute inset-x-3 top-0 h-11"

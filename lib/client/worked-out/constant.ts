@@ -26,6 +26,11 @@ export type SourceName =
   | 'handbook'
   | 'nowell1992'
   | 'madronich2007'
+  | 'michalsky1988'
+  | 'smith1998'
+  | 'alduchov1996'
+  | 'fao56'
+  | 'kfla2011'
   | 'bathers'
   | 'practice'
   | 'fitted'
@@ -61,7 +66,10 @@ export type ConstantUnit =
   | 'sigmaOfLog'
   | 'sigma'
   | 'gPerM3'
-  | 'pools';
+  | 'pools'
+  | 'metres'
+  | 'kilopascals'
+  | 'kilojoulesPerKilogram';
 
 /**
  * One constant as the help page lists it. `of` names where it lives, `folder/file#export.key`, so that a test can hold the

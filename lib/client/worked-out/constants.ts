@@ -1,10 +1,17 @@
+import { companionConstants } from './companion-constants';
 import { productConstants } from './product-constants';
 import { ruleConstants } from './rule-constants';
 import { waterConstants } from './water-constants';
 import { weekConstants } from './week-constants';
 
 /** Every constant in use, in groups; the help page prints them all, each with its source. */
-export const constantGroups = [...waterConstants, ...productConstants, ...weekConstants, ...ruleConstants] as const;
+export const constantGroups = [
+  ...waterConstants,
+  ...productConstants,
+  ...weekConstants,
+  ...ruleConstants,
+  ...companionConstants,
+] as const;
 
 export type ListedGroup = (typeof constantGroups)[number];
 export type ListedConstant = ListedGroup['constants'][number];

@@ -1,3 +1,4 @@
+import { PER_WIND, QUIET_POOL, STILL_AIR } from '@/lib/projection/evaporation';
 import { ENSEMBLE_SIZE } from '@/lib/projection/ensemble';
 import { parametersOf } from '@/lib/projection/parameters';
 import { holdRates, newStepRates, noRelease, SHARE_BECOMING_COMBINED } from '@/lib/projection/step';
@@ -23,4 +24,7 @@ export const numbersInEquations = {
   ultravioletExponent: ULTRAVIOLET_EXPONENT,
   becomingCombined: SHARE_BECOMING_COMBINED,
   pools: ENSEMBLE_SIZE,
+  quietPool: QUIET_POOL,
+  stillAir: STILL_AIR,
+  perWind: PER_WIND,
 };

@@ -1,3 +1,8 @@
+import {
+  CHLORINE_PER_NITROGEN_AT_BREAKPOINT,
+  CHLORINE_PER_NITROGEN_IN_MONOCHLORAMINE,
+  FIELD_RULE_TIMES_COMBINED,
+} from '@/lib/chemistry/breakpoint';
 import { EXCESS_LYE, GAS_CONSTANT, hypochloriteDecayRate } from '@/lib/chemistry/hypochlorite-decay';
 import {
   CYANURATE_OF_DICHLOR,
@@ -73,6 +78,27 @@ export const productConstants = [
       unit: 'gPerMole',
       of: 'chemistry/substances#CYANURATE_OF_DICHLOR',
       source: 'epa2017',
+    },
+  ]),
+  group('breakpoint', ['combined-chlorine'], 'stoichiometry', [
+    {
+      name: 'perNitrogen',
+      value: CHLORINE_PER_NITROGEN_AT_BREAKPOINT,
+      unit: 'none',
+      of: 'chemistry/breakpoint#CHLORINE_PER_NITROGEN_AT_BREAKPOINT',
+    },
+    {
+      name: 'perNitrogenInMonochloramine',
+      value: CHLORINE_PER_NITROGEN_IN_MONOCHLORAMINE,
+      unit: 'none',
+      of: 'chemistry/breakpoint#CHLORINE_PER_NITROGEN_IN_MONOCHLORAMINE',
+    },
+    {
+      name: 'fieldRule',
+      value: FIELD_RULE_TIMES_COMBINED,
+      unit: 'none',
+      of: 'chemistry/breakpoint#FIELD_RULE_TIMES_COMBINED',
+      source: 'kfla2011',
     },
   ]),
   group('decay', ['liquid-strength'], 'adam1999', [

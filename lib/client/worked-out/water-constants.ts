@@ -1,4 +1,5 @@
 import {
+  activityCoefficients,
   debyeHuckelCoefficient,
   dielectricConstant,
   ionicStrengthOf,
@@ -145,8 +146,16 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/activity#debyeHuckelCoefficient',
       at: [celsius],
-      formula: '*A* = 1.82 · 10{^6} (*ε* *T*){^−1.5}, log *γ* = −*A* z² (√*I* / (1 + √*I*) − 0.3 *I*)',
+      formula: '*A* = 1.82 · 10{^6} (*ε* *T*){^−1.5}',
       source: 'stumm',
+    },
+    {
+      name: 'davies',
+      value: activityCoefficients(celsius, ionicStrengthOf(DEFAULT_DISSOLVED_SOLIDS)).single,
+      unit: 'none',
+      of: 'chemistry/activity#activityCoefficients.single',
+      at: [celsius, ionicStrengthOf(DEFAULT_DISSOLVED_SOLIDS)],
+      formula: 'log *γ* = −*A* *z*² (√*I* / (1 + √*I*) − 0.3 *I*), uncharged log *γ* = 0.1 *I*',
     },
     {
       name: 'dielectric',

@@ -1,4 +1,5 @@
 import { coverPasses } from '@/lib/projection/forcing';
+import { latentHeat, PER_WIND, QUIET_POOL, saturationPressure, STILL_AIR } from '@/lib/projection/evaporation';
 import { ENSEMBLE_SIZE } from '@/lib/projection/ensemble';
 import { parametersOf, priorSigma } from '@/lib/projection/parameters';
 import {
@@ -20,9 +21,12 @@ import {
 } from '@/lib/projection/step';
 import { lifeOf } from '@/lib/projection/tablets';
 import { readingMethods } from '@/lib/schemas/reading';
+import { solarPosition } from '@/lib/sun/solar-position';
+import { weekAheadSchema } from '@/lib/schemas/week-ahead';
 import { REFERENCE_ELEVATION, ULTRAVIOLET_EXPONENT } from '@/lib/sun/ultraviolet';
 import { type Constant, type ConstantUnit, group, type SourceName } from './constant';
 
+const MIDSUMMER = Date.UTC(2026, 5, 21, 12);
 const still = parametersOf({ volume: 1, waterFeatures: false });
 const moving = parametersOf({ volume: 1, waterFeatures: true });
 
@@ -88,6 +92,17 @@ export const weekConstants = [
       source: 'madronich2007',
     },
   ]),
+  group('solar', ['sun'], 'michalsky1988', [
+    {
+      name: 'declination',
+      value: solarPosition(MIDSUMMER).declination,
+      unit: 'none',
+      of: 'sun/solar-position#solarPosition.declination',
+      at: [MIDSUMMER],
+      formula:
+        '*L* = 280.46 + 0.9856474 *n*, *g* = 357.528 + 0.9856003 *n*, *λ* = *L* + 1.915 sin *g* + 0.02 sin 2*g*, *ε* = 23.439 − 4 · 10{^−7} *n*, sidereal time 280.46062 + 360.98564737 *n*',
+    },
+  ]),
   group('covers', ['sun', 'evaporation'], 'practice', [
     {
       name: 'floatingSun',
@@ -107,6 +122,41 @@ export const weekConstants = [
       value: coverPasses.opaque.evaporation,
       unit: 'none',
       of: 'projection/forcing#coverPasses.opaque.evaporation',
+    },
+  ]),
+  group('evaporation', ['evaporation'], 'smith1998', [
+    {
+      name: 'stillAir',
+      value: STILL_AIR,
+      unit: 'none',
+      of: 'projection/evaporation#STILL_AIR',
+    },
+    { name: 'perWind', value: PER_WIND, unit: 'none', of: 'projection/evaporation#PER_WIND' },
+    { name: 'quietPool', value: QUIET_POOL, unit: 'none', of: 'projection/evaporation#QUIET_POOL' },
+    {
+      name: 'saturationPressure',
+      value: saturationPressure(25),
+      unit: 'kilopascals',
+      of: 'projection/evaporation#saturationPressure',
+      at: [25],
+      formula: '*p* = 0.61094 e{^17.625 *t* / (*t* + 243.04)}',
+      source: 'alduchov1996',
+    },
+    {
+      name: 'latentHeat',
+      value: latentHeat(25),
+      unit: 'kilojoulesPerKilogram',
+      of: 'projection/evaporation#latentHeat',
+      at: [25],
+      formula: '*Y* = 2501 − 2.361 *t*',
+      source: 'fao56',
+    },
+    {
+      name: 'evaporationDefault',
+      value: weekAheadSchema.parse({}).evaporation[0] ?? 0,
+      unit: 'mm',
+      of: 'schemas/week-ahead#weekAheadSchema',
+      source: 'practice',
     },
   ]),
   group('darkAndSwimmers', ['free-chlorine', 'swimmers', 'combined-chlorine'], 'practice', [

@@ -4,7 +4,10 @@ import type { Journey, Stage } from '../support/journey';
 import { type Answer, Person } from '../support/person';
 import type { Server } from '../support/server';
 
-const openPages = ['/', '/sign-in', '/sign-up', '/help', '/help/emergency', '/help/safety', '/there-is-no-such-page'];
+const openPages = [
+  ...['/', '/sign-in', '/sign-up', '/help', '/help/emergency', '/help/safety', '/help/how', '/help/how/sun'],
+  '/there-is-no-such-page',
+];
 const householdPages = ['/week', '/test', '/pool', '/pool/size', '/help'];
 
 /** Headers and cookies of both kinds of origin, and a policy with a nonce of its own on every page. */

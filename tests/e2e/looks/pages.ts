@@ -32,6 +32,20 @@ export const signedOut: readonly View[] = [
   { name: 'help', path: '/help' },
   { name: 'emergency', path: '/help/emergency' },
   { name: 'safety', path: '/help/safety' },
+  { name: 'how', path: '/help/how' },
+  { name: 'how-free-chlorine', path: '/help/how/free-chlorine' },
+  {
+    name: 'how-forms-moved',
+    path: '/help/how/chlorine-forms',
+    async prepare(page) {
+      await page.getByRole('slider', { name: words('how-examples.input.stabilizer') }).press('PageUp');
+      await page.getByRole('button', { name: words('how-examples.putBack') }).waitFor();
+    },
+  },
+  { name: 'how-ph', path: '/help/how/ph' },
+  { name: 'how-likely-range', path: '/help/how/likely-range' },
+  { name: 'how-unknown', path: '/help/how/unknown' },
+  { name: 'how-constants', path: '/help/how/constants' },
   { name: 'not-found', path: '/there-is-no-such-page', missing: true },
 ];
 

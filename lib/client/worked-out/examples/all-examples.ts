@@ -5,6 +5,8 @@ import { chlorineForms } from './chlorine-forms';
 import { combinedChlorineExample } from './combined-chlorine';
 import type { Input, InputName, Worked } from './example';
 import { freeChlorine } from './free-chlorine';
+import { evaporationExample } from './evaporation';
+import { learningExample } from './learning';
 import { likelyRangeExample } from './likely-range';
 import { liquidStrengthExample } from './liquid-strength';
 import { pHExample } from './ph';
@@ -39,4 +41,6 @@ export const examples: Partial<Record<HowPage, OpenExample>> = {
   'likely-range': open(likelyRangeExample),
   'liquid-strength': open(liquidStrengthExample),
   volume: open(volumeExample),
+  learning: open(learningExample),
+  evaporation: open(evaporationExample),
 };

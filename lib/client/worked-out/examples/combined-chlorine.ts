@@ -1,4 +1,5 @@
 import { ledgerOf } from '@/lib/chemistry';
+import { breakpointArithmetic } from '@/lib/chemistry/breakpoint';
 import { parametersOf } from '@/lib/projection/parameters';
 import { holdRates, moveOn, newStepRates, noRelease } from '@/lib/projection/step';
 import { limits } from '@/lib/standards/limits';
@@ -27,10 +28,13 @@ export const combinedChlorineExample: Example<'combinedChlorine'> = {
   work({ combinedChlorine }) {
     const open = course(combinedChlorine, 0);
     const covered = course(combinedChlorine, 1);
+    const { byStoichiometry, byFieldRule } = breakpointArithmetic(combinedChlorine);
     return {
       figures: [
         { name: 'combinedOpen', value: open.at(-1)?.[1] ?? 0, unit: 'mg/L', decimals: 1 },
         { name: 'combinedCovered', value: covered.at(-1)?.[1] ?? 0, unit: 'mg/L', decimals: 1 },
+        { name: 'halfRule', value: byStoichiometry, unit: 'mg/L', decimals: 1 },
+        { name: 'tenTimesRule', value: byFieldRule, unit: 'mg/L', decimals: 0 },
       ],
       curve: {
         across: { low: 0, high: DAYS, unit: 'days', decimals: 0, ticks: ticksOf(0, DAYS, 1) },

@@ -28,7 +28,8 @@ export type InputName =
   | 'deep'
   | 'airTemperature'
   | 'humidity'
-  | 'wind';
+  | 'wind'
+  | 'poolSun';
 
 export type ExampleUnit =
   | 'none'
@@ -149,6 +150,7 @@ export type FigureName =
   | 'dropOff'
   | 'evaporation'
   | 'evaporationVolume'
+  | 'evaporationCovered'
   | 'lossBefore'
   | 'lossLearnt'
   | 'trueLoss'
