@@ -58,7 +58,7 @@ export function integrateWeek(
   doses: readonly WeekDose[],
   setting: CourseSetting,
 ): Course {
-  const { parameters, depth, fillWater } = setting;
+  const { parameters, depth } = setting;
   const { stepsPerHour } = forcing;
   const ledger = { ...start.ledger };
   const half = { ...start.ledger };
@@ -82,24 +82,10 @@ export function integrateWeek(
   let constants = constantsOfLedger(ledger);
   let next = 0;
 
-  const happen = (instant: number) => {
-    for (; next < events.length && events[next]!.at <= instant; next++) {
-      const event = events[next]!;
-      if (event.kind === 'tablets') loads.push({ ...event.load });
-      else if (event.kind === 'backwash')
-        replaceWater(ledger, Math.min(1, event.volume / parameters.volume), fillWater, account);
-      else {
-        const before = ledger.freeChlorine;
-        addContents(ledger, parameters.volume, event.contents, event.amount);
-        account.dosed += ledger.freeChlorine - before;
-      }
-    }
-  };
-
   for (let step = 0; step <= forcing.steps; step++) {
     const from = forcing.startsAt + step * forcing.stepHours * MILLISECONDS_PER_HOUR;
     putActing(forcing, Math.min(step, forcing.steps - 1), acting);
-    happen(from);
+    next = happen(events, next, from, course, setting);
     if (acting.temperature !== ledger.temperature || step % (24 * stepsPerHour) === 0) {
       ledger.temperature = acting.temperature;
       constants = constantsOfLedger(ledger);
@@ -122,7 +108,7 @@ export function integrateWeek(
       holdRates(rates, whole ? acting : { ...acting, sun: sunBetween(forcing, at, cut) }, release, parameters, body);
       advance(ledger, half, state, constants, hours, setting, account);
       if (cut < to) {
-        happen(cut);
+        next = happen(events, next, cut, course, setting);
         solveLedger(ledger, constants, state);
       }
       at = cut;
@@ -131,27 +117,54 @@ export function integrateWeek(
   return course;
 }
 
+type Backwash = { at: number; kind: 'backwash'; volume: number };
+
+/** Lets everything happen that is due by an instant [ms]; tells which event comes next. */
+function happen(
+  events: readonly (WeekDose | Backwash)[],
+  next: number,
+  instant: number,
+  { end: ledger, loads, account }: Course,
+  { parameters, fillWater }: CourseSetting,
+): number {
+  for (; next < events.length && events[next]!.at <= instant; next++) {
+    const event = events[next]!;
+    if (event.kind === 'tablets') loads.push({ ...event.load });
+    else if (event.kind === 'backwash')
+      replaceWater(ledger, Math.min(1, event.volume / parameters.volume), fillWater, account);
+    else {
+      const before = ledger.freeChlorine;
+      addContents(ledger, parameters.volume, event.contents, event.amount);
+      account.dosed += ledger.freeChlorine - before;
+    }
+  }
+  return next;
+}
+
 /** The quantities of a ledger, and pH. */
 const ROWS = 10;
 
 /** Room for a course, in one block: asked of the system one by one, ten rows cost as much as ten hours of the course. */
 function newRows(hours: number): { hourly: LedgerSeries; pH: Float64Array } {
   const block = new ArrayBuffer(ROWS * hours * Float64Array.BYTES_PER_ELEMENT);
-  const row = (index: number) => new Float64Array(block, index * hours * Float64Array.BYTES_PER_ELEMENT, hours);
   return {
     hourly: {
-      freeChlorine: row(0),
-      combinedChlorine: row(1),
-      cyanurate: row(2),
-      alkalinity: row(3),
-      inorganicCarbon: row(4),
-      calcium: row(5),
-      borate: row(6),
-      dissolvedSolids: row(7),
-      temperature: row(8),
+      freeChlorine: rowOf(block, 0, hours),
+      combinedChlorine: rowOf(block, 1, hours),
+      cyanurate: rowOf(block, 2, hours),
+      alkalinity: rowOf(block, 3, hours),
+      inorganicCarbon: rowOf(block, 4, hours),
+      calcium: rowOf(block, 5, hours),
+      borate: rowOf(block, 6, hours),
+      dissolvedSolids: rowOf(block, 7, hours),
+      temperature: rowOf(block, 8, hours),
     },
-    pH: row(9),
+    pH: rowOf(block, 9, hours),
   };
+}
+
+function rowOf(block: ArrayBuffer, index: number, hours: number): Float64Array {
+  return new Float64Array(block, index * hours * Float64Array.BYTES_PER_ELEMENT, hours);
 }
 
 function keep(hourly: LedgerSeries, hour: number, ledger: Ledger): void {
@@ -251,8 +264,6 @@ function putActing(forcing: Forcing, step: number, acting: Acting): Acting {
   acting.temperature = forcing.temperature[step]!;
   return acting;
 }
-
-type Backwash = { at: number; kind: 'backwash'; volume: number };
 
 function eventsOf(forcing: Forcing, doses: readonly WeekDose[]): (WeekDose | Backwash)[] {
   const endsAt = forcing.startsAt + forcing.steps * forcing.stepHours * MILLISECONDS_PER_HOUR;

@@ -4,6 +4,10 @@ const RUNS = 7;
 /** Long enough for the clock, and for the machine's other work to spread evenly over a run [ms]. */
 const LEAST_MILLISECONDS = 30;
 
+/** A long run stands between longer stretches of the loop, one loop for so much of it [ms], up to so many. */
+const MILLISECONDS_PER_LOOP = 100;
+const MOST_LOOPS = 6;
+
 /** What a piece costs: time of one pass, and the same as a multiple of the reference loop. */
 export type Cost = { milliseconds: number; multiple: number };
 
@@ -26,13 +30,14 @@ let kept = 0;
  * both slower. The clock counts this process's own time on the processor: another process that is busy does not count.
  */
 export function costOf({ run }: Piece): Cost {
-  const passes = warmUp(run);
+  const { passes, took: atFirst } = warmUp(run);
+  const loops = Math.min(MOST_LOOPS, Math.ceil(atFirst / MILLISECONDS_PER_LOOP));
   const times: number[] = [];
   const multiples: number[] = [];
-  let loopBefore = timed(referenceLoop.run, 1);
+  let loopBefore = timed(referenceLoop.run, loops) / loops;
   for (let round = 0; round < RUNS; round++) {
     const took = timed(run, passes) / passes;
-    const loopAfter = timed(referenceLoop.run, 1);
+    const loopAfter = timed(referenceLoop.run, loops) / loops;
     times.push(took);
     multiples.push(took / ((loopBefore + loopAfter) / 2));
     loopBefore = loopAfter;
@@ -40,14 +45,14 @@ export function costOf({ run }: Piece): Cost {
   return { milliseconds: median(times), multiple: median(multiples) };
 }
 
-/** Runs until the compiler has done its work; tells how many passes make a run long enough. */
-function warmUp(run: Piece['run']): number {
+/** Runs until the compiler has done its work; tells how many passes make a run long enough, and how long it then is [ms]. */
+function warmUp(run: Piece['run']): { passes: number; took: number } {
   timed(referenceLoop.run, 2);
   let last = 0;
   for (let spent = 0; spent < 10 * LEAST_MILLISECONDS; spent += last + 0.01) last = timed(run, 1);
   let passes = 1;
   for (; last < LEAST_MILLISECONDS; last = timed(run, passes)) passes *= 2;
-  return passes;
+  return { passes, took: last };
 }
 
 /** Processor time of this process [ms]. */
