@@ -1,8 +1,9 @@
 import type { Curve, Level } from '@/lib/client/worked-out/examples/curve';
 import { shareOf } from './curve-path';
 
-const WORDS = { wide: 0.24, high: 0.12 };
-const places = [0, 0.3, 0.5, 0.15, 0.65];
+/** What words take on a phone, as shares of the picture. */
+const WORDS = { wide: 0.5, high: 0.12 };
+const places = [0, 0.15, 0.3, 0.45];
 
 /** Where along a level its words stand without lying on a line: at the left where that is free. */
 export function clearPlace({ across, up, lines, ranges = [] }: Curve, level: Level): number {

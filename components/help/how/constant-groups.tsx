@@ -8,7 +8,16 @@ import { Typeset } from './typeset';
 const MANY = 4;
 
 /** Groups of constants, each figure with its source. `folded` closes the long ones; they open without any script. */
-export function ConstantGroups({ groups, folded = false }: { groups: readonly ListedGroup[]; folded?: boolean }) {
+export function ConstantGroups({
+  groups,
+  heading: Heading,
+  folded = false,
+}: {
+  groups: readonly ListedGroup[];
+  /** What fits under the heading that the groups stand below. */
+  heading: 'h2' | 'h3';
+  folded?: boolean;
+}) {
   const t = useTranslations('how-constants');
   return (
     <div>
@@ -20,7 +29,7 @@ export function ConstantGroups({ groups, folded = false }: { groups: readonly Li
           className="group border-t border-rule-2"
         >
           <summary className="flex min-h-13 cursor-pointer list-none items-center justify-between gap-3 [&::-webkit-details-marker]:hidden">
-            <h3 className="font-display text-name">{t(`group.${group.id}`)}</h3>
+            <Heading className="font-display text-name">{t(`group.${group.id}`)}</Heading>
             <ChevronDown aria-hidden="true" className="size-5 shrink-0 text-ink-3 group-open:rotate-180" />
           </summary>
           <ul className="pb-2">

@@ -11,7 +11,7 @@ export function HowConstants() {
     <HowFrame current="constants" headline={t('sources.title')} lead={t('sources.lead')}>
       <CareNote />
       <p className="max-w-reading py-3.5 text-body">{t('sources.marks')}</p>
-      <ConstantGroups groups={constantGroups} />
+      <ConstantGroups groups={constantGroups} heading="h2" />
     </HowFrame>
   );
 }

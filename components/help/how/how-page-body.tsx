@@ -31,7 +31,7 @@ export function HowPageBody({ page }: { page: HowPage }) {
             {t('constants')}
           </h2>
           <p className="mb-2 text-small text-ink-2">{t('constantsLead')}</p>
-          <ConstantGroups groups={groups} folded />
+          <ConstantGroups groups={groups} heading="h3" folded />
         </section>
       )}
       <CareNote />

@@ -7,6 +7,7 @@ import { percentOf, shareOf } from './curve-path';
 /** Least distance of the middle of words from a line or a limit, and from other words, as shares of the height. */
 const FROM_LINES = 0.05;
 const FROM_WORDS = 0.085;
+const LEVEL_WORDS = 0.08;
 /** How much of the width words at the right end may take on a phone. */
 const WIDTH = 0.35;
 const steps = Array.from(
@@ -37,8 +38,14 @@ function placesOf({ lines, ranges = [], levels = [], across, up }: Curve) {
     return { low: Math.min(...heights), high: Math.max(...heights) };
   };
   const inTheWay = [
-    ...drawn.map(({ points }) => spanOf(points)),
-    ...levels.map(({ at }) => ({ low: shareOf(at, up), high: shareOf(at, up) })),
+    ...[...drawn.map(({ points }) => points), ...ranges.map(({ low }) => low)].map(spanOf),
+    // The words of a limit stand on its far side.
+    ...levels.map(({ at, forbidden }) => {
+      const share = shareOf(at, up);
+      return forbidden === 'below'
+        ? { low: share - LEVEL_WORDS, high: share }
+        : { low: share, high: share + LEVEL_WORDS };
+    }),
   ];
   const placed: { name: (typeof drawn)[number]['name']; height: number }[] = [];
   for (const { name, points } of named) {

@@ -36,12 +36,12 @@ export function Slider({ label, value, written, low, high, step, off, onMove }: 
           preserveAspectRatio="none"
           aria-hidden="true"
         >
-          <path d="M0 22H100" className="stroke-ink" strokeWidth="1.4" vectorEffect="non-scaling-stroke" />
+          <path d="M0 22H100" className="fill-none stroke-ink" strokeWidth="1.4" vectorEffect="non-scaling-stroke" />
           {Array.from({ length: ticks + 1 }, (_, tick) => (
             <path
               key={tick}
               d={`M${(100 * tick) / ticks} 22v7`}
-              className="stroke-ink"
+              className="fill-none stroke-ink"
               strokeWidth="1"
               vectorEffect="non-scaling-stroke"
             />

@@ -33,7 +33,7 @@ export function TakenBars({ across, taken }: { across: Axis; taken: Taken }) {
             <path d="M0 2.5q2.25 -2 4.5 0t4.5 0" className="fill-none stroke-teal" strokeWidth="0.9" />
           </pattern>
           <pattern id={`${id}sun`} width="3" height="6" patternUnits="userSpaceOnUse">
-            <path d="M1.5 0V6" className="stroke-ink" strokeWidth="1.1" />
+            <path d="M1.5 0V6" className="fill-none stroke-ink" strokeWidth="1.1" />
           </pattern>
         </defs>
         {taken.map(({ at, parts }) => {

@@ -17,13 +17,13 @@ function Part({ part }: { part: string }) {
   if (part.startsWith('*')) return <i>{part.slice(1, -1)}</i>;
   if (part.startsWith('{_'))
     return (
-      <sub className="text-[0.72em] leading-none">
+      <sub className="text-[max(0.72em,11.5px)] leading-none">
         <Typeset notation={part.slice(2, -1)} />
       </sub>
     );
   if (part.startsWith('{^'))
     return (
-      <sup className="text-[0.72em] leading-none">
+      <sup className="text-[max(0.72em,11.5px)] leading-none">
         <Typeset notation={part.slice(2, -1)} />
       </sup>
     );

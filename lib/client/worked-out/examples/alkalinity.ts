@@ -32,7 +32,7 @@ export const alkalinityExample: Example<'alkalinity' | 'pH' | 'stabilizer'> = {
         { name: 'alkalinityOfStabilizer', value: notCarbonate, unit: 'mg/L', decimals: 0 },
       ],
       curve: {
-        across: { low: 40, high: 180, unit: 'mg/L', decimals: 0, ticks: ticksOf(40, 180, 20) },
+        across: { low: 40, high: 180, unit: 'mg/L', decimals: 0, ticks: ticksOf(60, 180, 40) },
         up: { low: 0, high: 0.6, unit: 'none', decimals: 1, ticks: ticksOf(0, 0.6, 0.2) },
         lines: [{ name: 'pHFall', mark: 'pH', points: pointsOf(40, 180, 56, fallAt) }],
       },

@@ -154,5 +154,6 @@ export type FigureName =
   | 'lossBefore'
   | 'lossLearnt'
   | 'trueLoss'
+  | 'truth'
   | 'learntBand'
   | 'priorBand';

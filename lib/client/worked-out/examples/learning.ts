@@ -68,7 +68,7 @@ export const learningExample: Example<'poolSun'> = {
         up: { low: 0, high: 3, unit: 'mg/L', decimals: 0, ticks: ticksOf(0, 3, 1) },
         lines: [{ name: 'lossLearnt', mark: 'chlorine', points: edge('p50') }],
         ranges: [{ name: 'learntBand', low: edge('p10'), high: edge('p90') }],
-        levels: [{ name: 'trueLoss', at: trueLoss }],
+        levels: [{ name: 'truth', at: trueLoss }],
       },
     };
   },

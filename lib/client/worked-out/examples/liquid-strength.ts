@@ -18,7 +18,7 @@ export const liquidStrengthExample: Example<'strength' | 'temperature' | 'days'>
         { name: 'halfLife', value: hypochloriteHalfLife(strength, temperature), unit: 'days', decimals: 0 },
       ],
       curve: {
-        across: { low: 0, high: 180, unit: 'days', decimals: 0, ticks: ticksOf(0, 180, 30) },
+        across: { low: 0, high: 180, unit: 'days', decimals: 0, ticks: ticksOf(0, 180, 60) },
         up: { low: 0, high: 18, unit: 'tradePercent', decimals: 0, ticks: ticksOf(0, 15, 5) },
         lines: [{ name: 'strengthLeft', mark: 'chlorine', points: pointsOf(0, 180, 60, after) }],
       },

@@ -23,9 +23,9 @@ export const tabletsExample: Example<'tabletMass' | 'pumpHours'> = {
         { name: 'firstDay', value: (tabletMass * (1 - leftAfter(1)) * strength) / 100, unit: 'g', decimals: 0 },
       ],
       curve: {
-        across: { low: 0, high: 14, unit: 'days', decimals: 0, ticks: ticksOf(0, 14, 2) },
+        across: { low: 0, high: 12, unit: 'days', decimals: 0, ticks: ticksOf(0, 12, 3) },
         up: { low: 0, high: 110, unit: 'percent', decimals: 0, ticks: ticksOf(0, 100, 50) },
-        lines: [{ name: 'massLeft', mark: 'ink', points: pointsOf(0, 14, 84, (days) => 100 * leftAfter(days)) }],
+        lines: [{ name: 'massLeft', mark: 'ink', points: pointsOf(0, 12, 72, (days) => 100 * leftAfter(days)) }],
       },
     };
   },
