@@ -10,10 +10,12 @@ import {
   planDoses,
   plans,
   pools,
+  posteriors,
   preferences,
   readings,
   readingValues,
   shelfProducts,
+  tabletsFound,
   weekDays,
 } from '@/db/schema';
 import type { ProvenHouseholdId, SystemScope } from '@/lib/schemas/scope';
@@ -113,6 +115,13 @@ export async function copyHouseholdRecord(
     values.map(({ value }) => ({ ...value, readingId: idOf(value.readingId) })),
   );
 
+  const learnt = await tx.select().from(posteriors).where(eq(posteriors.householdId, from));
+  await insertAll(
+    tx,
+    posteriors,
+    learnt.map((row) => ({ ...row, householdId, readingId: idOf(row.readingId) })),
+  );
+
   const made = await tx.select().from(plans).where(eq(plans.householdId, from));
   await insertAll(
     tx,
@@ -128,6 +137,12 @@ export async function copyHouseholdRecord(
       ...{ householdId, id: idOf(row.id), planId: idOf(row.planId) },
       ...{ doneBy: person(row.doneBy), recordedBy: person(row.recordedBy), claimedBy: person(row.claimedBy) },
     })),
+  );
+  const found = await tx.select().from(tabletsFound).where(eq(tabletsFound.householdId, from));
+  await insertAll(
+    tx,
+    tabletsFound,
+    found.map((row) => ({ ...row, householdId, doseId: idOf(row.doseId) })),
   );
   const ticks = await tx.select().from(doseEvents).where(eq(doseEvents.householdId, from));
   await insertAll(

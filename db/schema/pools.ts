@@ -27,6 +27,9 @@ export const pools = sqliteTable(
     /** Readings, outlook and cautions are kept, but no chlorine is planned. */
     recordOnly: yesOrNo('record_only').notNull().default(false),
 
+    /** The pool is learnt from readings since then; null from the first on. */
+    learningFrom: integer('learning_from', { mode: 'timestamp_ms' }),
+
     system: text('system', { enum: waterSystems }),
     kind: text('kind', { enum: poolKinds }),
     roofed: yesOrNo('roofed'),

@@ -1,10 +1,9 @@
 import type { Worker } from 'node:worker_threads';
 import { AppError } from '@/lib/errors';
-import type { WeekPlan } from '@/lib/schemas/plan';
-import type { Scenario } from '@/lib/schemas/scenario';
-import { type Answer, type EngineTask, errorOf, type Question } from './messages';
+import { type Answer, type EngineTask, type EngineTasks, errorOf, type Question } from './messages';
 
-type Job = { question: Question; resolve: (plan: WeekPlan) => void; reject: (error: Error) => void };
+type AnyAnswer = EngineTasks[EngineTask]['answer'];
+type Job = { question: Question; resolve: (answer: AnyAnswer) => void; reject: (error: Error) => void };
 type Running = { job: Job; timer: NodeJS.Timeout };
 
 export type EngineOptions = {
@@ -42,12 +41,15 @@ export class Engine {
     this.options = { jobLimit: 5_000, loadLimit: 20_000, queueLimit: 200, ...options };
   }
 
-  /** Plans or projects a scenario; rejects with what the planner threw, with `engine-busy`, or with the crash. */
-  run(task: EngineTask, scenario: Scenario): Promise<WeekPlan> {
-    if (this.waiting.length >= this.options.queueLimit) return Promise.reject(busy('The queue is full.'));
-    return new Promise((resolve, reject) => {
+  /** Does a task; rejects with what the engine threw, with `engine-busy`, or with the crash. */
+  async run<Task extends EngineTask>(
+    task: Task,
+    order: EngineTasks[Task]['order'],
+  ): Promise<EngineTasks[Task]['answer']> {
+    if (this.waiting.length >= this.options.queueLimit) throw busy('The queue is full.');
+    return new Promise<AnyAnswer>((resolve, reject) => {
       this.lastId += 1;
-      this.waiting.push({ question: { id: this.lastId, task, scenario }, resolve, reject });
+      this.waiting.push({ question: { id: this.lastId, task, order }, resolve, reject });
       this.next();
     });
   }
@@ -91,7 +93,7 @@ export class Engine {
     }
     if (running?.job.question.id !== answer.id) return;
     this.settle();
-    if ('plan' in answer) running.job.resolve(answer.plan);
+    if ('answer' in answer) running.job.resolve(answer.answer);
     else running.job.reject(errorOf(answer.fault));
     if (this.waiting.length === 0) thread.unref();
     this.next();

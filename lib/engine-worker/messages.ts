@@ -1,16 +1,30 @@
 import { AppError, type ErrorCode, type FieldProblem } from '@/lib/errors';
+import type { PoolHistory } from '@/lib/learning';
 import type { WeekPlan } from '@/lib/schemas/plan';
+import type { FilterState, PosteriorStep } from '@/lib/schemas/posterior';
 import type { Scenario } from '@/lib/schemas/scenario';
 
-/** Plan the week, or only project what the scenario says is given. */
-export type EngineTask = 'plan' | 'project';
-export type Question = { id: number; task: EngineTask; scenario: Scenario };
+/** What the engine is asked for, and what it answers. */
+export type EngineTasks = {
+  /** Plan the week, or only project what the scenario says is given. */
+  plan: { order: Scenario; answer: WeekPlan };
+  project: { order: Scenario; answer: WeekPlan };
+  /** What a pool has taught since a stored state; null for from the beginning. */
+  learn: { order: { from: FilterState | null; history: PoolHistory }; answer: PosteriorStep[] };
+};
+export type EngineTask = keyof EngineTasks;
+export type Question<Task extends EngineTask = EngineTask> = {
+  id: number;
+  task: Task;
+  order: EngineTasks[Task]['order'];
+};
 
 /** An error as plain data: between threads its class is lost. */
 type Fault = { code: ErrorCode | null; message: string; problems: readonly FieldProblem[]; stack: string | null };
 
 /** The first answer of a thread says that it has loaded and waits for work. */
-export type Answer = { ready: true } | { id: number; plan: WeekPlan } | { id: number; fault: Fault };
+export type Answer =
+  { ready: true } | { id: number; answer: EngineTasks[EngineTask]['answer'] } | { id: number; fault: Fault };
 
 export function faultOf(error: unknown): Fault {
   const { message, stack = null } = error instanceof Error ? error : new Error(String(error));

@@ -1,12 +1,19 @@
 import { parentPort } from 'node:worker_threads';
+import { learnFrom } from '@/lib/learning';
 import { planWeek, projectScenario } from '@/lib/planner';
-import { type Answer, faultOf, type Question } from './messages';
+import { type Answer, type EngineTask, type EngineTasks, faultOf, type Question } from './messages';
 
-const tasks = { plan: planWeek, project: projectScenario };
+type Work<Task extends EngineTask> = (order: EngineTasks[Task]['order']) => EngineTasks[Task]['answer'];
 
-function answer({ id, task, scenario }: Question): Answer {
+const work: { [Task in EngineTask]: Work<Task> } = {
+  plan: planWeek,
+  project: projectScenario,
+  learn: ({ from, history }) => learnFrom(from, history),
+};
+
+function answer<Task extends EngineTask>({ id, task, order }: Question<Task>): Answer {
   try {
-    return { id, plan: tasks[task](scenario) };
+    return { id, answer: work[task](order) };
   } catch (error) {
     return { id, fault: faultOf(error) };
   }

@@ -8,6 +8,9 @@ export const QUANTILE_90 = 1.2815515655446004;
 /** Where a believed surprise comes to lie, in sigmas of what is expected after the expectation was loosened. */
 const BELIEVED_AT = 1.5;
 
+/** No pool spares more of the loss that is expected of it: what is there beyond that was added. */
+const MOST_OF_LOSS_SPARED = 0.7;
+
 /** The band that a value was expected in [its unit]; nothing measured is below 0. */
 export function expectedBand(middle: number, sigma: number) {
   return { p10: Math.max(0, middle - QUANTILE_90 * sigma), p50: middle, p90: middle + QUANTILE_90 * sigma };
@@ -22,6 +25,7 @@ export function expectedBand(middle: number, sigma: number) {
  * believed: then the expectation was wrong, and before the update it is loosened until the value is no surprise (fading
  * memory). Changes `state`.
  *
+ * @param chlorineLoss free chlorine expected to be used up since the last reading [mg/L]
  * Source: R. E. Kalman 1960; weight: see {@link hampelWeight}; loosening as in adaptive fading filters (Q. Xia, M. Rao,
  * Y. Ying, X. Shen, Automatica 30 (1994) 1333-1338; from memory).
  */
@@ -30,6 +34,7 @@ export function assimilate(
   quantity: UncertainQuantity,
   measured: number,
   sigma: number,
+  chlorineLoss: number,
 ): LearningNote {
   const { mean, covariance, doubts } = state;
   const place = placeOf[quantity];
@@ -43,9 +48,12 @@ export function assimilate(
   if (questioned && !believed) doubts[quantity] = side;
   else delete doubts[quantity];
 
-  if (believed) loosen(state, quantity, surprise, sigma);
+  // To learn from chlorine that somebody added unseen that hardly any is used up would starve the water.
+  const unrecorded = believed && quantity === 'freeChlorine' && surprise > MOST_OF_LOSS_SPARED * chlorineLoss;
+  if (unrecorded) loosenAlone(state, quantity, surprise, sigma);
+  else if (believed) loosen(state, quantity, surprise, sigma);
   update(mean, covariance, place, surprise, sigma, believed ? 1 : weight);
-  if (believed) return { ...note, kind: 'believed', weight: 1 };
+  if (believed) return { ...note, kind: unrecorded ? 'unrecorded-dose' : 'believed', weight: 1 };
   return { ...note, kind: questioned ? 'questioned' : 'counted', weight };
 }
 
@@ -68,14 +76,25 @@ function update(
   }
 }
 
+/** Variance of a quantity at which a value is no surprise any more. */
+function varianceWanted(surprise: number, sigma: number): number {
+  return Math.max(0, (surprise / BELIEVED_AT) ** 2 - sigma ** 2);
+}
+
+/** Widens what is known of a quantity for a reason that no parameter has to do with: its own variance only. */
+function loosenAlone({ covariance }: FilterState, quantity: UncertainQuantity, surprise: number, sigma: number): void {
+  const place = placeOf[quantity];
+  const variance = covariance[place]![place]!;
+  covariance[place]![place] = Math.max(variance, varianceWanted(surprise, sigma));
+}
+
 /**
  * Widens what is known of a quantity, and for what sun and demand change day by day the parameters too, none beyond its
  * prior. Rows and columns grow by the same factors, so it stays a covariance.
  */
 function loosen({ covariance }: FilterState, quantity: UncertainQuantity, surprise: number, sigma: number): void {
   const place = placeOf[quantity];
-  const wanted = Math.max(0, (surprise / BELIEVED_AT) ** 2 - sigma ** 2);
-  const factor = Math.sqrt(Math.max(1, wanted / covariance[place]![place]!));
+  const factor = Math.sqrt(Math.max(1, varianceWanted(surprise, sigma) / covariance[place]![place]!));
   const factors = covariance.map(() => 1);
   factors[place] = factor;
   if (quantity === 'freeChlorine' || quantity === 'pH')

@@ -15,13 +15,16 @@ import { momentsOf, sigmaPoints } from './unscented';
 /** What lies between two readings: forces, doses, and the pool with its prior's medians. */
 export type Gap = { forcing: Forcing; doses: readonly WeekDose[]; setting: CourseSetting; to: number };
 
+/** What is expected of a reading, and how much chlorine is expected to be used up until then [mg/L]. */
+export type Expected = { state: FilterState; chlorineLoss: number };
+
 /**
  * Carries what is known from one reading to the next: every sigma point is a pool of its own whose water the projection
  * takes through the gap; their mean and covariance are what is expected of the next reading.
  *
  * Errors: WaterRangeError where what was recorded brings a pool's water out of the model's range.
  */
-export function propagate(state: FilterState, { forcing, doses, setting, to }: Gap): FilterState {
+export function propagate(state: FilterState, { forcing, doses, setting, to }: Gap): Expected {
   const inside = doses.filter(({ at }) => at >= state.at && at < to);
   const points = sigmaPoints(state.mean, state.covariance);
   const courses = points.map(({ at }) => {
@@ -49,7 +52,8 @@ export function propagate(state: FilterState, { forcing, doses, setting, to }: G
     loads: feederAt(state.loads, inside, forcing.pumpIntervals, setting.floater, state.at, to),
   };
   drift(next, (to - state.at) / (24 * MILLISECONDS_PER_HOUR));
-  return next;
+  const { usedUp, combined } = courses[0]!.account;
+  return { state: next, chlorineLoss: usedUp + combined };
 }
 
 function endOf({ end, endPH }: Course): WaterAnalysis {

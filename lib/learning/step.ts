@@ -19,7 +19,7 @@ import { forcingBetween } from './gap';
 import type { Dated, PoolHistory, TabletsLeft } from './history';
 import { errorOf } from './measurement';
 import { posteriorOf } from './posterior-of';
-import { propagate } from './propagate';
+import { type Expected, propagate } from './propagate';
 import { placeOf } from './state';
 import { learnFromTabletsLeft } from './tablets-left';
 
@@ -52,21 +52,21 @@ export function stepTo(
   const setting = settingOf(history.pool, temperature);
   if (before) lookIntoFeeder(known, at, history, setting, found, log);
   const expected = before && expectedAt(known, at, temperature, history, setting, log);
-  const state = expected ?? startAnew(known, before, at, reading, history, log);
+  const state = expected?.state ?? startAnew(known, before, at, reading, history, log);
   state.temperature = temperature;
   if (reading.combinedChlorine !== undefined) state.combinedChlorine = middleOf(reading.combinedChlorine);
-  if (expected) weigh(state, reading, log);
+  if (expected) weigh(expected, reading, log);
   if (before) countFor(state, before);
   return { readingAt: reading.takenAt, state, posterior: posteriorOf(state, reading, setting.parameters), log };
 }
 
 /** Takes every measured value into what is known. */
-function weigh(state: FilterState, reading: Reading, log: LearningNote[]): void {
+function weigh({ state, chlorineLoss }: Expected, reading: Reading, log: LearningNote[]): void {
   for (const quantity of uncertainQuantities) {
     const value = reading[quantity];
     if (value === undefined) continue;
     const sigma = errorOf(quantity, value, reading.method, state.mean[placeOf[quantity]]!);
-    log.push(assimilate(state, quantity, middleOf(value), sigma));
+    log.push(assimilate(state, quantity, middleOf(value), sigma, chlorineLoss));
     state.mean[placeOf.freeChlorine] = Math.max(0, state.mean[placeOf.freeChlorine]!);
   }
 }
@@ -104,8 +104,8 @@ function expectedAt(
   history: PoolHistory,
   setting: CourseSetting,
   log: LearningNote[],
-): FilterState | null {
-  if (at === state.at) return state;
+): Expected | null {
+  if (at === state.at) return { state, chlorineLoss: 0 };
   if (at - state.at > LONGEST_GAP * MILLISECONDS_PER_DAY) {
     log.push({ kind: 'fresh-start', reason: 'long-gap' });
     return null;

@@ -5,7 +5,9 @@ import { ensembleOf, type Member } from '@/lib/projection/ensemble';
 import type { WeekDose } from '@/lib/projection/events';
 import { type Forcing, prepareForcing } from '@/lib/projection/forcing';
 import { type Course, integrateWeek } from '@/lib/projection/integrate';
+import { learntStart } from '@/lib/projection/learnt-start';
 import { bandOf } from '@/lib/projection/quantiles';
+import type { Posterior } from '@/lib/schemas/posterior';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { limits } from '@/lib/standards/limits';
 import { ledgerOf } from '@/lib/chemistry';
@@ -52,14 +54,23 @@ export type PlanContext = {
 export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext {
   const { pool, shelf } = scenario;
   const history = scenario.given.map((dose, index) => weekDoseOf(dose, `given[${index}]`, shelf, pool));
-  const start = startingWater(scenario, history);
+  const { start, taught } = startOf(scenario, history);
   const given = companion ? [...history, companion] : history;
   const forcing = prepareForcing(pool, start.takenAt, scenario.week, start.water.temperature);
-  const setting = settingOf(pool, start.water.temperature, scenario.parameters);
+  const setting = {
+    ...settingOf(pool, start.water.temperature, { ...taught?.medians, ...scenario.parameters }),
+    ...(taught ? { volumeRatio: pool.volume / taught.medians.volume } : {}),
+  };
   const hours = hoursFrom(start.takenAt);
   const swimHour = swimHours(scenario, hours);
   const median: Member = { start: { ledger: ledgerOf(start.water), loads: start.loads }, setting };
-  const members = ensembleOf(start.water, start.errors, start.loads, setting);
+  const members = ensembleOf(
+    start.water,
+    start.errors,
+    start.loads,
+    setting,
+    taught ? { covariance: taught.covariance } : {},
+  );
   const undosed = (member: Member) => integrateWeek(forcing, member.start, given, member.setting);
   const all = members.map((member) => ({ member, undosed: undosed(member) }));
   return {
@@ -78,6 +89,18 @@ export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext
     swimCeiling: Float64Array.from(swimHour, (swims) => (swims ? pool.swimLimit : Infinity)),
     stabilizedProductUsed: start.loads.length > 0 || given.some(bringsStabilizer),
   };
+}
+
+/**
+ * Where the week starts: at the newest reading, as what the pool has taught sees it when that reading is part of what it
+ * was taught by; else as the reading alone does.
+ */
+function startOf(scenario: Scenario, history: readonly WeekDose[]): { start: StartingWater; taught?: Posterior } {
+  const start = startingWater(scenario, history);
+  const { posterior } = scenario;
+  if (!posterior || parseInstant(posterior.readingAt) !== start.takenAt) return { start };
+  const learnt = learntStart(posterior);
+  return { start: { ...start, ...learnt, water: { ...start.water, ...learnt.water } }, taught: posterior };
 }
 
 /** Trichlor and dichlor bring chlorine and stabilizer together. */

@@ -20,10 +20,12 @@ const QUICK_RAISE = 2.5;
 export function plannedDoses(
   draft: Draft,
   { tablets, evenings }: Choice,
-  { scenario }: PlanContext,
+  { scenario, median }: PlanContext,
   halvedEvening: number | null = null,
 ): PlannedDose[] {
   const { pool } = scenario;
+  // Chlorine spreads over what the pool behaves as if it held; everything else over what was measured.
+  const { volume } = median.setting.parameters;
   const { fast } = draft;
   const isoAt = (evening: number) => toOffsetIso(evenings[evening]!.at, pool.timeZone);
   const doses: PlannedDose[] = [];
@@ -40,7 +42,7 @@ export function plannedDoses(
       form: 'tablet',
       amount: count,
       unit: 'tablet',
-      rise: riseOf(contents, count * tabletMass, pool.volume),
+      rise: riseOf(contents, count * tabletMass, volume),
       effect: { quantity: 'cyanuricAcid', change: stabilizer / (pool.volume * 1000) },
       reason: (halvedEvening === evening ? 'first-dose-halved' : 'slow-supply') satisfies DoseReason,
     });
@@ -50,7 +52,7 @@ export function plannedDoses(
     if (measures === 0 || !fast) return;
     const amount = measures * fast.measure;
     used += amount;
-    const rise = riseOfFast(fast, amount, evenings[evening]!.at, pool.volume);
+    const rise = riseOfFast(fast, amount, evenings[evening]!.at, volume);
     const usual: DoseReason = rise >= QUICK_RAISE ? 'quick-raise' : 'closes-gap';
     const reason: DoseReason = evening === halvedEvening ? 'first-dose-halved' : usual;
     doses.push({

@@ -46,14 +46,16 @@ export type Options = {
 };
 
 /** What the shelf, the feeder, the labels and the water let a plan use (safety constraints only; the rest is cost). */
-export function optionsOf(context: Pick<PlanContext, 'scenario' | 'start' | 'now'>): Options {
-  const { scenario, start } = context;
+export function optionsOf(context: Pick<PlanContext, 'scenario' | 'start' | 'now' | 'median'>): Options {
+  const { scenario, start, median } = context;
   const cautions: Fact[] = [];
   const caution = (code: CautionCode, figures: Omit<Fact, 'code'> = {}) => cautions.push({ code, ...figures });
   const owned = scenario.shelf.flatMap((product) => fastOption(product, scenario, start, caution) ?? []);
-  const fast = (owned.length > 0 ? owned : somethingToBuy(scenario, start)).sort(
-    (a, b) => pricePerRise(a, start.takenAt) - pricePerRise(b, start.takenAt),
-  );
+  // A cap holds for the smaller of the measured and the learnt volume.
+  const spread = Math.min(1, median.setting.parameters.volume / scenario.pool.volume);
+  const fast = (owned.length > 0 ? owned : somethingToBuy(scenario, start))
+    .map((option) => ({ ...option, capRise: option.capRise * spread }))
+    .sort((a, b) => pricePerRise(a, start.takenAt) - pricePerRise(b, start.takenAt));
   const tablets = tabletOption(context, fast.length > 0, caution);
   return typeof tablets === 'string'
     ? { tablets: null, noTablets: tablets, fast, cautions }

@@ -28,7 +28,14 @@ import { erode, type TabletLoad } from './tablets';
 export type CourseStart = { ledger: Ledger; loads: readonly TabletLoad[] };
 
 /** The pool's part in a course. */
-export type CourseSetting = { depth: number; fillWater: FillWater; floater: boolean; parameters: Parameters };
+export type CourseSetting = {
+  depth: number;
+  fillWater: FillWater;
+  floater: boolean;
+  parameters: Parameters;
+  /** Measured over learnt volume: what brings no chlorine spreads over the measured one. 1 when nothing was learnt. */
+  volumeRatio?: number;
+};
 
 /** Every quantity of a ledger hour by hour, in its units. */
 export type LedgerSeries = Record<keyof Ledger, Float64Array>;

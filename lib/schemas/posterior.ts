@@ -114,9 +114,12 @@ const expectedSchema = z.strictObject({ p10: finite, p50: finite, p90: finite })
 
 /** What became of one measured value, or of a stretch of time. */
 export const learningNoteSchema = z.discriminatedUnion('kind', [
-  /** `counted` in full, `questioned`: weighs less or nothing, `believed`: a second reading says the same. */
+  /**
+   * `counted` in full, `questioned`: weighs less or nothing, `believed`: a second reading says the same,
+   * `unrecorded-dose`: it says that there is more chlorine than can be left of what was recorded.
+   */
   z.strictObject({
-    kind: z.enum(['counted', 'questioned', 'believed']),
+    kind: z.enum(['counted', 'questioned', 'believed', 'unrecorded-dose']),
     quantity: z.enum([...uncertainQuantities, 'tabletsLeft']),
     measured: finite,
     expected: expectedSchema,

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { givenDoseSchema, plannedDoseSchema } from './dose';
 import { poolSchema } from './pool';
+import { posteriorSchema } from './posterior';
 import { preferencesSchema } from './preferences';
 import { readingSchema } from './reading';
 import { shelfProductSchema } from './shelf-product';
@@ -62,6 +63,8 @@ export const scenarioSchema = z
       .max(200)
       .optional(),
     parameters: parametersSchema.prefault({}),
+    /** What the pool has taught by its newest reading; takes the place of priors and of the bare reading. */
+    posterior: posteriorSchema.optional(),
     driftPrices: driftPricesSchema.prefault({}),
   })
   .superRefine(({ shelf }, context) => {

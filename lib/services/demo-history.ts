@@ -2,7 +2,7 @@ import 'server-only';
 import { randomUUID } from 'node:crypto';
 import type { Database } from '@/db/client';
 import { listDoses, recordDoseEvent, type StoredDose } from '@/db/queries/plan-doses';
-import { findPool } from '@/db/queries/pools';
+import { findPool, updatePool } from '@/db/queries/pools';
 import { insertReading } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
 import { inWriteTransaction } from '@/db/write';
@@ -55,6 +55,9 @@ export async function writeDemoHistory(
   const pen: Pen = { db, householdId, members, pool, shelf, until: startOfDay(today, timeZone) };
   const tests = demoTests(today);
 
+  // Before the first plan nobody wrote down what went in: such weeks teach nothing.
+  const firstPlanned = tests.find(({ plans }) => plans);
+  if (firstPlanned) await updatePool(db, householdId, { learningFrom: new Date(firstPlanned.at) });
   let water = firstWater(tests[0]?.day ?? today);
   let given: WeekDose[] = [];
   let lastWrite = 0;
@@ -71,8 +74,14 @@ export async function writeDemoHistory(
       water = waterAfter(water, pool, test.at, next, given);
     } else water = byHabit(water, pool, test, next);
   }
-  // The doses given since the newest test are known to the plan that the visitor finds.
-  await plan(pen, new Date(lastWrite + 5 * MINUTE));
+  // The doses given since the newest test are known to the plan that the visitor finds; those it still asks for of the time
+  // before are given too.
+  for (let due = true; due;) {
+    await plan(pen, new Date(lastWrite + 5 * MINUTE));
+    const { doses, lastTick } = await givePlanned(pen, new Date(lastWrite), new Date(pen.until));
+    due = doses.length > 0;
+    lastWrite = Math.max(lastWrite, lastTick);
+  }
 }
 
 async function writeTest(

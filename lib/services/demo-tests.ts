@@ -11,8 +11,8 @@ const weeks = 10;
 /** Days before today. The newest test is 1 to 3 days old at every hour of today. */
 const newestFullTest = 2;
 const quickChecks = [4, 6];
-/** The household began to plan three full tests ago; since the last but one every test has made a plan. */
-const firstPlan = newestFullTest + 2 * 7;
+/** The household began to plan six full tests ago; since the last but one every test has made a plan. */
+const firstPlan = newestFullTest + 5 * 7;
 const plannedClosely = newestFullTest + 7;
 
 /** A full test every week and quick checks between, oldest first; the first and the last are full ones. */

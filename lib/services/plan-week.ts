@@ -8,6 +8,7 @@ import { logFault } from '@/lib/log';
 import { ENGINE_VERSION } from '@/lib/planner/version';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { Database } from '@/db/client';
+import { learnPool } from './learn-pool';
 import { inputHashOf, makePlan } from './make-plan';
 import { sharedRun } from './shared-run';
 import { storePlan } from './store-plan';
@@ -50,6 +51,7 @@ async function bringUpToDate(context: PlanningContext): Promise<PlanOutcome> {
 
 async function tryToPlan({ db, access, now }: PlanningContext): Promise<PlanOutcome | undefined> {
   const { householdId, timeZone } = access;
+  await learnPool({ db, access, now });
   const snapshot = await loadWeekSnapshot(db, householdId, timeZone);
   const plan = await findCurrentPlan(db, householdId);
   if (!snapshot) return plan ? withoutPlan({ db, access, now }) : { plan: null, problem: null };

@@ -1,22 +1,20 @@
 import 'server-only';
 import type { DatabaseOrTransaction } from '@/db/client';
-import { listPlanSnapshots } from '@/db/queries/plan-history';
-import { listDoses, listGivenDoses, type StoredDose } from '@/db/queries/plan-doses';
+import { listDoses, listGivenDoses } from '@/db/queries/plan-doses';
 import { findPool } from '@/db/queries/pools';
+import { findPosterior } from '@/db/queries/posteriors';
 import { findPreferences } from '@/db/queries/preferences';
 import { findLatestReading, listReadings, type StoredReading } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
 import { listWeekDays } from '@/db/queries/week-days';
 import { addDays, dayOf } from '@/lib/calendar/household-day';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
-import type { GivenDose } from '@/lib/schemas/dose';
-import type { Reading } from '@/lib/schemas/reading';
+import { ENGINE_VERSION } from '@/lib/planner/version';
 import { type Scenario, scenarioSchema } from '@/lib/schemas/scenario';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
-import type { ShelfProduct } from '@/lib/schemas/shelf-product';
-import { limits } from '@/lib/standards/limits';
+import { engineDose, engineReading, productsGone } from './engine-history';
 import { enginePool, feederMassAt } from './engine-pool';
-import { engineProduct, goneProducts, productIdOf } from './engine-shelf';
+import { engineProduct } from './engine-shelf';
 import { type ZeroDoubt, zeroDoubtOf } from './false-zero';
 import { DAYS_OF_A_PLAN, weekAheadOf } from './week-ahead';
 
@@ -65,6 +63,7 @@ export async function loadWeekSnapshot(
   const shelf = (await listShelfProducts(db, householdId)).map(engineProduct);
   const day = dayOf(newest.takenAt.getTime(), timeZone);
   const week = await listWeekDays(db, { householdId, from: day, until: addDays(day, DAYS_OF_A_PLAN) });
+  const learnt = await findPosterior(db, householdId, newest.id);
   const loaded = feederMassAt(pool, found.pool.completedAt?.getTime() ?? 0, first.getTime());
   return {
     scenario: scenarioSchema.parse({
@@ -74,6 +73,7 @@ export async function loadWeekSnapshot(
       week: weekAheadOf(week, day),
       preferences: await findPreferences(db, householdId),
       given: given.map((dose) => engineDose(dose, timeZone)),
+      posterior: learnt?.engineVersion === ENGINE_VERSION ? learnt.step.posterior : undefined,
     } satisfies Record<keyof Omit<Scenario, 'now' | 'doses' | 'parameters' | 'driftPrices'>, unknown>),
     readingId: newest.id,
     task: found.pool.recordOnly ? 'project' : 'plan',
@@ -90,49 +90,6 @@ async function newestZeroDoubt(
   const reading = readings.find(({ values }) => values.freeChlorine !== undefined);
   const doubt = reading ? await zeroDoubtOf(db, householdId, reading) : null;
   return reading && doubt ? { doubt, takenAt: reading.takenAt.toISOString() } : null;
-}
-
-/**
- * A reading as the engine takes it. Chlorine over 10 mg/L bleaches the colour of the pH test: such a pH is ignored, and
- * where the colour flashed nothing that was read beside it counts (care rules, part 2).
- */
-function engineReading({ takenAt, method, values, zeroAnswer }: StoredReading, timeZone: string): Reading {
-  const { freeChlorine, combinedChlorine, pH, ...rest } = values;
-  const bleached = zeroAnswer === 'flashed';
-  const low = typeof freeChlorine === 'number' ? freeChlorine : (freeChlorine?.low ?? 0);
-  const trusted = {
-    ...(freeChlorine !== undefined && !bleached ? { freeChlorine } : {}),
-    ...(combinedChlorine !== undefined && !bleached ? { combinedChlorine } : {}),
-    ...(pH !== undefined && !bleached && low <= limits.freeChlorineMaximum.value ? { pH } : {}),
-  };
-  return { ...rest, ...trusted, method, takenAt: toOffsetIso(takenAt.getTime(), timeZone) };
-}
-
-function engineDose(dose: StoredDose, timeZone: string): GivenDose {
-  const { givenAt, givenAmount, at, amount, unit } = dose;
-  return {
-    at: toOffsetIso((givenAt ?? at).getTime(), timeZone),
-    product: productIdOf(dose),
-    amount: givenAmount ?? amount,
-    unit,
-  };
-}
-
-async function productsGone(
-  db: DatabaseOrTransaction,
-  householdId: ProvenHouseholdId,
-  given: readonly StoredDose[],
-  shelf: readonly ShelfProduct[],
-): Promise<ShelfProduct[]> {
-  const strangers = given.filter((dose) => !shelf.some(({ id }) => id === productIdOf(dose)));
-  if (strangers.length === 0) return [];
-  const planIds = [...new Set(strangers.map(({ planId }) => planId))];
-  const formerly = await listPlanSnapshots(db, householdId, planIds);
-  return goneProducts(
-    strangers,
-    shelf,
-    formerly.flatMap((snapshot) => snapshot.shelf),
-  );
 }
 
 async function skippedSince(

@@ -2,7 +2,7 @@ import { parentPort, threadId } from 'node:worker_threads';
 
 // Stands in for the engine's thread: does what the question tells it to, well or badly.
 const deeds = {
-  answer: (id, { value }) => parentPort.postMessage({ id, plan: { value, threadId } }),
+  answer: (id, { value }) => parentPort.postMessage({ id, answer: { value, threadId } }),
   refuse: (id) =>
     parentPort.postMessage({ id, fault: { code: 'plan-refused', message: 'No.', problems: [], stack: null } }),
   crash: () => {
@@ -14,5 +14,5 @@ const deeds = {
   },
 };
 
-parentPort.on('message', ({ id, scenario }) => deeds[scenario.deed](id, scenario));
+parentPort.on('message', ({ id, order }) => deeds[order.deed](id, order));
 parentPort.postMessage({ ready: true });

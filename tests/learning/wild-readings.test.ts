@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { learnFrom } from '@/lib/learning';
+import { describeLearnt, learnFrom } from '@/lib/learning';
 import { learnableParameters, type Posterior, type PosteriorStep } from '@/lib/schemas/posterior';
 import type { Reading } from '@/lib/schemas/reading';
 import { type SimulatedPool, simulatedPool } from './simulated-pools';
@@ -98,15 +98,31 @@ describe('a change that is real', () => {
     }
   });
 
-  it('of what the water uses up is learnt, not questioned for ever', () => {
+  it('that only chlorine from elsewhere can have made moves the water, not what the pool uses up', () => {
     for (const pool of pools.slice(0, 4)) {
-      // From the eighth reading on this pool keeps chlorine as if hardly anything used it.
+      // Three weeks with more than was ever added.
       const high = (reading: Reading) => ({ ...reading, freeChlorine: 14 });
       const steps = learnt(pool, { 7: high, 8: high, 9: high });
       expect(noteOf(steps[7]!)).toMatchObject({ kind: 'questioned' });
-      expect(noteOf(steps[8]!)).toMatchObject({ kind: 'believed' });
+      expect(noteOf(steps[8]!)).toMatchObject({ kind: 'unrecorded-dose' });
       expect(Math.abs(steps[8]!.posterior.water.freeChlorine - 14)).toBeLessThan(3);
-      expect(steps[9]!.posterior.medians.darkDemand).toBeLessThan(steps[6]!.posterior.medians.darkDemand);
+      expect(distance(steps[9]!.posterior, steps[6]!.posterior)).toBeLessThan(1);
     }
+  });
+
+  it('of what the water uses up is learnt when it uses up more: none is left where some was expected', () => {
+    const lossIn = (pool: SimulatedPool, { posterior }: PosteriorStep) =>
+      describeLearnt(posterior, pool.history.pool).dailyLoss.learnt.p50;
+    // Under a dark cover nothing is lost, and nothing can be learnt of losing it.
+    const open = pools.filter((pool) => lossIn(pool, states.get(pool)!.at(-1)!) > 0.3);
+    expect(open.length).toBeGreaterThan(3);
+    const grown = open.map((pool) => {
+      const none = (reading: Reading) => ({ ...reading, freeChlorine: 0.1 });
+      const steps = learnt(pool, { 7: none, 8: none });
+      return lossIn(pool, steps[8]!) / lossIn(pool, steps[6]!);
+    });
+    // Here and there little was expected, and little can be learnt of finding none.
+    expect(Math.min(...grown)).toBeGreaterThan(0.8);
+    expect(grown.reduce((sum, each) => sum + each, 0) / grown.length).toBeGreaterThan(1.02);
   });
 });

@@ -344,7 +344,10 @@ function leavesOf(schema: z.core.JSONSchema.JSONSchema, path: string[] = []): st
 }
 
 describe('every field of a scenario', () => {
-  const fields = leavesOf(z.toJSONSchema(scenarioSchema, { io: 'input' })).filter((path) => !path.startsWith('doses'));
+  // What a pool has taught is one thing, not a field each: learnt-start.test.ts.
+  const fields = leavesOf(z.toJSONSchema(scenarioSchema, { io: 'input' })).filter(
+    (path) => !/^(doses|posterior)/.test(path),
+  );
 
   it('has an answer here', () => {
     expect(new Set(Object.keys(answers))).toEqual(new Set(fields));

@@ -12,6 +12,7 @@ import type { Scenario } from '@/lib/schemas/scenario';
 import type { ServiceContext } from '@/lib/services/context';
 import { removeReading } from '@/lib/services/edit-reading';
 import { planWeek } from '@/lib/services/plan-week';
+import type { EngineTask, EngineTasks } from '@/lib/engine-worker/messages';
 import { recordReading } from '@/lib/services/record-reading';
 import { planWith, sourceEngine } from '@/tests/support/engine';
 import { aFullTest, aPoolHousehold, at, designPool, designShelf, hoursLater } from '@/tests/support/pool-household';
@@ -23,10 +24,12 @@ class WatchedEngine extends Engine {
   fault: Error | undefined;
   private readonly real = sourceEngine();
 
-  override async run(task: 'plan' | 'project', scenario: Scenario) {
-    this.asked.push(scenario);
-    if (this.fault) throw this.fault;
-    return this.real.run(task, scenario);
+  override async run<Task extends EngineTask>(task: Task, order: EngineTasks[Task]['order']) {
+    if ('reading' in order) {
+      this.asked.push(order);
+      if (this.fault) throw this.fault;
+    }
+    return this.real.run(task, order);
   }
 
   override async close() {
