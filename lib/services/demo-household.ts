@@ -17,7 +17,7 @@ export const demoHousehold = {
 
 export const demoPeople = { owner: 'Anjali', caretaker: 'Dev', visitor: 'Guest' } as const;
 
-export const demoPreferences: Preferences = { visits: 4, money: 1, evenings: 1, steadiness: 1, avoid: [] };
+export const demoPreferences: Preferences = { visits: 5, money: 1, evenings: 1, steadiness: 1, avoid: [] };
 
 export const demoPool: PoolChanges = {
   nextStep: null,
