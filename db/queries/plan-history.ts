@@ -28,3 +28,26 @@ export async function listPlanSnapshots(
     .where(and(eq(plans.householdId, householdId), inArray(plans.id, [...planIds])));
   return rows.map(({ snapshot }) => snapshot);
 }
+
+/** A plan by its number; null when there is none. */
+export async function findPlanOfVersion(
+  db: DatabaseOrTransaction,
+  householdId: ProvenHouseholdId,
+  version: number,
+): Promise<Pick<
+  typeof plans.$inferSelect,
+  'createdAt' | 'endsAt' | 'engineVersion' | 'snapshot' | 'readingId' | 'result'
+> | null> {
+  const [plan] = await db
+    .select({
+      createdAt: plans.createdAt,
+      endsAt: plans.endsAt,
+      engineVersion: plans.engineVersion,
+      snapshot: plans.snapshot,
+      readingId: plans.readingId,
+      result: plans.result,
+    })
+    .from(plans)
+    .where(and(eq(plans.householdId, householdId), eq(plans.version, version)));
+  return plan ?? null;
+}

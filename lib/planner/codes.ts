@@ -62,6 +62,8 @@ export const reasonCodes = [
   'lowest-level-follows-stabilizer',
   /** What goes in beside chlorine. */
   ...companionReasons,
+  /** What was never measured, and the value taken in its place. */
+  'water-values-assumed',
 ] as const;
 export type ReasonCode = (typeof reasonCodes)[number];
 
@@ -80,7 +82,6 @@ export const cautionCodes = [
   /** Something is needed beside chlorine and has to wait: for a test, or for a free evening. */
   'companion-waits',
   'hardness-outside-surface-range',
-  'water-values-assumed',
 ] as const;
 export type CautionCode = (typeof cautionCodes)[number];
 

@@ -69,6 +69,9 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
   for (const { reason: why, effect } of doses)
     if (effect && isCompanionReason(why)) reason(why, { quantity: effect.quantity, change: effect.change });
   if (cheapest(plan)) reason('cheaper-than');
+  for (const quantity of ['totalAlkalinity', 'calciumHardness', 'cyanuricAcid'] as const)
+    if (context.start.measuredAt[quantity] === undefined)
+      reason('water-values-assumed', { quantity, value: water[quantity] });
   return reasons;
 }
 
@@ -108,7 +111,5 @@ export function cautionsOf({ doses, options, choice, waiting }: Explained, conte
   for (const id of new Set(doses.flatMap(({ product, toBuy }) => (product !== null && toBuy ? [product] : []))))
     caution('stock-short', { product: id });
   if (pool.volumeEstimated) caution('volume-estimated', { volume: pool.volume });
-  for (const quantity of ['totalAlkalinity', 'calciumHardness', 'cyanuricAcid'] as const)
-    if (start.measuredAt[quantity] === undefined) caution('water-values-assumed', { quantity, value: water[quantity] });
   return cautions;
 }

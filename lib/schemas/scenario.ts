@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { contradictionsOf } from './contradictions';
 import { givenDoseSchema, plannedDoseSchema } from './dose';
 import { poolSchema } from './pool';
 import { posteriorSchema } from './posterior';
@@ -67,7 +68,8 @@ export const scenarioSchema = z
     posterior: posteriorSchema.optional(),
     driftPrices: driftPricesSchema.prefault({}),
   })
-  .superRefine(({ shelf }, context) => {
+  .superRefine(({ shelf, reading, now }, context) => {
+    for (const contradiction of contradictionsOf(reading, now)) context.addIssue({ code: 'custom', ...contradiction });
     const seen = new Set<string>();
     shelf.forEach(({ id }, index) => {
       if (seen.has(id))

@@ -5,6 +5,7 @@ import type { StoredDose } from '@/db/queries/plan-doses';
 import type { StoredReading } from '@/db/queries/readings';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import type { GivenDose } from '@/lib/schemas/dose';
+import { measuredQuantities } from '@/lib/schemas/measured-range';
 import type { Reading } from '@/lib/schemas/reading';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import type { ShelfProduct } from '@/lib/schemas/shelf-product';
@@ -53,4 +54,22 @@ export async function productsGone(
     shelf,
     formerly.flatMap((snapshot) => snapshot.shelf),
   );
+}
+
+/**
+ * Readings of which no two say something of one quantity at one instant: two people may test at once, and the plan goes by
+ * the one that comes first in the list.
+ */
+export function withoutRepeats(readings: readonly Reading[]): Reading[] {
+  const seen = new Set<string>();
+  return readings.map((reading) => {
+    const kept = { ...reading };
+    for (const quantity of measuredQuantities) {
+      if (kept[quantity] === undefined) continue;
+      const name = `${quantity} ${Date.parse(kept.takenAt)}`;
+      if (seen.has(name)) delete kept[quantity];
+      seen.add(name);
+    }
+    return kept;
+  });
 }

@@ -12,7 +12,7 @@ import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { ENGINE_VERSION } from '@/lib/planner/version';
 import { type Scenario, scenarioSchema } from '@/lib/schemas/scenario';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
-import { engineDose, engineReading, productsGone } from './engine-history';
+import { engineDose, engineReading, productsGone, withoutRepeats } from './engine-history';
 import { enginePool, feederMassAt } from './engine-pool';
 import { engineProduct } from './engine-shelf';
 import { type ZeroDoubt, zeroDoubtOf } from './false-zero';
@@ -68,7 +68,7 @@ export async function loadWeekSnapshot(
   return {
     scenario: scenarioSchema.parse({
       pool: { ...pool, feeder: { ...pool.feeder, loaded } },
-      reading: readings.map((reading) => engineReading(reading, timeZone)),
+      reading: withoutRepeats(readings.map((reading) => engineReading(reading, timeZone))),
       shelf: [...shelf, ...(await productsGone(db, householdId, given, shelf))],
       week: weekAheadOf(week, day),
       preferences: await findPreferences(db, householdId),

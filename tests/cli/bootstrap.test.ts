@@ -186,7 +186,9 @@ describe('a command that does not exist', () => {
   it('is answered with those that do', async () => {
     const { code, err } = await project.run(['strat']);
     expect(code).toBe(2);
-    expect(err).toBe('There is no command "strat". There are: start, dev, build, test, verify, plan, bench, mutants, shots.\n');
+    expect(err).toBe(
+      'There is no command "strat". There are: start, dev, build, test, verify, plan, bench, mutants, shots.\n',
+    );
   });
 });
 

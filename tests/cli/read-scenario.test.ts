@@ -37,8 +37,27 @@ describe('readScenario', () => {
     ['an unknown field', changed((s) => ({ ...s, pool: { ...s.pool, depth: 2 } })), '$.pool.depth: '],
     [
       'one of several readings',
-      changed((s) => ({ ...s, reading: [s.reading, { ...s.reading, pH: 12 }] })),
+      changed((s) => ({ ...s, reading: [s.reading, { ...s.reading, takenAt: '2026-07-04T19:00:00-04:00', pH: 12 }] })),
       '$.reading[1].pH: ',
+    ],
+    [
+      'a reading from after now',
+      changed((s) => ({ ...s, now: '2026-07-05T12:00:00-04:00' })),
+      '$.reading.takenAt: This reading is taken after now',
+    ],
+    [
+      'two values of one quantity at one instant, in whatever zone it is written',
+      changed((s) => ({
+        ...s,
+        reading: [s.reading, { takenAt: '2026-07-05T23:00:00Z', method: 'strip', pH: 7.2 }],
+      })),
+      '$.reading[1].pH: Another reading',
+    ],
+    ['too few days', changed((s) => ({ ...s, week: { rain: [1, 2, 3] } })), '$.week.rain: '],
+    [
+      'less than nothing on the shelf',
+      changed((s) => ({ ...s, shelf: [{ ...s.shelf[0], stock: -1 }] })),
+      '$.shelf[0].stock: ',
     ],
     [
       'two products of one id',

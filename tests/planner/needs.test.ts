@@ -34,7 +34,7 @@ describe('what a plan needs', () => {
     expect(tabletsIn(plan)).toBe(0);
     expect(plan.needs).toEqual([{ code: 'never-measured', quantity: 'cyanuricAcid', since: null }]);
     expect(codesIn(plan.reasons)).toContain('no-tablets-stabilizer-unknown');
-    expect(plan.cautions).toContainEqual(
+    expect(plan.reasons).toContainEqual(
       expect.objectContaining({ code: 'water-values-assumed', quantity: 'cyanuricAcid' }),
     );
     expect(plan.doses.length).toBeGreaterThan(0);
