@@ -9,6 +9,7 @@ import { mayUndo } from './dose-state';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useDoseWords } from './use-dose-words';
+import { FoundBefore } from './found-before';
 import { useTimes } from './use-times';
 
 /** What became of a dose, and for ten minutes the way back. */
@@ -29,6 +30,7 @@ export function DoneDose({ dose, tick }: { dose: PlanDose; tick: Tick }) {
         {dose.status === 'skipped' ? words.skippedBy(dose) : words.doneBy(dose)}
       </p>
       {dose.status === 'changed' && <p className="text-small text-ink-2">{words.changed(dose)}</p>}
+      {dose.form === 'tablet' && dose.status !== 'skipped' && <FoundBefore dose={dose} tick={tick} />}
       {undo && (
         <>
           <Button

@@ -13,6 +13,7 @@ import { OtherAmount } from './other-amount';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { SkipDose } from './skip-dose';
+import { TabletsLeft } from './tablets-left';
 import { type Tick, useTick } from './use-tick';
 import { useTimes } from './use-times';
 import { useTickProblem } from './use-tick-problem';
@@ -52,7 +53,10 @@ function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {
   const t = useTranslations('doses');
   const { sheet } = useSheet();
   const [asking, setAsking] = useState<'other' | 'skip' | undefined>(undefined);
-  if (asking === 'other') return <OtherAmount dose={dose} tick={tick} onClose={() => setAsking(undefined)} />;
+  const [left, setLeft] = useState<number | undefined>(undefined);
+  const found = left === undefined ? {} : { tabletsLeft: left };
+  if (asking === 'other')
+    return <OtherAmount dose={dose} tick={tick} found={found} onClose={() => setAsking(undefined)} />;
   if (asking === 'skip') return <SkipDose tick={tick} onClose={() => setAsking(undefined)} />;
   return (
     <>
@@ -78,11 +82,12 @@ function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {
           {t('action.unclaim')}
         </Button>
       )}
+      {dose.form === 'tablet' && <TabletsLeft value={left} onChange={setLeft} />}
       <Button
         wide
         size="large"
         variant="primary"
-        onClick={() => void tick.send({ action: 'given' })}
+        onClick={() => void tick.send({ action: 'given', ...found })}
         busy={tick.busy === 'given' ? t('action.givenBusy') : undefined}
       >
         <Check aria-hidden="true" className="size-5" />

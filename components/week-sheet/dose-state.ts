@@ -28,6 +28,15 @@ export function mayUndo(dose: PlanDose, now: number, me: WeekSheet['me']): boole
   return me.role === 'owner' || dose.recordedBy === me.name;
 }
 
+/**
+ * Whether this person may still say what was left in the feeder: of tablets that they ticked themselves, in the minutes
+ * in which they could take it back. From somebody else it would be a second tick.
+ */
+export function mayAddFound(dose: PlanDose, now: number, me: WeekSheet['me']): boolean {
+  const tablets = dose.form === 'tablet' && dose.status !== 'skipped';
+  return tablets && dose.tabletsLeft === null && dose.recordedBy === me.name && mayUndo(dose, now, me);
+}
+
 /** Why somebody may read the steps but not tick; undefined when they may. */
 export type TickBar = 'viewer' | 'not-handling';
 

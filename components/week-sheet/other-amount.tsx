@@ -16,7 +16,18 @@ import { useUnits } from './use-units';
 const FAR_MORE = 2;
 
 /** Another amount went in: typed in the unit of the card, then confirmed in words. Two taps, so that a slip is seen. */
-export function OtherAmount({ dose, tick, onClose }: { dose: PlanDose; tick: Tick; onClose: () => void }) {
+export function OtherAmount({
+  dose,
+  tick,
+  found,
+  onClose,
+}: {
+  dose: PlanDose;
+  tick: Tick;
+  /** What was said of the feeder before. */
+  found: { tabletsLeft?: number };
+  onClose: () => void;
+}) {
   const t = useTranslations('doses.action');
   const { unitLabel, read } = useAmountField(dose);
   const units = useUnits();
@@ -36,7 +47,7 @@ export function OtherAmount({ dose, tick, onClose }: { dose: PlanDose; tick: Tic
         <Button
           wide
           variant="primary"
-          onClick={() => void tick.send({ action: 'changed', amount })}
+          onClick={() => void tick.send({ action: 'changed', amount, ...found })}
           busy={tick.busy === 'changed' ? t('givenBusy') : undefined}
         >
           {t('otherConfirm', { amount: units.amount(amount, dose.unit) })}

@@ -8,6 +8,7 @@ import { ProblemState } from '@/components/ui/problem-state';
 import { longDay } from '@/lib/calendar/format';
 import type { MeasuredQuantity } from '@/lib/schemas/measured-range';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import { QuestionedTest } from './questioned-test';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
@@ -19,6 +20,7 @@ export function SheetStates() {
     <>
       {planProblem && <PlanProblem problem={planProblem} />}
       {pool.recordOnly && <RecordOnly />}
+      <QuestionedTest />
       {plan?.stale && <Stale />}
       {plan && plan.needs.length > 0 && <Needs needs={plan.needs} hasDoses={plan.cost !== null} />}
     </>

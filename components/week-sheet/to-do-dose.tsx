@@ -8,7 +8,7 @@ import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { DoneLine } from './done-line';
 import { DoseDialog } from './dose-dialog';
-import { mayUndo, momentOf, tickBar } from './dose-state';
+import { mayAddFound, mayUndo, momentOf, tickBar } from './dose-state';
 import { useSheet } from './sheet-context';
 import { useDoseWords } from './use-dose-words';
 import { useTick } from './use-tick';
@@ -42,6 +42,7 @@ function DoneToDo({ dose, onOpen }: LineProps) {
         who={skipped ? words.skippedBy(dose) : words.doneBy(dose)}
         skipped={skipped}
       />
+      {mayAddFound(dose, picture.now, sheet.me) && <StepsLink onPress={onOpen}>{t('tabletsLeft.ask')}</StepsLink>}
       {mayUndo(dose, picture.now, sheet.me) && <StepsLink onPress={onOpen}>{t('action.undo')}</StepsLink>}
     </>
   );

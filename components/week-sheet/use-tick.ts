@@ -8,7 +8,10 @@ import type { DoseTick, PlanDose } from '@/lib/schemas/plan-dose';
 import { useClock } from './clock-context';
 import { useSheet } from './sheet-context';
 
-export type Intention = { action: 'claim' | 'given' | 'skipped' | 'undo' } | { action: 'changed'; amount: number };
+export type Intention =
+  | { action: 'claim' | 'skipped' | 'undo' }
+  | { action: 'given'; tabletsLeft?: number }
+  | { action: 'changed'; amount: number; tabletsLeft?: number };
 
 /**
  * Says what became of a dose. The id of a tick is made once for each intention: pressing twice, or again after a failure,

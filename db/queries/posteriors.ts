@@ -1,8 +1,8 @@
 import 'server-only';
-import { and, asc, eq, inArray, notInArray } from 'drizzle-orm';
+import { and, asc, eq, inArray, notInArray, sql } from 'drizzle-orm';
 import type { DatabaseOrTransaction, Transaction } from '@/db/client';
 import { posteriors } from '@/db/schema';
-import type { PosteriorStep } from '@/lib/schemas/posterior';
+import type { LearningNote, PosteriorStep } from '@/lib/schemas/posterior';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 
 export type NewPosterior = Omit<typeof posteriors.$inferInsert, 'householdId'>;
@@ -31,6 +31,19 @@ export async function findPosterior(
     .from(posteriors)
     .where(and(eq(posteriors.householdId, householdId), eq(posteriors.readingId, readingId)));
   return row ?? null;
+}
+
+/** What became of each reading that an engine of this version learnt from, oldest first. */
+export async function listLearningLogs(
+  db: DatabaseOrTransaction,
+  { householdId, engineVersion }: { householdId: ProvenHouseholdId; engineVersion: string },
+): Promise<{ takenAt: Date; log: LearningNote[] }[]> {
+  const rows = await db
+    .select({ takenAt: posteriors.takenAt, log: sql<string>`json_extract(${posteriors.step}, '$.log')` })
+    .from(posteriors)
+    .where(and(eq(posteriors.householdId, householdId), eq(posteriors.engineVersion, engineVersion)))
+    .orderBy(asc(posteriors.takenAt), asc(posteriors.readingId));
+  return rows.map(({ takenAt, log }) => ({ takenAt, log: JSON.parse(log) as LearningNote[] }));
 }
 
 /** Puts newly learnt steps in the place of the old ones; those of readings that no longer count go. */

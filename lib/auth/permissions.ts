@@ -15,6 +15,7 @@ const rules = {
   look: { roles: everyone, otherwise: 'You cannot see this household.' },
   'change-household': { roles: owners, otherwise: onlyOwners },
   'change-pool': { roles: owners, otherwise: onlyOwners },
+  'reset-learning': { roles: owners, otherwise: 'Only an owner can let the pool be learnt anew.' },
   'change-preferences': { roles: owners, otherwise: onlyOwners },
   'change-shelf': { roles: owners, otherwise: 'Only an owner can add or remove products. You can count what is left.' },
   'count-stock': { roles: carers, otherwise: onlyCarers },

@@ -35,11 +35,21 @@ export const planDoseSchema = plannedDoseSchema.extend({
   givenAmount: z.number().nullable(),
   doneBy: z.string().nullable(),
   recordedBy: z.string().nullable(),
+  /** Whole tablets that were found in the feeder before it; null where nobody said. */
+  tabletsLeft: z.number().int().nullable(),
   /** Somebody says they are adding it right now. */
   claimedBy: z.string().nullable(),
   undoUntil: instantSchema.nullable(),
 });
 export type PlanDose = z.infer<typeof planDoseSchema>;
+
+/** Whole tablets that were found in the feeder before new ones went in; only of a dose of tablets, and never asked twice. */
+const tabletsLeftSchema = z
+  .number()
+  .int('Count whole tablets.')
+  .min(0, 'Count whole tablets.')
+  .max(50, 'No feeder holds that many. Count again.')
+  .optional();
 
 /** What a person says about a dose. The id of the tick is made on the device, so that a resend is the same tick. */
 export const doseTickSchema = z.discriminatedUnion('action', [
@@ -49,12 +59,14 @@ export const doseTickSchema = z.discriminatedUnion('action', [
     id: z.uuid(),
     planVersion: z.number().int(),
     at: instantSchema.optional(),
+    tabletsLeft: tabletsLeftSchema,
   }),
   z.strictObject({
     action: z.literal('changed'),
     id: z.uuid(),
     planVersion: z.number().int(),
     at: instantSchema.optional(),
+    tabletsLeft: tabletsLeftSchema,
     amount: z.number().gt(0, 'Write how much went in.').max(1e6),
   }),
   z.strictObject({ action: z.literal('skipped'), id: z.uuid(), planVersion: z.number().int() }),

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { bandSchema, checkSchema, factSchema, needSchema, weekPlanSchema } from './plan';
 import { planDoseSchema } from './plan-dose';
 import { surfaces } from './pool';
+import { uncertainQuantities } from './posterior';
 import { recordedReadingSchema } from './reading';
 import { calendarDaySchema, instantSchema, wallIntervalSchema } from './time';
 import { verdictSchema } from './verdict';
@@ -31,6 +32,15 @@ export const sheetCurveSchema = z.object({
   cyanuricAcid: bandSchema,
 });
 export type SheetCurve = z.infer<typeof sheetCurveSchema>;
+
+/** A value of the newest test that lies far from what was expected: it counts little until another test says the same. */
+const questionedSchema = z.object({
+  quantity: z.enum(uncertainQuantities),
+  measured: z.number(),
+  low: z.number(),
+  high: z.number(),
+  takenAt: instantSchema,
+});
 
 /** Everything the week sheet shows, at one moment. */
 export const weekSheetSchema = z.object({
@@ -80,6 +90,9 @@ export const weekSheetSchema = z.object({
   /** Set when planning failed: what the person is told, with the id under which it was logged. */
   planProblem: z.object({ code: z.string(), errorId: z.string() }).nullable(),
   lastReading: recordedReadingSchema.nullable(),
+  questioned: z.array(questionedSchema),
+  /** The newest test found more chlorine than can be left of what was recorded, and so did the one before it. */
+  unrecorded: z.boolean(),
   readings: z.array(recordedReadingSchema),
   doses: z.array(planDoseSchema),
   checks: z.array(checkSchema.extend({ done: z.boolean() })),

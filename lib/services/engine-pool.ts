@@ -69,7 +69,8 @@ export function feederMassAt(pool: Pool, profiledAt: number, instant: number): n
   return load.count * load.tabletMass * massLeft(share);
 }
 
-function pumpHoursADay(pool: Pool, instant: number): number {
+/** Hours that the pump runs by its timer on the day of an instant [ms]. */
+export function pumpHoursADay(pool: Pool, instant: number): number {
   const running = intervalsOfDay(pool.pump, dayOf(instant, pool.timeZone), pool.timeZone);
   return running.reduce((sum, { from, to }) => sum + (to - from) / HOUR, 0);
 }

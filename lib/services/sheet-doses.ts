@@ -45,10 +45,12 @@ type Around = {
   feederKind: PoolRow['feederKind'];
   timeZone: string;
   now: Date;
+  /** Tablets found before doses, by their ids. */
+  found: ReadonlyMap<string, number>;
 };
 
 /** A dose as the sheet shows it: which steps, and the hours that follow from when it goes in or went in. */
-export function sheetDose(dose: StoredDose, { plan, shelf, feederKind, timeZone, now }: Around): PlanDose {
+export function sheetDose(dose: StoredDose, { plan, shelf, feederKind, timeZone, now, found }: Around): PlanDose {
   const iso = (instant: number) => toOffsetIso(instant, timeZone);
   const at = dose.at.getTime();
   const poured = dose.givenAt?.getTime() ?? at;
@@ -79,6 +81,7 @@ export function sheetDose(dose: StoredDose, { plan, shelf, feederKind, timeZone,
     givenAmount: dose.givenAmount,
     doneBy: dose.doneByName,
     recordedBy: dose.recordedByName,
+    tabletsLeft: found.get(dose.id) ?? null,
     claimedBy: claimLasts(dose, now) ? dose.claimedByName : null,
     undoUntil: dose.tickedAt === null ? null : iso(dose.tickedAt.getTime() + undoWindow),
   };

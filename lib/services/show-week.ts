@@ -3,6 +3,7 @@ import { listPlans, type StoredPlan } from '@/db/queries/plans';
 import { findPool } from '@/db/queries/pools';
 import { listReadings } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
+import { tabletsFoundBefore } from '@/db/queries/tablets-found';
 import { listWeekDays } from '@/db/queries/week-days';
 import { firstWeekday } from '@/lib/calendar/first-weekday';
 import { addDays, type CalendarDay, dayOf, startOfDay, weekOf } from '@/lib/calendar/household-day';
@@ -17,6 +18,7 @@ import type { ServiceContext } from './context';
 import { enginePool } from './engine-pool';
 import { zeroDoubtOf } from './false-zero';
 import { planWeek, type PlanProblem } from './plan-week';
+import { questionsOf } from './questioned';
 import { recordedReading } from './recorded-reading';
 import { sheetChecks } from './sheet-checks';
 import { curveAhead, curveBehind } from './sheet-curves';
@@ -54,7 +56,6 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
   const last = readings[0] ?? null;
   const plans = await listPlans(db, { householdId, ...shown });
   const shelf = await listShelfProducts(db, householdId);
-  const around = { plan: plan?.result ?? null, shelf, feederKind: found.pool.feederKind, timeZone, now };
   // The verdict asks for the doses around now, the sheet for those of the week it shows.
   const reach = new Date(now.getTime() - DAYS_OF_A_PLAN * DAY);
   const doses = await countingDoses(db, {
@@ -63,6 +64,10 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     until: new Date(Math.max(now.getTime() + DAYS_OF_A_PLAN * DAY, shown.until.getTime())),
     lastReading: last?.takenAt ?? null,
   });
+  const around = {
+    ...{ plan: plan?.result ?? null, shelf, feederKind: found.pool.feederKind, timeZone, now },
+    found: await tabletsFoundBefore(db, { householdId, doseIds: doses.map(({ id }) => id) }),
+  };
   const bothForms = doses.map((stored) => ({ stored, shown: sheetDose(stored, around) }));
   const firstDay = dayOf(Math.min(last?.takenAt.getTime() ?? now.getTime(), shown.from.getTime()), timeZone);
   const lastDay = addDays(today > (days[6] ?? today) ? today : (days[6] ?? today), DAYS_OF_A_PLAN);
@@ -91,6 +96,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     plan: sheetPlan(plan, problem, timeZone, now),
     planProblem: problem,
     lastReading: last && recordedReading(last, timeZone),
+    ...(await questionsOf(db, householdId, { newest: last, zeroDoubt, timeZone })),
     readings: readings
       .filter(({ takenAt }) => takenAt >= shown.from && takenAt < shown.until)
       .map((reading) => recordedReading(reading, timeZone)),

@@ -5,6 +5,7 @@ import { wasTickRecorded } from '@/db/queries/dose-events';
 import { findDose, listDoseEvents, listDoses, recordDoseEvent, type StoredDose } from '@/db/queries/plan-doses';
 import { findCurrentPlan } from '@/db/queries/plans';
 import { findShelfProduct, setStock } from '@/db/queries/shelf-products';
+import { deleteTabletsFound, saveTabletsFound } from '@/db/queries/tablets-found';
 import { inWriteTransaction } from '@/db/write';
 import { addDays, startOfDay } from '@/lib/calendar/household-day';
 import { assertMay } from '@/lib/auth/permissions';
@@ -65,10 +66,16 @@ async function record(
   });
   if (outcome === 'already-recorded') throw new AppError('conflict', 'This tick was recorded in another household.');
   await countStock(tx, access, dose, usedOf(dose) - usedOf(after));
+  await keepTabletsLeft(tx, access, after, tick);
   const doubt = after.doubtfulAt !== null && dose.doubtfulAt === null;
   await writeAudit(tx, {
     ...{ householdId, personId, at: now, action: 'tick-dose', subjectId: dose.id },
-    detail: { tick: tick.action, amount: after.givenAmount, ...(doubt ? { suspected: 'double-dose' } : {}) },
+    detail: {
+      tick: tick.action,
+      amount: after.givenAmount,
+      ...tabletsLeftOf(tick),
+      ...(doubt ? { suspected: 'double-dose' } : {}),
+    },
   });
   return dose;
 }
@@ -88,6 +95,25 @@ async function asItStandsNow(
   const until = new Date(startOfDay(addDays(meant.day, 1), timeZone));
   const twins = (await listDoses(tx, { householdId, from, until })).filter((dose) => isSameDose(dose, meant));
   return twins.find(wentIn) ?? twins[0] ?? meant;
+}
+
+/** What a tick says was left in the feeder. */
+function tabletsLeftOf(tick: DoseTick): { tabletsLeft?: number } {
+  if (tick.action !== 'given' && tick.action !== 'changed') return {};
+  return tick.tabletsLeft === undefined ? {} : { tabletsLeft: tick.tabletsLeft };
+}
+
+/** What was found in the feeder stays with the dose that was put in then, and goes with it. */
+async function keepTabletsLeft(
+  tx: Transaction,
+  { householdId }: ServiceContext['access'],
+  after: Pick<StoredDose, 'id' | 'status'>,
+  tick: DoseTick,
+): Promise<void> {
+  const { tabletsLeft } = tabletsLeftOf(tick);
+  if (!wentIn(after)) await deleteTabletsFound(tx, { householdId, doseId: after.id });
+  else if (tabletsLeft !== undefined)
+    await saveTabletsFound(tx, { householdId, doseId: after.id, tablets: tabletsLeft });
 }
 
 /** How much is in the water by this dose, in its own unit. */

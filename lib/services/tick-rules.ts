@@ -29,6 +29,8 @@ export function assertMayBeTicked(dose: StoredDose, { timeZone, locale }: Access
  */
 export function pouredOf(tick: Pouring, dose: StoredDose, now: Date): { givenAt: Date; givenAmount: number } {
   const givenAmount = tick.action === 'changed' ? tick.amount : dose.amount;
+  if (dose.unit !== 'tablet' && tick.tabletsLeft !== undefined)
+    throw invalid('tabletsLeft', 'Only a dose of tablets tells what was left in the feeder.');
   if (dose.unit === 'tablet' && !Number.isInteger(givenAmount)) throw invalid('amount', 'Count whole tablets.');
   const claimed = tick.at === undefined ? now.getTime() : Date.parse(tick.at);
   if (claimed > now.getTime() + clockTolerance) throw invalid('at', 'A dose cannot have gone in later than now.');

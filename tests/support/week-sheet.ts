@@ -77,6 +77,8 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
     },
     planProblem: null,
     lastReading: readings.at(-1) ?? null,
+    questioned: [],
+    unrecorded: false,
     readings: readings.filter(({ takenAt: taken }) => Date.parse(taken) >= startOfDay(start, timeZone)),
     doses,
     checks: [
@@ -192,6 +194,7 @@ function aDose(number: number, at: number, iso: Iso, overrides: Partial<PlanDose
     givenAmount: null,
     doneBy: null,
     recordedBy: null,
+    tabletsLeft: null,
     claimedBy: null,
     undoUntil: null,
     ...overrides,
