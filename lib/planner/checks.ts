@@ -10,6 +10,9 @@ import type { PlanContext } from './context';
 
 type Check = WeekPlan['checks'][number];
 
+/** Nobody tests again so soon after a test [ms]: the water is still as it was read. */
+const SOON_AFTER = 6 * MILLISECONDS_PER_HOUR;
+
 /** Whether a quick check, which reads chlorine and pH, shows what a companion did. */
 function quickShows({ planned }: Companion): boolean {
   return planned.effect?.quantity === 'pH';
@@ -41,7 +44,7 @@ export function checksOf(
   for (let index = 0; index < 8; index++) {
     const day = addDays(first, index);
     const at = morning(day);
-    if (at <= lastTest || at < now || at >= endsAt) continue;
+    if (at <= lastTest + SOON_AFTER || at < now || at >= endsAt) continue;
     const swimmingEnds = intervalsOfDay([pool.swimHours], day, pool.timeZone).at(-1)?.to ?? at;
     const age = (swimmingEnds - lastTest) / MILLISECONDS_PER_HOUR;
     const swims = (week.swimmerHours[index] ?? 0) > 0;
@@ -63,8 +66,15 @@ export function checksOf(
     checks.push({ at, kind: retest && !quickShows(companion) ? 'full' : 'quick', reason });
     lastTest = at;
   }
-  checks.push({ at: Math.max(endsAt, now), kind: 'full', reason: 'next-week' });
-  return checks.map((check) => ({ ...check, at: toOffsetIso(check.at, pool.timeZone) }));
+  checks.push({ at: Math.max(fullTestDue(context, morning, endsAt), now), kind: 'full', reason: 'next-week' });
+  return checks.sort((a, b) => a.at - b.at).map((check) => ({ ...check, at: toOffsetIso(check.at, pool.timeZone) }));
+}
+
+/** A week after the last full test; the next morning where there has been none. */
+function fullTestDue({ start, scenario }: PlanContext, morning: (day: CalendarDay) => number, endsAt: number): number {
+  const lastFull = start.measuredAt.totalAlkalinity;
+  if (lastFull === undefined) return morning(addDays(dayOf(start.takenAt, scenario.pool.timeZone), 1));
+  return Math.max(start.takenAt, Math.min(endsAt, lastFull + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR));
 }
 
 function firstHourAtMinimum(

@@ -13,8 +13,8 @@ export const alkalinityAim = {
 
 /** How far under its aim a quantity lies before something is added: a weekly test reads it no better [mg/L]. */
 export const alkalinityDeadBand = {
-  value: 20,
-  source: practice('one step of a drop kit of 10 mg/L either way'),
+  value: 25,
+  source: practice('two steps of a drop kit of 10 mg/L, and what a week takes'),
 } as const;
 
 /** Hardness outside which the surface asks to act [mg/L as CaCO3]; no lower end where there is nothing to dissolve. */

@@ -241,6 +241,29 @@ describe('tests that a plan asks for', () => {
   });
 });
 
+describe('the full test', () => {
+  const dueIn = (changes: Parameters<typeof scenarioOf>[0], reading?: object) =>
+    planWeek({ ...scenarioOf(changes), ...reading }).checks.filter(({ kind }) => kind === 'full');
+  const quick = { takenAt: '2026-07-08T09:00:00-04:00', method: 'drop-kit' as const, freeChlorine: 2.8, pH: 7.5 };
+  const full = [scenarioOf().reading].flat()[0]!;
+
+  it('is due a week after the last full one, whatever was checked since', () => {
+    expect(dueIn({}, { reading: [full, quick] })).toEqual([
+      { at: '2026-07-12T19:00:00-04:00', kind: 'full', reason: 'next-week' },
+    ]);
+  });
+
+  it('is due the next morning where everything was never measured', () => {
+    expect(dueIn({}, { reading: quick })[0]).toMatchObject({ at: '2026-07-09T10:00:00-04:00' });
+  });
+
+  it('and no check comes within six hours of the test that makes the plan', () => {
+    const morning = { ...full, takenAt: '2026-07-05T09:40:00-04:00', freeChlorine: 2.1 };
+    const { checks } = planWeek({ ...scenarioOf(), reading: morning });
+    for (const { at } of checks) expect(Date.parse(at)).toBeGreaterThan(Date.parse(morning.takenAt) + 6 * 3_600_000);
+  });
+});
+
 describe('outcomes of common practice', () => {
   const fillWater = { calciumHardness: 350, totalAlkalinity: 120, pH: 7.8 };
   const forms = ({ doses }: WeekPlan) => new Set(doses.map(({ form }) => form));
