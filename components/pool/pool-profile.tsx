@@ -11,14 +11,16 @@ import { setupOptions } from '@/lib/client/pools';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { shelfOptions } from '@/lib/client/shelf-products';
 import type { SetupState, SetupStep } from '@/lib/schemas/pool-profile';
+import { LearntSection } from './learnt/learnt-section';
+import { PoolHeadline } from './learnt/pool-headline';
+import { StillGuesses } from './learnt/still-guesses';
 import { ProfileRows } from './profile-rows';
 import { SavedDrawing } from './saved-drawing';
 import { type PoolHousehold, PoolSettingProvider, usePoolSetting } from './setting';
 import { useProfileRows } from './use-profile-rows';
-import { useVolumeWords } from './volume-words';
 
 /** The pool as it was described: drawn where it was measured, and each part open for correction. */
-export function PoolProfile({ household }: { household: PoolHousehold }) {
+export function PoolProfile({ household, mayForget }: { household: PoolHousehold; mayForget: boolean }) {
   const t = useTranslations('first-run');
   const common = useTranslations('common');
   const words = useProblemWords();
@@ -38,20 +40,19 @@ export function PoolProfile({ household }: { household: PoolHousehold }) {
     return <Skeleton label={common('loading')} className="mx-margin my-8 h-72" />;
   return (
     <PoolSettingProvider household={household} place="profile">
-      <Profile state={setup.data} />
+      <Profile state={setup.data} mayForget={mayForget} />
     </PoolSettingProvider>
   );
 }
 
-function Profile({ state }: { state: SetupState }) {
+function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }) {
   const t = useTranslations('pool');
-  const { mayChange, system, name } = usePoolSetting();
-  const volumes = useVolumeWords();
+  const { mayChange } = usePoolSetting();
   const { data: shelf = [] } = useQuery(shelfOptions());
   const { profile } = state;
   const parts = useProfileRows({ profile, shelf });
   const drawing = profile.size?.how === 'measured' ? profile.size : undefined;
-  const volume = profile.volume === null ? undefined : volumes.inSystem(profile.volume, system);
+  const how = drawing === undefined ? 'entered' : 'drew';
   const part = ({ step, rows }: (typeof parts)[number]) => (
     <ProfileRows
       key={step}
@@ -64,10 +65,7 @@ function Profile({ state }: { state: SetupState }) {
   return (
     <div className="mx-auto max-w-sheet pb-8">
       <div className="px-margin pt-3 pb-3.5 md:border-t md:border-rule">
-        <h1 className="font-display-soft text-headline">
-          {volume === undefined ? t('profile.title') : t('profile.headline', { name, volume })}
-        </h1>
-        <p className="font-display text-lead text-pretty">{t(mayChange ? 'profile.lead' : 'profile.leadLooking')}</p>
+        <PoolHeadline volume={profile.volume} how={how} />
       </div>
       <DoubleRule className="mx-margin" />
       <div className="grid gap-x-7.5 px-margin pt-2 lg:grid-cols-[minmax(0,1fr)_420px]">
@@ -80,9 +78,11 @@ function Profile({ state }: { state: SetupState }) {
           <div className="grid gap-x-7.5 border-t border-rule sm:grid-cols-2 sm:*:border-t-0">
             {parts.filter(isWide).map(part)}
           </div>
+          {state.completed ? <LearntSection how={how} mayForget={mayForget} /> : null}
         </div>
         <div className="min-w-0 border-t border-rule lg:border-t-0">
           {parts.filter((one) => !isWide(one)).map(part)}
+          {state.completed ? <StillGuesses /> : null}
         </div>
       </div>
     </div>

@@ -5,6 +5,7 @@ import help from './en/help.json';
 import how from './en/how.json';
 import howConstants from './en/how-constants.json';
 import howExamples from './en/how-examples.json';
+import learnt from './en/learnt.json';
 import navigation from './en/navigation.json';
 import pool from './en/pool.json';
 import problems from './en/problems.json';
@@ -23,6 +24,7 @@ export const catalogue = {
   how,
   'how-constants': howConstants,
   'how-examples': howExamples,
+  learnt,
   navigation,
   pool,
   problems,

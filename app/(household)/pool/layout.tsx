@@ -1,5 +1,5 @@
 import { ClientMessages } from '@/lib/messages/client-messages';
 
 export default function PoolLayout({ children }: { children: React.ReactNode }) {
-  return <ClientMessages namespaces={['first-run', 'pool', 'units']}>{children}</ClientMessages>;
+  return <ClientMessages namespaces={['first-run', 'learnt', 'pool', 'units']}>{children}</ClientMessages>;
 }

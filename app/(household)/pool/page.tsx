@@ -13,5 +13,10 @@ export default async function PoolPage() {
   const { access } = await requireHousehold();
   const { householdId, householdName, timeZone, locale, unitSystem, personName } = access;
   const household = { id: householdId, name: householdName, timeZone, locale, unitSystem, personName };
-  return <PoolProfile household={{ ...household, mayChange: may(access, 'change-pool') }} />;
+  return (
+    <PoolProfile
+      household={{ ...household, mayChange: may(access, 'change-pool') }}
+      mayForget={may(access, 'reset-learning')}
+    />
+  );
 }
