@@ -18,6 +18,7 @@ import { SunLane } from './sun-lane';
 import { ToDoLane } from './to-do-lane';
 import { useElementWidth } from './use-element-width';
 import { useLaneAxes } from './use-lane-axes';
+import { WhatChanged } from './what-changed';
 import { WhyThisMix } from './why-this-mix';
 
 /** Seven day-columns on one time axis, with the margin column beside or below them. */
@@ -34,6 +35,7 @@ export function DeskSheet() {
       </div>
       <aside className="grid content-start gap-x-7.5 border-t border-ink pt-3.5 pb-6 sm:grid-cols-2 lg:grid-cols-1 lg:border-t-0">
         <WhyThisMix />
+        <WhatChanged />
         <FourWays />
       </aside>
     </div>

@@ -9,6 +9,7 @@ import { RestOfWeek } from './rest-of-week';
 import { SheetTables } from './sheet-tables';
 import { StopLine } from './stop-line';
 import { Today } from './today';
+import { WhatChanged } from './what-changed';
 import { WhyThisMix } from './why-this-mix';
 
 /** The day first: what to do next, the Stop, today's water, then the rest of the week. */
@@ -22,6 +23,7 @@ export function PhoneSheet() {
       <RestOfWeek />
       <div className="mt-5.5 grid gap-4">
         <WhyThisMix />
+        <WhatChanged />
         <FourWays />
         <SheetTables />
         <Colophon />

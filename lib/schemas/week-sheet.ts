@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { bandSchema, checkSchema, factSchema, needSchema, weekPlanSchema } from './plan';
+import { planChangesSchema } from './plan-changes';
 import { planDoseSchema } from './plan-dose';
 import { surfaces } from './pool';
 import { uncertainQuantities } from './posterior';
@@ -87,6 +88,8 @@ export const weekSheetSchema = z.object({
       openSwimShare: z.number().nullable(),
     })
     .nullable(),
+  /** What the newest plan changed of the days ahead. */
+  changes: planChangesSchema.nullable(),
   /** Set when planning failed: what the person is told, with the id under which it was logged. */
   planProblem: z.object({ code: z.string(), errorId: z.string() }).nullable(),
   lastReading: recordedReadingSchema.nullable(),

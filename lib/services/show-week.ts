@@ -17,6 +17,7 @@ import { limits } from '@/lib/standards/limits';
 import type { ServiceContext } from './context';
 import { enginePool } from './engine-pool';
 import { zeroDoubtOf } from './false-zero';
+import { planChanges } from './plan-changes';
 import { planWeek, type PlanProblem } from './plan-week';
 import { questionsOf } from './questioned';
 import { recordedReading } from './recorded-reading';
@@ -94,6 +95,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     behind: curveBehind(plans, shown.from.getTime(), Math.min(now.getTime(), shown.until.getTime())),
     ahead: curveAhead(plan),
     plan: sheetPlan(plan, problem, timeZone, now),
+    changes: await planChanges(db, householdId, plan, timeZone),
     planProblem: problem,
     lastReading: last && recordedReading(last, timeZone),
     ...(await questionsOf(db, householdId, { newest: last, zeroDoubt, timeZone })),
