@@ -1,7 +1,7 @@
 'use client';
 
 import { useLocale, useTranslations } from 'next-intl';
-import type { ExampleUnit } from '@/lib/client/worked-out/examples/example';
+import type { ExampleUnit } from '@/lib/client/worked-out/examples/names';
 import { formatNumber } from '@/lib/units/format';
 
 const months = ['1', '2', '3', '4', '5', '6', '7', '8', '9', '10', '11', '12'] as const;

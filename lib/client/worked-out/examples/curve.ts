@@ -1,4 +1,4 @@
-import type { ExampleUnit, FigureName } from './example';
+import type { ExampleUnit, FigureName } from './names';
 
 /** How a line is drawn; the marks are those of the week sheet. */
 export type Mark = 'chlorine' | 'pH' | 'stabilizer' | 'ink' | 'before';
