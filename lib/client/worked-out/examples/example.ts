@@ -63,4 +63,3 @@ export type Example<Name extends InputName = InputName> = {
   inputs: readonly Input<Name>[];
   work: (values: Readonly<Record<Name, number>>) => Worked;
 };
-
