@@ -7,45 +7,26 @@ import type { PlanContext } from './context';
 import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import { type Choice, emptyDraft, visitsOf } from './draft';
 import { plannedDoses } from './planned-doses';
-import type { Options } from './products';
-import type { Response } from './response';
-import { quickPlan } from './search';
+import { sketchAlone } from './sketch';
+import type { WeekSketch } from './week-sketch';
 
-/** The best week with each form alone: what the household gives up or gains against the plan's mix. */
-export function alternativesOf(
-  context: PlanContext,
-  response: Response,
-  choice: Choice,
-  options: Options,
-): Alternative[] {
+/**
+ * The best week with each form alone: what the household gives up or gains against the plan's mix. Each is projected in full
+ * for the median; what it costs over the ensemble is the quick model's figure, made to agree with the plan.
+ */
+export function alternativesOf({ context, options, choice, response, sketches }: WeekSketch, plan: Evaluated) {
   const without: Choice = { ...choice, tablets: null };
-  const only = (kind: Alternative['kind']): Evaluated | null => {
-    if (kind === 'tablets') return options.tablets ? quickPlan(context, response, { choice, fast: [null] }) : null;
-    const fast = options.fast.filter(({ form }) => form === kind);
-    return fast.length > 0 ? quickPlan(context, response, { choice: without, fast }) : null;
-  };
-  return (['tablets', 'granular', 'liquid'] as const).map((kind) => {
-    const found = only(kind);
-    const nothing = () =>
-      evaluate(
-        emptyDraft(without),
-        without,
-        context,
-        context.searchMembers.map(({ member }) => member),
-      );
-    return alternativeOf(kind, found ?? nothing(), found !== null, context);
+  const cost = response.costAround(plan);
+  return (['tablets', 'granular', 'liquid'] as const).map((kind): Alternative => {
+    const fast = kind === 'tablets' ? [null] : options.fast.filter(({ form }) => form === kind);
+    const possible = kind === 'tablets' ? options.tablets !== null : fast.length > 0;
+    const allowed = kind === 'tablets' ? choice : without;
+    const draft = possible ? sketchAlone(response, { choice: allowed, fast }, sketches) : emptyDraft(without);
+    const found = evaluate(draft, allowed, context, []);
+    const doses = plannedDoses(draft, allowed, context);
+    const burden = burdenOf(found, doses, context);
+    return { kind, feasible: possible && burden.hoursOutside === 0, doses, ...burden, total: cost.of(draft) };
   });
-}
-
-function alternativeOf(
-  kind: Alternative['kind'],
-  found: Evaluated,
-  possible: boolean,
-  context: PlanContext,
-): Alternative {
-  const doses = plannedDoses(found.draft, found.choice, context);
-  const burden = burdenOf(found, doses, context);
-  return { kind, feasible: possible && burden.hoursOutside === 0, doses, ...burden, total: found.cost.total };
 }
 
 /** What a week asks of the household and leaves in the water, by the median. */

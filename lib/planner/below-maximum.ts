@@ -17,7 +17,7 @@ export function belowMaximum({ draft, courses }: Evaluated, { evenings }: Choice
 /** Takes a fifth of the largest dose out of a plan, in the end tablets, until it stays below the maximum. */
 export function lowered(plan: Evaluated, choice: Choice, context: PlanContext): Evaluated {
   let next = plan;
-  while (!belowMaximum(next, choice, context)) next = evaluate(less(next.draft), choice, context, context.members);
+  while (!belowMaximum(next, choice, context)) next = evaluate(less(next.draft), choice, context);
   return next;
 }
 

@@ -2,11 +2,12 @@ import { dayOf } from '@/lib/calendar/household-day';
 import { intervalsOfDay, parseInstant } from '@/lib/calendar/wall-time';
 import { hoursFrom, settingOf } from '@/lib/projection';
 import { ensembleOf, type Member } from '@/lib/projection/ensemble';
-import type { WeekDose } from '@/lib/projection/events';
+import { riseOf, type WeekDose } from '@/lib/projection/events';
 import { type Forcing, prepareForcing } from '@/lib/projection/forcing';
 import { type Course, integrateWeek } from '@/lib/projection/integrate';
 import { learntStart } from '@/lib/projection/learnt-start';
 import { bandOf } from '@/lib/projection/quantiles';
+import type { TabletLoad } from '@/lib/projection/tablets';
 import type { Posterior } from '@/lib/schemas/posterior';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { limits } from '@/lib/standards/limits';
@@ -14,7 +15,9 @@ import { ledgerOf } from '@/lib/chemistry';
 import { weekDoseOf } from './given-doses';
 import { type StartingWater, startingWater } from './starting-water';
 
-const SEARCH_MEMBERS = 12;
+/** The first 32 of 64 Sobol points are as evenly spread as all of them. */
+const QUICK_MEMBERS = 32;
+const ROUGH_MEMBERS = 6;
 
 /** A member with its week in which nothing more goes in. */
 export type Undosed = { member: Member; undosed: Course };
@@ -30,8 +33,10 @@ export type PlanContext = {
   /** The pool with every parameter at its median, and the ensemble around it. */
   median: Member;
   members: readonly Member[];
-  /** Those that a search projects: they stand for all in how fast they lose chlorine. */
-  searchMembers: readonly Undosed[];
+  /** The half of them that the quick model compares drafts over. */
+  quickMembers: readonly Undosed[];
+  /** A few that stand for those in how fast they lose chlorine: for a first look at many drafts. */
+  roughMembers: readonly Undosed[];
   /** The median's week in which nothing more goes in: what a plan's own drift is measured from. */
   undosed: Course;
   hours: readonly number[];
@@ -72,7 +77,7 @@ export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext
     taught ? { covariance: taught.covariance } : {},
   );
   const undosed = (member: Member) => integrateWeek(forcing, member.start, given, member.setting);
-  const all = members.map((member) => ({ member, undosed: undosed(member) }));
+  const quickMembers = members.slice(0, QUICK_MEMBERS).map((member) => ({ member, undosed: undosed(member) }));
   return {
     scenario,
     now: scenario.now === undefined ? start.takenAt : Math.max(start.takenAt, parseInstant(scenario.now)!),
@@ -81,8 +86,11 @@ export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext
     forcing,
     median,
     members,
-    searchMembers: spread(all),
-    belowMaximumFrom: belowMaximumFrom(all, hours),
+    quickMembers,
+    roughMembers: spread(quickMembers),
+    belowMaximumFrom: members.every((member) => surelyBelowMaximum(member, given))
+      ? -Infinity
+      : belowMaximumFrom(members.map(undosed), hours),
     undosed: undosed(median),
     hours,
     swimHour,
@@ -108,20 +116,32 @@ function bringsStabilizer(dose: WeekDose): boolean {
   return dose.kind === 'tablets' || (dose.contents.freeChlorine > 0 && dose.contents.cyanurate > 0);
 }
 
+/** Whether a member cannot pass the maximum by itself, not even if nothing of what it has and gets were lost. */
+function surelyBelowMaximum({ start, setting }: Member, given: readonly WeekDose[]): boolean {
+  const { volume } = setting.parameters;
+  const ofTablets = ({ count, tabletMass, strength }: TabletLoad) => (count * tabletMass * strength) / 100 / volume;
+  const most = [
+    start.ledger.freeChlorine,
+    ...start.loads.map(ofTablets),
+    ...given.map((dose) =>
+      dose.kind === 'tablets' ? ofTablets(dose.load) : riseOf(dose.contents, dose.amount, volume),
+    ),
+  ].reduce((sum, each) => sum + each);
+  return most <= limits.freeChlorineMaximum.value;
+}
+
 /** The instant after which the 90th percentile of free chlorine is never over the maximum; infinite when it never is. */
-function belowMaximumFrom(all: readonly Undosed[], hours: readonly number[]): number {
+function belowMaximumFrom(undosed: readonly Course[], hours: readonly number[]): number {
   const { value: maximum } = limits.freeChlorineMaximum;
-  const rows = all.map(({ undosed }) => undosed.hourly.freeChlorine);
-  if (rows.every((row) => row.every((level) => level <= maximum))) return -Infinity;
-  const last = bandOf(rows).p90.findLastIndex((level) => level > maximum);
+  const last = bandOf(undosed.map(({ hourly }) => hourly.freeChlorine)).p90.findLastIndex((level) => level > maximum);
   return last < 0 ? -Infinity : (hours[last + 1] ?? Infinity);
 }
 
 /** A few members that stand for all: evenly spread over their order by the chlorine that is left to them. */
 function spread(all: readonly Undosed[]): Undosed[] {
   const ordered = all.map((each) => ({ each, mean: meanChlorine(each.undosed) })).sort((a, b) => a.mean - b.mean);
-  const place = (index: number) => Math.floor(((index + 0.5) * ordered.length) / SEARCH_MEMBERS);
-  return Array.from({ length: SEARCH_MEMBERS }, (_, index) => ordered[place(index)]!.each);
+  const place = (index: number) => Math.floor(((index + 0.5) * ordered.length) / ROUGH_MEMBERS);
+  return Array.from({ length: ROUGH_MEMBERS }, (_, index) => ordered[place(index)]!.each);
 }
 
 function meanChlorine({ hourly }: Course): number {

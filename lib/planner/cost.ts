@@ -11,8 +11,8 @@ import { weights } from './weights';
 
 export type Evaluated = { draft: Draft; choice: Choice; median: Course; courses: Course[]; cost: Cost };
 
-/** Projects a draft in full over some members and prices it. */
-export function evaluate(draft: Draft, choice: Choice, context: PlanContext, members: readonly Member[]): Evaluated {
+/** Projects a draft in full over the ensemble, or over some members, and prices it. */
+export function evaluate(draft: Draft, choice: Choice, context: PlanContext, members = context.members): Evaluated {
   const doses = weekDosesOf(draft, choice, context);
   const run = ({ start, setting }: Member) => integrateWeek(context.forcing, start, doses, setting);
   const median = run(context.median);
@@ -65,6 +65,8 @@ export function levelsOf(courses: readonly Course[]): Float64Array {
   return levels;
 }
 
+type Risk = { shortfall: number; excess: number };
+
 /**
  * Weighted shortfall and excess of the median, which comes first, and of the members after it, laid out as by
  * {@link levelsOf}: expected over the members, and again for the median.
@@ -75,7 +77,7 @@ export function riskOf(
   levels: Float64Array,
   lowest: Float64Array,
   { swimCeiling, swimHour }: Pick<PlanContext, 'swimCeiling' | 'swimHour'>,
-): { shortfall: number; excess: number } {
+): Risk {
   const courses = levels.length / lowest.length;
   const each = 1 / Math.max(1, courses - 1);
   const maximum = limits.freeChlorineMaximum.value;
@@ -130,18 +132,28 @@ export function pHPrice(
   first: { pH: number; totalAlkalinity: number },
   pH: ArrayLike<number>,
   endAlkalinity: number,
-  { scenario, swimHour }: Pick<PlanContext, 'scenario' | 'swimHour'>,
+  context: Pick<PlanContext, 'scenario' | 'swimHour'>,
 ): number {
-  const { pool, driftPrices } = scenario;
-  const fromAim = (value: number) => Math.max(limits.pHAimLow.value - value, value - limits.pHAimHigh.value, 0);
-  const away = Math.max(0, fromAim(pH[pH.length - 1]!) - fromAim(first.pH));
-  const each = driftPrices.pH ?? weights.pHPerCubicMetre * pool.volume;
-  const alkalinityLost = Math.max(0, Math.min(first.totalAlkalinity, 80) - endAlkalinity);
   let outside = 0;
   for (let hour = 0; hour < pH.length; hour++) {
     const by = Math.max(limits.pHRangeLow.value - pH[hour]!, pH[hour]! - limits.pHRangeHigh.value, 0);
     outside += (by / 0.1) * weights.pHOutside;
-    if (by > 0 && swimHour[hour]) outside += weights.closedSwimHour;
+    if (by > 0 && context.swimHour[hour]) outside += weights.closedSwimHour;
   }
-  return (away / 0.1) * each + (alkalinityLost / 10) * weights.alkalinityPerCubicMetre * pool.volume + outside;
+  return pHDriftPrice(first, pH[pH.length - 1]!, endAlkalinity, context) + outside;
+}
+
+/** The price of bringing pH and alkalinity back at the end of the week. */
+export function pHDriftPrice(
+  first: { pH: number; totalAlkalinity: number },
+  endPH: number,
+  endAlkalinity: number,
+  { scenario }: Pick<PlanContext, 'scenario'>,
+): number {
+  const { pool, driftPrices } = scenario;
+  const fromAim = (value: number) => Math.max(limits.pHAimLow.value - value, value - limits.pHAimHigh.value, 0);
+  const away = Math.max(0, fromAim(endPH) - fromAim(first.pH));
+  const each = driftPrices.pH ?? weights.pHPerCubicMetre * pool.volume;
+  const alkalinityLost = Math.max(0, Math.min(first.totalAlkalinity, 80) - endAlkalinity);
+  return (away / 0.1) * each + (alkalinityLost / 10) * weights.alkalinityPerCubicMetre * pool.volume;
 }

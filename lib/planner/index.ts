@@ -1,4 +1,3 @@
-import { dayOf } from '@/lib/calendar/household-day';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { analysisAt, type CourseBand } from '@/lib/projection';
 import { integrateWeek } from '@/lib/projection/integrate';
@@ -11,8 +10,6 @@ import { checksOf } from './checks';
 import { type Companion, companionOf } from './companions/companion';
 import { contextOf, type PlanContext } from './context';
 import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
-import type { Choice } from './draft';
-import { openEvenings } from './evenings';
 import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
 import { weekDoseOf } from './given-doses';
@@ -20,10 +17,9 @@ import { brokenLimits, openSwimShare } from './limits-broken';
 import { needsOf } from './needs';
 import { plannedDoses } from './planned-doses';
 import { projectionOf } from './projection-of';
-import { optionsOf } from './products';
-import { responseOf } from './response';
 import { searchPlan } from './search';
 import { ENGINE_VERSION } from './version';
+import { sketchWeek } from './week-sketch';
 import { weights } from './weights';
 
 export { assertSafePlan } from './safety/assert-safe-plan';
@@ -42,12 +38,15 @@ export type { CourseBand };
 export function planWeek(scenario: Scenario): WeekPlan {
   const { blocking, wanted } = needsOf(scenario);
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
-  const chlorineAlone = searchWeek(contextOf(scenario));
-  const { companion, waiting, context: withIt } = companionOf(chlorineAlone.found, chlorineAlone);
-  const searched = withIt ? searchWeek(withIt) : chlorineAlone;
-  const { context, options, choice, response, found } = searched;
+  const alone = sketchWeek(contextOf(scenario));
+  // What goes in beside chlorine hangs on the chlorine's evenings and tablets: a sketch tells them.
+  const sketched = evaluate(alone.sketches.best[0]!.draft, alone.choice, alone.context, []);
+  const { companion, waiting, context: withIt } = companionOf(sketched, alone);
+  const sketch = withIt ? sketchWeek(withIt, alone) : alone;
+  const { context, options, choice, response, sketches } = sketch;
+  const found = searchPlan(context, response, choice, sketches);
   const { draft, halvedEvening } = halveFirstDose(found.draft, scenario);
-  const best = draft === found.draft ? found : evaluate(draft, choice, context, context.members);
+  const best = draft === found.draft ? found : evaluate(draft, choice, context);
 
   const stabilized = stabilizedIn(draft, context);
   const chlorine = plannedDoses(draft, choice, context, halvedEvening);
@@ -55,7 +54,7 @@ export function planWeek(scenario: Scenario): WeekPlan {
   const projection = projectionOf(best.courses, best.median, context, stabilized);
   const broken = brokenLimits(projection, context, stabilized);
   const openShare = openSwimShare(projection, doses, context);
-  const alternatives = alternativesOf(context, response, choice, options);
+  const alternatives = alternativesOf(sketch, best);
   const explained = {
     ...{ doses, chlorine, choice, options, alternatives, broken, openShare, waiting },
     money: moneyOf(draft, choice),
@@ -77,19 +76,6 @@ export function planWeek(scenario: Scenario): WeekPlan {
   };
   assertSafePlan(scenario, plan);
   return plan;
-}
-
-/** The best chlorine of a week, and what it was looked for with. */
-function searchWeek(context: PlanContext) {
-  const options = optionsOf(context);
-  const choice: Choice = {
-    evenings: openEvenings(context),
-    visits: Math.max(0, context.scenario.preferences.visits - visitsGiven(context)),
-    tablets: options.tablets,
-  };
-  const response = responseOf(context, choice);
-  const fast = options.fast.length > 0 ? options.fast : [null];
-  return { context, options, choice, response, found: searchPlan(context, response, { choice, fast }) };
 }
 
 function inOrder(doses: readonly PlannedDose[]): PlannedDose[] {
@@ -165,10 +151,4 @@ function planWithout(scenario: Scenario, needs: WeekPlan['needs']): WeekPlan {
     cautions: [],
     needs,
   };
-}
-
-/** Evenings already used: days since the reading on which something was given. */
-function visitsGiven({ given, start, scenario }: PlanContext): number {
-  const since = given.filter(({ at }) => at >= start.takenAt);
-  return new Set(since.map(({ at }) => dayOf(at, scenario.pool.timeZone))).size;
 }

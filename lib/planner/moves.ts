@@ -1,5 +1,6 @@
 import { type Choice, type Draft, sumOf, visitsOf } from './draft';
 import type { FastOption } from './products';
+import type { QuickCost } from './response';
 
 /** One way to change a draft; the same draft when it does not apply. */
 export type Move = (draft: Draft) => Draft;
@@ -103,15 +104,17 @@ export function descend(
   start: Draft,
   moves: readonly Move[],
   fits: (draft: Draft) => boolean,
-  cost: (draft: Draft) => number,
+  cost: QuickCost,
 ): { draft: Draft; cost: number } {
   let best = start;
-  let least = cost(start);
+  let least = cost.of(start);
+  cost.settle();
   for (let still = 0, next = 0; still < moves.length; still++, next = (next + 1) % moves.length) {
     const draft = moves[next]!(best);
     if (draft === best || !fits(draft)) continue;
-    const total = cost(draft);
+    const total = cost.of(draft, least - IMPROVEMENT);
     if (total >= least - IMPROVEMENT) continue;
+    cost.settle();
     [best, least, still] = [draft, total, -1];
   }
   return { draft: best, cost: least };

@@ -1,46 +1,61 @@
 import { constantsOfLedger, speciesOfLedger } from '@/lib/chemistry';
+import { CYANURIC_ACID_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import type { Member } from '@/lib/projection/ensemble';
 import { riseOf } from '@/lib/projection/events';
 import { HOURS_IN_PLAN, MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
 import { actingIn, type Course, ledgerAt } from '@/lib/projection/integrate';
 import { holdRates, lightThroughDepth, lossUnderSun, newStepRates, noRelease } from '@/lib/projection/step';
 import { lifeOf, massLeft, type TabletLoad } from '@/lib/projection/tablets';
-import type { PlanContext } from './context';
-import { remember } from './remember';
+import type { PlanContext, Undosed } from './context';
 
 /** Tablets that a draft adds, and from which hour on. */
 export type AddedTablets = { load: TabletLoad; from: number };
 
 /** A few members at once. Series stand hour by hour, the members side by side: [hour * members + member]. */
 export type QuickWeek = {
-  /** What tablets release less what swimmers take [mg/L/h]; `pump` is its share of each hour. */
-  sourceOf: (tablets: readonly AddedTablets[], pump: Float64Array) => Float64Array;
+  /** What tablets of before release less what swimmers take [mg/L/h]; `pump` is its share of each hour. */
+  sourceOf: (pump: Float64Array) => Float64Array;
+  /** What tablets of a draft release [mg/L/h]. */
+  releaseOf: (tablets: AddedTablets, pump: Float64Array) => Float64Array;
   /**
-   * Free chlorine at every hour [mg/L] into `levels`.
+   * What is left of the loss under sun with more stabilizer [1].
    *
-   * @param rises  what a draft adds at each hour [g/m3 of the entered volume]
-   * @param source from `sourceOf`
-   * @param count  of the tablets that a draft adds
+   * @param stabilizer how much more, by hour [mg/L]
    */
-  run: (rises: Float64Array, source: Float64Array, count: number, levels: Float64Array) => void;
+  shelteredBy: (stabilizer: Float64Array) => Float64Array;
+  /** What holds for every draft. */
+  frame: QuickFrame;
 };
 
-/** A member, its course without anything of the plan, and one with some tablets if there may be any. */
-export type QuickMember = { member: Member; undosed: Course; withTablets: Course | null };
+/** What a quick week of every draft shares; series by hour and member as above. */
+export type QuickFrame = {
+  members: number;
+  /** Free chlorine at the start [mg/L]. */
+  start: Float64Array;
+  /** Entered volume over the member's. */
+  ofVolume: Float64Array;
+  /** Whether something happens at an hour beside the draft: what that adds [mg/L], after what share of the water is kept. */
+  happens: Uint8Array;
+  jumps: Float64Array;
+  kept: Float64Array;
+  losses: Losses;
+};
 
 /** The loss under sun is measured at these levels [mg/L]; a parabola runs through them. */
 const LEVELS = [0.5, 3, 7] as const;
+const USUAL_LEVEL = LEVELS[1];
+/** How far pH and stabilizer [mg/L] are moved to see what that does to the loss. */
+const PH_PROBE = 0.05;
+const STABILIZER_PROBE = 3;
 const HOURS_OF_ONE_SPECIATION = 6;
 
 /**
- * A quick week: free chlorine alone, in hourly steps. The loss under sun that follows from pH, stabilizer and temperature
- * is taken from two courses in full, one in which nothing more goes in and one with tablets, and in between by their count;
- * swimmers and dilution are as they are. Within about a tenth of a mg/L of the full projection in stabilized water: enough
- * to compare a great many drafts; what is found is projected in full.
- *
- * @param probeCount tablets in the courses with tablets
+ * A quick week: free chlorine alone, in hourly steps. The loss under sun follows from pH, stabilizer and temperature of the
+ * week in which nothing more goes in, and from how a draft moves pH and stabilizer away from it; swimmers and dilution are
+ * as they are. Within a few hundredths of a mg/L of the full projection in stabilized water: enough to compare a great many
+ * drafts; what is found is projected in full.
  */
-export function quickWeek(context: PlanContext, quickMembers: readonly QuickMember[], probeCount: number): QuickWeek {
+export function quickWeek(context: PlanContext, quickMembers: readonly Undosed[]): QuickWeek {
   const { forcing, scenario } = context;
   const members = quickMembers.length;
   const parameters = quickMembers.map(({ member }) => member.setting.parameters);
@@ -49,61 +64,44 @@ export function quickWeek(context: PlanContext, quickMembers: readonly QuickMemb
   const start = byMember((member) => quickMembers[member]!.member.start.ledger.freeChlorine);
   const ofVolume = byMember((member) => scenario.pool.volume / parameters[member]!.volume);
 
-  const losses = lossesOf(context, quickMembers, ({ undosed }) => undosed);
-  const tabletLosses = lossesOf(context, quickMembers, ({ undosed, withTablets }) => withTablets ?? undosed);
-  const lossesWith = remember((count: number) => between(losses, tabletLosses, count / probeCount));
+  const { losses, demand } = lossesOf(context, quickMembers);
 
   const jumps = new Float64Array((HOURS_IN_PLAN + 1) * members);
   const kept = new Float64Array((HOURS_IN_PLAN + 1) * members).fill(1);
-  const given = new Set<number>();
+  const happens = new Uint8Array(HOURS_IN_PLAN + 1);
   for (const dose of context.given) {
     const hour = hourOf(dose.at, forcing);
     if (dose.kind === 'tablets' || hour < 0 || hour > HOURS_IN_PLAN) continue;
     const { contents, amount } = dose;
-    given.add(hour);
+    happens[hour] = 1;
     parameters.forEach(({ volume }, member) => (jumps[hour * members + member]! += riseOf(contents, amount, volume)));
   }
   for (const { at, volume } of forcing.backwashes) {
-    given.add(hourOf(at, forcing));
+    happens[hourOf(at, forcing)] = 1;
     parameters.forEach((each, member) => {
       kept[hourOf(at, forcing) * members + member]! *= 1 - Math.min(1, volume / each.volume);
     });
   }
 
   return {
-    sourceOf: (tablets, pump) => {
-      const source = losses.demand.map((demand) => -demand);
+    sourceOf: (pump) => {
+      const source = demand.map((taken) => -taken);
       quickMembers.forEach(({ member }, index) => {
         for (const load of member.start.loads) addRelease(source, { load, from: 0 }, pump, member, index, members);
         for (const dose of context.given)
           if (dose.kind === 'tablets' && dose.at >= forcing.startsAt)
             addRelease(source, { load: dose.load, from: hourOf(dose.at, forcing) }, pump, member, index, members);
-        for (const added of tablets) addRelease(source, added, pump, member, index, members);
       });
       return source;
     },
-    run: (rises, source, count, levels) => {
-      const { constant, linear, square } = lossesWith(count);
-      levels.set(start);
-      for (let at = 0, hour = 0; hour <= HOURS_IN_PLAN; hour++) {
-        const rise = rises[hour]!;
-        if (rise > 0 || given.has(hour)) {
-          for (let member = 0; member < members; member++) {
-            const sum = levels[at + member]! * kept[at + member]! + jumps[at + member]! + rise * ofVolume[member]!;
-            levels[at + member] = sum > 0 ? sum : 0;
-          }
-        }
-        if (hour === HOURS_IN_PLAN) break;
-        for (let member = 0; member < members; member++, at++) {
-          const before = levels[at]!;
-          const parabola = constant[at]! + before * (linear[at]! + before * square[at]!);
-          const loss = parabola > 0 ? parabola : 0;
-          // exp(-loss) and its mean over the hour, by their series: exact to a thousandth where a tenth is lost in an hour.
-          const level = (before + source[at]! * (1 + 0.5 * loss)) / (1 + loss + 0.5 * loss * loss);
-          levels[at + members] = level > 0 ? level : 0;
-        }
-      }
+    releaseOf: (tablets, pump) => {
+      const release = new Float64Array(demand.length);
+      quickMembers.forEach(({ member }, index) => addRelease(release, tablets, pump, member, index, members));
+      return release;
     },
+    shelteredBy: (stabilizer) =>
+      losses.perStabilizer.map((per, at) => 1 / (1 + per * stabilizer[Math.floor(at / members)]!)),
+    frame: { members, start, ofVolume, happens, jumps, kept, losses },
   };
 }
 
@@ -136,54 +134,75 @@ function addRelease(
   }
 }
 
-/** First-order loss in each hour as constant + linear C + square C^2 [1/h, C in mg/L], and what swimmers take [mg/L/h]. */
-type Losses = Record<'constant' | 'linear' | 'square' | 'demand', Float64Array>;
+/**
+ * First-order loss in each hour: dark + (constant + linear C + square C^2) exp(perPH dpH) / (1 + perStabilizer dCya) [1/h],
+ * C in mg/L, the last two being how far a draft moves pH and stabilizer [mg/L].
+ */
+export type Losses = Record<'dark' | 'constant' | 'linear' | 'square' | 'perPH' | 'perStabilizer', Float64Array> & {
+  /** Whether the sun acts on the water in an hour. */
+  sunny: Uint8Array;
+};
 
-function between(from: Losses, to: Losses, share: number): Losses {
-  const mix = (key: keyof Losses) => from[key].map((value, at) => value + share * (to[key][at]! - value));
-  return share === 0
-    ? from
-    : { constant: mix('constant'), linear: mix('linear'), square: mix('square'), demand: from.demand };
-}
-
-function lossesOf(
-  { forcing }: PlanContext,
-  quickMembers: readonly QuickMember[],
-  courseOf: (each: QuickMember) => Course,
-): Losses {
+/** Losses of all members, and what swimmers take [mg/L/h]. */
+function lossesOf({ forcing }: PlanContext, quickMembers: readonly Undosed[]) {
   const series = () => new Float64Array(HOURS_IN_PLAN * quickMembers.length);
-  const losses = { constant: series(), linear: series(), square: series(), demand: series() };
+  const losses: Losses = {
+    ...{ dark: series(), constant: series(), linear: series(), square: series() },
+    ...{ perPH: series(), perStabilizer: series() },
+    sunny: Uint8Array.from(forcing.sun, (sun) => (sun > 0 ? 1 : 0)),
+  };
+  const demand = series();
   const rates = newStepRates();
-  quickMembers.forEach((each, index) => {
-    const { setting } = each.member;
-    const course = courseOf(each);
+  quickMembers.forEach(({ member: { setting }, undosed }, index) => {
     const body = { depth: setting.depth, light: lightThroughDepth(setting.depth) };
-    let underSun: readonly number[] = [];
+    let underSun: ReturnType<typeof lossUnderSunAt> | null = null;
     for (let hour = 0; hour < HOURS_IN_PLAN; hour++) {
-      if (hour % HOURS_OF_ONE_SPECIATION === 0) {
-        const ledger = ledgerAt(course, hour);
-        const constants = constantsOfLedger(ledger);
-        const rateAt = (level: number) => {
-          const species = speciesOfLedger({ ...ledger, freeChlorine: level }, course.pH[hour]!, constants);
-          return lossUnderSun(species, setting.parameters.boundPhotolysis) / level;
-        };
-        underSun = parabola(LEVELS, LEVELS.map(rateAt));
-      }
+      if (hour % HOURS_OF_ONE_SPECIATION === 0) underSun = null;
       holdRates(rates, actingIn(forcing, hour), noRelease, setting.parameters, body);
       const at = hour * quickMembers.length + index;
-      losses.demand[at] = rates.swimmerDemand;
-      losses.constant[at] = rates.darkDemand + rates.outflow + rates.light * underSun[0]!;
-      losses.linear[at] = rates.light * underSun[1]!;
-      losses.square[at] = rates.light * underSun[2]!;
+      demand[at] = rates.swimmerDemand;
+      losses.dark[at] = rates.darkDemand + rates.outflow;
+      if (losses.sunny[hour] === 0) continue;
+      underSun ??= lossUnderSunAt(undosed, hour, setting.parameters.boundPhotolysis);
+      losses.constant[at] = rates.light * underSun.constant;
+      losses.linear[at] = rates.light * underSun.linear;
+      losses.square[at] = rates.light * underSun.square;
+      losses.perPH[at] = underSun.perPH;
+      losses.perStabilizer[at] = underSun.perStabilizer;
     }
   });
-  return losses;
+  return { losses, demand };
+}
+
+/** First-order loss under the reference sun [1/h] in the water of a course at an hour, as in {@link Losses}. */
+function lossUnderSunAt(course: Course, hour: number, boundPhotolysis: number) {
+  const ledger = ledgerAt(course, hour);
+  const constants = constantsOfLedger(ledger);
+  const rateAt = (level: number, pH: number, stabilizer = 0) => {
+    ledger.freeChlorine = level;
+    const { cyanurate } = ledger;
+    ledger.cyanurate += stabilizer / CYANURIC_ACID_MILLIGRAMS_PER_MOLE;
+    const rate = lossUnderSun(speciesOfLedger(ledger, pH, constants), boundPhotolysis) / level;
+    ledger.cyanurate = cyanurate;
+    return rate;
+  };
+  const pH = course.pH[hour]!;
+  const rates = LEVELS.map((level) => rateAt(level, pH));
+  const [constant, linear, square] = parabola(LEVELS, rates);
+  const usual = rates[1]!;
+  return {
+    constant,
+    linear,
+    square,
+    perPH: Math.log(rateAt(USUAL_LEVEL, pH + PH_PROBE) / rateAt(USUAL_LEVEL, pH - PH_PROBE)) / (2 * PH_PROBE),
+    perStabilizer: (usual / rateAt(USUAL_LEVEL, pH, STABILIZER_PROBE) - 1) / STABILIZER_PROBE,
+  };
 }
 
 /** Coefficients of the parabola through three points, the constant first. */
-function parabola([a, b, c]: readonly [number, number, number], [fa, fb, fc]: readonly number[]): number[] {
+function parabola([a, b, c]: readonly [number, number, number], [fa, fb, fc]: readonly number[]) {
   const slope = (fb! - fa!) / (b - a);
   const square = ((fc! - fb!) / (c - b) - slope) / (c - a);
   const linear = slope - square * (a + b);
-  return [fa! - a * (linear + a * square), linear, square];
+  return [fa! - a * (linear + a * square), linear, square] as const;
 }

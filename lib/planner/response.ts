@@ -1,36 +1,39 @@
 import { contentsPerUnit } from '@/lib/chemistry';
 import { CYANURIC_ACID_MILLIGRAMS_PER_MOLE, HARDNESS_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
-import { type Course, integrateWeek } from '@/lib/projection/integrate';
-import type { Member } from '@/lib/projection/ensemble';
-import { lowestLevel } from '@/lib/standards/limits';
+import { limits, lowestLevel } from '@/lib/standards/limits';
 import type { PlanContext } from './context';
 import {
   type Evaluated,
   hardnessPrice,
   levelsOf,
   moneyOf,
+  pHDriftPrice,
   pHPrice,
-  riskOf,
   stabilizedIn,
   stabilizerPrice,
   troubleOf,
 } from './cost';
-import { type Choice, type Draft, sumOf, tabletDose } from './draft';
+import { type Choice, type Draft, sumOf } from './draft';
 import { type FastOption, riseOfFast } from './products';
-import { quickLevels } from './quick-levels';
+import { type Correction, type QuickRisk, quickRisk } from './quick-risk';
 import { remember } from './remember';
 import { sideEffectsOf } from './side-effects';
 
-/** What quick levels are off by. */
-export type Correction = Float64Array;
+/** What a draft costs by a quick model; infinite as soon as that is known to be more than `most`. */
+export type QuickCost = {
+  of: (draft: Draft, most?: number) => number;
+  /** Makes the draft asked about last the one from which the next ones differ little: those are then reckoned sooner. */
+  settle: () => void;
+};
 
-/** A quick model of the week: what a draft costs by it. */
+/** A quick model of the week. */
 export type Response = {
-  /** Over all search members; `correction` makes free chlorine exact at the plan from which it was taken. */
-  cost: (draft: Draft, correction?: Correction) => number;
-  /** Over every second search member: for a first look at many drafts. */
-  roughCost: (draft: Draft) => number;
-  correctionAt: (evaluated: Evaluated) => Correction;
+  /** Over half of the ensemble. */
+  cost: QuickCost;
+  /** Over a few of them: for a first look at many drafts. */
+  roughCost: QuickCost;
+  /** The same, made to agree with a plan that was projected in full over the whole ensemble. */
+  costAround: (evaluated: Evaluated) => QuickCost;
   /** Free chlorine that one measure adds on each evening [mg/L]. */
   measureRises: (fast: FastOption) => readonly number[];
 };
@@ -46,73 +49,69 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
   const measureRises = remember((fast: FastOption) =>
     evenings.map(({ at }) => riseOfFast(fast, fast.measure, at, pool.volume)),
   );
-  const probeCount = Math.max(1, Math.round((choice.tablets?.most ?? 0) / 2));
-  const members = [{ member: context.median, undosed }, ...context.searchMembers].map((each) => ({
-    ...each,
-    withTablets: withTablets(context, choice, each.member, probeCount),
-  }));
-  const levels = quickLevels(context, choice, members, probeCount, measureRises);
-  const roughMembers = members.filter((_, index) => index % 2 === 0);
-  const roughLevels = quickLevels(context, choice, roughMembers, probeCount, measureRises);
-
-  const effects = sideEffectsOf(context, choice);
+  const effects = sideEffectsOf(context, choice, measureRises);
   const stabilizer = undosed.hourly.cyanurate.map((cyanurate) => cyanurate * CYANURIC_ACID_MILLIGRAMS_PER_MOLE);
-  // Stabilizer is taken as rising evenly to where the tablets bring it.
-  const lowestOf = remember(
-    (draft: Draft) => {
-      const rise = effects.endOf(draft, measureRises).cyanuricAcid - stabilizer.at(-1)!;
-      const stabilized = stabilizedIn(draft, context);
-      const last = stabilizer.length - 1;
-      return stabilizer.map((value, hour) => lowestLevel(value + (rise * hour) / last, stabilized));
-    },
-    ({ tablets }) => tablets.join(),
-  );
-  const calciumWithout = undosed.end.calcium * HARDNESS_MILLIGRAMS_PER_MOLE;
+  const lowestOf = (draft: Draft) => {
+    const moves = effects.stabilizerOf(draft);
+    const stabilized = stabilizedIn(draft, context);
+    return stabilizer.map((value, hour) => lowestLevel(value + moves[hour]!, stabilized));
+  };
+  const measureHardness = remember((fast: FastOption) => hardnessOf(fast, evenings[0]?.at ?? 0, pool.volume));
+  const hardnessWithout = undosed.end.calcium * HARDNESS_MILLIGRAMS_PER_MOLE;
 
-  const costAt = (draft: Draft, levelsThen: Float64Array): number => {
-    const risk = riskOf(levelsThen, lowestOf(draft), context);
-    const end = effects.endOf(draft, measureRises);
+  const pHOf = (draft: Draft) => {
+    const moves = effects.pHMovedBy(draft, 0);
+    return undosed.pH.map((value, hour) => value + moves[hour]!);
+  };
+  /** All that a draft costs beside risk. */
+  const pricesOf = (draft: Draft): number => {
+    const end = effects.endOf(draft);
+    const { water } = context.start;
+    const pHStays = end.low >= limits.pHRangeLow.value && end.high <= limits.pHRangeHigh.value;
     return (
       preferences.money * moneyOf(draft, choice) +
       preferences.evenings * troubleOf(draft) +
-      preferences.steadiness * (risk.shortfall + risk.excess) +
       stabilizerPrice(end.cyanuricAcid, context) +
-      hardnessPrice(calciumWithout + calciumOf(draft, evenings, pool.volume), context) +
-      pHPrice(context.start.water, end.pH, end.totalAlkalinity, context)
+      hardnessPrice(hardnessWithout + (draft.fast ? sumOf(draft.measures) * measureHardness(draft.fast) : 0), context) +
+      (pHStays
+        ? pHDriftPrice(water, end.pH, end.totalAlkalinity, context)
+        : pHPrice(water, pHOf(draft), end.totalAlkalinity, context))
     );
   };
+  const costBy = ({ riskOf, settle }: QuickRisk, correction?: Correction, offset = 0): QuickCost => ({
+    settle,
+    of: (draft, most = Infinity) => {
+      const prices = pricesOf(draft) + offset;
+      if (prices > most) return Infinity;
+      const { steadiness } = preferences;
+      return steadiness === 0 ? prices : prices + steadiness * riskOf(draft, (most - prices) / steadiness, correction);
+    },
+  });
+  const riskOver = (members: PlanContext['quickMembers']) =>
+    quickRisk(context, choice, [{ member: context.median, undosed }, ...members], {
+      ...effects,
+      measureRises,
+      lowestOf,
+    });
+  const all = riskOver(context.quickMembers);
+  const few = riskOver(context.roughMembers);
   return {
     measureRises,
-    roughCost: (draft) => costAt(draft, roughLevels(draft)),
-    cost: (draft, correction) => {
-      const levelsThen = levels(draft);
-      if (correction) for (let at = 0; at < levelsThen.length; at++) levelsThen[at]! += correction[at]!;
-      return costAt(draft, levelsThen);
-    },
-    correctionAt: ({ draft, median, courses }) => {
-      const levelsThen = levels(draft);
-      return levelsOf([median, ...courses]).map((level, at) => level - levelsThen[at]!);
+    roughCost: costBy(few),
+    cost: costBy(all),
+    costAround: ({ draft, median, courses, cost }) => {
+      const quick = all.levelsOf(draft);
+      const exact = levelsOf([median, ...courses.slice(0, context.quickMembers.length)]);
+      const correction = exact.map((level, at) => level - quick[at]!);
+      // What is left is what the other half of the ensemble, and side effects that do not quite add up, make of it.
+      return costBy(all, correction, cost.total - costBy(all, correction).of(draft));
     },
   };
 }
 
-/** A member's week with so many tablets, loaded on the first evening. */
-function withTablets(
-  { forcing, given }: PlanContext,
-  { evenings, tablets }: Choice,
-  { start, setting }: Member,
-  count: number,
-): Course | null {
-  const at = evenings[0]?.at;
-  if (!tablets || tablets.most === 0 || at === undefined) return null;
-  return integrateWeek(forcing, start, [...given, tabletDose(tablets, count, at)], setting);
-}
-
-/** Hardness that the granules of a draft add [mg/L as CaCO3]. */
-function calciumOf({ fast, measures }: Draft, evenings: Choice['evenings'], volume: number): number {
-  if (!fast || fast.form !== 'granular') return 0;
-  const amount = sumOf(measures) * fast.measure;
-  if (amount === 0) return 0;
-  const contents = contentsPerUnit(fast.dose(amount, evenings[0]!.at));
-  return (contents.calcium * amount * HARDNESS_MILLIGRAMS_PER_MOLE) / (volume * 1000);
+/** Hardness that one measure of granules adds [mg/L as CaCO3]. */
+function hardnessOf(fast: FastOption, at: number, volume: number): number {
+  if (fast.form !== 'granular') return 0;
+  const { calcium } = contentsPerUnit(fast.dose(fast.measure, at));
+  return (calcium * fast.measure * HARDNESS_MILLIGRAMS_PER_MOLE) / (volume * 1000);
 }

@@ -1,0 +1,165 @@
+import { type Choice, type Draft, emptyDraft, keyOf } from './draft';
+import { allowed, descend, fastMoves, mostMeasures, type Move, tabletMoves } from './moves';
+import type { FastOption } from './products';
+import type { QuickCost, Response } from './response';
+
+/** A draft and what it costs by the quick model. */
+export type Sketch = { draft: Draft; cost: number };
+
+/** The fast products that a search may use, cheapest first; null where there is none. */
+export type SearchSpace = { choice: Choice; fast: readonly (FastOption | null)[] };
+
+export type Sketches = {
+  /** Drafts at which no single change helps, cheapest first. */
+  best: readonly Sketch[];
+  /** Where fast products alone may start from, cheapest first. */
+  fastAlone: readonly Draft[];
+};
+
+/** Drafts to start from: of all kinds, and of fast products alone. */
+export type Starts = { all: readonly Draft[]; fastAlone: readonly Draft[] };
+
+const MOST_TABLET_COUNTS = 9;
+const LOADING_EVENINGS = 2;
+/** Up to so many fast evenings every choice of evenings is tried; more are added one by one. */
+const EVENINGS_TRIED_IN_FULL = 3;
+/** Rises that every choice of evenings is tried with [mg/L]. */
+const FIRST_RISES = [1.2, 2.8];
+/** How many choices of evenings are kept for each loading of tablets, and for fast products alone. */
+const KEPT_OF_ONE_LOADING = 2;
+const KEPT_OF_FAST_ALONE = 3;
+const KEPT = Math.max(KEPT_OF_ONE_LOADING, KEPT_OF_FAST_ALONE);
+/** How many drafts are brought to where no single change helps: with the cheapest fast product, and with each other one. */
+const IMPROVED = 9;
+const IMPROVED_WITH_OTHERS = 4;
+
+/**
+ * Sketches of a week by the quick model: every count of tablets with every choice of evenings for the cheapest fast product
+ * at two rises; the best of them are brought to where no single change helps, and the best of those with every other
+ * product.
+ *
+ * @param earlier drafts to start from in place of that, where a week much like this one has been sketched
+ */
+export function sketchesOf(response: Response, space: SearchSpace, earlier?: Starts): Sketches {
+  const { choice, fast } = space;
+  const first = fast[0] ?? null;
+  const tried = earlier ? { ...earlier, all: costed(earlier.all, response) } : screen(first, choice, response);
+  const improved = (draft: Draft) => improve(draft, choice, response, response.roughCost);
+  const best = inOrder(tried.all.slice(0, IMPROVED).map(improved));
+  const others = fast.flatMap((product) =>
+    best
+      .slice(0, IMPROVED_WITH_OTHERS)
+      .filter(({ draft }) => draft.fast && draft.fast !== product)
+      .map(({ draft }) => improved(withProduct(draft, product, response))),
+  );
+  const exact = [...best, ...others].map(({ draft }) => ({ draft, cost: response.cost.of(draft) }));
+  return { best: inOrder(exact), fastAlone: tried.fastAlone };
+}
+
+/** The cheapest week with one kind of product alone, by the quick model. */
+export function sketchAlone(response: Response, { choice, fast }: SearchSpace, { fastAlone }: Sketches): Draft {
+  const starts = fast.flatMap((product) =>
+    product ? fastAlone.map((draft) => withProduct(draft, product, response)) : tabletStarts(choice),
+  );
+  return improve(costed(starts, response)[0]!, choice, response, response.roughCost).draft;
+}
+
+/** Distinct drafts, the cheapest by the rough cost first. */
+function costed(drafts: readonly Draft[], { roughCost }: Response): Draft[] {
+  return inOrder(drafts.map((draft) => ({ draft, cost: roughCost.of(draft) }))).map(({ draft }) => draft);
+}
+
+/** Distinct drafts, the cheapest first; of equals the one found first. */
+export function inOrder(sketches: readonly Sketch[]): Sketch[] {
+  const distinct = new Map(sketches.map((sketch) => [keyOf(sketch.draft), sketch]));
+  return [...distinct.values()].sort((a, b) => a.cost - b.cost);
+}
+
+/** Every move that a draft allows, and what it has to keep to. */
+function movesOf(draft: Draft, choice: Choice, response: Response) {
+  const most = mostMeasures(draft.fast, draft.fast ? response.measureRises(draft.fast) : draft.measures);
+  const moves: Move[] = [...(draft.fast ? fastMoves(choice, most) : []), ...tabletMoves(choice)];
+  return { moves, fits: (each: Draft) => allowed(each, choice, most) };
+}
+
+/** Brings a draft to where no single change helps. */
+export function improve(draft: Draft, choice: Choice, response: Response, cost: QuickCost): Sketch {
+  const { moves, fits } = movesOf(draft, choice, response);
+  return descend(draft, moves, fits, cost);
+}
+
+/**
+ * For every count of tablets and every evening on which they may be loaded: the best choices of evenings for fast doses to
+ * go with them, cheapest first. Without a fast product, the tablets alone.
+ */
+function screen(fast: FastOption | null, choice: Choice, response: Response): Starts {
+  const { roughCost } = response;
+  const starts = tabletStarts(choice);
+  if (!fast) return { all: costed(starts, response), fastAlone: [] };
+  const rises = response.measureRises(fast);
+  const most = mostMeasures(fast, rises);
+  const withRise = (start: Draft, set: readonly number[], rise: number): Draft => {
+    const measures = start.measures.slice();
+    for (const evening of set)
+      measures[evening] = Math.min(most[evening]!, Math.max(1, Math.round(rise / rises[evening]!)));
+    return { ...start, fast, measures };
+  };
+  const found = starts.map((start) => {
+    const alone = { ...start, fast };
+    const sketches: Sketch[] = [{ draft: alone, cost: roughCost.of(alone) }];
+    roughCost.settle();
+    for (const set of choicesOfEvenings(start, choice))
+      for (const rise of FIRST_RISES) {
+        const draft = withRise(start, set, rise);
+        const cost = roughCost.of(draft, sketches.at(KEPT - 1)?.cost);
+        if (cost === Infinity) continue;
+        sketches.push({ draft, cost });
+        sketches.sort((a, b) => a.cost - b.cost);
+      }
+    return inOrder(sketches);
+  });
+  return {
+    all: inOrder(found.flatMap((sketches) => sketches.slice(0, KEPT_OF_ONE_LOADING))).map(({ draft }) => draft),
+    fastAlone: found[0]!.slice(0, KEPT_OF_FAST_ALONE).map(({ draft }) => draft),
+  };
+}
+
+/** Drafts with every count of tablets, none first, loaded on the first or the second evening, and nothing fast yet. */
+function tabletStarts(choice: Choice): Draft[] {
+  const none = emptyDraft(choice);
+  const most = choice.tablets?.most ?? 0;
+  if (choice.visits === 0) return [none];
+  const step = Math.max(1, Math.ceil(most / MOST_TABLET_COUNTS));
+  const starts = [none];
+  for (let count = step; count <= most; count += step)
+    for (let loading = 0; loading < Math.min(LOADING_EVENINGS, choice.evenings.length); loading++)
+      starts.push({ ...none, tablets: none.tablets.map((_, evening) => (evening === loading ? count : 0)) });
+  return starts;
+}
+
+/** Every choice of up to so many evenings that the visits allow, the tablets' own left out. */
+function choicesOfEvenings({ tablets, measures }: Draft, choice: Choice): number[][] {
+  const free = measures.map((_, evening) => evening).filter((evening) => tablets[evening] === 0);
+  const most = Math.min(EVENINGS_TRIED_IN_FULL, choice.visits - (measures.length - free.length));
+  let sets: number[][] = [[]];
+  const all: number[][] = [];
+  for (let size = 1; size <= most; size++) {
+    sets = sets.flatMap((set) =>
+      free.filter((evening) => evening > (set.at(-1) ?? -1)).map((evening) => [...set, evening]),
+    );
+    all.push(...sets);
+  }
+  return all;
+}
+
+/** The same rises with another product, in its measures. */
+function withProduct(draft: Draft, fast: FastOption | null, response: Response): Draft {
+  if (draft.fast === fast || !draft.fast || !fast) return draft;
+  const from = response.measureRises(draft.fast);
+  const to = response.measureRises(fast);
+  const most = mostMeasures(fast, to);
+  const measures = draft.measures.map((count, evening) =>
+    Math.min(most[evening]!, Math.round((count * from[evening]!) / to[evening]!)),
+  );
+  return { ...draft, fast, measures };
+}
