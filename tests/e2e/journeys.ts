@@ -3,6 +3,7 @@ import { badRequests } from './journeys/bad-requests';
 import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
 import { headers } from './journeys/headers';
+import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
 import { measures } from './journeys/measures';
@@ -19,6 +20,7 @@ export const journeys: readonly Journey[] = [
   badRequests,
   ...clockChanges,
   measures,
+  learning,
   scope,
   headers,
   measuring,

@@ -60,14 +60,14 @@ export function LearntBars({ before, learnt, beforeWords, learntWords, tick, las
           strokeWidth="1.2"
           strokeDasharray="2 2.5"
         />
-        <path d={`M${px(upper.middle)} ${top - 3}v${BAR + 6}`} className="stroke-ink" strokeWidth="1.4" />
+        <path d={`M${px(upper.middle)} ${top - 3}v${BAR + 6}`} className="fill-none stroke-ink" strokeWidth="1.4" />
         <rect x={px(lower.from)} y={below} width={px(lower.to - lower.from)} height={BAR} className="fill-band" />
         <path
           d={`M${px(lower.from)} ${below - 1}v${BAR + 2}M${px(lower.to)} ${below - 1}v${BAR + 2}`}
-          className="stroke-teal"
+          className="fill-none stroke-teal"
           strokeWidth="1.6"
         />
-        <path d={`M${px(lower.middle)} ${below - 4}v${BAR + 8}`} className="stroke-teal" strokeWidth="2.6" />
+        <path d={`M${px(lower.middle)} ${below - 4}v${BAR + 8}`} className="fill-none stroke-teal" strokeWidth="2.6" />
         <DrawingText
           weight="plain"
           x={px(beforePlace.x)}
@@ -104,14 +104,14 @@ function Axis({
   const free = width - widthOf(lastWords) - 6;
   return (
     <>
-      <path d={`M${px(along(axis.from))} ${line}H${px(along(axis.to))}`} className="stroke-rule-2" />
+      <path d={`M${px(along(axis.from))} ${line}H${px(along(axis.to))}`} className="fill-none stroke-rule-2" />
       {axis.ticks.map((value, index) => {
         const x = along(value);
         const words = tick(value, axis.decimals);
         const shown = index < last && x + widthOf(words) / 2 < free;
         return (
           <g key={value}>
-            <path d={`M${px(x)} ${line}v${index === last || shown ? 6 : 4}`} className="stroke-rule-2" />
+            <path d={`M${px(x)} ${line}v${index === last || shown ? 6 : 4}`} className="fill-none stroke-rule-2" />
             {shown ? (
               <text x={px(x)} y={line + 20} textAnchor="middle" className="fill-ink-2 text-figure">
                 {words}

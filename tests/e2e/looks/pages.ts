@@ -129,7 +129,28 @@ export const signedIn: readonly View[] = [
       await page.getByText(words('readings.zero.title')).waitFor();
     },
   },
-  { name: 'pool', path: '/pool' },
+  {
+    name: 'pool',
+    path: '/pool',
+    async prepare(page) {
+      await page.getByText(words('learnt.legend')).waitFor();
+      await page
+        .getByRole('button', { name: pattern('learnt.why.openFor') })
+        .first()
+        .click();
+      await page.getByRole('button', { name: words('learnt.more') }).click();
+      await page.getByRole('heading', { name: words('learnt.thing.carbonDioxideTransfer.name') }).waitFor();
+    },
+  },
+  {
+    name: 'pool-start-again',
+    path: '/pool',
+    async prepare(page) {
+      await page.getByRole('button', { name: words('learnt.table.see') }).click();
+      await page.getByRole('button', { name: words('learnt.forget.open') }).click();
+      await page.getByRole('dialog').waitFor();
+    },
+  },
   { name: 'pool-sun', path: '/pool/sun', prepare: shows(words('pool.sun.title')) },
   { name: 'help-signed-in', path: '/help' },
 ];
