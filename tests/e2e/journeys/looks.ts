@@ -1,6 +1,16 @@
 import { randomUUID } from 'node:crypto';
 import { lookAt, widths } from '../looks/look-at';
-import { due, firstRun, recordOnly, signedIn, signedOut, stopped, untested, type View } from '../looks/pages';
+import {
+  due,
+  firstRun,
+  recordOnly,
+  signedIn,
+  signedOut,
+  stopped,
+  untested,
+  type View,
+  workedOut,
+} from '../looks/pages';
 import { enterAs } from '../support/enter';
 import { describePool, describeSteps, fullTest, slowTablets, sundayEvening } from '../support/households';
 import type { Journey, Stage } from '../support/journey';
@@ -10,6 +20,7 @@ import type { Server } from '../support/server';
 /** Colours, type, overlaps, cut text and accessibility of every page, and a picture of each. */
 export const looks: readonly Journey[] = [
   looking('looks: signed out', signedOut, async () => undefined),
+  looking('looks: how it is worked out', workedOut, async () => undefined),
   looking('looks: first run', firstRun, async (server) => {
     const person = new Person(server);
     await person.signUp();
@@ -55,7 +66,8 @@ function looking(
 ): Journey {
   return {
     name,
-    seconds: 240,
+    // Two journeys share two cores with their servers; alone the longest takes a quarter of this.
+    seconds: 480,
     async run(stage: Stage) {
       const server = await stage.server({ name: name.replace(/\W+/g, '-'), clock: sundayEvening });
       const person = await enter(server);

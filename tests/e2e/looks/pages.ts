@@ -32,6 +32,11 @@ export const signedOut: readonly View[] = [
   { name: 'help', path: '/help' },
   { name: 'emergency', path: '/help/emergency' },
   { name: 'safety', path: '/help/safety' },
+  { name: 'not-found', path: '/there-is-no-such-page', missing: true },
+];
+
+/** How the figures are worked out; open to everybody. */
+export const workedOut: readonly View[] = [
   { name: 'how', path: '/help/how' },
   { name: 'how-free-chlorine', path: '/help/how/free-chlorine' },
   {
@@ -46,7 +51,6 @@ export const signedOut: readonly View[] = [
   { name: 'how-likely-range', path: '/help/how/likely-range' },
   { name: 'how-unknown', path: '/help/how/unknown' },
   { name: 'how-constants', path: '/help/how/constants' },
-  { name: 'not-found', path: '/there-is-no-such-page', missing: true },
 ];
 
 /** For somebody in the middle of the first run, with all steps open. */
