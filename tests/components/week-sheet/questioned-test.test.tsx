@@ -14,7 +14,7 @@ const chlorine = {
 const hardness = { ...chlorine, quantity: 'calciumHardness', measured: 600, low: 190, high: 245.6 } as const;
 const sheetWith = (change: Partial<WeekSheet>) => aWeekSheet({}, change);
 const words =
-  'Free chlorine of 12.0 is far from the 2.0 to 4.0 mg/L that was expected. Was it read and typed right? It counts little until another test says the same.';
+  'Free chlorine of 12.0 is far from the 2.0 to 4.0 mg/L that was expected. Was it read and typed right? The sheet goes by it as it was read; of the pool it teaches little until another test says the same.';
 
 describe('a value that nobody expected', () => {
   it('is asked about as a caution, with the way to a new quick check', async () => {
