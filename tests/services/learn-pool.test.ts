@@ -1,41 +1,17 @@
 import { beforeEach, describe, expect, it } from 'vitest';
 import type { Database } from '@/db/client';
 import { findPosterior, listPosteriorHashes } from '@/db/queries/posteriors';
-import { Engine } from '@/lib/engine-worker/engine';
-import type { EngineTask, EngineTasks } from '@/lib/engine-worker/messages';
-import type { FilterState } from '@/lib/schemas/posterior';
 import type { NewReading } from '@/lib/schemas/reading';
 import type { ServiceContext } from '@/lib/services/context';
 import { editReading, removeReading } from '@/lib/services/edit-reading';
 import { recordReading } from '@/lib/services/record-reading';
 import { loadWeekSnapshot } from '@/lib/services/week-snapshot';
-import { planWith, sourceEngine } from '@/tests/support/engine';
+import { planWith } from '@/tests/support/engine';
 import { aFullTest, aPoolHousehold, at, hoursLater } from '@/tests/support/pool-household';
 import { freshDatabase } from '@/tests/support/test-database';
+import { WatchedEngine } from '@/tests/support/watched-engine';
 
-/** The real engine, with a list of the states that it was asked to learn from. */
-class WatchedEngine extends Engine {
-  learntFrom: (FilterState | null)[] = [];
-  broken = false;
-  private readonly real = sourceEngine();
-
-  override async run<Task extends EngineTask>(task: Task, order: EngineTasks[Task]['order']) {
-    if ('history' in order) {
-      this.learntFrom.push(order.from);
-      if (this.broken) throw new Error('Learning fails.');
-    }
-    return this.real.run(task, order);
-  }
-
-  override async close() {
-    await this.real.close();
-  }
-}
-const engine = new WatchedEngine({
-  startThread: () => {
-    throw new Error('The real engine starts its own.');
-  },
-});
+const engine = new WatchedEngine();
 planWith(engine);
 
 let db: Database;
@@ -43,8 +19,7 @@ let owner: ServiceContext;
 beforeEach(async () => {
   db = freshDatabase();
   owner = await aPoolHousehold(db, { pool: { feederLoaded: 0 } });
-  engine.learntFrom = [];
-  engine.broken = false;
+  engine.reset();
 });
 
 const hashes = () => listPosteriorHashes(db, owner.access.householdId);
@@ -64,7 +39,7 @@ describe('learnPool', { timeout: 60_000 }, () => {
   it('keeps a posterior for each reading, and goes on from the one before', async () => {
     const [first, second, third] = await testsOfDays(4, 2.8, 2);
     expect([...(await hashes()).keys()]).toEqual([first!.id, second!.id, third!.id]);
-    expect(engine.learntFrom.map((from) => from?.at ?? null)).toEqual([
+    expect(engine.asked.learn.map(({ from }) => from?.at ?? null)).toEqual([
       null,
       Date.parse(first!.takenAt),
       Date.parse(second!.takenAt),
@@ -97,9 +72,9 @@ describe('learnPool', { timeout: 60_000 }, () => {
   ] as const)('learns again from the time of a reading that is %s, and no earlier', async (_what, change) => {
     const [first, second] = await testsOfDays(4, 2.8, 2, 1.9);
     const before = await hashes();
-    engine.learntFrom = [];
+    engine.reset();
     await change(at(owner, hoursLater(80)), second!);
-    expect(engine.learntFrom.map((from) => from?.at ?? null)).toEqual([Date.parse(first!.takenAt)]);
+    expect(engine.asked.learn.map(({ from }) => from?.at ?? null)).toEqual([Date.parse(first!.takenAt)]);
     const after = await hashes();
     expect(after.get(first!.id)).toBe(before.get(first!.id));
     for (const [id, hash] of after) if (id !== first!.id) expect(hash).not.toBe(before.get(id));
@@ -124,7 +99,7 @@ describe('learnPool', { timeout: 60_000 }, () => {
   });
 
   it('costs no reading and no plan when it fails', async () => {
-    engine.broken = true;
+    engine.faults.learn = new Error('Learning fails.');
     const [reading] = await testsOfDays(3);
     expect(await hashes()).toEqual(new Map());
     const snapshot = await loadWeekSnapshot(db, owner.access.householdId, owner.access.timeZone);

@@ -6,41 +6,17 @@ import { savePreferences } from '@/db/queries/preferences';
 import { saveShelfProduct, setStock } from '@/db/queries/shelf-products';
 import { saveWeekDay } from '@/db/queries/week-days';
 import { planDoses, plans } from '@/db/schema';
-import { Engine } from '@/lib/engine-worker/engine';
 import { AppError } from '@/lib/errors';
-import type { Scenario } from '@/lib/schemas/scenario';
 import type { ServiceContext } from '@/lib/services/context';
 import { removeReading } from '@/lib/services/edit-reading';
 import { planWeek } from '@/lib/services/plan-week';
-import type { EngineTask, EngineTasks } from '@/lib/engine-worker/messages';
 import { recordReading } from '@/lib/services/record-reading';
-import { planWith, sourceEngine } from '@/tests/support/engine';
+import { planWith } from '@/tests/support/engine';
 import { aFullTest, aPoolHousehold, at, designPool, designShelf, hoursLater } from '@/tests/support/pool-household';
 import { freshDatabase } from '@/tests/support/test-database';
+import { WatchedEngine } from '@/tests/support/watched-engine';
 
-/** The real engine, with a way to make it fail and a list of what it was asked. */
-class WatchedEngine extends Engine {
-  asked: Scenario[] = [];
-  fault: Error | undefined;
-  private readonly real = sourceEngine();
-
-  override async run<Task extends EngineTask>(task: Task, order: EngineTasks[Task]['order']) {
-    if ('reading' in order) {
-      this.asked.push(order);
-      if (this.fault) throw this.fault;
-    }
-    return this.real.run(task, order);
-  }
-
-  override async close() {
-    await this.real.close();
-  }
-}
-const engine = new WatchedEngine({
-  startThread: () => {
-    throw new Error('The real engine starts its own.');
-  },
-});
+const engine = new WatchedEngine();
 planWith(engine);
 
 let db: Database;
@@ -48,8 +24,7 @@ let owner: ServiceContext;
 beforeEach(async () => {
   db = freshDatabase();
   owner = await aPoolHousehold(db);
-  engine.asked = [];
-  engine.fault = undefined;
+  engine.reset();
 });
 
 const current = () => findCurrentPlan(db, owner.access.householdId);
@@ -76,7 +51,7 @@ describe('planWeek', { timeout: 30_000 }, () => {
     const first = await current();
     for (const hours of [1, 30, 200, 2000]) await planWeek(at(owner, hoursLater(hours)));
     expect((await current())?.id).toBe(first?.id);
-    expect(engine.asked).toHaveLength(1);
+    expect(engine.asked.plan).toHaveLength(1);
   });
 
   it.each([
@@ -128,37 +103,37 @@ describe('planWeek', { timeout: 30_000 }, () => {
     await Promise.all(readings.map((reading) => recordReading(owner, reading)));
     const versions = (await db.select().from(plans)).map(({ version }) => version);
     expect(versions.toSorted((a, b) => a - b)).toEqual(versions.map((_, index) => index + 1));
-    expect(engine.asked.length).toBeLessThanOrEqual(3);
+    expect(engine.asked.plan.length).toBeLessThanOrEqual(3);
     const plan = await current();
     expect([plan?.snapshot.reading].flat()).toHaveLength(4);
     const doses = await db.$count(planDoses);
     const promised = (await db.select().from(plans)).reduce((sum, { result }) => sum + result.doses.length, 0);
     expect(doses).toBe(promised);
-    const asked = engine.asked.length;
+    const asked = engine.asked.plan.length;
     await Promise.all([1, 2, 3].map(() => planWeek(owner)));
-    expect(engine.asked).toHaveLength(asked);
+    expect(engine.asked.plan).toHaveLength(asked);
   });
 
   it('keeps the old plan when the planner refuses, does not ask it again, and recovers with the next change', async () => {
     await recordReading(owner, aFullTest());
     const before = await current();
-    engine.fault = new AppError('plan-refused', 'The net holds.');
+    engine.faults.plan = new AppError('plan-refused', 'The net holds.');
     await recordReading(at(owner, hoursLater(2)), aFullTest(hoursLater(2)));
-    const asked = engine.asked.length;
+    const asked = engine.asked.plan.length;
     const refused = await planWeek(at(owner, hoursLater(30)));
     expect(refused).toMatchObject({ plan: { id: before?.id }, problem: { code: 'plan-refused' } });
-    expect(engine.asked).toHaveLength(asked);
-    engine.fault = undefined;
+    expect(engine.asked.plan).toHaveLength(asked);
+    engine.faults = {};
     await recordReading(at(owner, hoursLater(31)), aFullTest(hoursLater(31)));
     expect(await planWeek(at(owner, hoursLater(31)))).toMatchObject({ plan: { version: 2 }, problem: null });
   });
 
   it('tries a fault that may pass again after a minute', async () => {
-    engine.fault = new AppError('engine-busy', 'Too long.');
+    engine.faults.plan = new AppError('engine-busy', 'Too long.');
     await recordReading(owner, aFullTest());
     expect((await planWeek(at(owner, hoursLater(0.5 / 60)))).problem?.code).toBe('engine-busy');
-    expect(engine.asked).toHaveLength(1);
-    engine.fault = undefined;
+    expect(engine.asked.plan).toHaveLength(1);
+    engine.faults = {};
     expect(await planWeek(at(owner, hoursLater(2 / 60)))).toMatchObject({ plan: { version: 1 }, problem: null });
   });
 
@@ -203,7 +178,7 @@ describe('planWeek', { timeout: 30_000 }, () => {
     const product = { ...designShelf[1]!, id: 'mystery', name: 'Mystery blend', substance: 'other' as const };
     await saveShelfProduct(db, { householdId: owner.access.householdId, product, now: owner.now });
     await recordReading(owner, aFullTest());
-    expect(engine.asked[0]?.shelf.map(({ id }) => id).toSorted()).toEqual(['gran', 'mystery', 'tabs']);
-    expect(JSON.stringify(engine.asked[0])).not.toContain('Mystery blend');
+    expect(engine.asked.plan[0]?.shelf.map(({ id }) => id).toSorted()).toEqual(['gran', 'mystery', 'tabs']);
+    expect(JSON.stringify(engine.asked.plan[0])).not.toContain('Mystery blend');
   });
 });
