@@ -44,7 +44,6 @@ export function TabletsLeft({
           value={number(value)}
           onChange={(text) => onChange(within(Math.round(parseDecimal(text) ?? FIRST_OF_MORE)))}
           onStep={(direction) => onChange(within(value + direction))}
-          unit={t('unit')}
           moreLabel={t('oneMore')}
           lessLabel={t('oneLess')}
           size="margin"
