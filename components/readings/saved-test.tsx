@@ -56,7 +56,7 @@ export function SavedTest({ reading, week, before, onCorrect, children }: SavedT
         <SheetProvider sheet={week.sheet} start={undefined}>
           <SavedVerdict />
           {children}
-          <SheetStates />
+          <SheetStates onCorrect={onCorrect} />
           <Changes doses={week.doses} before={before} />
         </SheetProvider>
       )}

@@ -2,29 +2,34 @@
 
 import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { Button } from '@/components/ui/button';
 import { Callout } from '@/components/ui/callout';
 import { buttonClass } from '@/components/ui/button-class';
 import { useSheet } from './sheet-context';
 import { useUnits } from './use-units';
 
 /** What the newest test said that was not expected: asked about, never held against whoever tested. */
-export function QuestionedTest() {
+export function QuestionedTest({ onCorrect }: { onCorrect: (() => void) | undefined }) {
   const { questioned, unrecorded } = useSheet().sheet;
   return (
     <>
-      {questioned.length > 0 && <Questioned />}
+      {questioned.length > 0 && <Questioned onCorrect={onCorrect} />}
       {unrecorded && <Unrecorded />}
     </>
   );
 }
 
-function Questioned() {
+function Questioned({ onCorrect }: { onCorrect: (() => void) | undefined }) {
   const t = useTranslations('week.state');
   const common = useTranslations('common');
   const { figure, unitOf } = useUnits();
   const { questioned, me } = useSheet().sheet;
   const quick = questioned.every(({ quantity }) => quantity === 'freeChlorine' || quantity === 'pH');
-  const again = (
+  const again = onCorrect ? (
+    <Button variant="primary" onClick={onCorrect}>
+      {t('correctIt')}
+    </Button>
+  ) : (
     <Link href={quick ? '/test?kind=quick' : '/test'} className={buttonClass({ variant: 'primary' })}>
       {t('checkAgain')}
     </Link>

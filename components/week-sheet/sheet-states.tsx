@@ -13,14 +13,18 @@ import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
 
-/** What stands between this sheet and a good plan, said before the sheet itself. */
-export function SheetStates() {
+/**
+ * What stands between this sheet and a good plan, said before the sheet itself.
+ *
+ * @param onCorrect where the newest test stands open for correction right here
+ */
+export function SheetStates({ onCorrect }: { onCorrect?: () => void }) {
   const { pool, plan, planProblem } = useSheet().sheet;
   return (
     <>
       {planProblem && <PlanProblem problem={planProblem} />}
       {pool.recordOnly && <RecordOnly />}
-      <QuestionedTest />
+      <QuestionedTest onCorrect={onCorrect} />
       {plan?.stale && <Stale />}
       {plan && plan.needs.length > 0 && <Needs needs={plan.needs} hasDoses={plan.cost !== null} />}
     </>

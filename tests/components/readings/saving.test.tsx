@@ -120,6 +120,20 @@ it('says the swim state first, then what changed in the plan', async () => {
   expect(screen.getByRole('link', { name: 'See the new week' })).toHaveAttribute('href', '/week');
 });
 
+it('asks once about a value that nobody expected, beside the way to correct it', async () => {
+  const server = fakeTestServer(sheet);
+  await openTest(sheet, { kind: 'quick' });
+  await quickCheck();
+  const doubt = { quantity: 'freeChlorine', measured: 12, low: 2, high: 4, takenAt: sheet.now } as const;
+  server.become({ ...sheet, questioned: [doubt], unrecorded: true });
+  await user.click(save());
+  await screen.findByText('Test saved');
+  expect(screen.getAllByText(/^Free chlorine of 12\.0 is far from the 2\.0 to 4\.0 mg\/L/)).toHaveLength(1);
+  expect(screen.getAllByText(/^There is more chlorine than can be left/)).toHaveLength(1);
+  await user.click(screen.getByRole('button', { name: 'Correct this test' }));
+  expect(await screen.findByRole('button', { name: 'Save the correction' })).toBeInTheDocument();
+});
+
 it('corrects a value of the test that was just saved', async () => {
   const server = fakeTestServer(sheet);
   await openTest(sheet, { kind: 'quick' });
