@@ -20,6 +20,11 @@ export function evaluate(draft: Draft, choice: Choice, context: PlanContext, mem
   return { draft, choice, median, courses, cost: costOf(draft, choice, median, courses, context) };
 }
 
+/** What a plan would cost if the first so many of its members were all. */
+export function costOver(count: number, { draft, choice, median, courses }: Evaluated, context: PlanContext): number {
+  return costOf(draft, choice, median, courses.slice(0, count), context).total;
+}
+
 /**
  * The whole cost of a week, in the currency of the prices: products, evenings, expected shortfall under the lowest level,
  * expected excess over the swim limit, and undoing what drifted; see {@link weights}.

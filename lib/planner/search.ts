@@ -1,14 +1,20 @@
 import { belowMaximum, lowered } from './below-maximum';
 import type { PlanContext } from './context';
-import { evaluate, type Evaluated } from './cost';
+import { costOver, evaluate, type Evaluated } from './cost';
 import { type Choice, type Draft, keyOf } from './draft';
 import type { Response } from './response';
 import { improve, inOrder, type Sketch, type Sketches } from './sketch';
 
-/** How many drafts are projected in full at most. */
+/** How many drafts are projected over the whole ensemble at most, and how many over the first few members of it. */
 const MOST_IN_FULL = 4;
-/** A sketch is projected in full when by the corrected quick model it costs no more than so many times the best plan. */
-const WORTH_A_LOOK = 1.005;
+const MOST_ON_TRIAL = 7;
+const TRIAL_MEMBERS = 8;
+/**
+ * A draft is put on trial when by the corrected quick model it costs no more than so many times the best plan; and projected
+ * over the whole ensemble when the trial, corrected likewise, says no more than this.
+ */
+const WORTH_A_TRIAL = 1.04;
+const WORTH_IT_IN_FULL = 1.003;
 const IMPROVEMENT = 1e-6;
 
 /**
@@ -26,8 +32,23 @@ export function searchPlan(context: PlanContext, response: Response, choice: Cho
 
   let best = inFull(sketches.best[0]!.draft);
   let promising = promisingAround(best, response, choice, sketches);
+  const trials = new Map<string, number>();
+  const onTrial = (draft: Draft): number => {
+    const key = keyOf(draft);
+    const known = trials.get(key);
+    if (known !== undefined) return known;
+    const { total } = evaluate(draft, choice, context, context.members.slice(0, TRIAL_MEMBERS)).cost;
+    trials.set(key, total);
+    return total;
+  };
   while (tried.size < MOST_IN_FULL) {
-    const next = promising.find(({ draft }) => !tried.has(keyOf(draft)));
+    const byTrial = costOver(TRIAL_MEMBERS, best, context);
+    const next = promising.find(
+      ({ draft }) =>
+        !tried.has(keyOf(draft)) &&
+        (trials.has(keyOf(draft)) || trials.size < MOST_ON_TRIAL) &&
+        onTrial(draft) - byTrial <= (WORTH_IT_IN_FULL - 1) * best.cost.total,
+    );
     if (!next) break;
     const evaluated = inFull(next.draft);
     if (evaluated.cost.total >= best.cost.total - IMPROVEMENT) continue;
@@ -41,7 +62,7 @@ export function searchPlan(context: PlanContext, response: Response, choice: Cho
 /** What promises to cost less than a plan or hardly more, by the quick model corrected to agree with it; cheapest first. */
 function promisingAround(plan: Evaluated, response: Response, choice: Choice, { best }: Sketches): Sketch[] {
   const cost = response.costAround(plan);
-  const most = WORTH_A_LOOK * plan.cost.total;
+  const most = WORTH_A_TRIAL * plan.cost.total;
   const sketches = best
     .map(({ draft }) => ({ draft, cost: cost.of(draft, most) }))
     .filter((sketch) => sketch.cost < Infinity);

@@ -28,10 +28,16 @@ const FIRST_RISES = [1.2, 2.8];
 /** How many choices of evenings are kept for each loading of tablets, and for fast products alone. */
 const KEPT_OF_ONE_LOADING = 2;
 const KEPT_OF_FAST_ALONE = 3;
+const KEPT_LOADED_TWICE = 3;
+const MOST_COUNTS_LOADED_TWICE = 4;
 const KEPT = Math.max(KEPT_OF_ONE_LOADING, KEPT_OF_FAST_ALONE);
 /** How many drafts are brought to where no single change helps: with the cheapest fast product, and with each other one. */
-const IMPROVED = 9;
+const IMPROVED = 8;
 const IMPROVED_WITH_OTHERS = 4;
+/** How many of those again by the whole quick model. */
+const IMPROVED_AGAIN = 2;
+/** From how many a visit is taken to see whether it is worth its while. */
+const VISITS_TAKEN_FROM = 4;
 
 /**
  * Sketches of a week by the quick model: every count of tablets with every choice of evenings for the cheapest fast product
@@ -52,14 +58,24 @@ export function sketchesOf(response: Response, space: SearchSpace, earlier?: Sta
       .filter(({ draft }) => draft.fast && draft.fast !== product)
       .map(({ draft }) => improved(withProduct(draft, product, response))),
   );
-  const exact = [...best, ...others].map(({ draft }) => ({ draft, cost: response.cost.of(draft) }));
-  return { best: inOrder(exact), fastAlone: tried.fastAlone };
+  const found = [...best, ...others].map(({ draft }) => draft);
+  // The rough cost may have led away from a draft that was better before, or to a visit that is not worth its while.
+  const costs = (drafts: readonly Draft[]) => drafts.map((draft) => ({ draft, cost: response.cost.of(draft) }));
+  const looked = inOrder(costs([...found, ...tried.all.slice(0, IMPROVED)]));
+  const exact = inOrder([
+    ...looked,
+    ...costs(looked.slice(0, VISITS_TAKEN_FROM).flatMap(({ draft }) => withOneVisitLess(draft))),
+  ]);
+  const again = exact.slice(0, IMPROVED_AGAIN).map(({ draft }) => improve(draft, choice, response, response.cost));
+  return { best: inOrder([...exact, ...again]), fastAlone: tried.fastAlone };
 }
 
 /** The cheapest week with one kind of product alone, by the quick model. */
 export function sketchAlone(response: Response, { choice, fast }: SearchSpace, { fastAlone }: Sketches): Draft {
   const starts = fast.flatMap((product) =>
-    product ? fastAlone.map((draft) => withProduct(draft, product, response)) : tabletStarts(choice),
+    product
+      ? fastAlone.map((draft) => withProduct(draft, product, response))
+      : [...tabletStarts(choice), ...loadedTwice(choice)],
   );
   return improve(costed(starts, response)[0]!, choice, response, response.roughCost).draft;
 }
@@ -95,7 +111,7 @@ export function improve(draft: Draft, choice: Choice, response: Response, cost: 
 function screen(fast: FastOption | null, choice: Choice, response: Response): Starts {
   const { roughCost } = response;
   const starts = tabletStarts(choice);
-  if (!fast) return { all: costed(starts, response), fastAlone: [] };
+  if (!fast) return { all: costed([...starts, ...loadedTwice(choice)], response), fastAlone: [] };
   const rises = response.measureRises(fast);
   const most = mostMeasures(fast, rises);
   const withRise = (start: Draft, set: readonly number[], rise: number): Draft => {
@@ -118,8 +134,12 @@ function screen(fast: FastOption | null, choice: Choice, response: Response): St
       }
     return inOrder(sketches);
   });
+  const kept = found.flatMap((sketches) => sketches.slice(0, KEPT_OF_ONE_LOADING));
+  const twice = inOrder(
+    loadedTwice(choice).map((draft) => ({ draft: { ...draft, fast }, cost: roughCost.of({ ...draft, fast }) })),
+  );
   return {
-    all: inOrder(found.flatMap((sketches) => sketches.slice(0, KEPT_OF_ONE_LOADING))).map(({ draft }) => draft),
+    all: inOrder([...kept, ...twice.slice(0, KEPT_LOADED_TWICE)]).map(({ draft }) => draft),
     fastAlone: found[0]!.slice(0, KEPT_OF_FAST_ALONE).map(({ draft }) => draft),
   };
 }
@@ -137,6 +157,21 @@ function tabletStarts(choice: Choice): Draft[] {
   return starts;
 }
 
+/** Drafts with tablets loaded twice, first on the first or the second evening, and nothing fast. */
+function loadedTwice(choice: Choice): Draft[] {
+  const none = emptyDraft(choice);
+  const most = choice.tablets?.most ?? 0;
+  if (choice.visits < 2) return [];
+  const step = Math.max(1, Math.ceil(most / MOST_COUNTS_LOADED_TWICE));
+  const drafts: Draft[] = [];
+  for (let first = 0; first < Math.min(LOADING_EVENINGS, choice.evenings.length); first++)
+    for (let second = first + 1; second < choice.evenings.length; second++)
+      for (let count = step; count < most; count += step)
+        for (let more = step; count + more <= most; more += step)
+          drafts.push({ ...none, tablets: none.tablets.with(first, count).with(second, more) });
+  return drafts;
+}
+
 /** Every choice of up to so many evenings that the visits allow, the tablets' own left out. */
 function choicesOfEvenings({ tablets, measures }: Draft, choice: Choice): number[][] {
   const free = measures.map((_, evening) => evening).filter((evening) => tablets[evening] === 0);
@@ -150,6 +185,16 @@ function choicesOfEvenings({ tablets, measures }: Draft, choice: Choice): number
     all.push(...sets);
   }
   return all;
+}
+
+/** A draft without each of its visits. */
+function withOneVisitLess(draft: Draft): Draft[] {
+  const { tablets, measures } = draft;
+  return measures.flatMap((count, evening) =>
+    count === 0 && tablets[evening] === 0
+      ? []
+      : [{ ...draft, tablets: tablets.with(evening, 0), measures: measures.with(evening, 0) }],
+  );
 }
 
 /** The same rises with another product, in its measures. */

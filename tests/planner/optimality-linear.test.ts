@@ -1,0 +1,43 @@
+import highsLoader, { type Highs } from 'highs';
+import { beforeAll, describe, expect, it } from 'vitest';
+import { planWeek } from '@/lib/planner';
+import { belowMaximum } from '@/lib/planner/below-maximum';
+import { contextOf } from '@/lib/planner/context';
+import { evaluate } from '@/lib/planner/cost';
+import type { Choice } from '@/lib/planner/draft';
+import { openEvenings } from '@/lib/planner/evenings';
+import { optionsOf } from '@/lib/planner/products';
+import { draftOf, linearProgramme } from './linear-programme';
+import { summerPool } from './optimality-scenarios';
+
+let highs: Highs;
+beforeAll(async () => {
+  highs = await highsLoader();
+});
+
+/** Exact: no gap is left, and the same every time. */
+const exactly = { mip_rel_gap: 0, mip_abs_gap: 0, threads: 1, random_seed: 1, output_flag: false };
+
+const scenarios = Array.from({ length: 40 }, (_, index) => ({
+  name: `pool ${20 + index}`,
+  scenario: summerPool(20 + index, { visits: 2 + (index % 2) }),
+}));
+
+describe('a plan costs at most 1.01 times the plan that solves the linear problem exactly, both projected in full', () => {
+  it.each(scenarios)('$name', ({ scenario }) => {
+    const context = contextOf(scenario);
+    const { tablets, fast } = optionsOf(context);
+    const choice: Choice = { evenings: openEvenings(context), visits: scenario.preferences.visits, tablets };
+    const solution = highs.solve(linearProgramme(context, choice, fast[0]!), exactly);
+    expect(solution.Status).toBe('Optimal');
+    const columns = solution.Columns as Record<string, { Primal?: number }>;
+    const draft = draftOf((name) => columns[name]?.Primal ?? NaN, choice, fast[0]!);
+    const solved = evaluate(draft, choice, context);
+    expect(solved.draft.measures.concat(solved.draft.tablets).some((count) => count > 0)).toBe(true);
+    expect(belowMaximum(solved, choice, context)).toBe(true);
+
+    const { cost, doses } = planWeek(scenario);
+    expect(doses.every(({ substance }) => /trichlor|hypochlorite/.test(substance))).toBe(true);
+    expect(cost!.total).toBeLessThanOrEqual(1.01 * solved.cost.total);
+  });
+});
