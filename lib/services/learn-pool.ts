@@ -4,6 +4,7 @@ import { findPosterior, listPosteriorHashes, type NewPosterior, replacePosterior
 import type { StoredReading } from '@/db/queries/readings';
 import { inWriteTransaction } from '@/db/write';
 import { dayOf } from '@/lib/calendar/household-day';
+import { toOffsetIso } from '@/lib/calendar/wall-time';
 import type { HouseholdAccess } from '@/lib/auth/household-access';
 import { sharedEngine } from '@/lib/engine-worker/shared-engine';
 import type { PoolHistory } from '@/lib/learning';
@@ -38,12 +39,13 @@ async function bringUpToDate({ db, access, now }: LearningContext): Promise<void
   const changed = readings.find(({ id }, index) => stored.get(id) !== hashes[index]);
   if (!changed && stored.size === readings.length) return;
 
-  // Readings of one instant are learnt together.
-  const kept = changed ? readings.filter(({ takenAt }) => takenAt < changed.takenAt).length : readings.length;
+  // Readings of one second, which is one instant to the engine, are learnt together.
+  const secondOf = ({ takenAt }: StoredReading) => Math.floor(takenAt.getTime() / 1000);
+  const kept = changed ? readings.filter((each) => secondOf(each) < secondOf(changed)).length : readings.length;
   const last = readings[kept - 1];
   const from = last ? ((await findPosterior(db, householdId, last.id))?.step.state ?? null) : null;
   const steps = known && changed ? await sharedEngine().run('learn', { from, history: known.history }) : [];
-  const learnt = rowsOf(steps, readings.slice(kept), hashes.slice(kept), now);
+  const learnt = rowsOf(steps, readings.slice(kept), hashes.slice(kept), { timeZone, now });
   await inWriteTransaction(db, (tx) =>
     replacePosteriors(tx, { householdId, readingIds: readings.map(({ id }) => id), learnt }),
   );
@@ -54,10 +56,11 @@ function rowsOf(
   steps: readonly PosteriorStep[],
   readings: readonly StoredReading[],
   hashes: readonly string[],
-  now: Date,
+  { timeZone, now }: { timeZone: string; now: Date },
 ): NewPosterior[] {
   return readings.map(({ id, takenAt }, index) => {
-    const step = steps.findLast(({ readingAt }) => Date.parse(readingAt) === takenAt.getTime());
+    const name = toOffsetIso(takenAt.getTime(), timeZone);
+    const step = steps.findLast(({ readingAt }) => readingAt === name);
     if (!step) throw new Error(`Nothing was learnt by the reading ${id}.`);
     return { readingId: id, takenAt, engineVersion: ENGINE_VERSION, inputHash: hashes[index]!, step, createdAt: now };
   });

@@ -49,6 +49,14 @@ describe('learnPool', { timeout: 60_000 }, () => {
     expect(posterior.sigmas.sunStrength).toBeLessThan(0.25);
   });
 
+  it('finds a reading again whose instant has parts of a second', async () => {
+    const reading = aFullTest(new Date(owner.now.getTime() - 1_357));
+    await recordReading(owner, reading);
+    expect(await stepOf(reading.id)).toBeDefined();
+    const snapshot = await loadWeekSnapshot(db, owner.access.householdId, owner.access.timeZone);
+    expect(snapshot!.scenario.posterior?.readingAt).toBe([snapshot!.scenario.reading].flat()[0]!.takenAt);
+  });
+
   it('gives the plan what was learnt by its reading', async () => {
     const readings = await testsOfDays(4, 2.8);
     const snapshot = await loadWeekSnapshot(db, owner.access.householdId, owner.access.timeZone);
