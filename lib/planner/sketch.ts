@@ -17,7 +17,7 @@ export type Sketches = {
 };
 
 /** Drafts to start from: of all kinds, and of fast products alone. */
-export type Starts = { all: readonly Draft[]; fastAlone: readonly Draft[] };
+type Starts = { all: readonly Draft[]; fastAlone: readonly Draft[] };
 
 const MOST_TABLET_COUNTS = 9;
 const LOADING_EVENINGS = 2;
@@ -44,12 +44,13 @@ const VISITS_TAKEN_FROM = 4;
  * at two rises; the best of them are brought to where no single change helps, and the best of those with every other
  * product.
  *
- * @param earlier drafts to start from in place of that, where a week much like this one has been sketched
+ * @param earlier drafts to start from beside those, where a week much like this one has been sketched
  */
-export function sketchesOf(response: Response, space: SearchSpace, earlier?: Starts): Sketches {
+export function sketchesOf(response: Response, space: SearchSpace, earlier?: readonly Draft[]): Sketches {
   const { choice, fast } = space;
   const first = fast[0] ?? null;
-  const tried = earlier ? { ...earlier, all: costed(earlier.all, response) } : screen(first, choice, response);
+  const screened = screen(first, choice, response);
+  const tried = earlier ? { ...screened, all: costed([...screened.all, ...earlier], response) } : screened;
   const improved = (draft: Draft) => improve(draft, choice, response, response.roughCost);
   const best = inOrder(tried.all.slice(0, IMPROVED).map(improved));
   const others = fast.flatMap((product) =>

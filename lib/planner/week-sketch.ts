@@ -18,7 +18,7 @@ export type WeekSketch = {
 /**
  * Sketches of a week's chlorine.
  *
- * @param alone those of the same week without what goes in beside chlorine: their drafts are where these start from
+ * @param alone those of the same week without what goes in beside chlorine: their drafts are what these start from, too
  */
 export function sketchWeek(context: PlanContext, alone?: WeekSketch): WeekSketch {
   const options = optionsOf(context);
@@ -37,21 +37,13 @@ export function sketchWeek(context: PlanContext, alone?: WeekSketch): WeekSketch
  * The drafts of another sketch of the same week, on the evenings that are left of it: what stood on one that is gone is left
  * out, and where the visits are fewer now, each way to leave one out.
  */
-function draftsFor(
-  { evenings, visits }: Choice,
-  options: Options,
-  { choice, sketches }: WeekSketch,
-): { all: Draft[]; fastAlone: Draft[] } {
+function draftsFor({ evenings, visits }: Choice, options: Options, { choice, sketches }: WeekSketch): Draft[] {
   const before = evenings.map(({ at }) => choice.evenings.findIndex((evening) => evening.at === at));
   const moved = (counts: readonly number[]) => before.map((evening) => counts[evening] ?? 0);
-  const drafts = ({ tablets, fast, measures }: Draft): Draft[] => {
+  return sketches.best.flatMap(({ draft: { tablets, fast, measures } }) => {
     const same = options.fast.find(({ product }) => product.id === fast?.product.id) ?? null;
     return within(visits, { tablets: moved(tablets), fast: same, measures: moved(measures) });
-  };
-  return {
-    all: sketches.best.flatMap(({ draft }) => drafts(draft)),
-    fastAlone: sketches.fastAlone.flatMap(drafts),
-  };
+  });
 }
 
 /** A draft that keeps to the visits, or each that comes of leaving out as many as are too many. */

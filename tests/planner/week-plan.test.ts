@@ -290,8 +290,9 @@ describe('outcomes of common practice', () => {
     expect(first!.reason).toBe('quick-raise');
   });
 
-  it('low pH and alkalinity: fewer tablets', () => {
-    const soft = planWeek(scenarioOf({ reading: { pH: 7.25, totalAlkalinity: 50 } }));
+  it('low pH and alkalinity: fewer tablets, where nothing else brings them up', () => {
+    const preferences = { avoid: ['sodium-bicarbonate'] };
+    const soft = planWeek(scenarioOf({ reading: { pH: 7.25, totalAlkalinity: 50 }, preferences }));
     expect(tabletsIn(soft)).toBeLessThan(tabletsIn(base));
   });
 
