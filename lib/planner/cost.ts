@@ -1,4 +1,8 @@
-import { CYANURIC_ACID_MILLIGRAMS_PER_MOLE, HARDNESS_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
+import {
+  ALKALINITY_MILLIGRAMS_PER_EQUIVALENT,
+  CYANURIC_ACID_MILLIGRAMS_PER_MOLE,
+  HARDNESS_MILLIGRAMS_PER_MOLE,
+} from '@/lib/chemistry/molar-masses';
 import { type Course, integrateWeek } from '@/lib/projection/integrate';
 import type { Member } from '@/lib/projection/ensemble';
 import { seriesOf } from '@/lib/projection';
@@ -137,7 +141,7 @@ export function pHPrice(
   first: { pH: number; totalAlkalinity: number },
   pH: ArrayLike<number>,
   endAlkalinity: number,
-  context: Pick<PlanContext, 'scenario' | 'swimHour'>,
+  context: Pick<PlanContext, 'scenario' | 'swimHour' | 'undosed'>,
 ): number {
   let outside = 0;
   for (let hour = 0; hour < pH.length; hour++) {
@@ -148,17 +152,26 @@ export function pHPrice(
   return pHDriftPrice(first, pH[pH.length - 1]!, endAlkalinity, context) + outside;
 }
 
-/** The price of bringing pH and alkalinity back at the end of the week. */
+/** From here on water holds its pH [mg/L as CaCO3]: the low end of what codes call ideal. */
+const ENOUGH_ALKALINITY = 80;
+
+/**
+ * The price of bringing pH and alkalinity back at the end of the week, as far as the plan itself moved them. In water that
+ * has too little alkalinity to begin with each mg/L weighs more: a dose, a visit and a test bring it back.
+ */
 export function pHDriftPrice(
   first: { pH: number; totalAlkalinity: number },
   endPH: number,
   endAlkalinity: number,
-  { scenario }: Pick<PlanContext, 'scenario'>,
+  { scenario, undosed }: Pick<PlanContext, 'scenario' | 'undosed'>,
 ): number {
   const { pool, driftPrices } = scenario;
   const fromAim = (value: number) => Math.max(limits.pHAimLow.value - value, value - limits.pHAimHigh.value, 0);
   const away = Math.max(0, fromAim(endPH) - fromAim(first.pH));
   const each = driftPrices.pH ?? weights.pHPerCubicMetre * pool.volume;
-  const alkalinityLost = Math.max(0, Math.min(first.totalAlkalinity, 80) - endAlkalinity);
-  return (away / 0.1) * each + (alkalinityLost / 10) * weights.alkalinityPerCubicMetre * pool.volume;
+  const undosedAlkalinity = undosed.end.alkalinity * ALKALINITY_MILLIGRAMS_PER_EQUIVALENT;
+  const lost = Math.max(0, Math.min(undosedAlkalinity, ENOUGH_ALKALINITY) - endAlkalinity);
+  const weak = Math.min(1, Math.max(0, ENOUGH_ALKALINITY - first.totalAlkalinity) / 20);
+  const alkalinityPrice = weights.alkalinityPerCubicMetre * pool.volume * (1 + weights.weakWater * weak);
+  return (away / 0.1) * each + (lost / 10) * alkalinityPrice;
 }

@@ -24,6 +24,8 @@ export const weights = {
   pHPerCubicMetre: 0.016,
   /** Bicarbonate that brings 10 mg/L of alkalinity back to one m3: 17 g. */
   alkalinityPerCubicMetre: 0.04,
+  /** How many times more each mg/L of alkalinity weighs that is taken from water 20 mg/L or more short of it. */
+  weakWater: 3,
   /** One m3 of replacement water from the tap. */
   water: 1.5,
 } as const;
