@@ -133,9 +133,10 @@ async function otherAmount(stage: Stage, page: Page, planned: PlanDose, sheet: S
   const before = await drawnCurves(page);
   const dialog = page.getByRole('dialog');
   const press = (name: string) => dialog.getByRole('button', { name: words(name), exact: true }).click();
+  // Doses before it that nobody ticked are due as well; this one is the last of them.
   await page
     .getByRole('button', { name: words('doses.action.stepsAndMore') })
-    .first()
+    .last()
     .click();
   await press('doses.action.other');
   const field = dialog.getByLabel(words('doses.action.otherAmount'));
