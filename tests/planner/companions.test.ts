@@ -146,7 +146,7 @@ describe('beside chlorine', () => {
     expect(half.amount).toBeLessThanOrEqual(whole.amount / 2);
   });
 
-  it('counts in money and visits, and closes the swim hours of its waiting time', () => {
+  it('counts in the cost, in visits and among the evenings that the household wants', () => {
     const plan = planWeek(scenarioOf({ reading: { pH: 8, totalAlkalinity: 100 } }));
     const { cost } = plan;
     const parts = Object.entries(cost!).filter(([part]) => part !== 'total');
