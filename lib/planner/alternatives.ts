@@ -4,7 +4,7 @@ import type { PlannedDose } from '@/lib/schemas/dose';
 import type { Alternative } from '@/lib/schemas/plan';
 import { lowestLevel } from '@/lib/standards/limits';
 import type { PlanContext } from './context';
-import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
+import { byMedian, type ByMedian, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import { type Choice, emptyDraft, visitsOf } from './draft';
 import { plannedDoses } from './planned-doses';
 import { sketchAlone } from './sketch';
@@ -22,7 +22,7 @@ export function alternativesOf({ context, options, choice, response, sketches }:
     const possible = kind === 'tablets' ? options.tablets !== null : fast.length > 0;
     const allowed = kind === 'tablets' ? choice : without;
     const draft = possible ? sketchAlone(response, { choice: allowed, fast }, sketches) : emptyDraft(without);
-    const found = evaluate(draft, allowed, context, []);
+    const found = byMedian(draft, allowed, context);
     const doses = plannedDoses(draft, allowed, context);
     const burden = burdenOf(found, doses, context);
     return { kind, feasible: possible && burden.hoursOutside === 0, doses, ...burden, total: cost.of(draft) };
@@ -30,7 +30,7 @@ export function alternativesOf({ context, options, choice, response, sketches }:
 }
 
 /** What a week asks of the household and leaves in the water, by the median. */
-export function burdenOf({ draft, choice, median }: Evaluated, doses: readonly PlannedDose[], context: PlanContext) {
+export function burdenOf({ draft, choice, median }: ByMedian, doses: readonly PlannedDose[], context: PlanContext) {
   const water = seriesOf(median);
   const { swimLimit } = context.scenario.pool;
   const hoursOutside = water.freeChlorine.filter((level, hour) => {

@@ -6,6 +6,7 @@ import {
 import { type Course, integrateWeek } from '@/lib/projection/integrate';
 import type { Member } from '@/lib/projection/ensemble';
 import { seriesOf } from '@/lib/projection';
+import { bandOf } from '@/lib/projection/quantiles';
 import type { Cost } from '@/lib/schemas/plan';
 import { limits, lowestLevel } from '@/lib/standards/limits';
 import { surfaceRanges } from '@/lib/standards/surface-ranges';
@@ -13,32 +14,70 @@ import type { PlanContext } from './context';
 import { type Choice, type Draft, measuresToBuy, sumOf, visitsOf, weekDosesOf } from './draft';
 import { weights } from './weights';
 
-export type Evaluated = { draft: Draft; choice: Choice; median: Course; courses: Course[]; cost: Cost };
+/** A draft projected with every parameter at its median. */
+export type ByMedian = { draft: Draft; choice: Choice; median: Course };
 
-/** Projects a draft in full over the ensemble, or over some members, and prices it. */
-export function evaluate(draft: Draft, choice: Choice, context: PlanContext, members = context.members): Evaluated {
-  const doses = weekDosesOf(draft, choice, context);
-  const run = ({ start, setting }: Member) => integrateWeek(context.forcing, start, doses, setting);
-  const median = run(context.median);
-  const courses = members.map(run);
-  return { draft, choice, median, courses, cost: costOf(draft, choice, median, courses, context) };
+/** A draft projected over the ensemble, too, and priced. */
+export type Evaluated = ByMedian & {
+  courses: Course[];
+  /** Free chlorine that half of the ensemble stays under, hour by hour [mg/L]: what limits are held against. */
+  middle: Float64Array;
+  cost: Cost;
+};
+
+/** Projects a draft in full over the ensemble and prices it. */
+export function evaluate(draft: Draft, choice: Choice, context: PlanContext): Evaluated {
+  const { median, courses } = coursesOf(draft, choice, context, context.members);
+  const middle = Float64Array.from(bandOf(courses.map(({ hourly }) => hourly.freeChlorine)).p50);
+  return { draft, choice, median, courses, middle, cost: costOf(draft, choice, median, courses, middle, context) };
 }
 
-/** What a plan would cost if the first so many of its members were all. */
-export function costOver(count: number, { draft, choice, median, courses }: Evaluated, context: PlanContext): number {
-  return costOf(draft, choice, median, courses.slice(0, count), context).total;
+/**
+ * How much more a draft costs than a plan that was projected over the whole ensemble, seen over the first few of its
+ * members; the middle of the ensemble is taken to lie as far from the median's course as it does with the plan.
+ */
+export function differenceOnTrial(draft: Draft, plan: Evaluated, context: PlanContext, members: number): number {
+  const { choice } = plan;
+  const { median, courses } = coursesOf(draft, choice, context, context.members.slice(0, members));
+  const middle = median.hourly.freeChlorine.map((level, hour) =>
+    Math.max(0, level + plan.middle[hour]! - plan.median.hourly.freeChlorine[hour]!),
+  );
+  const few = plan.courses.slice(0, members);
+  return (
+    costOf(draft, choice, median, courses, middle, context).total -
+    costOf(plan.draft, choice, plan.median, few, plan.middle, context).total
+  );
+}
+
+/** Projects a draft with every parameter at its median. */
+export function byMedian(draft: Draft, choice: Choice, context: PlanContext): ByMedian {
+  return { draft, choice, median: coursesOf(draft, choice, context, []).median };
+}
+
+/** The median's course with a draft, and those of members. */
+export function coursesOf(draft: Draft, choice: Choice, context: PlanContext, members: readonly Member[]) {
+  const doses = weekDosesOf(draft, choice, context);
+  const run = ({ start, setting }: Member) => integrateWeek(context.forcing, start, doses, setting);
+  return { median: run(context.median), courses: members.map(run) };
 }
 
 /**
  * The whole cost of a week, in the currency of the prices: products, evenings, expected shortfall under the lowest level,
  * expected excess over the swim limit, and undoing what drifted; see {@link weights}.
  */
-function costOf(draft: Draft, choice: Choice, median: Course, courses: readonly Course[], context: PlanContext): Cost {
+export function costOf(
+  draft: Draft,
+  choice: Choice,
+  median: Course,
+  courses: readonly Course[],
+  middle: Float64Array,
+  context: PlanContext,
+): Cost {
   const { preferences } = context.scenario;
   const water = seriesOf(median);
   const stabilized = stabilizedIn(draft, context);
   const lowest = Float64Array.from(water.cyanuricAcid, (stabilizer) => lowestLevel(stabilizer, stabilized));
-  const risk = riskOf(levelsOf([median, ...courses]), lowest, context);
+  const risk = riskOf(levelsOf(middle, courses), lowest, context);
   const first = context.start.water;
   const cost = {
     money: preferences.money * moneyOf(draft, choice),
@@ -65,20 +104,21 @@ export function troubleOf(draft: Draft): number {
   return weights.visit * visitsOf(draft) + (measuresToBuy(draft) > 0 ? weights.errand : 0);
 }
 
-/** Free chlorine of courses [mg/L], hour by hour, the courses side by side: [hour * courses + course]. */
-export function levelsOf(courses: readonly Course[]): Float64Array {
-  const levels = new Float64Array((courses[0]?.pH.length ?? 0) * courses.length);
-  courses.forEach(({ hourly }, course) =>
-    hourly.freeChlorine.forEach((level, hour) => (levels[hour * courses.length + course] = level)),
-  );
+/** Free chlorine [mg/L], hour by hour, the middle and the courses side by side: [hour * (courses + 1) + column]. */
+export function levelsOf(middle: Float64Array, courses: readonly Course[]): Float64Array {
+  const columns = [middle, ...courses.map(({ hourly }) => hourly.freeChlorine)];
+  const levels = new Float64Array(middle.length * columns.length);
+  columns.forEach((column, index) => {
+    for (let hour = 0; hour < column.length; hour++) levels[hour * columns.length + index] = column[hour]!;
+  });
   return levels;
 }
 
 type Risk = { shortfall: number; excess: number };
 
 /**
- * Weighted shortfall and excess of the median, which comes first, and of the members after it, laid out as by
- * {@link levelsOf}: expected over the members, and again for the median.
+ * Weighted shortfall and excess of the middle of the ensemble, which comes first, and of its members after it, laid out as
+ * by {@link levelsOf}: expected over the members, and again for the middle, which limits are held against.
  *
  * @param lowest lowest level at each hour [mg/L]
  */
@@ -87,15 +127,15 @@ export function riskOf(
   lowest: Float64Array,
   { swimCeiling, swimHour }: Pick<PlanContext, 'swimCeiling' | 'swimHour'>,
 ): Risk {
-  const courses = levels.length / lowest.length;
-  const each = 1 / Math.max(1, courses - 1);
+  const columns = levels.length / lowest.length;
+  const each = 1 / Math.max(1, columns - 1);
   const maximum = limits.freeChlorineMaximum.value;
   const risk = { shortfall: 0, excess: 0 };
   for (let hour = 1; hour < lowest.length; hour++) {
     const [least, most] = [lowest[hour]!, swimCeiling[hour]!];
     let under = 0;
     let over = 0;
-    for (let at = hour * courses + 1, end = (hour + 1) * courses; at < end; at++) {
+    for (let at = hour * columns + 1, end = (hour + 1) * columns; at < end; at++) {
       const level = levels[at]!;
       if (level < least) under += least - level;
       else if (level > most) over += level - most;
@@ -104,11 +144,11 @@ export function riskOf(
     risk.shortfall += weights.shortfall * each * under;
     risk.excess += weights.excess * each * over;
 
-    const median = levels[hour * courses]!;
+    const middle = levels[hour * columns]!;
     const closed = swimHour[hour] ? weights.closedSwimHour : 0;
-    if (median < least) risk.shortfall += weights.medianShortfall * (least - median) + closed;
-    else if (median > most) risk.excess += weights.medianExcess * (median - most) + closed;
-    if (median > maximum) risk.excess += weights.medianExcess * weights.overMaximum * (median - maximum);
+    if (middle < least) risk.shortfall += weights.medianShortfall * (least - middle) + closed;
+    else if (middle > most) risk.excess += weights.medianExcess * (middle - most) + closed;
+    if (middle > maximum) risk.excess += weights.medianExcess * weights.overMaximum * (middle - maximum);
   }
   return risk;
 }

@@ -9,7 +9,7 @@ import { assertSafePlan } from './safety/assert-safe-plan';
 import { checksOf } from './checks';
 import { type Companion, companionOf } from './companions/companion';
 import { contextOf, type PlanContext } from './context';
-import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
+import { byMedian, evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
 import { weekDoseOf } from './given-doses';
@@ -40,7 +40,7 @@ export function planWeek(scenario: Scenario): WeekPlan {
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
   const alone = sketchWeek(contextOf(scenario));
   // What goes in beside chlorine hangs on the chlorine's evenings and tablets: a sketch tells them.
-  const sketched = evaluate(alone.sketches.best[0]!.draft, alone.choice, alone.context, []);
+  const sketched = byMedian(alone.sketches.best[0]!.draft, alone.choice, alone.context);
   const { companion, waiting, context: withIt } = companionOf(sketched, alone);
   const sketch = withIt ? sketchWeek(withIt, alone) : alone;
   const { context, options, choice, response, sketches } = sketch;

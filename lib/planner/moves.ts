@@ -10,7 +10,7 @@ const IMPROVEMENT = 1e-3;
 /** An evening's cap is divided into at most so many steps, however small the measure: an eighth of a mg/L each. */
 const STEPS_OF_A_CAP = 32;
 
-/** More or fewer measures on an evening, a dose to another evening, one measure from one dose to another. */
+/** More or fewer measures on an evening, a dose to another evening or half of it, one measure from one dose to another. */
 export function fastMoves(choice: Choice, most: readonly number[]): Move[] {
   const evenings = choice.evenings.map((_, evening) => evening);
   const step = Math.max(1, Math.round(Math.max(0, ...most) / STEPS_OF_A_CAP));
@@ -23,7 +23,10 @@ export function fastMoves(choice: Choice, most: readonly number[]): Move[] {
   const pairs = evenings.flatMap((from) => evenings.filter((to) => to !== from).map((to) => [from, to] as const));
   const shifts = pairs.flatMap(([from, to]): Move[] => [
     (draft) => (draft.measures[from]! > 0 && draft.measures[to] === 0 ? carry(draft, from, to, Infinity) : draft),
-    (draft) => (draft.measures[from]! > step && draft.measures[to]! > 0 ? carry(draft, from, to, step) : draft),
+    (draft) => {
+      const [left, there] = [draft.measures[from]!, draft.measures[to]!];
+      return left > step ? carry(draft, from, to, there > 0 ? step : Math.floor(left / 2)) : draft;
+    },
   ]);
   return [...amounts, ...shifts];
 }

@@ -1,5 +1,6 @@
 import { contentsPerUnit } from '@/lib/chemistry';
 import { CYANURIC_ACID_MILLIGRAMS_PER_MOLE, HARDNESS_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
+import { quantile } from '@/lib/projection/quantiles';
 import { limits, lowestLevel } from '@/lib/standards/limits';
 import type { PlanContext } from './context';
 import {
@@ -28,10 +29,10 @@ export type QuickCost = {
 
 /** A quick model of the week. */
 export type Response = {
-  /** Over half of the ensemble. */
-  cost: QuickCost;
-  /** Over a few of them: for a first look at many drafts. */
+  /** Over a few of the ensemble, the median in place of its middle: for a first look at many drafts. */
   roughCost: QuickCost;
+  /** With the middle of the ensemble as far from the median as it is with a draft: over a few, and over half of them. */
+  costsNear: (draft: Draft) => { rough: QuickCost; whole: QuickCost };
   /** The same, made to agree with a plan that was projected in full over the whole ensemble. */
   costAround: (evaluated: Evaluated) => QuickCost;
   /** Free chlorine that one measure adds on each evening [mg/L]. */
@@ -98,15 +99,36 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
   return {
     measureRises,
     roughCost: costBy(few),
-    cost: costBy(all),
-    costAround: ({ draft, median, courses, cost }) => {
+    costsNear: (draft) => {
+      const gaps = middleOverMedian(all.levelsOf(draft), 1 + context.quickMembers.length);
+      const beside = (members: number) => {
+        const correction = new Float64Array(gaps.length * (1 + members));
+        gaps.forEach((gap, hour) => (correction[hour * (1 + members)] = gap));
+        return correction;
+      };
+      return {
+        rough: costBy(few, beside(context.roughMembers.length)),
+        whole: costBy(all, beside(context.quickMembers.length)),
+      };
+    },
+    costAround: ({ draft, middle, courses, cost }) => {
       const quick = all.levelsOf(draft);
-      const exact = levelsOf([median, ...courses.slice(0, context.quickMembers.length)]);
+      const exact = levelsOf(middle, courses.slice(0, context.quickMembers.length));
       const correction = exact.map((level, at) => level - quick[at]!);
       // What is left is what the other half of the ensemble, and side effects that do not quite add up, make of it.
       return costBy(all, correction, cost.total - costBy(all, correction).of(draft));
     },
   };
+}
+
+/** How far the middle of the members is from the median, which comes first in each row, by hour [mg/L]. */
+function middleOverMedian(levels: Float64Array, columns: number): Float64Array {
+  const sorted = new Float64Array(columns - 1);
+  return Float64Array.from({ length: levels.length / columns }, (_, hour) => {
+    const first = hour * columns;
+    sorted.set(levels.subarray(first + 1, first + columns));
+    return quantile(sorted.sort(), 0.5) - levels[first]!;
+  });
 }
 
 /** Hardness that one measure of granules adds [mg/L as CaCO3]. */

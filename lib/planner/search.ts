@@ -1,6 +1,6 @@
 import { belowMaximum, lowered } from './below-maximum';
 import type { PlanContext } from './context';
-import { costOver, evaluate, type Evaluated } from './cost';
+import { differenceOnTrial, evaluate, type Evaluated } from './cost';
 import { type Choice, type Draft, keyOf } from './draft';
 import type { Response } from './response';
 import { improve, inOrder, type Sketch, type Sketches } from './sketch';
@@ -33,21 +33,21 @@ export function searchPlan(context: PlanContext, response: Response, choice: Cho
   let best = inFull(sketches.best[0]!.draft);
   let promising = promisingAround(best, response, choice, sketches);
   const trials = new Map<string, number>();
+  /** The cost of a draft by a few members, as far as it differs from that of the best plan by them. */
   const onTrial = (draft: Draft): number => {
     const key = keyOf(draft);
     const known = trials.get(key);
     if (known !== undefined) return known;
-    const { total } = evaluate(draft, choice, context, context.members.slice(0, TRIAL_MEMBERS)).cost;
+    const total = best.cost.total + differenceOnTrial(draft, best, context, TRIAL_MEMBERS);
     trials.set(key, total);
     return total;
   };
   while (tried.size < MOST_IN_FULL) {
-    const byTrial = costOver(TRIAL_MEMBERS, best, context);
     const next = promising.find(
       ({ draft }) =>
         !tried.has(keyOf(draft)) &&
         (trials.has(keyOf(draft)) || trials.size < MOST_ON_TRIAL) &&
-        onTrial(draft) - byTrial <= (WORTH_IT_IN_FULL - 1) * best.cost.total,
+        onTrial(draft) <= WORTH_IT_IN_FULL * best.cost.total,
     );
     if (!next) break;
     const evaluated = inFull(next.draft);

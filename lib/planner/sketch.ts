@@ -51,7 +51,8 @@ export function sketchesOf(response: Response, space: SearchSpace, earlier?: rea
   const first = fast[0] ?? null;
   const screened = screen(first, choice, response);
   const tried = earlier ? { ...screened, all: costed([...screened.all, ...earlier], response) } : screened;
-  const improved = (draft: Draft) => improve(draft, choice, response, response.roughCost);
+  const { rough, whole } = response.costsNear(tried.all[0]!);
+  const improved = (draft: Draft) => improve(draft, choice, response, rough);
   const best = inOrder(tried.all.slice(0, IMPROVED).map(improved));
   const others = fast.flatMap((product) =>
     best
@@ -61,13 +62,14 @@ export function sketchesOf(response: Response, space: SearchSpace, earlier?: rea
   );
   const found = [...best, ...others].map(({ draft }) => draft);
   // The rough cost may have led away from a draft that was better before, or to a visit that is not worth its while.
-  const costs = (drafts: readonly Draft[]) => drafts.map((draft) => ({ draft, cost: response.cost.of(draft) }));
+  const fits = (draft: Draft) => allowed(draft, choice, capsOf(draft, response));
+  const costs = (drafts: readonly Draft[]) => drafts.map((draft) => ({ draft, cost: whole.of(draft) }));
   const looked = inOrder(costs([...found, ...tried.all.slice(0, IMPROVED)]));
   const exact = inOrder([
     ...looked,
-    ...costs(looked.slice(0, VISITS_TAKEN_FROM).flatMap(({ draft }) => withOneVisitLess(draft))),
+    ...costs(looked.slice(0, VISITS_TAKEN_FROM).flatMap(({ draft }) => withOneVisitLess(draft).filter(fits))),
   ]);
-  const again = exact.slice(0, IMPROVED_AGAIN).map(({ draft }) => improve(draft, choice, response, response.cost));
+  const again = exact.slice(0, IMPROVED_AGAIN).map(({ draft }) => improve(draft, choice, response, whole));
   return { best: inOrder([...exact, ...again]), fastAlone: tried.fastAlone };
 }
 
@@ -92,17 +94,16 @@ export function inOrder(sketches: readonly Sketch[]): Sketch[] {
   return [...distinct.values()].sort((a, b) => a.cost - b.cost);
 }
 
-/** Every move that a draft allows, and what it has to keep to. */
-function movesOf(draft: Draft, choice: Choice, response: Response) {
-  const most = mostMeasures(draft.fast, draft.fast ? response.measureRises(draft.fast) : draft.measures);
-  const moves: Move[] = [...(draft.fast ? fastMoves(choice, most) : []), ...tabletMoves(choice)];
-  return { moves, fits: (each: Draft) => allowed(each, choice, most) };
-}
-
 /** Brings a draft to where no single change helps. */
 export function improve(draft: Draft, choice: Choice, response: Response, cost: QuickCost): Sketch {
-  const { moves, fits } = movesOf(draft, choice, response);
-  return descend(draft, moves, fits, cost);
+  const most = capsOf(draft, response);
+  const moves: Move[] = [...(draft.fast ? fastMoves(choice, most) : []), ...tabletMoves(choice)];
+  return descend(draft, moves, (each) => allowed(each, choice, most), cost);
+}
+
+/** Most measures of a draft's fast product on each evening. */
+function capsOf({ fast, measures }: Draft, response: Response): number[] {
+  return mostMeasures(fast, fast ? response.measureRises(fast) : measures);
 }
 
 /**
@@ -188,14 +189,20 @@ function choicesOfEvenings({ tablets, measures }: Draft, choice: Choice): number
   return all;
 }
 
-/** A draft without each of its visits. */
+/** A draft without each of its visits: what goes in then is left out, or goes in with the dose before or after it. */
 function withOneVisitLess(draft: Draft): Draft[] {
   const { tablets, measures } = draft;
-  return measures.flatMap((count, evening) =>
-    count === 0 && tablets[evening] === 0
-      ? []
-      : [{ ...draft, tablets: tablets.with(evening, 0), measures: measures.with(evening, 0) }],
-  );
+  const doses = measures.flatMap((count, evening) => (count > 0 ? [evening] : []));
+  return measures.flatMap((count, evening) => {
+    if (count === 0 && tablets[evening] === 0) return [];
+    const without = { ...draft, tablets: tablets.with(evening, 0), measures: measures.with(evening, 0) };
+    const place = doses.indexOf(evening);
+    const beside = place < 0 ? [] : [doses[place - 1], doses[place + 1]].filter((each) => each !== undefined);
+    return [
+      without,
+      ...beside.map((each) => ({ ...without, measures: without.measures.with(each, measures[each]! + count) })),
+    ];
+  });
 }
 
 /** The same rises with another product, in its measures. */

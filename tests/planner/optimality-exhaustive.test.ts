@@ -2,10 +2,12 @@ import { describe, expect, it } from 'vitest';
 import { planWeek } from '@/lib/planner';
 import { belowMaximum } from '@/lib/planner/below-maximum';
 import { contextOf, type PlanContext } from '@/lib/planner/context';
-import { evaluate, type Evaluated } from '@/lib/planner/cost';
+import { costOf, coursesOf, evaluate, type Evaluated, stabilizedIn } from '@/lib/planner/cost';
 import type { Choice, Draft } from '@/lib/planner/draft';
 import { openEvenings } from '@/lib/planner/evenings';
 import { type FastOption, optionsOf } from '@/lib/planner/products';
+import { seriesOf } from '@/lib/projection';
+import { lowestLevel } from '@/lib/standards/limits';
 import { summerPool } from './optimality-scenarios';
 
 const MEASURES = 3;
@@ -44,20 +46,34 @@ function everyDraft({ evenings, visits, tablets }: Choice, fast: FastOption): Dr
   });
 }
 
+/** What a draft costs at least, by some of the members: the risk that the rest, and their middle, add can only be more. */
+function leastCost(draft: Draft, choice: Choice, context: PlanContext, members: PlanContext['members']): number {
+  const { median, courses } = coursesOf(draft, choice, context, members);
+  const stabilized = stabilizedIn(draft, context);
+  const lowest = Float64Array.from(seriesOf(median).cyanuricAcid, (value) => lowestLevel(value, stabilized));
+  // A middle at the lowest level breaks no limit: only the members count.
+  expect(Math.max(...lowest)).toBeLessThan(context.scenario.pool.swimLimit);
+  const { shortfall, excess, total } = costOf(draft, choice, median, courses, lowest, context);
+  const risk = shortfall + excess;
+  return total - risk + (risk * members.length) / context.members.length;
+}
+
+const FEW = 16;
+/** How much a quarter of the ensemble, which is as evenly spread as all of it, may be mistaken. */
+const MISTAKEN = 1.1;
+
 /**
- * The cheapest of all drafts that costs less than a bound, each projected in full over the whole ensemble. What the median
- * alone, and it and a quarter of the ensemble, make of a draft can only grow with the rest of the ensemble: a draft that is
- * dearer already by these is not projected any further.
+ * The cheapest of all drafts that costs less than a bound, each projected in full. One that is dearer already by the
+ * median's drift or by a few members goes no further; nor does one that a quarter of the ensemble, its own middle
+ * included, sees far over the bound.
  */
 function cheaperThan(bound: number, drafts: readonly Draft[], choice: Choice, context: PlanContext): Evaluated | null {
-  const quarter = context.members.slice(0, context.members.length / 4);
+  const quarter = { ...context, members: context.members.slice(0, FEW) };
   let least = bound;
   let cheapest: Evaluated | null = null;
   for (const draft of drafts) {
-    const byMedian = evaluate(draft, choice, context, []).cost.total;
-    if (byMedian >= least) continue;
-    const byQuarter = evaluate(draft, choice, context, quarter).cost.total;
-    if (byMedian + (byQuarter - byMedian) / 4 >= least) continue;
+    if ([0, 4].some((count) => leastCost(draft, choice, context, context.members.slice(0, count)) >= least)) continue;
+    if (evaluate(draft, choice, quarter).cost.total > MISTAKEN * least) continue;
     const whole = evaluate(draft, choice, context);
     if (whole.cost.total < least && belowMaximum(whole, choice, context)) [least, cheapest] = [whole.cost.total, whole];
   }

@@ -9,7 +9,7 @@ import type { Scenario } from '@/lib/schemas/scenario';
 import type { ShelfProduct } from '@/lib/schemas/shelf-product';
 import { retestHours } from '@/lib/standards/companions';
 import { contextOf, type PlanContext } from '../context';
-import type { Evaluated } from '../cost';
+import type { ByMedian } from '../cost';
 import { generic, isGeneric } from '../generic-products';
 import { priceOf } from '../product-facts';
 import { avoided, type Options } from '../products';
@@ -35,7 +35,7 @@ export type CompanionOutcome = {
  * @param plan the week's best chlorine without it
  */
 export function companionOf(
-  plan: Evaluated,
+  plan: ByMedian,
   { context, options }: { context: PlanContext; options: Options },
 ): CompanionOutcome {
   const { scenario, start } = context;
@@ -58,7 +58,7 @@ export function companionOf(
   return none;
 }
 
-function companionFor(need: CompanionNeed, plan: Evaluated, context: PlanContext): Companion | null {
+function companionFor(need: CompanionNeed, plan: ByMedian, context: PlanContext): Companion | null {
   const { scenario, start } = context;
   const { pool } = scenario;
   const product = productFor(need.substances, scenario);

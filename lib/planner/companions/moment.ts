@@ -4,7 +4,7 @@ import { HOURS_IN_PLAN, MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
 import { codeMinimum, limits } from '@/lib/standards/limits';
 import { daylightOf } from '@/lib/sun/daylight';
 import type { PlanContext } from '../context';
-import type { Evaluated } from '../cost';
+import type { ByMedian } from '../cost';
 import type { CompanionNeed, CompanionSubstance } from './need';
 
 const QUARTER_HOUR = MILLISECONDS_PER_HOUR / 4;
@@ -17,7 +17,7 @@ const acids: readonly CompanionSubstance[] = ['hydrochloric-acid', 'sodium-bisul
  * the code minimum is raised first, and nothing goes in while the likely range is over 10 mg/L. Null when the week has no
  * such moment.
  */
-export function momentOf(need: CompanionNeed, substance: CompanionSubstance, plan: Evaluated, context: PlanContext) {
+export function momentOf(need: CompanionNeed, substance: CompanionSubstance, plan: ByMedian, context: PlanContext) {
   const { start, now } = context;
   const chlorine = chlorineEvenings(plan);
   const low = start.water.freeChlorine < codeMinimum(start.water.cyanuricAcid, context.stabilizedProductUsed);
@@ -28,7 +28,7 @@ export function momentOf(need: CompanionNeed, substance: CompanionSubstance, pla
   return evenings.find((at) => !chlorine.includes(at)) ?? evenings.at(-1) ?? null;
 }
 
-function chlorineEvenings({ draft, choice }: Evaluated): number[] {
+function chlorineEvenings({ draft, choice }: ByMedian): number[] {
   return choice.evenings.flatMap(({ at }, evening) =>
     draft.tablets[evening]! > 0 || draft.measures[evening]! > 0 ? [at] : [],
   );
