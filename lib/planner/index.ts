@@ -7,9 +7,10 @@ import type { Scenario } from '@/lib/schemas/scenario';
 import { alternativesOf, burdenOf } from './alternatives';
 import { assertSafePlan } from './safety/assert-safe-plan';
 import { checksOf } from './checks';
-import { type Companion, companionOf } from './companions/companion';
+import { companionWeek } from './companion-week';
+import type { Companion } from './companions/companion';
 import { contextOf, type PlanContext } from './context';
-import { byMedian, evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
+import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
 import { weekDoseOf } from './given-doses';
@@ -38,11 +39,7 @@ export type { CourseBand };
 export function planWeek(scenario: Scenario): WeekPlan {
   const { blocking, wanted } = needsOf(scenario);
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
-  const alone = sketchWeek(contextOf(scenario));
-  // What goes in beside chlorine hangs on the chlorine's evenings and tablets: a sketch tells them.
-  const sketched = byMedian(alone.sketches.best[0]!.draft, alone.choice, alone.context);
-  const { companion, waiting, context: withIt } = companionOf(sketched, alone);
-  const sketch = withIt ? sketchWeek(withIt, alone) : alone;
+  const { sketch, companion, waiting } = companionWeek(sketchWeek(contextOf(scenario)));
   const { context, options, choice, response, sketches } = sketch;
   const found = searchPlan(context, response, choice, sketches);
   const { draft, halvedEvening } = halveFirstDose(found.draft, scenario);

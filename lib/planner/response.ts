@@ -35,6 +35,8 @@ export type Response = {
   costsNear: (draft: Draft) => { rough: QuickCost; whole: QuickCost };
   /** The same, made to agree with a plan that was projected in full over the whole ensemble. */
   costAround: (evaluated: Evaluated) => QuickCost;
+  /** Share of the swim hours in which the middle of the ensemble keeps the limits, by half of it. */
+  openShareOf: (draft: Draft) => number;
   /** Free chlorine that one measure adds on each evening [mg/L]. */
   measureRises: (fast: FastOption) => readonly number[];
 };
@@ -96,11 +98,24 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
     });
   const all = riskOver(context.quickMembers);
   const few = riskOver(context.roughMembers);
+  const columns = 1 + context.quickMembers.length;
   return {
     measureRises,
     roughCost: costBy(few),
+    openShareOf: (draft) => {
+      const levels = all.levelsOf(draft);
+      const gaps = middleOverMedian(levels, columns);
+      const lowest = lowestOf(draft);
+      const pH = pHOf(draft);
+      const open = context.swimHour.map((swims, hour) => {
+        const level = levels[hour * columns]! + gaps[hour]!;
+        const chlorineFits = level >= lowest[hour]! && level <= context.swimCeiling[hour]!;
+        return swims && chlorineFits && pH[hour]! >= limits.pHRangeLow.value && pH[hour]! <= limits.pHRangeHigh.value;
+      });
+      return count(open) / Math.max(1, count(context.swimHour));
+    },
     costsNear: (draft) => {
-      const gaps = middleOverMedian(all.levelsOf(draft), 1 + context.quickMembers.length);
+      const gaps = middleOverMedian(all.levelsOf(draft), columns);
       const beside = (members: number) => {
         const correction = new Float64Array(gaps.length * (1 + members));
         gaps.forEach((gap, hour) => (correction[hour * (1 + members)] = gap));
@@ -119,6 +134,10 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
       return costBy(all, correction, cost.total - costBy(all, correction).of(draft));
     },
   };
+}
+
+function count(hours: readonly boolean[]): number {
+  return hours.filter(Boolean).length;
 }
 
 /** How far the middle of the members is from the median, which comes first in each row, by hour [mg/L]. */

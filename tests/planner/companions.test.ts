@@ -3,6 +3,8 @@ import { dayOf } from '@/lib/calendar/household-day';
 import { wallClock } from '@/lib/calendar/wall-time';
 import { addDose, type Substance } from '@/lib/chemistry';
 import { planWeek } from '@/lib/planner';
+import { contextOf } from '@/lib/planner/context';
+import { openSwimShare } from '@/lib/planner/limits-broken';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import { type Changes, codesIn, fullTest, products, scenarioOf } from './scenarios';
@@ -136,6 +138,35 @@ describe('beside chlorine', () => {
     const one = planWeek(scenarioOf({ reading: { totalAlkalinity: 50 }, preferences: { visits: 1 } }));
     expect(companionsIn(one)).toEqual([]);
     expect(codesIn(one.cautions)).toContain('companion-waits');
+  });
+
+  it('waits where its evening, taken from chlorine, would close more than a quarter of the swim hours', () => {
+    const week = (visits: number, avoid: string[] = []) =>
+      planWeek(scenarioOf({ reading: { totalAlkalinity: 65 }, preferences: { visits, avoid } }));
+    expect(companionsIn(week(2))).toEqual([]);
+    expect(codesIn(week(2).cautions)).toContain('companion-waits');
+    expect(week(2).openSwimShare).toBe(week(2, ['sodium-bicarbonate']).openSwimShare);
+    expect(onlyCompanion(week(4)).substance).toBe('sodium-bicarbonate');
+    expect(codesIn(week(4).cautions)).not.toContain('companion-waits');
+  });
+
+  it('an acid dose closes the swim hours of its wait', () => {
+    const scenario = scenarioOf({
+      pool: { swimHours: { from: '07:00', to: '20:00' } },
+      reading: { pH: 8, totalAlkalinity: 100 },
+    });
+    const plan = planWeek(scenario);
+    const dose = onlyCompanion(plan);
+    const context = contextOf(scenario);
+    const without = openSwimShare(plan.projection!, [], context);
+    const waited = plan.hours.filter((hour, index) => {
+      const after = Date.parse(hour) - Date.parse(dose.at);
+      return context.swimHour[index] && after >= 0 && after < 4 * HOUR;
+    });
+    expect(dose.substance).toBe('hydrochloric-acid');
+    expect(waited.length).toBeGreaterThan(1);
+    expect(plan.openSwimShare).toBeLessThan(without);
+    expect(openSwimShare(plan.projection!, [{ ...dose, at: '2027-01-01T00:00:00Z' }], context)).toBe(without);
   });
 
   it('is halved in a pool whose volume is an estimate', () => {

@@ -10,7 +10,7 @@ import { type ParameterOverrides, type Scenario, scenarioSchema } from '@/lib/sc
 import { fullTest, scenarioOf } from './scenarios';
 
 const DAY = 86_400_000;
-const plain = scenarioOf();
+const plain = scenarioOf({ preferences: { visits: 5 } });
 const { pool } = plain;
 const doseAt = (at: string) => ({ at, substance: 'sodium-hypochlorite', strength: 12.5, amount: 1500 }) as const;
 

@@ -8,7 +8,7 @@ import type { PlannedDose } from '@/lib/schemas/dose';
 import type { Scenario } from '@/lib/schemas/scenario';
 import type { ShelfProduct } from '@/lib/schemas/shelf-product';
 import { retestHours } from '@/lib/standards/companions';
-import { contextOf, type PlanContext } from '../context';
+import type { PlanContext } from '../context';
 import type { ByMedian } from '../cost';
 import { generic, isGeneric } from '../generic-products';
 import { priceOf } from '../product-facts';
@@ -21,23 +21,16 @@ import { type CompanionNeed, companionNeeds, type CompanionSubstance } from './n
 /** A dose beside chlorine: how a plan names it, how the projection takes it, what it costs, and when to test again [ms]. */
 export type Companion = { planned: PlannedDose; dose: WeekDose; money: number; retestAt: number };
 
-export type CompanionOutcome = {
-  companion: Companion | null;
-  /** The week with it, ready to be searched again. */
-  context: PlanContext | null;
-  /** What the week needs and cannot have yet: no evening is left, or an earlier dose has not been tested. */
-  waiting: CompanionNeed | null;
-};
-
 /**
- * The week's companion dose: one at most, with a test before the next (care rules, part 4).
+ * What a plan's week needs beside chlorine, and a dose for each need that it leaves a moment for, the most urgent first. A
+ * week holds one at most, with a test before the next (care rules, part 4).
  *
- * @param plan the week's best chlorine without it
+ * @param plan a good week of chlorine without it
  */
-export function companionOf(
+export function companionsOf(
   plan: ByMedian,
   { context, options }: { context: PlanContext; options: Options },
-): CompanionOutcome {
+): { needs: CompanionNeed[]; companions: Companion[] } {
   const { scenario, start } = context;
   const needs = companionNeeds({
     pool: scenario.pool,
@@ -47,15 +40,8 @@ export function companionOf(
     tabletsLead: sumOf(plan.draft.tablets) > 0,
     tabletsPossible: options.tablets !== null,
   });
-  const none = { companion: null, context: null, waiting: needs[0] ?? null };
-  if (untested(context) || plan.choice.visits < 2) return none;
-  for (const need of needs) {
-    const companion = companionFor(need, plan, context);
-    const withIt = companion && contextOf(scenario, companion.dose);
-    // The pump runs for it, and may bring out more of the tablets than the water takes.
-    if (withIt && withIt.belowMaximumFrom <= companion.dose.at) return { companion, context: withIt, waiting: null };
-  }
-  return none;
+  if (untested(context) || plan.choice.visits < 2) return { needs, companions: [] };
+  return { needs, companions: needs.flatMap((need) => companionFor(need, plan, context) ?? []) };
 }
 
 function companionFor(need: CompanionNeed, plan: ByMedian, context: PlanContext): Companion | null {
