@@ -7,6 +7,7 @@ import { codeMinimum, limits } from '@/lib/standards/limits';
 import type { CheckReason } from './codes';
 import type { Companion } from './companions/companion';
 import type { PlanContext } from './context';
+import { MID_WEEK_FROM } from './mid-week-test';
 
 type Check = WeekPlan['checks'][number];
 
@@ -19,14 +20,17 @@ function quickShows({ planned }: Companion): boolean {
 }
 
 /**
- * Tests that the week asks for: one when a companion dose shows, a quick check before the first swim hour of a swim day on which the last test would come to
- * be over 48 h old, one on the first morning on which the likely range reaches the code minimum, one on the morning after a
- * halved first dose, and the full test that makes the next plan.
+ * Tests that the week asks for: one when a companion dose shows, a quick check before the first swim hour of a swim day on
+ * which the last test would come to be over 48 h old, one on the first morning on which the likely range reaches the code
+ * minimum, one on the morning after a halved first dose, a full one in the middle of the week where that pays, and the full test that makes the next plan.
+ *
+ * @param midWeekPays whether a further full test in the middle of the week is worth what it costs
  */
 export function checksOf(
   projection: PlanProjection,
   doses: readonly PlannedDose[],
   companion: Companion | null,
+  midWeekPays: boolean,
   context: PlanContext,
   stabilized: boolean,
 ): Check[] {
@@ -37,6 +41,7 @@ export function checksOf(
   const endsAt = start.takenAt + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR;
   const first = dayOf(start.takenAt, pool.timeZone);
   const lowFrom = firstHourAtMinimum(projection, context, stabilized);
+  const midWeekFrom = start.takenAt + MID_WEEK_FROM * MILLISECONDS_PER_HOUR;
   const halved = doses.find(({ reason }) => reason === 'first-dose-halved');
 
   let lastTest = start.takenAt;
@@ -51,19 +56,23 @@ export function checksOf(
     const nextMorning = morning(addDays(day, 1));
     const afterHalved = halved && Date.parse(halved.at) < at && Date.parse(halved.at) >= lastTest;
     const retest = companion && !retested && at >= companion.retestAt;
+    const midWeek = midWeekPays && at >= midWeekFrom && !checks.some(({ kind }) => kind === 'full');
     const low = lowFrom !== null && lowFrom < nextMorning && lastTest === start.takenAt;
     const reason: CheckReason | null = retest
       ? 'after-companion'
       : afterHalved
         ? 'after-halved-dose'
-        : swims && age > limits.verdictReadingAge.value
-          ? 'swim-day-after-two-days'
-          : low
-            ? 'band-reaches-code-minimum'
-            : null;
+        : midWeek
+          ? 'mid-week-pays'
+          : swims && age > limits.verdictReadingAge.value
+            ? 'swim-day-after-two-days'
+            : low
+              ? 'band-reaches-code-minimum'
+              : null;
     if (!reason) continue;
     if (retest) retested = true;
-    checks.push({ at, kind: retest && !quickShows(companion) ? 'full' : 'quick', reason });
+    const full = reason === 'mid-week-pays' || (retest && !quickShows(companion));
+    checks.push({ at, kind: full ? 'full' : 'quick', reason });
     lastTest = at;
   }
   checks.push({ at: Math.max(fullTestDue(context, morning, endsAt), now), kind: 'full', reason: 'next-week' });

@@ -26,6 +26,7 @@ export const checkReasons = [
   'band-reaches-code-minimum',
   'after-halved-dose',
   'after-companion',
+  'mid-week-pays',
   'next-week',
 ] as const;
 export type CheckReason = (typeof checkReasons)[number];

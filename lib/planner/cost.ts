@@ -75,9 +75,9 @@ export function costOf(
 ): Cost {
   const { preferences } = context.scenario;
   const water = seriesOf(median);
-  const stabilized = stabilizedIn(draft, context);
-  const lowest = Float64Array.from(water.cyanuricAcid, (stabilizer) => lowestLevel(stabilizer, stabilized));
-  const risk = riskOf(levelsOf(middle, courses), lowest, context);
+  const lowest = lowestLevelsOf({ draft, median }, context);
+  const members = courses.map(({ hourly }) => hourly.freeChlorine);
+  const risk = riskOf(levelsOf(middle, members), lowest, context);
   const first = context.start.water;
   const cost = {
     money: preferences.money * moneyOf(draft, choice),
@@ -89,6 +89,12 @@ export function costOf(
     pH: pHPrice(first, water.pH, water.totalAlkalinity.at(-1)!, context),
   };
   return { ...cost, total: Object.values(cost).reduce((sum, each) => sum + each, 0) };
+}
+
+/** Lowest level at each hour with the stabilizer of the median's course [mg/L]. */
+export function lowestLevelsOf({ draft, median }: Pick<ByMedian, 'draft' | 'median'>, context: PlanContext) {
+  const stabilized = stabilizedIn(draft, context);
+  return Float64Array.from(seriesOf(median).cyanuricAcid, (stabilizer) => lowestLevel(stabilizer, stabilized));
 }
 
 export function stabilizedIn(draft: Draft, context: PlanContext): boolean {
@@ -104,9 +110,9 @@ export function troubleOf(draft: Draft): number {
   return weights.visit * visitsOf(draft) + (measuresToBuy(draft) > 0 ? weights.errand : 0);
 }
 
-/** Free chlorine [mg/L], hour by hour, the middle and the courses side by side: [hour * (courses + 1) + column]. */
-export function levelsOf(middle: Float64Array, courses: readonly Course[]): Float64Array {
-  const columns = [middle, ...courses.map(({ hourly }) => hourly.freeChlorine)];
+/** Free chlorine [mg/L], hour by hour, the middle and the members side by side: [hour * (members + 1) + column]. */
+export function levelsOf(middle: Float64Array, members: readonly Float64Array[]): Float64Array {
+  const columns = [middle, ...members];
   const levels = new Float64Array(middle.length * columns.length);
   columns.forEach((column, index) => {
     for (let hour = 0; hour < column.length; hour++) levels[hour * columns.length + index] = column[hour]!;

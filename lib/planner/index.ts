@@ -15,6 +15,7 @@ import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
 import { weekDoseOf } from './given-doses';
 import { brokenLimits, openSwimShare } from './limits-broken';
+import { midWeekTestPays } from './mid-week-test';
 import { needsOf } from './needs';
 import { plannedDoses } from './planned-doses';
 import { projectionOf } from './projection-of';
@@ -60,7 +61,7 @@ export function planWeek(scenario: Scenario): WeekPlan {
     ...frame(context),
     projection,
     doses,
-    checks: checksOf(projection, doses, companion, context, stabilized),
+    checks: checksOf(projection, doses, companion, midWeekTestPays(best, context), context, stabilized),
     endOfWeek: endOf(best),
     cost: withCompanion(best.cost, companion, scenario),
     mix: burdenOf(best, chlorine, context),

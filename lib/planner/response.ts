@@ -128,7 +128,8 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
     },
     costAround: ({ draft, middle, courses, cost }) => {
       const quick = all.levelsOf(draft);
-      const exact = levelsOf(middle, courses.slice(0, context.quickMembers.length));
+      const members = courses.slice(0, context.quickMembers.length).map(({ hourly }) => hourly.freeChlorine);
+      const exact = levelsOf(middle, members);
       const correction = exact.map((level, at) => level - quick[at]!);
       // What is left is what the other half of the ensemble, and side effects that do not quite add up, make of it.
       return costBy(all, correction, cost.total - costBy(all, correction).of(draft));

@@ -64,9 +64,30 @@ export const learningFaults: readonly PlantedFault[] = [
   },
   {
     file: 'lib/planner/companions/companion.ts',
-    find: 'if (untested(context) || plan.choice.visits < 2) return none;',
-    plant: 'if (plan.choice.visits < 2) return none;',
+    find: 'if (untested(context) || plan.choice.visits < 2)',
+    plant: 'if (plan.choice.visits < 2)',
     noticedBy: companions,
     fault: 'a second companion without a test between',
+  },
+  {
+    file: 'lib/planner/companion-week.ts',
+    find: 'const MOST_HOURS_LOST = 0.25;',
+    plant: 'const MOST_HOURS_LOST = 2.5;',
+    noticedBy: companions,
+    fault: 'a companion that takes an evening chlorine needs',
+  },
+  {
+    file: 'lib/planner/mid-week-test.ts',
+    find: ' - riskFrom(levelsOf(plan.middle, [plan.middle]))',
+    plant: '',
+    noticedBy: ['tests/planner/week-plan.test.ts'],
+    fault: 'a mid-week test where knowing more helps nothing',
+  },
+  {
+    file: 'lib/planner/cost.ts',
+    find: 'riskOf(levelsOf(middle, members)',
+    plant: 'riskOf(levelsOf(median.hourly.freeChlorine, members)',
+    noticedBy: ['tests/planner/infeasible.test.ts'],
+    fault: 'the median priced in place of the middle of the ensemble',
   },
 ];

@@ -3,8 +3,10 @@ import { dayOf } from '@/lib/calendar/household-day';
 import { wallClock } from '@/lib/calendar/wall-time';
 import { addDose, type Substance } from '@/lib/chemistry';
 import { planWeek } from '@/lib/planner';
+import { companionAmount } from '@/lib/planner/companions/amount';
 import { contextOf } from '@/lib/planner/context';
 import { openSwimShare } from '@/lib/planner/limits-broken';
+import { shelfProductSchema } from '@/lib/schemas/shelf-product';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import { type Changes, codesIn, fullTest, products, scenarioOf } from './scenarios';
@@ -83,11 +85,28 @@ describe('beside chlorine', () => {
     expect(known).toMatchObject({ product: 'acid', toBuy: false });
     expect(known.amount).toBeGreaterThan((16 * 75.7) / 2);
     expect(known.amount).toBeLessThanOrEqual(16 * 75.7);
-    const unsure = onlyCompanion(
-      planWeek(scenarioOf({ ...changes('strip'), reading: { ...changes('strip').reading, pH: 7.9 } })),
-    );
-    // A strip may be off by 0.2: 7.2 + 1.28 * 0.2 = 7.46 is as low as the middle may come.
-    expect(7.9 + unsure.effect!.change).toBeGreaterThan(7.45);
+  });
+
+  it('acid never takes the likely range under 7.2, however sure or unsure pH is', () => {
+    const water = {
+      ...{ freeChlorine: 3, pH: 7.9, totalAlkalinity: 120, calciumHardness: 220, cyanuricAcid: 40, temperature: 29 },
+    };
+    const acid = shelfProductSchema.parse({
+      id: 'acid',
+      form: 'liquid',
+      substance: 'hydrochloric-acid',
+      strength: 31.45,
+    });
+    const need = { reason: 'lowers-pH', substances: [], quantity: 'pH', target: 7.5, fromHour: 0 } as const;
+    const product = { ...acid, substance: 'hydrochloric-acid' as const, measure: 1 };
+    const pHAfter = (pHError: number) => {
+      const amount = companionAmount(need, product, water, { volume: 75.7, pHError, halved: false });
+      return addDose(water, 75.7, { substance: 'hydrochloric-acid', strength: 31.45, amount }).pH;
+    };
+    expect(pHAfter(0.05)).toBeCloseTo(7.5, 1);
+    // One in ten lies 1.28 sigma below the middle.
+    for (const pHError of [0.25, 0.3, 0.4]) expect(pHAfter(pHError) - 1.28 * pHError).toBeGreaterThanOrEqual(7.199);
+    expect(pHAfter(0.3)).toBeLessThan(7.9);
   });
 
   it('is what chemistry makes of it', () => {

@@ -2,12 +2,10 @@ import { describe, expect, it } from 'vitest';
 import { planWeek } from '@/lib/planner';
 import { belowMaximum } from '@/lib/planner/below-maximum';
 import { contextOf, type PlanContext } from '@/lib/planner/context';
-import { costOf, coursesOf, evaluate, type Evaluated, stabilizedIn } from '@/lib/planner/cost';
+import { costOf, coursesOf, evaluate, type Evaluated, lowestLevelsOf } from '@/lib/planner/cost';
 import type { Choice, Draft } from '@/lib/planner/draft';
 import { openEvenings } from '@/lib/planner/evenings';
 import { type FastOption, optionsOf } from '@/lib/planner/products';
-import { seriesOf } from '@/lib/projection';
-import { lowestLevel } from '@/lib/standards/limits';
 import { summerPool } from './optimality-scenarios';
 
 const MEASURES = 3;
@@ -49,8 +47,7 @@ function everyDraft({ evenings, visits, tablets }: Choice, fast: FastOption): Dr
 /** What a draft costs at least, by some of the members: the risk that the rest, and their middle, add can only be more. */
 function leastCost(draft: Draft, choice: Choice, context: PlanContext, members: PlanContext['members']): number {
   const { median, courses } = coursesOf(draft, choice, context, members);
-  const stabilized = stabilizedIn(draft, context);
-  const lowest = Float64Array.from(seriesOf(median).cyanuricAcid, (value) => lowestLevel(value, stabilized));
+  const lowest = lowestLevelsOf({ draft, median }, context);
   // A middle at the lowest level breaks no limit: only the members count.
   expect(Math.max(...lowest)).toBeLessThan(context.scenario.pool.swimLimit);
   const { shortfall, excess, total } = costOf(draft, choice, median, courses, lowest, context);

@@ -3,7 +3,7 @@ import { dayOf } from '@/lib/calendar/household-day';
 import { wallClock } from '@/lib/calendar/wall-time';
 import { planWeek } from '@/lib/planner';
 import type { WeekPlan } from '@/lib/schemas/plan';
-import { codesIn, fullTest, products, scenarioOf, tabletsIn } from './scenarios';
+import { codesIn, fullTest, products, scenarioOf, tabletsIn, type Changes } from './scenarios';
 
 const zone = 'America/New_York';
 const hourOfDay = (iso: string) => wallClock(Date.parse(iso), zone).hourOfDay;
@@ -238,6 +238,17 @@ describe('tests that a plan asks for', () => {
     });
     expect(checks.map(({ at }) => at)).not.toContain('2026-07-10T10:00:00-04:00');
     expect(checks.at(-1)).toEqual({ at: '2026-07-12T19:00:00-04:00', kind: 'full', reason: 'next-week' });
+  });
+
+  it('a full test in the middle of the week where it is worth more than it costs: little room between the limits', () => {
+    const midWeek = (changes: Changes) =>
+      planWeek(scenarioOf(changes)).checks.filter(({ reason }) => reason === 'mid-week-pays');
+    const reading = { cyanuricAcid: 60 };
+    expect(midWeek({ reading })).toEqual([{ at: '2026-07-09T10:00:00-04:00', kind: 'full', reason: 'mid-week-pays' }]);
+    expect(midWeek({ reading: { cyanuricAcid: 40 } })).toEqual([]);
+    expect(midWeek({ reading, pool: { swimLimit: 10 } })).toEqual([]);
+    expect(midWeek({ reading, preferences: { steadiness: 0 } })).toEqual([]);
+    expect(midWeek({ reading, preferences: { evenings: 3 } })).toEqual([]);
   });
 });
 
