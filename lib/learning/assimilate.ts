@@ -6,10 +6,10 @@ import { parameterPlaces, placeOf } from './state';
 /** Of the standard normal distribution. */
 export const QUANTILE_90 = 1.2815515655446004;
 /** Where a believed surprise comes to lie, in sigmas of what is expected after the expectation was loosened. */
-const BELIEVED_AT = 1.5;
+export const BELIEVED_AT = 1.5;
 
 /** No pool spares more of the loss that is expected of it: what is there beyond that was added. */
-const MOST_OF_LOSS_SPARED = 0.7;
+export const MOST_OF_LOSS_SPARED = 0.7;
 
 /** The band that a value was expected in [its unit]; nothing measured is below 0. */
 export function expectedBand(middle: number, sigma: number) {

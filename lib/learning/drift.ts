@@ -8,14 +8,14 @@ import { parameterPlaces, placeOf, waterPlaces } from './state';
  * that nobody ever measured. Assumption: a thirtieth of what was learnt in a season of 100 days. A pool that changes faster
  * is noticed by its surprises, see `assimilate`.
  */
-const FORGETTING_DAYS = 3000;
+export const FORGETTING_DAYS = 3000;
 
 /**
  * Sigma that water gains in one day through what nobody writes down [its unit]; assumptions. Small on purpose: on simulated
  * pools, in which everything is written down, more would make ranges wider than they promise to be. Handfuls that nobody
  * wrote down show as surprises.
  */
-const unrecordedPerDay: Record<UncertainQuantity, number> = {
+export const unrecordedPerDay: Record<UncertainQuantity, number> = {
   freeChlorine: 0.03,
   pH: 0.01,
   totalAlkalinity: 0.3,
@@ -24,7 +24,7 @@ const unrecordedPerDay: Record<UncertainQuantity, number> = {
 };
 
 /** Chlorine of unrecorded doses is used up like any other: it adds up over no more than so many days. */
-const CHLORINE_REMEMBERS_DAYS = 2;
+export const CHLORINE_REMEMBERS_DAYS = 2;
 
 /** What time alone does to what is known: parameters drift back to their priors, water becomes less sure. */
 export function drift({ mean, covariance }: Pick<FilterState, 'mean' | 'covariance'>, days: number): void {

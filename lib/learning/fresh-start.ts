@@ -6,7 +6,7 @@ import { errorOf } from './measurement';
 import { forEveryParameter, parameterPlaces, placeOf } from './state';
 
 /** Taken where a quantity was not measured, with how far it may be off; assumptions. */
-const assumed: Record<UncertainQuantity, { value: number; sigma: number }> = {
+export const assumed: Record<UncertainQuantity, { value: number; sigma: number }> = {
   freeChlorine: { value: 1.5, sigma: 1.5 },
   pH: { value: 7.5, sigma: 0.3 },
   totalAlkalinity: { value: 90, sigma: 30 },
@@ -14,9 +14,9 @@ const assumed: Record<UncertainQuantity, { value: number; sigma: number }> = {
   cyanuricAcid: { value: 35, sigma: 20 },
 };
 
-const ASSUMED_COMBINED_CHLORINE = 0.1;
-const ASSUMED_TEMPERATURE = 26;
-const ASSUMED_DISSOLVED_SOLIDS = 1000;
+export const ASSUMED_COMBINED_CHLORINE = 0.1;
+export const ASSUMED_TEMPERATURE = 26;
+export const ASSUMED_DISSOLVED_SOLIDS = 1000;
 
 /** Nothing learnt yet: every parameter at its prior. The water is put in by {@link waterAnew}. */
 export function untaught(): FilterState {

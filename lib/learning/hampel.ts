@@ -1,7 +1,7 @@
 /** Where doubt begins, where it is no longer held back, and where nothing counts, in sigmas of what was expected. */
-const DOUBT = 2.5;
-const STRONG_DOUBT = 3;
-const NO_BELIEF = 5;
+export const DOUBT = 2.5;
+export const STRONG_DOUBT = 3;
+export const NO_BELIEF = 5;
 
 /** A value that counts for less than this is questioned. */
 export const QUESTIONED_BELOW = 0.8;

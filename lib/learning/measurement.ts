@@ -3,7 +3,7 @@ import type { UncertainQuantity } from '@/lib/schemas/posterior';
 import type { Interval, ReadingMethod } from '@/lib/schemas/reading';
 
 /** No test is surer than this, one sigma [its unit]: a strip that reads 0 is not exact, nor is an interval of no width. */
-const leastError: Record<UncertainQuantity, number> = {
+export const leastError: Record<UncertainQuantity, number> = {
   freeChlorine: 0.1,
   pH: 0.03,
   totalAlkalinity: 3,

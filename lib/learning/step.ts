@@ -25,9 +25,9 @@ import { learnFromTabletsLeft } from './tablets-left';
 
 const MILLISECONDS_PER_DAY = 24 * MILLISECONDS_PER_HOUR;
 /** After so long without a test [days] the water is anybody's guess; only what the pool itself taught is kept. */
-const LONGEST_GAP = 21;
+export const LONGEST_GAP = 21;
 /** Tablets from so long before a reading [days] may still be in the feeder. */
-const TABLETS_LAST = 30;
+export const TABLETS_LAST = 30;
 /** A reading counts for a parameter when it takes away this share of its variance. */
 const SHARE_THAT_COUNTS = 0.05;
 

@@ -6,7 +6,7 @@ import { hampelWeight, QUESTIONED_BELOW } from './hampel';
 import { placeOf } from './state';
 
 /** One sigma of what somebody sees in a feeder [tablets]: half a tablet; an assumption. */
-const EYE = 0.5;
+export const EYE = 0.5;
 
 /** Sigma points of one dimension, at the mean and sqrt(3) sigmas on either side. */
 const points = [

@@ -53,6 +53,8 @@ export const reasonCodes = [
   'no-tablets-pH-low',
   'no-tablets-feeder',
   'no-tablets-on-shelf',
+  'no-tablets-week-full',
+  'no-tablets-feeder-full',
   'no-tablets-better-without',
   /** Why this fast product, or why none. */
   'fast-closes-gap',

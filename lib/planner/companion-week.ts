@@ -9,7 +9,7 @@ import { sketchWeek, type WeekSketch } from './week-sketch';
 const SKETCHES_ASKED = 4;
 const MOST_MOMENTS = 2;
 /** A companion that takes an evening from chlorine and closes more of the swim hours than this waits for a better week. */
-const MOST_HOURS_LOST = 0.25;
+export const MOST_HOURS_LOST = 0.25;
 
 export type CompanionWeek = {
   sketch: WeekSketch;
@@ -34,11 +34,14 @@ export function companionWeek(alone: WeekSketch): CompanionWeek {
   const asked = sketches.best
     .slice(0, SKETCHES_ASKED)
     .map(({ draft }) => companionsOf(byMedian(draft, choice, context), alone));
-  const without: CompanionWeek = { sketch: alone, companion: null, waiting: asked[0]!.needs[0] ?? null };
+  // What is needed is what the best of them needs; the others only say when else it could go in.
+  const { needs } = asked[0]!;
+  const isNeeded = ({ planned }: Companion) => needs.some(({ reason }) => reason === planned.reason);
+  const without: CompanionWeek = { sketch: alone, companion: null, waiting: needs[0] ?? null };
   const moments = new Map<string, Companion>();
   for (const { companions } of asked) {
     if (moments.size === MOST_MOMENTS) break;
-    const companion = companions.find(fits);
+    const companion = companions.find((each) => isNeeded(each) && fits(each));
     if (companion && !moments.has(momentKey(companion.planned))) moments.set(momentKey(companion.planned), companion);
   }
   const openWithout = response.openShareOf(sketches.best[0]!.draft);

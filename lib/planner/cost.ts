@@ -199,7 +199,7 @@ export function pHPrice(
 }
 
 /** From here on water holds its pH [mg/L as CaCO3]: the low end of what codes call ideal. */
-const ENOUGH_ALKALINITY = 80;
+export const ENOUGH_ALKALINITY = 80;
 
 /**
  * The price of bringing pH and alkalinity back at the end of the week, as far as the plan itself moved them. In water that

@@ -10,7 +10,7 @@ import type { Choice } from './draft';
 import type { Options } from './products';
 import { waterExchange } from './water-exchange';
 
-const FEW_OPEN_HOURS = 0.9;
+export const FEW_OPEN_HOURS = 0.9;
 
 type Explained = {
   doses: readonly PlannedDose[];

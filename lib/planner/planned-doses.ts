@@ -9,7 +9,7 @@ import type { Choice, Draft } from './draft';
 import { isGeneric } from './generic-products';
 import { riseOfFast } from './products';
 
-const QUICK_RAISE = 2.5;
+export const QUICK_RAISE = 2.5;
 
 /**
  * The doses of a draft as a plan names them, in order of time. From the dose on that the shelf no longer holds, they are

@@ -101,12 +101,16 @@ function tabletOption(
   const { tabletMass, strength } = tabletFacts(product);
   const price = (priceOf(product) * tabletMass) / 1000;
   const inFeeder = start.loads.reduce((sum, load) => sum + (load.erodedShare < 1 ? load.count : 0), 0);
-  const most = Math.min(
-    mostTablets(pool.volume, { tabletMass, strength }, tabletsGiven(scenario, now - tabletCap.countedFor * HOUR)),
-    pool.feeder.capacity - inFeeder - tabletsGiven(scenario, start.takenAt).count,
-    Math.floor(product.stock / tabletMass + 1e-9),
+  const ofWeek = mostTablets(
+    pool.volume,
+    { tabletMass, strength },
+    tabletsGiven(scenario, now - tabletCap.countedFor * HOUR),
   );
-  return { product, tabletMass, strength, most: Math.max(0, most), price };
+  if (ofWeek < 1) return 'no-tablets-week-full';
+  const room = pool.feeder.capacity - inFeeder - tabletsGiven(scenario, start.takenAt).count;
+  if (room < 1) return 'no-tablets-feeder-full';
+  const most = Math.min(ofWeek, room, Math.floor(product.stock / tabletMass + 1e-9));
+  return { product, tabletMass, strength, most, price };
 }
 
 type Tablets = { count: number; mass: number; chlorine: number };

@@ -22,7 +22,7 @@ import { tabletFacts } from './product-facts';
 const MILLISECONDS_PER_DAY = 24 * MILLISECONDS_PER_HOUR;
 
 /** Taken where a quantity was never measured, with how far it may be off; the plan says so. */
-const assumed: Record<MeasuredQuantity, { value: number; sigma: number }> = {
+export const assumed: Record<MeasuredQuantity, { value: number; sigma: number }> = {
   freeChlorine: { value: 1, sigma: 1 },
   combinedChlorine: { value: 0.1, sigma: 0.1 },
   pH: { value: 7.5, sigma: 0.3 },

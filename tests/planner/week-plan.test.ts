@@ -252,6 +252,25 @@ describe('tests that a plan asks for', () => {
   });
 });
 
+describe('why no tablets', () => {
+  const given = [{ at: '2026-07-05T18:00:00-04:00', product: 'tabs', amount: 3, unit: 'tablet' }];
+  it.each([
+    ['no-tablets-week-full', { given }],
+    ['no-tablets-week-full', { pool: { volume: 15 } }],
+    [
+      'no-tablets-feeder-full',
+      { given, pool: { volume: 114, feeder: { kind: 'inline', ingredient: 'trichlor', capacity: 3 } } },
+    ],
+    ['no-tablets-feeder', { pool: { feeder: { kind: 'none' } } }],
+    ['no-tablets-on-shelf', { shelf: [products.gran] }],
+    ['no-tablets-stabilizer-high', { reading: { cyanuricAcid: 88 } }],
+  ])('%s', (code, changes: Changes) => {
+    const plan = planWeek(scenarioOf(changes));
+    expect(codesIn(plan.reasons)).toContain(code);
+    expect(tabletsIn(plan)).toBe(0);
+  });
+});
+
 describe('the full test', () => {
   const dueIn = (changes: Parameters<typeof scenarioOf>[0], reading?: object) =>
     planWeek({ ...scenarioOf(changes), ...reading }).checks.filter(({ kind }) => kind === 'full');

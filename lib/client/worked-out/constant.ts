@@ -31,6 +31,7 @@ export type SourceName =
   | 'alduchov1996'
   | 'fao56'
   | 'kfla2011'
+  | 'hampel1974'
   | 'bathers'
   | 'practice'
   | 'fitted'
@@ -69,7 +70,9 @@ export type ConstantUnit =
   | 'pools'
   | 'metres'
   | 'kilopascals'
-  | 'kilojoulesPerKilogram';
+  | 'kilojoulesPerKilogram'
+  | 'tablets'
+  | 'money';
 
 /**
  * One constant as the help page lists it. `of` names where it lives, `folder/file#export.key`, so that a test can hold the

@@ -1,4 +1,6 @@
 import { companionConstants } from './companion-constants';
+import { learningConstants } from './learning-constants';
+import { plannerConstants } from './planner-constants';
 import { productConstants } from './product-constants';
 import { ruleConstants } from './rule-constants';
 import { waterConstants } from './water-constants';
@@ -11,6 +13,8 @@ export const constantGroups = [
   ...weekConstants,
   ...ruleConstants,
   ...companionConstants,
+  ...learningConstants,
+  ...plannerConstants,
 ] as const;
 
 export type ListedGroup = (typeof constantGroups)[number];
