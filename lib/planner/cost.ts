@@ -78,7 +78,6 @@ export function costOf(
   const lowest = lowestLevelsOf({ draft, median }, context);
   const members = courses.map(({ hourly }) => hourly.freeChlorine);
   const risk = riskOf(levelsOf(middle, members), lowest, context);
-  const first = context.start.water;
   const cost = {
     money: preferences.money * moneyOf(draft, choice),
     visits: preferences.evenings * troubleOf(draft),
@@ -86,7 +85,9 @@ export function costOf(
     excess: preferences.steadiness * risk.excess,
     stabilizer: stabilizerPrice(water.cyanuricAcid.at(-1)!, context),
     hardness: hardnessPrice(water.calciumHardness.at(-1)!, context),
-    pH: pHPrice(first, water.pH, water.totalAlkalinity.at(-1)!, context),
+    pH:
+      pHDriftPrice(context.start.water, median.endPH, water.totalAlkalinity.at(-1)!, context) +
+      pHOutsidePrice(water.pH, context),
   };
   return { ...cost, total: Object.values(cost).reduce((sum, each) => sum + each, 0) };
 }
@@ -182,20 +183,15 @@ export function hardnessPrice(to: number, { scenario, undosed }: Pick<PlanContex
   return rise * each * awayFrom(surfaceRanges[pool.surface].calciumHardness, Math.max(to, fill));
 }
 
-/** Bringing pH and alkalinity back, as far as they were led away from where they are kept; and hours out of range. */
-export function pHPrice(
-  first: { pH: number; totalAlkalinity: number },
-  pH: ArrayLike<number>,
-  endAlkalinity: number,
-  context: Pick<PlanContext, 'scenario' | 'swimHour' | 'undosed'>,
-): number {
+/** The hours in which pH is out of its range. */
+export function pHOutsidePrice(pH: ArrayLike<number>, { swimHour }: Pick<PlanContext, 'swimHour'>): number {
   let outside = 0;
   for (let hour = 0; hour < pH.length; hour++) {
     const by = Math.max(limits.pHRangeLow.value - pH[hour]!, pH[hour]! - limits.pHRangeHigh.value, 0);
     outside += (by / 0.1) * weights.pHOutside;
-    if (by > 0 && context.swimHour[hour]) outside += weights.closedSwimHour;
+    if (by > 0 && swimHour[hour]) outside += weights.closedSwimHour;
   }
-  return pHDriftPrice(first, pH[pH.length - 1]!, endAlkalinity, context) + outside;
+  return outside;
 }
 
 /** From here on water holds its pH [mg/L as CaCO3]: the low end of what codes call ideal. */

@@ -5,7 +5,7 @@ import type { PlanContext, Undosed } from './context';
 import { type Choice, type Draft, sumOf } from './draft';
 import type { FastOption } from './products';
 import { reckonOn, type RiskBounds, startOf } from './quick-course';
-import { hourOf, quickWeek } from './quick-week';
+import { hourOf, type QuickWeek, quickWeek } from './quick-week';
 import { remember } from './remember';
 import type { SideEffects } from './side-effects';
 import { weights } from './weights';
@@ -13,19 +13,8 @@ import { weights } from './weights';
 /** What quick levels are off by, laid out like them. */
 export type Correction = Float64Array;
 
-export type QuickRisk = {
-  /**
-   * Weighted shortfall and excess of a draft; infinite as soon as they pass `most`, which saves the rest of the week. A
-   * draft that differs from the one settled on only from some evening on is reckoned from there on.
-   */
-  riskOf: (draft: Draft, most: number, correction?: Correction) => number;
-  /** Makes the draft that was asked about last, not past its `most`, the one that is settled on. */
-  settle: () => void;
-  /** Free chlorine of a draft [mg/L]: hour by hour, the members side by side. */
-  levelsOf: (draft: Draft) => Float64Array;
-};
-
-type Answers = Pick<SideEffects, 'pHMovedBy' | 'stabilizerOf'> & {
+type Answers = {
+  effects: SideEffects;
   /** Free chlorine that one measure adds on each evening [mg/L]. */
   measureRises: (fast: FastOption) => readonly number[];
   /** Lowest level at each hour with the tablets of a draft [mg/L]. */
@@ -43,16 +32,116 @@ type Reckoned = {
 /**
  * Risk of drafts by the quick week. What hangs on the tablets alone is reckoned once for each loading of them, what they
  * release once for each choice of evenings on which the pump runs longer; amounts then cost one pass through the week.
+ *
+ * A class, since V8 compiles a method once and a closure anew in every plan.
  */
-export function quickRisk(
-  context: PlanContext,
+export class QuickRisk {
+  private readonly quick: QuickWeek;
+  private readonly members: number;
+  private readonly hours: readonly number[];
+  private readonly loadingOf: (draft: Draft) => Loading;
+  private readonly rises = new Float64Array(HOURS_IN_PLAN + 1);
+  private settled: Reckoned;
+  private asked: Reckoned;
+  private from = 0;
+  private loading: Loading | null = null;
+  private loaded: readonly number[] | null = null;
+
+  constructor(
+    context: PlanContext,
+    choice: Choice,
+    members: readonly Undosed[],
+    private readonly answers: Answers,
+  ) {
+    this.quick = quickWeek(context, members);
+    this.members = members.length;
+    this.hours = choice.evenings.map(({ at }) => hourOf(at, context.forcing));
+    this.loadingOf = loadings(context, choice, this.quick, this.hours, answers);
+    this.settled = newReckoned(members.length);
+    this.asked = newReckoned(members.length);
+  }
+
+  /**
+   * Weighted shortfall and excess of a draft; infinite as soon as they pass `most`, which saves the rest of the week. A
+   * draft that differs from the one settled on only from some evening on is reckoned from there on.
+   */
+  riskOf(draft: Draft, most: number, correction?: Correction): number {
+    if (this.loaded !== draft.tablets) [this.loading, this.loaded] = [this.loadingOf(draft), draft.tablets];
+    const { bounds, sheltered, sourceOf } = this.loading!;
+    const { levels, risks } = this.asked;
+    const { frame } = this.quick;
+    this.putRises(draft);
+    this.asked.draft = null;
+    this.asked.correction = correction;
+    const from = this.differsFrom(draft, correction);
+    this.from = from;
+    const first = from * this.members;
+    const week = {
+      rises: this.rises,
+      source: sourceOf(draft.measures),
+      pH: this.answers.effects.pHMovedBy(draft, from),
+      sheltered,
+    };
+    if (from === 0) startOf(frame, this.rises[0]!, levels);
+    else levels.set(this.settled.levels.subarray(first, first + this.members), first);
+    risks[from] = from === 0 ? 0 : this.settled.risks[from]!;
+    const risk = reckonOn(frame, week, bounds, correction ?? null, from, levels, risks, most);
+    if (risk > most) return Infinity;
+    this.asked.draft = draft;
+    return risk;
+  }
+
+  /** Makes the draft that was asked about last, not past its `most`, the one that is settled on. */
+  settle(): void {
+    const { asked, settled, from } = this;
+    if (!asked.draft) return;
+    asked.levels.set(settled.levels.subarray(0, from * this.members));
+    asked.risks.set(settled.risks.subarray(0, from));
+    this.settled = asked;
+    this.asked = settled;
+  }
+
+  /** Free chlorine of a draft [mg/L]: hour by hour, the members side by side. */
+  levelsOf(draft: Draft): Float64Array {
+    const { bounds, sheltered, sourceOf } = this.loadingOf(draft);
+    const { levels, risks } = newReckoned(this.members);
+    this.putRises(draft);
+    startOf(this.quick.frame, this.rises[0]!, levels);
+    const pH = this.answers.effects.pHMovedBy(draft, 0);
+    const week = { rises: this.rises, source: sourceOf(draft.measures), pH, sheltered };
+    reckonOn(this.quick.frame, week, bounds, null, 0, levels, risks, Infinity);
+    return levels;
+  }
+
+  private putRises({ fast, measures }: Draft): void {
+    const { rises, hours } = this;
+    rises.fill(0);
+    if (!fast) return;
+    const each = this.answers.measureRises(fast);
+    for (let evening = 0; evening < hours.length; evening++)
+      rises[hours[evening]!]! += measures[evening]! * each[evening]!;
+  }
+
+  /** From which hour on a draft may differ from the one settled on. */
+  private differsFrom({ tablets, fast, measures }: Draft, correction?: Correction): number {
+    const { draft: before } = this.settled;
+    if (!before || this.settled.correction !== correction) return 0;
+    if (before.fast !== fast || !same(before.tablets, tablets)) return 0;
+    let evening = 0;
+    while (evening < measures.length && measures[evening] === before.measures[evening]) evening++;
+    // A dose between two hours already moves the pump in the hour before the one at which it shows.
+    return evening === measures.length ? HOURS_IN_PLAN : Math.max(0, this.hours[evening]! - 1);
+  }
+}
+
+/** What hangs on the tablets of a draft, reckoned once for each loading of them. */
+function loadings(
+  { forcing, given, scenario, start, swimHour, swimCeiling }: PlanContext,
   { evenings, tablets }: Choice,
-  members: readonly Undosed[],
-  { measureRises, lowestOf, pHMovedBy, stabilizerOf }: Answers,
-): QuickRisk {
-  const { forcing, given, scenario, start } = context;
-  const quick = quickWeek(context, members);
-  const hours = evenings.map(({ at }) => hourOf(at, forcing));
+  quick: QuickWeek,
+  hours: readonly number[],
+  { lowestOf, effects }: Answers,
+): (draft: Draft) => Loading {
   const pump = pumpShares(forcing, given);
   const pumpedOn = evenings.map(({ at }) => {
     const small = weekDose(at, { substance: 'sodium-hypochlorite', amount: 1 }, scenario.pool.volume);
@@ -60,7 +149,7 @@ export function quickRisk(
   });
   const inFeeder = start.loads.length > 0 || given.some(({ kind }) => kind === 'tablets');
 
-  const closed = Float64Array.from(context.swimHour, (swims) => (swims ? weights.closedSwimHour : 0));
+  const closed = Float64Array.from(swimHour, (swims) => (swims ? weights.closedSwimHour : 0));
   const pumpOn = remember((dosed: number) => {
     const shares = pump.slice();
     pumpedOn.forEach((differs, evening) => {
@@ -76,97 +165,30 @@ export function quickRisk(
       return quick.releaseOf({ load, from: hours[evening]! }, pumpOn(dosed));
     }),
   );
-  const loadingOf = remember(
+  return remember(
     (draft: Draft): Loading => {
-      const count = sumOf(draft.tablets);
       const sourceOf = remember((dosed: number) => {
         // What was in the feeder before hangs on the pump; without any, one source does for all.
         const source = sourceWithout(inFeeder ? dosed : 0).slice();
         draft.tablets.forEach((each, evening) => {
-          if (each === 0) return;
-          const release = releases[evening]!(dosed);
-          for (let at = 0; at < source.length; at++) source[at]! += each * release[at]!;
+          if (each > 0) addTimes(source, releases[evening]!(dosed), each);
         });
         return source;
       });
       // Without tablets nothing hangs on the pump.
-      const hangsOnPump = count > 0 || inFeeder;
+      const hangsOnPump = sumOf(draft.tablets) > 0 || inFeeder;
       return {
-        sheltered: quick.shelteredBy(stabilizerOf(draft)),
-        bounds: { lowest: lowestOf(draft), ceiling: context.swimCeiling, closed },
+        sheltered: quick.shelteredBy(effects.stabilizerOf(draft)),
+        bounds: { lowest: lowestOf(draft), ceiling: swimCeiling, closed },
         sourceOf: (measures) => sourceOf(hangsOnPump ? dosedOn(measures) : 0),
       };
     },
     ({ tablets: counts }) => counts.join(),
   );
+}
 
-  const rises = new Float64Array(HOURS_IN_PLAN + 1);
-  const putRises = ({ fast, measures }: Draft) => {
-    rises.fill(0);
-    if (!fast) return;
-    const each = measureRises(fast);
-    for (let evening = 0; evening < hours.length; evening++)
-      rises[hours[evening]!]! += measures[evening]! * each[evening]!;
-  };
-  let settled = newReckoned(members.length);
-  let asked = newReckoned(members.length);
-  let from = 0;
-  let loading: Loading | null = null;
-  let loaded: readonly number[] | null = null;
-
-  /** From which hour on a draft may differ from the one settled on. */
-  const differsFrom = (draft: Draft, correction?: Correction): number => {
-    const { draft: before } = settled;
-    if (!before || settled.correction !== correction) return 0;
-    if (before.fast !== draft.fast || !same(before.tablets, draft.tablets)) return 0;
-    const evening = draft.measures.findIndex((count, each) => count !== before.measures[each]);
-    // A dose between two hours already moves the pump in the hour before the one at which it shows.
-    return evening < 0 ? HOURS_IN_PLAN : Math.max(0, hours[evening]! - 1);
-  };
-
-  return {
-    riskOf: (draft, most, correction) => {
-      if (loaded !== draft.tablets) [loading, loaded] = [loadingOf(draft), draft.tablets];
-      const { bounds, sheltered, sourceOf } = loading!;
-      const { levels, risks } = asked;
-      putRises(draft);
-      asked.draft = null;
-      asked.correction = correction;
-      from = differsFrom(draft, correction);
-      const first = from * members.length;
-      const week = { rises, source: sourceOf(draft.measures), pH: pHMovedBy(draft, from), sheltered };
-      if (from === 0) startOf(quick.frame, rises[0]!, levels);
-      else levels.set(settled.levels.subarray(first, first + members.length), first);
-      risks[from] = from === 0 ? 0 : settled.risks[from]!;
-      const risk = reckonOn(quick.frame, week, bounds, correction ?? null, from, levels, risks, most);
-      if (risk > most) return Infinity;
-      asked.draft = draft;
-      return risk;
-    },
-    settle: () => {
-      if (!asked.draft) return;
-      asked.levels.set(settled.levels.subarray(0, from * members.length));
-      asked.risks.set(settled.risks.subarray(0, from));
-      [settled, asked] = [asked, settled];
-    },
-    levelsOf: (draft) => {
-      const { bounds, sheltered, sourceOf } = loadingOf(draft);
-      const { levels, risks } = newReckoned(members.length);
-      putRises(draft);
-      startOf(quick.frame, rises[0]!, levels);
-      reckonOn(
-        quick.frame,
-        { rises, source: sourceOf(draft.measures), pH: pHMovedBy(draft, 0), sheltered },
-        bounds,
-        null,
-        0,
-        levels,
-        risks,
-        Infinity,
-      );
-      return levels;
-    },
-  };
+function addTimes(sum: Float64Array, each: Float64Array, times: number): void {
+  for (let at = 0; at < sum.length; at++) sum[at]! += times * each[at]!;
 }
 
 /** What hangs on the tablets of a draft. */

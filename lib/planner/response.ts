@@ -9,16 +9,16 @@ import {
   levelsOf,
   moneyOf,
   pHDriftPrice,
-  pHPrice,
+  pHOutsidePrice,
   stabilizedIn,
   stabilizerPrice,
   troubleOf,
 } from './cost';
 import { type Choice, type Draft, sumOf } from './draft';
 import { type FastOption, riseOfFast } from './products';
-import { type Correction, type QuickRisk, quickRisk } from './quick-risk';
+import { type Correction, QuickRisk } from './quick-risk';
 import { remember } from './remember';
-import { sideEffectsOf } from './side-effects';
+import { SideEffects } from './side-effects';
 
 /** What a draft costs by a quick model; infinite as soon as that is known to be more than `most`. */
 export type QuickCost = {
@@ -47,12 +47,12 @@ export type Response = {
  */
 export function responseOf(context: PlanContext, choice: Choice): Response {
   const { scenario, undosed } = context;
-  const { pool, preferences } = scenario;
+  const { pool } = scenario;
   const { evenings } = choice;
   const measureRises = remember((fast: FastOption) =>
     evenings.map(({ at }) => riseOfFast(fast, fast.measure, at, pool.volume)),
   );
-  const effects = sideEffectsOf(context, choice, measureRises);
+  const effects = new SideEffects(context, choice, measureRises);
   const stabilizer = undosed.hourly.cyanurate.map((cyanurate) => cyanurate * CYANURIC_ACID_MILLIGRAMS_PER_MOLE);
   const lowestOf = (draft: Draft) => {
     const moves = effects.stabilizerOf(draft);
@@ -62,37 +62,12 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
   const measureHardness = remember((fast: FastOption) => hardnessOf(fast, evenings[0]?.at ?? 0, pool.volume));
   const hardnessWithout = undosed.end.calcium * HARDNESS_MILLIGRAMS_PER_MOLE;
 
-  const pHOf = (draft: Draft) => {
-    const moves = effects.pHMovedBy(draft, 0);
-    return undosed.pH.map((value, hour) => value + moves[hour]!);
-  };
-  /** All that a draft costs beside risk. */
-  const pricesOf = (draft: Draft): number => {
-    const end = effects.endOf(draft);
-    const { water } = context.start;
-    const pHStays = end.low >= limits.pHRangeLow.value && end.high <= limits.pHRangeHigh.value;
-    return (
-      preferences.money * moneyOf(draft, choice) +
-      preferences.evenings * troubleOf(draft) +
-      stabilizerPrice(end.cyanuricAcid, context) +
-      hardnessPrice(hardnessWithout + (draft.fast ? sumOf(draft.measures) * measureHardness(draft.fast) : 0), context) +
-      (pHStays
-        ? pHDriftPrice(water, end.pH, end.totalAlkalinity, context)
-        : pHPrice(water, pHOf(draft), end.totalAlkalinity, context))
-    );
-  };
-  const costBy = ({ riskOf, settle }: QuickRisk, correction?: Correction, offset = 0): QuickCost => ({
-    settle,
-    of: (draft, most = Infinity) => {
-      const prices = pricesOf(draft) + offset;
-      if (prices > most) return Infinity;
-      const { steadiness } = preferences;
-      return steadiness === 0 ? prices : prices + steadiness * riskOf(draft, (most - prices) / steadiness, correction);
-    },
-  });
+  const prices = { context, choice, effects, measureHardness, hardnessWithout };
+  const costBy = (risk: QuickRisk, correction?: Correction, offset?: number) =>
+    new CostByRisk(prices, risk, correction, offset);
   const riskOver = (members: PlanContext['quickMembers']) =>
-    quickRisk(context, choice, [{ member: context.median, undosed }, ...members], {
-      ...effects,
+    new QuickRisk(context, choice, [{ member: context.median, undosed }, ...members], {
+      effects,
       measureRises,
       lowestOf,
     });
@@ -106,7 +81,7 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
       const levels = all.levelsOf(draft);
       const gaps = middleOverMedian(levels, columns);
       const lowest = lowestOf(draft);
-      const pH = pHOf(draft);
+      const pH = pHOf(draft, prices);
       const open = context.swimHour.map((swims, hour) => {
         const level = levels[hour * columns]! + gaps[hour]!;
         const chlorineFits = level >= lowest[hour]! && level <= context.swimCeiling[hour]!;
@@ -135,6 +110,58 @@ export function responseOf(context: PlanContext, choice: Choice): Response {
       return costBy(all, correction, cost.total - costBy(all, correction).of(draft));
     },
   };
+}
+
+/** What the prices of drafts hang on. */
+type Prices = {
+  context: PlanContext;
+  choice: Choice;
+  effects: SideEffects;
+  measureHardness: (fast: FastOption) => number;
+  hardnessWithout: number;
+};
+
+/** Prices and risk of a draft. A class, since V8 compiles a method once and a closure anew in every plan. */
+class CostByRisk implements QuickCost {
+  constructor(
+    private readonly prices: Prices,
+    private readonly risk: QuickRisk,
+    private readonly correction?: Correction,
+    private readonly offset = 0,
+  ) {}
+
+  of(draft: Draft, most = Infinity): number {
+    const { steadiness } = this.prices.context.scenario.preferences;
+    const prices = pricesOf(draft, most - this.offset, this.prices) + this.offset;
+    if (prices > most) return Infinity;
+    if (steadiness === 0) return prices;
+    return prices + steadiness * this.risk.riskOf(draft, (most - prices) / steadiness, this.correction);
+  }
+
+  settle(): void {
+    this.risk.settle();
+  }
+}
+
+/** All that a draft costs beside risk, or all but the hours in which pH is out of range when that is past `most`. */
+function pricesOf(draft: Draft, most: number, parts: Prices): number {
+  const { context, choice, effects, measureHardness, hardnessWithout } = parts;
+  const { preferences } = context.scenario;
+  const end = effects.endOf(draft);
+  const prices =
+    preferences.money * moneyOf(draft, choice) +
+    preferences.evenings * troubleOf(draft) +
+    stabilizerPrice(end.cyanuricAcid, context) +
+    hardnessPrice(hardnessWithout + (draft.fast ? sumOf(draft.measures) * measureHardness(draft.fast) : 0), context) +
+    pHDriftPrice(context.start.water, end.pH, end.totalAlkalinity, context);
+  const pHStays = end.low >= limits.pHRangeLow.value && end.high <= limits.pHRangeHigh.value;
+  return pHStays || prices > most ? prices : prices + pHOutsidePrice(pHOf(draft, parts), context);
+}
+
+/** The median's pH with a draft, by hour. */
+function pHOf(draft: Draft, { context: { undosed }, effects }: Prices): Float64Array {
+  const moves = effects.pHMovedBy(draft, 0);
+  return undosed.pH.map((value, hour) => value + moves[hour]!);
 }
 
 function count(hours: readonly boolean[]): number {

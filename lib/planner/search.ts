@@ -14,7 +14,7 @@ const TRIAL_MEMBERS = 8;
  * over the whole ensemble when the trial, corrected likewise, says no more than this.
  */
 const WORTH_A_TRIAL = 1.04;
-const WORTH_IT_IN_FULL = 1.003;
+const WORTH_IT_IN_FULL = 0.998;
 const IMPROVEMENT = 1e-6;
 
 /**

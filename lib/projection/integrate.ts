@@ -67,8 +67,8 @@ export function integrateWeek(
 ): Course {
   const { parameters, depth } = setting;
   const { stepsPerHour } = forcing;
-  const ledger = { ...start.ledger };
-  const half = { ...start.ledger };
+  const ledger = workingCopy(start.ledger);
+  const half = workingCopy(start.ledger);
   const body = { depth, light: lightThroughDepth(depth) };
   const loads = start.loads.map((load) => ({ ...load }));
   const account = { dosed: 0, released: 0, usedUp: 0, combined: 0, carriedOut: 0 };
@@ -155,16 +155,17 @@ const ROWS = 10;
 function newRows(hours: number): { hourly: LedgerSeries; pH: Float64Array } {
   const block = new ArrayBuffer(ROWS * hours * Float64Array.BYTES_PER_ELEMENT);
   return {
+    // Not in a ledger's own order: V8 would give rows and numbers one hidden class, and box each number of every ledger.
     hourly: {
-      freeChlorine: rowOf(block, 0, hours),
-      combinedChlorine: rowOf(block, 1, hours),
-      cyanurate: rowOf(block, 2, hours),
-      alkalinity: rowOf(block, 3, hours),
-      inorganicCarbon: rowOf(block, 4, hours),
-      calcium: rowOf(block, 5, hours),
-      borate: rowOf(block, 6, hours),
-      dissolvedSolids: rowOf(block, 7, hours),
       temperature: rowOf(block, 8, hours),
+      dissolvedSolids: rowOf(block, 7, hours),
+      borate: rowOf(block, 6, hours),
+      calcium: rowOf(block, 5, hours),
+      inorganicCarbon: rowOf(block, 4, hours),
+      alkalinity: rowOf(block, 3, hours),
+      cyanurate: rowOf(block, 2, hours),
+      combinedChlorine: rowOf(block, 1, hours),
+      freeChlorine: rowOf(block, 0, hours),
     },
     pH: rowOf(block, 9, hours),
   };
@@ -243,6 +244,21 @@ function advance(
   // The next solve starts from where the water was heading: one step of it then does.
   state.pH += heading.pH * hours;
   state.hypochlorousAcid = Math.max(0, state.hypochlorousAcid + heading.hypochlorousAcid * hours);
+}
+
+/** A ledger to move on; written out, so that all of them are of one hidden class. */
+function workingCopy(ledger: Ledger): Ledger {
+  return {
+    freeChlorine: ledger.freeChlorine,
+    combinedChlorine: ledger.combinedChlorine,
+    cyanurate: ledger.cyanurate,
+    alkalinity: ledger.alkalinity,
+    inorganicCarbon: ledger.inorganicCarbon,
+    calcium: ledger.calcium,
+    borate: ledger.borate,
+    dissolvedSolids: ledger.dissolvedSolids,
+    temperature: ledger.temperature,
+  };
 }
 
 function copyLedger(from: Ledger, to: Ledger): void {

@@ -3,6 +3,10 @@ import type { Piece } from './piece';
 const RUNS = 7;
 /** Long enough for the clock, and for the machine's other work to spread evenly over a run [ms]. */
 const LEAST_MILLISECONDS = 30;
+/** And over so many inputs, whatever one takes. */
+const LEAST_PASSES = 3;
+/** The compiler has seen enough of a piece after so many passes, if they are long. */
+const WARM_PASSES = 9;
 
 /** A long run stands between longer stretches of the loop, one loop for so much of it [ms], up to so many. */
 const MILLISECONDS_PER_LOOP = 100;
@@ -48,9 +52,10 @@ export function costOf({ run }: Piece): Cost {
 /** Runs until the compiler has done its work; tells how many passes make a run long enough, and how long it then is [ms]. */
 function warmUp(run: Piece['run']): { passes: number; took: number } {
   timed(referenceLoop.run, 2);
-  let last = 0;
-  for (let spent = 0; spent < 10 * LEAST_MILLISECONDS; spent += last + 0.01) last = timed(run, 1);
-  let passes = 1;
+  for (let spent = 0, seen = 0; spent < 10 * LEAST_MILLISECONDS || seen < WARM_PASSES; seen += LEAST_PASSES)
+    spent += timed(run, LEAST_PASSES) + 0.01;
+  let passes = LEAST_PASSES;
+  let last = timed(run, passes);
   for (; last < LEAST_MILLISECONDS; last = timed(run, passes)) passes *= 2;
   return { passes, took: last };
 }

@@ -52,4 +52,7 @@ export async function runStep(program, args, reason, options) {
 /** Lets Node.js read TypeScript, from whatever folder the command was given. */
 export const typescriptLoader = ['--import', pathToFileURL(inRoot('node_modules/tsx/dist/loader.mjs')).href];
 
+/** As much room for what a plan leaves behind as the engine's thread has (lib/engine-worker/shared-engine.ts). */
+export const roomOfTheEngine = ['--max-semi-space-size=32'];
+
 export const typescriptEnvironment = { TSX_TSCONFIG_PATH: inRoot('tsconfig.json') };

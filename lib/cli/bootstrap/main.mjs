@@ -1,7 +1,7 @@
 import { existsSync } from 'node:fs';
 import { constants } from 'node:os';
 import { buildIfStale } from './build.mjs';
-import { runNode, typescriptEnvironment, typescriptLoader } from './child.mjs';
+import { roomOfTheEngine, runNode, typescriptEnvironment, typescriptLoader } from './child.mjs';
 import { ensureChromium } from './chromium.mjs';
 import { ensureDependencies } from './dependencies.mjs';
 import { withLock } from './lock.mjs';
@@ -48,7 +48,7 @@ async function plan(args) {
 
 async function bench(args) {
   await ensureDependencies();
-  return runTypescript('tests/bench/run.ts', args);
+  return runTypescript('tests/bench/run.ts', args, { node: roomOfTheEngine });
 }
 
 /** Plants faults in copies of the tree: each has to turn a test red. */
@@ -65,9 +65,9 @@ async function shots(args) {
   return runTypescript('lib/cli/shots.ts', args, { env: { CHROMIUM_PATH, NEXT_DIST_DIR: testFolder } });
 }
 
-async function runTypescript(file, args, { cwd, env } = {}) {
+async function runTypescript(file, args, { cwd, env, node = [] } = {}) {
   if (!existsSync(inRoot(file))) throw new Refusal(`${file} is missing from this copy of the project.`);
-  const { code } = await runNode([...typescriptLoader, inRoot(file), ...args], {
+  const { code } = await runNode([...node, ...typescriptLoader, inRoot(file), ...args], {
     cwd,
     env: { ...process.env, ...typescriptEnvironment, ...env },
   });

@@ -1,7 +1,7 @@
 import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { nextProgram } from './build.mjs';
-import { typescriptEnvironment, typescriptLoader } from './child.mjs';
+import { roomOfTheEngine, typescriptEnvironment, typescriptLoader } from './child.mjs';
 import { countBenchmarks, countEndToEnd, countVitest, oneCheck } from './counting.mjs';
 import { inRoot, testFolder, workFolder } from './place.mjs';
 
@@ -116,7 +116,7 @@ export const build = {
 export const benchmarks = {
   name: 'benchmarks',
   minutes: 5,
-  programs: [[...typescriptLoader, inRoot('tests/bench/run.ts'), '--check']],
+  programs: [[...roomOfTheEngine, ...typescriptLoader, inRoot('tests/bench/run.ts'), '--check']],
   env: typescriptEnvironment,
   count: countBenchmarks,
 };

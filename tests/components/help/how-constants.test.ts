@@ -167,7 +167,7 @@ const arithmetic: Record<string, string> = {
   'planner/context#spread': 'how a search goes',
   'planner/cost#stabilizerPrice': 'what the model lets in',
   'planner/cost#hardnessPrice': 'what the model lets in',
-  'planner/cost#pHPrice': 'a unit',
+  'planner/cost#pHOutsidePrice': 'a unit',
   'planner/cost#pHDriftPrice': 'units of the weights',
   'planner/draft#measuresToBuy': 'rounding',
   'planner/evenings#QUARTER_HOUR': 'a unit',
