@@ -2,86 +2,122 @@ import { type Choice, type Draft, sumOf, visitsOf } from './draft';
 import type { FastOption } from './products';
 import type { QuickCost } from './response';
 
-/** One way to change a draft; the same draft when it does not apply. */
-export type Move = (draft: Draft) => Draft;
+/** One way to change a draft. Data, not a closure, which V8 would compile anew in every plan. */
+export type Move =
+  /** More or fewer measures on an evening; so many on one that has none; none on one that has some. */
+  | { kind: 'more'; evening: number; by: number }
+  | { kind: 'begin'; evening: number; measures: number }
+  | { kind: 'empty'; evening: number }
+  /** A whole dose to a free evening; one step of it to another dose, or half of it to a free evening. */
+  | { kind: 'shift'; from: number; to: number }
+  | { kind: 'share'; from: number; to: number; step: number }
+  /** More or fewer tablets on an evening; a whole loading to a free evening; one tablet to any; one for a fast dose. */
+  | { kind: 'load'; evening: number; by: number }
+  | { kind: 'shift-tablets'; from: number; to: number }
+  | { kind: 'share-tablets'; from: number; to: number }
+  | { kind: 'tablet-for-dose'; evening: number };
 
 /** Less than a tenth of a hundredth of the currency is no improvement. */
 const IMPROVEMENT = 1e-3;
 /** An evening's cap is divided into at most so many steps, however small the measure: an eighth of a mg/L each. */
 const STEPS_OF_A_CAP = 32;
 
-/** More or fewer measures on an evening, a dose to another evening or half of it, one measure from one dose to another. */
+/** Every way to change fast doses, whether or not a draft allows it. */
 export function fastMoves(choice: Choice, most: readonly number[]): Move[] {
   const evenings = choice.evenings.map((_, evening) => evening);
   const step = Math.max(1, Math.round(Math.max(0, ...most) / STEPS_OF_A_CAP));
   const far = Math.max(2, Math.ceil(Math.max(0, ...most) / 6));
-  const amounts = evenings.flatMap((evening) => [
-    withMeasures(evening, () => 0),
-    ...[-far, -step, step, far].map((by) => withMeasures(evening, (now) => now + by)),
-    withMeasures(evening, (now) => (now === 0 ? Math.ceil(most[evening]! / 3) : now)),
-  ]);
-  const pairs = evenings.flatMap((from) => evenings.filter((to) => to !== from).map((to) => [from, to] as const));
-  const shifts = pairs.flatMap(([from, to]): Move[] => [
-    (draft) => (draft.measures[from]! > 0 && draft.measures[to] === 0 ? carry(draft, from, to, Infinity) : draft),
-    (draft) => {
-      const [left, there] = [draft.measures[from]!, draft.measures[to]!];
-      return left > step ? carry(draft, from, to, there > 0 ? step : Math.floor(left / 2)) : draft;
-    },
-  ]);
-  return [...amounts, ...shifts];
+  return [
+    ...evenings.flatMap((evening): Move[] => [
+      { kind: 'empty', evening },
+      ...[-far, -step, step, far].map((by): Move => ({ kind: 'more', evening, by })),
+      { kind: 'begin', evening, measures: Math.ceil(most[evening]! / 3) },
+    ]),
+    ...pairsOf(evenings).flatMap(([from, to]): Move[] => [
+      { kind: 'shift', from, to },
+      { kind: 'share', from, to, step },
+    ]),
+  ];
 }
 
 /** Tablets are loaded once and at most once more. */
 const MOST_LOADINGS = 2;
 
-/** One tablet more or fewer on an evening, a loading or a tablet to another evening, tablets in place of a fast dose. */
+/** Every way to change the tablets. */
 export function tabletMoves({ evenings, tablets }: Choice): Move[] {
   if (!tablets || tablets.most === 0) return [];
   const far = Math.max(2, Math.ceil(tablets.most / 6));
   const all = evenings.map((_, evening) => evening);
-  const pairs = all.flatMap((from) => all.filter((to) => to !== from).map((to) => [from, to] as const));
   return [
-    ...all.flatMap((evening) => [-far, -1, 1, far].map((by) => withTablets(evening, (now) => now + by))),
-    ...pairs.flatMap(([from, to]): Move[] => [
-      (draft) => (draft.tablets[to] === 0 ? carryTablets(draft, from, to, Infinity) : draft),
-      (draft) => (draft.tablets[from]! > 1 ? carryTablets(draft, from, to, 1) : draft),
+    ...all.flatMap((evening) => [-far, -1, 1, far].map((by): Move => ({ kind: 'load', evening, by }))),
+    ...pairsOf(all).flatMap(([from, to]): Move[] => [
+      { kind: 'shift-tablets', from, to },
+      { kind: 'share-tablets', from, to },
     ]),
-    ...all.map((evening): Move => {
-      const load = withTablets(evening, (now) => now + 1);
-      const empty = withMeasures(evening, () => 0);
-      return (draft) => (draft.measures[evening]! > 0 ? load(empty(draft)) : draft);
-    }),
+    ...all.map((evening): Move => ({ kind: 'tablet-for-dose', evening })),
   ];
 }
 
-function withTablets(evening: number, change: (now: number) => number): Move {
-  return (draft) => ({ ...draft, tablets: changed(draft.tablets, evening, change(draft.tablets[evening]!)) });
+function pairsOf(evenings: readonly number[]) {
+  return evenings.flatMap((from) => evenings.filter((to) => to !== from).map((to) => [from, to] as const));
 }
 
-function carryTablets(draft: Draft, from: number, to: number, count: number): Draft {
-  return draft.tablets[from] === 0 ? draft : { ...draft, tablets: carried(draft.tablets, from, to, count) };
+/** A draft after a move; the same draft when the move does not apply to it. */
+function after(draft: Draft, move: Move): Draft {
+  const { tablets, measures } = draft;
+  switch (move.kind) {
+    case 'more':
+      return { ...draft, measures: changed(measures, move.evening, measures[move.evening]! + move.by) };
+    case 'begin':
+      return measures[move.evening] === 0
+        ? { ...draft, measures: changed(measures, move.evening, move.measures) }
+        : draft;
+    case 'empty':
+      return measures[move.evening]! > 0 ? { ...draft, measures: changed(measures, move.evening, 0) } : draft;
+    case 'shift':
+      return measures[move.from]! > 0 && measures[move.to] === 0
+        ? { ...draft, measures: carried(measures, move.from, move.to, Infinity) }
+        : draft;
+    case 'share': {
+      const [left, there] = [measures[move.from]!, measures[move.to]!];
+      if (left <= move.step) return draft;
+      return {
+        ...draft,
+        measures: carried(measures, move.from, move.to, there > 0 ? move.step : Math.floor(left / 2)),
+      };
+    }
+    case 'load':
+      return { ...draft, tablets: changed(tablets, move.evening, tablets[move.evening]! + move.by) };
+    case 'shift-tablets':
+      return tablets[move.from]! > 0 && tablets[move.to] === 0
+        ? { ...draft, tablets: carried(tablets, move.from, move.to, Infinity) }
+        : draft;
+    case 'share-tablets':
+      return tablets[move.from]! > 1 ? { ...draft, tablets: carried(tablets, move.from, move.to, 1) } : draft;
+    case 'tablet-for-dose':
+      return measures[move.evening]! > 0
+        ? {
+            ...draft,
+            tablets: changed(tablets, move.evening, tablets[move.evening]! + 1),
+            measures: changed(measures, move.evening, 0),
+          }
+        : draft;
+  }
 }
 
 function changed(counts: readonly number[], evening: number, count: number): number[] {
-  return counts.map((each, index) => (index === evening ? count : each));
+  const next = counts.slice();
+  next[evening] = count;
+  return next;
 }
 
 /** Up to so many from one evening to another. */
 function carried(counts: readonly number[], from: number, to: number, count: number): number[] {
   const moved = Math.min(count, counts[from]!);
-  return counts.map((each, evening) => each + (evening === from ? -moved : evening === to ? moved : 0));
-}
-
-function withMeasures(evening: number, change: (now: number) => number): Move {
-  return (draft) => {
-    const now = draft.measures[evening]!;
-    const then = change(now);
-    return then === now ? draft : { ...draft, measures: changed(draft.measures, evening, then) };
-  };
-}
-
-function carry(draft: Draft, from: number, to: number, count: number): Draft {
-  return { ...draft, measures: carried(draft.measures, from, to, count) };
+  const next = counts.slice();
+  next[from]! -= moved;
+  next[to]! += moved;
+  return next;
 }
 
 /** Most measures on each evening under the evening's cap. */
@@ -113,7 +149,7 @@ export function descend(
   let least = cost.of(start);
   cost.settle();
   for (let still = 0, next = 0; still < moves.length; still++, next = (next + 1) % moves.length) {
-    const draft = moves[next]!(best);
+    const draft = after(best, moves[next]!);
     if (draft === best || !fits(draft)) continue;
     const total = cost.of(draft, least - IMPROVEMENT);
     if (total >= least - IMPROVEMENT) continue;
