@@ -13,7 +13,11 @@ const ratiosFile = join(import.meta.dirname, 'ratios.json');
 const TRIES = 3;
 
 const { values: asked } = parseArgs({
-  options: { check: { type: 'boolean', default: false }, keep: { type: 'boolean', default: false } },
+  options: {
+    check: { type: 'boolean', default: false },
+    keep: { type: 'boolean', default: false },
+    browser: { type: 'boolean', default: false },
+  },
 });
 
 const pieces = [...chemistryPieces, ...weekPieces, ...learningPieces];
@@ -29,6 +33,7 @@ for (const piece of pieces) {
     `${piece.name.padEnd(52)}${inWords(cost.milliseconds).padStart(9)}  ${times(cost.multiple)} x the loop  ${target}`,
   );
 }
+if (asked.browser) await browse();
 if (asked.keep) keep(ratios);
 if (asked.check) check(ratios);
 
@@ -50,6 +55,19 @@ function steadyCost(piece: Piece): Cost {
 function keep(measured: Ratios): void {
   const rounded = Object.entries(measured).map(([name, multiple]) => [name, Number(multiple.toPrecision(3))]);
   writeFileSync(ratiosFile, `${JSON.stringify(Object.fromEntries(rounded), null, 2)}\n`);
+}
+
+/** A what-if in Chromium; beside the loop's time there is no multiple of it, the page has a clock of its own. */
+async function browse(): Promise<void> {
+  const { timeInChromium } = await import('./what-if/in-chromium');
+  const { median, band, kilobytes } = await timeInChromium();
+  const line = (name: string, { first, after }: { first: number; after: number }, target: number) =>
+    console.log(
+      `${name.padEnd(52)}${inWords(after).padStart(9)}  first time ${inWords(first)}  target ${inWords(target)}`,
+    );
+  line('what-if in Chromium, the median on the page', median, 16);
+  line('what-if in Chromium, the band in a worker', band, 100);
+  console.log(`engine for it: ${kilobytes.toFixed(0)} kB minified`);
 }
 
 /** The last line is read by the suite. */
