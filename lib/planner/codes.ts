@@ -53,6 +53,7 @@ export const reasonCodes = [
   'no-tablets-pH-low',
   'no-tablets-feeder',
   'no-tablets-on-shelf',
+  'no-tablets-avoided',
   'no-tablets-week-full',
   'no-tablets-feeder-full',
   'no-tablets-better-without',

@@ -82,14 +82,11 @@ function tabletOption(
   caution: Caution,
 ): TabletOption | Exclude<Options['noTablets'], null> {
   const { pool, shelf, preferences } = scenario;
-  const product = shelf.find(
-    (each) =>
-      each.form === 'tablet' &&
-      each.substance === 'trichlor' &&
-      each.stock >= tabletFacts(each).tabletMass &&
-      !avoided(each, preferences.avoid),
+  const held = shelf.filter(
+    (each) => each.form === 'tablet' && each.substance === 'trichlor' && each.stock >= tabletFacts(each).tabletMass,
   );
-  if (!product) return 'no-tablets-on-shelf';
+  const product = held.find((each) => !avoided(each, preferences.avoid));
+  if (!product) return held.length > 0 ? 'no-tablets-avoided' : 'no-tablets-on-shelf';
   if (pool.feeder.kind === 'none') return 'no-tablets-feeder';
   if (pool.feeder.ingredient !== 'trichlor') {
     caution('feeder-ingredient-other', { product: product.id });

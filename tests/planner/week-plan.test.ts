@@ -263,6 +263,7 @@ describe('why no tablets', () => {
     ],
     ['no-tablets-feeder', { pool: { feeder: { kind: 'none' } } }],
     ['no-tablets-on-shelf', { shelf: [products.gran] }],
+    ['no-tablets-avoided', { preferences: { avoid: ['tablet'] } }],
     ['no-tablets-stabilizer-high', { reading: { cyanuricAcid: 88 } }],
   ])('%s', (code, changes: Changes) => {
     const plan = planWeek(scenarioOf(changes));
