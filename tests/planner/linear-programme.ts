@@ -1,3 +1,4 @@
+import type { Highs } from 'highs';
 import type { PlanContext } from '@/lib/planner/context';
 import { type Choice, type Draft, tabletDose } from '@/lib/planner/draft';
 import { mostMeasures } from '@/lib/planner/moves';
@@ -21,7 +22,7 @@ type Answers = { without: Float64Array; to: Float64Array[] };
  * tablet and a measure on each evening add, measured by one projection each; whole tablets and measures; visits; shortfall,
  * excess and closed swim hours at every fourth hour, for the median and a few of the ensemble. Side effects cost nothing.
  */
-export function linearProgramme(context: PlanContext, { evenings, visits, tablets }: Choice, fast: FastOption): string {
+function linearProgramme(context: PlanContext, { evenings, visits, tablets }: Choice, fast: FastOption): string {
   const { scenario, forcing, given, median, swimHour, swimCeiling } = context;
   const { preferences, pool } = scenario;
   const rises = evenings.map(({ at }) => riseOfFast(fast, fast.measure, at, pool.volume));
@@ -91,8 +92,19 @@ export function linearProgramme(context: PlanContext, { evenings, visits, tablet
   ].join('\n');
 }
 
+/** Exact: no gap is left, and the same every time. */
+const exactly = { mip_rel_gap: 0, mip_abs_gap: 0, threads: 1, random_seed: 1, output_flag: false };
+
+/** The draft that solves the linear problem exactly. */
+export function solveLinearly(highs: Highs, context: PlanContext, choice: Choice, fast: FastOption): Draft {
+  const solution = highs.solve(linearProgramme(context, choice, fast), exactly);
+  if (solution.Status !== 'Optimal') throw new Error(`The linear problem is ${solution.Status}.`);
+  const columns = solution.Columns as Record<string, { Primal?: number }>;
+  return draftOf((name) => columns[name]?.Primal ?? NaN, choice, fast);
+}
+
 /** The draft that a solution stands for. */
-export function draftOf(value: (name: string) => number, { evenings }: Choice, fast: FastOption): Draft {
+function draftOf(value: (name: string) => number, { evenings }: Choice, fast: FastOption): Draft {
   const whole = (letter: string) => evenings.map((_, evening) => Math.round(value(`${letter}${evening}`)));
   return { tablets: whole('t'), fast, measures: whole('x') };
 }
