@@ -5,6 +5,7 @@ import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
 import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
 import { bold } from './bold';
+import { PoolEvents } from './pool-events';
 import { useSheet } from './sheet-context';
 import { useVerdictWords } from './use-verdict-words';
 import { WaterNow } from './water-now';
@@ -21,6 +22,7 @@ export function Verdict() {
         <WaterNow>
           <Standing />
         </WaterNow>
+        <PoolEvents />
       </section>
     );
   const [first, ...others] = reasons;
@@ -46,6 +48,7 @@ export function Verdict() {
           {t(sheet.lastReading === null ? 'enterTest' : 'quickCheck')}
         </Link>
       )}
+      <PoolEvents />
     </VerdictFrame>
   );
 }

@@ -4,6 +4,7 @@ export { memberships } from './memberships';
 export { people } from './people';
 export { doseEvents, planDoses } from './plan-doses';
 export { planFailures, plans } from './plans';
+export { poolEvents } from './pool-events';
 export { pools } from './pools';
 export { posteriors } from './posteriors';
 export { preferences } from './preferences';

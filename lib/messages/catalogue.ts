@@ -1,5 +1,6 @@
 import common from './en/common.json';
 import doses from './en/doses.json';
+import events from './en/events.json';
 import firstRun from './en/first-run.json';
 import help from './en/help.json';
 import how from './en/how.json';
@@ -19,6 +20,7 @@ import week from './en/week.json';
 export const catalogue = {
   common,
   doses,
+  events,
   'first-run': firstRun,
   help,
   how,

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { bandSchema, checkSchema, factSchema, needSchema, weekPlanSchema } from './plan';
 import { planChangesSchema } from './plan-changes';
 import { planDoseSchema } from './plan-dose';
+import { poolEventSchema } from './pool-event';
 import { surfaces } from './pool';
 import { uncertainQuantities } from './posterior';
 import { recordedReadingSchema } from './reading';
@@ -97,6 +98,8 @@ export const weekSheetSchema = z.object({
   /** The newest test found more chlorine than can be left of what was recorded, and so did the one before it. */
   unrecorded: z.boolean(),
   readings: z.array(recordedReadingSchema),
+  /** What happened since the newest test, or is not over: it bears on the verdict of now. */
+  events: z.array(poolEventSchema),
   doses: z.array(planDoseSchema),
   checks: z.array(checkSchema.extend({ done: z.boolean() })),
 });

@@ -10,11 +10,20 @@ const clockTolerance = 5 * 60_000;
  * Error: `invalid-input` for a test of the future.
  */
 export function takenAtOf(claimed: string, latest: Date): string {
+  return pastInstant(claimed, latest, 'takenAt', 'A test cannot be later than now.');
+}
+
+/** When something happened, likewise. Error: `invalid-input` for what is still to come. */
+export function happenedAtOf(claimed: string, latest: Date): string {
+  return pastInstant(claimed, latest, 'happenedAt', 'What happened cannot be later than now.');
+}
+
+function pastInstant(claimed: string, latest: Date, path: string, message: string): string {
   const instant = Date.parse(claimed);
   if (instant <= latest.getTime()) return claimed;
   if (instant > latest.getTime() + clockTolerance)
-    throw new AppError('invalid-input', 'A test cannot be later than now.', {
-      problems: [{ path: 'takenAt', message: 'A test cannot be later than now. Check the day and the hour.' }],
+    throw new AppError('invalid-input', message, {
+      problems: [{ path, message: `${message} Check the day and the hour.` }],
     });
   return latest.toISOString();
 }

@@ -1,6 +1,7 @@
 import 'server-only';
 import type { StoredDose } from '@/db/queries/plan-doses';
 import type { StoredPlan } from '@/db/queries/plans';
+import type { StoredPoolEvent } from '@/db/queries/pool-events';
 import type { StoredReading } from '@/db/queries/readings';
 import type { WeekDayRow } from '@/db/queries/week-days';
 import { addDays, dayOf, startOfDay } from '@/lib/calendar/household-day';
@@ -9,6 +10,7 @@ import { middleOf } from '@/lib/projection/reading-error';
 import type { MeasuredQuantity } from '@/lib/schemas/measured-range';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { Pool } from '@/lib/schemas/pool';
+import type { PoolEventKind } from '@/lib/schemas/pool-event';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { codeMinimum, limits, lowestLevel } from '@/lib/standards/limits';
 import { type MeasuredValue, type SpreadAmount, swimVerdict, type SwimVerdictInput } from '@/lib/verdict';
@@ -27,6 +29,8 @@ export type VerdictGround = {
   doses: readonly { stored: StoredDose; shown: PlanDose }[];
   /** What was said of the days from that of the reading on. */
   days: readonly WeekDayRow[];
+  /** What nobody has said to be over. */
+  events: readonly StoredPoolEvent[];
 };
 
 /** The swim verdict of this moment, as the sheet shows it. */
@@ -48,11 +52,12 @@ export function sheetVerdict(ground: VerdictGround): WeekSheet['verdict'] {
 }
 
 function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
-  const { now, pool, readings, zeroDoubt, plan, doses } = ground;
+  const { now, pool, readings, zeroDoubt, plan, doses, events } = ground;
   const freeChlorine = newest(readings, 'freeChlorine');
   const pH = newest(readings, 'pH');
   const combinedChlorine = newest(readings, 'combinedChlorine');
-  const since = Math.min(freeChlorine?.takenAt ?? now, pH?.takenAt ?? now);
+  const since = testedSince(readings) ?? now;
+  const happened = (kind: PoolEventKind) => events.some((event) => event.kind === kind);
   const open = doses.filter(
     ({ stored }) => stored.status === 'planned' && stored.at.getTime() <= now && stored.at.getTime() > since,
   );
@@ -80,23 +85,29 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
       })),
     sinceReading: {
       rainMillimetres: rain.reduce((sum, day) => sum + day.amount * shareBefore(day, now), 0),
-      storm: false,
+      storm: happened('storm'),
       swimmerHoursInADay: Math.max(0, ...past.map(({ amount }) => amount)),
-      pumpFailure: false,
+      pumpFailure: happened('pump-failure'),
       dueDoseOpen: open.length > 0,
       doubtfulTick: false,
-      coverOffAfterAWeek: false,
+      coverOffAfterAWeek: happened('cover-off'),
     },
     open: {
       cloudy: readings[0]?.look === 'cloudy',
       green: readings[0]?.look === 'green',
       accident: false,
-      drainCoverBroken: false,
+      drainCoverBroken: happened('drain-cover'),
       suspectedDoubleDose: doses.some(({ stored }) => (stored.doubtfulAt?.getTime() ?? -Infinity) > doubtSince),
       falseZero: zeroDoubt === 'open',
     },
     ahead: { rain, swimmerHours: swimming.filter(({ until }) => until > now) },
   };
+}
+
+/** The older of the newest readings of chlorine and pH [ms]: what happened later is not in the test. Null without any. */
+export function testedSince(readings: readonly StoredReading[]): number | null {
+  const taken = (['freeChlorine', 'pH'] as const).flatMap((quantity) => newest(readings, quantity)?.takenAt ?? []);
+  return taken.length === 0 ? null : Math.min(...taken);
 }
 
 function newest(readings: readonly StoredReading[], quantity: MeasuredQuantity): MeasuredValue | undefined {

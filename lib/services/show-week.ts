@@ -1,5 +1,6 @@
 import 'server-only';
 import { listPlans, type StoredPlan } from '@/db/queries/plans';
+import { listOpenPoolEvents } from '@/db/queries/pool-events';
 import { findPool } from '@/db/queries/pools';
 import { listReadings } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
@@ -25,7 +26,7 @@ import { sheetChecks } from './sheet-checks';
 import { curveAhead, curveBehind } from './sheet-curves';
 import { sheetDays } from './sheet-days';
 import { countingDoses, sheetDose } from './sheet-doses';
-import { sheetVerdict } from './sheet-verdict';
+import { sheetVerdict, testedSince } from './sheet-verdict';
 import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
@@ -74,6 +75,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
   const lastDay = addDays(today > (days[6] ?? today) ? today : (days[6] ?? today), DAYS_OF_A_PLAN);
   const said = await listWeekDays(db, { householdId, from: firstDay, until: lastDay });
   const chlorineReading = readings.find(({ values }) => values.freeChlorine !== undefined);
+  const events = await listOpenPoolEvents(db, { householdId, since: new Date(testedSince(readings) ?? 0) });
   const zeroDoubt = chlorineReading ? await zeroDoubtOf(db, householdId, chlorineReading) : null;
 
   return {
@@ -89,7 +91,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     pool: sheetPool(pool, found.pool.recordOnly, found.swimLimitSetBy),
     days: sheetDays(days, said, pool),
     verdict: sheetVerdict({
-      ...{ now: now.getTime(), pool, readings, zeroDoubt, doses: bothForms, days: said },
+      ...{ now: now.getTime(), pool, readings, zeroDoubt, doses: bothForms, days: said, events },
       plan: problem ? null : plan,
     }),
     behind: curveBehind(plans, shown.from.getTime(), Math.min(now.getTime(), shown.until.getTime())),
@@ -102,6 +104,10 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     readings: readings
       .filter(({ takenAt }) => takenAt >= shown.from && takenAt < shown.until)
       .map((reading) => recordedReading(reading, timeZone)),
+    events: events.map(({ happenedAt, ...event }) => ({
+      ...event,
+      happenedAt: toOffsetIso(happenedAt.getTime(), timeZone),
+    })),
     doses: bothForms.filter(({ stored }) => isShown(stored.givenAt ?? stored.at, shown)).map((dose) => dose.shown),
     checks: sheetChecks(plan, readings, timeZone),
   };

@@ -82,6 +82,7 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
     questioned: [],
     unrecorded: false,
     readings: readings.filter(({ takenAt: taken }) => Date.parse(taken) >= startOfDay(start, timeZone)),
+    events: [],
     doses,
     checks: [
       { at: iso(at(3, '19:00')), kind: 'quick', reason: 'swim-day-after-two-days', done: false },

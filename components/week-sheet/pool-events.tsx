@@ -1,0 +1,45 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import { useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { EndEvent } from './end-event';
+import { ReportEvent } from './report-event';
+import { useSheet } from './sheet-context';
+import { instantOf } from './sheet-times';
+import { useTimes } from './use-times';
+
+/** What happened since the test and is not over, and the question whether something did. It stands with the verdict. */
+export function PoolEvents() {
+  const t = useTranslations('events');
+  const { sheet } = useSheet();
+  const times = useTimes();
+  const [asking, setAsking] = useState(false);
+  const mayReport = sheet.me.role !== 'viewer';
+  if (!mayReport && sheet.events.length === 0) return null;
+  return (
+    <section aria-label={t('label')} className="mt-2 grid gap-1 print:hidden">
+      {sheet.events.length > 0 && (
+        <ul className="grid gap-2">
+          {sheet.events.map((event) => (
+            <li key={event.id} className="grid gap-1 text-small">
+              <span className="font-emphasis">
+                {t(`said.${event.kind}`, {
+                  when: times.partAt(instantOf(event.happenedAt)),
+                  by: event.reportedBy ?? 'none',
+                })}
+              </span>
+              {mayReport && <EndEvent event={event} />}
+            </li>
+          ))}
+        </ul>
+      )}
+      {mayReport && (
+        <Button variant="quiet" size="small" className="-ml-3 justify-self-start" onClick={() => setAsking(true)}>
+          {t('ask')}
+        </Button>
+      )}
+      {asking && <ReportEvent onClose={() => setAsking(false)} />}
+    </section>
+  );
+}

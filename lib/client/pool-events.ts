@@ -1,0 +1,23 @@
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { doneSchema } from '@/lib/schemas/account';
+import type { NewPoolEvent } from '@/lib/schemas/pool-event';
+import { fetchJson } from './fetch-json';
+import { weekKeys } from './week';
+
+/** Writes down what happened to the pool; the verdict of the sheet follows. */
+export function useReportPoolEvent() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (event: NewPoolEvent) => fetchJson('/api/pool-events', doneSchema, { method: 'POST', body: event }),
+    onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
+  });
+}
+
+/** Says that it is over, or never was. */
+export function useEndPoolEvent() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (id: string) => fetchJson(`/api/pool-events/${id}`, doneSchema, { method: 'DELETE' }),
+    onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
+  });
+}
