@@ -30,6 +30,7 @@ export function HouseholdBar({ frame }: { frame: HouseholdFrame }) {
           <Siren aria-hidden="true" className="size-4.25" />
           {t('emergency')}
         </BarLink>
+        <BarLink href="/rounds">{t('rounds')}</BarLink>
         <BarLink href="/pool">{t('pool')}</BarLink>
         <BarLink href="/help">{t('help')}</BarLink>
         <span className="flex items-center gap-2.25">

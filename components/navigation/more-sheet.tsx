@@ -1,6 +1,6 @@
 'use client';
 
-import { ChevronRight, CircleQuestionMark, type LucideIcon, Waves } from 'lucide-react';
+import { ChevronRight, CircleQuestionMark, Footprints, type LucideIcon, Waves } from 'lucide-react';
 import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
@@ -24,6 +24,7 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
           <TroubleLink href="/help/safety">{t('keepingSafe')}</TroubleLink>
         </div>
       </div>
+      <MorePlace href="/rounds" Icon={Footprints} name={t('rounds')} fact={t('roundsFact')} />
       <MorePlace href="/pool" Icon={Waves} name={t('pool')} fact={t('poolFact')} />
       <MorePlace href="/help" Icon={CircleQuestionMark} name={t('help')} fact={t('helpFact')} />
       <div className="mx-4 flex min-h-14 items-center justify-between gap-3 border-t border-ink text-[15px] leading-5">

@@ -4,17 +4,23 @@ import { useTranslations } from 'next-intl';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { bold } from './bold';
 import { bucketLitres, pumpHours } from './dose-state';
+import { useDosingBar } from './use-dosing-bar';
 import { useDoseWords } from './use-dose-words';
 import { useUnits } from './use-units';
 
 const numbers = ['1', '2', '3', '4', '5', '6'] as const;
 
-/** The six steps of one dose with its own numbers, in the order in which they keep people safe. */
+/**
+ * The six steps of one dose with its own numbers, in the order in which they keep people safe. Where something happened
+ * that bars dosing, that stands in their place.
+ */
 export function DoseSteps({ dose, columns = false }: { dose: PlanDose; columns?: boolean }) {
   const t = useTranslations('doses');
   const words = useDoseWords();
   const units = useUnits();
   const text = textOf(dose);
+  const barred = useDosingBar();
+  if (barred) return <p className="border-l-care border-ochre-ink bg-care-wash px-4 py-3 font-emphasis">{barred}</p>;
   const figures = {
     hours: pumpHours(dose) ?? 0,
     litres: units.bucket(bucketLitres(dose)),

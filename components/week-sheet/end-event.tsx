@@ -7,38 +7,44 @@ import { useEndPoolEvent } from '@/lib/client/pool-events';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { PoolEvent } from '@/lib/schemas/pool-event';
 
-/** Ends what happened: a mistake is taken back at once, a new drain cover is asked about first. */
+type Question = 'mistake' | 'replaced';
+
+/** Ends what happened. It is asked once more: what did happen is over with a test, and a drain cover with a new one. */
 export function EndEvent({ event: { id, kind } }: { event: PoolEvent }) {
   const t = useTranslations('events');
   const problemWords = useProblemWords();
   const end = useEndPoolEvent();
-  const [asking, setAsking] = useState(false);
-  const drain = kind === 'drain-cover';
-  const busy = end.isPending ? t(drain ? 'replacing' : 'takingBack') : undefined;
+  const [asking, setAsking] = useState<Question | null>(null);
   return (
     <div className="grid gap-2">
       {asking ? (
-        <div role="group" aria-label={t('replaced')} className="grid gap-2">
-          <p className="font-emphasis">{t('replacedAsk')}</p>
+        <div role="group" aria-label={t(`${asking}.button`)} className="grid gap-2">
+          <p className="font-emphasis">{t(`${asking}.ask`)}</p>
           <div className="flex flex-wrap gap-2.5">
-            <Button size="small" variant="primary" onClick={() => end.mutate(id)} busy={busy}>
-              {t('replacedYes')}
+            <Button
+              size="small"
+              variant="primary"
+              onClick={() => end.mutate(id)}
+              busy={end.isPending ? t('ending') : undefined}
+            >
+              {t(`${asking}.yes`)}
             </Button>
-            <Button size="small" variant="quiet" onClick={() => setAsking(false)}>
+            <Button size="small" variant="quiet" onClick={() => setAsking(null)}>
               {t('notYet')}
             </Button>
           </div>
         </div>
       ) : (
-        <Button
-          size="small"
-          variant="outline"
-          className="justify-self-start"
-          onClick={() => (drain ? setAsking(true) : end.mutate(id))}
-          busy={busy}
-        >
-          {t(drain ? 'replaced' : 'takeBack')}
-        </Button>
+        <div className="flex flex-wrap gap-2.5">
+          {kind === 'drain-cover' && (
+            <Button size="small" variant="outline" onClick={() => setAsking('replaced')}>
+              {t('replaced.button')}
+            </Button>
+          )}
+          <Button size="small" variant="quiet" onClick={() => setAsking('mistake')}>
+            {t('mistake.button')}
+          </Button>
+        </div>
       )}
       {end.error && (
         <p role="alert" className="font-emphasis text-terra-ink">

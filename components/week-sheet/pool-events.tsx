@@ -9,12 +9,17 @@ import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
 
+const SIX_DAYS = 6 * 86_400_000;
+
 /** What happened since the test and is not over, and the question whether something did. It stands with the verdict. */
 export function PoolEvents() {
   const t = useTranslations('events');
   const { sheet } = useSheet();
   const times = useTimes();
   const [asking, setAsking] = useState(false);
+  // A weekday says nothing of what happened weeks ago.
+  const whenOf = (instant: number) =>
+    instantOf(sheet.now) - instant > SIX_DAYS ? times.heading(instant) : times.partAt(instant);
   const mayReport = sheet.me.role !== 'viewer';
   if (!mayReport && sheet.events.length === 0) return null;
   return (
@@ -25,10 +30,11 @@ export function PoolEvents() {
             <li key={event.id} className="grid gap-1 text-small">
               <span className="font-emphasis">
                 {t(`said.${event.kind}`, {
-                  when: times.partAt(instantOf(event.happenedAt)),
+                  when: whenOf(instantOf(event.happenedAt)),
                   by: event.reportedBy ?? 'none',
                 })}
               </span>
+              <span className="text-pretty">{t(`kind.${event.kind}.advice`)}</span>
               {mayReport && <EndEvent event={event} />}
             </li>
           ))}

@@ -6,6 +6,7 @@ import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { RadioRows } from '@/components/ui/radio-rows';
 import { useReportPoolEvent } from '@/lib/client/pool-events';
+import { useClock } from './clock-context';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { type PoolEventKind, poolEventKinds } from '@/lib/schemas/pool-event';
 
@@ -15,13 +16,14 @@ export function ReportEvent({ onClose }: { onClose: () => void }) {
   const common = useTranslations('common');
   const problemWords = useProblemWords();
   const report = useReportPoolEvent();
+  const clock = useClock();
   const [kind, setKind] = useState<PoolEventKind | null>(null);
   const [missing, setMissing] = useState(false);
   // One id for as long as the question is open: sent twice, it is written down once.
   const [id] = useState(() => crypto.randomUUID());
   const send = () => {
     if (kind === null) return setMissing(true);
-    report.mutate({ id, kind, happenedAt: new Date().toISOString() }, { onSuccess: onClose });
+    report.mutate({ id, kind, happenedAt: new Date(clock()).toISOString() }, { onSuccess: onClose });
   };
   return (
     <Dialog
@@ -36,7 +38,7 @@ export function ReportEvent({ onClose }: { onClose: () => void }) {
             {t('report')}
           </Button>
           <Button variant="quiet" onClick={onClose}>
-            {t('cancel')}
+            {kind === null ? t('cancel') : common('close')}
           </Button>
         </>
       }

@@ -10,8 +10,18 @@ import { useSheet } from './sheet-context';
 import { useVerdictWords } from './use-verdict-words';
 import { WaterNow } from './water-now';
 
-/** The swim verdict: the first line of the page. A Fine needs no frame and always has its standing line. */
+/** The swim verdict, the first line of the page, and below it what happened since the test. */
 export function Verdict() {
+  return (
+    <div>
+      <VerdictItself />
+      <PoolEvents />
+    </div>
+  );
+}
+
+/** A Fine needs no frame and always has its standing line. */
+function VerdictItself() {
   const t = useTranslations('verdict');
   const { sheet } = useSheet();
   const { state, headline, reasons } = useVerdictWords();
@@ -22,7 +32,6 @@ export function Verdict() {
         <WaterNow>
           <Standing />
         </WaterNow>
-        <PoolEvents />
       </section>
     );
   const [first, ...others] = reasons;
@@ -48,7 +57,6 @@ export function Verdict() {
           {t(sheet.lastReading === null ? 'enterTest' : 'quickCheck')}
         </Link>
       )}
-      <PoolEvents />
     </VerdictFrame>
   );
 }

@@ -1,9 +1,9 @@
 import 'server-only';
-import { and, asc, desc, eq, gte, inArray, isNull, lt, type SQL } from 'drizzle-orm';
+import { and, asc, desc, eq, gte, inArray, isNull, lt, max, type SQL } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/sqlite-core';
 import type { DatabaseOrTransaction } from '@/db/client';
 import { people, readings, readingValues, readingVersions } from '@/db/schema';
-import { measuredQuantities } from '@/lib/schemas/measured-range';
+import { type MeasuredQuantity, measuredQuantities } from '@/lib/schemas/measured-range';
 import type { Measured, NewReading } from '@/lib/schemas/reading';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 
@@ -41,6 +41,26 @@ export async function findLatestReading(
 ): Promise<StoredReading | null> {
   const [reading] = await readWhere(db, householdId, kind === undefined ? undefined : eq(readings.kind, kind), 1);
   return reading ?? null;
+}
+
+/** When each of some quantities was measured last, however long ago; those that never were are left out. */
+export async function lastMeasured(
+  db: DatabaseOrTransaction,
+  { householdId, quantities }: { householdId: ProvenHouseholdId; quantities: readonly MeasuredQuantity[] },
+): Promise<Date[]> {
+  const rows = await db
+    .select({ takenAt: max(readings.takenAt) })
+    .from(readings)
+    .innerJoin(readingValues, eq(readingValues.readingId, readings.id))
+    .where(
+      and(
+        eq(readings.householdId, householdId),
+        isNull(readings.deletedAt),
+        inArray(readingValues.quantity, [...quantities]),
+      ),
+    )
+    .groupBy(readingValues.quantity);
+  return rows.flatMap(({ takenAt }) => takenAt ?? []);
 }
 
 /**

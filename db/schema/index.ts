@@ -10,6 +10,7 @@ export { posteriors } from './posteriors';
 export { preferences } from './preferences';
 export { rateLimits } from './rate-limits';
 export { readings, readingValues, readingVersions } from './readings';
+export { rounds } from './rounds';
 export { sessions } from './sessions';
 export { shelfProducts } from './shelf-products';
 export { tabletsFound } from './tablets-found';

@@ -21,6 +21,7 @@ const rules = {
   'count-stock': { roles: carers, otherwise: onlyCarers },
   'enter-tests': { roles: carers, otherwise: onlyCarers },
   'correct-any-test': { roles: owners, otherwise: 'Only an owner can correct the tests of others.' },
+  'do-rounds': { roles: carers, otherwise: onlyCarers },
   'report-events': { roles: carers, otherwise: onlyCarers },
   'change-week-ahead': { roles: carers, otherwise: onlyCarers },
   plan: { roles: carers, otherwise: onlyCarers },

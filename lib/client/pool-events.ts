@@ -8,6 +8,8 @@ import { weekKeys } from './week';
 export function useReportPoolEvent() {
   const client = useQueryClient();
   return useMutation({
+    // Without a connection it fails in words rather than wait in silence.
+    networkMode: 'always',
     mutationFn: (event: NewPoolEvent) => fetchJson('/api/pool-events', doneSchema, { method: 'POST', body: event }),
     onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
   });
@@ -17,6 +19,8 @@ export function useReportPoolEvent() {
 export function useEndPoolEvent() {
   const client = useQueryClient();
   return useMutation({
+    // Without a connection it fails in words rather than wait in silence.
+    networkMode: 'always',
     mutationFn: (id: string) => fetchJson(`/api/pool-events/${id}`, doneSchema, { method: 'DELETE' }),
     onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
   });

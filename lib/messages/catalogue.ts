@@ -11,6 +11,7 @@ import navigation from './en/navigation.json';
 import pool from './en/pool.json';
 import problems from './en/problems.json';
 import readings from './en/readings.json';
+import rounds from './en/rounds.json';
 import start from './en/start.json';
 import units from './en/units.json';
 import verdict from './en/verdict.json';
@@ -31,6 +32,7 @@ export const catalogue = {
   pool,
   problems,
   readings,
+  rounds,
   start,
   units,
   verdict,

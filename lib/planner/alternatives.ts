@@ -19,7 +19,7 @@ export function alternativesOf({ context, options, choice, response, sketches }:
   const cost = response.costAround(plan);
   return (['tablets', 'granular', 'liquid'] as const).map((kind): Alternative => {
     const fast = kind === 'tablets' ? [null] : options.fast.filter(({ form }) => form === kind);
-    const possible = kind === 'tablets' ? options.tablets !== null : fast.length > 0;
+    const possible = kind === 'tablets' ? options.tabletsMayBe : fast.length > 0;
     const allowed = kind === 'tablets' ? choice : without;
     const draft = possible ? sketchAlone(response, { choice: allowed, fast }, sketches) : emptyDraft(without);
     const found = byMedian(draft, allowed, context);

@@ -7,12 +7,13 @@ import { codeMinimum, limits } from '@/lib/standards/limits';
 import type { CheckReason } from './codes';
 import type { Companion } from './companions/companion';
 import type { PlanContext } from './context';
-import { MID_WEEK_FROM } from './mid-week-test';
+import { isMidWeek } from './mid-week-test';
 
 type Check = WeekPlan['checks'][number];
 
 /** Nobody tests again so soon after a test [ms]: the water is still as it was read. */
 const SOON_AFTER = 6 * MILLISECONDS_PER_HOUR;
+const DAY = 24 * MILLISECONDS_PER_HOUR;
 
 /** Whether a quick check, which reads chlorine and pH, shows what a companion did. */
 function quickShows({ planned }: Companion): boolean {
@@ -41,7 +42,7 @@ export function checksOf(
   const endsAt = start.takenAt + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR;
   const first = dayOf(start.takenAt, pool.timeZone);
   const lowFrom = firstHourAtMinimum(projection, context, stabilized);
-  const midWeekFrom = start.takenAt + MID_WEEK_FROM * MILLISECONDS_PER_HOUR;
+  const due = Math.max(fullTestDue(context, morning, endsAt), now);
   const halved = doses.find(({ reason }) => reason === 'first-dose-halved');
 
   let lastTest = start.takenAt;
@@ -49,14 +50,15 @@ export function checksOf(
   for (let index = 0; index < 8; index++) {
     const day = addDays(first, index);
     const at = morning(day);
-    if (at <= lastTest + SOON_AFTER || at < now || at >= endsAt) continue;
+    if (at <= lastTest + SOON_AFTER || at < now || at >= endsAt || at === due) continue;
     const swimmingEnds = intervalsOfDay([pool.swimHours], day, pool.timeZone).at(-1)?.to ?? at;
     const age = (swimmingEnds - lastTest) / MILLISECONDS_PER_HOUR;
     const swims = (week.swimmerHours[index] ?? 0) > 0;
     const nextMorning = morning(addDays(day, 1));
     const afterHalved = halved && Date.parse(halved.at) < at && Date.parse(halved.at) >= lastTest;
     const retest = companion && !retested && at >= companion.retestAt;
-    const midWeek = midWeekPays && at >= midWeekFrom && !checks.some(({ kind }) => kind === 'full');
+    const midWeek =
+      midWeekPays && isMidWeek(at, context) && at + DAY < due && !checks.some(({ kind }) => kind === 'full');
     const low = lowFrom !== null && lowFrom < nextMorning && lastTest === start.takenAt;
     const reason: CheckReason | null = retest
       ? 'after-companion'
@@ -75,7 +77,7 @@ export function checksOf(
     checks.push({ at, kind: full ? 'full' : 'quick', reason });
     lastTest = at;
   }
-  checks.push({ at: Math.max(fullTestDue(context, morning, endsAt), now), kind: 'full', reason: 'next-week' });
+  checks.push({ at: due, kind: 'full', reason: 'next-week' });
   return checks.sort((a, b) => a.at - b.at).map((check) => ({ ...check, at: toOffsetIso(check.at, pool.timeZone) }));
 }
 

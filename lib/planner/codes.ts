@@ -54,6 +54,7 @@ export const reasonCodes = [
   'no-tablets-feeder',
   'no-tablets-on-shelf',
   'no-tablets-avoided',
+  'no-tablets-pool-small',
   'no-tablets-week-full',
   'no-tablets-feeder-full',
   'no-tablets-better-without',
@@ -83,7 +84,7 @@ export const cautionCodes = [
   'dose-after-dark',
   'volume-estimated',
   'free-chlorine-over-swim-limit',
-  /** Something is needed beside chlorine and has to wait: for a test, or for a free evening. */
+  /** Something is needed beside chlorine and has to wait: for a test, or for an evening that chlorine can spare. */
   'companion-waits',
   'hardness-outside-surface-range',
 ] as const;

@@ -40,6 +40,8 @@ export type Options = {
   tablets: TabletOption | null;
   /** Why there are none, when there are none. */
   noTablets: Extract<ReasonCode, `no-tablets-${string}`> | null;
+  /** Whether tablets may be used in this pool, though none may be added now where the week or the feeder is full. */
+  tabletsMayBe: boolean;
   /** The cheapest chlorine first. */
   fast: FastOption[];
   cautions: Fact[];
@@ -58,9 +60,12 @@ export function optionsOf(context: Pick<PlanContext, 'scenario' | 'start' | 'now
     .sort((a, b) => pricePerRise(a, start.takenAt) - pricePerRise(b, start.takenAt));
   const tablets = tabletOption(context, fast.length > 0, caution);
   return typeof tablets === 'string'
-    ? { tablets: null, noTablets: tablets, fast, cautions }
-    : { tablets, noTablets: null, fast, cautions };
+    ? { tablets: null, noTablets: tablets, tabletsMayBe: full.has(tablets), fast, cautions }
+    : { tablets, noTablets: null, tabletsMayBe: true, fast, cautions };
 }
+
+/** Why no tablet more may go in although tablets suit the pool: those that are in carry on. */
+const full: ReadonlySet<Options['noTablets']> = new Set(['no-tablets-week-full', 'no-tablets-feeder-full']);
 
 /** Where the shelf holds no fast chlorine that may be planned, one to buy takes its place, unless the household avoids it. */
 function somethingToBuy(scenario: Scenario, start: StartingWater): FastOption[] {
@@ -103,6 +108,7 @@ function tabletOption(
     { tabletMass, strength },
     tabletsGiven(scenario, now - tabletCap.countedFor * HOUR),
   );
+  if (mostTablets(pool.volume, { tabletMass, strength }) < 1) return 'no-tablets-pool-small';
   if (ofWeek < 1) return 'no-tablets-week-full';
   const room = pool.feeder.capacity - inFeeder - tabletsGiven(scenario, start.takenAt).count;
   if (room < 1) return 'no-tablets-feeder-full';

@@ -99,6 +99,8 @@ export class QuickRisk {
     asked.risks.set(settled.risks.subarray(0, from));
     this.settled = asked;
     this.asked = settled;
+    // Nothing has been asked about since.
+    this.asked.draft = null;
   }
 
   /** Free chlorine of a draft [mg/L]: hour by hour, the members side by side. */

@@ -9,7 +9,7 @@ export const weights = {
   /** Having to shop for more than the shelf holds. */
   errand: 3,
   /** One more full test. */
-  fullTest: 5.5,
+  fullTest: 5,
   /** One mg/L under the lowest level for one hour: expected over the ensemble, and again for its median. */
   shortfall: 0.25,
   medianShortfall: 1.5,

@@ -14,8 +14,8 @@ export function takenAtOf(claimed: string, latest: Date): string {
 }
 
 /** When something happened, likewise. Error: `invalid-input` for what is still to come. */
-export function happenedAtOf(claimed: string, latest: Date): string {
-  return pastInstant(claimed, latest, 'happenedAt', 'What happened cannot be later than now.');
+export function happenedAtOf(claimed: string, latest: Date, path = 'happenedAt'): string {
+  return pastInstant(claimed, latest, path, 'What happened cannot be later than now.');
 }
 
 function pastInstant(claimed: string, latest: Date, path: string, message: string): string {

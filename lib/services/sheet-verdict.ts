@@ -56,7 +56,7 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
   const freeChlorine = newest(readings, 'freeChlorine');
   const pH = newest(readings, 'pH');
   const combinedChlorine = newest(readings, 'combinedChlorine');
-  const since = testedSince(readings) ?? now;
+  const since = Math.min(freeChlorine?.takenAt ?? now, pH?.takenAt ?? now);
   const happened = (kind: PoolEventKind) => events.some((event) => event.kind === kind);
   const open = doses.filter(
     ({ stored }) => stored.status === 'planned' && stored.at.getTime() <= now && stored.at.getTime() > since,
@@ -102,12 +102,6 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
     },
     ahead: { rain, swimmerHours: swimming.filter(({ until }) => until > now) },
   };
-}
-
-/** The older of the newest readings of chlorine and pH [ms]: what happened later is not in the test. Null without any. */
-export function testedSince(readings: readonly StoredReading[]): number | null {
-  const taken = (['freeChlorine', 'pH'] as const).flatMap((quantity) => newest(readings, quantity)?.takenAt ?? []);
-  return taken.length === 0 ? null : Math.min(...taken);
 }
 
 function newest(readings: readonly StoredReading[], quantity: MeasuredQuantity): MeasuredValue | undefined {

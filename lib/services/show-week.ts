@@ -2,7 +2,7 @@ import 'server-only';
 import { listPlans, type StoredPlan } from '@/db/queries/plans';
 import { listOpenPoolEvents } from '@/db/queries/pool-events';
 import { findPool } from '@/db/queries/pools';
-import { listReadings } from '@/db/queries/readings';
+import { lastMeasured, listReadings } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
 import { tabletsFoundBefore } from '@/db/queries/tablets-found';
 import { listWeekDays } from '@/db/queries/week-days';
@@ -26,7 +26,7 @@ import { sheetChecks } from './sheet-checks';
 import { curveAhead, curveBehind } from './sheet-curves';
 import { sheetDays } from './sheet-days';
 import { countingDoses, sheetDose } from './sheet-doses';
-import { sheetVerdict, testedSince } from './sheet-verdict';
+import { sheetVerdict } from './sheet-verdict';
 import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
@@ -75,7 +75,10 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
   const lastDay = addDays(today > (days[6] ?? today) ? today : (days[6] ?? today), DAYS_OF_A_PLAN);
   const said = await listWeekDays(db, { householdId, from: firstDay, until: lastDay });
   const chlorineReading = readings.find(({ values }) => values.freeChlorine !== undefined);
-  const events = await listOpenPoolEvents(db, { householdId, since: new Date(testedSince(readings) ?? 0) });
+  const tested = await lastMeasured(db, { householdId, quantities: ['freeChlorine', 'pH'] });
+  // What happened after the older of the two is not in the test; before any test, all of it counts.
+  const testedSince = Math.min(...(tested.length > 0 ? tested : [new Date(0)]).map((taken) => taken.getTime()));
+  const events = await listOpenPoolEvents(db, { householdId, since: new Date(testedSince) });
   const zeroDoubt = chlorineReading ? await zeroDoubtOf(db, householdId, chlorineReading) : null;
 
   return {

@@ -2,8 +2,12 @@
 export const swimStates = ['stay-out', 'wait', 'test-first', 'fine'] as const;
 export type SwimState = (typeof swimStates)[number];
 
-/** Every reason a verdict can have and the state it asks for: care.md 2, row by row. Words stand in the messages. */
+/**
+ * Every reason a verdict can have and the state it asks for: care.md 2, row by row. Words stand in the messages. The first
+ * of those that hold is the headline: a drain cover leads, because it alone asks for an act this minute.
+ */
 export const swimReasons = {
+  'drain-cover-broken': 'stay-out',
   'chlorine-under-code-minimum': 'stay-out',
   'chlorine-over-maximum': 'stay-out',
   'ph-too-low': 'stay-out',
@@ -11,7 +15,6 @@ export const swimReasons = {
   'water-cloudy': 'stay-out',
   'water-green': 'stay-out',
   'accident-open': 'stay-out',
-  'drain-cover-broken': 'stay-out',
   'suspected-double-dose': 'stay-out',
   'dose-waiting-time': 'wait',
   'chlorine-over-swim-limit': 'wait',

@@ -148,6 +148,23 @@ describe('beside chlorine', () => {
     expect(dose.effect!.change).toBeLessThanOrEqual(20.5);
   });
 
+  it.each([
+    { cyanuricAcid: 25, pool: {} },
+    { cyanuricAcid: 15, pool: {} },
+    { cyanuricAcid: 28, pool: { volume: 41 } },
+    { cyanuricAcid: 15, pool: { feeder: { kind: 'inline', ingredient: 'trichlor', capacity: 3, loaded: 681 } } },
+  ])('no stabilizer on top of the tablets that bring it, before the tick or after: $cyanuricAcid, $pool', (water) => {
+    const changes = { pool: water.pool, reading: { cyanuricAcid: water.cyanuricAcid, totalAlkalinity: 110, pH: 7.6 } };
+    const before = planWeek(scenarioOf(changes));
+    expect(companionsIn(before)).toEqual([]);
+    const first = before.doses.find(({ form }) => form === 'tablet');
+    if (first === undefined) return;
+    const { at, product, amount, unit } = first;
+    const now = new Date(Date.parse(at) + HOUR).toISOString();
+    const after = planWeek(scenarioOf({ ...changes, given: [{ at, product, amount, unit }], now }));
+    expect(companionsIn(after)).toEqual([]);
+  });
+
   it('waits for a test after the last such dose, and for an evening of its own', () => {
     const shelf = [products.gran, { id: 'soda', form: 'other', substance: 'sodium-bicarbonate', stock: 5000 }];
     const given = [{ at: '2026-07-05T18:00:00-04:00', product: 'soda', amount: 1000, unit: 'g' }];

@@ -256,7 +256,7 @@ describe('why no tablets', () => {
   const given = [{ at: '2026-07-05T18:00:00-04:00', product: 'tabs', amount: 3, unit: 'tablet' }];
   it.each([
     ['no-tablets-week-full', { given }],
-    ['no-tablets-week-full', { pool: { volume: 15 } }],
+    ['no-tablets-pool-small', { pool: { volume: 15 } }],
     [
       'no-tablets-feeder-full',
       { given, pool: { volume: 114, feeder: { kind: 'inline', ingredient: 'trichlor', capacity: 3 } } },

@@ -57,6 +57,24 @@ describe('what happens to a pool between tests', { timeout: 60_000 }, () => {
     expect(codesOf(await showWeek(later))).not.toContain('drain-cover-broken');
   });
 
+  it('stays over for good with that test, however long ago it was', async () => {
+    const context = await fresh();
+    await report(context, 'storm');
+    const later = at(context, hoursLater(3));
+    await recordReading(later, { ...aFullTest(later.now), kind: 'quick' as const });
+    const spring = at(context, hoursLater(24 * 200));
+    expect((await showWeek(spring)).events).toEqual([]);
+  });
+
+  it('a drain cover is the headline, whatever the chemistry says', async () => {
+    const context = await fresh();
+    await report(context, 'drain-cover');
+    const later = at(context, hoursLater(3));
+    const low = aFullTest(later.now);
+    await recordReading(later, { ...low, values: { ...low.values, freeChlorine: 0.6 } });
+    expect(codesOf(await showWeek(later))[0]).toBe('drain-cover-broken');
+  });
+
   it('is written down once however often it is sent, and every change is on record', async () => {
     const context = await fresh();
     const before = await context.db.$count(auditTrail);

@@ -72,7 +72,8 @@ export type ConstantUnit =
   | 'kilopascals'
   | 'kilojoulesPerKilogram'
   | 'tablets'
-  | 'money';
+  | 'money'
+  | 'bar';
 
 /**
  * One constant as the help page lists it. `of` names where it lives, `folder/file#export.key`, so that a test can hold the

@@ -34,8 +34,14 @@ export const learningConstants = [
     { name: 'doubt', value: DOUBT, unit: 'sigma', of: 'learning/hampel#DOUBT' },
     { name: 'strongDoubt', value: STRONG_DOUBT, unit: 'sigma', of: 'learning/hampel#STRONG_DOUBT' },
     { name: 'noBelief', value: NO_BELIEF, unit: 'sigma', of: 'learning/hampel#NO_BELIEF' },
-    { name: 'questionedBelow', value: QUESTIONED_BELOW, unit: 'none', of: 'learning/hampel#QUESTIONED_BELOW' },
-    { name: 'believedAt', value: BELIEVED_AT, unit: 'sigma', of: 'learning/assimilate#BELIEVED_AT' },
+    {
+      name: 'questionedBelow',
+      value: QUESTIONED_BELOW,
+      unit: 'none',
+      of: 'learning/hampel#QUESTIONED_BELOW',
+      source: 'ours',
+    },
+    { name: 'believedAt', value: BELIEVED_AT, unit: 'sigma', of: 'learning/assimilate#BELIEVED_AT', source: 'ours' },
   ]),
   group('forgetting', ['learning'], 'ours', [
     { name: 'forgettingDays', value: FORGETTING_DAYS, unit: 'days', of: 'learning/drift#FORGETTING_DAYS' },

@@ -6,6 +6,7 @@ import {
   tabletCap,
   TABLETS_NEED_PH,
 } from '@/lib/standards/caps';
+import { filterPressureRise } from '@/lib/standards/filter';
 import { type Limit, limits } from '@/lib/standards/limits';
 import { surfaceRanges } from '@/lib/standards/surface-ranges';
 import { type Constant, type ConstantUnit, group } from './constant';
@@ -149,4 +150,20 @@ export const ruleConstants = [
     })),
   ),
   group('surfaces', ['calcium'], 'ours', surface),
+  group('filter', [], 'ours', [
+    {
+      name: 'filterCleanFrom',
+      value: filterPressureRise.from,
+      unit: 'bar',
+      of: 'standards/filter#filterPressureRise.from',
+      source: filterPressureRise.source,
+    },
+    {
+      name: 'filterCleanLatest',
+      value: filterPressureRise.latest,
+      unit: 'bar',
+      of: 'standards/filter#filterPressureRise.latest',
+      source: filterPressureRise.source,
+    },
+  ]),
 ];

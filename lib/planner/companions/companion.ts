@@ -38,7 +38,7 @@ export function companionsOf(
     pH: plan.median.pH,
     measured: (quantity) => start.measuredAt[quantity] !== undefined,
     tabletsLead: sumOf(plan.draft.tablets) > 0,
-    tabletsPossible: options.tablets !== null,
+    tabletsPossible: options.tabletsMayBe,
   });
   if (untested(context) || plan.choice.visits < 2) return { needs, companions: [] };
   return { needs, companions: needs.flatMap((need) => companionFor(need, plan, context) ?? []) };

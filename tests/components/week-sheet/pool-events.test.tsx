@@ -36,9 +36,13 @@ describe('what happened to the pool', () => {
     fireEvent.click(within(dialog).getByRole('button', { name: 'Write it down' }));
     expect(await within(dialog).findByText('Choose what happened.')).toBeInTheDocument();
     fireEvent.click(within(dialog).getByRole('radio', { name: /A drain cover is loose/ }));
-    const advice = within(dialog).getByText(/Everyone out and pump off now/).textContent;
-    // Out of the water before the pump, and a person who knows before anybody swims.
-    expect(advice.indexOf('Everyone out')).toBeLessThan(advice.indexOf('pump off'));
+    const advice = within(dialog).getByText(/Somebody held: pump off first/).textContent;
+    // Who is held comes first, and for them the pump; everybody else leaves the water before it.
+    const order = ['held', 'pump off first', 'emergency number', 'everyone out', 'pump off.'].map((said) =>
+      advice.indexOf(said),
+    );
+    expect(order).toEqual(order.toSorted((a, b) => a - b));
+    expect(Math.min(...order)).toBeGreaterThanOrEqual(0);
     expect(asked.filter(({ method }) => method === 'POST')).toEqual([]);
     fireEvent.click(within(dialog).getByRole('button', { name: 'Write it down' }));
     await waitFor(() => expect(screen.queryByRole('dialog')).toBeNull());
@@ -52,6 +56,8 @@ describe('what happened to the pool', () => {
     await showSheet(aWeekSheet({}, { events: [cover] }));
     const asked = listen();
     expect(screen.getByText('Drain cover not whole, this morning, Ines.')).toBeInTheDocument();
+    // What to do stays there for everybody, and no dose is described that wants the pump on.
+    expect(screen.getByText(/Somebody held: pump off first/)).toBeInTheDocument();
     fireEvent.click(screen.getByRole('button', { name: 'It is replaced' }));
     expect(screen.getByText(/Has someone seen that the new cover is whole/)).toBeInTheDocument();
     expect(asked.some(({ method }) => method === 'DELETE')).toBe(false);
@@ -61,10 +67,26 @@ describe('what happened to the pool', () => {
     );
   });
 
-  it('a mistake is taken back in one tap', async () => {
+  it('no dose is described while it bars dosing', async () => {
+    const phone = { width: 390 };
+    const { unmount } = await showSheet(aWeekSheet(), phone);
+    expect(screen.getAllByText(/Pump on now/).length).toBeGreaterThan(0);
+    unmount();
+    for (const kind of ['drain-cover', 'storm', 'pump-failure'] as const) {
+      const shown = await showSheet(aWeekSheet({}, { events: [{ ...cover, kind }] }), phone);
+      expect(screen.queryByText(/Pump on now/)).toBeNull();
+      expect(screen.getAllByText(/^Nothing goes in/).length).toBeGreaterThan(0);
+      shown.unmount();
+    }
+  });
+
+  it('a mistake is taken back after one question', async () => {
     await showSheet(aWeekSheet({}, { events: [{ ...cover, kind: 'storm' }] }));
     const asked = listen();
     fireEvent.click(screen.getByRole('button', { name: 'That was a mistake' }));
+    expect(screen.getByText(/If it did, it is over with the next test/)).toBeInTheDocument();
+    expect(asked.some(({ method }) => method === 'DELETE')).toBe(false);
+    fireEvent.click(screen.getByRole('button', { name: 'It did not happen' }));
     await waitFor(() => expect(asked.some(({ method }) => method === 'DELETE')).toBe(true));
   });
 

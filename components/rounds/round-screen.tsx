@@ -1,0 +1,24 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { useTranslations } from 'next-intl';
+import { Skeleton } from '@/components/ui/skeleton';
+import { roundsOptions } from '@/lib/client/rounds';
+import type { UnitSystem } from '@/lib/units/unit';
+import { RoundForm } from './round-form';
+
+export type RoundHousehold = {
+  timeZone: string;
+  locale: string;
+  unitSystem: UnitSystem;
+  personName: string;
+  mayDoRounds: boolean;
+};
+
+/** The round of a household; a blank while the last one is fetched. A round can be walked without knowing it. */
+export function RoundScreen({ household, serverNow }: { household: RoundHousehold; serverNow: number }) {
+  const t = useTranslations('rounds');
+  const { data, isPending } = useQuery(roundsOptions());
+  if (isPending) return <Skeleton label={t('loading')} className="mx-auto mt-6 h-96 max-w-form" />;
+  return <RoundForm household={household} serverNow={serverNow} known={data ?? { last: null, cleanPressure: null }} />;
+}
