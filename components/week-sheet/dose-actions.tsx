@@ -14,6 +14,7 @@ import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { SkipDose } from './skip-dose';
 import { TabletsLeft } from './tablets-left';
+import { useDosingBar } from './use-dosing-bar';
 import { type Tick, useTick } from './use-tick';
 import { useTimes } from './use-times';
 import { useTickProblem } from './use-tick-problem';
@@ -54,13 +55,17 @@ function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {
   const { sheet } = useSheet();
   const [asking, setAsking] = useState<'other' | 'skip' | undefined>(undefined);
   const [left, setLeft] = useState<number | undefined>(undefined);
+  // What went in all the same can be ticked; nobody is asked to begin.
+  const barred = useDosingBar() !== undefined;
   const found = left === undefined ? {} : { tabletsLeft: left };
   if (asking === 'other')
     return <OtherAmount dose={dose} tick={tick} found={found} onClose={() => setAsking(undefined)} />;
   if (asking === 'skip') return <SkipDose tick={tick} onClose={() => setAsking(undefined)} />;
   return (
     <>
-      {dose.claimedBy === null ? (
+      {dose.claimedBy !== null ? (
+        <ClaimedBy name={dose.claimedBy} />
+      ) : barred ? null : (
         <Button
           wide
           size="large"
@@ -70,8 +75,6 @@ function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {
           <Hand aria-hidden="true" className="size-5" />
           {t('action.claim')}
         </Button>
-      ) : (
-        <ClaimedBy name={dose.claimedBy} />
       )}
       {dose.claimedBy === sheet.me.name && (
         <Button

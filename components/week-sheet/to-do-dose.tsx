@@ -10,6 +10,7 @@ import { DoneLine } from './done-line';
 import { DoseDialog } from './dose-dialog';
 import { mayAddFound, mayUndo, momentOf, tickBar } from './dose-state';
 import { useSheet } from './sheet-context';
+import { useDosingBar } from './use-dosing-bar';
 import { useDoseWords } from './use-dose-words';
 import { useTick } from './use-tick';
 import { useTickProblem } from './use-tick-problem';
@@ -53,6 +54,7 @@ function OpenToDo({ dose, onOpen }: LineProps) {
   const { sheet, picture } = useSheet();
   const words = useDoseWords();
   const moment = momentOf(dose, picture.now);
+  const barred = useDosingBar();
   const ticks = moment !== 'ahead' && tickBar(sheet.me) === undefined;
   return (
     <>
@@ -65,12 +67,16 @@ function OpenToDo({ dose, onOpen }: LineProps) {
       <p className="mb-0.5 text-fine text-ink-2">{words.hourOf(dose, { pump: false })}</p>
       <p className="font-display text-[25px] leading-[27px] font-headline tracking-dose">{words.amountOf(dose)}</p>
       <p className="text-[13.5px] leading-[17px] font-strong">{words.productOf(dose)}</p>
-      <p className="mt-1.25 text-fine text-ink-2">
-        {dose.pumpUntil !== null && <>{words.pump(dose)} </>}
-        {words.afterwards(dose)}
-      </p>
+      {barred === undefined ? (
+        <p className="mt-1.25 text-fine text-ink-2">
+          {dose.pumpUntil !== null && <>{words.pump(dose)} </>}
+          {words.afterwards(dose)}
+        </p>
+      ) : (
+        <p className="mt-1.25 border-l-care border-ochre-ink pl-1.5 text-fine font-emphasis">{barred}</p>
+      )}
       <div className="mt-auto pt-1">
-        {ticks && <TickHere dose={dose} />}
+        {ticks && barred === undefined && <TickHere dose={dose} />}
         <StepsLink onPress={onOpen}>{t(ticks ? 'action.stepsAndMore' : 'action.steps')}</StepsLink>
       </div>
     </>

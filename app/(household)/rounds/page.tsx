@@ -14,7 +14,7 @@ export default async function RoundsPage() {
   const { access, now } = await requireHousehold();
   const { timeZone, locale, unitSystem, personName } = access;
   return (
-    <ClientMessages namespaces={['rounds', 'navigation']}>
+    <ClientMessages namespaces={['rounds']}>
       <RoundScreen
         household={{ timeZone, locale, unitSystem, personName, mayDoRounds: may(access, 'do-rounds') }}
         serverNow={now.getTime()}

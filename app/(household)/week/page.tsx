@@ -25,7 +25,7 @@ export default async function WeekPage({ searchParams }: { searchParams: Promise
     throw problem;
   });
   return (
-    <ClientMessages namespaces={['week', 'verdict', 'doses', 'units', 'readings']}>
+    <ClientMessages namespaces={['week', 'events', 'verdict', 'doses', 'units', 'readings']}>
       <WaitingTests
         household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
       />

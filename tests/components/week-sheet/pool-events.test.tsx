@@ -75,6 +75,7 @@ describe('what happened to the pool', () => {
     for (const kind of ['drain-cover', 'storm', 'pump-failure'] as const) {
       const shown = await showSheet(aWeekSheet({}, { events: [{ ...cover, kind }] }), phone);
       expect(screen.queryByText(/Pump on now/)).toBeNull();
+      expect(screen.queryByRole('button', { name: 'I am adding it now' })).toBeNull();
       expect(screen.getAllByText(/^Nothing goes in/).length).toBeGreaterThan(0);
       shown.unmount();
     }

@@ -3,6 +3,7 @@ import { lookAt, widths } from '../looks/look-at';
 import {
   due,
   firstRun,
+  happened,
   recordOnly,
   signedIn,
   signedOut,
@@ -36,6 +37,17 @@ export const looks: readonly Journey[] = [
   looking('looks: a dose is due', due, async (server) => {
     const person = await household(server);
     await person.must('POST', '/api/readings', fullTest(sundayEvening));
+    return person;
+  }),
+  looking('looks: something happened', happened, async (server) => {
+    const person = await household(server);
+    await person.must('POST', '/api/readings', fullTest(sundayEvening));
+    for (const kind of ['storm', 'drain-cover'])
+      await person.must('POST', '/api/pool-events', {
+        id: randomUUID(),
+        kind,
+        happenedAt: '2026-07-05T19:00:30-04:00',
+      });
     return person;
   }),
   looking('looks: out of scope', stopped, async (server) => {

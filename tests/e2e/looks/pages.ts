@@ -157,6 +157,35 @@ export const signedIn: readonly View[] = [
   },
   { name: 'pool-sun', path: '/pool/sun', prepare: shows(words('pool.sun.title')) },
   { name: 'help-signed-in', path: '/help' },
+  {
+    name: 'rounds-exceptions',
+    path: '/rounds',
+    async prepare(page) {
+      for (const item of ['filter-pressure', 'pump-seal', 'drain-cover'] as const) {
+        const name = words(`rounds.item.${item}.name`);
+        await page.getByRole('button', { name: `${name}: not fine` }).click();
+      }
+    },
+  },
+];
+
+/** For a household to whose pool something has happened while a dose was due. */
+export const happened: readonly View[] = [
+  {
+    name: 'week-something-happened',
+    path: '/week',
+    async prepare(page) {
+      await page.getByText(words('events.dosing.drain-cover')).first().waitFor({ state: 'attached' });
+    },
+  },
+  {
+    name: 'week-what-happened',
+    path: '/week',
+    async prepare(page) {
+      await page.getByRole('button', { name: words('events.ask') }).click();
+      await page.getByRole('radio', { name: words('events.kind.drain-cover.name') }).check({ force: true });
+    },
+  },
 ];
 
 /** For somebody whose pool is out of scope. */
