@@ -4,7 +4,7 @@ import { useTranslations } from 'next-intl';
 import { NumberTextField } from '@/components/ui/number-text-field';
 import { GAUGE } from '@/lib/schemas/round';
 import { type PressureText, pressureUnit, readPressures, writePressure } from './pressures';
-import type { RoundHousehold } from './round-screen';
+import type { RoundHousehold } from './round-household';
 
 type Props = {
   part: keyof PressureText;

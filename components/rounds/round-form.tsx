@@ -13,7 +13,7 @@ import { type RoundItem, roundItems, type Rounds } from '@/lib/schemas/round';
 import { PressureField } from './pressure-field';
 import { RoundHead } from './round-head';
 import { RoundRow } from './round-row';
-import type { RoundHousehold } from './round-screen';
+import type { RoundHousehold } from './round-household';
 import { type PressureText, readPressures } from './pressures';
 import { roundTimes } from './round-times';
 

@@ -22,7 +22,7 @@ import { classNames } from '@/components/ui/class-names';
 import type { RoundItem } from '@/lib/schemas/round';
 import { filterPressureRise } from '@/lib/standards/filter';
 import { writePressure } from './pressures';
-import type { RoundHousehold } from './round-screen';
+import type { RoundHousehold } from './round-household';
 
 const icons: Record<RoundItem, LucideIcon> = {
   baskets: ShoppingBasket,

@@ -4,16 +4,8 @@ import { useQuery } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
 import { Skeleton } from '@/components/ui/skeleton';
 import { roundsOptions } from '@/lib/client/rounds';
-import type { UnitSystem } from '@/lib/units/unit';
 import { RoundForm } from './round-form';
-
-export type RoundHousehold = {
-  timeZone: string;
-  locale: string;
-  unitSystem: UnitSystem;
-  personName: string;
-  mayDoRounds: boolean;
-};
+import type { RoundHousehold } from './round-household';
 
 /** The round of a household; a blank while the last one is fetched. A round can be walked without knowing it. */
 export function RoundScreen({ household, serverNow }: { household: RoundHousehold; serverNow: number }) {
