@@ -95,7 +95,7 @@ export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext
     hours,
     swimHour,
     swimCeiling: Float64Array.from(swimHour, (swims) => (swims ? pool.swimLimit : Infinity)),
-    stabilizedProductUsed: start.loads.length > 0 || given.some(bringsStabilizer),
+    stabilizedProductUsed: start.loads.some(isStabilized) || given.some(bringsStabilizer),
   };
 }
 
@@ -113,7 +113,13 @@ function startOf(scenario: Scenario, history: readonly WeekDose[]): { start: Sta
 
 /** Trichlor and dichlor bring chlorine and stabilizer together. */
 function bringsStabilizer(dose: WeekDose): boolean {
-  return dose.kind === 'tablets' || (dose.contents.freeChlorine > 0 && dose.contents.cyanurate > 0);
+  return dose.kind === 'tablets'
+    ? isStabilized(dose.load)
+    : dose.contents.freeChlorine > 0 && dose.contents.cyanurate > 0;
+}
+
+function isStabilized({ contents }: TabletLoad): boolean {
+  return contents === undefined || contents.cyanurate > 0;
 }
 
 /** Whether a member cannot pass the maximum by itself, not even if nothing of what it has and gets were lost. */

@@ -5,7 +5,7 @@ import type { DoseUnit } from '@/lib/schemas/dose';
 import type { Pool } from '@/lib/schemas/pool';
 import type { ShelfProduct, substances } from '@/lib/schemas/shelf-product';
 import { generic } from './generic-products';
-import { liquidStrength, tabletFacts } from './product-facts';
+import { isTabletSubstance, liquidStrength, tabletOf } from './product-facts';
 
 /** A dose as somebody names it: of a product on the shelf, or of a substance that has to be bought. */
 export type NamedDose = {
@@ -40,8 +40,9 @@ export function weekDoseOf(named: NamedDose, path: string, shelf: readonly Shelf
   if (named.unit !== unit) throw problem('unit', `This product is counted in ${unit}.`);
   const { substance, alkali } = product;
   if (product.form === 'tablet') {
-    const { tabletMass, strength } = tabletFacts(product);
-    return { at, kind: 'tablets', load: { tabletMass, count: named.amount, strength, erodedShare: 0 } };
+    if (!isTabletSubstance(substance))
+      throw problem('product', 'These tablets bring no chlorine: they cannot be reckoned with.');
+    return { at, kind: 'tablets', load: { ...tabletOf(substance, product), count: named.amount, erodedShare: 0 } };
   }
   const hypochlorite = substance === 'sodium-hypochlorite' || substance === 'calcium-hypochlorite';
   const strength =

@@ -17,7 +17,7 @@ import { type MeasuredQuantity, measuredQuantities } from '@/lib/schemas/measure
 import type { Reading } from '@/lib/schemas/reading';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { weekAheadSchema } from '@/lib/schemas/week-ahead';
-import { tabletFacts } from './product-facts';
+import { isTabletSubstance, tabletOf } from './product-facts';
 
 const MILLISECONDS_PER_DAY = 24 * MILLISECONDS_PER_HOUR;
 
@@ -53,9 +53,7 @@ export function startingWater(scenario: Scenario, given: readonly WeekDose[]): S
   const first = readings[0]!;
   const measuredAt: StartingWater['measuredAt'] = {};
   const errors = {} as ReadingErrors;
-  const { pool } = scenario;
-  const tablet = tabletFacts(scenario.shelf.find(({ form }) => form === 'tablet') ?? {});
-  const loaded = loadOfMass(pool.feeder.loaded, tablet.tabletMass, tablet.strength);
+  const loaded = loadedTablets(scenario);
 
   const blank: WaterAnalysis = {
     freeChlorine: 0,
@@ -80,6 +78,15 @@ export function startingWater(scenario: Scenario, given: readonly WeekDose[]): S
   }
   requireConsistent(water);
   return { takenAt: at, water, errors, loads, measuredAt };
+}
+
+/** What was in the feeder at the first reading; the label of the shelf's tablets of that kind tells their mass. */
+function loadedTablets({ pool, shelf }: Scenario): TabletLoad | undefined {
+  const { ingredient = 'trichlor', loaded } = pool.feeder;
+  // Of a blend nobody knows what it brings: care rules, part 4.
+  if (!isTabletSubstance(ingredient)) return undefined;
+  const same = shelf.find(({ form, substance }) => form === 'tablet' && substance === ingredient);
+  return loadOfMass(loaded, tabletOf(ingredient, same ?? {}));
 }
 
 function instant(reading: Reading): number {

@@ -23,8 +23,17 @@ export type Acting = {
   temperature: number;
 };
 
-/** What slow tablets release in one step, for each hour: chlorine [mg/L/h], cyanurate [mol/L/h], solids [mg/L/h]. */
-export type TabletRelease = { chlorine: number; cyanurate: number; solids: number };
+/**
+ * What slow tablets release in one step, for each hour: chlorine and solids [mg/L/h], cyanurate and calcium [mol/L/h],
+ * alkalinity [eq/L/h].
+ */
+export type TabletRelease = {
+  chlorine: number;
+  cyanurate: number;
+  alkalinity: number;
+  calcium: number;
+  solids: number;
+};
 
 /** What comes in when water is topped up. */
 export type FillWater = Pick<Ledger, 'alkalinity' | 'inorganicCarbon' | 'calcium' | 'dissolvedSolids'>;
@@ -61,7 +70,7 @@ export function lightThroughDepth(depth: number): number {
   return -Math.expm1(-optical) / optical;
 }
 
-export const noRelease: TabletRelease = { chlorine: 0, cyanurate: 0, solids: 0 };
+export const noRelease: TabletRelease = { chlorine: 0, cyanurate: 0, alkalinity: 0, calcium: 0, solids: 0 };
 
 /** Rates to be filled by {@link holdRates} and {@link rateState}. */
 export function newStepRates(): StepRates {
@@ -167,12 +176,16 @@ export function moveOn(
   const out = rates.outflow > 0 ? Math.expm1(-rates.outflow * hours) : 0;
   const left = 1 + out;
   const entered = rates.inflow * (rates.outflow > 0 ? -out / rates.outflow : hours);
-  ledger.alkalinity = ledger.alkalinity * left + fill.alkalinity * entered - usedUp / CHLORINE_MILLIGRAMS_PER_MOLE;
+  ledger.alkalinity =
+    ledger.alkalinity * left +
+    fill.alkalinity * entered +
+    rates.release.alkalinity * hours -
+    usedUp / CHLORINE_MILLIGRAMS_PER_MOLE;
   ledger.inorganicCarbon = Math.max(
     0,
     ledger.inorganicCarbon * left + fill.inorganicCarbon * entered - rates.carbonLoss * hours,
   );
-  ledger.calcium = ledger.calcium * left + fill.calcium * entered;
+  ledger.calcium = ledger.calcium * left + fill.calcium * entered + rates.release.calcium * hours;
   ledger.dissolvedSolids =
     ledger.dissolvedSolids * left + fill.dissolvedSolids * entered + rates.release.solids * hours;
   ledger.cyanurate = ledger.cyanurate * left + rates.release.cyanurate * hours;

@@ -1,5 +1,8 @@
+import type { DoseContents } from '@/lib/chemistry';
 import { CHLORINE_MILLIGRAMS_PER_MOLE } from '@/lib/chemistry/molar-masses';
 import { noRelease, type TabletRelease } from './step';
+
+const GRAMS_PER_MOLE = CHLORINE_MILLIGRAMS_PER_MOLE / 1000;
 
 /** Tablets that went into a feeder together and erode alike. */
 export type TabletLoad = {
@@ -10,6 +13,8 @@ export type TabletLoad = {
   strength: number;
   /** Running hours already behind them [h], as a share of their life. */
   erodedShare: number;
+  /** What 1 g brings, where they are not trichlor. */
+  contents?: DoseContents;
 };
 
 /**
@@ -55,10 +60,14 @@ export function lifeOf(tabletMass: number, life: number): number {
  *
  * @param mass tablet mass in the feeder [g]
  */
-export function loadOfMass(mass: number, tabletMass: number, strength: number): TabletLoad | undefined {
+export function loadOfMass(
+  mass: number,
+  { tabletMass, strength, contents }: Omit<TabletLoad, 'count' | 'erodedShare'>,
+): TabletLoad | undefined {
   if (mass <= 0) return undefined;
   const count = Math.ceil(mass / tabletMass - 1e-9);
-  return { tabletMass, count, strength, erodedShare: erodedShareAt(mass / (count * tabletMass)) };
+  const erodedShare = erodedShareAt(mass / (count * tabletMass));
+  return { tabletMass, count, strength, erodedShare, ...(contents ? { contents } : {}) };
 }
 
 /**
@@ -73,19 +82,34 @@ export function erode(
   { tabletLife, volume }: { tabletLife: number; volume: number },
 ): TabletRelease {
   if (loads.length === 0) return noRelease;
-  let chlorineMass = 0;
+  let trichlorine = 0;
+  let otherChlorine = 0;
   let mass = 0;
+  let cyanurate = 0;
+  let alkalinity = 0;
+  let calcium = 0;
   for (const load of loads) {
     const before = massLeft(load.erodedShare);
     load.erodedShare = Math.min(1, load.erodedShare + running / lifeOf(load.tabletMass, tabletLife));
     const dissolved = load.count * load.tabletMass * (before - massLeft(load.erodedShare));
     mass += dissolved;
-    chlorineMass += (dissolved * load.strength) / 100;
+    const { contents } = load;
+    if (contents === undefined) {
+      trichlorine += (dissolved * load.strength) / 100;
+      continue;
+    }
+    otherChlorine += dissolved * contents.freeChlorine * GRAMS_PER_MOLE;
+    cyanurate += dissolved * contents.cyanurate;
+    alkalinity += dissolved * contents.alkalinity;
+    calcium += dissolved * contents.calcium;
   }
-  const chlorine = chlorineMass / volume / hours;
+  const perLitreHour = 1 / (volume * 1000 * hours);
+  const ofTrichlor = trichlorine / volume / hours;
   return {
-    chlorine,
-    cyanurate: chlorine / (3 * CHLORINE_MILLIGRAMS_PER_MOLE),
+    chlorine: ofTrichlor + otherChlorine / volume / hours,
+    cyanurate: ofTrichlor / (3 * CHLORINE_MILLIGRAMS_PER_MOLE) + cyanurate * perLitreHour,
+    alkalinity: alkalinity * perLitreHour,
+    calcium: calcium * perLitreHour,
     solids: mass / volume / hours,
   };
 }

@@ -62,7 +62,7 @@ export function given<Values extends Record<string, unknown>>(
 export function feederMassAt(pool: Pool, profiledAt: number, instant: number): number {
   const { loaded, kind } = pool.feeder;
   const hours = (instant - profiledAt) / HOUR;
-  const load = loadOfMass(loaded, usualTabletMass, usualTabletStrength);
+  const load = loadOfMass(loaded, { tabletMass: usualTabletMass, strength: usualTabletStrength });
   if (!load || hours <= 0) return loaded;
   const running = kind === 'floating' ? hours : (hours / 24) * pumpHoursADay(pool, profiledAt);
   const share = load.erodedShare + running / lifeOf(load.tabletMass, parametersOf(pool).tabletLife);

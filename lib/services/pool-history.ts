@@ -51,11 +51,8 @@ export async function loadPoolHistory(
     until: addDays(dayOf(last.getTime(), timeZone), 1),
   });
   const { tabletMass, strength } = genericProducts.trichlor;
-  const load = loadOfMass(
-    feederMassAt(pool, found.pool.completedAt?.getTime() ?? 0, first.getTime()),
-    tabletMass,
-    strength,
-  );
+  const mass = feederMassAt(pool, found.pool.completedAt?.getTime() ?? 0, first.getTime());
+  const load = loadOfMass(mass, { tabletMass, strength });
   return {
     readings,
     history: {

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { tabletOf } from '@/lib/planner/product-facts';
 import { erode, erodedShareAt, lifeOf, loadOfMass, massLeft } from '@/lib/projection/tablets';
 
 const whole = { tabletMass: 227, count: 3, strength: 90, erodedShare: 0 };
@@ -49,12 +50,14 @@ describe('lifeOf', () => {
 });
 
 describe('loadOfMass', () => {
+  const usual = { tabletMass: 227, strength: 90 };
+
   it('makes a mass up from as few tablets as can be, eroded alike', () => {
-    const load = loadOfMass(300, 227, 90);
+    const load = loadOfMass(300, usual);
     expect(load).toMatchObject({ count: 2, tabletMass: 227, strength: 90 });
     expect(2 * 227 * massLeft(load!.erodedShare)).toBeCloseTo(300, 6);
-    expect(loadOfMass(227, 227, 90)).toMatchObject({ count: 1, erodedShare: expect.closeTo(0, 9) as number });
-    expect(loadOfMass(0, 227, 90)).toBeUndefined();
+    expect(loadOfMass(227, usual)).toMatchObject({ count: 1, erodedShare: expect.closeTo(0, 9) as number });
+    expect(loadOfMass(0, usual)).toBeUndefined();
   });
 });
 
@@ -69,5 +72,33 @@ describe('erode', () => {
     erode(loads, 100, 24, { tabletLife: 48, volume: 60 });
     expect(loads[0]!.erodedShare).toBe(1);
     expect(erode(loads, 24, 24, { tabletLife: 48, volume: 60 }).chlorine).toBe(0);
+  });
+});
+
+describe('tablets that are not trichlor', () => {
+  const parameters = { tabletLife: 48, volume: 50 };
+  const releaseOf = (substance: 'calcium-hypochlorite' | 'dichlor', strength: number) => {
+    const load = { ...tabletOf(substance, { strength }), count: 2, erodedShare: 0 };
+    // Half the life and a step of 6 h: rates times hours is what went into the water.
+    const release = erode([load], 24, 6, parameters);
+    return { release, mass: 2 * 227 * (1 - massLeft(0.5)) };
+  };
+
+  // Ca(OCl)2: A+2, FC+2, Ca+1 for each mol; available chlorine is 2 Cl2.
+  it('of calcium hypochlorite bring calcium and alkalinity and no stabilizer', () => {
+    const { release, mass } = releaseOf('calcium-hypochlorite', 65);
+    const chlorine = (mass * 0.65) / 50;
+    expect(release.chlorine * 6).toBeCloseTo(chlorine, 9);
+    expect(release.cyanurate).toBe(0);
+    const moles = chlorine / 1000 / 70.906;
+    expect(release.calcium * 6).toBeCloseTo(moles / 2, 8);
+    expect(release.alkalinity * 6).toBeCloseTo(moles, 8);
+  });
+
+  it('of dichlor bring half a mol of stabilizer for each mol of chlorine', () => {
+    const { release, mass } = releaseOf('dichlor', 56);
+    expect(release.chlorine * 6).toBeCloseTo((mass * 0.56) / 50, 9);
+    expect(release.cyanurate * 6).toBeCloseTo((release.chlorine * 6) / 1000 / 70.906 / 2, 8);
+    expect(release.calcium).toBe(0);
   });
 });

@@ -160,6 +160,8 @@ const arithmetic: Record<string, string> = {
   'planner/alternatives#LIQUID_DENSITY': 'density of liquid, to tell a weight',
   'planner/checks#SOON_AFTER': 'when nobody tests again',
   'planner/checks#checksOf': 'days of a week',
+  'planner/checks#DAY': 'a unit',
+  'projection/tablets#GRAMS_PER_MOLE': 'a unit, from a molar mass',
   'planner/companion-week#SKETCHES_ASKED': 'how a search goes',
   'planner/companion-week#MOST_MOMENTS': 'how a search goes',
   'planner/context#QUICK_MEMBERS': 'how a search goes',
