@@ -1,4 +1,4 @@
-import { readFileSync } from 'node:fs';
+import { readdirSync, readFileSync } from 'node:fs';
 import { randomUUID } from 'node:crypto';
 import { sql } from 'drizzle-orm';
 import { describe, expect, it } from 'vitest';
@@ -8,6 +8,16 @@ import { people } from '@/db/schema';
 import { freshFile } from '@/tests/support/test-database';
 
 const now = new Date('2026-07-05T12:00:00Z');
+
+/** The tables that migrations after a first one make, in the order in which they can go again. */
+function tablesMadeAfter(first: string): string[] {
+  const later = readdirSync('drizzle').filter((file) => file.endsWith('.sql') && file !== `${first}.sql`);
+  return later
+    .toSorted()
+    .flatMap((file) => [...readFileSync(`drizzle/${file}`, 'utf8').matchAll(/CREATE TABLE `(\w+)`/g)])
+    .map(([, table]) => table!)
+    .toReversed();
+}
 
 describe('prepareDatabase', () => {
   it('turns on the write-ahead log and copies nothing when the file is new or up to date', async () => {
@@ -23,13 +33,15 @@ describe('prepareDatabase', () => {
     const db = openDatabase(url);
     await prepareDatabase(db, url, now);
     await db.insert(people).values({ id: randomUUID(), name: 'Ines', createdAt: now });
-    const journal = JSON.parse(readFileSync('drizzle/meta/_journal.json', 'utf8')) as { entries: { when: number }[] };
+    const journal = JSON.parse(readFileSync('drizzle/meta/_journal.json', 'utf8')) as {
+      entries: { when: number; tag: string }[];
+    };
     const second = journal.entries[1];
     if (!second) throw new Error('There is no second migration.');
     // As if everything after the first migration were still to come.
     const triggers = await db.all<{ name: string }>(sql`SELECT name FROM sqlite_master WHERE type = 'trigger'`);
     for (const { name } of triggers) await db.run(sql.raw(`DROP TRIGGER "${name}"`));
-    for (const table of ['posteriors', 'tablets_found']) await db.run(sql.raw(`DROP TABLE ${table}`));
+    for (const table of tablesMadeAfter(journal.entries[0]!.tag)) await db.run(sql.raw(`DROP TABLE ${table}`));
     await db.run(sql`ALTER TABLE pools DROP COLUMN learning_from`);
     await db.run(sql`DELETE FROM __drizzle_migrations WHERE created_at >= ${second.when}`);
 

@@ -27,7 +27,7 @@ const targets = () =>
 
 it('leads only to places that exist, and to the emergency card from bar and head', () => {
   renderWithWords(<HouseholdShell frame={frame}>the sheet</HouseholdShell>);
-  expect(new Set(targets())).toEqual(new Set(['', '/week', '/test', '/pool', '/help', '/help/emergency']));
+  expect(new Set(targets())).toEqual(new Set(['', '/week', '/test', '/rounds', '/pool', '/help', '/help/emergency']));
   expect(targets().filter((target) => target === '/help/emergency')).toHaveLength(2);
 });
 
