@@ -25,7 +25,8 @@ export function Dialog({ open, onOpenChange, title, description, closeLabel, chi
     <BaseDialog.Root open={open} onOpenChange={onOpenChange}>
       <BaseDialog.Portal>
         <BaseDialog.Backdrop className={scrim} />
-        <BaseDialog.Viewport className="fixed inset-0 z-20 flex items-end justify-center overflow-y-auto sm:items-center sm:p-6">
+        {/* Above the tabs of a phone, which would cover its buttons. */}
+        <BaseDialog.Viewport className="fixed inset-0 z-30 flex items-end justify-center overflow-y-auto sm:items-center sm:p-6">
           <BaseDialog.Popup
             className={classNames(
               'relative w-full max-w-form border-t-stop border-ink bg-paper-lift p-5 text-body text-ink outline-none sm:border-due sm:p-6',
