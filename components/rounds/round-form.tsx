@@ -30,6 +30,8 @@ export function RoundForm({ household, serverNow, known }: Props) {
   const [missing, setMissing] = useState(false);
   // One id for as long as the page is open: sent twice, the round is written down once.
   const [id] = useState(() => crypto.randomUUID());
+  // The server's clock as it goes on from here: the device's own may be wrong.
+  const [openedAt] = useState(() => Date.now());
   const read = readPressures(pressure, household.unitSystem);
   const toggle = (item: RoundItem) =>
     setExceptions((before) =>
@@ -39,7 +41,12 @@ export function RoundForm({ household, serverNow, known }: Props) {
     );
   const send = () => {
     if (!read) return setMissing(true);
-    record.mutate({ id, doneAt: new Date().toISOString(), exceptions: [...exceptions], ...read });
+    record.mutate({
+      id,
+      doneAt: new Date(serverNow + Math.max(0, Date.now() - openedAt)).toISOString(),
+      exceptions: [...exceptions],
+      ...read,
+    });
   };
 
   if (record.isSuccess)

@@ -10,15 +10,15 @@ export const weights = {
   errand: 3,
   /** One more full test. */
   fullTest: 5,
-  /** One mg/L under the lowest level for one hour: expected over the ensemble, and again for its median. */
+  /** One mg/L under the lowest level for one hour: expected over the ensemble, and again for its middle. */
   shortfall: 0.25,
   medianShortfall: 1.5,
-  /** One mg/L over the swim limit for one hour in which somebody may swim: expected, and for the median. */
+  /** One mg/L over the swim limit for one hour in which somebody may swim: expected, and for the middle. */
   excess: 0.15,
   medianExcess: 1,
   /** How many times heavier each mg/L over 10 weighs, at any hour. */
   overMaximum: 10,
-  /** One swim hour in which the median is under the lowest level or over the swim limit: nobody may go in. */
+  /** One swim hour in which the middle is under the lowest level or over the swim limit: nobody may go in. */
   closedSwimHour: 0.4,
   /** Each 0.1 of pH outside 7.2 to 7.8 for one hour, median. */
   pHOutside: 0.2,

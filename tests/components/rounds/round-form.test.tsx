@@ -34,6 +34,9 @@ describe('the ten-minute round', () => {
     fireEvent.click(screen.getByRole('button', { name: 'All fine' }));
     expect(await screen.findByText('The round is kept.')).toBeInTheDocument();
     expect(sent).toMatchObject([{ exceptions: [] }]);
+    // By the server's clock, whatever the device's says.
+    const { doneAt } = sent[0] as { doneAt: string };
+    expect(Date.parse(doneAt) - serverNow).toBeLessThan(60_000);
     expect(screen.getAllByRole('link', { name: 'To the week sheet' })).not.toHaveLength(0);
   });
 
