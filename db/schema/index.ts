@@ -1,4 +1,5 @@
 export { auditTrail } from './audit-trail';
+export { houseNotes } from './house-notes';
 export { households } from './households';
 export { memberships } from './memberships';
 export { people } from './people';
@@ -13,5 +14,8 @@ export { readings, readingValues, readingVersions } from './readings';
 export { rounds } from './rounds';
 export { sessions } from './sessions';
 export { shelfProducts } from './shelf-products';
+export { situationTicks, situations } from './situations';
+export { stopConfirmations } from './stop-confirmations';
 export { tabletsFound } from './tablets-found';
+export { visits } from './visits';
 export { weekDays } from './week-days';

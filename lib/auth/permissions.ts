@@ -23,6 +23,8 @@ const rules = {
   'correct-any-test': { roles: owners, otherwise: 'Only an owner can correct the tests of others.' },
   'do-rounds': { roles: carers, otherwise: onlyCarers },
   'report-events': { roles: carers, otherwise: onlyCarers },
+  'open-situations': { roles: carers, otherwise: onlyCarers },
+  'keep-house-notes': { roles: carers, otherwise: onlyCarers },
   'change-week-ahead': { roles: carers, otherwise: onlyCarers },
   plan: { roles: carers, otherwise: onlyCarers },
   'read-safety-card': { roles: carers, otherwise: onlyCarers },
