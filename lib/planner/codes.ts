@@ -17,6 +17,10 @@ export const doseReasons = [
   'closes-gap',
   'quick-raise',
   'first-dose-halved',
+  /** Asked for by an open situation. */
+  'treatment-evening',
+  'raise-to-limit',
+  'pH-before-treatment',
   ...companionReasons,
 ] as const;
 export type DoseReason = (typeof doseReasons)[number];
@@ -27,6 +31,7 @@ export const checkReasons = [
   'after-halved-dose',
   'after-companion',
   'mid-week-pays',
+  'after-treatment',
   'next-week',
 ] as const;
 export type CheckReason = (typeof checkReasons)[number];
@@ -46,6 +51,9 @@ export const reasonCodes = [
   /** First sentences when the week cannot be kept in range. */
   'replace-water-first',
   'few-open-hours',
+  /** An open situation leads: its doses take the place of the week's, or nothing is dosed. */
+  'situation-treats',
+  'situation-holds',
   /** Why tablets, how many, or why none. */
   'tablets-carry',
   'no-tablets-stabilizer-high',

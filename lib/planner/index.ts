@@ -1,30 +1,29 @@
-import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { analysisAt, type CourseBand } from '@/lib/projection';
-import { integrateWeek } from '@/lib/projection/integrate';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { Cost, WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { alternativesOf, burdenOf } from './alternatives';
 import { assertSafePlan } from './safety/assert-safe-plan';
+import { frame, planWithout } from './bare-plan';
 import { checksOf } from './checks';
 import { companionWeek } from './companion-week';
 import type { Companion } from './companions/companion';
-import { contextOf, type PlanContext } from './context';
+import { contextOf } from './context';
 import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
-import { weekDoseOf } from './given-doses';
 import { brokenLimits, openSwimShare } from './limits-broken';
 import { midWeekTestPays } from './mid-week-test';
 import { needsOf } from './needs';
 import { plannedDoses } from './planned-doses';
 import { projectionOf } from './projection-of';
 import { searchPlan } from './search';
-import { ENGINE_VERSION } from './version';
 import { sketchWeek } from './week-sketch';
 import { weights } from './weights';
 
 export { assertSafePlan } from './safety/assert-safe-plan';
+export { projectScenario } from './project-scenario';
+export { holdWeek, treatmentWeek } from './treatment-week';
 export { ENGINE_VERSION } from './version';
 export type { CourseBand };
 
@@ -88,65 +87,6 @@ function withCompanion(cost: Cost, companion: Companion | null, { preferences }:
   return { ...cost, money: cost.money + money, visits: cost.visits + visit, total: cost.total + money + visit };
 }
 
-/** Projects the scenario's own `doses` and plans nothing: bands, broken limits and the end of the week for them. */
-export function projectScenario(scenario: Scenario): WeekPlan {
-  const { blocking, wanted } = needsOf(scenario);
-  if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
-  const base = contextOf(scenario);
-  const doses = (scenario.doses ?? []).map((dose, index) =>
-    weekDoseOf(dose, `doses[${index}]`, scenario.shelf, scenario.pool),
-  );
-  const stabilized = base.stabilizedProductUsed || doses.some(({ kind }) => kind === 'tablets');
-  const everything = [...base.given, ...doses];
-  const run = ({ start, setting }: PlanContext['median']) => integrateWeek(base.forcing, start, everything, setting);
-  const median = run(base.median);
-  const projection = projectionOf(base.members.map(run), median, base, stabilized);
-  return {
-    ...frame(base),
-    projection,
-    doses: [],
-    checks: [],
-    endOfWeek: analysisAt(median.end, median.endPH),
-    cost: null,
-    mix: null,
-    alternatives: [],
-    openSwimShare: openSwimShare(projection, [], base),
-    broken: brokenLimits(projection, base, stabilized),
-    reasons: [],
-    cautions: [],
-    needs: wanted,
-  };
-}
-
-function frame({ start, hours, scenario }: PlanContext) {
-  return {
-    engineVersion: ENGINE_VERSION,
-    takenAt: toOffsetIso(start.takenAt, scenario.pool.timeZone),
-    hours: hours.map((hour) => new Date(hour).toISOString()),
-  };
-}
-
 function endOf({ median }: Evaluated) {
   return analysisAt(median.end, median.endPH);
-}
-
-function planWithout(scenario: Scenario, needs: WeekPlan['needs']): WeekPlan {
-  const newest = [scenario.reading].flat().reduce((a, b) => (Date.parse(b.takenAt) > Date.parse(a.takenAt) ? b : a));
-  return {
-    engineVersion: ENGINE_VERSION,
-    takenAt: newest.takenAt,
-    hours: [],
-    projection: null,
-    doses: [],
-    checks: [],
-    endOfWeek: null,
-    cost: null,
-    mix: null,
-    alternatives: [],
-    openSwimShare: null,
-    broken: [],
-    reasons: [],
-    cautions: [],
-    needs,
-  };
 }

@@ -25,8 +25,21 @@ export function companionAmount(
   need: CompanionNeed,
   product: ShelfProduct & { substance: CompanionSubstance },
   water: WaterAnalysis,
-  { volume, pHError, halved }: Dosing,
+  dosing: Dosing,
 ): number {
+  const { wanted, most } = companionWanted(need, product, water, dosing);
+  const measure = product.measure ?? (product.form === 'liquid' ? 100 : 50);
+  const measures = need.reason === 'lowers-pH' ? Math.floor(wanted / measure) : Math.ceil(wanted / measure - 0.5);
+  return Math.min(measures, Math.floor(most / measure + 1e-9)) * measure;
+}
+
+/** The same without whole measures: what the target wants within the cap, and the cap of the evening [g or mL]. */
+export function companionWanted(
+  need: Pick<CompanionNeed, 'reason' | 'quantity' | 'target'>,
+  product: ShelfProduct & { substance: CompanionSubstance },
+  water: WaterAnalysis,
+  { volume, pHError, halved }: Dosing,
+): { wanted: number; most: number } {
   const { substance } = product;
   const cap = companionCap[substance];
   const strength = product.strength ?? cap.strength;
@@ -37,9 +50,7 @@ export function companionAmount(
   );
   const target = need.reason === 'lowers-pH' ? Math.max(need.target, lowest) : need.target;
   const wanted = wantedAmount(water, volume, { substance, strength }, { quantity: need.quantity, value: target }, most);
-  const measure = product.measure ?? (product.form === 'liquid' ? 100 : 50);
-  const measures = need.reason === 'lowers-pH' ? Math.floor(wanted / measure) : Math.ceil(wanted / measure - 0.5);
-  return Math.min(measures, Math.floor(most / measure + 1e-9)) * measure;
+  return { wanted, most };
 }
 
 function wantedAmount(

@@ -82,10 +82,10 @@ function companionFor(need: CompanionNeed, plan: ByMedian, context: PlanContext)
   };
 }
 
-type CompanionProduct = ShelfProduct & { substance: CompanionSubstance };
+export type CompanionProduct = ShelfProduct & { substance: CompanionSubstance };
 
 /** What the shelf holds of any of the substances, else the usual one to buy. */
-function productFor(
+export function productFor(
   substances: readonly CompanionSubstance[],
   { shelf, preferences }: Scenario,
 ): CompanionProduct | undefined {
@@ -106,6 +106,6 @@ function untested({ scenario, start }: PlanContext): boolean {
   });
 }
 
-function everGiven(substance: CompanionSubstance, { given, shelf }: Scenario): boolean {
+export function everGiven(substance: CompanionSubstance, { given, shelf }: Scenario): boolean {
   return given.some(({ product: id }) => shelf.find((product) => product.id === id)?.substance === substance);
 }

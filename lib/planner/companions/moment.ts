@@ -53,7 +53,7 @@ function acidMorning({ fromHour }: CompanionNeed, from: number, chlorine: readon
 }
 
 /** Sunrise rounded up to a quarter of an hour, unless somebody may swim then or there is none. */
-function firstLight(day: CalendarDay, { scenario: { pool } }: PlanContext): number | null {
+export function firstLight(day: CalendarDay, { scenario: { pool } }: Pick<PlanContext, 'scenario'>): number | null {
   const { sunrise } = daylightOf(wallToInstant(day, '12:00', pool.timeZone).instant, pool.latitude, pool.longitude);
   if (sunrise === null) return null;
   const at = Math.ceil(sunrise / QUARTER_HOUR) * QUARTER_HOUR;

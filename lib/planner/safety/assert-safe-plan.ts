@@ -17,12 +17,17 @@ import { tabletFaults } from './tablet-faults';
  * shelf holds unless marked to buy; a volume outside 1 to 1000 m3; figures that are not finite. The ways that a plan was
  * compared with are held to the same.
  *
+ * @param treatmentEvening whether a situation treats the water: granules and liquid may then raise to 10 mg/L in all
  * @throws AppError plan-refused, naming each fault
  */
-export function assertSafePlan(scenario: Scenario, plan: WeekPlan): void {
+export function assertSafePlan(
+  scenario: Scenario,
+  plan: WeekPlan,
+  { treatmentEvening = false }: { treatmentEvening?: boolean } = {},
+): void {
   const faults = [
     ...figureFaults(scenario, plan),
-    ...dosesFaults(plan.doses, scenario),
+    ...dosesFaults(plan.doses, scenario, treatmentEvening),
     ...projectionFaults(plan),
     ...companionFaults(plan, scenario),
     ...plan.alternatives.flatMap(({ kind, doses }) =>
@@ -32,10 +37,10 @@ export function assertSafePlan(scenario: Scenario, plan: WeekPlan): void {
   if (faults.length > 0) throw new AppError('plan-refused', `The plan was refused: ${faults.join('; ')}.`);
 }
 
-function dosesFaults(doses: readonly PlannedDose[], scenario: Scenario): string[] {
+function dosesFaults(doses: readonly PlannedDose[], scenario: Scenario, treatmentEvening = false): string[] {
   return [
     ...doses.flatMap((dose) => doseFaults(dose, scenario)),
-    ...eveningFaults(doses, scenario),
+    ...eveningFaults(doses, scenario, treatmentEvening),
     ...tabletFaults(doses, scenario),
     ...stockFaults(doses, scenario),
   ];

@@ -16,8 +16,11 @@ const acids: readonly string[] = ['hydrochloric-acid', 'sodium-bisulfate'];
 type Fast = keyof typeof fastChlorineCap;
 type Visit = { at: string; substance: string; amount: number; rise: number; product: ShelfProduct | undefined };
 
+/** What may go in beyond its cap on a treatment evening: the likely range alone limits it. */
+const ofTreatment: readonly string[] = ['calcium-hypochlorite', 'sodium-hypochlorite'];
+
 /** What is wrong between doses: too near to each other or to what was given, too much chlorine in one evening. */
-export function eveningFaults(doses: readonly PlannedDose[], scenario: Scenario): string[] {
+export function eveningFaults(doses: readonly PlannedDose[], scenario: Scenario, treatmentEvening: boolean): string[] {
   const { shelf, given, pool } = scenario;
   const productOf = (id: string | null) => shelf.find((product) => product.id === id);
   const planned = doses.map((dose): Visit => ({ ...dose, product: productOf(dose.product) }));
@@ -32,6 +35,7 @@ export function eveningFaults(doses: readonly PlannedDose[], scenario: Scenario)
   const tooMuch = [...days].flatMap((day) => {
     const shares = [...planned, ...before]
       .filter(({ at }) => dayOf(Date.parse(at), pool.timeZone) === day)
+      .filter(({ substance }) => !treatmentEvening || !ofTreatment.includes(substance))
       .map((visit) => shareOfCap(visit, scenario));
     const planning = planned.some(
       (visit) => isFast(visit.substance) && dayOf(Date.parse(visit.at), pool.timeZone) === day,
