@@ -26,6 +26,8 @@ export const planDoseSchema = plannedDoseSchema.extend({
   /** What the household calls the product; null when it has no name, or has to be bought. */
   productName: z.string().nullable(),
   labelWay: z.enum(labelWays).nullable(),
+  /** The marked measure that the household keeps for the product [g or mL]. */
+  measure: z.number().nullable(),
   steps: z.enum(stepTexts),
   /** From when it may be ticked, how long the pump must run, until when nobody swims. */
   tickFrom: instantSchema,
@@ -40,6 +42,10 @@ export const planDoseSchema = plannedDoseSchema.extend({
   /** Somebody says they are adding it right now. */
   claimedBy: z.string().nullable(),
   undoUntil: instantSchema.nullable(),
+  /** Two people ticked it, and no test has seen the water since. */
+  doubtful: z.boolean(),
+  /** Whoever asks ticks doses, and has yet to confirm by name the Stop of its product. */
+  stopDue: z.boolean(),
 });
 export type PlanDose = z.infer<typeof planDoseSchema>;
 

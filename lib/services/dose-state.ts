@@ -18,6 +18,11 @@ export function claimLasts({ claimedAt }: Pick<StoredDose, 'claimedAt'>, now: Da
   return claimedAt !== null && now.getTime() - claimedAt.getTime() < claimLastsFor;
 }
 
+/** Whether two people ticked it and nobody has measured free chlorine since: perhaps it went in twice. */
+export function isDoubtful({ doubtfulAt }: Pick<StoredDose, 'doubtfulAt'>, chlorineTakenAt: Date | null): boolean {
+  return doubtfulAt !== null && (chlorineTakenAt === null || doubtfulAt > chlorineTakenAt);
+}
+
 /** Whether it went into the water. */
 export function wentIn({ status }: Pick<StoredDose, 'status'>): boolean {
   return status === 'given' || status === 'changed';

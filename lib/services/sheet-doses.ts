@@ -10,7 +10,8 @@ import type { WeekPlan } from '@/lib/schemas/plan';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import { limits } from '@/lib/standards/limits';
-import { claimLasts } from './dose-state';
+import { claimLasts, isDoubtful } from './dose-state';
+import { stopProductOf } from './stop-product';
 import { swimWaitUntil } from './swim-wait';
 
 const HOUR = 3_600_000;
@@ -47,14 +48,20 @@ type Around = {
   now: Date;
   /** Tablets found before doses, by their ids. */
   found: ReadonlyMap<string, number>;
+  /** When free chlorine was measured last. */
+  chlorineTakenAt: Date | null;
+  /** Products whose Stop whoever asks has confirmed lately; null for somebody who ticks no doses. */
+  confirmedStops: ReadonlySet<string> | null;
 };
 
 /** A dose as the sheet shows it: which steps, and the hours that follow from when it goes in or went in. */
-export function sheetDose(dose: StoredDose, { plan, shelf, feederKind, timeZone, now, found }: Around): PlanDose {
+export function sheetDose(dose: StoredDose, around: Around): PlanDose {
+  const { plan, shelf, feederKind, timeZone, now, found, chlorineTakenAt, confirmedStops } = around;
   const iso = (instant: number) => toOffsetIso(instant, timeZone);
   const at = dose.at.getTime();
   const poured = dose.givenAt?.getTime() ?? at;
-  const labelWay = shelf.find(({ id }) => id === dose.productId)?.labelWay ?? null;
+  const onShelf = shelf.find(({ id }) => id === dose.productId);
+  const labelWay = onShelf?.labelWay ?? null;
   const isTablet = dose.form === 'tablet';
   return {
     id: dose.id,
@@ -72,6 +79,7 @@ export function sheetDose(dose: StoredDose, { plan, shelf, feederKind, timeZone,
     ...(dose.effect === null ? {} : { effect: dose.effect }),
     reason: dose.reason,
     labelWay,
+    measure: onShelf?.measure ?? null,
     steps: stepsOf(dose, labelWay, feederKind),
     status: dose.status,
     tickFrom: iso(tickFrom(dose)),
@@ -84,6 +92,8 @@ export function sheetDose(dose: StoredDose, { plan, shelf, feederKind, timeZone,
     tabletsLeft: found.get(dose.id) ?? null,
     claimedBy: claimLasts(dose, now) ? dose.claimedByName : null,
     undoUntil: dose.tickedAt === null ? null : iso(dose.tickedAt.getTime() + undoWindow),
+    doubtful: isDoubtful(dose, chlorineTakenAt),
+    stopDue: confirmedStops?.has(stopProductOf(dose, onShelf)) === false,
   };
 }
 

@@ -61,7 +61,6 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
   const open = doses.filter(
     ({ stored }) => stored.status === 'planned' && stored.at.getTime() <= now && stored.at.getTime() > since,
   );
-  const doubtSince = freeChlorine?.takenAt ?? -Infinity;
   const { swimming, rain } = spreadDays(ground, since);
   const past = swimming.filter(({ until }) => until <= now);
   return {
@@ -97,7 +96,7 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
       green: readings[0]?.look === 'green',
       accident: false,
       drainCoverBroken: happened('drain-cover'),
-      suspectedDoubleDose: doses.some(({ stored }) => (stored.doubtfulAt?.getTime() ?? -Infinity) > doubtSince),
+      suspectedDoubleDose: doses.some(({ shown }) => shown.doubtful),
       falseZero: zeroDoubt === 'open',
     },
     ahead: { rain, swimmerHours: swimming.filter(({ until }) => until > now) },

@@ -4,12 +4,13 @@ import { listOpenPoolEvents } from '@/db/queries/pool-events';
 import { findPool } from '@/db/queries/pools';
 import { lastMeasured, listReadings } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
+import { listConfirmedStops } from '@/db/queries/stop-confirmations';
 import { tabletsFoundBefore } from '@/db/queries/tablets-found';
 import { listWeekDays } from '@/db/queries/week-days';
 import { firstWeekday } from '@/lib/calendar/first-weekday';
 import { addDays, type CalendarDay, dayOf, startOfDay, weekOf } from '@/lib/calendar/household-day';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
-import { assertMay } from '@/lib/auth/permissions';
+import { assertMay, may } from '@/lib/auth/permissions';
 import { AppError } from '@/lib/errors';
 import type { Pool } from '@/lib/schemas/pool';
 import type { WeekQuery } from '@/lib/schemas/week-query';
@@ -66,15 +67,17 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     until: new Date(Math.max(now.getTime() + DAYS_OF_A_PLAN * DAY, shown.until.getTime())),
     lastReading: last?.takenAt ?? null,
   });
+  const chlorineReading = readings.find(({ values }) => values.freeChlorine !== undefined);
   const around = {
     ...{ plan: plan?.result ?? null, shelf, feederKind: found.pool.feederKind, timeZone, now },
     found: await tabletsFoundBefore(db, { householdId, doseIds: doses.map(({ id }) => id) }),
+    chlorineTakenAt: chlorineReading?.takenAt ?? null,
+    confirmedStops: may(access, 'tick-doses') ? await confirmedStops(context) : null,
   };
   const bothForms = doses.map((stored) => ({ stored, shown: sheetDose(stored, around) }));
   const firstDay = dayOf(Math.min(last?.takenAt.getTime() ?? now.getTime(), shown.from.getTime()), timeZone);
   const lastDay = addDays(today > (days[6] ?? today) ? today : (days[6] ?? today), DAYS_OF_A_PLAN);
   const said = await listWeekDays(db, { householdId, from: firstDay, until: lastDay });
-  const chlorineReading = readings.find(({ values }) => values.freeChlorine !== undefined);
   const tested = await lastMeasured(db, { householdId, quantities: ['freeChlorine', 'pH'] });
   // What happened after the older of the two is not in the test; before any test, all of it counts.
   const testedSince = Math.min(...(tested.length > 0 ? tested : [new Date(0)]).map((taken) => taken.getTime()));
@@ -114,6 +117,12 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     doses: bothForms.filter(({ stored }) => isShown(stored.givenAt ?? stored.at, shown)).map((dose) => dose.shown),
     checks: sheetChecks(plan, readings, timeZone),
   };
+}
+
+/** The products whose Stop this person need not confirm at present. */
+function confirmedStops({ db, access: { householdId, personId }, now }: ServiceContext): Promise<ReadonlySet<string>> {
+  const since = new Date(now.getTime() - limits.stopConfirmation.value * DAY);
+  return listConfirmedStops(db, { householdId, personId, since });
 }
 
 type Span = { from: Date; until: Date };

@@ -98,6 +98,11 @@ export const limits = {
     unit: 'hours',
     source: { kind: 'practice', text: 'a dose is ticked at its time, not in the morning' },
   },
+  stopConfirmation: {
+    value: 90,
+    unit: 'days',
+    source: { kind: 'practice', text: 'a Stop that is asked at every dose is pressed blind by the third week' },
+  },
   swimAfterDose: {
     value: 4,
     unit: 'hours',

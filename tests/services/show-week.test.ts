@@ -121,6 +121,8 @@ describe('showWeek with a plan', { timeout: 60_000 }, () => {
       productName: 'Granules',
       steps: 'granules-dissolve',
       labelWay: 'dissolve',
+      // As the household keeps it on the shelf.
+      measure: 50,
     });
     expect(Date.parse(fast.tickFrom)).toBe(hour - 3 * 3_600_000);
     expect(Date.parse(fast.pumpUntil ?? '')).toBe(hour + (fast.rise > 5 ? 8 : 4) * 3_600_000);

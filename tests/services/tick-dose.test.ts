@@ -203,6 +203,8 @@ describe('two ticks of one dose', { timeout: 60_000 }, () => {
     const sheet = await tickDose(at(other, minutes(20, due)), dose.id, said({ action: 'given' }));
     expect(sheet.verdict.state).toBe('stay-out');
     expect(sheet.verdict.reasons[0]?.code).toBe('suspected-double-dose');
+    // It is that dose which is in doubt, and no other.
+    expect(sheet.doses.filter(({ doubtful }) => doubtful).map(({ id }) => id)).toEqual([dose.id]);
     const details = (await db.select().from(auditTrail)).map(({ detail }) => detail);
     expect(details).toContainEqual(expect.objectContaining({ suspected: 'double-dose' }));
     const nextDay = hoursLater(20, due);
@@ -210,6 +212,7 @@ describe('two ticks of one dose', { timeout: 60_000 }, () => {
     await recordReading(at(owner, nextDay), aFullTest(nextDay));
     const codes = (await showWeek(at(owner, nextDay))).verdict.reasons.map(({ code }) => code);
     expect(codes).not.toContain('suspected-double-dose');
+    expect((await shownIn(at(owner, nextDay)))?.doubtful).toBe(false);
   });
 
   it('in the same moment are both on record', async () => {

@@ -20,6 +20,7 @@ it.each([
   ['planReadingAge', 14],
   ['rainEndsVerdict', 10],
   ['acidToChlorineGap', 4],
+  ['stopConfirmation', 90],
   ['swimAfterDose', 4],
   ['pumpAfterDose', 4],
   ['pumpAfterLargeDose', 8],

@@ -188,6 +188,7 @@ function aDose(number: number, at: number, iso: Iso, overrides: Partial<PlanDose
     rise: 0.9,
     reason: 'closes-gap',
     labelWay: 'dissolve',
+    measure: null,
     steps: 'granules-dissolve',
     status: 'planned',
     tickFrom: iso(at - 3 * HOUR),
@@ -200,6 +201,8 @@ function aDose(number: number, at: number, iso: Iso, overrides: Partial<PlanDose
     tabletsLeft: null,
     claimedBy: null,
     undoUntil: null,
+    doubtful: false,
+    stopDue: false,
     ...overrides,
   };
 }
