@@ -10,6 +10,7 @@ import { DoseActions } from './dose-actions';
 import { DoseReason } from './dose-reason';
 import { mayUndo, nextDose } from './dose-state';
 import { DoseSteps } from './dose-steps';
+import { MarkedMeasure } from './marked-measure';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import type { ToDoItem } from './to-do-items';
@@ -46,6 +47,7 @@ function ListedDose({ dose }: { dose: PlanDose }) {
       </p>
       {isOpen && !onTop && (
         <>
+          <MarkedMeasure dose={dose} />
           <DoseReason dose={dose} />
           <DoseSteps dose={dose} />
         </>

@@ -6,6 +6,7 @@ import { Button } from '@/components/ui/button';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { Tick } from './use-tick';
 import { mayUndo } from './dose-state';
+import { Doubtful } from './doubtful';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useDoseWords } from './use-dose-words';
@@ -29,6 +30,7 @@ export function DoneDose({ dose, tick }: { dose: PlanDose; tick: Tick }) {
         )}
         {dose.status === 'skipped' ? words.skippedBy(dose) : words.doneBy(dose)}
       </p>
+      <Doubtful dose={dose} />
       {dose.status === 'changed' && <p className="text-small text-ink-2">{words.changed(dose)}</p>}
       {dose.form === 'tablet' && dose.status !== 'skipped' && <FoundBefore dose={dose} tick={tick} />}
       {undo && (

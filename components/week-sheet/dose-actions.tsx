@@ -1,21 +1,17 @@
 'use client';
 
-import { Check, Eye, Hand, UserRound } from 'lucide-react';
+import { Eye } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import { useState } from 'react';
-import { Button } from '@/components/ui/button';
 import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { bold } from './bold';
+import { ClaimedBy } from './claimed-by';
 import { momentOf, tickBar } from './dose-state';
 import { DoneDose } from './done-dose';
-import { OtherAmount } from './other-amount';
+import { DueActions } from './due-actions';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
-import { SkipDose } from './skip-dose';
-import { TabletsLeft } from './tablets-left';
-import { useDosingBar } from './use-dosing-bar';
-import { type Tick, useTick } from './use-tick';
+import { useTick } from './use-tick';
 import { useTimes } from './use-times';
 import { useTickProblem } from './use-tick-problem';
 
@@ -47,79 +43,6 @@ export function DoseActions({ dose }: { dose: PlanDose }) {
         </p>
       )}
     </div>
-  );
-}
-
-function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {
-  const t = useTranslations('doses');
-  const { sheet } = useSheet();
-  const [asking, setAsking] = useState<'other' | 'skip' | undefined>(undefined);
-  const [left, setLeft] = useState<number | undefined>(undefined);
-  // What went in all the same can be ticked; nobody is asked to begin.
-  const barred = useDosingBar() !== undefined;
-  const found = left === undefined ? {} : { tabletsLeft: left };
-  if (asking === 'other')
-    return <OtherAmount dose={dose} tick={tick} found={found} onClose={() => setAsking(undefined)} />;
-  if (asking === 'skip') return <SkipDose tick={tick} onClose={() => setAsking(undefined)} />;
-  return (
-    <>
-      {dose.claimedBy !== null ? (
-        <ClaimedBy name={dose.claimedBy} />
-      ) : barred ? null : (
-        <Button
-          wide
-          size="large"
-          onClick={() => void tick.send({ action: 'claim' })}
-          busy={tick.busy === 'claim' ? t('action.claimBusy') : undefined}
-        >
-          <Hand aria-hidden="true" className="size-5" />
-          {t('action.claim')}
-        </Button>
-      )}
-      {dose.claimedBy === sheet.me.name && (
-        <Button
-          wide
-          onClick={() => void tick.send({ action: 'undo' })}
-          busy={tick.busy === 'undo' ? t('action.undoBusy') : undefined}
-        >
-          {t('action.unclaim')}
-        </Button>
-      )}
-      {dose.form === 'tablet' && <TabletsLeft value={left} onChange={setLeft} />}
-      <Button
-        wide
-        size="large"
-        variant="primary"
-        onClick={() => void tick.send({ action: 'given', ...found })}
-        busy={tick.busy === 'given' ? t('action.givenBusy') : undefined}
-      >
-        <Check aria-hidden="true" className="size-5" />
-        {t('action.given')}
-      </Button>
-      <div className="flex flex-wrap justify-between gap-x-4">
-        <Button variant="quiet" onClick={() => setAsking('other')}>
-          {t('action.other')}
-        </Button>
-        <Button variant="quiet" onClick={() => setAsking('skip')}>
-          {t('action.skip')}
-        </Button>
-      </div>
-      <p className="flex gap-2 text-small text-ink-2">
-        <UserRound aria-hidden="true" className="size-4.5 shrink-0" />
-        {t('may', { name: sheet.me.name })}
-      </p>
-    </>
-  );
-}
-
-function ClaimedBy({ name }: { name: string }) {
-  const t = useTranslations('doses.claimed');
-  const { sheet } = useSheet();
-  return (
-    <p className="flex items-center gap-2 font-strong">
-      <Hand aria-hidden="true" className="size-5" />
-      {name === sheet.me.name ? t('self') : t('other', { name })}
-    </p>
   );
 }
 

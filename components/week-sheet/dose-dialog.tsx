@@ -7,8 +7,10 @@ import { DoseActions } from './dose-actions';
 import { DoseSteps } from './dose-steps';
 import { DoseReason } from './dose-reason';
 import { momentOf } from './dose-state';
+import { MarkedMeasure } from './marked-measure';
 import { useSheet } from './sheet-context';
 import { StopLine } from './stop-line';
+import { useAsksStop } from './use-asks-stop';
 import { useDoseWords } from './use-dose-words';
 
 /** One dose on a desk: its steps, the Stop, and what may be done about it now. */
@@ -25,6 +27,7 @@ export function DoseDialog({
   const common = useTranslations('common');
   const { picture } = useSheet();
   const words = useDoseWords();
+  const asksStop = useAsksStop()(dose);
   const moment = momentOf(dose, picture.now);
   const isOpen = moment !== 'done' && moment !== 'skipped';
   return (
@@ -36,13 +39,14 @@ export function DoseDialog({
       closeLabel={common('close')}
     >
       <div className="grid gap-3">
+        {isOpen && <MarkedMeasure dose={dose} />}
         <DoseReason dose={dose} />
         {isOpen && (
           <section aria-label={t('stepsHeading')}>
             <DoseSteps dose={dose} />
           </section>
         )}
-        <StopLine className="border-y border-rule py-2.5" />
+        {!asksStop && <StopLine dose={dose} className="border-y border-rule py-2.5" />}
         <DoseActions dose={dose} />
       </div>
     </Dialog>

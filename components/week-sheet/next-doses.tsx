@@ -10,6 +10,7 @@ import { DoseActions } from './dose-actions';
 import { DoseReason } from './dose-reason';
 import { mayUndo, nextDose } from './dose-state';
 import { DoseSteps } from './dose-steps';
+import { MarkedMeasure } from './marked-measure';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useDoseWords } from './use-dose-words';
@@ -64,6 +65,7 @@ function NextDose({ dose }: { dose: PlanDose }) {
         </span>
       </p>
       <p className="mt-2 font-strong">{words.hourOf(dose, { pump: true })}</p>
+      <MarkedMeasure dose={dose} />
       <DoseReason dose={dose} />
       <section aria-label={t('stepsHeading')} className="mt-2.25 mb-3.5">
         <DoseSteps dose={dose} />

@@ -9,7 +9,10 @@ import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { DoneLine } from './done-line';
 import { DoseDialog } from './dose-dialog';
 import { mayAddFound, mayUndo, momentOf, tickBar } from './dose-state';
+import { Doubtful } from './doubtful';
+import { MarkedMeasure } from './marked-measure';
 import { useSheet } from './sheet-context';
+import { useAsksStop } from './use-asks-stop';
 import { useDosingBar } from './use-dosing-bar';
 import { useDoseWords } from './use-dose-words';
 import { useTick } from './use-tick';
@@ -43,6 +46,7 @@ function DoneToDo({ dose, onOpen }: LineProps) {
         who={skipped ? words.skippedBy(dose) : words.doneBy(dose)}
         skipped={skipped}
       />
+      <Doubtful dose={dose} small />
       {mayAddFound(dose, picture.now, sheet.me) && <StepsLink onPress={onOpen}>{t('tabletsLeft.ask')}</StepsLink>}
       {mayUndo(dose, picture.now, sheet.me) && <StepsLink onPress={onOpen}>{t('action.undo')}</StepsLink>}
     </>
@@ -55,6 +59,7 @@ function OpenToDo({ dose, onOpen }: LineProps) {
   const words = useDoseWords();
   const moment = momentOf(dose, picture.now);
   const barred = useDosingBar();
+  const asksStop = useAsksStop()(dose);
   const ticks = moment !== 'ahead' && tickBar(sheet.me) === undefined;
   return (
     <>
@@ -67,6 +72,7 @@ function OpenToDo({ dose, onOpen }: LineProps) {
       <p className="mb-0.5 text-fine text-ink-2">{words.hourOf(dose, { pump: false })}</p>
       <p className="font-display text-[25px] leading-[27px] font-headline tracking-dose">{words.amountOf(dose)}</p>
       <p className="text-[13.5px] leading-[17px] font-strong">{words.productOf(dose)}</p>
+      <MarkedMeasure dose={dose} small />
       {barred === undefined ? (
         <p className="mt-1.25 text-fine text-ink-2">
           {dose.pumpUntil !== null && <>{words.pump(dose)} </>}
@@ -76,8 +82,10 @@ function OpenToDo({ dose, onOpen }: LineProps) {
         <p className="mt-1.25 border-l-care border-ochre-ink pl-1.5 text-fine font-emphasis">{barred}</p>
       )}
       <div className="mt-auto pt-1">
-        {ticks && barred === undefined && <TickHere dose={dose} />}
-        <StepsLink onPress={onOpen}>{t(ticks ? 'action.stepsAndMore' : 'action.steps')}</StepsLink>
+        {ticks && barred === undefined && !asksStop && <TickHere dose={dose} />}
+        <StepsLink onPress={onOpen}>
+          {t(asksStop ? 'stop.first' : ticks ? 'action.stepsAndMore' : 'action.steps')}
+        </StepsLink>
       </div>
     </>
   );
