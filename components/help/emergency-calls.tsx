@@ -1,10 +1,9 @@
 import { Flame, type LucideIcon, Phone, PhoneCall } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
+import { dialled } from '@/components/ui/phone-link';
 import { textLink } from '@/components/ui/text-link';
 import { type EmergencyCountry, emergencyNumbers } from '@/lib/standards/emergency-numbers';
-
-const dialled = (number: string) => `tel:${number.replace(/[^0-9+]/g, '')}`;
 
 /** Whom to call, one tap each. Where a number is not certain, words stand in its place. */
 export function EmergencyCalls({ country, chooseHref }: { country: EmergencyCountry; chooseHref: string }) {

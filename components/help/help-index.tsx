@@ -5,13 +5,18 @@ import { emergencyCard } from '@/components/navigation/places';
 import { scopeAnchor } from '@/components/start/scope-list';
 import { HelpHead } from './help-head';
 
-/** The help that exists today, trouble first, and what no sheet can know. */
-export function HelpIndex() {
+/**
+ * The help that exists today, trouble first, and what no sheet can know.
+ *
+ * @param member whether somebody looks who belongs to a household with a pool
+ */
+export function HelpIndex({ member }: { member: boolean }) {
   const t = useTranslations('help');
   const how = useTranslations('how');
   const pages = [
     { href: emergencyCard, name: t('emergency.title'), note: t('index.emergencyNote') },
     { href: '/help/safety', name: t('index.safety'), note: t('index.safetyNote') },
+    ...(member ? [{ href: '/house', name: t('index.house'), note: t('index.houseNote') }] : []),
     { href: '/help/how', name: how('title'), note: t('index.howNote') },
     { href: `/#${scopeAnchor}`, name: t('index.scope'), note: t('index.scopeNote') },
   ];

@@ -1,6 +1,6 @@
 'use client';
 
-import { ChevronRight, CircleQuestionMark, Footprints, type LucideIcon, Waves } from 'lucide-react';
+import { ChevronRight, CircleQuestionMark, Footprints, House, type LucideIcon, Waves } from 'lucide-react';
 import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
@@ -25,6 +25,7 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
         </div>
       </div>
       <MorePlace href="/rounds" Icon={Footprints} name={t('rounds')} fact={t('roundsFact')} />
+      <MorePlace href="/house" Icon={House} name={t('house')} fact={t('houseFact')} />
       <MorePlace href="/pool" Icon={Waves} name={t('pool')} fact={t('poolFact')} />
       <MorePlace href="/help" Icon={CircleQuestionMark} name={t('help')} fact={t('helpFact')} />
       <div className="mx-4 flex min-h-14 items-center justify-between gap-3 border-t border-ink text-[15px] leading-5">

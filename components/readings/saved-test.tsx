@@ -16,6 +16,7 @@ import type { RecordedReading } from '@/lib/schemas/reading';
 import { PlanChangeList } from './plan-change-list';
 import { planChanges } from './plan-changes';
 import { useReadingWords } from './reading-words';
+import { ShopPurchases } from './shop-purchases';
 import { useTimeWords } from './use-time-words';
 
 export type SavedTestProps = {
@@ -58,6 +59,7 @@ export function SavedTest({ reading, week, before, onCorrect, children }: SavedT
           {children}
           <SheetStates onCorrect={onCorrect} />
           <Changes doses={week.doses} before={before} />
+          {reading.method === 'slip' ? <ShopPurchases week={week} /> : null}
         </SheetProvider>
       )}
       <div className="border-t border-rule pt-3 text-body">

@@ -7,4 +7,5 @@ export type RoundHousehold = {
   unitSystem: UnitSystem;
   personName: string;
   mayDoRounds: boolean;
+  mayKeepHouseNotes: boolean;
 };

@@ -21,7 +21,9 @@ import { Callout } from '@/components/ui/callout';
 import { classNames } from '@/components/ui/class-names';
 import type { RoundItem } from '@/lib/schemas/round';
 import { filterPressureRise } from '@/lib/standards/filter';
+import { BucketTest } from './bucket-test';
 import { writePressure } from './pressures';
+import { ProfessionalCall } from './professional-call';
 import type { RoundHousehold } from './round-household';
 
 const icons: Record<RoundItem, LucideIcon> = {
@@ -39,6 +41,8 @@ const icons: Record<RoundItem, LucideIcon> = {
 
 /** What asks for a test of the water today. */
 const acidSigns: readonly RoundItem[] = ['pump-seal', 'brushed'];
+/** What may end with a call for a technician. */
+const forTechnician: readonly RoundItem[] = ['pump-seal', 'brushed', 'feeder-lid', 'water-level'];
 
 type Props = {
   item: RoundItem;
@@ -104,6 +108,8 @@ export function RoundRow({ item, off, onToggle, household, cleanPressure, childr
               {t('testNow')}
             </Link>
           )}
+          {item === 'water-level' && <BucketTest household={household} />}
+          {forTechnician.includes(item) && <ProfessionalCall />}
           {item === 'lockers' && (
             <Link href={emergencyCard} className={buttonClass({ variant: 'terra' })}>
               {navigation('emergencyCard')}

@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, asc, eq, gt, isNull, lte, or } from 'drizzle-orm';
+import { and, asc, eq, gt, isNull, lte, ne, or } from 'drizzle-orm';
 import type { DatabaseOrTransaction } from '@/db/client';
 import { households, memberships, people, pools } from '@/db/schema';
 import type { ProvenHouseholdId, SystemScope } from '@/lib/schemas/scope';
@@ -37,6 +37,24 @@ export async function listValidMemberships(db: DatabaseOrTransaction, personId: 
       ),
     )
     .orderBy(asc(memberships.validFrom), asc(memberships.id));
+}
+
+/** Members of a household who are marked as handling chemicals and belong to it now; when they read the safety card. */
+export async function listChemicalHandlers(db: DatabaseOrTransaction, householdId: ProvenHouseholdId, now: Date) {
+  return db
+    .select({ membershipId: memberships.id, name: people.name, safetyCardReadAt: memberships.safetyCardReadAt })
+    .from(memberships)
+    .innerJoin(people, eq(people.id, memberships.personId))
+    .where(
+      and(
+        eq(memberships.householdId, householdId),
+        eq(memberships.handlesChemicals, true),
+        ne(memberships.role, 'viewer'),
+        lte(memberships.validFrom, now),
+        or(isNull(memberships.validUntil), gt(memberships.validUntil, now)),
+      ),
+    )
+    .orderBy(asc(people.name), asc(memberships.id));
 }
 
 /** Marks a member as one who handles chemicals, with the moment the safety card was read; null takes the mark away. */

@@ -27,6 +27,11 @@ export type HouseholdAccess = {
 /** A season comes once a year: so long a reading of the safety card counts. */
 const safetyCardCountsFor = 365 * 24 * 3_600_000;
 
+/** Whether somebody has read the safety card this season. */
+export function safetyCardCounts(readAt: Date | null, now: Date): boolean {
+  return readAt !== null && now.getTime() - readAt.getTime() < safetyCardCountsFor;
+}
+
 /**
  * Proves that a signed-in person belongs to a household now: the one asked for; the one joined first when none was. Checked
  * at every request, because a membership can end between two of them; nothing meant for one household ever lands in
@@ -48,10 +53,7 @@ export async function proveHousehold(
     personName: membership.personName,
     membershipId: membership.membershipId,
     role: membership.role,
-    handlesChemicals:
-      membership.handlesChemicals &&
-      safetyCardReadAt !== null &&
-      now.getTime() - safetyCardReadAt.getTime() < safetyCardCountsFor,
+    handlesChemicals: membership.handlesChemicals && safetyCardCounts(safetyCardReadAt, now),
     timeZone: household.timeZone,
     unitSystem: household.unitSystem,
     locale: household.locale,

@@ -3,6 +3,7 @@ import doses from './en/doses.json';
 import events from './en/events.json';
 import firstRun from './en/first-run.json';
 import help from './en/help.json';
+import house from './en/house.json';
 import how from './en/how.json';
 import howConstants from './en/how-constants.json';
 import howExamples from './en/how-examples.json';
@@ -12,6 +13,7 @@ import pool from './en/pool.json';
 import problems from './en/problems.json';
 import readings from './en/readings.json';
 import rounds from './en/rounds.json';
+import situations from './en/situations.json';
 import start from './en/start.json';
 import units from './en/units.json';
 import verdict from './en/verdict.json';
@@ -24,6 +26,7 @@ export const catalogue = {
   events,
   'first-run': firstRun,
   help,
+  house,
   how,
   'how-constants': howConstants,
   'how-examples': howExamples,
@@ -33,6 +36,7 @@ export const catalogue = {
   problems,
   readings,
   rounds,
+  situations,
   start,
   units,
   verdict,

@@ -15,7 +15,7 @@ export type Purchase = {
   /** What is left of it: of the products that the doses come from; where the week has none, of all. */
   inStock: number;
   unit: 'g' | 'mL';
-  /** It was never measured, so nobody can say yet whether the water lacks it. */
+  /** It is or brings stabilizer, and stabilizer was never measured. */
   testFirst: boolean;
 };
 
@@ -49,7 +49,9 @@ function purchaseOf(substance: PurchaseSubstance, { doses, shelf, needs }: Week)
     unit === 'tablet' ? amount * tabletFacts(held.find(({ id }) => id === product) ?? {}).tabletMass : amount;
   const sum = (of: readonly PlannedDose[]) => of.reduce((total, dose) => total + massOf(dose), 0);
   const sources = held.filter(({ id }) => ofSubstance.some(({ product }) => product === id));
-  const short = sources.some(({ id, stock }) => sum(ofSubstance.filter(({ product }) => product === id)) > stock + 1e-9);
+  const short = sources.some(
+    ({ id, stock }) => sum(ofSubstance.filter(({ product }) => product === id)) > stock + 1e-9,
+  );
   const mustBuy = short || ofSubstance.some(({ toBuy }) => toBuy);
   return {
     substance,
@@ -58,17 +60,12 @@ function purchaseOf(substance: PurchaseSubstance, { doses, shelf, needs }: Week)
     tablets: ofSubstance.reduce((count, { unit, amount }) => count + (unit === 'tablet' ? amount : 0), 0),
     inStock: (ofSubstance.length === 0 ? held : sources).reduce((total, { stock }) => total + stock, 0),
     unit: isLiquid(substance) ? 'mL' : 'g',
-    testFirst: needs.some(({ quantity }) => quantity === measuredBy[substance]),
+    testFirst: stabilizing.includes(substance) && needs.some(({ quantity }) => quantity === 'cyanuricAcid'),
   };
 }
 
-/** What a test has to say before anybody knows whether a substance is lacking. */
-const measuredBy: Partial<Record<PurchaseSubstance, string>> = {
-  'cyanuric-acid': 'cyanuricAcid',
-  'hydrochloric-acid': 'pH',
-  'sodium-bisulfate': 'pH',
-  'sodium-carbonate': 'pH',
-};
+/** What carries or is stabilizer: whether the water lacks it, or has too much, only a test of it tells. */
+const stabilizing: readonly PurchaseSubstance[] = ['trichlor', 'dichlor', 'cyanuric-acid'];
 
 function isLiquid(substance: PurchaseSubstance): boolean {
   return substance === 'sodium-hypochlorite' || substance === 'hydrochloric-acid';

@@ -14,9 +14,13 @@ export default async function RoundsPage() {
   const { access, now } = await requireHousehold();
   const { timeZone, locale, unitSystem, personName } = access;
   return (
-    <ClientMessages namespaces={['rounds']}>
+    <ClientMessages namespaces={['rounds', 'house', 'units']}>
       <RoundScreen
-        household={{ timeZone, locale, unitSystem, personName, mayDoRounds: may(access, 'do-rounds') }}
+        household={{
+          ...{ timeZone, locale, unitSystem, personName },
+          mayDoRounds: may(access, 'do-rounds'),
+          mayKeepHouseNotes: may(access, 'keep-house-notes'),
+        }}
         serverNow={now.getTime()}
       />
     </ClientMessages>

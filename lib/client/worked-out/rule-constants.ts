@@ -1,3 +1,4 @@
+import { waterMarkError } from '@/lib/standards/bucket-test';
 import {
   companionCap,
   fastChlorineCap,
@@ -164,6 +165,15 @@ export const ruleConstants = [
       unit: 'bar',
       of: 'standards/filter#filterPressureRise.latest',
       source: filterPressureRise.source,
+    },
+  ]),
+  group('bucketTest', [], 'ours', [
+    {
+      name: 'waterMarkError',
+      value: waterMarkError.value,
+      unit: waterMarkError.unit,
+      of: 'standards/bucket-test#waterMarkError.value',
+      source: waterMarkError.source,
     },
   ]),
 ];

@@ -39,11 +39,14 @@ it('marks the place where one is, in the bar and in the tabs', () => {
   expect(screen.getByRole('button', { name: 'More' })).not.toHaveClass('font-strong');
 });
 
-it.each(['/help', '/help/safety', '/help/emergency', '/pool/size'])('keeps More marked at %s', (path) => {
-  at(path);
-  renderWithWords(<HouseholdShell frame={frame}>help</HouseholdShell>);
-  expect(screen.getByRole('button', { name: 'More' })).toHaveClass('font-strong');
-});
+it.each(['/help', '/help/safety', '/help/emergency', '/pool/size', '/house/sheet'])(
+  'keeps More marked at %s',
+  (path) => {
+    at(path);
+    renderWithWords(<HouseholdShell frame={frame}>help</HouseholdShell>);
+    expect(screen.getByRole('button', { name: 'More' })).toHaveClass('font-strong');
+  },
+);
 
 it('marks the emergency card apart from Help', () => {
   at('/help/emergency');
@@ -56,6 +59,7 @@ it('opens More with trouble first, says who you are, and closes when one goes el
   await userEvent.click(screen.getByRole('button', { name: 'More' }));
   const more = await screen.findByRole('dialog', { name: 'More' });
   expect(within(more).getAllByRole('link')[0]).toHaveTextContent('Emergency card');
+  expect(within(more).getByRole('link', { name: /^House sheet/ })).toHaveAttribute('href', '/house');
   expect(more).toHaveTextContent('You are Ines, owner');
   expect(within(more).getByRole('button', { name: 'Sign out' })).toBeInTheDocument();
 

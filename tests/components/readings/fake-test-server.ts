@@ -1,9 +1,10 @@
 import { vi } from 'vitest';
 import { type NewReading, newReadingSchema, type RecordedReading } from '@/lib/schemas/reading';
+import type { HouseholdProduct } from '@/lib/schemas/household-product';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 
 /** What the routes of readings and week answer, kept in memory; every body is checked by the schema of its route. */
-export function fakeTestServer(sheet: WeekSheet) {
+export function fakeTestServer(sheet: WeekSheet, shelf: readonly HouseholdProduct[] = []) {
   const readings = new Map<string, NewReading>();
   const requests: { method: string; path: string; reading?: NewReading }[] = [];
   let now = sheet;
@@ -23,6 +24,7 @@ export function fakeTestServer(sheet: WeekSheet) {
       // The next calendar week holds no doses of its own here.
       return Response.json(path.includes('start=') ? { ...now, doses: [] } : now);
     }
+    if (path === '/api/shelf-products') return Response.json(shelf);
     const reading = newReadingSchema.parse(JSON.parse(String(options?.body)));
     requests.push({ method, path, reading });
     if (method === 'POST' && !readings.has(reading.id)) readings.set(reading.id, reading);

@@ -9,13 +9,15 @@ afterEach(() => vi.unstubAllGlobals());
 
 const household = {
   ...{ timeZone: 'Europe/Madrid', locale: 'en-GB', unitSystem: 'metric' as const },
-  ...{ personName: 'Ines', mayDoRounds: true },
+  ...{ personName: 'Ines', mayDoRounds: true, mayKeepHouseNotes: true },
 };
 const serverNow = Date.parse('2026-07-11T09:10:00+02:00');
 
 async function show(known: Rounds, changes: Partial<Parameters<typeof RoundScreen>[0]['household']> = {}) {
   const sent: unknown[] = [];
-  vi.stubGlobal('fetch', (_: string, init?: RequestInit) => {
+  vi.stubGlobal('fetch', (address: string, init?: RequestInit) => {
+    if (address === '/api/visits') return Promise.resolve(Response.json([]));
+    if (address === '/api/house-notes') return Promise.resolve(Response.json(noNotes));
     if (init?.method === 'POST') sent.push(JSON.parse(String(init.body)));
     return Promise.resolve(Response.json(known));
   });
@@ -24,6 +26,7 @@ async function show(known: Rounds, changes: Partial<Parameters<typeof RoundScree
   return sent;
 }
 
+const noNotes = { notes: {}, updatedAt: null, updatedBy: null };
 const nothingYet: Rounds = { last: null, cleanPressure: null };
 const rowOf = (name: string) => screen.getByText(name).closest('li')!;
 
