@@ -22,6 +22,7 @@ type ShortCode = Extract<
   | 'water-green'
   | 'accident-open'
   | 'drain-cover-broken'
+  | 'electricity-suspected'
   | 'suspected-double-dose'
 >;
 

@@ -3,12 +3,16 @@ import type { PoolHistory } from '@/lib/learning';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { FilterState, PosteriorStep } from '@/lib/schemas/posterior';
 import type { Scenario } from '@/lib/schemas/scenario';
+import type { SituationKind } from '@/lib/schemas/situation';
+import type { Treatment } from '@/lib/schemas/treatment';
 
 /** What the engine is asked for, and what it answers. */
 export type EngineTasks = {
   /** Plan the week, or only project what the scenario says is given. */
   plan: { order: Scenario; answer: WeekPlan };
   project: { order: Scenario; answer: WeekPlan };
+  /** The week while an open situation leads. */
+  lead: { order: { scenario: Scenario; lead: { treatment: Treatment } | { hold: SituationKind } }; answer: WeekPlan };
   /** What a pool has taught since a stored state; null for from the beginning. */
   learn: { order: { from: FilterState | null; history: PoolHistory }; answer: PosteriorStep[] };
 };

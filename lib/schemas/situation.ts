@@ -114,8 +114,6 @@ export const situationEndings = ['done', 'mistake', 'professional'] as const;
 export type SituationEnding = (typeof situationEndings)[number];
 export const endSituationSchema = z.strictObject({ ending: z.enum(situationEndings) });
 
-export const situationPathSchema = z.strictObject({ situationId: z.uuid() });
-
 /** One thing to do, on its day. A dose is ticked on the week sheet; `dose` names it. */
 export const situationStepSchema = z.object({
   /** Stable over the life of a procedure: what a tick is kept under. */

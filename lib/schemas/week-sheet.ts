@@ -3,6 +3,7 @@ import { bandSchema, checkSchema, factSchema, needSchema, weekPlanSchema } from 
 import { planChangesSchema } from './plan-changes';
 import { planDoseSchema } from './plan-dose';
 import { poolEventSchema } from './pool-event';
+import { openSituationSchema } from './situation';
 import { surfaces } from './pool';
 import { uncertainQuantities } from './posterior';
 import { recordedReadingSchema } from './reading';
@@ -100,6 +101,8 @@ export const weekSheetSchema = z.object({
   readings: z.array(recordedReadingSchema),
   /** What happened since the newest test, or is not over: it bears on the verdict of now. */
   events: z.array(poolEventSchema),
+  /** The procedure that is open, with the steps of the days shown; it leads the plan. */
+  situation: openSituationSchema.nullable(),
   doses: z.array(planDoseSchema),
   checks: z.array(checkSchema.extend({ done: z.boolean() })),
 });

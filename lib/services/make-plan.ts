@@ -15,10 +15,10 @@ export function inputHashOf({ readingId: _id, ...inputs }: WeekSnapshot): string
 /** The plan for a snapshot, made in the engine's thread. Rejects as `Engine.run` does. */
 export async function makePlan(snapshot: WeekSnapshot, now: Date): Promise<WeekPlan> {
   if (snapshot.zeroDoubt) return planOnHold(snapshot, snapshot.zeroDoubt);
-  const { scenario, task } = snapshot;
-  return task === 'project'
-    ? sharedEngine().run('project', { ...scenario, doses: [] })
-    : sharedEngine().run('plan', { ...scenario, now: earliestDose(snapshot, now).toISOString() });
+  const { task, lead } = snapshot;
+  if (task === 'project') return sharedEngine().run('project', { ...snapshot.scenario, doses: [] });
+  const scenario = { ...snapshot.scenario, now: earliestDose(snapshot, now).toISOString() };
+  return lead ? sharedEngine().run('lead', { scenario, lead }) : sharedEngine().run('plan', scenario);
 }
 
 /** Nothing is planned before now, nor in the hour of a dose that somebody decided against. */

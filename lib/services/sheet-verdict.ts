@@ -11,6 +11,7 @@ import type { MeasuredQuantity } from '@/lib/schemas/measured-range';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { Pool } from '@/lib/schemas/pool';
 import type { PoolEventKind } from '@/lib/schemas/pool-event';
+import type { Situation } from '@/lib/schemas/situation';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { codeMinimum, limits, lowestLevel } from '@/lib/standards/limits';
 import { type MeasuredValue, type SpreadAmount, swimVerdict, type SwimVerdictInput } from '@/lib/verdict';
@@ -31,6 +32,10 @@ export type VerdictGround = {
   days: readonly WeekDayRow[];
   /** What nobody has said to be over. */
   events: readonly StoredPoolEvent[];
+  /** The open situation, when it keeps everybody out. */
+  staysOut: Situation | null;
+  /** When a situation was last ended before its rule was met [ms]. */
+  endedEarlyAt: number | null;
 };
 
 /** The swim verdict of this moment, as the sheet shows it. */
@@ -52,7 +57,7 @@ export function sheetVerdict(ground: VerdictGround): WeekSheet['verdict'] {
 }
 
 function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
-  const { now, pool, readings, zeroDoubt, plan, doses, events } = ground;
+  const { now, pool, readings, zeroDoubt, plan, doses, events, staysOut, endedEarlyAt } = ground;
   const freeChlorine = newest(readings, 'freeChlorine');
   const pH = newest(readings, 'pH');
   const combinedChlorine = newest(readings, 'combinedChlorine');
@@ -62,6 +67,7 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
     ({ stored }) => stored.status === 'planned' && stored.at.getTime() <= now && stored.at.getTime() > since,
   );
   const { swimming, rain } = spreadDays(ground, since);
+  const clearing = staysOut?.kind === 'clearing' ? staysOut.answers.look : null;
   const past = swimming.filter(({ until }) => until <= now);
   return {
     now,
@@ -90,12 +96,15 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
       dueDoseOpen: open.length > 0,
       doubtfulTick: false,
       coverOffAfterAWeek: happened('cover-off'),
+      situationEndedEarly: endedEarlyAt !== null && endedEarlyAt > since,
     },
     open: {
-      cloudy: readings[0]?.look === 'cloudy',
-      green: readings[0]?.look === 'green',
-      accident: false,
-      drainCoverBroken: happened('drain-cover'),
+      cloudy: readings[0]?.look === 'cloudy' || (clearing !== null && clearing !== 'green'),
+      green: readings[0]?.look === 'green' || clearing === 'green',
+      accident: staysOut?.kind === 'accident',
+      drainCoverBroken: happened('drain-cover') || staysOut?.kind === 'drain-cover',
+      electricitySuspected:
+        staysOut?.kind === 'storm' && (staysOut.answers.shock === 'yes' || staysOut.answers.pumpRoom === 'wet'),
       suspectedDoubleDose: doses.some(({ shown }) => shown.doubtful),
       falseZero: zeroDoubt === 'open',
     },

@@ -10,12 +10,17 @@ import { listWeekDays } from '@/db/queries/week-days';
 import { addDays, dayOf } from '@/lib/calendar/household-day';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { ENGINE_VERSION } from '@/lib/planner/version';
+import type { Pool } from '@/lib/schemas/pool';
 import { type Scenario, scenarioSchema } from '@/lib/schemas/scenario';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
+import type { SituationKind } from '@/lib/schemas/situation';
+import type { Treatment } from '@/lib/schemas/treatment';
+import { wayOf } from '@/lib/situations';
 import { engineDose, engineReading, productsGone, withoutRepeats } from './engine-history';
 import { enginePool, feederMassAt } from './engine-pool';
 import { engineProduct } from './engine-shelf';
 import { type ZeroDoubt, zeroDoubtOf } from './false-zero';
+import { loadOpenSituation } from './situation-record';
 import { DAYS_OF_A_PLAN, weekAheadOf } from './week-ahead';
 
 const DAY = 86_400_000;
@@ -34,6 +39,8 @@ export type WeekSnapshot = {
   task: 'plan' | 'project';
   /** A reading that may say the opposite of what it seems to: nothing is planned on it. */
   zeroDoubt: { doubt: NonNullable<ZeroDoubt>; takenAt: string } | null;
+  /** An open situation that leads: what it asks to be treated, or that nothing is dosed. */
+  lead?: { treatment: Treatment } | { hold: SituationKind };
   /** Doses that somebody decided against [ISO]: their hour is over, another one is planned after it. */
   skipped: string[];
 };
@@ -78,8 +85,22 @@ export async function loadWeekSnapshot(
     readingId: newest.id,
     task: found.pool.recordOnly ? 'project' : 'plan',
     zeroDoubt,
+    ...(await leadOf(db, householdId, pool)),
     skipped: await skippedSince(db, householdId, newest.takenAt, timeZone),
   };
+}
+
+/** What an open situation asks of the plan; nothing where the plan goes on as usual. */
+async function leadOf(
+  db: DatabaseOrTransaction,
+  householdId: ProvenHouseholdId,
+  pool: Pool,
+): Promise<Pick<WeekSnapshot, 'lead'>> {
+  const open = await loadOpenSituation(db, householdId, pool);
+  if (!open) return {};
+  const { lead } = wayOf(open.record);
+  if (lead.kind === 'follow') return {};
+  return { lead: lead.kind === 'treat' ? { treatment: lead.treatment } : { hold: open.record.situation.kind } };
 }
 
 async function newestZeroDoubt(

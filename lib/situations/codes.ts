@@ -47,34 +47,42 @@ export const headlines = [
 ] as const;
 export type Headline = (typeof headlines)[number];
 
-export const cautions = [
-  /** Stop. */
-  'everyone-out',
-  'nobody-in-cloudy',
-  'no-time-for-loose-stool',
-  'drain-holds',
-  'thunder',
-  'shock',
-  'wet-pump-room',
-  'shell-can-float',
-  'half-open-cover',
-  'never-mix',
-  /** Take care. */
-  'gloves-and-net',
-  'liquid-low',
-  'granules-into-water',
-  'acid-alone',
-  'no-metal-ladder',
-  'pump-before-skimmer',
-  'outlet',
-  'no-floater-under-cover',
-  'metals',
-  'nobody-ill-swims',
-  /** Note. */
-  'nothing-of-ours',
-  'bottle-and-gate',
-] as const;
-export type Caution = (typeof cautions)[number];
+/** Cautions by how much harm they keep away. */
+const cautionsBySeverity = {
+  stop: [
+    'everyone-out',
+    'nobody-in-cloudy',
+    'no-time-for-loose-stool',
+    'drain-holds',
+    'thunder',
+    'shock',
+    'wet-pump-room',
+    'shell-can-float',
+    'half-open-cover',
+    'never-mix',
+  ],
+  care: [
+    'gloves-and-net',
+    'liquid-low',
+    'granules-into-water',
+    'acid-alone',
+    'no-metal-ladder',
+    'pump-before-skimmer',
+    'outlet',
+    'no-floater-under-cover',
+    'metals',
+    'nobody-ill-swims',
+  ],
+  note: ['nothing-of-ours', 'bottle-and-gate'],
+} as const;
+export type Severity = keyof typeof cautionsBySeverity;
+export type Caution = (typeof cautionsBySeverity)[Severity][number];
+export const cautions: readonly Caution[] = Object.values(cautionsBySeverity).flat();
+
+export function severityOf(caution: Caution): Severity {
+  const has = (list: readonly string[]) => list.includes(caution);
+  return has(cautionsBySeverity.stop) ? 'stop' : has(cautionsBySeverity.care) ? 'care' : 'note';
+}
 
 /** What a step asks for; figures stand beside. */
 export const steps = [
@@ -82,6 +90,8 @@ export const steps = [
   'test-now',
   'test-before-dose',
   'morning-reading',
+  /** Tick by hand beside it: the bottom drain was plainly seen. */
+  'drain-seen',
   'test-next-day',
   'test-after-time',
   'test-combined',

@@ -8,6 +8,7 @@ export type SwimState = (typeof swimStates)[number];
  */
 export const swimReasons = {
   'drain-cover-broken': 'stay-out',
+  'electricity-suspected': 'stay-out',
   'chlorine-under-code-minimum': 'stay-out',
   'chlorine-over-maximum': 'stay-out',
   'ph-too-low': 'stay-out',
@@ -36,6 +37,7 @@ export const swimReasons = {
   'due-dose-open': 'test-first',
   'doubtful-tick': 'test-first',
   'cover-off-after-a-week': 'test-first',
+  'situation-ended-early': 'test-first',
   'no-outlook': 'test-first',
 } as const satisfies Record<string, Exclude<SwimState, 'fine'>>;
 

@@ -37,6 +37,8 @@ export type SwimVerdictInput = {
     doubtfulTick: boolean;
     /** The cover came off after a week or more. */
     coverOffAfterAWeek: boolean;
+    /** A situation was ended before its rule was met. */
+    situationEndedEarly: boolean;
   };
   /** What is wrong until somebody says that it is over. */
   open: {
@@ -44,6 +46,8 @@ export type SwimVerdictInput = {
     green: boolean;
     accident: boolean;
     drainCoverBroken: boolean;
+    /** Somebody felt a tingle at the water, or the pump room is wet. */
+    electricitySuspected: boolean;
     suspectedDoubleDose: boolean;
     falseZero: boolean;
   };

@@ -28,6 +28,7 @@ function openTroubles({ open }: SwimVerdictInput): SwimReason[] {
     ['water-green', open.green],
     ['accident-open', open.accident],
     ['drain-cover-broken', open.drainCoverBroken],
+    ['electricity-suspected', open.electricitySuspected],
     ['suspected-double-dose', open.suspectedDoubleDose],
     ['false-zero-open', open.falseZero],
   ]);
@@ -99,7 +100,7 @@ function readingReasons(input: SwimVerdictInput, instant: number): SwimReason[] 
 }
 
 function eventReasons(input: SwimVerdictInput, instant: number): SwimReason[] {
-  const { storm, pumpFailure, dueDoseOpen, doubtfulTick, coverOffAfterAWeek } = input.sinceReading;
+  const { storm, pumpFailure, dueDoseOpen, doubtfulTick, coverOffAfterAWeek, situationEndedEarly } = input.sinceReading;
   const rain = { value: rainBy(input, instant), limit: limits.rainEndsVerdict.value };
   const swimmers = { value: Math.max(...swimmerHoursByDay(input, instant)), limit: swimmerHoursLimit(input) };
   return [
@@ -112,6 +113,7 @@ function eventReasons(input: SwimVerdictInput, instant: number): SwimReason[] {
       ['due-dose-open', dueDoseOpen],
       ['doubtful-tick', doubtfulTick],
       ['cover-off-after-a-week', coverOffAfterAWeek],
+      ['situation-ended-early', situationEndedEarly],
     ]),
   ];
 }

@@ -42,7 +42,14 @@ function oracle(input: SwimVerdictInput, t: number): SwimState {
   ];
   const pHs = ph0 ? [...(counts(ph0) ? [ph0.value] : []), ...(water ? [water.pH] : [])] : [];
 
-  if (open.cloudy || open.green || open.accident || open.drainCoverBroken || open.suspectedDoubleDose)
+  if (
+    open.cloudy ||
+    open.green ||
+    open.accident ||
+    open.drainCoverBroken ||
+    open.electricitySuspected ||
+    open.suspectedDoubleDose
+  )
     return 'stay-out';
   if (chlorines.some((c) => c.v < limits.codeMinimum || c.v > 10)) return 'stay-out';
   if (pHs.some((v) => v < 7.0 || v > 8.0)) return 'stay-out';
@@ -60,7 +67,13 @@ function oracle(input: SwimVerdictInput, t: number): SwimState {
     if (span > 0) rain += (r.amount / (r.until - r.from)) * span;
   }
   if (rain > 10 || sinceReading.storm || sinceReading.pumpFailure || sinceReading.dueDoseOpen) return 'test-first';
-  if (sinceReading.doubtfulTick || sinceReading.coverOffAfterAWeek || open.falseZero) return 'test-first';
+  if (
+    sinceReading.doubtfulTick ||
+    sinceReading.coverOffAfterAWeek ||
+    sinceReading.situationEndedEarly ||
+    open.falseZero
+  )
+    return 'test-first';
   let swimmers = sinceReading.swimmerHoursInADay;
   for (const d of input.ahead?.swimmerHours ?? []) {
     const share = Math.min(1, Math.max(0, (t - d.from) / (d.until - d.from)));
@@ -117,12 +130,14 @@ const anyInput: fc.Arbitrary<SwimVerdictInput> = fc
       dueDoseOpen: seldom,
       doubtfulTick: seldom,
       coverOffAfterAWeek: seldom,
+      situationEndedEarly: seldom,
     }),
     open: fc.record({
       cloudy: seldom,
       green: seldom,
       accident: seldom,
       drainCoverBroken: seldom,
+      electricitySuspected: seldom,
       suspectedDoubleDose: seldom,
       falseZero: seldom,
     }),

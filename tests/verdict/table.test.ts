@@ -22,6 +22,7 @@ const table: [string, SwimVerdictInput, SwimState, SwimReasonCode][] = [
   ['green', withOpen({ green: true }), 'stay-out', 'water-green'],
   ['accident', withOpen({ accident: true }), 'stay-out', 'accident-open'],
   ['drain cover', withOpen({ drainCoverBroken: true }), 'stay-out', 'drain-cover-broken'],
+  ['a tingle', withOpen({ electricitySuspected: true }), 'stay-out', 'electricity-suspected'],
   ['double dose', withOpen({ suspectedDoubleDose: true }), 'stay-out', 'suspected-double-dose'],
   ['a dose just given', { ...good, waits: [{ from: now - HOUR, until: now + HOUR }] }, 'wait', 'dose-waiting-time'],
   ['middle over the swim limit', withOutlook({ p50: 4.1, p90: 5 }), 'wait', 'chlorine-over-swim-limit'],
@@ -47,6 +48,7 @@ const table: [string, SwimVerdictInput, SwimState, SwimReasonCode][] = [
   ['pump', withSince({ pumpFailure: true }), 'test-first', 'pump-failure'],
   ['open dose', withSince({ dueDoseOpen: true }), 'test-first', 'due-dose-open'],
   ['doubtful tick', withSince({ doubtfulTick: true }), 'test-first', 'doubtful-tick'],
+  ['a situation ended early', withSince({ situationEndedEarly: true }), 'test-first', 'situation-ended-early'],
   ['cover', withSince({ coverOffAfterAWeek: true }), 'test-first', 'cover-off-after-a-week'],
   ['no outlook', withoutOutlook(good), 'test-first', 'no-outlook'],
 ];
