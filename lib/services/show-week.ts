@@ -4,6 +4,7 @@ import { listOpenPoolEvents } from '@/db/queries/pool-events';
 import { findPool } from '@/db/queries/pools';
 import { lastMeasured, listReadings } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
+import { listEndedSituations } from '@/db/queries/situations';
 import { listConfirmedStops } from '@/db/queries/stop-confirmations';
 import { tabletsFoundBefore } from '@/db/queries/tablets-found';
 import { listWeekDays } from '@/db/queries/week-days';
@@ -28,6 +29,9 @@ import { curveAhead, curveBehind } from './sheet-curves';
 import { sheetDays } from './sheet-days';
 import { countingDoses, sheetDose } from './sheet-doses';
 import { sheetVerdict } from './sheet-verdict';
+import { openSituation } from './show-situations';
+import { situationDoses } from './situation-doses';
+import { loadOpenSituation } from './situation-record';
 import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
@@ -82,6 +86,9 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
   // What happened after the older of the two is not in the test; before any test, all of it counts.
   const testedSince = Math.min(...(tested.length > 0 ? tested : [new Date(0)]).map((taken) => taken.getTime()));
   const events = await listOpenPoolEvents(db, { householdId, since: new Date(testedSince) });
+  const loaded = await loadOpenSituation(db, householdId, pool);
+  const situation = loaded && openSituation(loaded, await situationDoses(context, loaded), now);
+  const [ended] = await listEndedSituations(db, { householdId, most: 1 });
   const zeroDoubt = chlorineReading ? await zeroDoubtOf(db, householdId, chlorineReading) : null;
 
   return {
@@ -98,6 +105,8 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     days: sheetDays(days, said, pool),
     verdict: sheetVerdict({
       ...{ now: now.getTime(), pool, readings, zeroDoubt, doses: bothForms, days: said, events },
+      staysOut: situation?.procedure.stayOut ? situation.situation : null,
+      endedEarlyAt: ended?.endedAt && ended.ending !== 'done' ? ended.endedAt.getTime() : null,
       plan: problem ? null : plan,
     }),
     behind: curveBehind(plans, shown.from.getTime(), Math.min(now.getTime(), shown.until.getTime())),
@@ -114,6 +123,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
       ...event,
       happenedAt: toOffsetIso(happenedAt.getTime(), timeZone),
     })),
+    situation,
     doses: bothForms.filter(({ stored }) => isShown(stored.givenAt ?? stored.at, shown)).map((dose) => dose.shown),
     checks: sheetChecks(plan, readings, timeZone),
   };

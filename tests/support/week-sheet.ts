@@ -82,6 +82,7 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
     questioned: [],
     unrecorded: false,
     readings: readings.filter(({ takenAt: taken }) => Date.parse(taken) >= startOfDay(start, timeZone)),
+    situation: null,
     events: [],
     doses,
     checks: [
