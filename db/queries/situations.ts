@@ -1,5 +1,5 @@
 import 'server-only';
-import { aliasedTable, and, desc, eq, isNotNull, isNull } from 'drizzle-orm';
+import { aliasedTable, and, desc, eq, inArray, isNotNull, isNull, ne, or } from 'drizzle-orm';
 import type { DatabaseOrTransaction, Transaction } from '@/db/client';
 import { people, situations, situationTicks } from '@/db/schema';
 import type { Situation, SituationEnding, SituationKind } from '@/lib/schemas/situation';
@@ -64,6 +64,27 @@ export async function listEndedSituations(
     .where(and(eq(situations.householdId, householdId), isNotNull(situations.endedAt)))
     .orderBy(desc(situations.endedAt))
     .limit(most);
+}
+
+/** Kinds in which something in the water uses up more chlorine than the pool itself. */
+const treated: SituationKind[] = ['clearing', 'combined-chlorine', 'accident'];
+
+/** From when until when such a procedure was open [ms]; without an end while it is. One begun by mistake does not count. */
+export async function listTreatedTimes(
+  db: DatabaseOrTransaction,
+  householdId: ProvenHouseholdId,
+): Promise<{ from: number; until: number }[]> {
+  const rows = await db
+    .select({ openedAt: situations.openedAt, endedAt: situations.endedAt })
+    .from(situations)
+    .where(
+      and(
+        eq(situations.householdId, householdId),
+        inArray(situations.kind, treated),
+        or(isNull(situations.ending), ne(situations.ending, 'mistake')),
+      ),
+    );
+  return rows.map(({ openedAt, endedAt }) => ({ from: openedAt.getTime(), until: endedAt?.getTime() ?? Infinity }));
 }
 
 type NewRow = { householdId: ProvenHouseholdId; personId: string } & Pick<

@@ -1,7 +1,7 @@
 import type { LearningNote, UncertainQuantity } from '@/lib/schemas/posterior';
 import type { FilterState } from '@/lib/schemas/posterior';
 import { hampelWeight, QUESTIONED_BELOW } from './hampel';
-import { parameterPlaces, placeOf } from './state';
+import { parameterPlaces, placeOf, waterPlaces } from './state';
 
 /** Of the standard normal distribution. */
 export const QUANTILE_90 = 1.2815515655446004;
@@ -55,6 +55,21 @@ export function assimilate(
   update(mean, covariance, place, surprise, sigma, believed ? 1 : weight);
   if (believed) return { ...note, kind: unrecorded ? 'unrecorded-dose' : 'believed', weight: 1 };
   return { ...note, kind: questioned ? 'questioned' : 'counted', weight };
+}
+
+/**
+ * Takes a measured value for what it is and lets it teach no parameter: what is known of the water no longer hangs together
+ * with what is known of the pool, and is widened until the value is no surprise. Changes `state`.
+ */
+export function takeAsRead(state: FilterState, quantity: UncertainQuantity, measured: number, sigma: number): void {
+  const { mean, covariance, doubts } = state;
+  const place = placeOf[quantity];
+  const surprise = measured - mean[place]!;
+  for (const water of waterPlaces)
+    for (const parameter of parameterPlaces) covariance[water]![parameter] = covariance[parameter]![water] = 0;
+  delete doubts[quantity];
+  loosenAlone(state, quantity, surprise, sigma);
+  update(mean, covariance, place, surprise, sigma, 1);
 }
 
 /** Changes mean and covariance by a value at one place. */

@@ -35,6 +35,11 @@ export type PoolHistory = {
   tabletsLeft: readonly TabletsLeft[];
   /** What was in the feeder at the first reading beside the doses. */
   loads: readonly TabletLoad[];
+  /**
+   * Times in which something else used chlorine up [ms]: green water, used-up chlorine being raised away. A reading then tells
+   * how the water is and nothing of how the pool behaves.
+   */
+  unusual?: readonly { from: number; until: number }[];
 };
 
 /** A reading, or tablets found, at its instant [ms]. */

@@ -11,7 +11,7 @@ import {
   uncertainQuantities,
 } from '@/lib/schemas/posterior';
 import type { Reading } from '@/lib/schemas/reading';
-import { assimilate } from './assimilate';
+import { assimilate, takeAsRead } from './assimilate';
 import { drift } from './drift';
 import { feederAt, feederLoad, type FeederLoad, timerBetween } from './feeder';
 import { untaught, waterAnew } from './fresh-start';
@@ -55,18 +55,20 @@ export function stepTo(
   const state = expected?.state ?? startAnew(known, before, at, reading, history, log);
   state.temperature = temperature;
   if (reading.combinedChlorine !== undefined) state.combinedChlorine = middleOf(reading.combinedChlorine);
-  if (expected) weigh(expected, reading, log);
+  const unusual = history.unusual?.some(({ from, until }) => at >= from && at <= until) ?? false;
+  if (expected) weigh(expected, reading, log, unusual);
   if (before) countFor(state, before);
   return { readingAt: reading.takenAt, state, posterior: posteriorOf(state, reading, setting.parameters), log };
 }
 
 /** Takes every measured value into what is known. */
-function weigh({ state, chlorineLoss }: Expected, reading: Reading, log: LearningNote[]): void {
+function weigh({ state, chlorineLoss }: Expected, reading: Reading, log: LearningNote[], unusual: boolean): void {
   for (const quantity of uncertainQuantities) {
     const value = reading[quantity];
     if (value === undefined) continue;
     const sigma = errorOf(quantity, value, reading.method, state.mean[placeOf[quantity]]!);
-    log.push(assimilate(state, quantity, middleOf(value), sigma, chlorineLoss));
+    if (unusual) takeAsRead(state, quantity, middleOf(value), sigma);
+    else log.push(assimilate(state, quantity, middleOf(value), sigma, chlorineLoss));
     state.mean[placeOf.freeChlorine] = Math.max(0, state.mean[placeOf.freeChlorine]!);
   }
 }

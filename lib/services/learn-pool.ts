@@ -80,6 +80,7 @@ function hashesOf(readings: readonly StoredReading[], { pool, loads, ...history 
       doses: history.doses.filter(({ at }) => at >= since && at < until),
       days: Object.entries(history.days).filter(([day]) => day >= firstDay && day <= lastDay),
       tabletsLeft: history.tabletsLeft.filter(({ at }) => Date.parse(at) >= since && Date.parse(at) < until),
+      ...(history.unusual?.some((span) => until >= span.from && until <= span.until) ? { unusual: true } : {}),
     });
     since = until;
     return hash;

@@ -4,6 +4,7 @@ import { findPool } from '@/db/queries/pools';
 import { listGivenDoses } from '@/db/queries/plan-doses';
 import { listReadings, type StoredReading } from '@/db/queries/readings';
 import { listShelfProducts } from '@/db/queries/shelf-products';
+import { listTreatedTimes } from '@/db/queries/situations';
 import { listTabletsFound } from '@/db/queries/tablets-found';
 import { listWeekDays, type WeekDayRow } from '@/db/queries/week-days';
 import { addDays, dayOf } from '@/lib/calendar/household-day';
@@ -65,8 +66,18 @@ export async function loadPoolHistory(
         tablets,
       })),
       loads: load ? [load] : [],
+      unusual: [...(await listTreatedTimes(db, householdId)), ...readings.filter(notClear).map(timeOf)],
     },
   };
+}
+
+/** Something in green or cloudy water uses chlorine up that is no trait of the pool. */
+function notClear({ look }: StoredReading): boolean {
+  return look !== 'clear';
+}
+
+function timeOf({ takenAt }: StoredReading): { from: number; until: number } {
+  return { from: takenAt.getTime(), until: takenAt.getTime() };
 }
 
 function conditionsOf(day: WeekDayRow): DayConditions {
