@@ -41,7 +41,7 @@ export function ConfirmStop({ dose }: { dose: PlanDose }) {
         severity="stop"
         word={common('stop')}
         actions={
-          <Button wide onClick={confirm} busy={isPending ? t('confirming') : undefined}>
+          <Button wide className="py-2" onClick={confirm} busy={isPending ? t('confirming') : undefined}>
             {t('confirm', { name })}
           </Button>
         }

@@ -9,6 +9,7 @@ import { looks } from './journeys/looks';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
 import { scope } from './journeys/scope';
+import { stop } from './journeys/stop';
 import type { Journey } from './support/journey';
 
 /** Every journey of a run, the long ones first. */
@@ -22,6 +23,7 @@ export const journeys: readonly Journey[] = [
   measures,
   learning,
   scope,
+  stop,
   headers,
   measuring,
 ];

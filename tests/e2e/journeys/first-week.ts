@@ -3,6 +3,7 @@ import type { Page } from 'playwright-core';
 import { addDays } from '@/lib/calendar/household-day';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import { closeDialog, confirmStopOnDesk, nextDose, whenDue } from '../support/doses';
 import { borrowSession } from '../support/enter';
 import {
   addProduct,
@@ -84,22 +85,16 @@ const stateOf = ({ doses, readings, plan }: WeekSheet) => ({
   readings: readings.map(({ id, values }) => ({ id, values })),
 });
 
-/** The next dose that nobody has dealt with; of grams, where it has to be one that is weighed. */
-const nextDose = ({ doses, now }: WeekSheet, unit?: PlanDose['unit']) =>
-  doses.find((dose) => dose.status === 'planned' && dose.at > now && (unit ?? dose.unit) === dose.unit);
-
-/** A minute into the hours in which a dose may be ticked, and never back in time. */
-const whenDue = ({ tickFrom }: PlanDose, { now }: WeekSheet): string =>
-  new Date(Math.max(Date.parse(tickFrom), Date.parse(now)) + 60_000).toISOString();
-
 type Sheets = () => Promise<WeekSheet>;
 
 /** The same visit in a later version of the plan: a plan that is made again gives its doses new ids. */
 const sameDose = ({ doses }: WeekSheet, { at, substance }: PlanDose) =>
   doses.find((dose) => dose.substance === substance && dose.at.slice(0, 10) === at.slice(0, 10));
 
+const sameDoseNow = async (sheet: Sheets, planned: PlanDose) => sameDose(await sheet(), planned);
+
 async function becomes(stage: Stage, what: string, dose: PlanDose, status: string, sheet: Sheets): Promise<void> {
-  const found = async () => sameDose(await sheet(), dose)?.status;
+  const found = async () => (await sameDoseNow(sheet, dose))?.status;
   await until(async () => (await found()) === status);
   stage.equal(what, await found(), status);
 }
@@ -113,9 +108,11 @@ async function openWeek(page: Page): Promise<void> {
 async function tickAndUndo(stage: Stage, page: Page, planned: PlanDose, sheet: Sheets): Promise<void> {
   await openWeek(page);
   const tickHere = page.getByText(words('doses.action.given'), { exact: true }).first();
+  stage.check('before its first dose the Stop of a product is to be read', !(await tickHere.isVisible()));
+  await confirmStopOnDesk(page);
   await tickHere.click();
   await becomes(stage, 'one tap marks the dose as given', planned, 'given', sheet);
-  const given = sameDose(await sheet(), planned);
+  const given = await sameDoseNow(sheet, planned);
   stage.equal('what was planned is what was given', given?.givenAmount, planned.amount);
   stage.equal('and who gave it is kept', [given?.doneBy, given?.recordedBy], ['Ines', 'Ines']);
 
@@ -131,6 +128,8 @@ async function tickAndUndo(stage: Stage, page: Page, planned: PlanDose, sheet: S
 /** Another amount went in, typed with a decimal comma: it counts, and moves the curve. */
 async function otherAmount(stage: Stage, page: Page, planned: PlanDose, sheet: Sheets): Promise<void> {
   await openWeek(page);
+  // The first dose was one of tablets or of these.
+  if ((await sameDoseNow(sheet, planned))?.stopDue) await confirmStopOnDesk(page);
   const before = await drawnCurves(page);
   const dialog = page.getByRole('dialog');
   const press = (name: string) => dialog.getByRole('button', { name: words(name), exact: true }).click();
@@ -148,7 +147,7 @@ async function otherAmount(stage: Stage, page: Page, planned: PlanDose, sheet: S
   await press('doses.action.otherNext');
   await dialog.getByRole('button', { name: pattern('doses.action.otherConfirm') }).click();
   await becomes(stage, 'another amount is taken', planned, 'changed', sheet);
-  stage.equal('with the comma read as one', sameDose(await sheet(), planned)?.givenAmount, 123.5);
+  stage.equal('with the comma read as one', (await sameDoseNow(sheet, planned))?.givenAmount, 123.5);
   await closeDialog(page);
   await until(async () => apart(before, await drawnCurves(page)) > 3);
   const after = await drawnCurves(page);
@@ -158,12 +157,7 @@ async function otherAmount(stage: Stage, page: Page, planned: PlanDose, sheet: S
   await page.locator(curves).first().waitFor({ state: 'attached' });
   const reloaded = apart(after, await drawnCurves(page));
   stage.check('after a reload the curves are as they were', reloaded < 1, reloaded);
-  stage.equal('and the dose too', sameDose(await sheet(), planned)?.status, 'changed');
-}
-
-async function closeDialog(page: Page): Promise<void> {
-  await page.keyboard.press('Escape');
-  await page.getByRole('dialog').waitFor({ state: 'detached' });
+  stage.equal('and the dose too', (await sameDoseNow(sheet, planned))?.status, 'changed');
 }
 
 /** What was confirmed is on disk: the process ends without a chance to tidy up. */

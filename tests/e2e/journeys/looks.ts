@@ -9,9 +9,11 @@ import {
   signedOut,
   stopped,
   untested,
+  unread,
   type View,
   workedOut,
 } from '../looks/pages';
+import { confirmStops } from '../support/doses';
 import { enterAs } from '../support/enter';
 import { describePool, describeSteps, fullTest, slowTablets, sundayEvening } from '../support/households';
 import type { Journey, Stage } from '../support/journey';
@@ -35,6 +37,12 @@ export const looks: readonly Journey[] = [
     return person;
   }),
   looking('looks: a dose is due', due, async (server) => {
+    const person = await household(server);
+    await person.must('POST', '/api/readings', fullTest(sundayEvening));
+    await confirmStops(person);
+    return person;
+  }),
+  looking('looks: a Stop is to be read', unread, async (server) => {
     const person = await household(server);
     await person.must('POST', '/api/readings', fullTest(sundayEvening));
     return person;

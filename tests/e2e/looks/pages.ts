@@ -1,4 +1,5 @@
 import type { Page } from 'playwright-core';
+import { readStop } from '../support/doses';
 import { choice } from '../support/first-run';
 import { curves } from '../support/sheet';
 import { pattern, words } from '../support/words';
@@ -206,6 +207,21 @@ export const recordOnly: readonly View[] = [
 const dueDose = async (page: Page) => {
   await page.getByText(words('doses.action.given'), { exact: true }).first().waitFor();
 };
+
+/** For somebody who has a dose to add and has not read the Stop of its product yet. */
+export const unread: readonly View[] = [
+  {
+    name: 'week-stop',
+    path: '/week',
+    async prepare(page) {
+      // A phone shows it on the page itself.
+      const steps = page.getByRole('button', { name: words('doses.stop.first') }).first();
+      await steps.or(readStop(page)).first().waitFor();
+      if (await steps.isVisible()) await steps.click();
+      await readStop(page).waitFor();
+    },
+  },
+];
 
 /** For a household in whose week a dose is due now. */
 export const due: readonly View[] = [
