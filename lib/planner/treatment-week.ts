@@ -26,7 +26,7 @@ import { threeFigures } from './three-figures';
 import { treatmentAcid } from './treatment-acid';
 
 /** A level this near to the aim counts as there [mg/L]: no kit tells them apart. */
-const NEAR_ENOUGH = 0.2;
+export const NEAR_ENOUGH = 0.2;
 /** When a morning is read after a treatment evening. */
 const MORNING = '08:00';
 

@@ -50,6 +50,7 @@ export type ConstantUnit =
   | 'mg/L'
   | 'pH'
   | 'hours'
+  | 'minutes'
   | 'days'
   | 'g'
   | 'gPerHour'

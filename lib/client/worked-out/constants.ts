@@ -3,6 +3,7 @@ import { learningConstants } from './learning-constants';
 import { plannerConstants } from './planner-constants';
 import { productConstants } from './product-constants';
 import { ruleConstants } from './rule-constants';
+import { situationConstants } from './situation-constants';
 import { waterConstants } from './water-constants';
 import { weekConstants } from './week-constants';
 
@@ -13,6 +14,7 @@ export const constantGroups = [
   ...weekConstants,
   ...ruleConstants,
   ...companionConstants,
+  ...situationConstants,
   ...learningConstants,
   ...plannerConstants,
 ] as const;
