@@ -21,6 +21,7 @@ export function ConfirmStop({ dose }: { dose: PlanDose }) {
   const { mutate, isPending, error } = useConfirmStop();
   const id = useRef<string | undefined>(undefined);
 
+  const unheard = (problem: unknown) => problem instanceof RequestProblem && problem.code === 'no-connection';
   const confirm = () => {
     id.current ??= crypto.randomUUID();
     mutate(
@@ -28,8 +29,7 @@ export function ConfirmStop({ dose }: { dose: PlanDose }) {
       {
         onSettled: (_done, problem) => {
           // Without an answer it may have arrived: pressed again, it is the same confirmation.
-          const unheard = problem instanceof RequestProblem && problem.code === 'no-connection';
-          if (!unheard) id.current = undefined;
+          if (!unheard(problem)) id.current = undefined;
         },
       },
     );
@@ -53,7 +53,7 @@ export function ConfirmStop({ dose }: { dose: PlanDose }) {
       </Callout>
       {error !== null && (
         <p role="alert" className="mt-2 text-small font-emphasis text-terra-ink">
-          {problemWords(error)}
+          {unheard(error) ? t('unsent') : problemWords(error)}
         </p>
       )}
     </div>

@@ -95,7 +95,9 @@ describe('a dose whose Stop is still to be confirmed', () => {
     const { user } = await showSheet(unread(), phone);
     const sent = serve(unread({ stopDue: false }), ['no answer', 'done']);
     await user.click(screen.getByRole('button', { name: button }));
-    expect(await screen.findByRole('alert')).toHaveTextContent(/No connection|not reach|connection/i);
+    expect(await screen.findByRole('alert')).toHaveTextContent(
+      /^There is no connection, so it is not written down yet\./,
+    );
     expect(screen.getAllByText(/Goggles and gloves on/).length).toBeGreaterThan(0);
     expect(screen.queryByRole('button', { name: 'Mark as added' })).toBeNull();
     await user.click(screen.getByRole('button', { name: button }));

@@ -75,7 +75,7 @@ async function withoutConnection(stage: Stage, visitor: Visitor): Promise<void> 
   visitor.expect(/ERR_INTERNET_DISCONNECTED/);
   await page.context().setOffline(true);
   await readStop(page).first().click();
-  await page.getByText(words('problems.no-connection')).first().waitFor();
+  await page.getByText(words('doses.stop.unsent')).first().waitFor();
   const steps = page.getByRole('region', { name: words('doses.stepsHeading') }).first();
   stage.check('the steps can still be read', (await steps.innerText()).includes('Goggles and gloves on'));
   stage.equal('and nothing can be ticked yet', await tick(page).count(), 0);
