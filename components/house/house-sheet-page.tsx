@@ -9,7 +9,6 @@ import { Callout } from '@/components/ui/callout';
 import { textLink } from '@/components/ui/text-link';
 import { SheetProvider } from '@/components/week-sheet/sheet-context';
 import { instantOf } from '@/components/week-sheet/sheet-times';
-import { useDosingBar } from '@/components/week-sheet/use-dosing-bar';
 import { longDay, timeOfDay } from '@/lib/calendar/format';
 import { dayOf } from '@/lib/calendar/household-day';
 import type { HouseSheet } from '@/lib/schemas/house-sheet';
@@ -19,6 +18,7 @@ import { SheetFor } from './sheet-for';
 import { SheetPlaces } from './sheet-places';
 import { SheetDaily, SheetTrouble } from './sheet-rules';
 import { SheetTests } from './sheet-tests';
+import { useNothingToAdd } from './use-nothing-to-add';
 
 /** One page, on A4 and Letter, for whoever looks after the pool while the household is away. */
 export function HouseSheetPage({ sheet }: { sheet: HouseSheet }) {
@@ -31,18 +31,15 @@ export function HouseSheetPage({ sheet }: { sheet: HouseSheet }) {
 
 function OnePage({ sheet }: { sheet: HouseSheet }) {
   const t = useTranslations('house.sheet');
-  const bar = useDosingBar();
+  const nothing = useNothingToAdd(sheet);
   const common = useTranslations('common');
-  const { week, notes, handler, handlers, doses, openDoses } = sheet;
+  const { week, notes, handler, handlers, openDoses } = sheet;
   const { timeZone, locale, name } = week.household;
   const when = (iso: string) => {
     const instant = instantOf(iso);
     return `${longDay(dayOf(instant, timeZone), locale)}, ${timeOfDay(instant, timeZone, locale)}`;
   };
-  const good =
-    week.plan === null || doses.length === 0 || bar !== undefined
-      ? t('goodCalls')
-      : t('good', { when: when(week.plan.endsAt) });
+  const good = week.plan === null || nothing !== null ? t('goodCalls') : t('good', { when: when(week.plan.endsAt) });
   return (
     <div className="mx-auto max-w-sheet px-margin pb-10 print:max-w-none print:pb-0">
       <Link href="/house" className={`${textLink} inline-flex min-h-11 items-center gap-1.5 text-body print:hidden`}>

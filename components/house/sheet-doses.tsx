@@ -6,30 +6,19 @@ import { bold } from '@/components/week-sheet/bold';
 import { useSheet } from '@/components/week-sheet/sheet-context';
 import { instantOf } from '@/components/week-sheet/sheet-times';
 import { useDoseWords } from '@/components/week-sheet/use-dose-words';
-import { useDosingBar } from '@/components/week-sheet/use-dosing-bar';
 import { longDay } from '@/lib/calendar/format';
 import { dayOf } from '@/lib/calendar/household-day';
 import type { HouseSheet } from '@/lib/schemas/house-sheet';
 import { SheetSection } from './sheet-section';
 import { useMeasured } from './use-measured';
+import { useNothingToAdd } from './use-nothing-to-add';
 
 const stop = (words: React.ReactNode) => <StopWord>{words}</StopWord>;
 
 /** What goes in and when, for the one who may add it; for everybody else that nothing goes in. */
 export function SheetDoses({ sheet }: { sheet: HouseSheet }) {
   const t = useTranslations('house.sheet.doses');
-  const bar = useDosingBar();
-  const { plan } = sheet.week;
-  const nothing =
-    sheet.handler === null
-      ? t('nobody')
-      : plan === null || plan.stale
-        ? t('noPlan')
-        : bar !== undefined
-          ? t('barred', { reason: bar })
-          : sheet.doses.length === 0
-            ? t('none')
-            : null;
+  const nothing = useNothingToAdd(sheet);
   return (
     <SheetSection id="sheet-doses" title={t('title')}>
       {sheet.handler === null ? null : (

@@ -1,6 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { classNames } from '@/components/ui/class-names';
 import { bold } from '@/components/week-sheet/bold';
 import { SheetSection } from './sheet-section';
 
@@ -22,16 +23,21 @@ export function SheetTrouble() {
   const t = useTranslations('house.sheet.trouble');
   return (
     <SheetSection id="sheet-trouble" title={t('title')}>
-      <Lines lines={trouble.map((line) => ({ key: line, words: t.rich(line, { b: bold }) }))} />
+      <Lines
+        lines={trouble.map((line) => ({ key: line, words: t.rich(line, { b: bold }) }))}
+        className="md:columns-2 md:gap-x-9 print:columns-2 print:gap-x-6"
+      />
     </SheetSection>
   );
 }
 
-function Lines({ lines }: { lines: readonly { key: string; words: React.ReactNode }[] }) {
+type LinesProps = { lines: readonly { key: string; words: React.ReactNode }[]; className?: string };
+
+function Lines({ lines, className }: LinesProps) {
   return (
-    <ul className="mt-1 space-y-1.5 text-body print:space-y-0.5">
+    <ul className={classNames('mt-1 text-body', className)}>
       {lines.map(({ key, words }) => (
-        <li key={key} className="border-l-stop border-ink pl-2.5">
+        <li key={key} className="mb-1.5 break-inside-avoid border-l-stop border-ink pl-2.5 print:mb-0.5">
           {words}
         </li>
       ))}

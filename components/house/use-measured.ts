@@ -12,16 +12,19 @@ import type { PlanDose } from '@/lib/schemas/plan-dose';
  */
 export function useMeasured(): (dose: PlanDose) => string {
   const t = useTranslations('house.sheet.doses');
-  const { amountOf, productOf } = useDoseWords();
+  const { amountOf, productOf, amountAndProduct } = useDoseWords();
   const { amount } = useUnits();
-  const amountInWords = (dose: PlanDose): string => {
+  const measured = (dose: PlanDose): string => {
     const { unit, measure } = dose;
-    if (unit === 'tablet') return t('tablets', { count: dose.amount });
     const filled = markedMeasures(dose);
-    if (measure === null || filled?.how !== 'whole') return amountOf(dose);
-    const figures = { count: filled.count, each: amount(measure, unit), total: amountOf(dose) };
+    if (measure === null || filled?.how !== 'whole') return amountAndProduct(dose);
+    const figures = {
+      count: filled.count,
+      each: amount(measure, unit),
+      total: amountOf(dose),
+      product: productOf(dose),
+    };
     return t(unit === 'g' ? 'scoops' : 'measures', figures);
   };
-  return (dose) =>
-    t('line', { amount: amountInWords(dose), product: productOf(dose), name: dose.productName ?? 'none' });
+  return (dose) => t('line', { measured: measured(dose), name: dose.productName ?? 'none' });
 }
