@@ -2,27 +2,26 @@
 
 import type { ReactNode } from 'react';
 import { ComposedChart, ReferenceArea, ReferenceLine, Tooltip, XAxis, YAxis } from 'recharts';
-import type { ChartRow } from './chart-rows';
 import { isOn, type Stretch, type TimeAxis } from './time-axis';
 import type { ValueAxis } from './value-axis';
 
 /** What every lane of the sheet shares: one time axis, its nights, and where now stands. */
 export type LaneTime = { axis: TimeAxis; width: number; nights: readonly Stretch[]; now: number; syncId: string };
 
-type Props = {
+type Props<Row> = {
   time: LaneTime;
   value: ValueAxis;
-  rows: ChartRow[];
+  rows: Row[];
   /** One sentence that says what the curve shows. */
   label: string;
   /** What is said of one hour under the pointer. */
-  readout: (row: ChartRow) => string;
+  readout: (row: Row) => string;
   children: ReactNode;
   /** Words and marks over the chart. */
   notes?: ReactNode;
 };
 
-function Readout({ row, readout }: { row: ChartRow | undefined; readout: (row: ChartRow) => string }) {
+function Readout<Row>({ row, readout }: { row: Row | undefined; readout: (row: Row) => string }) {
   return row ? (
     <p className="rounded bg-ink px-2 py-1 text-chart whitespace-nowrap text-on-ink">{readout(row)}</p>
   ) : null;
@@ -47,7 +46,8 @@ export const still = { isAnimationActive: false, activeDot: false, type: 'linear
  * A chart that fills its lane from edge to edge. Without margins an instant has the same x in every lane, and the plain
  * lanes between the charts can place theirs by the same share.
  */
-export function LaneChart({ time, value, rows, label, readout, children, notes }: Props) {
+export function LaneChart<Row extends { at: number }>(props: Props<Row>) {
+  const { time, value, rows, label, readout, children, notes } = props;
   const { axis, width, nights, now, syncId } = time;
   return (
     <div className="relative text-ink" style={{ width, height: value.height }}>

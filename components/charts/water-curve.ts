@@ -84,7 +84,7 @@ function cut(points: WaterPoint[], { from, to }: TimeAxis): WaterPoint[] {
  * dose at 19:45 shows first at 20:00; a straight line from 19:00 would rise before anything was poured. Up to the dose the
  * hour before it holds, from then on the next one, as in the swim verdict.
  */
-export function withJumps(points: readonly WaterPoint[], doses: readonly number[]): WaterPoint[] {
+export function withJumps<Point extends { at: number }>(points: readonly Point[], doses: readonly number[]): Point[] {
   return points.flatMap((point, index) => {
     const before = points[index - 1];
     if (before === undefined) return [point];

@@ -5,7 +5,8 @@ import { BarLink } from './bar-link';
 import { BrandMark } from './brand-mark';
 import { Faces } from './faces';
 import type { HouseholdFrame } from './member';
-import { emergencyCard, weeklyPlaces } from './places';
+import { OpenSituations } from './open-situations';
+import { barPlaces, emergencyCard } from './places';
 import { SignOutButton } from './sign-out-button';
 
 /** One line of places on a desk, no menu: what is used every week at the left, what is set up once at the right. */
@@ -19,9 +20,10 @@ export function HouseholdBar({ frame }: { frame: HouseholdFrame }) {
         <span className="sr-only lg:not-sr-only">{common('productName')}</span>
       </Link>
       <nav aria-label={t('places')} className="flex gap-3.5 lg:ml-6.5 lg:gap-6">
-        {weeklyPlaces.map(({ href, name }) => (
+        {barPlaces.map(({ href, name }) => (
           <BarLink key={href} href={href}>
             {t(name)}
+            {href === '/situations' && <OpenSituations />}
           </BarLink>
         ))}
       </nav>

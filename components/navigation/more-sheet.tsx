@@ -1,6 +1,6 @@
 'use client';
 
-import { ChevronRight, CircleQuestionMark, Footprints, House, type LucideIcon, Waves } from 'lucide-react';
+import { ChevronRight, CircleQuestionMark, Footprints, House, LifeBuoy, type LucideIcon, Waves } from 'lucide-react';
 import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
@@ -24,6 +24,7 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
           <TroubleLink href="/help/safety">{t('keepingSafe')}</TroubleLink>
         </div>
       </div>
+      <MorePlace href="/situations" Icon={LifeBuoy} name={t('situations')} fact={t('situationsFact')} />
       <MorePlace href="/rounds" Icon={Footprints} name={t('rounds')} fact={t('roundsFact')} />
       <MorePlace href="/house" Icon={House} name={t('house')} fact={t('houseFact')} />
       <MorePlace href="/pool" Icon={Waves} name={t('pool')} fact={t('poolFact')} />

@@ -9,6 +9,9 @@ export const weeklyPlaces = [
   { href: '/test', name: 'test', shortName: 'testShort', Icon: TestTubeDiagonal },
 ] as const;
 
+/** On a desk the bar holds these too; a phone finds them under More. */
+export const barPlaces = [...weeklyPlaces, { href: '/situations', name: 'situations' }] as const;
+
 export const emergencyCard = '/help/emergency';
 
 /** Is this address, or one below it, where we are? The emergency card has a name of its own beside Help. */

@@ -1,9 +1,13 @@
+import { useQueryClient } from '@tanstack/react-query';
 import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { usePathname } from 'next/navigation';
 import { beforeEach, expect, it, vi } from 'vitest';
 import { HouseholdShell } from '@/components/navigation/household-shell';
 import { SignedOutShell } from '@/components/navigation/signed-out-shell';
+import { situationsOptions } from '@/lib/client/situations';
+import type { Situations } from '@/lib/schemas/situation';
+import { aSituations } from '@/tests/support/situations';
 import { renderWithWords } from '@/tests/support/with-words';
 
 vi.mock('next/navigation', () => ({ usePathname: vi.fn(() => '/week') }));
@@ -27,7 +31,9 @@ const targets = () =>
 
 it('leads only to places that exist, and to the emergency card from bar and head', () => {
   renderWithWords(<HouseholdShell frame={frame}>the sheet</HouseholdShell>);
-  expect(new Set(targets())).toEqual(new Set(['', '/week', '/test', '/rounds', '/pool', '/help', '/help/emergency']));
+  expect(new Set(targets())).toEqual(
+    new Set(['', '/week', '/test', '/situations', '/rounds', '/pool', '/help', '/help/emergency']),
+  );
   expect(targets().filter((target) => target === '/help/emergency')).toHaveLength(2);
 });
 
@@ -39,7 +45,7 @@ it('marks the place where one is, in the bar and in the tabs', () => {
   expect(screen.getByRole('button', { name: 'More' })).not.toHaveClass('font-strong');
 });
 
-it.each(['/help', '/help/safety', '/help/emergency', '/pool/size', '/house/sheet'])(
+it.each(['/help', '/help/safety', '/help/emergency', '/pool/size', '/house/sheet', '/situations/accident'])(
   'keeps More marked at %s',
   (path) => {
     at(path);
@@ -59,6 +65,7 @@ it('opens More with trouble first, says who you are, and closes when one goes el
   await userEvent.click(screen.getByRole('button', { name: 'More' }));
   const more = await screen.findByRole('dialog', { name: 'More' });
   expect(within(more).getAllByRole('link')[0]).toHaveTextContent('Emergency card');
+  expect(within(more).getByRole('link', { name: /^Situations/ })).toHaveAttribute('href', '/situations');
   expect(within(more).getByRole('link', { name: /^House sheet/ })).toHaveAttribute('href', '/house');
   expect(more).toHaveTextContent('You are Ines, owner');
   expect(within(more).getByRole('button', { name: 'Sign out' })).toBeInTheDocument();
@@ -92,3 +99,24 @@ it('offers the way in to a stranger and the way back to a member', () => {
   expect(screen.getByRole('button', { name: 'Sign out' })).toBeInTheDocument();
   expect(screen.queryByRole('link', { name: 'Sign in' })).not.toBeInTheDocument();
 });
+
+it('rings a one beside Situations while one is open, from what this browser knows already', () => {
+  renderWithWords(<HouseholdShell frame={frame}>the sheet</HouseholdShell>);
+  const place = screen.getByRole('link', { name: 'Situations' });
+  expect(place).toHaveAttribute('href', '/situations');
+  expect(place).toHaveTextContent(/^Situations$/);
+});
+
+it('counts the open one', () => {
+  renderWithWords(
+    <Known situations={aSituations({ kind: 'drain-cover' })}>
+      <HouseholdShell frame={frame}>the sheet</HouseholdShell>
+    </Known>,
+  );
+  expect(screen.getByRole('link', { name: 'Situations, 1 open' })).toBeInTheDocument();
+});
+
+function Known({ situations, children }: { situations: Situations; children: React.ReactNode }) {
+  useQueryClient().setQueryData(situationsOptions().queryKey, situations);
+  return children;
+}

@@ -1,0 +1,32 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import { Skeleton } from '@/components/ui/skeleton';
+import type { SituationKind, Situations } from '@/lib/schemas/situation';
+import { severityOf } from '@/lib/client/caution-severity';
+import { BeginSituation } from './begin-situation';
+import { Cautions } from './cautions';
+import { cautionsBefore } from './cautions-before';
+
+type Props = {
+  kind: SituationKind;
+  /** Undefined while they are fetched; the cautions do not wait for them. */
+  situations: Situations | undefined;
+  loading: boolean;
+};
+
+/** A kind that is not open: what protects first, then its questions, then the button that begins it. */
+export function ClosedSituation({ kind, situations, loading }: Props) {
+  const t = useTranslations('situations');
+  return (
+    <div className="grid gap-4">
+      <Cautions cautions={cautionsBefore[kind].map((code) => ({ code, severity: severityOf(code) }))} />
+      {situations ? (
+        // Over and begun again, it is another one.
+        <BeginSituation key={situations.past[0]?.id ?? 'first'} kind={kind} open={situations.open?.situation.kind} />
+      ) : loading ? (
+        <Skeleton label={t('loading')} className="h-40" />
+      ) : null}
+    </div>
+  );
+}

@@ -1,0 +1,18 @@
+'use client';
+
+import { Siren } from 'lucide-react';
+import Link from 'next/link';
+import { useTranslations } from 'next-intl';
+import { emergencyCard } from '@/components/navigation/places';
+import { textLink } from '@/components/ui/text-link';
+
+/** One tap from a caution to the emergency card. */
+export function EmergencyLink() {
+  const t = useTranslations('navigation');
+  return (
+    <Link href={emergencyCard} className={`inline-flex min-h-11 items-center gap-2 font-emphasis ${textLink}`}>
+      <Siren aria-hidden="true" className="size-4.5 shrink-0" />
+      {t('emergencyCard')}
+    </Link>
+  );
+}
