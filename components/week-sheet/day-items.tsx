@@ -13,7 +13,8 @@ import { DoseSteps } from './dose-steps';
 import { MarkedMeasure } from './marked-measure';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
-import type { ToDoItem } from './to-do-items';
+import { keyOf, type ToDoItem } from './to-do-items';
+import { ToDoStep } from './to-do-step';
 import { useCheckReason } from './use-check-reason';
 import { useDoseWords } from './use-dose-words';
 import { useTimes } from './use-times';
@@ -23,10 +24,11 @@ export function DayItems({ items }: { items: readonly ToDoItem[] }) {
   return (
     <ul className="grid gap-3">
       {items.map((item) => (
-        <li key={`${item.kind} ${item.at}`}>
+        <li key={keyOf(item)}>
           {item.kind === 'dose' && <ListedDose dose={item.dose} />}
           {item.kind === 'check' && <ListedCheck check={item.check} />}
           {item.kind === 'reading' && <DoneReading reading={item.reading} />}
+          {item.kind === 'step' && <ToDoStep step={item.step} />}
         </li>
       ))}
     </ul>

@@ -10,8 +10,9 @@ import { DoneReading } from './done-reading';
 import { nextDose } from './dose-state';
 import { useSheet } from './sheet-context';
 import { instantOf, type SheetDay } from './sheet-times';
-import { toDoOf, type ToDoItem } from './to-do-items';
+import { keyOf, toDoOf, type ToDoItem } from './to-do-items';
 import { ToDoDose } from './to-do-dose';
+import { ToDoStep } from './to-do-step';
 import { useCheckReason } from './use-check-reason';
 import { useDoseWords } from './use-dose-words';
 import { useTimes } from './use-times';
@@ -48,11 +49,7 @@ function DayToDo({ day }: { day: SheetDay }) {
       }`}
     >
       {holdsNext && next && <DueMark dose={next} />}
-      {items.length === 0 ? (
-        <EmptyDay day={day} />
-      ) : (
-        items.map((item) => <Item key={`${item.kind} ${item.at}`} item={item} />)
-      )}
+      {items.length === 0 ? <EmptyDay day={day} /> : items.map((item) => <Item key={keyOf(item)} item={item} />)}
     </div>
   );
 }
@@ -75,6 +72,8 @@ function Item({ item }: { item: ToDoItem }) {
       return <ToDoCheck check={item.check} />;
     case 'reading':
       return <DoneReading reading={item.reading} />;
+    case 'step':
+      return <ToDoStep step={item.step} />;
   }
 }
 

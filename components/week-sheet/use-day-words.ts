@@ -6,6 +6,7 @@ import { useSheet } from './sheet-context';
 import type { SheetDay } from './sheet-times';
 import { toDoOf, type ToDoItem } from './to-do-items';
 import { useDoseWords } from './use-dose-words';
+import { useStepWords } from './use-step-words';
 import { useTimes } from './use-times';
 
 /** A day in two short lines: what is to be done or was done, and when. */
@@ -14,6 +15,7 @@ export function useDayWords(day: SheetDay): { what: string; when: string } {
   const { sheet, picture } = useSheet();
   const words = useDoseWords();
   const times = useTimes();
+  const step = useStepWords();
   const items = toDoOf(day, sheet);
   if (items.length === 0) {
     const ends = picture.planEndsAt;
@@ -24,6 +26,7 @@ export function useDayWords(day: SheetDay): { what: string; when: string } {
   }
   const whatOf = (item: ToDoItem) => {
     if (item.kind === 'dose') return words.amountAndProduct(item.dose);
+    if (item.kind === 'step') return step(item.step) ?? t('situation.label');
     return t(`check.${item.kind === 'check' ? item.check.kind : item.reading.kind}`);
   };
   const whenOf = (item: ToDoItem) => {

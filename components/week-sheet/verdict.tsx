@@ -5,6 +5,7 @@ import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
 import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
 import { bold } from './bold';
+import { OpenSituation } from './open-situation';
 import { PoolEvents } from './pool-events';
 import { useSheet } from './sheet-context';
 import { useVerdictWords } from './use-verdict-words';
@@ -15,6 +16,7 @@ export function Verdict() {
   return (
     <div>
       <VerdictItself />
+      <OpenSituation />
       <PoolEvents />
     </div>
   );

@@ -25,7 +25,10 @@ export default async function WeekPage({ searchParams }: { searchParams: Promise
     throw problem;
   });
   return (
-    <ClientMessages namespaces={['week', 'events', 'verdict', 'doses', 'units', 'readings']}>
+    <ClientMessages
+      namespaces={['week', 'events', 'verdict', 'doses', 'units', 'readings']}
+      parts={{ situations: ['kind', 'step', 'steps'] }}
+    >
       <WaitingTests
         household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
       />

@@ -85,7 +85,13 @@ export const situationConstants = [
       of: `${file}#combinedRules.evenings`,
       ...combined,
     },
-    { name: 'freshTest', value: freshTest.value, unit: 'hours', of: `${file}#freshTest.value`, source: freshTest.source },
+    {
+      name: 'freshTest',
+      value: freshTest.value,
+      unit: 'hours',
+      of: `${file}#freshTest.value`,
+      source: freshTest.source,
+    },
     {
       name: 'replacedAtMost',
       value: replacedAtMost.value,
