@@ -3,6 +3,7 @@ import { badRequests } from './journeys/bad-requests';
 import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
 import { headers } from './journeys/headers';
+import { house } from './journeys/house';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
@@ -22,6 +23,7 @@ export const journeys: readonly Journey[] = [
   ...clockChanges,
   measures,
   learning,
+  house,
   scope,
   stop,
   headers,

@@ -158,14 +158,33 @@ export const signedIn: readonly View[] = [
   },
   { name: 'pool-sun', path: '/pool/sun', prepare: shows(words('pool.sun.title')) },
   { name: 'help-signed-in', path: '/help' },
+  { name: 'situations', path: '/situations', prepare: shows(words('situations.onlyOne')) },
+  {
+    name: 'situations-accident',
+    path: '/situations/accident',
+    async prepare(page) {
+      await page.getByRole('button', { name: words('situations.begin.button') }).click();
+      await choice(page, words('situations.answer.vomit')).click();
+      await page.getByText(words('situations.questions.missing')).waitFor();
+    },
+  },
+  {
+    name: 'situations-stabilizer',
+    path: '/situations/stabilizer-high',
+    prepare: shows(words('situations.begin.button')),
+  },
+  { name: 'house', path: '/house', prepare: shows(words('house.field.gate')) },
+  { name: 'house-sheet', path: '/house/sheet', prepare: shows(words('house.sheet.doses.nobody')) },
   {
     name: 'rounds-exceptions',
     path: '/rounds',
     async prepare(page) {
-      for (const item of ['filter-pressure', 'pump-seal', 'drain-cover'] as const) {
+      for (const item of ['water-level', 'filter-pressure', 'pump-seal', 'drain-cover'] as const) {
         const name = words(`rounds.item.${item}.name`);
         await page.getByRole('button', { name: `${name}: not fine` }).click();
       }
+      await page.getByRole('button', { name: words('house.visits.writeDown') }).click();
+      await page.getByLabel(words('house.visits.note')).waitFor();
     },
   },
 ];
@@ -187,6 +206,26 @@ export const happened: readonly View[] = [
       await page.getByRole('radio', { name: words('events.kind.drain-cover.name') }).check({ force: true });
     },
   },
+];
+
+const drawn = async (page: Page) => {
+  await page.getByRole('img', { name: pattern('situations.chart.label') }).waitFor({ state: 'attached' });
+};
+
+/** For a household whose water is clearing, on its third morning. */
+export const clearing: readonly View[] = [
+  { name: 'situations-clearing', path: '/situations/clearing', prepare: drawn },
+  { name: 'situations-open', path: '/situations', prepare: shows(words('situations.onlyOne')) },
+  {
+    name: 'situations-mistake',
+    path: '/situations/clearing',
+    async prepare(page) {
+      await drawn(page);
+      await page.getByRole('button', { name: words('situations.ends.mistakeButton') }).click();
+      await page.getByRole('dialog').waitFor();
+    },
+  },
+  { name: 'situations-other', path: '/situations/storm', prepare: shows(words('situations.begin.toOpen')) },
 ];
 
 /** For somebody whose pool is out of scope. */
@@ -246,6 +285,14 @@ export const due: readonly View[] = [
     },
   },
   {
+    name: 'house-sheet-named',
+    path: '/house/sheet',
+    async prepare(page) {
+      await page.getByRole('link', { name: 'Ines', exact: true }).click();
+      await page.getByText(pattern('house.sheet.doses.steps')).first().waitFor();
+    },
+  },
+  {
     name: 'test-saved',
     path: '/test?kind=quick',
     async prepare(page) {
@@ -256,6 +303,21 @@ export const due: readonly View[] = [
       await page.locator('#value-pH').blur();
       await page.getByRole('button', { name: words('readings.save.quick') }).click();
       await page.getByText(words('readings.saved.title')).waitFor();
+    },
+  },
+  {
+    name: 'test-saved-slip',
+    path: '/test?kind=quick',
+    async prepare(page) {
+      await choice(page, words('readings.kind.quick')).first().click();
+      await choice(page, words('readings.method.slip')).click();
+      await page.locator('#value-freeChlorine').fill('2.8');
+      await page.locator('#value-pH').fill('7.5');
+      await page.locator('#value-pH').blur();
+      await page.getByRole('button', { name: words('readings.save.quick') }).click();
+      for (const product of ['calcium-hypochlorite', 'cyanuric-acid', 'copper'])
+        await page.getByRole('button', { name: words(`house.shop.product.${product}`) }).click();
+      await page.getByText(words('house.shop.keepAway')).waitFor();
     },
   },
 ];
