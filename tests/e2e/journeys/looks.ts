@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { lookAt, widths } from '../looks/look-at';
 import {
+  clearing,
   due,
   firstRun,
   happened,
@@ -13,6 +14,7 @@ import {
   type View,
   workedOut,
 } from '../looks/pages';
+import { clearThreeDays } from '../support/clearing';
 import { confirmStops } from '../support/doses';
 import { enterAs } from '../support/enter';
 import { describePool, describeSteps, fullTest, slowTablets, sundayEvening } from '../support/households';
@@ -56,6 +58,12 @@ export const looks: readonly Journey[] = [
         kind,
         happenedAt: '2026-07-05T19:00:30-04:00',
       });
+    return person;
+  }),
+  looking('looks: the water is clearing', clearing, async (server) => {
+    const person = new Person(server);
+    await person.signUp();
+    await clearThreeDays(server, person);
     return person;
   }),
   looking('looks: out of scope', stopped, async (server) => {
