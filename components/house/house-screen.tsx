@@ -21,7 +21,7 @@ export function HouseScreen({ household }: { household: HouseHousehold }) {
   return (
     <div className="mx-auto max-w-sheet px-margin pb-10">
       <HelpHead headline={t('title')} lead={t('lead')} />
-      <div className="grid gap-x-9 gap-y-5 pt-3 md:grid-cols-[minmax(0,1fr)_22rem]">
+      <div className="grid gap-x-9 gap-y-5 pt-3 md:grid-cols-[minmax(0,27rem)_minmax(0,22rem)]">
         <GoingAway />
         <div className="md:order-first">
           {data !== undefined ? (

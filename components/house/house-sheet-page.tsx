@@ -67,9 +67,9 @@ function OnePage({ sheet }: { sheet: HouseSheet }) {
           <div>
             <SheetDoses sheet={sheet} />
             {handler === null ? null : <SheetTests week={week} />}
-            <SheetTrouble />
           </div>
         </div>
+        <SheetTrouble />
       </div>
     </div>
   );

@@ -10,7 +10,8 @@ import { SheetSection } from './sheet-section';
 /** Whom to call: those who know this pool first, then those who come when somebody is hurt. */
 export function SheetCalls({ notes, locale }: { notes: HouseNotes['notes']; locale: string }) {
   const t = useTranslations('house.sheet.call');
-  const { emergency, poison } = emergencyNumbers(emergencyCountryOf(locale));
+  const country = emergencyCountryOf(locale);
+  const { emergency, poison } = emergencyNumbers(country);
   const call = (whom: string, number: string | undefined, name?: string) => (
     <SheetRow name={whom}>
       {number === undefined && name === undefined ? undefined : (
@@ -42,6 +43,7 @@ export function SheetCalls({ notes, locale }: { notes: HouseNotes['notes']; loca
           )}
         </SheetRow>
       </dl>
+      {emergency === null ? null : <p className="text-small text-ink-2">{t('numbersFor', { country })}</p>}
     </SheetSection>
   );
 }

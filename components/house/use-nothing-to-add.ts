@@ -10,6 +10,7 @@ export function useNothingToAdd({ handler, week, doses }: HouseSheet): string | 
   const bar = useDosingBar();
   if (handler === null) return t('nobody');
   if (bar !== undefined) return t('barred', { reason: bar });
+  if (week.doses.some(({ doubtful }) => doubtful)) return t('doubtful');
   // Its mornings decide, and a test each day; that cannot be handed over on paper.
   if (week.situation !== null) return t('situation');
   if (week.plan === null || week.plan.stale) return t('noPlan');

@@ -4,10 +4,13 @@ import { safetyCardCounts } from '@/lib/auth/household-access';
 import { assertMay } from '@/lib/auth/permissions';
 import { addDays } from '@/lib/calendar/household-day';
 import type { HouseSheet } from '@/lib/schemas/house-sheet';
-import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { ServiceContext } from './context';
+import { countingDoses } from './sheet-doses';
 import { showHouseNotes } from './show-house-notes';
 import { showWeek } from './show-week';
+import { DAYS_OF_A_PLAN } from './week-ahead';
+
+const DAY = 86_400_000;
 
 /**
  * The sheet for whoever looks after the pool while the household is away. Doses stand on it only for a member who handles
@@ -27,16 +30,23 @@ export async function showHouseSheet(context: ServiceContext, membershipId?: str
     .filter(({ safetyCardReadAt }) => safetyCardCounts(safetyCardReadAt, now))
     .map(({ membershipId: id, name }) => ({ membershipId: id, name }));
   const handler = handlers.find((each) => each.membershipId === membershipId) ?? null;
-  const planned = [...week.doses, ...next.doses].filter(({ status }) => status === 'planned');
-  const isAhead = ({ at }: PlanDose) => Date.parse(at) > now.getTime();
+  const ahead = [...week.doses, ...next.doses].filter(
+    ({ at, planId, status }) => status === 'planned' && planId === week.plan?.id && Date.parse(at) > now.getTime(),
+  );
   const holds = week.plan !== null && !week.plan.stale;
+  const due = await countingDoses(db, {
+    householdId,
+    from: new Date(now.getTime() - DAYS_OF_A_PLAN * DAY),
+    until: now,
+    lastReading: week.lastReading && new Date(week.lastReading.takenAt),
+  });
   return {
     // The curves are drawn on the week sheet only.
     week: { ...week, behind: null, ahead: null },
     notes: (await showHouseNotes(context)).notes,
     handlers,
     handler,
-    doses: handler === null || !holds ? [] : planned.filter((dose) => isAhead(dose) && dose.planId === week.plan?.id),
-    openDoses: planned.filter((dose) => !isAhead(dose)).length,
+    doses: handler === null || !holds ? [] : ahead,
+    openDoses: due.filter(({ status }) => status === 'planned').length,
   };
 }

@@ -73,6 +73,12 @@ describe('the house sheet', { timeout: 60_000 }, () => {
     expect((await showHouseSheet(context)).openDoses).toBe(0);
     // Two hours later the hour of this evening's dose is over.
     expect((await showHouseSheet(at(context, hoursLater(2)))).openDoses).toBe(1);
+    // On Sunday, the first day of the next calendar week, what was due before it still counts.
+    const sunday = at(context, hoursLater(6 * DAY + 12));
+    const open = (await showWeek(sunday)).doses.filter(({ status, at: hour }) => {
+      return status === 'planned' && Date.parse(hour) < sunday.now.getTime();
+    });
+    expect((await showHouseSheet(sunday)).openDoses).toBeGreaterThan(open.length);
     const late = at(context, hoursLater(8 * DAY));
     expect((await showHouseSheet(late, context.access.membershipId)).doses).toEqual([]);
   });

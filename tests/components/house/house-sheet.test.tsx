@@ -85,12 +85,20 @@ describe('the house sheet', () => {
     expect(screen.queryByText(/Good until/)).toBeNull();
   });
 
+  it('holds no dose where one may have gone in twice', () => {
+    const doubted = aDose({ id: idOf(8), doubtful: true });
+    show({ handler: joost, doses: [aDose({ measure: 50, amount: 150 })] }, { doses: [doubted] });
+    expect(part('Doses').getByText(/^A dose may have gone in twice\./)).toBeInTheDocument();
+    expect(screen.queryByText(/3 level scoops/)).toBeNull();
+  });
+
   it('calls by number, leaves a line where nothing is written down, and never guesses an emergency number', () => {
     show({ notes: { neighbourName: 'Ada', neighbourPhone: '0170 555 01' } });
     expect(screen.getByRole('link', { name: 'Ada, 0170 555 01' })).toHaveAttribute('href', 'tel:017055501');
     expect(part('Call').getAllByText('not written down yet')).toHaveLength(2);
     // The household of these tests writes as in Britain.
     expect(screen.getByRole('link', { name: 'Emergency, 999' })).toHaveAttribute('href', 'tel:999');
+    expect(part('Call').getByText(/^Numbers for the United Kingdom/)).toBeInTheDocument();
   });
 
   it('warns of a dose of which nobody said whether it went in', () => {
