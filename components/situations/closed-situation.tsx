@@ -23,7 +23,7 @@ export function ClosedSituation({ kind, situations, loading }: Props) {
       <Cautions cautions={cautionsBefore[kind].map((code) => ({ code, severity: severityOf(code) }))} />
       {situations ? (
         // Over and begun again, it is another one.
-        <BeginSituation key={situations.past[0]?.id ?? 'first'} kind={kind} open={situations.open?.situation.kind} />
+        <BeginSituation key={situations.past[0]?.id ?? 'first'} kind={kind} open={situations.open} />
       ) : loading ? (
         <Skeleton label={t('loading')} className="h-40" />
       ) : null}

@@ -8,7 +8,7 @@ import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { SituationEnding } from '@/lib/schemas/situation';
 
 /** Ends before the rule is met. */
-export type EarlyEnding = Exclude<SituationEnding, 'done'>;
+export type EarlyEnding = Exclude<SituationEnding, 'done' | 'set-aside'>;
 
 type Props = { id: string; ending: EarlyEnding; onClose: () => void; onEnded: () => void };
 

@@ -46,7 +46,7 @@ export function useTickStep() {
 
 /** Ends a procedure: its rule is met, it was a mistake, or a licensed person has taken over. */
 export function useEndSituation() {
-  return useChange(({ id, ending }: { id: string; ending: SituationEnding }) => ({
+  return useChange(({ id, ending }: { id: string; ending: Exclude<SituationEnding, 'set-aside'> }) => ({
     path: `/${id}/end`,
     method: 'POST',
     body: { ending },

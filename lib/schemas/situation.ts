@@ -100,7 +100,12 @@ export type Situation = z.output<typeof situationSchema>;
 export type AnswersOf<Kind extends SituationKind> = z.output<(typeof situationAnswers)[Kind]>;
 
 /** A procedure that somebody begins; the id is made on the device, so that a resend is harmless. */
-export const newSituationSchema = z.strictObject({ id: z.uuid(), situation: situationSchema });
+export const newSituationSchema = z.strictObject({
+  id: z.uuid(),
+  situation: situationSchema,
+  /** The open one that this one takes the place of: an accident does not wait until the pool has been opened. */
+  setAside: z.uuid().optional(),
+});
 export type NewSituation = z.output<typeof newSituationSchema>;
 
 /** The same procedure with other answers. */
@@ -109,10 +114,13 @@ export const answerSituationSchema = z.strictObject({ situation: situationSchema
 /** A step that was done, or was not after all. */
 export const situationTickSchema = z.strictObject({ step: z.string().min(1).max(64), done: z.boolean() });
 
-/** Why a procedure is over: its rule is met, it was begun by mistake, or a licensed person has taken over. */
-export const situationEndings = ['done', 'mistake', 'professional'] as const;
+/**
+ * Why a procedure is over: its rule is met, it was begun by mistake, a licensed person has taken over, or a more urgent one
+ * took its place.
+ */
+export const situationEndings = ['done', 'mistake', 'professional', 'set-aside'] as const;
 export type SituationEnding = (typeof situationEndings)[number];
-export const endSituationSchema = z.strictObject({ ending: z.enum(situationEndings) });
+export const endSituationSchema = z.strictObject({ ending: z.enum(['done', 'mistake', 'professional']) });
 
 /** One thing to do, on its day. A dose is ticked on the week sheet; `dose` names it. */
 export const situationStepSchema = z.object({

@@ -3,7 +3,7 @@ import type { Transaction } from '@/db/client';
 import { writeAudit } from '@/db/queries/audit-trail';
 import { insertPoolEvent } from '@/db/queries/pool-events';
 import { findPool } from '@/db/queries/pools';
-import { findOpenSituation, findSituation, insertSituation } from '@/db/queries/situations';
+import { endSituation, findOpenSituation, findSituation, insertSituation } from '@/db/queries/situations';
 import { inWriteTransaction } from '@/db/write';
 import { assertMay } from '@/lib/auth/permissions';
 import { AppError } from '@/lib/errors';
@@ -15,11 +15,14 @@ import { showSituations } from './show-situations';
 
 /**
  * Begins a guided procedure; from then on it leads the plan and the verdict. What ends a verdict by itself is written down as
- * such, too. The same one twice is begun once.
+ * such, too. The same one twice is begun once; one that is named may be set aside for it.
  *
  * Error: `conflict` while another one is open, or before the pool is described.
  */
-export async function openSituation(context: ServiceContext, { id, situation }: NewSituation): Promise<Situations> {
+export async function openSituation(
+  context: ServiceContext,
+  { id, situation, setAside }: NewSituation,
+): Promise<Situations> {
   const { db, access, now } = context;
   assertMay(access, 'open-situations');
   const { householdId, personId, timeZone } = access;
@@ -28,13 +31,15 @@ export async function openSituation(context: ServiceContext, { id, situation }: 
     throw new AppError('conflict', 'Describe the pool first; then a procedure can be worked out for it.');
   await inWriteTransaction(db, async (tx) => {
     if (await findSituation(tx, { householdId, id })) return;
-    if (await findOpenSituation(tx, householdId))
+    const open = await findOpenSituation(tx, householdId);
+    if (open && open.id !== setAside)
       throw new AppError('conflict', 'Another situation is open. Only one can be open at a time: end it first.');
+    if (open) await endSituation(tx, { householdId, personId, id: open.id, at: now, ending: 'set-aside' });
     const { kind, answers } = situation;
     if (!(await insertSituation(tx, { householdId, personId, id, kind, answers, openedAt: now })))
       throw new AppError('conflict', 'This was begun in another household.');
     await reportEvent(tx, context, { id, situation });
-    const detail = { kind, answers };
+    const detail = { kind, answers, ...(open ? { setAside: open.id } : {}) };
     await writeAudit(tx, { householdId, personId, at: now, action: 'open-situation', subjectId: id, detail });
   });
   return showSituations(context);

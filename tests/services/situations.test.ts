@@ -170,6 +170,17 @@ describe('situations of a household', { timeout: 120_000 }, () => {
     expect((await showSituations(context)).past).toEqual([]);
   });
 
+  it('sets the open one aside for another that is named with it, and the water then needs a test', async () => {
+    const context = await fresh(0.2);
+    const opening = await open(context, { kind: 'opening', answers: { startsOn: '2026-07-06' } });
+    await expect(
+      openSituation(context, { id: randomUUID(), situation: formed, setAside: randomUUID() }),
+    ).rejects.toMatchObject({ code: 'conflict' });
+    const shown = await openSituation(context, { id: randomUUID(), situation: formed, setAside: opening });
+    expect(shown.open!.situation.kind).toBe('accident');
+    expect(shown.past).toMatchObject([{ id: opening, ending: 'set-aside' }]);
+  });
+
   it.each([
     [{ kind: 'storm', answers: { pumpRoom: 'dry', shock: 'no' } }, 'test-first', 'storm'],
     [{ kind: 'storm', answers: { pumpRoom: 'dry', shock: 'yes' } }, 'stay-out', 'electricity-suspected'],
