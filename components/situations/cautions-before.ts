@@ -10,7 +10,7 @@ export const cautionsBefore: Record<SituationKind, readonly Caution[]> = {
   'combined-chlorine': ['never-mix'],
   'drain-cover': ['drain-holds'],
   'quick-raise': ['never-mix'],
-  storm: ['thunder', 'shock', 'wet-pump-room', 'no-metal-ladder'],
+  storm: ['thunder', 'shock', 'wet-pump-room'],
   cover: ['half-open-cover', 'no-floater-under-cover'],
   stain: ['metals', 'nothing-of-ours'],
   away: ['bottle-and-gate'],

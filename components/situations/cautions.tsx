@@ -31,6 +31,7 @@ export function Cautions({ cautions }: { cautions: Procedure['cautions'] }) {
             severity={look}
             word={common(word)}
             title={title}
+            className={severity === 'note' ? 'lg:self-start' : ''}
             actions={severity === 'note' ? undefined : <EmergencyLink />}
           >
             <p className="mt-0.5 text-pretty">{text}</p>

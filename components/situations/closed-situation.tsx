@@ -21,6 +21,7 @@ export function ClosedSituation({ kind, situations, loading }: Props) {
   return (
     <div className="grid gap-4">
       <Cautions cautions={cautionsBefore[kind].map((code) => ({ code, severity: severityOf(code) }))} />
+      <p className="max-w-reading text-pretty">{t(`about.${kind}`)}</p>
       {situations ? (
         // Over and begun again, it is another one.
         <BeginSituation key={situations.past[0]?.id ?? 'first'} kind={kind} open={situations.open} />

@@ -10,7 +10,10 @@ import { textLink } from '@/components/ui/text-link';
 export function EmergencyLink() {
   const t = useTranslations('navigation');
   return (
-    <Link href={emergencyCard} className={`inline-flex min-h-11 items-center gap-2 font-emphasis ${textLink}`}>
+    <Link
+      href={emergencyCard}
+      className={`inline-flex min-h-11 items-center gap-2 font-emphasis md:min-h-7 pointer-coarse:min-h-11 ${textLink}`}
+    >
       <Siren aria-hidden="true" className="size-4.5 shrink-0" />
       {t('emergencyCard')}
     </Link>

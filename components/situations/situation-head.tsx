@@ -11,13 +11,15 @@ type Props = {
   /** The page of one kind has a way back; the index is headed by the place's own name. */
   page: 'index' | 'kind';
   headline: string;
-  lead: string | undefined;
+  lead?: string | undefined;
+  /** Nothing is open: the head says no more than the name, so that what protects stands right under it. */
+  short?: boolean;
   /** When the next test is asked for, in words. */
-  nextTest: string | undefined;
+  nextTest?: string | undefined;
 };
 
 /** What this place is, what is to be done, and what is to be measured next; closed by the double rule. */
-export function SituationHead({ page, headline, lead, nextTest }: Props) {
+export function SituationHead({ page, headline, lead, short = false, nextTest }: Props) {
   const t = useTranslations('situations');
   const ofIndex = page === 'index';
   const Headline = ofIndex ? 'h2' : 'h1';
@@ -39,20 +41,22 @@ export function SituationHead({ page, headline, lead, nextTest }: Props) {
           <Headline className="font-display-soft text-headline text-balance">{headline}</Headline>
           {lead !== undefined && <p className="mt-1 font-display text-lead text-pretty">{lead}</p>}
         </div>
-        <div
-          className={`pb-4 md:col-start-2 md:px-7 lg:col-start-3 lg:border-l lg:border-rule lg:pt-4.25 lg:pr-0 ${ofIndex ? 'hidden md:block' : ''}`}
-        >
-          {nextTest !== undefined && (
-            <>
-              <p className="text-small text-ink-2">{t('head.nextReading')}</p>
-              <p className="mb-2 font-display text-section">{nextTest}</p>
-            </>
-          )}
-          <Link href="/test" className={buttonClass({ size: 'small' })}>
-            <TestTubeDiagonal aria-hidden="true" className="size-4.5" />
-            {t('head.enterTest')}
-          </Link>
-        </div>
+        {!short && (
+          <div
+            className={`pb-4 md:col-start-2 md:px-7 lg:col-start-3 lg:border-l lg:border-rule lg:pt-4.25 lg:pr-0 ${ofIndex ? 'hidden md:block' : ''}`}
+          >
+            {nextTest !== undefined && (
+              <>
+                <p className="text-small text-ink-2">{t('head.nextReading')}</p>
+                <p className="mb-2 font-display text-section">{nextTest}</p>
+              </>
+            )}
+            <Link href="/test" className={buttonClass({ size: 'small' })}>
+              <TestTubeDiagonal aria-hidden="true" className="size-4.5" />
+              {t('head.enterTest')}
+            </Link>
+          </div>
+        )}
       </div>
       <DoubleRule />
     </header>

@@ -56,7 +56,7 @@ function IndexRow({ kind, current, openDay }: RowProps) {
       href={`/situations/${kind}`}
       aria-current={current ? 'page' : undefined}
       className={classNames(
-        '-mx-margin grid min-h-[66px] grid-cols-[1fr_auto] items-center gap-2.5 border-t px-margin py-2 md:min-h-14 md:pr-3',
+        '-mx-margin grid min-h-[66px] grid-cols-[1fr_auto] items-center gap-2.5 border-t px-margin py-2 md:-mr-3 md:min-h-14 md:pr-3',
         isOpen ? 'border-transparent bg-ink text-on-ink' : 'border-rule',
         current && !isOpen && 'bg-paper-lift',
       )}

@@ -82,18 +82,8 @@ function Head({ kind, situations }: { kind: SituationKind | undefined; situation
   const open = situations?.open ?? null;
   if (open && situations && (kind === undefined || kind === open.situation.kind))
     return <OpenHead page={page} open={open} now={instantOf(situations.now)} />;
-  if (kind)
-    return (
-      <SituationHead page={page} headline={t(`kind.${kind}.name`)} lead={t(`about.${kind}`)} nextTest={undefined} />
-    );
-  return (
-    <SituationHead
-      page={page}
-      headline={t(situations ? 'nothingOpen.title' : 'index')}
-      lead={undefined}
-      nextTest={undefined}
-    />
-  );
+  if (kind) return <SituationHead page={page} headline={t(`kind.${kind}.name`)} short />;
+  return <SituationHead page={page} headline={t(situations ? 'nothingOpen.title' : 'index')} short />;
 }
 
 function OpenHead({ page, open, now }: { page: 'index' | 'kind'; open: OpenSituation; now: number }) {

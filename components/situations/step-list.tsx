@@ -53,7 +53,7 @@ function Days({ days, open, now }: Props & { days: readonly StepDay[] }) {
 }
 
 /** A day's name; today on ink. */
-export function StepDayName({ day, now }: { day: string; now: number }) {
+export function StepDayName({ day, now, inColumn = false }: { day: string; now: number; inColumn?: boolean }) {
   const t = useTranslations('situations.steps');
   const times = useSituationTimes(now);
   const isToday = day === times.today;
@@ -61,7 +61,7 @@ export function StepDayName({ day, now }: { day: string; now: number }) {
     <h3
       aria-label={times.longDay(day)}
       aria-current={isToday ? 'date' : undefined}
-      className={`flex h-6.5 items-center justify-between gap-2 text-name ${isToday ? 'bg-ink px-2.25 text-on-ink' : 'border-b border-rule'}`}
+      className={`flex h-6.5 items-center justify-between gap-2 text-name ${isToday ? 'bg-ink text-on-ink' : inColumn ? '' : 'border-b border-rule'} ${isToday || inColumn ? 'px-2.25' : ''}`}
     >
       <span className="font-display whitespace-nowrap">{times.heading(day)}</span>
       {isToday && <span className="text-chart font-emphasis">{t('today')}</span>}

@@ -41,7 +41,7 @@ export function TreatmentChlorine({ open, chart, axis, now, width }: Props) {
       style={{ height: HEIGHT }}
     >
       <div className="sticky left-0 z-2 bg-paper">
-        <div className="max-w-20">
+        <div className="max-w-26">
           <LaneName name={t('name')} note={t('note', { unit: units.unitOf('freeChlorine') })} tone="teal" />
         </div>
         <AxisFigures value={value} figures={figures} />

@@ -55,7 +55,7 @@ export function TreatmentSheet({ open, chart, days, now, withSteps }: Props) {
         <LaneGrid days={days} name={null}>
           {(day) => (
             <div className="relative h-12.5">
-              <StepDayName day={day.day} now={now} />
+              <StepDayName day={day.day} now={now} inColumn />
               <HourMarks day={day} timeZone={timeZone} />
             </div>
           )}

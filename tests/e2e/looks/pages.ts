@@ -209,7 +209,8 @@ export const happened: readonly View[] = [
 ];
 
 const drawn = async (page: Page) => {
-  await page.getByRole('img', { name: pattern('situations.chart.label') }).waitFor({ state: 'attached' });
+  const sheet = page.getByRole('region', { name: words('situations.chart.scroll') });
+  await sheet.getByRole('img').waitFor({ state: 'attached' });
 };
 
 /** For a household whose water is clearing, on its third morning. */
