@@ -10,6 +10,7 @@ import { looks } from './journeys/looks';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
 import { scope } from './journeys/scope';
+import { situations } from './journeys/situations';
 import { stop } from './journeys/stop';
 import type { Journey } from './support/journey';
 
@@ -26,6 +27,7 @@ export const journeys: readonly Journey[] = [
   house,
   scope,
   stop,
+  situations,
   headers,
   measuring,
 ];

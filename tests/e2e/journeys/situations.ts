@@ -1,0 +1,144 @@
+import type { Page } from 'playwright-core';
+import { join } from 'node:path';
+import type { SituationKind } from '@/lib/schemas/situation';
+import { situationsOf } from '../support/clearing';
+import { enterAs } from '../support/enter';
+import { describePool, fullTest, sundayEvening, weekOf } from '../support/households';
+import type { Journey, Stage } from '../support/journey';
+import { Person } from '../support/person';
+import { shotsFolder } from '../support/place';
+import { words } from '../support/words';
+
+const answer = (name: string) => words(`situations.answer.${name}`);
+
+/** What is answered on the page of each kind, and the state that the week sheet then has. */
+const walks: readonly {
+  kind: SituationKind;
+  choose?: readonly string[];
+  days?: readonly string[];
+  verdict?: string;
+}[] = [
+  { kind: 'accident', choose: [answer('loose-stool')], verdict: 'stay-out' },
+  { kind: 'clearing', choose: [answer('not-at-all'), answer('green'), answer('no')], verdict: 'stay-out' },
+  { kind: 'combined-chlorine' },
+  { kind: 'drain-cover', verdict: 'stay-out' },
+  { kind: 'quick-raise' },
+  { kind: 'storm', choose: [answer('dry'), answer('no')], verdict: 'test-first' },
+  { kind: 'cover', choose: [answer('week-or-more'), answer('yes')], verdict: 'test-first' },
+  { kind: 'stain' },
+  { kind: 'away', days: ['2026-07-10', '2026-07-16'], choose: [answer('nobody')] },
+  { kind: 'stabilizer-high', choose: [answer('no')] },
+  { kind: 'hardness-high', choose: [answer('unsure')] },
+  { kind: 'opening', days: ['2026-07-06'] },
+  { kind: 'closing', days: ['2026-07-06'] },
+];
+
+/** Every situation on a phone: from its cautions to its steps on the week sheet, and its end. */
+export const situations: Journey = {
+  name: 'situations on a phone',
+  seconds: 300,
+  async run(stage) {
+    const server = await stage.server({ name: 'situations', clock: sundayEvening });
+    const ines = new Person(server);
+    await ines.signUp();
+    await describePool(ines);
+    const test = fullTest(sundayEvening);
+    const values = { ...test.values, freeChlorine: 1.4, combinedChlorine: 0.7, cyanuricAcid: 95, calciumHardness: 620 };
+    await ines.must('POST', '/api/readings', { ...test, values });
+    const { page } = await stage
+      .visitor(server, 'Ines', { width: 390, height: 844, touch: true })
+      .then(async (visitor) => {
+        await enterAs(visitor, ines);
+        return visitor;
+      });
+    for (const walk of walks) await stage.part(walk.kind, () => walkThrough(stage, page, ines, walk));
+    await stage.part('a drain cover is replaced', () => replaceDrainCover(stage, page, ines));
+  },
+};
+
+async function walkThrough(
+  stage: Stage,
+  page: Page,
+  ines: Person,
+  { kind, choose = [], days = [], verdict }: (typeof walks)[number],
+) {
+  const name = words(`situations.kind.${kind}.name`);
+  await page.goto('/situations');
+  await page
+    .getByRole('link', { name: new RegExp(`^${escaped(name)}`) })
+    .first()
+    .click();
+  await page.waitForURL(`**/situations/${kind}`);
+  const begin = page.getByRole('button', { name: words('situations.begin.button'), exact: true });
+  await begin.waitFor();
+  await cautionsFirst(stage, page, kind);
+  for (const [index, day] of days.entries()) await page.locator('input[type=date]').nth(index).fill(day);
+  for (const each of choose) await exactly(page, each).click();
+  await begin.click();
+  await page.getByRole('heading', { name: words('situations.ends.label') }).waitFor();
+  await shoot(page, `situation-${kind}`);
+  const { open } = await situationsOf(ines);
+  stage.equal(`${kind}: it is open`, open?.situation.kind, kind);
+  stage.check(`${kind}: it has steps`, (open?.procedure.steps.length ?? 0) > 0, open);
+  await noSideways(stage, page, kind);
+
+  await page.goto('/week');
+  const strip = page.getByRole('region', { name: words('week.situation.label') });
+  await strip.waitFor();
+  stage.check(`${kind}: the week sheet names it`, (await strip.innerText()).includes(name));
+  if (verdict !== undefined) stage.equal(`${kind}: the verdict`, (await weekOf(ines)).verdict.state, verdict);
+  await shoot(page, `situation-${kind}-week`);
+
+  await strip.getByRole('link', { name: words('week.situation.toSteps') }).click();
+  await page.getByRole('button', { name: words('situations.ends.mistakeButton') }).click();
+  await page.getByRole('button', { name: words('situations.ends.mistake.yes') }).click();
+  await page.getByRole('dialog').waitFor({ state: 'detached' });
+  stage.equal(`${kind}: begun by mistake, it is over`, (await situationsOf(ines)).open, null);
+}
+
+/** What protects people stands above what is asked. */
+async function cautionsFirst(stage: Stage, page: Page, kind: SituationKind): Promise<void> {
+  const text = (await page.locator('main').innerText()).replace(/\s+/g, ' ');
+  const asked = text.indexOf(words('situations.begin.button'));
+  const stop = text.search(
+    new RegExp(`${words('common.stop')}|${words('common.takeCare')}|${words('common.note')}`, 'i'),
+  );
+  stage.check(`${kind}: cautions stand before the questions`, stop >= 0 && stop < asked, text.slice(0, 400));
+  stage.check(`${kind}: never ‘safe’`, !/\bsafe\b/i.test(text), text);
+}
+
+async function replaceDrainCover(stage: Stage, page: Page, ines: Person): Promise<void> {
+  await page.goto('/situations/drain-cover');
+  await page.getByRole('button', { name: words('situations.begin.button'), exact: true }).click();
+  const replaced = page.getByRole('checkbox', {
+    name: new RegExp(escaped(words('situations.step.cover-replaced.name'))),
+  });
+  await replaced.first().waitFor();
+  const done = page.getByRole('button', { name: words('situations.ends.doneButton'), exact: true });
+  stage.equal('it cannot be ended before', await done.count(), 0);
+  await replaced.first().check({ force: true });
+  await done.click();
+  await page.getByText(words('situations.ends.over')).first().waitFor();
+  const { open, past } = await situationsOf(ines);
+  stage.equal('it is over, and done', [open, past[0]?.ending], [null, 'done']);
+  const { verdict } = await weekOf(ines);
+  stage.check('nobody is kept out for it any more', verdict.reasons[0]?.code !== 'drain-cover-broken', verdict);
+}
+
+/** The answer that says this and nothing more: "no" is not "not at all". */
+function exactly(page: Page, text: string) {
+  return page.locator('label:has(input[type=radio])').filter({ hasText: new RegExp(`^${escaped(text)}$`) });
+}
+
+async function noSideways(stage: Stage, page: Page, kind: string): Promise<void> {
+  const wider = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
+  stage.check(`${kind}: nothing is wider than the phone`, wider <= 0, wider);
+}
+
+async function shoot(page: Page, name: string): Promise<void> {
+  await page.screenshot({ path: join(shotsFolder, `${name}.png`), fullPage: true });
+}
+
+function escaped(text: string): string {
+  return text.replace(/[.*+?^${}()|[\]\\]/g, '\\$&');
+}
