@@ -19,7 +19,7 @@ type Props = {
 export function ClosedSituation({ kind, situations, loading }: Props) {
   const t = useTranslations('situations');
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       <Cautions cautions={cautionsBefore[kind].map((code) => ({ code, severity: severityOf(code) }))} />
       <p className="max-w-reading text-pretty">{t(`about.${kind}`)}</p>
       {situations ? (

@@ -28,7 +28,7 @@ export function OpenSituationView({ open, situations: { now: iso, chart }, onEnd
   const drawn = chart !== null && days.length > 0;
   const columns = drawn && isPhone === false;
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       <Cautions cautions={open.procedure.cautions} />
       <Answered open={open} />
       {drawn && (

@@ -18,7 +18,7 @@ export function useStepWords() {
     const situation = sheet.situation?.situation;
     return t(`${code}.name`, {
       minutes: figure('minutes'),
-      drop: units.quantity(figure('drop'), 'length'),
+      drop: units.quantity(figure('drop'), 'level'),
       volume: units.quantity(figure('volume'), 'volume'),
       name: situation?.kind === 'away' ? (situation.answers.name ?? 'none') : 'none',
     });

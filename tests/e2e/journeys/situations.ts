@@ -136,6 +136,8 @@ async function noSideways(stage: Stage, page: Page, kind: string): Promise<void>
 }
 
 async function shoot(page: Page, name: string): Promise<void> {
+  // The drawing's code comes after the page.
+  await page.waitForTimeout(1200);
   await page.screenshot({ path: join(shotsFolder, `${name}.png`), fullPage: true });
 }
 
