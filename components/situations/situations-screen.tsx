@@ -52,7 +52,9 @@ function SituationsPage({ kind }: { kind: SituationKind | undefined }) {
         <aside className={onIndex ? '' : 'hidden md:block'}>
           <SituationIndex situations={situations} current={kind} />
         </aside>
-        <div className={`min-w-0 grid-cols-[minmax(0,1fr)] content-start gap-5 pt-3.5 ${onIndex ? 'hidden md:grid' : 'grid'}`}>
+        <div
+          className={`min-w-0 grid-cols-[minmax(0,1fr)] content-start gap-5 pt-3.5 ${onIndex ? 'hidden md:grid' : 'grid'}`}
+        >
           {ended && !open && <Ended />}
           {query.isError && situations === undefined && (
             <NotLoaded retry={() => void query.refetch()} problem={query.error} />

@@ -23,13 +23,17 @@ export function TreatmentTables({ open, chart, now, until }: Props) {
   const [first, last] = [points[0], points.at(-1)];
   const doseIn = (at: number, next: number) =>
     chart.doses.find((dose) => instantOf(dose.at) >= at && instantOf(dose.at) < next);
+  const againstBand = (value: number, low: number, high: number) => {
+    if (value < low) return mornings('below', { value: level(low - value) });
+    return value > high ? mornings('above', { value: level(value - high) }) : mornings('inside');
+  };
   return (
     <Disclosure summary={<span className="text-small">{t('seeHours')}</span>}>
       {chart.readings.length > 0 && (
         <DataTable
           caption={t('captionReadings')}
           columns={[t('hour'), t('reading'), t('ordinaryColumn'), t('judged')]}
-          rows={chart.readings.map(({ takenAt, freeChlorine, inside }) => {
+          rows={chart.readings.map(({ takenAt, freeChlorine }) => {
             const band = bandOf(takenAt);
             const known = band !== undefined && band.low !== null && band.high !== null;
             return {
@@ -38,7 +42,7 @@ export function TreatmentTables({ open, chart, now, until }: Props) {
                 whenOf(instantOf(takenAt)),
                 level(freeChlorine),
                 known ? t('between', { low: level(band.low ?? 0), high: level(band.high ?? 0) }) : mornings('noBand'),
-                inside === null ? mornings('noBand') : mornings(inside ? 'inside' : 'notYet'),
+                known ? againstBand(freeChlorine, band.low ?? 0, band.high ?? 0) : '',
               ],
             };
           })}

@@ -13,7 +13,11 @@ export function WhyThisMix() {
   return (
     <section className="pb-3 lg:border-b lg:border-rule">
       <h2 className="mb-1.5 font-display text-section">{t('title')}</h2>
-      {plan === null || (plan.cost === null && plan.reasons.length === 0) ? <p className="text-ink-2">{t('none')}</p> : <Reasons plan={plan} />}
+      {plan === null || (plan.cost === null && plan.reasons.length === 0) ? (
+        <p className="text-ink-2">{t('none')}</p>
+      ) : (
+        <Reasons plan={plan} />
+      )}
     </section>
   );
 }

@@ -11,20 +11,20 @@ import { words } from '../support/words';
 
 const answer = (name: string) => words(`situations.answer.${name}`);
 
-/** What is answered on the page of each kind, and the state that the week sheet then has. */
+/** What is answered on the page of each kind, and a reason that the verdict then has. */
 const walks: readonly {
   kind: SituationKind;
   choose?: readonly string[];
   days?: readonly string[];
-  verdict?: string;
+  reason?: string;
 }[] = [
-  { kind: 'accident', choose: [answer('loose-stool')], verdict: 'stay-out' },
-  { kind: 'clearing', choose: [answer('not-at-all'), answer('green'), answer('no')], verdict: 'stay-out' },
+  { kind: 'accident', choose: [answer('loose-stool')], reason: 'accident-open' },
+  { kind: 'clearing', choose: [answer('not-at-all'), answer('green'), answer('no')], reason: 'water-green' },
   { kind: 'combined-chlorine' },
-  { kind: 'drain-cover', verdict: 'stay-out' },
+  { kind: 'drain-cover', reason: 'drain-cover-broken' },
   { kind: 'quick-raise' },
-  { kind: 'storm', choose: [answer('dry'), answer('no')], verdict: 'test-first' },
-  { kind: 'cover', choose: [answer('week-or-more'), answer('yes')], verdict: 'test-first' },
+  { kind: 'storm', choose: [answer('dry'), answer('no')], reason: 'storm' },
+  { kind: 'cover', choose: [answer('week-or-more'), answer('yes')], reason: 'cover-off-after-a-week' },
   { kind: 'stain' },
   { kind: 'away', days: ['2026-07-10', '2026-07-16'], choose: [answer('nobody')] },
   { kind: 'stabilizer-high', choose: [answer('no')] },
@@ -60,7 +60,7 @@ async function walkThrough(
   stage: Stage,
   page: Page,
   ines: Person,
-  { kind, choose = [], days = [], verdict }: (typeof walks)[number],
+  { kind, choose = [], days = [], reason }: (typeof walks)[number],
 ) {
   const name = words(`situations.kind.${kind}.name`);
   await page.goto('/situations');
@@ -86,7 +86,13 @@ async function walkThrough(
   const strip = page.getByRole('region', { name: words('week.situation.label') });
   await strip.waitFor();
   stage.check(`${kind}: the week sheet names it`, (await strip.innerText()).includes(name));
-  if (verdict !== undefined) stage.equal(`${kind}: the verdict`, (await weekOf(ines)).verdict.state, verdict);
+  const { reasons } = (await weekOf(ines)).verdict;
+  if (reason !== undefined)
+    stage.check(
+      `${kind}: the verdict knows`,
+      reasons.some(({ code }) => code === reason),
+      reasons,
+    );
   await shoot(page, `situation-${kind}-week`);
 
   await strip.getByRole('link', { name: words('week.situation.toSteps') }).click();
