@@ -30,7 +30,7 @@ export function SheetDoses({ sheet }: { sheet: HouseSheet }) {
         <p className="mt-1.5 border-due border-ink px-3 py-2 text-body font-strong">{nothing}</p>
       )}
       {sheet.handler === null ? <p className="mt-1.5 text-body">{t('nobodyWords')}</p> : null}
-      <InlineStop className="mt-2">{t.rich(nothing === null ? 'mix' : 'mixShort', { stop })}</InlineStop>
+      <InlineStop className="mt-2 print:mt-1">{t.rich(nothing === null ? 'mix' : 'mixShort', { stop })}</InlineStop>
     </SheetSection>
   );
 }
@@ -44,7 +44,7 @@ function DoseLines({ sheet }: { sheet: HouseSheet }) {
     <>
       <ul className="mt-1">
         {sheet.doses.map((dose) => (
-          <li key={dose.id} className="border-t border-rule py-1.5 text-body print:py-0.5">
+          <li key={dose.id} className="border-t border-rule py-1.5 text-body print:py-0.5 print:text-small">
             <p>
               {t.rich('when', {
                 day: longDay(dayOf(instantOf(dose.at), timeZone), locale),
@@ -57,7 +57,7 @@ function DoseLines({ sheet }: { sheet: HouseSheet }) {
           </li>
         ))}
       </ul>
-      <ul className="mt-1 list-disc space-y-0.5 pl-5 text-body">
+      <ul className="mt-1 list-disc space-y-0.5 pl-5 text-body print:space-y-0 print:text-small">
         {(['steps', 'measure', 'weather'] as const).map((rule) => (
           <li key={rule}>{t.rich(rule, { b: bold })}</li>
         ))}

@@ -35,7 +35,7 @@ type LinesProps = { lines: readonly { key: string; words: React.ReactNode }[]; c
 
 function Lines({ lines, className }: LinesProps) {
   return (
-    <ul className={classNames('mt-1 text-body', className)}>
+    <ul className={classNames('mt-1 text-body print:text-small', className)}>
       {lines.map(({ key, words }) => (
         <li key={key} className="mb-1.5 break-inside-avoid border-l-stop border-ink pl-2.5 print:mb-0.5">
           {words}
