@@ -3,10 +3,9 @@
 import { useTranslations } from 'next-intl';
 import { Skeleton } from '@/components/ui/skeleton';
 import type { SituationKind, Situations } from '@/lib/schemas/situation';
-import { severityOf } from '@/lib/client/caution-severity';
+import { cautionsBefore } from '@/lib/client/cautions-before';
 import { BeginSituation } from './begin-situation';
 import { Cautions } from './cautions';
-import { cautionsBefore } from './cautions-before';
 
 type Props = {
   kind: SituationKind;
@@ -20,7 +19,7 @@ export function ClosedSituation({ kind, situations, loading }: Props) {
   const t = useTranslations('situations');
   return (
     <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
-      <Cautions cautions={cautionsBefore[kind].map((code) => ({ code, severity: severityOf(code) }))} />
+      <Cautions cautions={cautionsBefore(kind)} />
       <p className="max-w-reading text-pretty">{t(`about.${kind}`)}</p>
       {situations ? (
         // Over and begun again, it is another one.

@@ -1,5 +1,6 @@
 import type { Entered, SignIn, SignUp } from '@/lib/schemas/account';
 import { fetchJson, type ReplyParser } from './fetch-json';
+import { forgetEmergencyCard } from './kept-card';
 
 /**
  * Where to go after signing in or up: an address of our own, never another site's. Checked by hand, because the schema
@@ -32,6 +33,7 @@ export function signUp(entry: SignUp): Promise<Entered> {
 
 export async function signOut(): Promise<void> {
   await fetchJson('/api/sign-out', nothing, { method: 'POST' });
+  await forgetEmergencyCard();
 }
 
 /** Opens a private copy of the demo household; the cookie comes with the reply. */

@@ -1,5 +1,6 @@
 import { badForms } from './journeys/bad-forms';
 import { badRequests } from './journeys/bad-requests';
+import { cardOffline } from './journeys/card-offline';
 import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
 import { headers } from './journeys/headers';
@@ -28,6 +29,7 @@ export const journeys: readonly Journey[] = [
   scope,
   stop,
   situations,
+  cardOffline,
   headers,
   measuring,
 ];

@@ -53,6 +53,7 @@ export type ConstantUnit =
   | 'minutes'
   | 'days'
   | 'g'
+  | 'litres'
   | 'gPerHour'
   | 'litresPerHour'
   | 'metresPerHour'

@@ -8,6 +8,7 @@ import {
   TABLETS_NEED_PH,
 } from '@/lib/standards/caps';
 import { filterPressureRise } from '@/lib/standards/filter';
+import { handling } from '@/lib/standards/handling';
 import { type Limit, limits } from '@/lib/standards/limits';
 import { surfaceRanges } from '@/lib/standards/surface-ranges';
 import { type Constant, type ConstantUnit, group } from './constant';
@@ -27,6 +28,7 @@ const fastNames = Object.keys(fastChlorineCap) as (keyof typeof fastChlorineCap)
 const companionNames = Object.keys(companionCap) as (keyof typeof companionCap)[];
 const waitNames = [...fastNames, 'trichlor', ...companionNames] as const;
 const surfaceNames = Object.keys(surfaceRanges) as (keyof typeof surfaceRanges)[];
+const handlingNames = Object.keys(handling) as (keyof typeof handling)[];
 
 const surface = surfaceNames.flatMap(
   (name): Constant<`surface.${typeof name}.${'hardness' | 'index'}.${'low' | 'high'}`>[] => {
@@ -176,4 +178,16 @@ export const ruleConstants = [
       source: waterMarkError.source,
     },
   ]),
+  group(
+    'handling',
+    [],
+    'ours',
+    handlingNames.map((name) => ({
+      name: `handling.${name}` as const,
+      value: handling[name].value,
+      unit: handling[name].unit,
+      of: `standards/handling#handling.${name}.value`,
+      source: handling[name].source,
+    })),
+  ),
 ];

@@ -1,6 +1,6 @@
 import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
-import { cautionsBefore } from '@/components/situations/cautions-before';
+import { cautionsBefore } from '@/lib/client/cautions-before';
 import { questionsOf } from '@/components/situations/questions';
 import words from '@/lib/messages/en/situations.json';
 import { type SituationKind, situationKinds } from '@/lib/schemas/situation';
@@ -22,7 +22,7 @@ describe.each(situationKinds)('%s, not begun', (kind: SituationKind) => {
     const button = await begin();
     expect(screen.getByRole('heading', { level: 1 })).toHaveTextContent(words.kind[kind].name);
     const cautions = screen.getByRole('region', { name: 'Cautions' });
-    const titles = cautionsBefore[kind].map((code) => within(cautions).getByText(words.caution[code].title));
+    const titles = cautionsBefore(kind).map(({ code }) => within(cautions).getByText(words.caution[code].title));
     const stops = titles.filter((_, index) => severityOf(cautionsBefore[kind][index]!) === 'stop');
     const others = titles.filter((title) => !stops.includes(title));
     const questions = screen.queryByRole('region', { name: 'Questions' });

@@ -1,10 +1,10 @@
 import type { SituationKind } from '@/lib/schemas/situation';
-import type { Caution } from '@/lib/situations/codes';
+import { type Caution, severityOf } from '@/lib/situations/codes';
 
 /**
  * What holds before any question is answered, in the order in which it protects. Once a procedure is open it brings its own.
  */
-export const cautionsBefore: Record<SituationKind, readonly Caution[]> = {
+const codes: Record<SituationKind, readonly Caution[]> = {
   accident: ['everyone-out', 'no-time-for-loose-stool', 'gloves-and-net', 'nobody-ill-swims'],
   clearing: ['nobody-in-cloudy', 'never-mix', 'nothing-of-ours'],
   'combined-chlorine': ['never-mix'],
@@ -19,3 +19,8 @@ export const cautionsBefore: Record<SituationKind, readonly Caution[]> = {
   opening: ['nobody-in-cloudy', 'drain-holds', 'half-open-cover', 'never-mix'],
   closing: ['half-open-cover', 'never-mix', 'no-floater-under-cover'],
 };
+
+/** The cautions of a kind before it is begun, each with how much harm it keeps away. */
+export function cautionsBefore(kind: SituationKind) {
+  return codes[kind].map((code) => ({ code, severity: severityOf(code) }));
+}

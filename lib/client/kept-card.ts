@@ -1,0 +1,16 @@
+/** What the service worker names its store. */
+const kept = 'wadewell-emergency-card';
+
+/**
+ * Has the emergency card kept on this device, so that it opens without a connection. A browser that has no service workers,
+ * or a page over plain http, goes without.
+ */
+export function keepEmergencyCard(): void {
+  if (!('serviceWorker' in navigator)) return;
+  navigator.serviceWorker.register('/sw.js').catch(() => undefined);
+}
+
+/** Forgets the card as the person saw it who signs out: names stand on it. It is kept anew for whoever comes next. */
+export async function forgetEmergencyCard(): Promise<void> {
+  if ('caches' in globalThis) await caches.delete(kept);
+}
