@@ -24,7 +24,7 @@ describe('free chlorine of a clearing', () => {
     await drawn();
     expect(
       screen.getByRole('img', {
-        name: 'Free chlorine from Thursday 9 July to Monday 13 July, never over 10: 4 readings, 0.6, 4.2, 6.9, 8.5; 1 of 3 inside the ordinary band.',
+        name: 'Free chlorine from Thursday 9 July to Monday 13 July, never over 10: 4 readings, 0.6, 4.2, 6.9, 8.5; 1 of 3 not under the ordinary band.',
       }),
     ).toBeInTheDocument();
   });
@@ -74,7 +74,7 @@ describe('free chlorine of a clearing', () => {
       name: 'Readings against the ordinary band of the morning',
       hidden: true,
     });
-    expect(table).toHaveTextContent('Fri 10, 07:104.27.9 to 9.1');
+    expect(table).toHaveTextContent('Fri 10, 07:104.27.9 to 9.13.7 below');
     expect(
       screen.getByRole('table', { name: /^Free chlorine, hour by hour, from Thu 9, 18:00/, hidden: true }),
     ).toBeInTheDocument();

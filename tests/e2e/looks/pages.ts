@@ -210,7 +210,7 @@ export const happened: readonly View[] = [
 
 const drawn = async (page: Page) => {
   const sheet = page.getByRole('region', { name: words('situations.chart.scroll') });
-  await sheet.getByRole('img').waitFor({ state: 'attached' });
+  await sheet.getByRole('img').first().waitFor({ state: 'attached' });
 };
 
 /** For a household whose water is clearing, on its third morning. */
