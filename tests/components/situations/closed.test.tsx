@@ -4,7 +4,6 @@ import { cautionsBefore } from '@/lib/client/cautions-before';
 import { questionsOf } from '@/components/situations/questions';
 import words from '@/lib/messages/en/situations.json';
 import { type SituationKind, situationKinds } from '@/lib/schemas/situation';
-import { severityOf } from '@/lib/situations/codes';
 import { aSituations } from '../../support/situations';
 import { inOrder, showSituations } from './show-situations';
 
@@ -23,7 +22,7 @@ describe.each(situationKinds)('%s, not begun', (kind: SituationKind) => {
     expect(screen.getByRole('heading', { level: 1 })).toHaveTextContent(words.kind[kind].name);
     const cautions = screen.getByRole('region', { name: 'Cautions' });
     const titles = cautionsBefore(kind).map(({ code }) => within(cautions).getByText(words.caution[code].title));
-    const stops = titles.filter((_, index) => severityOf(cautionsBefore[kind][index]!) === 'stop');
+    const stops = titles.filter((_, index) => cautionsBefore(kind)[index]!.severity === 'stop');
     const others = titles.filter((title) => !stops.includes(title));
     const questions = screen.queryByRole('region', { name: 'Questions' });
     expect(questions !== null).toBe(questionsOf(kind).length > 0);
