@@ -20,7 +20,7 @@ export function MorningsLane({ open, days }: { open: OpenSituation; days: readon
   const withDrain = open.situation.kind === 'clearing';
   return (
     <section aria-label={t('label')} className="border-t border-rule-2 text-small">
-      <LaneGrid days={days} name={<h3 className="pt-2 font-display text-name">{t('label')}</h3>}>
+      <LaneGrid days={days} name={<h2 className="pt-2 font-display text-name">{t('label')}</h2>}>
         {({ day }) => <MorningName morning={mornings.find((each) => each.day === day)} first={day === openedOn} />}
       </LaneGrid>
       {withDrain && (

@@ -57,14 +57,16 @@ export function StepDayName({ day, now, inColumn = false }: { day: string; now: 
   const t = useTranslations('situations.steps');
   const times = useSituationTimes(now);
   const isToday = day === times.today;
+  // Over the lanes they come first, in a list below the name of the steps.
+  const Heading = inColumn ? 'h2' : 'h3';
   return (
-    <h3
+    <Heading
       aria-label={times.longDay(day)}
       aria-current={isToday ? 'date' : undefined}
       className={`flex h-6.5 items-center justify-between gap-2 text-name ${isToday ? 'bg-ink text-on-ink' : inColumn ? '' : 'border-b border-rule'} ${isToday || inColumn ? 'px-2.25' : ''}`}
     >
       <span className="font-display whitespace-nowrap">{times.heading(day)}</span>
       {isToday && <span className="text-chart font-emphasis">{t('today')}</span>}
-    </h3>
+    </Heading>
   );
 }

@@ -1,4 +1,4 @@
-import { screen, within } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import { aClearing } from '../../support/situations';
 import { showSituations } from './show-situations';
@@ -54,7 +54,10 @@ describe('free chlorine of a clearing', () => {
         '8.5',
       ]),
     );
-    expect(chart.querySelectorAll('.recharts-reference-area path[fill="url(#chart-hatch)"]')).toHaveLength(3);
+    // What lies in a layer of its own is drawn a moment later.
+    await waitFor(() =>
+      expect(chart.querySelectorAll('.recharts-reference-area path[fill="url(#chart-hatch)"]')).toHaveLength(3),
+    );
   });
 
   it('counts the mornings and says how far each lay below', async () => {
