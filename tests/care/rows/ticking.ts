@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import { readdirSync } from 'node:fs';
+import { readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { expect } from 'vitest';
 import { saveShelfProduct, setStock } from '@/db/queries/shelf-products';
@@ -282,7 +282,11 @@ export const tickingRows: readonly Row[] = [
   ],
   [
     'made-and-until',
-    'nothing is served without a connection yet; when a page is, when it was made belongs here',
-    () => expect(folders('public').filter((name) => /worker|sw\./.test(name))).toEqual([]),
+    'without a connection only the emergency card opens, which ages by no hour; another page has to say when it was made',
+    () => {
+      const worker = readFileSync(join(root, 'public/sw.js'), 'utf8');
+      const pages = [...worker.matchAll(/'(\/(?!_next)[\w/-]+)'/g)].map(([, path]) => path);
+      expect(pages).toEqual(['/help/emergency']);
+    },
   ],
 ];
