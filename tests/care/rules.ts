@@ -2,8 +2,8 @@
 type Rule = readonly [part: '2' | '3' | '4', says: string];
 
 /**
- * Every bullet and table row of parts 2 and 4 of the care paper, and the two sentences of part 3 that a plan begins with, in
- * short. Each has at least one row in the tests of this folder.
+ * Every bullet and table row of parts 2 and 4 of the care paper, and of part 3 the two sentences that a plan begins with and
+ * where tablets end, in short. Each has at least one row in the tests of this folder.
  */
 export const rules = {
   // Part 2, the table of states.
@@ -52,6 +52,7 @@ export const rules = {
   // Part 3.
   'no-room': ['3', 'lowest level at swim limit - 0.5: no level is both high enough and inside the limit'],
   'open-hours': ['3', 'under 90 % open swim hours: the first sentence says so and offers three ways'],
+  'tablets-band': ['3', 'tablets are no candidate above the stabilizer band, and never where water is to be replaced'],
   // Part 4, products.
   'by-ingredient': ['4', 'products by the active ingredient as printed, never by shape'],
   'blends-never': ['4', 'blends and others are stored, never planned'],

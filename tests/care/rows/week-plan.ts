@@ -1,7 +1,7 @@
 import { expect } from 'vitest';
 import { dayOf } from '@/lib/calendar/household-day';
 import { wallClock, wallToInstant } from '@/lib/calendar/wall-time';
-import { planWeek } from '@/lib/planner';
+import { assertSafePlan, planWeek } from '@/lib/planner';
 import { companionNeeds } from '@/lib/planner/companions/need';
 import { VOLUME_REACH } from '@/lib/learning/posterior-of';
 import { projectWeek } from '@/lib/projection';
@@ -163,6 +163,37 @@ export const weekPlanRows: readonly Row[] = [
       expect(many.openSwimShare).toBeGreaterThanOrEqual(0.9);
       expect(codesIn(many.reasons)).not.toContain('few-open-hours');
     },
+  ],
+  [
+    'tablets-band',
+    'no tablets at a stabilizer above the band, while anything else may be had',
+    () => {
+      expect(tabletsIn(plan({ reading: { cyanuricAcid: 60 } }))).toBeGreaterThan(0);
+      expect(tabletsIn(plan({ reading: { cyanuricAcid: 61 } }))).toBe(0);
+    },
+  ],
+  [
+    'tablets-band',
+    'no tablets from a stabilizer of 70 on, also where the household would rather have nothing else',
+    () => {
+      const avoid = ['granular', 'liquid'];
+      expect(tabletsIn(plan({ reading: { cyanuricAcid: 95 }, preferences: { avoid } }))).toBe(0);
+    },
+    'lib/planner/products.ts plans tablets at any stabilizer where no other form may be planned; the net has no limit',
+  ],
+  [
+    'low-pH-no-tablets',
+    'the net refuses tablets at a pH of 6.5',
+    () => {
+      const scenario = scenarioOf();
+      const week = planWeek(scenario);
+      const doses = week.doses.filter(({ form }) => form === 'tablet');
+      const sour = { ...scenario, reading: { ...[scenario.reading].flat()[0]!, pH: 6.5 } };
+      expect(doses.length).toBeGreaterThan(0);
+      expect(() => assertSafePlan(scenario, { ...week, doses, alternatives: [] })).not.toThrow();
+      expect(() => assertSafePlan(sour, { ...week, doses, alternatives: [] })).toThrow();
+    },
+    'lib/planner/safety/tablet-faults.ts knows neither pH nor stabilizer; the search keeps the rule',
   ],
   [
     'blends-never',
