@@ -24,6 +24,12 @@ export const cardOffline: Journey = {
     await enterAs(visitor, ines);
     await page.goto('/week');
     stage.check('the card and its files are kept', await until(async () => (await filesKept(page)) > 3));
+    // While its files are fetched the worker is not in charge yet.
+    await page.evaluate(() => navigator.serviceWorker.ready.then(({ active }) => active?.state));
+    stage.check(
+      'the worker is in charge',
+      await until(() => page.evaluate(() => navigator.serviceWorker.controller !== null)),
+    );
 
     visitor.expect(/ERR_INTERNET_DISCONNECTED/, /ERR_FAILED/, /fetch/i);
     await page.context().setOffline(true);
