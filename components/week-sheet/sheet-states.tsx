@@ -69,8 +69,10 @@ function Needs({ needs, hasDoses }: { needs: NonNullable<WeekSheet['plan']>['nee
   const words = needs.flatMap(({ code, quantity, since }) => {
     if (code === 'false-zero-open' || code === 'chlorine-bleached-test') return [t(`zero.${code}`)];
     if (!known(quantity)) return [];
-    if (quantity === 'cyanuricAcid' && hasDoses) return [t('stabilizerNever')];
+    if (quantity === 'cyanuricAcid' && since === null && hasDoses) return [t('stabilizerNever')];
     const name = t(`quantity.${quantity}`);
+    if (code === 'measured-long-ago' && since !== null)
+      return [t('needMonthly', { quantity: name, day: longDay(times.dayOf(instantOf(since)), locale) })];
     if (since === null) return [t('needNever', { quantity: name })];
     return [t('needOld', { quantity: name, day: longDay(times.dayOf(instantOf(since)), locale) })];
   });

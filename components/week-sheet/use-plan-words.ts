@@ -54,6 +54,7 @@ export function usePlanWords(plan: Plan): { reasons: Sentence[]; cautions: Sente
       ...Object.fromEntries(written),
       stabilizerRise: units.number(count(fact.stabilizer), 1),
       swimLimit: units.number(count(fact.swimLimit)),
+      closed: fact.closed === 'yes' ? 'yes' : 'no',
       pHLow: units.figure(limits.pHRangeLow.value, 'pH'),
       pHHigh: units.figure(limits.pHRangeHigh.value, 'pH'),
       combinedAct: units.number(limits.combinedChlorineAct.value),

@@ -58,6 +58,8 @@ export const reasonCodes = [
   'tablets-carry',
   'no-tablets-stabilizer-high',
   'no-tablets-stabilizer-unknown',
+  'no-tablets-strip-alone',
+  'no-tablets-label-unknown',
   'no-tablets-pH-low',
   'no-tablets-feeder',
   'no-tablets-on-shelf',
@@ -98,5 +100,5 @@ export const cautionCodes = [
 ] as const;
 export type CautionCode = (typeof cautionCodes)[number];
 
-export const needCodes = ['reading-too-old', 'never-measured'] as const;
+export const needCodes = ['reading-too-old', 'never-measured', 'measured-long-ago'] as const;
 export type NeedCode = (typeof needCodes)[number];

@@ -11,7 +11,7 @@ const MILLISECONDS_PER_DAY = 86_400_000;
 /** What must be measured before there can be a plan, or for a better one. */
 export function needsOf(scenario: Scenario): { blocking: Need[]; wanted: Need[] } {
   const readings = [scenario.reading].flat();
-  const newest = (quantity: 'freeChlorine' | 'pH' | 'cyanuricAcid') =>
+  const newest = (quantity: 'freeChlorine' | 'pH' | 'cyanuricAcid' | 'calciumHardness') =>
     readings
       .filter((reading) => reading[quantity] !== undefined)
       .map(({ takenAt }) => takenAt)
@@ -27,6 +27,11 @@ export function needsOf(scenario: Scenario): { blocking: Need[]; wanted: Need[] 
   const wanted: Need[] = [];
   if (newest('cyanuricAcid') === undefined)
     wanted.push({ code: 'never-measured' satisfies NeedCode, quantity: 'cyanuricAcid', since: null });
+  for (const quantity of ['cyanuricAcid', 'calciumHardness'] as const) {
+    const since = newest(quantity);
+    if (since !== undefined && now - parseInstant(since)! > limits.monthlyTest.value * MILLISECONDS_PER_DAY)
+      wanted.push({ code: 'measured-long-ago' satisfies NeedCode, quantity, since });
+  }
   // The week of the newest reading is over: there is no evening left to plan.
   if (blocking.length === 0 && now >= last + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR)
     wanted.push({

@@ -58,7 +58,7 @@ export function optionsOf(context: Pick<PlanContext, 'scenario' | 'start' | 'now
   const fast = (owned.length > 0 ? owned : somethingToBuy(scenario, start))
     .map((option) => ({ ...option, capRise: option.capRise * spread }))
     .sort((a, b) => pricePerRise(a, start.takenAt) - pricePerRise(b, start.takenAt));
-  const tablets = tabletOption(context, fast.length > 0, caution);
+  const tablets = tabletOption(context, caution);
   return typeof tablets === 'string'
     ? { tablets: null, noTablets: tablets, tabletsMayBe: full.has(tablets), fast, cautions }
     : { tablets, noTablets: null, tabletsMayBe: true, fast, cautions };
@@ -83,13 +83,15 @@ type Caution = (code: CautionCode, figures?: Omit<Fact, 'code'>) => void;
 
 function tabletOption(
   { scenario, start, now }: Pick<PlanContext, 'scenario' | 'start' | 'now'>,
-  anotherForm: boolean,
   caution: Caution,
 ): TabletOption | Exclude<Options['noTablets'], null> {
   const { pool, shelf, preferences } = scenario;
-  const held = shelf.filter(
+  const onShelf = shelf.filter(
     (each) => each.form === 'tablet' && each.substance === 'trichlor' && each.stock >= tabletFacts(each).tabletMass,
   );
+  const held = onShelf.filter(({ labelWay }) => labelWay !== 'unknown');
+  for (const { id } of onShelf.filter((each) => !held.includes(each))) caution('label-way-unknown', { product: id });
+  if (onShelf.length > 0 && held.length === 0) return 'no-tablets-label-unknown';
   const product = held.find((each) => !avoided(each, preferences.avoid));
   if (!product) return held.length > 0 ? 'no-tablets-avoided' : 'no-tablets-on-shelf';
   if (pool.feeder.kind === 'none') return 'no-tablets-feeder';
@@ -98,7 +100,8 @@ function tabletOption(
     return 'no-tablets-feeder';
   }
   if (start.measuredAt.cyanuricAcid === undefined) return 'no-tablets-stabilizer-unknown';
-  if (start.water.cyanuricAcid > pool.stabilizerBand[1] && anotherForm) return 'no-tablets-stabilizer-high';
+  if (readOnStripsAlone(scenario)) return 'no-tablets-strip-alone';
+  if (start.water.cyanuricAcid > pool.stabilizerBand[1]) return 'no-tablets-stabilizer-high';
   if (start.water.pH < TABLETS_NEED_PH) return 'no-tablets-pH-low';
   const { tabletMass, strength } = tabletFacts(product);
   const price = (priceOf(product) * tabletMass) / 1000;
@@ -114,6 +117,11 @@ function tabletOption(
   if (room < 1) return 'no-tablets-feeder-full';
   const most = Math.min(ofWeek, room, Math.floor(product.stock / tabletMass + 1e-9));
   return { product, tabletMass, strength, most, price };
+}
+
+/** A strip tells stabilizer so roughly that its value alone never switches tablets on (care rules, part 2). */
+function readOnStripsAlone({ reading }: Pick<Scenario, 'reading'>): boolean {
+  return [reading].flat().every(({ cyanuricAcid, method }) => cyanuricAcid === undefined || method === 'strip');
 }
 
 type Tablets = { count: number; mass: number; chlorine: number };
@@ -199,7 +207,7 @@ function fastOption(
 }
 
 function granulesAllowed(product: ShelfProduct, pool: Pool, caution: Caution): boolean {
-  if (product.labelWay === 'unknown') {
+  if ((product.labelWay ?? 'unknown') === 'unknown') {
     caution('label-way-unknown', { product: product.id });
     return false;
   }

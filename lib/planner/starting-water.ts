@@ -17,6 +17,7 @@ import { type MeasuredQuantity, measuredQuantities } from '@/lib/schemas/measure
 import type { Reading } from '@/lib/schemas/reading';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { weekAheadSchema } from '@/lib/schemas/week-ahead';
+import { limits } from '@/lib/standards/limits';
 import { isTabletSubstance, tabletOf } from './product-facts';
 
 const MILLISECONDS_PER_DAY = 24 * MILLISECONDS_PER_HOUR;
@@ -102,15 +103,22 @@ function readInto(
   const read = { ...water };
   for (const quantity of measuredQuantities) {
     const value = reading[quantity];
-    if (value === undefined) continue;
+    if (value === undefined || (quantity === 'pH' && bleachesPH(reading))) continue;
     read[quantity] = middleOf(value);
     measuredAt[quantity] = instant(reading);
   }
   for (const quantity of uncertainQuantities) {
     const value = reading[quantity];
-    if (value !== undefined) errors[quantity] = readingError(quantity, value, reading.method);
+    if (value !== undefined && !(quantity === 'pH' && bleachesPH(reading)))
+      errors[quantity] = readingError(quantity, value, reading.method);
   }
   return read;
+}
+
+/** Chlorine over 10 mg/L bleaches the colour of the pH test: a pH that was read beside it is ignored (care rules, part 2). */
+function bleachesPH({ freeChlorine }: Reading): boolean {
+  const low = typeof freeChlorine === 'object' ? freeChlorine.low : (freeChlorine ?? 0);
+  return low > limits.freeChlorineMaximum.value;
 }
 
 type Carried = { water: WaterAnalysis; loads: readonly TabletLoad[] };

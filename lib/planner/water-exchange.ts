@@ -6,6 +6,8 @@ import { limits } from '@/lib/standards/limits';
 export type WaterExchange = {
   stabilizer: number;
   swimLimit: number;
+  /** Whether no level of chlorine is both high enough and inside the swim limit. */
+  closed: 'yes' | 'no';
   /** Stabilizer under which chlorine can be both high enough and inside the swim limit [mg/L]. */
   closesAt: number;
   /** Stabilizer to come down to [mg/L], the water to let out for it in all, and the days that takes. */
@@ -33,5 +35,6 @@ export function waterExchange(
   const target = Math.min((low + high) / 2, closesAt);
   const share = Math.min(1, waterExchangeADay.value / meanDepth);
   const days = share === 1 ? 1 : Math.ceil(Math.log(target / stabilizer) / Math.log(1 - share));
-  return { stabilizer, swimLimit, closesAt, target, volume: days * share * volume, days };
+  const closed = stabilizer >= closesAt ? 'yes' : 'no';
+  return { stabilizer, swimLimit, closed, closesAt, target, volume: days * share * volume, days };
 }

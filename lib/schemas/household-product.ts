@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { shelfProductSchema } from './shelf-product';
+import { labelWays, shelfProductSchema } from './shelf-product';
 
 const liquids: readonly string[] = ['sodium-hypochlorite', 'hydrochloric-acid'];
 /** What is sold in many strengths: nothing is assumed, the label says. */
@@ -14,6 +14,8 @@ const strengthVaries: readonly string[] = [
 /** A product as the household keeps it: what the plan needs, and what the family calls it. */
 export const householdProductSchema = shelfProductSchema
   .extend({
+    /** What nobody was asked counts as what nobody could find. */
+    labelWay: z.enum(labelWays).default('unknown'),
     name: z.string().trim().min(1, 'Write a name, or none.').max(80, 'Keep the name under 80 characters.').optional(),
   })
   .superRefine(({ form, substance, strength, tabletMass, boughtOn }, context) => {

@@ -32,7 +32,8 @@ export const shelfProductSchema = z.strictObject({
   alkali: z.number().min(0).max(20).default(0),
   /** One tablet [g]. */
   tabletMass: z.number().min(1).max(1000).optional(),
-  labelWay: z.enum(labelWays).default('unknown'),
+  /** How its label says that it goes in; left out where nobody asked, 'unknown' where somebody could not find it. */
+  labelWay: z.enum(labelWays).optional(),
   /** Whole measures: the marked measure kept for this product [g or mL]. */
   measure: z.number().gt(0).max(20000).optional(),
   pricePerKg: z.number().min(0).max(10000).optional(),

@@ -83,7 +83,7 @@ export function sheetDose(dose: StoredDose, around: Around): PlanDose {
     steps: stepsOf(dose, labelWay, feederKind),
     status: dose.status,
     tickFrom: iso(tickFrom(dose)),
-    pumpUntil: isTablet ? null : iso(pumpUntil(poured, dose.rise)),
+    pumpUntil: isTablet ? null : iso(pumpUntil(poured, (dose.rise * (dose.givenAmount ?? dose.amount)) / dose.amount)),
     waitUntil: iso(swimWaitUntil(dose, poured, plan)),
     givenAt: dose.givenAt === null ? null : iso(poured),
     givenAmount: dose.givenAmount,

@@ -32,6 +32,8 @@ export type VerdictGround = {
   days: readonly WeekDayRow[];
   /** What nobody has said to be over. */
   events: readonly StoredPoolEvent[];
+  /** One person skipped a dose since the test that another one added. */
+  tickInDoubt: boolean;
   /** The open situation, when it keeps everybody out. */
   staysOut: Situation | null;
   /** When a situation was last ended before its rule was met [ms]. */
@@ -94,7 +96,7 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
       swimmerHoursInADay: Math.max(0, ...past.map(({ amount }) => amount)),
       pumpFailure: happened('pump-failure'),
       dueDoseOpen: open.length > 0,
-      doubtfulTick: false,
+      doubtfulTick: ground.tickInDoubt,
       coverOffAfterAWeek: happened('cover-off'),
       situationEndedEarly: endedEarlyAt !== null && endedEarlyAt > since,
     },

@@ -1,4 +1,5 @@
 import 'server-only';
+import { isATickInDoubt } from '@/db/queries/dose-events';
 import { listPlans, type StoredPlan } from '@/db/queries/plans';
 import { listOpenPoolEvents } from '@/db/queries/pool-events';
 import { findPool } from '@/db/queries/pools';
@@ -106,6 +107,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     verdict: sheetVerdict({
       ...{ now: now.getTime(), pool, readings, zeroDoubt, doses: bothForms, days: said, events },
       staysOut: situation?.procedure.stayOut ? situation.situation : null,
+      tickInDoubt: await isATickInDoubt(db, { householdId, since: new Date(testedSince) }),
       endedEarlyAt: ended?.endedAt && ended.ending !== 'done' ? ended.endedAt.getTime() : null,
       plan: problem ? null : plan,
     }),

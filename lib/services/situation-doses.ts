@@ -33,7 +33,10 @@ export async function situationDoses(
       {
         ...{ id, at, substance, form, unit, toBuy },
         amount: givenAmount ?? dose.amount,
-        pumpUntil: form === 'tablet' ? null : pumpUntil(givenAt?.getTime() ?? at, rise),
+        pumpUntil:
+          form === 'tablet'
+            ? null
+            : pumpUntil(givenAt?.getTime() ?? at, (rise * (givenAmount ?? dose.amount)) / dose.amount),
         givenAt: givenAt?.getTime() ?? null,
         doneBy,
       },

@@ -71,6 +71,8 @@ export const limits = {
     source: { kind: 'code', text: 'Western Australia Health and Health Canada: test daily while the pool is used' },
   },
   planReadingAge: { value: 14, unit: 'days', source: { kind: 'practice', text: 'two weekly tests missed' } },
+  /** Stabilizer and hardness are tested again after so long. */
+  monthlyTest: { value: 31, unit: 'days', source: { kind: 'practice', text: 'once a month, by tube or shop slip' } },
   rainEndsVerdict: {
     value: 10,
     unit: 'mm',

@@ -194,7 +194,14 @@ describe('what a plan says of its limits', () => {
   it('puts replacing water first where no level is both high and low enough', () => {
     const plan = plans['stabilizer 88'];
     const { volume, days, ...exchange } = plan.reasons[0] as unknown as Record<string, number>;
-    expect(exchange).toEqual({ code: 'replace-water-first', stabilizer: 88, closesAt: 70, swimLimit: 4, target: 45 });
+    expect(exchange).toEqual({
+      code: 'replace-water-first',
+      stabilizer: 88,
+      closesAt: 70,
+      swimLimit: 4,
+      closed: 'yes',
+      target: 45,
+    });
     // A tenth of 1.5 m a day: 0.9^7 leaves 42 of 88, 0.9^6 still 47.
     expect(days).toBe(7);
     expect(volume).toBeCloseTo(7 * 7.57, 2);

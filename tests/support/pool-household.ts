@@ -50,6 +50,7 @@ export const designShelf: ShelfProductValues[] = [
     substance: 'trichlor',
     strength: 90,
     tabletMass: 227,
+    labelWay: 'feeder-only',
     pricePerKg: 9,
     stock: 5000,
   }),

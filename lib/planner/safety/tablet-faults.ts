@@ -19,6 +19,18 @@ export function tabletFaults(doses: readonly PlannedDose[], { pool, shelf, readi
   if (planned.some(({ substance }) => substance !== 'trichlor')) faults.push('tablets of another ingredient');
   if ([reading].flat().every(({ cyanuricAcid }) => cyanuricAcid === undefined))
     faults.push('tablets though stabilizer was never measured');
+  const newestFirst = [reading].flat().toSorted((a, b) => Date.parse(b.takenAt) - Date.parse(a.takenAt));
+  const sour = middle(
+    newestFirst.find(({ pH, freeChlorine }) => pH !== undefined && (middle(freeChlorine) ?? 0) <= 10)?.pH,
+  );
+  if (sour !== undefined && sour < 7) faults.push('tablets at a pH under 7.0');
+  const stabilizers = newestFirst.filter(({ cyanuricAcid }) => cyanuricAcid !== undefined);
+  if (stabilizers.length > 0 && stabilizers.every(({ method }) => method === 'strip'))
+    faults.push('tablets though stabilizer was read on strips alone');
+  const stabilizer = middle(stabilizers[0]?.cyanuricAcid);
+  // What the pool has taught may move it a little from what was read.
+  if (stabilizer !== undefined && stabilizer > pool.stabilizerBand[1] + 10)
+    faults.push('tablets though stabilizer is above its band');
   if (planned.some(({ amount, unit }) => unit !== 'tablet' || !Number.isInteger(amount)))
     faults.push('a broken tablet');
 
@@ -41,4 +53,8 @@ export function tabletFaults(doses: readonly PlannedDose[], { pool, shelf, readi
   if ((chlorine / pool.volume) * STABILIZER_PER_CHLORINE > tabletCap.stabilizerRise + ROUNDING)
     faults.push('tablets raise stabilizer too much');
   return faults;
+}
+
+function middle(value: number | { low: number; high: number } | undefined): number | undefined {
+  return typeof value === 'object' ? (value.low + value.high) / 2 : value;
 }

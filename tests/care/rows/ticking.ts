@@ -162,7 +162,6 @@ export const tickingRows: readonly Row[] = [
       await tickDose(at(other, minutes(5, due)), dose.id, given());
       expect(await codesOf(at(owner, minutes(6, due)))).toContain('doubtful-tick');
     },
-    'lib/services/sheet-verdict.ts sets doubtfulTick to false always: nothing in the product makes a tick doubtful',
   ],
   [
     'handles',
@@ -213,7 +212,6 @@ export const tickingRows: readonly Row[] = [
       const { pumpUntil } = doses.find(({ id }) => id === dose.id)!;
       expect(Date.parse(pumpUntil!) - due.getTime()).toBe(8 * 3_600_000);
     },
-    'lib/services/sheet-doses.ts reckons pumpUntil from the planned rise, not from the amount that went in',
   ],
   [
     'label-way',
@@ -226,7 +224,6 @@ export const tickingRows: readonly Row[] = [
       const { doses } = await showWeek(owner, { start: '2026-07-06' });
       expect(doses.filter(({ form }) => form === 'tablet')).toEqual([]);
     },
-    'lib/planner/products.ts never looks at the label’s way of tablets, while the shelf says “No dose: the label’s way is not known”',
   ],
   [
     'zero-holds',
