@@ -42,13 +42,16 @@ export function useDoseWords() {
     /** "Nobody in until the morning." */
     afterwards: (dose: PlanDose) => {
       if (dose.steps === 'tablets-inline') return t('after.tablets');
+      // Soda and calcium cloud the water until they have dissolved.
+      const clouds = dose.substance === 'sodium-carbonate' || dose.substance === 'calcium-chloride';
       const free = nextPart(instantOf(dose.waitUntil), household.timeZone);
       const doseDay = times.dayOf(instantOf(dose.at));
       const morning = wallToInstant(addDays(doseDay, 1), '06:00', household.timeZone).instant;
       const lastSwim = intervalsOfDay([sheet.pool.swimHours], doseDay, household.timeZone).at(-1)?.to ?? morning;
       // Once the swim hours are over nobody goes in before the next day's, however early the wait ends.
-      if (free.startsAt >= Math.min(lastSwim, morning) && free.startsAt <= morning) return t('after.morning');
-      return t('after.part', { when: times.partAfter(instantOf(dose.waitUntil)) });
+      if (free.startsAt >= Math.min(lastSwim, morning) && free.startsAt <= morning)
+        return t(clouds ? 'after.morningClear' : 'after.morning');
+      return t(clouds ? 'after.partClear' : 'after.part', { when: times.partAfter(instantOf(dose.waitUntil)) });
     },
     /** "Due tomorrow". */
     dueOf: (dose: PlanDose) => {

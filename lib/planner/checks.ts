@@ -8,6 +8,7 @@ import type { CheckReason } from './codes';
 import type { Companion } from './companions/companion';
 import type { PlanContext } from './context';
 import { isMidWeek } from './mid-week-test';
+import { QUICK_RAISE } from './planned-doses';
 
 type Check = WeekPlan['checks'][number];
 
@@ -23,7 +24,7 @@ function quickShows({ planned }: Companion): boolean {
 /**
  * Tests that the week asks for: one when a companion dose shows, a quick check before the first swim hour of a swim day on
  * which the last test would come to be over 48 h old, one on the first morning on which the likely range reaches the code
- * minimum, one on the morning after a halved first dose, a full one in the middle of the week where that pays, and the full test that makes the next plan.
+ * minimum, one on the morning after a halved first dose or a large one, a full one in the middle of the week where that pays, and the full test that makes the next plan.
  *
  * @param midWeekPays whether a further full test in the middle of the week is worth what it costs
  */
@@ -45,6 +46,8 @@ export function checksOf(
   const due = Math.max(fullTestDue(context, morning, endsAt), now);
   const halved = doses.find(({ reason }) => reason === 'first-dose-halved');
 
+  const large = doses.filter(isLarge).map((dose) => Date.parse(dose.at));
+
   let lastTest = start.takenAt;
   let retested = false;
   for (let index = 0; index < 8; index++) {
@@ -57,6 +60,7 @@ export function checksOf(
     const nextMorning = morning(addDays(day, 1));
     const afterHalved = halved && Date.parse(halved.at) < at && Date.parse(halved.at) >= lastTest;
     const retest = companion && !retested && at >= companion.retestAt;
+    const afterLarge = large.some((dose) => dose < at && dose >= lastTest && at - dose < DAY);
     const midWeek =
       midWeekPays && isMidWeek(at, context) && at + DAY < due && !checks.some(({ kind }) => kind === 'full');
     const low = lowFrom !== null && lowFrom < nextMorning && lastTest === start.takenAt;
@@ -64,13 +68,15 @@ export function checksOf(
       ? 'after-companion'
       : afterHalved
         ? 'after-halved-dose'
-        : midWeek
-          ? 'mid-week-pays'
-          : swims && age > limits.verdictReadingAge.value
-            ? 'swim-day-after-two-days'
-            : low
-              ? 'band-reaches-code-minimum'
-              : null;
+        : afterLarge
+          ? 'after-large-dose'
+          : midWeek
+            ? 'mid-week-pays'
+            : swims && age > limits.verdictReadingAge.value
+              ? 'swim-day-after-two-days'
+              : low
+                ? 'band-reaches-code-minimum'
+                : null;
     if (!reason) continue;
     if (retest) retested = true;
     const full = reason === 'mid-week-pays' || (retest && !quickShows(companion));
@@ -79,6 +85,11 @@ export function checksOf(
   }
   checks.push({ at: due, kind: 'full', reason: 'next-week' });
   return checks.sort((a, b) => a.at - b.at).map((check) => ({ ...check, at: toOffsetIso(check.at, pool.timeZone) }));
+}
+
+/** Chlorine that mixes at once, in an amount near what one evening may add. */
+function isLarge({ form, rise }: PlannedDose): boolean {
+  return form !== 'tablet' && rise >= QUICK_RAISE;
 }
 
 /** A week after the last full test; the next morning where there has been none. */

@@ -29,6 +29,7 @@ export const checkReasons = [
   'swim-day-after-two-days',
   'band-reaches-code-minimum',
   'after-halved-dose',
+  'after-large-dose',
   'after-companion',
   'mid-week-pays',
   'after-treatment',

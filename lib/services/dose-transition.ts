@@ -25,6 +25,9 @@ export type DoseTransition = Partial<
   >
 >;
 
+/** A tick that was sent late names the hour of the one that was sent at once, give or take this [ms]. */
+const SAME_TICK = 30 * 60_000;
+
 const untouched: DoseTransition = {
   status: 'planned',
   givenAt: null,
@@ -80,9 +83,15 @@ function pour(
   const ticked = { status: tick.action, recordedBy: asker.personId, tickedAt: now };
   if (!wentIn(dose)) return { ...ticked, ...poured, doneBy: asker.personId, claimedBy: null, claimedAt: null };
   // Two people say that they added it: perhaps it is in the water twice. Only a reading tells.
-  if (dose.recordedBy !== asker.personId) return { doubtfulAt: dose.doubtfulAt ?? now };
+  if (dose.recordedBy !== asker.personId || isAnotherHour(dose, tick)) return { doubtfulAt: dose.doubtfulAt ?? now };
   if (tick.action === 'given') return {};
   return { ...ticked, givenAmount: poured.givenAmount, ...(tick.at === undefined ? {} : { givenAt: poured.givenAt }) };
+}
+
+/** Said again with another hour it may have been another time; what is corrected says so. */
+function isAnotherHour({ givenAt }: StoredDose, tick: Extract<DoseTick, { action: 'given' | 'changed' }>): boolean {
+  if (tick.action !== 'given' || tick.at === undefined || givenAt === null) return false;
+  return Math.abs(Date.parse(tick.at) - givenAt.getTime()) > SAME_TICK;
 }
 
 function skip(dose: StoredDose, asker: Asker, now: Date): DoseTransition {

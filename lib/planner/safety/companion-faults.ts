@@ -5,6 +5,8 @@ import type { Scenario } from '@/lib/schemas/scenario';
 
 const HOUR = 3_600_000;
 const ROUNDING = 1e-6;
+/** How far the edge of 64 members may lie from the edge that the dose was reckoned by. */
+const LOW_EDGE_MAY_MISS = 0.1;
 const acids: readonly string[] = ['hydrochloric-acid', 'sodium-bisulfate'];
 const carbonates: readonly string[] = ['sodium-bicarbonate', 'sodium-carbonate'];
 const chlorines: readonly string[] = ['trichlor', 'dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
@@ -31,6 +33,8 @@ export function companionFaults({ doses, projection, hours }: WeekPlan, scenario
       if (!(change <= 0 && change >= -0.4 - ROUNDING)) faults.push('acid lowers pH by more than 0.4');
       const after = hours.findIndex((hour) => Date.parse(hour) >= at);
       if (after >= 0 && projection && projection.median.pH[after]! < 7.2) faults.push('acid takes pH under 7.2');
+      if (after >= 0 && projection && projection.pH.p10[after]! < 7.2 - LOW_EDGE_MAY_MISS)
+        faults.push('acid may take pH under 7.2');
     }
     if (dose.substance === 'sodium-carbonate' && hardOrNotAcid(scenario))
       faults.push('soda in hard water or over pH 7.5');

@@ -7,6 +7,8 @@ import { genericProducts } from '@/lib/standards/generic-products';
 import { dissolveFirstSurfaces } from '@/lib/standards/surface-ranges';
 
 const ROUNDING = 1e-6;
+/** Stabilizer from which on dichlor, which leaves more of it behind, is out of the question [mg/L]. */
+const DICHLOR_UNDER = 50;
 
 /** What is wrong with one dose by itself: its moment, its product, its label, its amount. */
 export function doseFaults(dose: PlannedDose, scenario: Scenario): string[] {
@@ -28,6 +30,8 @@ export function doseFaults(dose: PlannedDose, scenario: Scenario): string[] {
     const poured = product.labelWay === 'broadcast' && !dissolveFirstSurfaces.includes(pool.surface);
     if (!dissolves && !poured) faults.push(`${product.id} against its label`);
   }
+  if (substance === 'dichlor' && newestStabilizer(scenario) >= DICHLOR_UNDER)
+    faults.push('dichlor though stabilizer is at 50 or more');
   if (substance in companionCap) {
     const { perCubicMetre, strength } = companionCap[substance as keyof typeof companionCap];
     const share = (product?.strength ?? genericProducts[substance].strength) / strength;
@@ -41,4 +45,11 @@ export function doseFaults(dose: PlannedDose, scenario: Scenario): string[] {
 function planningFrom({ now, reading }: Scenario): number {
   const newest = Math.max(...[reading].flat().map(({ takenAt }) => Date.parse(takenAt)));
   return now === undefined ? newest : Math.max(newest, Date.parse(now));
+}
+
+/** The newest stabilizer that was read [mg/L]; nothing where it never was. */
+function newestStabilizer({ reading }: Scenario): number {
+  const newestFirst = [reading].flat().toSorted((a, b) => Date.parse(b.takenAt) - Date.parse(a.takenAt));
+  const value = newestFirst.find(({ cyanuricAcid }) => cyanuricAcid !== undefined)?.cyanuricAcid;
+  return typeof value === 'object' ? value.high : (value ?? 0);
 }

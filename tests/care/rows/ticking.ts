@@ -132,7 +132,6 @@ export const tickingRows: readonly Row[] = [
       await tickDose(at(owner, hoursLater(2, due)), dose.id, offline);
       expect(await codesOf(at(owner, hoursLater(2, due)))).toContain('suspected-double-dose');
     },
-    'lib/services/dose-transition.ts takes a second tick of the same person for the first, also when it names another hour',
   ],
   [
     'two-ticks',
