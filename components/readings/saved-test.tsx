@@ -37,25 +37,31 @@ export function SavedTest({ reading, week, before, onCorrect, children }: SavedT
   const takenAt = parseInstant(reading.takenAt) ?? 0;
   const words = useReadingWords();
   const { measured, missing } = words(reading);
+  const saved = (
+    <header className="border-b-stop border-ink pb-2.5">
+      <p className="font-display text-section">{t('title')}</p>
+      <p className="text-small text-ink-2">
+        {t('by', {
+          when: times.dayAndTime(takenAt),
+          name: reading.recordedBy ?? reading.doneBy ?? '',
+          method: t(`method.${reading.method}`),
+        })}
+      </p>
+    </header>
+  );
   return (
     <div className="mx-auto grid max-w-reading gap-4 px-margin pt-3 pb-6">
-      <header className="border-b-stop border-ink pb-2.5">
-        <p className="font-display text-section">{t('title')}</p>
-        <p className="text-small text-ink-2">
-          {t('by', {
-            when: times.dayAndTime(takenAt),
-            name: reading.recordedBy ?? reading.doneBy ?? '',
-            method: t(`method.${reading.method}`),
-          })}
-        </p>
-      </header>
       {week === undefined ? (
-        <p role="status" className="text-body">
-          {t('noSheet')}
-        </p>
+        <>
+          {saved}
+          <p role="status" className="text-body">
+            {t('noSheet')}
+          </p>
+        </>
       ) : (
         <SheetProvider sheet={week.sheet} start={undefined}>
           <SavedVerdict />
+          {saved}
           {children}
           <SheetStates onCorrect={onCorrect} />
           <Changes doses={week.doses} before={before} />

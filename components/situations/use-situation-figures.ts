@@ -45,13 +45,14 @@ export function useSituationFigures() {
     pHMost: quantity(accidentTime.pHAtMost, 'pH'),
     warm: quantity(accidentTime.temperatureAtLeast, 'temperature'),
     maximum: number(limits.freeChlorineMaximum.value),
+    // Until a fact names them: nobody measured them.
+    temperature: 'none',
+    pH: 'none',
   };
 
   const written = (code: string, name: string, value: string | number): string | number => {
     if (typeof value === 'string') return value;
     if (name === 'pH') return figure(value, 'pH');
-    // Nobody measured it: no pool that people look after is at freezing point.
-    if (name === 'temperature' && value === 0) return 'none';
     if (name === 'limit') return quantity(value, code === 'combined' ? 'combinedChlorine' : 'cyanuricAcid');
     const of = quantities[name];
     return of === undefined ? value : quantity(value, of);

@@ -1,6 +1,7 @@
 import { badForms } from './journeys/bad-forms';
 import { badRequests } from './journeys/bad-requests';
 import { cardOffline } from './journeys/card-offline';
+import { cards } from './journeys/cards';
 import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
 import { headers } from './journeys/headers';
@@ -29,6 +30,7 @@ export const journeys: readonly Journey[] = [
   scope,
   stop,
   situations,
+  cards,
   cardOffline,
   headers,
   measuring,

@@ -1,7 +1,6 @@
 import type { AnswersOf } from '@/lib/schemas/situation';
 import { dayOf } from '@/lib/calendar/household-day';
 import { accidentTime } from '@/lib/standards/situations';
-import { limits } from '@/lib/standards/limits';
 import type { Call } from '../codes';
 import { fastDoses, inRange, isStabilized, lowestOf, newest, since, type SituationRecord, type Taken } from '../record';
 import { dayAt, follow, hold, quick, test, tick, ticksNow, type Way } from '../way';
@@ -162,15 +161,22 @@ function nextDay(tests: readonly Taken[], record: SituationRecord, first: Way['s
         ? stabilizer === null
           ? { code: 'stabilizer-unknown' }
           : { code: 'stabilized', stabilizer: stabilizer.value }
-        : {
-            code: 'cold-or-high-pH',
-            pH: newest(record, 'pH')?.value ?? limits.pHRangeHigh.value,
-            temperature: newest(record, 'temperature')?.value ?? 0,
-          },
+        : coldOrHighPH(record),
     ],
     steps: [...first, test('test-now', record.openedAt), test('test-next-day', dayAfter(heldSince, record), quick)],
     doneWhen: 'next-day-and-test',
     done,
+  };
+}
+
+/** Why no published time holds, with what was measured of it. */
+function coldOrHighPH(record: SituationRecord): Way['reasons'][number] {
+  const pH = newest(record, 'pH')?.value;
+  const temperature = newest(record, 'temperature')?.value;
+  return {
+    code: 'cold-or-high-pH',
+    ...(pH === undefined ? {} : { pH }),
+    ...(temperature === undefined ? {} : { temperature }),
   };
 }
 

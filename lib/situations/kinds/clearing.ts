@@ -22,7 +22,13 @@ export function clearing(answers: AnswersOf<'clearing'>, record: SituationRecord
 }
 
 const callWhen: readonly Call[] = ['four-evenings', 'spots-or-slime', 'filter-climbs', 'doctor-first'];
-const cautions: readonly Caution[] = ['nobody-in-cloudy', 'never-mix', 'liquid-low', 'nothing-of-ours'];
+const cautions: readonly Caution[] = [
+  'nobody-in-cloudy',
+  'never-mix',
+  'liquid-low',
+  'granules-into-water',
+  'nothing-of-ours',
+];
 
 function professional(record: SituationRecord): Way {
   const said = record.ticks.get('professional-done');

@@ -14,7 +14,7 @@ export function combinedChlorine(record: SituationRecord): Way {
   const combined = newest(record, 'combinedChlorine');
   const base = {
     stayOut: false,
-    cautions: ['never-mix', 'liquid-low'],
+    cautions: ['never-mix', 'liquid-low', 'granules-into-water'],
     doneWhen: 'combined-low',
     callWhen: ['three-evenings', 'doctor-first'],
   } as const;
