@@ -45,8 +45,11 @@ export function weekDoseOf(named: NamedDose, path: string, shelf: readonly Shelf
     return { at, kind: 'tablets', load: { ...tabletOf(substance, product), count: named.amount, erodedShare: 0 } };
   }
   const hypochlorite = substance === 'sodium-hypochlorite' || substance === 'calcium-hypochlorite';
+  // Where the label was not copied: as shops sell it, here as in what is planned.
   const strength =
-    substance === 'sodium-hypochlorite' ? liquidStrength(product, pool.timeZone)(at).strength : product.strength;
+    substance === 'sodium-hypochlorite'
+      ? liquidStrength(product, pool.timeZone)(at).strength
+      : (product.strength ?? generic[substance].strength);
   return weekDose(
     at,
     {

@@ -4,6 +4,7 @@ import { addDose } from '@/lib/chemistry';
 import { type WeekDose, weekDose } from '@/lib/projection/events';
 import { MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
 import type { PlannedDose } from '@/lib/schemas/dose';
+import { companionCap } from '@/lib/standards/caps';
 import { limits } from '@/lib/standards/limits';
 import type { DoseReason } from './codes';
 import { companionWanted } from './companions/amount';
@@ -45,7 +46,7 @@ export function treatmentAcid(target: number, context: PlanContext): { planned: 
   });
   const amount = threeFigures(wanted);
   if (amount <= 0) return null;
-  const dose = { substance, amount, ...(product.strength === undefined ? {} : { strength: product.strength }) };
+  const dose = { substance, amount, strength: product.strength ?? companionCap[substance].strength };
   return {
     planned: {
       at: toOffsetIso(at, pool.timeZone),

@@ -7,6 +7,7 @@ import { ledgerAt } from '@/lib/projection/integrate';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { Scenario } from '@/lib/schemas/scenario';
 import type { ShelfProduct } from '@/lib/schemas/shelf-product';
+import { companionCap } from '@/lib/standards/caps';
 import { retestHours } from '@/lib/standards/companions';
 import type { PlanContext } from '../context';
 import type { ByMedian } from '../cost';
@@ -61,7 +62,7 @@ function companionFor(need: CompanionNeed, plan: ByMedian, context: PlanContext)
   });
   if (amount === 0) return null;
   const { substance } = product;
-  const dose = { substance, amount, ...(product.strength === undefined ? {} : { strength: product.strength }) };
+  const dose = { substance, amount, strength: product.strength ?? companionCap[substance].strength };
   const after = addDose(water, pool.volume, dose);
   return {
     planned: {

@@ -47,12 +47,12 @@ const cases: readonly Case[] = [
   },
 ];
 
-/** The state that a test gives, a day after it. */
+/** What a test leads to; one of two and a half days ago is too old, whatever it read. */
 const states: readonly { state: string; values: Values; takenAt?: string }[] = [
   { state: 'fine', values: {} },
   { state: 'wait', values: { freeChlorine: 6 } },
   { state: 'stay-out', values: { pH: 6.8 } },
-  { state: 'test-first', values: {}, takenAt: '2026-07-02T19:00:00-04:00' },
+  { state: 'test-first', values: { freeChlorine: 3.9 }, takenAt: '2026-07-03T18:00:00-04:00' },
 ];
 
 /** Each product's card and each state of the verdict, at the width of a phone. */
@@ -97,7 +97,9 @@ async function household(server: Server, { shelf, feeder = 'none' }: Case): Prom
 async function readCard(stage: Stage, page: Page, person: Person, card: string): Promise<void> {
   await page.goto('/week');
   await page.getByRole('heading', { name: words('week.phone.rest') }).waitFor();
-  for (const day of await page.locator('button[aria-expanded=false]').all()) await day.click();
+  // Each one that is opened leaves the list of those that are shut.
+  const shut = page.locator('main button[aria-expanded=false]');
+  for (let left = await shut.count(); left > 0; left--) await shut.first().click();
   const first = plain(`doses.steps.${card}.1`);
   const steps = page.locator('ol').filter({ hasText: first }).first();
   await steps.waitFor().catch(() => undefined);
