@@ -47,12 +47,12 @@ const cases: readonly Case[] = [
   },
 ];
 
-/** What a test leads to; one of two and a half days ago is too old, whatever it read. */
-const states: readonly { state: string; values: Values; takenAt?: string }[] = [
+/** What a test leads to; after a storm it counts no more, whatever it read. */
+const states: readonly { state: string; values: Values; storm?: boolean }[] = [
   { state: 'fine', values: {} },
   { state: 'wait', values: { freeChlorine: 6 } },
   { state: 'stay-out', values: { pH: 6.8 } },
-  { state: 'test-first', values: { freeChlorine: 3.9 }, takenAt: '2026-07-03T18:00:00-04:00' },
+  { state: 'test-first', values: {}, storm: true },
 ];
 
 /** Each product's card and each state of the verdict, at the width of a phone. */
@@ -69,20 +69,26 @@ export const cards: Journey = {
         await enterAs(visitor, person);
         await readCard(stage, visitor.page, person, each.card);
       });
-    for (const { state, values, takenAt } of states)
+    for (const { state, values, storm } of states)
       await stage.part(state, async () => {
         const person = await household(server, { card: state, shelf: [slowTablets, granules], feeder: 'inline' });
-        await person.must('POST', '/api/readings', test(values, takenAt));
+        await person.must('POST', '/api/readings', test(values));
+        if (storm) await reportStorm(person);
         await enterAs(visitor, person);
         await readVerdict(stage, visitor.page, person, state);
       });
   },
 };
 
-const test = (values: Values = {}, takenAt = sundayEvening) => {
-  const usual = fullTest(takenAt);
+const test = (values: Values = {}) => {
+  const usual = fullTest(sundayEvening);
   return { ...usual, values: { ...usual.values, ...values } };
 };
+
+async function reportStorm(person: Person): Promise<void> {
+  const { now: happenedAt } = await weekOf(person);
+  await person.must('POST', '/api/pool-events', { id: randomUUID(), kind: 'storm', happenedAt });
+}
 
 async function household(server: Server, { shelf, feeder = 'none' }: Case): Promise<Person> {
   const person = new Person(server);
