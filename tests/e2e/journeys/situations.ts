@@ -93,7 +93,6 @@ async function walkThrough(
       reasons.some(({ code }) => code === reason),
       reasons,
     );
-  await shoot(page, `situation-${kind}-week`);
 
   await strip.getByRole('link', { name: words('week.situation.toSteps') }).click();
   await page.getByRole('button', { name: words('situations.ends.mistakeButton') }).click();
@@ -142,8 +141,6 @@ async function noSideways(stage: Stage, page: Page, kind: string): Promise<void>
 }
 
 async function shoot(page: Page, name: string): Promise<void> {
-  // The drawing's code comes after the page.
-  await page.waitForTimeout(1200);
   await page.screenshot({ path: join(shotsFolder, `${name}.png`), fullPage: true });
 }
 
