@@ -1,17 +1,15 @@
 import { addDays, dayOf } from '@/lib/calendar/household-day';
-import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { addDose } from '@/lib/chemistry';
 import { type WeekDose, weekDose } from '@/lib/projection/events';
 import { MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import { companionCap } from '@/lib/standards/caps';
 import { limits } from '@/lib/standards/limits';
-import type { DoseReason } from './codes';
 import { companionWanted } from './companions/amount';
-import { everGiven, productFor } from './companions/companion';
+import { everGiven, productFor } from './companions/companion-product';
 import { firstLight } from './companions/moment';
+import { plannedCompanion } from './companions/planned';
 import type { PlanContext } from './context';
-import { isGeneric } from './generic-products';
 import { threeFigures } from './three-figures';
 
 /** Mornings that are looked at: somewhere in a week there is one. */
@@ -48,18 +46,10 @@ export function treatmentAcid(target: number, context: PlanContext): { planned: 
   if (amount <= 0) return null;
   const dose = { substance, amount, strength: product.strength ?? companionCap[substance].strength };
   return {
-    planned: {
-      at: toOffsetIso(at, pool.timeZone),
-      product: isGeneric(product) ? null : product.id,
-      toBuy: isGeneric(product) || product.stock < amount,
-      substance,
-      form: product.form,
-      amount,
-      unit: product.form === 'liquid' ? 'mL' : 'g',
-      rise: 0,
+    planned: plannedCompanion(product, {
+      ...{ at, amount, reason: 'pH-before-treatment', timeZone: pool.timeZone },
       effect: { quantity: 'pH', change: addDose(water, pool.volume, dose).pH - water.pH },
-      reason: 'pH-before-treatment' satisfies DoseReason,
-    },
+    }),
     dose: weekDose(at, dose, pool.volume),
   };
 }

@@ -1,5 +1,6 @@
 import 'server-only';
 import { sharedEngine } from '@/lib/engine-worker/shared-engine';
+import { planWithout } from '@/lib/planner/bare-plan';
 import { ENGINE_VERSION } from '@/lib/planner/version';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import { identityOf } from './plan-identity';
@@ -29,29 +30,12 @@ function earliestDose({ skipped }: WeekSnapshot, now: Date): Date {
 
 /** Nothing is added on the strength of a reading that may mean none or far too much: the next test decides. */
 function planOnHold({ scenario }: WeekSnapshot, { doubt, takenAt }: NonNullable<WeekSnapshot['zeroDoubt']>): WeekPlan {
-  const newest = [scenario.reading].flat()[0];
-  return {
-    engineVersion: ENGINE_VERSION,
-    takenAt: newest?.takenAt ?? takenAt,
-    hours: [],
-    projection: null,
-    doses: [],
-    checks: [],
-    endOfWeek: null,
-    cost: null,
-    mix: null,
-    alternatives: [],
-    openSwimShare: null,
-    broken: [],
-    reasons: [],
-    cautions: [],
-    needs: [
-      {
-        code: doubt === 'open' ? 'false-zero-open' : 'chlorine-bleached-test',
-        // Not a measurement that is missing: one that is in doubt.
-        quantity: 'false-zero',
-        since: takenAt,
-      },
-    ],
-  };
+  return planWithout(scenario, [
+    {
+      code: doubt === 'open' ? 'false-zero-open' : 'chlorine-bleached-test',
+      // Not a measurement that is missing: one that is in doubt.
+      quantity: 'false-zero',
+      since: takenAt,
+    },
+  ]);
 }

@@ -1,23 +1,22 @@
-import { parseInstant, toOffsetIso } from '@/lib/calendar/wall-time';
+import { parseInstant } from '@/lib/calendar/wall-time';
 import { addDose } from '@/lib/chemistry';
 import { analysisAt } from '@/lib/projection';
 import { type WeekDose, weekDose } from '@/lib/projection/events';
 import { MILLISECONDS_PER_HOUR } from '@/lib/projection/forcing';
 import { ledgerAt } from '@/lib/projection/integrate';
 import type { PlannedDose } from '@/lib/schemas/dose';
-import type { Scenario } from '@/lib/schemas/scenario';
-import type { ShelfProduct } from '@/lib/schemas/shelf-product';
 import { companionCap } from '@/lib/standards/caps';
 import { retestHours } from '@/lib/standards/companions';
 import type { PlanContext } from '../context';
 import type { ByMedian } from '../cost';
-import { generic, isGeneric } from '../generic-products';
 import { priceOf } from '../product-facts';
-import { avoided, type Options } from '../products';
+import type { Options } from '../products';
 import { sumOf } from '../draft';
 import { companionAmount } from './amount';
+import { everGiven, productFor } from './companion-product';
 import { momentOf } from './moment';
 import { type CompanionNeed, companionNeeds, type CompanionSubstance } from './need';
+import { plannedCompanion } from './planned';
 
 /** A dose beside chlorine: how a plan names it, how the projection takes it, what it costs, and when to test again [ms]. */
 export type Companion = { planned: PlannedDose; dose: WeekDose; money: number; retestAt: number };
@@ -65,36 +64,14 @@ function companionFor(need: CompanionNeed, plan: ByMedian, context: PlanContext)
   const dose = { substance, amount, strength: product.strength ?? companionCap[substance].strength };
   const after = addDose(water, pool.volume, dose);
   return {
-    planned: {
-      at: toOffsetIso(at, pool.timeZone),
-      product: isGeneric(product) ? null : product.id,
-      toBuy: isGeneric(product) || product.stock < amount,
-      substance,
-      form: product.form,
-      amount,
-      unit: product.form === 'liquid' ? 'mL' : 'g',
-      rise: 0,
+    planned: plannedCompanion(product, {
+      ...{ at, amount, reason: need.reason, timeZone: pool.timeZone },
       effect: { quantity: need.quantity, change: after[need.quantity] - water[need.quantity] },
-      reason: need.reason,
-    },
+    }),
     dose: weekDose(at, dose, pool.volume),
     money: (priceOf(product) * amount) / 1000,
     retestAt: at + retestHours[substance] * MILLISECONDS_PER_HOUR,
   };
-}
-
-export type CompanionProduct = ShelfProduct & { substance: CompanionSubstance };
-
-/** What the shelf holds of any of the substances, else the usual one to buy. */
-export function productFor(
-  substances: readonly CompanionSubstance[],
-  { shelf, preferences }: Scenario,
-): CompanionProduct | undefined {
-  const is = (product: ShelfProduct): product is CompanionProduct =>
-    substances.some((each) => each === product.substance);
-  const held = shelf.filter((product) => is(product) && product.stock > 0);
-  const offered = [...held, ...substances.map((substance) => generic[substance])];
-  return offered.filter(is).find((product) => !avoided(product, preferences.avoid));
 }
 
 /** Whether a companion has gone in since the water was last tested long enough after it. */
@@ -105,8 +82,4 @@ function untested({ scenario, start }: PlanContext): boolean {
     const hours = substance && retestHours[substance as CompanionSubstance];
     return hours !== undefined && parseInstant(at)! + hours * MILLISECONDS_PER_HOUR > newest;
   });
-}
-
-export function everGiven(substance: CompanionSubstance, { given, shelf }: Scenario): boolean {
-  return given.some(({ product: id }) => shelf.find((product) => product.id === id)?.substance === substance);
 }
