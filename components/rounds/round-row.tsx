@@ -15,6 +15,7 @@ import {
 } from 'lucide-react';
 import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { ProfessionalCall } from '@/components/house/professional-call';
 import { emergencyCard } from '@/components/navigation/places';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
@@ -23,7 +24,6 @@ import type { RoundItem } from '@/lib/schemas/round';
 import { filterPressureRise } from '@/lib/standards/filter';
 import { BucketTest } from './bucket-test';
 import { writePressure } from './pressures';
-import { ProfessionalCall } from './professional-call';
 import type { RoundHousehold } from './round-household';
 
 const icons: Record<RoundItem, LucideIcon> = {

@@ -3,6 +3,7 @@
 import { useQuery } from '@tanstack/react-query';
 import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { ProfessionalCall } from '@/components/house/professional-call';
 import { Button } from '@/components/ui/button';
 import { Disclosure } from '@/components/ui/disclosure';
 import { ProblemState } from '@/components/ui/problem-state';
@@ -12,7 +13,6 @@ import { dayWithYear } from '@/lib/calendar/format';
 import { visitsOptions } from '@/lib/client/visits';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { Visits as NewestVisits } from '@/lib/schemas/visit';
-import { ProfessionalCall } from './professional-call';
 import type { RoundHousehold } from './round-household';
 import { VisitForm } from './visit-form';
 

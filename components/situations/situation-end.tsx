@@ -2,6 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
+import { ProfessionalCall } from '@/components/house/professional-call';
 import { Button } from '@/components/ui/button';
 import { Callout } from '@/components/ui/callout';
 import { useEndSituation } from '@/lib/client/situations';
@@ -49,6 +50,9 @@ export function SituationEnd({ open: { id, procedure }, onEnded }: { open: OpenS
                 </li>
               ))}
             </ul>
+            <div className="mt-2">
+              <ProfessionalCall />
+            </div>
           </div>
         )}
       </div>

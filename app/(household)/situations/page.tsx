@@ -14,7 +14,7 @@ export default async function SituationsPage() {
   const { access } = await requireHousehold();
   const { timeZone, locale, unitSystem } = access;
   return (
-    <ClientMessages namespaces={['situations', 'doses', 'units']}>
+    <ClientMessages namespaces={['situations', 'doses', 'units']} parts={{ house: ['visits'] }}>
       <SituationsScreen household={{ timeZone, locale, unitSystem, mayOpen: may(access, 'open-situations') }} />
     </ClientMessages>
   );

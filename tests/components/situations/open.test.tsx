@@ -167,6 +167,13 @@ describe('the end', () => {
     await waitFor(() => expect(sent).toMatchObject([{ body: { ending } }]));
   });
 
+  it('has the professional’s phone one tap away', async () => {
+    const procedure = { branch: 'treatment-evenings', callWhen: ['four-evenings'] };
+    showSituations(aSituations({ kind: 'clearing', procedure }), { kind: 'clearing' });
+    const call = await screen.findByRole('link', { name: /Pond and Sons/ });
+    expect(call).toHaveAttribute('href', 'tel:5550100');
+  });
+
   it('says when it is time to call a professional', async () => {
     showSituations(aSituations({ kind: 'stain', procedure: { branch: 'professional', callNow: true } }), {
       kind: 'stain',

@@ -2,12 +2,20 @@ import userEvent from '@testing-library/user-event';
 import { vi } from 'vitest';
 import { SituationsScreen } from '@/components/situations/situations-screen';
 import type { SituationHousehold } from '@/components/situations/situation-household';
+import type { HouseNotes } from '@/lib/schemas/house-note';
 import type { SituationKind, Situations } from '@/lib/schemas/situation';
 import { renderWithWords } from '../../support/with-words';
 
 export type Sent = { address: string; method: string; body: unknown };
 /** What the server answers to a change, or that it does not. */
 export type Answer = Situations | Promise<Situations> | 'no answer';
+
+/** What the household has written down of whom to call. */
+const noted: HouseNotes = {
+  notes: { professionalName: 'Pond and Sons', professionalPhone: '555 0100' },
+  updatedAt: null,
+  updatedBy: null,
+};
 
 const household: SituationHousehold = {
   ...{ timeZone: 'Europe/Madrid', locale: 'en-GB', unitSystem: 'metric' },
@@ -39,6 +47,7 @@ export function showSituations(
   vi.spyOn(HTMLElement.prototype, 'getBoundingClientRect').mockReturnValue({ ...box, toJSON: () => box });
   vi.stubGlobal('fetch', async (address: string, init?: RequestInit) => {
     const method = init?.method ?? 'GET';
+    if (address === '/api/house-notes') return Response.json(noted);
     if (method === 'GET') return Response.json(await known);
     sent.push({ address, method, body: JSON.parse(String(init?.body)) });
     const answer = answers.shift() ?? 'no answer';

@@ -21,7 +21,7 @@ export default async function SituationPage({ params }: Props) {
   if (!kind.success) notFound();
   const { timeZone, locale, unitSystem } = access;
   return (
-    <ClientMessages namespaces={['situations', 'doses', 'units']}>
+    <ClientMessages namespaces={['situations', 'doses', 'units']} parts={{ house: ['visits'] }}>
       <SituationsScreen
         household={{ timeZone, locale, unitSystem, mayOpen: may(access, 'open-situations') }}
         kind={kind.data}
