@@ -23,6 +23,7 @@ type ShortCode = Extract<
   | 'accident-open'
   | 'drain-cover-broken'
   | 'electricity-suspected'
+  | 'situation-open'
   | 'suspected-double-dose'
 >;
 

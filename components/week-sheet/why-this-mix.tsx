@@ -13,13 +13,14 @@ export function WhyThisMix() {
   return (
     <section className="pb-3 lg:border-b lg:border-rule">
       <h2 className="mb-1.5 font-display text-section">{t('title')}</h2>
-      {plan === null || (plan.cost === null && plan.reasons.length === 0) ? (
-        <p className="text-ink-2">{t('none')}</p>
-      ) : (
-        <Reasons plan={plan} />
-      )}
+      {plan === null || !explains(plan) ? <p className="text-ink-2">{t('none')}</p> : <Reasons plan={plan} />}
     </section>
   );
+}
+
+/** A plan without a cost compared nothing; but an open situation says why nothing is dosed. */
+function explains({ cost, reasons }: NonNullable<WeekSheet['plan']>): boolean {
+  return cost !== null || reasons.some(({ code }) => code.startsWith('situation-'));
 }
 
 function Reasons({ plan }: { plan: NonNullable<WeekSheet['plan']> }) {

@@ -27,6 +27,8 @@ import { treatmentAcid } from './treatment-acid';
 
 /** A level this near to the aim counts as there [mg/L]: no kit tells them apart. */
 export const NEAR_ENOUGH = 0.2;
+/** So much over its target pH counts as there: a kit reads it no better. */
+export const PH_NEAR_ENOUGH = 0.1;
 /** When a morning is read after a treatment evening. */
 const MORNING = '08:00';
 
@@ -44,7 +46,9 @@ export function treatmentWeek(scenario: Scenario, treatment: Treatment): WeekPla
   const bare = contextOf(scenario);
   const acid = treatment.pHFirst === undefined ? null : treatmentAcid(treatment.pHFirst, bare);
   const context = acid ? contextOf(scenario, acid.dose) : bare;
-  const evening = openEvenings(context).find(({ at }) => !acid || at > Date.parse(acid.planned.at));
+  // Chlorine waits until a test finds pH low enough: acid and chlorine need a reading between them.
+  const waits = treatment.pHFirst !== undefined && bare.start.water.pH > treatment.pHFirst + PH_NEAR_ENOUGH;
+  const evening = waits ? undefined : openEvenings(context)[0];
   const { fast, cautions } = optionsOf(context);
   const chlorine = evening ? chlorineDose(treatment, evening, fast, context) : null;
   const doses = [acid?.planned ?? [], chlorine ?? []].flat();
@@ -52,7 +56,7 @@ export function treatmentWeek(scenario: Scenario, treatment: Treatment): WeekPla
   const result: WeekPlan = {
     ...plan,
     doses,
-    checks: doses.length > 0 ? [morningAfter(doses, context)] : [],
+    checks: doses.length > 0 ? [nextCheck(doses, waits, context)] : [],
     openSwimShare: plan.projection && openSwimShare(plan.projection, doses, context),
     reasons: [{ code: 'situation-treats' satisfies ReasonCode, kind: treatment.kind }],
     cautions,
@@ -149,8 +153,15 @@ function mostUnder(level: number, levels: readonly number[], contents: DoseConte
   return low;
 }
 
-function morningAfter(doses: readonly PlannedDose[], { scenario: { pool } }: PlanContext): WeekPlan['checks'][number] {
-  const last = dayOf(Math.max(...doses.map(({ at }) => Date.parse(at))), pool.timeZone);
-  const at = wallToInstant(addDays(last, 1), MORNING, pool.timeZone).instant;
+/** The morning after chlorine; after acid the same day, as soon as it shows. */
+function nextCheck(
+  doses: readonly PlannedDose[],
+  afterAcid: boolean,
+  { scenario: { pool } }: PlanContext,
+): WeekPlan['checks'][number] {
+  const last = Math.max(...doses.map(({ at }) => Date.parse(at)));
+  const at = afterAcid
+    ? last + limits.acidToChlorineGap.value * MILLISECONDS_PER_HOUR
+    : wallToInstant(addDays(dayOf(last, pool.timeZone), 1), MORNING, pool.timeZone).instant;
   return { at: toOffsetIso(at, pool.timeZone), kind: 'quick', reason: 'after-treatment' satisfies CheckReason };
 }

@@ -11,7 +11,7 @@ import type { MeasuredQuantity } from '@/lib/schemas/measured-range';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { Pool } from '@/lib/schemas/pool';
 import type { PoolEventKind } from '@/lib/schemas/pool-event';
-import type { Situation } from '@/lib/schemas/situation';
+import type { Situation, SituationKind } from '@/lib/schemas/situation';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { codeMinimum, limits, lowestLevel } from '@/lib/standards/limits';
 import { type MeasuredValue, type SpreadAmount, swimVerdict, type SwimVerdictInput } from '@/lib/verdict';
@@ -58,6 +58,9 @@ export function sheetVerdict(ground: VerdictGround): WeekSheet['verdict'] {
   };
 }
 
+/** Situations that keep people out by a reason of their own. */
+const named: readonly SituationKind[] = ['accident', 'clearing', 'drain-cover'];
+
 function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
   const { now, pool, readings, zeroDoubt, plan, doses, events, staysOut, endedEarlyAt } = ground;
   const freeChlorine = newest(readings, 'freeChlorine');
@@ -70,6 +73,8 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
   );
   const { swimming, rain } = spreadDays(ground, since);
   const clearing = staysOut?.kind === 'clearing' ? staysOut.answers.look : null;
+  const electric =
+    staysOut?.kind === 'storm' && (staysOut.answers.shock === 'yes' || staysOut.answers.pumpRoom === 'wet');
   const past = swimming.filter(({ until }) => until <= now);
   return {
     now,
@@ -105,8 +110,8 @@ function verdictInputOf(ground: VerdictGround): SwimVerdictInput {
       green: readings[0]?.look === 'green' || clearing === 'green',
       accident: staysOut?.kind === 'accident',
       drainCoverBroken: happened('drain-cover') || staysOut?.kind === 'drain-cover',
-      electricitySuspected:
-        staysOut?.kind === 'storm' && (staysOut.answers.shock === 'yes' || staysOut.answers.pumpRoom === 'wet'),
+      electricitySuspected: electric,
+      situationOpen: staysOut !== null && !electric && !named.includes(staysOut.kind),
       suspectedDoubleDose: doses.some(({ shown }) => shown.doubtful),
       falseZero: zeroDoubt === 'open',
     },

@@ -89,7 +89,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
   const events = await listOpenPoolEvents(db, { householdId, since: new Date(testedSince) });
   const loaded = await loadOpenSituation(db, householdId, pool);
   const situation = loaded && openSituation(loaded, await situationDoses(context, loaded), now);
-  const [ended] = await listEndedSituations(db, { householdId, most: 1 });
+  const ended = (await listEndedSituations(db, { householdId, most: 20 })).find(({ ending }) => ending !== 'done');
   const zeroDoubt = chlorineReading ? await zeroDoubtOf(db, householdId, chlorineReading) : null;
 
   return {
@@ -108,7 +108,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
       ...{ now: now.getTime(), pool, readings, zeroDoubt, doses: bothForms, days: said, events },
       staysOut: situation?.procedure.stayOut ? situation.situation : null,
       tickInDoubt: await isATickInDoubt(db, { householdId, since: new Date(testedSince) }),
-      endedEarlyAt: ended?.endedAt && ended.ending !== 'done' ? ended.endedAt.getTime() : null,
+      endedEarlyAt: ended?.endedAt?.getTime() ?? null,
       plan: problem ? null : plan,
     }),
     behind: curveBehind(plans, shown.from.getTime(), Math.min(now.getTime(), shown.until.getTime())),

@@ -50,8 +50,10 @@ export async function loadOpenSituation(
     from: new Date(openedAt.getTime() - stabilizedFor),
     until,
   });
-  const given = before.flatMap(({ givenAt, substance }) =>
-    givenAt !== null && givenAt >= openedAt ? [{ at: givenAt.getTime(), substance }] : [],
+  const given = before.flatMap(({ givenAt, substance, rise, amount, givenAmount }) =>
+    givenAt !== null && givenAt >= openedAt
+      ? [{ at: givenAt.getTime(), substance, rise: (rise * (givenAmount ?? amount)) / amount }]
+      : [],
   );
   const tickRows = await listSituationTicks(db, { householdId, situationId: stored.id });
   const ticks = new Map(tickRows.map(({ step, doneAt }) => [step, doneAt.getTime()]));

@@ -2,9 +2,11 @@ import 'server-only';
 import { writeAudit } from '@/db/queries/audit-trail';
 import { deleteSituationTick, insertSituationTick } from '@/db/queries/situations';
 import { inWriteTransaction } from '@/db/write';
+import { type CalendarDay, dayOf } from '@/lib/calendar/household-day';
 import { assertMay } from '@/lib/auth/permissions';
 import { AppError } from '@/lib/errors';
 import type { Situations } from '@/lib/schemas/situation';
+import { drainSeenOn } from '@/lib/situations';
 import type { ServiceContext } from './context';
 import { requireOpenSituation } from './require-open-situation';
 import { showSituations } from './show-situations';
@@ -28,6 +30,10 @@ export async function tickSituationStep(
     throw new AppError('invalid-input', 'This step is not one to tick.', {
       problems: [{ path: 'step', message: 'Load the page again: the steps have changed.' }],
     });
+  if (done && isDrainOfALaterDay(step, dayOf(now.getTime(), access.timeZone)))
+    throw new AppError('invalid-input', 'This can be ticked on its day: look at the drain in the morning.', {
+      problems: [{ path: 'step', message: 'It can be ticked on its day.' }],
+    });
   await inWriteTransaction(db, async (tx) => {
     await requireOpenSituation(tx, { householdId, id: situationId });
     if (done) await insertSituationTick(tx, { householdId, situationId, step, doneAt: now, doneBy: personId });
@@ -36,4 +42,9 @@ export async function tickSituationStep(
     await writeAudit(tx, { householdId, personId, at: now, action: 'tick-situation', subjectId: situationId, detail });
   });
   return showSituations(context);
+}
+
+function isDrainOfALaterDay(step: string, today: CalendarDay): boolean {
+  const prefix = drainSeenOn('');
+  return step.startsWith(prefix) && step.slice(prefix.length) > today;
 }

@@ -9,7 +9,7 @@ import { hardnessHigh, stabilizerHigh } from './kinds/too-high';
 import type { SituationRecord } from './record';
 import type { Way } from './way';
 
-export { morningsOf, type PromiseAt } from './mornings';
+export { drainSeenOn, morningsOf, type PromiseAt } from './mornings';
 export { procedureOf, type SituationDose } from './procedure';
 export { lowestOf, type SituationRecord, type Taken } from './record';
 export type { Way } from './way';

@@ -18,7 +18,7 @@ export function drainSeenOn(day: CalendarDay): string {
  * looks clear and somebody has plainly seen the bottom drain; good ones in a row are counted, a day without one starts anew.
  * Above the band is good too: then the water used less than was thought.
  *
- * @param readings oldest first; the first one with free chlorine before noon counts for its day
+ * @param readings oldest first; the first one with free chlorine from 04:00 to noon counts for its day
  */
 export function morningsOf(
   readings: readonly Taken[],
@@ -33,6 +33,8 @@ export function morningsOf(
     const { freeChlorine } = values;
     if (freeChlorine === undefined || day <= opened || mornings.at(-1)?.day === day) continue;
     if (takenAt >= wallToInstant(day, '12:00', timeZone).instant) continue;
+    // At night nobody sees a drain, and the night has not used up its chlorine yet.
+    if (takenAt < wallToInstant(day, '04:00', timeZone).instant) continue;
     const band = promise(takenAt);
     const drainSeen = look === 'clear' ? (ticks.has(drainSeenOn(day)) ? true : null) : false;
     const inside = band && freeChlorine >= band.low;

@@ -18,8 +18,8 @@ export type SituationRecord = {
   pool: Pool;
   /** Every reading that may still count, oldest first; those before the opening too. */
   readings: readonly Taken[];
-  /** Doses since it was opened, oldest first. */
-  given: readonly { at: number; substance: string }[];
+  /** Doses since it was opened, oldest first, with the free chlorine that each added [mg/L]. */
+  given: readonly { at: number; substance: string; rise: number }[];
   /** When each step was ticked. */
   ticks: ReadonlyMap<string, number>;
   mornings: readonly Morning[];
@@ -64,7 +64,7 @@ export function inRange({ values }: Taken, record: SituationRecord): boolean {
 }
 
 /** Chlorine that mixes at once, given since the opening. */
-export function fastDoses({ given }: SituationRecord): { at: number }[] {
+export function fastDoses({ given }: SituationRecord): { at: number; rise: number }[] {
   return given.filter(({ substance }) => fast.includes(substance));
 }
 const fast: readonly string[] = ['calcium-hypochlorite', 'sodium-hypochlorite', 'dichlor'];

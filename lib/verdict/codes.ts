@@ -16,6 +16,7 @@ export const swimReasons = {
   'water-cloudy': 'stay-out',
   'water-green': 'stay-out',
   'accident-open': 'stay-out',
+  'situation-open': 'stay-out',
   'suspected-double-dose': 'stay-out',
   'dose-waiting-time': 'wait',
   'chlorine-over-swim-limit': 'wait',

@@ -46,6 +46,8 @@ export type SwimVerdictInput = {
     green: boolean;
     accident: boolean;
     drainCoverBroken: boolean;
+    /** Another situation is open that keeps everybody out: thunder, a cover or a pool that is being opened. */
+    situationOpen: boolean;
     /** Somebody felt a tingle at the water, or the pump room is wet. */
     electricitySuspected: boolean;
     suspectedDoubleDose: boolean;

@@ -27,6 +27,7 @@ function openTroubles({ open }: SwimVerdictInput): SwimReason[] {
     ['water-cloudy', open.cloudy],
     ['water-green', open.green],
     ['accident-open', open.accident],
+    ['situation-open', open.situationOpen],
     ['drain-cover-broken', open.drainCoverBroken],
     ['electricity-suspected', open.electricitySuspected],
     ['suspected-double-dose', open.suspectedDoubleDose],

@@ -35,10 +35,10 @@ const waters: readonly SituationRecord['readings'][] = [
   [aReading(-2, { ...full, cyanuricAcid: 0, temperature: 18 }), aReading(1, { freeChlorine: 1, pH: 7.7 })],
   [aReading(-2, { ...full, cyanuricAcid: 90, calciumHardness: 700 })],
   [aReading(-2, { ...full, pH: 7.9, combinedChlorine: 0.9 })],
-  [aReading(-2, { ...full, combinedChlorine: 0.9 }), aReading(90, { ...full, combinedChlorine: 0.9 })],
+  [aReading(-2, { ...full, combinedChlorine: 0.9 }), aReading(96, { ...full, combinedChlorine: 0.9 })],
   [aReading(-2, full), aReading(26, { freeChlorine: 3, pH: 7.5 }), aReading(40, { freeChlorine: 3, pH: 7.5 })],
 ];
-const liquid = (hours: number) => ({ at: openedAt + hours * HOUR, substance: 'sodium-hypochlorite' });
+const liquid = (hours: number) => ({ at: openedAt + hours * HOUR, substance: 'sodium-hypochlorite', rise: 3 });
 const doses: readonly SituationRecord['given'][] = [
   [],
   [liquid(11)],

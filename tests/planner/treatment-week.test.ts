@@ -95,13 +95,23 @@ describe('a treatment evening', () => {
     expect(large.amount / small.amount).toBeLessThan(2.04);
   });
 
-  it('brings pH down first, in the morning, and chlorine on its own at least 4 h later', () => {
+  it('brings pH down first, in the morning, and chlorine waits for a test', () => {
     const plan = treatmentWeek(green({ pH: 7.7 }), clearing);
-    const acid = plan.doses.find(({ substance }) => substance === 'hydrochloric-acid')!;
-    const chlorine = chlorineOf(plan)!;
-    expect(Date.parse(chlorine.at) - Date.parse(acid.at)).toBeGreaterThanOrEqual(4 * 3_600_000);
-    expect(acid.effect!.change).toBeLessThan(0);
-    expect(acid.effect!.change).toBeGreaterThanOrEqual(-0.4 - 1e-9);
+    expect(plan.doses.map(({ substance }) => substance)).toEqual(['hydrochloric-acid']);
+    const [acid] = plan.doses;
+    expect(acid!.effect!.change).toBeLessThan(0);
+    expect(acid!.effect!.change).toBeGreaterThanOrEqual(-0.4 - 1e-9);
+    // 4 h after the acid it shows: then chlorine may still go in that evening.
+    expect(Date.parse(plan.checks[0]!.at) - Date.parse(acid!.at)).toBe(4 * 3_600_000);
+    expect(chlorineOf(treatmentWeek(green({ pH: 7.45 }), clearing))).toBeDefined();
+  });
+
+  it('plans no chlorine on a pH too high where no acid may be planned', () => {
+    const without = {
+      ...green({ pH: 7.9 }),
+      preferences: { ...green().preferences, avoid: ['hydrochloric-acid', 'sodium-bisulfate'] },
+    };
+    expect(treatmentWeek(without, clearing).doses).toEqual([]);
   });
 
   it('asks for a test on the morning after', () => {

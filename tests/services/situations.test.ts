@@ -182,14 +182,10 @@ describe('situations of a household', { timeout: 120_000 }, () => {
   });
 
   it.each([
-    [{ kind: 'storm', answers: { pumpRoom: 'dry', shock: 'no' } }, 'test-first', 'storm'],
+    [{ kind: 'storm', answers: { pumpRoom: 'dry', shock: 'no' } }, 'stay-out', 'storm'],
     [{ kind: 'storm', answers: { pumpRoom: 'dry', shock: 'yes' } }, 'stay-out', 'electricity-suspected'],
     [{ kind: 'drain-cover', answers: {} }, 'stay-out', 'drain-cover-broken'],
-    [
-      { kind: 'cover', answers: { covered: 'week-or-more', floaterUnder: 'no' } },
-      'test-first',
-      'cover-off-after-a-week',
-    ],
+    [{ kind: 'cover', answers: { covered: 'week-or-more', floaterUnder: 'no' } }, 'stay-out', 'cover-off-after-a-week'],
   ] as const)('%j ends the verdict', async (situation, state, code) => {
     const context = await fresh(0.2);
     await test(context, { freeChlorine: 3, pH: 7.5 });
@@ -197,6 +193,63 @@ describe('situations of a household', { timeout: 120_000 }, () => {
     const { verdict } = await showWeek(later(context, 0.4));
     expect(verdict.state).toBe(state);
     expect(verdict.reasons.map((reason) => reason.code)).toContain(code);
+  });
+
+  it('in thunder nobody goes in, however good the test', async () => {
+    const context = await fresh(0.2);
+    const id = await open(context, { kind: 'storm', answers: { pumpRoom: 'dry', shock: 'no' } });
+    await test(later(context, 0.4), { freeChlorine: 3, pH: 7.5 });
+    const state = async (hours: number) => (await showWeek(later(context, hours))).verdict.state;
+    expect(await state(0.5)).toBe('stay-out');
+    await tickSituationStep(later(context, 0.6), { situationId: id, step: 'thunder-over', done: true });
+    await test(later(context, 0.7), { freeChlorine: 3, pH: 7.5 });
+    expect(await state(0.8)).toBe('fine');
+  });
+
+  it('nothing smaller takes the place of what keeps everybody out', async () => {
+    const context = await fresh(0.2);
+    const stool = await open(context, { kind: 'accident', answers: { what: 'loose-stool' } });
+    const instead = (situation: Situation, setAside: string) =>
+      openSituation(context, { id: randomUUID(), situation, setAside });
+    await expect(instead({ kind: 'quick-raise', answers: {} }, stool)).rejects.toMatchObject({ code: 'conflict' });
+    await expect(instead({ kind: 'drain-cover', answers: {} }, stool)).rejects.toMatchObject({ code: 'conflict' });
+    await endSituation(context, { situationId: stool, ending: 'mistake' });
+    const algae = await open(context, green);
+    await expect(instead({ kind: 'stain', answers: {} }, algae)).rejects.toMatchObject({ code: 'conflict' });
+    expect((await instead(formed, algae)).open!.situation.kind).toBe('accident');
+  });
+
+  it('one that ended early is not forgotten over another that ended well', async () => {
+    const context = await fresh(0.2);
+    await test(context, { freeChlorine: 3, pH: 7.5 });
+    const begun = later(context, 0.3);
+    await endSituation(begun, { situationId: await open(begun, formed), ending: 'mistake' });
+    const cover = await open(begun, { kind: 'cover', answers: { covered: 'days', floaterUnder: 'no' } });
+    await tickSituationStep(begun, { situationId: cover, step: 'air-cover', done: true });
+    await endSituation(begun, { situationId: cover, ending: 'done' });
+    expect((await showWeek(begun)).verdict.reasons.map(({ code }) => code)).toContain('situation-ended-early');
+  });
+
+  it('a replaced drain cover asks for a test: the pump stood still', async () => {
+    const context = await fresh(0.2);
+    await test(context, { freeChlorine: 3, pH: 7.5 });
+    const begun = later(context, 0.3);
+    const id = await open(begun, { kind: 'drain-cover', answers: {} });
+    await expect(endSituation(begun, { situationId: id, ending: 'done' })).rejects.toMatchObject({ code: 'conflict' });
+    await tickSituationStep(begun, { situationId: id, step: 'cover-replaced', done: true });
+    await endSituation(begun, { situationId: id, ending: 'done' });
+    const { verdict } = await showWeek(later(context, 0.4));
+    expect(verdict.reasons.map(({ code }) => code)).not.toContain('drain-cover-broken');
+    expect(verdict.reasons.map(({ code }) => code)).toContain('pump-failure');
+  });
+
+  it('a drain is not seen the evening before', async () => {
+    const context = await fresh(0.2);
+    const id = await open(context, green);
+    const step = (await stepsOf(context)).find(({ code }) => code === 'drain-seen')!;
+    await expect(tickSituationStep(context, { situationId: id, step: step.id, done: true })).rejects.toMatchObject({
+      code: 'invalid-input',
+    });
   });
 
   it('ended before its rule is met, the water needs a test before anyone swims', async () => {

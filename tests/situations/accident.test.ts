@@ -74,12 +74,12 @@ describe('an accident in the water (care rules, part 7)', () => {
         kind: 'treat',
         treatment: { kind: 'accident', aim: { to: 4 }, evening: 'treatment' },
       });
-      const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite' }];
+      const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite', rise: 2.5 }];
       expect(accident(formed, { readings: tested, given }).lead).toEqual({ kind: 'hold' });
     });
 
     it('is over on the next day with a test in range, not on the same day', () => {
-      const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite' }];
+      const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite', rise: 2.5 }];
       const tested = [aReading(-2, full), aReading(1, { ...fine, freeChlorine: 1.5 })];
       expect(accident(formed, { given, readings: [...tested, aReading(12, fine)] }).done).toBe(false);
       expect(accident(formed, { given, readings: [...tested, aReading(23, fine)] }).done).toBe(true);
@@ -88,12 +88,33 @@ describe('an accident in the water (care rules, part 7)', () => {
       );
     });
 
+    it('is not over minutes after midnight', () => {
+      const late = openedAt + 14.6 * HOUR;
+      const readings = [
+        aReading(-2, full),
+        aReading(14.7, { ...fine, freeChlorine: 3.8 }),
+        aReading(15.6, { ...fine, freeChlorine: 3.7 }),
+      ];
+      expect(accident(formed, { readings, openedAt: late }).done).toBe(false);
+    });
+
+    it('is not over where what went in cannot have come near the swim limit', () => {
+      const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite', rise: 1 }];
+      const readings = [
+        aReading(-2, full),
+        aReading(1, { ...fine, freeChlorine: 1.5 }),
+        aReading(23, { ...fine, freeChlorine: 2.1 }),
+      ];
+      expect(accident(formed, { given, readings }).done).toBe(false);
+      expect(accident(formed, { given, readings }).lead.kind).toBe('treat');
+    });
+
     it('is not over by waiting alone where nothing was raised', () => {
       expect(accident(formed, { readings: [aReading(-2, full), aReading(23, fine)] }).done).toBe(false);
     });
 
     it('raises again where the next day finds too little', () => {
-      const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite' }];
+      const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite', rise: 2.5 }];
       const readings = [aReading(-2, full), aReading(1, fine), aReading(24, { ...fine, freeChlorine: 1 })];
       expect(accident(formed, { given, readings }).lead.kind).toBe('treat');
     });
@@ -137,6 +158,13 @@ describe('an accident in the water (care rules, part 7)', () => {
       ['stabilizer of 10', { ...plain, cyanuricAcid: 10 }],
     ])('has no published time with %s', (_name, values) => {
       expect(accident(formed, { readings: [aReading(1, values)] }).branch).toBe('next-day');
+    });
+
+    it('has no published time on a temperature of days ago', () => {
+      const old = aReading(-30, { temperature: 28, cyanuricAcid: 0 });
+      expect(accident(formed, { readings: [old, aReading(1, { freeChlorine: 2.4, pH: 7.4 })] }).branch).toBe(
+        'next-day',
+      );
     });
 
     it('has no published time where dichlor or trichlor was used', () => {

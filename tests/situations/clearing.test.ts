@@ -14,7 +14,11 @@ const clearing = (
       { readings: [aReading(-2, { ...full, pH: 7.3, freeChlorine: 0.6 }, 'green')], ...changes },
     ),
   );
-const evening = (day: number) => ({ at: openedAt + day * DAY + 10 * HOUR, substance: 'sodium-hypochlorite' });
+const evening = (day: number) => ({
+  at: openedAt + day * DAY + 10 * HOUR,
+  substance: 'sodium-hypochlorite',
+  rise: 2.5,
+});
 const morning = (day: string, inARow: number): Morning => ({
   day,
   takenAt: `${day}T08:00:00-05:00`,
@@ -85,6 +89,38 @@ describe('green and cloudy water (care rules, part 7)', () => {
     expect(after).toMatchObject({ branch: 'professional', lead: { kind: 'hold' }, callNow: true, stayOut: true });
   });
 
+  it('holds until the morning after an evening was read, and doses no evening on the model alone', () => {
+    expect(clearing({ given: [evening(0)] }).lead).toEqual({ kind: 'hold' });
+    expect(clearing({ given: [evening(0)], mornings: [morning('2026-07-06', 0)] }).lead.kind).toBe('treat');
+    expect(clearing({ given: [evening(0), evening(1)], mornings: [morning('2026-07-06', 0)] }).lead).toEqual({
+      kind: 'hold',
+    });
+  });
+
+  it('after the fourth evening waits for the second morning where the first was good', () => {
+    const given = [0, 1, 2, 3].map(evening);
+    const way = clearing({ given, mornings: [morning('2026-07-08', 0), morning('2026-07-09', 1)] });
+    expect(way).toMatchObject({ lead: { kind: 'hold' }, callNow: false, headline: 'out-one-good-morning' });
+  });
+
+  it('leaves a pH under 7.2 to the plan of the week first', () => {
+    const way = clearing({ readings: [aReading(-2, { ...full, pH: 6.6 }, 'green')] });
+    expect(way).toMatchObject({ branch: 'pH-first', lead: { kind: 'follow' }, stayOut: true });
+  });
+
+  it('asks before any water is let out', () => {
+    const high = { readings: [aReading(-2, { ...full, cyanuricAcid: 75 }, 'green')] };
+    expect(clearing(high).steps.map(({ code }) => code)).toEqual(['ask-before-lowering']);
+    const asked = clearing({ ...high, ticks: ticked('ask-before-lowering') });
+    expect(asked.steps.map(({ code }) => code)).toContain('replace-water');
+  });
+
+  it('treats again where the water turns after two good mornings', () => {
+    const mornings = [morning('2026-07-06', 1), morning('2026-07-07', 2), morning('2026-07-08', 0)];
+    const readings = [aReading(-2, { ...full, pH: 7.3 }), aReading(72, fine, 'cloudy')];
+    expect(clearing({ given: [evening(0), evening(1)], mornings, readings }).branch).toBe('treatment-evenings');
+  });
+
   it('is cleared by two good mornings in a row, and over only with two tests in range 12 h apart', () => {
     const mornings = [morning('2026-07-06', 1), morning('2026-07-07', 2)];
     const given = [evening(0), evening(1)];
@@ -134,6 +170,10 @@ describe('mornings against the ordinary band', () => {
       aReading(at8(1) + 30, { freeChlorine: 8 }),
     ];
     expect(judge(readings).map(({ day, freeChlorine }) => [day, freeChlorine])).toEqual([['2026-07-06', 8]]);
+  });
+
+  it('does not take a reading of the night for a morning', () => {
+    expect(judge([aReading(at8(1) - 7, { freeChlorine: 8 })], 'drain-seen-2026-07-06')).toEqual([]);
   });
 
   it('is neither inside nor outside where nothing was promised', () => {

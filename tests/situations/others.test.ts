@@ -11,7 +11,7 @@ const codes = ({ steps }: ReturnType<typeof way>) => steps.map(({ code }) => cod
 describe('used-up chlorine (care rules, part 7)', () => {
   const combined = (values: object, changes: Partial<SituationRecord> = {}) =>
     way({ kind: 'combined-chlorine', answers: {} }, { readings: [aReading(-2, { ...full, ...values })], ...changes });
-  const dose = { at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite' };
+  const dose = { at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite', rise: 2.5 };
 
   it('raises by 5, tests on the next day, on three evenings at most', () => {
     expect(combined({ combinedChlorine: 0.8 }).lead).toMatchObject({ kind: 'treat', treatment: { aim: { by: 5 } } });
@@ -28,6 +28,8 @@ describe('used-up chlorine (care rules, part 7)', () => {
 
   it('is over at 0.4, and asks for a test where it was never measured', () => {
     expect(combined({ combinedChlorine: 0.4 })).toMatchObject({ branch: 'not-high', done: true });
+    const old = [aReading(-50, { combinedChlorine: 0.8 }), aReading(-2, fine)];
+    expect(combined({}, { readings: old })).toMatchObject({ branch: 'never-measured', lead: { kind: 'follow' } });
     expect(combined({ combinedChlorine: undefined })).toMatchObject({ branch: 'never-measured', done: false });
   });
 });
@@ -40,7 +42,7 @@ describe('a quick raise', () => {
       kind: 'treat',
       treatment: { aim: { to: 4 }, evening: 'ordinary' },
     });
-    const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite' }];
+    const given = [{ at: openedAt + 10 * HOUR, substance: 'sodium-hypochlorite', rise: 2.5 }];
     expect(raise({ readings, given })).toMatchObject({ lead: { kind: 'hold' }, done: false });
     expect(raise({ given, readings: [...readings, aReading(11, fine)] }).done).toBe(false);
     expect(raise({ given, readings: [...readings, aReading(23, fine)] }).done).toBe(true);

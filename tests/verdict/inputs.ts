@@ -52,6 +52,7 @@ export const good: SwimVerdictInput = {
     accident: false,
     drainCoverBroken: false,
     electricitySuspected: false,
+    situationOpen: false,
     suspectedDoubleDose: false,
     falseZero: false,
   },

@@ -48,6 +48,7 @@ function oracle(input: SwimVerdictInput, t: number): SwimState {
     open.accident ||
     open.drainCoverBroken ||
     open.electricitySuspected ||
+    open.situationOpen ||
     open.suspectedDoubleDose
   )
     return 'stay-out';
@@ -138,6 +139,7 @@ const anyInput: fc.Arbitrary<SwimVerdictInput> = fc
       accident: seldom,
       drainCoverBroken: seldom,
       electricitySuspected: seldom,
+      situationOpen: seldom,
       suspectedDoubleDose: seldom,
       falseZero: seldom,
     }),

@@ -22,6 +22,7 @@ const table: [string, SwimVerdictInput, SwimState, SwimReasonCode][] = [
   ['green', withOpen({ green: true }), 'stay-out', 'water-green'],
   ['accident', withOpen({ accident: true }), 'stay-out', 'accident-open'],
   ['drain cover', withOpen({ drainCoverBroken: true }), 'stay-out', 'drain-cover-broken'],
+  ['another situation', withOpen({ situationOpen: true }), 'stay-out', 'situation-open'],
   ['a tingle', withOpen({ electricitySuspected: true }), 'stay-out', 'electricity-suspected'],
   ['double dose', withOpen({ suspectedDoubleDose: true }), 'stay-out', 'suspected-double-dose'],
   ['a dose just given', { ...good, waits: [{ from: now - HOUR, until: now + HOUR }] }, 'wait', 'dose-waiting-time'],

@@ -1,4 +1,4 @@
-import { NEAR_ENOUGH } from '@/lib/planner/treatment-week';
+import { NEAR_ENOUGH, PH_NEAR_ENOUGH } from '@/lib/planner/treatment-week';
 import { accidentTime, clearingRules, combinedRules, freshTest, replacedAtMost } from '@/lib/standards/situations';
 import { group } from './constant';
 
@@ -100,5 +100,6 @@ export const situationConstants = [
       source: replacedAtMost.source,
     },
     { name: 'nearEnough', value: NEAR_ENOUGH, unit: 'mg/L', of: 'planner/treatment-week#NEAR_ENOUGH' },
+    { name: 'pHNearEnough', value: PH_NEAR_ENOUGH, unit: 'pH', of: 'planner/treatment-week#PH_NEAR_ENOUGH' },
   ]),
 ] as const;

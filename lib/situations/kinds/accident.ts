@@ -1,11 +1,14 @@
 import type { AnswersOf } from '@/lib/schemas/situation';
 import { dayOf } from '@/lib/calendar/household-day';
-import { accidentTime } from '@/lib/standards/situations';
+import { accidentTime, freshTest } from '@/lib/standards/situations';
 import type { Call } from '../codes';
 import { fastDoses, inRange, isStabilized, lowestOf, newest, since, type SituationRecord, type Taken } from '../record';
 import { dayAt, follow, hold, quick, test, tick, ticksNow, type Way } from '../way';
 
 const MINUTE = 60_000;
+const HOUR = 60 * MINUTE;
+/** The next day is a night later, not the next minute after midnight [ms]. */
+export const NIGHT = 8 * HOUR;
 /** Free chlorine that a published time asks for, and a little for what is used up meanwhile [mg/L]. */
 const WITH_RESERVE = 0.5;
 /** As near to the swim limit as a kit can tell [mg/L]. */
@@ -86,14 +89,18 @@ function raise({ what }: AnswersOf<'accident'>, record: SituationRecord): Way {
 
 /** The published time is for water without stabilizer that is warm enough and of a pH low enough. */
 function publishedTimeHolds(record: SituationRecord): boolean {
-  const pH = newest(record, 'pH');
-  const temperature = newest(record, 'temperature');
+  const fresh = (quantity: 'pH' | 'temperature') => {
+    const read = newest(record, quantity);
+    return read && read.takenAt >= record.openedAt - freshTest.value * HOUR ? read.value : null;
+  };
+  const pH = fresh('pH');
+  const temperature = fresh('temperature');
   return (
     !isStabilized(record) &&
     pH !== null &&
-    pH.value <= accidentTime.pHAtMost &&
+    pH <= accidentTime.pHAtMost &&
     temperature !== null &&
-    temperature.value >= accidentTime.temperatureAtLeast
+    temperature >= accidentTime.temperatureAtLeast
   );
 }
 
@@ -141,11 +148,13 @@ function nextDay(tests: readonly Taken[], record: SituationRecord, first: Way['s
   const doses = fastDoses(record);
   const lastDose = doses.at(-1)?.at ?? -Infinity;
   const last = tests.at(-1);
-  const raised = doses.length > 0 || tests.some(({ values }) => (values.freeChlorine ?? 0) >= swimLimit - NEAR);
+  const raised =
+    doses.some((dose) => levelWith(dose, record) >= swimLimit - NEAR) ||
+    tests.some(({ values }) => (values.freeChlorine ?? 0) >= swimLimit - NEAR);
   const heldSince = Math.max(record.openedAt, lastDose);
-  const done =
-    raised &&
-    tests.some((taken) => dayOf(taken.takenAt, timeZone) > dayOf(heldSince, timeZone) && inRange(taken, record));
+  const isNextDay = ({ takenAt }: Taken) =>
+    dayOf(takenAt, timeZone) > dayOf(heldSince, timeZone) && takenAt - heldSince >= NIGHT;
+  const done = raised && tests.some((taken) => isNextDay(taken) && inRange(taken, record));
   const lowAgain = last !== undefined && (last.values.freeChlorine ?? 0) < lowestOf(record).lowest;
   const treats = last !== undefined && lastDose < last.takenAt && !done && (!raised || lowAgain);
   const stabilizer = newest(record, 'cyanuricAcid');
@@ -167,6 +176,12 @@ function nextDay(tests: readonly Taken[], record: SituationRecord, first: Way['s
     doneWhen: 'next-day-and-test',
     done,
   };
+}
+
+/** What a dose brought chlorine to at most: what was read before it, and what it adds [mg/L]. */
+function levelWith({ at, rise }: { at: number; rise: number }, record: SituationRecord): number {
+  const before = record.readings.findLast(({ takenAt, values }) => takenAt <= at && values.freeChlorine !== undefined);
+  return (before?.values.freeChlorine ?? 0) + rise;
 }
 
 /** Why no published time holds, with what was measured of it. */

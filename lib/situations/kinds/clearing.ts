@@ -1,5 +1,6 @@
 import { dayOf } from '@/lib/calendar/household-day';
 import type { AnswersOf } from '@/lib/schemas/situation';
+import { limits } from '@/lib/standards/limits';
 import { clearingRules, freshTest } from '@/lib/standards/situations';
 import type { Call, Caution } from '../codes';
 import { morningAfter } from '../mornings';
@@ -77,19 +78,23 @@ function waitADay(record: SituationRecord, until: number): Way {
 }
 
 function treat(record: SituationRecord): Way {
-  const cleared = record.mornings.some(({ inARow }) => inARow >= clearingRules.mornings);
-  if (cleared) return settling(record);
+  if (clearedAt(record) !== null) return settling(record);
   const stabilizer = newest(record, 'cyanuricAcid');
   if (stabilizer && stabilizer.value > clearingRules.stabilizer) return waterFirst(stabilizer.value, record);
 
   const evenings = eveningsOf(record);
-  const { mornings } = record;
-  const usedUp = evenings.length >= clearingRules.evenings && mornings.some(({ day }) => day > evenings.at(-1)!);
-  const pH = newest(record, 'pH');
+  const last = record.mornings.at(-1);
+  const readSince = evenings.length === 0 || (last !== undefined && last.day > evenings.at(-1)!);
+  const goodBefore = readSince && last?.inARow === 1;
+  const allGiven = evenings.length >= clearingRules.evenings;
+  // A good morning is progress: the second one may follow without another evening.
+  const usedUp = allGiven && readSince && !goodBefore;
   const freshSince = record.openedAt - freshTest.value * HOUR;
   const tested = since(record, freshSince).some(({ values }) => quick.every((each) => values[each] !== undefined));
+  const pH = newest(record, 'pH');
+  const sour = pH !== null && pH.value < limits.pHRangeLow.value;
   const pHFirst = evenings.length === 0 && pH !== null && pH.value > clearingRules.pH;
-  const goodBefore = mornings.at(-1)?.inARow === 1;
+  const treats = tested && readSince && !allGiven;
   const steps = [
     ...ticksNow(record, ['pump-day-and-night', 'leaves-and-brush']),
     ...(tested && evenings.length === 0 ? [] : [test('test-before-dose', record.openedAt, quick, freshSince)]),
@@ -98,10 +103,12 @@ function treat(record: SituationRecord): Way {
     ...evenings.flatMap((day) => morningSteps(morningAfter(day, record.pool.timeZone), record.pool.timeZone)),
   ];
   return {
-    branch: usedUp ? 'professional' : pHFirst ? 'pH-first' : 'treatment-evenings',
-    lead:
-      usedUp || !tested
-        ? hold
+    branch: usedUp ? 'professional' : pHFirst || sour ? 'pH-first' : 'treatment-evenings',
+    lead: !treats
+      ? hold
+      : sour
+        ? // The plan of an ordinary week brings pH up, and chlorine to its lowest level meanwhile.
+          follow
         : {
             kind: 'treat',
             treatment: {
@@ -113,14 +120,14 @@ function treat(record: SituationRecord): Way {
           },
     stayOut: true,
     headline: usedUp ? 'ask-professional' : goodBefore ? 'out-one-good-morning' : 'out-clearing',
-    cautions: pHFirst ? [...cautions, 'acid-alone'] : cautions,
+    cautions: pHFirst || sour ? [...cautions, 'acid-alone'] : cautions,
     reasons: [
       stabilizer
         ? { code: 'stabilizer-under', stabilizer: stabilizer.value, limit: clearingRules.stabilizer }
         : { code: 'stabilizer-unknown' },
-      ...(pHFirst ? [{ code: 'pH-first', pH: pH.value } as const] : []),
+      ...(pHFirst || sour ? [{ code: 'pH-first', pH: pH.value } as const] : []),
       ...(pH === null ? [{ code: 'pH-unknown' } as const] : []),
-      usedUp
+      allGiven
         ? { code: 'evenings-used-up', most: clearingRules.evenings }
         : { code: 'evening-of', evening: evenings.length + 1, most: clearingRules.evenings },
     ],
@@ -132,10 +139,18 @@ function treat(record: SituationRecord): Way {
   };
 }
 
+/** When two good mornings in a row had cleared the water [ms]; null where it has turned since, or not yet. */
+function clearedAt({ mornings, readings }: SituationRecord): number | null {
+  const turned = readings.findLast(({ look }) => look !== 'clear')?.takenAt ?? -Infinity;
+  const second = mornings.find(
+    ({ inARow, takenAt }) => inARow >= clearingRules.mornings && takenAt !== null && Date.parse(takenAt) > turned,
+  );
+  return second?.takenAt ? Date.parse(second.takenAt) : null;
+}
+
 /** The water no longer uses more than it should; chlorine comes down by itself until two tests are in range. */
 function settling(record: SituationRecord): Way {
-  const first = record.mornings.find(({ inARow }) => inARow >= clearingRules.mornings);
-  const from = first?.takenAt ? Date.parse(first.takenAt) : record.openedAt;
+  const from = clearedAt(record) ?? record.openedAt;
   const done = twoInRange(record, from);
   return {
     branch: 'settling',
@@ -158,12 +173,15 @@ function settling(record: SituationRecord): Way {
 }
 
 function waterFirst(stabilizer: number, record: SituationRecord): Way {
-  const steps = replacingSteps('cyanuricAcid', stabilizer, clearingRules.stabilizer, record);
+  // Nobody has said what the ground is like: whoever knows the shell is asked before any water goes.
+  const ask = ticksNow(record, ['ask-before-lowering']);
+  const replacing = replacingSteps('cyanuricAcid', stabilizer, clearingRules.stabilizer, record);
+  const steps = allTicked(record, ask) ? [...ask, ...replacing] : ask;
   return {
     branch: 'water-first',
     lead: hold,
     stayOut: true,
-    headline: allTicked(record, steps) ? 'test-next' : 'replace-water',
+    headline: !allTicked(record, ask) ? 'ask-professional' : allTicked(record, steps) ? 'test-next' : 'replace-water',
     cautions: ['nobody-in-cloudy', 'shell-can-float', 'pump-before-skimmer', 'outlet', 'nothing-of-ours'],
     reasons: [
       { code: 'stabilizer-over', stabilizer, limit: clearingRules.stabilizer },
@@ -182,23 +200,24 @@ function eveningsOf(record: SituationRecord): string[] {
   return [...new Set(fastDoses(record).map(({ at }) => dayOf(at, record.pool.timeZone)))];
 }
 
-/** The test that is still missing: the first in range, or the one at least 12 h after it. */
+/** The test that is still missing: one in range, or the one at least 12 h after it. */
 function secondTest(record: SituationRecord, from: number): Asked[] {
-  const good = goodSince(record, from);
-  const first = good[0]?.takenAt;
+  const first = goodInARow(record, from)[0]?.takenAt;
   const apart = clearingRules.hoursBetweenTests * HOUR;
-  return first === undefined ? [] : [test('test-before-swim', first + apart, quick, first + apart)];
+  if (first !== undefined) return [test('test-before-swim', first + apart, quick, first + apart)];
+  const last = record.readings.at(-1)?.takenAt ?? from;
+  return [test('test-before-swim', last + apart, quick, last + 1)];
 }
 
-function goodSince(record: SituationRecord, from: number): Taken[] {
-  return since(record, from).filter((taken) => taken.look === 'clear' && inRange(taken, record));
+/** The tests in range since the last one that was not. */
+function goodInARow(record: SituationRecord, from: number): Taken[] {
+  const taken = since(record, from).filter(({ values }) => quick.every((each) => values[each] !== undefined));
+  return taken.slice(taken.findLastIndex((each) => each.look !== 'clear' || !inRange(each, record)) + 1);
 }
 
 /** Clear, and chlorine and pH in range twice, at least 12 h apart, with nothing out of range between. */
-export function twoInRange(record: SituationRecord, from: number): boolean {
-  const taken = since(record, from).filter(({ values }) => quick.every((each) => values[each] !== undefined));
-  const lastBad = taken.findLastIndex((each) => each.look !== 'clear' || !inRange(each, record));
-  const good = taken.slice(lastBad + 1);
+function twoInRange(record: SituationRecord, from: number): boolean {
+  const good = goodInARow(record, from);
   const [first, last] = [good[0], good.at(-1)];
   return !!first && !!last && last.takenAt - first.takenAt >= clearingRules.hoursBetweenTests * HOUR;
 }

@@ -3,6 +3,7 @@ import { limits } from '@/lib/standards/limits';
 import { combinedRules, freshTest } from '@/lib/standards/situations';
 import { EARLY } from '../morning-steps';
 import { morningAfter } from '../mornings';
+import { NIGHT } from './accident';
 import { fastDoses, newest, since, type SituationRecord } from '../record';
 import { follow, hold, quick, test, ticksNow, type Way } from '../way';
 
@@ -11,7 +12,9 @@ const HOUR = 3_600_000;
 /** Too much used-up chlorine: care rules, part 7. No ten-times figure on screen. */
 export function combinedChlorine(record: SituationRecord): Way {
   const limit = limits.combinedChlorineAct.value;
-  const combined = newest(record, 'combinedChlorine');
+  const read = newest(record, 'combinedChlorine');
+  const freshSince = record.openedAt - freshTest.value * HOUR;
+  const combined = read && read.takenAt >= freshSince ? read : null;
   const base = {
     stayOut: false,
     cautions: ['never-mix', 'liquid-low', 'granules-into-water'],
@@ -46,11 +49,12 @@ export function combinedChlorine(record: SituationRecord): Way {
   const { timeZone } = record.pool;
   const evenings = [...new Set(fastDoses(record).map(({ at }) => dayOf(at, timeZone)))];
   const lastDose = fastDoses(record).at(-1)?.at ?? -Infinity;
-  const readSince = combined.takenAt > lastDose;
+  // Minutes after a dose it shows nothing: the next day's test counts.
+  const readSince =
+    !Number.isFinite(lastDose) ||
+    (combined.takenAt - lastDose >= NIGHT && dayOf(combined.takenAt, timeZone) > dayOf(lastDose, timeZone));
   const usedUp = evenings.length >= combinedRules.evenings && readSince;
-  const tested = since(record, record.openedAt - freshTest.value * HOUR).some(({ values }) =>
-    quick.every((each) => values[each] !== undefined),
-  );
+  const tested = since(record, freshSince).some(({ values }) => quick.every((each) => values[each] !== undefined));
   return {
     ...base,
     branch: usedUp ? 'professional' : 'treatment-evenings',
@@ -69,9 +73,7 @@ export function combinedChlorine(record: SituationRecord): Way {
         : { code: 'evening-of', evening: evenings.length + 1, most: combinedRules.evenings },
     ],
     steps: [
-      ...(tested && evenings.length === 0
-        ? []
-        : [test('test-before-dose', record.openedAt, quick, record.openedAt - freshTest.value * HOUR)]),
+      ...(tested && evenings.length === 0 ? [] : [test('test-before-dose', record.openedAt, quick, freshSince)]),
       ...ticksNow(record, ['open-cover-and-sun']),
       ...evenings.map((day) => {
         const at = morningAfter(day, timeZone);

@@ -1,6 +1,7 @@
 import { dayOf } from '@/lib/calendar/household-day';
 import { freshTest } from '@/lib/standards/situations';
 import { morningAfter } from '../mornings';
+import { NIGHT } from './accident';
 import { fastDoses, newest, since, type SituationRecord } from '../record';
 import { hold, quick, test, type Way } from '../way';
 
@@ -18,7 +19,10 @@ export function quickRaise(record: SituationRecord): Way {
   const checked =
     dose !== undefined &&
     since(record, dose.at).some(
-      ({ takenAt, values }) => values.freeChlorine !== undefined && dayOf(takenAt, timeZone) > dayOf(dose.at, timeZone),
+      ({ takenAt, values }) =>
+        values.freeChlorine !== undefined &&
+        dayOf(takenAt, timeZone) > dayOf(dose.at, timeZone) &&
+        takenAt - dose.at >= NIGHT,
     );
   const enough = fresh && dose === undefined && chlorine.value >= swimLimit - NEAR;
   const done = checked || enough;

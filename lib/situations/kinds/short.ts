@@ -68,7 +68,7 @@ const AIRING = 30 * MINUTE;
 export function cover({ covered, floaterUnder }: AnswersOf<'cover'>, record: SituationRecord): Way {
   const ticks = ticksNow(record, [...(floaterUnder === 'yes' ? (['floater-out'] as const) : []), 'air-cover']);
   const aired = record.ticks.get('air-cover');
-  const tested = aired !== undefined && since(record, aired).some(hasQuick);
+  const tested = aired !== undefined && since(record, aired + AIRING).some(hasQuick);
   const long = covered === 'week-or-more';
   const done = allTicked(record, ticks) && (tested || !long);
   return {
@@ -80,7 +80,9 @@ export function cover({ covered, floaterUnder }: AnswersOf<'cover'>, record: Sit
     reasons: [],
     steps: [
       ...ticks,
-      ...(long ? [test('test-before-swim', (aired ?? record.openedAt) + AIRING, quick, aired ?? Infinity)] : []),
+      ...(long
+        ? [test('test-before-swim', (aired ?? record.openedAt) + AIRING, quick, (aired ?? Infinity) + AIRING)]
+        : []),
     ],
     doneWhen: 'ticks-and-test',
     done,
