@@ -115,13 +115,14 @@ async function cautionsFirst(stage: Stage, page: Page, kind: SituationKind): Pro
 async function replaceDrainCover(stage: Stage, page: Page, ines: Person): Promise<void> {
   await page.goto('/situations/drain-cover');
   await page.getByRole('button', { name: words('situations.begin.button'), exact: true }).click();
-  const replaced = page.getByRole('checkbox', {
-    name: new RegExp(escaped(words('situations.step.cover-replaced.name'))),
-  });
+  // The box is drawn by the label around it.
+  const replaced = page
+    .locator('label:has(input[type=checkbox])')
+    .filter({ hasText: words('situations.step.cover-replaced.name') });
   await replaced.first().waitFor();
   const done = page.getByRole('button', { name: words('situations.ends.doneButton'), exact: true });
   stage.equal('it cannot be ended before', await done.count(), 0);
-  await replaced.first().check({ force: true });
+  await replaced.first().click();
   await done.click();
   await page.getByText(words('situations.ends.over')).first().waitFor();
   const { open, past } = await situationsOf(ines);
