@@ -23,7 +23,7 @@ self.addEventListener('fetch', (event) => {
   if (request.method !== 'GET' || origin !== self.location.origin) return;
   if (request.mode === 'navigate') {
     if (pathname === card) event.respondWith(fetch(request).catch(() => keptCard()));
-    if (Date.now() - keptAt > anHour) event.waitUntil(keepCard().catch(() => undefined));
+    event.waitUntil(renewCard().catch(() => undefined));
   } else if (pathname.startsWith('/_next/static/')) {
     event.respondWith(fetch(request).catch(async () => (await caches.match(request)) ?? Response.error()));
   }
@@ -31,6 +31,11 @@ self.addEventListener('fetch', (event) => {
 
 async function keptCard() {
   return (await caches.match(card)) ?? Response.error();
+}
+
+/** Once an hour; at once where somebody signed out and it was forgotten. */
+async function renewCard() {
+  if (Date.now() - keptAt > anHour || !(await caches.has(kept))) await keepCard();
 }
 
 /** Fetches the card as this person sees it, and every file that it or its styles name; what was kept before goes. */

@@ -1,4 +1,6 @@
 import { z } from 'zod';
+import { daysBetween } from '@/lib/calendar/household-day';
+import { handling } from '@/lib/standards/handling';
 import { calendarDaySchema, instantSchema } from './time';
 
 /** Guided procedures of the care rules, part 7: for when the week sheet alone is not enough. */
@@ -56,7 +58,7 @@ export const situationAnswers = {
     .superRefine(({ leavesOn, backOn, care, name }, context) => {
       const problem = (path: string, message: string) => context.addIssue({ code: 'custom', path: [path], message });
       if (backOn < leavesOn) problem('backOn', 'You come back after you leave. Check the days.');
-      if (care === 'nobody' && daysBetween(leavesOn, backOn) > LONGEST_ALONE)
+      if (care === 'nobody' && daysBetween(leavesOn, backOn) > handling.longestAlone.value)
         problem('care', 'Longer than seven days needs a named adult with a weekly test, or a closed pool.');
       if (care === 'adult' && !name) problem('name', 'Write who looks after the pool.');
     }),
@@ -65,16 +67,6 @@ export const situationAnswers = {
   opening: z.strictObject({ startsOn: calendarDaySchema }),
   closing: z.strictObject({ startsOn: calendarDaySchema }),
 } as const satisfies Record<SituationKind, z.ZodType>;
-
-/** Longest absence in which nobody looks after the pool [days]. */
-export const LONGEST_ALONE = 7;
-
-const DAY = 86_400_000;
-
-/** Days from one calendar day to another, by the calendar and not by the clock. */
-function daysBetween(from: string, to: string): number {
-  return Math.round((Date.parse(to) - Date.parse(from)) / DAY);
-}
 
 function withAnswers<Kind extends SituationKind>(kind: Kind) {
   return z.strictObject({ kind: z.literal(kind), answers: situationAnswers[kind] });

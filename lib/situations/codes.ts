@@ -183,7 +183,6 @@ export const reasons = [
   'water-in-rounds',
   'fill-water-hard',
   'days-away',
-  'no-product',
 ] as const;
 export type Reason = (typeof reasons)[number];
 

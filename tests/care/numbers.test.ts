@@ -2,7 +2,6 @@ import { describe, expect, it } from 'vitest';
 import { bucketLitres } from '@/components/week-sheet/dose-state';
 import type { Constant } from '@/lib/client/worked-out/constant';
 import { constantGroups } from '@/lib/client/worked-out/constants';
-import { LONGEST_ALONE } from '@/lib/schemas/situation';
 import { undoWindow } from '@/lib/services/sheet-doses';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { handling } from '@/lib/standards/handling';
@@ -166,7 +165,6 @@ describe('every number in the care texts', () => {
   });
 
   it('is the number that the program works with', () => {
-    expect(LONGEST_ALONE).toBe(handling.longestAlone.value);
     expect(undoWindow).toBe(handling.undo.value * 60_000);
     const bucket = (amount: number, substance: PlanDose['substance']) =>
       bucketLitres({ amount, substance } as PlanDose);

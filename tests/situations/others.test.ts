@@ -237,10 +237,3 @@ describe('opening and closing', () => {
     expect(way(situation, { ticks: all, readings: [aReading(5, full)] }).done).toBe(true);
   });
 });
-
-describe('the way through a procedure', () => {
-  it('does not hang on what time it is: steps have their instants from the record alone', () => {
-    const situation = { kind: 'storm', answers: { pumpRoom: 'dry', shock: 'no' } } as const;
-    expect(way(situation)).toEqual(way(situation));
-  });
-});

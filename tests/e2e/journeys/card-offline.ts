@@ -52,9 +52,9 @@ export const cardOffline: Journey = {
     await page.setViewportSize({ width: 1280, height: 900 });
     await page.getByRole('button', { name: words('navigation.signOut') }).click();
     await page.waitForURL((url) => url.pathname === '/');
-    const named = await page.evaluate(async () =>
-      (await (await caches.match('/help/emergency'))?.text())?.includes('Ines'),
-    );
-    stage.check('whoever signs out leaves no name behind', named !== true, named);
+    stage.check('it is kept anew for whoever comes next', await until(async () => (await filesKept(page)) > 3));
+    const text = await page.evaluate(async () => (await (await caches.match('/help/emergency'))?.text()) ?? '');
+    stage.check('as a whole', text.includes(words('help.emergency.after')), text.length);
+    stage.check('with no name of whoever signed out', !text.includes('Ines'));
   },
 };
