@@ -12,3 +12,13 @@ export const generic = Object.fromEntries(
 export function isGeneric(product: ShelfProduct): boolean {
   return product.substance !== 'other' && generic[product.substance] === product;
 }
+
+/** The product of what shops sell that has an id. */
+export function genericOf(id: string): ShelfProduct | undefined {
+  return Object.values(generic).find((product) => product.id === id);
+}
+
+/** The id of what shops sell of a substance. */
+export function genericIdOf(substance: ShelfProduct['substance']): string {
+  return substance === 'other' ? substance : generic[substance].id;
+}

@@ -85,14 +85,11 @@ function tabletOption(
   { scenario, start, now }: Pick<PlanContext, 'scenario' | 'start' | 'now'>,
   caution: Caution,
 ): TabletOption | Exclude<Options['noTablets'], null> {
-  const { pool, shelf, preferences } = scenario;
-  const onShelf = shelf.filter(
-    (each) => each.form === 'tablet' && each.substance === 'trichlor' && each.stock >= tabletFacts(each).tabletMass,
-  );
-  const held = onShelf.filter(({ labelWay }) => labelWay !== 'unknown');
+  const { pool } = scenario;
+  const { onShelf, held } = tabletsOnShelf(scenario);
   for (const { id } of onShelf.filter((each) => !held.includes(each))) caution('label-way-unknown', { product: id });
   if (onShelf.length > 0 && held.length === 0) return 'no-tablets-label-unknown';
-  const product = held.find((each) => !avoided(each, preferences.avoid));
+  const product = tabletsFrom(scenario);
   if (!product) return held.length > 0 ? 'no-tablets-avoided' : 'no-tablets-on-shelf';
   if (pool.feeder.kind === 'none') return 'no-tablets-feeder';
   if (pool.feeder.ingredient !== 'trichlor') {
@@ -117,6 +114,19 @@ function tabletOption(
   if (room < 1) return 'no-tablets-feeder-full';
   const most = Math.min(ofWeek, room, Math.floor(product.stock / tabletMass + 1e-9));
   return { product, tabletMass, strength, most, price };
+}
+
+/** Tablets for a feeder, at least one of them, and those of which the label tells the way. */
+function tabletsOnShelf({ shelf }: Pick<Scenario, 'shelf'>) {
+  const onShelf = shelf.filter(
+    (each) => each.form === 'tablet' && each.substance === 'trichlor' && each.stock >= tabletFacts(each).tabletMass,
+  );
+  return { onShelf, held: onShelf.filter(({ labelWay }) => labelWay !== 'unknown') };
+}
+
+/** The product that a plan takes its tablets from. */
+export function tabletsFrom(scenario: Pick<Scenario, 'shelf' | 'preferences'>): ShelfProduct | undefined {
+  return tabletsOnShelf(scenario).held.find((each) => !avoided(each, scenario.preferences.avoid));
 }
 
 /** A strip tells stabilizer so roughly that its value alone never switches tablets on (care rules, part 2). */

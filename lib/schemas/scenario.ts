@@ -8,6 +8,7 @@ import { readingSchema } from './reading';
 import { shelfProductSchema } from './shelf-product';
 import { instantSchema } from './time';
 import { weekAheadSchema } from './week-ahead';
+import { wishesSchema } from './wishes';
 
 const positive = z.number().gt(0);
 
@@ -67,6 +68,8 @@ export const scenarioSchema = z
     /** What the pool has taught by its newest reading; takes the place of priors and of the bare reading. */
     posterior: posteriorSchema.optional(),
     driftPrices: driftPricesSchema.prefault({}),
+    /** What the household changed of its plan; for planning only. */
+    wishes: wishesSchema.optional(),
   })
   .superRefine(({ shelf, reading, now }, context) => {
     for (const contradiction of contradictionsOf(reading, now)) context.addIssue({ code: 'custom', ...contradiction });

@@ -81,7 +81,7 @@ export async function loadWeekSnapshot(
       preferences: await findPreferences(db, householdId),
       given: given.map((dose) => engineDose(dose, timeZone)),
       posterior: learnt?.engineVersion === ENGINE_VERSION ? learnt.step.posterior : undefined,
-    } satisfies Record<keyof Omit<Scenario, 'now' | 'doses' | 'parameters' | 'driftPrices'>, unknown>),
+    } satisfies Record<keyof Omit<Scenario, 'now' | 'doses' | 'parameters' | 'driftPrices' | 'wishes'>, unknown>),
     readingId: newest.id,
     task: found.pool.recordOnly ? 'project' : 'plan',
     zeroDoubt,
