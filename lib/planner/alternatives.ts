@@ -43,7 +43,7 @@ export function burdenOf({ draft, choice, median }: ByMedian, doses: readonly Pl
     swing: swingOf(water.freeChlorine, context),
     stabilizer: water.cyanuricAcid.at(-1)! - water.cyanuricAcid[0]!,
     hardness: water.calciumHardness.at(-1)! - water.calciumHardness[0]!,
-    kilograms: doses.reduce((sum, dose) => sum + kilogramsOf(dose, choice), 0),
+    kilograms: doses.reduce((sum, dose) => sum + kilogramsOf(dose, choice.tablets), 0),
     hoursOutside,
   };
 }
@@ -64,7 +64,8 @@ function swingOf(freeChlorine: ArrayLike<number>, { hours, scenario }: PlanConte
 /** Density of liquid hypochlorite [kg/L]. */
 const LIQUID_DENSITY = 1.2;
 
-function kilogramsOf(dose: PlannedDose, { tablets }: Evaluated['choice']): number {
+/** What a dose weighs [kg]. */
+export function kilogramsOf(dose: PlannedDose, tablets: { tabletMass: number } | null): number {
   if (dose.unit === 'tablet') return (dose.amount * (tablets?.tabletMass ?? 0)) / 1000;
   return (dose.amount / 1000) * (dose.unit === 'mL' ? LIQUID_DENSITY : 1);
 }

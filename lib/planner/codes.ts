@@ -21,6 +21,8 @@ export const doseReasons = [
   'treatment-evening',
   'raise-to-limit',
   'pH-before-treatment',
+  /** Stands as the household wished it. */
+  'wished',
   ...companionReasons,
 ] as const;
 export type DoseReason = (typeof doseReasons)[number];
@@ -52,6 +54,8 @@ export const reasonCodes = [
   /** First sentences when the week cannot be kept in range. */
   'replace-water-first',
   'few-open-hours',
+  /** The household changed this plan. */
+  'wished',
   /** An open situation leads: its doses take the place of the week's, or nothing is dosed. */
   'situation-treats',
   'situation-holds',
@@ -93,6 +97,8 @@ export const cautionCodes = [
   'granules-not-for-surface',
   'stock-short',
   'dose-after-dark',
+  /** What the household changed no longer keeps to the limits: the plan is made without it. */
+  'wishes-set-aside',
   'volume-estimated',
   'free-chlorine-over-swim-limit',
   /** Something is needed beside chlorine and has to wait: for a test, or for an evening that chlorine can spare. */

@@ -25,7 +25,7 @@ export type CompanionWeek = {
 export function companionWeek(alone: WeekSketch): CompanionWeek {
   const { sketches, choice, context, response } = alone;
   const contextWith = remember(
-    ({ dose }: Companion) => contextOf(context.scenario, dose),
+    ({ dose }: Companion) => contextOf(context.scenario, { companion: dose, wishes: context.wishes }),
     ({ planned }) => momentKey(planned),
   );
   // The pump runs for it, and may bring out more of the tablets than the water takes.

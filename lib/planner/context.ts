@@ -10,10 +10,13 @@ import { bandOf } from '@/lib/projection/quantiles';
 import type { TabletLoad } from '@/lib/projection/tablets';
 import type { Posterior } from '@/lib/schemas/posterior';
 import type { Scenario } from '@/lib/schemas/scenario';
+import type { Wishes } from '@/lib/schemas/wishes';
 import { limits } from '@/lib/standards/limits';
 import { ledgerOf } from '@/lib/chemistry';
 import { weekDoseOf } from './given-doses';
 import { type StartingWater, startingWater } from './starting-water';
+import { wishedWeekDoses } from './wished-week-doses';
+import { noWishes } from './wishes';
 
 /** The first 32 of 64 Sobol points are as evenly spread as all of them. */
 const QUICK_MEMBERS = 32;
@@ -27,8 +30,11 @@ export type PlanContext = {
   scenario: Scenario;
   now: number;
   start: StartingWater;
-  /** What went in, and what is to go in beside chlorine. */
+  /** What went in, what is to go in beside chlorine, and what stands as it was wished. */
   given: readonly WeekDose[];
+  /** What the household changed of the plan, and its doses as they stand among those. */
+  wishes: Wishes;
+  wished: readonly WeekDose[];
   forcing: Forcing;
   /** The pool with every parameter at its median, and the ensemble around it. */
   median: Member;
@@ -54,13 +60,18 @@ export type PlanContext = {
  * Readies a scenario: the water at its newest reading, what acts on it, the ensemble.
  *
  * @param companion what is to go in beside chlorine
+ * @param wishes    what the household changed of the plan; only a plan made for the week itself minds them
  * Errors: invalid-input for a given dose that cannot be reckoned with; WaterRangeError for water that cannot be.
  */
-export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext {
+export function contextOf(
+  scenario: Scenario,
+  { companion, wishes = noWishes }: { companion?: WeekDose; wishes?: Wishes } = {},
+): PlanContext {
   const { pool, shelf } = scenario;
   const history = scenario.given.map((dose, index) => weekDoseOf(dose, `given[${index}]`, shelf, pool));
   const { start, taught } = startOf(scenario, history);
-  const given = companion ? [...history, companion] : history;
+  const wished = wishedWeekDoses(wishes, scenario);
+  const given = [...history, ...(companion ? [companion] : []), ...wished];
   const forcing = prepareForcing(pool, start.takenAt, scenario.week, start.water.temperature);
   const setting = {
     ...settingOf(pool, start.water.temperature, { ...taught?.medians, ...scenario.parameters }),
@@ -83,6 +94,8 @@ export function contextOf(scenario: Scenario, companion?: WeekDose): PlanContext
     now: scenario.now === undefined ? start.takenAt : Math.max(start.takenAt, parseInstant(scenario.now)!),
     start,
     given,
+    wishes,
+    wished,
     forcing,
     median,
     members,

@@ -36,9 +36,9 @@ export function doseEvenings(pool: Pool, takenAt: number, now: number): Evening[
 
 /**
  * The evenings that a plan may use: none while the likely range is over 10 mg/L by itself, none on a day on which chlorine
- * was given, none within the gap between acid and chlorine of anything given.
+ * was given, none within the gap between acid and chlorine of anything given, none on a day that the household keeps free.
  */
-export function openEvenings({ scenario, start, now, given, belowMaximumFrom }: PlanContext): Evening[] {
+export function openEvenings({ scenario, start, now, given, wishes, belowMaximumFrom }: PlanContext): Evening[] {
   const { pool } = scenario;
   const gap = limits.acidToChlorineGap.value * MILLISECONDS_PER_HOUR;
   const chlorineDays = new Set(given.filter(bringsChlorine).map(({ at }) => dayOf(at, pool.timeZone)));
@@ -47,6 +47,7 @@ export function openEvenings({ scenario, start, now, given, belowMaximumFrom }: 
       at >= belowMaximumFrom &&
       // A late evening may lie behind midnight.
       !chlorineDays.has(dayOf(at, pool.timeZone)) &&
+      !wishes.notOn.includes(dayOf(at, pool.timeZone)) &&
       given.every((dose) => Math.abs(dose.at - at) >= gap),
   );
 }

@@ -6,9 +6,11 @@ import { surfaceRanges } from '@/lib/standards/surface-ranges';
 import { type CautionCode, isCompanionReason, type ReasonCode } from './codes';
 import type { CompanionNeed } from './companions/need';
 import type { PlanContext } from './context';
+import { doseEvenings } from './evenings';
 import type { Choice } from './draft';
 import type { Options } from './products';
 import { waterExchange } from './water-exchange';
+import { isEmptyWish } from './wishes';
 
 export const FEW_OPEN_HOURS = 0.9;
 
@@ -37,6 +39,7 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
   const exchange = waterExchange(water.cyanuricAcid, pool);
   if (exchange) reason('replace-water-first', { ...exchange });
   if (openShare < FEW_OPEN_HOURS) reason('few-open-hours', { share: openShare, visits: preferences.visits });
+  if (!isEmptyWish(context.wishes)) reason('wished');
   const tablets = chlorine.filter(({ form }) => form === 'tablet');
   const stabilized = context.stabilizedProductUsed || tablets.length > 0;
   const sum = (each: (dose: PlannedDose) => number) => tablets.reduce((total, dose) => total + each(dose), 0);
@@ -54,18 +57,17 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
     });
   else if (options.noTablets)
     reason(options.noTablets, { stabilizer: water.cyanuricAcid, upper: pool.stabilizerBand[1], pH: water.pH });
-  else if (free) reason('no-tablets-better-without');
+  // Where the household wants none, nobody has looked whether they would be better.
+  else if (free && !context.wishes.noFurtherTablets) reason('no-tablets-better-without');
 
   const fast = chlorine.filter(({ form }) => form !== 'tablet');
-  const product = fast[0];
-  if (product)
-    reason('fast-closes-gap', {
-      form: product.form,
-      evenings: fast.length,
-      rise: fast.reduce((total, { rise }) => total + rise, 0),
-    });
-  else if (options.fast.length === 0) reason('no-fast-on-shelf');
-  else if (free) reason('nothing-fast-needed');
+  for (const form of new Set(fast.map((dose) => dose.form))) {
+    const ofForm = fast.filter((dose) => dose.form === form);
+    const rise = ofForm.reduce((total, dose) => total + dose.rise, 0);
+    reason('fast-closes-gap', { form, evenings: ofForm.length, rise });
+  }
+  if (fast.length === 0 && options.fast.length === 0) reason('no-fast-on-shelf');
+  else if (fast.length === 0 && free) reason('nothing-fast-needed');
   for (const { reason: why, effect } of doses)
     if (effect && isCompanionReason(why)) reason(why, { quantity: effect.quantity, change: effect.change });
   if (cheapest(plan)) reason('cheaper-than');
@@ -103,9 +105,12 @@ export function cautionsOf({ doses, options, choice, waiting }: Explained, conte
       high,
       index: saturationIndex(water),
     });
+  const wishedEvenings = doseEvenings(pool, start.takenAt, context.now).filter(({ at }) =>
+    context.wished.some((dose) => dose.at === at),
+  );
+  const evenings = [...choice.evenings, ...wishedEvenings];
   const dark = doses.some(
-    ({ at, form }) =>
-      form !== 'tablet' && choice.evenings.some((evening) => evening.afterDark && evening.at === Date.parse(at)),
+    ({ at, form }) => form !== 'tablet' && evenings.some((each) => each.afterDark && each.at === Date.parse(at)),
   );
   if (dark) caution('dose-after-dark');
   for (const id of new Set(doses.flatMap(({ product, toBuy }) => (product !== null && toBuy ? [product] : []))))

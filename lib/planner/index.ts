@@ -1,6 +1,6 @@
 import { analysisAt, type CourseBand } from '@/lib/projection';
 import type { PlannedDose } from '@/lib/schemas/dose';
-import type { Cost, WeekPlan } from '@/lib/schemas/plan';
+import type { Burden, Cost, WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { alternativesOf, burdenOf } from './alternatives';
 import { assertSafePlan } from './safety/assert-safe-plan';
@@ -8,7 +8,8 @@ import { frame, planWithout } from './bare-plan';
 import { checksOf } from './checks';
 import { companionWeek } from './companion-week';
 import type { Companion } from './companions/companion';
-import { contextOf } from './context';
+import type { DoseReason } from './codes';
+import { contextOf, type PlanContext } from './context';
 import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
 import { cautionsOf, reasonsOf } from './explain';
 import { halveFirstDose } from './first-dose';
@@ -17,9 +18,12 @@ import { midWeekTestPays } from './mid-week-test';
 import { needsOf } from './needs';
 import { plannedDoses } from './planned-doses';
 import { projectionOf } from './projection-of';
+import { isFirstEver, refuseWishes } from './refuse-wishes';
 import { searchPlan } from './search';
 import { sketchWeek } from './week-sketch';
 import { weights } from './weights';
+import { costWithWished, type Wished, wishedIn } from './wished-doses';
+import { isEmptyWish, noWishes, wishesInForce } from './wishes';
 
 export { assertSafePlan } from './safety/assert-safe-plan';
 export { projectScenario } from './project-scenario';
@@ -31,30 +35,40 @@ export type { CourseBand };
  * The week's plan: which form of chlorine, how much, which evening, for 168 h from the newest reading.
  *
  * Minimises the whole cost over the ensemble (see `weights`) under the safety constraints; when nothing keeps the range it
- * is the least bad plan and `broken` says which limit, when, by how much. Deterministic.
+ * is the least bad plan and `broken` says which limit, when, by how much. Deterministic. What the household wishes stands as
+ * it is wished, within the same limits, and the rest is planned around it.
  *
  * Errors: invalid-input for a given dose of an unknown product; WaterRangeError for water that cannot be; plan-refused
- * when the safety net finds a fault in the result.
+ * when the safety net finds a fault in the result, or in what was wished.
  */
 export function planWeek(scenario: Scenario): WeekPlan {
   const { blocking, wanted } = needsOf(scenario);
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
-  const { sketch, companion, waiting } = companionWeek(sketchWeek(contextOf(scenario)));
+  const wishes = wishesInForce(scenario);
+  const { sketch, companion, waiting } = companionWeek(sketchWeek(contextOf(scenario, { wishes })));
   const { context, options, choice, response, sketches } = sketch;
   const found = searchPlan(context, response, choice, sketches);
-  const { draft, halvedEvening } = halveFirstDose(found.draft, scenario);
+  const { draft, halvedEvening } = wishedComesFirst(found, context)
+    ? { draft: found.draft, halvedEvening: null }
+    : halveFirstDose(found.draft, scenario);
   const best = draft === found.draft ? found : evaluate(draft, choice, context);
 
   const stabilized = stabilizedIn(draft, context);
-  const chlorine = plannedDoses(draft, choice, context, halvedEvening);
-  const doses = inOrder(companion ? [...chlorine, companion.planned] : chlorine);
+  const searched = plannedDoses(draft, choice, context, halvedEvening);
+  const wished = firstMarked(wishedIn(context), searched, context);
+  const chlorine = inOrder([...searched, ...wished.doses]);
+  refuseWishes(wished.doses, chlorine[0], context);
+  const doses = companion ? inOrder([...chlorine, companion.planned]) : chlorine;
   const projection = projectionOf(best.courses, best.median, context, stabilized);
   const broken = brokenLimits(projection, context, stabilized);
   const openShare = openSwimShare(projection, doses, context);
-  const alternatives = alternativesOf(sketch, best);
+  // What each form alone would do has nothing to do with what was wished.
+  const alternatives = isEmptyWish(wishes)
+    ? alternativesOf(sketch, best)
+    : planWeek({ ...scenario, wishes: noWishes }).alternatives;
   const explained = {
     ...{ doses, chlorine, choice, options, alternatives, broken, openShare, waiting },
-    money: moneyOf(draft, choice),
+    money: moneyOf(draft, choice) + wished.burden.money,
   };
   const plan: WeekPlan = {
     ...frame(context),
@@ -62,8 +76,8 @@ export function planWeek(scenario: Scenario): WeekPlan {
     doses,
     checks: checksOf(projection, doses, companion, midWeekTestPays(best, context), context, stabilized),
     endOfWeek: endOf(best),
-    cost: withCompanion(best.cost, companion, scenario),
-    mix: burdenOf(best, chlorine, context),
+    cost: withCompanion(costWithWished(best, wished, context), companion, scenario),
+    mix: withWished(burdenOf(best, searched, context), wished),
     alternatives,
     openSwimShare: openShare,
     broken,
@@ -77,6 +91,29 @@ export function planWeek(scenario: Scenario): WeekPlan {
 
 function inOrder(doses: readonly PlannedDose[]): PlannedDose[] {
   return doses.toSorted((a, b) => Date.parse(a.at) - Date.parse(b.at));
+}
+
+/** Whether a wished dose goes in before all that the search found. */
+function wishedComesFirst({ draft, choice }: Evaluated, { wished }: PlanContext): boolean {
+  const found = choice.evenings.filter((_, evening) => draft.tablets[evening]! > 0 || draft.measures[evening]! > 0);
+  return Math.min(...wished.map(({ at }) => at)) < Math.min(...found.map(({ at }) => at));
+}
+
+/** Where nothing has gone in yet and the volume is an estimate, the first dose is a half one and asks for a test after it. */
+function firstMarked(wished: Wished, searched: readonly PlannedDose[], context: PlanContext): Wished {
+  const [first] = inOrder([...searched, ...wished.doses]);
+  if (!isFirstEver(context)) return wished;
+  const reason = 'first-dose-halved' satisfies DoseReason;
+  return { ...wished, doses: wished.doses.map((dose) => (dose === first ? { ...dose, reason } : dose)) };
+}
+
+function withWished(burden: Burden, { burden: { money, visits, kilograms } }: Wished): Burden {
+  return {
+    ...burden,
+    money: burden.money + money,
+    visits: burden.visits + visits,
+    kilograms: burden.kilograms + kilograms,
+  };
 }
 
 /** What the companion costs beside the chlorine: its product and its visit. */

@@ -13,6 +13,7 @@ import type { PlanContext } from './context';
 import { generic } from './generic-products';
 import { liquidStrength, priceOf, tabletFacts } from './product-facts';
 import type { StartingWater } from './starting-water';
+import { wishedOf } from './wished-week-doses';
 
 const HOUR = 3_600_000;
 /** Chlorine that comes with 1 g of stabilizer from trichlor [g]. */
@@ -48,17 +49,24 @@ export type Options = {
 };
 
 /** What the shelf, the feeder, the labels and the water let a plan use (safety constraints only; the rest is cost). */
-export function optionsOf(context: Pick<PlanContext, 'scenario' | 'start' | 'now' | 'median'>): Options {
-  const { scenario, start, median } = context;
+export function optionsOf(context: Pick<PlanContext, 'scenario' | 'start' | 'now' | 'median' | 'wishes'>): Options {
+  const { scenario, start, median, wishes } = context;
   const cautions: Fact[] = [];
   const caution = (code: CautionCode, figures: Omit<Fact, 'code'> = {}) => cautions.push({ code, ...figures });
   const owned = scenario.shelf.flatMap((product) => fastOption(product, scenario, start, caution) ?? []);
   // A cap holds for the smaller of the measured and the learnt volume.
   const spread = Math.min(1, median.setting.parameters.volume / scenario.pool.volume);
   const fast = (owned.length > 0 ? owned : somethingToBuy(scenario, start))
-    .map((option) => ({ ...option, capRise: option.capRise * spread }))
+    .map((option) => ({
+      ...option,
+      capRise: option.capRise * spread,
+      // What was wished comes off the shelf first.
+      stock: Math.max(0, option.stock - wishedOf(option.product, wishes)),
+    }))
     .sort((a, b) => pricePerRise(a, start.takenAt) - pricePerRise(b, start.takenAt));
   const tablets = tabletOption(context, caution);
+  if (typeof tablets !== 'string' && wishes.noFurtherTablets)
+    return { tablets: null, noTablets: null, tabletsMayBe: true, fast, cautions };
   return typeof tablets === 'string'
     ? { tablets: null, noTablets: tablets, tabletsMayBe: full.has(tablets), fast, cautions }
     : { tablets, noTablets: null, tabletsMayBe: true, fast, cautions };
@@ -82,7 +90,7 @@ function pricePerRise(option: FastOption, at: number): number {
 type Caution = (code: CautionCode, figures?: Omit<Fact, 'code'>) => void;
 
 function tabletOption(
-  { scenario, start, now }: Pick<PlanContext, 'scenario' | 'start' | 'now'>,
+  { scenario, start, now, wishes }: Pick<PlanContext, 'scenario' | 'start' | 'now' | 'wishes'>,
   caution: Caution,
 ): TabletOption | Exclude<Options['noTablets'], null> {
   const { pool } = scenario;
@@ -102,17 +110,19 @@ function tabletOption(
   if (start.water.pH < TABLETS_NEED_PH) return 'no-tablets-pH-low';
   const { tabletMass, strength } = tabletFacts(product);
   const price = (priceOf(product) * tabletMass) / 1000;
+  const withWished = { shelf: scenario.shelf, given: [...scenario.given, ...wishes.doses] };
   const inFeeder = start.loads.reduce((sum, load) => sum + (load.erodedShare < 1 ? load.count : 0), 0);
   const ofWeek = mostTablets(
     pool.volume,
     { tabletMass, strength },
-    tabletsGiven(scenario, now - tabletCap.countedFor * HOUR),
+    tabletsGiven(withWished, now - tabletCap.countedFor * HOUR),
   );
   if (mostTablets(pool.volume, { tabletMass, strength }) < 1) return 'no-tablets-pool-small';
   if (ofWeek < 1) return 'no-tablets-week-full';
-  const room = pool.feeder.capacity - inFeeder - tabletsGiven(scenario, start.takenAt).count;
+  const room = pool.feeder.capacity - inFeeder - tabletsGiven(withWished, start.takenAt).count;
   if (room < 1) return 'no-tablets-feeder-full';
-  const most = Math.min(ofWeek, room, Math.floor(product.stock / tabletMass + 1e-9));
+  const left = product.stock - wishedOf(product, wishes);
+  const most = Math.min(ofWeek, room, Math.max(0, Math.floor(left / tabletMass + 1e-9)));
   return { product, tabletMass, strength, most, price };
 }
 

@@ -45,7 +45,7 @@ export function treatmentWeek(scenario: Scenario, treatment: Treatment): WeekPla
   if (needsOf(scenario).blocking.length > 0) return projectScenario({ ...scenario, doses: [] });
   const bare = contextOf(scenario);
   const acid = treatment.pHFirst === undefined ? null : treatmentAcid(treatment.pHFirst, bare);
-  const context = acid ? contextOf(scenario, acid.dose) : bare;
+  const context = acid ? contextOf(scenario, { companion: acid.dose }) : bare;
   // Chlorine waits until a test finds pH low enough: acid and chlorine need a reading between them.
   const waits = treatment.pHFirst !== undefined && bare.start.water.pH > treatment.pHFirst + PH_NEAR_ENOUGH;
   const evening = waits ? undefined : openEvenings(context)[0];

@@ -43,8 +43,10 @@ export function wishesInForce(scenario: Scenario): Wishes {
   const from = now === undefined ? takenAt : Math.max(takenAt, parseInstant(now)!);
   const until = takenAt + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR;
   const dayOfDose = (dose: GivenDose) => dayOf(parseInstant(dose.at)!, pool.timeZone);
+  const firstDay = dayOf(from, pool.timeZone);
   return {
     ...wishes,
+    notOn: wishes.notOn.filter((day) => day >= firstDay),
     doses: wishes.doses.filter((dose) => {
       const at = parseInstant(dose.at)!;
       const product = wishedProduct(dose, scenario);

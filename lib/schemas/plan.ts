@@ -64,6 +64,7 @@ export const burdenSchema = z.object({
   kilograms: z.number(),
   hoursOutside: z.number(),
 });
+export type Burden = z.infer<typeof burdenSchema>;
 
 export const alternativeSchema = burdenSchema.extend({
   kind: z.enum(['tablets', 'granular', 'liquid']),

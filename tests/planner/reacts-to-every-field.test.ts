@@ -125,6 +125,14 @@ const driftPrice =
   (s) =>
     (s.driftPrices = { [field]: value });
 
+const wishes =
+  (dose: Record<string, unknown>): Change =>
+  (s) =>
+    (s.wishes = {
+      doses: [{ at: '2026-07-09T20:15:00-04:00', product: 'gran', amount: 350, unit: 'g', ...dose }],
+    });
+const wishedIn = ({ doses }: WeekPlan) => doses.find(({ reason }) => reason === 'wished');
+
 const same: Change = () => {};
 const plain = projected(same);
 const plainPlan = planned(same);
@@ -327,6 +335,17 @@ const answers: Record<string, () => void> = {
     expect(
       planned(with_(reading('calciumHardness', 390), driftPrice('hardness', 50))).doses.map((dose) => dose.product),
     ).not.toContain('gran'),
+  'wishes.doses.at': () => expect(wishedIn(planned(wishes({})))?.at).toBe('2026-07-09T20:15:00-04:00'),
+  'wishes.doses.product': () =>
+    expect(wishedIn(planned(wishes({ product: 'liq', unit: 'mL', amount: 1000 })))?.form).toBe('liquid'),
+  'wishes.doses.amount': () =>
+    expect(wishedIn(planned(wishes({ amount: 200 })))!.rise).toBeLessThan(wishedIn(planned(wishes({})))!.rise),
+  'wishes.doses.unit': () => expect(() => planned(wishes({ unit: 'mL' }))).toThrow(/counted/),
+  'wishes.notOn': () => {
+    const day = plainPlan.doses[0]!.at.slice(0, 10);
+    expect(planned((s) => (s.wishes = { notOn: [day] })).doses.map(({ at }) => at.slice(0, 10))).not.toContain(day);
+  },
+  'wishes.noFurtherTablets': () => expect(tablets(planned((s) => (s.wishes = { noFurtherTablets: true })))).toBe(0),
   'driftPrices.pH': () => expect(tablets(planned(driftPrice('pH', 50)))).toBeLessThan(tablets(plainPlan)),
 };
 

@@ -37,7 +37,7 @@ export function companionsOf(
     water: start.water,
     pH: plan.median.pH,
     measured: (quantity) => start.measuredAt[quantity] !== undefined,
-    tabletsLead: sumOf(plan.draft.tablets) > 0,
+    tabletsLead: sumOf(plan.draft.tablets) > 0 || context.wished.some(({ kind }) => kind === 'tablets'),
     tabletsPossible: options.tabletsMayBe,
   });
   if (untested(context) || plan.choice.visits < 2) return { needs, companions: [] };

@@ -19,7 +19,7 @@ const acids: readonly CompanionSubstance[] = ['hydrochloric-acid', 'sodium-bisul
  */
 export function momentOf(need: CompanionNeed, substance: CompanionSubstance, plan: ByMedian, context: PlanContext) {
   const { start, now } = context;
-  const chlorine = chlorineEvenings(plan);
+  const chlorine = [...chlorineEvenings(plan), ...context.wished.map(({ at }) => at)].sort((a, b) => a - b);
   const low = start.water.freeChlorine < codeMinimum(start.water.cyanuricAcid, context.stabilizedProductUsed);
   const from = Math.max(now, context.belowMaximumFrom, low && chlorine.length > 0 ? chlorine[0]! : start.takenAt);
   if (acids.includes(substance)) return acidMorning(need, from, chlorine, context);
