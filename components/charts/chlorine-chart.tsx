@@ -4,6 +4,7 @@ import type { ReactNode } from 'react';
 import { Area, ReferenceLine } from 'recharts';
 import { type ChartRow, waterOf } from './chart-rows';
 import { LaneChart, type LaneTime, layer, still } from './lane-chart';
+import type { Reading } from './lane-cursor';
 import { WAVES } from './patterns';
 import { type ChartTest, TestMarks } from './test-marks';
 import { ticksOf, type ValueAxis } from './value-axis';
@@ -16,16 +17,17 @@ type Props = {
   limits: readonly Limit[];
   tests: readonly ChartTest[];
   label: string;
-  readout: (row: ChartRow) => string;
+  reading: Reading<ChartRow>;
   notes: ReactNode;
   thicker?: number;
+  byFinger?: boolean;
 };
 
 /** Free chlorine between the lowest level and the swim limit. */
 export function ChlorineChart(props: Props) {
-  const { time, value, rows, limits, tests, label, readout, notes, thicker = 0 } = props;
+  const { time, value, rows, limits, tests, label, reading, notes, thicker = 0, byFinger = false } = props;
   return (
-    <LaneChart time={time} value={value} rows={rows} label={label} readout={readout} notes={notes}>
+    <LaneChart {...{ time, value, rows, label, reading, notes, byFinger }}>
       {['water', 'waves'].map((fill) => (
         <Area
           key={fill}

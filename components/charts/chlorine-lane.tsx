@@ -7,6 +7,7 @@ import { ChlorineChart } from './chlorine-chart';
 import { dayWords } from './day-words';
 import { DoseCircles, MeetingMark, NowDot, SwimHours } from './dose-marks';
 import type { LaneTime } from './lane-chart';
+import type { Reading } from './lane-cursor';
 import { LikelyLeader } from './likely-leader';
 import { NotesLayer } from './notes-layer';
 import { type Box, placeWords } from './place-words';
@@ -33,7 +34,7 @@ export type ChlorineLaneProps = {
   planEndsAt: number | undefined;
   phrases: WeekPhrases;
   label: string;
-  readout: (row: ChartRow) => string;
+  reading: Reading<ChartRow>;
 };
 
 /** Free chlorine with everything that is said about it. */
@@ -55,8 +56,9 @@ export function ChlorineLane(props: ChlorineLaneProps) {
       limits={limits}
       tests={tests}
       label={props.label}
-      readout={props.readout}
+      reading={props.reading}
       thicker={span === 'day' ? 0.4 : 0}
+      byFinger={span === 'day'}
       notes={
         <NotesLayer width={width} height={value.height}>
           <SwimHours {...ground} hours={swimHours} limit={swimLimit} />

@@ -1,7 +1,8 @@
 'use client';
 
-import type { ReactNode } from 'react';
-import { ComposedChart, ReferenceArea, ReferenceLine, Tooltip, XAxis, YAxis } from 'recharts';
+import { type ReactNode, useId } from 'react';
+import { ComposedChart, ReferenceArea, ReferenceLine, XAxis, YAxis } from 'recharts';
+import { LaneCursor, type Reading } from './lane-cursor';
 import { isOn, type Stretch, type TimeAxis } from './time-axis';
 import type { ValueAxis } from './value-axis';
 
@@ -14,18 +15,14 @@ type Props<Row> = {
   rows: Row[];
   /** One sentence that says what the curve shows. */
   label: string;
-  /** What is said of one hour under the pointer. */
-  readout: (row: Row) => string;
+  /** How the curve is read hour by hour. */
+  reading: Reading<Row>;
   children: ReactNode;
   /** Words and marks over the chart. */
   notes?: ReactNode;
+  /** Whether a finger reads along the curve: not where the lanes scroll sideways. */
+  byFinger?: boolean;
 };
-
-function Readout<Row>({ row, readout }: { row: Row | undefined; readout: (row: Row) => string }) {
-  return row ? (
-    <p className="rounded bg-ink px-2 py-1 text-chart whitespace-nowrap text-on-ink">{readout(row)}</p>
-  ) : null;
-}
 
 /** Order of what lies over what; water at the bottom, marks on top. */
 export const layer = {
@@ -47,18 +44,18 @@ export const still = { isAnimationActive: false, activeDot: false, type: 'linear
  * lanes between the charts can place theirs by the same share.
  */
 export function LaneChart<Row extends { at: number }>(props: Props<Row>) {
-  const { time, value, rows, label, readout, children, notes } = props;
-  const { axis, width, nights, now, syncId } = time;
+  const { time, value, rows, label, reading, children, notes, byFinger = false } = props;
+  const { axis, width, nights, now } = time;
+  const sentence = useId();
   return (
     <div className="relative text-ink" style={{ width, height: value.height }}>
-      <div role="img" aria-label={label}>
+      <div id={sentence} role="img" aria-label={label}>
         <ComposedChart
           width={width}
           height={value.height}
           margin={{ top: 0, right: 0, bottom: 0, left: 0 }}
           data={rows}
-          syncId={syncId}
-          // The table beside the chart is what a keyboard reaches.
+          // The cursor over the chart is what a keyboard reaches.
           accessibilityLayer={false}
         >
           <XAxis type="number" dataKey="at" domain={[axis.from, axis.to]} hide allowDataOverflow />
@@ -76,15 +73,11 @@ export function LaneChart<Row extends { at: number }>(props: Props<Row>) {
             />
           ))}
           {children}
-          <Tooltip
-            isAnimationActive={false}
-            cursor={{ stroke: 'currentColor', strokeWidth: 1, strokeDasharray: '2 3' }}
-            content={({ payload }) => <Readout row={payload[0]?.payload} readout={readout} />}
-          />
           {isOn(axis, now) && <ReferenceLine x={now} stroke="currentColor" strokeWidth={1.6} zIndex={layer.now} />}
         </ComposedChart>
       </div>
       {notes}
+      <LaneCursor {...{ time, value, rows, reading, byFinger }} describedBy={sentence} />
     </div>
   );
 }

@@ -19,7 +19,7 @@ export type Words = {
   tone?: 'teal';
   /** Room above their left end that a leader line needs, free of other words. */
   leader?: { width: number; height: number };
-  /** Left out when every place is taken; other words then stand at their first place all the same. */
+  /** Left out when every place is taken; other words then stand where they cover least. */
   mayBeLeftOut?: true;
 };
 export type PlacedWords = Words & Place;
@@ -28,24 +28,55 @@ const LINE_GAP = 2.5;
 /** Widest mean of a character as a share of its size, measured on the words of the sheet in the two fonts. */
 const characterWidth: Record<Weight, number> = { plain: 0.49, bold: 0.525, figure: 0.55, italic: 0.52 };
 
+/** Air round words, so that what is close is not read as one [px]. */
+const AIR = { across: 4, down: 2 };
+/** Words under words can be read by nobody; a mark under words can still be seen round them. */
+const COVERED_WORDS_WEIGH = 20;
+
 /**
  * Places words so that none covers other words, a mark or the curve. In the order given: what stands first chooses first.
  */
 export function placeWords(words: readonly Words[], taken: readonly Box[], bounds: Box): PlacedWords[] {
   const placed: PlacedWords[] = [];
-  const occupied = [...taken];
   for (const candidate of words) {
+    const others = placed.map(({ lines, ...place }) => boxOf(lines, place));
     const free = candidate.places.find((place) => {
       const box = boxOf(candidate.lines, place);
-      if (!holds(bounds, box) || occupied.some((other) => overlap(box, other))) return false;
-      return candidate.leader === undefined || !crossesWords(box, candidate.leader, placed);
+      if (!holds(bounds, box) || taken.some((other) => overlap(box, other))) return false;
+      if (others.some((other) => overlap(grown(box), other))) return false;
+      return candidate.leader === undefined || !crossesWords(box, candidate.leader, others);
     });
-    const place = free ?? (candidate.mayBeLeftOut ? undefined : candidate.places[0]);
-    if (place === undefined) continue;
-    placed.push({ ...candidate, ...place });
-    occupied.push(boxOf(candidate.lines, place));
+    const place = free ?? (candidate.mayBeLeftOut ? undefined : leastCovering(candidate, taken, others, bounds));
+    if (place !== undefined) placed.push({ ...candidate, ...place });
   }
   return placed;
+}
+
+/** Where indispensable words hide least, when no place is free: always inside the chart. */
+function leastCovering(
+  { lines, places }: Words,
+  taken: readonly Box[],
+  others: readonly Box[],
+  bounds: Box,
+): Place | undefined {
+  const inside = places.map((place) => movedInto(bounds, lines, place));
+  const costs = inside.map((place) => {
+    const box = boxOf(lines, place);
+    const over = (boxes: readonly Box[]) => boxes.reduce((sum, other) => sum + shared(box, other), 0);
+    return over(taken) + COVERED_WORDS_WEIGH * over(others);
+  });
+  return inside[costs.indexOf(Math.min(...costs))];
+}
+
+function movedInto(bounds: Box, lines: readonly WordLine[], place: Place): Place {
+  const box = boxOf(lines, place);
+  const within = (from: number, size: number, low: number, room: number) =>
+    Math.max(low, Math.min(from, low + room - size)) - from;
+  return {
+    ...place,
+    x: place.x + within(box.x, box.width, bounds.x, bounds.width),
+    y: place.y + within(box.y, box.height, bounds.y, bounds.height),
+  };
 }
 
 /** Room that lines of words take at a place. */
@@ -76,13 +107,21 @@ function overlap(a: Box, b: Box): boolean {
   return a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
 }
 
-function crossesWords(
-  { x, y }: Box,
-  leader: { width: number; height: number },
-  placed: readonly PlacedWords[],
-): boolean {
+function grown({ x, y, width, height }: Box): Box {
+  const { across, down } = AIR;
+  return { x: x - across, y: y - down, width: width + 2 * across, height: height + 2 * down };
+}
+
+/** Area that two boxes have in common. */
+function shared(a: Box, b: Box): number {
+  const across = Math.min(a.x + a.width, b.x + b.width) - Math.max(a.x, b.x);
+  const down = Math.min(a.y + a.height, b.y + b.height) - Math.max(a.y, b.y);
+  return Math.max(0, across) * Math.max(0, down);
+}
+
+function crossesWords({ x, y }: Box, leader: { width: number; height: number }, others: readonly Box[]): boolean {
   const room = { x, y: y - leader.height, ...leader };
-  return placed.some(({ lines, ...place }) => overlap(room, boxOf(lines, place)));
+  return others.some((other) => overlap(room, other));
 }
 
 function holds(outer: Box, inner: Box): boolean {

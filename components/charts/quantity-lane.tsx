@@ -6,6 +6,7 @@ import type { ChartRow } from './chart-rows';
 import { ChartWords } from './chart-words';
 import { DoseCircles } from './dose-marks';
 import { LaneChart, type LaneTime, layer } from './lane-chart';
+import type { Reading } from './lane-cursor';
 import { NotesLayer } from './notes-layer';
 import { type Box, type Place, placeWords, type Words } from './place-words';
 import { type ChartTest, TestMarks } from './test-marks';
@@ -27,7 +28,7 @@ export type QuantityLaneProps = {
   tests: readonly ChartTest[];
   phrases: { now: string | undefined; end: string | undefined; tests: Record<string, string> };
   label: string;
-  readout: (row: ChartRow) => string;
+  reading: Reading<ChartRow>;
 };
 
 /** pH or stabilizer in a low lane of their own. */
@@ -42,7 +43,7 @@ export function QuantityLane(props: QuantityLaneProps) {
       value={value}
       rows={rows}
       label={label}
-      readout={props.readout}
+      reading={props.reading}
       notes={
         <NotesLayer width={width} height={value.height}>
           <ChartWords words={words} />

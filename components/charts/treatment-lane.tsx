@@ -3,6 +3,7 @@
 import { Area, Line, ReferenceArea, ReferenceLine } from 'recharts';
 import { ChartWords } from './chart-words';
 import { LaneChart, type LaneTime, layer, still } from './lane-chart';
+import type { Reading } from './lane-cursor';
 import { NotesLayer } from './notes-layer';
 import { WAVES } from './patterns';
 import { placeWords } from './place-words';
@@ -16,11 +17,11 @@ export type TreatmentLaneProps = Omit<TreatmentGeometry, 'axis' | 'width' | 'now
   time: LaneTime;
   phrases: TreatmentPhrases;
   label: string;
-  readout: (row: TreatmentRow) => string;
+  reading: Reading<TreatmentRow>;
 };
 
 /** Free chlorine since a procedure was opened: never over 10, each morning against its ordinary band. */
-export function TreatmentLane({ time, phrases, label, readout, ...shown }: TreatmentLaneProps) {
+export function TreatmentLane({ time, phrases, label, reading, ...shown }: TreatmentLaneProps) {
   const { axis, width, now } = time;
   const { value, points, bars, readings, doses, maximum, swimLimit, lowestLevel } = shown;
   const geometry = { ...shown, axis, width, now };
@@ -33,7 +34,7 @@ export function TreatmentLane({ time, phrases, label, readout, ...shown }: Treat
       value={value}
       rows={treatmentRows(points, now)}
       label={label}
-      readout={readout}
+      reading={reading}
       notes={
         <NotesLayer width={width} height={value.height}>
           <MorningBars {...ground} bars={bars} />

@@ -44,6 +44,8 @@ const HATCH = 8;
 const SWIM_BRACKET = 8;
 /** Room for the line from the words about the likely range up to it. */
 const LEADER = { width: 44, height: 90 };
+/** From one line under the lowest level to the next one tried. */
+const LINE_STEP = 18;
 /** Lines above the limit: the gains next to it, the limit's own words at the top. */
 const TOP_MARGIN = 4;
 
@@ -173,21 +175,31 @@ function lowestWords({ lowest }: WeekPhrases, geometry: WeekGeometry): Words[] {
   if (from === undefined) return [];
   const start = xOf(axis, width, Math.min(Math.max(now, axis.from), axis.to)) - 100;
   const across = [start, xOf(axis, width, from.at) + 10, ...everyQuarter(width)];
+  const reach = yOf(value, from.lowestLevel) + HATCH;
+  const drops = Array.from({ length: Math.ceil((value.height - reach) / LINE_STEP) }, (_, row) => 4 + row * LINE_STEP);
   const below = (x: number, drop: number): Place => {
     const at = axis.from + (x / width) * (axis.to - axis.from);
     const level = (waterAt(points, at) ?? from).lowestLevel;
     return { x, y: yOf(value, level) + HATCH + drop, anchor: 'start' };
   };
-  const places = [4, 22, 40].flatMap((drop) => across.map((x) => below(x, drop)));
+  // Near the line where there is room; the curve may itself be down there.
+  const places = drops.flatMap((drop) => across.map((x) => below(x, drop)));
   return [{ id: 'lowest', lines: [[run(lowest)]], places }];
 }
 
-function meetingWords({ meets }: WeekPhrases, { axis, width, value }: WeekGeometry): Words[] {
+function meetingWords({ meets }: WeekPhrases, geometry: WeekGeometry): Words[] {
+  const { axis, width, value, points } = geometry;
   if (meets === undefined) return [];
   const x = xOf(axis, width, meets.at);
   const y = yOf(value, meets.value);
-  const aside = [8, 40, 80, 130, 190];
-  const places = [y + 14, y + 32, y + 50, y - 44].flatMap((top) =>
+  const high = 2 * CHART + 2.5;
+  const aside = [8, 40, 80, 130, 190, 250, 310];
+  // Under the lowest level or over the limit, the side of the meeting first; between the two only where nothing else is free.
+  const level = waterAt(points, meets.at)?.lowestLevel ?? 0;
+  const under = [14, 32, 50, 68, 86, 104].map((drop) => yOf(value, level) + drop);
+  const over = [aboveLimit(geometry, high), TOP_MARGIN];
+  const tops = meets.value > level ? [...over, ...under, y + 14] : [...under, ...over, y - 44];
+  const places = tops.flatMap((top) =>
     aside.flatMap((gap): Place[] => [
       { x: x + gap, y: top, anchor: 'start' },
       { x: x - gap, y: top, anchor: 'end' },

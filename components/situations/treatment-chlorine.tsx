@@ -16,7 +16,15 @@ const LazyLane = dynamic(() => import('@/components/charts/treatment-lane').then
   ssr: false,
 });
 
+/** The hour that is read, in the lanes below the chart. */
+export const LazyTreatmentCursor = dynamic(
+  () => import('@/components/charts/cursor-line').then((part) => part.CursorLine),
+  { ssr: false },
+);
+
 const HEIGHT = 268;
+/** One cursor for all lanes. */
+export const TREATMENT = 'situation';
 
 type Props = { open: OpenSituation; chart: TreatmentChart; axis: TimeAxis; now: number; width: number };
 
@@ -51,7 +59,7 @@ export function TreatmentChlorine({ open, chart, axis, now, width }: Props) {
           <LazyLane
             {...picture}
             {...phrases}
-            time={{ axis, width, nights: [], now, syncId: 'situation' }}
+            time={{ axis, width, nights: [], now, syncId: TREATMENT }}
             value={value}
             maximum={maximum}
             swimLimit={swimLimit}

@@ -12,7 +12,7 @@ import { useHousehold } from './situation-context';
 import type { StepDay } from './step-days';
 import { StepColumns } from './step-columns';
 import { StepDayName } from './step-list';
-import { TreatmentChlorine } from './treatment-chlorine';
+import { LazyTreatmentCursor, TREATMENT, TreatmentChlorine } from './treatment-chlorine';
 import type { TreatmentChart } from './treatment-picture';
 
 type Props = {
@@ -51,6 +51,7 @@ export function TreatmentSheet({ open, chart, days, now, withSteps }: Props) {
               style={{ left: `${shareOf(axis, from) * 100}%` }}
             />
           ))}
+          <LazyTreatmentCursor axis={axis} syncId={TREATMENT} />
         </div>
         <LaneGrid days={days} name={null}>
           {(day) => (

@@ -14,7 +14,7 @@ export function useTreatmentPhrases(
   { bars, readings }: TreatmentPicture,
   axis: TimeAxis,
   now: number,
-): Pick<TreatmentLaneProps, 'phrases' | 'label' | 'readout'> {
+): Pick<TreatmentLaneProps, 'phrases' | 'label' | 'reading'> {
   const t = useTranslations('situations.chart');
   const units = useSituationFigures();
   const times = useSituationTimes(now);
@@ -32,11 +32,20 @@ export function useTreatmentPhrases(
       judged: judged.length,
       inside: judged.filter(({ inside }) => inside).length,
     }),
-    readout: ({ at, ahead, behind }) => {
-      const point = ahead ?? behind;
-      if (point === undefined) return '';
-      const [low, value, high] = [level(point.low), level(point.middle), level(point.high)];
-      return t('readout', { when: capitalised(times.partAt(at)), value, low, high });
+    reading: {
+      name: t('readName'),
+      level: ({ ahead, behind }) => (ahead ?? behind)?.middle,
+      words: ({ at, ahead, behind }) => {
+        const point = ahead ?? behind;
+        if (point === undefined) return '';
+        return t('readout', {
+          when: capitalised(times.partAt(at)),
+          time: times.clock(at),
+          value: units.quantity(point.middle, 'freeChlorine'),
+          low: level(point.low),
+          high: level(point.high),
+        });
+      },
     },
     phrases: {
       maximum: [t('maximum', { maximum: units.number(maximum) }), t('maximumWhy')],

@@ -4,6 +4,7 @@ import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import type { LaneTime } from '@/components/charts/lane-chart';
 import { ticksOf, type ValueAxis } from '@/components/charts/value-axis';
+import { TriedLineLayer } from '@/components/try-out/tried-line-layer';
 import { limits } from '@/lib/standards/limits';
 import { chartDoses, chartTests } from './chart-input';
 import { Lane } from './lane';
@@ -23,8 +24,19 @@ const LazyQuantityLane = dynamic(() => import('@/components/charts/quantity-lane
   ssr: false,
 });
 
-/** One pointer for the three charts. */
+/** The hour that is read, in the lanes beside the charts. It comes with the charts, for there is no reading without them. */
+export const LazyCursorLine = dynamic(() => import('@/components/charts/cursor-line').then((part) => part.CursorLine), {
+  ssr: false,
+});
+
+/** One cursor for all lanes. */
 const SYNC = 'week-sheet';
+
+/** The hour that is read in a chart, through the lanes that are none; `height`: down to where the lanes end [px]. */
+export function WeekCursorLine({ height }: { height: number }) {
+  const { axis } = useSheet().picture;
+  return <LazyCursorLine axis={axis} syncId={SYNC} height={height} />;
+}
 
 function useLaneTime(width: number): LaneTime {
   const { axis, nights, now } = useSheet().picture;
@@ -75,6 +87,7 @@ export function ChlorineWeekLane({ width, value }: LaneProps) {
           planEndsAt={picture.planEndsAt}
         />
       )}
+      <TriedLineLayer axis={time.axis} width={width} value={value} />
     </Lane>
   );
 }

@@ -4,13 +4,13 @@ import { useTranslations } from 'next-intl';
 import { useLayoutEffect, useRef } from 'react';
 import { ChartPatterns } from '@/components/charts/patterns';
 import { shareOf } from '@/components/charts/time-axis';
-import { ChlorineWeekLane, PHLane, StabilizerLane } from './chart-lanes';
+import { ChlorineWeekLane, PHLane, StabilizerLane, WeekCursorLine } from './chart-lanes';
 import { Colophon } from './colophon';
 import { DayHeads } from './day-heads';
 import { DayRules } from './day-rules';
 import { FourWays } from './four-ways';
 import { HighLowLane } from './high-low-lane';
-import { PlumbLines } from './plumb-lines';
+import { lanesFoot, PlumbLines } from './plumb-lines';
 import { useSheet } from './sheet-context';
 import { SheetTables } from './sheet-tables';
 import { StopLine } from './stop-line';
@@ -60,6 +60,7 @@ function Lanes() {
         <PlumbLines width={width} axes={axes} />
         <div ref={plot} className="pointer-events-none absolute inset-y-0 right-0 left-[var(--gutter)]">
           <DayRules />
+          <WeekCursorLine height={lanesFoot} />
         </div>
         <DayHeads />
         <SunLane />

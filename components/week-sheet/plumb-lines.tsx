@@ -16,7 +16,8 @@ const tops: Record<CurveQuantity, number> = {
 };
 const figures = { top: tops.pH - laneHeight.highLow, bottom: tops.pH };
 const FIGURES_WIDTH = 96;
-const foot = tops.cyanuricAcid + laneHeight.stabilizer;
+/** Where the drawn lanes end and the to-do lane begins [px]. */
+export const lanesFoot = tops.cyanuricAcid + laneHeight.stabilizer;
 
 /** From the to-do lane up through the lanes to the curve that each dose lifts: drawn out once it is given. */
 export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQuantity, ValueAxis> }) {
@@ -31,8 +32,8 @@ export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQ
   return (
     <svg
       width={width}
-      height={foot}
-      viewBox={`0 0 ${width} ${foot}`}
+      height={lanesFoot}
+      viewBox={`0 0 ${width} ${lanesFoot}`}
       aria-hidden="true"
       className="pointer-events-none absolute top-0 left-[var(--gutter)] stroke-ink"
     >
@@ -45,7 +46,9 @@ export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQ
           <path
             key={dose.id}
             d={
-              crossesFigures(x) ? `M${x} ${foot}V${figures.bottom}M${x} ${figures.top}V${top}` : `M${x} ${foot}V${top}`
+              crossesFigures(x)
+                ? `M${x} ${lanesFoot}V${figures.bottom}M${x} ${figures.top}V${top}`
+                : `M${x} ${lanesFoot}V${top}`
             }
             fill="none"
             strokeWidth="1.1"

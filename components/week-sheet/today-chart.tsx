@@ -7,9 +7,10 @@ import { chlorineDayAxis } from '@/components/charts/lane-axes';
 import { cutTo, shareOf } from '@/components/charts/time-axis';
 import { ticksOf } from '@/components/charts/value-axis';
 import { wholeCourse } from '@/components/charts/water-curve';
+import { TriedLineLayer } from '@/components/try-out/tried-line-layer';
 import { wallTimeText } from '@/lib/calendar/format';
 import { chartDoses, chartTests } from './chart-input';
-import { LazyChlorineLane } from './chart-lanes';
+import { LazyChlorineLane, LazyCursorLine } from './chart-lanes';
 import { Nights, NowRule } from './lane';
 import { AxisFigures } from './lane-name';
 import { useSheet } from './sheet-context';
@@ -24,15 +25,17 @@ import { useUnits } from './use-units';
 
 const HEIGHT = 208;
 const SUN_BASE = 46;
+/** One cursor for the sun and the curve. */
+const SYNC = 'today';
 
 /** The day's sun, swimmers and free chlorine on the day's own axis. */
 export function TodayChart({ day }: { day: SheetDay }) {
   const { sheet, picture } = useSheet();
   const [width, plot] = useElementWidth();
   const units = useUnits();
-  const phrases = useChlorinePhrases();
   const doses = chartDoses(sheet.doses, useDoseWords());
   const axis = useMemo(() => ({ from: day.from, to: day.to }), [day.from, day.to]);
+  const phrases = useChlorinePhrases(axis);
   const course = useMemo(() => courseOn(sheet, axis), [sheet, axis]);
   const points = wholeCourse(course);
   const nights = picture.nights.flatMap((night) => cutTo(axis, night) ?? []);
@@ -46,6 +49,7 @@ export function TodayChart({ day }: { day: SheetDay }) {
       <div className="relative h-15.5">
         <Nights axis={axis} nights={nights} />
         <DaySun day={day} />
+        <LazyCursorLine axis={axis} syncId={SYNC} />
       </div>
       <div className="relative" style={{ height: HEIGHT }}>
         <AxisFigures value={value} figures={ticksOf(value, 36).map((at) => ({ at, words: units.number(at) }))} />
@@ -55,7 +59,7 @@ export function TodayChart({ day }: { day: SheetDay }) {
           <LazyChlorineLane
             {...phrases}
             span="day"
-            time={{ axis, nights, now: picture.now, width, syncId: 'today' }}
+            time={{ axis, nights, now: picture.now, width, syncId: SYNC }}
             value={value}
             rows={rowsOf(course)}
             points={points}
@@ -70,6 +74,7 @@ export function TodayChart({ day }: { day: SheetDay }) {
             planEndsAt={picture.planEndsAt}
           />
         )}
+        <TriedLineLayer axis={axis} width={width} value={value} />
       </div>
       <div />
       <Hours day={day} />
