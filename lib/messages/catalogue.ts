@@ -15,6 +15,7 @@ import readings from './en/readings.json';
 import rounds from './en/rounds.json';
 import situations from './en/situations.json';
 import start from './en/start.json';
+import tryOut from './en/try-out.json';
 import units from './en/units.json';
 import verdict from './en/verdict.json';
 import week from './en/week.json';
@@ -38,6 +39,7 @@ export const catalogue = {
   rounds,
   situations,
   start,
+  'try-out': tryOut,
   units,
   verdict,
   week,

@@ -1,0 +1,93 @@
+'use client';
+
+import { useTranslations } from 'next-intl';
+import { useEffect, useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { ProblemState } from '@/components/ui/problem-state';
+import { useSheet } from '@/components/week-sheet/sheet-context';
+import type { Tried } from '@/lib/client/try-it/use-try-it';
+import { useTakeTryOut } from '@/lib/client/try-out';
+import { useProblemWords } from '@/lib/messages/use-problem-words';
+import type { TryOutChanges } from '@/lib/schemas/try-out';
+import { useTrySentences } from './use-try-sentences';
+
+type Props = {
+  planId: string;
+  changes: TryOutChanges;
+  tried: Tried;
+  /** The try-out is in the plan now. */
+  onUsed: () => void;
+  onPutBack: () => void;
+};
+
+/** What becomes of the week, and what may be done about it. */
+export function TryResult({ planId, changes, tried, onUsed, onPutBack }: Props) {
+  const t = useTranslations('try-out');
+  const sentences = useTrySentences();
+  const { course, advice, failed } = tried;
+  useMarkSentence(course?.number);
+  return (
+    <>
+      <div className="grid grid-cols-[32px_minmax(0,1fr)] gap-x-2">
+        <svg width="32" height="20" viewBox="0 0 32 20" aria-hidden="true">
+          <path d="M0 10H32" fill="none" className="stroke-ink" strokeWidth="1.6" strokeDasharray="5 4" />
+        </svg>
+        <p aria-live="polite" className="min-h-10 text-body">
+          {failed ? t('failed') : course ? sentences(changes, course.facts, advice).join(' ') : t('working')}
+        </p>
+      </div>
+      <div className="flex flex-wrap items-start gap-x-4 gap-y-1 pl-10">
+        <Use planId={planId} changes={changes} tried={tried} onUsed={onUsed} />
+        <Button variant="quiet" onClick={onPutBack}>
+          {t('putBack')}
+        </Button>
+      </div>
+    </>
+  );
+}
+
+function Use({ planId, changes, tried: { advice, failed }, onUsed }: Omit<Props, 'onPutBack'>) {
+  const t = useTranslations('try-out');
+  const { sheet } = useSheet();
+  const problemWords = useProblemWords();
+  const take = useTakeTryOut();
+  // The same changes keep their id, so that sending them again takes them once.
+  const [sent, setSent] = useState<{ id: string; what: string } | undefined>(undefined);
+  if (sheet.me.role === 'viewer') return <p className="w-full text-small text-ink-2">{t('viewer')}</p>;
+  if (failed || advice?.code === 'refused') return null;
+  const use = async () => {
+    const what = JSON.stringify([planId, changes]);
+    const id = sent?.what === what ? sent.id : crypto.randomUUID();
+    setSent({ id, what });
+    try {
+      await take.mutateAsync({ id, planId, ...changes });
+    } catch {
+      // Said below; what was tried stays on the screen.
+      return;
+    }
+    onUsed();
+  };
+  return (
+    <>
+      <Button
+        onClick={() => void use()}
+        busy={take.isPending ? t('using') : undefined}
+        offReason={advice === undefined ? t('wait') : undefined}
+      >
+        {t('use')}
+      </Button>
+      {take.isError && <ProblemState className="w-full" title={t('notUsed')}>{problemWords(take.error)}</ProblemState>}
+    </>
+  );
+}
+
+/** Marks the frame after the one in which an answer's words were painted. */
+function useMarkSentence(answer: number | undefined): void {
+  useEffect(() => {
+    if (answer === undefined) return undefined;
+    let frame = requestAnimationFrame(() => {
+      frame = requestAnimationFrame(() => performance.mark('try-it:sentence'));
+    });
+    return () => cancelAnimationFrame(frame);
+  }, [answer]);
+}

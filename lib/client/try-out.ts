@@ -1,0 +1,60 @@
+'use client';
+
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import type { TryOut, TryOutStart } from '@/lib/schemas/try-out';
+import { fetchJson } from './fetch-json';
+import { weekKeys } from './week';
+
+const tryOutKeys = {
+  all: ['try-out'] as const,
+  on: (planId: string) => [...tryOutKeys.all, planId] as const,
+};
+
+/** What trying out starts from. Asked once for each plan; its schema is loaded with it, not with the page. */
+export function tryOutStart(planId: string) {
+  return queryOptions({
+    queryKey: tryOutKeys.on(planId),
+    queryFn: async ({ signal }): Promise<TryOutStart> => {
+      const { tryOutStartSchema } = await import('@/lib/schemas/try-out');
+      return fetchJson('/api/try-outs', tryOutStartSchema, { signal });
+    },
+    staleTime: Infinity,
+    retry: false,
+  });
+}
+
+/** Takes a try-out into the plan; the sheet follows with its new plan. */
+export function useTakeTryOut() {
+  const client = useQueryClient();
+  return useMutation({
+    // Without a connection it fails in words rather than wait in silence.
+    networkMode: 'always',
+    mutationFn: async (tryOut: TryOut) => {
+      const { doneSchema } = await import('@/lib/schemas/account');
+      return fetchJson('/api/try-outs', doneSchema, { method: 'POST', body: tryOut });
+    },
+    onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
+    // The plan has moved on: what is on the screen is no longer true.
+    onError: (problem) => sheetAnew(client, problem),
+  });
+}
+
+/** Puts a try-out back that was taken into the plan. */
+export function usePutBackTryOut() {
+  const client = useQueryClient();
+  return useMutation({
+    networkMode: 'always',
+    mutationFn: async (id: string) => {
+      const { doneSchema } = await import('@/lib/schemas/account');
+      return fetchJson(`/api/try-outs/${id}`, doneSchema, { method: 'DELETE' });
+    },
+    onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
+    onError: (problem) => sheetAnew(client, problem),
+  });
+}
+
+function sheetAnew(client: ReturnType<typeof useQueryClient>, problem: Error) {
+  return 'code' in problem && problem.code === 'conflict'
+    ? client.invalidateQueries({ queryKey: weekKeys.all })
+    : undefined;
+}
