@@ -17,6 +17,7 @@ const causeKeys = {
   pool: 'pool',
   shelf: 'shelf',
   preferences: 'preferences',
+  'try-out': 'tryOut',
   learning: 'learning',
   engine: 'engine',
 } as const satisfies Record<ChangeCause, string>;

@@ -17,5 +17,6 @@ export { shelfProducts } from './shelf-products';
 export { situationTicks, situations } from './situations';
 export { stopConfirmations } from './stop-confirmations';
 export { tabletsFound } from './tablets-found';
+export { tryOuts } from './try-outs';
 export { visits } from './visits';
 export { weekDays } from './week-days';

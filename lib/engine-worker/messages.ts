@@ -5,12 +5,15 @@ import type { FilterState, PosteriorStep } from '@/lib/schemas/posterior';
 import type { Scenario } from '@/lib/schemas/scenario';
 import type { SituationKind } from '@/lib/schemas/situation';
 import type { Treatment } from '@/lib/schemas/treatment';
+import type { TryOutStart } from '@/lib/schemas/try-out';
 
 /** What the engine is asked for, and what it answers. */
 export type EngineTasks = {
   /** Plan the week, or only project what the scenario says is given. */
   plan: { order: Scenario; answer: WeekPlan };
   project: { order: Scenario; answer: WeekPlan };
+  /** What may be tried on a week. */
+  openings: { order: Scenario; answer: Pick<TryOutStart, 'evenings' | 'mostTablets'> };
   /** The week while an open situation leads. */
   lead: { order: { scenario: Scenario; lead: { treatment: Treatment } | { hold: SituationKind } }; answer: WeekPlan };
   /** What a pool has taught since a stored state; null for from the beginning. */

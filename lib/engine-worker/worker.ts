@@ -1,6 +1,6 @@
 import { parentPort } from 'node:worker_threads';
 import { learnFrom } from '@/lib/learning';
-import { holdWeek, planWeek, projectScenario, treatmentWeek } from '@/lib/planner';
+import { holdWeek, planWeek, projectScenario, treatmentWeek, tryOutOpenings } from '@/lib/planner';
 import { type Answer, type EngineTask, type EngineTasks, faultOf, type Question } from './messages';
 
 type Work<Task extends EngineTask> = (order: EngineTasks[Task]['order']) => EngineTasks[Task]['answer'];
@@ -8,6 +8,7 @@ type Work<Task extends EngineTask> = (order: EngineTasks[Task]['order']) => Engi
 const work: { [Task in EngineTask]: Work<Task> } = {
   plan: planWeek,
   project: projectScenario,
+  openings: tryOutOpenings,
   lead: ({ scenario, lead }) =>
     'hold' in lead ? holdWeek(scenario, lead.hold) : treatmentWeek(scenario, lead.treatment),
   learn: ({ from, history }) => learnFrom(from, history),

@@ -28,6 +28,7 @@ import { isEmptyWish, noWishes, wishesInForce } from './wishes';
 export { assertSafePlan } from './safety/assert-safe-plan';
 export { projectScenario } from './project-scenario';
 export { holdWeek, treatmentWeek } from './treatment-week';
+export { tryOutOpenings } from './try-out-openings';
 export { ENGINE_VERSION } from './version';
 export type { CourseBand };
 

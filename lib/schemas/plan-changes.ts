@@ -11,6 +11,7 @@ export const changeCauses = [
   'pool',
   'shelf',
   'preferences',
+  'try-out',
   'learning',
   'engine',
 ] as const;

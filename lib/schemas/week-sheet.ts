@@ -8,6 +8,7 @@ import { surfaces } from './pool';
 import { uncertainQuantities } from './posterior';
 import { recordedReadingSchema } from './reading';
 import { calendarDaySchema, instantSchema, wallIntervalSchema } from './time';
+import { takenTryOutSchema } from './try-out';
 import { verdictSchema } from './verdict';
 
 export const roles = ['owner', 'caretaker', 'viewer'] as const;
@@ -103,6 +104,8 @@ export const weekSheetSchema = z.object({
   events: z.array(poolEventSchema),
   /** The procedure that is open, with the steps of the days shown; it leads the plan. */
   situation: openSituationSchema.nullable(),
+  /** Try-outs that somebody took into the plan and that still change something of it. */
+  tryOuts: z.array(takenTryOutSchema),
   doses: z.array(planDoseSchema),
   checks: z.array(checkSchema.extend({ done: z.boolean() })),
 });

@@ -58,6 +58,7 @@ const parts: [ChangeCause, (scenario: Scenario) => unknown][] = [
   // What a dose takes off the shelf is part of that dose.
   ['shelf', ({ shelf }) => shelf.map(({ stock: _stock, ...product }) => product)],
   ['preferences', ({ preferences }) => preferences],
+  ['try-out', ({ wishes }) => wishes],
 ];
 
 /** What differs between what two plans were made from. A dose that was skipped is in neither: nothing else differs then. */

@@ -33,6 +33,7 @@ import { sheetVerdict } from './sheet-verdict';
 import { openSituation } from './show-situations';
 import { situationDoses } from './situation-doses';
 import { loadOpenSituation } from './situation-record';
+import { loadTryOutsInForce } from './try-outs-in-force';
 import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
@@ -126,6 +127,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
       happenedAt: toOffsetIso(happenedAt.getTime(), timeZone),
     })),
     situation,
+    tryOuts: await loadTryOutsInForce(db, access, { newest: last, now }),
     doses: bothForms.filter(({ stored }) => isShown(stored.givenAt ?? stored.at, shown)).map((dose) => dose.shown),
     checks: sheetChecks(plan, readings, timeZone),
   };

@@ -21,6 +21,7 @@ import { enginePool, feederMassAt } from './engine-pool';
 import { engineProduct } from './engine-shelf';
 import { type ZeroDoubt, zeroDoubtOf } from './false-zero';
 import { loadOpenSituation } from './situation-record';
+import { loadWishes } from './try-outs-in-force';
 import { DAYS_OF_A_PLAN, weekAheadOf } from './week-ahead';
 
 const DAY = 86_400_000;
@@ -71,6 +72,7 @@ export async function loadWeekSnapshot(
   const day = dayOf(newest.takenAt.getTime(), timeZone);
   const week = await listWeekDays(db, { householdId, from: day, until: addDays(day, DAYS_OF_A_PLAN) });
   const learnt = await findPosterior(db, householdId, newest.id);
+  const wishes = await loadWishes(db, householdId, { newest, pool });
   const loaded = feederMassAt(pool, found.pool.completedAt?.getTime() ?? 0, first.getTime());
   return {
     scenario: scenarioSchema.parse({
@@ -80,6 +82,7 @@ export async function loadWeekSnapshot(
       week: weekAheadOf(week, day),
       preferences: await findPreferences(db, householdId),
       given: given.map((dose) => engineDose(dose, timeZone)),
+      ...(wishes ? { wishes } : {}),
       posterior: learnt?.engineVersion === ENGINE_VERSION ? learnt.step.posterior : undefined,
     } satisfies Record<keyof Omit<Scenario, 'now' | 'doses' | 'parameters' | 'driftPrices' | 'wishes'>, unknown>),
     readingId: newest.id,

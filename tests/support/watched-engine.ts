@@ -5,7 +5,13 @@ import { sourceEngine } from './engine';
 /** The real engine, with a way to make its tasks fail and a list of what it was asked. */
 export class WatchedEngine extends Engine {
   /** The orders of each task, in their order. */
-  asked: { [Task in EngineTask]: EngineTasks[Task]['order'][] } = { plan: [], project: [], lead: [], learn: [] };
+  asked: { [Task in EngineTask]: EngineTasks[Task]['order'][] } = {
+    plan: [],
+    project: [],
+    openings: [],
+    lead: [],
+    learn: [],
+  };
   faults: Partial<Record<EngineTask, Error>> = {};
   private readonly real = sourceEngine();
 
@@ -30,7 +36,7 @@ export class WatchedEngine extends Engine {
 
   /** Forgets what it was asked, and works. */
   reset() {
-    this.asked = { plan: [], project: [], lead: [], learn: [] };
+    this.asked = { plan: [], project: [], openings: [], lead: [], learn: [] };
     this.faults = {};
   }
 }

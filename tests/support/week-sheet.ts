@@ -83,6 +83,7 @@ export function aWeekSheet(options: WeekOptions = {}, overrides: Partial<WeekShe
     unrecorded: false,
     readings: readings.filter(({ takenAt: taken }) => Date.parse(taken) >= startOfDay(start, timeZone)),
     situation: null,
+    tryOuts: [],
     events: [],
     doses,
     checks: [
