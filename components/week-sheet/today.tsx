@@ -11,6 +11,7 @@ import type { SheetDay } from './sheet-times';
 import { TodayChart } from './today-chart';
 import { toDoOf } from './to-do-items';
 import { useUnits } from './use-units';
+import { turnsWeeks } from './week-turning';
 
 /** Today on a phone: its curve, pH and stabilizer, and what there is to do. */
 export function Today() {
@@ -26,7 +27,7 @@ function TodayOf({ day }: { day: SheetDay }) {
   const items = toDoOf(day, sheet);
   const nothingToAdd = !items.some((item) => item.kind === 'dose' && item.dose.status === 'planned');
   return (
-    <section className="mt-5.5">
+    <section data-turns-weeks="" className={`mt-5.5 ${turnsWeeks.className}`}>
       <h2 className="flex h-10 items-center justify-between bg-ink px-3 text-on-ink">
         <span className="font-display text-[20px] font-headline">{dayHeading(day.day, sheet.household.locale)}</span>
         <span className="text-label font-emphasis">{t('lane.todayMark')}</span>

@@ -6,6 +6,7 @@ import type { Curve, Line } from '@/lib/client/worked-out/examples/curve';
 import type { HowPage } from '@/lib/client/worked-out/how-page';
 import { DrawnCurve } from './drawn-curve';
 import { TakenBars } from './taken-bars';
+import { useCurveSentence } from './use-curve-sentence';
 import { useWritten } from './use-written';
 
 const TABLE_ROWS = 8;
@@ -14,6 +15,7 @@ const TABLE_ROWS = 8;
 export function ExamplePicture({ page, curve }: { page: HowPage; curve: Curve }) {
   const t = useTranslations('how-examples');
   const written = useWritten();
+  const sentenceOf = useCurveSentence();
   const lines: readonly Line[] = [
     ...curve.lines.filter(({ name }) => !curve.ranges?.some((range) => range.name === name)),
   ];
@@ -23,7 +25,7 @@ export function ExamplePicture({ page, curve }: { page: HowPage; curve: Curve })
   return (
     <PictureOrTable
       className="mt-4"
-      sentence={t(`sentence.${page}`)}
+      sentence={sentenceOf(page, curve)}
       seeTable={t('table')}
       seePicture={t('picture')}
       picture={

@@ -17,6 +17,7 @@ import { usePoolSetting } from '../setting';
 import { taughtRows } from './has-taught';
 import { LearntRow } from './learnt-row';
 import { StartAgain } from './start-again';
+import { useLearntSentence } from './use-learnt-sentence';
 import { useLearntTable } from './use-learnt-table';
 import { type SizeKnown, useLearntWords } from './use-learnt-words';
 
@@ -59,6 +60,7 @@ function Taught({ learnt, how, mayForget }: { learnt: Learnt; how: SizeKnown; ma
   const { main, more } = taughtRows(learnt);
   const tableOf = useLearntTable(words);
   const rows = [...main, ...more];
+  const sentence = useLearntSentence(words)(rows);
   const since = learnt.since === null ? undefined : parseInstant(learnt.since);
   if (main.length === 0)
     return (
@@ -72,7 +74,7 @@ function Taught({ learnt, how, mayForget }: { learnt: Learnt; how: SizeKnown; ma
   return (
     <>
       <PictureOrTable
-        sentence={t('sentence', { things: rows.map(({ thing }) => words.name(thing)).join(t('listJoiner')) })}
+        sentence={sentence}
         seeTable={t('table.see')}
         seePicture={t('table.picture')}
         table={tableOf(rows)}

@@ -55,11 +55,29 @@ function hundreds(volume: number): number {
   return Math.round(fromInside(volume, 'us-gal') / 100) * 100;
 }
 
+type Measured = Pick<LearntRow, 'unit' | 'learnt'>;
+
 /** The figures of one row in the household's measures, with and without their unit. */
-export function useFigures({ unit, learnt }: Pick<LearntRow, 'unit' | 'learnt'>) {
+export function useFigures(row: Measured) {
+  return useRowFigures()(row);
+}
+
+/** The same for rows of which it is not known how many there are. */
+export function useRowFigures() {
   const t = useTranslations('learnt.unit');
   const units = useTranslations('units');
   const { system, locale } = usePoolSetting();
+  return (row: Measured) => figuresOf(row, { system, locale, t, units });
+}
+
+type Words = {
+  system: UnitSystem;
+  locale: string;
+  t: ReturnType<typeof useTranslations<'learnt.unit'>>;
+  units: ReturnType<typeof useTranslations<'units'>>;
+};
+
+function figuresOf({ unit, learnt }: Measured, { system, locale, t, units }: Words) {
   const shown = shownAs(unit, system, learnt.p50);
   const written = (value: number, decimals: number) => formatNumber(value, { decimals, locale });
   const withUnit = (value: string) => ('code' in shown ? units(shown.code, { value }) : t(shown.worded, { value }));

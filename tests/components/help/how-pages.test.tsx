@@ -64,3 +64,19 @@ it('says first what only people can see', () => {
   expect(first).toHaveTextContent('Only you can see');
   expect(screen.getByText('If not, nobody goes in, whatever the sheet says.', { exact: false })).toBeInTheDocument();
 });
+
+it('says in the sentence of a drawing how its lines run', () => {
+  const { container } = renderWithWords(<HowPageBody page="tablets" />);
+  expect(container.querySelector('figcaption')).toHaveTextContent(
+    /^What is left of one tablet, day by day\. As drawn: .* from 100\.0\s?% at .* to 0\.0\s?% at /,
+  );
+});
+
+it('says it anew when a slider moves', () => {
+  const { container } = renderWithWords(<HowPageBody page="free-chlorine" />);
+  const sentence = () => container.querySelector('figcaption')?.textContent ?? '';
+  const before = sentence();
+  const [slider] = screen.getAllByRole<HTMLInputElement>('slider');
+  fireEvent.change(slider!, { target: { value: slider!.min } });
+  expect(sentence()).not.toBe(before);
+});

@@ -68,6 +68,15 @@ describe('what the pool has taught', () => {
     expect(tablet.getByText('Lasts about 7 days')).toBeInTheDocument();
   });
 
+  it('is said in one sentence, thing by thing', async () => {
+    const { section } = await showPool(aLearntPool());
+    const sentence = (await section.findByRole('figure')).querySelector('figcaption')?.textContent ?? '';
+    expect(sentence).toMatch(
+      /^What we assumed of the pool before, and what it has taught: A usual day 0\.8 to 2\.2 mg\/L before, 1\.2 to 1\.5 mg\/L now; /,
+    );
+    expect(sentence).toContain('Its size 61 to 75 m³ before, 69 to 74 m³ now');
+  });
+
   it('draws each bar from its tenth to its ninetieth percentile on one axis', async () => {
     const { section } = await showPool(aLearntPool());
     const svg = (await section.findByText('learnt: 69 to 74')).closest('svg')!;

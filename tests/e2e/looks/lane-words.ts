@@ -85,14 +85,22 @@ export function laneFaults(page: Page, lanesName: string): Promise<LaneFaults> {
         const matrix = curve.getScreenCTM();
         const lane = laneOf(curve);
         if (matrix === null || lane === undefined) continue;
-        // Of a plan that is over there is nothing ahead, and a line without points has no length to follow.
-        const length = curve.getAttribute('d') ? curve.getTotalLength() : -1;
         const beside = words.filter((word) => word.lane === lane && word.element.closest('svg') !== null);
         const struck = new Set<Word>();
-        for (let along = 0; along <= length; along += 2) {
-          const { x, y } = curve.getPointAtLength(along).matrixTransform(matrix);
-          for (const word of beside)
-            if (x > word.left && x < word.right && y > word.top + 1 && y < word.bottom - 1) struck.add(word);
+        // Straight from hour to hour: the points of the path are all there is to follow, at steps of two pixels at most.
+        for (const piece of (curve.getAttribute('d') ?? '').split('M')) {
+          const points = [...piece.matchAll(/(-?[\d.]+),(-?[\d.]+)/g)].map(([, x, y]) =>
+            new DOMPoint(Number(x), Number(y)).matrixTransform(matrix),
+          );
+          for (const [index, from] of points.entries()) {
+            const to = points[index + 1] ?? from;
+            const steps = Math.max(1, Math.ceil(Math.hypot(to.x - from.x, to.y - from.y) / 2));
+            for (let step = 0; step <= steps; step += 1) {
+              const [x, y] = [from.x + ((to.x - from.x) * step) / steps, from.y + ((to.y - from.y) * step) / steps];
+              for (const word of beside)
+                if (x > word.left && x < word.right && y > word.top + 1 && y < word.bottom - 1) struck.add(word);
+            }
+          }
         }
         for (const word of struck) onCurve.push(`${said(word)} on a line of ${getComputedStyle(curve).stroke}`);
       }
