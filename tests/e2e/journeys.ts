@@ -6,6 +6,7 @@ import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
 import { headers } from './journeys/headers';
 import { house } from './journeys/house';
+import { labelBoxes } from './journeys/label-boxes';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
@@ -14,6 +15,7 @@ import { measuring } from './journeys/measuring';
 import { scope } from './journeys/scope';
 import { situations } from './journeys/situations';
 import { stop } from './journeys/stop';
+import { throughTheWeeks } from './journeys/through-the-weeks';
 import type { Journey } from './support/journey';
 
 /** Every journey of a run, the long ones first. */
@@ -24,12 +26,14 @@ export const journeys: readonly Journey[] = [
   badForms,
   badRequests,
   ...clockChanges,
+  labelBoxes,
   measures,
   learning,
   house,
   scope,
   stop,
   situations,
+  throughTheWeeks,
   cards,
   cardOffline,
   headers,

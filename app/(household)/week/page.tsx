@@ -2,23 +2,35 @@ import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { WaitingTests } from '@/components/readings/waiting-tests';
 import { WeekSheetScreen } from '@/components/week-sheet/week-sheet-screen';
-import { requireHousehold } from '@/lib/auth/page-gate';
+import { findHousehold, requireHousehold } from '@/lib/auth/page-gate';
+import { firstWeekday } from '@/lib/calendar/first-weekday';
+import { dayRange } from '@/lib/calendar/format';
+import { weekOf } from '@/lib/calendar/household-day';
 import { AppError } from '@/lib/errors';
 import { ClientMessages } from '@/lib/messages/client-messages';
 import { calendarDaySchema } from '@/lib/schemas/time';
 import { showWeek } from '@/lib/services/show-week';
 
-export async function generateMetadata(): Promise<Metadata> {
+type Props = { searchParams: Promise<{ start?: string | string[] }> };
+
+const startOf = async (searchParams: Props['searchParams']) =>
+  calendarDaySchema.safeParse((await searchParams).start).data;
+
+/** Whoever goes through the weeks is told by the title which one it is. */
+export async function generateMetadata({ searchParams }: Props): Promise<Metadata> {
   const t = await getTranslations('week');
-  return { title: t('title') };
+  const [start, visit] = [await startOf(searchParams), await findHousehold()];
+  if (start === undefined || visit === null) return { title: t('title') };
+  const days = weekOf(start, firstWeekday(visit.access.locale));
+  const range = dayRange(days[0] ?? start, days.at(-1) ?? start, visit.access.locale, t('rangeJoiner'));
+  return { title: t('titleOf', { days: range }) };
 }
 
 /** The sheet comes with the page, so that the swim verdict is the first thing to be seen. */
-export default async function WeekPage({ searchParams }: { searchParams: Promise<{ start?: string | string[] }> }) {
+export default async function WeekPage({ searchParams }: Props) {
   const visit = await requireHousehold();
   const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem } = visit.access;
-  const asked = calendarDaySchema.safeParse((await searchParams).start);
-  const start = asked.success ? asked.data : undefined;
+  const start = await startOf(searchParams);
   const initial = await showWeek(visit, start === undefined ? {} : { start }).catch((problem: unknown) => {
     // The browser asks again and says in words what is wrong.
     if (problem instanceof AppError) return undefined;
