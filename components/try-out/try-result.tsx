@@ -7,9 +7,9 @@ import { ProblemState } from '@/components/ui/problem-state';
 import { useSheet } from '@/components/week-sheet/sheet-context';
 import type { Tried } from '@/lib/client/try-it/use-try-it';
 import { useTakeTryOut } from '@/lib/client/try-out';
-import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { TryOutChanges } from '@/lib/schemas/try-out';
 import { useTrySentences } from './use-try-sentences';
+import { useTryProblemWords } from './use-try-problem-words';
 
 type Props = {
   planId: string;
@@ -49,7 +49,7 @@ export function TryResult({ planId, changes, tried, onUsed, onPutBack }: Props) 
 function Use({ planId, changes, tried: { advice, failed }, onUsed }: Omit<Props, 'onPutBack'>) {
   const t = useTranslations('try-out');
   const { sheet } = useSheet();
-  const problemWords = useProblemWords();
+  const problemWords = useTryProblemWords();
   const take = useTakeTryOut();
   // The same changes keep their id, so that sending them again takes them once.
   const [sent, setSent] = useState<{ id: string; what: string } | undefined>(undefined);
@@ -72,11 +72,21 @@ function Use({ planId, changes, tried: { advice, failed }, onUsed }: Omit<Props,
       <Button
         onClick={() => void use()}
         busy={take.isPending ? t('using') : undefined}
-        offReason={advice === undefined ? t('wait') : undefined}
+        offReasonId={advice === undefined ? 'try-it-wait' : undefined}
       >
         {t('use')}
       </Button>
-      {take.isError && <ProblemState className="w-full" title={t('notUsed')}>{problemWords(take.error)}</ProblemState>}
+      {/* Beside the button, which keeps its focus when the reason goes. */}
+      {advice === undefined && (
+        <p id="try-it-wait" className="order-last w-full text-small text-ink-2">
+          {t('wait')}
+        </p>
+      )}
+      {take.isError && (
+        <ProblemState className="w-full" title={t('notUsed')}>
+          {problemWords(take.error)}
+        </ProblemState>
+      )}
     </>
   );
 }

@@ -4,6 +4,7 @@ import { useTranslations } from 'next-intl';
 import { useLayoutEffect, useRef } from 'react';
 import { ChartPatterns } from '@/components/charts/patterns';
 import { shareOf } from '@/components/charts/time-axis';
+import { TryIt } from '@/components/try-out/try-it';
 import { ChlorineWeekLane, PHLane, StabilizerLane, WeekCursorLine } from './chart-lanes';
 import { Colophon } from './colophon';
 import { DayHeads } from './day-heads';
@@ -37,6 +38,7 @@ export function DeskSheet() {
         <WhyThisMix />
         <WhatChanged />
         <FourWays />
+        <TryIt />
       </aside>
     </div>
   );

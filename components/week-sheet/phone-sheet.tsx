@@ -1,6 +1,7 @@
 'use client';
 
 import { ChartPatterns } from '@/components/charts/patterns';
+import { TryIt } from '@/components/try-out/try-it';
 import { Colophon } from './colophon';
 import { nextDose } from './dose-state';
 import { FourWays } from './four-ways';
@@ -26,6 +27,7 @@ export function PhoneSheet() {
       <NextDoses />
       {!asked && <StopLine className="mt-3.5 border-y border-rule py-3" />}
       <Today />
+      <TryIt />
       <RestOfWeek />
       <div className="mt-5.5 grid gap-4">
         <WhyThisMix />

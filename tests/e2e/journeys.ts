@@ -16,6 +16,7 @@ import { scope } from './journeys/scope';
 import { situations } from './journeys/situations';
 import { stop } from './journeys/stop';
 import { throughTheWeeks } from './journeys/through-the-weeks';
+import { tryIt } from './journeys/try-it';
 import type { Journey } from './support/journey';
 
 /** Every journey of a run, the long ones first. */
@@ -30,6 +31,7 @@ export const journeys: readonly Journey[] = [
   measures,
   learning,
   house,
+  tryIt,
   scope,
   stop,
   situations,

@@ -38,7 +38,7 @@ export default async function WeekPage({ searchParams }: Props) {
   });
   return (
     <ClientMessages
-      namespaces={['week', 'events', 'verdict', 'doses', 'units', 'readings']}
+      namespaces={['week', 'events', 'verdict', 'doses', 'units', 'readings', 'try-out']}
       parts={{ situations: ['kind', 'step', 'steps'] }}
     >
       <WaitingTests
