@@ -12,6 +12,8 @@ export type WordLine = Run[];
 export type Words = {
   id: string;
   lines: WordLine[];
+  /** The same in less room, each tried where there is no place for what stands before it. */
+  shorter?: WordLine[][];
   places: Place[];
   /** The colour of the ground they stand on, for their halo. */
   ground?: 'water';
@@ -40,14 +42,17 @@ export function placeWords(words: readonly Words[], taken: readonly Box[], bound
   const placed: PlacedWords[] = [];
   for (const candidate of words) {
     const others = placed.map(({ lines, ...place }) => boxOf(lines, place));
-    const free = candidate.places.find((place) => {
-      const box = boxOf(candidate.lines, place);
+    const isFree = (lines: WordLine[], place: Place) => {
+      const box = boxOf(lines, place);
       if (!holds(bounds, box) || taken.some((other) => overlap(box, other))) return false;
       if (others.some((other) => overlap(grown(box), other))) return false;
       return candidate.leader === undefined || !crossesWords(box, candidate.leader, others);
-    });
+    };
+    const said = [candidate.lines, ...(candidate.shorter ?? [])];
+    const lines = said.find((each) => candidate.places.some((place) => isFree(each, place))) ?? candidate.lines;
+    const free = candidate.places.find((place) => isFree(lines, place));
     const place = free ?? (candidate.mayBeLeftOut ? undefined : leastCovering(candidate, taken, others, bounds));
-    if (place !== undefined) placed.push({ ...candidate, ...place });
+    if (place !== undefined) placed.push({ ...candidate, lines, ...place });
   }
   return placed;
 }

@@ -44,7 +44,7 @@ const HATCH = 8;
 const SWIM_BRACKET = 8;
 /** Room for the line from the words about the likely range up to it. */
 const LEADER = { width: 44, height: 90 };
-/** From one line under the lowest level to the next one tried. */
+/** From one line of places to the next [px]. */
 const LINE_STEP = 18;
 /** Lines above the limit: the gains next to it, the limit's own words at the top. */
 const TOP_MARGIN = 4;
@@ -161,15 +161,16 @@ function testWords({ tests: phrases }: WeekPhrases, { axis, width, value, tests 
   });
 }
 
-function limitWords({ limit: [bold, plain] }: WeekPhrases, geometry: WeekGeometry): Words {
+function limitWords({ limit: [bold, plain], limitShort }: WeekPhrases, geometry: WeekGeometry): Words {
   const lines = [[run(bold, 'bold')], [run(plain)]];
   const low = aboveLimit(geometry, 2 * CHART + 2.5);
   const across = [...everyQuarter(geometry.width), 10];
   const places = [TOP_MARGIN, low].flatMap((y) => across.map((x): Place => ({ x, y, anchor: 'start' })));
-  return { id: 'limit', lines, places: [{ x: 10, y: TOP_MARGIN, anchor: 'start' }, ...places] };
+  const shorter = [[[run(bold, 'bold')]], [[run(limitShort, 'bold')]]];
+  return { id: 'limit', lines, shorter, places: [{ x: 10, y: TOP_MARGIN, anchor: 'start' }, ...places] };
 }
 
-function lowestWords({ lowest }: WeekPhrases, geometry: WeekGeometry): Words[] {
+function lowestWords({ lowest, lowestParts }: WeekPhrases, geometry: WeekGeometry): Words[] {
   const { axis, width, value, points, now } = geometry;
   const from = points[0];
   if (from === undefined) return [];
@@ -184,7 +185,7 @@ function lowestWords({ lowest }: WeekPhrases, geometry: WeekGeometry): Words[] {
   };
   // Near the line where there is room; the curve may itself be down there.
   const places = drops.flatMap((drop) => across.map((x) => below(x, drop)));
-  return [{ id: 'lowest', lines: [[run(lowest)]], places }];
+  return [{ id: 'lowest', lines: [[run(lowest)]], shorter: [lowestParts.map((part) => [run(part)])], places }];
 }
 
 function meetingWords({ meets }: WeekPhrases, geometry: WeekGeometry): Words[] {
@@ -211,13 +212,17 @@ function meetingWords({ meets }: WeekPhrases, geometry: WeekGeometry): Words[] {
 function planEndWords({ planEnds }: WeekPhrases, { axis, width, value, planEndsAt }: WeekGeometry): Words[] {
   if (planEndsAt === undefined || planEndsAt >= axis.to || planEndsAt < axis.from) return [];
   const x = xOf(axis, width, planEndsAt);
-  const heights = [value.height * 0.45, value.height * 0.72, value.height * 0.85, TOP_MARGIN];
-  const places = heights.flatMap((y): Place[] => [
-    { x: x + 8, y, anchor: 'start' },
-    { x: x - 8, y, anchor: 'end' },
-    { x: width - 6, y, anchor: 'end' },
-  ]);
-  return [{ id: 'plan ends', lines: [[run(planEnds[0], 'bold')], [run(planEnds[1])]], places }];
+  const rows = Array.from({ length: Math.floor(value.height / LINE_STEP) }, (_, row) => TOP_MARGIN + row * LINE_STEP);
+  const heights = [value.height * 0.45, value.height * 0.72, value.height * 0.85, TOP_MARGIN, ...rows];
+  const places = [8, 60, 120].flatMap((gap) =>
+    heights.flatMap((y): Place[] => [
+      { x: x + gap, y, anchor: 'start' },
+      { x: x - gap, y, anchor: 'end' },
+      { x: width - 6, y, anchor: 'end' },
+    ]),
+  );
+  const bold = [run(planEnds[0], 'bold')];
+  return [{ id: 'plan ends', lines: [bold, [run(planEnds[1])]], shorter: [[bold]], places }];
 }
 
 function likelyWords({ likely }: WeekPhrases, { axis, width, value, points }: WeekGeometry): Words[] {

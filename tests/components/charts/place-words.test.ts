@@ -28,6 +28,51 @@ describe('placeWords', () => {
     expect(placeWords([{ ...words, mayBeLeftOut: true }], everywhere, bounds)).toEqual([]);
   });
 
+  it('puts indispensable words without a free place where they hide least, words before all, and inside the chart', () => {
+    const first: Words = { id: 'a', lines: line('first'), places: [{ x: 10, y: 10, anchor: 'start' }] };
+    const second: Words = {
+      id: 'b',
+      lines: line('second'),
+      places: [
+        { x: 10, y: 10, anchor: 'start' },
+        { x: 390, y: 100, anchor: 'start' },
+      ],
+    };
+    const curve = { x: 0, y: 90, width: 400, height: 40 };
+    const [, placed] = placeWords([first, second], [curve], bounds);
+    expect(placed).toMatchObject({ y: 100 });
+    const box = boxOf(second.lines, placed!);
+    expect(box.x + box.width).toBeLessThanOrEqual(400);
+  });
+
+  it('says in less room what has no place in full', () => {
+    const shelf = { x: 60, y: 0, width: 340, height: 200 };
+    const words: Words = {
+      id: 'a',
+      lines: line('Swim limit 4, from the label'),
+      shorter: [line('Swim limit 4'), line('4')],
+      places: [
+        { x: 0, y: 10, anchor: 'start' },
+        { x: 0, y: 30, anchor: 'start' },
+      ],
+    };
+    expect(placeWords([words], [shelf], bounds)[0]?.lines).toEqual(line('4'));
+    expect(placeWords([words], [], bounds)[0]?.lines).toEqual(words.lines);
+  });
+
+  it('keeps air between words', () => {
+    const words = (id: string, y: number): Words => ({
+      id,
+      lines: line('words'),
+      places: [{ x: 10, y, anchor: 'start' }],
+    });
+    const under = { ...words('b', 23), mayBeLeftOut: true as const };
+    expect(placeWords([words('a', 10), under], [], bounds)).toHaveLength(1);
+    expect(
+      placeWords([words('a', 10), { ...under, places: [{ x: 10, y: 24.5, anchor: 'start' }] }], [], bounds),
+    ).toHaveLength(2);
+  });
+
   it('stays inside the chart at both ends', () => {
     const ends: Place[] = [
       { x: 395, y: 10, anchor: 'start' },

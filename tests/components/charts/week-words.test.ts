@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { chlorineWeekAxis } from '@/components/charts/lane-axes';
-import { boxOf, placeWords } from '@/components/charts/place-words';
+import { type Box, boxOf, placeWords } from '@/components/charts/place-words';
 import { xOf } from '@/components/charts/time-axis';
 import { yOf } from '@/components/charts/value-axis';
-import { pointsOf, waterAt } from '@/components/charts/water-curve';
+import { pointsOf, waterAt, type WaterPoint } from '@/components/charts/water-curve';
 import { takenBoxes, type WeekGeometry, type WeekPhrases, weekWords } from '@/components/charts/week-words';
 import { aWeekSheet } from '../../support/week-sheet';
 
@@ -27,8 +27,10 @@ const phrases: WeekPhrases = {
   tests: {},
 };
 
-function geometry(nowHour: number, width: number): WeekGeometry {
-  const points = pointsOf(aWeekSheet().ahead).filter(({ at }) => at >= axis.from && at <= axis.to);
+function geometry(nowHour: number, width: number, shift = 0, lowestLevel?: number): WeekGeometry {
+  const points = pointsOf(aWeekSheet().ahead)
+    .filter(({ at }) => at >= axis.from && at <= axis.to)
+    .map((point) => moved(point, shift, lowestLevel));
   const doses = [19.67, 43.67, 91.67, 115.67, 139.67].map((hour, index) => ({
     id: `${index}`,
     at: axis.from + hour * HOUR,
@@ -43,7 +45,69 @@ function geometry(nowHour: number, width: number): WeekGeometry {
   return { axis, width, value, points, now, limit: 4, doses, tests: [], planEndsAt: points.at(-1)!.at };
 }
 
+/** The same water with so much more chlorine, at another stabilizer. */
+function moved(point: WaterPoint, shift: number, lowestLevel = point.lowestLevel): WaterPoint {
+  const { low, middle, high } = point.freeChlorine;
+  const up = (level: number) => Math.max(0, level + shift);
+  return { ...point, lowestLevel, freeChlorine: { low: up(low), middle: up(middle), high: up(high) } };
+}
+
+/** Where the curve first leaves its range after now, as the sheet finds it. */
+function meetingIn({ points, now, limit }: WeekGeometry): WeekPhrases['meets'] {
+  const met = points.find(
+    ({ at, freeChlorine: { middle }, lowestLevel }) => at > now && (middle < lowestLevel || middle > limit),
+  );
+  if (met === undefined) return undefined;
+  const low = met.freeChlorine.middle < met.lowestLevel;
+  return {
+    at: met.at,
+    value: low ? met.lowestLevel : limit,
+    words: low
+      ? ['Wednesday night: meets the lowest level', 'check then, before anyone swims']
+      : ['Saturday morning: over the swim limit', 'nobody swims while it is above'],
+  };
+}
+
+type Placed = { id: string } & Box;
+
+/** What lies over something else: two words, words over an edge, indispensable words on the curve. */
+function faultsOf(shape: WeekGeometry, said: WeekPhrases): string[] {
+  const bounds = { x: 0, y: 0, width: shape.width, height: shape.value.height };
+  const placed = placeWords(weekWords(said, shape), takenBoxes(shape), bounds);
+  const boxes: Placed[] = placed.map((words) => ({ id: words.id, ...boxOf(words.lines, words) }));
+  const over = (a: Box, b: Box) =>
+    a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
+  const clashes = boxes.flatMap((a, index) =>
+    boxes
+      .slice(index + 1)
+      .filter((b) => over(a, b))
+      .map((b) => `${a.id} on ${b.id}`),
+  );
+  const outside = boxes
+    .filter(
+      ({ x, y, width, height }) => x < -0.01 || y < 0 || x + width > bounds.width + 0.01 || y + height > bounds.height,
+    )
+    .map(({ id }) => `${id} outside`);
+  const middles = shape.points.map(({ at, freeChlorine }) => ({
+    x: xOf(axis, shape.width, at),
+    y: yOf(shape.value, freeChlorine.middle),
+    ...{ width: 0.1, height: 0.1 },
+  }));
+  const struck = boxes.filter((box) => middles.some((point) => over(box, point))).map(({ id }) => `${id} on the curve`);
+  return [...clashes, ...outside, ...struck];
+}
+
 describe('words of the chlorine lane', () => {
+  it.each([740, 816, 910, 1390])('find room whatever the water, %i px wide', (width) => {
+    for (const lowestLevel of [2, 2.6, 3.6])
+      for (let shift = -2.4; shift < 1.3; shift += 0.6)
+        for (let hour = 2; hour < 168; hour += 15) {
+          const shape = geometry(hour, width, shift, lowestLevel);
+          const faults = faultsOf(shape, { ...phrases, meets: meetingIn(shape) });
+          expect(faults, `hour ${hour}, ${shift.toFixed(1)} more, lowest ${lowestLevel}`).toEqual([]);
+        }
+  });
+
   it.each([728, 910])('keep off each other and off the curve at every hour of the week, %i px wide', (width) => {
     for (let hour = 1; hour < 168; hour += 1) {
       const shape = geometry(hour, width);
