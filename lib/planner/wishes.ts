@@ -5,7 +5,7 @@ import type { GivenDose } from '@/lib/schemas/dose';
 import type { Scenario } from '@/lib/schemas/scenario';
 import type { ShelfProduct } from '@/lib/schemas/shelf-product';
 import type { Wishes } from '@/lib/schemas/wishes';
-import { genericOf, isGeneric } from './generic-products';
+import { genericOf } from './generic-products';
 
 export const noWishes: Wishes = { doses: [], notOn: [], noFurtherTablets: false };
 
@@ -35,7 +35,7 @@ export function mergedWishes(earlier: Wishes, later: Wishes, { pool }: Pick<Scen
 
 /**
  * What of a scenario's wishes a plan still has to mind: doses that are ahead, within the plan, of a product that is there,
- * and that have not gone in meanwhile (the same product on the same day is the same dose).
+ * and that have not gone in meanwhile (the same kind of product on the same day is the same dose).
  */
 export function wishesInForce(scenario: Scenario): Wishes {
   const { wishes = noWishes, reading, now, pool, given } = scenario;
@@ -61,9 +61,8 @@ export function wishesInForce(scenario: Scenario): Wishes {
   };
 }
 
-/** Whether a dose was of a product; of one that had to be bought, of what was bought. */
+/** Whether a dose was of a product's kind: of that tub or bottle, or of another that took its place. */
 function isOf({ product: id }: GivenDose, product: ShelfProduct, { shelf }: Scenario): boolean {
-  if (!isGeneric(product)) return id === product.id;
-  const bought = shelf.find((each) => each.id === id);
-  return bought?.substance === product.substance && bought.form === product.form;
+  const poured = shelf.find((each) => each.id === id);
+  return poured?.substance === product.substance && poured.form === product.form;
 }

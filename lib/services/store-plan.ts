@@ -46,8 +46,9 @@ export async function storePlan(
       day: dayOf(at.getTime(), timeZone),
       wallTime: wallTimeOf(at.getTime(), timeZone),
       at,
-      productId: dose.product,
-      productName: dose.product === null ? null : (names.get(dose.product) ?? null),
+      // What the shelf no longer holds enough of has to be bought: it is kept as no product of the shelf.
+      productId: dose.toBuy ? null : dose.product,
+      productName: dose.toBuy || dose.product === null ? null : (names.get(dose.product) ?? null),
       toBuy: dose.toBuy,
       substance: dose.substance,
       form: dose.form,

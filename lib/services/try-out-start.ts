@@ -6,6 +6,8 @@ import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { sharedEngine } from '@/lib/engine-worker/shared-engine';
 import { AppError } from '@/lib/errors';
 import type { PlanAhead } from '@/lib/planner/wishes-of';
+import type { PlannedDose } from '@/lib/schemas/dose';
+import type { WeekPlan } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import type { ServiceContext } from './context';
 import { inputHashOf, scenarioAt } from './make-plan';
@@ -57,9 +59,15 @@ export async function loadTryOutStart(context: ServiceContext): Promise<LoadedSt
       .map(({ id, at, productId, toBuy, substance, form, amount, unit, rise, effect, reason }) => ({
         ...{ id, toBuy, substance, form, amount, unit, rise, reason },
         at: toOffsetIso(at.getTime(), timeZone),
-        product: productId,
+        // A dose that the shelf no longer holds is kept without its product; the plan knows which it is.
+        product: productId ?? plannedProduct(plan.result, { at, substance }),
         ...(effect === null ? {} : { effect }),
       })),
     days: { first: dayOf(now.getTime(), timeZone), last: dayOf(plan.endsAt.getTime() - 1, timeZone) },
   };
+}
+
+function plannedProduct({ doses }: WeekPlan, dose: { at: Date; substance: PlannedDose['substance'] }): string | null {
+  const same = doses.find(({ at, substance }) => Date.parse(at) === dose.at.getTime() && substance === dose.substance);
+  return same?.product ?? null;
 }

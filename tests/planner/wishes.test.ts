@@ -173,6 +173,13 @@ describe('a wish that is over', () => {
 
   it.each([
     ['went in meanwhile', { given: [{ ...granules('2026-07-07'), at: '2026-07-07T20:40:00-04:00', amount: 300 }] }],
+    [
+      'went in from a tub that was bought for it',
+      {
+        shelf: [...usual.shelf, { ...usual.shelf[1]!, id: 'bought', stock: 0 }],
+        given: [{ ...granules('2026-07-07'), at: '2026-07-07T18:30:00-04:00', product: 'bought' }],
+      },
+    ],
     ['was of a product that has left the shelf', { shelf: [usual.shelf[2]!] }],
     ['lies before now', { now: '2026-07-08T09:00:00-04:00' }],
     ['lies before the reading', { reading: { takenAt: '2026-07-08T19:00:00-04:00' } }],

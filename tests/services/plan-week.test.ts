@@ -46,6 +46,19 @@ describe('planWeek', { timeout: 30_000 }, () => {
     expect(doses.every(({ day, wallTime }) => /^2026-07-\d\d$/.test(day) && /^\d\d:\d\d$/.test(wallTime))).toBe(true);
   });
 
+  it('of more than the shelf holds is kept, with what is missing marked to buy', async () => {
+    await setStock(db, { householdId: owner.access.householdId, id: 'tabs', stock: 0 });
+    await setStock(db, { householdId: owner.access.householdId, id: 'gran', stock: 150 });
+    await recordReading(owner, aFullTest());
+    const short = (await current())?.result.doses.filter(({ toBuy }) => toBuy) ?? [];
+    expect(short.length).toBeGreaterThan(0);
+    expect(short.every(({ product }) => product === 'gran')).toBe(true);
+    const stored = (await db.select().from(planDoses)).filter(({ toBuy }) => toBuy);
+    expect(stored.map(({ amount, productId }) => ({ amount, productId }))).toEqual(
+      short.map(({ amount }) => ({ amount, productId: null })),
+    );
+  });
+
   it('keeps the plan while its inputs stand, however time passes', async () => {
     await recordReading(owner, aFullTest());
     const first = await current();

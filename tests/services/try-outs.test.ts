@@ -154,6 +154,21 @@ describe('a try-out', { timeout: 60_000 }, () => {
     ]);
   });
 
+  it('that needs more than the shelf holds is taken, and what is missing can be moved like the rest', async () => {
+    const context = await fresh();
+    await setStock(context.db, { householdId: context.access.householdId, id: 'gran', stock: 100 });
+    await planWeek(context);
+    await take(context, party);
+    const { doses, evenings } = await showTryOutStart(context);
+    const short = doses.find(({ toBuy }) => toBuy)!;
+    expect(short.product).toBe('gran');
+    const free = evenings.findLast(({ day }) => !doses.some((each) => dayOfDose(each) === day))!;
+    await take(context, { moves: [{ doseId: short.id, toDay: free.day }] });
+    expect((await current(context)).result.doses).toContainEqual(
+      expect.objectContaining({ at: free.at, amount: short.amount, product: 'gran', toBuy: true, reason: 'wished' }),
+    );
+  });
+
   it('puts back what the days said, drops its wishes, and is the plan of before', async () => {
     const context = await fresh();
     const before = await current(context);
