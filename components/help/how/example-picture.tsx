@@ -2,8 +2,9 @@
 
 import { useTranslations } from 'next-intl';
 import { PictureOrTable } from '@/components/ui/picture-or-table';
-import type { Curve, Line } from '@/lib/client/worked-out/examples/curve';
+import type { Curve } from '@/lib/client/worked-out/examples/curve';
 import type { HowPage } from '@/lib/client/worked-out/how-page';
+import { curveColumns } from './curve-columns';
 import { DrawnCurve } from './drawn-curve';
 import { TakenBars } from './taken-bars';
 import { useCurveSentence } from './use-curve-sentence';
@@ -16,12 +17,11 @@ export function ExamplePicture({ page, curve }: { page: HowPage; curve: Curve })
   const t = useTranslations('how-examples');
   const written = useWritten();
   const sentenceOf = useCurveSentence();
-  const lines: readonly Line[] = [
-    ...curve.lines.filter(({ name }) => !curve.ranges?.some((range) => range.name === name)),
-  ];
-  const first = lines[0]?.points ?? [];
+  const first = curve.lines[0]?.points ?? [];
   const every = Math.max(1, Math.round((first.length - 1) / TABLE_ROWS));
-  const rows = first.filter((_, index) => index % every === 0);
+  const places = first.filter((_, index) => index % every === 0).map(([across]) => across);
+  const columns = curveColumns(curve, places);
+  const inTable = { ...curve.up, decimals: curve.up.decimals + 2 };
   return (
     <PictureOrTable
       className="mt-4"
@@ -35,12 +35,16 @@ export function ExamplePicture({ page, curve }: { page: HowPage; curve: Curve })
         </>
       }
       table={{
-        columns: [t('at'), ...lines.map(({ name }) => t(`figure.${name}`))],
-        rows: rows.map(([across], row) => [
-          written(across, curve.across),
-          ...lines.map(({ points }) =>
-            written(points[row * every]?.[1] ?? 0, { ...curve.up, decimals: curve.up.decimals + 2 }),
-          ),
+        columns: [
+          t('at'),
+          ...columns.map(({ name, edge = 'whole' }) => t('column', { name: t(`figure.${name}`), edge })),
+        ],
+        rows: places.map((place, row) => [
+          written(place, curve.across),
+          ...columns.map(({ valueAt }) => {
+            const value = valueAt(row);
+            return value === undefined ? '' : written(value, inTable);
+          }),
         ]),
       }}
     />

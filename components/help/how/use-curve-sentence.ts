@@ -10,7 +10,7 @@ import { useWritten } from './use-written';
 export function useCurveSentence(): (page: HowPage, curve: Curve) => string {
   const t = useTranslations('how-examples');
   const written = useWritten();
-  return (page, { lines, across, up }) => {
+  return (page, { lines, levels = [], across, up }) => {
     const at = (value: number) => written(value, across);
     const level = (value: number) => written(value, { ...up, decimals: up.decimals + 1 });
     const courses = lines.flatMap(({ name, points }) => {
@@ -24,7 +24,12 @@ export function useCurveSentence(): (page: HowPage, curve: Curve) => string {
       if (turn) return [t('courseOver', { ...ends, turn: level(turn[1]), turnAt: at(turn[0]) })];
       return [t(ends.start === ends.end ? 'courseLevel' : 'course', ends)];
     });
+    const limits = levels.map(({ name, at: value }) =>
+      t('courseLevel', { name: t(`figure.${name}`), start: level(value) }),
+    );
     const sentence = t(`sentence.${page}`);
-    return courses.length === 0 ? sentence : t('drawn', { sentence, courses: courses.join(t('courseJoiner')) });
+    return courses.length === 0
+      ? sentence
+      : t('drawn', { sentence, courses: [...courses, ...limits].join(t('courseJoiner')) });
   };
 }
