@@ -47,10 +47,10 @@ async function atADesk(stage: Stage, server: Server, person: Person, sheet: Week
   const weeks = page.getByRole('navigation', { name: words('week.weeks') }).first();
   const next = weeks.getByRole('link', { name: words('week.nextWeek') });
   const scrolled = () => page.evaluate(() => scrollY);
-  await page.evaluate(() => scrollTo(0, 120));
-  const before = await scrolled();
-
   await next.focus();
+  await page.evaluate(() => scrollTo(0, 90));
+  const before = await scrolled();
+  stage.check('there is something to scroll', before > 0, before);
   await page.keyboard.press('Enter');
   stage.check('the title says which week it is', await startsWith(page, titleOf(sheet, 1)), await page.title());
   const focused = () => page.evaluate(() => document.activeElement?.getAttribute('aria-label'));
