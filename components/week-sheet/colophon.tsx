@@ -1,11 +1,27 @@
 'use client';
 
+import { Printer } from 'lucide-react';
+import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { textLink } from '@/components/ui/text-link';
 import { useSheet } from './sheet-context';
 
-/** What the sheet is worked out from, and how to read its grey columns. */
+/** What the sheet is worked out from, how to read its grey columns, and the way to the page on paper. */
 export function Colophon() {
   const t = useTranslations('week');
-  const { readings } = useSheet().sheet;
-  return <p className="text-fine text-ink-3">{t('colophon', { count: readings.length })}</p>;
+  const { sheet, start } = useSheet();
+  return (
+    <>
+      <p className="text-fine text-ink-3">{t('colophon', { count: sheet.readings.length })}</p>
+      <p>
+        <Link
+          href={start === undefined ? '/week/print' : `/week/print?start=${start}`}
+          className={`${textLink} inline-flex min-h-6 items-center gap-1.5 text-small font-emphasis pointer-coarse:min-h-11`}
+        >
+          <Printer aria-hidden="true" className="size-4.5" />
+          {t('print')}
+        </Link>
+      </p>
+    </>
+  );
 }

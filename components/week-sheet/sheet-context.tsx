@@ -9,6 +9,8 @@ type Sheet = {
   picture: SheetPicture;
   /** The first day of the week that was asked for; undefined for the week of now. */
   start: string | undefined;
+  /** Paper hangs for days: nothing on it is "today". */
+  onPaper: boolean;
 };
 
 const SheetContext = createContext<Sheet | undefined>(undefined);
@@ -17,13 +19,15 @@ const SheetContext = createContext<Sheet | undefined>(undefined);
 export function SheetProvider({
   sheet,
   start,
+  onPaper = false,
   children,
 }: {
   sheet: WeekSheet;
   start: string | undefined;
+  onPaper?: boolean;
   children: React.ReactNode;
 }) {
-  const value = useMemo(() => ({ sheet, picture: pictureOf(sheet), start }), [sheet, start]);
+  const value = useMemo(() => ({ sheet, picture: pictureOf(sheet), start, onPaper }), [sheet, start, onPaper]);
   return <SheetContext value={value}>{children}</SheetContext>;
 }
 

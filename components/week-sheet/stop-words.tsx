@@ -24,7 +24,7 @@ export function StopWords({ dose, headed = false }: { dose?: PlanDose | undefine
 }
 
 /** The Stop of its own that a product has. */
-function stopOf({ form, steps }: PlanDose): 'acid' | 'tablets' | undefined {
+export function stopOf({ form, steps }: PlanDose): 'acid' | 'tablets' | undefined {
   if (form === 'tablet') return 'tablets';
   return steps === 'acid' ? 'acid' : undefined;
 }

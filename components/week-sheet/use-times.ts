@@ -10,12 +10,14 @@ import { useSheet } from './sheet-context';
 /** Times as this household says them. Ahead they are parts of a day, never minutes; only what is to be done has a clock time. */
 export function useTimes() {
   const t = useTranslations('week');
-  const { sheet } = useSheet();
+  const { sheet, onPaper } = useSheet();
   const { timeZone, locale } = sheet.household;
   const today = dayOf(instantOf(sheet.now), timeZone);
 
   const partOn = ({ day, part }: { day: string; part: PartOfDay }) =>
-    day === today ? t(`today.${part}`) : t('dayPart', { day: weekdayName(day, locale), part: t(`part.${part}`) });
+    day === today && !onPaper
+      ? t(`today.${part}`)
+      : t('dayPart', { day: weekdayName(day, locale), part: t(`part.${part}`) });
 
   return {
     today,
@@ -29,8 +31,8 @@ export function useTimes() {
     dayInWords: (instant: number) => {
       const day = dayOf(instant, timeZone);
       const days = daysBetween(today, day);
-      if (days === 0) return t('todayName');
-      return days === 1 ? t('tomorrowName') : t('onDay', { day: weekdayName(day, locale) });
+      if (days === 0 && !onPaper) return t('todayName');
+      return days === 1 && !onPaper ? t('tomorrowName') : t('onDay', { day: weekdayName(day, locale) });
     },
     weekday: (instant: number) => weekdayName(dayOf(instant, timeZone), locale),
     heading: (instant: number) => dayHeading(dayOf(instant, timeZone), locale),

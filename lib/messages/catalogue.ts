@@ -19,6 +19,7 @@ import tryOut from './en/try-out.json';
 import units from './en/units.json';
 import verdict from './en/verdict.json';
 import week from './en/week.json';
+import weekPrint from './en/week-print.json';
 
 /** Every word of the product, one namespace a file. A new file is added here and is then typed and served everywhere. */
 export const catalogue = {
@@ -43,6 +44,7 @@ export const catalogue = {
   units,
   verdict,
   week,
+  'week-print': weekPrint,
 };
 
 export type Catalogue = typeof catalogue;

@@ -13,10 +13,11 @@ import { looks } from './journeys/looks';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
 import { scope } from './journeys/scope';
+import { paper } from './journeys/paper';
 import { situations } from './journeys/situations';
 import { stop } from './journeys/stop';
-import { throughTheWeeks } from './journeys/through-the-weeks';
 import { tryIt } from './journeys/try-it';
+import { throughTheWeeks } from './journeys/through-the-weeks';
 import type { Journey } from './support/journey';
 
 /** Every journey of a run, the long ones first. */
@@ -32,6 +33,7 @@ export const journeys: readonly Journey[] = [
   learning,
   house,
   tryIt,
+  paper,
   scope,
   stop,
   situations,

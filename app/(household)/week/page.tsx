@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { WaitingTests } from '@/components/readings/waiting-tests';
+import { PrintElsewhere } from '@/components/week-print/print-elsewhere';
 import { WeekSheetScreen } from '@/components/week-sheet/week-sheet-screen';
 import { findHousehold, requireHousehold } from '@/lib/auth/page-gate';
 import { firstWeekday } from '@/lib/calendar/first-weekday';
@@ -41,10 +42,13 @@ export default async function WeekPage({ searchParams }: Props) {
       namespaces={['week', 'events', 'verdict', 'doses', 'units', 'readings', 'try-out']}
       parts={{ situations: ['kind', 'step', 'steps'] }}
     >
-      <WaitingTests
-        household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
-      />
-      <WeekSheetScreen start={start} initial={initial} />
+      <div className="print:hidden">
+        <WaitingTests
+          household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
+        />
+        <WeekSheetScreen start={start} initial={initial} />
+      </div>
+      <PrintElsewhere />
     </ClientMessages>
   );
 }

@@ -119,6 +119,7 @@ export const signedIn: readonly View[] = [
       await page.getByRole('region').locator('table').first().waitFor();
     },
   },
+  { name: 'week-print', path: '/week/print', prepare: shows(words('week-print.readings.title')) },
   { name: 'test-strip', path: '/test', prepare: testForm('strip') },
   { name: 'test-kit', path: '/test', prepare: testForm('drop-kit') },
   {
@@ -198,6 +199,7 @@ export const happened: readonly View[] = [
       await page.getByText(words('events.dosing.drain-cover')).first().waitFor({ state: 'attached' });
     },
   },
+  { name: 'week-print-happened', path: '/week/print', prepare: shows(words('week-print.asks.barred')) },
   {
     name: 'week-what-happened',
     path: '/week',
