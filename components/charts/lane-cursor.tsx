@@ -3,8 +3,7 @@
 import { useMemo } from 'react';
 import { nearestStop, rowAt, stopAfterKey, stopsOf } from './cursor-stops';
 import { moveCursor, useCursor } from './cursor-store';
-import type { LaneTime } from './lane-chart';
-import { isOn, shareOf, xOf } from './time-axis';
+import { isOn, shareOf, type TimeAxis, xOf } from './time-axis';
 import { type ValueAxis, yOf } from './value-axis';
 
 export type Reading<Row> = {
@@ -16,8 +15,10 @@ export type Reading<Row> = {
   level: (row: Row) => number | undefined;
 };
 
+type CursorTime = { axis: TimeAxis; width: number; now: number; syncId: string };
+
 type Props<Row> = {
-  time: LaneTime;
+  time: CursorTime;
   value: ValueAxis;
   rows: readonly Row[];
   reading: Reading<Row>;
@@ -95,7 +96,7 @@ export function LaneCursor<Row extends { at: number }>({
   );
 }
 
-type Mark = { time: LaneTime; value: ValueAxis; at: number; level: number | undefined; words: string };
+type Mark = { time: CursorTime; value: ValueAxis; at: number; level: number | undefined; words: string };
 
 /** The line of the hour, where the curve crosses it, and its words on the side that has more room. */
 function CursorMark({ time: { axis, width }, value, at, level, words }: Mark) {
