@@ -69,7 +69,7 @@ export function LaneCursor<Row extends { at: number }>({
         aria-valuemax={stops.length - 1}
         aria-valuenow={stop}
         aria-valuetext={reading.words(row)}
-        className={`absolute inset-0 ${byFinger ? 'touch-pan-y' : ''}`}
+        className={`absolute inset-0 ${byFinger ? 'touch-pan-y touch-pinch-zoom' : ''}`}
         onFocus={() => {
           if (at === undefined) go(stop);
         }}

@@ -9,7 +9,7 @@ import { useTimes } from './use-times';
 import { weeksBeside } from './weeks';
 
 /** What says of itself that a finger on it turns the weeks. */
-export const turnsWeeks = { 'data-turns-weeks': '', className: 'max-sm:touch-pan-y' } as const;
+export const turnsWeeks = { 'data-turns-weeks': '', className: 'max-sm:touch-pan-y max-sm:touch-pinch-zoom' } as const;
 
 /**
  * Turns the weeks without a button: the left and right arrow keys, while nothing else on the page wants them, and on a
