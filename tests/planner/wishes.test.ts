@@ -327,7 +327,7 @@ describe('any scenario with any wishes', () => {
     };
   }
 
-  it('keeps to every limit with them, or is refused', { timeout: 400_000 }, () => {
+  it('keeps to every limit with them, or is refused', { timeout: 3_600_000 }, () => {
     const seen = { planned: 0, refused: 0, wished: 0 };
     fc.assert(
       fc.property(anyScenario, someWishes, (scenario, some) => {
