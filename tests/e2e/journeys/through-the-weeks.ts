@@ -36,7 +36,7 @@ function titleOf({ days, household }: WeekSheet, weeks: number): string {
 const startsWith = (page: Page, title: string) => until(async () => (await page.title()).startsWith(title));
 
 async function atADesk(stage: Stage, server: Server, person: Person, sheet: WeekSheet): Promise<void> {
-  const visitor = await stage.visitor(server, 'desk', { width: 1440, height: 700 });
+  const visitor = await stage.visitor(server, 'desk', { width: 1440, height: 500 });
   const { page } = visitor;
   await enterAs(visitor, person);
   await page.goto('/week');
@@ -100,11 +100,7 @@ async function onAPhone(stage: Stage, server: Server, person: Person, sheet: Wee
     await page.title(),
   );
   const range = titleOf(sheet, 1).split(',')[0] ?? '';
-  await page
-    .getByRole('banner', { name: words('week.title') })
-    .getByText(range)
-    .first()
-    .waitFor();
+  await page.locator('header[data-turns-weeks]').getByText(range).first().waitFor();
   await drag(finger, { x: 120, y: 150 }, { x: 320, y: 160 });
   await page.waitForURL((url) => url.pathname === '/week' && url.search === '');
   stage.check('and one to the right brings back this week', page.url().endsWith('/week'), page.url());
