@@ -1,6 +1,6 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
+import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
 import { useEffect, useRef, useState } from 'react';
 import { triedLevels } from '@/components/charts/tried-levels';
@@ -45,7 +45,7 @@ function Trying({ ground }: { ground: TryGround }) {
   const { draft, setDraft, restarted } = useDraft(ground.planId);
   const known = { ...draft, moves: movesThatStand(draft, ground) };
   const problemWords = useTryProblemWords();
-  const query = useQuery({ ...tryOutStart(ground.planId), enabled: wanted });
+  const query = useQuery({ ...tryOutStart(ground.planId), enabled: wanted || hasTried(draft) });
   const { data: start, error: problem } = query;
   const planned = ground.tablets ?? 0;
   const mostTablets = Math.max(planned, start?.mostTablets ?? 0);
@@ -99,11 +99,23 @@ function Trying({ ground }: { ground: TryGround }) {
   );
 }
 
-/** What is being tried on a plan. Another plan begins anew, and says so where something was lost by it. */
+type Held = { planId: string; draft: Draft; restarted: boolean };
+const draftKey = ['try-out-draft'];
+
+/**
+ * What is being tried on a plan. It is kept beside the fetched sheet, because turning a tablet takes one form of the sheet
+ * off the page and puts the other on it. Another plan begins anew, and says so where something was lost by it.
+ */
 function useDraft(planId: string) {
-  const [held, hold] = useState({ planId, draft: emptyDraft, restarted: false });
+  const client = useQueryClient();
+  const [held, hold] = useState<Held>(
+    () => client.getQueryData<Held>(draftKey) ?? { planId, draft: emptyDraft, restarted: false },
+  );
   if (held.planId !== planId)
     hold({ planId, draft: { ...emptyDraft, day: held.draft.day }, restarted: hasTried(held.draft) });
+  useEffect(() => {
+    client.setQueryData(draftKey, held);
+  }, [client, held]);
   return {
     draft: held.draft,
     restarted: held.restarted,

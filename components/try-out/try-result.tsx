@@ -50,27 +50,22 @@ function Use({ planId, changes, tried: { advice, failed }, onUsed }: Omit<Props,
   const t = useTranslations('try-out');
   const { sheet } = useSheet();
   const problemWords = useTryProblemWords();
-  const take = useTakeTryOut();
+  const take = useTakeTryOut(onUsed);
   // The same changes keep their id, so that sending them again takes them once.
   const [sent, setSent] = useState<{ id: string; what: string } | undefined>(undefined);
   if (sheet.me.role === 'viewer') return <p className="w-full text-small text-ink-2">{t('viewer')}</p>;
   if (failed || advice?.code === 'refused') return null;
-  const use = async () => {
+  const use = () => {
     const what = JSON.stringify([planId, changes]);
     const id = sent?.what === what ? sent.id : crypto.randomUUID();
     setSent({ id, what });
-    try {
-      await take.mutateAsync({ id, planId, ...changes });
-    } catch {
-      // Said below; what was tried stays on the screen.
-      return;
-    }
-    onUsed();
+    // Where it fails that is said below, and what was tried stays on the screen.
+    take.mutate({ id, planId, ...changes });
   };
   return (
     <>
       <Button
-        onClick={() => void use()}
+        onClick={use}
         busy={take.isPending ? t('using') : undefined}
         offReasonId={advice === undefined ? 'try-it-wait' : undefined}
       >

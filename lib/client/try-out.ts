@@ -23,8 +23,12 @@ export function tryOutStart(planId: string) {
   });
 }
 
-/** Takes a try-out into the plan; the sheet follows with its new plan. */
-export function useTakeTryOut() {
+/**
+ * Takes a try-out into the plan; the sheet follows with its new plan.
+ *
+ * @param onTaken called before the new plan is on the screen
+ */
+export function useTakeTryOut(onTaken: () => void) {
   const client = useQueryClient();
   return useMutation({
     // Without a connection it fails in words rather than wait in silence.
@@ -33,7 +37,10 @@ export function useTakeTryOut() {
       const { doneSchema } = await import('@/lib/schemas/account');
       return fetchJson('/api/try-outs', doneSchema, { method: 'POST', body: tryOut });
     },
-    onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
+    onSuccess: () => {
+      onTaken();
+      return client.invalidateQueries({ queryKey: weekKeys.all });
+    },
     // The plan has moved on: what is on the screen is no longer true.
     onError: (problem) => sheetAnew(client, problem),
   });

@@ -43,10 +43,10 @@ export function startOn(sheet: WeekSheet, overrides: Partial<TryOutStart> = {}):
  * The screen on a server that answers with this start, and with these answers to what is sent, in their order; it says yes
  * to whatever is left.
  */
-export async function showTryIt(sheet: WeekSheet, start: TryOutStart | Answer, answers: Answer[] = [], width = 1440) {
+export async function showTryIt(sheet: WeekSheet, start: TryOutStart | Answer, answers: Answer[] = []) {
   Thread.opened = [];
   vi.stubGlobal('Worker', Thread);
-  const page = await showSheet(sheet, { width });
+  const page = await showSheet(sheet);
   const ofSheet = vi.mocked(fetch).getMockImplementation()!;
   const state = { sheet, start };
   const sent: Sent[] = [];
@@ -65,5 +65,11 @@ export async function showTryIt(sheet: WeekSheet, start: TryOutStart | Answer, a
     return Response.json(answer);
   });
   const section = within(screen.getByRole('heading', { name: 'Try it' }).closest('section')!);
-  return { ...page, sent, state, section, threads: Thread };
+  /** Turns the device to a phone's width; the next sheet that comes finds it so. */
+  const turn = () => {
+    const narrow = { matches: true, addEventListener() {}, removeEventListener() {} };
+    vi.stubGlobal('matchMedia', () => narrow);
+    window.dispatchEvent(new Event('visibilitychange'));
+  };
+  return { ...page, sent, state, section, turn, threads: Thread };
 }

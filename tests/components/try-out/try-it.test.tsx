@@ -116,6 +116,15 @@ describe('Try it', () => {
     expect(swimmers(shown)).toHaveValue('14');
   });
 
+  it('keeps what was tried when the other form of the sheet takes its place', async () => {
+    const shown = await showTryIt(aWeekSheet(), startOn(aWeekSheet()));
+    await tryOneMore(shown);
+    shown.turn();
+    await screen.findByText('The rest of the week');
+    expect(screen.getByRole('textbox', { name: 'Swimmer-hours on Saturday' })).toHaveValue('15');
+    await waitFor(() => expect(shown.threads.opened.at(-1)?.asked.at(-1)).toMatchObject({ kind: 'course' }));
+  });
+
   it('puts back what was tried', async () => {
     const shown = await showTryIt(aWeekSheet(), startOn(aWeekSheet()));
     await tryOneMore(shown);
@@ -142,6 +151,21 @@ describe('Try it', () => {
       method: 'POST',
       body: { planId: aWeekSheet().plan?.id, swimmers: [{ day: saturday, swimmerHours: 15 }], tablets: null },
     });
+  });
+
+  it('does not say that the plan has changed to whoever changed it', async () => {
+    const sheet = aWeekSheet();
+    const shown = await showTryIt(sheet, startOn(sheet));
+    await tryOneMore(shown);
+    await advise(shown, { code: 'planned', changed: [], keeps: true });
+    const use = shown.section.getByRole('button', { name: 'Use it in the plan' });
+    await waitFor(() => expect(use).not.toHaveAttribute('aria-disabled'));
+    const days = sheet.days.map((day) => (day.day === saturday ? { ...day, swimmerHours: 15 } : day));
+    shown.state.sheet = { ...sheet, days, plan: { ...sheet.plan!, id: idOf(77) } };
+    await shown.user.click(use);
+    expect(await shown.section.findByText('the sheet says 15')).toBeVisible();
+    expect(shown.section.queryByText(/starts anew/)).toBeNull();
+    expect(swimmers(shown)).toHaveValue('15');
   });
 
   it('offers no use of what the planner refuses', async () => {
