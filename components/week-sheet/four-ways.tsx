@@ -95,7 +95,7 @@ function Alone() {
         <li key={alternative.kind}>
           {t('aloneIs', {
             form: t(`alone.${alternative.kind}`),
-            words: isPossible(alternative) ? t('outside', { hours: alternative.hoursOutside }) : t('impossible'),
+            words: t(isPossible(alternative) ? 'outside' : 'impossible', { hours: alternative.hoursOutside }),
           })}
         </li>
       ))}

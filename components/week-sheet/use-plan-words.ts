@@ -44,6 +44,28 @@ export function usePlanWords(plan: Plan): { reasons: Sentence[]; cautions: Sente
   const productName = (id: unknown) =>
     sheet.doses.find(({ product }) => product !== null && product === id)?.productName ?? t('someProduct');
   const count = (value: unknown) => (typeof value === 'number' ? value : 0);
+  /** A figure that stands beside the limit it is over or under: rounded alike it would explain nothing. */
+  const apartFromLimit = (fact: Fact): Record<string, string> => {
+    const beside = (value: unknown, limit: number, fewest = 1) =>
+      besideLimit(count(value), limit, sheet.household.locale, fewest).value;
+    const nearest = (value: unknown, low: number, high: number) => (count(value) < low ? low : high);
+    switch (fact.code) {
+      case 'no-tablets-stabilizer-high':
+        return { stabilizer: beside(fact.stabilizer, count(fact.upper), 0) };
+      case 'pH-out-of-range':
+        return { pH: beside(fact.pH, nearest(fact.pH, limits.pHRangeLow.value, limits.pHRangeHigh.value)) };
+      case 'combined-chlorine-high':
+        return { combinedChlorine: beside(fact.combinedChlorine, limits.combinedChlorineAct.value) };
+      case 'free-chlorine-over-swim-limit':
+        return { freeChlorine: beside(fact.freeChlorine, count(fact.swimLimit)) };
+      case 'hardness-outside-surface-range': {
+        const limit = nearest(fact.calciumHardness, count(fact.low), count(fact.high));
+        return { calciumHardness: beside(fact.calciumHardness, limit, 0) };
+      }
+      default:
+        return {};
+    }
+  };
   const figures = (fact: Fact) => {
     const written = Object.entries(quantities).map(([name, quantity]) => [
       name,
@@ -55,6 +77,12 @@ export function usePlanWords(plan: Plan): { reasons: Sentence[]; cautions: Sente
       stabilizerRise: units.number(count(fact.stabilizer), 1),
       swimLimit: units.number(count(fact.swimLimit)),
       closed: fact.closed === 'yes' ? 'yes' : 'no',
+      sets: fact.sets === 'rules' ? 'rules' : 'stabilizer',
+      most: fact.most === 'no' ? 'no' : 'yes',
+      closes: fact.closes === 'no' ? 'no' : 'yes',
+      lastLight: fact.lastLight === 'no' ? 'no' : 'yes',
+      halved: fact.halved === 'no' ? 'no' : 'yes',
+      doses: typeof fact.doses === 'number' ? fact.doses : 1,
       pHLow: units.figure(limits.pHRangeLow.value, 'pH'),
       pHHigh: units.figure(limits.pHRangeHigh.value, 'pH'),
       combinedAct: units.number(limits.combinedChlorineAct.value),
@@ -72,15 +100,14 @@ export function usePlanWords(plan: Plan): { reasons: Sentence[]; cautions: Sente
       product: productName(fact.product),
       quantity: assumed ? t(`quantity.${assumed}`) : '',
       value: assumed ? units.figure(count(fact.value), assumed) : '',
+      ...apartFromLimit(fact),
     };
   };
 
   const broken = plan.broken.flatMap(({ limit, at, value, bound }): Sentence[] => {
     if (!isLimit(limit)) return [];
     const stabilizer = limit === 'stabilizer-too-high-for-swim-limit';
-    const both = stabilizer
-      ? { value: units.number(value, 0), limit: units.number(bound, 0) }
-      : besideLimit(value, bound, sheet.household.locale);
+    const both = besideLimit(value, bound, sheet.household.locale, stabilizer ? 0 : 1);
     const when = capitalised(times.partAt(instantOf(at)));
     return [{ code: limit, words: t(`limit.${limit}`, { when, value: both.value, bound: both.limit }) }];
   });

@@ -52,6 +52,12 @@ export function openEvenings({ scenario, start, now, given, wishes, belowMaximum
   );
 }
 
+/** Whether something goes in within the last two hours of light; where the sun does not set there is no such hour. */
+export function isLastLight(at: number, { latitude, longitude }: Pick<Pool, 'latitude' | 'longitude'>): boolean {
+  const { sunset } = daylightOf(at, latitude, longitude);
+  return sunset !== null && at <= sunset && at >= sunset - 2 * MILLISECONDS_PER_HOUR;
+}
+
 function bringsChlorine(dose: WeekDose): boolean {
   return dose.kind === 'tablets' || dose.contents.freeChlorine > 0;
 }

@@ -1,12 +1,12 @@
 import { saturationIndex } from '@/lib/chemistry';
 import type { Alternative, BrokenLimit, Fact } from '@/lib/schemas/plan';
 import type { PlannedDose } from '@/lib/schemas/dose';
-import { limits, lowestLevel } from '@/lib/standards/limits';
+import { codeMinimum, limits, lowestLevel } from '@/lib/standards/limits';
 import { surfaceRanges } from '@/lib/standards/surface-ranges';
-import { type CautionCode, isCompanionReason, type ReasonCode } from './codes';
+import { type CautionCode, type DoseReason, isCompanionReason, type LimitCode, type ReasonCode } from './codes';
 import type { CompanionNeed } from './companions/need';
 import type { PlanContext } from './context';
-import { doseEvenings } from './evenings';
+import { doseEvenings, isLastLight } from './evenings';
 import type { Choice } from './draft';
 import type { Options } from './products';
 import { waterExchange } from './water-exchange';
@@ -43,31 +43,36 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
   const tablets = chlorine.filter(({ form }) => form === 'tablet');
   const stabilized = context.stabilizedProductUsed || tablets.length > 0;
   const sum = (each: (dose: PlannedDose) => number) => tablets.reduce((total, dose) => total + each(dose), 0);
+  const lowest = lowestLevel(water.cyanuricAcid, stabilized);
   reason('lowest-level-follows-stabilizer', {
     stabilizer: water.cyanuricAcid,
-    lowestLevel: lowestLevel(water.cyanuricAcid, stabilized),
+    lowestLevel: lowest,
+    sets: lowest > codeMinimum(water.cyanuricAcid, stabilized) ? 'stabilizer' : 'rules',
   });
 
+  const fast = chlorine.filter(({ form }) => form !== 'tablet');
   const free = choice.evenings.length > 0 && choice.visits > 0;
   if (tablets.length > 0)
     reason('tablets-carry', {
       tablets: sum(({ amount }) => amount),
       rise: sum(({ rise }) => rise),
       stabilizer: sum(({ effect }) => effect?.change ?? 0),
+      most: yesOrNo(sum(({ rise }) => rise) > fast.reduce((total, { rise }) => total + rise, 0)),
     });
   else if (options.noTablets)
     reason(options.noTablets, { stabilizer: water.cyanuricAcid, upper: pool.stabilizerBand[1], pH: water.pH });
   // Where the household wants none, nobody has looked whether they would be better.
   else if (free && !context.wishes.noFurtherTablets) reason('no-tablets-better-without');
 
-  const fast = chlorine.filter(({ form }) => form !== 'tablet');
+  const closes = plan.broken.every(({ limit }) => limit !== ('lowest-level' satisfies LimitCode));
   for (const form of new Set(fast.map((dose) => dose.form))) {
     const ofForm = fast.filter((dose) => dose.form === form);
     const rise = ofForm.reduce((total, dose) => total + dose.rise, 0);
-    reason('fast-closes-gap', { form, evenings: ofForm.length, rise });
+    const lastLight = yesOrNo(ofForm.every(({ at }) => isLastLight(Date.parse(at), pool)));
+    reason('fast-closes-gap', { form, evenings: ofForm.length, rise, closes: yesOrNo(closes), lastLight });
   }
   if (fast.length === 0 && options.fast.length === 0) reason('no-fast-on-shelf');
-  else if (fast.length === 0 && free) reason('nothing-fast-needed');
+  else if (fast.length === 0 && free && closes) reason('nothing-fast-needed');
   for (const { reason: why, effect } of doses)
     if (effect && isCompanionReason(why)) reason(why, { quantity: effect.quantity, change: effect.change });
   if (cheapest(plan)) reason('cheaper-than');
@@ -77,14 +82,26 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
   return reasons;
 }
 
-/** Whether the plan holds its limits, and every other way that does costs more money. */
+/** Whether the plan holds its limits, and every other way that does costs more money, as money is written: in hundredths. */
 function cheapest({ broken, alternatives, doses, money }: Explained): boolean {
-  const others = alternatives.filter(({ feasible, money: other }) => feasible && other !== money);
-  return doses.length > 0 && broken.length === 0 && others.length > 0 && others.every((other) => other.money > money);
+  const others = alternatives.filter((way) => way.feasible && !isSameWay(way.doses, doses));
+  const hundredths = (price: number) => Math.round(price * 100);
+  const cheaper = others.every((other) => hundredths(other.money) > hundredths(money));
+  return doses.length > 0 && broken.length === 0 && others.length > 0 && cheaper;
+}
+
+function isSameWay(one: readonly PlannedDose[], other: readonly PlannedDose[]): boolean {
+  const written = (doses: readonly PlannedDose[]) =>
+    doses.map(({ at, product, amount }) => `${at} ${product} ${amount}`).join();
+  return written(one) === written(other);
+}
+
+function yesOrNo(is: boolean): 'yes' | 'no' {
+  return is ? 'yes' : 'no';
 }
 
 /** What to mind with this water and this plan. */
-export function cautionsOf({ doses, options, choice, waiting }: Explained, context: PlanContext): Fact[] {
+export function cautionsOf({ doses, options, waiting }: Explained, context: PlanContext): Fact[] {
   const cautions: Fact[] = [...options.cautions];
   const caution = (code: CautionCode, figures: Omit<Fact, 'code'> = {}) => cautions.push({ code, ...figures });
   const { start, scenario } = context;
@@ -105,16 +122,12 @@ export function cautionsOf({ doses, options, choice, waiting }: Explained, conte
       high,
       index: saturationIndex(water),
     });
-  const wishedEvenings = doseEvenings(pool, start.takenAt, context.now).filter(({ at }) =>
-    context.wished.some((dose) => dose.at === at),
-  );
-  const evenings = [...choice.evenings, ...wishedEvenings];
-  const dark = doses.some(
-    ({ at, form }) => form !== 'tablet' && evenings.some((each) => each.afterDark && each.at === Date.parse(at)),
-  );
-  if (dark) caution('dose-after-dark');
+  const late = doseEvenings(pool, start.takenAt, context.now).filter(({ afterDark }) => afterDark);
+  const dark = doses.filter(({ at }) => late.some((evening) => evening.at === Date.parse(at)));
+  if (dark.length > 0) caution('dose-after-dark', { doses: dark.length });
   for (const id of new Set(doses.flatMap(({ product, toBuy }) => (product !== null && toBuy ? [product] : []))))
     caution('stock-short', { product: id });
-  if (pool.volumeEstimated) caution('volume-estimated', { volume: pool.volume });
+  const halved = doses.some(({ reason }) => reason === ('first-dose-halved' satisfies DoseReason));
+  if (pool.volumeEstimated) caution('volume-estimated', { volume: pool.volume, halved: yesOrNo(halved) });
   return cautions;
 }

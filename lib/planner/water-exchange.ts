@@ -20,7 +20,8 @@ export type WaterExchange = {
  * Replacing water where stabilizer is so high that chlorine cannot be both high enough and inside the swim limit: from 70
  * mg/L at a swim limit of 4, 80 at 5, 90 at 10. Null below.
  *
- * Each day so much of the depth is let out and filled up: after n days (1 - share)^n of the stabilizer is left.
+ * Each day so much of the depth is let out and filled up at most: after n days (1 - share)^n of the stabilizer is left. On
+ * the last day only as much goes out as brings it to the target.
  *
  * @param stabilizer mg/L
  */
@@ -35,6 +36,8 @@ export function waterExchange(
   const target = Math.min((low + high) / 2, closesAt);
   const share = Math.min(1, waterExchangeADay.value / meanDepth);
   const days = share === 1 ? 1 : Math.ceil(Math.log(target / stabilizer) / Math.log(1 - share));
+  const beforeLastDay = stabilizer * (1 - share) ** (days - 1);
+  const lastShare = 1 - target / beforeLastDay;
   const closed = stabilizer >= closesAt ? 'yes' : 'no';
-  return { stabilizer, swimLimit, closed, closesAt, target, volume: days * share * volume, days };
+  return { stabilizer, swimLimit, closed, closesAt, target, volume: ((days - 1) * share + lastShare) * volume, days };
 }

@@ -6,6 +6,7 @@ import { weekPlanSchema } from '@/lib/schemas/plan';
 import type { Scenario } from '@/lib/schemas/scenario';
 import { anyScenario } from './any-scenario';
 import { wrongWith } from './independent-check';
+import { untrueOf } from './sentences/untrue';
 
 /** Input that no schema can see to be wrong may be refused, in words; a plan that the net refuses is a fault of ours. */
 const inTheInput = ['invalid-input', 'water-out-of-range'];
@@ -28,6 +29,7 @@ function planMany(numRuns: number): number {
       if (!plan) return;
       planned++;
       expect(wrongWith(scenario, plan)).toEqual([]);
+      expect(untrueOf({ scenario, plan })).toEqual([]);
       expect(weekPlanSchema.safeParse(plan).success).toBe(true);
     }),
     { numRuns },
