@@ -51,6 +51,8 @@ export function LaneChart<Row extends { at: number }>(props: Props<Row>) {
     <div className="relative text-ink" style={{ width, height: value.height }}>
       <div id={sentence} role="img" aria-label={label}>
         <ComposedChart
+          // The library loses its layers between two weeks, and with them nights and limits: each week has a chart of its own.
+          key={`${axis.from} ${rows.length === 0}`}
           width={width}
           height={value.height}
           margin={{ top: 0, right: 0, bottom: 0, left: 0 }}

@@ -14,7 +14,7 @@ const widths = [1920, 1760, 1600, 1440, 1366, 1280, 1152, 1024, 960, 904] as con
 /** No label of the week sheet lies over another, on a curve or outside its lane, whatever the week and the screen. */
 export const labelBoxes: Journey = {
   name: 'labels of the week',
-  seconds: 120,
+  seconds: 240,
   async run(stage) {
     const server = await stage.server({ name: 'label-boxes', clock: midweek, fresh: true });
     const visitor = await stage.visitor(server, 'ten households', { width: widths[0], height: 1000 });

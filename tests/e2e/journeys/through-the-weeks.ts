@@ -46,6 +46,9 @@ async function atADesk(stage: Stage, server: Server, person: Person, sheet: Week
   await curve.waitFor();
   const weeks = page.getByRole('navigation', { name: words('week.weeks') }).first();
   const next = weeks.getByRole('link', { name: words('week.nextWeek') });
+  const nightsAndLimits = page.locator('.recharts-reference-area, .recharts-reference-line');
+  await until(async () => (await nightsAndLimits.count()) > 40);
+  const drawn = await nightsAndLimits.count();
   const scrolled = () => page.evaluate(() => scrollY);
   await next.focus();
   await page.evaluate(() => scrollTo(0, 90));
@@ -63,6 +66,8 @@ async function atADesk(stage: Stage, server: Server, person: Person, sheet: Week
   stage.check('and back, with nothing in focus', await startsWith(page, titleOf(sheet, 1)), await page.title());
   await weeks.getByRole('link', { name: words('week.thisWeek') }).click();
   await page.waitForURL((url) => url.pathname === '/week' && url.search === '');
+  await until(async () => (await nightsAndLimits.count()) === drawn);
+  stage.equal('nights and limits stand there as before', await nightsAndLimits.count(), drawn);
 
   await curve.focus();
   const said = () => curve.getAttribute('aria-valuetext');
