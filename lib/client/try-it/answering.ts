@@ -30,6 +30,8 @@ export function answering(say: (answer: TryItAnswer) => void, pause: () => Promi
     if (question.kind === 'start') {
       start = question.start;
       engine = undefined;
+      // Before the first input comes, which then need not wait for it.
+      ready().ready();
       return;
     }
     const { kind, number, changes } = question;

@@ -42,6 +42,11 @@ export class TryItEngine {
     this.context = contextOf(withoutWishes(this.planned.scenario));
   }
 
+  /** Works out beforehand what every answer needs: the plan's own week with its likely range. */
+  ready(): void {
+    this.plan();
+  }
+
   /** The tried week by the median's course; the middle is taken to lie as far from it as in the plan's own week. */
   course(number: number, changes: TryOutChanges): CourseAnswer {
     const plan = this.plan();
