@@ -121,6 +121,12 @@ describe('the limits hold for what is wished', () => {
     expect(refusal(wishing(wishes, { reading: { method: 'strip' } }))).toMatch(/1 tablets where 0/);
   });
 
+  it('that keep the likely range over 10 mg/L all week: refused, also where the water needs acid', () => {
+    const doses = ['05', '06', '07', '08', '09', '10', '11'].map((day) => granules(`2026-07-${day}`, 440));
+    const dark = { pool: { sunExposure: 0, feeder: { kind: 'none' } }, reading: { freeChlorine: 9.8, pH: 7.9 } };
+    expect(refusal(wishing({ doses }, dark))).toMatch(/plan-refused: .*may pass 10 mg/);
+  });
+
   it('within 4 h of acid that went in: refused', () => {
     const acid = { id: 'acid', form: 'liquid', substance: 'hydrochloric-acid', strength: 31.45, stock: 4000 };
     const given = [{ at: '2026-07-05T19:30:00-04:00', product: 'acid', amount: 500, unit: 'mL' }];

@@ -39,6 +39,8 @@ function acidMorning({ fromHour }: CompanionNeed, from: number, chlorine: readon
   const { start, scenario, given } = context;
   const { timeZone } = scenario.pool;
   const endsAt = start.takenAt + HOURS_IN_PLAN * MILLISECONDS_PER_HOUR;
+  // Where the likely range stays over 10 mg/L all week there is no such morning, nor a day to begin at.
+  if (from >= endsAt) return null;
   const taken = [...chlorine, ...given.map(({ at }) => at)];
   const gap = limits.acidToChlorineGap.value * MILLISECONDS_PER_HOUR;
   const mornings: number[] = [];
