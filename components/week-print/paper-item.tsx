@@ -70,7 +70,7 @@ function OpenCheck({ check }: { check: Check }) {
   return (
     <div>
       <PaperBox label={label} />
-      <p>{check.kind === 'full' ? own('fullNote') : t('check.quickNote')}</p>
+      {check.kind === 'full' && <p>{own('fullNote')}</p>}
     </div>
   );
 }

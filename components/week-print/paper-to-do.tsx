@@ -16,7 +16,7 @@ export function PaperToDo() {
   const columns = picture.days.map(({ from, to }) => `minmax(0,${to - from}fr)`).join(' ');
   return (
     <section
-      className="grid min-h-[136px] border-t-todo border-b border-ink"
+      className="grid min-h-[128px] border-t-todo border-b border-ink"
       style={{ gridTemplateColumns: `${GUTTER}px minmax(0,1fr)` }}
     >
       <div className="pt-1.5 pr-1.5">

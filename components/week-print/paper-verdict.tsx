@@ -19,7 +19,7 @@ export function PaperVerdict() {
   const { headline, reasons } = useVerdictWords();
   return (
     <section>
-      <h2 className="font-display text-[21px] leading-[25px] font-headline">{asks}</h2>
+      <h2 className="font-display text-[20px] leading-[23px] font-headline">{asks}</h2>
       {barred !== undefined && <p className="mt-1 border-due border-ink px-2 py-1 text-small font-strong">{barred}</p>}
       <LedBySituation />
       <p className="mt-1 text-small">

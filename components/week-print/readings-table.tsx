@@ -10,7 +10,7 @@ export function ReadingsTable() {
   const blank = <td className="w-[58px] border-t border-x border-ink" />;
   const row = ({ name, last, keep }: PaperRow) => (
     <tr key={name}>
-      <th scope="row" className="h-[21px] border-t border-ink text-left font-strong whitespace-nowrap">
+      <th scope="row" className="h-[20px] border-t border-ink text-left font-strong whitespace-nowrap">
         {name}
       </th>
       <td className="border-t border-ink pr-1.5 whitespace-nowrap">{last}</td>
