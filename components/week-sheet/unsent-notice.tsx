@@ -38,7 +38,7 @@ function UnsentTick({ sent }: { sent: SentTick }) {
     setProblem(undefined);
     try {
       await mutateAsync(sent);
-      forgetTick(sheet.me.id, tick.id);
+      await forgetTick(sheet.me.id, tick.id);
     } catch (cause) {
       setProblem(cause);
     } finally {
@@ -58,7 +58,7 @@ function UnsentTick({ sent }: { sent: SentTick }) {
           <Button variant="primary" onClick={() => void send()} busy={sending ? t('action.sending') : undefined}>
             {t('action.send')}
           </Button>
-          {refused && <Button onClick={() => forgetTick(sheet.me.id, tick.id)}>{t('action.discard')}</Button>}
+          {refused && <Button onClick={() => void forgetTick(sheet.me.id, tick.id)}>{t('action.discard')}</Button>}
         </>
       }
     >

@@ -39,13 +39,13 @@ export function useTick(dose: PlanDose) {
     try {
       await mutateAsync({ doseId: dose.id, tick });
       intention.current = undefined;
-      forgetTick(sheet.me.id, tick.id);
+      await forgetTick(sheet.me.id, tick.id);
     } catch (cause) {
       sending.current = false;
       const unheard = cause instanceof RequestProblem && cause.code === 'no-connection';
       // 'I am adding it now' is worth nothing later.
       if (unheard && tick.action !== 'claim')
-        keepTick(sheet.me.id, { doseId: dose.id, tick: pressedAt(tick, clock()) });
+        await keepTick(sheet.me.id, { doseId: dose.id, tick: pressedAt(tick, clock()) });
     }
   };
 

@@ -1,8 +1,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import type { DoseTick } from '@/lib/schemas/plan-dose';
-import { weekSheetSchema } from '@/lib/schemas/week-sheet';
 import { fetchJson, RequestProblem } from './fetch-json';
-import { weekKeys } from './week';
+import { weekKeys, weekSheetReply } from './week';
 
 export type SentTick = { doseId: string; tick: DoseTick };
 
@@ -18,7 +17,7 @@ export function useTickDose(start: string | undefined) {
     mutationKey: ['tick-dose'],
     networkMode: 'always',
     mutationFn: ({ doseId, tick }: SentTick) =>
-      fetchJson(`/api/doses/${doseId}/ticks`, weekSheetSchema, { method: 'POST', body: tick }),
+      fetchJson(`/api/doses/${doseId}/ticks`, weekSheetReply, { method: 'POST', body: tick }),
     onSuccess: async (sheet) => {
       const shown = weekKeys.starting(start);
       // A refetch that set out before the tick would bring the old sheet back.

@@ -34,15 +34,20 @@ export type JsonRequest = {
 
 /** Anything that checks a reply and returns it typed; the zod schemas of lib/schemas do. */
 export type ReplyParser<Reply> = { parse(value: unknown): Reply };
+/** Most of them come with zod when they are first asked for, so that no page waits for them before it is drawn. */
+export type Reply<Form> = ReplyParser<Form> | (() => Promise<ReplyParser<Form>>);
 
 const PATIENCE_MS = 20_000;
 
 /** Sends JSON, checks the reply, and turns every failure into a RequestProblem. */
-export async function fetchJson<Reply>(
+export async function fetchJson<Form>(
   address: string,
-  reply: ReplyParser<Reply>,
+  reply: Reply<Form>,
   { method = 'GET', body, signal }: JsonRequest = {},
-): Promise<Reply> {
+): Promise<Form> {
+  const parser = parserOf(reply, address);
+  // A request that fails first is what is told.
+  parser.catch(() => undefined);
   const patience = AbortSignal.timeout(PATIENCE_MS);
   const response = await fetch(address, {
     method,
@@ -60,10 +65,21 @@ export async function fetchJson<Reply>(
 
   const answer: unknown = response.status === 204 ? undefined : await response.json().catch(() => undefined);
   if (!response.ok) throw problemOf(answer, address, response.status);
+  const known = await parser;
   try {
-    return reply.parse(answer);
+    return known.parse(answer);
   } catch (cause) {
     throw new RequestProblem('unexpected', `The reply of ${address} has an unknown form`, [], { cause });
+  }
+}
+
+/** Fetched beside the request itself. One that cannot be fetched is a connection that is gone. */
+async function parserOf<Form>(reply: Reply<Form>, address: string): Promise<ReplyParser<Form>> {
+  if (typeof reply !== 'function') return reply;
+  try {
+    return await reply();
+  } catch (cause) {
+    throw new RequestProblem('no-connection', `No form for the reply of ${address}`, [], { cause });
   }
 }
 

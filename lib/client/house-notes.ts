@@ -1,8 +1,10 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { houseNotesSchema, type NewHouseNotes } from '@/lib/schemas/house-note';
+import type { NewHouseNotes } from '@/lib/schemas/house-note';
 import { fetchJson } from './fetch-json';
+
+const houseNotesReply = () => import('@/lib/schemas/house-note').then(({ houseNotesSchema }) => houseNotesSchema);
 
 const houseNotesKey = ['house-notes'] as const;
 
@@ -10,7 +12,7 @@ const houseNotesKey = ['house-notes'] as const;
 export function houseNotesOptions() {
   return queryOptions({
     queryKey: houseNotesKey,
-    queryFn: ({ signal }) => fetchJson('/api/house-notes', houseNotesSchema, { signal }),
+    queryFn: ({ signal }) => fetchJson('/api/house-notes', houseNotesReply, { signal }),
   });
 }
 
@@ -21,7 +23,7 @@ export function useSaveHouseNotes() {
     // Without a connection it fails in words rather than wait in silence.
     networkMode: 'always',
     mutationFn: (notes: NewHouseNotes) =>
-      fetchJson('/api/house-notes', houseNotesSchema, { method: 'PUT', body: notes }),
+      fetchJson('/api/house-notes', houseNotesReply, { method: 'PUT', body: notes }),
     onSuccess: (notes) => client.setQueryData(houseNotesKey, notes),
   });
 }

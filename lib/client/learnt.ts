@@ -1,9 +1,10 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { learntSchema } from '@/lib/schemas/learnt';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
+
+const learntReply = () => import('@/lib/schemas/learnt').then(({ learntSchema }) => learntSchema);
 
 const learntKey = ['learnt'] as const;
 
@@ -11,7 +12,7 @@ const learntKey = ['learnt'] as const;
 export function learntOptions() {
   return queryOptions({
     queryKey: learntKey,
-    queryFn: ({ signal }) => fetchJson('/api/learnt', learntSchema, { signal }),
+    queryFn: ({ signal }) => fetchJson('/api/learnt', learntReply, { signal }),
   });
 }
 
@@ -19,7 +20,7 @@ export function learntOptions() {
 export function useForgetLearnt() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: () => fetchJson('/api/learnt', learntSchema, { method: 'DELETE' }),
+    mutationFn: () => fetchJson('/api/learnt', learntReply, { method: 'DELETE' }),
     onSuccess: async (learnt) => {
       await client.cancelQueries({ queryKey: learntKey });
       client.setQueryData(learntKey, learnt);

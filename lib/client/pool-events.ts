@@ -1,6 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { doneSchema } from '@/lib/schemas/account';
 import type { NewPoolEvent } from '@/lib/schemas/pool-event';
+import { doneReply } from './done-reply';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
 
@@ -10,7 +10,7 @@ export function useReportPoolEvent() {
   return useMutation({
     // Without a connection it fails in words rather than wait in silence.
     networkMode: 'always',
-    mutationFn: (event: NewPoolEvent) => fetchJson('/api/pool-events', doneSchema, { method: 'POST', body: event }),
+    mutationFn: (event: NewPoolEvent) => fetchJson('/api/pool-events', doneReply, { method: 'POST', body: event }),
     onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
   });
 }
@@ -21,7 +21,7 @@ export function useEndPoolEvent() {
   return useMutation({
     // Without a connection it fails in words rather than wait in silence.
     networkMode: 'always',
-    mutationFn: (id: string) => fetchJson(`/api/pool-events/${id}`, doneSchema, { method: 'DELETE' }),
+    mutationFn: (id: string) => fetchJson(`/api/pool-events/${id}`, doneReply, { method: 'DELETE' }),
     onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
   });
 }

@@ -1,11 +1,13 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { doneSchema } from '@/lib/schemas/account';
-import { type SetupAnswer, type SetupState, setupStateSchema } from '@/lib/schemas/pool-profile';
+import type { SetupAnswer, SetupState } from '@/lib/schemas/pool-profile';
 import type { UnitSystem } from '@/lib/units/unit';
+import { doneReply } from './done-reply';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
+
+const setupReply = () => import('@/lib/schemas/pool-profile').then(({ setupStateSchema }) => setupStateSchema);
 
 const setupKey = ['pool'] as const;
 
@@ -13,7 +15,7 @@ const setupKey = ['pool'] as const;
 export function setupOptions() {
   return queryOptions({
     queryKey: setupKey,
-    queryFn: ({ signal }) => fetchJson('/api/pool', setupStateSchema, { signal }),
+    queryFn: ({ signal }) => fetchJson('/api/pool', setupReply, { signal }),
   });
 }
 
@@ -21,7 +23,7 @@ export function setupOptions() {
 export function useSaveSetup() {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (answer: SetupAnswer) => fetchJson('/api/pool', setupStateSchema, { method: 'PUT', body: answer }),
+    mutationFn: (answer: SetupAnswer) => fetchJson('/api/pool', setupReply, { method: 'PUT', body: answer }),
     onSuccess: async (state: SetupState) => {
       client.setQueryData(setupKey, state);
       await client.invalidateQueries({ queryKey: weekKeys.all });
@@ -33,6 +35,6 @@ export function useSaveSetup() {
 export function useSaveUnitSystem() {
   return useMutation({
     mutationFn: (unitSystem: UnitSystem) =>
-      fetchJson('/api/households', doneSchema, { method: 'PATCH', body: { unitSystem } }),
+      fetchJson('/api/households', doneReply, { method: 'PATCH', body: { unitSystem } }),
   });
 }

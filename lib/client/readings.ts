@@ -4,7 +4,7 @@ import { type QueryClient, useMutation, useQuery, useQueryClient } from '@tansta
 import { useEffect } from 'react';
 import { addDays } from '@/lib/calendar/household-day';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
-import { type NewReading, type RecordedReading, recordedReadingSchema } from '@/lib/schemas/reading';
+import type { NewReading, RecordedReading } from '@/lib/schemas/reading';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { fetchJson, RequestProblem } from './fetch-json';
 import {
@@ -16,6 +16,9 @@ import {
   useUnsentReadings,
 } from './unsent-readings';
 import { weekKeys, weekSheet } from './week';
+
+const recordedReadingReply = () =>
+  import('@/lib/schemas/reading').then(({ recordedReadingSchema }) => recordedReadingSchema);
 
 export { type FalseZeroCause, falseZeroQuestion } from '@/lib/verdict/false-zero';
 
@@ -57,7 +60,7 @@ export function useCorrectReading() {
   return useMutation({
     networkMode: 'always',
     mutationFn: async (reading: NewReading): Promise<SentReading> => {
-      const corrected = await fetchJson(`/api/readings/${reading.id}`, recordedReadingSchema, {
+      const corrected = await fetchJson(`/api/readings/${reading.id}`, recordedReadingReply, {
         method: 'PUT',
         body: reading,
       });
@@ -138,7 +141,7 @@ async function sendEach(owner: ReadingOwner): Promise<number> {
 const lastingRefusals: readonly string[] = ['invalid-input', 'not-allowed', 'conflict', 'not-found'];
 
 function post(reading: NewReading): Promise<RecordedReading> {
-  return fetchJson('/api/readings', recordedReadingSchema, { method: 'POST', body: reading });
+  return fetchJson('/api/readings', recordedReadingReply, { method: 'POST', body: reading });
 }
 
 function isOffline(problem: unknown): boolean {

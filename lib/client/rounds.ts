@@ -1,9 +1,11 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { type NewRound, roundsSchema } from '@/lib/schemas/round';
+import type { NewRound } from '@/lib/schemas/round';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
+
+const roundsReply = () => import('@/lib/schemas/round').then(({ roundsSchema }) => roundsSchema);
 
 const roundsKey = ['rounds'] as const;
 
@@ -11,7 +13,7 @@ const roundsKey = ['rounds'] as const;
 export function roundsOptions() {
   return queryOptions({
     queryKey: roundsKey,
-    queryFn: ({ signal }) => fetchJson('/api/rounds', roundsSchema, { signal }),
+    queryFn: ({ signal }) => fetchJson('/api/rounds', roundsReply, { signal }),
   });
 }
 
@@ -21,7 +23,7 @@ export function useRecordRound() {
   return useMutation({
     // Without a connection it fails in words rather than wait in silence.
     networkMode: 'always',
-    mutationFn: (round: NewRound) => fetchJson('/api/rounds', roundsSchema, { method: 'POST', body: round }),
+    mutationFn: (round: NewRound) => fetchJson('/api/rounds', roundsReply, { method: 'POST', body: round }),
     onSuccess: async (rounds) => {
       client.setQueryData(roundsKey, rounds);
       await client.invalidateQueries({ queryKey: weekKeys.all });

@@ -2,15 +2,16 @@
 
 import { type QueryClient, queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { SUBSTANCES } from '@/lib/chemistry/substances';
-import { doneSchema } from '@/lib/schemas/account';
-import {
-  type HouseholdProduct,
-  householdProductListSchema,
-  householdProductSchema,
-} from '@/lib/schemas/household-product';
+import type { HouseholdProduct } from '@/lib/schemas/household-product';
 import type { substances } from '@/lib/schemas/shelf-product';
+import { doneReply } from './done-reply';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
+
+const listReply = () =>
+  import('@/lib/schemas/household-product').then(({ householdProductListSchema }) => householdProductListSchema);
+const productReply = () =>
+  import('@/lib/schemas/household-product').then(({ householdProductSchema }) => householdProductSchema);
 
 const shelfKey = ['shelf-products'] as const;
 
@@ -18,7 +19,7 @@ const shelfKey = ['shelf-products'] as const;
 export function shelfOptions() {
   return queryOptions({
     queryKey: shelfKey,
-    queryFn: ({ signal }) => fetchJson('/api/shelf-products', householdProductListSchema, { signal }),
+    queryFn: ({ signal }) => fetchJson('/api/shelf-products', listReply, { signal }),
   });
 }
 
@@ -27,7 +28,7 @@ export function useSaveProduct() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (product: HouseholdProduct) =>
-      fetchJson('/api/shelf-products', householdProductSchema, { method: 'POST', body: product }),
+      fetchJson('/api/shelf-products', productReply, { method: 'POST', body: product }),
     onSuccess: (saved) =>
       changeShelf(client, (shelf) =>
         shelf.some(({ id }) => id === saved.id)
@@ -41,7 +42,7 @@ export function useRemoveProduct() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: async (id: string) => {
-      await fetchJson(`/api/shelf-products/${encodeURIComponent(id)}`, doneSchema, { method: 'DELETE' });
+      await fetchJson(`/api/shelf-products/${encodeURIComponent(id)}`, doneReply, { method: 'DELETE' });
       return id;
     },
     onSuccess: (removed) => changeShelf(client, (shelf) => shelf.filter(({ id }) => id !== removed)),

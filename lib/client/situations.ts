@@ -1,15 +1,11 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import {
-  type NewSituation,
-  type Situation,
-  type SituationEnding,
-  type Situations,
-  situationsSchema,
-} from '@/lib/schemas/situation';
+import type { NewSituation, Situation, SituationEnding, Situations } from '@/lib/schemas/situation';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
+
+const situationsReply = () => import('@/lib/schemas/situation').then(({ situationsSchema }) => situationsSchema);
 
 const situationsKey = ['situations'] as const;
 
@@ -17,7 +13,7 @@ const situationsKey = ['situations'] as const;
 export function situationsOptions() {
   return queryOptions({
     queryKey: situationsKey,
-    queryFn: ({ signal }) => fetchJson('/api/situations', situationsSchema, { signal }),
+    queryFn: ({ signal }) => fetchJson('/api/situations', situationsReply, { signal }),
   });
 }
 
@@ -62,7 +58,7 @@ function useChange<Change>(requestOf: (change: Change) => Request) {
     networkMode: 'always',
     mutationFn: (change: Change): Promise<Situations> => {
       const { path, method, body } = requestOf(change);
-      return fetchJson(`/api/situations${path}`, situationsSchema, { method, body });
+      return fetchJson(`/api/situations${path}`, situationsReply, { method, body });
     },
     onSuccess: async (situations) => {
       client.setQueryData(situationsKey, situations);

@@ -1,6 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { doneSchema } from '@/lib/schemas/account';
 import type { NewStopConfirmation } from '@/lib/schemas/stop-confirmation';
+import { doneReply } from './done-reply';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
 
@@ -11,7 +11,7 @@ export function useConfirmStop() {
     // Without a connection it fails in words rather than wait in silence.
     networkMode: 'always',
     mutationFn: (confirmation: NewStopConfirmation) =>
-      fetchJson('/api/stop-confirmations', doneSchema, { method: 'POST', body: confirmation }),
+      fetchJson('/api/stop-confirmations', doneReply, { method: 'POST', body: confirmation }),
     onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
   });
 }

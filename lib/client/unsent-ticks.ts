@@ -1,10 +1,12 @@
 import { useSyncExternalStore } from 'react';
-import { z } from 'zod';
-import { doseTickSchema } from '@/lib/schemas/plan-dose';
 import type { SentTick } from './doses';
 
-const storedSchema = z.array(z.object({ doseId: z.uuid(), tick: doseTickSchema }));
+type Checked = typeof import('./checked-ticks').checkedTicks;
+
+/** What checks the kept ticks comes with zod, after the page is drawn; until then there are none. */
+let checked: Checked | undefined;
 const nothing: readonly SentTick[] = [];
+const none = '[]';
 
 /**
  * Ticks that could not be sent, kept on this device for one person until they are. Reading gives the same array as long as
@@ -23,24 +25,36 @@ export function useUnsentTicks(personId: string): readonly SentTick[] {
 
 export function unsentTicks(personId: string): readonly SentTick[] {
   const text = stored(personId);
+  if (checked === undefined || text === none) return nothing;
   const known = cache.get(personId);
   if (known?.text === text) return known.ticks;
-  const ticks = storedSchema.safeParse(parsed(text)).data ?? nothing;
+  const ticks = checked(parsed(text)) ?? nothing;
   cache.set(personId, { text, ticks });
   return ticks;
 }
 
 /** Keeps a tick, the same one once only. @returns whether the device took it: a private window may refuse */
-export function keepTick(personId: string, sent: SentTick): boolean {
+export async function keepTick(personId: string, sent: SentTick): Promise<boolean> {
+  if (!(await canCheck())) return false;
   const others = unsentTicks(personId).filter(({ tick }) => tick.id !== sent.tick.id);
   return store(personId, [...others, sent]);
 }
 
-export function forgetTick(personId: string, tickId: string): void {
+export async function forgetTick(personId: string, tickId: string): Promise<void> {
+  if (!(await canCheck())) return;
   store(
     personId,
     unsentTicks(personId).filter(({ tick }) => tick.id !== tickId),
   );
+}
+
+async function canCheck(): Promise<boolean> {
+  try {
+    checked ??= (await import('./checked-ticks')).checkedTicks;
+    return true;
+  } catch {
+    return false;
+  }
 }
 
 function store(personId: string, ticks: readonly SentTick[]): boolean {
@@ -49,20 +63,25 @@ function store(personId: string, ticks: readonly SentTick[]): boolean {
   } catch {
     return false;
   }
-  listeners.forEach((listener) => listener());
+  tellAll();
   return true;
+}
+
+function tellAll(): void {
+  listeners.forEach((listener) => listener());
 }
 
 function stored(personId: string): string {
   try {
-    return window.localStorage.getItem(keyOf(personId)) ?? '[]';
+    return window.localStorage.getItem(keyOf(personId)) ?? none;
   } catch {
-    return '[]';
+    return none;
   }
 }
 
 function listen(listener: () => void): () => void {
   listeners.add(listener);
+  if (checked === undefined) void canCheck().then(tellAll);
   // Another tab of the same browser keeps to the same list.
   window.addEventListener('storage', listener);
   return () => {

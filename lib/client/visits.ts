@@ -1,8 +1,10 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import { type NewVisit, visitsSchema } from '@/lib/schemas/visit';
+import type { NewVisit } from '@/lib/schemas/visit';
 import { fetchJson } from './fetch-json';
+
+const visitsReply = () => import('@/lib/schemas/visit').then(({ visitsSchema }) => visitsSchema);
 
 const visitsKey = ['visits'] as const;
 
@@ -10,7 +12,7 @@ const visitsKey = ['visits'] as const;
 export function visitsOptions() {
   return queryOptions({
     queryKey: visitsKey,
-    queryFn: ({ signal }) => fetchJson('/api/visits', visitsSchema, { signal }),
+    queryFn: ({ signal }) => fetchJson('/api/visits', visitsReply, { signal }),
   });
 }
 
@@ -20,7 +22,7 @@ export function useRecordVisit() {
   return useMutation({
     // Without a connection it fails in words rather than wait in silence.
     networkMode: 'always',
-    mutationFn: (visit: NewVisit) => fetchJson('/api/visits', visitsSchema, { method: 'POST', body: visit }),
+    mutationFn: (visit: NewVisit) => fetchJson('/api/visits', visitsReply, { method: 'POST', body: visit }),
     onSuccess: (visits) => client.setQueryData(visitsKey, visits),
   });
 }

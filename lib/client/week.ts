@@ -1,6 +1,7 @@
 import { queryOptions } from '@tanstack/react-query';
-import { weekSheetSchema } from '@/lib/schemas/week-sheet';
 import { fetchJson } from './fetch-json';
+
+export const weekSheetReply = () => import('@/lib/schemas/week-sheet').then(({ weekSheetSchema }) => weekSheetSchema);
 
 const MINUTE = 60_000;
 
@@ -18,7 +19,7 @@ export const weekSheet = (start: string | undefined) =>
   queryOptions({
     queryKey: weekKeys.starting(start),
     queryFn: ({ signal }) =>
-      fetchJson(start === undefined ? '/api/week' : `/api/week?${new URLSearchParams({ start })}`, weekSheetSchema, {
+      fetchJson(start === undefined ? '/api/week' : `/api/week?${new URLSearchParams({ start })}`, weekSheetReply, {
         signal,
       }),
     staleTime: MINUTE,

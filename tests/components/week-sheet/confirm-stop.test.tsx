@@ -175,7 +175,7 @@ describe('nobody is asked', () => {
   });
 
   it('about a dose that was ticked on this device and waits to be sent', async () => {
-    keepTick(idOf(1), { doseId: thursday, tick: { action: 'given', id: idOf(901), planVersion: 3 } });
+    await keepTick(idOf(1), { doseId: thursday, tick: { action: 'given', id: idOf(901), planVersion: 3 } });
     await showSheet(unread(), phone);
     expect(screen.getByText(/waiting to be sent/)).toBeInTheDocument();
     expect(screen.queryByRole('button', { name: button })).toBeNull();

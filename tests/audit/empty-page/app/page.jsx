@@ -1,0 +1,7 @@
+import { connection } from 'next/server';
+
+/** Made per request, as every page of the product is. */
+export default async function EmptyPage() {
+  await connection();
+  return <main />;
+}
