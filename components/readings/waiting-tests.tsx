@@ -1,14 +1,14 @@
 'use client';
 
-import { useHydrated } from '@/components/ui/use-hydrated';
+import dynamic from 'next/dynamic';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
-import { UnsentTests } from './unsent-tests';
+
+/** The device's store is not known to the server. */
+const UnsentTests = dynamic(() => import('./unsent-tests').then((part) => part.UnsentTests), { ssr: false });
 
 /** Tests that wait on this device, on a page that is not about entering one: they are sent from there as well. */
 export function WaitingTests({ household }: { household: ReadingHousehold }) {
-  // The device's store is not known to the server.
-  const hydrated = useHydrated();
-  if (household.role === 'viewer' || !hydrated) return null;
+  if (household.role === 'viewer') return null;
   return (
     <ReadingSettingProvider household={household}>
       <div className="mx-margin mt-3 empty:hidden">

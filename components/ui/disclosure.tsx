@@ -1,6 +1,3 @@
-'use client';
-
-import { Collapsible } from '@base-ui/react/collapsible';
 import { ChevronDown } from 'lucide-react';
 import { classNames } from './class-names';
 
@@ -11,23 +8,21 @@ export type DisclosureProps = {
   className?: string;
 };
 
-/** A row that opens. What is inside can be found by the browser's own search while it is closed. */
+/** A row that opens, also before the scripts of the page have come. The browser's own search finds what is inside. */
 export function Disclosure({ summary, children, defaultOpen = false, className }: DisclosureProps) {
   return (
-    <Collapsible.Root defaultOpen={defaultOpen} className={classNames('border-t border-rule', className)}>
-      <Collapsible.Trigger className="group flex min-h-[66px] w-full cursor-pointer items-center gap-3 text-left md:min-h-14">
+    <details
+      open={defaultOpen || undefined}
+      className={classNames('disclosure group/disclosure border-t border-rule', className)}
+    >
+      <summary className="flex min-h-[66px] w-full cursor-pointer list-none items-center gap-3 text-left md:min-h-14 [&::-webkit-details-marker]:hidden">
         <span className="min-w-0 flex-1">{summary}</span>
         <ChevronDown
           aria-hidden="true"
-          className="size-5 shrink-0 text-ink-3 transition-[rotate] duration-expand group-data-panel-open:rotate-180"
+          className="size-5 shrink-0 text-ink-3 transition-[rotate] duration-expand group-open/disclosure:rotate-180"
         />
-      </Collapsible.Trigger>
-      <Collapsible.Panel
-        hiddenUntilFound
-        className="h-[var(--collapsible-panel-height)] overflow-hidden transition-[height] duration-expand data-ending-style:h-0 data-starting-style:h-0 [&[hidden]:not([hidden=until-found])]:hidden"
-      >
-        <div className="pb-4">{children}</div>
-      </Collapsible.Panel>
-    </Collapsible.Root>
+      </summary>
+      <div className="pb-4">{children}</div>
+    </details>
   );
 }

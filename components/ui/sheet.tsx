@@ -1,9 +1,8 @@
 'use client';
 
-import { Dialog as BaseDialog } from '@base-ui/react/dialog';
-import { X } from 'lucide-react';
-import { classNames } from './class-names';
-import { scrim } from './dialog';
+import dynamic from 'next/dynamic';
+import { useIdleFetch } from './use-idle-fetch';
+import { useOpenedOnce } from './use-opened-once';
 
 export type SheetProps = {
   open: boolean;
@@ -15,35 +14,12 @@ export type SheetProps = {
   aboveTabs?: boolean;
 };
 
-/** Rises over a phone page from its lower edge, under a double rule. */
-export function Sheet({ open, onOpenChange, title, closeLabel, children, aboveTabs = false }: SheetProps) {
-  const floor = aboveTabs ? 'bottom-tabs' : 'bottom-0';
-  return (
-    <BaseDialog.Root open={open} onOpenChange={onOpenChange} modal={aboveTabs ? 'trap-focus' : true}>
-      <BaseDialog.Portal>
-        <BaseDialog.Backdrop className={classNames(scrim, aboveTabs && 'bottom-tabs')} />
-        <BaseDialog.Popup
-          className={classNames(
-            'fixed inset-x-0 z-20 max-h-[calc(100dvh-8rem)] overflow-y-auto border-t-stop border-ink bg-paper-lift text-body text-ink outline-none',
-            'before:absolute before:inset-x-0 before:top-px before:border-t before:border-ink',
-            'transition-[translate] duration-expand ease-out data-ending-style:translate-y-full data-starting-style:translate-y-full',
-            floor,
-          )}
-        >
-          <div className="flex items-center justify-between pt-3 pr-2 pb-1 pl-4">
-            <BaseDialog.Title className="font-display text-[24px] leading-[30px] font-section">
-              {title}
-            </BaseDialog.Title>
-            <BaseDialog.Close
-              aria-label={closeLabel}
-              className="flex size-11 cursor-pointer items-center justify-center rounded"
-            >
-              <X aria-hidden="true" className="size-5.5" />
-            </BaseDialog.Close>
-          </div>
-          {children}
-        </BaseDialog.Popup>
-      </BaseDialog.Portal>
-    </BaseDialog.Root>
-  );
+const fetchPanel = () => import('./sheet-panel');
+const Panel = dynamic(() => import('./sheet-panel').then(({ SheetPanel }) => SheetPanel), { ssr: false });
+
+/** Rises over a phone page from its lower edge, under a double rule. What draws it is fetched once the page stands. */
+export function Sheet(props: SheetProps) {
+  useIdleFetch(fetchPanel);
+  const opened = useOpenedOnce(props.open);
+  return opened ? <Panel {...props} /> : null;
 }

@@ -4,13 +4,12 @@ import { useTranslations } from 'next-intl';
 import { useLayoutEffect, useRef } from 'react';
 import { ChartPatterns } from '@/components/charts/patterns';
 import { shareOf } from '@/components/charts/time-axis';
-import { TryIt } from '@/components/try-out/try-it';
 import { ChlorineWeekLane, PHLane, StabilizerLane, WeekCursorLine } from './chart-lanes';
 import { Colophon } from './colophon';
 import { DayHeads } from './day-heads';
 import { DayRules } from './day-rules';
-import { FourWays } from './four-ways';
 import { HighLowLane } from './high-low-lane';
+import { margin, tryIt } from './parts-that-follow';
 import { lanesFoot, PlumbLines } from './plumb-lines';
 import { useSheet } from './sheet-context';
 import { SheetTables } from './sheet-tables';
@@ -19,8 +18,6 @@ import { SunLane } from './sun-lane';
 import { ToDoLane } from './to-do-lane';
 import { useElementWidth } from './use-element-width';
 import { useLaneAxes } from './use-lane-axes';
-import { WhatChanged } from './what-changed';
-import { WhyThisMix } from './why-this-mix';
 
 /** Seven day-columns on one time axis, with the margin column beside or below them. */
 export function DeskSheet() {
@@ -35,10 +32,8 @@ export function DeskSheet() {
         </div>
       </div>
       <aside className="grid content-start gap-x-7.5 border-t border-ink pt-3.5 pb-6 sm:grid-cols-2 lg:grid-cols-1 lg:border-t-0">
-        <WhyThisMix />
-        <WhatChanged />
-        <FourWays />
-        <TryIt />
+        {margin}
+        {tryIt}
       </aside>
     </div>
   );

@@ -1,11 +1,10 @@
 'use client';
 
 import { ChartPatterns } from '@/components/charts/patterns';
-import { TryIt } from '@/components/try-out/try-it';
 import { Colophon } from './colophon';
 import { nextDose } from './dose-state';
-import { FourWays } from './four-ways';
 import { NextDoses } from './next-doses';
+import { margin, tryIt } from './parts-that-follow';
 import { PoolFacts } from './pool-facts';
 import { RestOfWeek } from './rest-of-week';
 import { useSheet } from './sheet-context';
@@ -13,8 +12,6 @@ import { SheetTables } from './sheet-tables';
 import { StopLine } from './stop-line';
 import { Today } from './today';
 import { useAsksStop } from './use-asks-stop';
-import { WhatChanged } from './what-changed';
-import { WhyThisMix } from './why-this-mix';
 
 /** The day first: what to do next, the Stop, today's water, then the rest of the week. */
 export function PhoneSheet() {
@@ -27,12 +24,10 @@ export function PhoneSheet() {
       <NextDoses />
       {!asked && <StopLine className="mt-3.5 border-y border-rule py-3" />}
       <Today />
-      <TryIt />
+      {tryIt}
       <RestOfWeek />
       <div className="mt-5.5 grid gap-4">
-        <WhyThisMix />
-        <WhatChanged />
-        <FourWays />
+        {margin}
         <SheetTables />
         <Colophon />
         <PoolFacts />

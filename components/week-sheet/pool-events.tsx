@@ -1,13 +1,17 @@
 'use client';
 
+import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import { EndEvent } from './end-event';
-import { ReportEvent } from './report-event';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
+
+const fetchReport = () => import('./report-event');
+const ReportEvent = dynamic(() => import('./report-event').then((part) => part.ReportEvent), { ssr: false });
 
 const SIX_DAYS = 6 * 86_400_000;
 
@@ -17,6 +21,7 @@ export function PoolEvents() {
   const { sheet } = useSheet();
   const times = useTimes();
   const [asking, setAsking] = useState(false);
+  useIdleFetch(fetchReport);
   // A weekday says nothing of what happened weeks ago.
   const whenOf = (instant: number) =>
     instantOf(sheet.now) - instant > SIX_DAYS ? times.heading(instant) : times.partAt(instant);

@@ -1,9 +1,11 @@
 'use client';
 
+import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { useId, useState } from 'react';
-import { DaysTable } from './days-table';
-import { HoursTable } from './hours-table';
+
+const DaysTable = dynamic(() => import('./days-table').then((part) => part.DaysTable), { ssr: false });
+const HoursTable = dynamic(() => import('./hours-table').then((part) => part.HoursTable), { ssr: false });
 
 const tables = ['chlorine', 'pH', 'stabilizer', 'days'] as const;
 type Table = (typeof tables)[number];

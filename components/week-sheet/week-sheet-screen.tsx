@@ -1,6 +1,7 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
+import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
@@ -17,8 +18,10 @@ import { PhoneSheet } from './phone-sheet';
 import { SheetProvider, useSheet } from './sheet-context';
 import { SheetStates } from './sheet-states';
 import { instantOf } from './sheet-times';
-import { UnsentNotice } from './unsent-notice';
 import { useIsPhone } from './use-is-phone';
+
+/** The device alone knows what waits on it; the server never draws it. */
+const UnsentNotice = dynamic(() => import('./unsent-notice').then((part) => part.UnsentNotice), { ssr: false });
 
 /** The week sheet, fetched and kept fresh. `initial`: what the server knew when it made the page. */
 export function WeekSheetScreen({ start, initial }: { start?: string | undefined; initial?: WeekSheet | undefined }) {
@@ -54,12 +57,26 @@ export function WeekSheetScreen({ start, initial }: { start?: string | undefined
   );
 }
 
+/**
+ * The sheet of a desk or that of a phone. Which of the two it is, only the browser knows: the server draws both, so that either
+ * can be read before any script has come, the style sheet shows one, and the other is dropped once React listens.
+ */
 function SheetBody() {
-  const t = useTranslations('week');
   const { sheet } = useSheet();
   const isPhone = useIsPhone();
   if (sheet.lastReading === null) return <FirstTest />;
-  // Which of the two it will be is only known in the browser; until then the page keeps its place.
-  if (isPhone === undefined) return <Skeleton label={t('loadingChart')} className="m-margin h-96" />;
-  return isPhone ? <PhoneSheet /> : <DeskSheet />;
+  return (
+    <>
+      {isPhone !== false && (
+        <div className="sm:hidden">
+          <PhoneSheet />
+        </div>
+      )}
+      {isPhone !== true && (
+        <div className="max-sm:hidden">
+          <DeskSheet />
+        </div>
+      )}
+    </>
+  );
 }
