@@ -2,45 +2,35 @@
 
 import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
-import type { LaneTime } from '@/components/charts/lane-chart';
 import { ticksOf, type ValueAxis } from '@/components/charts/value-axis';
-import { TriedLineLayer } from '@/components/try-out/tried-line-layer';
 import { limits } from '@/lib/standards/limits';
-import { chartDoses, chartTests } from './chart-input';
+import { WEEK } from './cursor-names';
 import { Lane } from './lane';
 import { AxisFigures, LaneName } from './lane-name';
 import { useSheet } from './sheet-context';
-import { useChlorinePhrases, useQuantityPhrases } from './use-chart-phrases';
-import { useDoseWords } from './use-dose-words';
 import { useUnits } from './use-units';
 
-export const LazyChlorineLane = dynamic(
-  () => import('@/components/charts/chlorine-lane').then((part) => part.ChlorineLane),
-  {
-    ssr: false,
-  },
-);
-const LazyQuantityLane = dynamic(() => import('@/components/charts/quantity-lane').then((part) => part.QuantityLane), {
+/** What is drawn in the lanes comes after the page, and their places are kept for it. */
+const LazyChlorinePicture = dynamic(() => import('./lane-pictures').then((part) => part.ChlorinePicture), {
   ssr: false,
 });
+export const LazyChlorineDayPicture = dynamic(() => import('./lane-pictures').then((part) => part.ChlorineDayPicture), {
+  ssr: false,
+});
+const LazyQuantityPicture = dynamic(() => import('./lane-pictures').then((part) => part.QuantityPicture), {
+  ssr: false,
+});
+export const LazyPlumbLines = dynamic(() => import('./plumb-lines').then((part) => part.PlumbLines), { ssr: false });
 
 /** The hour that is read, in the lanes beside the charts. It comes with the charts, for there is no reading without them. */
 export const LazyCursorLine = dynamic(() => import('@/components/charts/cursor-line').then((part) => part.CursorLine), {
   ssr: false,
 });
 
-/** One cursor for all lanes. */
-const SYNC = 'week-sheet';
-
 /** The hour that is read in a chart, through the lanes that are none; `height`: down to where the lanes end [px]. */
 export function WeekCursorLine({ height }: { height: number }) {
   const { axis } = useSheet().picture;
-  return <LazyCursorLine axis={axis} syncId={SYNC} height={height} />;
-}
-
-function useLaneTime(width: number): LaneTime {
-  const { axis, nights, now } = useSheet().picture;
-  return { axis, nights, now, width, syncId: SYNC };
+  return <LazyCursorLine axis={axis} syncId={WEEK} height={height} />;
 }
 
 /** `width`: of the plot [px]; nothing is drawn before it is known. */
@@ -49,12 +39,8 @@ type LaneProps = { width: number; value: ValueAxis };
 /** Free chlorine between its limits. */
 export function ChlorineWeekLane({ width, value }: LaneProps) {
   const t = useTranslations('week.lane');
-  const { sheet, picture } = useSheet();
+  const { sheet } = useSheet();
   const units = useUnits();
-  const doses = chartDoses(sheet.doses, useDoseWords());
-  const tests = chartTests(sheet.readings, 'freeChlorine');
-  const phrases = useChlorinePhrases();
-  const time = useLaneTime(width);
   const { swimLimit } = sheet.pool;
   const figures = [...new Set([...ticksOf(value), swimLimit])].map((at) => ({
     at,
@@ -71,23 +57,7 @@ export function ChlorineWeekLane({ width, value }: LaneProps) {
         </>
       }
     >
-      {width > 0 && (
-        <LazyChlorineLane
-          {...phrases}
-          span="week"
-          time={time}
-          value={value}
-          rows={picture.rows}
-          points={picture.points}
-          limits={picture.swimLimits}
-          swimLimit={swimLimit}
-          swimHours={picture.swimHours}
-          doses={doses}
-          tests={tests}
-          planEndsAt={picture.planEndsAt}
-        />
-      )}
-      <TriedLineLayer axis={time.axis} width={width} value={value} />
+      {width > 0 && <LazyChlorinePicture width={width} value={value} />}
     </Lane>
   );
 }
@@ -95,8 +65,6 @@ export function ChlorineWeekLane({ width, value }: LaneProps) {
 export function PHLane({ width, value }: LaneProps) {
   const t = useTranslations('week.lane');
   const units = useUnits();
-  const { sheet } = useSheet();
-  const tests = chartTests(sheet.readings, 'pH');
   const keep = [limits.pHRangeLow.value, limits.pHRangeHigh.value] as const;
   const [low, high] = keep.map((level) => units.figure(level, 'pH'));
   return (
@@ -109,7 +77,7 @@ export function PHLane({ width, value }: LaneProps) {
         </>
       }
     >
-      <LowLane quantity="pH" width={width} value={value} keep={keep} tests={tests} forbidden={[]} />
+      {width > 0 && <LazyQuantityPicture quantity="pH" width={width} value={value} keep={keep} forbidden={[]} />}
     </Lane>
   );
 }
@@ -118,7 +86,6 @@ export function StabilizerLane({ width, value }: LaneProps) {
   const t = useTranslations('week.lane');
   const units = useUnits();
   const { sheet } = useSheet();
-  const tests = chartTests(sheet.readings, 'cyanuricAcid');
   const [low, high] = sheet.pool.stabilizerBand;
   const words = { low: units.figure(low, 'cyanuricAcid'), high: units.figure(high, 'cyanuricAcid') };
   return (
@@ -134,44 +101,15 @@ export function StabilizerLane({ width, value }: LaneProps) {
         </>
       }
     >
-      <LowLane
-        quantity="cyanuricAcid"
-        width={width}
-        value={value}
-        keep={[low, high]}
-        tests={tests}
-        forbidden={[high]}
-      />
+      {width > 0 && (
+        <LazyQuantityPicture
+          quantity="cyanuricAcid"
+          width={width}
+          value={value}
+          keep={[low, high]}
+          forbidden={[high]}
+        />
+      )}
     </Lane>
-  );
-}
-
-type LowLaneProps = LaneProps & {
-  quantity: 'pH' | 'cyanuricAcid';
-  keep: readonly [number, number];
-  tests: ReturnType<typeof chartTests>;
-  /** Levels hatched on their upper side. */
-  forbidden: readonly number[];
-};
-
-function LowLane({ quantity, width, value, keep, tests, forbidden }: LowLaneProps) {
-  const { sheet, picture } = useSheet();
-  const phrases = useQuantityPhrases(quantity, keep);
-  const doses = chartDoses(sheet.doses, useDoseWords());
-  const time = useLaneTime(width);
-  if (width === 0) return null;
-  return (
-    <LazyQuantityLane
-      {...phrases}
-      quantity={quantity}
-      time={time}
-      value={value}
-      rows={picture.rows}
-      points={picture.points}
-      keep={keep}
-      limits={forbidden.map((level) => ({ ...picture.axis, value: level, forbidden: 'above' }))}
-      doses={doses}
-      tests={tests}
-    />
   );
 }

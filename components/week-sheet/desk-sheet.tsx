@@ -4,13 +4,13 @@ import { useTranslations } from 'next-intl';
 import { useLayoutEffect, useRef } from 'react';
 import { ChartPatterns } from '@/components/charts/patterns';
 import { shareOf } from '@/components/charts/time-axis';
-import { ChlorineWeekLane, PHLane, StabilizerLane, WeekCursorLine } from './chart-lanes';
+import { ChlorineWeekLane, LazyPlumbLines, PHLane, StabilizerLane, WeekCursorLine } from './chart-lanes';
 import { Colophon } from './colophon';
 import { DayHeads } from './day-heads';
 import { DayRules } from './day-rules';
 import { HighLowLane } from './high-low-lane';
+import { lanesFoot } from './lane';
 import { margin, tryIt } from './parts-that-follow';
-import { lanesFoot, PlumbLines } from './plumb-lines';
 import { useSheet } from './sheet-context';
 import { SheetTables } from './sheet-tables';
 import { StopLine } from './stop-line';
@@ -54,7 +54,7 @@ function Lanes() {
     >
       <div className="relative min-w-[1022px] md:min-w-0">
         <ChartPatterns />
-        <PlumbLines width={width} axes={axes} />
+        {width > 0 && <LazyPlumbLines width={width} axes={axes} />}
         <div ref={plot} className="pointer-events-none absolute inset-y-0 right-0 left-[var(--gutter)]">
           <DayRules />
           <WeekCursorLine height={lanesFoot} />

@@ -4,6 +4,9 @@ import { shareOf } from '@/components/charts/time-axis';
 /** Heights of the lanes [px]; the page and the plumb lines through it have to agree on them. */
 export const laneHeight = { head: 50, sun: 74, chlorine: 268, highLow: 36, pH: 58, stabilizer: 58 } as const;
 
+/** Where the drawn lanes end and the to-do lane begins [px]. */
+export const lanesFoot = Object.values(laneHeight).reduce((sum, height) => sum + height, 0);
+
 export type LaneName = keyof typeof laneHeight;
 
 /** One lane: its name in the gutter, its picture on the shared time axis. The gutter stays when the sheet is scrolled. */

@@ -5,7 +5,7 @@ import { isOn, xOf } from '@/components/charts/time-axis';
 import { type ValueAxis, yOf } from '@/components/charts/value-axis';
 import type { CurveQuantity } from '@/components/charts/water-curve';
 import { chartDoses } from './chart-input';
-import { laneHeight } from './lane';
+import { laneHeight, lanesFoot } from './lane';
 import { useSheet } from './sheet-context';
 import { useDoseWords } from './use-dose-words';
 
@@ -16,8 +16,6 @@ const tops: Record<CurveQuantity, number> = {
 };
 const figures = { top: tops.pH - laneHeight.highLow, bottom: tops.pH };
 const FIGURES_WIDTH = 96;
-/** Where the drawn lanes end and the to-do lane begins [px]. */
-export const lanesFoot = tops.cyanuricAcid + laneHeight.stabilizer;
 
 /** From the to-do lane up through the lanes to the curve that each dose lifts: drawn out once it is given. */
 export function PlumbLines({ width, axes }: { width: number; axes: Record<CurveQuantity, ValueAxis> }) {

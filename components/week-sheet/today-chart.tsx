@@ -2,15 +2,14 @@
 
 import { useTranslations } from 'next-intl';
 import { useMemo } from 'react';
-import { rowsOf } from '@/components/charts/chart-rows';
 import { chlorineDayAxis } from '@/components/charts/lane-axes';
 import { cutTo, shareOf } from '@/components/charts/time-axis';
 import { ticksOf } from '@/components/charts/value-axis';
 import { wholeCourse } from '@/components/charts/water-curve';
-import { TriedLineLayer } from '@/components/try-out/tried-line-layer';
 import { wallTimeText } from '@/lib/calendar/format';
-import { chartDoses, chartTests } from './chart-input';
-import { LazyChlorineLane, LazyCursorLine } from './chart-lanes';
+import { chartTests } from './chart-input';
+import { LazyChlorineDayPicture, LazyCursorLine } from './chart-lanes';
+import { TODAY } from './cursor-names';
 import { Nights, NowRule } from './lane';
 import { AxisFigures } from './lane-name';
 import { useSheet } from './sheet-context';
@@ -18,24 +17,18 @@ import { courseOn } from './sheet-picture';
 import { hourMarksOf, type SheetDay } from './sheet-times';
 import { SunBars } from './sun-bars';
 import { SwimmerHeads } from './swimmer-heads';
-import { useChlorinePhrases } from './use-chart-phrases';
-import { useDoseWords } from './use-dose-words';
 import { useElementWidth } from './use-element-width';
 import { useUnits } from './use-units';
 
 const HEIGHT = 208;
 const SUN_BASE = 46;
-/** One cursor for the sun and the curve. */
-const SYNC = 'today';
 
 /** The day's sun, swimmers and free chlorine on the day's own axis. */
 export function TodayChart({ day }: { day: SheetDay }) {
   const { sheet, picture } = useSheet();
   const [width, plot] = useElementWidth();
   const units = useUnits();
-  const doses = chartDoses(sheet.doses, useDoseWords());
   const axis = useMemo(() => ({ from: day.from, to: day.to }), [day.from, day.to]);
-  const phrases = useChlorinePhrases(axis);
   const course = useMemo(() => courseOn(sheet, axis), [sheet, axis]);
   const points = wholeCourse(course);
   const nights = picture.nights.flatMap((night) => cutTo(axis, night) ?? []);
@@ -49,32 +42,13 @@ export function TodayChart({ day }: { day: SheetDay }) {
       <div className="relative h-15.5">
         <Nights axis={axis} nights={nights} />
         <DaySun day={day} />
-        <LazyCursorLine axis={axis} syncId={SYNC} />
+        <LazyCursorLine axis={axis} syncId={TODAY} />
       </div>
       <div className="relative" style={{ height: HEIGHT }}>
         <AxisFigures value={value} figures={ticksOf(value, 36).map((at) => ({ at, words: units.number(at) }))} />
       </div>
       <div ref={plot} className="relative border-b border-rule-2" style={{ height: HEIGHT }}>
-        {width > 0 && (
-          <LazyChlorineLane
-            {...phrases}
-            span="day"
-            time={{ axis, nights, now: picture.now, width, syncId: SYNC }}
-            value={value}
-            rows={rowsOf(course)}
-            points={points}
-            limits={picture.swimLimits.flatMap((limit) => {
-              const cut = cutTo(axis, limit);
-              return cut ? [{ ...limit, ...cut }] : [];
-            })}
-            swimLimit={swimLimit}
-            swimHours={picture.swimHours.flatMap((hours) => cutTo(axis, hours) ?? [])}
-            doses={doses}
-            tests={tests}
-            planEndsAt={picture.planEndsAt}
-          />
-        )}
-        <TriedLineLayer axis={axis} width={width} value={value} />
+        {width > 0 && <LazyChlorineDayPicture axis={axis} width={width} value={value} />}
       </div>
       <div />
       <Hours day={day} />

@@ -10,7 +10,7 @@ import { Interruption, Refusal } from './refusal.mjs';
 import { dev, start } from './serve.mjs';
 import { test, verify } from './suite.mjs';
 
-const commands = { start, dev, build, test, verify, plan, bench, mutants, shots };
+const commands = { start, dev, build, test, verify, plan, bench, mutants, shots, audit };
 
 /** Runs one command; its exit code becomes ours. */
 export async function run(name, args) {
@@ -63,6 +63,14 @@ async function shots(args) {
   const CHROMIUM_PATH = await ensureChromium();
   await withLock('build', () => buildIfStale(testFolder));
   return runTypescript('lib/cli/shots.ts', args, { env: { CHROMIUM_PATH, NEXT_DIST_DIR: testFolder } });
+}
+
+/** How quick and how open to everybody the pages are, beside an empty one; from the build that the end-to-end tests use. */
+async function audit(args) {
+  await ensureDependencies();
+  const CHROMIUM_PATH = await ensureChromium();
+  await withLock('build', () => buildIfStale(testFolder));
+  return runTypescript('tests/audit/run.ts', args, { env: { CHROMIUM_PATH, NEXT_DIST_DIR: testFolder } });
 }
 
 async function runTypescript(file, args, { cwd, env, node = [] } = {}) {

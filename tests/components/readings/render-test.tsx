@@ -1,6 +1,8 @@
 import { fireEvent, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { vi } from 'vitest';
+// It follows the page in a browser.
+import '@/components/readings/test-for-now';
 import { TestEntry } from '@/components/readings/test-entry';
 import type { ReadingHousehold } from '@/components/readings/reading-setting';
 import { parseInstant } from '@/lib/calendar/wall-time';

@@ -39,7 +39,8 @@ async function show({ visits = [], notes = {}, changes = {}, answer }: Scene = {
   return { sent, section };
 }
 
-const open = (name: string | RegExp) => fireEvent.click(screen.getByRole('button', { name }));
+const press = (name: string | RegExp) => fireEvent.click(screen.getByRole('button', { name }));
+const open = (row: string) => fireEvent.click(screen.getByText(row));
 const aVisit: Visits[number] = {
   id: '00000000-0000-4000-8000-000000000001',
   visitedOn: '2026-05-02',
@@ -58,7 +59,7 @@ describe('the professional on the round', () => {
 
   it('is one tap away from a dripping seal', async () => {
     await show({ notes: { professionalName: 'The pool firm', professionalPhone: '+49 (0)30 12-34' } });
-    open('Pump seal: not fine');
+    press('Pump seal: not fine');
     const row = within(screen.getByText('Pump seal: it drips').closest('li')!);
     const call = await row.findByRole('link', { name: /Call The pool firm/ });
     expect(call).toHaveAttribute('href', 'tel:+49301234');
@@ -111,7 +112,7 @@ describe('the professional on the round', () => {
 describe('the bucket test', () => {
   const fill = (name: string, value: string) => fireEvent.change(screen.getByLabelText(name), { target: { value } });
   const openTest = () => {
-    open('Water level: not fine');
+    press('Water level: not fine');
     open('Work out the bucket test');
   };
 

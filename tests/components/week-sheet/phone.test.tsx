@@ -30,8 +30,9 @@ it('begins with the day: verdict, standing line, next dose and its steps, Stop, 
 
 it('opens a day with its doses, and their steps without a way to tick them early', async () => {
   const { user } = await showSheet(aWeekSheet(), { width: 390 });
-  await user.click(screen.getByRole('button', { name: /Fri 10/ }));
-  const day = screen.getByRole('button', { name: /Fri 10/ }).parentElement as HTMLElement;
+  await user.click(screen.getByText('Fri 10', { selector: 'summary *' }));
+  const day = screen.getByText('Fri 10', { selector: 'summary *' }).closest('details')!;
+  expect(day).toHaveAttribute('open');
   expect(within(day).getByText('Last light, about 19:40, pump on until 23:40')).toBeInTheDocument();
   expect(within(day).getByText(/15 L of water/)).toBeInTheDocument();
   expect(within(day).queryByRole('button', { name: 'Mark as added' })).not.toBeInTheDocument();

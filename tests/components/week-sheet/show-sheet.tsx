@@ -1,7 +1,16 @@
-import { screen } from '@testing-library/react';
+import { act, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { vi } from 'vitest';
 import { WeekSheetScreen } from '@/components/week-sheet/week-sheet-screen';
+// What follows the page in a browser is here already, so that it stands as soon as it is asked for.
+import '@/components/try-out/try-it';
+import '@/components/ui/dialog-panel';
+import '@/components/week-sheet/days-table';
+import '@/components/week-sheet/hours-table';
+import '@/components/week-sheet/margin';
+import '@/components/week-sheet/report-event';
+import '@/components/week-sheet/unsent-notice';
+import '@/lib/client/checked-ticks';
 import type { DoseTick } from '@/lib/schemas/plan-dose';
 import { type WeekSheet, weekSheetSchema } from '@/lib/schemas/week-sheet';
 import { renderWithWords } from '../../support/with-words';
@@ -63,5 +72,6 @@ export async function showSheet(
   );
   const page = renderWithWords(<WeekSheetScreen start={start} />);
   await screen.findByRole('heading', { level: 1 });
+  await act(() => new Promise<void>((settled) => setTimeout(settled)));
   return { ...page, sent, asked, user: userEvent.setup() };
 }

@@ -1,7 +1,7 @@
 import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
 import type { Server } from './server';
 
-const flags = [
+export const flags = [
   '--headless',
   '--no-sandbox',
   '--disable-gpu',

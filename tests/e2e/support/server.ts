@@ -130,7 +130,7 @@ export class Server {
 /** The name says that it is a test's: nothing else may have its clock set. */
 export const databaseFileOf = (name: string): string => join(runFolder, `test-${name}.db`);
 
-function freePort(): Promise<number> {
+export function freePort(): Promise<number> {
   return new Promise((resolve, reject) => {
     const probe = createServer();
     probe.once('error', reject);
