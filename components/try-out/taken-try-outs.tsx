@@ -37,6 +37,7 @@ function Taken({ tryOut }: { tryOut: TakenTryOut }) {
       {sheet.me.role !== 'viewer' && (
         <Button
           variant="quiet"
+          className="-ml-1.5"
           aria-label={t('putBackOf', { changes })}
           onClick={() => putBack.mutate(tryOut.id)}
           busy={putBack.isPending ? t('puttingBack') : undefined}
