@@ -125,6 +125,7 @@ export function Span(props: SpanProps) {
             '[&::-webkit-slider-thumb]:pointer-events-auto [&::-webkit-slider-thumb]:h-8.5 [&::-webkit-slider-thumb]:w-6 [&::-webkit-slider-thumb]:appearance-none [&::-webkit-slider-thumb]:rounded-tick [&::-webkit-slider-thumb]:border-due [&::-webkit-slider-thumb]:border-solid [&::-webkit-slider-thumb]:border-ink [&::-webkit-slider-thumb]:bg-paper-lift [&::-webkit-slider-thumb]:[background-image:var(--handle)]',
             '[&::-moz-range-thumb]:pointer-events-auto [&::-moz-range-thumb]:h-7.5 [&::-moz-range-thumb]:w-5 [&::-moz-range-thumb]:rounded-tick [&::-moz-range-thumb]:border-due [&::-moz-range-thumb]:border-solid [&::-moz-range-thumb]:border-ink [&::-moz-range-thumb]:bg-paper-lift [&::-moz-range-thumb]:[background-image:var(--handle)]',
             'focus-visible:[&::-webkit-slider-thumb]:outline-3 focus-visible:[&::-webkit-slider-thumb]:outline-offset-2 focus-visible:[&::-webkit-slider-thumb]:outline-teal focus-visible:[&::-webkit-slider-thumb]:outline-solid',
+            'focus-visible:[&::-moz-range-thumb]:outline-3 focus-visible:[&::-moz-range-thumb]:outline-offset-2 focus-visible:[&::-moz-range-thumb]:outline-teal focus-visible:[&::-moz-range-thumb]:outline-solid',
           )}
         />
       ))}

@@ -1,7 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import { useId } from 'react';
+import { Fragment, useId } from 'react';
 import { classNames } from '@/components/ui/class-names';
 import { formatNumber } from '@/lib/units/format';
 import type { Interval } from '@/lib/schemas/reading';
@@ -55,31 +55,28 @@ export function StripPad({ label, aside, steps, value, onChange, locale }: Strip
           const inside = value !== undefined && step >= value.low && step <= value.high;
           const joined = inside && previous !== undefined && previous >= value.low;
           return (
-            <label
-              key={step}
-              className={classNames(
-                'flex cursor-pointer items-center justify-center border-l-control text-[16.5px] leading-none font-chart first:rounded-l-[2px] first:border-l-0 last:rounded-r-[2px]',
-                'has-focus-visible:z-1 has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-teal',
-                inside ? 'bg-ink font-strong text-on-ink' : '',
-                joined ? 'border-ink' : 'border-rule-2',
+            <Fragment key={step}>
+              {previous === undefined ? null : (
+                <label
+                  className="absolute inset-y-0 w-6 -translate-x-1/2 cursor-pointer rounded-tick has-focus-visible:z-1 has-focus-visible:outline-3 has-focus-visible:outline-teal"
+                  style={{ left: `${(index / steps.length) * 100}%` }}
+                >
+                  {radio(previous, step)}
+                  <span className="sr-only">{t('between', { low: figure(previous), high: figure(step) })}</span>
+                </label>
               )}
-            >
-              {radio(step, step)}
-              {figure(step)}
-            </label>
-          );
-        })}
-        {steps.slice(1).map((high, index) => {
-          const low = steps[index] ?? high;
-          return (
-            <label
-              key={`${low} ${high}`}
-              className="absolute inset-y-0 w-6 -translate-x-1/2 cursor-pointer rounded-tick has-focus-visible:z-1 has-focus-visible:outline-3 has-focus-visible:outline-teal"
-              style={{ left: `${((index + 1) / steps.length) * 100}%` }}
-            >
-              {radio(low, high)}
-              <span className="sr-only">{t('between', { low: figure(low), high: figure(high) })}</span>
-            </label>
+              <label
+                className={classNames(
+                  'flex cursor-pointer items-center justify-center border-l-control text-[16.5px] leading-none font-chart first:rounded-l-[2px] first:border-l-0 last:rounded-r-[2px]',
+                  'has-focus-visible:z-1 has-focus-visible:outline-3 has-focus-visible:outline-offset-2 has-focus-visible:outline-teal',
+                  inside ? 'bg-ink font-strong text-on-ink' : '',
+                  joined ? 'border-ink' : 'border-rule-2',
+                )}
+              >
+                {radio(step, step)}
+                {figure(step)}
+              </label>
+            </Fragment>
           );
         })}
       </div>

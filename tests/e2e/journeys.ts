@@ -6,6 +6,7 @@ import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
 import { headers } from './journeys/headers';
 import { house } from './journeys/house';
+import { byKeyboard, escape } from './journeys/keyboard';
 import { labelBoxes } from './journeys/label-boxes';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
@@ -25,6 +26,7 @@ export const journeys: readonly Journey[] = [
   lookRound,
   ...looks,
   firstWeek,
+  byKeyboard,
   badForms,
   badRequests,
   ...clockChanges,
@@ -40,6 +42,7 @@ export const journeys: readonly Journey[] = [
   throughTheWeeks,
   cards,
   cardOffline,
+  escape,
   headers,
   measuring,
 ];

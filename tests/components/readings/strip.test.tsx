@@ -100,6 +100,12 @@ it('walks from a step to the seam beside it with the keyboard', async () => {
   // The browser moves between radios in the order in which they stand on the page.
   const keys = [...(key('pH', '7.2').closest('fieldset')?.querySelectorAll('input') ?? [])];
   expect(new Set(keys.map(({ name }) => name)).size).toBe(1);
+  expect(keys.map(({ labels }) => labels?.[0]?.textContent).slice(0, 4)).toEqual([
+    '6.2',
+    'between 6.2 and 6.8',
+    '6.8',
+    'between 6.8 and 7.2',
+  ]);
   expect(keys).toHaveLength(9);
   fireEvent.keyDown(key('pH', '7.2'), { key: 'Delete' });
   expect(key('pH', '7.2')).not.toBeChecked();

@@ -138,7 +138,7 @@ async function aVisit(stage: Stage, page: Page): Promise<void> {
   await page.goto('/rounds');
   const section = page.getByRole('region', { name: words('house.visits.title') });
   await section.getByRole('link', { name: /The pool firm in the lane/ }).waitFor();
-  await section.getByRole('button', { name: words('house.visits.writeDown') }).click();
+  await section.locator('summary', { hasText: words('house.visits.writeDown') }).click();
   await section.getByLabel(words('house.visits.note')).fill('New seal on the pump');
   await section.getByRole('button', { name: words('house.visits.save') }).click();
   await section.getByText(words('house.visits.kept')).waitFor();

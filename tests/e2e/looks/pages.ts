@@ -144,7 +144,7 @@ export const signedIn: readonly View[] = [
         .getByRole('button', { name: pattern('learnt.why.openFor') })
         .first()
         .click();
-      await page.getByRole('button', { name: words('learnt.more') }).click();
+      await page.locator('summary', { hasText: words('learnt.more') }).click();
       await page.getByRole('heading', { name: words('learnt.thing.carbonDioxideTransfer.name') }).waitFor();
     },
   },
@@ -184,7 +184,7 @@ export const signedIn: readonly View[] = [
         const name = words(`rounds.item.${item}.name`);
         await page.getByRole('button', { name: `${name}: not fine` }).click();
       }
-      await page.getByRole('button', { name: words('house.visits.writeDown') }).click();
+      await page.locator('summary', { hasText: words('house.visits.writeDown') }).click();
       await page.getByLabel(words('house.visits.note')).waitFor();
     },
   },
