@@ -104,7 +104,7 @@ async function readCard(stage: Stage, page: Page, person: Person, card: string):
   await page.goto('/week');
   await page.getByRole('heading', { name: words('week.phone.rest') }).waitFor();
   // Each one that is opened leaves the list of those that are shut.
-  const shut = page.locator('main button[aria-expanded=false]');
+  const shut = page.locator('main details:not([open]) > summary');
   for (let left = await shut.count(); left > 0; left--) await shut.first().click();
   const first = plain(`doses.steps.${card}.1`);
   const steps = page.locator('ol').filter({ hasText: first }).first();
