@@ -1,13 +1,13 @@
 'use client';
 
 import { Check, Hand, UserRound } from 'lucide-react';
+import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { ClaimedBy } from './claimed-by';
-import { ConfirmStop } from './confirm-stop';
-import { OtherAmount } from './other-amount';
 import { useSheet } from './sheet-context';
 import { SkipDose } from './skip-dose';
 import { TabletsLeft } from './tablets-left';
@@ -15,12 +15,17 @@ import { useAsksStop } from './use-asks-stop';
 import { useDosingBar } from './use-dosing-bar';
 import type { Tick } from './use-tick';
 
+const ConfirmStop = dynamic(() => import('./confirm-stop').then((part) => part.ConfirmStop));
+const fetchOtherAmount = () => import('./other-amount');
+const OtherAmount = dynamic(() => import('./other-amount').then((part) => part.OtherAmount), { ssr: false });
+
 /** What may be said of a dose that is due. Where the Stop is still to be read, that comes before all that puts it in. */
 export function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {
   const t = useTranslations('doses');
   const { sheet } = useSheet();
   const [asking, setAsking] = useState<'other' | 'skip' | undefined>(undefined);
   const [left, setLeft] = useState<number | undefined>(undefined);
+  useIdleFetch(fetchOtherAmount);
   const asksStop = useAsksStop()(dose);
   // What went in all the same can be ticked; nobody is asked to begin.
   const barred = useDosingBar() !== undefined;

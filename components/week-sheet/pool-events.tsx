@@ -5,11 +5,11 @@ import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { useIdleFetch } from '@/components/ui/use-idle-fetch';
-import { EndEvent } from './end-event';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
 
+const EndEvent = dynamic(() => import('./end-event').then((part) => part.EndEvent));
 const fetchReport = () => import('./report-event');
 const ReportEvent = dynamic(() => import('./report-event').then((part) => part.ReportEvent), { ssr: false });
 

@@ -11,7 +11,6 @@ import { weekSheet } from '@/lib/client/week';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { ClockProvider } from './clock-context';
 import { DeskSheet } from './desk-sheet';
-import { FirstTest } from './first-test';
 import { Masthead } from './masthead';
 import { NotRefreshed } from './not-refreshed';
 import { PhoneSheet } from './phone-sheet';
@@ -20,6 +19,7 @@ import { SheetStates } from './sheet-states';
 import { instantOf } from './sheet-times';
 import { useIsPhone } from './use-is-phone';
 
+const FirstTest = dynamic(() => import('./first-test').then((part) => part.FirstTest));
 /** The device alone knows what waits on it; the server never draws it. */
 const UnsentNotice = dynamic(() => import('./unsent-notice').then((part) => part.UnsentNotice), { ssr: false });
 

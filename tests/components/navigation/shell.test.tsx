@@ -3,6 +3,9 @@ import { screen, waitFor, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { usePathname } from 'next/navigation';
 import { beforeEach, expect, it, vi } from 'vitest';
+// It follows the page in a browser.
+import '@/components/navigation/more-sheet';
+import '@/components/ui/sheet-panel';
 import { HouseholdShell } from '@/components/navigation/household-shell';
 import { SignedOutShell } from '@/components/navigation/signed-out-shell';
 import { situationsOptions } from '@/lib/client/situations';

@@ -5,9 +5,13 @@ import { WeekSheetScreen } from '@/components/week-sheet/week-sheet-screen';
 // What follows the page in a browser is here already, so that it stands as soon as it is asked for.
 import '@/components/try-out/try-it';
 import '@/components/ui/dialog-panel';
+import '@/components/week-sheet/confirm-stop';
 import '@/components/week-sheet/days-table';
+import '@/components/week-sheet/end-event';
+import '@/components/week-sheet/first-test';
 import '@/components/week-sheet/hours-table';
 import '@/components/week-sheet/margin';
+import '@/components/week-sheet/other-amount';
 import '@/components/week-sheet/report-event';
 import '@/components/week-sheet/unsent-notice';
 import '@/lib/client/checked-ticks';
