@@ -26,7 +26,7 @@ const SUN_BASE = 46;
 /** The day's sun, swimmers and free chlorine on the day's own axis. */
 export function TodayChart({ day }: { day: SheetDay }) {
   const { sheet, picture } = useSheet();
-  const [width, plot] = useElementWidth();
+  const [width, plot] = useElementWidth({ whenNear: true });
   const units = useUnits();
   const axis = useMemo(() => ({ from: day.from, to: day.to }), [day.from, day.to]);
   const course = useMemo(() => courseOn(sheet, axis), [sheet, axis]);
@@ -42,12 +42,12 @@ export function TodayChart({ day }: { day: SheetDay }) {
       <div className="relative h-15.5">
         <Nights axis={axis} nights={nights} />
         <DaySun day={day} />
-        <LazyCursorLine axis={axis} syncId={TODAY} />
+        {width > 0 && <LazyCursorLine axis={axis} syncId={TODAY} />}
       </div>
       <div className="relative" style={{ height: HEIGHT }}>
         <AxisFigures value={value} figures={ticksOf(value, 36).map((at) => ({ at, words: units.number(at) }))} />
       </div>
-      <div ref={plot} className="relative border-b border-rule-2" style={{ height: HEIGHT }}>
+      <div ref={plot} data-plot="today" className="relative border-b border-rule-2" style={{ height: HEIGHT }}>
         {width > 0 && <LazyChlorineDayPicture axis={axis} width={width} value={value} />}
       </div>
       <div />

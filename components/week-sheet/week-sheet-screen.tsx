@@ -7,6 +7,7 @@ import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Skeleton } from '@/components/ui/skeleton';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
+import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import { weekSheet } from '@/lib/client/week';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { ClockProvider } from './clock-context';
@@ -48,13 +49,19 @@ export function WeekSheetScreen({ start, initial }: { start?: string | undefined
         {query.isError && <NotRefreshed />}
         <Masthead />
         <div className="mx-margin grid gap-3 empty:hidden sm:my-3">
-          <UnsentNotice />
+          <Unsent />
           <SheetStates />
         </div>
         <SheetBody />
       </SheetProvider>
     </ClockProvider>
   );
+}
+
+/** Nothing at all where nothing waits: even an empty place would move the page when it goes. */
+function Unsent() {
+  const { sheet } = useSheet();
+  return useUnsentTicks(sheet.me.id).length > 0 && <UnsentNotice />;
 }
 
 /**

@@ -7,14 +7,8 @@ import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { NewReading, RecordedReading } from '@/lib/schemas/reading';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { fetchJson, RequestProblem } from './fetch-json';
-import {
-  forgetReading,
-  keepReading,
-  type ReadingOwner,
-  type UnsentReading,
-  unsentReadings,
-  useUnsentReadings,
-} from './unsent-readings';
+import { forgetReading, keepReading, type UnsentReading, unsentReadings, useUnsentReadings } from './unsent-readings';
+import type { ReadingOwner } from './unsent-readings-key';
 import { weekKeys, weekSheet } from './week';
 
 const recordedReadingReply = () =>

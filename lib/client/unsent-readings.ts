@@ -1,15 +1,13 @@
 import { useSyncExternalStore } from 'react';
 import { z } from 'zod';
 import { type NewReading, newReadingSchema } from '@/lib/schemas/reading';
+import { type ReadingOwner, unsentReadingsKey } from './unsent-readings-key';
 
 /** A test that has not reached the server; `refusal` says why it will not be taken as it is. */
 export type UnsentReading = { reading: NewReading; refusal: string | null };
 
 const keptSchema = z.array(z.object({ reading: newReadingSchema, refusal: z.string().nullable() }));
 const nothing: readonly UnsentReading[] = [];
-
-/** Whose tests they are: they were taken by one person for one household, and go nowhere else. */
-export type ReadingOwner = { personId: string; householdId: string };
 
 const cache = new Map<string, { text: string; readings: readonly UnsentReading[] }>();
 const listeners = new Set<() => void>();
@@ -24,7 +22,7 @@ export function useUnsentReadings(owner: ReadingOwner): readonly UnsentReading[]
 
 /** The same array as long as nothing has changed, as React asks of a store. */
 export function unsentReadings(owner: ReadingOwner): readonly UnsentReading[] {
-  const key = keyOf(owner);
+  const key = unsentReadingsKey(owner);
   const text = stored(key);
   const known = cache.get(key);
   if (known?.text === text) return known.readings;
@@ -48,7 +46,7 @@ export function forgetReading(owner: ReadingOwner, id: string): void {
 
 function store(owner: ReadingOwner, readings: readonly UnsentReading[]): boolean {
   try {
-    window.localStorage.setItem(keyOf(owner), JSON.stringify(readings));
+    window.localStorage.setItem(unsentReadingsKey(owner), JSON.stringify(readings));
   } catch {
     // A full or forbidden store: the caller says so, and the form keeps what was typed.
     return false;
@@ -65,10 +63,6 @@ function listen(listener: () => void): () => void {
     listeners.delete(listener);
     window.removeEventListener('storage', listener);
   };
-}
-
-function keyOf({ personId, householdId }: ReadingOwner): string {
-  return `wadewell.unsent-readings.${personId}.${householdId}`;
 }
 
 function stored(key: string): string {

@@ -1,9 +1,9 @@
-import { useSyncExternalStore } from 'react';
+import { useCallback, useSyncExternalStore } from 'react';
 import type { SentTick } from './doses';
 
 type Checked = typeof import('./checked-ticks').checkedTicks;
 
-/** What checks the kept ticks comes with zod, after the page is drawn; until then there are none. */
+/** What checks ticks of an earlier page comes with zod, and only where there are any; until then there are none. */
 let checked: Checked | undefined;
 const nothing: readonly SentTick[] = [];
 const none = '[]';
@@ -16,8 +16,9 @@ const cache = new Map<string, { text: string; ticks: readonly SentTick[] }>();
 const listeners = new Set<() => void>();
 
 export function useUnsentTicks(personId: string): readonly SentTick[] {
+  const subscribe = useCallback((listener: () => void) => listen(personId, listener), [personId]);
   return useSyncExternalStore(
-    listen,
+    subscribe,
     () => unsentTicks(personId),
     () => nothing,
   );
@@ -25,9 +26,10 @@ export function useUnsentTicks(personId: string): readonly SentTick[] {
 
 export function unsentTicks(personId: string): readonly SentTick[] {
   const text = stored(personId);
-  if (checked === undefined || text === none) return nothing;
+  if (text === none) return nothing;
   const known = cache.get(personId);
   if (known?.text === text) return known.ticks;
+  if (checked === undefined) return nothing;
   const ticks = checked(parsed(text)) ?? nothing;
   cache.set(personId, { text, ticks });
   return ticks;
@@ -35,17 +37,23 @@ export function unsentTicks(personId: string): readonly SentTick[] {
 
 /** Keeps a tick, the same one once only. @returns whether the device took it: a private window may refuse */
 export async function keepTick(personId: string, sent: SentTick): Promise<boolean> {
-  if (!(await canCheck())) return false;
+  if (!(await isRead(personId))) return false;
   const others = unsentTicks(personId).filter(({ tick }) => tick.id !== sent.tick.id);
   return store(personId, [...others, sent]);
 }
 
 export async function forgetTick(personId: string, tickId: string): Promise<void> {
-  if (!(await canCheck())) return;
+  if (!(await isRead(personId))) return;
   store(
     personId,
     unsentTicks(personId).filter(({ tick }) => tick.id !== tickId),
   );
+}
+
+/** Whether what is kept is known: what this page kept itself needs no check. */
+async function isRead(personId: string): Promise<boolean> {
+  const text = stored(personId);
+  return text === none || cache.get(personId)?.text === text || canCheck();
 }
 
 async function canCheck(): Promise<boolean> {
@@ -58,11 +66,13 @@ async function canCheck(): Promise<boolean> {
 }
 
 function store(personId: string, ticks: readonly SentTick[]): boolean {
+  const text = JSON.stringify(ticks);
   try {
-    window.localStorage.setItem(keyOf(personId), JSON.stringify(ticks));
+    window.localStorage.setItem(keyOf(personId), text);
   } catch {
     return false;
   }
+  cache.set(personId, { text, ticks });
   tellAll();
   return true;
 }
@@ -79,9 +89,9 @@ function stored(personId: string): string {
   }
 }
 
-function listen(listener: () => void): () => void {
+function listen(personId: string, listener: () => void): () => void {
   listeners.add(listener);
-  if (checked === undefined) void canCheck().then(tellAll);
+  if (checked === undefined && stored(personId) !== none) void canCheck().then(tellAll);
   // Another tab of the same browser keeps to the same list.
   window.addEventListener('storage', listener);
   return () => {

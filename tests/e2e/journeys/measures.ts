@@ -5,7 +5,7 @@ import { describePool, fullTest, sundayEvening } from '../support/households';
 import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
 import type { Server } from '../support/server';
-import { curves } from '../support/sheet';
+import { curvesDrawn } from '../support/sheet';
 import { pattern, words } from '../support/words';
 
 /** Metric and US: the volume in the wrong unit is asked back, and every figure on a page has its unit. */
@@ -62,7 +62,7 @@ async function unitsOnSheet(stage: Stage, server: Server, system: 'metric' | 'us
   const { page } = visitor;
   await enterAs(visitor, person);
   await page.goto('/week');
-  await page.locator(curves).first().waitFor({ state: 'attached' });
+  await curvesDrawn(page);
   const week = await textOf(page);
   await page
     .getByRole('button', { name: words('doses.action.steps') })

@@ -1,7 +1,7 @@
 import type { Page } from 'playwright-core';
 import { readStop } from '../support/doses';
 import { choice } from '../support/first-run';
-import { curves } from '../support/sheet';
+import { curvesDrawn } from '../support/sheet';
 import { pattern, words } from '../support/words';
 
 /** A page, or a state of one, as somebody sees it. */
@@ -107,14 +107,14 @@ export const signedIn: readonly View[] = [
     name: 'week',
     path: '/week',
     async prepare(page) {
-      await page.locator(curves).first().waitFor({ state: 'attached' });
+      await curvesDrawn(page);
     },
   },
   {
     name: 'week-tables',
     path: '/week',
     async prepare(page) {
-      await page.locator(curves).first().waitFor({ state: 'attached' });
+      await curvesDrawn(page);
       await page.getByRole('button', { name: words('week.table.days'), exact: true }).click();
       await page.getByRole('region').locator('table').first().waitFor();
     },

@@ -5,6 +5,13 @@ import type { Stage } from './journey';
 /** The lines that are drawn in the charts of the week sheet: the curves, and the limits, which run level. */
 export const curves = 'path.recharts-line-curve';
 
+/** Waits for a curve to be drawn. On a phone that of today is drawn once somebody scrolls near it. */
+export async function curvesDrawn(page: Page): Promise<void> {
+  const today = page.locator('[data-plot="today"]:visible');
+  if ((page.viewportSize()?.width ?? 0) < 600) await today.scrollIntoViewIfNeeded();
+  await page.locator(curves).first().waitFor({ state: 'attached' });
+}
+
 /** The colours in which the three curves are drawn, by what they show. */
 const strokes = { freeChlorine: 'rgb(14, 124, 134)', pH: 'rgb(107, 76, 122)', stabilizer: 'rgb(174, 126, 34)' };
 
