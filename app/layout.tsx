@@ -5,6 +5,7 @@ import './globals.css';
 import type { Metadata, Viewport } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { connection } from 'next/server';
+import { preload } from 'react-dom';
 import { UiProvider } from '@/components/ui/ui-provider';
 import { Providers } from '@/lib/client/providers';
 import { ClientMessages } from '@/lib/messages/client-messages';
@@ -27,11 +28,21 @@ export async function generateMetadata(): Promise<Metadata> {
   };
 }
 
+/** Those of every page, asked for beside the style sheet that names them: text that changes its width later would move the page. */
+const fonts = [
+  new URL('@fontsource-variable/fraunces/files/fraunces-latin-full-normal.woff2', import.meta.url),
+  new URL(
+    '@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2',
+    import.meta.url,
+  ),
+];
+
 export const viewport: Viewport = { width: 'device-width', initialScale: 1, colorScheme: 'light dark' };
 
 export default async function RootLayout({ children }: { children: React.ReactNode }) {
   // Every page is made per request: a page made at build time would carry no nonce and its scripts would be refused.
   await connection();
+  for (const font of fonts) preload(font.pathname, { as: 'font', type: 'font/woff2', crossOrigin: '' });
   return (
     <html lang="en">
       <body>
