@@ -84,6 +84,15 @@ export function checksOf(
     lastTest = at;
   }
   checks.push({ at: due, kind: 'full', reason: 'next-week' });
+  // Where that comes before the companion shows and no morning is left after it, the plan ends with another.
+  if (companion && !retested && due < Math.min(companion.retestAt, endsAt)) {
+    const shows = companion.retestAt <= endsAt;
+    checks.push({
+      at: endsAt,
+      kind: shows && quickShows(companion) ? 'quick' : 'full',
+      reason: shows ? 'after-companion' : 'next-week',
+    });
+  }
   return checks.sort((a, b) => a.at - b.at).map((check) => ({ ...check, at: toOffsetIso(check.at, pool.timeZone) }));
 }
 

@@ -25,8 +25,9 @@ type Explained = {
   alternatives: readonly Alternative[];
   broken: readonly BrokenLimit[];
   openShare: number;
-  /** What the products of the plan cost. */
+  /** What the products of the plan cost, and the whole of what it costs. */
   money: number;
+  total: number;
 };
 
 /** Why this plan, as codes with their figures; what the person must know first comes first. */
@@ -61,8 +62,8 @@ export function reasonsOf(plan: Explained, context: PlanContext): Fact[] {
     });
   else if (options.noTablets)
     reason(options.noTablets, { stabilizer: water.cyanuricAcid, upper: pool.stabilizerBand[1], pH: water.pH });
-  // Where the household wants none, nobody has looked whether they would be better.
-  else if (free && !context.wishes.noFurtherTablets) reason('no-tablets-better-without');
+  // Where the household wants none, nobody has looked whether they would be better; a halved first dose may make them so.
+  else if (free && !context.wishes.noFurtherTablets && !tabletsCostLess(plan)) reason('no-tablets-better-without');
 
   const closes = plan.broken.every(({ limit }) => limit !== ('lowest-level' satisfies LimitCode));
   for (const form of new Set(fast.map((dose) => dose.form))) {
@@ -88,6 +89,11 @@ function cheapest({ broken, alternatives, doses, money }: Explained): boolean {
   const hundredths = (price: number) => Math.round(price * 100);
   const cheaper = others.every((other) => hundredths(other.money) > hundredths(money));
   return doses.length > 0 && broken.length === 0 && others.length > 0 && cheaper;
+}
+
+/** Whether the week with tablets alone costs less over all. */
+function tabletsCostLess({ alternatives, total }: Explained): boolean {
+  return alternatives.some((way) => way.kind === 'tablets' && way.doses.length > 0 && way.total < total);
 }
 
 function isSameWay(one: readonly PlannedDose[], other: readonly PlannedDose[]): boolean {

@@ -6,21 +6,18 @@ import { alternativesOf, burdenOf } from './alternatives';
 import { assertSafePlan } from './safety/assert-safe-plan';
 import { frame, planWithout } from './bare-plan';
 import { checksOf } from './checks';
-import { companionWeek } from './companion-week';
 import type { Companion } from './companions/companion';
 import type { DoseReason } from './codes';
-import { contextOf, type PlanContext } from './context';
-import { evaluate, type Evaluated, moneyOf, stabilizedIn } from './cost';
+import type { PlanContext } from './context';
+import { type Evaluated, moneyOf, stabilizedIn } from './cost';
 import { cautionsOf, reasonsOf } from './explain';
-import { halveFirstDose } from './first-dose';
+import { findWeek } from './found-week';
 import { brokenLimits, openSwimShare } from './limits-broken';
 import { midWeekTestPays } from './mid-week-test';
 import { needsOf } from './needs';
 import { plannedDoses } from './planned-doses';
 import { projectionOf } from './projection-of';
 import { isFirstEver, refuseWishes } from './refuse-wishes';
-import { searchPlan } from './search';
-import { sketchWeek } from './week-sketch';
 import { weights } from './weights';
 import { costWithWished, type Wished, wishedIn } from './wished-doses';
 import { isEmptyWish, noWishes, wishesInForce } from './wishes';
@@ -46,13 +43,9 @@ export function planWeek(scenario: Scenario): WeekPlan {
   const { blocking, wanted } = needsOf(scenario);
   if (blocking.length > 0) return planWithout(scenario, [...blocking, ...wanted]);
   const wishes = wishesInForce(scenario);
-  const { sketch, companion, waiting } = companionWeek(sketchWeek(contextOf(scenario, { wishes })));
-  const { context, options, choice, response, sketches } = sketch;
-  const found = searchPlan(context, response, choice, sketches);
-  const { draft, halvedEvening } = wishedComesFirst(found, context)
-    ? { draft: found.draft, halvedEvening: null }
-    : halveFirstDose(found.draft, scenario);
-  const best = draft === found.draft ? found : evaluate(draft, choice, context);
+  const { sketch, companion, waiting, best, halvedEvening } = findWeek(scenario, wishes);
+  const { context, options, choice } = sketch;
+  const { draft } = best;
 
   const stabilized = stabilizedIn(draft, context);
   const searched = plannedDoses(draft, choice, context, halvedEvening);
@@ -65,11 +58,13 @@ export function planWeek(scenario: Scenario): WeekPlan {
   const openShare = openSwimShare(projection, doses, context);
   // What each form alone would do has nothing to do with what was wished.
   const alternatives = isEmptyWish(wishes)
-    ? alternativesOf(sketch, best)
+    ? alternativesOf(sketch, best).map((way) => ({ ...way, total: way.total + costOfCompanion(companion, scenario) }))
     : planWeek({ ...scenario, wishes: noWishes }).alternatives;
+  const cost = withCompanion(costWithWished(best, wished, context), companion, scenario);
   const explained = {
     ...{ doses, chlorine, choice, options, alternatives, broken, openShare, waiting },
     money: moneyOf(draft, choice) + wished.burden.money,
+    total: cost.total,
   };
   const plan: WeekPlan = {
     ...frame(context),
@@ -77,7 +72,7 @@ export function planWeek(scenario: Scenario): WeekPlan {
     doses,
     checks: checksOf(projection, doses, companion, midWeekTestPays(best, context), context, stabilized),
     endOfWeek: endOf(best),
-    cost: withCompanion(costWithWished(best, wished, context), companion, scenario),
+    cost,
     mix: withWished(burdenOf(best, searched, context), wished),
     alternatives,
     openSwimShare: openShare,
@@ -92,12 +87,6 @@ export function planWeek(scenario: Scenario): WeekPlan {
 
 function inOrder(doses: readonly PlannedDose[]): PlannedDose[] {
   return doses.toSorted((a, b) => Date.parse(a.at) - Date.parse(b.at));
-}
-
-/** Whether a wished dose goes in before all that the search found. */
-function wishedComesFirst({ draft, choice }: Evaluated, { wished }: PlanContext): boolean {
-  const found = choice.evenings.filter((_, evening) => draft.tablets[evening]! > 0 || draft.measures[evening]! > 0);
-  return Math.min(...wished.map(({ at }) => at)) < Math.min(...found.map(({ at }) => at));
 }
 
 /** Where nothing has gone in yet and the volume is an estimate, the first dose is a half one and asks for a test after it. */
@@ -117,12 +106,25 @@ function withWished(burden: Burden, { burden: { money, visits, kilograms } }: Wi
   };
 }
 
-/** What the companion costs beside the chlorine: its product and its visit. */
-function withCompanion(cost: Cost, companion: Companion | null, { preferences }: Scenario): Cost {
-  if (!companion) return cost;
-  const money = preferences.money * companion.money;
-  const visit = preferences.evenings * weights.visit;
-  return { ...cost, money: cost.money + money, visits: cost.visits + visit, total: cost.total + money + visit };
+/** What the companion costs beside the chlorine, whatever form that has: its product and its visit. */
+function partsOfCompanion(companion: Companion | null, { preferences }: Scenario) {
+  if (!companion) return { money: 0, visits: 0 };
+  return { money: preferences.money * companion.money, visits: preferences.evenings * weights.visit };
+}
+
+function costOfCompanion(companion: Companion | null, scenario: Scenario): number {
+  const { money, visits } = partsOfCompanion(companion, scenario);
+  return money + visits;
+}
+
+function withCompanion(cost: Cost, companion: Companion | null, scenario: Scenario): Cost {
+  const { money, visits } = partsOfCompanion(companion, scenario);
+  return {
+    ...cost,
+    money: cost.money + money,
+    visits: cost.visits + visits,
+    total: cost.total + costOfCompanion(companion, scenario),
+  };
 }
 
 function endOf({ median }: Evaluated) {

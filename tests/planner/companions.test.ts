@@ -2,14 +2,16 @@ import { describe, expect, it } from 'vitest';
 import { dayOf } from '@/lib/calendar/household-day';
 import { wallClock } from '@/lib/calendar/wall-time';
 import { addDose, type Substance } from '@/lib/chemistry';
-import { planWeek } from '@/lib/planner';
+import { planWeek, projectScenario } from '@/lib/planner';
 import { companionAmount } from '@/lib/planner/companions/amount';
+import type { CompanionNeed, CompanionSubstance } from '@/lib/planner/companions/need';
 import { contextOf } from '@/lib/planner/context';
 import { openSwimShare } from '@/lib/planner/limits-broken';
 import { shelfProductSchema } from '@/lib/schemas/shelf-product';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import { type Changes, codesIn, fullTest, products, scenarioOf } from './scenarios';
+import { untrueOf } from './sentences/untrue';
 
 const HOUR = 3_600_000;
 const zone = 'America/New_York';
@@ -127,6 +129,104 @@ describe('beside chlorine', () => {
     expect(dose.amount).toBeLessThanOrEqual(10 * 75.7);
     const hard = planWeek(scenarioOf({ ...low, reading: { ...low.reading, calciumHardness: 350 } }));
     expect(companionsIn(hard)).toEqual([]);
+  });
+
+  it('nothing goes in where the water is past its target in the hour of the dose', () => {
+    const water = { ...fullTest, combinedChlorine: 0.2 };
+    const amountOf = (
+      need: Pick<CompanionNeed, 'reason' | 'quantity' | 'target'>,
+      substance: CompanionSubstance,
+      now: object,
+    ) =>
+      companionAmount(
+        { ...need, substances: [], fromHour: 0 },
+        { ...shelfProductSchema.parse({ id: 'it', form: 'other', substance, stock: 5000 }), substance, measure: 1 },
+        { ...water, ...now },
+        { volume: 75.7, pHError: 0.1, halved: false },
+      );
+    const lowersPH = { reason: 'lowers-pH', quantity: 'pH', target: 7.5 } as const;
+    const raisesAlkalinity = { reason: 'raises-alkalinity', quantity: 'totalAlkalinity', target: 80 } as const;
+    expect(amountOf(lowersPH, 'hydrochloric-acid', { pH: 6.9 })).toBe(0);
+    // Under 7.2 and 1.28 sigma above it the likely range would fall out.
+    expect(amountOf({ ...lowersPH, target: 7.3 }, 'hydrochloric-acid', { pH: 7.32 })).toBe(0);
+    expect(amountOf(lowersPH, 'hydrochloric-acid', { pH: 7.9 })).toBeGreaterThan(0);
+    expect(amountOf(raisesAlkalinity, 'sodium-bicarbonate', { totalAlkalinity: 95 })).toBe(0);
+    expect(amountOf(raisesAlkalinity, 'sodium-bicarbonate', { totalAlkalinity: 60 })).toBeGreaterThan(0);
+  });
+
+  it('no soda by a pH that chlorine bleached, and that was carried on from an earlier test', () => {
+    const earlier = { ...fullTest, takenAt: '2026-07-03T19:00:00-04:00', pH: 7, totalAlkalinity: 90 };
+    const soda = (newest: object) =>
+      planWeek(scenarioOf({ ...noFeeder, reading: [earlier, { ...fullTest, totalAlkalinity: 90, ...newest }] }));
+    expect(onlyCompanion(soda({ pH: 7 })).substance).toBe('sodium-carbonate');
+    expect(companionsIn(soda({ pH: 7.7, freeChlorine: 10.2 }))).toEqual([]);
+  });
+
+  describe('is tested for at the end of a plan whose full test is due before it', () => {
+    const full = { ...fullTest, takenAt: '2026-06-29T19:00:00-04:00' };
+    const shelf = [products.gran];
+
+    it('acid of the last morning by the evening', () => {
+      const quick = { takenAt: '2026-07-05T21:30:00-04:00', freeChlorine: 3, pH: 8.1, method: 'drop-kit' };
+      const alkaline = { ...full, totalAlkalinity: 110 };
+      const plan = planWeek(scenarioOf({ reading: [alkaline, quick], now: '2026-07-11T22:00:00-04:00', shelf }));
+      expect(onlyCompanion(plan).at.slice(0, 13)).toBe('2026-07-12T06');
+      const last = { kind: 'quick', at: '2026-07-12T21:30:00-04:00', reason: 'after-companion' };
+      expect(plan.checks.at(-1)).toMatchObject(last);
+    });
+
+    it('bicarbonate, which a plan of less than a further day does not see, by the next week’s test', () => {
+      const quick = { takenAt: '2026-07-05T19:00:00-04:00', freeChlorine: 1.9, pH: 7.5, method: 'drop-kit' };
+      const weak = { ...full, totalAlkalinity: 50 };
+      const now = '2026-07-10T22:00:00-04:00';
+      const plan = planWeek(scenarioOf({ reading: [weak, quick], now, preferences: { visits: 2 }, shelf }));
+      expect(onlyCompanion(plan).at.slice(0, 10)).toBe('2026-07-11');
+      const last = { kind: 'full', at: '2026-07-12T19:00:00-04:00', reason: 'next-week' };
+      expect(plan.checks.at(-1)).toMatchObject(last);
+    });
+  });
+
+  it('that only a week with more chlorine would need is left out of one with less', () => {
+    // Granules raise this water's pH out of its range, and half a first dose of them does not.
+    const scenario = scenarioOf({
+      pool: {
+        ...{ volume: 120, volumeEstimated: true, meanDepth: 2.36, surface: 'tile', pump: [] },
+        ...{ latitude: 40.4, longitude: -3.7, timeZone: 'Europe/Madrid', sunExposure: 0.93 },
+        fillWater: { calciumHardness: 120, totalAlkalinity: 249, pH: 7 },
+        feeder: { kind: 'inline', ingredient: 'trichlor', capacity: 4 },
+      },
+      reading: [
+        {
+          ...fullTest,
+          takenAt: '2026-06-15T06:13:00Z',
+          freeChlorine: 2.4,
+          pH: 7.3,
+          cyanuricAcid: 59.5,
+          temperature: 12.6,
+        },
+        {
+          takenAt: '2026-06-21T08:13:00-04:00',
+          freeChlorine: 0.22,
+          pH: 7.638,
+          totalAlkalinity: 92.6,
+          temperature: 18.6,
+          method: 'drop-kit',
+        },
+      ],
+      shelf: [{ ...products.gran, strength: 48.5, alkali: 1.68, measure: 282, labelWay: 'broadcast', stock: 546 }],
+      week: {
+        rain: [0, 24, 0, 0, 0, 0, 0],
+        swimmerHours: [0, 0, 0, 0, 0, 0, 37.6],
+        waterTemperature: [8.4, 8.3, 10, 14.8, 16.3, 15.3, 24.6, 17.6],
+      },
+      preferences: { visits: 2, evenings: 0.465, steadiness: 0.237 },
+    });
+    const plan = planWeek(scenario);
+    for (const dose of companionsIn(plan)) {
+      const without = projectScenario({ ...scenario, doses: plan.doses.filter((each) => each !== dose) });
+      expect(Math.max(...without.projection!.pH.p50)).toBeGreaterThan(7.8);
+    }
+    expect(untrueOf({ scenario, plan })).toEqual([]);
   });
 
   it('hardness is raised where the surface would give its own, and only when it was measured', () => {

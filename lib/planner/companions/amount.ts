@@ -30,7 +30,7 @@ export function companionAmount(
   const { wanted, most } = companionWanted(need, product, water, dosing);
   const measure = product.measure ?? (product.form === 'liquid' ? 100 : 50);
   const measures = need.reason === 'lowers-pH' ? Math.floor(wanted / measure) : Math.ceil(wanted / measure - 0.5);
-  return Math.min(measures, Math.floor(most / measure + 1e-9)) * measure;
+  return Math.max(0, Math.min(measures, Math.floor(most / measure + 1e-9))) * measure;
 }
 
 /** The same without whole measures: what the target wants within the cap, and the cap of the evening [g or mL]. */
@@ -48,7 +48,11 @@ export function companionWanted(
     water.pH - companionAim.largestFallOfPH,
     limits.pHRangeLow.value + TO_TENTH_PERCENTILE * pHError,
   );
-  const target = need.reason === 'lowers-pH' ? Math.max(need.target, lowest) : need.target;
+  const lowers = need.reason === 'lowers-pH';
+  const target = lowers ? Math.max(need.target, lowest) : need.target;
+  // Water may be past its target in the hour of the dose: what it was read for comes with a later day.
+  const there = lowers ? water.pH <= target : water[need.quantity] >= target;
+  if (there) return { wanted: 0, most };
   const wanted = wantedAmount(water, volume, { substance, strength }, { quantity: need.quantity, value: target }, most);
   return { wanted, most };
 }

@@ -37,6 +37,7 @@ export function companionsOf(
     water: start.water,
     pH: plan.median.pH,
     measured: (quantity) => start.measuredAt[quantity] !== undefined,
+    pHRead: start.measuredAt.pH === start.takenAt,
     tabletsLead: sumOf(plan.draft.tablets) > 0 || context.wished.some(({ kind }) => kind === 'tablets'),
     tabletsPossible: options.tabletsMayBe,
   });

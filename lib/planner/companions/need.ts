@@ -37,6 +37,8 @@ type Week = {
   /** Median pH at each hour. */
   pH: ArrayLike<number>;
   measured: (quantity: MeasuredQuantity) => boolean;
+  /** Whether the newest test read pH: beside much chlorine it does not, and what is carried on is no ground for soda. */
+  pHRead: boolean;
   /** Whether this week is carried by slow tablets, and whether they may be used at all. */
   tabletsLead: boolean;
   tabletsPossible: boolean;
@@ -46,7 +48,15 @@ type Week = {
  * What a week needs beside chlorine, the most urgent first: alkalinity, then pH, hardness, stabilizer (care rules, part 4).
  * Only what was measured counts. Nothing is added for a quantity that the tablets of the plan raise by themselves.
  */
-export function companionNeeds({ pool, water, pH, measured, tabletsLead, tabletsPossible }: Week): CompanionNeed[] {
+export function companionNeeds({
+  pool,
+  water,
+  pH,
+  measured,
+  pHRead,
+  tabletsLead,
+  tabletsPossible,
+}: Week): CompanionNeed[] {
   const needs: CompanionNeed[] = [];
   const [aimed] = (tabletsLead ? alkalinityAim.tablets : alkalinityAim.fast).value;
   if (measured('totalAlkalinity') && water.totalAlkalinity < aimed - alkalinityDeadBand.value)
@@ -60,7 +70,7 @@ export function companionNeeds({ pool, water, pH, measured, tabletsLead, tablets
 
   const high = firstOfADay(pH, (value) => value > limits.pHRangeHigh.value);
   const low = firstOfADay(pH, (value) => value < limits.pHRangeLow.value);
-  const sodaAsh = water.calciumHardness <= sodaAshLimits.hardness && water.pH <= sodaAshLimits.pH;
+  const sodaAsh = pHRead && water.calciumHardness <= sodaAshLimits.hardness && water.pH <= sodaAshLimits.pH;
   if (high !== null)
     needs.push({
       reason: 'lowers-pH',

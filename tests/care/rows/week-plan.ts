@@ -333,6 +333,7 @@ export const weekPlanRows: readonly Row[] = [
         pool,
         water,
         pH: Array.from({ length: 169 }, () => 6.9),
+        pHRead: true,
         measured: () => true,
         tabletsLead: false,
         tabletsPossible: false,

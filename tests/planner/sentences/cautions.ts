@@ -17,6 +17,7 @@ import {
   type Told,
   waterAtFirst,
 } from './told';
+import { breaksLimits } from './wishes';
 
 const HOUR = 3_600_000;
 const hardnessKept = {
@@ -78,7 +79,10 @@ export const cautionHolds: Record<string, Holds> = {
     const swumBefore = dark.every(({ at }) => isSwimHour(Date.parse(at) - 0.5 * HOUR, told));
     return dark.length > 0 && fact.doses === dark.length && swumBefore;
   },
-  'wishes-set-aside': (_, { plan }) => plan.doses.every(({ reason }) => reason !== 'wished'),
+  'wishes-set-aside': (_, told) =>
+    told.plan.doses.every(({ reason }) => reason !== 'wished') &&
+    told.plan.reasons.every(({ code }) => code !== 'wished') &&
+    breaksLimits(told),
   'volume-estimated': (fact, told) => {
     const halved = told.plan.doses.some(({ reason }) => reason === 'first-dose-halved');
     const { volume, volumeEstimated } = told.scenario.pool;

@@ -1,4 +1,5 @@
 import { usesStabilized } from './limits';
+import { keepsWishes, wishIsAhead } from './wishes';
 import { projectScenario } from '@/lib/planner';
 import type { ShelfProduct } from '@/lib/schemas/shelf-product';
 import {
@@ -72,8 +73,7 @@ export const reasonHolds: Record<string, Holds> = {
     );
   },
 
-  wished: (_, { scenario: { wishes } }) =>
-    wishes !== undefined && (wishes.doses.length > 0 || wishes.notOn.length > 0 || wishes.noFurtherTablets),
+  wished: (_, told) => wishIsAhead(told) && keepsWishes(told),
 
   'situation-treats': (_, { plan }) => {
     const ofSituation = ['treatment-evening', 'raise-to-limit', 'pH-before-treatment', 'first-dose-halved'];

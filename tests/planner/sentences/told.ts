@@ -1,3 +1,4 @@
+import { projectScenario } from '@/lib/planner';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { Scenario } from '@/lib/schemas/scenario';
@@ -11,6 +12,8 @@ export type Sentence = WeekPlan['reasons'][number];
 export type Holds = (fact: Sentence, told: Told) => boolean;
 
 const HOUR = 3_600_000;
+/** The minute of the day at which a filter is backwashed. */
+const NOON = 12 * 60;
 const chlorine = ['trichlor', 'dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
 
 export type Quantity = 'freeChlorine' | 'pH' | 'totalAlkalinity' | 'calciumHardness' | 'cyanuricAcid';
@@ -24,9 +27,27 @@ export function number(figure: unknown): number {
   return typeof figure === 'number' ? figure : Number.NaN;
 }
 
-/** What the plan's water is at its first hour. */
-export function waterAtFirst({ plan }: Told, quantity: Quantity): number {
-  return plan.projection?.median[quantity][0] ?? Number.NaN;
+/**
+ * What the plan's water is when its week begins. The first row of a curve already holds what happens in that very instant:
+ * where something does, the week is reckoned again without it.
+ */
+export function waterAtFirst(told: Told, quantity: Quantity): number {
+  const { projection } = happensAtFirst(told) ? weekWithoutIt(told) : told.plan;
+  return projection?.median[quantity][0] ?? Number.NaN;
+}
+
+function happensAtFirst(told: Told): boolean {
+  const { scenario, plan } = told;
+  const first = takenAt(told);
+  const backwashed = minuteOf(first, told) === NOON && scenario.week.backwash[0]! > 0;
+  return backwashed || [...scenario.given, ...plan.doses].some(({ at }) => Date.parse(at) === first);
+}
+
+function weekWithoutIt(told: Told, week: Partial<Told['scenario']['week']> = {}): WeekPlan {
+  const { scenario } = told;
+  const given = scenario.given.filter(({ at }) => Date.parse(at) !== takenAt(told));
+  const backwash = scenario.week.backwash.map(() => 0);
+  return projectScenario({ ...scenario, given, doses: [], week: { ...scenario.week, backwash, ...week } });
 }
 
 export function readingsOf({ scenario }: Told) {
@@ -84,6 +105,11 @@ export function mostTabletGrams({ scenario }: Told, strength: number): number {
 /** Stabilizer in a gram of trichlor, by molar masses: 129.08 of 3 times 70.91 of available chlorine [g/g]. */
 export function stabilizerShare(strength: number): number {
   return ((strength / 100) * 129.08) / (3 * 70.91);
+}
+
+/** The household's day of an instant, from the machine's own zone database. */
+export function dayAt(at: string, { scenario }: Told): string {
+  return new Intl.DateTimeFormat('en-CA', { timeZone: scenario.pool.timeZone }).format(Date.parse(at));
 }
 
 /** Minutes after midnight by the household's clock, from the machine's own zone database. */
@@ -146,7 +172,7 @@ export function levelBefore({ at }: PlannedDose, told: Told): number {
 
 /**
  * Whether a pH is that of the newest reading. What was read beside more chlorine than 10 counts for nothing; then it is
- * the one before, carried on, and the curve begins near it.
+ * the one before, carried on, in water as warm as it was read: the week's own warmth moves the curve's first pH.
  */
 export function isPHNow(said: unknown, told: Told): boolean {
   const newest = readingsOf(told).find(({ takenAt: at }) => Date.parse(at) === takenAt(told));
@@ -154,6 +180,6 @@ export function isPHNow(said: unknown, told: Told): boolean {
     typeof value === 'number' ? value : (value.low + value.high) / 2;
   const low = (value: number | { low: number }) => (typeof value === 'number' ? value : value.low);
   if (newest?.pH === undefined || low(newest.freeChlorine ?? 0) > 10)
-    return Math.abs(number(said) - waterAtFirst(told, 'pH')) < 0.15;
+    return alike(said, weekWithoutIt(told, { waterTemperature: undefined }).projection?.median.pH[0] ?? Number.NaN, 2);
   return alike(said, middle(newest.pH), 1);
 }
