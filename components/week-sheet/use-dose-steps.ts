@@ -8,8 +8,12 @@ import { useDoseWords } from './use-dose-words';
 import { useUnits } from './use-units';
 
 const numbers = ['1', '2', '3', '4', '5', '6'] as const;
+const beforeAny = ['1', '2', '3'] as const;
 
-/** The six steps of a dose with its own numbers, in the order in which they keep people safe. */
+/**
+ * The six steps of a dose with its own numbers, in the order in which they keep people safe; of a product whose label nobody
+ * has read, the three that come before any.
+ */
 export function useDoseSteps(): (dose: PlanDose) => { number: string; words: React.ReactNode }[] {
   const t = useTranslations('doses');
   const words = useDoseWords();
@@ -22,7 +26,10 @@ export function useDoseSteps(): (dose: PlanDose) => { number: string; words: Rea
       after: words.afterwards(dose),
       b: bold,
     };
-    return numbers.map((number) => ({ number, words: t.rich(`steps.${stepTextOf(dose)}.${number}`, figures) }));
+    const text = stepTextOf(dose);
+    if (text === 'granules-label-first')
+      return beforeAny.map((number) => ({ number, words: t.rich(`steps.${text}.${number}`, figures) }));
+    return numbers.map((number) => ({ number, words: t.rich(`steps.${text}.${number}`, figures) }));
   };
 }
 

@@ -10,6 +10,8 @@ export type DoseStatus = (typeof doseStatuses)[number];
 export const stepTexts = [
   'granules-dissolve',
   'granules-broadcast',
+  /** Nobody has said what its label allows: no way of adding it is shown. */
+  'granules-label-first',
   'liquid',
   'acid',
   'tablets-inline',

@@ -8,6 +8,7 @@ import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { pumpUntil } from '@/lib/projection/events';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
+import type { LabelWay } from '@/lib/schemas/shelf-product';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import { limits } from '@/lib/standards/limits';
 import { claimLasts, isDoubtful } from './dose-state';
@@ -61,7 +62,7 @@ export function sheetDose(dose: StoredDose, around: Around): PlanDose {
   const at = dose.at.getTime();
   const poured = dose.givenAt?.getTime() ?? at;
   const onShelf = shelf.find(({ id }) => id === dose.productId);
-  const labelWay = onShelf?.labelWay ?? null;
+  const labelWay = onShelf?.labelWay ?? wayOfAlike(dose, shelf);
   const isTablet = dose.form === 'tablet';
   return {
     id: dose.id,
@@ -102,6 +103,29 @@ export function tickFrom({ at }: Pick<StoredDose, 'at'>): number {
   return at.getTime() - limits.tickBeforeDose.value * HOUR;
 }
 
+const wayTexts = {
+  dissolve: 'granules-dissolve',
+  broadcast: 'granules-broadcast',
+  'feeder-only': 'granules-label-first',
+  unknown: 'granules-label-first',
+} as const satisfies Record<LabelWay, PlanDose['steps']>;
+
+/**
+ * How a dose that has to be bought goes in: as the label of the same product on the shelf says, where that speaks with one
+ * voice. Care rules, part 4: of a label that nobody could find no way is taken for granted.
+ */
+function wayOfAlike(
+  { toBuy, substance, form }: Pick<StoredDose, 'toBuy' | 'substance' | 'form'>,
+  shelf: Around['shelf'],
+): PlanDose['labelWay'] {
+  if (!toBuy) return null;
+  const ways = new Set(
+    shelf.filter((each) => each.substance === substance && each.form === form).map(({ labelWay }) => labelWay),
+  );
+  const [way] = ways;
+  return way !== undefined && ways.size === 1 ? way : null;
+}
+
 function stepsOf(
   { form, substance }: Pick<StoredDose, 'form' | 'substance'>,
   labelWay: PlanDose['labelWay'],
@@ -110,7 +134,6 @@ function stepsOf(
   if (form === 'tablet') return feederKind === 'floating' ? 'tablets-floating' : 'tablets-inline';
   if (substance === 'hydrochloric-acid' || substance === 'sodium-bisulfate') return 'acid';
   if (form === 'liquid') return 'liquid';
-  if (substance === 'calcium-hypochlorite' || substance === 'dichlor')
-    return labelWay === 'broadcast' ? 'granules-broadcast' : 'granules-dissolve';
+  if (substance === 'calcium-hypochlorite' || substance === 'dichlor') return wayTexts[labelWay ?? 'unknown'];
   return 'companion-dissolve';
 }

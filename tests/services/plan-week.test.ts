@@ -11,6 +11,7 @@ import type { ServiceContext } from '@/lib/services/context';
 import { removeReading } from '@/lib/services/edit-reading';
 import { planWeek } from '@/lib/services/plan-week';
 import { recordReading } from '@/lib/services/record-reading';
+import { showWeek } from '@/lib/services/show-week';
 import { planWith } from '@/tests/support/engine';
 import { aFullTest, aPoolHousehold, at, designPool, designShelf, hoursLater } from '@/tests/support/pool-household';
 import { freshDatabase } from '@/tests/support/test-database';
@@ -27,6 +28,7 @@ beforeEach(async () => {
   engine.reset();
 });
 
+const granules = designShelf.find(({ id }) => id === 'gran')!;
 const current = () => findCurrentPlan(db, owner.access.householdId);
 
 describe('planWeek', { timeout: 30_000 }, () => {
@@ -57,6 +59,36 @@ describe('planWeek', { timeout: 30_000 }, () => {
     expect(stored.map(({ amount, productId }) => ({ amount, productId }))).toEqual(
       short.map(({ amount }) => ({ amount, productId: null })),
     );
+  });
+
+  it.each([
+    ['broadcast', 'granules-broadcast'],
+    ['dissolve', 'granules-dissolve'],
+  ] as const)('shows what is to buy going in as the same product’s label says: %s', async (labelWay, steps) => {
+    const { householdId } = owner.access;
+    await setStock(db, { householdId, id: 'tabs', stock: 0 });
+    await saveShelfProduct(db, { householdId, product: { ...granules, labelWay, stock: 150 }, now: owner.now });
+    await recordReading(owner, aFullTest());
+    const short = (await showWeek(owner)).doses.filter(({ toBuy }) => toBuy);
+    expect(short.length).toBeGreaterThan(0);
+    expect(short.map((dose) => [dose.labelWay, dose.steps])).toEqual(short.map(() => [labelWay, steps]));
+  });
+
+  it.each([
+    ['another of its kind says something else', { ...granules, id: 'other', labelWay: 'broadcast' }],
+    ['the label of another could not be found', { ...granules, id: 'other', labelWay: 'unknown', stock: 0 }],
+  ] as const)('shows no way of adding what is to buy where %s', async (_, other) => {
+    const { householdId } = owner.access;
+    await setStock(db, { householdId, id: 'tabs', stock: 0 });
+    for (const product of [
+      { ...granules, stock: 150 },
+      { ...other, stock: 0 },
+    ])
+      await saveShelfProduct(db, { householdId, product, now: owner.now });
+    await recordReading(owner, aFullTest());
+    const short = (await showWeek(owner)).doses.filter(({ toBuy }) => toBuy);
+    expect(short.length).toBeGreaterThan(0);
+    expect(short.every((dose) => dose.labelWay === null && dose.steps === 'granules-label-first')).toBe(true);
   });
 
   it('keeps the plan while its inputs stand, however time passes', async () => {
