@@ -23,7 +23,7 @@ import { useNothingToAdd } from './use-nothing-to-add';
 /** One page, on A4 and Letter, for whoever looks after the pool while the household is away. */
 export function HouseSheetPage({ sheet }: { sheet: HouseSheet }) {
   return (
-    <SheetProvider sheet={sheet.week} start={undefined}>
+    <SheetProvider sheet={sheet.week} start={undefined} onPaper>
       <OnePage sheet={sheet} />
     </SheetProvider>
   );

@@ -67,6 +67,15 @@ describe('the house sheet', () => {
     expect(screen.getByText(/^Made Wednesday 8 July, 10:20\. Good until Sunday 12 July, 19:00/)).toBeInTheDocument();
   });
 
+  it('names the day of a wait: on paper no day is today', () => {
+    // Soda that went in at ten of the day on which the sheet is made: the water is free the same afternoon.
+    const soda = { substance: 'sodium-bicarbonate', form: 'other', steps: 'companion-dissolve' } as const;
+    const hours = { at: '2026-07-08T10:30:00+02:00', waitUntil: '2026-07-08T12:30:00+02:00' };
+    show({ handler: joost, doses: [aDose({ ...soda, ...hours })] });
+    expect(part('Doses').getByText(/Wednesday/, { selector: 'p:last-child' })).toBeInTheDocument();
+    expect(part('Doses').queryByText(/this (morning|afternoon|evening)|today|tonight/i)).toBeNull();
+  });
+
   it('holds no dose where no plan does', () => {
     show({ handler: joost, doses: [] }, { plan: null });
     expect(screen.getByText('There is no plan that holds. Add nothing; call us.')).toBeInTheDocument();
