@@ -10,6 +10,7 @@ import {
   isSwimHour,
   hourAt,
   number,
+  pHAsRead,
   productOf,
   readingsOf,
   sumOf,
@@ -135,7 +136,7 @@ function readInNewest(told: Told): boolean {
  * - 12.1, the factor from 0.3 at 8 deg C to 0.9 at 36 deg C.
  */
 function handbookIndex(told: Told): number {
-  const pH = waterAtFirst(told, 'pH');
+  const pH = pHAsRead(told);
   const read = readingsOf(told).flatMap(({ temperature }) => (typeof temperature === 'number' ? [temperature] : []));
   const temperature = read.at(-1) ?? 26;
   const carbonate =

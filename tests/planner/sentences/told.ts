@@ -160,6 +160,11 @@ function awayFrom(which: 'sunset' | 'sunrise', { at }: PlannedDose, { scenario: 
   return away.toSorted((a, b) => Math.abs(a) - Math.abs(b))[0];
 }
 
+/** pH in water as warm as it was read: the week's own warmth moves the curve's first pH. */
+export function pHAsRead(told: Told): number {
+  return weekWithoutIt(told, { waterTemperature: undefined }).projection?.median.pH[0] ?? Number.NaN;
+}
+
 /** The place of an instant among the plan's hours: the hour that has begun. */
 export function hourAt(at: string, told: Told): number {
   return Math.floor((Date.parse(at) - takenAt(told)) / HOUR);
@@ -172,14 +177,13 @@ export function levelBefore({ at }: PlannedDose, told: Told): number {
 
 /**
  * Whether a pH is that of the newest reading. What was read beside more chlorine than 10 counts for nothing; then it is
- * the one before, carried on, in water as warm as it was read: the week's own warmth moves the curve's first pH.
+ * the one before, carried on.
  */
 export function isPHNow(said: unknown, told: Told): boolean {
   const newest = readingsOf(told).find(({ takenAt: at }) => Date.parse(at) === takenAt(told));
   const middle = (value: number | { low: number; high: number }) =>
     typeof value === 'number' ? value : (value.low + value.high) / 2;
   const low = (value: number | { low: number }) => (typeof value === 'number' ? value : value.low);
-  if (newest?.pH === undefined || low(newest.freeChlorine ?? 0) > 10)
-    return alike(said, weekWithoutIt(told, { waterTemperature: undefined }).projection?.median.pH[0] ?? Number.NaN, 2);
+  if (newest?.pH === undefined || low(newest.freeChlorine ?? 0) > 10) return alike(said, pHAsRead(told), 2);
   return alike(said, middle(newest.pH), 1);
 }
