@@ -27,7 +27,7 @@ export function TryIt() {
   const led = sheet.situation !== null && sheet.situation.procedure.lead !== 'follow';
   if (ground === undefined && !led) return null;
   return (
-    <section className="pt-3.5 pb-3">
+    <section className="pt-3.5 pb-3 md:pt-0 lg:pt-3.5">
       <h2 className="mb-1.5 font-display text-section">{t('title')}</h2>
       <TakenTryOuts />
       {led || ground === undefined ? <p className="text-body text-ink-2">{t('led')}</p> : <Trying ground={ground} />}

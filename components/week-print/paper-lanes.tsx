@@ -58,7 +58,12 @@ export function PaperLanes() {
             <path d={`M${x(now)} ${laneTop.sun}V${laneTop.highLow}`} className="stroke-ink" strokeWidth="1.2" />
           )}
           {endsAt !== undefined && isOn(axis, endsAt) && (
-            <path d={`M${x(endsAt)} 2V${WHOLE}`} className="stroke-ink" strokeWidth="2.2" strokeDasharray="7 4" />
+            <path
+              d={`M${x(endsAt)} ${laneTop.sun}V${laneTop.highLow}`}
+              className="stroke-ink"
+              strokeWidth="2.2"
+              strokeDasharray="7 4"
+            />
           )}
         </g>
         {[laneTop.sun, laneTop.chlorine, laneTop.highLow].map((top) => (

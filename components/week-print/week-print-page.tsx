@@ -44,7 +44,7 @@ export function WeekPrintPage({ printed, start }: { printed: PrintedWeek; start:
             tabIndex={0}
             className="paper overflow-x-auto text-fine print:overflow-visible"
           >
-            <div className="w-[700px]">
+            <div className="mx-auto w-[700px]">
               <PaperMasthead />
               <DoubleRule />
               <div className="grid grid-cols-[minmax(0,1fr)_300px] gap-x-4 pt-1.5 pb-1">

@@ -31,7 +31,7 @@ export function DeskSheet() {
           <SheetTables />
         </div>
       </div>
-      <aside className="grid content-start gap-x-7.5 border-t border-ink pt-3.5 pb-6 sm:grid-cols-2 lg:grid-cols-1 lg:border-t-0">
+      <aside className="grid content-start gap-x-7.5 border-t border-ink pt-3.5 pb-6 sm:grid-cols-2 md:grid-cols-3 lg:grid-cols-1 lg:border-t-0">
         {margin}
         {tryIt}
       </aside>

@@ -8,8 +8,10 @@ import { WhyThisMix } from './why-this-mix';
 export function Margin() {
   return (
     <>
-      <WhyThisMix />
-      <WhatChanged />
+      <div>
+        <WhyThisMix />
+        <WhatChanged />
+      </div>
       <FourWays />
     </>
   );

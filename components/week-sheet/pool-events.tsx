@@ -46,7 +46,7 @@ export function PoolEvents() {
         </ul>
       )}
       {mayReport && (
-        <Button variant="quiet" size="small" className="-ml-3 justify-self-start" onClick={() => setAsking(true)}>
+        <Button variant="quiet" size="small" className="-ml-1.5 justify-self-start" onClick={() => setAsking(true)}>
           {t('ask')}
         </Button>
       )}
