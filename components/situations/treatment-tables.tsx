@@ -2,7 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { Disclosure } from '@/components/ui/disclosure';
-import { DataTable } from '@/components/week-sheet/data-table';
+import { Table } from '@/components/ui/table';
 import type { OpenSituation } from '@/lib/schemas/situation';
 import { type TreatmentChart, pointsOf } from './treatment-picture';
 import { useSituationFigures } from './use-situation-figures';
@@ -30,7 +30,7 @@ export function TreatmentTables({ open, chart, now, until }: Props) {
   return (
     <Disclosure summary={<span className="text-small">{t('seeHours')}</span>}>
       {chart.readings.length > 0 && (
-        <DataTable
+        <Table
           caption={t('captionReadings')}
           columns={[t('hour'), t('reading'), t('ordinaryColumn'), t('judged')]}
           rows={chart.readings.map(({ takenAt, freeChlorine }) => {
@@ -49,7 +49,7 @@ export function TreatmentTables({ open, chart, now, until }: Props) {
         />
       )}
       {first && last && (
-        <DataTable
+        <Table
           caption={t('captionHours', { from: whenOf(first.at), to: whenOf(last.at) })}
           columns={[t('hour'), t('low'), t('middle'), t('high'), t('dose')]}
           rows={points.map(({ at, low, middle, high }, index) => {

@@ -2,6 +2,7 @@
 
 import { useId, useState } from 'react';
 import { Button } from './button';
+import { Table } from './table';
 
 export type FigureTable = { columns: readonly string[]; rows: readonly (readonly React.ReactNode[])[] };
 
@@ -24,7 +25,11 @@ export function PictureOrTable({ sentence, picture, table, seeTable, seePicture,
       <figcaption id={sentenceId} className="sr-only">
         {sentence}
       </figcaption>
-      {asTable ? <FigureAsTable sentence={sentence} table={table} /> : picture}
+      {asTable ? (
+        <Table caption={sentence} columns={table.columns} rows={table.rows.map((cells, key) => ({ key, cells }))} />
+      ) : (
+        picture
+      )}
       <Button
         variant="quiet"
         size="small"
@@ -35,40 +40,5 @@ export function PictureOrTable({ sentence, picture, table, seeTable, seePicture,
         {asTable ? seePicture : seeTable}
       </Button>
     </figure>
-  );
-}
-
-function FigureAsTable({ sentence, table }: { sentence: string; table: FigureTable }) {
-  return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={sentence}>
-      <table className="w-full border-collapse text-left text-small">
-        <thead>
-          <tr className="border-b border-ink">
-            {table.columns.map((column) => (
-              <th key={column} scope="col" className="py-2 pr-4 align-bottom font-strong">
-                {column}
-              </th>
-            ))}
-          </tr>
-        </thead>
-        <tbody>
-          {table.rows.map((row, rowIndex) => (
-            <tr key={rowIndex} className="border-b border-rule">
-              {row.map((cell, cellIndex) =>
-                cellIndex === 0 ? (
-                  <th key={cellIndex} scope="row" className="py-2 pr-4 font-emphasis">
-                    {cell}
-                  </th>
-                ) : (
-                  <td key={cellIndex} className="py-2 pr-4">
-                    {cell}
-                  </td>
-                ),
-              )}
-            </tr>
-          ))}
-        </tbody>
-      </table>
-    </div>
   );
 }

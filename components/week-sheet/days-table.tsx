@@ -1,7 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import { DataTable } from './data-table';
+import { Table } from '@/components/ui/table';
 import { type Extreme, highAndLowOf } from './high-and-low';
 import { useSheet } from './sheet-context';
 import { useTimes } from './use-times';
@@ -16,7 +16,7 @@ export function DaysTable() {
   const extremeWords = ({ value, part }: Extreme) =>
     t('dayPart', { day: units.figure(value, 'freeChlorine'), part: times.partName(part) });
   return (
-    <DataTable
+    <Table
       caption={t('table.captionDays')}
       columns={[
         t('table.day'),

@@ -4,7 +4,7 @@ import { useTranslations } from 'next-intl';
 import { hourRows } from '@/components/charts/hours-table';
 import type { CurveQuantity } from '@/components/charts/water-curve';
 import { capitalised } from './capitalised';
-import { DataTable } from './data-table';
+import { Table } from '@/components/ui/table';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
@@ -24,7 +24,7 @@ export function HoursTable({ quantity, name }: { quantity: CurveQuantity; name: 
   const limitColumns = quantity === 'freeChlorine' ? [t('lowest'), t('limit')] : [];
   return (
     <>
-      <DataTable
+      <Table
         caption={t('caption', { name: capitalised(name), from: times.heading(first.at), to: times.heading(last.at) })}
         columns={[t('hour'), t('side'), t('low'), t('middle'), t('high'), ...limitColumns]}
         rows={rows.map(({ at, side, likely, lowestLevel, swimLimit }) => ({
