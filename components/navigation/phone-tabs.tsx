@@ -7,13 +7,16 @@ import { usePathname } from 'next/navigation';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { classNames } from '@/components/ui/class-names';
+import { untilFetched } from '@/components/ui/until-fetched';
 import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import { useOpenedOnce } from '@/components/ui/use-opened-once';
 import type { HouseholdFrame } from './member';
 import { isCurrent, weeklyPlaces } from './places';
 
 const fetchMore = () => import('./more-sheet');
-const MoreSheet = dynamic(() => import('./more-sheet').then((part) => part.MoreSheet), { ssr: false });
+const MoreSheet = dynamic(() => untilFetched(() => import('./more-sheet')).then((part) => part.MoreSheet), {
+  ssr: false,
+});
 
 const tab =
   'relative -mt-px flex h-tabs cursor-pointer flex-col items-center justify-center gap-1 border-t-[3px] text-[13.5px] leading-4';

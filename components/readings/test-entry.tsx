@@ -5,6 +5,7 @@ import { useTranslations } from 'next-intl';
 import Link from 'next/link';
 import { buttonClass } from '@/components/ui/button-class';
 import { Skeleton } from '@/components/ui/skeleton';
+import { untilFetched } from '@/components/ui/until-fetched';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
 import type { TestDraft } from './test-draft';
 
@@ -17,7 +18,7 @@ export type TestEntryProps = {
 };
 
 /** Drafts live on the device, which the server does not know; so the form and what checks it follow the page. */
-const LazyTest = dynamic(() => import('./test-for-now').then((part) => part.TestForNow), {
+const LazyTest = dynamic(() => untilFetched(() => import('./test-for-now')).then((part) => part.TestForNow), {
   ssr: false,
   loading: Loading,
 });

@@ -1,11 +1,14 @@
 'use client';
 
 import dynamic from 'next/dynamic';
+import { untilFetched } from '@/components/ui/until-fetched';
 import { useHydrated } from '@/components/ui/use-hydrated';
 import { mayWait } from '@/lib/client/unsent-readings-key';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
 
-const UnsentTests = dynamic(() => import('./unsent-tests').then((part) => part.UnsentTests), { ssr: false });
+const UnsentTests = dynamic(() => untilFetched(() => import('./unsent-tests')).then((part) => part.UnsentTests), {
+  ssr: false,
+});
 
 /** Tests that wait on this device, on a page that is not about entering one: they are sent from there as well. */
 export function WaitingTests({ household }: { household: ReadingHousehold }) {

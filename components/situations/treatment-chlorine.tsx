@@ -2,6 +2,7 @@
 
 import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
+import { untilFetched } from '@/components/ui/until-fetched';
 import type { TimeAxis } from '@/components/charts/time-axis';
 import { treatmentAxis } from '@/components/charts/treatment-rows';
 import { ticksOf } from '@/components/charts/value-axis';
@@ -12,13 +13,16 @@ import { type TreatmentChart, treatmentPicture } from './treatment-picture';
 import { useSituationFigures } from './use-situation-figures';
 import { useTreatmentPhrases } from './use-treatment-phrases';
 
-const LazyLane = dynamic(() => import('@/components/charts/treatment-lane').then((part) => part.TreatmentLane), {
-  ssr: false,
-});
+const LazyLane = dynamic(
+  () => untilFetched(() => import('@/components/charts/treatment-lane')).then((part) => part.TreatmentLane),
+  {
+    ssr: false,
+  },
+);
 
 /** The hour that is read, in the lanes below the chart. */
 export const LazyTreatmentCursor = dynamic(
-  () => import('@/components/charts/cursor-line').then((part) => part.CursorLine),
+  () => untilFetched(() => import('@/components/charts/cursor-line')).then((part) => part.CursorLine),
   { ssr: false },
 );
 

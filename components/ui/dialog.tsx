@@ -1,6 +1,7 @@
 'use client';
 
 import dynamic from 'next/dynamic';
+import { untilFetched } from './until-fetched';
 import { useIdleFetch } from './use-idle-fetch';
 import { useOpenedOnce } from './use-opened-once';
 
@@ -17,7 +18,9 @@ export type DialogProps = {
 };
 
 const fetchPanel = () => import('./dialog-panel');
-const Panel = dynamic(() => import('./dialog-panel').then(({ DialogPanel }) => DialogPanel), { ssr: false });
+const Panel = dynamic(() => untilFetched(() => import('./dialog-panel')).then(({ DialogPanel }) => DialogPanel), {
+  ssr: false,
+});
 
 /** A question that has to be answered before going on. What draws it is fetched once the page stands. */
 export function Dialog(props: DialogProps) {

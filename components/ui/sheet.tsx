@@ -1,6 +1,7 @@
 'use client';
 
 import dynamic from 'next/dynamic';
+import { untilFetched } from './until-fetched';
 import { useIdleFetch } from './use-idle-fetch';
 import { useOpenedOnce } from './use-opened-once';
 
@@ -15,7 +16,9 @@ export type SheetProps = {
 };
 
 const fetchPanel = () => import('./sheet-panel');
-const Panel = dynamic(() => import('./sheet-panel').then(({ SheetPanel }) => SheetPanel), { ssr: false });
+const Panel = dynamic(() => untilFetched(() => import('./sheet-panel')).then(({ SheetPanel }) => SheetPanel), {
+  ssr: false,
+});
 
 /** Rises over a phone page from its lower edge, under a double rule. What draws it is fetched once the page stands. */
 export function Sheet(props: SheetProps) {

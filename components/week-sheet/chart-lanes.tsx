@@ -2,6 +2,7 @@
 
 import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
+import { untilFetched } from '@/components/ui/until-fetched';
 import { ticksOf, type ValueAxis } from '@/components/charts/value-axis';
 import { limits } from '@/lib/standards/limits';
 import { WEEK } from './cursor-names';
@@ -11,21 +12,36 @@ import { useSheet } from './sheet-context';
 import { useUnits } from './use-units';
 
 /** What is drawn in the lanes comes after the page, and their places are kept for it. */
-const LazyChlorinePicture = dynamic(() => import('./lane-pictures').then((part) => part.ChlorinePicture), {
-  ssr: false,
-});
-export const LazyChlorineDayPicture = dynamic(() => import('./lane-pictures').then((part) => part.ChlorineDayPicture), {
-  ssr: false,
-});
-const LazyQuantityPicture = dynamic(() => import('./lane-pictures').then((part) => part.QuantityPicture), {
-  ssr: false,
-});
-export const LazyPlumbLines = dynamic(() => import('./plumb-lines').then((part) => part.PlumbLines), { ssr: false });
+const LazyChlorinePicture = dynamic(
+  () => untilFetched(() => import('./lane-pictures')).then((part) => part.ChlorinePicture),
+  {
+    ssr: false,
+  },
+);
+export const LazyChlorineDayPicture = dynamic(
+  () => untilFetched(() => import('./lane-pictures')).then((part) => part.ChlorineDayPicture),
+  {
+    ssr: false,
+  },
+);
+const LazyQuantityPicture = dynamic(
+  () => untilFetched(() => import('./lane-pictures')).then((part) => part.QuantityPicture),
+  {
+    ssr: false,
+  },
+);
+export const LazyPlumbLines = dynamic(
+  () => untilFetched(() => import('./plumb-lines')).then((part) => part.PlumbLines),
+  { ssr: false },
+);
 
 /** The hour that is read, in the lanes beside the charts. It comes with the charts, for there is no reading without them. */
-export const LazyCursorLine = dynamic(() => import('@/components/charts/cursor-line').then((part) => part.CursorLine), {
-  ssr: false,
-});
+export const LazyCursorLine = dynamic(
+  () => untilFetched(() => import('@/components/charts/cursor-line')).then((part) => part.CursorLine),
+  {
+    ssr: false,
+  },
+);
 
 /** The hour that is read in a chart, through the lanes that are none; `height`: down to where the lanes end [px]. */
 export function WeekCursorLine({ height }: { height: number }) {

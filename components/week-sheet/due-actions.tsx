@@ -5,6 +5,7 @@ import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { untilFetched } from '@/components/ui/until-fetched';
 import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { ClaimedBy } from './claimed-by';
@@ -15,9 +16,11 @@ import { useAsksStop } from './use-asks-stop';
 import { useDosingBar } from './use-dosing-bar';
 import type { Tick } from './use-tick';
 
-const ConfirmStop = dynamic(() => import('./confirm-stop').then((part) => part.ConfirmStop));
+const ConfirmStop = dynamic(() => untilFetched(() => import('./confirm-stop')).then((part) => part.ConfirmStop));
 const fetchOtherAmount = () => import('./other-amount');
-const OtherAmount = dynamic(() => import('./other-amount').then((part) => part.OtherAmount), { ssr: false });
+const OtherAmount = dynamic(() => untilFetched(() => import('./other-amount')).then((part) => part.OtherAmount), {
+  ssr: false,
+});
 
 /** What may be said of a dose that is due. Where the Stop is still to be read, that comes before all that puts it in. */
 export function DueActions({ dose, tick }: { dose: PlanDose; tick: Tick }) {

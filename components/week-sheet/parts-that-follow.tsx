@@ -1,9 +1,12 @@
 'use client';
 
 import { lazy, Suspense } from 'react';
+import { untilFetched } from '@/components/ui/until-fetched';
 
-const Margin = lazy(() => import('./margin').then((part) => ({ default: part.Margin })));
-const TryIt = lazy(() => import('@/components/try-out/try-it').then((part) => ({ default: part.TryIt })));
+const Margin = lazy(() => untilFetched(() => import('./margin')).then((part) => ({ default: part.Margin })));
+const TryIt = lazy(() =>
+  untilFetched(() => import('@/components/try-out/try-it')).then((part) => ({ default: part.TryIt })),
+);
 
 /**
  * The words of these parts come with the page, the code that brings them to life after it. One element of each for every

@@ -4,14 +4,17 @@ import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { untilFetched } from '@/components/ui/until-fetched';
 import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
 import { useTimes } from './use-times';
 
-const EndEvent = dynamic(() => import('./end-event').then((part) => part.EndEvent));
+const EndEvent = dynamic(() => untilFetched(() => import('./end-event')).then((part) => part.EndEvent));
 const fetchReport = () => import('./report-event');
-const ReportEvent = dynamic(() => import('./report-event').then((part) => part.ReportEvent), { ssr: false });
+const ReportEvent = dynamic(() => untilFetched(() => import('./report-event')).then((part) => part.ReportEvent), {
+  ssr: false,
+});
 
 const SIX_DAYS = 6 * 86_400_000;
 

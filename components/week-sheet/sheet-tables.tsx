@@ -3,9 +3,14 @@
 import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { useId, useState } from 'react';
+import { untilFetched } from '@/components/ui/until-fetched';
 
-const DaysTable = dynamic(() => import('./days-table').then((part) => part.DaysTable), { ssr: false });
-const HoursTable = dynamic(() => import('./hours-table').then((part) => part.HoursTable), { ssr: false });
+const DaysTable = dynamic(() => untilFetched(() => import('./days-table')).then((part) => part.DaysTable), {
+  ssr: false,
+});
+const HoursTable = dynamic(() => untilFetched(() => import('./hours-table')).then((part) => part.HoursTable), {
+  ssr: false,
+});
 
 const tables = ['chlorine', 'pH', 'stabilizer', 'days'] as const;
 type Table = (typeof tables)[number];

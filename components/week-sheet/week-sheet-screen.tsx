@@ -6,6 +6,7 @@ import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Skeleton } from '@/components/ui/skeleton';
+import { untilFetched } from '@/components/ui/until-fetched';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import { weekSheet } from '@/lib/client/week';
@@ -20,9 +21,11 @@ import { SheetStates } from './sheet-states';
 import { instantOf } from './sheet-times';
 import { useIsPhone } from './use-is-phone';
 
-const FirstTest = dynamic(() => import('./first-test').then((part) => part.FirstTest));
+const FirstTest = dynamic(() => untilFetched(() => import('./first-test')).then((part) => part.FirstTest));
 /** The device alone knows what waits on it; the server never draws it. */
-const UnsentNotice = dynamic(() => import('./unsent-notice').then((part) => part.UnsentNotice), { ssr: false });
+const UnsentNotice = dynamic(() => untilFetched(() => import('./unsent-notice')).then((part) => part.UnsentNotice), {
+  ssr: false,
+});
 
 /** The week sheet, fetched and kept fresh. `initial`: what the server knew when it made the page. */
 export function WeekSheetScreen({ start, initial }: { start?: string | undefined; initial?: WeekSheet | undefined }) {

@@ -8,6 +8,7 @@ import { headers } from './journeys/headers';
 import { house } from './journeys/house';
 import { byKeyboard, escape } from './journeys/keyboard';
 import { labelBoxes } from './journeys/label-boxes';
+import { lateCode } from './journeys/late-code';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
@@ -43,6 +44,7 @@ export const journeys: readonly Journey[] = [
   cards,
   cardOffline,
   escape,
+  lateCode,
   headers,
   measuring,
 ];

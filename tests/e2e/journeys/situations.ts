@@ -7,6 +7,7 @@ import { describePool, fullTest, sundayEvening, weekOf } from '../support/househ
 import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
 import { shotsFolder } from '../support/place';
+import { until } from '../support/waiting';
 import { words } from '../support/words';
 
 const answer = (name: string) => words(`situations.answer.${name}`);
@@ -95,8 +96,13 @@ async function walkThrough(
     );
 
   await strip.getByRole('link', { name: words('week.situation.toSteps') }).click();
-  await page.getByRole('button', { name: words('situations.ends.mistakeButton') }).click();
-  await page.getByRole('button', { name: words('situations.ends.mistake.yes') }).click();
+  const yes = page.getByRole('button', { name: words('situations.ends.mistake.yes') });
+  await until(async () => {
+    // A page that was drawn only just now may not listen yet.
+    await page.getByRole('button', { name: words('situations.ends.mistakeButton') }).click();
+    return until(() => yes.isVisible(), { seconds: 3 });
+  });
+  await yes.click();
   await page.getByRole('dialog').waitFor({ state: 'detached' });
   stage.equal(`${kind}: begun by mistake, it is over`, (await situationsOf(ines)).open, null);
 }

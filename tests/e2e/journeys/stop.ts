@@ -72,7 +72,8 @@ async function asked(stage: Stage, page: Page): Promise<void> {
 
 async function withoutConnection(stage: Stage, visitor: Visitor): Promise<void> {
   const { page } = visitor;
-  visitor.expect(/ERR_INTERNET_DISCONNECTED/);
+  // Code that had not come yet is asked for again.
+  visitor.expect(/ERR_INTERNET_DISCONNECTED/, /ERR_FAILED .*\/_next\/static\/chunks\//);
   await page.context().setOffline(true);
   await readStop(page).first().click();
   await page.getByText(words('doses.stop.unsent')).first().waitFor();

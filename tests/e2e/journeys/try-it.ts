@@ -95,7 +95,9 @@ const usable = (page: Page) => page.locator('button:not([aria-disabled])', { has
 async function inThePlan(stage: Stage, page: Page, owner: Person): Promise<void> {
   const before = await weekOf(owner);
   await page.getByRole('button', { name: words('try-out.use') }).click();
-  const said = page.getByText(/changed the plan: 60 swimmer-hours on Saturday\./);
+  const said = page
+    .getByRole('list', { name: words('try-out.takenTitle') })
+    .getByText(/changed the plan: 60 swimmer-hours on Saturday\./);
   await said.waitFor();
   const after = await weekOf(owner);
   stage.equal('the sheet has the swimmers', swimmersIn(after), 60);
