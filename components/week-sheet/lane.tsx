@@ -46,12 +46,12 @@ export function Nights({ axis, nights }: { axis: TimeAxis; nights: readonly Stre
 }
 
 /** The line of now through a lane that is not a chart; `left` as a share of its width. */
-export function NowRule({ left }: { left: number }) {
+export function NowRule({ left, top = 0 }: { left: number; top?: number }) {
   return (
     <div
       aria-hidden="true"
-      className="absolute inset-y-0 border-l-[1.6px] border-ink"
-      style={{ left: `calc(${left * 100}% - 0.8px)` }}
+      className="absolute bottom-0 border-l-[1.6px] border-ink"
+      style={{ left: `calc(${left * 100}% - 0.8px)`, top }}
     />
   );
 }

@@ -18,6 +18,7 @@ export function SunLane() {
   const t = useTranslations('week');
   const { picture } = useSheet();
   const { axis, days, nights, now } = picture;
+  const today = days.find(({ from, to }) => now >= from && now < to);
   return (
     <Lane name="sun" gutter={<LaneName name={t('lane.sun')} note={t('lane.sunUnit')} />}>
       <Nights axis={axis} nights={nights} />
@@ -26,10 +27,24 @@ export function SunLane() {
           <DayOfSun key={day.day} day={day} />
         ))}
         <div className="absolute inset-x-0 border-t border-rule-2" style={{ top: BASE }} />
-        {isOn(axis, now) && <NowRule left={shareOf(axis, now)} />}
+        {isOn(axis, now) && <NowRule left={shareOf(axis, now)} top={belowWords(now, today)} />}
       </div>
     </Lane>
   );
+}
+
+const HOUR = 3_600_000;
+/** How far into a day its hours of sun are written, and from when on its rain [h]. */
+const WORDS_END = 9;
+const RAIN_BEGINS = 13;
+/** Under those words [px]. */
+const WORDS_FOOT = 22;
+
+/** Where the line of now begins: under the words of the day where it would cross them. */
+export function belowWords(now: number, day: SheetDay | undefined): number {
+  if (day === undefined) return 0;
+  const hours = (now - day.from) / HOUR;
+  return hours < WORDS_END || (day.rain >= 0.5 && hours > RAIN_BEGINS) ? WORDS_FOOT : 0;
 }
 
 function DayOfSun({ day }: { day: SheetDay }) {

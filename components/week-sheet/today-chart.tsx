@@ -16,6 +16,7 @@ import { useSheet } from './sheet-context';
 import { courseOn } from './sheet-picture';
 import { hourMarksOf, type SheetDay } from './sheet-times';
 import { SunBars } from './sun-bars';
+import { belowWords } from './sun-lane';
 import { SwimmerHeads } from './swimmer-heads';
 import { useElementWidth } from './use-element-width';
 import { useUnits } from './use-units';
@@ -69,7 +70,7 @@ function DaySun({ day }: { day: SheetDay }) {
         {t('phone.sunHours', { hours: units.number(fullSun, 1) })}
       </span>
       <SwimmerHeads day={day} top={SUN_BASE - 5} />
-      <NowRule left={shareOf(day, now)} />
+      <NowRule left={shareOf(day, now)} top={belowWords(now, day)} />
     </div>
   );
 }
