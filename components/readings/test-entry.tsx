@@ -7,15 +7,9 @@ import { buttonClass } from '@/components/ui/button-class';
 import { Skeleton } from '@/components/ui/skeleton';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
-import type { TestDraft } from './test-draft';
+import type { TestForNowProps } from './test-for-now';
 
-export type TestEntryProps = {
-  household: ReadingHousehold;
-  /** Which test the link asked for. */
-  kind: TestDraft['kind'];
-  /** The server's clock when the page was made [ms]. */
-  serverNow: number;
-};
+type TestEntryProps = TestForNowProps & { household: ReadingHousehold };
 
 /** Drafts live on the device, which the server does not know; so the form and what checks it follow the page. */
 const LazyTest = dynamic(() => untilFetched(() => import('./test-for-now')).then((part) => part.TestForNow), {

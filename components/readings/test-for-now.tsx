@@ -17,16 +17,23 @@ import { KeptOnDevice } from './kept-on-device';
 import { OpenZero } from './open-zero';
 import { useReadingSetting } from './reading-setting';
 import { SavedTest } from './saved-test';
-import type { TestEntryProps } from './test-entry';
+import type { TestDraft } from './test-draft';
 import { TestForm } from './test-form';
 import { UnsentTests } from './unsent-tests';
 import { useNow } from './use-now';
 import { useTestDraft } from './use-test-draft';
 
+export type TestForNowProps = {
+  /** Which test the link asked for. */
+  kind: TestDraft['kind'];
+  /** The server's clock when the page was made [ms]. */
+  serverNow: number;
+};
+
 type Outcome = { sent: SentReading; before: readonly PlanDose[] | null };
 
 /** A test from its first figure to what the sheet says of it. */
-export function TestForNow({ kind, serverNow }: Omit<TestEntryProps, 'household'>) {
+export function TestForNow({ kind, serverNow }: TestForNowProps) {
   const t = useTranslations('readings');
   const problemWords = useProblemWords();
   const { householdId, personId } = useReadingSetting();

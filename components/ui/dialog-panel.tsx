@@ -3,7 +3,18 @@
 import { Dialog as BaseDialog } from '@base-ui/react/dialog';
 import { X } from 'lucide-react';
 import { classNames } from './class-names';
-import type { DialogProps } from './dialog';
+
+export type DialogProps = {
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+  title: React.ReactNode;
+  /** One sentence under the title, read out when the dialog opens. */
+  description?: React.ReactNode;
+  closeLabel: string;
+  children?: React.ReactNode;
+  /** The buttons at the end, main one first. */
+  actions?: React.ReactNode;
+};
 
 export const scrim =
   'fixed inset-0 z-20 bg-ink opacity-50 transition-opacity duration-expand data-ending-style:opacity-0 data-starting-style:opacity-0';

@@ -4,7 +4,16 @@ import { Dialog as BaseDialog } from '@base-ui/react/dialog';
 import { X } from 'lucide-react';
 import { classNames } from './class-names';
 import { scrim } from './dialog-panel';
-import type { SheetProps } from './sheet';
+
+export type SheetProps = {
+  open: boolean;
+  onOpenChange: (open: boolean) => void;
+  title: React.ReactNode;
+  closeLabel: string;
+  children: React.ReactNode;
+  /** Leaves this much room below, for a bar that must stay in reach. */
+  aboveTabs?: boolean;
+};
 
 /** The sheet itself; `Sheet` fetches it. */
 export function SheetPanel({ open, onOpenChange, title, closeLabel, children, aboveTabs = false }: SheetProps) {
