@@ -50,6 +50,7 @@ export function PaperChlorine(props: Props) {
     <>
       {ticksOf(value).map((level) => (
         <path
+          fill="none"
           key={level}
           d={`M0 ${yOf(value, level)}H${width}`}
           className="stroke-ink"
@@ -66,7 +67,7 @@ export function PaperChlorine(props: Props) {
         return (
           <g key={from}>
             <rect x={x} y={y - HATCH_HEIGHT} width={reach} height={HATCH_HEIGHT} fill={HATCH} />
-            <path d={`M${x} ${y}h${reach}`} className="stroke-ink" strokeWidth="1.25" />
+            <path fill="none" d={`M${x} ${y}h${reach}`} className="stroke-ink" strokeWidth="1.25" />
           </g>
         );
       })}
@@ -93,6 +94,7 @@ function PlumbLines({ ground, doses, points }: Pick<Props, 'ground' | 'doses' | 
     if (foot === undefined || !isOn(axis, dose.at)) return null;
     return (
       <path
+        fill="none"
         key={dose.id}
         d={`M${xOf(axis, width, dose.at)} ${yOf(value, foot)}V${value.height}`}
         className="stroke-ink"
@@ -111,7 +113,7 @@ function Tests({ ground: { axis, width, value }, tests }: Pick<Props, 'ground' |
     const x = xOf(axis, width, at);
     return (
       <g key={id} className="stroke-ink" fill="none" strokeWidth="1.3">
-        <path d={`M${x} ${yOf(value, low)}V${yOf(value, high)}m-3 0h6M${x - 3} ${yOf(value, low)}h6`} />
+        <path fill="none" d={`M${x} ${yOf(value, low)}V${yOf(value, high)}m-3 0h6M${x - 3} ${yOf(value, low)}h6`} />
         {between === undefined && (
           <circle cx={x} cy={yOf(value, middle)} r="4" className="fill-paper stroke-ink" strokeWidth="1.6" />
         )}

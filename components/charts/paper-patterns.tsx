@@ -11,7 +11,7 @@ export function PaperPatterns() {
         <circle cx="3.8" cy="3.8" r="0.55" className="fill-ink" />
       </pattern>
       <pattern id="paper-night" width="3.2" height="4" patternUnits="userSpaceOnUse">
-        <path d="M1.6 0V4" className="stroke-ink" strokeWidth="0.35" />
+        <path fill="none" d="M1.6 0V4" className="stroke-ink" strokeWidth="0.35" />
       </pattern>
     </defs>
   );

@@ -32,7 +32,7 @@ export function PaperDay({ day }: { day: SheetDay }) {
       </text>
       {hourMarksOf(day, timeZone).map(({ hour, at }) => (
         <g key={hour}>
-          <path d={`M${x(at)} ${laneTop.sun - 4}v4`} className="stroke-ink" strokeWidth="0.8" />
+          <path fill="none" d={`M${x(at)} ${laneTop.sun - 4}v4`} className="stroke-ink" strokeWidth="0.8" />
           <text x={x(at)} y={laneTop.sun - 6} fontSize={SMALL} textAnchor="middle" className="fill-ink">
             {hourWords[hour]}
           </text>
@@ -41,6 +41,7 @@ export function PaperDay({ day }: { day: SheetDay }) {
       {day.sun.map((share, hour) =>
         share < SPECK ? null : (
           <path
+            fill="none"
             key={hour}
             d={`M${x(day.from + (hour + 0.5) * HOUR)} ${laneTop.chlorine - 3}v${-share * TALLEST}`}
             className="stroke-ink"

@@ -46,7 +46,7 @@ export function PaperLanes() {
             />
           ))}
           {[axis.from, ...days.map(({ to }) => to)].map((at) => (
-            <path key={at} d={`M${x(at)} 4V${WHOLE}`} className="stroke-ink" strokeWidth="0.5" />
+            <path fill="none" key={at} d={`M${x(at)} 4V${WHOLE}`} className="stroke-ink" strokeWidth="0.5" />
           ))}
           {days.map((day) => (
             <PaperDay key={day.day} day={day} />
@@ -55,10 +55,16 @@ export function PaperLanes() {
             <Chlorine value={value} tests={tests} endsAt={endsAt} />
           </g>
           {isOn(axis, now) && (
-            <path d={`M${x(now)} ${laneTop.sun}V${laneTop.highLow}`} className="stroke-ink" strokeWidth="1.2" />
+            <path
+              fill="none"
+              d={`M${x(now)} ${laneTop.sun}V${laneTop.highLow}`}
+              className="stroke-ink"
+              strokeWidth="1.2"
+            />
           )}
           {endsAt !== undefined && isOn(axis, endsAt) && (
             <path
+              fill="none"
               d={`M${x(endsAt)} ${laneTop.sun}V${laneTop.highLow}`}
               className="stroke-ink"
               strokeWidth="2.2"
@@ -67,7 +73,7 @@ export function PaperLanes() {
           )}
         </g>
         {[laneTop.sun, laneTop.chlorine, laneTop.highLow].map((top) => (
-          <path key={top} d={`M0 ${top}H${GUTTER + PLOT}`} className="stroke-ink" strokeWidth="0.8" />
+          <path fill="none" key={top} d={`M0 ${top}H${GUTTER + PLOT}`} className="stroke-ink" strokeWidth="0.8" />
         ))}
       </svg>
     </>
