@@ -24,10 +24,23 @@ const poured = [
   'stabilizer-bag',
 ] as const;
 const loaded = ['tablets-inline', 'tablets-floating'] as const;
+/** No way of adding: care rules, part 4, give none by default. */
+const labelFirst = 'granules-label-first';
 
 describe('the six steps of a dose', () => {
   it('are those of one of the kinds below', () => {
-    expect(Object.keys(doses.steps).toSorted()).toEqual([...poured, ...loaded].toSorted());
+    expect(Object.keys(doses.steps).toSorted()).toEqual([...poured, ...loaded, labelFirst].toSorted());
+  });
+
+  it('of a label that nobody has read: no way of adding it, and none to try', () => {
+    const steps = doses.steps[labelFirst];
+    expect(Object.keys(steps)).toEqual(['1', '2', '3']);
+    expect(steps[1]).toMatch(/^<b>Do not add it yet\.<\/b>/);
+    const text = Object.values(steps).join(' ');
+    // What a label may say is named in its own words, as the question for it is.
+    expect(text.replace('dissolve first, pour straight in, or only through its feeder', '')).not.toMatch(pours);
+    expect(text).not.toMatch(/\bTick\b|[Bb]ucket|[Ss]coop/);
+    expect(text).toMatch(/Where the label does not say, nothing of it goes in\.$/);
   });
 
   it.each(poured)('%s: nobody in, then goggles and gloves, then the pump, then pouring, then the tick', (card) => {

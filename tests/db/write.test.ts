@@ -64,7 +64,8 @@ describe('inWriteTransaction', () => {
     await written;
     await single;
     clearInterval(heart);
-    expect(beats).toBeGreaterThan(5);
+    // A thread that is blocked has no beat at all; one that shares its core with others has fewer than 25.
+    expect(beats).toBeGreaterThan(2);
     expect(await db.$count(rateLimits)).toBe(2);
     // The connection that was refused is not left broken.
     await inWriteTransaction(db, (tx) => tx.insert(rateLimits).values(aRow()));

@@ -377,7 +377,7 @@ describe('any scenario with any wishes', () => {
             wanted.wishes.doses.filter(({ unit }) => unit === 'tablet').reduce((sum, { amount }) => sum + amount, 0),
           );
       }),
-      { numRuns: process.env.LONG === '1' ? 300 : 60 },
+      { numRuns: process.env.LONG === '1' ? 300 : 40 },
     );
     expect(seen.planned).toBeGreaterThan(10);
     expect(seen.refused).toBeGreaterThan(3);

@@ -30,8 +30,9 @@ function stayOutCodes(): string[] {
 }
 
 it('gives each way of handling a product exactly six steps', () => {
-  for (const steps of Object.values(catalogue.doses.steps))
-    expect(Object.keys(steps)).toEqual(['1', '2', '3', '4', '5', '6']);
+  // That a label has to be read first is no way of handling.
+  const { 'granules-label-first': _, ...ways } = catalogue.doses.steps;
+  for (const steps of Object.values(ways)) expect(Object.keys(steps)).toEqual(['1', '2', '3', '4', '5', '6']);
 });
 
 it('never calls water safe, and puts no exclamation mark behind anything', () => {
