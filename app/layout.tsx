@@ -5,7 +5,6 @@ import './globals.css';
 import type { Metadata, Viewport } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { connection } from 'next/server';
-import { preload } from 'react-dom';
 import { UiProvider } from '@/components/ui/ui-provider';
 import { Providers } from '@/lib/client/providers';
 import { ClientMessages } from '@/lib/messages/client-messages';
@@ -42,9 +41,14 @@ export const viewport: Viewport = { width: 'device-width', initialScale: 1, colo
 export default async function RootLayout({ children }: { children: React.ReactNode }) {
   // Every page is made per request: a page made at build time would carry no nonce and its scripts would be refused.
   await connection();
-  for (const font of fonts) preload(font.pathname, { as: 'font', type: 'font/woff2', crossOrigin: '' });
   return (
     <html lang="en">
+      <head>
+        {/* An element, and not a call of React's, which would ask for them again on the way to another page. */}
+        {fonts.map(({ pathname }) => (
+          <link key={pathname} rel="preload" href={pathname} as="font" type="font/woff2" crossOrigin="anonymous" />
+        ))}
+      </head>
       <body>
         <ClientMessages>
           <Providers>
