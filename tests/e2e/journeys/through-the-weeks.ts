@@ -8,6 +8,7 @@ import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
 import type { Server } from '../support/server';
 import { until } from '../support/waiting';
+import { curvesDrawn } from '../support/sheet';
 import { words } from '../support/words';
 
 /** Through the weeks by link, by key and by finger, and along a curve hour by hour. */
@@ -93,7 +94,8 @@ async function onAPhone(stage: Stage, server: Server, person: Person, sheet: Wee
   const { page } = visitor;
   await enterAs(visitor, person);
   await page.goto('/week');
-  await page.getByRole('slider').first().waitFor();
+  await curvesDrawn(page);
+  await page.evaluate(() => scrollTo(0, 0));
   const finger = await visitor.context.newCDPSession(page);
   await drag(finger, { x: 320, y: 150 }, { x: 310, y: 60 });
   await page.waitForTimeout(400);
