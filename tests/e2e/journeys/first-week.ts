@@ -62,6 +62,8 @@ export const firstWeek: Journey = {
     await stage.part('another amount', () => otherAmount(stage, page, poured, sheet));
 
     const after = await sheet();
+    // The sheet may still be fetching something while the session ends under it.
+    visitor.expect(/401 \(Unauthorized\)/);
     await page.getByRole('button', { name: words('navigation.signOut') }).click();
     await page.waitForURL((url) => ['/', '/sign-in'].includes(url.pathname));
     await page.goto('/week');
