@@ -1,8 +1,8 @@
 import { FlaskConical, Package } from 'lucide-react';
 import { type Mark, ProductGlyph } from '@/components/charts/product-glyph';
 import type { HouseholdProduct } from '@/lib/schemas/household-product';
+import { chlorines } from '@/lib/standards/chlorines';
 
-const chlorines: readonly string[] = ['trichlor', 'dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
 const marks: Partial<Record<HouseholdProduct['form'], Mark>> = {
   tablet: 'tablet',
   granular: 'granules',

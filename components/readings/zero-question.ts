@@ -1,11 +1,11 @@
 import { parseInstant } from '@/lib/calendar/wall-time';
 import { type FalseZeroCause, falseZeroQuestion } from '@/lib/client/readings';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import { chlorines } from '@/lib/standards/chlorines';
 import { type Value, asInterval, middleOf } from './entered';
 import type { TestDraft } from './test-draft';
 
 const HOUR = 3_600_000;
-const chlorines: readonly string[] = ['trichlor', 'dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
 
 /** The question of the care rules about a reading that looks like none, and what the sheet expected instead. */
 export type ZeroQuestion = { cause: FalseZeroCause; expected: { low: number; high: number } | undefined };

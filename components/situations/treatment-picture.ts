@@ -10,14 +10,13 @@ import {
 import { wallToInstant } from '@/lib/calendar/wall-time';
 import { productForms } from '@/lib/schemas/shelf-product';
 import type { OpenSituation, Situations } from '@/lib/schemas/situation';
+import { chlorines } from '@/lib/standards/chlorines';
 import { instantOf } from './use-situation-times';
 
 export type TreatmentChart = NonNullable<Situations['chart']>;
 
 /** When a morning that is still to come is read. */
 const MORNING = '08:00';
-
-const chlorine = ['calcium-hypochlorite', 'sodium-hypochlorite', 'dichlor', 'trichlor'];
 
 export type TreatmentPicture = {
   points: TreatmentPoint[];
@@ -68,7 +67,7 @@ function dosesOf({ doses }: TreatmentChart, steps: OpenSituation['procedure']['s
         kind === 'dose' && (instantOf(planned) === instant || (doneAt !== null && instantOf(doneAt) === instant)),
     );
     // Acid moves no chlorine.
-    if (step && !chlorine.some((each) => each === step.figures.substance)) return [];
+    if (step && !chlorines.some((each) => each === step.figures.substance)) return [];
     const form = productForms.find((each) => each === step?.figures.form);
     return [{ at: instant, given, glyph: form && glyphOf(form) }];
   });

@@ -1,8 +1,8 @@
+import type { SheetPicture } from '@/components/week-sheet/sheet-picture';
+import { instantOf, type SheetDay } from '@/components/week-sheet/sheet-times';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
-import type { SheetDay } from '@/components/week-sheet/sheet-times';
-import { instantOf } from '@/components/week-sheet/sheet-times';
-import type { SheetPicture } from '@/components/week-sheet/sheet-picture';
+import { chlorines } from '@/lib/standards/chlorines';
 
 /** What of a sheet there is to try on. */
 export type TryGround = {
@@ -14,8 +14,6 @@ export type TryGround = {
   /** Slow tablets that the plan still loads; undefined where there are none in question. */
   tablets: number | undefined;
 };
-
-const chlorines: readonly string[] = ['dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
 
 /** Undefined where nothing can be tried: no plan that planned anything, or none of its days on the sheet. */
 export function groundOf(sheet: WeekSheet, picture: SheetPicture): TryGround | undefined {

@@ -1,23 +1,23 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import type { TryOut, TryOutStart } from '@/lib/schemas/try-out';
+import type { TryOut } from '@/lib/schemas/try-out';
+import { doneReply } from './done-reply';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
+
+const startReply = () => import('@/lib/schemas/try-out').then(({ tryOutStartSchema }) => tryOutStartSchema);
 
 const tryOutKeys = {
   all: ['try-out'] as const,
   on: (planId: string) => [...tryOutKeys.all, planId] as const,
 };
 
-/** What trying out starts from. Asked once for each plan; its schema is loaded with it, not with the page. */
+/** What trying out starts from. Asked once for each plan. */
 export function tryOutStart(planId: string) {
   return queryOptions({
     queryKey: tryOutKeys.on(planId),
-    queryFn: async ({ signal }): Promise<TryOutStart> => {
-      const { tryOutStartSchema } = await import('@/lib/schemas/try-out');
-      return fetchJson('/api/try-outs', tryOutStartSchema, { signal });
-    },
+    queryFn: ({ signal }) => fetchJson('/api/try-outs', startReply, { signal }),
     staleTime: Infinity,
     retry: false,
   });
@@ -33,10 +33,7 @@ export function useTakeTryOut(onTaken: () => void) {
   return useMutation({
     // Without a connection it fails in words rather than wait in silence.
     networkMode: 'always',
-    mutationFn: async (tryOut: TryOut) => {
-      const { doneSchema } = await import('@/lib/schemas/account');
-      return fetchJson('/api/try-outs', doneSchema, { method: 'POST', body: tryOut });
-    },
+    mutationFn: (tryOut: TryOut) => fetchJson('/api/try-outs', doneReply, { method: 'POST', body: tryOut }),
     onSuccess: () => {
       onTaken();
       return client.invalidateQueries({ queryKey: weekKeys.all });
@@ -51,10 +48,7 @@ export function usePutBackTryOut() {
   const client = useQueryClient();
   return useMutation({
     networkMode: 'always',
-    mutationFn: async (id: string) => {
-      const { doneSchema } = await import('@/lib/schemas/account');
-      return fetchJson(`/api/try-outs/${id}`, doneSchema, { method: 'DELETE' });
-    },
+    mutationFn: (id: string) => fetchJson(`/api/try-outs/${id}`, doneReply, { method: 'DELETE' }),
     onSuccess: () => client.invalidateQueries({ queryKey: weekKeys.all }),
     onError: (problem) => sheetAnew(client, problem),
   });

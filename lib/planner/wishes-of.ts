@@ -3,16 +3,15 @@ import { parseInstant } from '@/lib/calendar/wall-time';
 import type { PlannedDose } from '@/lib/schemas/dose';
 import type { Scenario } from '@/lib/schemas/scenario';
 import type { TryOutChanges, TryOutStart } from '@/lib/schemas/try-out';
+import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import type { Wishes } from '@/lib/schemas/wishes';
+import { chlorines } from '@/lib/standards/chlorines';
 import { genericIdOf } from './generic-products';
 import { tabletsFrom } from './products';
 import { isEmptyWish, mergedWishes, noWishes } from './wishes';
 
 /** The plan that something is tried on: its doses that are still ahead, and the evenings on which chlorine may go in. */
 export type PlanAhead = { doses: TryOutStart['doses']; evenings: TryOutStart['evenings'] };
-
-const DAYS_OF_A_PLAN = 8;
-const chlorines: readonly string[] = ['trichlor', 'dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
 
 /** What changes wish of a plan: tablets of the whole plan in one loading, and doses on another evening. */
 export function wishesOf(changes: TryOutChanges, ahead: PlanAhead, scenario: Scenario): Wishes {

@@ -57,7 +57,5 @@ export const tryOutStartSchema = z.object({
   evenings: z.array(z.object({ day: calendarDaySchema, at: instantSchema })),
   /** Most slow tablets that the rules allow in this week; 0 where none may be planned. */
   mostTablets: z.number().int(),
-  /** Those taken and not put back. */
-  taken: z.array(takenTryOutSchema),
 });
 export type TryOutStart = z.infer<typeof tryOutStartSchema>;

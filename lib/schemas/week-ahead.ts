@@ -1,5 +1,8 @@
 import { z } from 'zod';
 
+/** A plan of 168 hours touches eight household days. */
+export const DAYS_OF_A_PLAN = 8;
+
 const daily = (low: number, high: number) => z.array(z.number().min(low).max(high)).min(7).max(8);
 
 /**

@@ -7,9 +7,9 @@ import { middleOf } from '@/lib/projection/reading-error';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import { limits } from '@/lib/standards/limits';
 import { falseZeroQuestion } from '@/lib/verdict/false-zero';
+import { chlorines } from '@/lib/standards/chlorines';
 
 const HOUR = 3_600_000;
-const chlorines: readonly string[] = ['trichlor', 'dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
 
 /**
  * Whether a reading of no chlorine may be one of far too much (care rules, part 2). 'open': the person has not answered

@@ -3,11 +3,11 @@ import { assertMay } from '@/lib/auth/permissions';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import type { PrintedWeek } from '@/lib/schemas/printed-week';
 import type { WeekQuery } from '@/lib/schemas/week-query';
+import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import type { ServiceContext } from './context';
 import { countingDoses } from './sheet-doses';
 import { showHouseNotes } from './show-house-notes';
 import { showWeek } from './show-week';
-import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
 

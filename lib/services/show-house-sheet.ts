@@ -4,11 +4,11 @@ import { safetyCardCounts } from '@/lib/auth/household-access';
 import { assertMay } from '@/lib/auth/permissions';
 import { addDays } from '@/lib/calendar/household-day';
 import type { HouseSheet } from '@/lib/schemas/house-sheet';
+import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import type { ServiceContext } from './context';
 import { countingDoses } from './sheet-doses';
 import { showHouseNotes } from './show-house-notes';
 import { showWeek } from './show-week';
-import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
 

@@ -18,6 +18,7 @@ import type { Pool } from '@/lib/schemas/pool';
 import type { WeekQuery } from '@/lib/schemas/week-query';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { limits } from '@/lib/standards/limits';
+import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import type { ServiceContext } from './context';
 import { enginePool } from './engine-pool';
 import { zeroDoubtOf } from './false-zero';
@@ -34,7 +35,6 @@ import { openSituation } from './show-situations';
 import { situationDoses } from './situation-doses';
 import { loadOpenSituation } from './situation-record';
 import { loadTryOutsInForce } from './try-outs-in-force';
-import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
 const readingsCountFor = 60 * DAY;

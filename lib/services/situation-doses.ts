@@ -2,10 +2,10 @@ import 'server-only';
 import { lastMeasured } from '@/db/queries/readings';
 import { pumpUntil } from '@/lib/projection/events';
 import { type SituationDose, wayOf } from '@/lib/situations';
+import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import type { ServiceContext } from './context';
 import { countingDoses } from './sheet-doses';
 import type { LoadedSituation } from './situation-record';
-import { DAYS_OF_A_PLAN } from './week-ahead';
 
 const DAY = 86_400_000;
 

@@ -8,7 +8,7 @@ import type { Scenario } from '@/lib/schemas/scenario';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import type { TakenTryOut } from '@/lib/schemas/try-out';
 import type { Wishes } from '@/lib/schemas/wishes';
-import { DAYS_OF_A_PLAN } from './week-ahead';
+import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 
 const DAY = 86_400_000;
 

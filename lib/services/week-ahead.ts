@@ -1,10 +1,7 @@
 import 'server-only';
 import type { WeekDayRow, WeekDayValues } from '@/db/queries/week-days';
 import { addDays, type CalendarDay } from '@/lib/calendar/household-day';
-import { type WeekAhead, weekAheadSchema } from '@/lib/schemas/week-ahead';
-
-/** A plan of 168 hours touches eight household days. */
-export const DAYS_OF_A_PLAN = 8;
+import { DAYS_OF_A_PLAN, type WeekAhead, weekAheadSchema } from '@/lib/schemas/week-ahead';
 
 /** What was said of the days of a plan, in the engine's arrays; the usual where nothing was said. */
 export function weekAheadOf(rows: readonly WeekDayRow[], first: CalendarDay): WeekAhead {

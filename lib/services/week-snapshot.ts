@@ -16,13 +16,14 @@ import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import type { SituationKind } from '@/lib/schemas/situation';
 import type { Treatment } from '@/lib/schemas/treatment';
 import { wayOf } from '@/lib/situations';
+import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import { engineDose, engineReading, productsGone, withoutRepeats } from './engine-history';
 import { enginePool, feederMassAt } from './engine-pool';
 import { engineProduct } from './engine-shelf';
 import { type ZeroDoubt, zeroDoubtOf } from './false-zero';
 import { loadOpenSituation } from './situation-record';
 import { loadWishes } from './try-outs-in-force';
-import { DAYS_OF_A_PLAN, weekAheadOf } from './week-ahead';
+import { weekAheadOf } from './week-ahead';
 
 const DAY = 86_400_000;
 const HOUR = 3_600_000;

@@ -9,18 +9,16 @@ import { dayRange } from '@/lib/calendar/format';
 import { weekOf } from '@/lib/calendar/household-day';
 import { AppError } from '@/lib/errors';
 import { ClientMessages } from '@/lib/messages/client-messages';
-import { calendarDaySchema } from '@/lib/schemas/time';
+import { weekAskedFor, type WeekAddress } from '@/lib/schemas/week-query';
 import { showWeek } from '@/lib/services/show-week';
 
-type Props = { searchParams: Promise<{ start?: string | string[] }> };
-
-const startOf = async (searchParams: Props['searchParams']) =>
-  calendarDaySchema.safeParse((await searchParams).start).data;
+type Props = { searchParams: Promise<WeekAddress> };
 
 /** Whoever goes through the weeks is told by the title which one it is. */
 export async function generateMetadata({ searchParams }: Props): Promise<Metadata> {
   const t = await getTranslations('week');
-  const [start, visit] = [await startOf(searchParams), await findHousehold()];
+  const { start } = weekAskedFor(await searchParams);
+  const visit = await findHousehold();
   if (start === undefined || visit === null) return { title: t('title') };
   const days = weekOf(start, firstWeekday(visit.access.locale));
   const range = dayRange(days[0] ?? start, days.at(-1) ?? start, visit.access.locale, t('rangeJoiner'));
@@ -31,8 +29,8 @@ export async function generateMetadata({ searchParams }: Props): Promise<Metadat
 export default async function WeekPage({ searchParams }: Props) {
   const visit = await requireHousehold();
   const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem } = visit.access;
-  const start = await startOf(searchParams);
-  const initial = await showWeek(visit, start === undefined ? {} : { start }).catch((problem: unknown) => {
+  const asked = weekAskedFor(await searchParams);
+  const initial = await showWeek(visit, asked).catch((problem: unknown) => {
     // The browser asks again and says in words what is wrong.
     if (problem instanceof AppError) return undefined;
     throw problem;
@@ -46,7 +44,7 @@ export default async function WeekPage({ searchParams }: Props) {
         <WaitingTests
           household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
         />
-        <WeekSheetScreen start={start} initial={initial} />
+        <WeekSheetScreen start={asked.start} initial={initial} />
       </div>
       <PrintElsewhere />
     </ClientMessages>

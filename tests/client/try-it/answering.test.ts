@@ -7,7 +7,7 @@ import { scenarioOf } from '../../planner/scenarios';
 
 const scenario = scenarioOf();
 const start: TryOutStart = {
-  ...{ planId: 'p', scenario, evenings: [], mostTablets: 3, taken: [] },
+  ...{ planId: 'p', scenario, evenings: [], mostTablets: 3 },
   doses: planWeek(scenario).doses.map((dose, index) => ({
     ...dose,
     id: `00000000-0000-4000-8000-00000000000${index}`,

@@ -15,7 +15,6 @@ const start: TryOutStart = {
   doses,
   evenings: days.map((day) => ({ day, at: `${day}T20:15:00-04:00` })),
   mostTablets: 3,
-  taken: [],
 };
 const engine = new TryItEngine(start);
 const changes = (given: Record<string, unknown>) => tryOutChangesSchema.parse(given);

@@ -3,7 +3,7 @@ import type { TryItAnswer, TryItQuestion } from '@/lib/client/try-it/messages';
 import { TryItSession, type TryItThread } from '@/lib/client/try-it/session';
 import { type TryOutStart, tryOutChangesSchema } from '@/lib/schemas/try-out';
 
-const start: TryOutStart = { planId: 'p', scenario: {}, doses: [], evenings: [], mostTablets: 0, taken: [] };
+const start: TryOutStart = { planId: 'p', scenario: {}, doses: [], evenings: [], mostTablets: 0 };
 const swimmers = (count: number) =>
   tryOutChangesSchema.parse({ swimmers: [{ day: '2026-07-11', swimmerHours: count }] });
 

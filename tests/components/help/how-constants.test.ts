@@ -197,7 +197,6 @@ const arithmetic: Record<string, string> = {
   'planner/products#fastOption': 'what a label says where the household does not',
   'planner/refuse-wishes#tooMuchAtFirst': 'half of a first dose, and rounding',
   'planner/wished-doses#wishedIn': 'rounding',
-  'planner/wishes-of#DAYS_OF_A_PLAN': 'days of a plan',
   'planner/quick-course#reckonOn': 'a series',
   'planner/quick-week#LEVELS': 'how a search goes',
   'planner/quick-week#USUAL_LEVEL': 'how a search goes',

@@ -34,7 +34,6 @@ export function startOn(sheet: WeekSheet, overrides: Partial<TryOutStart> = {}):
     doses: [],
     evenings: sheet.days.map(({ day }) => ({ day, at: `${day}T19:40:00+02:00` })),
     mostTablets: 3,
-    taken: [],
     ...overrides,
   };
 }

@@ -2,10 +2,9 @@ import type { Page } from 'playwright-core';
 import { join } from 'node:path';
 import type { HouseNotes } from '@/lib/schemas/house-note';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
-import { joinHousehold } from '../support/database';
 import { enterAs } from '../support/enter';
 import { choice } from '../support/first-run';
-import { describePool, fullTest, sundayEvening, weekOf } from '../support/households';
+import { describePool, fullTest, sundayEvening, weekOf, viewerOf } from '../support/households';
 import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
 import { shotsFolder } from '../support/place';
@@ -153,12 +152,7 @@ async function aVisit(stage: Stage, page: Page): Promise<void> {
 }
 
 async function aViewer(stage: Stage, server: Server, owner: Person): Promise<void> {
-  const viewer = new Person(server);
-  const { email } = await viewer.signUp({ name: 'Kit' });
-  const households = await owner.must<{ id: string }[]>('GET', '/api/households');
-  const householdId = households[0]?.id ?? '';
-  await joinHousehold(server, { email, householdId, role: 'viewer' });
-  await viewer.must('PUT', '/api/households/chosen', { householdId });
+  const viewer = await viewerOf(server, owner, 'Kit');
   const visitor = await stage.visitor(server, 'a viewer', { width: 1440 });
   await enterAs(visitor, viewer);
   const { page } = visitor;

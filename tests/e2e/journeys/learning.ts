@@ -1,8 +1,7 @@
 import type { Page } from 'playwright-core';
 import type { Learnt } from '@/lib/schemas/learnt';
-import { joinHousehold } from '../support/database';
 import { enterAs } from '../support/enter';
-import { describePool, fullTest, sundayEvening, weekOf } from '../support/households';
+import { describePool, fullTest, sundayEvening, weekOf, viewerOf } from '../support/households';
 import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
 import type { Server } from '../support/server';
@@ -80,12 +79,7 @@ async function theBars(stage: Stage, server: Server, owner: Person): Promise<voi
 }
 
 async function aViewer(stage: Stage, server: Server, owner: Person): Promise<void> {
-  const viewer = new Person(server);
-  const { email } = await viewer.signUp({ name: 'Ada' });
-  const households = await owner.must<{ id: string }[]>('GET', '/api/households');
-  const householdId = households[0]?.id ?? '';
-  await joinHousehold(server, { email, householdId, role: 'viewer' });
-  await viewer.must('PUT', '/api/households/chosen', { householdId });
+  const viewer = await viewerOf(server, owner, 'Ada');
 
   const page = await poolPage(stage, server, viewer, 'a viewer');
   await page.getByText(words('learnt.forget.owners')).waitFor();

@@ -2,9 +2,8 @@ import type { Page } from 'playwright-core';
 import { randomUUID } from 'node:crypto';
 import { join } from 'node:path';
 import type { TryOutStart } from '@/lib/schemas/try-out';
-import { joinHousehold } from '../support/database';
 import { enterAs } from '../support/enter';
-import { describePool, fullTest, sundayEvening, weekOf } from '../support/households';
+import { describePool, fullTest, sundayEvening, weekOf, viewerOf } from '../support/households';
 import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
 import { shotsFolder } from '../support/place';
@@ -166,12 +165,7 @@ async function onPhone(stage: Stage, server: Server, owner: Person): Promise<voi
 }
 
 async function aViewer(stage: Stage, server: Server, owner: Person): Promise<void> {
-  const viewer = new Person(server);
-  const { email } = await viewer.signUp({ name: 'Kit' });
-  const households = await owner.must<{ id: string }[]>('GET', '/api/households');
-  const householdId = households[0]?.id ?? '';
-  await joinHousehold(server, { email, householdId, role: 'viewer' });
-  await viewer.must('PUT', '/api/households/chosen', { householdId });
+  const viewer = await viewerOf(server, owner, 'Kit');
   const visitor = await stage.visitor(server, 'a viewer', { width: 1440 });
   await enterAs(visitor, viewer);
   const { page } = visitor;

@@ -1,7 +1,9 @@
 import { randomUUID } from 'node:crypto';
 import type { NewReading } from '@/lib/schemas/reading';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
-import type { Person } from './person';
+import { joinHousehold } from './database';
+import { Person } from './person';
+import type { Server } from './server';
 
 /** Midsummer, a Sunday evening at the pool: when this household tests its water. */
 export const sundayEvening = '2026-07-05T19:00:00-04:00';
@@ -106,3 +108,14 @@ export function fullTest(takenAt: string, overrides: Partial<NewReading> = {}): 
 }
 
 export const weekOf = (person: Person): Promise<WeekSheet> => person.must<WeekSheet>('GET', '/api/week');
+
+/** Somebody who may only look at an owner's household. */
+export async function viewerOf(server: Server, owner: Person, name: string): Promise<Person> {
+  const viewer = new Person(server);
+  const { email } = await viewer.signUp({ name });
+  const households = await owner.must<{ id: string }[]>('GET', '/api/households');
+  const householdId = households[0]?.id ?? '';
+  await joinHousehold(server, { email, householdId, role: 'viewer' });
+  await viewer.must('PUT', '/api/households/chosen', { householdId });
+  return viewer;
+}

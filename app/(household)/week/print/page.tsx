@@ -3,7 +3,7 @@ import { getTranslations } from 'next-intl/server';
 import { WeekPrintPage } from '@/components/week-print/week-print-page';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { ClientMessages } from '@/lib/messages/client-messages';
-import { calendarDaySchema } from '@/lib/schemas/time';
+import { weekAskedFor, type WeekAddress } from '@/lib/schemas/week-query';
 import { printWeek } from '@/lib/services/print-week';
 
 export async function generateMetadata(): Promise<Metadata> {
@@ -11,17 +11,16 @@ export async function generateMetadata(): Promise<Metadata> {
   return { title: t('title') };
 }
 
-export default async function PrintPage({ searchParams }: { searchParams: Promise<{ start?: string | string[] }> }) {
+export default async function PrintPage({ searchParams }: { searchParams: Promise<WeekAddress> }) {
   const visit = await requireHousehold();
-  const asked = calendarDaySchema.safeParse((await searchParams).start);
-  const start = asked.success ? asked.data : undefined;
-  const printed = await printWeek(visit, start === undefined ? {} : { start });
+  const asked = weekAskedFor(await searchParams);
+  const printed = await printWeek(visit, asked);
   return (
     <ClientMessages
       namespaces={['week-print', 'week', 'events', 'verdict', 'doses', 'units']}
       parts={{ situations: ['kind', 'step', 'steps'], house: ['sheet'] }}
     >
-      <WeekPrintPage printed={printed} start={start} />
+      <WeekPrintPage printed={printed} start={asked.start} />
     </ClientMessages>
   );
 }

@@ -1,0 +1,2 @@
+/** Substances that put available chlorine into the water. */
+export const chlorines: readonly string[] = ['trichlor', 'dichlor', 'calcium-hypochlorite', 'sodium-hypochlorite'];
