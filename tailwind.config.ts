@@ -50,8 +50,6 @@ const size = (name: string, style: TypeStyle = {}): [string, Record<string, stri
   },
 ];
 
-const fraunces = '"Fraunces Variable", Georgia, serif';
-
 export default {
   content: ['./app/**/*.tsx', './components/**/*.tsx'],
   theme: {
@@ -64,8 +62,7 @@ export default {
     screens: { sm: '600px', md: '900px', lg: '1280px' },
     fontFamily: {
       body: '"Atkinson Hyperlegible Next Variable", system-ui, sans-serif',
-      display: [fraunces, { fontVariationSettings: '"SOFT" 70, "WONK" 0' }],
-      'display-soft': [fraunces, { fontVariationSettings: '"SOFT" 100, "WONK" 0' }],
+      display: '"Fraunces Variable", Georgia, serif',
     },
     fontSize: {
       landing: size('landing', { weight: '560', tracking: '-0.024em' }),

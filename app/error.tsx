@@ -11,7 +11,7 @@ export default function PageProblem({ reset }: { error: Error & { digest?: strin
   const common = useTranslations('common');
   return (
     <div role="alert" className="mx-auto max-w-sheet px-margin py-12">
-      <h1 className="font-display-soft text-headline">{t('pageTitle')}</h1>
+      <h1 className="font-display text-headline">{t('pageTitle')}</h1>
       <p className="mt-2 mb-6 max-w-reading text-body">{t('pageWords')}</p>
       <div className="flex flex-wrap gap-2.5">
         <Button variant="primary" onClick={reset}>

@@ -1,12 +1,12 @@
-import '@fontsource-variable/atkinson-hyperlegible-next/index.css';
-import '@fontsource-variable/fraunces/full.css';
-import '@fontsource-variable/fraunces/full-italic.css';
+import './fonts/faces.css';
 import './globals.css';
 import type { Metadata, Viewport } from 'next';
 import { getTranslations } from 'next-intl/server';
-import { connection } from 'next/server';
+import { headers } from 'next/headers';
+import { earlyPressesScript } from '@/components/ui/early-presses';
 import { UiProvider } from '@/components/ui/ui-provider';
 import { Providers } from '@/lib/client/providers';
+import { nonceOf } from '@/lib/api/headers';
 import { ClientMessages } from '@/lib/messages/client-messages';
 
 export async function generateMetadata(): Promise<Metadata> {
@@ -29,21 +29,20 @@ export async function generateMetadata(): Promise<Metadata> {
 
 /** Those of every page, asked for beside the style sheet that names them: text that changes its width later would move the page. */
 const fonts = [
-  new URL('@fontsource-variable/fraunces/files/fraunces-latin-full-normal.woff2', import.meta.url),
-  new URL(
-    '@fontsource-variable/atkinson-hyperlegible-next/files/atkinson-hyperlegible-next-latin-wght-normal.woff2',
-    import.meta.url,
-  ),
+  new URL('./fonts/fraunces-latin.woff2', import.meta.url),
+  new URL('./fonts/atkinson-latin.woff2', import.meta.url),
 ];
 
 export const viewport: Viewport = { width: 'device-width', initialScale: 1, colorScheme: 'light dark' };
 
 export default async function RootLayout({ children }: { children: React.ReactNode }) {
   // Every page is made per request: a page made at build time would carry no nonce and its scripts would be refused.
-  await connection();
+  const nonce = nonceOf((await headers()).get('content-security-policy'));
   return (
     <html lang="en">
       <head>
+        {/* A browser hides the nonce from whoever reads the page, React among them. */}
+        <script nonce={nonce} suppressHydrationWarning dangerouslySetInnerHTML={{ __html: earlyPressesScript }} />
         {/* An element, and not a call of React's, which would ask for them again on the way to another page. */}
         {fonts.map(({ pathname }) => (
           <link key={pathname} rel="preload" href={pathname} as="font" type="font/woff2" crossOrigin="anonymous" />

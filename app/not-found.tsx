@@ -21,7 +21,7 @@ export default async function NotFound() {
       <SkipLink />
       <SignedOutBar signedIn={visit !== null} />
       <main id={contentId} tabIndex={-1} className="mx-auto max-w-sheet px-margin py-12 outline-none">
-        <h1 className="font-display-soft text-headline">{t('notFoundTitle')}</h1>
+        <h1 className="font-display text-headline">{t('notFoundTitle')}</h1>
         <p className="mt-2 mb-6 max-w-reading text-body">{t('notFoundWords')}</p>
         <Link href="/" className={buttonClass({ variant: 'primary' })}>
           {t('backToStart')}

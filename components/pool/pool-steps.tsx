@@ -37,7 +37,7 @@ export function PoolSteps({ household, place, step }: PoolStepsProps) {
   if (!household.mayChange)
     return (
       <Content className="mx-auto block max-w-reading px-margin py-8">
-        <h1 className="font-display-soft text-board">{t('notYoursTitle')}</h1>
+        <h1 className="font-display text-board">{t('notYoursTitle')}</h1>
         <p className="mt-2 text-body text-ink-2">{t('notYours')}</p>
       </Content>
     );

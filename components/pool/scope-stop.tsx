@@ -24,7 +24,7 @@ export function ScopeStop({ decision, place, onChange }: { decision: Scope; plac
       id={place === 'first-run' ? contentId : undefined}
       className="mx-auto grid max-w-reading gap-5 px-margin py-8"
     >
-      <h1 className="font-display-soft text-board text-balance md:text-headline">{t('stopTitle')}</h1>
+      <h1 className="font-display text-board text-balance md:text-headline">{t('stopTitle')}</h1>
       <ul className="grid gap-3.5">
         {reasons.map((reason) => (
           <li key={reason}>

@@ -60,7 +60,7 @@ export function StepFrame(props: StepFrameProps) {
       <Content id={place === 'profile' ? undefined : contentId} className="flex-1">
         <div className="grid px-margin md:grid-cols-[1fr_330px] md:border-t md:border-rule">
           <div className="pt-3.5 md:py-3.5 md:pr-10">
-            <h1 className="font-display-soft text-board md:text-headline">{title}</h1>
+            <h1 className="font-display text-board md:text-headline">{title}</h1>
             <p className="mt-0.5 text-body text-pretty text-ink-2 md:font-display md:text-lead md:text-ink">{lead}</p>
           </div>
           <div className="hidden border-l border-rule py-3.5 pl-6.5 md:block">
@@ -127,7 +127,7 @@ function ResultWords({ result, large = false }: { result: RunningResult; large?:
         <b
           className={classNames(
             'font-display whitespace-nowrap',
-            large ? 'block font-display-soft text-headline' : 'text-[22px] leading-6.5 font-headline',
+            large ? 'block font-display text-headline' : 'text-[22px] leading-6.5 font-headline',
           )}
         >
           {figure}

@@ -11,7 +11,7 @@ export function KeptOnDevice({ onAgain }: { onAgain: () => void }) {
   const t = useTranslations('readings.kept');
   return (
     <div className="mx-auto grid max-w-reading gap-3.5 px-margin py-6">
-      <h1 className="font-display-soft text-board">{t('title')}</h1>
+      <h1 className="font-display text-board">{t('title')}</h1>
       <p className="text-body">{t('words')}</p>
       <p className="border-t-stop border-b border-ink bg-paper-lift px-3.5 py-3 text-body font-strong">{t('swim')}</p>
       <UnsentTests />

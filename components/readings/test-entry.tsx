@@ -36,7 +36,7 @@ function OnlyLooking() {
   const t = useTranslations('readings.viewer');
   return (
     <div className="mx-auto max-w-reading px-margin py-8">
-      <h1 className="font-display-soft text-board">{t('title')}</h1>
+      <h1 className="font-display text-board">{t('title')}</h1>
       <p className="mt-2 text-body text-ink-2">{t('words')}</p>
       <Link href="/week" className={buttonClass({ variant: 'primary', className: 'mt-4' })}>
         {t('seeWeek')}

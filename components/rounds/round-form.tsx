@@ -53,7 +53,7 @@ export function RoundForm({ household, serverNow, known }: Props) {
     return (
       <div className="mx-auto max-w-form px-margin py-6">
         <RoundHead when={times.full(serverNow)} name={household.personName} />
-        <p role="status" className="mt-5 font-display-soft text-verdict">
+        <p role="status" className="mt-5 font-display text-verdict">
           {t('kept')}
         </p>
         <Link href="/week" className={buttonClass({ variant: 'primary', size: 'large', className: 'mt-5 w-full' })}>
@@ -70,7 +70,7 @@ export function RoundForm({ household, serverNow, known }: Props) {
       }}
     >
       <RoundHead when={times.full(serverNow)} name={household.personName} />
-      <h1 className="mt-4 font-display-soft text-verdict">{t('headline', { count: exceptions.length })}</h1>
+      <h1 className="mt-4 font-display text-verdict">{t('headline', { count: exceptions.length })}</h1>
       <p className="mt-1 text-body text-ink-2">{t(exceptions.length === 0 ? 'lead' : 'leadExceptions')}</p>
       <ul className="mt-3.5">
         {roundItems.map((item) => (

@@ -28,7 +28,7 @@ export function SituationHead({ page, headline, lead, short = false, nextTest }:
     <header className="px-margin">
       <div className="md:grid md:grid-cols-[230px_minmax(0,1fr)] lg:grid-cols-[341px_minmax(0,1fr)_260px]">
         <div className={`pt-3 pb-3 md:border-r md:border-rule md:pr-6 ${ofIndex ? '' : 'hidden md:block'}`}>
-          <Place className="mt-1 font-display-soft text-board">{t('title')}</Place>
+          <Place className="mt-1 font-display text-board">{t('title')}</Place>
           <p className="mt-1 text-small text-ink-2">{t('lead')}</p>
           {!ofIndex && <Back />}
         </div>
@@ -38,7 +38,7 @@ export function SituationHead({ page, headline, lead, short = false, nextTest }:
               <Back />
             </div>
           )}
-          <Headline className="font-display-soft text-headline text-balance">{headline}</Headline>
+          <Headline className="font-display text-headline text-balance">{headline}</Headline>
           {lead !== undefined && <p className="mt-1 font-display text-lead text-pretty">{lead}</p>}
         </div>
         {!short && (

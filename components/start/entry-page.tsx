@@ -6,7 +6,7 @@ export function EntryPage({ title, lead, children }: { title: string; lead: stri
     <div className="mx-auto max-w-sheet px-margin">
       <DoubleRule className="hidden md:block" />
       <div className="mx-auto max-w-form pt-6 pb-16 md:pt-12">
-        <h1 className="font-display-soft text-headline">{title}</h1>
+        <h1 className="font-display text-headline">{title}</h1>
         <p className="mt-1 mb-6 text-body text-ink-2">{lead}</p>
         {children}
       </div>

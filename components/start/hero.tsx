@@ -10,7 +10,7 @@ export function Hero() {
   return (
     <div className="grid md:border-t md:border-rule lg:grid-cols-[1fr_326px]">
       <div className="pt-5.5 lg:py-11 lg:pr-10">
-        <h1 className="font-display-soft text-landing">
+        <h1 className="font-display text-landing">
           {t('headline')}
           <br />
           {t('headlineSecond')}

@@ -58,7 +58,7 @@ function Trying({ ground }: { ground: TryGround }) {
       {restarted && <p role="status">{t('restarted')}</p>}
       {/* Before React listens a press would be lost. */}
       <fieldset
-        disabled={!hydrated}
+        inert={!hydrated}
         aria-describedby={hydrated ? undefined : 'try-it-loading'}
         className="grid min-w-0 gap-3"
       >

@@ -2,7 +2,9 @@
 
 import { useId } from 'react';
 import { buttonClass, type ButtonSize, type ButtonVariant } from './button-class';
+import { UNHEARD } from './early-presses';
 import { Spinner } from './spinner';
+import { useEarlyPress } from './use-early-press';
 import { useHydrated } from './use-hydrated';
 
 export type ButtonProps = Omit<React.ComponentProps<'button'>, 'disabled'> & {
@@ -22,9 +24,10 @@ export type ButtonProps = Omit<React.ComponentProps<'button'>, 'disabled'> & {
  * reason. Hence `aria-disabled` and not `disabled`.
  */
 export function Button(props: ButtonProps) {
-  const { variant, size, wide, busy, offReason, offReasonId, className, children, onClick, type, ...rest } = props;
+  const { variant, size, wide, busy, offReason, offReasonId, className, children, onClick, type, ref, ...rest } = props;
   const ownReasonId = useId();
-  const hydrated = useHydrated();
+  const hydrated = useHydrated(type === 'submit');
+  const pressed = useEarlyPress(ref);
   const off = offReason !== undefined || offReasonId !== undefined;
   const inert = off || busy !== undefined;
   const reasonId = offReason === undefined ? offReasonId : ownReasonId;
@@ -32,9 +35,11 @@ export function Button(props: ButtonProps) {
   const button = (
     <button
       {...rest}
+      {...{ [UNHEARD]: '' }}
+      ref={pressed}
       type={type ?? 'button'}
       // Sent before React listens, a form would leave the page and lose what was typed.
-      disabled={type === 'submit' && !hydrated}
+      disabled={!hydrated}
       className={buttonClass({ variant, size, off, wide, className })}
       aria-disabled={inert || undefined}
       aria-busy={busy === undefined ? undefined : true}

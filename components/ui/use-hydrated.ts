@@ -4,11 +4,15 @@ import { useSyncExternalStore } from 'react';
 
 const never = () => () => {};
 
-/** False on the server and in the first paint, true once React listens. */
-export function useHydrated(): boolean {
+/**
+ * False on the server and in the first paint, true once React listens.
+ *
+ * @param asked false for who need not know: it is true from the start then, and nothing is drawn twice
+ */
+export function useHydrated(asked = true): boolean {
   return useSyncExternalStore(
     never,
     () => true,
-    () => false,
+    () => !asked,
   );
 }

@@ -1,21 +1,26 @@
 import { useEffect } from 'react';
 
-/** For browsers that do not say when they are idle [ms]. */
-const A_WHILE = 2000;
+/** So long a page is left alone after it is drawn: on a phone its first seconds belong to whoever looks at it [ms]. */
+const A_WHILE = 5000;
 
 /**
- * Fetches code for what will be opened later, when the page is drawn and nothing else is to be done: so that it opens at once,
- * and without a connection. The function has to be the same at each call.
+ * Fetches code for what will be opened later, when the page has been drawn for a while or somebody begins to use it: so that it
+ * opens at once, and without a connection. The function has to be the same at each call.
  */
 export function useIdleFetch(load: () => Promise<unknown>): void {
   useEffect(() => {
-    // Without an answer it is asked for again when it is opened.
-    const begin = () => void load().catch(() => undefined);
-    if (!('requestIdleCallback' in window)) {
-      const timer = setTimeout(begin, A_WHILE);
-      return () => clearTimeout(timer);
-    }
-    const idle = window.requestIdleCallback(begin);
-    return () => window.cancelIdleCallback(idle);
+    const begin = () => {
+      stopWaiting();
+      // Without an answer it is asked for again when it is opened.
+      void load().catch(() => undefined);
+    };
+    const timer = setTimeout(begin, A_WHILE);
+    const uses = ['pointerdown', 'keydown'] as const;
+    for (const use of uses) window.addEventListener(use, begin, { passive: true });
+    const stopWaiting = () => {
+      clearTimeout(timer);
+      for (const use of uses) window.removeEventListener(use, begin);
+    };
+    return stopWaiting;
   }, [load]);
 }

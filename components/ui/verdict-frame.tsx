@@ -40,7 +40,7 @@ export function VerdictFrame({ state, word, headline, level = 1, children, class
         <Icon aria-hidden="true" className="size-5.5" />
         {word}
       </p>
-      <Heading className="mt-1.5 mb-1 font-display-soft text-verdict text-balance">{headline}</Heading>
+      <Heading className="mt-1.5 mb-1 font-display text-verdict text-balance">{headline}</Heading>
       {children}
     </section>
   );

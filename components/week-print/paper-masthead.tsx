@@ -16,7 +16,7 @@ export function PaperMasthead() {
     <header className="grid grid-cols-[minmax(0,1fr)_auto] items-end gap-x-4 pb-1.5">
       <div className="flex items-center gap-3">
         <BrandMark className="size-8" />
-        <h1 className="font-display-soft text-[24px] leading-[27px] font-headline">{household.name}</h1>
+        <h1 className="font-display text-[24px] leading-[27px] font-headline">{household.name}</h1>
       </div>
       <div className="text-right">
         <p className="font-display text-section">{dayRange(first, last, household.locale, t('rangeJoiner'))}</p>

@@ -58,7 +58,7 @@ function NextDose({ dose }: { dose: PlanDose }) {
         <CheckBefore dose={dose} />
       </p>
       <p className="mt-2.5 mb-0.5 flex flex-wrap items-end gap-x-3.5">
-        <span className="font-display-soft text-dose">{words.amountOf(dose)}</span>
+        <span className="font-display text-dose">{words.amountOf(dose)}</span>
         <span className="inline-flex items-center gap-2.25 font-display text-[23px] leading-7 font-section">
           <ProductGlyph mark={glyphOf(dose.form)} size={18} />
           {words.productOf(dose)}

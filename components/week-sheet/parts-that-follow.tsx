@@ -1,7 +1,8 @@
 'use client';
 
-import { lazy, Suspense } from 'react';
+import { Activity, lazy, Suspense, useState } from 'react';
 import { untilFetched } from '@/components/ui/until-fetched';
+import { useHydrated } from '@/components/ui/use-hydrated';
 
 const Margin = lazy(() => untilFetched(() => import('./margin')).then((part) => ({ default: part.Margin })));
 const TryIt = lazy(() =>
@@ -13,13 +14,20 @@ const TryIt = lazy(() =>
  * drawing: new props would make React throw the server's words away before that code is there.
  */
 export const margin = (
-  <Suspense fallback={null}>
+  <Follows>
     <Margin />
-  </Suspense>
+  </Follows>
 );
 
 export const tryIt = (
-  <Suspense fallback={null}>
+  <Follows>
     <TryIt />
-  </Suspense>
+  </Follows>
 );
+
+/** A server would send what stands in Suspense at the end of the page, where nobody sees it before the scripts. */
+function Follows({ children }: { children: React.ReactNode }) {
+  const hydrated = useHydrated();
+  const [part] = useState(hydrated ? <Suspense fallback={null}>{children}</Suspense> : <Activity>{children}</Activity>);
+  return part;
+}

@@ -13,6 +13,9 @@ import { StopLine } from './stop-line';
 import { Today } from './today';
 import { useAsksStop } from './use-asks-stop';
 
+/** Laid out only when the page is scrolled towards it; as wide as the page, for what sticks out of it is cut off. */
+const further = '-mx-margin px-margin [content-visibility:auto] [contain-intrinsic-height:auto_var(--as-tall-as)]';
+
 /** The day first: what to do next, the Stop, today's water, then the rest of the week. */
 export function PhoneSheet() {
   const { sheet } = useSheet();
@@ -24,9 +27,11 @@ export function PhoneSheet() {
       <NextDoses />
       {!asked && <StopLine className="mt-3.5 border-y border-rule py-3" />}
       <Today />
-      {tryIt}
-      <RestOfWeek />
-      <div className="mt-5.5 grid gap-4">
+      <div className={`${further} [--as-tall-as:56rem]`}>{tryIt}</div>
+      <div className={`${further} [--as-tall-as:34rem]`}>
+        <RestOfWeek />
+      </div>
+      <div className={`${further} grid gap-4 pt-5.5 [--as-tall-as:90rem]`}>
         {margin}
         <SheetTables />
         <Colophon />

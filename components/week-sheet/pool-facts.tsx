@@ -15,7 +15,7 @@ export function PoolFacts() {
   const [first, last] = [days[0]?.day, days.at(-1)?.day];
   return (
     <section>
-      <p className="font-display-soft text-[25px] leading-[30px] font-section">{household.name}</p>
+      <p className="font-display text-[25px] leading-[30px] font-section">{household.name}</p>
       {first !== undefined && last !== undefined && (
         <p className="mt-1.25 text-[15px] leading-5 font-control">
           {dayRange(first, last, household.locale, t('rangeJoiner'))}

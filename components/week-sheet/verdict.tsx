@@ -30,7 +30,7 @@ function VerdictItself() {
   if (sheet.verdict.state === 'fine')
     return (
       <section data-verdict="fine">
-        <h1 className="font-display-soft text-verdict text-balance md:text-wrap">{headline}</h1>
+        <h1 className="font-display text-verdict text-balance md:text-wrap">{headline}</h1>
         <WaterNow>
           <Standing />
         </WaterNow>

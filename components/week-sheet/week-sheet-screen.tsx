@@ -5,6 +5,7 @@ import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
+import { part } from '@/components/ui/part';
 import { Skeleton } from '@/components/ui/skeleton';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
@@ -67,6 +68,10 @@ function Unsent() {
   return useUnsentTicks(sheet.me.id).length > 0 && <UnsentNotice />;
 }
 
+// Each comes to life in a turn of its own, and one of them never: see `part`.
+const phoneSheet = part(<PhoneSheet />);
+const deskSheet = part(<DeskSheet />);
+
 /**
  * The sheet of a desk or that of a phone. Which of the two it is, only the browser knows: the server draws both, so that either
  * can be read before any script has come, the style sheet shows one, and the other is dropped once React listens.
@@ -77,16 +82,8 @@ function SheetBody() {
   if (sheet.lastReading === null) return <FirstTest />;
   return (
     <>
-      {isPhone !== false && (
-        <div className="sm:hidden">
-          <PhoneSheet />
-        </div>
-      )}
-      {isPhone !== true && (
-        <div className="max-sm:hidden">
-          <DeskSheet />
-        </div>
-      )}
+      {isPhone !== false && <div className="sm:hidden">{phoneSheet}</div>}
+      {isPhone !== true && <div className="max-sm:hidden">{deskSheet}</div>}
     </>
   );
 }

@@ -38,6 +38,11 @@ export function pagePolicy(
   ].join('; ');
 }
 
+/** The nonce that a policy asks scripts to carry. */
+export function nonceOf(policy: string | null): string | undefined {
+  return /'nonce-([^']+)'/.exec(policy ?? '')?.[1];
+}
+
 /** On every page beside its policy. */
 export const pageHeaders: Readonly<Record<string, string>> = {
   'x-content-type-options': 'nosniff',

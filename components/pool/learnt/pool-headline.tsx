@@ -42,7 +42,7 @@ export function PoolHeadline({ volume, how }: { volume: number | null; how: Size
 function Headline({ title, lead }: { title: string; lead: string }) {
   return (
     <>
-      <h1 className="font-display-soft text-headline">{title}</h1>
+      <h1 className="font-display text-headline">{title}</h1>
       <p className="max-w-[90ch] font-display text-lead text-pretty">{lead}</p>
     </>
   );

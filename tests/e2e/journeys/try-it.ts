@@ -38,7 +38,13 @@ const sectionOf = (page: Page) =>
   page.locator('section', { has: page.getByRole('heading', { name: words('try-out.title') }) });
 const fieldOf = (page: Page) => page.getByRole('textbox', { name: 'Swimmer-hours on Saturday' });
 const lineOf = (page: Page) => page.locator('path[data-tried]').last().getAttribute('d');
-const saturday = (page: Page) => page.getByRole('combobox', { name: words('try-out.day') }).selectOption(SATURDAY);
+const saturday = async (page: Page) => {
+  await listening(page);
+  await page.getByRole('combobox', { name: words('try-out.day') }).selectOption(SATURDAY);
+};
+
+/** Until React listens nobody can get at the fields; a script of ours could. */
+const listening = (page: Page) => sectionOf(page).locator('fieldset:not([inert])').first().waitFor();
 
 async function untouched(stage: Stage, page: Page): Promise<void> {
   const asked: string[] = [];
@@ -126,6 +132,7 @@ async function putBack(stage: Stage, page: Page, owner: Person): Promise<void> {
 }
 
 async function anotherEvening(stage: Stage, page: Page): Promise<void> {
+  await listening(page);
   const dose = page.getByRole('combobox', { name: words('try-out.move'), exact: true });
   await dose.selectOption({ index: 1 });
   const to = page.getByRole('combobox', { name: words('try-out.moveTo'), exact: true });
@@ -150,6 +157,7 @@ async function onPhone(stage: Stage, server: Server, owner: Person): Promise<voi
     const { page } = visitor;
     await page.goto('/week');
     await sectionOf(page).scrollIntoViewIfNeeded();
+    await listening(page);
     // Today's curve is the one that a phone shows.
     await page.getByRole('combobox', { name: words('try-out.day') }).selectOption({ index: 0 });
     await page.getByRole('radio', { name: words('try-out.skies.overcast') }).check({ force: true });
