@@ -1,10 +1,10 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
-import Link from 'next/link';
 import { connection } from 'next/server';
 import { SignedOutBar } from '@/components/navigation/signed-out-bar';
 import { contentId, SkipLink } from '@/components/navigation/skip-link';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { findHousehold } from '@/lib/auth/page-gate';
 
 export async function generateMetadata(): Promise<Metadata> {
@@ -23,9 +23,9 @@ export default async function NotFound() {
       <main id={contentId} tabIndex={-1} className="mx-auto max-w-sheet px-margin py-12 outline-none">
         <h1 className="font-display text-headline">{t('notFoundTitle')}</h1>
         <p className="mt-2 mb-6 max-w-reading text-body">{t('notFoundWords')}</p>
-        <Link href="/" className={buttonClass({ variant: 'primary' })}>
+        <PageLink href="/" className={buttonClass({ variant: 'primary' })}>
           {t('backToStart')}
-        </Link>
+        </PageLink>
       </main>
     </>
   );

@@ -1,8 +1,8 @@
 import { ChevronRight } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
 import { emergencyCard } from '@/components/navigation/places';
 import { scopeAnchor } from '@/components/start/scope-list';
+import { PageLink } from '@/components/ui/page-link';
 import { HelpHead } from './help-head';
 
 /**
@@ -28,13 +28,13 @@ export function HelpIndex({ member }: { member: boolean }) {
         <ul>
           {pages.map(({ href, name, note }) => (
             <li key={href}>
-              <Link href={href} className="flex min-h-17 items-center gap-3 border-t border-rule py-2">
+              <PageLink href={href} className="flex min-h-17 items-center gap-3 border-t border-rule py-2">
                 <span className="min-w-0 flex-1">
                   <b className="block font-display text-section">{name}</b>
                   <span className="block text-small text-ink-2">{note}</span>
                 </span>
                 <ChevronRight aria-hidden="true" className="size-5 shrink-0 text-ink-3" />
-              </Link>
+              </PageLink>
             </li>
           ))}
         </ul>

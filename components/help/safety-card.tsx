@@ -1,8 +1,8 @@
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
 import { emergencyCard } from '@/components/navigation/places';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
+import { PageLink } from '@/components/ui/page-link';
 import { HelpHead } from './help-head';
 import { PrintButton } from './print-button';
 import { RuleList } from './rule-list';
@@ -46,9 +46,9 @@ export function SafetyCard() {
       </div>
       <div className="mt-2 flex flex-wrap items-center gap-x-5 gap-y-2 border-t border-ink pt-3 print:hidden">
         <p className="font-display text-section">{t('wrong')}</p>
-        <Link href={emergencyCard} className={buttonClass({ variant: 'terra' })}>
+        <PageLink href={emergencyCard} className={buttonClass({ variant: 'terra' })}>
           {navigation('emergencyCard')}
-        </Link>
+        </PageLink>
       </div>
       <p className="mt-3 max-w-[60rem] text-small text-ink-2">{t('ground')}</p>
     </div>

@@ -1,9 +1,9 @@
 'use client';
 
 import { Printer } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { bold } from '@/components/week-sheet/bold';
 
 /** How long the pool may be left, and the sheet for whoever looks after it meanwhile. */
@@ -11,10 +11,10 @@ export function GoingAway() {
   const t = useTranslations('house');
   return (
     <section aria-labelledby="going-away">
-      <Link href="/house/sheet" className={buttonClass({ variant: 'primary', size: 'large', wide: true })}>
+      <PageLink href="/house/sheet" className={buttonClass({ variant: 'primary', size: 'large', wide: true })}>
         <Printer aria-hidden="true" className="size-5" />
         {t('toSheet')}
-      </Link>
+      </PageLink>
       <p className="mt-1.5 text-small text-ink-2">{t('toSheetNote')}</p>
       <h2 id="going-away" className="mt-5 border-t border-ink pt-2.5 font-display text-section">
         {t('away.title')}

@@ -1,11 +1,11 @@
 'use client';
 
 import { ArrowLeft } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { HelpHead } from '@/components/help/help-head';
 import { PrintButton } from '@/components/help/print-button';
 import { Callout } from '@/components/ui/callout';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { SheetProvider } from '@/components/week-sheet/sheet-context';
 import { instantOf } from '@/components/week-sheet/sheet-times';
@@ -42,10 +42,13 @@ function OnePage({ sheet }: { sheet: HouseSheet }) {
   const good = week.plan === null || nothing !== null ? t('goodCalls') : t('good', { when: when(week.plan.endsAt) });
   return (
     <div className="mx-auto max-w-sheet px-margin pb-10 print:max-w-none print:pb-0">
-      <Link href="/house" className={`${textLink} inline-flex min-h-11 items-center gap-1.5 text-body print:hidden`}>
+      <PageLink
+        href="/house"
+        className={`${textLink} inline-flex min-h-11 items-center gap-1.5 text-body print:hidden`}
+      >
         <ArrowLeft aria-hidden="true" className="size-4.5" />
         {t('change')}
-      </Link>
+      </PageLink>
       <HelpHead
         headline={t('title', { household: name })}
         lead={`${t('made', { when: when(week.now) })} ${good}`}

@@ -2,9 +2,9 @@
 
 import { useQuery } from '@tanstack/react-query';
 import { PhoneCall } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { dialled } from '@/components/ui/phone-link';
 import { textLink } from '@/components/ui/text-link';
 import { houseNotesOptions } from '@/lib/client/house-notes';
@@ -20,9 +20,9 @@ export function ProfessionalCall() {
       <p className="text-small text-ink-2">
         {t.rich('noPhone', {
           link: (words) => (
-            <Link href="/house" className={`${textLink} inline-flex min-h-11 items-center text-ink`}>
+            <PageLink href="/house" className={`${textLink} inline-flex min-h-11 items-center text-ink`}>
               {words}
-            </Link>
+            </PageLink>
           ),
         })}
       </p>

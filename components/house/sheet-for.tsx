@@ -1,7 +1,7 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import type { HouseSheet } from '@/lib/schemas/house-sheet';
 
@@ -10,13 +10,13 @@ export function SheetFor({ handlers, handler }: Pick<HouseSheet, 'handlers' | 'h
   const t = useTranslations('house.sheet.for');
   const choice = (href: string, name: string, current: boolean) => (
     <li key={href}>
-      <Link
+      <PageLink
         href={href}
         aria-current={current ? 'true' : undefined}
         className={`inline-flex min-h-11 items-center text-body ${current ? 'font-strong' : textLink}`}
       >
         {name}
-      </Link>
+      </PageLink>
     </li>
   );
   return (

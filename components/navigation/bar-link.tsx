@@ -1,8 +1,8 @@
 'use client';
 
-import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import { classNames } from '@/components/ui/class-names';
+import { PageLink } from '@/components/ui/page-link';
 import { isCurrent } from './places';
 
 export type BarLinkProps = {
@@ -18,7 +18,7 @@ export function BarLink({ href, children, loud = false, exact = false }: BarLink
   const path = usePathname();
   const current = exact ? path === href : isCurrent(href, path);
   return (
-    <Link
+    <PageLink
       href={href}
       aria-current={current ? 'page' : undefined}
       className={classNames(
@@ -34,6 +34,6 @@ export function BarLink({ href, children, loud = false, exact = false }: BarLink
       >
         {children}
       </span>
-    </Link>
+    </PageLink>
   );
 }

@@ -1,6 +1,6 @@
 import { Siren } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { BarLink } from './bar-link';
 import { BrandMark } from './brand-mark';
 import { Faces } from './faces';
@@ -15,10 +15,10 @@ export function HouseholdBar({ frame }: { frame: HouseholdFrame }) {
   const common = useTranslations('common');
   return (
     <header className="mx-auto hidden h-13.5 max-w-sheet items-center gap-3.5 px-margin md:flex lg:gap-7.5">
-      <Link href="/week" className="inline-flex min-h-11 items-center gap-2.5 font-display text-brand">
+      <PageLink href="/week" className="inline-flex min-h-11 items-center gap-2.5 font-display text-brand">
         <BrandMark />
         <span className="sr-only lg:not-sr-only">{common('productName')}</span>
-      </Link>
+      </PageLink>
       <nav aria-label={t('places')} className="flex gap-3.5 lg:ml-6.5 lg:gap-6">
         {barPlaces.map(({ href, name }) => (
           <BarLink key={href} href={href}>

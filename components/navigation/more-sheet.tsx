@@ -1,9 +1,9 @@
 'use client';
 
 import { ChevronRight, CircleQuestionMark, Footprints, House, LifeBuoy, type LucideIcon, Waves } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
+import { PageLink } from '@/components/ui/page-link';
 import { Sheet } from '@/components/ui/sheet';
 import { ringOf } from './faces';
 import type { HouseholdFrame } from './member';
@@ -46,24 +46,24 @@ type MorePlaceProps = { href: string; Icon: LucideIcon; name: string; fact: stri
 
 function MorePlace({ href, Icon, name, fact }: MorePlaceProps) {
   return (
-    <Link href={href} className="mx-4 flex min-h-17 items-center gap-3 border-t border-rule">
+    <PageLink href={href} className="mx-4 flex min-h-17 items-center gap-3 border-t border-rule">
       <Icon aria-hidden="true" className="size-5.75 shrink-0" />
       <span className="min-w-0 flex-1">
         <b className="block font-display text-[19px] leading-[23px] font-section">{name}</b>
         <span className="block text-[14.5px] leading-[19px] text-ink-2">{fact}</span>
       </span>
       <ChevronRight aria-hidden="true" className="size-5 shrink-0 text-ink-3" />
-    </Link>
+    </PageLink>
   );
 }
 
 function TroubleLink({ href, children }: { href: string; children: React.ReactNode }) {
   return (
-    <Link
+    <PageLink
       href={href}
       className="inline-flex min-h-11 items-center text-[15.5px] leading-5 font-emphasis underline decoration-1 underline-offset-[3px]"
     >
       {children}
-    </Link>
+    </PageLink>
   );
 }

@@ -2,11 +2,11 @@
 
 import { Ellipsis } from 'lucide-react';
 import dynamic from 'next/dynamic';
-import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { classNames } from '@/components/ui/class-names';
+import { PageLink } from '@/components/ui/page-link';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import { useOpenedOnce } from '@/components/ui/use-opened-once';
@@ -44,7 +44,7 @@ export function PhoneTabs({ frame }: { frame: HouseholdFrame }) {
         {weeklyPlaces.map(({ href, shortName, Icon }) => {
           const current = !open && isCurrent(href, path);
           return (
-            <Link
+            <PageLink
               key={href}
               href={href}
               aria-current={isCurrent(href, path) ? 'page' : undefined}
@@ -52,7 +52,7 @@ export function PhoneTabs({ frame }: { frame: HouseholdFrame }) {
             >
               <Icon aria-hidden="true" className="size-5.75" />
               {t(shortName)}
-            </Link>
+            </PageLink>
           );
         })}
         <button

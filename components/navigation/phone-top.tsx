@@ -1,6 +1,6 @@
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { DoubleRule } from '@/components/ui/double-rule';
+import { PageLink } from '@/components/ui/page-link';
 import { BrandMark } from './brand-mark';
 import { Faces } from './faces';
 import type { HouseholdFrame } from './member';
@@ -12,7 +12,7 @@ export function PhoneTop({ frame }: { frame: HouseholdFrame }) {
   return (
     <header className="px-margin md:hidden">
       <div className="flex h-15 items-center gap-2.75">
-        <Link href="/week" className="flex min-h-11 min-w-0 flex-1 items-center gap-2.75">
+        <PageLink href="/week" className="flex min-h-11 min-w-0 flex-1 items-center gap-2.75">
           <BrandMark className="size-7" />
           <span className="min-w-0">
             <b className="block truncate font-display text-brand font-section">{frame.householdName}</b>
@@ -20,7 +20,7 @@ export function PhoneTop({ frame }: { frame: HouseholdFrame }) {
               {t('nameAndRole', { name: frame.you.name, role: t(`role.${frame.you.role}`) })}
             </span>
           </span>
-        </Link>
+        </PageLink>
         <SirenLink />
         <Faces people={frame.people} />
       </div>

@@ -1,8 +1,8 @@
 import { Siren } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
 import { DoubleRule } from '@/components/ui/double-rule';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { BarLink } from './bar-link';
 import { BrandMark } from './brand-mark';
@@ -22,10 +22,10 @@ export function SignedOutBar({ signedIn = false }: { signedIn?: boolean }) {
   return (
     <header className="print:hidden">
       <div className="mx-auto flex h-15 max-w-sheet items-center gap-5 px-margin md:h-13.5 lg:gap-7.5">
-        <Link href="/" className="inline-flex min-h-11 items-center gap-2.5 font-display text-brand">
+        <PageLink href="/" className="inline-flex min-h-11 items-center gap-2.5 font-display text-brand">
           <BrandMark />
           {common('productName')}
-        </Link>
+        </PageLink>
         <nav aria-label={t('places')} className="ml-3 hidden gap-6 md:flex">
           <BarLink href="/help/safety">{t('keepingSafe')}</BarLink>
           <BarLink href="/#for-your-pool">{t('forYourPool')}</BarLink>
@@ -43,16 +43,16 @@ export function SignedOutBar({ signedIn = false }: { signedIn?: boolean }) {
           <span className="md:hidden">
             <SirenLink />
           </span>
-          <Link href={signedIn ? '/week' : '/sign-in'} className={`${doorLink} ${textLink}`}>
+          <PageLink href={signedIn ? '/week' : '/sign-in'} className={`${doorLink} ${textLink}`}>
             {signedIn ? t('toYourSheet') : t('signIn')}
-          </Link>
+          </PageLink>
           <span className="hidden md:inline">
             {signedIn ? (
               <SignOutButton className="text-[15px] leading-5" />
             ) : (
-              <Link href="/sign-up" className={buttonClass({ size: 'small' })}>
+              <PageLink href="/sign-up" className={buttonClass({ size: 'small' })}>
                 {t('signUp')}
-              </Link>
+              </PageLink>
             )}
           </span>
         </nav>

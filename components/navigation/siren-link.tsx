@@ -1,18 +1,18 @@
 import { Siren } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { emergencyCard } from './places';
 
 /** One tap to the emergency card from every page of a phone. */
 export function SirenLink() {
   const t = useTranslations('navigation');
   return (
-    <Link
+    <PageLink
       href={emergencyCard}
       aria-label={t('emergencyCard')}
       className="flex size-11 items-center justify-center rounded text-ink"
     >
       <Siren aria-hidden="true" className="size-5.75" />
-    </Link>
+    </PageLink>
   );
 }

@@ -1,5 +1,5 @@
 import { Pencil } from 'lucide-react';
-import Link from 'next/link';
+import { PageLink } from '@/components/ui/page-link';
 import type { SetupStep } from '@/lib/schemas/pool-profile';
 import { addressOf } from './step-order';
 
@@ -23,14 +23,14 @@ export function ProfileRows({
       <div className="flex items-baseline justify-between gap-3">
         <h2 className="font-display text-section">{title}</h2>
         {change === undefined ? null : (
-          <Link
+          <PageLink
             href={addressOf(step, 'profile')}
             aria-label={[change, title].join(', ')}
             className="inline-flex min-h-11 items-center gap-1.5 text-body underline decoration-1 underline-offset-[3px]"
           >
             <Pencil aria-hidden="true" className="size-4" />
             {change}
-          </Link>
+          </PageLink>
         )}
       </div>
       <dl className="text-body">

@@ -1,10 +1,10 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import type { z } from 'zod';
 import { Callout, InlineStop, StopWord } from '@/components/ui/callout';
+import { PageLink } from '@/components/ui/page-link';
 import { RadioRows } from '@/components/ui/radio-rows';
 import { Segments } from '@/components/ui/segments';
 import { TickBox } from '@/components/ui/tick-box';
@@ -132,13 +132,13 @@ export function ScopeStep({ state }: { state: SetupState }) {
           checked={draft.handlesChemicals}
           onChange={(handlesChemicals) => change({ handlesChemicals })}
         />
-        <Link
+        <PageLink
           href="/help/safety"
           target="_blank"
           className="inline-flex min-h-11 items-center text-body underline decoration-1 underline-offset-[3px]"
         >
           {t('chemicals.card')}
-        </Link>
+        </PageLink>
       </div>
     </StepFrame>
   );

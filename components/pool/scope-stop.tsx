@@ -1,12 +1,12 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
 import { contentId } from '@/components/navigation/skip-link';
 import { emergencyCard } from '@/components/navigation/places';
+import { PageLink } from '@/components/ui/page-link';
 import type { Scope } from '@/lib/schemas/pool-profile';
 import type { PoolPlace } from './setting';
 
@@ -39,9 +39,9 @@ export function ScopeStop({ decision, place, onChange }: { decision: Scope; plac
         <Button variant="primary" size="large" onClick={onChange}>
           {t('changeAnswer')}
         </Button>
-        <Link href={emergencyCard} className={buttonClass({ size: 'large' })}>
+        <PageLink href={emergencyCard} className={buttonClass({ size: 'large' })}>
           {t('emergencyCard')}
-        </Link>
+        </PageLink>
       </div>
     </Content>
   );

@@ -1,10 +1,10 @@
 'use client';
 
 import { ArrowLeft } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { BrandMark } from '@/components/navigation/brand-mark';
 import { SirenLink } from '@/components/navigation/siren-link';
+import { PageLink } from '@/components/ui/page-link';
 import { ProgressRuler } from '@/components/ui/progress-ruler';
 import type { SetupStep } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';
@@ -28,13 +28,13 @@ function FirstRunHeader({ step }: { step: SetupStep }) {
   return (
     <header>
       <div className="grid min-h-14.5 grid-cols-[48px_1fr_auto] items-center pr-2 pl-1 md:hidden">
-        <Link
+        <PageLink
           href={before === undefined ? '/' : addressOf(before, 'first-run')}
           aria-label={t('back')}
           className="flex size-12 items-center justify-center"
         >
           <ArrowLeft aria-hidden="true" className="size-5.5" />
-        </Link>
+        </PageLink>
         <span className="truncate font-display text-name">{first ? t('beforeYouStart') : t('setUp')}</span>
         <span className="flex items-center gap-1">
           <span className="text-small text-ink-2">{count}</span>
@@ -56,12 +56,12 @@ function FirstRunHeader({ step }: { step: SetupStep }) {
         <span className="min-w-0 truncate text-[15px] leading-5 text-ink-2">{t('settingUp', { name })}</span>
         <span className="ml-auto flex items-center gap-3">
           <SirenLink />
-          <Link
+          <PageLink
             href="/"
             className="inline-flex min-h-11 items-center text-[15px] leading-5 underline decoration-1 underline-offset-[3px]"
           >
             {t('goOnLater')}
-          </Link>
+          </PageLink>
         </span>
       </div>
     </header>
@@ -72,13 +72,13 @@ function BackToProfile() {
   const t = useTranslations('first-run');
   return (
     <p className="px-margin">
-      <Link
+      <PageLink
         href="/pool"
         className="inline-flex min-h-12 items-center gap-2 text-body underline decoration-1 underline-offset-[3px]"
       >
         <ArrowLeft aria-hidden="true" className="size-5" />
         {t('leaveProfile')}
-      </Link>
+      </PageLink>
     </p>
   );
 }

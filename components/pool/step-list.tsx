@@ -2,9 +2,9 @@
 
 import { useQuery } from '@tanstack/react-query';
 import { CalendarDays } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { classNames } from '@/components/ui/class-names';
+import { PageLink } from '@/components/ui/page-link';
 import { setupOptions } from '@/lib/client/pools';
 import { type SetupStep, setupSteps } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';
@@ -43,9 +43,9 @@ export function StepList({ step }: { step: SetupStep }) {
                 {figure}
               </span>
               {open && !current ? (
-                <Link href={addressOf(name, place)} className="block py-2.25 hover:underline">
+                <PageLink href={addressOf(name, place)} className="block py-2.25 hover:underline">
                   {words}
-                </Link>
+                </PageLink>
               ) : (
                 <span className="py-2.25">{words}</span>
               )}

@@ -1,9 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { UnsentTests } from './unsent-tests';
 
 /** No connection: the test is on this device, and said to be. */
@@ -16,9 +16,9 @@ export function KeptOnDevice({ onAgain }: { onAgain: () => void }) {
       <p className="border-t-stop border-b border-ink bg-paper-lift px-3.5 py-3 text-body font-strong">{t('swim')}</p>
       <UnsentTests />
       <div className="flex flex-wrap gap-2.5">
-        <Link href="/week" className={buttonClass({ variant: 'primary' })}>
+        <PageLink href="/week" className={buttonClass({ variant: 'primary' })}>
           {t('seeWeek')}
-        </Link>
+        </PageLink>
         <Button onClick={onAgain}>{t('again')}</Button>
       </div>
     </div>

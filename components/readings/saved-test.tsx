@@ -1,9 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
 import { bold } from '@/components/week-sheet/bold';
 import { SheetProvider, useSheet } from '@/components/week-sheet/sheet-context';
@@ -78,12 +78,12 @@ export function SavedTest({ reading, week, before, onCorrect, children }: SavedT
         </Button>
       </div>
       <div className="sticky bottom-tabs border-t border-ink bg-paper-lift py-3 md:static md:border-t-0 md:bg-transparent">
-        <Link
+        <PageLink
           href="/week"
           className={buttonClass({ variant: 'primary', size: 'large', wide: true, className: 'md:w-auto' })}
         >
           {t('seeWeek')}
-        </Link>
+        </PageLink>
       </div>
     </div>
   );

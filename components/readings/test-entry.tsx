@@ -2,8 +2,8 @@
 
 import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { Skeleton } from '@/components/ui/skeleton';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
@@ -38,9 +38,9 @@ function OnlyLooking() {
     <div className="mx-auto max-w-reading px-margin py-8">
       <h1 className="font-display text-board">{t('title')}</h1>
       <p className="mt-2 text-body text-ink-2">{t('words')}</p>
-      <Link href="/week" className={buttonClass({ variant: 'primary', className: 'mt-4' })}>
+      <PageLink href="/week" className={buttonClass({ variant: 'primary', className: 'mt-4' })}>
         {t('seeWeek')}
-      </Link>
+      </PageLink>
     </div>
   );
 }

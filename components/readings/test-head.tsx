@@ -1,10 +1,10 @@
 'use client';
 
 import { X } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { PageLink } from '@/components/ui/page-link';
 import { Segments } from '@/components/ui/segments';
 import { useReadingSetting } from './reading-setting';
 import type { TestDraft } from './test-draft';
@@ -31,9 +31,9 @@ export function TestHead({
   return (
     <header className="px-margin">
       <div className="flex min-h-15.5 items-center gap-1 border-b-stop border-ink py-1.5 md:min-h-18">
-        <Link href="/week" aria-label={t('close')} className="-ml-3 flex size-12 items-center justify-center">
+        <PageLink href="/week" aria-label={t('close')} className="-ml-3 flex size-12 items-center justify-center">
           <X aria-hidden="true" className="size-5.5" />
-        </Link>
+        </PageLink>
         <div className="min-w-0 flex-1">
           <h1 className="font-display text-[20px] leading-6 font-section md:font-display md:text-headline md:leading-10.5">
             {t(`kind.${draft.kind}`)}

@@ -1,12 +1,12 @@
 'use client';
 
 import { Check } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
 import { Disclosure } from '@/components/ui/disclosure';
+import { PageLink } from '@/components/ui/page-link';
 import { useRecordRound } from '@/lib/client/rounds';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { type RoundItem, roundItems, type Rounds } from '@/lib/schemas/round';
@@ -56,9 +56,9 @@ export function RoundForm({ household, serverNow, known }: Props) {
         <p role="status" className="mt-5 font-display text-verdict">
           {t('kept')}
         </p>
-        <Link href="/week" className={buttonClass({ variant: 'primary', size: 'large', className: 'mt-5 w-full' })}>
+        <PageLink href="/week" className={buttonClass({ variant: 'primary', size: 'large', className: 'mt-5 w-full' })}>
           {t('toSheet')}
-        </Link>
+        </PageLink>
       </div>
     );
   return (

@@ -13,13 +13,13 @@ import {
   ShoppingBasket,
   Waves,
 } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { ProfessionalCall } from '@/components/house/professional-call';
 import { emergencyCard } from '@/components/navigation/places';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
 import { classNames } from '@/components/ui/class-names';
+import { PageLink } from '@/components/ui/page-link';
 import type { RoundItem } from '@/lib/schemas/round';
 import { filterPressureRise } from '@/lib/standards/filter';
 import { BucketTest } from './bucket-test';
@@ -104,16 +104,16 @@ export function RoundRow({ item, off, onToggle, household, cleanPressure, childr
           </Callout>
           {children}
           {acidSigns.includes(item) && (
-            <Link href="/test" className={buttonClass({ variant: 'outline' })}>
+            <PageLink href="/test" className={buttonClass({ variant: 'outline' })}>
               {t('testNow')}
-            </Link>
+            </PageLink>
           )}
           {item === 'water-level' && <BucketTest household={household} />}
           {forTechnician.includes(item) && <ProfessionalCall />}
           {item === 'lockers' && (
-            <Link href={emergencyCard} className={buttonClass({ variant: 'terra' })}>
+            <PageLink href={emergencyCard} className={buttonClass({ variant: 'terra' })}>
               {navigation('emergencyCard')}
-            </Link>
+            </PageLink>
           )}
         </div>
       )}

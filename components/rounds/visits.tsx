@@ -1,11 +1,11 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { ProfessionalCall } from '@/components/house/professional-call';
 import { Button } from '@/components/ui/button';
 import { Disclosure } from '@/components/ui/disclosure';
+import { PageLink } from '@/components/ui/page-link';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Skeleton } from '@/components/ui/skeleton';
 import { textLink } from '@/components/ui/text-link';
@@ -52,9 +52,9 @@ export function Visits({ household, serverNow }: Props) {
         <VisitForm household={household} serverNow={serverNow} />
       </Disclosure>
       {data === undefined || data.length === 0 ? null : <VisitList visits={data} locale={household.locale} />}
-      <Link href="/house" className={`${textLink} inline-flex min-h-11 items-center text-body`}>
+      <PageLink href="/house" className={`${textLink} inline-flex min-h-11 items-center text-body`}>
         {t('houseSheet')}
-      </Link>
+      </PageLink>
     </section>
   );
 }

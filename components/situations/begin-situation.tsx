@@ -1,9 +1,9 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { useOpenSituation } from '@/lib/client/situations';
 import type { OpenSituation, SituationKind } from '@/lib/schemas/situation';
@@ -25,9 +25,9 @@ export function BeginSituation({ kind, open }: { kind: SituationKind; open: Open
         <p className="max-w-reading font-emphasis">{t('begin.otherOpen', { name: t(`kind.${other}.name`) })}</p>
         <p className="max-w-reading text-ink-2">{t('begin.meanwhile')}</p>
         <div className="flex flex-wrap items-center gap-x-5">
-          <Link href={`/situations/${other}`} className={`inline-flex min-h-11 items-center ${textLink}`}>
+          <PageLink href={`/situations/${other}`} className={`inline-flex min-h-11 items-center ${textLink}`}>
             {t('begin.toOpen')}
-          </Link>
+          </PageLink>
           {mayOpen && (
             <Button variant="outline" onClick={() => setSetsAside(true)}>
               {t('begin.setAside')}

@@ -1,21 +1,21 @@
 'use client';
 
 import { Siren } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { emergencyCard } from '@/components/navigation/places';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 
 /** One tap from a caution to the emergency card. */
 export function EmergencyLink() {
   const t = useTranslations('navigation');
   return (
-    <Link
+    <PageLink
       href={emergencyCard}
       className={`inline-flex min-h-11 items-center gap-2 font-emphasis md:min-h-7 pointer-coarse:min-h-11 ${textLink}`}
     >
       <Siren aria-hidden="true" className="size-4.5 shrink-0" />
       {t('emergencyCard')}
-    </Link>
+    </PageLink>
   );
 }

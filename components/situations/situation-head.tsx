@@ -1,10 +1,10 @@
 'use client';
 
 import { ChevronLeft, TestTubeDiagonal } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
 import { DoubleRule } from '@/components/ui/double-rule';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 
 type Props = {
@@ -51,10 +51,10 @@ export function SituationHead({ page, headline, lead, short = false, nextTest }:
                 <p className="mb-2 font-display text-section">{nextTest}</p>
               </>
             )}
-            <Link href="/test" className={buttonClass({ size: 'small' })}>
+            <PageLink href="/test" className={buttonClass({ size: 'small' })}>
               <TestTubeDiagonal aria-hidden="true" className="size-4.5" />
               {t('head.enterTest')}
-            </Link>
+            </PageLink>
           </div>
         )}
       </div>
@@ -66,9 +66,9 @@ export function SituationHead({ page, headline, lead, short = false, nextTest }:
 function Back() {
   const t = useTranslations('situations');
   return (
-    <Link href="/situations" className={`-ml-1 inline-flex min-h-11 items-center gap-1 text-label ${textLink}`}>
+    <PageLink href="/situations" className={`-ml-1 inline-flex min-h-11 items-center gap-1 text-label ${textLink}`}>
       <ChevronLeft aria-hidden="true" className="size-4.5" />
       {t('all')}
-    </Link>
+    </PageLink>
   );
 }

@@ -1,8 +1,8 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { classNames } from '@/components/ui/class-names';
+import { PageLink } from '@/components/ui/page-link';
 import { daysBetween, dayOf } from '@/lib/calendar/household-day';
 import type { SituationKind, Situations } from '@/lib/schemas/situation';
 import { groups } from './groups';
@@ -52,7 +52,7 @@ function IndexRow({ kind, current, openDay }: RowProps) {
   const t = useTranslations('situations');
   const isOpen = openDay !== null;
   return (
-    <Link
+    <PageLink
       href={`/situations/${kind}`}
       aria-current={current ? 'page' : undefined}
       className={classNames(
@@ -66,6 +66,6 @@ function IndexRow({ kind, current, openDay }: RowProps) {
         <span className={classNames('block text-small', !isOpen && 'text-ink-2')}>{t(`kind.${kind}.hint`)}</span>
       </span>
       <span className={classNames('text-small', !isOpen && 'text-ink-2')}>{openDay ?? t(`kind.${kind}.lasts`)}</span>
-    </Link>
+    </PageLink>
   );
 }

@@ -1,7 +1,7 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { substances, productForms } from '@/lib/schemas/shelf-product';
 import { doseUnits } from '@/lib/schemas/dose';
@@ -74,9 +74,9 @@ function TestStep({ open, step, now }: Props) {
       {!done && (
         <>
           <p className="text-small text-ink-2">{note}</p>
-          <Link href="/test" className={stepLink}>
+          <PageLink href="/test" className={stepLink}>
             {t('toTest')}
-          </Link>
+          </PageLink>
         </>
       )}
     </StepWords>
@@ -103,9 +103,9 @@ function DoseStep({ step, now }: { step: SituationStep; now: number }) {
           <p className="text-small">{hours.join(', ')}</p>
           {toBuy === 1 && <p className="text-small font-emphasis">{t('toBuy')}</p>}
           <p className="text-small text-ink-2">{note}</p>
-          <Link href="/week" className={stepLink}>
+          <PageLink href="/week" className={stepLink}>
             {t('toSheet')}
-          </Link>
+          </PageLink>
         </>
       )}
     </StepWords>

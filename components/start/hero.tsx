@@ -1,5 +1,5 @@
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { buttonClass } from '@/components/ui/button-class';
 import { LookRoundButton } from './look-round-button';
@@ -21,16 +21,16 @@ export function Hero() {
         <p className="order-last text-small sm:col-span-2 lg:col-span-1 text-ink-2 lg:order-none lg:mb-1 lg:text-body">
           {t('need')}
         </p>
-        <Link href="/sign-up" className={buttonClass({ variant: 'primary', size: 'large', wide: true })}>
+        <PageLink href="/sign-up" className={buttonClass({ variant: 'primary', size: 'large', wide: true })}>
           {t('start')}
-        </Link>
+        </PageLink>
         <LookRoundButton size="large" />
         <p className="hidden text-body lg:block">
           {t.rich('haveSheet', {
             link: (words) => (
-              <Link href="/sign-in" className={textLink}>
+              <PageLink href="/sign-in" className={textLink}>
                 {words}
-              </Link>
+              </PageLink>
             ),
           })}
         </p>

@@ -1,7 +1,7 @@
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { InlineStop, StopWord } from '@/components/ui/callout';
 import { emergencyCard } from '@/components/navigation/places';
+import { PageLink } from '@/components/ui/page-link';
 
 const bold = (words: React.ReactNode) => <b className="font-emphasis text-ink">{words}</b>;
 
@@ -21,15 +21,15 @@ export function LandingFoot() {
           <p>{t.rich('source', { b: bold })}</p>
         </div>
         <nav aria-label={navigation('help')} className="flex flex-wrap gap-x-5.5 text-ink">
-          <Link href={emergencyCard} className={link}>
+          <PageLink href={emergencyCard} className={link}>
             {navigation('emergencyCard')}
-          </Link>
-          <Link href="/help/safety" className={link}>
+          </PageLink>
+          <PageLink href="/help/safety" className={link}>
             {navigation('keepingSafe')}
-          </Link>
-          <Link href="/help" className={link}>
+          </PageLink>
+          <PageLink href="/help" className={link}>
             {navigation('help')}
-          </Link>
+          </PageLink>
         </nav>
       </div>
     </footer>

@@ -1,7 +1,7 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
@@ -49,9 +49,9 @@ export function SignInForm() {
       <p className="text-body">
         {t.rich('noSheet', {
           link: (words) => (
-            <Link href="/sign-up" className={textLink}>
+            <PageLink href="/sign-up" className={textLink}>
               {words}
-            </Link>
+            </PageLink>
           ),
         })}
       </p>

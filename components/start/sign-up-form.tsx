@@ -1,7 +1,7 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
@@ -96,9 +96,9 @@ export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
       <p className="text-body">
         {t.rich('haveSheet', {
           link: (words) => (
-            <Link href="/sign-in" className={textLink}>
+            <PageLink href="/sign-in" className={textLink}>
               {words}
-            </Link>
+            </PageLink>
           ),
         })}
       </p>

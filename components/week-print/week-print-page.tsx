@@ -1,10 +1,10 @@
 'use client';
 
 import { ArrowLeft } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { PrintButton } from '@/components/help/print-button';
 import { DoubleRule } from '@/components/ui/double-rule';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { SheetProvider } from '@/components/week-sheet/sheet-context';
 import type { PrintedWeek } from '@/lib/schemas/printed-week';
@@ -29,13 +29,13 @@ export function WeekPrintPage({ printed, start }: { printed: PrintedWeek; start:
       <PaperProvider state={paperStateOf(printed)}>
         <div className="px-margin pb-10 print:p-0">
           <div className="flex flex-wrap items-center justify-between gap-x-8 py-2 print:hidden">
-            <Link
+            <PageLink
               href={start === undefined ? '/week' : `/week?start=${start}`}
               className={`${textLink} inline-flex min-h-11 items-center gap-1.5 text-body`}
             >
               <ArrowLeft aria-hidden="true" className="size-4.5" />
               {t('back')}
-            </Link>
+            </PageLink>
             <PrintButton label={common('print')} />
           </div>
           <div

@@ -1,8 +1,8 @@
 'use client';
 
 import { Printer } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { useSheet } from './sheet-context';
 
@@ -14,13 +14,13 @@ export function Colophon() {
     <>
       <p className="text-fine text-ink-3">{t('colophon', { count: sheet.readings.length })}</p>
       <p>
-        <Link
+        <PageLink
           href={start === undefined ? '/week/print' : `/week/print?start=${start}`}
           className={`${textLink} inline-flex min-h-6 items-center gap-1.5 text-small font-emphasis pointer-coarse:min-h-11`}
         >
           <Printer aria-hidden="true" className="size-4.5" />
           {t('print')}
-        </Link>
+        </PageLink>
       </p>
     </>
   );

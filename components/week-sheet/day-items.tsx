@@ -1,7 +1,7 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { bold } from './bold';
 import type { Check } from './checks';
@@ -67,9 +67,9 @@ function ListedCheck({ check }: { check: Check }) {
     <p>
       {t.rich('check.by', { kind: t(`check.${check.kind}`), time: times.clock(instantOf(check.at)), b: bold })}
       <span className="block text-small text-ink-2">{reason}</span>
-      <Link href="/test" className="inline-flex min-h-11 items-center underline decoration-1 underline-offset-3">
+      <PageLink href="/test" className="inline-flex min-h-11 items-center underline decoration-1 underline-offset-3">
         {t('next.enter')}
-      </Link>
+      </PageLink>
     </p>
   );
 }

@@ -1,9 +1,9 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
 import { EmptyState } from '@/components/ui/empty-state';
+import { PageLink } from '@/components/ui/page-link';
 
 /** Before the first reading there is nothing to draw: the sheet asks for a full test. */
 export function FirstTest() {
@@ -14,9 +14,9 @@ export function FirstTest() {
       picture={<DippedStrip />}
       title={t('state.firstTitle')}
       action={
-        <Link href="/test" className={buttonClass({ variant: 'primary' })}>
+        <PageLink href="/test" className={buttonClass({ variant: 'primary' })}>
           {t('next.enter')}
-        </Link>
+        </PageLink>
       }
     >
       {t('state.firstWords')}

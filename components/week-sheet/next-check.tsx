@@ -1,9 +1,9 @@
 'use client';
 
 import { TestTubeDiagonal } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { longDay } from '@/lib/calendar/format';
 import { type Check, nextCheck } from './checks';
 import { useSheet } from './sheet-context';
@@ -26,10 +26,10 @@ export function NextCheck() {
       <p className="mt-px mb-2.5 font-display text-[20px] leading-[26px] font-section">
         {next ? when(next) : t('noneWhen')}
       </p>
-      <Link href="/test" className={buttonClass({ size: 'small', className: 'md:min-h-9.5' })}>
+      <PageLink href="/test" className={buttonClass({ size: 'small', className: 'md:min-h-9.5' })}>
         <TestTubeDiagonal aria-hidden="true" className="size-4.5" />
         {t('enter')}
-      </Link>
+      </PageLink>
       {full && full !== next && (
         <p className="mt-2.25 text-small text-ink-2">
           {t('fullOn', {

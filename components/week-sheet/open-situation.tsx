@@ -1,7 +1,7 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { bold } from './bold';
 import { useSheet } from './sheet-context';
 import { useStepWords } from './use-step-words';
@@ -21,12 +21,12 @@ export function OpenSituation() {
     <section aria-label={t('label')} className="mt-3 border-l-care border-teal bg-paper-lift px-4 py-3">
       <p>{t.rich(lead === 'follow' ? 'beside' : 'leads', { name: names(`${kind}.name`), b: bold })}</p>
       <p className="text-small text-ink-2">{done ? t('done') : next ? t('next', { step: words(next) ?? '' }) : ''}</p>
-      <Link
+      <PageLink
         href={`/situations/${kind}`}
         className="inline-flex min-h-11 items-center font-emphasis underline decoration-1 underline-offset-3"
       >
         {t('toSteps')}
-      </Link>
+      </PageLink>
     </section>
   );
 }

@@ -1,10 +1,10 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
 import { Callout } from '@/components/ui/callout';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { useSheet } from './sheet-context';
 import { useUnits } from './use-units';
 
@@ -30,9 +30,9 @@ function Questioned({ onCorrect }: { onCorrect: (() => void) | undefined }) {
       {t('correctIt')}
     </Button>
   ) : (
-    <Link href={quick ? '/test?kind=quick' : '/test'} className={buttonClass({ variant: 'primary' })}>
+    <PageLink href={quick ? '/test?kind=quick' : '/test'} className={buttonClass({ variant: 'primary' })}>
       {t('checkAgain')}
-    </Link>
+    </PageLink>
   );
   return (
     <Callout

@@ -1,9 +1,9 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { Callout } from '@/components/ui/callout';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { ProblemState } from '@/components/ui/problem-state';
 import { longDay } from '@/lib/calendar/format';
 import type { MeasuredQuantity } from '@/lib/schemas/measured-range';
@@ -95,8 +95,8 @@ function Needs({ needs, hasDoses }: { needs: NonNullable<WeekSheet['plan']>['nee
 function ToTest() {
   const t = useTranslations('week.next');
   return (
-    <Link href="/test" className={buttonClass({ variant: 'primary' })}>
+    <PageLink href="/test" className={buttonClass({ variant: 'primary' })}>
       {t('enter')}
-    </Link>
+    </PageLink>
   );
 }

@@ -1,9 +1,9 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { emergencyCard } from '@/components/navigation/places';
 import { StopWord } from '@/components/ui/callout';
+import { PageLink } from '@/components/ui/page-link';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 
 /** What must never happen; beside a dose of acid or tablets also what holds for those, and always the emergency card. */
@@ -16,9 +16,9 @@ export function StopWords({ dose, headed = false }: { dose?: PlanDose | undefine
     <>
       {headed ? common('neverMix') : common.rich('neverMixStop', { stop: (words) => <StopWord>{words}</StopWord> })}{' '}
       {own && <>{t(own)} </>}
-      <Link href={emergencyCard} className="whitespace-nowrap underline decoration-1 underline-offset-3">
+      <PageLink href={emergencyCard} className="whitespace-nowrap underline decoration-1 underline-offset-3">
         {navigation('emergencyCard')}
-      </Link>
+      </PageLink>
     </>
   );
 }

@@ -1,8 +1,8 @@
 'use client';
 
 import { Bell } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { bold } from './bold';
 import type { Check } from './checks';
@@ -95,12 +95,12 @@ function ToDoCheck({ check }: { check: Check }) {
       <p className="font-display text-[23px] leading-[27px] font-headline tracking-dose">{t('check.full')}</p>
       <p className="text-[13.5px] leading-[17px] font-strong">{t('check.fullNote')}</p>
       <p className="mt-1.25 text-fine text-ink-2">{reason}</p>
-      <Link
+      <PageLink
         href="/test"
         className="inline-flex min-h-6 items-center font-emphasis underline decoration-1 underline-offset-3 pointer-coarse:min-h-11"
       >
         {t('next.enter')}
-      </Link>
+      </PageLink>
     </div>
   );
 }

@@ -1,8 +1,8 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { TickStep } from '@/components/situations/tick-step';
+import { PageLink } from '@/components/ui/page-link';
 import type { SituationStep } from '@/lib/schemas/situation';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';
@@ -19,12 +19,12 @@ export function ToDoStep({ step }: { step: SituationStep }) {
   if (!situation || words === undefined) return null;
   if (step.kind === 'test')
     return (
-      <Link
+      <PageLink
         href="/test"
         className="inline-flex min-h-6 items-center font-emphasis underline decoration-1 underline-offset-3 pointer-coarse:min-h-11"
       >
         {words}
-      </Link>
+      </PageLink>
     );
   return (
     <TickStep

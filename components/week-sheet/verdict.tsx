@@ -1,8 +1,8 @@
 'use client';
 
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
 import { buttonClass } from '@/components/ui/button-class';
+import { PageLink } from '@/components/ui/page-link';
 import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
 import { bold } from './bold';
 import { OpenSituation } from './open-situation';
@@ -49,7 +49,7 @@ function VerdictItself() {
       )}
       <WaterNow framed />
       {sheet.verdict.state !== 'stay-out' && (
-        <Link
+        <PageLink
           href="/test"
           className={buttonClass({
             variant: sheet.verdict.state === 'test-first' ? 'primary' : 'outline',
@@ -57,7 +57,7 @@ function VerdictItself() {
           })}
         >
           {t(sheet.lastReading === null ? 'enterTest' : 'quickCheck')}
-        </Link>
+        </PageLink>
       )}
     </VerdictFrame>
   );

@@ -1,8 +1,8 @@
 'use client';
 
 import { ChevronLeft, ChevronRight } from 'lucide-react';
-import Link from 'next/link';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/ui/page-link';
 import { useSheet } from './sheet-context';
 import { useTimes } from './use-times';
 import { isThisWeek, weeksBeside } from './weeks';
@@ -24,7 +24,7 @@ export function WeekNavigation() {
   const isNow = isThisWeek(picture);
   return (
     <nav aria-label={t('weeks')} data-weeks="" className="mt-2.5 flex items-center gap-2 text-small">
-      <Link
+      <PageLink
         href={previous}
         scroll={false}
         className={step}
@@ -33,8 +33,8 @@ export function WeekNavigation() {
         aria-keyshortcuts="ArrowLeft"
       >
         <ChevronLeft aria-hidden="true" className="size-5" />
-      </Link>
-      <Link
+      </PageLink>
+      <PageLink
         href={next}
         scroll={false}
         className={step}
@@ -43,15 +43,15 @@ export function WeekNavigation() {
         aria-keyshortcuts="ArrowRight"
       >
         <ChevronRight aria-hidden="true" className="size-5" />
-      </Link>
-      <Link
+      </PageLink>
+      <PageLink
         href="/week"
         scroll={false}
         aria-current={isNow ? 'date' : undefined}
         className={`inline-flex min-h-9 items-center px-1 pointer-coarse:min-h-11 ${isNow ? 'text-ink-2' : 'underline underline-offset-3'}`}
       >
         {t('thisWeek')}
-      </Link>
+      </PageLink>
     </nav>
   );
 }

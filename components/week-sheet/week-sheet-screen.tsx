@@ -28,8 +28,16 @@ const UnsentNotice = dynamic(() => untilFetched(() => import('./unsent-notice'))
   ssr: false,
 });
 
-/** The week sheet, fetched and kept fresh. `initial`: what the server knew when it made the page. */
-export function WeekSheetScreen({ start, initial }: { start?: string | undefined; initial?: WeekSheet | undefined }) {
+type WeekSheetScreenProps = {
+  start?: string | undefined;
+  /** What the server knew when it made the page. */
+  initial?: WeekSheet | undefined;
+  /** Whether it was asked for by a phone. */
+  onPhone?: boolean;
+};
+
+/** The week sheet, fetched and kept fresh. */
+export function WeekSheetScreen({ start, initial, onPhone = false }: WeekSheetScreenProps) {
   const t = useTranslations('week');
   const common = useTranslations('common');
   const problemWords = useProblemWords();
@@ -56,7 +64,7 @@ export function WeekSheetScreen({ start, initial }: { start?: string | undefined
           <Unsent />
           <SheetStates />
         </div>
-        <SheetBody />
+        <SheetBody onPhone={onPhone} />
       </SheetProvider>
     </ClockProvider>
   );
@@ -73,17 +81,19 @@ const phoneSheet = part(<PhoneSheet />);
 const deskSheet = part(<DeskSheet />);
 
 /**
- * The sheet of a desk or that of a phone. Which of the two it is, only the browser knows: the server draws both, so that either
- * can be read before any script has come, the style sheet shows one, and the other is dropped once React listens.
+ * The sheet of a desk or that of a phone. Which of the two fits, only the browser knows: unless a phone says what it is, the
+ * server draws both, so that either can be read before any script has come, the style sheet shows one, and the other is dropped
+ * once React listens.
  */
-function SheetBody() {
+function SheetBody({ onPhone }: { onPhone: boolean }) {
   const { sheet } = useSheet();
-  const isPhone = useIsPhone();
+  const narrow = useIsPhone() ?? (onPhone ? true : undefined);
   if (sheet.lastReading === null) return <FirstTest />;
+  const both = narrow === undefined;
   return (
     <>
-      {isPhone !== false && <div className="sm:hidden">{phoneSheet}</div>}
-      {isPhone !== true && <div className="max-sm:hidden">{deskSheet}</div>}
+      {narrow !== false && <div className={both ? 'sm:hidden' : undefined}>{phoneSheet}</div>}
+      {narrow !== true && <div className={both ? 'max-sm:hidden' : undefined}>{deskSheet}</div>}
     </>
   );
 }

@@ -35,7 +35,7 @@ function curveOf(stretches: readonly Stretch[]): SheetCurve | null {
   const series = (valuesOf: (projection: NonNullable<StoredPlan['result']['projection']>) => readonly number[]) =>
     known.flatMap(({ plan: { result }, indices }) => {
       const values = result.projection ? valuesOf(result.projection) : [];
-      return indices.map((index) => values[index] ?? 0);
+      return indices.map((index) => asDrawn(values[index] ?? 0));
     });
   return {
     hours: known.flatMap(({ plan, indices }) => indices.map((index) => plan.result.hours[index] ?? '')),
@@ -57,4 +57,9 @@ function curveOf(stretches: readonly Stretch[]): SheetCurve | null {
       p90: series(({ cyanuricAcid }) => cyanuricAcid.p90),
     },
   };
+}
+
+/** As fine as anything that is drawn or said of a curve, mg/L or pH. Further digits would only travel: half the weight of the page. */
+function asDrawn(value: number): number {
+  return Math.round(value * 10_000) / 10_000;
 }

@@ -1,5 +1,7 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
+import { headers } from 'next/headers';
+import { userAgent } from 'next/server';
 import { WaitingTests } from '@/components/readings/waiting-tests';
 import { PrintElsewhere } from '@/components/week-print/print-elsewhere';
 import { WeekSheetScreen } from '@/components/week-sheet/week-sheet-screen';
@@ -35,6 +37,7 @@ export default async function WeekPage({ searchParams }: Props) {
     if (problem instanceof AppError) return undefined;
     throw problem;
   });
+  const onPhone = userAgent({ headers: await headers() }).device.type === 'mobile';
   return (
     <ClientMessages
       namespaces={['week', 'events', 'verdict', 'doses', 'units', 'readings', 'try-out']}
@@ -44,7 +47,7 @@ export default async function WeekPage({ searchParams }: Props) {
         <WaitingTests
           household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
         />
-        <WeekSheetScreen start={asked.start} initial={initial} />
+        <WeekSheetScreen start={asked.start} initial={initial} onPhone={onPhone} />
       </div>
       <PrintElsewhere />
     </ClientMessages>

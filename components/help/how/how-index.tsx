@@ -1,6 +1,6 @@
 import { ChevronRight } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
+import { PageLink } from '@/components/ui/page-link';
 import { howPages } from '@/lib/client/worked-out/how-page';
 import { HelpHead } from '../help-head';
 
@@ -29,13 +29,13 @@ export function HowIndex() {
 function Row({ href, name, note }: { href: string; name: string; note: string }) {
   return (
     <li className="break-inside-avoid">
-      <Link href={href} className="flex min-h-17 items-center gap-3 border-t border-rule py-2">
+      <PageLink href={href} className="flex min-h-17 items-center gap-3 border-t border-rule py-2">
         <span className="min-w-0 flex-1">
           <b className="block font-display text-section">{name}</b>
           <span className="block text-small text-ink-2">{note}</span>
         </span>
         <ChevronRight aria-hidden="true" className="size-5 shrink-0 text-ink-3" />
-      </Link>
+      </PageLink>
     </li>
   );
 }

@@ -1,5 +1,5 @@
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
+import { PageLink } from '@/components/ui/page-link';
 import { howPages, type HowPage } from '@/lib/client/worked-out/how-page';
 
 export type HowPlace = HowPage | 'constants' | 'unknown' | 'index';
@@ -20,9 +20,9 @@ export function HowList({ current }: { current: HowPlace }) {
         {current === 'index' ? (
           t('listTitle')
         ) : (
-          <Link href="/help/how" className="inline-flex min-h-11 items-center hover:underline">
+          <PageLink href="/help/how" className="inline-flex min-h-11 items-center hover:underline">
             {t('listTitle')}
-          </Link>
+          </PageLink>
         )}
       </h2>
       <ul>
@@ -34,9 +34,9 @@ export function HowList({ current }: { current: HowPlace }) {
                 {name}
               </span>
             ) : (
-              <Link href={`/help/how/${page}`} className={`${row} hover:underline`}>
+              <PageLink href={`/help/how/${page}`} className={`${row} hover:underline`}>
                 {name}
-              </Link>
+              </PageLink>
             )}
           </li>
         ))}

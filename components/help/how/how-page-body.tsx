@@ -1,5 +1,5 @@
 import { useTranslations } from 'next-intl';
-import Link from 'next/link';
+import { PageLink } from '@/components/ui/page-link';
 import { constantGroups } from '@/lib/client/worked-out/constants';
 import { examples } from '@/lib/client/worked-out/examples/all-examples';
 import type { HowPage } from '@/lib/client/worked-out/how-page';
@@ -36,12 +36,12 @@ export function HowPageBody({ page }: { page: HowPage }) {
       )}
       <CareNote />
       <p className="mt-2 flex flex-wrap gap-x-6 text-body">
-        <Link href="/help/how/constants" className={`${textLink} inline-flex min-h-11 items-center`}>
+        <PageLink href="/help/how/constants" className={`${textLink} inline-flex min-h-11 items-center`}>
           {t('allConstants')}
-        </Link>
-        <Link href="/help/how/unknown" className={`${textLink} inline-flex min-h-11 items-center`}>
+        </PageLink>
+        <PageLink href="/help/how/unknown" className={`${textLink} inline-flex min-h-11 items-center`}>
           {t('unknown.title')}
-        </Link>
+        </PageLink>
       </p>
     </HowFrame>
   );
