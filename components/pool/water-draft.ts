@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { feederIngredients, feederKinds } from '@/lib/schemas/pool';
 import type { SetupState } from '@/lib/schemas/pool-profile';
-import { readingMethods } from '@/lib/schemas/reading';
+import { readingMethods } from '@/lib/schemas/reading-kinds';
 import { formatForInput, formatNumber } from '@/lib/units/format';
 import { parseDecimal, parseQuantity } from '@/lib/units/parse';
 import { toInside, type UnitSystem } from '@/lib/units/unit';

@@ -6,7 +6,7 @@ import { FieldWordsBelow } from '@/components/ui/field';
 import { NumberTextField } from '@/components/ui/number-text-field';
 import { TickBox } from '@/components/ui/tick-box';
 import { type SetupState, waterAndEquipmentSchema } from '@/lib/schemas/pool-profile';
-import { readingMethods } from '@/lib/schemas/reading';
+import { readingMethods } from '@/lib/schemas/reading-kinds';
 import { FeederFields } from './feeder-fields';
 import { checkAnswers, focusFirstProblem, noProblems } from './field-problems';
 import { PumpTimes } from './pump-times';

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { readingKinds, readingMethods, waterLooks } from '@/lib/schemas/reading';
+import { readingKinds, readingMethods, waterLooks } from '@/lib/schemas/reading-kinds';
 import type { UnitSystem } from '@/lib/units/unit';
 import { entryQuantities, type EntryQuantity, padQuantities } from './quantities';
 import { textOf, typedValue } from './typed-value';
@@ -31,28 +31,6 @@ export const testDraftSchema = z.object({
   correcting: z.boolean(),
 });
 export type TestDraft = z.infer<typeof testDraftSchema>;
-
-export function emptyTest(
-  id: string,
-  kind: TestDraft['kind'],
-  method: TestDraft['method'],
-  system: UnitSystem,
-): TestDraft {
-  return {
-    id,
-    kind,
-    method,
-    time: null,
-    look: 'clear',
-    strip: {},
-    typed: {},
-    system,
-    confirmed: [],
-    zeroAnswer: null,
-    zeroFor: '',
-    correcting: false,
-  };
-}
 
 /** Whether anything was written down that would be missed. */
 export function isTouched({ strip, typed, look, time, correcting }: TestDraft): boolean {

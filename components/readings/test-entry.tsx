@@ -1,35 +1,35 @@
 'use client';
 
-import dynamic from 'next/dynamic';
 import { useTranslations } from 'next-intl';
+import { lazy, startTransition, useEffect, useState } from 'react';
 import { buttonClass } from '@/components/ui/button-class';
 import { PageLink } from '@/components/ui/page-link';
-import { Skeleton } from '@/components/ui/skeleton';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
+import { TestComing } from './test-coming';
 import type { TestForNowProps } from './test-for-now';
 
 type TestEntryProps = TestForNowProps & { household: ReadingHousehold };
 
 /** Drafts live on the device, which the server does not know; so the form and what checks it follow the page. */
-const LazyTest = dynamic(() => untilFetched(() => import('./test-for-now')).then((part) => part.TestForNow), {
-  ssr: false,
-  loading: Loading,
+const LazyTest = lazy(async () => {
+  // What checks a reading takes a phone as long to set up as the form itself: each has a turn of its own.
+  await untilFetched(() => import('@/lib/schemas/reading'));
+  await new Promise((resolve) => setTimeout(resolve));
+  return { default: (await untilFetched(() => import('./test-for-now'))).TestForNow };
 });
 
 /** Enter a test. */
 export function TestEntry({ household, kind, serverNow }: TestEntryProps) {
+  const [drawn, setDrawn] = useState(false);
+  // The head stays as it is until the form is whole.
+  useEffect(() => startTransition(() => setDrawn(true)), []);
   if (household.role === 'viewer') return <OnlyLooking />;
   return (
     <ReadingSettingProvider household={household}>
-      <LazyTest kind={kind} serverNow={serverNow} />
+      {drawn ? <LazyTest kind={kind} serverNow={serverNow} /> : <TestComing kind={kind} serverNow={serverNow} />}
     </ReadingSettingProvider>
   );
-}
-
-function Loading() {
-  const common = useTranslations('common');
-  return <Skeleton label={common('loading')} className="m-margin h-96" />;
 }
 
 function OnlyLooking() {

@@ -2,6 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { useRef, useState } from 'react';
+import { useLeftAlone } from '@/components/ui/use-left-alone';
 import { RequestProblem } from '@/lib/client/fetch-json';
 import {
   type PlannedWeek,
@@ -38,7 +39,8 @@ export function TestForNow({ kind, serverNow }: TestForNowProps) {
   const problemWords = useProblemWords();
   const { householdId, personId } = useReadingSetting();
   const { now, read } = useNow(serverNow);
-  const week = usePlannedWeek();
+  // Nothing asks for it before the first figure is entered.
+  const week = usePlannedWeek(useLeftAlone());
   const { draft, setDraft, forget, startAgain } = useTestDraft(kind);
   const send = useSendReading({ personId, householdId });
   const correct = useCorrectReading();

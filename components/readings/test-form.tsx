@@ -1,6 +1,5 @@
 'use client';
 
-import { Pipette, ReceiptText } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
@@ -9,12 +8,14 @@ import { Segments } from '@/components/ui/segments';
 import { useIsPhone } from '@/components/week-sheet/use-is-phone';
 import { useKept } from '@/lib/client/device-store';
 import type { PlannedWeek } from '@/lib/client/readings';
-import { type NewReading, readingMethods, waterLooks } from '@/lib/schemas/reading';
+import type { NewReading } from '@/lib/schemas/reading';
+import { waterLooks } from '@/lib/schemas/reading-kinds';
 import { bottleSchema, firstBottle } from './bottle';
 import { doubtsOf } from './doubts';
 import { asked, enteredOf } from './entered';
 import { FalseZero } from './false-zero';
 import { KitPad } from './kit-pad';
+import { MethodChoice } from './method-choice';
 import { newReadingOf } from './new-reading';
 import { quickQuantities, type EntryQuantity } from './quantities';
 import { useReadingSetting } from './reading-setting';
@@ -22,6 +23,7 @@ import { StripEntry } from './strip-entry';
 import { StripTimer } from './strip-timer';
 import type { TestDraft } from './test-draft';
 import { TestHead } from './test-head';
+import { TestNote } from './test-note';
 import { testTime } from './test-time';
 import { ValueFields } from './value-fields';
 import { zeroAnswerTo, zeroQuestionOf, zeroSubject } from './zero-question';
@@ -94,24 +96,8 @@ export function TestForm({ draft, change, now, readNow, week, onSave, busy, prob
       <TestHead draft={draft} change={change} now={now} time={time} />
       <div className="grid flex-1 content-start gap-x-10 px-margin pt-3 pb-5 lg:grid-cols-[minmax(0,600px)_minmax(0,420px)]">
         <div className="min-w-0">
-          <Segments
-            hideLabel
-            label={t('method.label')}
-            choices={readingMethods.map((method) => ({
-              value: method,
-              label: (
-                <span className="inline-flex items-center gap-2">
-                  <MethodIcon method={method} />
-                  {t(`method.${method}`)}
-                </span>
-              ),
-            }))}
-            value={draft.method}
-            onChange={(method) => change({ method })}
-          />
-          <p className="py-2.5 text-small text-pretty text-ink-2">
-            {draft.kind === 'quick' ? t('quickNote') : t('sample')}
-          </p>
+          <MethodChoice value={draft.method} onChange={(method) => change({ method })} />
+          <TestNote kind={draft.kind} />
           {draft.method === 'strip' ? (
             <>
               <div className="mb-3.5">
@@ -213,16 +199,5 @@ function SaveBar({
         {label}
       </Button>
     </div>
-  );
-}
-
-function MethodIcon({ method }: { method: TestDraft['method'] }) {
-  if (method === 'drop-kit') return <Pipette aria-hidden="true" className="size-5" />;
-  if (method === 'slip') return <ReceiptText aria-hidden="true" className="size-5" />;
-  return (
-    <svg viewBox="0 0 24 24" aria-hidden="true" className="size-5 fill-none stroke-current" strokeWidth="2">
-      <rect x="8.5" y="2.5" width="7" height="19" rx="1" />
-      <path d="M8.5 7.5h7M8.5 12h7M8.5 16.5h7" />
-    </svg>
   );
 }

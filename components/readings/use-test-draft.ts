@@ -3,9 +3,10 @@
 import { useState } from 'react';
 import { z } from 'zod';
 import { readKept, writeKept } from '@/lib/client/device-store';
-import { readingMethods } from '@/lib/schemas/reading';
+import { readingMethods } from '@/lib/schemas/reading-kinds';
+import { emptyTest } from './empty-test';
 import { useReadingSetting } from './reading-setting';
-import { emptyTest, isTouched, type TestDraft, testDraftSchema, testInSystem } from './test-draft';
+import { isTouched, type TestDraft, testDraftSchema, testInSystem } from './test-draft';
 
 const methodSchema = z.enum(readingMethods);
 

@@ -3,7 +3,8 @@ import { glyphOf } from '@/components/charts/chart-doses';
 import type { ChartTest } from '@/components/charts/test-marks';
 import type { CurveQuantity } from '@/components/charts/water-curve';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
-import type { ReadingMethod, RecordedReading } from '@/lib/schemas/reading';
+import type { RecordedReading } from '@/lib/schemas/reading';
+import type { ReadingMethod } from '@/lib/schemas/reading-kinds';
 import { doseInstant } from './dose-state';
 import { instantOf } from './sheet-times';
 

@@ -3,7 +3,7 @@ import { check, integer, real, sqliteTable, text } from 'drizzle-orm/sqlite-core
 import { covers, feederIngredients, feederKinds } from '@/lib/schemas/pool';
 import { poolKinds, setupSteps, surfaceAnswers, waterSystems } from '@/lib/schemas/pool-profile';
 import { poolFloors, poolShapes, volumeUnits } from '@/lib/schemas/pool-size';
-import type { ReadingMethod } from '@/lib/schemas/reading';
+import type { ReadingMethod } from '@/lib/schemas/reading-kinds';
 import type { WallInterval } from '@/lib/schemas/time';
 import { between, isWallTime, oneOf } from './checks';
 import { households } from './households';

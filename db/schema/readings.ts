@@ -1,7 +1,8 @@
 import { sql } from 'drizzle-orm';
 import { check, index, integer, primaryKey, real, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import { type MeasuredQuantity, measuredQuantities, measuredRange } from '@/lib/schemas/measured-range';
-import { type NewReading, readingKinds, readingMethods, waterLooks } from '@/lib/schemas/reading';
+import type { NewReading } from '@/lib/schemas/reading';
+import { readingKinds, readingMethods, waterLooks } from '@/lib/schemas/reading-kinds';
 import { oneOf } from './checks';
 import { households } from './households';
 import { people } from './people';

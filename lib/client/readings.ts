@@ -161,8 +161,8 @@ function weekAfter({ days }: WeekSheet): string {
 }
 
 /** The week and its plan as they stand before a test, asked for while it is written down. */
-export function usePlannedWeek(): PlannedWeek | undefined {
-  const now = useQuery(weekSheet(undefined));
+export function usePlannedWeek(enabled: boolean): PlannedWeek | undefined {
+  const now = useQuery({ ...weekSheet(undefined), enabled });
   const next = useQuery({
     ...weekSheet(now.data && weekAfter(now.data)),
     enabled: now.data !== undefined,

@@ -1,6 +1,7 @@
 import { readingError } from '@/lib/projection/reading-error';
 import type { UncertainQuantity } from '@/lib/schemas/posterior';
-import type { Interval, ReadingMethod } from '@/lib/schemas/reading';
+import type { Interval } from '@/lib/schemas/reading';
+import type { ReadingMethod } from '@/lib/schemas/reading-kinds';
 
 /** No test is surer than this, one sigma [its unit]: a strip that reads 0 is not exact, nor is an interval of no width. */
 export const leastError: Record<UncertainQuantity, number> = {

@@ -1,5 +1,6 @@
 import { type UncertainQuantity, uncertainQuantities } from '@/lib/schemas/posterior';
-import type { Interval, ReadingMethod } from '@/lib/schemas/reading';
+import type { Interval } from '@/lib/schemas/reading';
+import type { ReadingMethod } from '@/lib/schemas/reading-kinds';
 
 export { type UncertainQuantity, uncertainQuantities };
 

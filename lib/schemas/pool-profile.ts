@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { covers, feederIngredients, feederKinds, surfaces } from './pool';
-import { readingMethods } from './reading';
+import { readingMethods } from './reading-kinds';
 import { knownTimeZoneSchema } from './account';
 import { wallIntervalSchema } from './time';
 import { poolSizeSchema } from './pool-size';

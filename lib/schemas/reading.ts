@@ -1,9 +1,7 @@
 import { z } from 'zod';
 import { type MeasuredQuantity, measuredRange } from './measured-range';
+import { readingKinds, readingMethods, waterLooks } from './reading-kinds';
 import { instantSchema } from './time';
-
-export const readingMethods = ['strip', 'drop-kit', 'slip'] as const;
-export type ReadingMethod = (typeof readingMethods)[number];
 
 /** A strip read between two steps: the value lies somewhere in here. */
 export const intervalSchema = z
@@ -40,10 +38,6 @@ export const readingSchema = measuredSchema.extend({
   method: z.enum(readingMethods).default('drop-kit'),
 });
 export type Reading = z.output<typeof readingSchema>;
-
-export const readingKinds = ['full', 'quick'] as const;
-/** What somebody saw beside the numbers; 'clear' when nothing was said. */
-export const waterLooks = ['clear', 'cloudy', 'green'] as const;
 
 /** The one description of a new reading: form, route and import use it. The id is made on the device. */
 export const newReadingSchema = z

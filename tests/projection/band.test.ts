@@ -15,7 +15,7 @@ import {
   uncertainQuantities,
 } from '@/lib/projection/reading-error';
 import { measuredRange } from '@/lib/schemas/measured-range';
-import type { ReadingMethod } from '@/lib/schemas/reading';
+import type { ReadingMethod } from '@/lib/schemas/reading-kinds';
 import { aPool, aWeek, everyDay, someWater, takenAt } from './pools';
 
 function errorsOf(water: WaterAnalysis, method: ReadingMethod): ReadingErrors {

@@ -20,7 +20,7 @@ import {
   SHARE_BECOMING_COMBINED,
 } from '@/lib/projection/step';
 import { lifeOf } from '@/lib/projection/tablets';
-import { readingMethods } from '@/lib/schemas/reading';
+import { readingMethods } from '@/lib/schemas/reading-kinds';
 import { solarPosition } from '@/lib/sun/solar-position';
 import { weekAheadSchema } from '@/lib/schemas/week-ahead';
 import { REFERENCE_ELEVATION, ULTRAVIOLET_EXPONENT } from '@/lib/sun/ultraviolet';

@@ -1,7 +1,7 @@
 import { type CourseBand, projectWeekBand, type ReadingErrors } from '@/lib/projection';
 import { readingError, uncertainQuantities } from '@/lib/projection/reading-error';
 import { poolSchema } from '@/lib/schemas/pool';
-import type { ReadingMethod } from '@/lib/schemas/reading';
+import type { ReadingMethod } from '@/lib/schemas/reading-kinds';
 import { type Point, ticksOf } from './curve';
 import type { Example } from './example';
 import { ordinaryWater } from './water';
