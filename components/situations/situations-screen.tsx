@@ -10,8 +10,8 @@ import { Skeleton } from '@/components/ui/skeleton';
 import { situationsOptions } from '@/lib/client/situations';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { OpenSituation, SituationKind, Situations } from '@/lib/schemas/situation';
-import { ClosedSituation } from './closed-situation';
-import { OpenSituationView } from './open-situation-view';
+import type { ClosedSituation } from './closed-situation';
+import type { OpenSituationView } from './open-situation-view';
 import { PastSituations } from './past-situations';
 import { SituationProvider } from './situation-context';
 import { SituationHead } from './situation-head';
@@ -24,22 +24,28 @@ type Props = {
   household: SituationHousehold;
   /** The page of one kind; undefined on the index, which shows what is open. */
   kind?: SituationKind;
+  /** What the server knew when it made the page. */
+  initial?: Situations | undefined;
+  views: SituationViews;
 };
 
-/**
- * The situations of a household: the index, and beside it the open one or the one that was asked for. They are fetched by the
- * browser: to know what is open the week is planned, and the cautions of an accident must not wait for that.
- */
-export function SituationsScreen({ household, kind }: Props) {
+/** What shows one situation: the page of a kind has it at once, the index when one is open. */
+export type SituationViews = {
+  Open: React.ComponentType<React.ComponentProps<typeof OpenSituationView>>;
+  Closed?: React.ComponentType<React.ComponentProps<typeof ClosedSituation>>;
+};
+
+/** The situations of a household: the index, and beside it the open one or the one that was asked for. */
+export function SituationsScreen({ household, ...page }: Props) {
   return (
     <SituationProvider household={household}>
-      <SituationsPage kind={kind} />
+      <SituationsPage {...page} />
     </SituationProvider>
   );
 }
 
-function SituationsPage({ kind }: { kind: SituationKind | undefined }) {
-  const query = useQuery(situationsOptions());
+function SituationsPage({ kind, initial, views: { Open, Closed } }: Omit<Props, 'household'>) {
+  const query = useQuery({ ...situationsOptions(), ...(initial === undefined ? {} : { initialData: initial }) });
   const situations = query.data;
   const [ended, setEnded] = useState(false);
   const shown = kind ?? situations?.open?.situation.kind;
@@ -60,9 +66,9 @@ function SituationsPage({ kind }: { kind: SituationKind | undefined }) {
             <NotLoaded retry={() => void query.refetch()} problem={query.error} />
           )}
           {open && situations ? (
-            <OpenSituationView key={open.id} open={open} situations={situations} onEnded={() => setEnded(true)} />
-          ) : kind ? (
-            <ClosedSituation kind={kind} situations={situations} loading={query.isPending} />
+            <Open key={open.id} open={open} situations={situations} onEnded={() => setEnded(true)} />
+          ) : kind && Closed ? (
+            <Closed kind={kind} situations={situations} loading={query.isPending} />
           ) : (
             !query.isError && <NothingOpen known={situations !== undefined} />
           )}

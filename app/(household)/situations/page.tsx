@@ -1,9 +1,11 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
-import { SituationsScreen } from '@/components/situations/situations-screen';
+import { SituationIndexScreen } from '@/components/situations/situation-index-screen';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
+import { browserAsksAgain } from '@/lib/api/browser-asks-again';
 import { ClientMessages } from '@/lib/messages/client-messages';
+import { showSituations } from '@/lib/services/show-situations';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('situations');
@@ -11,11 +13,16 @@ export async function generateMetadata(): Promise<Metadata> {
 }
 
 export default async function SituationsPage() {
-  const { access } = await requireHousehold();
+  const visit = await requireHousehold();
+  const { access } = visit;
   const { timeZone, locale, unitSystem } = access;
+  const initial = await showSituations(visit).catch(browserAsksAgain);
   return (
     <ClientMessages namespaces={['situations', 'doses', 'units']} parts={{ house: ['visits'] }}>
-      <SituationsScreen household={{ timeZone, locale, unitSystem, mayOpen: may(access, 'open-situations') }} />
+      <SituationIndexScreen
+        household={{ timeZone, locale, unitSystem, mayOpen: may(access, 'open-situations') }}
+        initial={initial}
+      />
     </ClientMessages>
   );
 }

@@ -9,7 +9,7 @@ import { findHousehold, requireHousehold } from '@/lib/auth/page-gate';
 import { firstWeekday } from '@/lib/calendar/first-weekday';
 import { dayRange } from '@/lib/calendar/format';
 import { weekOf } from '@/lib/calendar/household-day';
-import { AppError } from '@/lib/errors';
+import { browserAsksAgain } from '@/lib/api/browser-asks-again';
 import { ClientMessages } from '@/lib/messages/client-messages';
 import { weekAskedFor, type WeekAddress } from '@/lib/schemas/week-query';
 import { showWeek } from '@/lib/services/show-week';
@@ -32,11 +32,7 @@ export default async function WeekPage({ searchParams }: Props) {
   const visit = await requireHousehold();
   const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem } = visit.access;
   const asked = weekAskedFor(await searchParams);
-  const initial = await showWeek(visit, asked).catch((problem: unknown) => {
-    // The browser asks again and says in words what is wrong.
-    if (problem instanceof AppError) return undefined;
-    throw problem;
-  });
+  const initial = await showWeek(visit, asked).catch(browserAsksAgain);
   const onPhone = userAgent({ headers: await headers() }).device.type === 'mobile';
   return (
     <ClientMessages

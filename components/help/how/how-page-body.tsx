@@ -9,7 +9,7 @@ import { ConstantGroups } from './constant-groups';
 import { EquationTerms } from './equation-terms';
 import { equations } from './equations';
 import { HowFrame } from './how-frame';
-import { LiveExample } from './live-example';
+import { LaterExample } from './later-example';
 
 /** One quantity: its equation, what it is in plain words, an example that moves, how sure it is, its constants. */
 export function HowPageBody({ page }: { page: HowPage }) {
@@ -24,7 +24,7 @@ export function HowPageBody({ page }: { page: HowPage }) {
         <Passage title={t('how')} words={t(`page.${page}.how`)} />
         <Passage title={t('sure')} words={t(`page.${page}.sure`)} />
       </div>
-      {examples[page] === undefined ? null : <LiveExample page={page} />}
+      {examples[page] === undefined ? null : <LaterExample key={page} page={page} />}
       {groups.length === 0 ? null : (
         <section aria-labelledby="constants" className="mt-6 border-t border-ink pt-3.5">
           <h2 id="constants" className="font-display text-section">

@@ -41,7 +41,8 @@ export function LiveExample({ page }: { page: HowPage }) {
       <noscript>
         <p className="mt-1 text-small text-ink-2">{t('still')}</p>
       </noscript>
-      <div className="mt-3 grid gap-x-8 gap-y-1 sm:grid-cols-2 lg:grid-cols-4">
+      {/* What is moved before React listens would jump back. */}
+      <div inert={!hydrated} className="mt-3 grid gap-x-8 gap-y-1 sm:grid-cols-2 lg:grid-cols-4">
         {example.inputs.map((input, index) => {
           const value = values[index] ?? input.start;
           return (
@@ -57,7 +58,6 @@ export function LiveExample({ page }: { page: HowPage }) {
               low={input.low}
               high={input.high}
               step={input.step}
-              off={!hydrated}
               onMove={(next) => setValues(values.map((old, at) => (at === index ? next : old)))}
             />
           );

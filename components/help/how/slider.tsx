@@ -10,15 +10,13 @@ export type SliderProps = {
   low: number;
   high: number;
   step: number;
-  /** Shown, but nobody listens yet. */
-  off: boolean;
   onMove: (value: number) => void;
 };
 
 const ticks = 8;
 
 /** A value on an engraved scale. It is the browser's own slider: arrow keys, page keys, home and end work. */
-export function Slider({ label, value, written, low, high, step, off, onMove }: SliderProps) {
+export function Slider({ label, value, written, low, high, step, onMove }: SliderProps) {
   const id = useId();
   return (
     <div className="min-w-0 py-1">
@@ -54,7 +52,6 @@ export function Slider({ label, value, written, low, high, step, off, onMove }: 
           max={high}
           step={step}
           value={value}
-          disabled={off}
           aria-valuetext={written}
           onChange={(event) => onMove(event.target.valueAsNumber)}
           className="relative h-11 w-full cursor-pointer appearance-none bg-transparent text-ink [&::-moz-range-thumb]:size-5 [&::-moz-range-thumb]:rounded-full [&::-moz-range-thumb]:border-[2px] [&::-moz-range-thumb]:border-ink [&::-moz-range-thumb]:bg-teal [&::-webkit-slider-thumb]:size-6 [&::-webkit-slider-thumb]:appearance-none [&::-webkit-slider-thumb]:rounded-full [&::-webkit-slider-thumb]:border-[2px] [&::-webkit-slider-thumb]:border-ink [&::-webkit-slider-thumb]:bg-[radial-gradient(circle,var(--teal)_0_5px,var(--paper-lift)_5.5px)]"

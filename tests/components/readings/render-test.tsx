@@ -1,11 +1,12 @@
-import { fireEvent, screen } from '@testing-library/react';
+import { fireEvent, screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
-import { vi } from 'vitest';
+import { expect, vi } from 'vitest';
 // It follows the page in a browser.
 import '@/components/readings/test-for-now';
 import { TestEntry } from '@/components/readings/test-entry';
 import type { ReadingHousehold } from '@/components/readings/reading-setting';
 import { parseInstant } from '@/lib/calendar/wall-time';
+import common from '@/lib/messages/en/common.json';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { renderWithWords } from '@/tests/support/with-words';
 import { aWeekSheet, type WeekOptions } from '@/tests/support/week-sheet';
@@ -39,7 +40,9 @@ export async function openTest(
 ) {
   const serverNow = parseInstant(sheet.now) ?? 0;
   const page = renderWithWords(<TestEntry household={{ ...household, ...change }} kind={kind} serverNow={serverNow} />);
-  await screen.findByRole('heading', { level: 1 });
+  await waitFor(() => expect(screen.queryByText(common.loading)).toBeNull());
+  // With the first touch the week is asked for.
+  fireEvent.pointerDown(document.body);
   return page;
 }
 

@@ -1,6 +1,9 @@
 import userEvent from '@testing-library/user-event';
 import { vi } from 'vitest';
-import { SituationsScreen } from '@/components/situations/situations-screen';
+// What the index fetches later is there from the start.
+import '@/components/situations/open-situation-view';
+import { SituationIndexScreen } from '@/components/situations/situation-index-screen';
+import { SituationScreen } from '@/components/situations/situation-screen';
 import type { SituationHousehold } from '@/components/situations/situation-household';
 import type { HouseNotes } from '@/lib/schemas/house-note';
 import type { SituationKind, Situations } from '@/lib/schemas/situation';
@@ -55,7 +58,11 @@ export function showSituations(
     return Response.json(await answer);
   });
   const page = renderWithWords(
-    <SituationsScreen household={{ ...household, ...changes }} {...(kind === undefined ? {} : { kind })} />,
+    kind === undefined ? (
+      <SituationIndexScreen household={{ ...household, ...changes }} initial={undefined} />
+    ) : (
+      <SituationScreen household={{ ...household, ...changes }} kind={kind} />
+    ),
   );
   return { ...page, sent, user: userEvent.setup() };
 }

@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { getTranslations } from 'next-intl/server';
-import { SituationsScreen } from '@/components/situations/situations-screen';
+import { SituationScreen } from '@/components/situations/situation-screen';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
 import { ClientMessages } from '@/lib/messages/client-messages';
@@ -22,7 +22,7 @@ export default async function SituationPage({ params }: Props) {
   const { timeZone, locale, unitSystem } = access;
   return (
     <ClientMessages namespaces={['situations', 'doses', 'units']} parts={{ house: ['visits'] }}>
-      <SituationsScreen
+      <SituationScreen
         household={{ timeZone, locale, unitSystem, mayOpen: may(access, 'open-situations') }}
         kind={kind.data}
       />
