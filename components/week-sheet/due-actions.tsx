@@ -9,6 +9,7 @@ import { untilFetched } from '@/components/ui/until-fetched';
 import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { ClaimedBy } from './claimed-by';
+import { ConfirmStop } from './confirm-stop';
 import { useSheet } from './sheet-context';
 import { SkipDose } from './skip-dose';
 import { TabletsLeft } from './tablets-left';
@@ -16,7 +17,6 @@ import { useAsksStop } from './use-asks-stop';
 import { useDosingBar } from './use-dosing-bar';
 import type { Tick } from './use-tick';
 
-const ConfirmStop = dynamic(() => untilFetched(() => import('./confirm-stop')).then((part) => part.ConfirmStop));
 const fetchOtherAmount = () => import('./other-amount');
 const OtherAmount = dynamic(() => untilFetched(() => import('./other-amount')).then((part) => part.OtherAmount), {
   ssr: false,

@@ -1,7 +1,8 @@
 import { enterAs } from '../support/enter';
 import { describePool, fullTest, sundayEvening } from '../support/households';
-import type { Journey } from '../support/journey';
+import type { Journey, Stage } from '../support/journey';
 import { Person } from '../support/person';
+import type { Server } from '../support/server';
 import { until } from '../support/waiting';
 import { words } from '../support/words';
 
@@ -43,11 +44,36 @@ export const lateCode: Journey = {
         const text = await page.locator('main').innerText();
         stage.check(`${what}: the sheet stays`, /The water is fine for swimming until/.test(text), text.slice(0, 300));
         // The words of Try it stand there before its code does; until then its controls are off.
-        const off = page.locator('fieldset:disabled').filter({ hasText: words('try-out.title') });
+        const off = page.locator('fieldset[inert]').filter({ hasText: words('try-out.title') });
         stage.equal(`${what}: Try it is not alive yet`, await off.count(), 1);
         await page.unroute(chunks);
         const alive = await until(async () => (await off.count()) === 0, { seconds: 40, every: 500 });
         stage.check(`${what}: it comes to life by itself`, alive);
       });
+    await stage.part('pressed before anybody listens', () => pressedEarly(stage, server, ines));
   },
 };
+
+/** A press on the words from the server, while the scripts are still on their way. */
+async function pressedEarly(stage: Stage, server: Server, person: Person): Promise<void> {
+  const visitor = await stage.visitor(server, 'in a hurry', { width: 390, height: 900, touch: true });
+  const { page } = visitor;
+  await enterAs(visitor, person);
+  await visitor.context.addInitScript('delete Navigator.prototype.serviceWorker');
+  let release = () => {};
+  const released = new Promise<void>((resolve) => (release = resolve));
+  await page.route(chunks, async (route) => {
+    await released;
+    await route.continue();
+  });
+  await page.goto('/week', { waitUntil: 'commit' });
+  await page
+    .getByRole('button', { name: words('doses.action.skip') })
+    .first()
+    .click();
+  const asked = page.getByText(words('doses.action.skipAsk'));
+  stage.equal('nothing happens before the code is there', await asked.isVisible(), false);
+  release();
+  await asked.waitFor();
+  stage.check('it is done when the code is there', await asked.isVisible());
+}
