@@ -6,10 +6,13 @@ import { Button } from '@/components/ui/button';
 import { DoubleRule } from '@/components/ui/double-rule';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Skeleton } from '@/components/ui/skeleton';
-import { useHydrated } from '@/components/ui/use-hydrated';
+import { fromPage } from '@/lib/client/from-page';
+import { learntOptions } from '@/lib/client/learnt';
 import { setupOptions } from '@/lib/client/pools';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { shelfOptions } from '@/lib/client/shelf-products';
+import type { HouseholdProduct } from '@/lib/schemas/household-product';
+import type { Learnt } from '@/lib/schemas/learnt';
 import type { SetupState, SetupStep } from '@/lib/schemas/pool-profile';
 import { LearntSection } from './learnt/learnt-section';
 import { PoolHeadline } from './learnt/pool-headline';
@@ -19,13 +22,26 @@ import { SavedDrawing } from './saved-drawing';
 import { type PoolHousehold, PoolSettingProvider, usePoolSetting } from './setting';
 import { useProfileRows } from './use-profile-rows';
 
+type Props = {
+  household: PoolHousehold;
+  mayForget: boolean;
+  /** What the server knew when it made the page. */
+  initial?: {
+    setup: SetupState | undefined;
+    shelf: HouseholdProduct[] | undefined;
+    learnt: Learnt | undefined;
+  };
+};
+
 /** The pool as it was described: drawn where it was measured, and each part open for correction. */
-export function PoolProfile({ household, mayForget }: { household: PoolHousehold; mayForget: boolean }) {
+export function PoolProfile({ household, mayForget, initial }: Props) {
   const t = useTranslations('first-run');
   const common = useTranslations('common');
   const words = useProblemWords();
-  const hydrated = useHydrated();
-  const setup = useQuery(setupOptions());
+  const setup = useQuery({ ...setupOptions(), ...fromPage(initial?.setup) });
+  // Those who show them below find them with the page, too.
+  useQuery({ ...shelfOptions(), ...fromPage(initial?.shelf) });
+  useQuery({ ...learntOptions(), ...fromPage(initial?.learnt) });
   if (setup.isError && setup.data === undefined)
     return (
       <ProblemState
@@ -36,8 +52,7 @@ export function PoolProfile({ household, mayForget }: { household: PoolHousehold
         {words(setup.error)}
       </ProblemState>
     );
-  if (!hydrated || setup.data === undefined)
-    return <Skeleton label={common('loading')} className="mx-margin my-8 h-72" />;
+  if (setup.data === undefined) return <Skeleton label={common('loading')} className="mx-margin my-8 h-72" />;
   return (
     <PoolSettingProvider household={household} place="profile">
       <Profile state={setup.data} mayForget={mayForget} />

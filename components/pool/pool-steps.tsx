@@ -18,7 +18,8 @@ import { ScopeStop } from './scope-stop';
 import { type PoolHousehold, type PoolPlace, PoolSettingProvider } from './setting';
 import { ShelfStep } from './shelf-step';
 import { SizeStep } from './size-step';
-import { addressOf, isOpen, stoppingStep } from './step-order';
+import { addressOf } from './step-address';
+import { isOpen, stoppingStep } from './step-order';
 import { SunStep } from './sun-step';
 import { WaterStep } from './water-step';
 

@@ -1,7 +1,7 @@
 import { Pencil } from 'lucide-react';
 import { PageLink } from '@/components/ui/page-link';
 import type { SetupStep } from '@/lib/schemas/pool-profile';
-import { addressOf } from './step-order';
+import { addressOf } from './step-address';
 
 export type ProfileRow = { name: string; value: string };
 

@@ -8,7 +8,8 @@ import { useSaveSetup } from '@/lib/client/pools';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { SetupAnswer, SetupState } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';
-import { addressOf, stepAfter, stoppingStep } from './step-order';
+import { addressOf } from './step-address';
+import { stepAfter, stoppingStep } from './step-order';
 
 /**
  * Saves a step and goes on: to the next one, from the last one to the week sheet, in the profile back to it. Where the

@@ -1,10 +1,8 @@
 'use client';
 
-import { createContext, useContext, useMemo, useState } from 'react';
-import { z } from 'zod';
+import { createContext, useContext, useMemo, useState, useSyncExternalStore } from 'react';
 import { readKept, writeKept } from '@/lib/client/device-store';
 import { useSaveUnitSystem } from '@/lib/client/pools';
-import { unitSystems } from '@/lib/schemas/week-sheet';
 import type { UnitSystem } from '@/lib/units/unit';
 
 /** Whose pool is described, and how this household writes days and figures. */
@@ -31,8 +29,7 @@ export type PoolSetting = PoolHousehold & {
 };
 
 const Setting = createContext<PoolSetting | undefined>(undefined);
-/** Chosen on this device over what the household had then: a later change of the household wins. */
-const chosenSchema = z.object({ over: z.enum(unitSystems), system: z.enum(unitSystems) });
+const never = () => () => {};
 
 export function PoolSettingProvider({
   household,
@@ -45,17 +42,21 @@ export function PoolSettingProvider({
 }) {
   const name = `wadewell.measures.${household.id}`;
   const { mutate: save } = useSaveUnitSystem();
-  const [system, setSystem] = useState(() => {
-    const chosen = readKept(name, chosenSchema);
-    return chosen?.over === household.unitSystem ? chosen.system : household.unitSystem;
-  });
+  // The server knows no device: what is kept there is taken up once React listens, and mostly it is the household's own.
+  const kept = useSyncExternalStore(
+    never,
+    () => keptSystem(name, household.unitSystem),
+    () => household.unitSystem,
+  );
+  const [chosen, setChosen] = useState<UnitSystem>();
+  const system = chosen ?? kept;
   const setting = useMemo(
     () => ({
       ...household,
       place,
       system,
       setSystem: (next: UnitSystem) => {
-        setSystem(next);
+        setChosen(next);
         writeKept(name, { over: household.unitSystem, system: next });
         save(next);
       },
@@ -63,6 +64,31 @@ export function PoolSettingProvider({
     [household, place, system, name, save],
   );
   return <Setting value={setting}>{children}</Setting>;
+}
+
+/** Chosen on this device over what the household had then: a later change of the household wins. */
+function keptSystem(name: string, own: UnitSystem): UnitSystem {
+  const chosen = readKept(name, choice);
+  return chosen?.over === own ? chosen.system : own;
+}
+
+type Choice = { over: UnitSystem; system: UnitSystem };
+
+/** By hand: the page of the pool would otherwise wait for zod. */
+const choice = {
+  safeParse: (kept: unknown) => (isChoice(kept) ? { success: true as const, data: kept } : { success: false as const }),
+};
+
+function isChoice(kept: unknown): kept is Choice {
+  return (
+    typeof kept === 'object' &&
+    kept !== null &&
+    ['over', 'system'].every((part) => isUnitSystem((kept as Record<string, unknown>)[part]))
+  );
+}
+
+function isUnitSystem(value: unknown): value is UnitSystem {
+  return value === 'metric' || value === 'us';
 }
 
 export function usePoolSetting(): PoolSetting {

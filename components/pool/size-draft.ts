@@ -1,34 +1,15 @@
-import { z } from 'zod';
-import { poolFloors, poolShapes, type PoolSizeAnswer, volumeUnits } from '@/lib/schemas/pool-size';
+import type { z } from 'zod';
+import type { PoolSizeAnswer } from '@/lib/schemas/pool-size';
 import { formatForInput } from '@/lib/units/format';
 import { parseQuantity, parseVolume } from '@/lib/units/parse';
 import { fromInside, toInside, type UnitSystem } from '@/lib/units/unit';
 import { likelyUnitMistake, type UnitQuestion, type VolumeUnit } from '@/lib/units/unit-mistake';
+import type { sizeDraftSchema } from './kept-size';
 
 /** Lengths as they are typed: metres, or feet with decimals. */
 const lengthFields = ['meanDepth', 'length', 'width', 'secondWidth', 'diameter', 'depth', 'shallow', 'deep'] as const;
 export type LengthField = (typeof lengthFields)[number];
 
-export const sizeDraftSchema = z.object({
-  how: z.enum(['entered', 'measured']),
-  volume: z.string(),
-  unit: z.enum(volumeUnits),
-  sure: z.boolean().nullable(),
-  /** The volume and unit of which somebody said "yes, that is the unit". */
-  confirmed: z.string(),
-  shape: z.enum(poolShapes),
-  floor: z.enum(poolFloors),
-  /** The measures in which the lengths below are typed. */
-  system: z.enum(['metric', 'us']),
-  meanDepth: z.string(),
-  length: z.string(),
-  width: z.string(),
-  secondWidth: z.string(),
-  diameter: z.string(),
-  depth: z.string(),
-  shallow: z.string(),
-  deep: z.string(),
-});
 export type SizeDraft = z.infer<typeof sizeDraftSchema>;
 
 export const lengthUnit = (system: UnitSystem) => (system === 'metric' ? 'm' : 'ft');

@@ -14,11 +14,14 @@ export function SizeDrawing({
   draft,
   change,
   words,
+  whenNear,
 }: {
   draft: SizeDraft;
   /** Left out where the drawing is only shown. */
   change?: (part: Partial<SizeDraft>) => void;
   words: string | undefined;
+  /** Drawn when it comes near what is seen of the page; its place is kept for it. */
+  whenNear?: boolean;
 }) {
   const t = useTranslations('pool');
   const units = useTranslations('units');
@@ -62,6 +65,7 @@ export function SizeDrawing({
       pool={pool}
       figures={figures}
       words={words}
+      whenNear={whenNear}
       label={t('drawing.label', {
         shape: t(`size.shape.${draft.shape}`),
         length: said('length'),

@@ -10,19 +10,12 @@ import { scopeOf } from '@/lib/schemas/pool-scope';
 import { formatQuantityIn } from '@/lib/units/format';
 import { EnteredSize } from './entered-size';
 import { checkAnswers, type FieldProblems, focusFirstProblem, noProblems } from './field-problems';
+import { sizeDraftSchema } from './kept-size';
 import { MeasureFields } from './measure-fields';
 import { useSaveStep } from './save-step';
 import { usePoolSetting } from './setting';
 import { FloorChoice, ShapeChoice } from './shape-choice';
-import {
-  emptySize,
-  inSystem,
-  lengthUnit,
-  sizeAnswersOf,
-  sizeDraftOf,
-  sizeDraftSchema,
-  unitQuestionOf,
-} from './size-draft';
+import { emptySize, inSystem, lengthUnit, sizeAnswersOf, sizeDraftOf, unitQuestionOf } from './size-draft';
 import { SizeDrawing } from './size-drawing';
 import { StepFrame } from './step-frame';
 import { useStepDraft } from './use-step-draft';

@@ -39,7 +39,7 @@ const bar = { height: 22, top: 6 };
 /** A bar over the hours of a day with two handles: the browser's own sliders, so that arrow keys work. */
 export function Span(props: SpanProps) {
   const { from, to, onChange, labels, write, words, midnight, step = 0.25, children, above = 0, problem } = props;
-  const [frame, width] = useWidth<HTMLDivElement>(358);
+  const [frame, width] = useWidth(358);
   const place = (hour: number) => inset + (hour / 24) * (width - 2 * inset);
   const filled =
     from <= to

@@ -8,7 +8,8 @@ import { PageLink } from '@/components/ui/page-link';
 import { ProgressRuler } from '@/components/ui/progress-ruler';
 import type { SetupStep } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';
-import { addressOf, rulerPart, rulerParts, stepBefore } from './step-order';
+import { addressOf } from './step-address';
+import { rulerPart, rulerParts, stepBefore } from './step-order';
 
 /** Where one is and the way back. */
 export function StepHeader({ step }: { step: SetupStep }) {

@@ -8,7 +8,8 @@ import { PageLink } from '@/components/ui/page-link';
 import { setupOptions } from '@/lib/client/pools';
 import { type SetupStep, setupSteps } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';
-import { addressOf, isDone, isOpen, rulerPart } from './step-order';
+import { addressOf } from './step-address';
+import { isDone, isOpen, rulerPart } from './step-order';
 
 /** The steps down the left side of a desk; those already answered can be opened again. */
 export function StepList({ step }: { step: SetupStep }) {

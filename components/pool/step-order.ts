@@ -1,9 +1,4 @@
 import { type SetupState, type SetupStep, setupSteps } from '@/lib/schemas/pool-profile';
-import type { PoolPlace } from './setting';
-
-export function addressOf(step: SetupStep, place: PoolPlace): string {
-  return place === 'profile' ? `/pool/${step}` : `/first-run/${step}`;
-}
 
 /** Figure on the ruler: the scope questions come before it, and the label belongs to the fifth step. */
 export const rulerPart: Record<SetupStep, number> = {

@@ -25,7 +25,7 @@ export function VolumeComparison({
   likelyFigure: string;
   toScale: string;
 }) {
-  const [frame, width] = useWidth<HTMLDivElement>(320);
+  const [frame, width] = useWidth(320);
   const figureRoom = 84;
   const gap = 10;
   const olympic = Math.round(typed / olympicPool.volume);

@@ -2,7 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { NumberTextField } from '@/components/ui/number-text-field';
-import { GAUGE } from '@/lib/schemas/round';
+import { GAUGE } from '@/lib/schemas/round-items';
 import { type PressureText, pressureUnit, readPressures, writePressure } from './pressures';
 import type { RoundHousehold } from './round-household';
 

@@ -1,4 +1,4 @@
-import { GAUGE } from '@/lib/schemas/round';
+import { GAUGE } from '@/lib/schemas/round-items';
 import { formatQuantity } from '@/lib/units/format';
 import { parseQuantity } from '@/lib/units/parse';
 import { fromInside, toInside, type UnitSystem } from '@/lib/units/unit';

@@ -19,8 +19,10 @@ import { emergencyCard } from '@/components/navigation/places';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
 import { classNames } from '@/components/ui/class-names';
+import { UNHEARD } from '@/components/ui/early-presses';
 import { PageLink } from '@/components/ui/page-link';
-import type { RoundItem } from '@/lib/schemas/round';
+import { useEarlyPress } from '@/components/ui/use-early-press';
+import type { RoundItem } from '@/lib/schemas/round-items';
 import { filterPressureRise } from '@/lib/standards/filter';
 import { BucketTest } from './bucket-test';
 import { writePressure } from './pressures';
@@ -59,6 +61,7 @@ export function RoundRow({ item, off, onToggle, household, cleanPressure, childr
   const t = useTranslations('rounds');
   const common = useTranslations('common');
   const navigation = useTranslations('navigation');
+  const pressed = useEarlyPress(undefined);
   const Icon = icons[item];
   const pressure = (bar: number) => writePressure(bar, household.unitSystem, household.locale);
   const fine =
@@ -83,6 +86,8 @@ export function RoundRow({ item, off, onToggle, household, cleanPressure, childr
           {!off && <span className="block text-small text-ink-2">{fine}</span>}
         </p>
         <button
+          {...{ [UNHEARD]: '' }}
+          ref={pressed}
           type="button"
           aria-pressed={off}
           aria-label={t(off ? 'fineAfterAllOf' : 'notFineOf', { name: t(`item.${item}.name`) })}

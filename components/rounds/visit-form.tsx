@@ -2,15 +2,18 @@
 
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
-import { checkAnswers, type FieldProblems, noProblems } from '@/components/pool/field-problems';
+import { type FieldProblems, noProblems } from '@/components/pool/field-problems';
 import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/text-field';
+import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import { dayOf } from '@/lib/calendar/household-day';
 import { RequestProblem } from '@/lib/client/fetch-json';
 import { useRecordVisit } from '@/lib/client/visits';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
-import { newVisitSchema } from '@/lib/schemas/visit';
 import type { RoundHousehold } from './round-household';
+
+/** What is typed is checked when it is kept: what does that comes after the page. */
+const fetchCheck = () => import('./check-visit');
 
 type Props = { household: RoundHousehold; serverNow: number };
 
@@ -30,10 +33,16 @@ export function VisitForm({ household: { timeZone, mayKeepHouseNotes }, serverNo
     record.reset();
   };
   const refused = record.error instanceof RequestProblem ? record.error : undefined;
-  const send = () => {
+  useIdleFetch(fetchCheck);
+  const send = async () => {
     if (record.isPending) return;
     const { note, ...rest } = draft;
-    const checked = checkAnswers(newVisitSchema, note.trim() === '' ? rest : draft);
+    const visit = note.trim() === '' ? rest : draft;
+    // Where it cannot be fetched nothing can be sent either, and that is then what is said.
+    const checked = await fetchCheck().then(
+      ({ checkVisit }) => checkVisit(visit),
+      () => ({ answers: visit, problems: noProblems }),
+    );
     setProblems(checked.problems);
     if (checked.answers) record.mutate(checked.answers, { onSuccess: () => setDraft(blank()) });
   };
@@ -43,7 +52,7 @@ export function VisitForm({ household: { timeZone, mayKeepHouseNotes }, serverNo
       className="grid gap-3"
       onSubmit={(event) => {
         event.preventDefault();
-        send();
+        void send();
       }}
     >
       <TextField

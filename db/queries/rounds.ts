@@ -2,7 +2,7 @@ import 'server-only';
 import { and, desc, eq, isNotNull } from 'drizzle-orm';
 import type { DatabaseOrTransaction, Transaction } from '@/db/client';
 import { people, rounds } from '@/db/schema';
-import type { RoundItem } from '@/lib/schemas/round';
+import type { RoundItem } from '@/lib/schemas/round-items';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 
 type NewRow = Omit<typeof rounds.$inferInsert, 'householdId'> & { householdId: ProvenHouseholdId };

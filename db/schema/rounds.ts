@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
 import { check, index, integer, real, sqliteTable, text } from 'drizzle-orm/sqlite-core';
-import { GAUGE, type RoundItem } from '@/lib/schemas/round';
+import { GAUGE, type RoundItem } from '@/lib/schemas/round-items';
 import { between } from './checks';
 import { households } from './households';
 import { people } from './people';

@@ -1,23 +1,7 @@
 import { z } from 'zod';
+import { GAUGE, roundItems } from './round-items';
 import { instantSchema } from './time';
 
-/** What a ten-minute round looks at, in the order of a walk round the pool. */
-export const roundItems = [
-  'baskets',
-  'water-level',
-  'filter-pressure',
-  'brushed',
-  'pump-seal',
-  'feeder-lid',
-  'drain-cover',
-  'gate-latch',
-  'ladder',
-  'lockers',
-] as const;
-export type RoundItem = (typeof roundItems)[number];
-
-/** What a gauge on a filter can show [bar]. */
-export const GAUGE = [0, 6] as const;
 const outside = `A gauge shows ${GAUGE[0]} to ${GAUGE[1]} bar.`;
 const pressureSchema = z.number().min(GAUGE[0], outside).max(GAUGE[1], outside);
 

@@ -3,20 +3,32 @@ import { getTranslations } from 'next-intl/server';
 import { PoolProfile } from '@/components/pool/pool-profile';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
+import { forPage } from '@/lib/services/for-page';
+import { listShelfProducts } from '@/lib/services/list-shelf-products';
+import { readPool } from '@/lib/services/read-pool';
+import { showLearnt } from '@/lib/services/show-learnt';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('pool');
   return { title: t('profile.title') };
 }
 
+/** What is known of the pool comes with the page. */
 export default async function PoolPage() {
-  const { access } = await requireHousehold();
+  const visit = await requireHousehold();
+  const { access } = visit;
   const { householdId, householdName, timeZone, locale, unitSystem, personName } = access;
   const household = { id: householdId, name: householdName, timeZone, locale, unitSystem, personName };
+  const [setup, shelf, learnt] = await Promise.all([
+    forPage(readPool(visit)),
+    forPage(listShelfProducts(visit)),
+    forPage(showLearnt(visit)),
+  ]);
   return (
     <PoolProfile
       household={{ ...household, mayChange: may(access, 'change-pool') }}
       mayForget={may(access, 'reset-learning')}
+      initial={{ setup, shelf, learnt }}
     />
   );
 }

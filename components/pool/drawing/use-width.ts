@@ -1,21 +1,50 @@
 'use client';
 
-import { useLayoutEffect, useRef, useState } from 'react';
+import { useCallback, useState } from 'react';
 
-/** Width of an element [px], so that a drawing is made for the room there is and its words keep their size. */
-export function useWidth<Element extends HTMLElement>(
+/** How far below the screen a drawing is made before it is scrolled to [px]. */
+const NEAR = '600px';
+
+/**
+ * Width of an element [px], so that a drawing is made for the room there is and its words keep their size. Give the returned
+ * function to the element as its ref.
+ *
+ * @param whenNear whether it stays 0 until the element comes near what is seen of the page: its place has to be kept then
+ */
+export function useWidth(
   initial: number,
-): [reference: React.RefObject<Element | null>, width: number] {
-  const reference = useRef<Element>(null);
-  const [width, setWidth] = useState(initial);
-  useLayoutEffect(() => {
-    const element = reference.current;
-    if (!element || typeof ResizeObserver === 'undefined') return;
-    const observer = new ResizeObserver(([entry]) => {
-      if (entry && entry.contentRect.width > 0) setWidth(Math.floor(entry.contentRect.width));
-    });
-    observer.observe(element);
-    return () => observer.disconnect();
-  }, []);
-  return [reference, width];
+  { whenNear = false }: { whenNear?: boolean | undefined } = {},
+): [ref: (element: HTMLElement | null) => (() => void) | undefined, width: number] {
+  const [width, setWidth] = useState(whenNear ? 0 : initial);
+  const ref = useCallback(
+    (element: HTMLElement | null) => {
+      if (element === null) return undefined;
+      if (typeof ResizeObserver === 'undefined') {
+        setWidth(initial);
+        return undefined;
+      }
+      const resized = new ResizeObserver(([entry]) => {
+        if (entry && entry.contentRect.width > 0) setWidth(Math.floor(entry.contentRect.width));
+      });
+      if (!whenNear) {
+        resized.observe(element);
+        return () => resized.disconnect();
+      }
+      const seen = new IntersectionObserver(
+        (entries) => {
+          if (!entries.some(({ isIntersecting }) => isIntersecting)) return;
+          seen.disconnect();
+          resized.observe(element);
+        },
+        { rootMargin: NEAR },
+      );
+      seen.observe(element);
+      return () => {
+        seen.disconnect();
+        resized.disconnect();
+      };
+    },
+    [initial, whenNear],
+  );
+  return [ref, width];
 }

@@ -23,8 +23,24 @@ export type LearntBarsProps = {
 };
 
 /** What was assumed, dotted and hollow, above what was learnt, on one axis; a tick in each at its middle. */
-export function LearntBars({ before, learnt, beforeWords, learntWords, tick, lastTick }: LearntBarsProps) {
-  const [frame, width] = useWidth<HTMLDivElement>(520);
+export function LearntBars(props: LearntBarsProps) {
+  const [frame, width] = useWidth(520, { whenNear: true });
+  return (
+    <div ref={frame} className="min-h-26 w-full">
+      {width > 0 && <Bars {...props} width={width} />}
+    </div>
+  );
+}
+
+function Bars({
+  before,
+  learnt,
+  beforeWords,
+  learntWords,
+  tick,
+  lastTick,
+  width,
+}: LearntBarsProps & { width: number }) {
   const axis = barAxis(before, learnt);
   const along = (value: number) =>
     MARGIN.left + ((value - axis.from) / (axis.to - axis.from)) * (width - MARGIN.left - MARGIN.right);
@@ -37,51 +53,49 @@ export function LearntBars({ before, learnt, beforeWords, learntWords, tick, las
   const line = below + BAR + 15;
   const link = [top + BAR + 4, below - 4] as const;
   return (
-    <div ref={frame} className="w-full">
-      <svg
-        width={width}
-        height={px(line + 26)}
-        viewBox={`0 0 ${width} ${px(line + 26)}`}
-        aria-hidden="true"
-        className="block"
+    <svg
+      width={width}
+      height={px(line + 26)}
+      viewBox={`0 0 ${width} ${px(line + 26)}`}
+      aria-hidden="true"
+      className="block"
+    >
+      <path
+        d={`M${px(upper.middle)} ${link[0]}C${px(upper.middle)} ${link[0] + 7} ${px(lower.middle)} ${link[1] - 7} ${px(lower.middle)} ${link[1]}`}
+        className="fill-none stroke-ink"
+        strokeDasharray="1 3"
+        strokeLinecap="round"
+      />
+      <rect
+        x={px(upper.from)}
+        y={top}
+        width={px(upper.to - upper.from)}
+        height={BAR}
+        className="fill-none stroke-ink"
+        strokeWidth="1.2"
+        strokeDasharray="2 2.5"
+      />
+      <path d={`M${px(upper.middle)} ${top - 3}v${BAR + 6}`} className="fill-none stroke-ink" strokeWidth="1.4" />
+      <rect x={px(lower.from)} y={below} width={px(lower.to - lower.from)} height={BAR} className="fill-band" />
+      <path
+        d={`M${px(lower.from)} ${below - 1}v${BAR + 2}M${px(lower.to)} ${below - 1}v${BAR + 2}`}
+        className="fill-none stroke-teal"
+        strokeWidth="1.6"
+      />
+      <path d={`M${px(lower.middle)} ${below - 4}v${BAR + 8}`} className="fill-none stroke-teal" strokeWidth="2.6" />
+      <DrawingText
+        weight="plain"
+        x={px(beforePlace.x)}
+        y={beforePlace.above ? top - 8 : top + 11}
+        anchor={beforePlace.anchor}
       >
-        <path
-          d={`M${px(upper.middle)} ${link[0]}C${px(upper.middle)} ${link[0] + 7} ${px(lower.middle)} ${link[1] - 7} ${px(lower.middle)} ${link[1]}`}
-          className="fill-none stroke-ink"
-          strokeDasharray="1 3"
-          strokeLinecap="round"
-        />
-        <rect
-          x={px(upper.from)}
-          y={top}
-          width={px(upper.to - upper.from)}
-          height={BAR}
-          className="fill-none stroke-ink"
-          strokeWidth="1.2"
-          strokeDasharray="2 2.5"
-        />
-        <path d={`M${px(upper.middle)} ${top - 3}v${BAR + 6}`} className="fill-none stroke-ink" strokeWidth="1.4" />
-        <rect x={px(lower.from)} y={below} width={px(lower.to - lower.from)} height={BAR} className="fill-band" />
-        <path
-          d={`M${px(lower.from)} ${below - 1}v${BAR + 2}M${px(lower.to)} ${below - 1}v${BAR + 2}`}
-          className="fill-none stroke-teal"
-          strokeWidth="1.6"
-        />
-        <path d={`M${px(lower.middle)} ${below - 4}v${BAR + 8}`} className="fill-none stroke-teal" strokeWidth="2.6" />
-        <DrawingText
-          weight="plain"
-          x={px(beforePlace.x)}
-          y={beforePlace.above ? top - 8 : top + 11}
-          anchor={beforePlace.anchor}
-        >
-          {beforeWords}
-        </DrawingText>
-        <DrawingText x={px(learntPlace.x)} y={learntPlace.above ? below - 8 : below + 11} anchor={learntPlace.anchor}>
-          {learntWords}
-        </DrawingText>
-        <Axis {...{ axis, along, line, width, tick, lastTick }} />
-      </svg>
-    </div>
+        {beforeWords}
+      </DrawingText>
+      <DrawingText x={px(learntPlace.x)} y={learntPlace.above ? below - 8 : below + 11} anchor={learntPlace.anchor}>
+        {learntWords}
+      </DrawingText>
+      <Axis {...{ axis, along, line, width, tick, lastTick }} />
+    </svg>
   );
 }
 

@@ -2,7 +2,8 @@ import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import { RoundScreen } from '@/components/rounds/round-screen';
 import words from '@/lib/messages/en/rounds.json';
-import { type Rounds, roundItems } from '@/lib/schemas/round';
+import type { Rounds } from '@/lib/schemas/round';
+import { roundItems } from '@/lib/schemas/round-items';
 import { renderWithWords } from '../../support/with-words';
 
 afterEach(() => vi.unstubAllGlobals());

@@ -89,7 +89,7 @@ describe('the professional on the round', () => {
     const note = section.getByLabelText('What was done');
     fireEvent.change(note, { target: { value: 'x'.repeat(501) } });
     fireEvent.click(section.getByRole('button', { name: 'Keep the visit' }));
-    expect(section.getByText('Keep the note to 500 characters.')).toBeInTheDocument();
+    expect(await section.findByText('Keep the note to 500 characters.')).toBeInTheDocument();
     expect(sent).toEqual([]);
     fireEvent.change(note, { target: { value: 'Pump seal' } });
     for (const times of [1, 2]) {
