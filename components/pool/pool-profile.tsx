@@ -2,6 +2,7 @@
 
 import { useQuery } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
+import { Activity } from 'react';
 import { Button } from '@/components/ui/button';
 import { DoubleRule } from '@/components/ui/double-rule';
 import { ProblemState } from '@/components/ui/problem-state';
@@ -13,14 +14,14 @@ import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { shelfOptions } from '@/lib/client/shelf-products';
 import type { HouseholdProduct } from '@/lib/schemas/household-product';
 import type { Learnt } from '@/lib/schemas/learnt';
-import type { SetupState, SetupStep } from '@/lib/schemas/pool-profile';
+import type { PoolProfile as Described, SetupState } from '@/lib/schemas/pool-profile';
 import { LearntSection } from './learnt/learnt-section';
 import { PoolHeadline } from './learnt/pool-headline';
 import { StillGuesses } from './learnt/still-guesses';
 import { ProfileRows } from './profile-rows';
 import { SavedDrawing } from './saved-drawing';
 import { type PoolHousehold, PoolSettingProvider, usePoolSetting } from './setting';
-import { useProfileRows } from './use-profile-rows';
+import { type ProfilePart, useEquipmentRows, usePoolRows } from './use-profile-rows';
 
 type Props = {
   household: PoolHousehold;
@@ -60,23 +61,16 @@ export function PoolProfile({ household, mayForget, initial }: Props) {
   );
 }
 
+/** Only laid out when a phone is scrolled towards it; as wide as the page, for what sticks out of it is cut off. */
+const further =
+  'max-lg:-mx-margin max-lg:px-margin max-lg:[content-visibility:auto] max-lg:[contain-intrinsic-height:auto_52rem]';
+
+/** Part by part, each in a turn of its own, so that a phone is never busy for long. */
 function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }) {
   const t = useTranslations('pool');
-  const { mayChange } = usePoolSetting();
-  const { data: shelf = [] } = useQuery(shelfOptions());
-  const { profile } = state;
-  const parts = useProfileRows({ profile, shelf });
+  const { profile, completed } = state;
   const drawing = profile.size?.how === 'measured' ? profile.size : undefined;
   const how = drawing === undefined ? 'entered' : 'drew';
-  const part = ({ step, rows }: (typeof parts)[number]) => (
-    <ProfileRows
-      key={step}
-      step={step}
-      title={t(`profile.part.${step}`)}
-      rows={rows}
-      change={mayChange ? t('profile.change') : undefined}
-    />
-  );
   return (
     <div className="mx-auto max-w-sheet pb-8">
       <div className="px-margin pt-3 pb-3.5 md:border-t md:border-rule">
@@ -91,13 +85,23 @@ function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }
             <SavedDrawing size={drawing} />
           )}
           <div className="grid gap-x-7.5 border-t border-rule sm:grid-cols-2 sm:*:border-t-0">
-            {parts.filter(isWide).map(part)}
+            <Activity>
+              <Equipment profile={profile} />
+            </Activity>
           </div>
-          {state.completed ? <LearntSection how={how} mayForget={mayForget} /> : null}
+          {completed ? (
+            <Activity>
+              <LearntSection how={how} mayForget={mayForget} />
+            </Activity>
+          ) : null}
         </div>
-        <div className="min-w-0 border-t border-rule lg:border-t-0">
-          {parts.filter((one) => !isWide(one)).map(part)}
-          {state.completed ? <StillGuesses /> : null}
+        <div className={further}>
+          <div className="min-w-0 border-t border-rule lg:border-t-0">
+            <Activity>
+              <Pool profile={profile} />
+              {completed ? <StillGuesses /> : null}
+            </Activity>
+          </div>
         </div>
       </div>
     </div>
@@ -105,6 +109,25 @@ function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }
 }
 
 /** Stands below the drawing, where there is room for two columns. */
-function isWide({ step }: { step: SetupStep }): boolean {
-  return step === 'water' || step === 'shelf';
+function Equipment({ profile }: { profile: Described }) {
+  const { data: shelf = [] } = useQuery(shelfOptions());
+  return <Parts parts={useEquipmentRows({ profile, shelf })} />;
+}
+
+function Pool({ profile }: { profile: Described }) {
+  return <Parts parts={usePoolRows({ profile })} />;
+}
+
+function Parts({ parts }: { parts: readonly ProfilePart[] }) {
+  const t = useTranslations('pool');
+  const { mayChange } = usePoolSetting();
+  return parts.map(({ step, rows }) => (
+    <ProfileRows
+      key={step}
+      step={step}
+      title={t(`profile.part.${step}`)}
+      rows={rows}
+      change={mayChange ? t('profile.change') : undefined}
+    />
+  ));
 }

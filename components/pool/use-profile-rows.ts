@@ -11,14 +11,33 @@ import { usePoolSetting } from './setting';
 import { lengthUnit } from './size-draft';
 import { useVolumeWords } from './volume-words';
 
-type Profile = { profile: PoolProfile; shelf: readonly HouseholdProduct[] };
+export type ProfilePart = { step: SetupStep; rows: ProfileRow[] };
 
-/** Everything that is known of the pool, part by part, as it is read. */
-export function useProfileRows({ profile, shelf }: Profile): { step: SetupStep; rows: ProfileRow[] }[] {
+/** What is known of the water, its equipment and what stands on the shelf, as it is read. */
+export function useEquipmentRows({
+  profile: { water },
+  shelf,
+}: {
+  profile: Pick<PoolProfile, 'water'>;
+  shelf: readonly HouseholdProduct[];
+}): ProfilePart[] {
+  const products = useProductWords();
+  return [
+    { step: 'water', rows: useWaterRows(water) },
+    {
+      step: 'shelf',
+      rows: shelf.map((product) => ({
+        name: products.left(product),
+        value: [products.name(product), products.detail(product)].join(', '),
+      })),
+    },
+  ];
+}
+
+/** Everything else that is known of the pool, part by part. */
+export function usePoolRows({ profile }: { profile: PoolProfile }): ProfilePart[] {
   const t = useTranslations('pool');
   const { locale } = usePoolSetting();
-  const water = useWaterRows(profile);
-  const products = useProductWords();
   const { scope, lining, sun, label, swimLimitSetBy } = profile;
   const size = useSizeRows(profile);
   const row = (name: Parameters<typeof t>[0], value: string | undefined): ProfileRow[] =>
@@ -56,14 +75,6 @@ export function useProfileRows({ profile, shelf }: Profile): { step: SetupStep; 
             ...row('profile.row.cover', t(`sun.cover.${sun.cover}`)),
           ]
         : [],
-    },
-    { step: 'water', rows: water },
-    {
-      step: 'shelf',
-      rows: shelf.map((product) => ({
-        name: products.left(product),
-        value: [products.name(product), products.detail(product)].join(', '),
-      })),
     },
     {
       step: 'label',
@@ -111,7 +122,7 @@ function useSizeRows({ size, volume, meanDepth, volumeEstimated }: PoolProfile):
   ];
 }
 
-function useWaterRows({ water }: PoolProfile): ProfileRow[] {
+function useWaterRows(water: PoolProfile['water']): ProfileRow[] {
   const t = useTranslations('pool');
   const names = useTranslations('pool.ingredient');
   const units = useTranslations('units');

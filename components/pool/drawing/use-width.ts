@@ -1,6 +1,6 @@
 'use client';
 
-import { useCallback, useState } from 'react';
+import { startTransition, useCallback, useState } from 'react';
 
 /** How far below the screen a drawing is made before it is scrolled to [px]. */
 const NEAR = '600px';
@@ -24,7 +24,11 @@ export function useWidth(
         return undefined;
       }
       const resized = new ResizeObserver(([entry]) => {
-        if (entry && entry.contentRect.width > 0) setWidth(Math.floor(entry.contentRect.width));
+        if (!entry || entry.contentRect.width <= 0) return;
+        const measured = Math.floor(entry.contentRect.width);
+        // Several drawings come near at once: a phone draws one after the other.
+        if (whenNear) startTransition(() => setWidth(measured));
+        else setWidth(measured);
       });
       if (!whenNear) {
         resized.observe(element);

@@ -2,6 +2,7 @@
 
 import { useQuery } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
+import { Activity } from 'react';
 import { Button } from '@/components/ui/button';
 import { Disclosure } from '@/components/ui/disclosure';
 import { PictureOrTable } from '@/components/ui/picture-or-table';
@@ -81,13 +82,17 @@ function Taught({ learnt, how, mayForget }: { learnt: Learnt; how: SizeKnown; ma
         picture={
           <>
             {main.map((row) => (
-              <LearntRow key={row.thing} row={row} learnt={learnt} words={words} />
+              <Activity key={row.thing}>
+                <LearntRow row={row} learnt={learnt} words={words} />
+              </Activity>
             ))}
             {more.length === 0 ? null : (
               <Disclosure summary={<span className="font-display text-name">{t('more')}</span>}>
-                {more.map((row) => (
-                  <LearntRow key={row.thing} row={row} learnt={learnt} words={words} />
-                ))}
+                <Activity>
+                  {more.map((row) => (
+                    <LearntRow key={row.thing} row={row} learnt={learnt} words={words} />
+                  ))}
+                </Activity>
               </Disclosure>
             )}
           </>

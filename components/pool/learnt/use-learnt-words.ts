@@ -1,5 +1,5 @@
 import { useTranslations } from 'next-intl';
-import { type Learnt, type LearntRow, type LearntThing } from '@/lib/schemas/learnt';
+import type { Learnt, LearntRow, LearntThing } from '@/lib/schemas/learnt';
 import { formatNumber, formatQuantity } from '@/lib/units/format';
 import { usePoolSetting } from '../setting';
 import { useVolumeWords } from '../volume-words';
