@@ -74,7 +74,9 @@ function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }
   return (
     <div className="mx-auto max-w-sheet pb-8">
       <div className="px-margin pt-3 pb-3.5 md:border-t md:border-rule">
-        <PoolHeadline volume={profile.volume} how={how} />
+        <Activity>
+          <PoolHeadline volume={profile.volume} how={how} />
+        </Activity>
       </div>
       <DoubleRule className="mx-margin" />
       <div className="grid gap-x-7.5 px-margin pt-2 lg:grid-cols-[minmax(0,1fr)_420px]">
@@ -82,7 +84,9 @@ function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }
           {drawing === undefined ? (
             <p className="mb-4 border border-dashed border-rule-2 p-6 text-body text-ink-2">{t('profile.notDrawn')}</p>
           ) : (
-            <SavedDrawing size={drawing} />
+            <Activity>
+              <SavedDrawing size={drawing} />
+            </Activity>
           )}
           <div className="grid gap-x-7.5 border-t border-rule sm:grid-cols-2 sm:*:border-t-0">
             <Activity>

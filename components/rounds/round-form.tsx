@@ -2,7 +2,7 @@
 
 import { Check } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import { useState } from 'react';
+import { Activity, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
 import { Disclosure } from '@/components/ui/disclosure';
@@ -25,7 +25,6 @@ export function RoundForm({ household, serverNow, known }: Props) {
   const t = useTranslations('rounds');
   const problemWords = useProblemWords();
   const record = useRecordRound();
-  const times = roundTimes(household);
   const [exceptions, setExceptions] = useState<readonly RoundItem[]>([]);
   const [pressure, setPressure] = useState<PressureText>({ now: '', clean: '' });
   const [missing, setMissing] = useState(false);
@@ -53,7 +52,7 @@ export function RoundForm({ household, serverNow, known }: Props) {
   if (record.isSuccess)
     return (
       <div className="mx-auto max-w-form px-margin py-6">
-        <RoundHead when={times.full(serverNow)} name={household.personName} />
+        <RoundHead household={household} serverNow={serverNow} />
         <p role="status" className="mt-5 font-display text-verdict">
           {t('kept')}
         </p>
@@ -70,30 +69,32 @@ export function RoundForm({ household, serverNow, known }: Props) {
         send();
       }}
     >
-      <RoundHead when={times.full(serverNow)} name={household.personName} />
+      <RoundHead household={household} serverNow={serverNow} />
       <h1 className="mt-4 font-display text-verdict">{t('headline', { count: exceptions.length })}</h1>
       <p className="mt-1 text-body text-ink-2">{t(exceptions.length === 0 ? 'lead' : 'leadExceptions')}</p>
       <ul className="mt-3.5">
-        {roundItems.map((item) => (
-          <RoundRow
-            key={item}
-            item={item}
-            off={exceptions.includes(item)}
-            onToggle={() => toggle(item)}
-            household={household}
-            cleanPressure={known.cleanPressure}
-          >
-            {item === 'filter-pressure' && (
-              <PressureField
-                part="now"
-                pressure={pressure}
-                onChange={setPressure}
-                problem={missing && !read}
-                household={household}
-              />
-            )}
-          </RoundRow>
-        ))}
+        <Activity>
+          {roundItems.map((item) => (
+            <RoundRow
+              key={item}
+              item={item}
+              off={exceptions.includes(item)}
+              onToggle={() => toggle(item)}
+              household={household}
+              cleanPressure={known.cleanPressure}
+            >
+              {item === 'filter-pressure' && (
+                <PressureField
+                  part="now"
+                  pressure={pressure}
+                  onChange={setPressure}
+                  problem={missing && !read}
+                  household={household}
+                />
+              )}
+            </RoundRow>
+          ))}
+        </Activity>
       </ul>
       <Disclosure summary={<span className="text-small">{t('writeClean')}</span>}>
         <PressureField
@@ -115,7 +116,7 @@ export function RoundForm({ household, serverNow, known }: Props) {
             <span>{t('firstRound')}</span>
           ) : (
             <>
-              <span>{t('lastRound', { when: times.day(Date.parse(known.last.doneAt)) })}</span>
+              <span>{t('lastRound', { when: roundTimes(household).day(Date.parse(known.last.doneAt)) })}</span>
               <span>
                 {t(known.last.exceptions.length === 0 ? 'lastFine' : 'lastExceptions', {
                   count: known.last.exceptions.length,

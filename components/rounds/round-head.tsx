@@ -4,10 +4,13 @@ import { X } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { DoubleRule } from '@/components/ui/double-rule';
 import { PageLink } from '@/components/ui/page-link';
+import type { RoundHousehold } from './round-household';
+import { roundTimes } from './round-times';
 
 /** What this is, when, and who is walking. The way back is on the left. */
-export function RoundHead({ when, name }: { when: string; name: string }) {
+export function RoundHead({ household, serverNow }: { household: RoundHousehold; serverNow: number }) {
   const t = useTranslations('rounds');
+  const when = roundTimes(household).full(serverNow);
   return (
     <header>
       <div className="flex items-center gap-3 py-2">
@@ -20,7 +23,7 @@ export function RoundHead({ when, name }: { when: string; name: string }) {
         </PageLink>
         <div className="min-w-0">
           <p className="font-display text-section">{t('title')}</p>
-          <p className="text-small text-ink-2">{t('asWhom', { when, name })}</p>
+          <p className="text-small text-ink-2">{t('asWhom', { when, name: household.personName })}</p>
         </div>
       </div>
       <DoubleRule />

@@ -34,9 +34,12 @@ export function RoundScreen({ household, serverNow, initial }: Props) {
   useQuery({ ...visitsOptions(), ...fromPage(initial?.visits) });
   useQuery({ ...houseNotesOptions(), ...fromPage(initial?.houseNotes) });
   if (isPending) return <Skeleton label={t('loading')} className="mx-auto mt-6 h-96 max-w-form" />;
+  // Each comes to life in a turn of its own, so that a phone is never busy for long.
   return (
     <>
-      <RoundForm household={household} serverNow={serverNow} known={data ?? { last: null, cleanPressure: null }} />
+      <Activity>
+        <RoundForm household={household} serverNow={serverNow} known={data ?? { last: null, cleanPressure: null }} />
+      </Activity>
       <Activity>
         <Visits household={household} serverNow={serverNow} />
       </Activity>

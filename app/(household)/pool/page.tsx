@@ -3,6 +3,7 @@ import { getTranslations } from 'next-intl/server';
 import { PoolProfile } from '@/components/pool/pool-profile';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
+import { ClientMessages } from '@/lib/messages/client-messages';
 import { forPage } from '@/lib/services/for-page';
 import { listShelfProducts } from '@/lib/services/list-shelf-products';
 import { readPool } from '@/lib/services/read-pool';
@@ -12,6 +13,9 @@ export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('pool');
   return { title: t('profile.title') };
 }
+
+/** The words of a pool that is described; those of the questions come with the steps. */
+const described = ['profile', 'scope', 'size', 'drawing', 'lining', 'sun', 'water', 'ingredient', 'product'];
 
 /** What is known of the pool comes with the page. */
 export default async function PoolPage() {
@@ -25,10 +29,12 @@ export default async function PoolPage() {
     forPage(showLearnt(visit)),
   ]);
   return (
-    <PoolProfile
-      household={{ ...household, mayChange: may(access, 'change-pool') }}
-      mayForget={may(access, 'reset-learning')}
-      initial={{ setup, shelf, learnt }}
-    />
+    <ClientMessages namespaces={['learnt', 'units']} parts={{ 'first-run': ['notLoaded'], pool: described }}>
+      <PoolProfile
+        household={{ ...household, mayChange: may(access, 'change-pool') }}
+        mayForget={may(access, 'reset-learning')}
+        initial={{ setup, shelf, learnt }}
+      />
+    </ClientMessages>
   );
 }

@@ -25,7 +25,7 @@ export default async function RoundsPage() {
     forPage(showHouseNotes(visit)),
   ]);
   return (
-    <ClientMessages namespaces={['rounds', 'house', 'units']}>
+    <ClientMessages namespaces={['rounds', 'units']} parts={{ house: ['visits'] }}>
       <RoundScreen
         household={{
           ...{ timeZone, locale, unitSystem, personName },

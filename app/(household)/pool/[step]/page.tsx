@@ -5,6 +5,7 @@ import { PoolSteps } from '@/components/pool/pool-steps';
 import { stepNamed } from '@/components/pool/step-order';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
+import { ClientMessages } from '@/lib/messages/client-messages';
 
 type Props = { params: Promise<{ step: string }> };
 
@@ -21,11 +22,13 @@ export default async function PoolStepPage({ params }: Props) {
   const { householdId, householdName, timeZone, locale, unitSystem, personName } = access;
   const household = { id: householdId, name: householdName, timeZone, locale, unitSystem, personName };
   return (
-    <PoolSteps
-      key={step}
-      household={{ ...household, mayChange: may(access, 'change-pool') }}
-      place="profile"
-      step={step}
-    />
+    <ClientMessages namespaces={['first-run', 'pool', 'units']}>
+      <PoolSteps
+        key={step}
+        household={{ ...household, mayChange: may(access, 'change-pool') }}
+        place="profile"
+        step={step}
+      />
+    </ClientMessages>
   );
 }
