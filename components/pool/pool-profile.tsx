@@ -63,7 +63,7 @@ export function PoolProfile({ household, mayForget, initial }: Props) {
 
 /** Only laid out when a phone is scrolled towards it; as wide as the page, for what sticks out of it is cut off. */
 const further =
-  'max-lg:-mx-margin max-lg:px-margin max-lg:[content-visibility:auto] max-lg:[contain-intrinsic-height:auto_52rem]';
+  'min-w-0 max-lg:-mx-margin max-lg:px-margin max-lg:[content-visibility:auto] max-lg:[contain-intrinsic-height:auto_63rem]';
 
 /** Part by part, each in a turn of its own, so that a phone is never busy for long. */
 function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }) {
@@ -100,7 +100,7 @@ function Profile({ state, mayForget }: { state: SetupState; mayForget: boolean }
           ) : null}
         </div>
         <div className={further}>
-          <div className="min-w-0 border-t border-rule lg:border-t-0">
+          <div className="border-t border-rule lg:border-t-0">
             <Activity>
               <Pool profile={profile} />
               {completed ? <StillGuesses /> : null}

@@ -26,7 +26,6 @@ export function ProfileRows({
           <PageLink
             href={addressOf(step, 'profile')}
             // Seldom gone: not worth the first seconds of a phone.
-            prefetch={false}
             aria-label={[change, title].join(', ')}
             className="inline-flex min-h-11 items-center gap-1.5 text-body underline decoration-1 underline-offset-[3px]"
           >

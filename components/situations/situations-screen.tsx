@@ -7,6 +7,7 @@ import { Button } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Skeleton } from '@/components/ui/skeleton';
+import { fromPage } from '@/lib/client/from-page';
 import { situationsOptions } from '@/lib/client/situations';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { OpenSituation, SituationKind, Situations } from '@/lib/schemas/situation';
@@ -45,7 +46,7 @@ export function SituationsScreen({ household, ...page }: Props) {
 }
 
 function SituationsPage({ kind, initial, views: { Open, Closed } }: Omit<Props, 'household'>) {
-  const query = useQuery({ ...situationsOptions(), ...(initial === undefined ? {} : { initialData: initial }) });
+  const query = useQuery({ ...situationsOptions(), ...fromPage(initial) });
   const situations = query.data;
   const [ended, setEnded] = useState(false);
   const shown = kind ?? situations?.open?.situation.kind;

@@ -9,6 +9,7 @@ import { part } from '@/components/ui/part';
 import { Skeleton } from '@/components/ui/skeleton';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
+import { fromPage } from '@/lib/client/from-page';
 import { useUnsentTicks } from '@/lib/client/unsent-ticks';
 import { weekSheet } from '@/lib/client/week';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
@@ -41,7 +42,7 @@ export function WeekSheetScreen({ start, initial, onPhone = false }: WeekSheetSc
   const t = useTranslations('week');
   const common = useTranslations('common');
   const problemWords = useProblemWords();
-  const query = useQuery({ ...weekSheet(start), ...(initial === undefined ? {} : { initialData: initial }) });
+  const query = useQuery({ ...weekSheet(start), ...fromPage(initial) });
   if (query.data === undefined) {
     if (query.isError)
       return (

@@ -3,8 +3,8 @@ import { getTranslations } from 'next-intl/server';
 import { SituationIndexScreen } from '@/components/situations/situation-index-screen';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
-import { browserAsksAgain } from '@/lib/api/browser-asks-again';
 import { ClientMessages } from '@/lib/messages/client-messages';
+import { forPage } from '@/lib/services/for-page';
 import { showSituations } from '@/lib/services/show-situations';
 
 export async function generateMetadata(): Promise<Metadata> {
@@ -16,7 +16,7 @@ export default async function SituationsPage() {
   const visit = await requireHousehold();
   const { access } = visit;
   const { timeZone, locale, unitSystem } = access;
-  const initial = await showSituations(visit).catch(browserAsksAgain);
+  const initial = await forPage(showSituations(visit));
   return (
     <ClientMessages namespaces={['situations', 'doses', 'units']} parts={{ house: ['visits'] }}>
       <SituationIndexScreen

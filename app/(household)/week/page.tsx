@@ -9,9 +9,9 @@ import { findHousehold, requireHousehold } from '@/lib/auth/page-gate';
 import { firstWeekday } from '@/lib/calendar/first-weekday';
 import { dayRange } from '@/lib/calendar/format';
 import { weekOf } from '@/lib/calendar/household-day';
-import { browserAsksAgain } from '@/lib/api/browser-asks-again';
 import { ClientMessages } from '@/lib/messages/client-messages';
 import { weekAskedFor, type WeekAddress } from '@/lib/schemas/week-query';
+import { forPage } from '@/lib/services/for-page';
 import { showWeek } from '@/lib/services/show-week';
 
 type Props = { searchParams: Promise<WeekAddress> };
@@ -32,7 +32,7 @@ export default async function WeekPage({ searchParams }: Props) {
   const visit = await requireHousehold();
   const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem } = visit.access;
   const asked = weekAskedFor(await searchParams);
-  const initial = await showWeek(visit, asked).catch(browserAsksAgain);
+  const initial = await forPage(showWeek(visit, asked));
   const onPhone = userAgent({ headers: await headers() }).device.type === 'mobile';
   return (
     <ClientMessages

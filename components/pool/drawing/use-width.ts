@@ -23,12 +23,14 @@ export function useWidth(
         setWidth(initial);
         return undefined;
       }
+      let isDrawn = !whenNear;
       const resized = new ResizeObserver(([entry]) => {
         if (!entry || entry.contentRect.width <= 0) return;
         const measured = Math.floor(entry.contentRect.width);
-        // Several drawings come near at once: a phone draws one after the other.
-        if (whenNear) startTransition(() => setWidth(measured));
-        else setWidth(measured);
+        // Several drawings come near at once, and a phone is not to be busy with them for long; then each keeps to its room.
+        if (isDrawn) setWidth(measured);
+        else startTransition(() => setWidth(measured));
+        isDrawn = true;
       });
       if (!whenNear) {
         resized.observe(element);

@@ -58,7 +58,7 @@ function Bars({
       height={px(line + 26)}
       viewBox={`0 0 ${width} ${px(line + 26)}`}
       aria-hidden="true"
-      className="block"
+      className="block max-w-full"
     >
       <path
         d={`M${px(upper.middle)} ${link[0]}C${px(upper.middle)} ${link[0] + 7} ${px(lower.middle)} ${link[1] - 7} ${px(lower.middle)} ${link[1]}`}
