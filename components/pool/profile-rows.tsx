@@ -25,7 +25,6 @@ export function ProfileRows({
         {change === undefined ? null : (
           <PageLink
             href={addressOf(step, 'profile')}
-            // Seldom gone: not worth the first seconds of a phone.
             aria-label={[change, title].join(', ')}
             className="inline-flex min-h-11 items-center gap-1.5 text-body underline decoration-1 underline-offset-[3px]"
           >
