@@ -1,10 +1,10 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { connection } from 'next/server';
+import { PageLink } from '@/components/navigation/page-link';
 import { SignedOutBar } from '@/components/navigation/signed-out-bar';
 import { contentId, SkipLink } from '@/components/navigation/skip-link';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { findHousehold } from '@/lib/auth/page-gate';
 
 export async function generateMetadata(): Promise<Metadata> {

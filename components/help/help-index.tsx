@@ -1,8 +1,8 @@
 import { ChevronRight } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { emergencyCard } from '@/components/navigation/places';
 import { scopeAnchor } from '@/components/start/scope-list';
-import { PageLink } from '@/components/ui/page-link';
 import { HelpHead } from './help-head';
 
 /**

@@ -1,8 +1,8 @@
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { emergencyCard } from '@/components/navigation/places';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
-import { PageLink } from '@/components/ui/page-link';
 import { HelpHead } from './help-head';
 import { PrintButton } from './print-button';
 import { RuleList } from './rule-list';

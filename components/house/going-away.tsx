@@ -2,8 +2,8 @@
 
 import { Printer } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { bold } from '@/components/week-sheet/bold';
 
 /** How long the pool may be left, and the sheet for whoever looks after it meanwhile. */

@@ -3,8 +3,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { PhoneCall } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { dialled } from '@/components/ui/phone-link';
 import { textLink } from '@/components/ui/text-link';
 import { houseNotesOptions } from '@/lib/client/house-notes';

@@ -2,7 +2,7 @@
 
 import { usePathname } from 'next/navigation';
 import { classNames } from '@/components/ui/class-names';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from './page-link';
 import { isCurrent } from './places';
 
 export type BarLinkProps = {

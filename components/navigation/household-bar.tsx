@@ -1,11 +1,11 @@
 import { Siren } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
 import { BarLink } from './bar-link';
 import { BrandMark } from './brand-mark';
 import { Faces } from './faces';
 import type { HouseholdFrame } from './member';
 import { OpenSituations } from './open-situations';
+import { PageLink } from './page-link';
 import { barPlaces, emergencyCard } from './places';
 import { SignOutButton } from './sign-out-button';
 

@@ -3,10 +3,10 @@
 import { ChevronRight, CircleQuestionMark, Footprints, House, LifeBuoy, type LucideIcon, Waves } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
-import { PageLink } from '@/components/ui/page-link';
 import { Sheet } from '@/components/ui/sheet';
 import { ringOf } from './faces';
 import type { HouseholdFrame } from './member';
+import { PageLink } from './page-link';
 import { emergencyCard } from './places';
 import { SignOutButton } from './sign-out-button';
 

@@ -6,11 +6,11 @@ import { usePathname } from 'next/navigation';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { classNames } from '@/components/ui/class-names';
-import { PageLink } from '@/components/ui/page-link';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import { useOpenedOnce } from '@/components/ui/use-opened-once';
 import type { HouseholdFrame } from './member';
+import { PageLink } from './page-link';
 import { isCurrent, weeklyPlaces } from './places';
 
 const fetchMore = () => import('./more-sheet');

@@ -1,9 +1,9 @@
 import { useTranslations } from 'next-intl';
 import { DoubleRule } from '@/components/ui/double-rule';
-import { PageLink } from '@/components/ui/page-link';
 import { BrandMark } from './brand-mark';
 import { Faces } from './faces';
 import type { HouseholdFrame } from './member';
+import { PageLink } from './page-link';
 import { SirenLink } from './siren-link';
 
 /** The head of a phone page: whose pool it is, the siren, the faces. */

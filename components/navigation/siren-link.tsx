@@ -1,6 +1,6 @@
 import { Siren } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from './page-link';
 import { emergencyCard } from './places';
 
 /** One tap to the emergency card from every page of a phone. */

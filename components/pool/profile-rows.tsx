@@ -1,5 +1,5 @@
 import { Pencil } from 'lucide-react';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import type { SetupStep } from '@/lib/schemas/pool-profile';
 import { addressOf } from './step-address';
 

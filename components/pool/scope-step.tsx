@@ -3,8 +3,8 @@
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import type { z } from 'zod';
+import { PageLink } from '@/components/navigation/page-link';
 import { Callout, InlineStop, StopWord } from '@/components/ui/callout';
-import { PageLink } from '@/components/ui/page-link';
 import { RadioRows } from '@/components/ui/radio-rows';
 import { Segments } from '@/components/ui/segments';
 import { TickBox } from '@/components/ui/tick-box';

@@ -1,12 +1,12 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
 import { contentId } from '@/components/navigation/skip-link';
 import { emergencyCard } from '@/components/navigation/places';
-import { PageLink } from '@/components/ui/page-link';
 import type { Scope } from '@/lib/schemas/pool-profile';
 import type { PoolPlace } from './setting';
 

@@ -3,8 +3,8 @@
 import { ArrowLeft } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { BrandMark } from '@/components/navigation/brand-mark';
+import { PageLink } from '@/components/navigation/page-link';
 import { SirenLink } from '@/components/navigation/siren-link';
-import { PageLink } from '@/components/ui/page-link';
 import { ProgressRuler } from '@/components/ui/progress-ruler';
 import type { SetupStep } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';

@@ -3,8 +3,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { CalendarDays } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { classNames } from '@/components/ui/class-names';
-import { PageLink } from '@/components/ui/page-link';
 import { setupOptions } from '@/lib/client/pools';
 import { type SetupStep, setupSteps } from '@/lib/schemas/pool-profile';
 import { usePoolSetting } from './setting';

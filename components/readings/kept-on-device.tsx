@@ -1,9 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { UnsentTests } from './unsent-tests';
 
 /** No connection: the test is on this device, and said to be. */

@@ -1,9 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
 import { bold } from '@/components/week-sheet/bold';
 import { SheetProvider, useSheet } from '@/components/week-sheet/sheet-context';

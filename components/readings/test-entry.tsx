@@ -2,8 +2,8 @@
 
 import { useTranslations } from 'next-intl';
 import { lazy, startTransition, useEffect, useState } from 'react';
+import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { untilFetched } from '@/components/ui/until-fetched';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
 import { TestComing } from './test-coming';

@@ -3,8 +3,8 @@
 import { X } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
+import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
-import { PageLink } from '@/components/ui/page-link';
 import { Segments } from '@/components/ui/segments';
 import { useReadingSetting } from './reading-setting';
 import type { TestDraft } from './test-draft';

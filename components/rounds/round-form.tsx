@@ -3,10 +3,10 @@
 import { Check } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { Activity, useState } from 'react';
+import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
 import { Disclosure } from '@/components/ui/disclosure';
-import { PageLink } from '@/components/ui/page-link';
 import { useRecordRound } from '@/lib/client/rounds';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import type { Rounds } from '@/lib/schemas/round';

@@ -2,8 +2,8 @@
 
 import { X } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { DoubleRule } from '@/components/ui/double-rule';
-import { PageLink } from '@/components/ui/page-link';
 import type { RoundHousehold } from './round-household';
 import { roundTimes } from './round-times';
 

@@ -15,12 +15,12 @@ import {
 } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { ProfessionalCall } from '@/components/house/professional-call';
+import { PageLink } from '@/components/navigation/page-link';
 import { emergencyCard } from '@/components/navigation/places';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
 import { classNames } from '@/components/ui/class-names';
 import { UNHEARD } from '@/components/ui/early-presses';
-import { PageLink } from '@/components/ui/page-link';
 import { useEarlyPress } from '@/components/ui/use-early-press';
 import type { RoundItem } from '@/lib/schemas/round-items';
 import { filterPressureRise } from '@/lib/standards/filter';

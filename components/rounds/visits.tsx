@@ -3,9 +3,9 @@
 import { useQuery } from '@tanstack/react-query';
 import { useTranslations } from 'next-intl';
 import { ProfessionalCall } from '@/components/house/professional-call';
+import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
 import { Disclosure } from '@/components/ui/disclosure';
-import { PageLink } from '@/components/ui/page-link';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Skeleton } from '@/components/ui/skeleton';
 import { textLink } from '@/components/ui/text-link';

@@ -2,8 +2,8 @@
 
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
+import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
-import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { useOpenSituation } from '@/lib/client/situations';
 import type { OpenSituation, SituationKind } from '@/lib/schemas/situation';

@@ -2,8 +2,8 @@
 
 import { Siren } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { emergencyCard } from '@/components/navigation/places';
-import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 
 /** One tap from a caution to the emergency card. */

@@ -2,9 +2,9 @@
 
 import { ChevronLeft, TestTubeDiagonal } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
 import { DoubleRule } from '@/components/ui/double-rule';
-import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 
 type Props = {

@@ -1,8 +1,8 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { classNames } from '@/components/ui/class-names';
-import { PageLink } from '@/components/ui/page-link';
 import { daysBetween, dayOf } from '@/lib/calendar/household-day';
 import type { SituationKind, Situations } from '@/lib/schemas/situation';
 import { groups } from './groups';

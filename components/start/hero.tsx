@@ -1,5 +1,5 @@
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { buttonClass } from '@/components/ui/button-class';
 import { LookRoundButton } from './look-round-button';

@@ -1,7 +1,7 @@
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { InlineStop, StopWord } from '@/components/ui/callout';
 import { emergencyCard } from '@/components/navigation/places';
-import { PageLink } from '@/components/ui/page-link';
 
 const bold = (words: React.ReactNode) => <b className="font-emphasis text-ink">{words}</b>;
 

@@ -1,7 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';

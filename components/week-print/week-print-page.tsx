@@ -3,8 +3,8 @@
 import { ArrowLeft } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { PrintButton } from '@/components/help/print-button';
+import { PageLink } from '@/components/navigation/page-link';
 import { DoubleRule } from '@/components/ui/double-rule';
-import { PageLink } from '@/components/ui/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { SheetProvider } from '@/components/week-sheet/sheet-context';
 import type { PrintedWeek } from '@/lib/schemas/printed-week';

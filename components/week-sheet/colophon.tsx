@@ -2,7 +2,7 @@
 
 import { Printer } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { useSheet } from './sheet-context';
 

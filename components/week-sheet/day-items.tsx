@@ -1,7 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import { bold } from './bold';
 import type { Check } from './checks';

@@ -1,9 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
 import { EmptyState } from '@/components/ui/empty-state';
-import { PageLink } from '@/components/ui/page-link';
 
 /** Before the first reading there is nothing to draw: the sheet asks for a full test. */
 export function FirstTest() {

@@ -2,8 +2,8 @@
 
 import { TestTubeDiagonal } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { longDay } from '@/lib/calendar/format';
 import { type Check, nextCheck } from './checks';
 import { useSheet } from './sheet-context';

@@ -1,7 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { bold } from './bold';
 import { useSheet } from './sheet-context';
 import { useStepWords } from './use-step-words';

@@ -1,9 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { Callout } from '@/components/ui/callout';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { ProblemState } from '@/components/ui/problem-state';
 import { longDay } from '@/lib/calendar/format';
 import type { MeasuredQuantity } from '@/lib/schemas/measured-range';

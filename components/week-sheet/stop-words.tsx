@@ -1,9 +1,9 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { emergencyCard } from '@/components/navigation/places';
 import { StopWord } from '@/components/ui/callout';
-import { PageLink } from '@/components/ui/page-link';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 
 /** What must never happen; beside a dose of acid or tablets also what holds for those, and always the emergency card. */

@@ -1,8 +1,8 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { TickStep } from '@/components/situations/tick-step';
-import { PageLink } from '@/components/ui/page-link';
 import type { SituationStep } from '@/lib/schemas/situation';
 import { useSheet } from './sheet-context';
 import { instantOf } from './sheet-times';

@@ -1,8 +1,8 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
+import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
-import { PageLink } from '@/components/ui/page-link';
 import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
 import { bold } from './bold';
 import { OpenSituation } from './open-situation';

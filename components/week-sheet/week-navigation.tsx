@@ -2,7 +2,7 @@
 
 import { ChevronLeft, ChevronRight } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { useSheet } from './sheet-context';
 import { useTimes } from './use-times';
 import { isThisWeek, weeksBeside } from './weeks';

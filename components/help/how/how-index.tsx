@@ -1,6 +1,6 @@
 import { ChevronRight } from 'lucide-react';
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { howPages } from '@/lib/client/worked-out/how-page';
 import { HelpHead } from '../help-head';
 

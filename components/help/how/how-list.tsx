@@ -1,5 +1,5 @@
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { howPages, type HowPage } from '@/lib/client/worked-out/how-page';
 
 export type HowPlace = HowPage | 'constants' | 'unknown' | 'index';

@@ -1,5 +1,5 @@
 import { useTranslations } from 'next-intl';
-import { PageLink } from '@/components/ui/page-link';
+import { PageLink } from '@/components/navigation/page-link';
 import { constantGroups } from '@/lib/client/worked-out/constants';
 import { examples } from '@/lib/client/worked-out/examples/all-examples';
 import type { HowPage } from '@/lib/client/worked-out/how-page';
