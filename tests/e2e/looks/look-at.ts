@@ -7,6 +7,7 @@ import { until } from '../support/waiting';
 import { boxFaults, sidewaysScroll } from './boxes';
 import { foreignColours } from './colours';
 import { foreignFonts } from './fonts';
+import { layEverythingOut } from './lay-everything-out';
 import type { View } from './pages';
 import type { Theme } from './tokens';
 
@@ -24,6 +25,7 @@ export async function lookAt(stage: Stage, page: Page, view: View, width: (typeo
   await page.setViewportSize({ width, height: heights[width] });
   await page.goto(view.path);
   await page.waitForLoadState('networkidle');
+  await layEverythingOut(page);
   await view.prepare?.(page);
   // A pointer that rests on something, or a field that is being typed in, would be measured in that state.
   await page.mouse.move(0, 0);
