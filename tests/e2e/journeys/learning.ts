@@ -56,6 +56,12 @@ async function theBars(stage: Stage, server: Server, owner: Person): Promise<voi
   const row = page.locator('section', {
     has: page.getByRole('heading', { name: words('learnt.thing.dailyLoss.name') }),
   });
+  // The bars are drawn when they come near what is seen of the page.
+  await row.last().scrollIntoViewIfNeeded();
+  await row
+    .last()
+    .getByText(/^learnt: /)
+    .waitFor();
   const shown = (await row.last().innerText()).replace(/\s+/g, ' ');
   const figure = (value = 0) => value.toFixed(1);
   for (const [what, range] of [
@@ -83,6 +89,10 @@ async function aViewer(stage: Stage, server: Server, owner: Person): Promise<voi
 
   const page = await poolPage(stage, server, viewer, 'a viewer');
   await page.getByText(words('learnt.forget.owners')).waitFor();
+  await page
+    .getByText(/^learnt: /)
+    .first()
+    .waitFor();
   stage.equal('a viewer sees the bars', (await page.getByText(/^learnt: /).count()) > 0, true);
   stage.equal('and no way to begin again', await forgetButton(page).count(), 0);
   const refused = await viewer.send('DELETE', '/api/learnt');
