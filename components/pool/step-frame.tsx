@@ -127,7 +127,7 @@ function ResultWords({ result, large = false }: { result: RunningResult; large?:
         <b
           className={classNames(
             'font-display whitespace-nowrap',
-            large ? 'block font-display text-headline' : 'text-[22px] leading-6.5 font-headline',
+            large ? 'block text-headline' : 'text-[22px] leading-6.5 font-headline',
           )}
         >
           {figure}

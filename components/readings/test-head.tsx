@@ -35,7 +35,7 @@ export function TestHead({
           <X aria-hidden="true" className="size-5.5" />
         </PageLink>
         <div className="min-w-0 flex-1">
-          <h1 className="font-display text-[20px] leading-6 font-section md:font-display md:text-headline md:leading-10.5">
+          <h1 className="font-display text-[20px] leading-6 font-section md:text-headline md:leading-10.5">
             {t(`kind.${draft.kind}`)}
           </h1>
           <p className="text-small text-ink-2">

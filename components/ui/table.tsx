@@ -26,7 +26,7 @@ export function Table({ caption, columns, rows }: TableProps) {
         <tbody>
           {rows.map(({ key, cells: [name, ...cells] }) => (
             <tr key={key} className="border-b border-rule">
-              <th scope="row" className="py-1 pr-4 font-emphasis">
+              <th scope="row" className="py-1 pr-4 font-emphasis whitespace-nowrap">
                 {name}
               </th>
               {cells.map((cell, index) => (
