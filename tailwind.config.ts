@@ -61,8 +61,8 @@ export default {
     },
     screens: { sm: '600px', md: '900px', lg: '1280px' },
     fontFamily: {
-      body: '"Atkinson Hyperlegible Next Variable", system-ui, sans-serif',
-      display: '"Fraunces Variable", Georgia, serif',
+      body: '"Atkinson Hyperlegible Next Variable", "Atkinson Hyperlegible Next Variable Extended", system-ui, sans-serif',
+      display: '"Fraunces Variable", "Fraunces Variable Extended", Georgia, serif',
     },
     fontSize: {
       landing: size('landing', { weight: '560', tracking: '-0.024em' }),

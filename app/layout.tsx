@@ -3,6 +3,7 @@ import './globals.css';
 import type { Metadata, Viewport } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { headers } from 'next/headers';
+import { earlyFontsScript } from '@/components/ui/early-fonts';
 import { earlyPressesScript } from '@/components/ui/early-presses';
 import { UiProvider } from '@/components/ui/ui-provider';
 import { Providers } from '@/lib/client/providers';
@@ -42,7 +43,11 @@ export default async function RootLayout({ children }: { children: React.ReactNo
     <html lang="en">
       <head>
         {/* A browser hides the nonce from whoever reads the page, React among them. */}
-        <script nonce={nonce} suppressHydrationWarning dangerouslySetInnerHTML={{ __html: earlyPressesScript }} />
+        <script
+          nonce={nonce}
+          suppressHydrationWarning
+          dangerouslySetInnerHTML={{ __html: `${earlyFontsScript}${earlyPressesScript}` }}
+        />
         {/* An element, and not a call of React's, which would ask for them again on the way to another page. */}
         {fonts.map(({ pathname }) => (
           <link key={pathname} rel="preload" href={pathname} as="font" type="font/woff2" crossOrigin="anonymous" />

@@ -59,7 +59,7 @@ async function cut(face: Face, subset: string): Promise<string> {
   console.log(`${file}: ${whole.length} bytes, now ${part.length}`);
   return `
 @font-face {
-  font-family: '${face.family}';
+  font-family: '${familyOf(face, subset)}';
   font-style: ${face.style};
   font-display: swap;
   font-weight: ${face.weights.min} ${face.weights.max};
@@ -67,6 +67,14 @@ async function cut(face: Face, subset: string): Promise<string> {
   unicode-range: ${ranges};
 }
 `;
+}
+
+/**
+ * The other subsets are a family of their own, named after the first in every list of families: while a face of one family
+ * has not come, Chromium looks up the device's own faces beside it for every size of text.
+ */
+function familyOf({ family }: Face, subset: string): string {
+  return subset === 'latin' ? family : `${family} Extended`;
 }
 
 function rangesOf(file: string, subset: string): string {

@@ -1,13 +1,16 @@
 /** What the service worker names its store. */
 const kept = 'wadewell-emergency-card';
 
+/** So long after a page has come: the card is fetched with every file it names, and the page's own first seconds come first [ms]. */
+const A_WHILE = 10_000;
+
 /**
  * Has the emergency card kept on this device, so that it opens without a connection. A browser that has no service workers,
  * or a page over plain http, goes without.
  */
 export function keepEmergencyCard(): void {
   if (!('serviceWorker' in navigator)) return;
-  navigator.serviceWorker.register('/sw.js').catch(() => undefined);
+  setTimeout(() => void navigator.serviceWorker.register('/sw.js').catch(() => undefined), A_WHILE);
 }
 
 /** Forgets the card as the person saw it who signs out: names stand on it. It is kept anew for whoever comes next. */
