@@ -1,13 +1,28 @@
-import { z } from 'zod';
 import { parseDecimal } from '@/lib/units/parse';
 import { type PadQuantity, padQuantities, permitted } from './quantities';
 
 /** One pad of the strip with the steps printed for it on the bottle. */
-const padSchema = z.object({ quantity: z.enum(padQuantities), steps: z.array(z.number()).min(2) });
+type Pad = { quantity: PadQuantity; steps: number[] };
 
 /** The pads of one bottle of strips, from the top of the strip down. Kept on the device: the bottle stands beside it. */
-export const bottleSchema = z.array(padSchema).min(1);
-export type Bottle = z.infer<typeof bottleSchema>;
+export type Bottle = Pad[];
+
+/** Checks a bottle that was kept; by hand, since the form does not wait for zod. */
+export const keptBottle = {
+  safeParse: (value: unknown) =>
+    isBottle(value) ? { success: true as const, data: value } : { success: false as const },
+};
+
+function isBottle(value: unknown): value is Bottle {
+  return Array.isArray(value) && value.length > 0 && value.every(isPad);
+}
+
+function isPad(value: unknown): value is Pad {
+  if (typeof value !== 'object' || value === null || !('quantity' in value && 'steps' in value)) return false;
+  const { quantity, steps } = value;
+  const numbers = Array.isArray(steps) && steps.every((step) => typeof step === 'number');
+  return padQuantities.some((known) => known === quantity) && numbers && steps.length >= 2;
+}
 
 /** An invented bottle to begin with; its steps are changed once to those of the real one. */
 export const firstBottle: Bottle = [

@@ -2,7 +2,8 @@ import type { Bottle } from './bottle';
 import { asked, type Entered, middleOf } from './entered';
 import { isPermitted, isUsual, likelyTypo } from './likely-typo';
 import { type EntryQuantity, permitted } from './quantities';
-import { confirmationOf, type TestDraft } from './test-draft';
+import { confirmationOf } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import { typedValue } from './typed-value';
 
 /** Why a field cannot be taken as it stands. `likely`: what was probably meant. mg/L, pH, degrees C. */

@@ -1,5 +1,5 @@
 import type { UnitSystem } from '@/lib/units/unit';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 
 /** A test of which nothing is written down yet. */
 export function emptyTest(

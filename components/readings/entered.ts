@@ -1,7 +1,7 @@
 import type { Interval, Measured } from '@/lib/schemas/reading';
 import type { Bottle } from './bottle';
 import { type EntryQuantity, quickQuantities, typedQuantities } from './quantities';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import { typedValue } from './typed-value';
 
 export type Value = number | Interval;

@@ -3,7 +3,7 @@
 import { TestTubeDiagonal, TriangleAlert } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { Button } from '@/components/ui/button';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import { useValueWords } from './use-value-words';
 import type { ZeroQuestion } from './zero-question';
 

@@ -3,7 +3,7 @@
 import { isUsual } from './likely-typo';
 import { NumberPad } from './number-pad';
 import type { EntryQuantity } from './quantities';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import { typedValue } from './typed-value';
 import { fieldId, focusAfter } from './value-fields';
 

@@ -1,7 +1,7 @@
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import type { NewReading } from '@/lib/schemas/reading';
 import { type Entered, measuredOf } from './entered';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 
 /** A test as it is sent: under the id that was made when its form opened. */
 export function newReadingOf({

@@ -11,7 +11,7 @@ import { combinedOf, type Entered, middleOf } from './entered';
 import { quickQuantities } from './quantities';
 import { useReadingSetting } from './reading-setting';
 import { StripPad } from './strip-pad';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import { useValueWords } from './use-value-words';
 
 /** The strip as it is held: its pads from the top down, each beside its printed steps. */

@@ -5,14 +5,14 @@ import { Skeleton } from '@/components/ui/skeleton';
 import { MethodChoice } from './method-choice';
 import { useReadingSetting } from './reading-setting';
 import { emptyTest } from './empty-test';
-import type { TestForNowProps } from './test-for-now';
+import type { AskedTest } from './test-for-now';
 import { TestHead } from './test-head';
 import { TestNote } from './test-note';
 
 const nothing = () => {};
 
 /** The head of a test while its form is on the way, at the places where that will have it: to be read, not yet to be used. */
-export function TestComing({ kind, serverNow }: TestForNowProps) {
+export function TestComing({ kind, serverNow }: AskedTest) {
   const common = useTranslations('common');
   const { unitSystem } = useReadingSetting();
   const draft = emptyTest('', kind, 'strip', unitSystem);

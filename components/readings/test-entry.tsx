@@ -5,29 +5,35 @@ import { lazy, startTransition, useEffect, useState } from 'react';
 import { PageLink } from '@/components/navigation/page-link';
 import { buttonClass } from '@/components/ui/button-class';
 import { untilFetched } from '@/components/ui/until-fetched';
+import { keptDraft } from './kept-draft';
 import { type ReadingHousehold, ReadingSettingProvider } from './reading-setting';
 import { TestComing } from './test-coming';
-import type { TestForNowProps } from './test-for-now';
+import type { TestDraft } from './test-draft-schema';
+import type { AskedTest } from './test-for-now';
 
-type TestEntryProps = TestForNowProps & { household: ReadingHousehold };
+type TestEntryProps = AskedTest & { household: ReadingHousehold };
 
-/** Drafts live on the device, which the server does not know; so the form and what checks it follow the page. */
-const LazyTest = lazy(async () => {
-  // What checks a reading takes a phone as long to set up as the form itself: each has a turn of its own.
-  await untilFetched(() => import('@/lib/schemas/reading'));
-  await new Promise((resolve) => setTimeout(resolve));
-  return { default: (await untilFetched(() => import('./test-for-now'))).TestForNow };
-});
+/** Drafts live on the device, which the server does not know; so the form follows the page. */
+const LazyTest = lazy(() =>
+  untilFetched(() => import('./test-for-now')).then(({ TestForNow }) => ({ default: TestForNow })),
+);
 
 /** Enter a test. */
 export function TestEntry({ household, kind, serverNow }: TestEntryProps) {
-  const [drawn, setDrawn] = useState(false);
-  // The head stays as it is until the form is whole.
-  useEffect(() => startTransition(() => setDrawn(true)), []);
+  const [kept, setKept] = useState<{ begun: TestDraft | undefined }>();
+  const { personId, householdId } = household;
+  useEffect(() => {
+    // The head stays as it is until the form is whole.
+    void keptDraft({ personId, householdId }).then((begun) => startTransition(() => setKept({ begun })));
+  }, [personId, householdId]);
   if (household.role === 'viewer') return <OnlyLooking />;
   return (
     <ReadingSettingProvider household={household}>
-      {drawn ? <LazyTest kind={kind} serverNow={serverNow} /> : <TestComing kind={kind} serverNow={serverNow} />}
+      {kept ? (
+        <LazyTest kind={kind} serverNow={serverNow} begun={kept.begun} />
+      ) : (
+        <TestComing kind={kind} serverNow={serverNow} />
+      )}
     </ReadingSettingProvider>
   );
 }

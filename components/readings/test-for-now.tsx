@@ -18,30 +18,35 @@ import { KeptOnDevice } from './kept-on-device';
 import { OpenZero } from './open-zero';
 import { useReadingSetting } from './reading-setting';
 import { SavedTest } from './saved-test';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import { TestForm } from './test-form';
 import { UnsentTests } from './unsent-tests';
 import { useNow } from './use-now';
 import { useTestDraft } from './use-test-draft';
 
-export type TestForNowProps = {
+export type AskedTest = {
   /** Which test the link asked for. */
   kind: TestDraft['kind'];
   /** The server's clock when the page was made [ms]. */
   serverNow: number;
 };
 
+type TestForNowProps = AskedTest & {
+  /** What is kept of one that was begun on this device. */
+  begun: TestDraft | undefined;
+};
+
 type Outcome = { sent: SentReading; before: readonly PlanDose[] | null };
 
 /** A test from its first figure to what the sheet says of it. */
-export function TestForNow({ kind, serverNow }: TestForNowProps) {
+export function TestForNow({ kind, serverNow, begun }: TestForNowProps) {
   const t = useTranslations('readings');
   const problemWords = useProblemWords();
   const { householdId, personId } = useReadingSetting();
   const { now, read } = useNow(serverNow);
   // Nothing asks for it before the first figure is entered.
   const week = usePlannedWeek(useLeftAlone());
-  const { draft, setDraft, forget, startAgain } = useTestDraft(kind);
+  const { draft, setDraft, forget, startAgain } = useTestDraft(kind, begun);
   const send = useSendReading({ personId, householdId });
   const correct = useCorrectReading();
   const [outcome, setOutcome] = useState<Outcome | null>(null);

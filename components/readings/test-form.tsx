@@ -10,7 +10,7 @@ import { useKept } from '@/lib/client/device-store';
 import type { PlannedWeek } from '@/lib/client/readings';
 import type { NewReading } from '@/lib/schemas/reading';
 import { waterLooks } from '@/lib/schemas/reading-kinds';
-import { bottleSchema, firstBottle } from './bottle';
+import { firstBottle, keptBottle } from './bottle';
 import { doubtsOf } from './doubts';
 import { asked, enteredOf } from './entered';
 import { FalseZero } from './false-zero';
@@ -21,7 +21,7 @@ import { quickQuantities, type EntryQuantity } from './quantities';
 import { useReadingSetting } from './reading-setting';
 import { StripEntry } from './strip-entry';
 import { StripTimer } from './strip-timer';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import { TestHead } from './test-head';
 import { TestNote } from './test-note';
 import { testTime } from './test-time';
@@ -44,7 +44,7 @@ export type TestFormProps = {
 export function TestForm({ draft, change, now, readNow, week, onSave, busy, problem }: TestFormProps) {
   const t = useTranslations('readings');
   const { householdId, timeZone } = useReadingSetting();
-  const [bottle, setBottle] = useKept(`wadewell.bottle.${householdId}`, bottleSchema, () => firstBottle);
+  const [bottle, setBottle] = useKept(`wadewell.bottle.${householdId}`, keptBottle, () => firstBottle);
   const [typing, setTyping] = useState<EntryQuantity | null>(null);
 
   const quantities = asked(draft, bottle);

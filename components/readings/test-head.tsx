@@ -7,7 +7,7 @@ import { PageLink } from '@/components/navigation/page-link';
 import { Button } from '@/components/ui/button';
 import { Segments } from '@/components/ui/segments';
 import { useReadingSetting } from './reading-setting';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import type { TestTime } from './test-time';
 import { TimeFields } from './time-fields';
 import { useTimeWords } from './use-time-words';

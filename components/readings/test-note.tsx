@@ -1,7 +1,7 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 
 /** How the water for it is taken, or what a quick one leaves out. */
 export function TestNote({ kind }: Pick<TestDraft, 'kind'>) {

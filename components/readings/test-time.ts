@@ -1,6 +1,6 @@
 import { isCalendarDay } from '@/lib/calendar/household-day';
 import { wallToInstant } from '@/lib/calendar/wall-time';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 
 export type TestTime =
   { takenAt: number; problem: undefined } | { takenAt: undefined; problem: 'unreadable' | 'future' };

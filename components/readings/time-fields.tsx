@@ -6,7 +6,7 @@ import { TextField } from '@/components/ui/text-field';
 import { dayOf } from '@/lib/calendar/household-day';
 import { wallTimeOf } from '@/lib/calendar/wall-time';
 import { useReadingSetting } from './reading-setting';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 import type { TestTime } from './test-time';
 
 /** Day and hour of a test that was not taken just now. */

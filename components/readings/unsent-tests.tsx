@@ -31,7 +31,7 @@ export function UnsentTests() {
             {t('send')}
           </Button>
         ) : (
-          <Button onClick={() => forgetReading(owner, reading.id)}>{t('forget')}</Button>
+          <Button onClick={() => void forgetReading(owner, reading.id)}>{t('forget')}</Button>
         )
       }
     >

@@ -3,7 +3,7 @@ import { type FalseZeroCause, falseZeroQuestion } from '@/lib/client/readings';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
 import { chlorines } from '@/lib/standards/chlorines';
 import { type Value, asInterval, middleOf } from './entered';
-import type { TestDraft } from './test-draft';
+import type { TestDraft } from './test-draft-schema';
 
 const HOUR = 3_600_000;
 

@@ -18,6 +18,25 @@ export function readKept<Kept>(name: string, kept: KeptParser<Kept>): Kept | und
   }
 }
 
+/** Whether anything is kept under a name, without what checks it. */
+export function isKept(name: string): boolean {
+  try {
+    return window.localStorage.getItem(name) !== null;
+  } catch {
+    return false;
+  }
+}
+
+/** Checks that what was kept is one of these words, on a page that has not fetched zod yet. */
+export function oneOf<Word extends string>(words: readonly Word[]): KeptParser<Word> {
+  return {
+    safeParse(value) {
+      const data = words.find((word) => word === value);
+      return data === undefined ? { success: false } : { success: true, data };
+    },
+  };
+}
+
 /** Returns whether the device took it: a private window may refuse. */
 export function writeKept(name: string, value: unknown): boolean {
   try {

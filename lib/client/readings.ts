@@ -6,8 +6,9 @@ import { addDays } from '@/lib/calendar/household-day';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { NewReading, RecordedReading } from '@/lib/schemas/reading';
 import type { WeekSheet } from '@/lib/schemas/week-sheet';
+import type { UnsentReading } from './checked-readings';
 import { fetchJson, RequestProblem } from './fetch-json';
-import { forgetReading, keepReading, type UnsentReading, unsentReadings, useUnsentReadings } from './unsent-readings';
+import { forgetReading, keepReading, unsentReadings, useUnsentReadings } from './unsent-readings';
 import type { ReadingOwner } from './unsent-readings-key';
 import { weekKeys, weekSheet } from './week';
 
@@ -38,10 +39,10 @@ export function useSendReading(owner: ReadingOwner) {
     mutationFn: async (reading: NewReading): Promise<SentReading> => {
       try {
         const recorded = await post(reading);
-        forgetReading(owner, reading.id);
+        await forgetReading(owner, reading.id);
         return { where: 'server', reading: recorded, week: await newWeek(client) };
       } catch (problem) {
-        if (isOffline(problem) && keepReading(owner, reading)) return { where: 'device' };
+        if (isOffline(problem) && (await keepReading(owner, reading))) return { where: 'device' };
         throw problem;
       }
     },
@@ -120,13 +121,13 @@ async function sendEach(owner: ReadingOwner): Promise<number> {
     if (refusal !== null) continue;
     try {
       await post(reading);
-      forgetReading(owner, reading.id);
+      await forgetReading(owner, reading.id);
       sent += 1;
     } catch (problem) {
       if (isOffline(problem)) return sent;
       // What the server will never take stays where it can be seen, with the reason.
       const lasting = problem instanceof RequestProblem && lastingRefusals.includes(problem.code);
-      if (lasting) keepReading(owner, reading, problem.problems[0]?.message ?? problem.message);
+      if (lasting) await keepReading(owner, reading, problem.problems[0]?.message ?? problem.message);
     }
   }
   return sent;
