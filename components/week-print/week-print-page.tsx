@@ -5,6 +5,7 @@ import { useTranslations } from 'next-intl';
 import { PrintButton } from '@/components/help/print-button';
 import { PageLink } from '@/components/navigation/page-link';
 import { DoubleRule } from '@/components/ui/double-rule';
+import { part } from '@/components/ui/part';
 import { textLink } from '@/components/ui/text-link';
 import { SheetProvider } from '@/components/week-sheet/sheet-context';
 import type { PrintedWeek } from '@/lib/schemas/printed-week';
@@ -19,6 +20,13 @@ import { PaperStop } from './paper-stop';
 import { PaperToDo } from './paper-to-do';
 import { PaperVerdict } from './paper-verdict';
 import { ReadingsTable } from './readings-table';
+
+// Nobody presses anything on paper: what is long comes to life in turns of its own.
+const lanes = part(<PaperLanes />);
+const toDo = part(<PaperToDo />);
+const stop = part(<PaperStop />);
+const readings = part(<ReadingsTable />);
+const how = part(<PaperHow />);
 
 /** One upright page of A4 or Letter for the pump room; on a screen it looks as it comes out of the printer. */
 export function WeekPrintPage({ printed, start }: { printed: PrintedWeek; start: string | undefined }) {
@@ -51,12 +59,12 @@ export function WeekPrintPage({ printed, start }: { printed: PrintedWeek; start:
                 <PaperVerdict />
                 <PaperMade />
               </div>
-              <PaperLanes />
-              <PaperToDo />
-              <PaperStop />
+              {lanes}
+              {toDo}
+              {stop}
               <div className="grid grid-cols-[300px_minmax(0,1fr)] gap-x-4 pt-1.5">
-                <ReadingsTable />
-                <PaperHow />
+                {readings}
+                {how}
               </div>
               <PaperFoot notes={printed.notes} />
             </div>
