@@ -1,4 +1,4 @@
-import { fireEvent, screen, waitFor } from '@testing-library/react';
+import { act, fireEvent, screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { expect, vi } from 'vitest';
 // It follows the page in a browser.
@@ -41,6 +41,8 @@ export async function openTest(
   const serverNow = parseInstant(sheet.now) ?? 0;
   const page = renderWithWords(<TestEntry household={{ ...household, ...change }} kind={kind} serverNow={serverNow} />);
   await waitFor(() => expect(screen.queryByText(common.loading)).toBeNull());
+  // What listens to the first touch is there once React has done with the form.
+  await act(async () => undefined);
   // With the first touch the week is asked for.
   fireEvent.pointerDown(document.body);
   return page;
