@@ -8,7 +8,7 @@ import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
 import { Segments } from '@/components/ui/segments';
 import { TextField } from '@/components/ui/text-field';
-import { useHydrated } from '@/components/ui/use-hydrated';
+import { useLeftAlone } from '@/components/ui/use-left-alone';
 import { browserTimeZone, signUp } from '@/lib/client/session';
 import type { SignUp } from '@/lib/schemas/account';
 import { looksLikeEmail } from './email-shape';
@@ -23,7 +23,7 @@ export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
   const t = useTranslations('start.signUp');
   const form = useTranslations('start.form');
   const [unitSystem, setUnitSystem] = useState(likelyUnits);
-  const hydrated = useHydrated();
+  const alone = useLeftAlone();
   const { problems, failure, busy, forgive, submit } = useEntryForm(
     fields,
     ({ name, email, password, householdName }) => ({
@@ -82,7 +82,8 @@ export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
       />
       <Segments
         label={t('units')}
-        hint={hydrated ? t('timeZone', { zone: browserTimeZone().replaceAll('_', ' ') }) : undefined}
+        // A phone takes as long to find its time zone as to bring the whole form to life; the line is kept free for it.
+        hint={alone ? t('timeZone', { zone: browserTimeZone().replaceAll('_', ' ') }) : '\u00a0'}
         choices={[
           { value: 'metric', label: t('metric'), detail: t('metricNote') },
           { value: 'us', label: t('us'), detail: t('usNote') },

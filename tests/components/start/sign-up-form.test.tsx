@@ -1,4 +1,4 @@
-import { screen, waitFor } from '@testing-library/react';
+import { fireEvent, screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, beforeEach, expect, it, vi } from 'vitest';
 import { SignUpForm } from '@/components/start/sign-up-form';
@@ -79,10 +79,11 @@ it('names an address that cannot be one before anyone is asked', async () => {
   expect(answer).not.toHaveBeenCalled();
 });
 
-it('says how long a password has to be, and in which zone hours are told', () => {
+it('says how long a password has to be, and once somebody begins, in which zone hours are told', async () => {
   renderWithWords(<SignUpForm likelyUnits="us" shortestPassword={10} />);
   expect(screen.getByLabelText('Password')).toHaveAccessibleDescription(/^At least 10 characters\./);
-  expect(screen.getByRole('group', { name: 'Measures' })).toHaveAccessibleDescription(
-    /^Hours are told in Asia\/Kath?mandu\.$/,
-  );
+  const measures = screen.getByRole('group', { name: 'Measures' });
+  expect(measures).not.toHaveAccessibleDescription();
+  fireEvent.pointerDown(document.body);
+  await waitFor(() => expect(measures).toHaveAccessibleDescription(/^Hours are told in Asia\/Kath?mandu\.$/));
 });
