@@ -10,7 +10,10 @@ const A_WHILE = 10_000;
  */
 export function keepEmergencyCard(): void {
   if (!('serviceWorker' in navigator)) return;
-  setTimeout(() => void navigator.serviceWorker.register('/sw.js').catch(() => undefined), A_WHILE);
+  setTimeout(() => {
+    // The next page tries again.
+    if (navigator.onLine) navigator.serviceWorker.register('/sw.js').catch(() => undefined);
+  }, A_WHILE);
 }
 
 /** Forgets the card as the person saw it who signs out: names stand on it. It is kept anew for whoever comes next. */

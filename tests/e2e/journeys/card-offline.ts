@@ -23,7 +23,11 @@ export const cardOffline: Journey = {
     const { page } = visitor;
     await enterAs(visitor, ines);
     await page.goto('/week');
-    stage.check('the card and its files are kept', await until(async () => (await filesKept(page)) > 3));
+    // Ten seconds after the page, and then the time that its files take.
+    stage.check(
+      'the card and its files are kept',
+      await until(async () => (await filesKept(page)) > 3, { seconds: 30 }),
+    );
     // While its files are fetched the worker is not in charge yet.
     await page.evaluate(() => navigator.serviceWorker.ready.then(({ active }) => active?.state));
     stage.check(
