@@ -123,7 +123,7 @@ export const benchmarks = {
 
 export const endToEnd = {
   name: 'end to end',
-  minutes: 20,
+  minutes: 40,
   needsChromium: true,
   live: true,
   programs: [[...typescriptLoader, inRoot('tests/e2e/run.ts')]],

@@ -77,6 +77,8 @@ export const firstWeek: Journey = {
     await borrowSession(visitor, ines);
     stage.equal('signed in again, all is as it was', stateOf(await sheet()), stateOf(after));
 
+    // A sheet left open would ask the server that is about to be killed.
+    await page.goto('about:blank');
     await stage.part('a crash right after a save', () => crash(stage, server, ines));
   },
 };
