@@ -84,19 +84,21 @@ export const boundaries = {
   count: oneCheck,
 };
 
-export const unit = vitestProject('unit', 15);
-export const component = vitestProject('component', 15);
+export const unit = vitestProjects('unit', ['unit', 'routes']);
+export const component = vitestProjects('component', ['component', 'stand-ins']);
 
-function vitestProject(name, minutes) {
+function vitestProjects(name, projects) {
   const report = join(workFolder, `vitest-${name}.json`);
   return {
     name,
-    minutes,
+    minutes: 15,
     prepare: () => rmSync(report, { force: true }),
     programs: [
       [
         program('vitest/vitest.mjs'),
-        ...['run', '--project', name, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`],
+        'run',
+        ...projects.flatMap((project) => ['--project', project]),
+        ...['--reporter=default', '--reporter=json', `--outputFile.json=${report}`],
       ],
     ],
     shows: (line) => /^\s*(reference|seed):|^\s+(Test Files|Tests) /.test(line),
