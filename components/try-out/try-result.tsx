@@ -1,9 +1,10 @@
 'use client';
 
 import { useTranslations } from 'next-intl';
-import { useEffect, useState } from 'react';
+import { useLayoutEffect, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
+import { whenPainted } from '@/components/ui/when-painted';
 import { useSheet } from '@/components/week-sheet/sheet-context';
 import type { Tried } from '@/lib/client/try-it/use-try-it';
 import { useTakeTryOut } from '@/lib/client/try-out';
@@ -86,13 +87,10 @@ function Use({ planId, changes, tried: { advice, failed }, onUsed }: Omit<Props,
   );
 }
 
-/** Marks the frame after the one in which an answer's words were painted. */
+/** Marks when an answer's words are on the screen. */
 function useMarkSentence(answer: number | undefined): void {
-  useEffect(() => {
-    if (answer === undefined) return undefined;
-    let frame = requestAnimationFrame(() => {
-      frame = requestAnimationFrame(() => performance.mark('try-it:sentence'));
-    });
-    return () => cancelAnimationFrame(frame);
-  }, [answer]);
+  useLayoutEffect(
+    () => (answer === undefined ? undefined : whenPainted(() => performance.mark('try-it:sentence'))),
+    [answer],
+  );
 }
