@@ -10,6 +10,7 @@ import { useSheet } from '@/components/week-sheet/sheet-context';
 import type { CourseAnswer } from '@/lib/client/try-it/messages';
 import { useTryIt } from '@/lib/client/try-it/use-try-it';
 import { tryOutStart } from '@/lib/client/try-out';
+import type { TryOutChanges, TryOutStart } from '@/lib/schemas/try-out';
 import { changesOf, type Draft, emptyDraft } from './draft';
 import { TakenTryOuts } from './taken-try-outs';
 import { TryControls } from './try-controls';
@@ -38,7 +39,6 @@ export function TryIt() {
 function Trying({ ground }: { ground: TryGround }) {
   const t = useTranslations('try-out');
   const common = useTranslations('common');
-  const { picture } = useSheet();
   const hydrated = useHydrated();
   const section = useRef<HTMLDivElement>(null);
   const wanted = useWanted(section);
@@ -50,8 +50,6 @@ function Trying({ ground }: { ground: TryGround }) {
   const planned = ground.tablets ?? 0;
   const mostTablets = Math.max(planned, start?.mostTablets ?? 0);
   const changes = changesOf(known, { days: ground.days, tablets: planned, mostTablets });
-  const tried = useTryIt(start, changes);
-  useShownLine(tried.course, picture.now);
   return (
     <div ref={section} className="grid gap-3">
       <p className="text-small text-ink-2">{t('lead')}</p>
@@ -86,16 +84,36 @@ function Trying({ ground }: { ground: TryGround }) {
           </Button>
         </p>
       )}
-      {changes && (start || !problem) && (
-        <TryResult
-          planId={start?.planId ?? ground.planId}
-          changes={changes}
-          tried={tried}
-          onUsed={() => setDraft(emptyDraft)}
-          onPutBack={() => setDraft({ ...emptyDraft, day: draft.day })}
-        />
-      )}
+      <TriedWeek
+        start={start}
+        failed={problem !== null}
+        planId={ground.planId}
+        changes={changes}
+        onUsed={() => setDraft(emptyDraft)}
+        onPutBack={() => setDraft({ ...emptyDraft, day: draft.day })}
+      />
     </div>
+  );
+}
+
+type TriedWeekProps = {
+  start: TryOutStart | undefined;
+  /** There is nothing to try on, and none is on its way. */
+  failed: boolean;
+  planId: string;
+  changes: TryOutChanges | undefined;
+  onUsed: () => void;
+  onPutBack: () => void;
+};
+
+/** What comes of what is tried. An answer draws this and nothing else, so that its sentence does not wait for the controls. */
+function TriedWeek({ start, failed, planId, changes, onUsed, onPutBack }: TriedWeekProps) {
+  const { picture } = useSheet();
+  const tried = useTryIt(start, changes);
+  useShownLine(tried.course, picture.now);
+  if (changes === undefined || (start === undefined && failed)) return null;
+  return (
+    <TryResult planId={start?.planId ?? planId} changes={changes} tried={tried} onUsed={onUsed} onPutBack={onPutBack} />
   );
 }
 
