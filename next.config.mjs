@@ -1,8 +1,8 @@
 import createNextIntlPlugin from 'next-intl/plugin';
 
 const withMessages = createNextIntlPlugin({
-  requestConfig: './lib/messages/request.ts',
-  experimental: { messages: { path: './lib/messages', format: 'json', locales: ['en'], precompile: true } },
+  requestConfig: './app/request-words.ts',
+  experimental: { messages: { path: './lib/messages', format: 'json', locales: ['en', 'es'], precompile: true } },
 });
 
 /** @type {import('next').NextConfig} */

@@ -1,7 +1,7 @@
 import './fonts/faces.css';
 import './globals.css';
 import type { Metadata, Viewport } from 'next';
-import { getTranslations } from 'next-intl/server';
+import { getLocale, getTranslations } from 'next-intl/server';
 import { headers } from 'next/headers';
 import { earlyFontsScript } from '@/components/ui/early-fonts';
 import { earlyPressesScript } from '@/components/ui/early-presses';
@@ -39,8 +39,9 @@ export const viewport: Viewport = { width: 'device-width', initialScale: 1, colo
 export default async function RootLayout({ children }: { children: React.ReactNode }) {
   // Every page is made per request: a page made at build time would carry no nonce and its scripts would be refused.
   const nonce = nonceOf((await headers()).get('content-security-policy'));
+  const language = await getLocale();
   return (
-    <html lang="en">
+    <html lang={language}>
       <head>
         {/* A browser hides the nonce from whoever reads the page, React among them. */}
         <script

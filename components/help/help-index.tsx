@@ -1,8 +1,11 @@
 import { ChevronRight } from 'lucide-react';
 import { useTranslations } from 'next-intl';
+import { LanguageButton } from '@/components/navigation/language-button';
+import { LanguageLinks } from '@/components/navigation/language-links';
 import { PageLink } from '@/components/navigation/page-link';
 import { emergencyCard } from '@/components/navigation/places';
 import { scopeAnchor } from '@/components/start/scope-list';
+import { textLink } from '@/components/ui/text-link';
 import { HelpHead } from './help-head';
 
 /**
@@ -13,6 +16,7 @@ import { HelpHead } from './help-head';
 export function HelpIndex({ member }: { member: boolean }) {
   const t = useTranslations('help');
   const how = useTranslations('how');
+  const navigation = useTranslations('navigation');
   const pages = [
     { href: emergencyCard, name: t('emergency.title'), note: t('index.emergencyNote') },
     { href: '/help/safety', name: t('index.safety'), note: t('index.safetyNote') },
@@ -51,6 +55,10 @@ export function HelpIndex({ member }: { member: boolean }) {
           </ul>
         </section>
       </div>
+      <p className="flex items-center gap-2 border-t border-rule pt-1 text-body">
+        {navigation('language.label')}
+        {member ? <LanguageButton /> : <LanguageLinks className={`inline-flex min-h-11 items-center ${textLink}`} />}
+      </p>
     </div>
   );
 }

@@ -5,6 +5,7 @@ import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
 import { Sheet } from '@/components/ui/sheet';
 import { ringOf } from './faces';
+import { LanguageButton } from './language-button';
 import type { HouseholdFrame } from './member';
 import { PageLink } from './page-link';
 import { emergencyCard } from './places';
@@ -36,7 +37,10 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
             {t('youAre', { name: frame.you.name, role: t(`role.${frame.you.role}`) })}
           </span>
         </span>
-        <SignOutButton problem="above" />
+        <span className="flex items-center gap-4">
+          <LanguageButton problem="above" />
+          <SignOutButton problem="above" />
+        </span>
       </div>
     </Sheet>
   );

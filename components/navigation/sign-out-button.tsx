@@ -6,9 +6,9 @@ import { classNames } from '@/components/ui/class-names';
 import { textLink } from '@/components/ui/text-link';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { leaveFor, signOut } from '@/lib/client/session';
+import { DoorProblem, type ProblemSide } from './door-problem';
 
-/** At the foot of a phone the words of a problem stand above the button, in a bar below it. */
-export type SignOutButtonProps = { className?: string; problem?: 'above' | 'below' };
+export type SignOutButtonProps = { className?: string; problem?: ProblemSide };
 
 export function SignOutButton({ className, problem = 'below' }: SignOutButtonProps) {
   const t = useTranslations('navigation');
@@ -28,14 +28,7 @@ export function SignOutButton({ className, problem = 'below' }: SignOutButtonPro
       >
         {busy ? t('signingOut') : t('signOut')}
       </button>
-      {leaving.isError ? (
-        <span
-          role="alert"
-          className={`absolute right-0 z-10 w-64 border-due border-ink bg-paper-lift p-3 text-small font-emphasis text-terra-ink ${problem === 'above' ? 'bottom-full' : 'top-full'}`}
-        >
-          {words(leaving.error)}
-        </span>
-      ) : null}
+      {leaving.isError ? <DoorProblem side={problem}>{words(leaving.error)}</DoorProblem> : null}
     </span>
   );
 }

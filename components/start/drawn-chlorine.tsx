@@ -76,7 +76,7 @@ export function DrawnChlorine({ days }: { days: readonly string[] }) {
       <Words hour={3} height={0.83}>
         <b className="font-strong text-ink">{t('tested')}</b>
       </Words>
-      <Words hour={drawnCheck + 2} height={0.1}>
+      <Words hour={drawnCheck - 2} height={0.1} before>
         <b className="font-strong text-ink">{t('quickCheck')}</b>
       </Words>
       <Words hour={4} height={0.14}>
@@ -132,12 +132,13 @@ function TestDot() {
   return <span className="block size-2.75 rounded-full border-[1.8px] border-ink bg-paper-lift" />;
 }
 
-type WordsProps = { hour: number; height: number; children: React.ReactNode };
+/** `before`: they end at the hour instead of beginning there. */
+type WordsProps = { hour: number; height: number; before?: boolean; children: React.ReactNode };
 
-function Words({ hour, height, children }: WordsProps) {
+function Words({ hour, height, before = false, children }: WordsProps) {
   return (
     <span
-      className="absolute -translate-y-1/2 text-chart whitespace-nowrap"
+      className={`absolute -translate-y-1/2 text-chart whitespace-nowrap ${before ? '-translate-x-full' : ''}`}
       style={{ left: `${across(hour)}%`, top: `${down(height)}%` }}
     >
       {children}

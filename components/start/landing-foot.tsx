@@ -1,4 +1,5 @@
 import { useTranslations } from 'next-intl';
+import { LanguageLinks } from '@/components/navigation/language-links';
 import { PageLink } from '@/components/navigation/page-link';
 import { InlineStop, StopWord } from '@/components/ui/callout';
 import { emergencyCard } from '@/components/navigation/places';
@@ -30,6 +31,7 @@ export function LandingFoot() {
           <PageLink href="/help" className={link}>
             {navigation('help')}
           </PageLink>
+          <LanguageLinks className={link} />
         </nav>
       </div>
     </footer>

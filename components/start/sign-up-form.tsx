@@ -1,6 +1,6 @@
 'use client';
 
-import { useTranslations } from 'next-intl';
+import { useLocale, useTranslations } from 'next-intl';
 import { PageLink } from '@/components/navigation/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { useState } from 'react';
@@ -10,6 +10,7 @@ import { Segments } from '@/components/ui/segments';
 import { TextField } from '@/components/ui/text-field';
 import { useLeftAlone } from '@/components/ui/use-left-alone';
 import { browserTimeZone, signUp } from '@/lib/client/session';
+import { localeIn } from '@/lib/schemas/languages';
 import type { SignUp } from '@/lib/schemas/account';
 import { looksLikeEmail } from './email-shape';
 import { PasswordField } from './password-field';
@@ -23,6 +24,7 @@ export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
   const t = useTranslations('start.signUp');
   const form = useTranslations('start.form');
   const [unitSystem, setUnitSystem] = useState(likelyUnits);
+  const language = useLocale();
   const alone = useLeftAlone();
   const { problems, failure, busy, forgive, submit } = useEntryForm(
     fields,
@@ -40,7 +42,7 @@ export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
         householdName: householdName.trim(),
         timeZone: browserTimeZone(),
         unitSystem,
-        locale: navigator.language,
+        locale: localeIn(language, navigator.language),
       }),
   );
   return (

@@ -82,7 +82,7 @@ function HighAndLow({ day, left }: { day: SheetDay; left: number }) {
   return (['high', 'low'] as const).map((which, index) => (
     <text key={which} x={left} y={laneTop.highLow + 13 + index * 14} fontSize={SMALL} className="fill-ink">
       <tspan className="font-strong">{units.figure(extremes[which].value, 'freeChlorine')}</tspan>
-      <tspan dx="5">{times.partName(extremes[which].part)}</tspan>
+      <tspan dx="5">{times.partShort(extremes[which].part)}</tspan>
     </text>
   ));
 }

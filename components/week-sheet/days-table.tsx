@@ -14,7 +14,7 @@ export function DaysTable() {
   const times = useTimes();
   const units = useUnits();
   const extremeWords = ({ value, part }: Extreme) =>
-    t('dayPart', { day: units.figure(value, 'freeChlorine'), part: times.partName(part) });
+    t('figureAt', { figure: units.figure(value, 'freeChlorine'), part: times.partName(part) });
   return (
     <Table
       caption={t('table.captionDays')}

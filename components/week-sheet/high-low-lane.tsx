@@ -53,7 +53,7 @@ function ExtremeLine({ name, extreme: { value, part } }: { name: string; extreme
       <dt className="sr-only">{name}</dt>
       <dd className="flex gap-2.25 bg-transparent whitespace-nowrap">
         <b className="text-ink">{units.figure(value, 'freeChlorine')}</b>
-        <span>{times.partName(part)}</span>
+        <span>{times.partShort(part)}</span>
       </dd>
     </div>
   );

@@ -22,6 +22,8 @@ export function useTimes() {
   return {
     today,
     partName: (part: PartOfDay) => t(`part.${part}`),
+    /** Beside a figure, in a place that says that it tells when. */
+    partShort: (part: PartOfDay) => t(`partShort.${part}`),
     /** "Thursday evening", "this evening": the part that holds an instant. */
     partAt: (instant: number) => partOn(spokenPart(instant, timeZone)),
     /** The first part that begins at an instant or after it: what may be said of a time to wait for. */

@@ -21,6 +21,7 @@ export async function listValidMemberships(db: DatabaseOrTransaction, personId: 
       handlesChemicals: memberships.handlesChemicals,
       safetyCardReadAt: memberships.safetyCardReadAt,
       personName: people.name,
+      language: people.language,
       household: households,
       poolCompletedAt: pools.completedAt,
     })

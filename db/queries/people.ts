@@ -2,6 +2,7 @@ import 'server-only';
 import { eq } from 'drizzle-orm';
 import type { DatabaseOrTransaction } from '@/db/client';
 import { people } from '@/db/schema';
+import type { Language } from '@/lib/schemas/languages';
 import type { SystemScope } from '@/lib/schemas/scope';
 
 /** @returns "taken" when somebody has this e-mail already: the unique index decides, also between two at once. */
@@ -21,4 +22,13 @@ export async function insertPerson(
 export async function findPersonByEmail(db: DatabaseOrTransaction, _scope: SystemScope, email: string) {
   const [person] = await db.select().from(people).where(eq(people.email, email));
   return person ?? null;
+}
+
+/** Nobody but the person chooses it, and no household sees it: the caller has the id from the session. */
+export async function setPersonLanguage(
+  db: DatabaseOrTransaction,
+  personId: string,
+  language: Language,
+): Promise<void> {
+  await db.update(people).set({ language }).where(eq(people.id, personId));
 }

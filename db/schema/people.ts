@@ -1,5 +1,6 @@
 import { sql } from 'drizzle-orm';
 import { check, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import { languages } from '@/lib/schemas/languages';
 
 export const people = sqliteTable(
   'people',
@@ -10,6 +11,8 @@ export const people = sqliteTable(
     email: text('email').unique(),
     /** Argon2id in its PHC text form. */
     passwordHash: text('password_hash'),
+    /** The language of the screen; mail follows the household's locale. */
+    language: text('language', { enum: languages }).notNull().default('en'),
     createdAt: integer('created_at', { mode: 'timestamp_ms' }).notNull(),
   },
   (table) => [

@@ -2,6 +2,7 @@ import 'server-only';
 import { listValidMemberships } from '@/db/queries/memberships';
 import type { DatabaseOrTransaction } from '@/db/client';
 import { AppError } from '@/lib/errors';
+import { type Language, localeIn } from '@/lib/schemas/languages';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import type { Role } from '@/lib/schemas/week-sheet';
 import type { UnitSystem } from '@/lib/units/unit';
@@ -18,6 +19,9 @@ export type HouseholdAccess = {
   handlesChemicals: boolean;
   timeZone: string;
   unitSystem: UnitSystem;
+  /** The person's, for the screen. */
+  language: Language;
+  /** How days and numbers are written: in the person's language, as where the household is at home. */
   locale: string;
   demo: boolean;
   /** Whether the first run is finished. */
@@ -56,7 +60,8 @@ export async function proveHousehold(
     handlesChemicals: membership.handlesChemicals && safetyCardCounts(safetyCardReadAt, now),
     timeZone: household.timeZone,
     unitSystem: household.unitSystem,
-    locale: household.locale,
+    language: membership.language,
+    locale: localeIn(membership.language, household.locale),
     demo: household.demo,
     poolCompleted: membership.poolCompletedAt !== null,
   };

@@ -3,8 +3,10 @@ import { createHmac } from 'node:crypto';
 import { type Database, database } from '@/db/client';
 import { environment, now as wallClock } from '@/lib/env';
 import { AppError } from '@/lib/errors';
+import type { Language } from '@/lib/schemas/languages';
 import { type HouseholdAccess, proveHousehold } from './household-access';
 import { type SignedIn, sessionsOf } from './sessions';
+import { languageCookieOf, visitLanguage } from './visit-language';
 
 /** One request, as services that know no household see it. */
 export type Visit = {
@@ -16,6 +18,10 @@ export type Visit = {
   enter(personId: string, householdId: string | null): Promise<void>;
   /** Signs out on this device. */
   leave(): Promise<void>;
+  /** What this device asks to be spoken to in. */
+  language: Language;
+  /** Keeps another language for this device. */
+  speak(language: Language): void;
   /** Names something that is counted, such as an e-mail or the address of the visitor, without giving it away. */
   keyOf(what: string, value: string): string;
   /** Network address, as far as it can be known. */
@@ -43,6 +49,8 @@ export async function openVisit(
     now,
     cookies,
     signedIn: found?.signedIn ?? null,
+    language: visitLanguage(headers),
+    speak: (language: Language) => void cookies.push(languageCookieOf(language, { secure })),
     // A proxy in front appends the address it saw. Without one this can be what the visitor claims, so nothing that
     // matters relies on it alone: sign-in is also limited by e-mail.
     address: headers.get('x-forwarded-for')?.split(',').at(-1)?.trim() ?? 'unknown',

@@ -1,4 +1,5 @@
 import type { Entered, SignIn, SignUp } from '@/lib/schemas/account';
+import type { LanguageChoice } from '@/lib/schemas/language-choice';
 import { fetchJson, type ReplyParser } from './fetch-json';
 import { forgetEmergencyCard } from './kept-card';
 
@@ -34,6 +35,11 @@ export function signUp(entry: SignUp): Promise<Entered> {
 export async function signOut(): Promise<void> {
   await fetchJson('/api/sign-out', nothing, { method: 'POST' });
   await forgetEmergencyCard();
+}
+
+/** Speaks another language to whoever is signed in, on all of their devices. */
+export async function chooseLanguage(choice: LanguageChoice): Promise<void> {
+  await fetchJson('/api/language', nothing, { method: 'PUT', body: choice });
 }
 
 /** Opens a private copy of the demo household; the cookie comes with the reply. */

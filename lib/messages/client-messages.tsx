@@ -1,5 +1,6 @@
 import { NextIntlClientProvider } from 'next-intl';
-import { catalogue, type Namespace } from './catalogue';
+import { getLocale } from 'next-intl/server';
+import { catalogues, type Namespace } from './catalogue';
 
 /** The words that every page's controls need in the browser. */
 const everywhere: readonly Namespace[] = ['common', 'navigation', 'problems'];
@@ -10,7 +11,7 @@ const everywhere: readonly Namespace[] = ['common', 'navigation', 'problems'];
  *
  * @param parts of namespaces of which only some words are needed: the names of their first level
  */
-export function ClientMessages({
+export async function ClientMessages({
   namespaces = [],
   parts = {},
   children,
@@ -19,6 +20,7 @@ export function ClientMessages({
   parts?: Partial<Record<Namespace, readonly string[]>>;
   children: React.ReactNode;
 }) {
+  const catalogue = catalogues[await getLocale()];
   const whole = [...everywhere, ...namespaces].map((name) => [name, catalogue[name]] as const);
   const some = Object.entries(parts).map(([name, keys]) => [name, pick(catalogue[name as Namespace], keys)] as const);
   const messages = Object.fromEntries([...some, ...whole]);

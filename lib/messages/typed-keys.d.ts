@@ -1,8 +1,9 @@
-import type { Catalogue } from './catalogue';
+import type { Language } from '@/lib/schemas/languages';
+import type { Catalogue } from './english';
 
 declare module 'next-intl' {
   interface AppConfig {
-    Locale: 'en';
+    Locale: Language;
     Messages: Catalogue;
   }
 }

@@ -1,5 +1,5 @@
 import { useTranslations } from 'next-intl';
-import type { Catalogue } from './catalogue';
+import type { Catalogue } from './english';
 
 type ProblemCode = keyof Catalogue['problems'];
 

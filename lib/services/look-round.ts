@@ -34,7 +34,7 @@ export async function lookRound(visit: Visit): Promise<Entered> {
         'too-many-requests',
         'Many people are looking round just now. Try again in an hour, or sign up.',
       );
-    return makeCopy(tx, scope, original, now);
+    return makeCopy(tx, scope, original, visit);
   });
   await visit.enter(copy.personId, copy.householdId);
   return { next };
@@ -46,7 +46,9 @@ async function looksRoundAlready({ db, signedIn, now }: Visit): Promise<boolean>
   return memberships.some(({ household }) => household.demo && household.id === signedIn.householdId);
 }
 
-async function makeCopy(tx: Transaction, scope: SystemScope, original: ProvenHouseholdId, now: Date) {
+type Looking = Pick<Visit, 'now' | 'language'>;
+
+async function makeCopy(tx: Transaction, scope: SystemScope, original: ProvenHouseholdId, { now, language }: Looking) {
   const householdId = householdOfSystem(scope, randomUUID());
   const personId = randomUUID();
   const idOf = (id: string) => derivedId(householdId, id);
@@ -59,7 +61,7 @@ async function makeCopy(tx: Transaction, scope: SystemScope, original: ProvenHou
     { id: personId, name: demoPeople.visitor, role: 'owner' as const },
   ];
   for (const { id, name, role } of people) {
-    await insertPerson(tx, scope, { id, name, createdAt: now });
+    await insertPerson(tx, scope, { id, name, language, createdAt: now });
     await insertMembership(tx, scope, {
       ...{ id: randomUUID(), householdId, personId: id, role, validFrom: now },
       ...{ handlesChemicals: true, safetyCardReadAt: now },

@@ -10,6 +10,7 @@ import { systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import type { Entered, SignUp } from '@/lib/schemas/account';
+import { languageOf } from '@/lib/schemas/languages';
 
 /** Makes an account with a household of its own, whose owner the person is, and signs in. */
 export async function signUp(visit: Visit, account: SignUp): Promise<Entered> {
@@ -24,7 +25,14 @@ export async function signUp(visit: Visit, account: SignUp): Promise<Entered> {
   const passwordHash = await hashPassword(account.password);
   const { name, email, householdName, timeZone, unitSystem, locale } = account;
   await inWriteTransaction(db, async (tx) => {
-    const added = await insertPerson(tx, scope, { id: personId, name, email, passwordHash, createdAt: now });
+    const added = await insertPerson(tx, scope, {
+      id: personId,
+      name,
+      email,
+      passwordHash,
+      language: languageOf(locale),
+      createdAt: now,
+    });
     if (added === 'taken')
       throw refusal('conflict', 'email', 'There is an account with this e-mail already. Sign in instead.');
     await insertHousehold(tx, scope, {

@@ -5,7 +5,14 @@ import { call, routePatterns, serveFreshDatabase, signedInAs, writeMethods } fro
 import { aHousehold, aMember } from '@/tests/support/test-database';
 
 /** Writes that are about a person or a device and about no household. */
-const ofThePerson = ['/api/sign-up', '/api/sign-in', '/api/sign-out', '/api/look-round', '/api/households/chosen'];
+const ofThePerson = [
+  '/api/sign-up',
+  '/api/sign-in',
+  '/api/sign-out',
+  '/api/look-round',
+  '/api/language',
+  '/api/households/chosen',
+];
 /** What answers when no route does. */
 const unknown = '/api/[...path]';
 

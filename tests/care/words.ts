@@ -1,5 +1,5 @@
 import { createTranslator } from 'next-intl';
-import { catalogue } from '@/lib/messages/catalogue';
+import { english } from '@/lib/messages/english';
 
 type Words = { [name: string]: string | Words };
 
@@ -13,7 +13,7 @@ function sentencesIn(words: Words, before: string): Sentence[] {
 }
 
 /** Every message that can stand on a screen. */
-export const everySentence: readonly Sentence[] = Object.entries(catalogue).flatMap(([namespace, words]) =>
+export const everySentence: readonly Sentence[] = Object.entries(english).flatMap(([namespace, words]) =>
   sentencesIn(words, `${namespace}: `),
 );
 
@@ -24,7 +24,7 @@ export function written(at: string): string {
   return found.text;
 }
 
-const translator = createTranslator({ locale: 'en', messages: catalogue as Words, onError: fail });
+const translator = createTranslator({ locale: 'en', messages: english as Words, onError: fail });
 
 /** The message at a place with its figures filled in and its tags taken out. */
 export function said(at: string, figures: Record<string, string | number> = {}): string {

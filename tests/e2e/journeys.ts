@@ -17,6 +17,7 @@ import { measuring } from './journeys/measuring';
 import { scope } from './journeys/scope';
 import { paper } from './journeys/paper';
 import { situations } from './journeys/situations';
+import { choosingLanguage, inSpanish, spanishPages } from './journeys/spanish';
 import { stop } from './journeys/stop';
 import { tryIt } from './journeys/try-it';
 import { throughTheWeeks } from './journeys/through-the-weeks';
@@ -27,6 +28,8 @@ export const journeys: readonly Journey[] = [
   lookRound,
   ...looks,
   firstWeek,
+  inSpanish,
+  spanishPages,
   byKeyboard,
   badForms,
   badRequests,
@@ -44,6 +47,7 @@ export const journeys: readonly Journey[] = [
   cards,
   cardOffline,
   escape,
+  choosingLanguage,
   lateCode,
   headers,
   measuring,

@@ -2,7 +2,7 @@ import { renderHook } from '@testing-library/react';
 import { expect, it } from 'vitest';
 import { RequestProblem } from '@/lib/client/fetch-json';
 import { AppError } from '@/lib/errors';
-import { catalogue } from '@/lib/messages/catalogue';
+import { english } from '@/lib/messages/english';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { Surroundings } from '@/tests/support/with-words';
 
@@ -12,8 +12,8 @@ const wordsFor = (problem: unknown) => {
 };
 
 it('has a sentence for each code', () => {
-  expect(wordsFor(new RequestProblem('no-connection', 'fetch failed'))).toBe(catalogue.problems['no-connection']);
-  expect(wordsFor(new AppError('engine-busy', 'queue full'))).toBe(catalogue.problems['engine-busy']);
+  expect(wordsFor(new RequestProblem('no-connection', 'fetch failed'))).toBe(english.problems['no-connection']);
+  expect(wordsFor(new AppError('engine-busy', 'queue full'))).toBe(english.problems['engine-busy']);
 });
 
 it('leaves it to the server to say what someone may not do', () => {
@@ -29,5 +29,5 @@ it.each([
   null,
   { code: 'conflict' },
 ])('gives away nothing of a fault: %s', (problem) => {
-  expect(wordsFor(problem)).toBe(catalogue.problems.unexpected);
+  expect(wordsFor(problem)).toBe(english.problems.unexpected);
 });

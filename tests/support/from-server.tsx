@@ -6,7 +6,7 @@ import { vi } from 'vitest';
 import { earlyPressesScript } from '@/components/ui/early-presses';
 import { UiProvider } from '@/components/ui/ui-provider';
 import { Providers } from '@/lib/client/providers';
-import { catalogue } from '@/lib/messages/catalogue';
+import { english } from '@/lib/messages/english';
 
 /** A page as the server drew it, before anybody listens; whatever it asks for is written down and not answered. */
 export function fromServer(page: React.ReactElement) {
@@ -18,7 +18,7 @@ export function fromServer(page: React.ReactElement) {
   new Function(earlyPressesScript)();
   const place = document.createElement('div');
   const element = (
-    <NextIntlClientProvider locale="en" timeZone="UTC" messages={catalogue}>
+    <NextIntlClientProvider locale="en" timeZone="UTC" messages={english}>
       <Providers>
         <UiProvider>{page}</UiProvider>
       </Providers>

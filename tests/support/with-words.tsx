@@ -2,13 +2,13 @@ import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { render } from '@testing-library/react';
 import { NextIntlClientProvider } from 'next-intl';
 import { UiProvider } from '@/components/ui/ui-provider';
-import { catalogue } from '@/lib/messages/catalogue';
+import { english } from '@/lib/messages/english';
 
 /** What stands round every page: the words, the query client, the primitives' own provider. */
 export function Surroundings({ children }: { children: React.ReactNode }) {
   const client = new QueryClient({ defaultOptions: { queries: { retry: false }, mutations: { retry: false } } });
   return (
-    <NextIntlClientProvider locale="en" timeZone="UTC" messages={catalogue} onError={fail}>
+    <NextIntlClientProvider locale="en" timeZone="UTC" messages={english} onError={fail}>
       <QueryClientProvider client={client}>
         <UiProvider>{children}</UiProvider>
       </QueryClientProvider>

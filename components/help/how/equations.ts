@@ -1,4 +1,4 @@
-import type { Catalogue } from '@/lib/messages/catalogue';
+import type { Catalogue } from '@/lib/messages/english';
 import type { HowPage } from '@/lib/client/worked-out/how-page';
 import { numbersInEquations } from '@/lib/client/worked-out/numbers-in-equations';
 

@@ -10,7 +10,14 @@ const refusals = [401, 403, 404, 405, 409, 413, 415, 422];
 /** What tells about the machine and not about the mistake. */
 const technical =
   /\bat .+:\d+:\d+|\.tsx?\b|node_modules|TypeError|SyntaxError|SQLITE|undefined|\bNaN\b|\[object|expected \w+, received|Invalid input|Unexpected token|ZodError/i;
-const publicRoutes = ['/api/health', '/api/sign-in', '/api/sign-out', '/api/sign-up', '/api/look-round'];
+const publicRoutes = [
+  '/api/health',
+  '/api/sign-in',
+  '/api/sign-out',
+  '/api/sign-up',
+  '/api/look-round',
+  '/api/language',
+];
 
 /** What no page of ours would send: refused in words, with nothing written. */
 export const badRequests: Journey = {

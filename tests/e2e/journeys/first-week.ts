@@ -109,7 +109,7 @@ async function openWeek(page: Page): Promise<void> {
 }
 
 /** One tap, and the way back. */
-async function tickAndUndo(stage: Stage, page: Page, planned: PlanDose, sheet: Sheets): Promise<void> {
+export async function tickAndUndo(stage: Stage, page: Page, planned: PlanDose, sheet: Sheets): Promise<void> {
   await openWeek(page);
   const tickHere = page.getByText(words('doses.action.given'), { exact: true }).first();
   stage.check('before its first dose the Stop of a product is to be read', !(await tickHere.isVisible()));
@@ -194,7 +194,7 @@ async function crash(stage: Stage, server: Server, ines: Person): Promise<void> 
   stage.check('and is no double dose', doubtful?.includes('suspected-double-dose') === false, doubtful);
 }
 
-async function describeEverything(stage: Stage, page: Page): Promise<void> {
+export async function describeEverything(stage: Stage, page: Page): Promise<void> {
   await signUp(page, account);
   await answerScope(page);
   await goOn(page, 'scope', '/first-run/size');
@@ -223,7 +223,7 @@ async function describeEverything(stage: Stage, page: Page): Promise<void> {
   await page.getByText(words('week.state.firstTitle')).waitFor();
 }
 
-async function enterFullTest(stage: Stage, page: Page): Promise<void> {
+export async function enterFullTest(stage: Stage, page: Page): Promise<void> {
   await page
     .getByRole('link', { name: words('week.next.enter') })
     .first()

@@ -90,7 +90,7 @@ export async function addProduct(
 }
 
 export async function answerLabel(page: Page): Promise<void> {
-  await choice(page, 'At 4 mg/L or less').click();
+  await choice(page, words('pool.label.limit.at').replace('{limit}', '4')).click();
 }
 
 /** Types what the drop kit shows, in the fields' own order. */

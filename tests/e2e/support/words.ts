@@ -1,15 +1,25 @@
+import { AsyncLocalStorage } from 'node:async_hooks';
 import { readFileSync } from 'node:fs';
+import type { Language } from '@/lib/schemas/languages';
 import { inRoot } from './place';
 
 type Tree = { [name: string]: string | Tree };
 
 const catalogues = new Map<string, Tree>();
 
+const spoken = new AsyncLocalStorage<Language>();
+
+/** Runs a part of a journey whose person reads this language: all words that it looks for are in it. */
+export function inLanguage<Result>(language: Language, run: () => Promise<Result>): Promise<Result> {
+  return spoken.run(language, run);
+}
+
 function catalogueOf(namespace: string): Tree {
-  const known = catalogues.get(namespace);
+  const file = `${spoken.getStore() ?? 'en'}/${namespace}.json`;
+  const known = catalogues.get(file);
   if (known) return known;
-  const tree = JSON.parse(readFileSync(inRoot('lib/messages/en', `${namespace}.json`), 'utf8')) as Tree;
-  catalogues.set(namespace, tree);
+  const tree = JSON.parse(readFileSync(inRoot('lib/messages', file), 'utf8')) as Tree;
+  catalogues.set(file, tree);
   return tree;
 }
 

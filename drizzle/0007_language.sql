@@ -1,0 +1,1 @@
+ALTER TABLE `people` ADD `language` text DEFAULT 'en' NOT NULL;

@@ -1,0 +1,49 @@
+import common from './es/common.json';
+import doses from './es/doses.json';
+import events from './es/events.json';
+import firstRun from './es/first-run.json';
+import help from './es/help.json';
+import house from './es/house.json';
+import how from './es/how.json';
+import howConstants from './es/how-constants.json';
+import howExamples from './es/how-examples.json';
+import learnt from './es/learnt.json';
+import navigation from './es/navigation.json';
+import pool from './es/pool.json';
+import problems from './es/problems.json';
+import readings from './es/readings.json';
+import rounds from './es/rounds.json';
+import situations from './es/situations.json';
+import start from './es/start.json';
+import tryOut from './es/try-out.json';
+import units from './es/units.json';
+import verdict from './es/verdict.json';
+import week from './es/week.json';
+import weekPrint from './es/week-print.json';
+import type { Catalogue } from './english';
+
+/** The same words in Spanish, as they are said in Spain and in America alike. */
+export const spanish: Catalogue = {
+  common,
+  doses,
+  events,
+  'first-run': firstRun,
+  help,
+  house,
+  how,
+  'how-constants': howConstants,
+  'how-examples': howExamples,
+  learnt,
+  navigation,
+  pool,
+  problems,
+  readings,
+  rounds,
+  situations,
+  start,
+  'try-out': tryOut,
+  units,
+  verdict,
+  week,
+  'week-print': weekPrint,
+};
