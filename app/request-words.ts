@@ -1,7 +1,5 @@
-import { headers } from 'next/headers';
 import { getRequestConfig } from 'next-intl/server';
-import { findHousehold } from '@/lib/auth/page-gate';
-import { visitLanguage } from '@/lib/auth/visit-language';
+import { pageLanguage } from '@/lib/auth/page-gate';
 import { catalogues } from '@/lib/messages/catalogue';
 
 /**
@@ -10,6 +8,6 @@ import { catalogues } from '@/lib/messages/catalogue';
  * disagreeing.
  */
 export default getRequestConfig(async () => {
-  const locale = (await findHousehold())?.access.language ?? visitLanguage(await headers());
+  const locale = await pageLanguage();
   return { locale, timeZone: 'UTC', messages: catalogues[locale] };
 });

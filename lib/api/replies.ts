@@ -1,6 +1,8 @@
 import 'server-only';
 import { AppError, type ErrorCode, type FieldProblem } from '@/lib/errors';
 import { logFault } from '@/lib/log';
+import { answerIn } from '@/lib/messages/answers';
+import type { Language } from '@/lib/schemas/languages';
 import { apiHeaders } from './headers';
 
 /** Complete by construction: a new code without a status does not compile. */
@@ -42,16 +44,21 @@ export function invalidInput(problems: readonly FieldProblem[]): AppError {
 }
 
 /** Turns whatever was thrown into HTTP. What nobody foresaw says nothing about itself but an id to ask for. */
-export function problemReply(error: unknown, about: { method: string; path: string }): Response {
+export function problemReply(error: unknown, about: { method: string; path: string }, language: Language): Response {
   if (error instanceof RequestRefusal) {
     const { code, message, status } = error;
-    return jsonReply({ error: { code, message, problems: [] } }, status);
+    return jsonReply({ error: { code, message: answerIn(language, message), problems: [] } }, status);
   }
   if (error instanceof AppError) {
-    const { code, message, problems } = error;
+    const { code } = error;
+    const message = answerIn(language, error.message);
+    const problems = error.problems.map((problem) => ({ ...problem, message: answerIn(language, problem.message) }));
     const wait = tryAgainAfter[code];
     return jsonReply({ error: { code, message, problems } }, statusOf[code], wait ? { 'retry-after': wait } : {});
   }
   const id = logFault(error, about);
-  return jsonReply({ error: { code: 'unexpected', message: 'Something went wrong on our side.', id } }, 500);
+  return jsonReply(
+    { error: { code: 'unexpected', message: answerIn(language, 'Something went wrong on our side.'), id } },
+    500,
+  );
 }

@@ -11,6 +11,7 @@ import {
   type Visit,
 } from '@/lib/auth/visit';
 import type { SignedIn } from '@/lib/auth/sessions';
+import { visitLanguage } from '@/lib/auth/visit-language';
 import { checkInput } from '@/lib/schemas/problems';
 import { readJson } from './read-body';
 import { invalidInput, jsonReply, problemReply } from './replies';
@@ -67,9 +68,11 @@ function answering<Context, Input extends z.ZodType, Params extends z.ZodType, R
   contextOf: (visit: OpenVisit) => Promise<Context>,
 ): Handler {
   return async (request, segment) => {
+    let language = visitLanguage(request.headers);
     try {
       assertSameOrigin(request);
       const visit = await openVisit(request.headers);
+      language = visit.language;
       const context = await contextOf(visit);
       const params = checked(route.params, (await segment?.params) ?? {});
       const input = checked(route.input, route.input && (await sent(request)));
@@ -77,7 +80,7 @@ function answering<Context, Input extends z.ZodType, Params extends z.ZodType, R
       for (const cookie of visit.cookies) reply.headers.append('set-cookie', cookie);
       return reply;
     } catch (error) {
-      return problemReply(error, { method: request.method, path: new URL(request.url).pathname });
+      return problemReply(error, { method: request.method, path: new URL(request.url).pathname }, language);
     }
   };
 }

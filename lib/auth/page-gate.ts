@@ -4,12 +4,20 @@ import { redirect } from 'next/navigation';
 import { cache } from 'react';
 import { chooseSessionHousehold } from '@/db/queries/sessions';
 import { AppError } from '@/lib/errors';
+import type { Language } from '@/lib/schemas/languages';
 import { proveHousehold } from './household-access';
 import { type HouseholdVisit, householdVisitOf, openVisit } from './visit';
 
+const openPage = cache(async () => openVisit(await headers()));
+
+/** What to speak on a page. */
+export async function pageLanguage(): Promise<Language> {
+  return (await openPage()).language;
+}
+
 /** What a page is about, looked up once however many parts of it ask; null when nobody is signed in. */
 export const findHousehold = cache(async (): Promise<HouseholdVisit | null> => {
-  const visit = await openVisit(await headers());
+  const visit = await openPage();
   if (!visit.signedIn) return null;
   try {
     return await householdVisitOf(visit);

@@ -4,10 +4,12 @@ import { DrizzleSQLiteAdapter } from '@lucia-auth/adapter-drizzle';
 import { generateIdFromEntropySize, Lucia, TimeSpan } from 'lucia';
 import type { Database } from '@/db/client';
 import { people, sessions } from '@/db/schema';
+import type { Language } from '@/lib/schemas/languages';
 
 declare module 'lucia' {
   interface Register {
-    Lucia: Lucia<{ householdId: string | null }>;
+    Lucia: Lucia<{ householdId: string | null }, { language: Language }>;
+    DatabaseUserAttributes: { language: Language };
     DatabaseSessionAttributes: { householdId: string | null };
   }
 }
@@ -17,8 +19,8 @@ export type SignedIn = { sessionId: string; personId: string; householdId: strin
 
 /** Sessions in cookies. Everything that knows the session package is in this file. */
 export type Sessions = {
-  /** @returns who the cookies belong to, and the cookie to send when the session was prolonged */
-  find(cookies: string | null): Promise<{ signedIn: SignedIn; prolonged: string | null } | null>;
+  /** @returns who the cookies belong to, what they speak, and the cookie to send when the session was prolonged */
+  find(cookies: string | null): Promise<{ signedIn: SignedIn; language: Language; prolonged: string | null } | null>;
   /** @returns the new session and its cookie */
   start(personId: string, householdId: string | null): Promise<{ signedIn: SignedIn; cookie: string }>;
   /** @returns the cookie that forgets the session */
@@ -43,6 +45,7 @@ export function sessionsOf(db: Database, { secure, secret }: { secure: boolean; 
     sessionExpiresIn: new TimeSpan(30, 'd'),
     sessionCookie: { name, attributes: { secure, sameSite: 'lax', path: '/' } },
     getSessionAttributes: ({ householdId }) => ({ householdId }),
+    getUserAttributes: ({ language }) => ({ language }),
   });
   const digest = (token: string) => createHmac('sha256', secret).update(`session ${token}`).digest('base64url');
   const cookieOf = (token: string) => lucia.createSessionCookie(token).serialize();
@@ -51,11 +54,12 @@ export function sessionsOf(db: Database, { secure, secret }: { secure: boolean; 
     async find(cookies) {
       const token = tokenIn(cookies, name);
       if (token === null) return null;
-      const { session } = await lucia.validateSession(digest(token));
+      const { session, user } = await lucia.validateSession(digest(token));
       if (session === null) return null;
       const { id, userId, householdId, fresh } = session;
       return {
         signedIn: { sessionId: id, personId: userId, householdId },
+        language: user.language,
         prolonged: fresh ? cookieOf(token) : null,
       };
     },

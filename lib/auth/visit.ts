@@ -18,7 +18,7 @@ export type Visit = {
   enter(personId: string, householdId: string | null): Promise<void>;
   /** Signs out on this device. */
   leave(): Promise<void>;
-  /** What this device asks to be spoken to in. */
+  /** What to speak: the language of who is signed in, else what this device asks for. */
   language: Language;
   /** Keeps another language for this device. */
   speak(language: Language): void;
@@ -49,7 +49,7 @@ export async function openVisit(
     now,
     cookies,
     signedIn: found?.signedIn ?? null,
-    language: visitLanguage(headers),
+    language: found?.language ?? visitLanguage(headers),
     speak: (language: Language) => void cookies.push(languageCookieOf(language, { secure })),
     // A proxy in front appends the address it saw. Without one this can be what the visitor claims, so nothing that
     // matters relies on it alone: sign-in is also limited by e-mail.

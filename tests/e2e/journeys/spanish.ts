@@ -32,6 +32,8 @@ export const inSpanish: Journey = {
       await enterFullTest(stage, page);
       const ines = new Person(server);
       await borrowSession(visitor, ines);
+      const refused = (await ines.send('PUT', '/api/language', { language: 'fr' })).text;
+      stage.check('a refusal is in Spanish', refused.includes('Elige inglés o español.'), refused);
       const sheet = () => ines.must<WeekSheet>('GET', '/api/week');
       const first = nextDose(await sheet());
       if (!first) return stage.check('a dose lies ahead', false, (await sheet()).doses);
