@@ -21,10 +21,16 @@ describe('passwords', () => {
     await verifyPassword(null, 'warm up');
     const time = async (hash: string | null) => {
       const start = performance.now();
-      for (let round = 0; round < 5; round += 1) expect(await verifyPassword(hash, 'something else')).toBe(false);
+      expect(await verifyPassword(hash, 'something else')).toBe(false);
       return performance.now() - start;
     };
-    const [unknown, wrong] = [await time(null), await time(kept)];
+    // The quickest of several in turn: the machine may be busy with something else in any of them.
+    const times = { unknown: [] as number[], wrong: [] as number[] };
+    for (let round = 0; round < 7; round += 1) {
+      times.unknown.push(await time(null));
+      times.wrong.push(await time(kept));
+    }
+    const [unknown, wrong] = [Math.min(...times.unknown), Math.min(...times.wrong)];
     expect(unknown).toBeGreaterThan(wrong / 3);
     expect(unknown).toBeLessThan(wrong * 3);
   });
