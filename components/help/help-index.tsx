@@ -11,9 +11,10 @@ import { HelpHead } from './help-head';
 /**
  * The help that exists today, trouble first, and what no sheet can know.
  *
- * @param member whether somebody looks who belongs to a household with a pool
+ * @param member   whether somebody looks who belongs to a household with a pool
+ * @param signedIn whether somebody is signed in at all
  */
-export function HelpIndex({ member }: { member: boolean }) {
+export function HelpIndex({ member, signedIn }: { member: boolean; signedIn: boolean }) {
   const t = useTranslations('help');
   const how = useTranslations('how');
   const navigation = useTranslations('navigation');
@@ -57,7 +58,7 @@ export function HelpIndex({ member }: { member: boolean }) {
       </div>
       <p className="flex items-center gap-2 border-t border-rule pt-1 text-body">
         {navigation('language.label')}
-        {member ? <LanguageButton /> : <LanguageLinks className={`inline-flex min-h-11 items-center ${textLink}`} />}
+        {signedIn ? <LanguageButton /> : <LanguageLinks className={`inline-flex min-h-11 items-center ${textLink}`} />}
       </p>
     </div>
   );

@@ -10,5 +10,5 @@ export async function generateMetadata(): Promise<Metadata> {
 
 export default async function HelpPage() {
   const visit = await findHousehold();
-  return <HelpIndex member={visit?.access.poolCompleted ?? false} />;
+  return <HelpIndex member={visit?.access.poolCompleted ?? false} signedIn={visit !== null} />;
 }
