@@ -18,12 +18,14 @@ export function HelpIndex({ member, signedIn }: { member: boolean; signedIn: boo
   const t = useTranslations('help');
   const how = useTranslations('how');
   const navigation = useTranslations('navigation');
+  const privacy = useTranslations('privacy');
   const pages = [
     { href: emergencyCard, name: t('emergency.title'), note: t('index.emergencyNote') },
     { href: '/help/safety', name: t('index.safety'), note: t('index.safetyNote') },
     ...(member ? [{ href: '/house', name: t('index.house'), note: t('index.houseNote') }] : []),
     { href: '/help/how', name: how('title'), note: t('index.howNote') },
     { href: `/#${scopeAnchor}`, name: t('index.scope'), note: t('index.scopeNote') },
+    { href: '/help/privacy', name: privacy('title'), note: privacy('note') },
   ];
   const unknowns = [t('cannot.see'), t('cannot.label'), t('cannot.measure'), t('cannot.body')];
   return (

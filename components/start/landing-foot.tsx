@@ -10,6 +10,7 @@ const bold = (words: React.ReactNode) => <b className="font-emphasis text-ink">{
 export function LandingFoot() {
   const t = useTranslations('start.foot');
   const navigation = useTranslations('navigation');
+  const privacy = useTranslations('privacy');
   const link = 'inline-flex min-h-11 items-center underline decoration-1 underline-offset-[3px] whitespace-nowrap';
   return (
     <footer className="border-t border-ink pb-8">
@@ -30,6 +31,9 @@ export function LandingFoot() {
           </PageLink>
           <PageLink href="/help" className={link}>
             {navigation('help')}
+          </PageLink>
+          <PageLink href="/help/privacy" className={link}>
+            {privacy('title')}
           </PageLink>
           <LanguageLinks className={link} />
         </nav>

@@ -10,6 +10,7 @@ import howExamples from './en/how-examples.json';
 import learnt from './en/learnt.json';
 import navigation from './en/navigation.json';
 import pool from './en/pool.json';
+import privacy from './en/privacy.json';
 import problems from './en/problems.json';
 import readings from './en/readings.json';
 import rounds from './en/rounds.json';
@@ -36,6 +37,7 @@ export const english = {
   learnt,
   navigation,
   pool,
+  privacy,
   problems,
   readings,
   rounds,

@@ -10,6 +10,7 @@ import howExamples from './es/how-examples.json';
 import learnt from './es/learnt.json';
 import navigation from './es/navigation.json';
 import pool from './es/pool.json';
+import privacy from './es/privacy.json';
 import problems from './es/problems.json';
 import readings from './es/readings.json';
 import rounds from './es/rounds.json';
@@ -36,6 +37,7 @@ export const spanish: Catalogue = {
   learnt,
   navigation,
   pool,
+  privacy,
   problems,
   readings,
   rounds,

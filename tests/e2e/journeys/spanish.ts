@@ -76,7 +76,7 @@ export const choosingLanguage: Journey = {
   },
 };
 
-const beforeTheDoor = ['/', '/sign-in', '/sign-up', '/help/emergency', '/help/safety'];
+const beforeTheDoor = ['/', '/sign-in', '/sign-up', '/help/emergency', '/help/safety', '/help/privacy'];
 const inside = ['/week', '/week/print', '/test', '/pool', '/situations', '/rounds', '/house', '/help'];
 
 /** Spanish words are longer: nothing may run over at the narrowest and at the widest. */

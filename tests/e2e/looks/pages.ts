@@ -33,6 +33,7 @@ export const signedOut: readonly View[] = [
   { name: 'help', path: '/help' },
   { name: 'emergency', path: '/help/emergency' },
   { name: 'safety', path: '/help/safety' },
+  { name: 'privacy', path: '/help/privacy' },
   { name: 'not-found', path: '/there-is-no-such-page', missing: true },
 ];
 
