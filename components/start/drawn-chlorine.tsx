@@ -76,8 +76,8 @@ export function DrawnChlorine({ days }: { days: readonly string[] }) {
       <Words hour={3} height={0.83}>
         <b className="font-strong text-ink">{t('tested')}</b>
       </Words>
-      <Words hour={drawnCheck - 2} height={0.1} before>
-        <b className="font-strong text-ink">{t('quickCheck')}</b>
+      <Words hour={drawnCheck + 2} height={0.1}>
+        <b className="font-strong text-ink">{t('checked')}</b>
       </Words>
       <Words hour={4} height={0.14}>
         <i className="font-display text-[16px] text-teal-ink italic">{t('goodRange')}</i>
@@ -132,13 +132,12 @@ function TestDot() {
   return <span className="block size-2.75 rounded-full border-[1.8px] border-ink bg-paper-lift" />;
 }
 
-/** `before`: they end at the hour instead of beginning there. */
-type WordsProps = { hour: number; height: number; before?: boolean; children: React.ReactNode };
+type WordsProps = { hour: number; height: number; children: React.ReactNode };
 
-function Words({ hour, height, before = false, children }: WordsProps) {
+function Words({ hour, height, children }: WordsProps) {
   return (
     <span
-      className={`absolute -translate-y-1/2 text-chart whitespace-nowrap ${before ? '-translate-x-full' : ''}`}
+      className="absolute -translate-y-1/2 text-chart whitespace-nowrap"
       style={{ left: `${across(hour)}%`, top: `${down(height)}%` }}
     >
       {children}
