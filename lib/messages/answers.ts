@@ -3,6 +3,9 @@ import { spanishAnswers } from './spanish-answers';
 
 const answers: Record<Exclude<Language, 'en'>, Readonly<Record<string, string>>> = { es: spanishAnswers };
 
+/** Characters; what is longer repeats what somebody sent, and looking for gaps in it would keep the server busy. */
+const LONGEST = 500;
+
 type Frame = { reads: RegExp; says: string };
 const frames = new Map<string, readonly Frame[]>();
 
@@ -11,9 +14,8 @@ const frames = new Map<string, readonly Frame[]>();
  * sentence itself is the key, and what fills its gaps is translated where it is known. A sentence that is not known stays.
  */
 export function answerIn(language: Language, sentence: string): string {
-  if (language === 'en') return sentence;
-  const known = answers[language][sentence];
-  if (known !== undefined) return known;
+  if (language === 'en' || sentence.length > LONGEST) return sentence;
+  if (Object.hasOwn(answers[language], sentence)) return answers[language][sentence] ?? sentence;
   for (const { reads, says } of framesOf(language)) {
     const found = reads.exec(sentence);
     if (found) return says.replace(/\{(\d+)\}/g, (_, gap) => answerIn(language, found.groups?.[`gap${gap}`] ?? ''));

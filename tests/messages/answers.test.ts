@@ -43,6 +43,14 @@ describe('answers in Spanish', () => {
   it('leaves English, and what nobody has translated, as it is', () => {
     expect(answerIn('en', 'Write your name.')).toBe('Write your name.');
     expect(answerIn('es', 'Nobody wrote this sentence')).toBe('Nobody wrote this sentence');
+    expect(answerIn('es', 'constructor')).toBe('constructor');
+  });
+
+  it('does not look for sentences in a long text that somebody sent', () => {
+    const sent = `Wadewell does not know this field: ${'a is b; '.repeat(8000)}.`;
+    const began = performance.now();
+    expect(answerIn('es', sent)).toBe(sent);
+    expect(performance.now() - began).toBeLessThan(100);
   });
 });
 
