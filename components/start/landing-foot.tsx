@@ -29,6 +29,9 @@ export function LandingFoot() {
           <PageLink href="/help/safety" className={link}>
             {navigation('keepingSafe')}
           </PageLink>
+          <PageLink href="/help/how" className={link}>
+            {t('sources')}
+          </PageLink>
           <PageLink href="/help" className={link}>
             {navigation('help')}
           </PageLink>

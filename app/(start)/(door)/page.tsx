@@ -1,27 +1,32 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
-import { DrawnSheet } from '@/components/start/drawn-sheet';
+import { headers } from 'next/headers';
 import { Hero } from '@/components/start/hero';
 import { LandingFoot } from '@/components/start/landing-foot';
+import { likelyUnits } from '@/components/start/likely-units';
+import { SampleWeek } from '@/components/start/sample-week/sample-week';
 import { ScopeList } from '@/components/start/scope-list';
 import { ThreeReasons } from '@/components/start/three-reasons';
-import { YourWeek } from '@/components/start/your-week';
 import { DoubleRule } from '@/components/ui/double-rule';
+import { ClientMessages } from '@/lib/messages/client-messages';
+import { forPage } from '@/lib/services/for-page';
+import { showSampleWeek } from '@/lib/services/show-sample-week';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('start.landing');
   return { title: { absolute: t('title') } };
 }
 
-export default function LandingPage() {
+export default async function LandingPage() {
+  const week = await forPage(showSampleWeek());
+  const unitSystem = likelyUnits((await headers()).get('accept-language'));
   return (
     <div className="mx-auto max-w-sheet px-margin">
       <Hero />
       <DoubleRule className="hidden md:block" />
-      <div className="grid gap-x-7.5 border-t-todo border-ink md:border-t-0 lg:grid-cols-[1fr_326px]">
-        <DrawnSheet />
-        <YourWeek />
-      </div>
+      <ClientMessages namespaces={['start', 'units']}>
+        <SampleWeek week={week} unitSystem={unitSystem} />
+      </ClientMessages>
       <ThreeReasons />
       <ScopeList />
       <LandingFoot />

@@ -1,0 +1,62 @@
+import type { SampleWater, SampleWeek } from '@/lib/schemas/sample-water';
+import type { WeekPlan } from '@/lib/schemas/plan';
+import type { ReasonCode } from './codes';
+import { sampleDaylight, sampleMonday, samplePool, sampleScenario, sampleSun } from './sample-scenario';
+import { planWeek } from './index';
+
+const HOUR = 3_600_000;
+/** What is drawn is no finer than a hundredth [mg/L]. */
+const rounded = (level: number) => Math.round(level * 100) / 100;
+
+/** The week planned for a sample water: the same planner as a household's, with its safety net. */
+export function sampleWeek(water: SampleWater): SampleWeek {
+  return sampleWeekOf(water, planWeek(sampleScenario(water)));
+}
+
+/** What is drawn of a plan made for `sampleScenario(water)`. */
+export function sampleWeekOf(water: SampleWater, plan: WeekPlan): SampleWeek {
+  const { projection } = plan;
+  if (projection === null) throw new Error('The sample has every reading that a plan needs.');
+  const { p10, p50, p90, lowestLevel } = projection.freeChlorine;
+  return {
+    water,
+    tested: samplePool.freeChlorine,
+    course: plan.hours.flatMap((at, index) => {
+      const hour = hourOf(at);
+      if (hour < 0) return [];
+      return {
+        hour,
+        low: rounded(p10[index]!),
+        middle: rounded(p50[index]!),
+        high: rounded(p90[index]!),
+        lowest: rounded(lowestLevel[index]!),
+      };
+    }),
+    swimLimit: samplePool.swimLimit,
+    swims: samplePool.swims,
+    sun: { rises: sampleDaylight.rises, sets: sampleDaylight.sets },
+    sunByHour: sampleSun(water.sunshine).map(rounded),
+    doses: plan.doses.map(({ at, form, unit, amount, rise }) => ({ hour: hourOf(at), form, unit, amount, rise })),
+    quickChecks: plan.checks.filter(({ kind }) => kind === 'quick').map(({ at }) => hourOf(at)),
+    standing: standingOf(plan),
+  };
+}
+
+function standingOf({ reasons, openSwimShare }: WeekPlan): SampleWeek['standing'] {
+  const reason = (code: ReasonCode) => reasons.find((each) => each.code === code);
+  const replace = reason('replace-water-first');
+  if (replace)
+    return {
+      code: 'replace-water',
+      volume: Number(replace.volume),
+      days: Number(replace.days),
+      target: Number(replace.target),
+    };
+  const few = reason('few-open-hours');
+  if (few) return { code: 'few-open-hours', share: openSwimShare ?? 0, visits: Number(few.visits) };
+  return { code: 'planned' };
+}
+
+function hourOf(at: string): number {
+  return (Date.parse(at) - Date.parse(sampleMonday)) / HOUR;
+}
