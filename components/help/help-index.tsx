@@ -3,7 +3,7 @@ import { useTranslations } from 'next-intl';
 import { LanguageButton } from '@/components/navigation/language-button';
 import { LanguageLinks } from '@/components/navigation/language-links';
 import { PageLink } from '@/components/navigation/page-link';
-import { emergencyCard } from '@/components/navigation/places';
+import { emergencyCard } from '@/components/navigation/addresses';
 import { scopeAnchor } from '@/components/start/scope-list';
 import { textLink } from '@/components/ui/text-link';
 import { HelpHead } from './help-head';

@@ -1,6 +1,6 @@
 import { useTranslations } from 'next-intl';
 import { PageLink } from '@/components/navigation/page-link';
-import { emergencyCard } from '@/components/navigation/places';
+import { emergencyCard } from '@/components/navigation/addresses';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
 import { HelpHead } from './help-head';

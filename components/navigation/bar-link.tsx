@@ -3,7 +3,7 @@
 import { usePathname } from 'next/navigation';
 import { classNames } from '@/components/ui/class-names';
 import { PageLink } from './page-link';
-import { isCurrent } from './places';
+import { isCurrent } from './addresses';
 
 export type BarLinkProps = {
   href: string;

@@ -6,7 +6,8 @@ import { Faces } from './faces';
 import type { HouseholdFrame } from './member';
 import { OpenSituations } from './open-situations';
 import { PageLink } from './page-link';
-import { barPlaces, emergencyCard } from './places';
+import { emergencyCard } from './addresses';
+import { barPlaces } from './places';
 import { SignOutButton } from './sign-out-button';
 
 /** One line of places on a desk, no menu: what is used every week at the left, what is set up once at the right. */

@@ -8,7 +8,7 @@ import { ringOf } from './faces';
 import { LanguageButton } from './language-button';
 import type { HouseholdFrame } from './member';
 import { PageLink } from './page-link';
-import { emergencyCard } from './places';
+import { emergencyCard } from './addresses';
 import { SignOutButton } from './sign-out-button';
 
 export type MoreSheetProps = { frame: HouseholdFrame; open: boolean; onOpenChange: (open: boolean) => void };

@@ -11,7 +11,8 @@ import { useIdleFetch } from '@/components/ui/use-idle-fetch';
 import { useOpenedOnce } from '@/components/ui/use-opened-once';
 import type { HouseholdFrame } from './member';
 import { PageLink } from './page-link';
-import { isCurrent, weeklyPlaces } from './places';
+import { isCurrent } from './addresses';
+import { weeklyPlaces } from './places';
 
 const fetchMore = () => import('./more-sheet');
 const MoreSheet = dynamic(() => untilFetched(() => import('./more-sheet')).then((part) => part.MoreSheet), {

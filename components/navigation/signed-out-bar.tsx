@@ -6,7 +6,7 @@ import { textLink } from '@/components/ui/text-link';
 import { BarLink } from './bar-link';
 import { BrandMark } from './brand-mark';
 import { PageLink } from './page-link';
-import { emergencyCard } from './places';
+import { emergencyCard } from './addresses';
 import { SignOutButton } from './sign-out-button';
 import { SirenLink } from './siren-link';
 

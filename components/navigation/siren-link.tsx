@@ -1,7 +1,7 @@
 import { Siren } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { PageLink } from './page-link';
-import { emergencyCard } from './places';
+import { emergencyCard } from './addresses';
 
 /** One tap to the emergency card from every page of a phone. */
 export function SirenLink() {

@@ -6,7 +6,7 @@ import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
 import { Callout } from '@/components/ui/callout';
 import { contentId } from '@/components/navigation/skip-link';
-import { emergencyCard } from '@/components/navigation/places';
+import { emergencyCard } from '@/components/navigation/addresses';
 import type { Scope } from '@/lib/schemas/pool-profile';
 import type { PoolPlace } from './setting';
 

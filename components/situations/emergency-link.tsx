@@ -3,7 +3,7 @@
 import { Siren } from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { PageLink } from '@/components/navigation/page-link';
-import { emergencyCard } from '@/components/navigation/places';
+import { emergencyCard } from '@/components/navigation/addresses';
 import { textLink } from '@/components/ui/text-link';
 
 /** One tap from a caution to the emergency card. */

@@ -2,7 +2,7 @@ import { useTranslations } from 'next-intl';
 import { LanguageLinks } from '@/components/navigation/language-links';
 import { PageLink } from '@/components/navigation/page-link';
 import { InlineStop, StopWord } from '@/components/ui/callout';
-import { emergencyCard } from '@/components/navigation/places';
+import { emergencyCard } from '@/components/navigation/addresses';
 
 const bold = (words: React.ReactNode) => <b className="font-emphasis text-ink">{words}</b>;
 

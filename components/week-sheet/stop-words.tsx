@@ -2,7 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { PageLink } from '@/components/navigation/page-link';
-import { emergencyCard } from '@/components/navigation/places';
+import { emergencyCard } from '@/components/navigation/addresses';
 import { StopWord } from '@/components/ui/callout';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 

@@ -94,7 +94,7 @@ export function sampleSun(sunshine: number): number[] {
 
 function daylight() {
   const { sunrise, sunset } = daylightOf(midWeek, latitude, longitude);
-  if (sunrise === null || sunset === null) throw new Error('The sun rises and sets at 40 degrees north.');
+  if (sunrise === null || sunset === null) throw new Error('no sunrise at 40 degrees north');
   const hourOf = (instant: number) => 12 + (instant - midWeek) / HOUR;
   return { rises: hourOf(sunrise), sets: hourOf(sunset), length: (sunset - sunrise) / HOUR };
 }

@@ -16,22 +16,19 @@ export function sampleWeek(water: SampleWater): SampleWeek {
 /** What is drawn of a plan made for `sampleScenario(water)`. */
 export function sampleWeekOf(water: SampleWater, plan: WeekPlan): SampleWeek {
   const { projection } = plan;
-  if (projection === null) throw new Error('The sample has every reading that a plan needs.');
+  if (projection === null) throw new Error('no plan for the sample');
   const { p10, p50, p90, lowestLevel } = projection.freeChlorine;
+  const first = plan.hours.findIndex((at) => hourOf(at) >= 0);
+  const fromMonday = (levels: readonly number[]) => levels.slice(first).map(rounded);
   return {
     water,
     tested: samplePool.freeChlorine,
-    course: plan.hours.flatMap((at, index) => {
-      const hour = hourOf(at);
-      if (hour < 0) return [];
-      return {
-        hour,
-        low: rounded(p10[index]!),
-        middle: rounded(p50[index]!),
-        high: rounded(p90[index]!),
-        lowest: rounded(lowestLevel[index]!),
-      };
-    }),
+    course: {
+      low: fromMonday(p10),
+      middle: fromMonday(p50),
+      high: fromMonday(p90),
+      lowest: fromMonday(lowestLevel),
+    },
     swimLimit: samplePool.swimLimit,
     swims: samplePool.swims,
     sun: { rises: sampleDaylight.rises, sets: sampleDaylight.sets },

@@ -32,8 +32,8 @@ export type SampleDose = {
 export type SampleWeek = {
   water: SampleWater;
   tested: number;
-  /** Free chlorine hour by hour to the end of the plan, with the edges of its likely range and the lowest level. */
-  course: { hour: number; low: number; middle: number; high: number; lowest: number }[];
+  /** Free chlorine at every full hour from Monday's midnight to the end of the plan, its likely range, the lowest level. */
+  course: { low: number[]; middle: number[]; high: number[]; lowest: number[] };
   swimLimit: number;
   swims: { from: number; to: number };
   sun: { rises: number; sets: number };

@@ -8,6 +8,7 @@ import { headers } from './journeys/headers';
 import { house } from './journeys/house';
 import { byKeyboard, escape } from './journeys/keyboard';
 import { labelBoxes } from './journeys/label-boxes';
+import { landing } from './journeys/landing';
 import { lateCode } from './journeys/late-code';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
@@ -48,6 +49,7 @@ export const journeys: readonly Journey[] = [
   cardOffline,
   escape,
   choosingLanguage,
+  landing,
   lateCode,
   headers,
   measuring,

@@ -24,7 +24,7 @@ export default async function LandingPage() {
     <div className="mx-auto max-w-sheet px-margin">
       <Hero />
       <DoubleRule className="hidden md:block" />
-      <ClientMessages namespaces={['start', 'units']}>
+      <ClientMessages namespaces={['units']} parts={{ start: ['sample'] }}>
         <SampleWeek week={week} unitSystem={unitSystem} />
       </ClientMessages>
       <ThreeReasons />

@@ -2,7 +2,7 @@ import { useTranslations } from 'next-intl';
 import { GlyphShape } from '@/components/charts/product-glyph';
 import type { SampleDose, SampleWeek } from '@/lib/schemas/sample-water';
 import type { UnitSystem } from '@/lib/units/unit';
-import { across, areaOf, cutOf, down, levelAt, lineOf, pathOf, topOf, weekDays } from './sample-drawing';
+import { across, areaOf, cutOf, down, levelAt, pathOf, topOf, weekDays, weekHours } from './sample-drawing';
 import { useSampleWords } from './use-sample-words';
 
 type Props = { week: SampleWeek; before?: SampleWeek | undefined; unitSystem: UnitSystem };
@@ -16,12 +16,12 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
   const { number, days } = useSampleWords(unitSystem);
   const top = topOf(week);
   const { swimLimit, swims, tested } = week;
-  const lowest = lineOf(week, 'lowest');
-  const atLeast = Math.min(...lowest.map(({ level }) => level));
+  const { low, middle, high, lowest } = week.course;
+  const atLeast = Math.min(...lowest);
   const picture = t('picture', {
     tested: number(tested, 1),
-    low: number(Math.min(...lineOf(week, 'middle').map(({ level }) => level)), 1),
-    high: number(Math.max(...lineOf(week, 'middle').map(({ level }) => level)), 1),
+    low: number(Math.min(...middle), 1),
+    high: number(Math.max(...middle), 1),
     lowest: number(atLeast, 1),
     swimLimit: number(swimLimit),
   });
@@ -36,12 +36,12 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
           <Ground week={week} top={top} />
           <svg
             className="absolute inset-0 size-full"
-            viewBox="0 0 100 100"
+            viewBox={`0 0 ${weekHours} 100`}
             preserveAspectRatio="none"
             aria-hidden="true"
           >
             <Nights week={week} />
-            <path d={areaOf(lineOf(week, 'high'), lineOf(week, 'low'), top)} className="fill-band" />
+            <path d={areaOf(high, low, top)} className="fill-band" />
             <path
               d={pathOf(lowest, top)}
               className="fill-none stroke-ink"
@@ -51,7 +51,7 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
             {week.doses.map(({ hour, form }) => (
               <path
                 key={`${hour} ${form}`}
-                d={`M${across(hour)} ${down(levelAt(week, hour), top)}V100`}
+                d={`M${hour} ${down(levelAt(week, hour), top)}V100`}
                 className="fill-none stroke-ink"
                 strokeWidth="1.1"
                 strokeDasharray="2 3"
@@ -60,7 +60,7 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
             ))}
             {before === undefined ? null : (
               <path
-                d={pathOf(lineOf(before, 'middle'), top)}
+                d={pathOf(before.course.middle, top)}
                 className="fill-none stroke-teal-ink"
                 strokeWidth="1.6"
                 strokeDasharray="1 4"
@@ -69,7 +69,7 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
               />
             )}
             <path
-              d={pathOf(lineOf(week, 'middle'), top)}
+              d={pathOf(middle, top)}
               className="fill-none stroke-teal"
               strokeWidth="2.6"
               strokeLinejoin="round"
@@ -128,11 +128,14 @@ const isFast = ({ form }: SampleDose) => form === 'granular' || form === 'liquid
 
 const glyphs = { tablet: 'tablet', granular: 'granules', liquid: 'liquid', other: 'granules' } as const;
 
+/** Share of the lane that is hatched under the lowest level. */
+const HATCHED = 0.03;
+
 /** Water between the limits, hatching where the line may not go. */
 function Ground({ week, top }: { week: SampleWeek; top: number }) {
-  const lowest = lineOf(week, 'lowest');
-  const limit = lowest.map(({ hour }) => ({ hour, level: week.swimLimit }));
-  const below = lowest.map(({ hour, level }) => ({ hour, level: level - top * 0.03 }));
+  const { lowest } = week.course;
+  const limit = lowest.map(() => week.swimLimit);
+  const below = lowest.map((level) => level - top * HATCHED);
   return (
     <>
       <div className="absolute inset-0 bg-water-2" style={{ clipPath: cutOf(limit, lowest, top) }} aria-hidden="true" />
@@ -146,13 +149,18 @@ function Ground({ week, top }: { week: SampleWeek; top: number }) {
 }
 
 function Nights({ week: { sun } }: { week: SampleWeek }) {
-  return weekDays.map((day) => (
-    <g key={day}>
-      <rect x={across(day * 24)} y="0" width={across(sun.rises)} height="100" className="fill-night" />
-      <rect x={across(day * 24 + sun.sets)} y="0" width={across(24 - sun.sets)} height="100" className="fill-night" />
-      <path d={`M${across(day * 24)} 0V100`} className="fill-none stroke-rule" vectorEffect="non-scaling-stroke" />
-    </g>
-  ));
+  const box = (from: number, to: number) => `M${from.toFixed(1)} 0H${to.toFixed(1)}V100H${from.toFixed(1)}Z`;
+  const nights = weekDays.map((day) => box(day * 24, day * 24 + sun.rises) + box(day * 24 + sun.sets, day * 24 + 24));
+  return (
+    <>
+      <path d={nights.join('')} className="fill-night" />
+      <path
+        d={weekDays.map((day) => `M${day * 24} 0V100`).join('')}
+        className="fill-none stroke-rule"
+        vectorEffect="non-scaling-stroke"
+      />
+    </>
+  );
 }
 
 /** The limit is inked and hatched above; brackets hang from it where people swim. */

@@ -7,7 +7,7 @@ const LEAST_TOP = 6;
 
 /** The level at the top of the lane: a whole one that holds the likely range. */
 export function topOf({ course }: SampleWeek): number {
-  return Math.max(LEAST_TOP, ...course.map(({ high }) => Math.ceil(high)));
+  return Math.max(LEAST_TOP, Math.ceil(Math.max(...course.high)));
 }
 
 /** Share of the width [%]. */
@@ -16,31 +16,35 @@ export const across = (hour: number) => rounded((hour / weekHours) * 100);
 /** Share of the height, from the top [%]. */
 export const down = (level: number, top: number) => rounded((1 - level / top) * 100);
 
-type Point = { hour: number; level: number };
+/** A level at each hour from 0 on. */
+type Line = readonly number[];
 
-export function pathOf(points: readonly Point[], top: number): string {
-  return `M${points.map(({ hour, level }) => `${across(hour)} ${down(level, top)}`).join('L')}`;
+/** A line in a drawing that is `weekHours` wide and 100 high. */
+export function pathOf(line: Line, top: number): string {
+  return `M${line.map((level, hour) => `${hour} ${down(level, top)}`).join('L')}`;
 }
 
-/** The area between a line and a level or another line, closed. */
-export function areaOf(upper: readonly Point[], lower: readonly Point[], top: number): string {
-  return `${pathOf([...upper, ...lower.toReversed()], top)}Z`;
+/** The area between two lines. */
+export function areaOf(upper: Line, lower: Line, top: number): string {
+  const back = lower.map((level, hour) => `${hour} ${down(level, top)}`).toReversed();
+  return `${pathOf(upper, top)}L${back.join('L')}Z`;
 }
 
-/** The same area as CSS cuts it out of a box. */
-export function cutOf(upper: readonly Point[], lower: readonly Point[], top: number): string {
-  const points = [...upper, ...lower.toReversed()];
-  return `polygon(${points.map(({ hour, level }) => `${across(hour)}% ${down(level, top)}%`).join(',')})`;
-}
+/** Hours from one point to the next where CSS cuts an area out: the lowest level hardly moves in them. */
+const CUT_EVERY = 6;
 
-/** One line of a course. */
-export function lineOf({ course }: SampleWeek, line: 'low' | 'middle' | 'high' | 'lowest'): Point[] {
-  return course.map((point) => ({ hour: point.hour, level: point[line] }));
+/** The area between two lines as CSS cuts it out of a box. */
+export function cutOf(upper: Line, lower: Line, top: number): string {
+  const points = (line: Line) =>
+    line.flatMap((level, hour) =>
+      hour % CUT_EVERY === 0 || hour === line.length - 1 ? `${across(hour)}% ${down(level, top)}%` : [],
+    );
+  return `polygon(${[...points(upper), ...points(lower).toReversed()].join(',')})`;
 }
 
 /** The middle of the course at an hour. */
-export function levelAt({ course }: SampleWeek, hour: number): number {
-  return (course.findLast((point) => point.hour <= hour) ?? course[0])?.middle ?? 0;
+export function levelAt({ course: { middle } }: SampleWeek, hour: number): number {
+  return middle[Math.min(Math.floor(hour), middle.length - 1)] ?? 0;
 }
 
 /** Evenings on which something goes in, as days from Monday. */
@@ -51,5 +55,5 @@ export function eveningsOf({ doses }: SampleWeek): number[] {
 export const dayOf = (hour: number) => Math.floor(hour / 24);
 
 function rounded(share: number): number {
-  return Math.round(share * 100) / 100;
+  return Math.round(share * 10) / 10;
 }

@@ -28,6 +28,8 @@ export type VisitorOptions = {
   theme?: 'light' | 'dark';
   /** A finger instead of a mouse. */
   touch?: boolean;
+  /** False for a browser that runs none of the page's scripts. */
+  scripts?: boolean;
 };
 
 /** One person with a browser of their own, and everything the browser complained about. */
@@ -45,7 +47,7 @@ export class Visitor {
 
   static async open(browser: Browser, server: Server, name: string, options: VisitorOptions = {}): Promise<Visitor> {
     const { width = 1280, height = 900, timeZone = 'America/New_York', locale = 'en-US' } = options;
-    const { theme = 'light', touch = false } = options;
+    const { theme = 'light', touch = false, scripts = true } = options;
     const context = await browser.newContext({
       baseURL: server.address,
       viewport: { width, height },
@@ -55,6 +57,7 @@ export class Visitor {
       reducedMotion: 'reduce',
       hasTouch: touch,
       isMobile: touch,
+      javaScriptEnabled: scripts,
     });
     context.setDefaultTimeout(15_000);
     // The loader of TypeScript marks functions by their names, also those that run in the page.
