@@ -79,6 +79,14 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
           </svg>
           <SwimLimit week={week} top={top} />
           <Levels top={top} />
+          <Words level={swimLimit} top={top} above>
+            <b className="font-strong text-ink">{t('swimLimit', { limit: number(swimLimit) })}</b>
+            <span className="hidden lg:inline"> {t('swimLimitNote')}</span>
+          </Words>
+          <Words level={atLeast} top={top}>
+            <b className="font-strong text-ink">{t('lowestLevel', { level: number(atLeast, 1) })}</b>
+            <span className="hidden lg:inline"> {t('lowestLevelNote')}</span>
+          </Words>
           <At hour={0} level={tested} top={top}>
             <span className="block size-2.75 rounded-full border-[1.8px] border-ink bg-paper-lift" />
           </At>
@@ -96,14 +104,6 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
               ) : null}
             </At>
           ))}
-          <Words level={swimLimit} top={top} above>
-            <b className="font-strong text-ink">{t('swimLimit', { limit: number(swimLimit) })}</b>
-            <span className="hidden lg:inline"> {t('swimLimitNote')}</span>
-          </Words>
-          <Words level={atLeast} top={top}>
-            <b className="font-strong text-ink">{t('lowestLevel', { level: number(atLeast, 1) })}</b>
-            <span className="hidden lg:inline"> {t('lowestLevelNote')}</span>
-          </Words>
         </div>
         <p
           className="flex justify-between border-t border-rule-2 pt-1 text-chart text-ink-2 md:hidden"
@@ -218,7 +218,7 @@ type WordsProps = { level: number; top: number; above?: boolean; children: React
 function Words({ level, top, above = false, children }: WordsProps) {
   return (
     <span
-      className={`absolute left-2.5 bg-paper px-1 text-chart text-ink-2 ${above ? '-translate-y-[calc(100%+9px)]' : 'translate-y-3'}`}
+      className={`absolute left-2.5 bg-paper px-1 text-chart text-ink-2 ${above ? '-translate-y-[calc(100%+9px)]' : 'translate-y-4.5'}`}
       style={{ top: `${down(level, top)}%` }}
       aria-hidden="true"
     >
