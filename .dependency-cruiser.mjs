@@ -106,7 +106,7 @@ const zones = [
     libFolders('services'),
     [
       '^db/',
-      libFolders('services', 'auth', 'mail', 'push', 'weather', 'engine-worker', 'messages', ...pure),
+      libFolders('services', 'auth', 'mail', 'photos', 'push', 'weather', 'engine-worker', 'messages', ...pure),
       libFiles('errors', 'env', 'log'),
     ],
     'A service is called by routes and commands and knows neither: hand it what it needs.',
@@ -131,8 +131,8 @@ const zones = [
   ),
   onlyInto(
     'adapters-stand-alone',
-    libFolders('mail', 'push', 'weather'),
-    [libFolders('mail', 'push', 'weather', 'messages', ...plainPure), libFiles('errors', 'env', 'log')],
+    libFolders('mail', 'photos', 'push', 'weather'),
+    [libFolders('mail', 'photos', 'push', 'weather', 'messages', ...plainPure), libFiles('errors', 'env', 'log')],
     'An adapter speaks to the outside and is called by services: hand it what it should send.',
   ),
   onlyInto(
@@ -206,6 +206,7 @@ const homes = [
     'Only components/charts knows Recharts: add a chart there.',
   ),
   onlyIn('web-push-at-home', '^lib/push/', ['web-push'], 'Send through lib/push.'),
+  onlyIn('sharp-at-home', '^lib/photos/', ['sharp'], 'Read and write pictures through lib/photos.'),
   onlyIn('mail-at-home', '^lib/mail/', ['nodemailer'], 'Send through lib/mail.'),
   onlyIn(
     'sessions-at-home',

@@ -2,6 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
+import { PhotosOf } from '@/components/photos/photos-of';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { useRemoveProduct } from '@/lib/client/shelf-products';
@@ -10,6 +11,7 @@ import type { HouseholdProduct } from '@/lib/schemas/household-product';
 import { factsOf } from './ingredients';
 import { IngredientMark } from './ingredient-mark';
 import { useProductWords } from './product-words';
+import { usePoolSetting } from './setting';
 
 /** What stands on the shelf, a row each. */
 export function ShelfList({
@@ -22,6 +24,7 @@ export function ShelfList({
 }) {
   const t = useTranslations('pool.shelf');
   const words = useProductWords();
+  const { place, timeZone, locale } = usePoolSetting();
   const [leaving, setLeaving] = useState<HouseholdProduct | null>(null);
   return (
     <>
@@ -58,6 +61,11 @@ export function ShelfList({
                 </Button>
               </span>
             )}
+            {place === 'profile' ? (
+              <div className="col-start-2 pb-1.5">
+                <PhotosOf kind="label" about={product.id} setting={{ timeZone, locale }} />
+              </div>
+            ) : null}
           </li>
         ))}
       </ul>

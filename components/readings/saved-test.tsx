@@ -2,6 +2,7 @@
 
 import { useTranslations } from 'next-intl';
 import { PageLink } from '@/components/navigation/page-link';
+import { PhotosOf } from '@/components/photos/photos-of';
 import { Button } from '@/components/ui/button';
 import { buttonClass } from '@/components/ui/button-class';
 import { StandingLine, VerdictFrame } from '@/components/ui/verdict-frame';
@@ -15,6 +16,7 @@ import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { RecordedReading } from '@/lib/schemas/reading';
 import { PlanChangeList } from './plan-change-list';
 import { planChanges } from './plan-changes';
+import { useReadingSetting } from './reading-setting';
 import { useReadingWords } from './reading-words';
 import { ShopPurchases } from './shop-purchases';
 import { useTimeWords } from './use-time-words';
@@ -34,6 +36,7 @@ export type SavedTestProps = {
 export function SavedTest({ reading, week, before, onCorrect, children }: SavedTestProps) {
   const t = useTranslations('readings.saved');
   const times = useTimeWords();
+  const setting = useReadingSetting();
   const takenAt = parseInstant(reading.takenAt) ?? 0;
   const words = useReadingWords();
   const { measured, missing } = words(reading);
@@ -76,6 +79,9 @@ export function SavedTest({ reading, week, before, onCorrect, children }: SavedT
         <Button variant="quiet" className="-ml-1.5" onClick={onCorrect}>
           {t('correct')}
         </Button>
+        <div className="mt-1.5">
+          <PhotosOf kind="strip" about={reading.id} setting={setting} />
+        </div>
       </div>
       <div className="sticky bottom-tabs border-t border-ink bg-paper-lift py-3 md:static md:border-t-0 md:bg-transparent">
         <PageLink

@@ -4,6 +4,7 @@ export { households } from './households';
 export { memberships } from './memberships';
 export { people } from './people';
 export { doseEvents, planDoses } from './plan-doses';
+export { photos } from './photos';
 export { planFailures, plans } from './plans';
 export { poolEvents } from './pool-events';
 export { pools } from './pools';

@@ -27,6 +27,15 @@ export function jsonReply(value: unknown, status = 200, headers: Record<string, 
   return Response.json(value, { status, headers: { ...apiHeaders, ...headers } });
 }
 
+export type FileReply = { bytes: Uint8Array<ArrayBuffer>; type: string; tag: string };
+
+/** A file of a household. A browser may keep it for this person, and has to ask each time whether it may still be shown. */
+export function fileReply({ bytes, type, tag }: FileReply, request: Request): Response {
+  const headers = { ...apiHeaders, 'cache-control': 'private, no-cache', etag: tag };
+  if (request.headers.get('if-none-match') === tag) return new Response(null, { status: 304, headers });
+  return new Response(bytes, { headers: { ...headers, 'content-type': type } });
+}
+
 /** A refusal that HTTP has a number of its own for. */
 export class RequestRefusal extends Error {
   constructor(

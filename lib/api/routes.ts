@@ -13,8 +13,8 @@ import {
 import type { SignedIn } from '@/lib/auth/sessions';
 import { visitLanguage } from '@/lib/auth/visit-language';
 import { checkInput } from '@/lib/schemas/problems';
-import { readJson } from './read-body';
-import { invalidInput, jsonReply, problemReply } from './replies';
+import { readFile, readJson } from './read-body';
+import { type FileReply, fileReply, invalidInput, jsonReply, problemReply } from './replies';
 import { assertSameOrigin } from './same-origin';
 
 /** What Next.js hands a route beside the request. */
@@ -39,14 +39,14 @@ export type PersonVisit = Visit & { signedIn: SignedIn };
 export function publicRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
   route: RouteOf<Visit, Input, Params, Reply>,
 ): Handler {
-  return answering(route, (visit) => Promise.resolve(visit));
+  return answering(inJson(route), (visit) => Promise.resolve(visit));
 }
 
 /** For whoever is signed in, in no household in particular. */
 export function personRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
   route: RouteOf<PersonVisit, Input, Params, Reply>,
 ): Handler {
-  return answering(route, (visit) => Promise.resolve(Object.assign(visit, { signedIn: signedInOf(visit) })));
+  return answering(inJson(route), (visit) => Promise.resolve(Object.assign(visit, { signedIn: signedInOf(visit) })));
 }
 
 /**
@@ -56,15 +56,49 @@ export function personRoute<Input extends z.ZodType, Params extends z.ZodType, R
 export function householdRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
   route: RouteOf<HouseholdVisit, Input, Params, Reply> & { may: Permission },
 ): Handler {
-  return answering(route, async (visit) => {
-    const household = await householdVisitOf(visit);
-    assertMay(household.access, route.may);
-    return household;
-  });
+  return answering(inJson(route), householdContext(route.may));
 }
 
-function answering<Context, Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
-  route: RouteOf<Context, Input, Params, Reply>,
+/** For members who send a file: `input` is read from the query, with the file as `bytes`, no more of them than `most`. */
+export function householdUpload<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
+  route: RouteOf<HouseholdVisit, Input, Params, Reply> & { may: Permission; most: number },
+): Handler {
+  const receive = async (request: Request) => ({
+    ...queryOf(request),
+    bytes: await readFile(request, route.most),
+  });
+  return answering({ ...inJson(route), receive }, householdContext(route.may));
+}
+
+/** For members who fetch a file, which the browser may keep and has to ask about each time. */
+export function householdFile<Input extends z.ZodType, Params extends z.ZodType>(
+  route: Pick<RouteOf<HouseholdVisit, Input, Params, z.ZodType>, 'input' | 'params'> & {
+    may: Permission;
+    handle: (context: HouseholdVisit, input: z.output<Input>, params: z.output<Params>) => Promise<FileReply>;
+  },
+): Handler {
+  return answering({ ...route, answer: fileReply }, householdContext(route.may));
+}
+
+function householdContext(permission: Permission) {
+  return async (visit: OpenVisit): Promise<HouseholdVisit> => {
+    const household = await householdVisitOf(visit);
+    assertMay(household.access, permission);
+    return household;
+  };
+}
+
+type Answering<Context, Input extends z.ZodType, Params extends z.ZodType, Result> = {
+  input?: Input;
+  params?: Params;
+  handle: (context: Context, input: z.output<Input>, params: z.output<Params>) => Promise<Result>;
+  /** What was sent, and how the result goes out. */
+  receive?: (request: Request) => Promise<unknown>;
+  answer: (result: Result, request: Request) => Response;
+};
+
+function answering<Context, Input extends z.ZodType, Params extends z.ZodType, Result>(
+  { receive = sent, ...route }: Answering<Context, Input, Params, Result>,
   contextOf: (visit: OpenVisit) => Promise<Context>,
 ): Handler {
   return async (request, segment) => {
@@ -75,8 +109,8 @@ function answering<Context, Input extends z.ZodType, Params extends z.ZodType, R
       language = visit.language;
       const context = await contextOf(visit);
       const params = checked(route.params, (await segment?.params) ?? {});
-      const input = checked(route.input, route.input && (await sent(request)));
-      const reply = jsonReply(route.reply.parse(await route.handle(context, input, params)));
+      const input = checked(route.input, route.input && (await receive(request)));
+      const reply = route.answer(await route.handle(context, input, params), request);
       for (const cookie of visit.cookies) reply.headers.append('set-cookie', cookie);
       return reply;
     } catch (error) {
@@ -85,10 +119,19 @@ function answering<Context, Input extends z.ZodType, Params extends z.ZodType, R
   };
 }
 
+/** Answers in JSON, parsed by the schema of the reply. */
+function inJson<Context, Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
+  route: RouteOf<Context, Input, Params, Reply>,
+) {
+  return { ...route, answer: (result: z.input<Reply>) => jsonReply(route.reply.parse(result)) };
+}
+
 function sent(request: Request): Promise<unknown> {
-  return ['GET', 'HEAD'].includes(request.method)
-    ? Promise.resolve(Object.fromEntries(new URL(request.url).searchParams))
-    : readJson(request);
+  return ['GET', 'HEAD'].includes(request.method) ? Promise.resolve(queryOf(request)) : readJson(request);
+}
+
+function queryOf(request: Request): Record<string, string> {
+  return Object.fromEntries(new URL(request.url).searchParams);
 }
 
 /** A route that names no schema gets nothing, whatever was sent. */

@@ -24,6 +24,8 @@ const rules = {
   'do-rounds': { roles: carers, otherwise: onlyCarers },
   'report-events': { roles: carers, otherwise: onlyCarers },
   'open-situations': { roles: carers, otherwise: onlyCarers },
+  'add-photos': { roles: carers, otherwise: onlyCarers },
+  'remove-any-photo': { roles: owners, otherwise: 'Only an owner can take away the photos of others.' },
   'keep-house-notes': { roles: carers, otherwise: onlyCarers },
   'change-week-ahead': { roles: carers, otherwise: onlyCarers },
   plan: { roles: carers, otherwise: onlyCarers },

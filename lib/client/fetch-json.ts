@@ -29,6 +29,8 @@ export class RequestProblem extends Error {
 export type JsonRequest = {
   method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
   body?: unknown;
+  /** Sent as it is, instead of a body written as JSON. */
+  file?: File;
   signal?: AbortSignal;
 };
 
@@ -38,25 +40,24 @@ export type ReplyParser<Reply> = { parse(value: unknown): Reply };
 export type Reply<Form> = ReplyParser<Form> | (() => Promise<ReplyParser<Form>>);
 
 const PATIENCE_MS = 20_000;
+/** A picture travels slowly from the pool. */
+const PATIENCE_WITH_FILES_MS = 120_000;
 
 /** Sends JSON, checks the reply, and turns every failure into a RequestProblem. */
 export async function fetchJson<Form>(
   address: string,
   reply: Reply<Form>,
-  { method = 'GET', body, signal }: JsonRequest = {},
+  { method = 'GET', body, file, signal }: JsonRequest = {},
 ): Promise<Form> {
   const parser = parserOf(reply, address);
   // A request that fails first is what is told.
   parser.catch(() => undefined);
-  const patience = AbortSignal.timeout(PATIENCE_MS);
+  const patience = AbortSignal.timeout(file === undefined ? PATIENCE_MS : PATIENCE_WITH_FILES_MS);
   const response = await fetch(address, {
     method,
-    headers:
-      body === undefined
-        ? { accept: 'application/json' }
-        : { accept: 'application/json', 'content-type': 'application/json' },
+    headers: { accept: 'application/json', ...typeOf(body, file) },
     signal: signal === undefined ? patience : AbortSignal.any([signal, patience]),
-    ...(body === undefined ? {} : { body: JSON.stringify(body) }),
+    ...bodyOf(body, file),
   }).catch((cause: unknown) => {
     // A request that the caller gave up is not a problem to show.
     if (signal?.aborted) throw cause;
@@ -71,6 +72,17 @@ export async function fetchJson<Form>(
   } catch (cause) {
     throw new RequestProblem('unexpected', `The reply of ${address} has an unknown form`, [], { cause });
   }
+}
+
+function typeOf(body: unknown, file: File | undefined): Record<string, string> {
+  // A file of a kind that the browser does not know says nothing of it.
+  if (file !== undefined) return { 'content-type': file.type || 'application/octet-stream' };
+  return body === undefined ? {} : { 'content-type': 'application/json' };
+}
+
+function bodyOf(body: unknown, file: File | undefined): { body?: BodyInit } {
+  if (file !== undefined) return { body: file };
+  return body === undefined ? {} : { body: JSON.stringify(body) };
 }
 
 /** Fetched beside the request itself. One that cannot be fetched is a connection that is gone. */

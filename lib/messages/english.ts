@@ -9,6 +9,7 @@ import howConstants from './en/how-constants.json';
 import howExamples from './en/how-examples.json';
 import learnt from './en/learnt.json';
 import navigation from './en/navigation.json';
+import photos from './en/photos.json';
 import pool from './en/pool.json';
 import privacy from './en/privacy.json';
 import problems from './en/problems.json';
@@ -36,6 +37,7 @@ export const english = {
   'how-examples': howExamples,
   learnt,
   navigation,
+  photos,
   pool,
   privacy,
   problems,

@@ -349,4 +349,22 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
   '{0} (tablets alone)': '{0} (solo pastillas)',
   '{0} (granular alone)': '{0} (solo granulado)',
   '{0} (liquid alone)': '{0} (solo líquido)',
+  'Keep the words to {0} characters.': 'No pases de {0} caracteres.',
+  'A piece of equipment stands for itself.': 'Un equipo no pertenece a otra cosa.',
+  'Say what this photo belongs to.': 'Indica a qué pertenece esta foto.',
+  'What this photo belongs to is no longer there.': 'Aquello a lo que pertenece esta foto ya no está.',
+  'This photo was added in another household.': 'Esta foto se añadió en otro hogar.',
+  'There is no room for more photos. Take one away first.': 'No caben más fotos. Quita antes una.',
+  'This photo is not there, or no longer.': 'Esta foto no está, o ya no está.',
+  'Only an owner can take away the photos of others.': 'Solo un propietario puede quitar las fotos de otros.',
+  'Send a picture, with its content type.': 'Envía una imagen, con su tipo de contenido.',
+  'A picture may have {0} MB. Send a smaller one.': 'Una imagen puede tener {0} MB. Envía una más pequeña.',
+  'This picture has too many pixels. Send a smaller one: 12 megapixels are plenty.':
+    'Esta imagen tiene demasiados píxeles. Envía una más pequeña: 12 megapíxeles son de sobra.',
+  'This picture is not whole, or cannot be read. Take it again, or send another.':
+    'Esta imagen no está completa o no se puede leer. Hazla de nuevo, o envía otra.',
+  'This is no photo. Choose a picture in JPEG, PNG or WebP.':
+    'Esto no es una foto. Elige una imagen en JPEG, PNG o WebP.',
+  'This photo is in a format that cannot be read here (HEIC or AVIF). Send it as JPEG: on an iPhone, Settings, Camera, Formats, Most Compatible.':
+    'Esta foto está en un formato que aquí no se puede leer (HEIC o AVIF). Envíala como JPEG: en un iPhone, Ajustes, Cámara, Formatos, El más compatible.',
 };

@@ -9,6 +9,7 @@ import howConstants from './es/how-constants.json';
 import howExamples from './es/how-examples.json';
 import learnt from './es/learnt.json';
 import navigation from './es/navigation.json';
+import photos from './es/photos.json';
 import pool from './es/pool.json';
 import privacy from './es/privacy.json';
 import problems from './es/problems.json';
@@ -36,6 +37,7 @@ export const spanish: Catalogue = {
   'how-examples': howExamples,
   learnt,
   navigation,
+  photos,
   pool,
   privacy,
   problems,

@@ -8,7 +8,7 @@ import { root } from '../boundaries/planted-tree';
 import { sourceFiles } from '../boundaries/source-files';
 
 /** Where sentences are written that a refused request may answer. */
-const saying = /^lib\/(schemas|services|auth|api|calendar|units|planner|engine-worker|errors)\b.*\.ts$/;
+const saying = /^lib\/(schemas|services|auth|api|calendar|units|planner|engine-worker|errors|photos)\b.*\.ts$/;
 /** Faults of the program, which nobody is told. */
 const untold = [
   'The demo household has no pool.',

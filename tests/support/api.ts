@@ -31,6 +31,8 @@ export type Call = {
   headers?: Record<string, string>;
   /** Sent as it is, instead of a body written as JSON. */
   text?: string;
+  /** The same for a file. */
+  bytes?: Uint8Array<ArrayBuffer>;
   path?: Record<string, string>;
   query?: string;
 };
@@ -39,14 +41,14 @@ export type Call = {
 export async function call(
   method: Method,
   pattern: string,
-  { body, cookie, headers, text, path = {}, query = '' }: Call = {},
+  { body, cookie, headers, text, bytes, path = {}, query = '' }: Call = {},
 ): Promise<Response> {
   const load = files[`../../app${pattern}/route.ts`];
   if (!load) throw new Error(`There is no route ${pattern}.`);
   const handler = (await load())[method];
   if (!handler) throw new Error(`${pattern} has no ${method}.`);
   const address = pattern.replace(/\[(?:\.{3})?(\w+)\]/g, (_, name: string) => path[name] ?? 'none');
-  const sent = text ?? (body === undefined ? undefined : JSON.stringify(body));
+  const sent = bytes ?? text ?? (body === undefined ? undefined : JSON.stringify(body));
   const request = new Request(`http://127.0.0.1:3000${address}${query}`, {
     method,
     headers: {

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
+import { HouseholdPhotos } from '@/components/photos/household-photos';
 import { PoolProfile } from '@/components/pool/pool-profile';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
@@ -29,12 +30,13 @@ export default async function PoolPage() {
     forPage(showLearnt(visit)),
   ]);
   return (
-    <ClientMessages namespaces={['learnt', 'units']} parts={{ 'first-run': ['notLoaded'], pool: described }}>
+    <ClientMessages namespaces={['learnt', 'photos', 'units']} parts={{ 'first-run': ['notLoaded'], pool: described }}>
       <PoolProfile
         household={{ ...household, mayChange: may(access, 'change-pool') }}
         mayForget={may(access, 'reset-learning')}
         initial={{ setup, shelf, learnt }}
       />
+      <HouseholdPhotos setting={{ timeZone, locale }} mayAdd={may(access, 'add-photos')} />
     </ClientMessages>
   );
 }

@@ -14,7 +14,7 @@ export default async function TestPage({ searchParams }: { searchParams: Promise
   const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem } = access;
   const { kind } = await searchParams;
   return (
-    <ClientMessages namespaces={['readings', 'units', 'verdict', 'week', 'doses', 'house']}>
+    <ClientMessages namespaces={['photos', 'readings', 'units', 'verdict', 'week', 'doses', 'house']}>
       <TestEntry
         household={{ householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem }}
         kind={kind === 'quick' ? 'quick' : 'full'}

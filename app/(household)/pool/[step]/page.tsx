@@ -22,7 +22,7 @@ export default async function PoolStepPage({ params }: Props) {
   const { householdId, householdName, timeZone, locale, unitSystem, personName } = access;
   const household = { id: householdId, name: householdName, timeZone, locale, unitSystem, personName };
   return (
-    <ClientMessages namespaces={['first-run', 'pool', 'units']}>
+    <ClientMessages namespaces={['first-run', 'photos', 'pool', 'units']}>
       <PoolSteps
         key={step}
         household={{ ...household, mayChange: may(access, 'change-pool') }}
