@@ -22,6 +22,7 @@ export async function listValidMemberships(db: DatabaseOrTransaction, personId: 
       safetyCardReadAt: memberships.safetyCardReadAt,
       personName: people.name,
       language: people.language,
+      tourClosedAt: people.tourClosedAt,
       household: households,
       poolCompletedAt: pools.completedAt,
     })

@@ -1,5 +1,5 @@
 import 'server-only';
-import { eq } from 'drizzle-orm';
+import { and, eq, isNull } from 'drizzle-orm';
 import type { DatabaseOrTransaction } from '@/db/client';
 import { people } from '@/db/schema';
 import type { Language } from '@/lib/schemas/languages';
@@ -22,6 +22,14 @@ export async function insertPerson(
 export async function findPersonByEmail(db: DatabaseOrTransaction, _scope: SystemScope, email: string) {
   const [person] = await db.select().from(people).where(eq(people.email, email));
   return person ?? null;
+}
+
+/** Once closed they stay closed, with the time of the first closing. */
+export async function setTourClosed(db: DatabaseOrTransaction, personId: string, at: Date): Promise<void> {
+  await db
+    .update(people)
+    .set({ tourClosedAt: at })
+    .where(and(eq(people.id, personId), isNull(people.tourClosedAt)));
 }
 
 /** Nobody but the person chooses it, and no household sees it: the caller has the id from the session. */

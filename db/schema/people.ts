@@ -13,6 +13,8 @@ export const people = sqliteTable(
     passwordHash: text('password_hash'),
     /** The language of the screen; mail follows the household's locale. */
     language: text('language', { enum: languages }).notNull().default('en'),
+    /** When the notes on the first sheet were closed; null until then. */
+    tourClosedAt: integer('tour_closed_at', { mode: 'timestamp_ms' }),
     createdAt: integer('created_at', { mode: 'timestamp_ms' }).notNull(),
   },
   (table) => [

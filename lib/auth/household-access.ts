@@ -24,6 +24,8 @@ export type HouseholdAccess = {
   /** How days and numbers are written: in the person's language, as where the household is at home. */
   locale: string;
   demo: boolean;
+  /** Whether the person has yet to close the notes on the first sheet. */
+  tourOpen: boolean;
   /** Whether the first run is finished. */
   poolCompleted: boolean;
 };
@@ -63,6 +65,7 @@ export async function proveHousehold(
     language: membership.language,
     locale: localeIn(membership.language, household.locale),
     demo: household.demo,
+    tourOpen: membership.tourClosedAt === null && !household.demo,
     poolCompleted: membership.poolCompletedAt !== null,
   };
 }

@@ -17,6 +17,7 @@ import readings from './en/readings.json';
 import rounds from './en/rounds.json';
 import situations from './en/situations.json';
 import start from './en/start.json';
+import tour from './en/tour.json';
 import tryOut from './en/try-out.json';
 import units from './en/units.json';
 import verdict from './en/verdict.json';
@@ -45,6 +46,7 @@ export const english = {
   rounds,
   situations,
   start,
+  tour,
   'try-out': tryOut,
   units,
   verdict,

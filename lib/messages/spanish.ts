@@ -17,6 +17,7 @@ import readings from './es/readings.json';
 import rounds from './es/rounds.json';
 import situations from './es/situations.json';
 import start from './es/start.json';
+import tour from './es/tour.json';
 import tryOut from './es/try-out.json';
 import units from './es/units.json';
 import verdict from './es/verdict.json';
@@ -45,6 +46,7 @@ export const spanish: Catalogue = {
   rounds,
   situations,
   start,
+  tour,
   'try-out': tryOut,
   units,
   verdict,

@@ -11,6 +11,7 @@ const ofThePerson = [
   '/api/sign-out',
   '/api/look-round',
   '/api/language',
+  '/api/tour',
   '/api/households/chosen',
 ];
 /** What answers when no route does. */

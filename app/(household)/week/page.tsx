@@ -3,6 +3,7 @@ import { getTranslations } from 'next-intl/server';
 import { headers } from 'next/headers';
 import { userAgent } from 'next/server';
 import { WaitingTests } from '@/components/readings/waiting-tests';
+import { FirstSheetTour } from '@/components/tour/first-sheet';
 import { PrintElsewhere } from '@/components/week-print/print-elsewhere';
 import { WeekSheetScreen } from '@/components/week-sheet/week-sheet-screen';
 import { findHousehold, requireHousehold } from '@/lib/auth/page-gate';
@@ -30,7 +31,8 @@ export async function generateMetadata({ searchParams }: Props): Promise<Metadat
 /** The sheet comes with the page, so that the swim verdict is the first thing to be seen. */
 export default async function WeekPage({ searchParams }: Props) {
   const visit = await requireHousehold();
-  const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem } = visit.access;
+  const { householdId, personId, personName, role, handlesChemicals, timeZone, locale, unitSystem, tourOpen } =
+    visit.access;
   const asked = weekAskedFor(await searchParams);
   const initial = await forPage(showWeek(visit, asked));
   const onPhone = userAgent({ headers: await headers() }).device.type === 'mobile';
@@ -45,6 +47,11 @@ export default async function WeekPage({ searchParams }: Props) {
         />
         <WeekSheetScreen start={asked.start} initial={initial} onPhone={onPhone} />
       </div>
+      {tourOpen && initial?.plan ? (
+        <ClientMessages namespaces={['tour']}>
+          <FirstSheetTour />
+        </ClientMessages>
+      ) : null}
       <PrintElsewhere />
     </ClientMessages>
   );

@@ -45,6 +45,7 @@ export const firstWeek: Journey = {
 
     await page.goto('/week');
     await page.locator(curves).first().waitFor({ state: 'attached' });
+    await stage.part('the four notes of the first visit', () => closeTour(stage, page));
     stage.equal('three curves', await quantitiesDrawn(page), ['freeChlorine', 'pH', 'stabilizer']);
     const planned = await sheet();
     stage.check('the plan has a dose at least', planned.doses.length > 0, planned.plan);
@@ -106,6 +107,20 @@ async function becomes(stage: Stage, what: string, dose: PlanDose, status: strin
 async function openWeek(page: Page): Promise<void> {
   await page.goto('/week');
   await page.locator(curves).first().waitFor({ state: 'attached' });
+}
+
+/** Read once to the end, they never come back. */
+async function closeTour(stage: Stage, page: Page): Promise<void> {
+  const tour = page.getByRole('region', { name: words('tour.name') });
+  for (const note of ['verdict', 'curve', 'doses', 'help']) {
+    await tour.getByText(words(`tour.${note}.title`)).waitFor();
+    if (note !== 'help') await tour.getByRole('button', { name: words('tour.next') }).click();
+  }
+  const closed = page.waitForResponse((response) => response.url().endsWith('/api/tour'));
+  await tour.getByRole('button', { name: words('tour.done') }).click();
+  stage.equal('that they are read is kept', (await closed).status(), 200);
+  await openWeek(page);
+  stage.equal('and they do not come back', await tour.count(), 0);
 }
 
 /** One tap, and the way back. */

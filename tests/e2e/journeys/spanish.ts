@@ -32,6 +32,7 @@ export const inSpanish: Journey = {
       await enterFullTest(stage, page);
       const ines = new Person(server);
       await borrowSession(visitor, ines);
+      await ines.must('PUT', '/api/tour', { closed: true });
       const refused = (await ines.send('PUT', '/api/language', { language: 'fr' })).text;
       stage.check('a refusal is in Spanish', refused.includes('Elige inglés o español.'), refused);
       const sheet = () => ines.must<WeekSheet>('GET', '/api/week');

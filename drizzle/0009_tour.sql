@@ -1,0 +1,1 @@
+ALTER TABLE `people` ADD `tour_closed_at` integer;
