@@ -60,7 +60,7 @@ export function householdRoute<Input extends z.ZodType, Params extends z.ZodType
 }
 
 /** For members who send a file: `input` is read from the query, with the file as `bytes`, no more of them than `most`. */
-export function householdUpload<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
+export function uploadRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
   route: RouteOf<HouseholdVisit, Input, Params, Reply> & { may: Permission; most: number },
 ): Handler {
   const receive = async (request: Request) => ({
@@ -71,7 +71,7 @@ export function householdUpload<Input extends z.ZodType, Params extends z.ZodTyp
 }
 
 /** For members who fetch a file, which the browser may keep and has to ask about each time. */
-export function householdFile<Input extends z.ZodType, Params extends z.ZodType>(
+export function fileRoute<Input extends z.ZodType, Params extends z.ZodType>(
   route: Pick<RouteOf<HouseholdVisit, Input, Params, z.ZodType>, 'input' | 'params'> & {
     may: Permission;
     handle: (context: HouseholdVisit, input: z.output<Input>, params: z.output<Params>) => Promise<FileReply>;

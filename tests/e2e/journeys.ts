@@ -15,6 +15,7 @@ import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
+import { photos } from './journeys/photos';
 import { scope } from './journeys/scope';
 import { paper } from './journeys/paper';
 import { situations } from './journeys/situations';
@@ -48,6 +49,7 @@ export const journeys: readonly Journey[] = [
   cards,
   cardOffline,
   escape,
+  photos,
   choosingLanguage,
   landing,
   lateCode,

@@ -1,12 +1,12 @@
 import { methods } from '@/lib/api/methods';
-import { householdRoute, householdUpload } from '@/lib/api/routes';
+import { householdRoute, uploadRoute } from '@/lib/api/routes';
 import { MOST_PHOTO_BYTES, newPhotoSchema, photosSchema } from '@/lib/schemas/photo';
 import { addPhoto } from '@/lib/services/add-photo';
 import { showPhotos } from '@/lib/services/show-photos';
 
 export const { GET, POST, PUT, PATCH, DELETE } = methods({
   GET: householdRoute({ may: 'look', reply: photosSchema, handle: showPhotos }),
-  POST: householdUpload({
+  POST: uploadRoute({
     may: 'add-photos',
     most: MOST_PHOTO_BYTES,
     input: newPhotoSchema,

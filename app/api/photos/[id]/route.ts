@@ -1,12 +1,12 @@
 import { methods } from '@/lib/api/methods';
-import { householdFile, householdRoute } from '@/lib/api/routes';
+import { fileRoute, householdRoute } from '@/lib/api/routes';
 import { idSchema } from '@/lib/schemas/id';
 import { photoSizeSchema, photosSchema } from '@/lib/schemas/photo';
 import { removePhoto } from '@/lib/services/remove-photo';
 import { showPicture } from '@/lib/services/show-picture';
 
 export const { GET, POST, PUT, PATCH, DELETE } = methods({
-  GET: householdFile({
+  GET: fileRoute({
     may: 'look',
     params: idSchema,
     input: photoSizeSchema,
