@@ -77,6 +77,7 @@ function useAdviceWords(): (advice: Advice, facts: readonly TryOutFact[]) => str
   const { amount } = useUnits();
   const dose = ({ substance, form, unit }: ChangedDose, value: number) =>
     doses('amountAndProduct', {
+      unit,
       amount: amount(value, unit),
       product: doses(`product.${substance}`, { form, count: value }),
     });

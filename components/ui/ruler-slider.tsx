@@ -6,13 +6,13 @@ export type RulerSliderProps = {
   shown: React.ReactNode;
   /** The value as it is read out. */
   spoken: string;
-  name: string;
+  name?: string;
   least: number;
   most: number;
   step: number;
-  /** Values that stand in figures under the ruler, and those with a line only. */
-  figures: readonly number[];
+  /** Values that have a line on the ruler, and those that stand under it in figures. */
   lines: readonly number[];
+  figures?: readonly number[];
   value: number;
   /** Left out where nobody listens yet: the thumb then moves by itself. */
   onChange?: (value: number) => void;
@@ -20,11 +20,11 @@ export type RulerSliderProps = {
 
 /** A value on a ruler. The native control lies over the drawing, so that finger, keys and readers work as everywhere. */
 export function RulerSlider(props: RulerSliderProps) {
-  const { label, shown, spoken, name, least, most, step, figures, lines, value, onChange } = props;
+  const { label, shown, spoken, name, least, most, step, lines, figures = [], value, onChange } = props;
   const id = useId();
-  const at = (mark: number) => `${(((mark - least) / (most - least)) * 100).toFixed(2)}%`;
+  const at = (mark: number) => `${((mark - least) / (most - least)) * 100}%`;
   const given = onChange
-    ? { value, onChange: (event: React.ChangeEvent<HTMLInputElement>) => onChange(Number(event.target.value)) }
+    ? { value, onChange: (event: React.ChangeEvent<HTMLInputElement>) => onChange(event.target.valueAsNumber) }
     : { defaultValue: value };
   return (
     <div>
@@ -32,9 +32,11 @@ export function RulerSlider(props: RulerSliderProps) {
         <label htmlFor={id} className="text-body">
           {label}
         </label>
-        <span className="text-small text-ink-2">{shown}</span>
+        <output htmlFor={id} className="text-small whitespace-nowrap text-ink-2">
+          {shown}
+        </output>
       </div>
-      <div className="relative h-14">
+      <div className={figures.length === 0 ? 'relative h-11' : 'relative h-14'}>
         <div className="absolute inset-x-3.5 top-5.5 border-t-control border-ink" aria-hidden="true">
           {lines.map((line) => (
             <span key={line} className="absolute -top-1 h-2 border-l border-ink" style={{ left: at(line) }} />

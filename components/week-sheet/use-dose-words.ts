@@ -26,7 +26,7 @@ export function useDoseWords() {
     amountOf: (dose: PlanDose) => amount(effectiveAmount(dose), dose.unit),
     productOf: (dose: PlanDose) => product(dose, effectiveAmount(dose)),
     amountAndProduct: (dose: PlanDose, value = effectiveAmount(dose)) =>
-      t('amountAndProduct', { amount: amount(value, dose.unit), product: product(dose, value) }),
+      t('amountAndProduct', { unit: dose.unit, amount: amount(value, dose.unit), product: product(dose, value) }),
     /** "Last light, about 19:40", with the pump's hours where they matter. */
     hourOf: (dose: PlanDose, { pump }: { pump: boolean }) => {
       const day = picture.days.find(({ from, to }) => instantOf(dose.at) >= from && instantOf(dose.at) < to);

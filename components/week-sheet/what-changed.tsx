@@ -58,7 +58,7 @@ function useChangeWords() {
   return ({ day, substance, form, unit, before, after }: PlanChanges['doses'][number]) => {
     const words = (value: number) => {
       const product = doses(`product.${substance}`, { form, count: value });
-      return doses('amountAndProduct', { amount: amount(value, unit), product });
+      return doses('amountAndProduct', { unit, amount: amount(value, unit), product });
     };
     const said = { day: weekdayName(day, locale) };
     if (after === null) return t('dropped', { ...said, dose: words(before ?? 0) });

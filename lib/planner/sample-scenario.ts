@@ -2,6 +2,7 @@ import type { SampleWater } from '@/lib/schemas/sample-water';
 import { type Scenario, scenarioSchema } from '@/lib/schemas/scenario';
 import { daylightOf } from '@/lib/sun/daylight';
 import { solarElevations } from '@/lib/sun/elevation';
+import { skyOfSunshine } from '@/lib/sun/sunshine';
 import { ultravioletWeight } from '@/lib/sun/ultraviolet';
 
 const latitude = 40;
@@ -65,31 +66,20 @@ export function sampleScenario({ volume, sunshine, stabilizer }: SampleWater): S
         ...{ storedAt: 24, measure: 100, pricePerLitre: 1.6, stock: 100_000 },
       },
     ],
-    week: { sky: Array<number>(8).fill(skyOf(sunshine)), swimmerHours: [0, 0, 0, 0, 0, 0, 8, 4] },
+    week: {
+      sky: Array<number>(8).fill(skyOfSunshine(sunshine, sampleDaylight.length)),
+      swimmerHours: [0, 0, 0, 0, 0, 0, 8, 4],
+    },
     preferences: { visits: 4 },
     now: sampleMonday,
   });
 }
 
-/**
- * Share of the clear sky's radiation on a day with so much sunshine: (0.25 + 0.50 n / N) / (0.25 + 0.50), where n is the
- * sunshine and N the length of the sample's day [h]; from 1/3 for none to 1. Monthly means lie within about a tenth of it
- * (from memory).
- *
- * Source: Angstrom formula with the coefficients of FAO Irrigation and Drainage Paper 56 (1998), equations 35 and 36; taken
- * for UV as it is for the whole radiation, though cloud takes somewhat less of UV.
- *
- * @param sunshine h a day; more than the day is long counts as all of it
- */
-export function skyOf(sunshine: number): number {
-  const share = Math.min(1, Math.max(0, sunshine) / sampleDaylight.length);
-  return (0.25 + 0.5 * share) / 0.75;
-}
-
 /** Share of the reference sun in the middle of each hour of the sample's day, under its sky. */
 export function sampleSun(sunshine: number): number[] {
   const hours = Array.from({ length: 24 }, (_, hour) => midWeek + (hour - 11.5) * HOUR);
-  return solarElevations(hours, latitude, longitude).map((elevation) => skyOf(sunshine) * ultravioletWeight(elevation));
+  const sky = skyOfSunshine(sunshine, sampleDaylight.length);
+  return solarElevations(hours, latitude, longitude).map((elevation) => sky * ultravioletWeight(elevation));
 }
 
 function daylight() {

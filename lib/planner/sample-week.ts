@@ -40,17 +40,17 @@ export function sampleWeekOf(water: SampleWater, plan: WeekPlan): SampleWeek {
 }
 
 function standingOf({ reasons, openSwimShare }: WeekPlan): SampleWeek['standing'] {
-  const reason = (code: ReasonCode) => reasons.find((each) => each.code === code);
-  const replace = reason('replace-water-first');
-  if (replace)
-    return {
-      code: 'replace-water',
-      volume: Number(replace.volume),
-      days: Number(replace.days),
-      target: Number(replace.target),
-    };
-  const few = reason('few-open-hours');
-  if (few) return { code: 'few-open-hours', share: openSwimShare ?? 0, visits: Number(few.visits) };
+  const figure = (code: ReasonCode, name: string): number | undefined => {
+    const found = reasons.find((reason) => reason.code === code)?.[name];
+    return typeof found === 'number' ? found : undefined;
+  };
+  const volume = figure('replace-water-first', 'volume');
+  const days = figure('replace-water-first', 'days');
+  const target = figure('replace-water-first', 'target');
+  if (volume !== undefined && days !== undefined && target !== undefined)
+    return { code: 'replace-water', volume, days, target };
+  const visits = figure('few-open-hours', 'visits');
+  if (visits !== undefined) return { code: 'few-open-hours', share: openSwimShare ?? 0, visits };
   return { code: 'planned' };
 }
 

@@ -1,19 +1,10 @@
 import { describe, expect, it } from 'vitest';
-import { sampleDaylight, sampleScenario, sampleSun, skyOf } from '@/lib/planner/sample-scenario';
+import { sampleDaylight, sampleScenario, sampleSun } from '@/lib/planner/sample-scenario';
 import { sampleWeek } from '@/lib/planner/sample-week';
 import { planWeek } from '@/lib/planner';
 import { type SampleWater, sampleWaters, startingSample } from '@/lib/schemas/sample-water';
 
-describe('the sky of a day with so much sunshine', () => {
-  // FAO Irrigation and Drainage Paper 56, equations 35 and 36: Rs = (0.25 + 0.50 n/N) Ra, clear sky 0.75 Ra.
-  it.each([
-    [0, 1 / 3],
-    [sampleDaylight.length / 2, 2 / 3],
-    [sampleDaylight.length, 1],
-    [24, 1],
-    [-1, 1 / 3],
-  ])('%f h give %f of a clear one', (sunshine, share) => expect(skyOf(sunshine)).toBeCloseTo(share, 12));
-
+describe('the day of the sample', () => {
   it('lies over a day of early July at 40 degrees north', () => {
     // Tables of sunrise and sunset for that latitude: 15 h less a few minutes (from memory).
     expect(sampleDaylight.length).toBeCloseTo(15, 0);

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { daylightOf } from '@/lib/sun/daylight';
 import { solarElevation, solarElevations } from '@/lib/sun/elevation';
 import { sinesOfElevation, solarPosition } from '@/lib/sun/solar-position';
+import { skyOfSunshine } from '@/lib/sun/sunshine';
 import { ultravioletWeight, ultravioletWeightOfSine } from '@/lib/sun/ultraviolet';
 
 // The UV index rows of tests/reference/published-values.csv are checked in tests/chemistry/published-values.test.ts.
@@ -158,4 +159,18 @@ describe('UV weight', () => {
     // Madronich 2007: 12.5 overhead, 2.34 at 60 degrees from the zenith.
     expect(ultravioletWeight(30) / ultravioletWeight(90)).toBeCloseTo(2.34 / 12.5, 3);
   });
+});
+
+describe('the sky of a day with so much sunshine', () => {
+  // FAO Irrigation and Drainage Paper 56, equations 35 and 36: Rs = (0.25 + 0.50 n/N) Ra, clear sky 0.75 Ra.
+  it.each([
+    [0, 15, 1 / 3],
+    [7.5, 15, 2 / 3],
+    [15, 15, 1],
+    [24, 15, 1],
+    [-1, 15, 1 / 3],
+    [9, 12, 0.625 / 0.75],
+  ])('%f h of %f h give %f of a clear one', (sunshine, dayLength, share) =>
+    expect(skyOfSunshine(sunshine, dayLength)).toBeCloseTo(share, 12),
+  );
 });

@@ -37,7 +37,7 @@ export const equations: Readonly<Record<HowPage, Equation>> = {
       { word: 'minimum', symbol: '*m*' },
       { word: 'share', symbol: `*S* / ${n.stabilizerPerLowestLevel}` },
     ],
-    further: [`*m* = ${n.minimumStabilized}, or ${n.minimumUnstabilized} without stabilizer`],
+    further: [`*m* = ${n.minimumStabilized}, {=or} ${n.minimumUnstabilized} {=withoutStabilizer}`],
   },
   sun: {
     terms: [
@@ -47,7 +47,7 @@ export const equations: Readonly<Record<HowPage, Equation>> = {
       { sign: '×', word: 'height', symbol: `(sin *e* / sin ${n.referenceElevation}°){^${n.ultravioletExponent}}` },
       { sign: '×', word: 'through', symbol: '(1 − e{^−*K* *d*}) / (*K* *d*)' },
     ],
-    further: ['loss = *S* *D* (*k*{_H} [HOCl] + *k*{_O} [OCl{^−}] + *k*{_B} [bound])'],
+    further: ['{=loss} = *S* *D* (*k*{_H} [HOCl] + *k*{_O} [OCl{^−}] + *k*{_B} [{=bound}])'],
   },
   tablets: {
     terms: [
@@ -55,7 +55,7 @@ export const equations: Readonly<Record<HowPage, Equation>> = {
       { sign: '=', word: 'narrower', symbol: '(1 − *s* / 3){^2}' },
       { sign: '×', word: 'thinner', symbol: '(1 − *s*)' },
     ],
-    further: ['*s* = running hours / life'],
+    further: ['*s* = {=runningHours} / {=life}'],
   },
   swimmers: {
     terms: [
@@ -140,11 +140,11 @@ export const equations: Readonly<Record<HowPage, Equation>> = {
       { sign: '×', word: 'depth', symbol: '*d*' },
     ],
     further: [
-      'rectangle *L* *W*',
-      'oval π/4 *L* *W*',
-      'round π/4 *D*{^2}',
-      'kidney 0.45 (*A* + *B*) *L*',
-      'sloping floor (shallow + deep) / 2',
+      '{=rectangle} *L* *W*',
+      '{=oval} π/4 *L* *W*',
+      '{=round} π/4 *D*{^2}',
+      '{=kidney} 0.45 (*A* + *B*) *L*',
+      '{=slopingBottom} ({=shallow} + {=deep}) / 2',
     ],
   },
   evaporation: {

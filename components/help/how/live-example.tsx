@@ -3,12 +3,12 @@
 import { useTranslations } from 'next-intl';
 import { useDeferredValue, useState } from 'react';
 import { Button } from '@/components/ui/button';
+import { RulerSlider } from '@/components/ui/ruler-slider';
 import { useHydrated } from '@/components/ui/use-hydrated';
 import { examples } from '@/lib/client/worked-out/examples/all-examples';
 import type { HowPage } from '@/lib/client/worked-out/how-page';
 import { ExampleFigures } from './example-figures';
 import { ExamplePicture } from './example-picture';
-import { Slider } from './slider';
 import { useWritten } from './use-written';
 
 /** Sliders over the very functions that work the week out. Without JavaScript it shows what follows from where they stand. */
@@ -46,7 +46,7 @@ export function LiveExample({ page }: { page: HowPage }) {
         {example.inputs.map((input, index) => {
           const value = values[index] ?? input.start;
           return (
-            <Slider
+            <RulerSlider
               key={input.name}
               label={t(
                 page === 'liquid-strength' && input.name === 'temperature'
@@ -54,11 +54,13 @@ export function LiveExample({ page }: { page: HowPage }) {
                   : `input.${input.name}`,
               )}
               value={value}
-              written={written(value, input)}
-              low={input.low}
-              high={input.high}
+              shown={<b className="font-display text-name text-ink">{written(value, input)}</b>}
+              spoken={written(value, input)}
+              least={input.low}
+              most={input.high}
               step={input.step}
-              onMove={(next) => setValues(values.map((old, at) => (at === index ? next : old)))}
+              lines={evenly(input)}
+              onChange={(next) => setValues(values.map((old, at) => (at === index ? next : old)))}
             />
           );
         })}
@@ -67,4 +69,11 @@ export function LiveExample({ page }: { page: HowPage }) {
       {worked.curve === undefined ? null : <ExamplePicture page={page} curve={worked.curve} />}
     </section>
   );
+}
+
+const RULER_PARTS = 8;
+
+/** Lines that part a range evenly. */
+function evenly({ low, high }: { low: number; high: number }): number[] {
+  return Array.from({ length: RULER_PARTS + 1 }, (_, part) => low + ((high - low) * part) / RULER_PARTS);
 }

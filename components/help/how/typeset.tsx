@@ -1,9 +1,13 @@
+import { useTranslations } from 'next-intl';
+import { type NotationWord, notationWord } from './notation-words';
+
 /**
- * Symbols as a book prints them, from a short notation: *x* is a quantity (italic), {_x} stands low, {^x} stands high.
+ * Symbols as a book prints them, from a short notation: *x* is a quantity (italic), {_x} stands low, {^x} stands high,
+ * {=x} is a word in the reader's language.
  * Plain text in the page, so that it can be copied, found and read out.
  */
 export function Typeset({ notation }: { notation: string }) {
-  const parts = notation.split(/(\*[^*]+\*|\{[_^][^}]+\})/).filter((part) => part !== '');
+  const parts = notation.split(/(\*[^*]+\*|\{[_^=][^}]+\})/).filter((part) => part !== '');
   return (
     <span className="font-display">
       {parts.map((part, index) => (
@@ -27,5 +31,11 @@ function Part({ part }: { part: string }) {
         <Typeset notation={part.slice(2, -1)} />
       </sup>
     );
+  if (part.startsWith('{=')) return <Word name={notationWord(part.slice(2, -1))} />;
   return part;
+}
+
+function Word({ name }: { name: NotationWord }) {
+  const t = useTranslations('how.word');
+  return t(name);
 }

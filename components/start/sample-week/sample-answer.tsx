@@ -10,6 +10,7 @@ const MUCH_STABILIZER = 50;
 
 /** The week in one line, its doses, and why it looks like this. */
 export function SampleAnswer({ week, unitSystem }: { week: SampleWeek; unitSystem: UnitSystem }) {
+  const t = useTranslations('start.sample');
   const words = useSampleWords(unitSystem);
   const headline = useHeadline(week);
   const why = useWhy(week, unitSystem);
@@ -19,7 +20,7 @@ export function SampleAnswer({ week, unitSystem }: { week: SampleWeek; unitSyste
       <ul className="mt-1 text-body">
         {week.doses.map((dose) => (
           <li key={`${dose.hour} ${dose.form}`} className="font-emphasis">
-            {`${words.days[dayOf(dose.hour)]}: ${words.dose(dose)}`}
+            {t('onDay', { day: words.days[dayOf(dose.hour)] ?? '', dose: words.dose(dose) })}
           </li>
         ))}
       </ul>

@@ -81,11 +81,11 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
           <Levels top={top} />
           <Words level={swimLimit} top={top} above>
             <b className="font-strong text-ink">{t('swimLimit', { limit: number(swimLimit) })}</b>
-            <span className="hidden lg:inline"> {t('swimLimitNote')}</span>
+            <span className="ml-1 hidden lg:inline">{t('swimLimitNote')}</span>
           </Words>
           <Words level={atLeast} top={top}>
             <b className="font-strong text-ink">{t('lowestLevel', { level: number(atLeast, 1) })}</b>
-            <span className="hidden lg:inline"> {t('lowestLevelNote')}</span>
+            <span className="ml-1 hidden lg:inline">{t('lowestLevelNote')}</span>
           </Words>
           <At hour={0} level={tested} top={top}>
             <span className="block size-2.75 rounded-full border-[1.8px] border-ink bg-paper-lift" />
@@ -117,7 +117,7 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
         </p>
         <p className="pt-1.5 pb-2 text-fine text-ink-2">
           {t('legend', { tested: number(tested, 1), from: swims.from, to: swims.to })}
-          {before === undefined ? null : ` ${t('beforeLegend')}`}
+          {before === undefined ? null : <span className="ml-1">{t('beforeLegend')}</span>}
         </p>
       </div>
     </>
@@ -149,7 +149,8 @@ function Ground({ week, top }: { week: SampleWeek; top: number }) {
 }
 
 function Nights({ week: { sun } }: { week: SampleWeek }) {
-  const box = (from: number, to: number) => `M${from.toFixed(1)} 0H${to.toFixed(1)}V100H${from.toFixed(1)}Z`;
+  const tenth = (hour: number) => Math.round(hour * 10) / 10;
+  const box = (from: number, to: number) => `M${tenth(from)} 0H${tenth(to)}V100H${tenth(from)}Z`;
   const nights = weekDays.map((day) => box(day * 24, day * 24 + sun.rises) + box(day * 24 + sun.sets, day * 24 + 24));
   return (
     <>

@@ -49,7 +49,7 @@ export const productConstants = [
       unit: 'gPerMillilitre',
       of: 'chemistry/substances#hydrochloricAcidDensity',
       at: [SUBSTANCES['hydrochloric-acid'].defaultStrength],
-      formula: '*ρ* = 1 + 0.00509 · strength',
+      formula: '*ρ* = 1 + 0.00509 · {=strength}',
     },
     {
       name: 'liquidDensity',

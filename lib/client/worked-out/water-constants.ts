@@ -130,7 +130,7 @@ export const waterConstants = [
       unit: 'molesPerLitre',
       of: 'chemistry/activity#ionicStrengthOf',
       at: [DEFAULT_DISSOLVED_SOLIDS],
-      formula: '*I* = 1.6 · 10{^−5} · dissolved solids',
+      formula: '*I* = 1.6 · 10{^−5} · {=dissolvedSolids}',
       source: 'ionic',
     },
     {
@@ -155,7 +155,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/activity#activityCoefficients.single',
       at: [celsius, ionicStrengthOf(DEFAULT_DISSOLVED_SOLIDS)],
-      formula: 'log *γ* = −*A* *z*² (√*I* / (1 + √*I*) − 0.3 *I*), uncharged log *γ* = 0.1 *I*',
+      formula: 'log *γ* = −*A* *z*² (√*I* / (1 + √*I*) − 0.3 *I*), {=uncharged} log *γ* = 0.1 *I*',
     },
     {
       name: 'dielectric',
@@ -198,7 +198,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/saturation#calciumFactor',
       at: [300],
-      formula: '*C* = log hardness − 0.4',
+      formula: '*C* = log {=hardness} − 0.4',
     },
     {
       name: 'alkalinityFactor',
@@ -206,7 +206,7 @@ export const waterConstants = [
       unit: 'none',
       of: 'chemistry/saturation#alkalinityFactor',
       at: [100],
-      formula: '*D* = log alkalinity',
+      formula: '*D* = log {=alkalinity}',
     },
   ]),
   group(

@@ -22,6 +22,7 @@ import {
 import { lifeOf } from '@/lib/projection/tablets';
 import { readingMethods } from '@/lib/schemas/reading-kinds';
 import { solarPosition } from '@/lib/sun/solar-position';
+import { skyOfSunshine } from '@/lib/sun/sunshine';
 import { weekAheadSchema } from '@/lib/schemas/week-ahead';
 import { REFERENCE_ELEVATION, ULTRAVIOLET_EXPONENT } from '@/lib/sun/ultraviolet';
 import { type Constant, type ConstantUnit, group, type SourceName } from './constant';
@@ -100,7 +101,17 @@ export const weekConstants = [
       of: 'sun/solar-position#solarPosition.declination',
       at: [MIDSUMMER],
       formula:
-        '*L* = 280.46 + 0.9856474 *n*, *g* = 357.528 + 0.9856003 *n*, *λ* = *L* + 1.915 sin *g* + 0.02 sin 2*g*, *ε* = 23.439 − 4 · 10{^−7} *n*, sidereal time 280.46062 + 360.98564737 *n*',
+        '*L* = 280.46 + 0.9856474 *n*, *g* = 357.528 + 0.9856003 *n*, *λ* = *L* + 1.915 sin *g* + 0.02 sin 2*g*, *ε* = 23.439 − 4 · 10{^−7} *n*, {=siderealTime} 280.46062 + 360.98564737 *n*',
+    },
+  ]),
+  group('sunshine', ['sun'], 'fao56', [
+    {
+      name: 'skyOfSunshine',
+      value: skyOfSunshine(11, 15),
+      unit: 'none',
+      of: 'sun/sunshine#skyOfSunshine',
+      at: [11, 15],
+      formula: '(0.25 + 0.5 *n* / *N*) / 0.75',
     },
   ]),
   group('covers', ['sun', 'evaporation'], 'practice', [
@@ -175,7 +186,7 @@ export const weekConstants = [
       unit: 'hours',
       of: 'projection/tablets#lifeOf',
       at: [20, still.tabletLife],
-      formula: 'life · ∛(mass/200) under 200 g, life · ∛(mass/230) over 230 g',
+      formula: '{=life} · ∛({=mass}/200) {=under} 200 g, {=life} · ∛({=mass}/230) {=over} 230 g',
       source: 'tabletShape',
     },
   ]),
