@@ -32,9 +32,7 @@ export function RulerSlider(props: RulerSliderProps) {
         <label htmlFor={id} className="text-body">
           {label}
         </label>
-        <output htmlFor={id} className="text-small whitespace-nowrap text-ink-2">
-          {shown}
-        </output>
+        <span className="text-small whitespace-nowrap text-ink-2">{shown}</span>
       </div>
       <div className={figures.length === 0 ? 'relative h-11' : 'relative h-14'}>
         <div className="absolute inset-x-3.5 top-5.5 border-t-control border-ink" aria-hidden="true">
