@@ -1,6 +1,7 @@
 import { ChevronDown } from 'lucide-react';
 import { useLocale, useTranslations } from 'next-intl';
 import type { ListedConstant, ListedGroup } from '@/lib/client/worked-out/constants';
+import { sourceIn } from '@/lib/messages/source-words';
 import { formatNumber } from '@/lib/units/format';
 import { fewestDecimals } from './fewest-decimals';
 import { Typeset } from './typeset';
@@ -65,7 +66,7 @@ function ConstantRow({ constant, group }: { constant: ListedConstant; group: Lis
       <span className="col-span-2 text-small text-ink-2 md:col-span-1">
         {typeof source === 'string'
           ? t(`source.${source}`)
-          : t('marked', { kind: t(`kind.${source.kind}`), text: source.text })}
+          : t('marked', { kind: t(`kind.${source.kind}`), text: sourceIn(locale, source.text) })}
       </span>
     </li>
   );

@@ -77,7 +77,17 @@ export const choosingLanguage: Journey = {
   },
 };
 
-const beforeTheDoor = ['/', '/sign-in', '/sign-up', '/help/emergency', '/help/safety', '/help/privacy'];
+const beforeTheDoor = [
+  '/',
+  '/sign-in',
+  '/sign-up',
+  '/help/emergency',
+  '/help/safety',
+  '/help/privacy',
+  '/help/how',
+  '/help/how/free-chlorine',
+  '/help/how/volume',
+];
 const inside = ['/week', '/week/print', '/test', '/pool', '/situations', '/rounds', '/house', '/help'];
 
 /** Spanish words are longer: nothing may run over at the narrowest and at the widest. */
