@@ -36,7 +36,7 @@ export function HouseholdBar({ frame }: { frame: HouseholdFrame }) {
         <BarLink href="/rounds">{t('rounds')}</BarLink>
         <BarLink href="/pool">{t('pool')}</BarLink>
         <BarLink href="/help">{t('help')}</BarLink>
-        <span className="flex items-center gap-2.25">
+        <PageLink href="/household" className="flex min-h-11 items-center gap-2.25">
           <Faces people={frame.people} />
           <span className="text-fine">
             <b className="block max-w-44 truncate font-emphasis">{frame.householdName}</b>
@@ -44,7 +44,7 @@ export function HouseholdBar({ frame }: { frame: HouseholdFrame }) {
               {t('nameAndRole', { name: frame.you.name, role: t(`role.${frame.you.role}`) })}
             </span>
           </span>
-        </span>
+        </PageLink>
         <SignOutButton className="text-[15px] leading-5" />
       </nav>
     </header>

@@ -1,6 +1,15 @@
 'use client';
 
-import { ChevronRight, CircleQuestionMark, Footprints, House, LifeBuoy, type LucideIcon, Waves } from 'lucide-react';
+import {
+  ChevronRight,
+  CircleQuestionMark,
+  Footprints,
+  House,
+  LifeBuoy,
+  type LucideIcon,
+  UsersRound,
+  Waves,
+} from 'lucide-react';
 import { useTranslations } from 'next-intl';
 import { Avatar } from '@/components/ui/avatar';
 import { Sheet } from '@/components/ui/sheet';
@@ -29,6 +38,7 @@ export function MoreSheet({ frame, open, onOpenChange }: MoreSheetProps) {
       <MorePlace href="/rounds" Icon={Footprints} name={t('rounds')} fact={t('roundsFact')} />
       <MorePlace href="/house" Icon={House} name={t('house')} fact={t('houseFact')} />
       <MorePlace href="/pool" Icon={Waves} name={t('pool')} fact={t('poolFact')} />
+      <MorePlace href="/household" Icon={UsersRound} name={t('household')} fact={t('householdFact')} />
       <MorePlace href="/help" Icon={CircleQuestionMark} name={t('help')} fact={t('helpFact')} />
       <div className="mx-4 flex min-h-14 items-center justify-between gap-3 border-t border-ink text-[15px] leading-5">
         <span className="inline-flex min-w-0 items-center gap-2.25">

@@ -1,8 +1,9 @@
 import 'server-only';
 import { and, asc, eq, gt, isNull, lte, ne, or } from 'drizzle-orm';
-import type { DatabaseOrTransaction } from '@/db/client';
+import type { DatabaseOrTransaction, Transaction } from '@/db/client';
 import { households, memberships, people, pools } from '@/db/schema';
 import type { ProvenHouseholdId, SystemScope } from '@/lib/schemas/scope';
+import type { Role } from '@/lib/schemas/week-sheet';
 
 export async function insertMembership(
   db: DatabaseOrTransaction,
@@ -18,6 +19,7 @@ export async function listValidMemberships(db: DatabaseOrTransaction, personId: 
     .select({
       membershipId: memberships.id,
       role: memberships.role,
+      chemicalsAllowed: memberships.chemicalsAllowed,
       handlesChemicals: memberships.handlesChemicals,
       safetyCardReadAt: memberships.safetyCardReadAt,
       personName: people.name,
@@ -76,3 +78,45 @@ export async function markHandlesChemicals(
     .set(cardReadAt === null ? { handlesChemicals: false } : { handlesChemicals: true, safetyCardReadAt: cardReadAt })
     .where(and(eq(memberships.householdId, householdId), eq(memberships.id, membershipId)));
 }
+
+/** Who belongs to a household now, in the order in which they came. */
+export async function listMembers(db: DatabaseOrTransaction, householdId: ProvenHouseholdId, now: Date) {
+  return db
+    .select({
+      id: memberships.id,
+      personId: memberships.personId,
+      name: people.name,
+      role: memberships.role,
+      chemicalsAllowed: memberships.chemicalsAllowed,
+      handlesChemicals: memberships.handlesChemicals,
+      safetyCardReadAt: memberships.safetyCardReadAt,
+    })
+    .from(memberships)
+    .innerJoin(people, eq(people.id, memberships.personId))
+    .where(and(eq(memberships.householdId, householdId), isValid(now)))
+    .orderBy(asc(memberships.validFrom), asc(memberships.id));
+}
+
+/** Another role, and whether they may handle chemicals; whoever may not any more no longer does. */
+export async function updateMember(
+  tx: Transaction,
+  { householdId, id, role, chemicalsAllowed }: MemberOf & { role: Role; chemicalsAllowed: boolean },
+): Promise<void> {
+  await tx
+    .update(memberships)
+    .set({ role, chemicalsAllowed, ...(chemicalsAllowed ? {} : { handlesChemicals: false }) })
+    .where(and(eq(memberships.householdId, householdId), eq(memberships.id, id)));
+}
+
+/** The membership is over from now on. */
+export async function endMembership(tx: Transaction, { householdId, id, at }: MemberOf & { at: Date }): Promise<void> {
+  await tx
+    .update(memberships)
+    .set({ validUntil: at })
+    .where(and(eq(memberships.householdId, householdId), eq(memberships.id, id)));
+}
+
+type MemberOf = { householdId: ProvenHouseholdId; id: string };
+
+const isValid = (now: Date) =>
+  and(lte(memberships.validFrom, now), or(isNull(memberships.validUntil), gt(memberships.validUntil, now)));

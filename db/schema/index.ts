@@ -1,6 +1,7 @@
 export { auditTrail } from './audit-trail';
 export { houseNotes } from './house-notes';
 export { households } from './households';
+export { invitations } from './invitations';
 export { memberships } from './memberships';
 export { people } from './people';
 export { doseEvents, planDoses } from './plan-doses';

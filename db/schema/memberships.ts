@@ -16,6 +16,8 @@ export const memberships = sqliteTable(
       .notNull()
       .references(() => people.id, { onDelete: 'cascade' }),
     role: text('role', { enum: roles }).notNull(),
+    /** An owner says that this is an adult who may handle chemicals. */
+    chemicalsAllowed: integer('chemicals_allowed', { mode: 'boolean' }).notNull().default(true),
     /** Adult who may dose; counts only while the safety card was read within the season. */
     handlesChemicals: integer('handles_chemicals', { mode: 'boolean' }).notNull().default(false),
     safetyCardReadAt: integer('safety_card_read_at', { mode: 'timestamp_ms' }),

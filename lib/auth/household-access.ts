@@ -15,6 +15,8 @@ export type HouseholdAccess = {
   personName: string;
   membershipId: string;
   role: Role;
+  /** An owner says that this is an adult who may handle chemicals. */
+  chemicalsAllowed: boolean;
   /** Marked as one who handles chemicals, with the safety card read within the season. */
   handlesChemicals: boolean;
   timeZone: string;
@@ -59,6 +61,7 @@ export async function proveHousehold(
     personName: membership.personName,
     membershipId: membership.membershipId,
     role: membership.role,
+    chemicalsAllowed: membership.chemicalsAllowed,
     handlesChemicals: membership.handlesChemicals && safetyCardCounts(safetyCardReadAt, now),
     timeZone: household.timeZone,
     unitSystem: household.unitSystem,

@@ -6,9 +6,14 @@ import { chooseSessionHousehold } from '@/db/queries/sessions';
 import { AppError } from '@/lib/errors';
 import type { Language } from '@/lib/schemas/languages';
 import { proveHousehold } from './household-access';
-import { type HouseholdVisit, householdVisitOf, openVisit } from './visit';
+import { type HouseholdVisit, householdVisitOf, openVisit, type Visit } from './visit';
 
 const openPage = cache(async () => openVisit(await headers()));
+
+/** Who looks at a page that is about no household yet. */
+export async function openPageVisit(): Promise<Visit> {
+  return openPage();
+}
 
 /** What to speak on a page. */
 export async function pageLanguage(): Promise<Language> {

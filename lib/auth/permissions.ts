@@ -13,6 +13,7 @@ const onlyCarers = 'You can look at this household, but not change it.';
 /** What each role may do, in one table; what is refused is said in words. */
 const rules = {
   look: { roles: everyone, otherwise: 'You cannot see this household.' },
+  invite: { roles: owners, otherwise: 'Only an owner can invite, change or remove members.' },
   'change-household': { roles: owners, otherwise: onlyOwners },
   'change-pool': { roles: owners, otherwise: onlyOwners },
   'reset-learning': { roles: owners, otherwise: 'Only an owner can let the pool be learnt anew.' },

@@ -1,4 +1,4 @@
-import type { Entered, SignIn, SignUp } from '@/lib/schemas/account';
+import type { Entered, InvitedSignUp, SignIn, SignUp } from '@/lib/schemas/account';
 import type { LanguageChoice } from '@/lib/schemas/language-choice';
 import { fetchJson, type ReplyParser } from './fetch-json';
 import { forgetEmergencyCard } from './kept-card';
@@ -30,6 +30,16 @@ export function signIn(entry: SignIn): Promise<Entered> {
 
 export function signUp(entry: SignUp): Promise<Entered> {
   return fetchJson('/api/sign-up', whereNext, { method: 'POST', body: entry });
+}
+
+/** Signs up and joins the household of an invitation. */
+export function signUpInvited(entry: InvitedSignUp): Promise<Entered> {
+  return fetchJson('/api/invitations/sign-up', whereNext, { method: 'POST', body: entry });
+}
+
+/** Joins the household of an invitation with the account that is signed in. */
+export function acceptInvitation(accepted: { token: string }): Promise<Entered> {
+  return fetchJson('/api/invitations/accept', whereNext, { method: 'POST', body: accepted });
 }
 
 export async function signOut(): Promise<void> {

@@ -4,9 +4,11 @@ import events from './en/events.json';
 import firstRun from './en/first-run.json';
 import help from './en/help.json';
 import house from './en/house.json';
+import household from './en/household.json';
 import how from './en/how.json';
 import howConstants from './en/how-constants.json';
 import howExamples from './en/how-examples.json';
+import invitation from './en/invitation.json';
 import learnt from './en/learnt.json';
 import navigation from './en/navigation.json';
 import photos from './en/photos.json';
@@ -33,9 +35,11 @@ export const english = {
   'first-run': firstRun,
   help,
   house,
+  household,
   how,
   'how-constants': howConstants,
   'how-examples': howExamples,
+  invitation,
   learnt,
   navigation,
   photos,

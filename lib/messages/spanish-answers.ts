@@ -367,4 +367,24 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
     'Esto no es una foto. Elige una imagen en JPEG, PNG o WebP.',
   'This photo is in a format that cannot be read here (HEIC or AVIF). Send it as JPEG: on an iPhone, Settings, Camera, Formats, Most Compatible.':
     'Esta foto está en un formato que aquí no se puede leer (HEIC o AVIF). Envíala como JPEG: en un iPhone, Ajustes, Cámara, Formatos, El más compatible.',
+  'Write their name.': 'Escribe su nombre.',
+  'Somebody who only looks does not handle chemicals.': 'Quien solo mira no maneja productos químicos.',
+  'This link is not whole. Copy all of it.': 'Este enlace no está completo. Cópialo entero.',
+  'Only an owner can invite, change or remove members.':
+    'Solo un propietario puede invitar, cambiar o quitar personas.',
+  'So many invitations are open already. Withdraw one first.': 'Ya hay muchas invitaciones abiertas. Retira antes una.',
+  'This invitation was sent already. Send it again to get another link.':
+    'Esta invitación ya se envió. Pide un enlace nuevo para tener otro.',
+  'Nobody can be invited into the demo household.': 'No se puede invitar a nadie al hogar de muestra.',
+  'This invitation is used, withdrawn, or not of this household.':
+    'Esta invitación ya se usó, se retiró o no es de este hogar.',
+  'This person does not belong to the household, or no longer.': 'Esta persona no pertenece al hogar, o ya no.',
+  'A household needs an owner. Make somebody else an owner first.':
+    'Un hogar necesita un propietario. Haz antes propietario a otra persona.',
+  'This invitation is not known. Ask for another link.': 'Esta invitación no se conoce. Pide otro enlace.',
+  'You belong to this household already.': 'Ya perteneces a este hogar.',
+  'This invitation is used, withdrawn or over. Ask for another link.':
+    'Esta invitación ya se usó, se retiró o venció. Pide otro enlace.',
+  'An owner has to mark you as an adult who handles chemicals first.':
+    'Antes, un propietario tiene que indicar que eres una persona adulta que maneja productos químicos.',
 };

@@ -4,9 +4,11 @@ import events from './es/events.json';
 import firstRun from './es/first-run.json';
 import help from './es/help.json';
 import house from './es/house.json';
+import household from './es/household.json';
 import how from './es/how.json';
 import howConstants from './es/how-constants.json';
 import howExamples from './es/how-examples.json';
+import invitation from './es/invitation.json';
 import learnt from './es/learnt.json';
 import navigation from './es/navigation.json';
 import photos from './es/photos.json';
@@ -33,9 +35,11 @@ export const spanish: Catalogue = {
   'first-run': firstRun,
   help,
   house,
+  household,
   how,
   'how-constants': howConstants,
   'how-examples': howExamples,
+  invitation,
   learnt,
   navigation,
   photos,

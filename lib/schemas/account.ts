@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { isTimeZone } from '@/lib/calendar/wall-time';
+import { invitationTokenSchema } from './member';
 import { timeZoneSchema } from './time';
 import { unitSystems } from './week-sheet';
 
@@ -35,22 +36,27 @@ export const shortestPassword = 10;
 /** Longer ones only cost time to digest. */
 const longestPassword = 200;
 
+const newPasswordSchema = z
+  .string({ error: 'Choose a password.' })
+  .min(shortestPassword, `Use at least ${shortestPassword} characters. A few words in a row are easy to keep in mind.`)
+  .max(longestPassword, `Use at most ${longestPassword} characters.`);
+
 export const signUpSchema = z.strictObject({
   name: personNameSchema,
   email: emailSchema,
-  password: z
-    .string({ error: 'Choose a password.' })
-    .min(
-      shortestPassword,
-      `Use at least ${shortestPassword} characters. A few words in a row are easy to keep in mind.`,
-    )
-    .max(longestPassword, `Use at most ${longestPassword} characters.`),
+  password: newPasswordSchema,
   householdName: householdNameSchema,
   timeZone: knownTimeZoneSchema,
   unitSystem: unitSystemSchema,
   locale: localeSchema,
 });
 export type SignUp = z.output<typeof signUpSchema>;
+
+/** Somebody who was invited signs up without a household of their own. */
+export const invitedSignUpSchema = signUpSchema
+  .pick({ name: true, email: true, password: true, locale: true })
+  .extend({ token: invitationTokenSchema });
+export type InvitedSignUp = z.output<typeof invitedSignUpSchema>;
 
 export const signInSchema = z.strictObject({
   email: emailSchema,

@@ -1,5 +1,6 @@
 import 'server-only';
 import { randomUUID } from 'node:crypto';
+import type { Transaction } from '@/db/client';
 import { insertHousehold } from '@/db/queries/households';
 import { insertMembership } from '@/db/queries/memberships';
 import { insertPerson } from '@/db/queries/people';
@@ -9,44 +10,62 @@ import { countTry } from '@/lib/auth/rate-limit';
 import { systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
-import type { Entered, SignUp } from '@/lib/schemas/account';
+import type { Entered, InvitedSignUp, SignUp } from '@/lib/schemas/account';
 import { languageOf } from '@/lib/schemas/languages';
+import { useInvitation } from './join-household';
 
 /** Makes an account with a household of its own, whose owner the person is, and signs in. */
 export async function signUp(visit: Visit, account: SignUp): Promise<Entered> {
-  await countTry(visit, 'sign-up-address', visit.address);
-  if (isCommonPassword(account.password))
-    throw refusal('invalid-input', 'password', 'This password is one of those that are tried first. Choose another.');
-
-  const { db, now } = visit;
-  const scope = systemScope('sign-up');
-  const personId = randomUUID();
   const householdId = randomUUID();
-  const passwordHash = await hashPassword(account.password);
-  const { name, email, householdName, timeZone, unitSystem, locale } = account;
-  await inWriteTransaction(db, async (tx) => {
-    const added = await insertPerson(tx, scope, {
-      id: personId,
-      name,
-      email,
-      passwordHash,
-      language: languageOf(locale),
-      createdAt: now,
-    });
-    if (added === 'taken')
-      throw refusal('conflict', 'email', 'There is an account with this e-mail already. Sign in instead.');
-    await insertHousehold(tx, scope, {
-      id: householdId,
-      name: householdName,
-      timeZone,
-      unitSystem,
-      locale,
-      createdAt: now,
-    });
-    await insertMembership(tx, scope, { id: randomUUID(), householdId, personId, role: 'owner', validFrom: now });
+  const { householdName, timeZone, unitSystem, locale } = account;
+  const personId = await addPerson(visit, account, async (tx, person) => {
+    const scope = systemScope('sign-up');
+    const household = { id: householdId, name: householdName, timeZone, unitSystem, locale, createdAt: visit.now };
+    await insertHousehold(tx, scope, household);
+    const membership = {
+      id: randomUUID(),
+      householdId,
+      personId: person,
+      role: 'owner',
+      validFrom: visit.now,
+    } as const;
+    await insertMembership(tx, scope, membership);
   });
   await visit.enter(personId, householdId);
   return { next: '/first-run' };
+}
+
+/** Makes an account for somebody who was invited, uses the invitation up, and signs in: all of it or nothing. */
+export async function signUpInvited(visit: Visit, { token, ...account }: InvitedSignUp): Promise<Entered> {
+  let householdId: string | null = null;
+  const personId = await addPerson(visit, account, async (tx, person) => {
+    householdId = await useInvitation(tx, { token, personId: person, now: visit.now });
+  });
+  await visit.enter(personId, householdId);
+  return { next: '/week' };
+}
+
+type Account = Pick<SignUp, 'name' | 'email' | 'password' | 'locale'>;
+
+/** Writes a person and whatever belongs to them, in one transaction. @returns the person's id */
+async function addPerson(
+  visit: Visit,
+  { name, email, password, locale }: Account,
+  further: (tx: Transaction, personId: string) => Promise<void>,
+): Promise<string> {
+  await countTry(visit, 'sign-up-address', visit.address);
+  if (isCommonPassword(password))
+    throw refusal('invalid-input', 'password', 'This password is one of those that are tried first. Choose another.');
+  const { db, now } = visit;
+  const personId = randomUUID();
+  const passwordHash = await hashPassword(password);
+  await inWriteTransaction(db, async (tx) => {
+    const person = { id: personId, name, email, passwordHash, language: languageOf(locale), createdAt: now };
+    if ((await insertPerson(tx, systemScope('sign-up'), person)) === 'taken')
+      throw refusal('conflict', 'email', 'There is an account with this e-mail already. Sign in instead.');
+    await further(tx, personId);
+  });
+  return personId;
 }
 
 function refusal(code: 'invalid-input' | 'conflict', path: string, message: string): AppError {

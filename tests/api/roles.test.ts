@@ -12,6 +12,8 @@ const ofThePerson = [
   '/api/look-round',
   '/api/language',
   '/api/tour',
+  '/api/invitations/accept',
+  '/api/invitations/sign-up',
   '/api/households/chosen',
 ];
 /** What answers when no route does. */
@@ -22,6 +24,10 @@ const writes = routePatterns
   .filter((pattern) => pattern !== unknown && !ofThePerson.includes(pattern))
   .flatMap((pattern) => writeMethods.map((method) => ({ method, pattern })));
 const path = { productId: 'gran', readingId: crypto.randomUUID(), doseId: crypto.randomUUID(), day: '2026-07-05' };
+
+/** Whoever belongs to a household may leave it; whom else they may remove is looked at by the service. */
+const forEveryMember = ({ method, pattern }: (typeof writes)[number]) =>
+  method === 'DELETE' && pattern === '/api/members/[id]';
 
 describe('a write', () => {
   let db: Database;
@@ -40,12 +46,15 @@ describe('a write', () => {
     expect(routePatterns).toEqual(expect.arrayContaining(['/api/pool', '/api/shelf-products', '/api/households']));
   });
 
-  it.each(writes)('is not for a viewer: $method $pattern', async ({ method, pattern }) => {
-    const response = await call(method, pattern, { cookie: viewer, body: {}, path });
-    // 405: there is no such write.
-    expect([403, 405]).toContain(response.status);
-    expect(await db.$count(auditTrail)).toBe(0);
-  });
+  it.each(writes.filter((write) => !forEveryMember(write)))(
+    'is not for a viewer: $method $pattern',
+    async ({ method, pattern }) => {
+      const response = await call(method, pattern, { cookie: viewer, body: {}, path });
+      // 405: there is no such write.
+      expect([403, 405]).toContain(response.status);
+      expect(await db.$count(auditTrail)).toBe(0);
+    },
+  );
 
   it.each(writes)('is not for somebody who is signed out: $method $pattern', async ({ method, pattern }) => {
     expect([401, 405]).toContain((await call(method, pattern, { body: {}, path })).status);

@@ -78,7 +78,7 @@ const refused: Refusal[] = [
     what: 'chemicals in the hands of a viewer',
     by: /memberships_viewers_do_not_dose/,
     write: ({ membershipId }) =>
-      sql`INSERT INTO memberships SELECT 'm', household_id, person_id, 'viewer', 1, 1, 1, 2 FROM memberships WHERE id = ${membershipId}`,
+      sql`INSERT INTO memberships (id, household_id, person_id, role, handles_chemicals, safety_card_read_at, valid_from, valid_until) SELECT 'm', household_id, person_id, 'viewer', 1, 1, 1, 2 FROM memberships WHERE id = ${membershipId}`,
   },
   {
     what: 'chemicals in the hands of somebody who has not read the card',
@@ -89,7 +89,7 @@ const refused: Refusal[] = [
     what: 'a second open membership of one person',
     by: /UNIQUE/,
     write: ({ membershipId }) =>
-      sql`INSERT INTO memberships SELECT 'm', household_id, person_id, 'owner', 0, NULL, 1, NULL FROM memberships WHERE id = ${membershipId}`,
+      sql`INSERT INTO memberships (id, household_id, person_id, role, handles_chemicals, safety_card_read_at, valid_from, valid_until) SELECT 'm', household_id, person_id, 'owner', 0, NULL, 1, NULL FROM memberships WHERE id = ${membershipId}`,
   },
   {
     what: 'the last owner becoming a viewer',

@@ -17,6 +17,7 @@ const publicRoutes = [
   '/api/sign-up',
   '/api/look-round',
   '/api/language',
+  '/api/invitations/sign-up',
 ];
 
 /** What no page of ours would send: refused in words, with nothing written. */
