@@ -3,6 +3,8 @@ import type { HouseholdFrame } from '@/components/navigation/member';
 import { SignedOutShell } from '@/components/navigation/signed-out-shell';
 import { findHousehold } from '@/lib/auth/page-gate';
 import type { HouseholdVisit } from '@/lib/auth/visit';
+import type { Member } from '@/lib/schemas/member';
+import { showPeople } from '@/lib/services/show-people';
 
 /**
  * Draws the bars for whoever is here. Nobody is sent away: the emergency card and the safety card stand below this layout
@@ -12,10 +14,13 @@ import type { HouseholdVisit } from '@/lib/auth/visit';
 export default async function HouseholdLayout({ children }: { children: React.ReactNode }) {
   const visit = await findHousehold();
   if (!visit?.access.poolCompleted) return <SignedOutShell signedIn={visit !== null}>{children}</SignedOutShell>;
-  return <HouseholdShell frame={frameOf(visit)}>{children}</HouseholdShell>;
+  const { members } = await showPeople(visit);
+  return <HouseholdShell frame={frameOf(visit, members)}>{children}</HouseholdShell>;
 }
 
-function frameOf({ access }: HouseholdVisit): HouseholdFrame {
+/** Whose faces are shown: yours first. */
+function frameOf({ access }: HouseholdVisit, members: readonly Member[]): HouseholdFrame {
   const you = { name: access.personName, role: access.role };
-  return { householdName: access.householdName, you, people: [you] };
+  const others = members.filter((member) => !member.you).map(({ name, role }) => ({ name, role }));
+  return { householdName: access.householdName, you, people: [you, ...others] };
 }

@@ -26,7 +26,7 @@ export function HouseholdScreen({ setting }: { setting: HouseholdSetting }) {
       <HelpHead headline={t('title')} lead={t('lead')} />
       <div className="grid gap-x-9 gap-y-5 pt-3 lg:grid-cols-[minmax(0,1fr)_326px]">
         <section aria-labelledby="people">
-          <h2 id="people" className="font-display text-section">
+          <h2 id="people" className="pb-1.5 font-display text-section">
             {t('people')}
           </h2>
           {data !== undefined ? (

@@ -24,7 +24,7 @@ export function InvitationRow({ invitation, setting }: { invitation: Invitation;
       <Avatar name={name} ring="dashed" className="mt-0.5" />
       <p className="min-w-0">
         <b className="block font-display text-name break-words">{name}</b>
-        <span className="block text-small text-ink-2">{`${t('invited')}, ${t(`role.${role}`)}`}</span>
+        <span className="block text-small text-ink-2">{t('invited', { role: t(`role.${role}`) })}</span>
       </p>
       <div className="col-start-2 min-w-0 md:col-start-3">
         <p className="text-body">{t(expired ? 'over' : 'until', { when })}</p>

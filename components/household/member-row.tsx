@@ -3,12 +3,14 @@
 import { useTranslations } from 'next-intl';
 import { useState } from 'react';
 import { ringOf } from '@/components/navigation/faces';
+import { PageLink } from '@/components/navigation/page-link';
 import { Avatar } from '@/components/ui/avatar';
 import { Button } from '@/components/ui/button';
 import { Dialog } from '@/components/ui/dialog';
 import { PlainSelect } from '@/components/ui/plain-select';
 import { Switch } from '@/components/ui/switch';
-import { useChangeMember, useEndMember } from '@/lib/client/members';
+import { textLink } from '@/components/ui/text-link';
+import { useChangeMember, useConfirmCard, useEndMember } from '@/lib/client/members';
 import type { Member } from '@/lib/schemas/member';
 import { dayIn } from './day-in';
 import type { HouseholdSetting } from './household-setting';
@@ -31,8 +33,7 @@ export function MemberRow({ member, setting }: { member: Member; setting: Househ
       <p className="min-w-0">
         <b className="block font-display text-name break-words">{name}</b>
         <span className="block text-small text-ink-2">
-          {t(`role.${role}`)}
-          {you ? <span className="ml-1">{`(${t('you')})`}</span> : null}
+          {you ? t('you', { role: t(`role.${role}`) }) : t(`role.${role}`)}
         </span>
       </p>
       <div className="col-start-2 min-w-0 md:col-start-3">
@@ -42,6 +43,7 @@ export function MemberRow({ member, setting }: { member: Member; setting: Househ
             ? t('card.handles', { when: dayIn(setting, member.cardReadAt) })
             : t(chemicalsAllowed && role !== 'viewer' ? 'card.waits' : 'card.none')}
         </p>
+        {you && role !== 'viewer' && chemicalsAllowed && !member.handlesChemicals ? <ConfirmCard /> : null}
         {changes && role !== 'viewer' ? (
           <Switch
             label={<span className="text-small">{t('allow', { name })}</span>}
@@ -106,5 +108,23 @@ function RemoveDialog({ member: { id, name }, onClose }: { member: Member; onClo
     >
       {end.error === null ? null : <p role="alert">{words(end.error)}</p>}
     </Dialog>
+  );
+}
+
+/** The safety card is read again each season, by whoever handles chemicals. */
+function ConfirmCard() {
+  const t = useTranslations('household.card');
+  const words = useRefusalWords();
+  const confirm = useConfirmCard();
+  return (
+    <div className="my-2 grid justify-items-start gap-1">
+      <PageLink href="/help/safety" className={`inline-flex min-h-11 items-center text-body ${textLink}`}>
+        {t('read')}
+      </PageLink>
+      <Button busy={confirm.isPending ? t('confirming') : undefined} onClick={() => confirm.mutate()}>
+        {t('confirm')}
+      </Button>
+      {confirm.error === null ? null : <p role="alert">{words(confirm.error)}</p>}
+    </div>
   );
 }

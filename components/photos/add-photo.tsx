@@ -60,7 +60,7 @@ export function AddPhoto({ kind, about, caption, label, onAdded }: Props) {
         <input
           type="file"
           accept={accepted}
-          className="absolute inset-0 cursor-pointer opacity-0"
+          className="absolute inset-0 cursor-pointer opacity-0 outline-none"
           disabled={add.isPending}
           onChange={({ target }) => {
             const file = target.files?.[0];

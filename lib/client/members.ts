@@ -2,6 +2,7 @@
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import type { HouseholdPeople, MemberChange, NewInvitation, SentInvitation } from '@/lib/schemas/member';
+import { doneReply } from './done-reply';
 import { fetchJson } from './fetch-json';
 import { weekKeys } from './week';
 
@@ -89,5 +90,19 @@ export function useEndMember() {
     networkMode: 'always',
     mutationFn: (id: string) => fetchJson(`/api/members/${id}`, peopleReply, { method: 'DELETE' }),
     onSuccess: keep,
+  });
+}
+
+/** Says that whoever is signed in is an adult and has just read the safety card. */
+export function useConfirmCard() {
+  const client = useQueryClient();
+  return useMutation({
+    networkMode: 'always',
+    mutationFn: () => fetchJson('/api/safety-card', doneReply, { method: 'POST', body: { adult: true, read: true } }),
+    onSuccess: () =>
+      Promise.all([
+        client.invalidateQueries({ queryKey: peopleKey }),
+        client.invalidateQueries({ queryKey: weekKeys.all }),
+      ]),
   });
 }

@@ -116,6 +116,11 @@ export const importPlants: { rule: string; wrong: Plant; right: Plant }[] = [
     right: plant('db/client.ts', '@libsql/client'),
   },
   {
+    rule: 'sharp-at-home',
+    wrong: plant('lib/services/picture.ts', 'sharp'),
+    right: plant('lib/photos/picture.ts', 'sharp'),
+  },
+  {
     rule: 'recharts-at-home',
     wrong: plant('components/week-sheet/chart.tsx', 'recharts'),
     right: plant('components/charts/chart.tsx', 'recharts'),

@@ -35,7 +35,19 @@ const lib = [
     'storage',
     'projection',
   ],
-  ...['learning', 'planner', 'situations', 'season', 'verdict', 'services', 'engine-worker', 'auth', 'mail', 'push'],
+  ...[
+    'learning',
+    'planner',
+    'situations',
+    'season',
+    'verdict',
+    'services',
+    'engine-worker',
+    'auth',
+    'mail',
+    'photos',
+    'push',
+  ],
   ...['weather', 'api', 'client', 'messages', 'cli', 'docs'],
 ];
 const indexes = ['db/schema', 'lib/chemistry', 'lib/projection', 'lib/planner'].map((folder) => `${folder}/index.ts`);

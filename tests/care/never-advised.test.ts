@@ -68,6 +68,7 @@ const neverAdvised: readonly Forbidden[] = [
       'Only a member who handles chemicals, and has read the safety card this season, can be named.',
       'I do: I am an adult and have read the safety card',
       'Read the safety card: one minute',
+      'I am an adult and have read the safety card',
       'only adults who have read the safety card, again each season, tick doses.',
       'May handle chemicals once they have read the safety card of this season',
       'Handles chemicals: adult, safety card read {when}',

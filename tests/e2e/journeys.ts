@@ -17,6 +17,7 @@ import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
 import { photos } from './journeys/photos';
 import { scope } from './journeys/scope';
+import { members } from './journeys/members';
 import { paper } from './journeys/paper';
 import { situations } from './journeys/situations';
 import { choosingLanguage, inSpanish, spanishPages } from './journeys/spanish';
@@ -49,6 +50,7 @@ export const journeys: readonly Journey[] = [
   cards,
   cardOffline,
   escape,
+  members,
   photos,
   choosingLanguage,
   landing,

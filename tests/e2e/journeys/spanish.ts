@@ -88,7 +88,7 @@ const beforeTheDoor = [
   '/help/how/free-chlorine',
   '/help/how/volume',
 ];
-const inside = ['/week', '/week/print', '/test', '/pool', '/situations', '/rounds', '/house', '/help'];
+const inside = ['/week', '/week/print', '/test', '/pool', '/situations', '/rounds', '/house', '/household', '/help'];
 
 /** Spanish words are longer: nothing may run over at the narrowest and at the widest. */
 export const spanishPages: Journey = {

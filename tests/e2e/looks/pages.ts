@@ -177,6 +177,7 @@ export const signedIn: readonly View[] = [
   },
   { name: 'house', path: '/house', prepare: shows(words('house.field.gate')) },
   { name: 'house-sheet', path: '/house/sheet', prepare: shows(words('house.sheet.doses.nobody')) },
+  { name: 'household', path: '/household', prepare: shows(words('household.does.owner')) },
   {
     name: 'rounds-exceptions',
     path: '/rounds',

@@ -1,7 +1,9 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
+import { SignOutButton } from '@/components/navigation/sign-out-button';
 import { EntryPage } from '@/components/start/entry-page';
 import { SignInForm } from '@/components/start/sign-in-form';
+import { findHousehold, openPageVisit } from '@/lib/auth/page-gate';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('start.signIn');
@@ -10,6 +12,14 @@ export async function generateMetadata(): Promise<Metadata> {
 
 export default async function SignInPage() {
   const t = await getTranslations('start.signIn');
+  const visit = await openPageVisit();
+  // Whoever is signed in and belongs nowhere is sent here from every page of a household.
+  if (visit.signedIn && !(await findHousehold()))
+    return (
+      <EntryPage title={t('nowhere')} lead={t('nowhereWords')}>
+        <SignOutButton className="text-body" />
+      </EntryPage>
+    );
   return (
     <EntryPage title={t('title')} lead={t('lead')}>
       <SignInForm />
