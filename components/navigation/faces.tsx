@@ -18,7 +18,8 @@ export function Faces({ people }: { people: readonly FramePerson[] }) {
           key={`${person.name}-${index}`}
           name={person.name}
           ring={ringOf[person.role]}
-          className="-ml-1.75 outline-2 outline-paper first:ml-0"
+          // On the narrowest phones the name beside them needs the room.
+          className="-ml-1.75 outline-2 outline-paper first:ml-0 not-first:max-[379px]:hidden"
         />
       ))}
     </span>

@@ -35,7 +35,7 @@ const targets = () =>
 it('leads only to places that exist, and to the emergency card from bar and head', () => {
   renderWithWords(<HouseholdShell frame={frame}>the sheet</HouseholdShell>);
   expect(new Set(targets())).toEqual(
-    new Set(['', '/week', '/test', '/situations', '/rounds', '/pool', '/help', '/help/emergency']),
+    new Set(['', '/week', '/test', '/situations', '/rounds', '/pool', '/household', '/help', '/help/emergency']),
   );
   expect(targets().filter((target) => target === '/help/emergency')).toHaveLength(2);
 });

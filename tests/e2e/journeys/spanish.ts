@@ -127,6 +127,9 @@ const languageOf = (page: Page) => page.evaluate(() => document.documentElement.
 /** Lines with words that every English text has and no Spanish one. */
 function englishOn(page: Page): Promise<string[]> {
   return page.evaluate(() =>
-    document.body.innerText.split('\n').filter((line) => /\b(the|and|with|your|of|this|to|is)\b/i.test(line)),
+    document.body.innerText
+      .replaceAll('Journal of Physical Chemistry', '')
+      .split('\n')
+      .filter((line) => /\b(the|and|with|your|of|this|to|is)\b/i.test(line)),
   );
 }
