@@ -8,6 +8,7 @@ import { ProblemState } from '@/components/ui/problem-state';
 import { Skeleton } from '@/components/ui/skeleton';
 import { peopleOptions } from '@/lib/client/members';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
+import { Account } from './account';
 import type { HouseholdSetting } from './household-setting';
 import { InvitationRow } from './invitation-row';
 import { InviteForm } from './invite-form';
@@ -15,8 +16,10 @@ import { Leaving } from './leaving';
 import { MemberRow } from './member-row';
 import { OtherHouseholds } from './other-households';
 
+type Props = { setting: HouseholdSetting; shortestPassword: number };
+
 /** Who belongs to the household, what each may do, and who is invited. */
-export function HouseholdScreen({ setting }: { setting: HouseholdSetting }) {
+export function HouseholdScreen({ setting, shortestPassword }: Props) {
   const t = useTranslations('household');
   const common = useTranslations('common');
   const problemWords = useProblemWords();
@@ -54,6 +57,7 @@ export function HouseholdScreen({ setting }: { setting: HouseholdSetting }) {
           {setting.mayInvite && !setting.demo ? <InviteForm /> : null}
           {setting.mayInvite ? null : <p className="text-small text-ink-2">{t('onlyOwners')}</p>}
           <OtherHouseholds />
+          {setting.demo ? null : <Account shortestPassword={shortestPassword} />}
           {data === undefined || setting.demo ? null : <Leaving members={data.members} />}
         </div>
       </div>

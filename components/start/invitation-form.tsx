@@ -11,6 +11,7 @@ import { RequestProblem } from '@/lib/client/fetch-json';
 import { acceptInvitation, leaveFor, signUpInvited } from '@/lib/client/session';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { localeIn } from '@/lib/schemas/languages';
+import { EmailField } from './email-field';
 import { looksLikeEmail } from './email-shape';
 import { PasswordField } from './password-field';
 import { useEntryForm } from './use-entry-form';
@@ -77,15 +78,7 @@ function SignUpAndJoin({ token, name: called, shortestPassword }: Omit<Props, 's
         problem={problems.name}
         onChange={() => forgive('name')}
       />
-      <TextField
-        label={t('email')}
-        name="email"
-        type="email"
-        autoComplete="email"
-        inputMode="email"
-        problem={problems.email}
-        onChange={() => forgive('email')}
-      />
+      <EmailField label={t('email')} problem={problems.email} onChange={() => forgive('email')} />
       <PasswordField
         label={t('password')}
         name="password"

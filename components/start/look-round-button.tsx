@@ -13,7 +13,7 @@ export function LookRoundButton({ size = 'normal' }: Pick<ButtonProps, 'size'>) 
   const looking = useMutation({ mutationFn: lookRound, onSuccess: () => leaveFor('/week') });
   const busy = looking.isPending || looking.isSuccess;
   return (
-    <div>
+    <div className="[@media(scripting:none)]:hidden">
       <Button size={size} wide busy={busy ? t('lookingRound') : undefined} onClick={() => looking.mutate()}>
         {t('lookRound')}
       </Button>

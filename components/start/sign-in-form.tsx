@@ -5,8 +5,8 @@ import { PageLink } from '@/components/navigation/page-link';
 import { textLink } from '@/components/ui/text-link';
 import { Button } from '@/components/ui/button';
 import { ProblemState } from '@/components/ui/problem-state';
-import { TextField } from '@/components/ui/text-field';
 import { signIn } from '@/lib/client/session';
+import { EmailField } from './email-field';
 import { looksLikeEmail } from './email-shape';
 import { PasswordField } from './password-field';
 import { useEntryForm } from './use-entry-form';
@@ -27,15 +27,7 @@ export function SignInForm() {
   return (
     <form method="post" noValidate onSubmit={submit} className="grid gap-5">
       {failure === undefined ? null : <ProblemState title={failure} />}
-      <TextField
-        label={t('email')}
-        name="email"
-        type="email"
-        autoComplete="email"
-        inputMode="email"
-        problem={problems.email}
-        onChange={() => forgive('email')}
-      />
+      <EmailField label={t('email')} problem={problems.email} onChange={() => forgive('email')} />
       <PasswordField
         label={t('password')}
         name="password"

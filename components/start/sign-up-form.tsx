@@ -12,6 +12,7 @@ import { useLeftAlone } from '@/components/ui/use-left-alone';
 import { browserTimeZone, signUp } from '@/lib/client/session';
 import { localeIn } from '@/lib/schemas/languages';
 import type { SignUp } from '@/lib/schemas/account';
+import { EmailField } from './email-field';
 import { looksLikeEmail } from './email-shape';
 import { PasswordField } from './password-field';
 import { useEntryForm } from './use-entry-form';
@@ -56,16 +57,7 @@ export function SignUpForm({ likelyUnits, shortestPassword }: SignUpFormProps) {
         problem={problems.name}
         onChange={() => forgive('name')}
       />
-      <TextField
-        label={t('email')}
-        hint={t('emailHint')}
-        name="email"
-        type="email"
-        autoComplete="email"
-        inputMode="email"
-        problem={problems.email}
-        onChange={() => forgive('email')}
-      />
+      <EmailField label={t('email')} hint={t('emailHint')} problem={problems.email} onChange={() => forgive('email')} />
       <PasswordField
         label={t('password')}
         hint={t('passwordHint', { count: shortestPassword })}

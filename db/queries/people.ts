@@ -40,3 +40,17 @@ export async function setPersonLanguage(
 ): Promise<void> {
   await db.update(people).set({ language }).where(eq(people.id, personId));
 }
+
+/** What the password of a person is checked against; null for whoever has none. */
+export async function findPasswordHash(db: DatabaseOrTransaction, personId: string): Promise<string | null> {
+  const [person] = await db.select({ hash: people.passwordHash }).from(people).where(eq(people.id, personId));
+  return person?.hash ?? null;
+}
+
+export async function setPasswordHash(
+  db: DatabaseOrTransaction,
+  personId: string,
+  passwordHash: string,
+): Promise<void> {
+  await db.update(people).set({ passwordHash }).where(eq(people.id, personId));
+}

@@ -10,6 +10,7 @@ const limits = {
   /** A family behind one address signs in seldom; a list of stolen passwords is tried fast. */
   'sign-in-address': { most: 100, windowMilliseconds: 15 * minute },
   'sign-in-email': { most: 10, windowMilliseconds: 15 * minute },
+  'password-person': { most: 10, windowMilliseconds: 15 * minute },
   'sign-up-address': { most: 60, windowMilliseconds: 60 * minute },
 } as const;
 

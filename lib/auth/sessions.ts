@@ -25,6 +25,8 @@ export type Sessions = {
   start(personId: string, householdId: string | null): Promise<{ signedIn: SignedIn; cookie: string }>;
   /** @returns the cookie that forgets the session */
   end(sessionId: string | null): Promise<string>;
+  /** Ends every session of a person, on all devices. */
+  endAll(personId: string): Promise<void>;
   deleteExpired(): Promise<void>;
 };
 
@@ -72,6 +74,7 @@ export function sessionsOf(db: Database, { secure, secret }: { secure: boolean; 
       if (sessionId !== null) await lucia.invalidateSession(sessionId);
       return lucia.createBlankSessionCookie().serialize();
     },
+    endAll: (personId) => lucia.invalidateUserSessions(personId),
     deleteExpired: () => lucia.deleteExpiredSessions(),
   };
 }

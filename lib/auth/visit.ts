@@ -16,6 +16,8 @@ export type Visit = {
   signedIn: SignedIn | null;
   /** Signs a person in on this device, in place of whoever was. */
   enter(personId: string, householdId: string | null): Promise<void>;
+  /** Signs out on every device but this one, which gets another session. Nothing for nobody. */
+  leaveElsewhere(): Promise<void>;
   /** Signs out on this device. */
   leave(): Promise<void>;
   /** What to speak: the language of who is signed in, else what this device asks for. */
@@ -61,6 +63,12 @@ export async function openVisit(
       const started = await sessions.start(personId, householdId);
       visit.signedIn = started.signedIn;
       cookies.splice(0, cookies.length, started.cookie);
+    },
+    async leaveElsewhere() {
+      if (!visit.signedIn) return;
+      const { personId, householdId } = visit.signedIn;
+      await sessions.endAll(personId);
+      await visit.enter(personId, householdId);
     },
     async leave() {
       cookies.splice(0, cookies.length, await sessions.end(visit.signedIn?.sessionId ?? null));

@@ -1,4 +1,4 @@
-import type { Entered, InvitedSignUp, SignIn, SignUp } from '@/lib/schemas/account';
+import type { Entered, InvitedSignUp, PasswordChange, SignIn, SignUp } from '@/lib/schemas/account';
 import type { LanguageChoice } from '@/lib/schemas/language-choice';
 import { fetchJson, type ReplyParser } from './fetch-json';
 import { forgetEmergencyCard } from './kept-card';
@@ -40,6 +40,16 @@ export function signUpInvited(entry: InvitedSignUp): Promise<Entered> {
 /** Joins the household of an invitation with the account that is signed in. */
 export function acceptInvitation(accepted: { token: string }): Promise<Entered> {
   return fetchJson('/api/invitations/accept', whereNext, { method: 'POST', body: accepted });
+}
+
+/** Another password; every other device is signed out by it. */
+export async function changePassword(change: PasswordChange): Promise<void> {
+  await fetchJson('/api/account/password', nothing, { method: 'PUT', body: change });
+}
+
+/** Signs out on every device but this one. */
+export async function signOutElsewhere(): Promise<void> {
+  await fetchJson('/api/sessions', nothing, { method: 'DELETE' });
 }
 
 export async function signOut(): Promise<void> {

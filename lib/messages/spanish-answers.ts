@@ -387,4 +387,6 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
     'Esta invitación ya se usó, se retiró o venció. Pide otro enlace.',
   'An owner has to mark you as an adult who handles chemicals first.':
     'Antes, un propietario tiene que indicar que eres una persona adulta que maneja productos químicos.',
+  'Write the password you have now.': 'Escribe la contraseña que tienes ahora.',
+  'This is not the password you have now.': 'Esta no es la contraseña que tienes ahora.',
 };

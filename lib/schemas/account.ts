@@ -58,6 +58,16 @@ export const invitedSignUpSchema = signUpSchema
   .extend({ token: invitationTokenSchema });
 export type InvitedSignUp = z.output<typeof invitedSignUpSchema>;
 
+/** Whoever changes the password shows that they know it: a device left open is not enough. */
+export const passwordChangeSchema = z.strictObject({
+  current: z
+    .string({ error: 'Write the password you have now.' })
+    .min(1, 'Write the password you have now.')
+    .max(longestPassword, `A password has at most ${longestPassword} characters.`),
+  password: newPasswordSchema,
+});
+export type PasswordChange = z.output<typeof passwordChangeSchema>;
+
 export const signInSchema = z.strictObject({
   email: emailSchema,
   password: z

@@ -119,3 +119,52 @@ describe('signing in and out', () => {
     expect((await signIn('lena@pool.example')).status).toBe(200);
   });
 });
+
+describe('the password', () => {
+  const change = (cookie: string, current: string, password: string) =>
+    call('PUT', '/api/account/password', { cookie, body: { current, password } });
+  const isIn = async (cookie: string) => (await call('GET', '/api/households', { cookie })).status === 200;
+
+  it('is changed by whoever knows it, and signs out every other device', async () => {
+    const email = 'changes@pool.example';
+    const first = sessionOf(await signUp(email));
+    const second = sessionOf(await signIn(email));
+    const changed = await change(second, 'larch water evening', 'heron over the mill');
+    expect(changed.status).toBe(200);
+    const kept = sessionOf(changed);
+    expect(kept).not.toBe(second);
+    expect([await isIn(first), await isIn(second), await isIn(kept)]).toEqual([false, false, true]);
+    expect((await signIn(email)).status).toBe(401);
+    expect((await signIn(email, 'heron over the mill')).status).toBe(200);
+  });
+
+  it('stays as it is for whoever does not know it, and guessing ends', async () => {
+    const email = 'stays@pool.example';
+    const cookie = sessionOf(await signUp(email));
+    const wrong = await change(cookie, 'not this one', 'heron over the mill');
+    expect(wrong.status).toBe(422);
+    expect(await wrong.json()).toMatchObject({ error: { problems: [{ path: 'current' }] } });
+    const statuses: number[] = [];
+    for (let tried = 0; tried < 10; tried += 1)
+      statuses.push((await change(cookie, `guess ${tried}`, 'heron over the mill')).status);
+    expect(statuses.at(-1)).toBe(429);
+    expect((await signIn(email)).status).toBe(200);
+  });
+
+  it('is not one of those that are tried first', async () => {
+    const cookie = sessionOf(await signUp('common@pool.example'));
+    const answer = await change(cookie, 'larch water evening', 'password123');
+    expect(await answer.json()).toMatchObject({ error: { problems: [{ path: 'password' }] } });
+  });
+});
+
+it('signs out everywhere else', async () => {
+  const email = 'elsewhere@pool.example';
+  const first = sessionOf(await signUp(email));
+  const second = sessionOf(await signIn(email));
+  const kept = sessionOf(await call('DELETE', '/api/sessions', { cookie: second }));
+  const statuses = await Promise.all(
+    [first, second, kept].map(async (cookie) => (await call('GET', '/api/households', { cookie })).status),
+  );
+  expect(statuses).toEqual([401, 401, 200]);
+});

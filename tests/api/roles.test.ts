@@ -12,6 +12,8 @@ const ofThePerson = [
   '/api/look-round',
   '/api/language',
   '/api/tour',
+  '/api/account/password',
+  '/api/sessions',
   '/api/invitations/accept',
   '/api/invitations/sign-up',
   '/api/households/chosen',

@@ -3,6 +3,7 @@ import { getTranslations } from 'next-intl/server';
 import { HouseholdScreen } from '@/components/household/household-screen';
 import { requireHousehold } from '@/lib/auth/page-gate';
 import { may } from '@/lib/auth/permissions';
+import { shortestPassword } from '@/lib/schemas/account';
 import { ClientMessages } from '@/lib/messages/client-messages';
 
 export async function generateMetadata(): Promise<Metadata> {
@@ -14,8 +15,11 @@ export default async function HouseholdPage() {
   const { access } = await requireHousehold();
   const { timeZone, locale, demo } = access;
   return (
-    <ClientMessages namespaces={['household']}>
-      <HouseholdScreen setting={{ timeZone, locale, demo, mayInvite: may(access, 'invite') }} />
+    <ClientMessages namespaces={['household']} parts={{ start: ['signUp'] }}>
+      <HouseholdScreen
+        setting={{ timeZone, locale, demo, mayInvite: may(access, 'invite') }}
+        shortestPassword={shortestPassword}
+      />
     </ClientMessages>
   );
 }

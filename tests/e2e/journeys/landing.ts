@@ -25,6 +25,8 @@ export const landing: Journey = {
       stage.check('a whole week is read', text.includes(words('start.sample.fullTest')), text);
       stage.check('with its doses', /\d+ (slow )?tablets?/.test(text), text);
       stage.check('and why nothing moves', text.includes('need scripts'), text);
+      const button = page.getByRole('button', { name: words('start.landing.lookRound') });
+      stage.equal('no button that does nothing', await button.count(), 0);
       stage.equal('no slider that does nothing', await page.getByRole('slider').count(), 0);
       await page
         .getByRole('link', { name: words('start.landing.start') })
