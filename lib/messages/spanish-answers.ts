@@ -389,4 +389,6 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
     'Antes, un propietario tiene que indicar que eres una persona adulta que maneja productos químicos.',
   'Write the password you have now.': 'Escribe la contraseña que tienes ahora.',
   'This is not the password you have now.': 'Esta no es la contraseña que tienes ahora.',
+  'A look round has no account. Sign out, then open the link again.':
+    'Una vuelta por la muestra no tiene cuenta. Cierra la sesión y abre de nuevo el enlace.',
 };

@@ -4,6 +4,7 @@ import type { Database, Transaction } from '@/db/client';
 import { writeAudit } from '@/db/queries/audit-trail';
 import { consumeInvitation, findInvitation } from '@/db/queries/invitations';
 import { insertMembership, listValidMemberships } from '@/db/queries/memberships';
+import { findPasswordHash } from '@/db/queries/people';
 import { chooseSessionHousehold } from '@/db/queries/sessions';
 import { inWriteTransaction } from '@/db/write';
 import { invitationDigest } from '@/lib/auth/invitation-token';
@@ -34,6 +35,9 @@ export async function joinHousehold(
   { token }: { token: string },
 ): Promise<Entered> {
   const { personId, sessionId } = signedIn;
+  // A visitor of the demo is gone after a day, with everything that was theirs.
+  if ((await findPasswordHash(db, personId)) === null)
+    throw new AppError('not-allowed', 'A look round has no account. Sign out, then open the link again.');
   const householdId = await inWriteTransaction(db, (tx) => useInvitation(tx, { token, personId, now }));
   await chooseSessionHousehold(db, sessionId, householdId);
   return { next: '/week' };

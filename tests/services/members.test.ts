@@ -1,6 +1,7 @@
+import { eq } from 'drizzle-orm';
 import { beforeEach, describe, expect, it } from 'vitest';
 import type { Database } from '@/db/client';
-import { auditTrail, invitations, memberships } from '@/db/schema';
+import { auditTrail, invitations, memberships, people } from '@/db/schema';
 import { type HouseholdAccess, proveHousehold } from '@/lib/auth/household-access';
 import { invitationDigest } from '@/lib/auth/invitation-token';
 import { changeMember, endMember } from '@/lib/services/change-member';
@@ -103,6 +104,13 @@ describe('an invitation', () => {
   it('is nothing for who belongs there, and is not used up by them', async () => {
     const token = tokenOf((await invite(as(owner), invitation())).link);
     await expect(join(token, owner)).rejects.toMatchObject({ code: 'conflict' });
+    expect(await open(token)).toMatchObject({ state: 'open' });
+  });
+
+  it('is not for a visitor of the demo, who has no account', async () => {
+    const token = tokenOf((await invite(as(owner), invitation())).link);
+    await db.update(people).set({ email: null, passwordHash: null }).where(eq(people.id, guest.personId));
+    await expect(join(token)).rejects.toMatchObject({ code: 'not-allowed' });
     expect(await open(token)).toMatchObject({ state: 'open' });
   });
 

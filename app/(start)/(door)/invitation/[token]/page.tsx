@@ -2,7 +2,7 @@ import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { EntryPage } from '@/components/start/entry-page';
 import { InvitationForm } from '@/components/start/invitation-form';
-import { openPageVisit } from '@/lib/auth/page-gate';
+import { findHousehold, openPageVisit } from '@/lib/auth/page-gate';
 import { ClientMessages } from '@/lib/messages/client-messages';
 import { shortestPassword } from '@/lib/schemas/account';
 import { openInvitation } from '@/lib/services/join-household';
@@ -37,7 +37,7 @@ export default async function InvitationPage({ params }: { params: Promise<{ tok
         <InvitationForm
           token={token}
           name={name}
-          signedIn={visit.signedIn !== null}
+          signedIn={visit.signedIn !== null && (await findHousehold())?.access.demo !== true}
           shortestPassword={shortestPassword}
         />
       </EntryPage>
