@@ -4,7 +4,7 @@ import { SignedOutShell } from '@/components/navigation/signed-out-shell';
 import { findHousehold } from '@/lib/auth/page-gate';
 import type { HouseholdVisit } from '@/lib/auth/visit';
 import type { Member } from '@/lib/schemas/member';
-import { showPeople } from '@/lib/services/show-people';
+import { listPeople } from '@/lib/services/show-people';
 
 /**
  * Draws the bars for whoever is here. Nobody is sent away: the emergency card and the safety card stand below this layout
@@ -14,7 +14,7 @@ import { showPeople } from '@/lib/services/show-people';
 export default async function HouseholdLayout({ children }: { children: React.ReactNode }) {
   const visit = await findHousehold();
   if (!visit?.access.poolCompleted) return <SignedOutShell signedIn={visit !== null}>{children}</SignedOutShell>;
-  const { members } = await showPeople(visit);
+  const members = await listPeople(visit);
   return <HouseholdShell frame={frameOf(visit, members)}>{children}</HouseholdShell>;
 }
 

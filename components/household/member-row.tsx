@@ -11,6 +11,7 @@ import { PlainSelect } from '@/components/ui/plain-select';
 import { Switch } from '@/components/ui/switch';
 import { textLink } from '@/components/ui/text-link';
 import { useChangeMember, useConfirmCard, useEndMember } from '@/lib/client/members';
+import { leaveFor } from '@/lib/client/session';
 import type { Member } from '@/lib/schemas/member';
 import { dayIn } from './day-in';
 import type { HouseholdSetting } from './household-setting';
@@ -64,7 +65,11 @@ export function MemberRow({ member, setting }: { member: Member; setting: Househ
             options={roles.map((value) => ({ value, label: t(`role.${value}`) }))}
             value={wanted.role}
             onChange={(next) =>
-              change.mutate({ id, role: next, chemicalsAllowed: next !== 'viewer' && chemicalsAllowed })
+              change.mutate(
+                { id, role: next, chemicalsAllowed: next !== 'viewer' && chemicalsAllowed },
+                // What the page shows hangs on one's own role.
+                { onSuccess: () => you && leaveFor('/household') },
+              )
             }
           />
           {you ? null : (

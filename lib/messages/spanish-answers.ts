@@ -365,8 +365,8 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
     'Esta imagen no está completa o no se puede leer. Hazla de nuevo, o envía otra.',
   'This is no photo. Choose a picture in JPEG, PNG or WebP.':
     'Esto no es una foto. Elige una imagen en JPEG, PNG o WebP.',
-  'This photo is in a format that cannot be read here (HEIC or AVIF). Send it as JPEG: on an iPhone, Settings, Camera, Formats, Most Compatible.':
-    'Esta foto está en un formato que aquí no se puede leer (HEIC o AVIF). Envíala como JPEG: en un iPhone, Ajustes, Cámara, Formatos, El más compatible.',
+  'This photo is in a format that cannot be read here (HEIC or AVIF). Send it as JPEG: the settings of a camera name it the compatible format.':
+    'Esta foto está en un formato que aquí no se puede leer (HEIC o AVIF). Envíala como JPEG: en los ajustes de la cámara es el formato compatible.',
   'Write their name.': 'Escribe su nombre.',
   'Somebody who only looks does not handle chemicals.': 'Quien solo mira no maneja productos químicos.',
   'This link is not whole. Copy all of it.': 'Este enlace no está completo. Cópialo entero.',

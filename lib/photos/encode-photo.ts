@@ -45,8 +45,7 @@ let last: Promise<unknown> = Promise.resolve();
 
 async function encode(bytes: Uint8Array): Promise<EncodedPhoto> {
   assertPhoto(bytes);
-  const decoded = await decode(bytes);
-  const { data, info } = decoded;
+  const { data, info } = await decode(bytes);
   const { width, height, channels } = info;
   const raw = () => sharp(data, { raw: { width, height, channels } });
   const small = await resized(raw(), SMALL_SIDE).webp({ quality: 70 }).toBuffer();
@@ -95,7 +94,7 @@ function assertPhoto(bytes: Uint8Array): void {
   if (head.startsWith('\xff\xd8\xff') || head.startsWith('\x89PNG\r\n\x1a\n') || /^RIFF[^]{4}WEBP/.test(head)) return;
   if (/^[^]{4}ftyp(heic|heix|hevc|heim|heis|mif1|msf1|avif)/.test(head))
     throw refusal(
-      'This photo is in a format that cannot be read here (HEIC or AVIF). Send it as JPEG: on an iPhone, Settings, Camera, Formats, Most Compatible.',
+      'This photo is in a format that cannot be read here (HEIC or AVIF). Send it as JPEG: the settings of a camera name it the compatible format.',
     );
   throw refusal('This is no photo. Choose a picture in JPEG, PNG or WebP.');
 }

@@ -3,21 +3,28 @@ import { listOpenInvitations } from '@/db/queries/invitations';
 import { listMembers } from '@/db/queries/memberships';
 import { safetyCardCounts } from '@/lib/auth/household-access';
 import { assertMay, may } from '@/lib/auth/permissions';
-import type { HouseholdPeople } from '@/lib/schemas/member';
+import type { HouseholdPeople, Member } from '@/lib/schemas/member';
 import type { ServiceContext } from './context';
 
-/** Who belongs to the household, and for owners whoever is invited. */
-export async function showPeople({ db, access, now }: ServiceContext): Promise<HouseholdPeople> {
+/** Who belongs to the household now, in the order in which they came. */
+export async function listPeople({ db, access, now }: ServiceContext): Promise<Member[]> {
   assertMay(access, 'look');
   const members = await listMembers(db, access.householdId, now);
+  return members.map(({ personId, safetyCardReadAt, handlesChemicals, ...member }) => ({
+    ...member,
+    you: personId === access.personId,
+    handlesChemicals: handlesChemicals && safetyCardCounts(safetyCardReadAt, now),
+    cardReadAt: safetyCardReadAt?.toISOString() ?? null,
+  }));
+}
+
+/** The same, and for owners whoever is invited. */
+export async function showPeople(context: ServiceContext): Promise<HouseholdPeople> {
+  const { db, access, now } = context;
+  const members = await listPeople(context);
   const invited = may(access, 'invite') ? await listOpenInvitations(db, access.householdId) : [];
   return {
-    members: members.map(({ personId, safetyCardReadAt, handlesChemicals, ...member }) => ({
-      ...member,
-      you: personId === access.personId,
-      handlesChemicals: handlesChemicals && safetyCardCounts(safetyCardReadAt, now),
-      cardReadAt: safetyCardReadAt?.toISOString() ?? null,
-    })),
+    members,
     invitations: invited.map(({ createdAt, expiresAt, ...invitation }) => ({
       ...invitation,
       createdAt: createdAt.toISOString(),

@@ -51,7 +51,7 @@ export default function LiveSample({ start, unitSystem, begin }: LiveSampleProps
           </>
         }
         sheet={
-          week === undefined ? null : (
+          week === undefined || failed ? null : (
             <SampleSheet week={week} before={moved ? start : undefined} unitSystem={unitSystem} />
           )
         }

@@ -4,7 +4,7 @@ import type { UnitSystem } from '@/lib/units/unit';
 import { dayOf, eveningsOf } from './sample-drawing';
 import { useSampleWords } from './use-sample-words';
 
-/** Under this much stabilizer the sun takes chlorine within hours; over the other much chlorine is needed [mg/L]. */
+/** Under the one the sun takes chlorine fast; over the other little room is left under the swim limit [mg/L]. */
 const LITTLE_STABILIZER = 30;
 const MUCH_STABILIZER = 50;
 

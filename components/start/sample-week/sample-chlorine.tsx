@@ -2,7 +2,7 @@ import { useTranslations } from 'next-intl';
 import { GlyphShape } from '@/components/charts/product-glyph';
 import type { SampleDose, SampleWeek } from '@/lib/schemas/sample-water';
 import type { UnitSystem } from '@/lib/units/unit';
-import { across, areaOf, cutOf, down, levelAt, pathOf, topOf, weekDays, weekHours } from './sample-drawing';
+import { across, areaOf, cutOf, down, glyphs, levelAt, pathOf, topOf, weekDays, weekHours } from './sample-drawing';
 import { useSampleWords } from './use-sample-words';
 
 type Props = { week: SampleWeek; before?: SampleWeek | undefined; unitSystem: UnitSystem };
@@ -125,8 +125,6 @@ export function SampleChlorine({ week, before, unitSystem }: Props) {
 }
 
 const isFast = ({ form }: SampleDose) => form === 'granular' || form === 'liquid';
-
-const glyphs = { tablet: 'tablet', granular: 'granules', liquid: 'liquid', other: 'granules' } as const;
 
 /** Share of the lane that is hatched under the lowest level. */
 const HATCHED = 0.03;

@@ -52,6 +52,9 @@ export function eveningsOf({ doses }: SampleWeek): number[] {
   return [...new Set(doses.map(({ hour }) => dayOf(hour)))];
 }
 
+/** The shape that stands for each form. */
+export const glyphs = { tablet: 'tablet', granular: 'granules', liquid: 'liquid', other: 'granules' } as const;
+
 export const dayOf = (hour: number) => Math.floor(hour / 24);
 
 function rounded(share: number): number {

@@ -2,10 +2,9 @@ import { useTranslations } from 'next-intl';
 import { ProductGlyph } from '@/components/charts/product-glyph';
 import type { SampleWeek } from '@/lib/schemas/sample-water';
 import type { UnitSystem } from '@/lib/units/unit';
-import { dayOf, weekDays } from './sample-drawing';
+import { dayOf, glyphs, weekDays } from './sample-drawing';
 import { useSampleWords } from './use-sample-words';
 
-const glyphs = { tablet: 'tablet', granular: 'granules', liquid: 'liquid', other: 'granules' } as const;
 /** The day of the next full test. */
 const SUNDAY = 6;
 
