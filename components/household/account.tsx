@@ -9,6 +9,7 @@ import { Disclosure } from '@/components/ui/disclosure';
 import { RequestProblem } from '@/lib/client/fetch-json';
 import { changePassword, signOutElsewhere } from '@/lib/client/session';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
+import { AccountEmail } from './account-email';
 
 /** What belongs to whoever is signed in and not to the household: the password, and where they are signed in. */
 export function Account({ shortestPassword }: { shortestPassword: number }) {
@@ -20,6 +21,7 @@ export function Account({ shortestPassword }: { shortestPassword: number }) {
       <h2 id="account" className="font-display text-section">
         {t('title')}
       </h2>
+      <AccountEmail />
       <Disclosure summary={<span className="text-body">{t('change')}</span>}>
         <PasswordForm shortestPassword={shortestPassword} />
       </Disclosure>

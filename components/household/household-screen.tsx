@@ -54,7 +54,7 @@ export function HouseholdScreen({ setting, shortestPassword }: Props) {
         </section>
         <div className="grid content-start gap-5">
           {setting.demo ? <p className="text-small text-ink-2">{t('demo')}</p> : null}
-          {setting.mayInvite && !setting.demo ? <InviteForm /> : null}
+          {setting.mayInvite && !setting.demo && data !== undefined ? <InviteForm mailFrom={data.mailFrom} /> : null}
           {setting.mayInvite ? null : <p className="text-small text-ink-2">{t('onlyOwners')}</p>}
           <OtherHouseholds />
           {setting.demo ? null : <Account shortestPassword={shortestPassword} />}

@@ -5,7 +5,7 @@ import { Avatar } from '@/components/ui/avatar';
 import { Button } from '@/components/ui/button';
 import { useInviteAgain, useUninvite } from '@/lib/client/members';
 import type { Invitation } from '@/lib/schemas/member';
-import { dayIn } from './day-in';
+import { dayIn, timeIn } from './day-in';
 import type { HouseholdSetting } from './household-setting';
 import { InvitationLink } from './invitation-link';
 import { useRefusalWords } from './use-refusal-words';
@@ -16,7 +16,7 @@ export function InvitationRow({ invitation, setting }: { invitation: Invitation;
   const words = useRefusalWords();
   const again = useInviteAgain();
   const withdraw = useUninvite();
-  const { id, name, role, expired } = invitation;
+  const { id, name, email, mail, role, expired } = invitation;
   const when = dayIn(setting, invitation.expiresAt);
   const problem = again.error ?? withdraw.error;
   return (
@@ -28,14 +28,23 @@ export function InvitationRow({ invitation, setting }: { invitation: Invitation;
       </p>
       <div className="col-start-2 min-w-0 md:col-start-3">
         <p className="text-body">{t(expired ? 'over' : 'until', { when })}</p>
+        {email === null || mail === null ? null : (
+          <p className="text-small break-words text-ink-2">
+            {t(`mail.${mail.state}`, {
+              email,
+              when: mail.nextTryAt === null ? '' : timeIn(setting, mail.nextTryAt),
+            })}
+            {mail.refusal === null ? null : <span className="block">{t('mail.said', { refusal: mail.refusal })}</span>}
+          </p>
+        )}
         <div className="flex flex-wrap gap-x-3">
           <Button
             variant="quiet"
             className="-ml-1.5"
-            busy={again.isPending ? t('againBusy') : undefined}
+            busy={again.isPending ? t(email === null ? 'againBusy' : 'mail.againBusy') : undefined}
             onClick={() => again.mutate(id)}
           >
-            {t('again')}
+            {t(email === null ? 'again' : 'mail.again')}
           </Button>
           <Button
             variant="quiet"
@@ -45,7 +54,9 @@ export function InvitationRow({ invitation, setting }: { invitation: Invitation;
             {t('withdraw')}
           </Button>
         </div>
-        {again.data === undefined ? null : <InvitationLink name={name} link={again.data.link} />}
+        {again.data === undefined || again.data.link === null ? null : (
+          <InvitationLink name={name} link={again.data.link} />
+        )}
         {problem === null ? null : (
           <p role="alert" className="text-small font-emphasis text-terra-ink">
             {words(problem)}

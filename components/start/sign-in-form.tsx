@@ -39,6 +39,15 @@ export function SignInForm() {
         {t('submit')}
       </Button>
       <p className="text-body">
+        {t.rich('forgotten', {
+          link: (words) => (
+            <PageLink href="/reset" className={textLink}>
+              {words}
+            </PageLink>
+          ),
+        })}
+      </p>
+      <p className="text-body">
         {t.rich('noSheet', {
           link: (words) => (
             <PageLink href="/sign-up" className={textLink}>

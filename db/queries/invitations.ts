@@ -13,6 +13,7 @@ export async function listOpenInvitations(db: DatabaseOrTransaction, householdId
     .select({
       id: invitations.id,
       name: invitations.name,
+      email: invitations.email,
       role: invitations.role,
       chemicalsAllowed: invitations.chemicalsAllowed,
       createdAt: invitations.createdAt,
@@ -29,17 +30,17 @@ export async function insertInvitation(tx: Transaction, row: NewRow): Promise<bo
   return written.length > 0;
 }
 
-/** Another link for an open invitation, and another seven days; false where there is none. The link before it is worth nothing. */
+/** Another link for an open invitation, and another seven days; null where there is none. The link before it is worth nothing. */
 export async function renewInvitation(
   tx: Transaction,
   { householdId, id, ...renewed }: Of & { tokenDigest: string; createdAt: Date; expiresAt: Date },
-): Promise<boolean> {
-  const written = await tx
+) {
+  const [written] = await tx
     .update(invitations)
     .set(renewed)
     .where(and(eq(invitations.householdId, householdId), eq(invitations.id, id), isOpen))
-    .returning({ id: invitations.id });
-  return written.length > 0;
+    .returning({ name: invitations.name, email: invitations.email, role: invitations.role });
+  return written ?? null;
 }
 
 /** Withdraws an open invitation; false where there is none. */

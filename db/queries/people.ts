@@ -24,6 +24,42 @@ export async function findPersonByEmail(db: DatabaseOrTransaction, _scope: Syste
   return person ?? null;
 }
 
+/** The account of a person, for that person: the caller has the id from the session, or from a link of theirs. */
+export async function findAccount(db: DatabaseOrTransaction, personId: string) {
+  const [person] = await db
+    .select({
+      name: people.name,
+      email: people.email,
+      emailConfirmedAt: people.emailConfirmedAt,
+      language: people.language,
+    })
+    .from(people)
+    .where(eq(people.id, personId));
+  return person ?? null;
+}
+
+/** Whoever reads the mail of this address is this person; not for an address that was changed meanwhile. */
+export async function setEmailConfirmed(
+  db: DatabaseOrTransaction,
+  { personId, email, at }: { personId: string; email: string; at: Date },
+): Promise<void> {
+  await db
+    .update(people)
+    .set({ emailConfirmedAt: at })
+    .where(and(eq(people.id, personId), eq(people.email, email), isNull(people.emailConfirmedAt)));
+}
+
+/** @returns "taken" when somebody has this e-mail already; the transaction is still good then */
+export async function setEmail(
+  tx: DatabaseOrTransaction,
+  { personId, email, confirmedAt }: { personId: string; email: string; confirmedAt: Date | null },
+): Promise<'changed' | 'taken'> {
+  const [other] = await tx.select({ id: people.id }).from(people).where(eq(people.email, email));
+  if (other && other.id !== personId) return 'taken';
+  await tx.update(people).set({ email, emailConfirmedAt: confirmedAt }).where(eq(people.id, personId));
+  return 'changed';
+}
+
 /** Once closed they stay closed, with the time of the first closing. */
 export async function setTourClosed(db: DatabaseOrTransaction, personId: string, at: Date): Promise<void> {
   await db

@@ -1,8 +1,10 @@
+export { accountLinks } from './account-links';
 export { auditTrail } from './audit-trail';
 export { houseNotes } from './house-notes';
 export { households } from './households';
 export { invitations } from './invitations';
 export { memberships } from './memberships';
+export { outgoingMails } from './outgoing-mails';
 export { people } from './people';
 export { doseEvents, planDoses } from './plan-doses';
 export { photos } from './photos';

@@ -18,6 +18,8 @@ export const invitations = sqliteTable(
     tokenDigest: text('token_digest').notNull().unique(),
     /** What the household calls whoever is meant. */
     name: text('name').notNull(),
+    /** Where the link goes by mail; null when it is handed over by whoever invites. */
+    email: text('email'),
     role: text('role', { enum: roles }).notNull(),
     chemicalsAllowed: integer('chemicals_allowed', { mode: 'boolean' }).notNull(),
     createdAt: integer('created_at', { mode: 'timestamp_ms' }).notNull(),

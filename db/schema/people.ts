@@ -9,6 +9,8 @@ export const people = sqliteTable(
     name: text('name').notNull(),
     /** Lower case; null for the visitor of a demo copy, who has no account. */
     email: text('email').unique(),
+    /** When whoever reads that mail said that the address is theirs; null until then. */
+    emailConfirmedAt: integer('email_confirmed_at', { mode: 'timestamp_ms' }),
     /** Argon2id in its PHC text form. */
     passwordHash: text('password_hash'),
     /** The language of the screen; mail follows the household's locale. */

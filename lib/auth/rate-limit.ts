@@ -12,12 +12,19 @@ const limits = {
   'sign-in-email': { most: 10, windowMilliseconds: 15 * minute },
   'password-person': { most: 10, windowMilliseconds: 15 * minute },
   'sign-up-address': { most: 60, windowMilliseconds: 60 * minute },
+  'reset-address': { most: 30, windowMilliseconds: 60 * minute },
+  'reset-email': { most: 5, windowMilliseconds: 60 * minute },
+  'mailbox-address': { most: 30, windowMilliseconds: 15 * minute },
+  'mail-person': { most: 5, windowMilliseconds: 60 * minute },
 } as const;
+
+/** What counting needs of a visit. */
+type Counted = Pick<Visit, 'db' | 'now' | 'keyOf'>;
 
 export type RateLimit = keyof typeof limits;
 
 /** Counts one try. Error: `too-many-requests` once there were too many. */
-export async function countTry(visit: Visit, limit: RateLimit, value: string): Promise<void> {
+export async function countTry(visit: Counted, limit: RateLimit, value: string): Promise<void> {
   const { most, windowMilliseconds } = limits[limit];
   const { points } = await takePoint(visit.db, { key: visit.keyOf(limit, value), windowMilliseconds, now: visit.now });
   if (points > most)

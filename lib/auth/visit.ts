@@ -16,6 +16,8 @@ export type Visit = {
   signedIn: SignedIn | null;
   /** Signs a person in on this device, in place of whoever was. */
   enter(personId: string, householdId: string | null): Promise<void>;
+  /** Signs a person out on every device, whoever asks. */
+  leaveAll(personId: string): Promise<void>;
   /** Signs out on every device but this one, which gets another session. Nothing for nobody. */
   leaveElsewhere(): Promise<void>;
   /** Signs out on this device. */
@@ -70,6 +72,7 @@ export async function openVisit(
       await sessions.endAll(personId);
       await visit.enter(personId, householdId);
     },
+    leaveAll: (personId: string) => sessions.endAll(personId),
     async leave() {
       cookies.splice(0, cookies.length, await sessions.end(visit.signedIn?.sessionId ?? null));
       visit.signedIn = null;

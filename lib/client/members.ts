@@ -35,8 +35,8 @@ export function chooseHousehold(householdId: string) {
 
 function useKeepPeople() {
   const client = useQueryClient();
-  return ({ members, invitations }: HouseholdPeople | SentInvitation) =>
-    client.setQueryData<HouseholdPeople>(peopleKey, { members, invitations });
+  return ({ members, invitations, mailFrom }: HouseholdPeople | SentInvitation) =>
+    client.setQueryData<HouseholdPeople>(peopleKey, { members, invitations, mailFrom });
 }
 
 /** Invites somebody; the reply carries the link, this once. */

@@ -1,4 +1,13 @@
-import type { Entered, InvitedSignUp, PasswordChange, SignIn, SignUp } from '@/lib/schemas/account';
+import type {
+  EmailChange,
+  Entered,
+  InvitedSignUp,
+  PasswordChange,
+  PasswordReset,
+  ResetRequest,
+  SignIn,
+  SignUp,
+} from '@/lib/schemas/account';
 import type { LanguageChoice } from '@/lib/schemas/language-choice';
 import { fetchJson, type ReplyParser } from './fetch-json';
 import { forgetEmergencyCard } from './kept-card';
@@ -45,6 +54,31 @@ export function acceptInvitation(accepted: { token: string }): Promise<Entered> 
 /** Another password; every other device is signed out by it. */
 export async function changePassword(change: PasswordChange): Promise<void> {
   await fetchJson('/api/account/password', nothing, { method: 'PUT', body: change });
+}
+
+/** Asks for a link to another password. */
+export async function requestReset(request: ResetRequest): Promise<void> {
+  await fetchJson('/api/password-resets', nothing, { method: 'POST', body: request });
+}
+
+/** Another password, by the link that was sent. */
+export async function resetPassword(reset: PasswordReset): Promise<void> {
+  await fetchJson('/api/password-resets', nothing, { method: 'PUT', body: reset });
+}
+
+/** Says that an address is one's own, by the link that was sent there. */
+export async function confirmEmail(opened: { token: string }): Promise<void> {
+  await fetchJson('/api/email-confirmations', nothing, { method: 'POST', body: opened });
+}
+
+/** Another address to sign in with. */
+export async function changeEmail(change: EmailChange): Promise<void> {
+  await fetchJson('/api/account/email', nothing, { method: 'PUT', body: change });
+}
+
+/** Asks for another mail that asks whether the address is one's own. */
+export async function askForConfirmation(): Promise<void> {
+  await fetchJson('/api/account/confirmation', nothing, { method: 'POST' });
 }
 
 /** Signs out on every device but this one. */

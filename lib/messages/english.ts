@@ -10,6 +10,7 @@ import howConstants from './en/how-constants.json';
 import howExamples from './en/how-examples.json';
 import invitation from './en/invitation.json';
 import learnt from './en/learnt.json';
+import mail from './en/mail.json';
 import navigation from './en/navigation.json';
 import photos from './en/photos.json';
 import pool from './en/pool.json';
@@ -41,6 +42,7 @@ export const english = {
   'how-examples': howExamples,
   invitation,
   learnt,
+  mail,
   navigation,
   photos,
   pool,

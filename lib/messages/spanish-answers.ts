@@ -391,4 +391,21 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
   'This is not the password you have now.': 'Esta no es la contraseña que tienes ahora.',
   'A look round has no account. Sign out, then open the link again.':
     'Una vuelta por la muestra no tiene cuenta. Cierra la sesión y abre de nuevo el enlace.',
+  'The name has characters that cannot be seen. Write it again by hand.':
+    'El nombre tiene caracteres que no se ven. Escríbelo otra vez a mano.',
+  'This address has letters beyond a to z, which can look like others. Write it with plain letters, as your mail program shows it.':
+    'Esta dirección tiene letras que no van de la a a la z y que pueden parecer otras. Escríbela con letras simples, como la muestra tu programa de correo.',
+  'This link is used, over or not known. Ask for another mail.':
+    'Este enlace ya se usó, venció o no se conoce. Pide otro correo.',
+  'Another account has this address by now. Nothing was changed.':
+    'Otra cuenta ya tiene esta dirección. No se ha cambiado nada.',
+  'Another account has this address.': 'Otra cuenta tiene esta dirección.',
+  'This server sends no mail. Ask whoever runs it for another password.':
+    'Este servidor no envía correo. Pide otra contraseña a quien lo lleva.',
+  'This server sends no mail. Make a link, and send it yourself.':
+    'Este servidor no envía correo. Crea un enlace y envíalo tú.',
+  'Confirm your own address first, or make a link and send it yourself.':
+    'Confirma antes tu propia dirección, o crea un enlace y envíalo tú.',
+  'So many mails have gone out today. Make a link, and send it yourself.':
+    'Hoy ya han salido muchos correos. Crea un enlace y envíalo tú.',
 };

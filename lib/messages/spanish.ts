@@ -10,6 +10,7 @@ import howConstants from './es/how-constants.json';
 import howExamples from './es/how-examples.json';
 import invitation from './es/invitation.json';
 import learnt from './es/learnt.json';
+import mail from './es/mail.json';
 import navigation from './es/navigation.json';
 import photos from './es/photos.json';
 import pool from './es/pool.json';
@@ -41,6 +42,7 @@ export const spanish: Catalogue = {
   'how-examples': howExamples,
   invitation,
   learnt,
+  mail,
   navigation,
   photos,
   pool,

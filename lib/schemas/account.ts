@@ -1,20 +1,14 @@
 import { z } from 'zod';
 import { isTimeZone } from '@/lib/calendar/wall-time';
-import { invitationTokenSchema } from './member';
+import { linkTokenSchema, openedLinkSchema } from './account-link';
+import { emailSchema } from './email';
+import { nameSchemaOf } from './name';
+import { sentMailSchema } from './sent-mail';
 import { timeZoneSchema } from './time';
 import { unitSystems } from './week-sheet';
 
-const personNameSchema = z
-  .string({ error: 'Write your name.' })
-  .trim()
-  .min(1, 'Write your name.')
-  .max(80, 'Keep the name under 80 characters.');
-
-export const householdNameSchema = z
-  .string({ error: 'Write what you call the pool or the house.' })
-  .trim()
-  .min(1, 'Write what you call the pool or the house.')
-  .max(80, 'Keep the name under 80 characters.');
+const personNameSchema = nameSchemaOf('Write your name.');
+export const householdNameSchema = nameSchemaOf('Write what you call the pool or the house.');
 
 export const knownTimeZoneSchema = timeZoneSchema.refine(isTimeZone, 'Choose a time zone such as America/New_York.');
 export const localeSchema = z
@@ -22,15 +16,6 @@ export const localeSchema = z
   .max(35)
   .regex(/^[A-Za-z]{2,3}(-[A-Za-z0-9]{1,8})*$/, 'Choose a language such as en-US.');
 export const unitSystemSchema = z.enum(unitSystems, { error: 'Choose metric or US units.' });
-
-/** One spelling for one address, so that nobody has two accounts by a capital letter. */
-const emailSchema = z
-  .string({ error: 'Write your e-mail address.' })
-  .normalize('NFKC')
-  .trim()
-  .toLowerCase()
-  .max(254, 'Write an e-mail address like ines@pool.example.')
-  .regex(/^[^\s@]+@[^\s@]+\.[^\s@]+$/, 'Write an e-mail address like ines@pool.example.');
 
 export const shortestPassword = 10;
 /** Longer ones only cost time to digest. */
@@ -55,18 +40,42 @@ export type SignUp = z.output<typeof signUpSchema>;
 /** Somebody who was invited signs up without a household of their own. */
 export const invitedSignUpSchema = signUpSchema
   .pick({ name: true, email: true, password: true, locale: true })
-  .extend({ token: invitationTokenSchema });
+  .extend({ token: linkTokenSchema });
 export type InvitedSignUp = z.output<typeof invitedSignUpSchema>;
 
+const currentPasswordSchema = z
+  .string({ error: 'Write the password you have now.' })
+  .min(1, 'Write the password you have now.')
+  .max(longestPassword, `A password has at most ${longestPassword} characters.`);
+
 /** Whoever changes the password shows that they know it: a device left open is not enough. */
-export const passwordChangeSchema = z.strictObject({
-  current: z
-    .string({ error: 'Write the password you have now.' })
-    .min(1, 'Write the password you have now.')
-    .max(longestPassword, `A password has at most ${longestPassword} characters.`),
-  password: newPasswordSchema,
-});
+export const passwordChangeSchema = z.strictObject({ current: currentPasswordSchema, password: newPasswordSchema });
 export type PasswordChange = z.output<typeof passwordChangeSchema>;
+
+export const emailChangeSchema = z.strictObject({ current: currentPasswordSchema, email: emailSchema });
+export type EmailChange = z.output<typeof emailChangeSchema>;
+
+/** Somebody has forgotten their password. */
+export const resetRequestSchema = z.strictObject({ email: emailSchema });
+export type ResetRequest = z.output<typeof resetRequestSchema>;
+
+/** And holds the link that was sent to them. */
+export const passwordResetSchema = openedLinkSchema.extend({ password: newPasswordSchema });
+export type PasswordReset = z.output<typeof passwordResetSchema>;
+
+/** What whoever is signed in sees of their account. */
+export const shownAccountSchema = z.object({
+  /** Null for the visitor of a demo household. */
+  email: z.string().nullable(),
+  confirmed: z.boolean(),
+  /** The address it changes to once that is confirmed. */
+  awaited: z.string().nullable(),
+  /** How far the newest mail about the account has come. */
+  mail: sentMailSchema.nullable(),
+  /** Whether this server sends mail at all. */
+  sendsMail: z.boolean(),
+});
+export type ShownAccount = z.output<typeof shownAccountSchema>;
 
 export const signInSchema = z.strictObject({
   email: emailSchema,

@@ -1,4 +1,8 @@
 import { z } from 'zod';
+import { openedLinkSchema } from './account-link';
+import { emailSchema } from './email';
+import { nameSchemaOf } from './name';
+import { sentMailSchema } from './sent-mail';
 import { instantSchema } from './time';
 import { roles } from './week-sheet';
 
@@ -23,6 +27,9 @@ export const invitationSchema = z.object({
   name: z.string(),
   role: z.enum(roles),
   chemicalsAllowed: z.boolean(),
+  /** Where it was sent, and whether it arrived; null when the link is handed over. */
+  email: z.string().nullable(),
+  mail: sentMailSchema.nullable(),
   createdAt: instantSchema,
   expiresAt: instantSchema,
   expired: z.boolean(),
@@ -33,25 +40,30 @@ export type Invitation = z.infer<typeof invitationSchema>;
 export const householdPeopleSchema = z.object({
   members: z.array(memberSchema),
   invitations: z.array(invitationSchema),
+  /** Whether an invitation can go by mail from here, by whoever asks. */
+  mailFrom: z.enum(['here', 'after-confirmation', 'nowhere']),
 });
 export type HouseholdPeople = z.infer<typeof householdPeopleSchema>;
 
-const nameSchema = z
-  .string({ error: 'Write their name.' })
-  .trim()
-  .min(1, 'Write their name.')
-  .max(80, 'Keep the name under 80 characters.');
+const nameSchema = nameSchemaOf('Write their name.');
 
 const lookOnly = { path: ['chemicalsAllowed'], message: 'Somebody who only looks does not handle chemicals.' };
 
 /** The one description of an invitation. The id is made on the device. */
 export const newInvitationSchema = z
-  .strictObject({ id: z.uuid(), name: nameSchema, role: z.enum(roles), chemicalsAllowed: z.boolean() })
+  .strictObject({
+    id: z.uuid(),
+    name: nameSchema,
+    /** Where the link goes; without it whoever invites hands it over. */
+    email: emailSchema.optional(),
+    role: z.enum(roles),
+    chemicalsAllowed: z.boolean(),
+  })
   .refine(({ role, chemicalsAllowed }) => role !== 'viewer' || !chemicalsAllowed, lookOnly);
 export type NewInvitation = z.output<typeof newInvitationSchema>;
 
-/** Who is there now, and the link of an invitation, which is shown this once. */
-export const sentInvitationSchema = householdPeopleSchema.extend({ link: z.url() });
+/** Who is there now, and the link of an invitation, which is shown this once; null when it went by mail. */
+export const sentInvitationSchema = householdPeopleSchema.extend({ link: z.url().nullable() });
 export type SentInvitation = z.infer<typeof sentInvitationSchema>;
 
 /** What an owner changes of a member. */
@@ -60,9 +72,7 @@ export const memberChangeSchema = z
   .refine(({ role, chemicalsAllowed }) => role !== 'viewer' || !chemicalsAllowed, lookOnly);
 export type MemberChange = z.output<typeof memberChangeSchema>;
 
-/** 32 random bytes in base64url. */
-export const invitationTokenSchema = z.string().regex(/^[\w-]{43}$/, 'This link is not whole. Copy all of it.');
-export const acceptedInvitationSchema = z.strictObject({ token: invitationTokenSchema });
+export const acceptedInvitationSchema = openedLinkSchema;
 
 /** What somebody is told who opens the link of an invitation. */
 export type OpenedInvitation =

@@ -41,7 +41,7 @@ export async function endMember(context: ServiceContext, { id }: { id: string })
     const action = leaves ? 'leave' : 'remove-member';
     await writeAudit(tx, { householdId, personId, at: now, action, subjectId: id });
   });
-  return leaves ? { members: [], invitations: [] } : showPeople(context);
+  return leaves ? { members: [], invitations: [], mailFrom: 'nowhere' } : showPeople(context);
 }
 
 /**

@@ -1,49 +1,58 @@
 import 'server-only';
+import type { Transaction } from '@/db/client';
 import { writeAudit } from '@/db/queries/audit-trail';
 import { insertInvitation, listOpenInvitations, renewInvitation, withdrawInvitation } from '@/db/queries/invitations';
+import { withdrawMails } from '@/db/queries/outgoing-mails';
 import { inWriteTransaction } from '@/db/write';
-import { invitationDigest, invitationLink, newInvitationToken } from '@/lib/auth/invitation-token';
+import { linkDigest, linkTo, newLinkToken } from '@/lib/auth/link-token';
 import { assertMay } from '@/lib/auth/permissions';
 import { AppError } from '@/lib/errors';
 import type { HouseholdPeople, NewInvitation, SentInvitation } from '@/lib/schemas/member';
 import type { ServiceContext } from './context';
+import { deliverSoon } from './deliver-mail';
+import { mailInvitation } from './mail-invitation';
 import { showPeople } from './show-people';
 
 const OPEN_FOR = 7 * 24 * 3_600_000;
 /** A family is no more; a list of strangers would be. */
 const MOST_OPEN = 20;
 
-/** Asks somebody to join. The link is told this once: of it only a digest is kept. */
+/**
+ * Asks somebody to join. Sent by mail, the link is known to whoever reads that mail alone; else it is told this once: of it
+ * only a digest is kept.
+ */
 export async function invite(context: ServiceContext, invitation: NewInvitation): Promise<SentInvitation> {
-  const { db, access, now } = context;
+  const { access, now } = context;
   assertMay(access, 'invite');
   refuseDemo(access.demo);
   const { householdId, personId } = access;
-  const { id, name, role, chemicalsAllowed } = invitation;
-  const token = newInvitationToken();
-  await inWriteTransaction(db, async (tx) => {
+  const { id, name, email = null, role, chemicalsAllowed } = invitation;
+  return withLink(context, email, async (tx, token) => {
     if ((await listOpenInvitations(tx, householdId)).length >= MOST_OPEN)
       throw new AppError('conflict', 'So many invitations are open already. Withdraw one first.');
-    const row = { id, householdId, name, role, chemicalsAllowed, createdBy: personId, ...linkOf(token, now) };
+    const row = { id, householdId, name, email, role, chemicalsAllowed, createdBy: personId, ...linkOf(token, now) };
     if (!(await insertInvitation(tx, row)))
       throw new AppError('conflict', 'This invitation was sent already. Send it again to get another link.');
     const detail = { name, role, chemicalsAllowed };
     await writeAudit(tx, { householdId, personId, at: now, action: 'invite', subjectId: id, detail });
+    if (email !== null) await mailInvitation(tx, context, { id, name, email, role, ...linkOf(token, now), token });
   });
-  return { ...(await showPeople(context)), link: invitationLink(token) };
 }
 
-/** Another link for seven more days; the one before it no longer opens. */
+/** Another link for seven more days, by the way of the one before it, which no longer opens. */
 export async function inviteAgain(context: ServiceContext, { id }: { id: string }): Promise<SentInvitation> {
   const { db, access, now } = context;
   assertMay(access, 'invite');
   const { householdId, personId } = access;
-  const token = newInvitationToken();
-  await inWriteTransaction(db, async (tx) => {
-    if (!(await renewInvitation(tx, { householdId, id, ...linkOf(token, now) }))) throw notOpen();
+  const [asked] = (await listOpenInvitations(db, householdId)).filter((invitation) => invitation.id === id);
+  return withLink(context, asked?.email ?? null, async (tx, token) => {
+    const renewed = await renewInvitation(tx, { householdId, id, ...linkOf(token, now) });
+    if (!renewed) throw notOpen();
     await writeAudit(tx, { householdId, personId, at: now, action: 'invite-again', subjectId: id });
+    await withdrawMails(tx, id);
+    const { email } = renewed;
+    if (email !== null) await mailInvitation(tx, context, { id, ...renewed, email, ...linkOf(token, now), token });
   });
-  return { ...(await showPeople(context)), link: invitationLink(token) };
 }
 
 /** Takes an invitation back. */
@@ -53,13 +62,26 @@ export async function uninvite(context: ServiceContext, { id }: { id: string }):
   const { householdId, personId } = access;
   await inWriteTransaction(db, async (tx) => {
     if (!(await withdrawInvitation(tx, { householdId, id, at: now }))) throw notOpen();
+    await withdrawMails(tx, id);
     await writeAudit(tx, { householdId, personId, at: now, action: 'uninvite', subjectId: id });
   });
   return showPeople(context);
 }
 
+async function withLink(
+  context: ServiceContext,
+  email: string | null,
+  work: (tx: Transaction, token: string) => Promise<void>,
+): Promise<SentInvitation> {
+  const token = newLinkToken();
+  await inWriteTransaction(context.db, (tx) => work(tx, token));
+  if (email !== null) deliverSoon(context.db);
+  return { ...(await showPeople(context)), link: email === null ? linkTo('invitation', token) : null };
+}
+
 function linkOf(token: string, now: Date) {
-  return { tokenDigest: invitationDigest(token), createdAt: now, expiresAt: new Date(now.getTime() + OPEN_FOR) };
+  const tokenDigest = linkDigest('invitation', token);
+  return { tokenDigest, createdAt: now, expiresAt: new Date(now.getTime() + OPEN_FOR) };
 }
 
 function refuseDemo(demo: boolean): void {

@@ -7,7 +7,7 @@ import { insertMembership, listValidMemberships } from '@/db/queries/memberships
 import { findPasswordHash } from '@/db/queries/people';
 import { chooseSessionHousehold } from '@/db/queries/sessions';
 import { inWriteTransaction } from '@/db/write';
-import { invitationDigest } from '@/lib/auth/invitation-token';
+import { linkDigest } from '@/lib/auth/link-token';
 import type { SignedIn } from '@/lib/auth/sessions';
 import { householdOfSystem, systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
@@ -20,7 +20,7 @@ type PersonContext = { db: Database; now: Date; signedIn: SignedIn };
 
 /** What the link of an invitation leads to, for whoever holds it. */
 export async function openInvitation({ db, now }: Visit, token: string): Promise<OpenedInvitation> {
-  const found = await findInvitation(db, systemScope('invitation'), invitationDigest(token));
+  const found = await findInvitation(db, systemScope('invitation'), linkDigest('invitation', token));
   if (!found) return { state: 'unknown' };
   if (found.usedAt) return { state: 'used' };
   if (found.withdrawnAt) return { state: 'withdrawn' };
@@ -49,7 +49,7 @@ export async function useInvitation(
   { token, personId, now }: { token: string; personId: string; now: Date },
 ): Promise<ProvenHouseholdId> {
   const scope = systemScope('invitation');
-  const found = await findInvitation(tx, scope, invitationDigest(token));
+  const found = await findInvitation(tx, scope, linkDigest('invitation', token));
   if (!found) throw new AppError('not-found', 'This invitation is not known. Ask for another link.');
   const { householdId, role, chemicalsAllowed } = found;
   const belongs = await listValidMemberships(tx, personId, now);

@@ -12,6 +12,8 @@ import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import type { Entered, InvitedSignUp, SignUp } from '@/lib/schemas/account';
 import { languageOf } from '@/lib/schemas/languages';
+import { askForConfirmation } from './confirm-email';
+import { deliverSoon } from './deliver-mail';
 import { useInvitation } from './join-household';
 
 /** Makes an account with a household of its own, whose owner the person is, and signs in. */
@@ -60,11 +62,14 @@ async function addPerson(
   const personId = randomUUID();
   const passwordHash = await hashPassword(password);
   await inWriteTransaction(db, async (tx) => {
-    const person = { id: personId, name, email, passwordHash, language: languageOf(locale), createdAt: now };
-    if ((await insertPerson(tx, systemScope('sign-up'), person)) === 'taken')
+    const person = { personId, name, email, language: languageOf(locale) };
+    const row = { id: personId, name, email, passwordHash, language: person.language, createdAt: now };
+    if ((await insertPerson(tx, systemScope('sign-up'), row)) === 'taken')
       throw refusal('conflict', 'email', 'There is an account with this e-mail already. Sign in instead.');
     await further(tx, personId);
+    await askForConfirmation(tx, person, { purpose: 'confirm-email', now });
   });
+  deliverSoon(db);
   return personId;
 }
 

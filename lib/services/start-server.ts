@@ -1,14 +1,18 @@
 import 'server-only';
 import { database } from '@/db/client';
 import { prepareDatabase } from '@/db/migrate';
+import { deleteOldAccountLinks } from '@/db/queries/account-links';
 import { deleteExpiredDemoCopies } from '@/db/queries/households';
+import { deleteOldMails } from '@/db/queries/outgoing-mails';
 import { deleteExpiredRateLimits } from '@/db/queries/rate-limits';
 import { inWriteTransaction } from '@/db/write';
 import { sessionsOf } from '@/lib/auth/sessions';
 import { systemScope } from '@/lib/auth/system-scope';
 import { environment, now as wallClock } from '@/lib/env';
 import { log } from '@/lib/log';
+import { keepMailGoing } from './deliver-mail';
 import { keepDemoFresh } from './keep-demo-fresh';
+import { announceMailbox } from './show-mailbox';
 
 /** Brings the database up to date and clears away what has run out; the server answers nobody before. */
 export async function startServer(): Promise<void> {
@@ -21,5 +25,10 @@ export async function startServer(): Promise<void> {
   const scope = systemScope('clean-up');
   await deleteExpiredRateLimits(db, scope, now);
   await inWriteTransaction(db, (tx) => deleteExpiredDemoCopies(tx, scope, now));
+  const monthAgo = new Date(now.getTime() - 30 * 24 * 3_600_000);
+  await deleteOldMails(db, scope, monthAgo);
+  await deleteOldAccountLinks(db, scope, monthAgo);
+  keepMailGoing(db);
+  announceMailbox();
   keepDemoFresh(db, wallClock);
 }

@@ -17,6 +17,8 @@ const publicRoutes = [
   '/api/sign-up',
   '/api/look-round',
   '/api/language',
+  '/api/email-confirmations',
+  '/api/password-resets',
   '/api/invitations/sign-up',
 ];
 

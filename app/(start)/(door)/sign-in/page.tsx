@@ -10,7 +10,7 @@ export async function generateMetadata(): Promise<Metadata> {
   return { title: t('title') };
 }
 
-export default async function SignInPage() {
+export default async function SignInPage({ searchParams }: { searchParams: Promise<Record<string, unknown>> }) {
   const t = await getTranslations('start.signIn');
   const visit = await openPageVisit();
   // Whoever is signed in and belongs nowhere is sent here from every page of a household.
@@ -21,7 +21,7 @@ export default async function SignInPage() {
       </EntryPage>
     );
   return (
-    <EntryPage title={t('title')} lead={t('lead')}>
+    <EntryPage title={t('title')} lead={'changed' in (await searchParams) ? t('changed') : t('lead')}>
       <SignInForm />
     </EntryPage>
   );
