@@ -13,6 +13,7 @@ import { lateCode } from './journeys/late-code';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
+import { mail } from './journeys/mail';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
 import { photos } from './journeys/photos';
@@ -51,6 +52,7 @@ export const journeys: readonly Journey[] = [
   cardOffline,
   escape,
   members,
+  mail,
   photos,
   choosingLanguage,
   landing,

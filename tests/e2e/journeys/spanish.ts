@@ -81,6 +81,7 @@ const beforeTheDoor = [
   '/',
   '/sign-in',
   '/sign-up',
+  '/reset',
   '/help/emergency',
   '/help/safety',
   '/help/privacy',

@@ -21,6 +21,7 @@ const shows = (text: string | RegExp) => async (page: Page) => {
 export const signedOut: readonly View[] = [
   { name: 'landing', path: '/' },
   { name: 'sign-in', path: '/sign-in' },
+  { name: 'reset', path: '/reset' },
   { name: 'sign-up', path: '/sign-up' },
   {
     name: 'sign-up-refused',

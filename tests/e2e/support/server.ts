@@ -12,6 +12,8 @@ export type ServerOptions = {
   clock: string;
   /** The address that people type, where it is not the one that is listened on. */
   origin?: string;
+  /** Further settings of its environment, such as MAIL. */
+  variables?: Readonly<Record<string, string>>;
   /** Starts without any database, and makes its demo household beside the first requests. */
   fresh?: boolean;
 };
@@ -75,7 +77,7 @@ export class Server {
   }
 
   async #run(clock: string): Promise<void> {
-    const { APP_ORIGIN: _origin, ...env } = process.env;
+    const { APP_ORIGIN: _origin, MAIL: _mail, SMTP_URL: _smtp, ...env } = process.env;
     const child = spawn(
       process.execPath,
       [inRoot('node_modules/next/dist/bin/next'), 'start', '-H', '127.0.0.1', '-p', `${this.port}`],
@@ -91,6 +93,7 @@ export class Server {
           DATABASE_URL: `file:${this.databaseFile}`,
           TEST_CLOCK: clock,
           WADEWELL_SECRET: secret,
+          ...this.options.variables,
           ...(this.options.origin === undefined ? {} : { APP_ORIGIN: this.options.origin }),
         },
         stdio: ['ignore', 'pipe', 'pipe'],
