@@ -5,12 +5,12 @@ import { HelpHead } from './help-head';
 export function Privacy() {
   const t = useTranslations('privacy');
   const parts = [
-    { title: t('account.title'), facts: [t('account.one'), t('account.two'), t('account.three')] },
+    { title: t('account.title'), facts: [t('account.one'), t('account.two'), t('account.three'), t('account.four')] },
     {
       title: t('household.title'),
       facts: [t('household.one'), t('household.two'), t('household.three'), t('household.four')],
     },
-    { title: t('where.title'), facts: [t('where.one'), t('where.two'), t('where.three')] },
+    { title: t('where.title'), facts: [t('where.one'), t('where.two'), t('where.three'), t('where.four')] },
     { title: t('device.title'), facts: [t('device.one'), t('device.two'), t('device.three')] },
     { title: t('time.title'), facts: [t('time.one'), t('time.two'), t('time.three'), t('time.four')] },
   ];

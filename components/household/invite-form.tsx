@@ -57,7 +57,7 @@ export function InviteForm({ mailFrom }: { mailFrom: HouseholdPeople['mailFrom']
       <h2 id="invite" className="font-display text-section">
         {t('inviteTitle')}
       </h2>
-      <p className="mb-2.5 text-small text-ink-2">{t('inviteLead')}</p>
+      <p className="mb-2.5 text-small text-ink-2">{t(mailFrom === 'here' ? 'mail.lead' : 'inviteLead')}</p>
       <form
         noValidate
         className="grid gap-3"

@@ -11,10 +11,10 @@ export function KeptMails({ mails }: { mails: readonly Mail[] }) {
   return (
     <ol className="grid gap-6">
       {mails.map(({ id, email, subject, text, html }) => (
-        <li key={id} className="grid gap-1.5 border-t border-rule pt-3">
+        <li key={id} className="grid min-w-0 gap-1.5 border-t border-rule pt-3">
           <h2 className="font-display text-name break-words">{subject}</h2>
           <p className="text-small break-words text-ink-2">{t('to', { email })}</p>
-          <p className="text-body break-words whitespace-pre-line">{withLinks(text)}</p>
+          <p className="min-w-0 text-body wrap-anywhere whitespace-pre-line">{withLinks(text)}</p>
           <Disclosure summary={<span className="text-small">{t('asHtml')}</span>}>
             <iframe sandbox="" srcDoc={html} title={subject} className="h-96 w-full border border-rule" />
           </Disclosure>

@@ -50,7 +50,7 @@ export async function withdrawInvitation(
 ): Promise<boolean> {
   const written = await tx
     .update(invitations)
-    .set({ withdrawnAt: at })
+    .set({ withdrawnAt: at, email: null })
     .where(and(eq(invitations.householdId, householdId), eq(invitations.id, id), isOpen))
     .returning({ id: invitations.id });
   return written.length > 0;
@@ -86,7 +86,7 @@ export async function consumeInvitation(
 ): Promise<boolean> {
   const written = await tx
     .update(invitations)
-    .set({ usedAt: at, usedBy: personId })
+    .set({ usedAt: at, usedBy: personId, email: null })
     .where(and(eq(invitations.id, id), isOpen, gt(invitations.expiresAt, at)))
     .returning({ id: invitations.id });
   return written.length > 0;

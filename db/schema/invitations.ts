@@ -18,7 +18,7 @@ export const invitations = sqliteTable(
     tokenDigest: text('token_digest').notNull().unique(),
     /** What the household calls whoever is meant. */
     name: text('name').notNull(),
-    /** Where the link goes by mail; null when it is handed over by whoever invites. */
+    /** Where the link goes by mail; null when it is handed over by whoever invites, and once it is used. */
     email: text('email'),
     role: text('role', { enum: roles }).notNull(),
     chemicalsAllowed: integer('chemicals_allowed', { mode: 'boolean' }).notNull(),
