@@ -1,25 +1,24 @@
 import 'server-only';
-import { findPasswordHash, setPasswordHash } from '@/db/queries/people';
-import { hashPassword, isCommonPassword, verifyPassword } from '@/lib/auth/passwords';
-import { countTry, forgetTries } from '@/lib/auth/rate-limit';
+import { setPasswordHash } from '@/db/queries/people';
+import { hashPassword, isCommonPassword } from '@/lib/auth/passwords';
 import type { SignedIn } from '@/lib/auth/sessions';
 import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import type { Done, PasswordChange } from '@/lib/schemas/account';
+import { confirmPassword } from './confirm-password';
 
 /** Another password, for whoever knows the one before; every other device is signed out by it. */
 export async function changePassword(
   visit: Visit & { signedIn: SignedIn },
   { current, password }: PasswordChange,
 ): Promise<Done> {
-  const { db, signedIn } = visit;
-  await countTry(visit, 'password-person', signedIn.personId);
-  const hash = await findPasswordHash(db, signedIn.personId);
-  if (!(await verifyPassword(hash, current))) throw refusal('current', 'This is not the password you have now.');
-  if (isCommonPassword(password))
-    throw refusal('password', 'This password is one of those that are tried first. Choose another.');
-  await setPasswordHash(db, signedIn.personId, await hashPassword(password));
-  await forgetTries(visit, 'password-person', signedIn.personId);
+  const { personId } = visit.signedIn;
+  await confirmPassword(visit, { personId, password: current, path: 'current' });
+  if (isCommonPassword(password)) {
+    const message = 'This password is one of those that are tried first. Choose another.';
+    throw new AppError('invalid-input', message, { problems: [{ path: 'password', message }] });
+  }
+  await setPasswordHash(visit.db, personId, await hashPassword(password));
   await visit.leaveElsewhere();
   return { done: true };
 }
@@ -28,8 +27,4 @@ export async function changePassword(
 export async function signOutElsewhere(visit: Visit): Promise<Done> {
   await visit.leaveElsewhere();
   return { done: true };
-}
-
-function refusal(path: string, message: string): AppError {
-  return new AppError('invalid-input', message, { problems: [{ path, message }] });
 }
