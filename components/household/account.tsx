@@ -7,15 +7,13 @@ import { PasswordField } from '@/components/start/password-field';
 import { Button } from '@/components/ui/button';
 import { Disclosure } from '@/components/ui/disclosure';
 import { RequestProblem } from '@/lib/client/fetch-json';
-import { changePassword, signOutElsewhere } from '@/lib/client/session';
+import { changePassword } from '@/lib/client/session';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { AccountEmail } from './account-email';
 
-/** What belongs to whoever is signed in and not to the household: the password, and where they are signed in. */
+/** What belongs to whoever is signed in and not to the household: the password. */
 export function Account({ shortestPassword }: { shortestPassword: number }) {
   const t = useTranslations('household.account');
-  const words = useProblemWords();
-  const elsewhere = useMutation({ networkMode: 'always', mutationFn: signOutElsewhere });
   return (
     <section aria-labelledby="account" className="grid gap-2">
       <h2 id="account" className="font-display text-section">
@@ -25,18 +23,6 @@ export function Account({ shortestPassword }: { shortestPassword: number }) {
       <Disclosure summary={<span className="text-body">{t('change')}</span>}>
         <PasswordForm shortestPassword={shortestPassword} />
       </Disclosure>
-      <Button
-        size="small"
-        className="justify-self-start"
-        busy={elsewhere.isPending ? t('elsewhereBusy') : undefined}
-        onClick={() => elsewhere.mutate()}
-      >
-        {t('elsewhere')}
-      </Button>
-      <p role="status" className="text-small empty:hidden">
-        {elsewhere.isSuccess ? t('elsewhereDone') : null}
-        {elsewhere.error === null ? null : words(elsewhere.error)}
-      </p>
     </section>
   );
 }

@@ -9,6 +9,9 @@ import { Skeleton } from '@/components/ui/skeleton';
 import { peopleOptions } from '@/lib/client/members';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { Account } from './account';
+import { Closing } from './closing';
+import { DeleteAccount } from './delete-account';
+import { Devices } from './devices';
 import type { HouseholdSetting } from './household-setting';
 import { InvitationRow } from './invitation-row';
 import { InviteForm } from './invite-form';
@@ -58,7 +61,17 @@ export function HouseholdScreen({ setting, shortestPassword }: Props) {
           {setting.mayInvite ? null : <p className="text-small text-ink-2">{t('onlyOwners')}</p>}
           <OtherHouseholds />
           {setting.demo ? null : <Account shortestPassword={shortestPassword} />}
-          {data === undefined || setting.demo ? null : <Leaving members={data.members} />}
+          {setting.demo ? null : <Devices setting={setting} />}
+          {setting.demo ? null : (
+            <section aria-labelledby="leaving" className="grid gap-1">
+              <h2 id="leaving" className="font-display text-section">
+                {t('leavingTitle')}
+              </h2>
+              {data === undefined ? null : <Leaving members={data.members} />}
+              {data === undefined ? null : <Closing members={data.members} />}
+              <DeleteAccount />
+            </section>
+          )}
         </div>
       </div>
     </div>

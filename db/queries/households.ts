@@ -1,8 +1,9 @@
 import 'server-only';
 import { and, count, eq, gt, inArray, isNotNull, isNull, lte } from 'drizzle-orm';
-import type { DatabaseOrTransaction } from '@/db/client';
+import type { DatabaseOrTransaction, Transaction } from '@/db/client';
 import { households, memberships, people, pools } from '@/db/schema';
 import type { ProvenHouseholdId, SystemScope } from '@/lib/schemas/scope';
+import { forgetFormerMembers, listFormerMembers } from './former-members';
 
 export type NewHousehold = typeof households.$inferInsert;
 
@@ -28,6 +29,17 @@ export async function updateHousehold(
 ): Promise<void> {
   if (Object.keys(changes).length === 0) return;
   await db.update(households).set(changes).where(eq(households.id, householdId));
+}
+
+/** Deletes a household with everything in it, and whoever was only kept because it referred to them. */
+export async function deleteHousehold(
+  tx: Transaction,
+  scope: SystemScope,
+  householdId: ProvenHouseholdId,
+): Promise<void> {
+  const former = await listFormerMembers(tx, scope, householdId);
+  await tx.delete(households).where(eq(households.id, householdId));
+  await forgetFormerMembers(tx, scope, former);
 }
 
 /** The demo household that copies are made of; null before it was seeded. */

@@ -18,6 +18,8 @@ export const people = sqliteTable(
     /** When the notes on the first sheet were closed; null until then. */
     tourClosedAt: integer('tour_closed_at', { mode: 'timestamp_ms' }),
     createdAt: integer('created_at', { mode: 'timestamp_ms' }).notNull(),
+    /** When the account was deleted: the row only stands for somebody a household still refers to, and names nobody. */
+    deletedAt: integer('deleted_at', { mode: 'timestamp_ms' }),
   },
   (table) => [
     check('people_email_goes_with_password', sql`(${table.email} is null) = (${table.passwordHash} is null)`),

@@ -1,4 +1,5 @@
 import { index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import type { Device } from '@/lib/schemas/device';
 import { households } from './households';
 import { people } from './people';
 
@@ -15,6 +16,11 @@ export const sessions = sqliteTable(
     expiresAt: integer('expires_at').notNull(),
     /** The household that this device looks at. */
     householdId: text('household_id').references(() => households.id, { onDelete: 'set null' }),
+    /** Two words of a closed list, worked out when it began; what the browser said of itself is not kept. */
+    device: text('device', { mode: 'json' }).$type<Device>(),
+    startedAt: integer('started_at', { mode: 'timestamp_ms' }),
+    /** To the hour: a session is not written at each request. */
+    lastSeenAt: integer('last_seen_at', { mode: 'timestamp_ms' }),
   },
   (table) => [index('sessions_person_idx').on(table.userId), index('sessions_expires_at_idx').on(table.expiresAt)],
 );

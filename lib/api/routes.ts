@@ -3,6 +3,7 @@ import type { z } from 'zod';
 import type { Permission } from '@/lib/auth/permissions';
 import { assertMay } from '@/lib/auth/permissions';
 import {
+  type HouseholdRequest,
   type HouseholdVisit,
   householdVisitOf,
   type OpenVisit,
@@ -54,7 +55,7 @@ export function personRoute<Input extends z.ZodType, Params extends z.ZodType, R
  * it needs, because it has other callers.
  */
 export function householdRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
-  route: RouteOf<HouseholdVisit, Input, Params, Reply> & { may: Permission },
+  route: RouteOf<HouseholdRequest, Input, Params, Reply> & { may: Permission },
 ): Handler {
   return answering(inJson(route), householdContext(route.may));
 }
@@ -81,10 +82,10 @@ export function fileRoute<Input extends z.ZodType, Params extends z.ZodType>(
 }
 
 function householdContext(permission: Permission) {
-  return async (visit: OpenVisit): Promise<HouseholdVisit> => {
+  return async (visit: OpenVisit): Promise<HouseholdRequest> => {
     const household = await householdVisitOf(visit);
     assertMay(household.access, permission);
-    return household;
+    return { ...household, visit };
   };
 }
 

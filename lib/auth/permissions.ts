@@ -15,6 +15,7 @@ const rules = {
   look: { roles: everyone, otherwise: 'You cannot see this household.' },
   invite: { roles: owners, otherwise: 'Only an owner can invite, change or remove members.' },
   'change-household': { roles: owners, otherwise: onlyOwners },
+  'close-household': { roles: owners, otherwise: 'Only an owner can close this household.' },
   'change-pool': { roles: owners, otherwise: onlyOwners },
   'reset-learning': { roles: owners, otherwise: 'Only an owner can let the pool be learnt anew.' },
   'change-preferences': { roles: owners, otherwise: onlyOwners },

@@ -11,6 +11,8 @@ const limits = {
   'sign-in-address': { most: 100, windowMilliseconds: 15 * minute },
   'sign-in-email': { most: 10, windowMilliseconds: 15 * minute },
   'password-person': { most: 10, windowMilliseconds: 15 * minute },
+  /** A family has a few pools; a program would have thousands. */
+  'new-household-person': { most: 20, windowMilliseconds: 60 * minute },
   'sign-up-address': { most: 60, windowMilliseconds: 60 * minute },
   'reset-address': { most: 30, windowMilliseconds: 60 * minute },
   'reset-email': { most: 5, windowMilliseconds: 60 * minute },

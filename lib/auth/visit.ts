@@ -5,7 +5,8 @@ import { environment, now as wallClock } from '@/lib/env';
 import { AppError } from '@/lib/errors';
 import type { Language } from '@/lib/schemas/languages';
 import { type HouseholdAccess, proveHousehold } from './household-access';
-import { type SignedIn, sessionsOf } from './sessions';
+import { deviceOf } from './device';
+import { type ListedSession, type SignedIn, sessionsOf } from './sessions';
 import { languageCookieOf, visitLanguage } from './visit-language';
 
 /** One request, as services that know no household see it. */
@@ -22,6 +23,10 @@ export type Visit = {
   leaveElsewhere(): Promise<void>;
   /** Signs out on this device. */
   leave(): Promise<void>;
+  /** Every device on which whoever is signed in is so, this one included. */
+  devices(): Promise<ListedSession[]>;
+  /** Signs out on one of those devices. */
+  leaveOn(session: ListedSession): Promise<void>;
   /** What to speak: the language of who is signed in, else what this device asks for. */
   language: Language;
   /** Keeps another language for this device. */
@@ -34,6 +39,8 @@ export type Visit = {
 
 /** What a service of a household is handed. */
 export type HouseholdVisit = { db: Database; access: HouseholdAccess; now: Date };
+/** The same for one that asks for the password again, and counts how often. */
+export type HouseholdRequest = HouseholdVisit & { visit: Visit };
 
 /** A visit with the cookies it wants to set, for whoever writes the reply. */
 export type OpenVisit = Visit & { readonly cookies: readonly string[] };
@@ -45,7 +52,7 @@ export async function openVisit(
   headers: Headers,
   { db, now, secure, secret }: Surroundings = surroundings(),
 ): Promise<OpenVisit> {
-  const sessions = sessionsOf(db, { secure, secret });
+  const sessions = sessionsOf(db, { secure, secret, now });
   const found = await sessions.find(headers.get('cookie'));
   const cookies = found?.prolonged ? [found.prolonged] : [];
   const visit = {
@@ -62,7 +69,7 @@ export async function openVisit(
       `${what} ${createHmac('sha256', secret).update(`${what} ${value}`).digest('base64url')}`,
     async enter(personId: string, householdId: string | null) {
       if (visit.signedIn) await sessions.end(visit.signedIn.sessionId);
-      const started = await sessions.start(personId, householdId);
+      const started = await sessions.start(personId, householdId, deviceOf(headers.get('user-agent')));
       visit.signedIn = started.signedIn;
       cookies.splice(0, cookies.length, started.cookie);
     },
@@ -73,6 +80,11 @@ export async function openVisit(
       await visit.enter(personId, householdId);
     },
     leaveAll: (personId: string) => sessions.endAll(personId),
+    devices: async () => (visit.signedIn ? sessions.list(visit.signedIn.personId) : []),
+    async leaveOn({ sessionId }: ListedSession) {
+      if (sessionId === visit.signedIn?.sessionId) await visit.leave();
+      else await sessions.end(sessionId);
+    },
     async leave() {
       cookies.splice(0, cookies.length, await sessions.end(visit.signedIn?.sessionId ?? null));
       visit.signedIn = null;
@@ -92,9 +104,14 @@ export function signedInOf({ signedIn }: Visit): SignedIn {
   return signedIn;
 }
 
-/** The household that this visit is about, proven now. Errors: `signed-out`, `not-allowed`. */
+/**
+ * The household that this visit is about, proven now. A device whose household was closed is about none until a page has
+ * shown it another: what is still sent from a page of the former must not land there. Errors: `signed-out`, `not-allowed`.
+ */
 export async function householdVisitOf(visit: Visit): Promise<HouseholdVisit> {
   const { personId, householdId } = signedInOf(visit);
+  if (householdId === null)
+    throw new AppError('not-allowed', 'You do not belong to a household, or your time there is over. Ask its owner.');
   const { db, now } = visit;
   return { db, now, access: await proveHousehold(db, { personId, householdId, now }) };
 }

@@ -1,6 +1,7 @@
 'use client';
 
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import type { Closing } from '@/lib/schemas/household';
 import type { HouseholdPeople, MemberChange, NewInvitation, SentInvitation } from '@/lib/schemas/member';
 import { doneReply } from './done-reply';
 import { fetchJson } from './fetch-json';
@@ -9,6 +10,8 @@ import { weekKeys } from './week';
 const peopleReply = () => import('@/lib/schemas/member').then(({ householdPeopleSchema }) => householdPeopleSchema);
 const sentReply = () => import('@/lib/schemas/member').then(({ sentInvitationSchema }) => sentInvitationSchema);
 const householdsReply = () => import('@/lib/schemas/household').then(({ householdListSchema }) => householdListSchema);
+
+const deletionReply = () => import('@/lib/schemas/account').then(({ deletionPreviewSchema }) => deletionPreviewSchema);
 
 const peopleKey = ['people'] as const;
 
@@ -31,6 +34,21 @@ export function householdsOptions() {
 /** Makes this device look at another household. */
 export function chooseHousehold(householdId: string) {
   return fetchJson('/api/households/chosen', householdsReply, { method: 'PUT', body: { householdId } });
+}
+
+/** What deleting the account of whoever is signed in would do; asked anew each time, since others come and go. */
+export function deletionOptions() {
+  return queryOptions({
+    queryKey: ['account-deletion'] as const,
+    queryFn: ({ signal }) => fetchJson('/api/account/deletion', deletionReply, { signal }),
+    staleTime: 0,
+    gcTime: 0,
+  });
+}
+
+/** Deletes the household that this device looks at, for everybody. */
+export function closeHousehold(closing: Closing) {
+  return fetchJson('/api/households/current', doneReply, { method: 'DELETE', body: closing });
 }
 
 function useKeepPeople() {

@@ -1,4 +1,5 @@
 import type {
+  AccountDeletion,
   EmailChange,
   Entered,
   InvitedSignUp,
@@ -8,6 +9,7 @@ import type {
   SignIn,
   SignUp,
 } from '@/lib/schemas/account';
+import type { NewHousehold } from '@/lib/schemas/household';
 import type { LanguageChoice } from '@/lib/schemas/language-choice';
 import { fetchJson, type ReplyParser } from './fetch-json';
 import { forgetEmergencyCard } from './kept-card';
@@ -49,6 +51,17 @@ export function signUpInvited(entry: InvitedSignUp): Promise<Entered> {
 /** Joins the household of an invitation with the account that is signed in. */
 export function acceptInvitation(accepted: { token: string }): Promise<Entered> {
   return fetchJson('/api/invitations/accept', whereNext, { method: 'POST', body: accepted });
+}
+
+/** Makes a household of one's own, and looks at it on this device. */
+export function makeHousehold(household: NewHousehold): Promise<Entered> {
+  return fetchJson('/api/households', whereNext, { method: 'POST', body: household });
+}
+
+/** Deletes the account of whoever is signed in; they are signed out by it everywhere. */
+export async function deleteAccount(deletion: AccountDeletion): Promise<void> {
+  await fetchJson('/api/account', nothing, { method: 'DELETE', body: deletion });
+  await forgetEmergencyCard();
 }
 
 /** Another password; every other device is signed out by it. */

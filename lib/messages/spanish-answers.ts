@@ -3,6 +3,21 @@
  * words that fill a gap stand here as well.
  */
 export const spanishAnswers: Readonly<Record<string, string>> = {
+  'former member': 'quien ya no está',
+  'You are not signed in on this device, or no longer.': 'Tu sesión no está abierta en este dispositivo, o ya no.',
+  'You are the last owner of {0}, and others belong to it. Make somebody an owner first, or close it.':
+    'Eres la última persona propietaria de {0}, y otras pertenecen a él. Haz antes propietario a alguien, o ciérralo.',
+  'By now nobody else belongs to {0}: it would be deleted with everything in it. Look again first.':
+    'Ya nadie más pertenece a {0}: se borraría con todo lo que contiene. Mira antes otra vez.',
+  'A look round has no account to delete. Sign out, and it is gone after a day.':
+    'Una visita de muestra no tiene cuenta que borrar. Cierra la sesión, y en un día ya no está.',
+  'A look round has no account. Sign out, then start a sheet of your own.':
+    'Una visita de muestra no tiene cuenta. Cierra la sesión y empieza tu propia hoja.',
+  'The demo household is not closed: it is gone after a day.':
+    'El hogar de muestra no se cierra: en un día ya no está.',
+  'The household is called {0}. Write its name to close it.': 'El hogar se llama {0}. Escribe su nombre para cerrarlo.',
+  'Only an owner can close this household.': 'Solo un propietario puede cerrar este hogar.',
+  'Write the name of the household.': 'Escribe el nombre del hogar.',
   'Write your name.': 'Escribe tu nombre.',
   'Keep the name under 80 characters.': 'Escribe el nombre con menos de 80 caracteres.',
   'Write what you call the pool or the house.': 'Escribe cómo llamas a la piscina o a la casa.',

@@ -43,13 +43,17 @@ export const invitedSignUpSchema = signUpSchema
   .extend({ token: linkTokenSchema });
 export type InvitedSignUp = z.output<typeof invitedSignUpSchema>;
 
-const currentPasswordSchema = z
+/** Asked before what cannot be taken back: a device left open is not enough. */
+export const currentPasswordSchema = z
   .string({ error: 'Write the password you have now.' })
   .min(1, 'Write the password you have now.')
   .max(longestPassword, `A password has at most ${longestPassword} characters.`);
 
-/** Whoever changes the password shows that they know it: a device left open is not enough. */
-export const passwordChangeSchema = z.strictObject({ current: currentPasswordSchema, password: newPasswordSchema });
+/** Whoever changes the password shows that they know it. */
+export const passwordChangeSchema = z.strictObject({
+  current: currentPasswordSchema,
+  password: newPasswordSchema,
+});
 export type PasswordChange = z.output<typeof passwordChangeSchema>;
 
 export const emailChangeSchema = z.strictObject({ current: currentPasswordSchema, email: emailSchema });
@@ -85,6 +89,30 @@ export const signInSchema = z.strictObject({
     .max(longestPassword, `A password has at most ${longestPassword} characters.`),
 });
 export type SignIn = z.output<typeof signInSchema>;
+
+export const householdFates = ['deleted', 'left', 'blocked'] as const;
+
+/** What deleting an account would do to each household of the person. */
+export const deletionPreviewSchema = z.object({
+  households: z.array(
+    z.object({
+      id: z.string(),
+      name: z.string(),
+      /** `blocked`: its last owner goes, and others belong to it. */
+      fate: z.enum(householdFates),
+      /** How many belong to it beside the person. */
+      others: z.number(),
+    }),
+  ),
+});
+export type DeletionPreview = z.output<typeof deletionPreviewSchema>;
+
+export const accountDeletionSchema = z.strictObject({
+  password: currentPasswordSchema,
+  /** The households of which the person was told that they are deleted: no other one is. */
+  deletes: z.array(z.string().min(1).max(64)).max(1_000),
+});
+export type AccountDeletion = z.output<typeof accountDeletionSchema>;
 
 /** Where somebody who just came in goes next: an address of our own. */
 export const enteredSchema = z.object({ next: z.string().startsWith('/') });

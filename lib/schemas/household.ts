@@ -1,5 +1,11 @@
 import { z } from 'zod';
-import { householdNameSchema, knownTimeZoneSchema, localeSchema, unitSystemSchema } from './account';
+import {
+  currentPasswordSchema,
+  householdNameSchema,
+  knownTimeZoneSchema,
+  localeSchema,
+  unitSystemSchema,
+} from './account';
 import { roles } from './week-sheet';
 
 /** One of the households that a person belongs to. */
@@ -20,6 +26,22 @@ export const householdListSchema = z.array(householdSummarySchema);
 export type HouseholdList = z.output<typeof householdListSchema>;
 
 export const chosenHouseholdSchema = z.strictObject({ householdId: z.string().min(1).max(64) });
+
+/** A household of one's own, for somebody who has an account. */
+export const newHouseholdSchema = z.strictObject({
+  name: householdNameSchema,
+  timeZone: knownTimeZoneSchema,
+  unitSystem: unitSystemSchema,
+  locale: localeSchema,
+});
+export type NewHousehold = z.output<typeof newHouseholdSchema>;
+
+/** Whoever closes a household shows that they are who they are, and that they mean this one. */
+export const closingSchema = z.strictObject({
+  password: currentPasswordSchema,
+  name: z.string({ error: 'Write the name of the household.' }).max(200, 'Write the name of the household.'),
+});
+export type Closing = z.output<typeof closingSchema>;
 
 /** What is left out stays as it is. */
 export const householdChangesSchema = z.strictObject({

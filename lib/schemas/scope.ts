@@ -10,4 +10,4 @@ export type ProvenHouseholdId = string & { readonly [proven]: 'household' };
 /** Leave to work across households, for the server's own tasks (start, sign-up, clean-up). Only `lib/auth` makes one. */
 export type SystemScope = { readonly [system]: true; readonly task: SystemTask };
 
-export type SystemTask = 'sign-up' | 'sign-in' | 'invitation' | 'mail' | 'seed-demo' | 'clean-up';
+export type SystemTask = 'sign-up' | 'sign-in' | 'invitation' | 'mail' | 'seed-demo' | 'clean-up' | 'leaving';

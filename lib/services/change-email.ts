@@ -1,14 +1,14 @@
 import 'server-only';
-import { findAccount, findPasswordHash, findPersonByEmail, setEmail } from '@/db/queries/people';
+import { findAccount, findPersonByEmail, setEmail } from '@/db/queries/people';
 import { inWriteTransaction } from '@/db/write';
-import { verifyPassword } from '@/lib/auth/passwords';
-import { countTry, forgetTries } from '@/lib/auth/rate-limit';
+import { countTry } from '@/lib/auth/rate-limit';
 import type { SignedIn } from '@/lib/auth/sessions';
 import { systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import type { Done, EmailChange } from '@/lib/schemas/account';
 import { askForConfirmation } from './confirm-email';
+import { confirmPassword } from './confirm-password';
 import { deliverSoon } from './deliver-mail';
 import { queueMail, sendsMail } from './queue-mail';
 
@@ -22,17 +22,16 @@ export async function changeEmail(
 ): Promise<Done> {
   const { db, now, signedIn } = visit;
   const { personId } = signedIn;
-  await countTry(visit, 'password-person', personId);
-  if (!(await verifyPassword(await findPasswordHash(db, personId), current)))
-    throw refusal('invalid-input', 'current', 'This is not the password you have now.');
-  await forgetTries(visit, 'password-person', personId);
+  await confirmPassword(visit, { personId, password: current, path: 'current' });
   await countTry(visit, 'mail-person', personId);
   await inWriteTransaction(db, async (tx) => {
     const account = await findAccount(tx, personId);
     if (!account?.email || account.email === email) return;
     if (!sendsMail()) {
-      if ((await setEmail(tx, { personId, email, confirmedAt: null })) === 'taken')
-        throw refusal('conflict', 'email', 'Another account has this address.');
+      if ((await setEmail(tx, { personId, email, confirmedAt: null })) === 'taken') {
+        const message = 'Another account has this address.';
+        throw new AppError('conflict', message, { problems: [{ path: 'email', message }] });
+      }
       return;
     }
     const { name, language } = account;
@@ -43,8 +42,4 @@ export async function changeEmail(
   });
   deliverSoon(db);
   return { done: true };
-}
-
-function refusal(code: 'invalid-input' | 'conflict', path: string, message: string): AppError {
-  return new AppError(code, message, { problems: [{ path, message }] });
 }

@@ -1,12 +1,12 @@
 import 'server-only';
-import { findAccount, findPasswordHash, setPasswordHash } from '@/db/queries/people';
+import { findAccount, setPasswordHash } from '@/db/queries/people';
 import { inWriteTransaction } from '@/db/write';
-import { hashPassword, isCommonPassword, verifyPassword } from '@/lib/auth/passwords';
-import { countTry, forgetTries } from '@/lib/auth/rate-limit';
+import { hashPassword, isCommonPassword } from '@/lib/auth/passwords';
 import type { SignedIn } from '@/lib/auth/sessions';
 import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import type { Done, PasswordChange } from '@/lib/schemas/account';
+import { confirmPassword } from './confirm-password';
 import { deliverSoon } from './deliver-mail';
 import { queueMail } from './queue-mail';
 
@@ -15,23 +15,22 @@ export async function changePassword(
   visit: Visit & { signedIn: SignedIn },
   { current, password }: PasswordChange,
 ): Promise<Done> {
-  const { db, now, signedIn } = visit;
-  await countTry(visit, 'password-person', signedIn.personId);
-  const hash = await findPasswordHash(db, signedIn.personId);
-  if (!(await verifyPassword(hash, current))) throw refusal('current', 'This is not the password you have now.');
-  if (isCommonPassword(password))
-    throw refusal('password', 'This password is one of those that are tried first. Choose another.');
+  const { db, now } = visit;
+  const { personId } = visit.signedIn;
+  await confirmPassword(visit, { personId, password: current, path: 'current' });
+  if (isCommonPassword(password)) {
+    const message = 'This password is one of those that are tried first. Choose another.';
+    throw new AppError('invalid-input', message, { problems: [{ path: 'password', message }] });
+  }
   const passwordHash = await hashPassword(password);
   await inWriteTransaction(db, async (tx) => {
-    await setPasswordHash(tx, signedIn.personId, passwordHash);
-    const account = await findAccount(tx, signedIn.personId);
+    await setPasswordHash(tx, personId, passwordHash);
+    const account = await findAccount(tx, personId);
     if (!account?.email) return;
     const { name, email, language } = account;
-    const letter = { about: 'password', name } as const;
-    await queueMail(tx, { letter, email, language, now, about: { personId: signedIn.personId } });
+    await queueMail(tx, { letter: { about: 'password', name }, email, language, now, about: { personId } });
   });
   deliverSoon(db);
-  await forgetTries(visit, 'password-person', signedIn.personId);
   await visit.leaveElsewhere();
   return { done: true };
 }
@@ -40,8 +39,4 @@ export async function changePassword(
 export async function signOutElsewhere(visit: Visit): Promise<Done> {
   await visit.leaveElsewhere();
   return { done: true };
-}
-
-function refusal(path: string, message: string): AppError {
-  return new AppError('invalid-input', message, { problems: [{ path, message }] });
 }

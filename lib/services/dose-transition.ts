@@ -2,6 +2,7 @@ import 'server-only';
 import type { DoseEvent, StoredDose } from '@/db/queries/plan-doses';
 import type { HouseholdAccess } from '@/lib/auth/household-access';
 import { AppError } from '@/lib/errors';
+import { formerMember } from '@/lib/schemas/former-member';
 import type { DoseTick } from '@/lib/schemas/plan-dose';
 import { claimLasts, wentIn } from './dose-state';
 import { undoWindow } from './sheet-doses';
@@ -65,11 +66,16 @@ export function transitionOf(
 
 function claim(dose: StoredDose, asker: Asker, now: Date): DoseTransition {
   assertMayBeTicked(dose, asker, now);
-  if (wentIn(dose)) throw new AppError('conflict', `${dose.doneByName ?? 'Somebody'} has added it already.`);
+  if (wentIn(dose)) throw new AppError('conflict', `${somebody(dose.doneByName)} has added it already.`);
   if (dose.status === 'skipped') throw new AppError('conflict', 'This dose was skipped. Undo that first.');
   if (claimLasts(dose, now) && dose.claimedBy !== asker.personId)
-    throw new AppError('conflict', `${dose.claimedByName ?? 'Somebody'} has it. Ask before you add anything.`);
+    throw new AppError('conflict', `${somebody(dose.claimedByName)} has it. Ask before you add anything.`);
   return { claimedBy: asker.personId, claimedAt: now };
+}
+
+/** At the beginning of a sentence. */
+function somebody(name: string | null): string {
+  return name === null || name === formerMember ? 'Somebody' : name;
 }
 
 function pour(

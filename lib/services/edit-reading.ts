@@ -35,7 +35,7 @@ export async function editReading(context: ServiceContext, id: string, sent: New
   });
   if (!corrected) throw notFound();
   await bringPlanUpToDate(context);
-  return recordedReading(corrected, access.timeZone);
+  return recordedReading(corrected, access);
 }
 
 /** Takes a reading out of everything that is computed; the record keeps it. Rules and errors as for a correction. */

@@ -35,10 +35,12 @@ export async function joinHousehold(
   { token }: { token: string },
 ): Promise<Entered> {
   const { personId, sessionId } = signedIn;
-  // A visitor of the demo is gone after a day, with everything that was theirs.
-  if ((await findPasswordHash(db, personId)) === null)
-    throw new AppError('not-allowed', 'A look round has no account. Sign out, then open the link again.');
-  const householdId = await inWriteTransaction(db, (tx) => useInvitation(tx, { token, personId, now }));
+  const householdId = await inWriteTransaction(db, async (tx) => {
+    // A visitor of the demo is gone after a day, with everything that was theirs; a deleted account is gone now.
+    if ((await findPasswordHash(tx, personId)) === null)
+      throw new AppError('not-allowed', 'A look round has no account. Sign out, then open the link again.');
+    return useInvitation(tx, { token, personId, now });
+  });
   await chooseSessionHousehold(db, sessionId, householdId);
   return { next: '/week' };
 }

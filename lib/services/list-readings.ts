@@ -17,5 +17,5 @@ export async function listReadings(
   const until = query.until === undefined ? new Date(now.getTime() + 1) : new Date(query.until);
   const from = query.from === undefined ? new Date(until.getTime() - usualSpan) : new Date(query.from);
   const readings = await queryReadings(db, { householdId: access.householdId, from, until });
-  return readings.map((reading) => recordedReading(reading, access.timeZone));
+  return readings.map((reading) => recordedReading(reading, access));
 }

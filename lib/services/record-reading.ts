@@ -29,5 +29,5 @@ export async function recordReading(context: ServiceContext, sent: NewReading): 
   await bringPlanUpToDate(context);
   const recorded = await findReading(db, householdId, reading.id);
   if (!recorded) throw new AppError('conflict', 'This test was sent before and has been deleted since.');
-  return recordedReading(recorded, access.timeZone);
+  return recordedReading(recorded, access);
 }

@@ -1,10 +1,15 @@
 import 'server-only';
 import type { StoredReading } from '@/db/queries/readings';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
+import type { HouseholdAccess } from '@/lib/auth/household-access';
 import type { RecordedReading } from '@/lib/schemas/reading';
+import { shownName } from './shown-name';
 
-/** A reading as the household sees it. */
-export function recordedReading(reading: StoredReading, timeZone: string): RecordedReading {
+/** A reading as somebody of the household sees it. */
+export function recordedReading(
+  reading: StoredReading,
+  { timeZone, language }: Pick<HouseholdAccess, 'timeZone' | 'language'>,
+): RecordedReading {
   const { id, takenAt, createdAt, kind, method, values, look, zeroAnswer, note, doneByName, recordedByName } = reading;
   return {
     id,
@@ -16,7 +21,7 @@ export function recordedReading(reading: StoredReading, timeZone: string): Recor
     look,
     zeroAnswer,
     note,
-    doneBy: doneByName,
-    recordedBy: recordedByName,
+    doneBy: shownName(doneByName, language),
+    recordedBy: shownName(recordedByName, language),
   };
 }

@@ -6,12 +6,14 @@ import type { PoolRow } from '@/db/queries/pools';
 import type { ShelfProductRow } from '@/db/queries/shelf-products';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { pumpUntil } from '@/lib/projection/events';
+import type { Language } from '@/lib/schemas/languages';
 import type { WeekPlan } from '@/lib/schemas/plan';
 import type { PlanDose } from '@/lib/schemas/plan-dose';
 import type { LabelWay } from '@/lib/schemas/shelf-product';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import { limits } from '@/lib/standards/limits';
 import { claimLasts, isDoubtful } from './dose-state';
+import { shownName } from './shown-name';
 import { stopProductOf } from './stop-product';
 import { swimWaitUntil } from './swim-wait';
 
@@ -46,6 +48,7 @@ type Around = {
   shelf: readonly ShelfProductRow[];
   feederKind: PoolRow['feederKind'];
   timeZone: string;
+  language: Language;
   now: Date;
   /** Tablets found before doses, by their ids. */
   found: ReadonlyMap<string, number>;
@@ -57,7 +60,7 @@ type Around = {
 
 /** A dose as the sheet shows it: which steps, and the hours that follow from when it goes in or went in. */
 export function sheetDose(dose: StoredDose, around: Around): PlanDose {
-  const { plan, shelf, feederKind, timeZone, now, found, chlorineTakenAt, confirmedStops } = around;
+  const { plan, shelf, feederKind, timeZone, language, now, found, chlorineTakenAt, confirmedStops } = around;
   const iso = (instant: number) => toOffsetIso(instant, timeZone);
   const at = dose.at.getTime();
   const poured = dose.givenAt?.getTime() ?? at;
@@ -88,10 +91,10 @@ export function sheetDose(dose: StoredDose, around: Around): PlanDose {
     waitUntil: iso(swimWaitUntil(dose, poured, plan)),
     givenAt: dose.givenAt === null ? null : iso(poured),
     givenAmount: dose.givenAmount,
-    doneBy: dose.doneByName,
-    recordedBy: dose.recordedByName,
+    doneBy: shownName(dose.doneByName, language),
+    recordedBy: shownName(dose.recordedByName, language),
     tabletsLeft: found.get(dose.id) ?? null,
-    claimedBy: claimLasts(dose, now) ? dose.claimedByName : null,
+    claimedBy: claimLasts(dose, now) ? shownName(dose.claimedByName, language) : null,
     undoUntil: dose.tickedAt === null ? null : iso(dose.tickedAt.getTime() + undoWindow),
     doubtful: isDoubtful(dose, chlorineTakenAt),
     stopDue: confirmedStops?.has(stopProductOf(dose, onShelf)) === false,

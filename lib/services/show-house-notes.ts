@@ -4,6 +4,7 @@ import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { assertMay } from '@/lib/auth/permissions';
 import { type HouseNotes, houseNoteNames } from '@/lib/schemas/house-note';
 import type { ServiceContext } from './context';
+import { shownName } from './shown-name';
 
 /** Whom to call and where things are, as far as somebody wrote it down. */
 export async function showHouseNotes({ db, access }: ServiceContext): Promise<HouseNotes> {
@@ -12,7 +13,7 @@ export async function showHouseNotes({ db, access }: ServiceContext): Promise<Ho
   return {
     notes: stored ? notesOf(stored) : {},
     updatedAt: stored && toOffsetIso(stored.updatedAt.getTime(), access.timeZone),
-    updatedBy: stored?.updatedByName ?? null,
+    updatedBy: shownName(stored?.updatedByName ?? null, access.language),
   };
 }
 

@@ -7,6 +7,7 @@ import { listEndedSituations } from '@/db/queries/situations';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
 import { assertMay } from '@/lib/auth/permissions';
 import { middleOf } from '@/lib/projection/reading-error';
+import type { Language } from '@/lib/schemas/languages';
 import type { MeasuredQuantity } from '@/lib/schemas/measured-range';
 import type { Pool } from '@/lib/schemas/pool';
 import type { OpenSituation, Situations } from '@/lib/schemas/situation';
@@ -16,6 +17,7 @@ import type { ServiceContext } from './context';
 import { enginePool } from './engine-pool';
 import { planWeek } from './plan-week';
 import { curveBehind } from './sheet-curves';
+import { shownName } from './shown-name';
 import { situationDoses } from './situation-doses';
 import { type LoadedSituation, loadOpenSituation } from './situation-record';
 
@@ -28,7 +30,7 @@ const asked = ['freeChlorine', 'combinedChlorine', 'pH', 'cyanuricAcid', 'calciu
 export async function showSituations(context: ServiceContext): Promise<Situations> {
   const { db, access, now } = context;
   assertMay(access, 'look');
-  const { householdId, timeZone } = access;
+  const { householdId, timeZone, language } = access;
   const iso = (instant: Date) => toOffsetIso(instant.getTime(), timeZone);
   const found = await findPool(db, householdId);
   const pool = found && enginePool(found.pool, timeZone);
@@ -38,9 +40,11 @@ export async function showSituations(context: ServiceContext): Promise<Situation
   const past = await listEndedSituations(db, { householdId, most: shownPast });
   return {
     now: iso(now),
-    open: loaded && openSituation(loaded, doses, now),
+    open: loaded && openSituation(loaded, doses, language, now),
     past: past.flatMap(({ id, kind, openedAt, endedAt, ending, endedBy }) =>
-      endedAt && ending ? [{ id, kind, openedAt: iso(openedAt), endedAt: iso(endedAt), ending, endedBy }] : [],
+      endedAt && ending
+        ? [{ id, kind, openedAt: iso(openedAt), endedAt: iso(endedAt), ending, endedBy: shownName(endedBy, language) }]
+        : [],
     ),
     water: await waterNow(db, householdId, now, iso),
     chart: loaded && pool && (await chartOf(context, loaded, doses, plan, pool)),
@@ -51,14 +55,16 @@ export async function showSituations(context: ServiceContext): Promise<Situation
 export function openSituation(
   { stored, record, promise, tickedBy }: LoadedSituation,
   doses: readonly SituationDose[],
+  language: Language,
   now: Date,
 ): OpenSituation {
+  const names = new Map([...tickedBy].map(([step, name]) => [step, shownName(name, language)]));
   return {
     id: stored.id,
     situation: record.situation,
     openedAt: toOffsetIso(record.openedAt, record.pool.timeZone),
-    openedBy: stored.openedBy,
-    procedure: procedureOf(wayOf(record), record, { doses, tickedBy, promise, now: now.getTime() }),
+    openedBy: shownName(stored.openedBy, language),
+    procedure: procedureOf(wayOf(record), record, { doses, tickedBy: names, promise, now: now.getTime() }),
   };
 }
 

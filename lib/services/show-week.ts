@@ -32,6 +32,7 @@ import { sheetDays } from './sheet-days';
 import { countingDoses, sheetDose } from './sheet-doses';
 import { sheetVerdict } from './sheet-verdict';
 import { openSituation } from './show-situations';
+import { shownName } from './shown-name';
 import { situationDoses } from './situation-doses';
 import { loadOpenSituation } from './situation-record';
 import { loadTryOutsInForce } from './try-outs-in-force';
@@ -76,6 +77,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
   const chlorineReading = readings.find(({ values }) => values.freeChlorine !== undefined);
   const around = {
     ...{ plan: plan?.result ?? null, shelf, feederKind: found.pool.feederKind, timeZone, now },
+    language: access.language,
     found: await tabletsFoundBefore(db, { householdId, doseIds: doses.map(({ id }) => id) }),
     chlorineTakenAt: chlorineReading?.takenAt ?? null,
     confirmedStops: may(access, 'tick-doses') ? await confirmedStops(context) : null,
@@ -89,7 +91,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
   const testedSince = Math.min(...(tested.length > 0 ? tested : [new Date(0)]).map((taken) => taken.getTime()));
   const events = await listOpenPoolEvents(db, { householdId, since: new Date(testedSince) });
   const loaded = await loadOpenSituation(db, householdId, pool);
-  const situation = loaded && openSituation(loaded, await situationDoses(context, loaded), now);
+  const situation = loaded && openSituation(loaded, await situationDoses(context, loaded), access.language, now);
   const ended = (await listEndedSituations(db, { householdId, most: 20 })).find(({ ending }) => ending !== 'done');
   const zeroDoubt = chlorineReading ? await zeroDoubtOf(db, householdId, chlorineReading) : null;
 
@@ -103,7 +105,7 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
       demo: access.demo,
     },
     me: { id: access.personId, name: access.personName, role: access.role, handlesChemicals: access.handlesChemicals },
-    pool: sheetPool(pool, found.pool.recordOnly, found.swimLimitSetBy),
+    pool: sheetPool(pool, found.pool.recordOnly, shownName(found.swimLimitSetBy, access.language)),
     days: sheetDays(days, said, pool),
     verdict: sheetVerdict({
       ...{ now: now.getTime(), pool, readings, zeroDoubt, doses: bothForms, days: said, events },
@@ -117,13 +119,14 @@ export async function showWeek(context: ServiceContext, query: WeekQuery = {}): 
     plan: sheetPlan(plan, problem, timeZone, now),
     changes: await planChanges(db, householdId, plan, timeZone),
     planProblem: problem,
-    lastReading: last && recordedReading(last, timeZone),
+    lastReading: last && recordedReading(last, access),
     ...(await questionsOf(db, householdId, { newest: last, zeroDoubt, timeZone })),
     readings: readings
       .filter(({ takenAt }) => takenAt >= shown.from && takenAt < shown.until)
-      .map((reading) => recordedReading(reading, timeZone)),
-    events: events.map(({ happenedAt, ...event }) => ({
+      .map((reading) => recordedReading(reading, access)),
+    events: events.map(({ happenedAt, reportedBy, ...event }) => ({
       ...event,
+      reportedBy: shownName(reportedBy, access.language),
       happenedAt: toOffsetIso(happenedAt.getTime(), timeZone),
     })),
     situation,

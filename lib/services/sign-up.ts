@@ -1,8 +1,6 @@
 import 'server-only';
 import { randomUUID } from 'node:crypto';
 import type { Transaction } from '@/db/client';
-import { insertHousehold } from '@/db/queries/households';
-import { insertMembership } from '@/db/queries/memberships';
 import { insertPerson } from '@/db/queries/people';
 import { inWriteTransaction } from '@/db/write';
 import { hashPassword, isCommonPassword } from '@/lib/auth/passwords';
@@ -15,23 +13,14 @@ import { languageOf } from '@/lib/schemas/languages';
 import { askForConfirmation } from './confirm-email';
 import { deliverSoon } from './deliver-mail';
 import { useInvitation } from './join-household';
+import { addHousehold } from './make-household';
 
 /** Makes an account with a household of its own, whose owner the person is, and signs in. */
 export async function signUp(visit: Visit, account: SignUp): Promise<Entered> {
-  const householdId = randomUUID();
-  const { householdName, timeZone, unitSystem, locale } = account;
-  const personId = await addPerson(visit, account, async (tx, person) => {
-    const scope = systemScope('sign-up');
-    const household = { id: householdId, name: householdName, timeZone, unitSystem, locale, createdAt: visit.now };
-    await insertHousehold(tx, scope, household);
-    const membership = {
-      id: randomUUID(),
-      householdId,
-      personId: person,
-      role: 'owner',
-      validFrom: visit.now,
-    } as const;
-    await insertMembership(tx, scope, membership);
+  let householdId: string | null = null;
+  const { householdName: name, timeZone, unitSystem, locale } = account;
+  const personId = await addPerson(visit, account, async (tx, owner) => {
+    householdId = await addHousehold(tx, { name, timeZone, unitSystem, locale }, { owner, now: visit.now });
   });
   await visit.enter(personId, householdId);
   return { next: '/first-run' };

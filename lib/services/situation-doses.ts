@@ -5,6 +5,7 @@ import { type SituationDose, wayOf } from '@/lib/situations';
 import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import type { ServiceContext } from './context';
 import { countingDoses } from './sheet-doses';
+import { shownName } from './shown-name';
 import type { LoadedSituation } from './situation-record';
 
 const DAY = 86_400_000;
@@ -14,7 +15,7 @@ export async function situationDoses(
   { db, access, now }: Pick<ServiceContext, 'db' | 'access' | 'now'>,
   { record }: Pick<LoadedSituation, 'record'>,
 ): Promise<SituationDose[]> {
-  const { householdId } = access;
+  const { householdId, language } = access;
   const treats = wayOf(record).lead.kind === 'treat';
   const openedAt = new Date(record.openedAt);
   const tested = await lastMeasured(db, { householdId, quantities: ['freeChlorine'] });
@@ -27,7 +28,7 @@ export async function situationDoses(
   return doses.flatMap(({ status, givenAt, givenAmount, ...dose }) => {
     const counts = givenAt ? givenAt >= openedAt : status === 'planned' && treats && dose.at >= openedAt;
     if (!counts) return [];
-    const { id, substance, form, unit, toBuy, rise, doneByName: doneBy } = dose;
+    const { id, substance, form, unit, toBuy, rise, doneByName } = dose;
     const at = dose.at.getTime();
     return [
       {
@@ -38,7 +39,7 @@ export async function situationDoses(
             ? null
             : pumpUntil(givenAt?.getTime() ?? at, (rise * (givenAmount ?? dose.amount)) / dose.amount),
         givenAt: givenAt?.getTime() ?? null,
-        doneBy,
+        doneBy: shownName(doneByName, language),
       },
     ];
   });

@@ -3,12 +3,14 @@ import type { DatabaseOrTransaction } from '@/db/client';
 import { listTakenTryOuts, type StoredTryOut } from '@/db/queries/try-outs';
 import { dayOf } from '@/lib/calendar/household-day';
 import { toOffsetIso } from '@/lib/calendar/wall-time';
+import type { HouseholdAccess } from '@/lib/auth/household-access';
 import { isEmptyWish, mergedWishes, noWishes } from '@/lib/planner/wishes';
 import type { Scenario } from '@/lib/schemas/scenario';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import type { TakenTryOut } from '@/lib/schemas/try-out';
 import type { Wishes } from '@/lib/schemas/wishes';
 import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
+import { shownName } from './shown-name';
 
 const DAY = 86_400_000;
 
@@ -37,7 +39,12 @@ export async function loadWishes(
 /** The try-outs that still change something of the days from today on, for whoever looks at the week. */
 export async function loadTryOutsInForce(
   db: DatabaseOrTransaction,
-  { householdId, householdName, timeZone }: { householdId: ProvenHouseholdId; householdName: string; timeZone: string },
+  {
+    householdId,
+    householdName,
+    timeZone,
+    language,
+  }: Pick<HouseholdAccess, 'householdId' | 'householdName' | 'timeZone' | 'language'>,
   { newest, now }: { newest: Newest | null; now: Date },
 ): Promise<TakenTryOut[]> {
   if (!newest) return [];
@@ -47,7 +54,7 @@ export async function loadTryOutsInForce(
     .map(({ id, takenBy, takenAt, changes }) => ({
       id,
       // Whoever took it may have left: then it was the household.
-      takenBy: takenBy ?? householdName,
+      takenBy: shownName(takenBy ?? householdName, language),
       takenAt: toOffsetIso(takenAt.getTime(), timeZone),
       changes,
     }));

@@ -46,6 +46,10 @@ describe('prepareDatabase', () => {
     await db.run(sql`ALTER TABLE people DROP COLUMN language`);
     await db.run(sql`ALTER TABLE people DROP COLUMN tour_closed_at`);
     await db.run(sql`ALTER TABLE people DROP COLUMN email_confirmed_at`);
+    await db.run(sql`ALTER TABLE people DROP COLUMN deleted_at`);
+    await db.run(sql`ALTER TABLE sessions DROP COLUMN device`);
+    await db.run(sql`ALTER TABLE sessions DROP COLUMN started_at`);
+    await db.run(sql`ALTER TABLE sessions DROP COLUMN last_seen_at`);
     await db.run(sql`ALTER TABLE memberships DROP COLUMN chemicals_allowed`);
     await db.run(sql`DELETE FROM __drizzle_migrations WHERE created_at >= ${second.when}`);
 

@@ -10,6 +10,7 @@ import { byKeyboard, escape } from './journeys/keyboard';
 import { labelBoxes } from './journeys/label-boxes';
 import { landing } from './journeys/landing';
 import { lateCode } from './journeys/late-code';
+import { leaving } from './journeys/leaving';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
@@ -53,6 +54,7 @@ export const journeys: readonly Journey[] = [
   escape,
   members,
   mail,
+  leaving,
   photos,
   choosingLanguage,
   landing,

@@ -1,9 +1,14 @@
 import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
+import { headers } from 'next/headers';
+import { DeleteAccount } from '@/components/household/delete-account';
 import { SignOutButton } from '@/components/navigation/sign-out-button';
 import { EntryPage } from '@/components/start/entry-page';
+import { likelyUnits } from '@/components/start/likely-units';
+import { OwnHousehold } from '@/components/start/own-household';
 import { SignInForm } from '@/components/start/sign-in-form';
 import { findHousehold, openPageVisit } from '@/lib/auth/page-gate';
+import { ClientMessages } from '@/lib/messages/client-messages';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('start.signIn');
@@ -17,7 +22,13 @@ export default async function SignInPage({ searchParams }: { searchParams: Promi
   if (visit.signedIn && !(await findHousehold()))
     return (
       <EntryPage title={t('nowhere')} lead={t('nowhereWords')}>
-        <SignOutButton className="text-body" />
+        <ClientMessages parts={{ household: ['deleting'], start: ['signIn', 'signUp', 'form'] }}>
+          <OwnHousehold likelyUnits={likelyUnits((await headers()).get('accept-language'))} />
+          <div className="mt-6 grid justify-items-start gap-1 border-t border-rule pt-4">
+            <SignOutButton className="text-body" />
+            <DeleteAccount />
+          </div>
+        </ClientMessages>
       </EntryPage>
     );
   return (
