@@ -1,4 +1,5 @@
 export { auditTrail } from './audit-trail';
+export { handOvers } from './hand-overs';
 export { houseNotes } from './house-notes';
 export { households } from './households';
 export { invitations } from './invitations';

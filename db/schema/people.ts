@@ -16,6 +16,8 @@ export const people = sqliteTable(
     /** When the notes on the first sheet were closed; null until then. */
     tourClosedAt: integer('tour_closed_at', { mode: 'timestamp_ms' }),
     createdAt: integer('created_at', { mode: 'timestamp_ms' }).notNull(),
+    /** When the account was given up; what they did in a household stays on its record, without their name. */
+    deletedAt: integer('deleted_at', { mode: 'timestamp_ms' }),
   },
   (table) => [
     check('people_email_goes_with_password', sql`(${table.email} is null) = (${table.passwordHash} is null)`),

@@ -27,9 +27,12 @@ const writes = routePatterns
   .flatMap((pattern) => writeMethods.map((method) => ({ method, pattern })));
 const path = { productId: 'gran', readingId: crypto.randomUUID(), doseId: crypto.randomUUID(), day: '2026-07-05' };
 
-/** Whoever belongs to a household may leave it; whom else they may remove is looked at by the service. */
-const forEveryMember = ({ method, pattern }: (typeof writes)[number]) =>
-  method === 'DELETE' && pattern === '/api/members/[id]';
+/**
+ * Whoever belongs to a household may leave it, and may say yes or no when they are asked to look after it; whom else they
+ * may remove, and whose hand-over it is, is looked at by the service.
+ */
+const ofEveryMember = ['DELETE /api/members/[id]', 'DELETE /api/hand-overs/[id]', 'PUT /api/hand-overs/[id]/agreement'];
+const forEveryMember = ({ method, pattern }: (typeof writes)[number]) => ofEveryMember.includes(`${method} ${pattern}`);
 
 describe('a write', () => {
   let db: Database;

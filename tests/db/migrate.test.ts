@@ -45,6 +45,7 @@ describe('prepareDatabase', () => {
     await db.run(sql`ALTER TABLE pools DROP COLUMN learning_from`);
     await db.run(sql`ALTER TABLE people DROP COLUMN language`);
     await db.run(sql`ALTER TABLE people DROP COLUMN tour_closed_at`);
+    await db.run(sql`ALTER TABLE people DROP COLUMN deleted_at`);
     await db.run(sql`ALTER TABLE memberships DROP COLUMN chemicals_allowed`);
     await db.run(sql`DELETE FROM __drizzle_migrations WHERE created_at >= ${second.when}`);
 

@@ -4,6 +4,7 @@ import { cardOffline } from './journeys/card-offline';
 import { cards } from './journeys/cards';
 import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
+import { handOver } from './journeys/hand-over';
 import { headers } from './journeys/headers';
 import { house } from './journeys/house';
 import { byKeyboard, escape } from './journeys/keyboard';
@@ -51,6 +52,7 @@ export const journeys: readonly Journey[] = [
   cardOffline,
   escape,
   members,
+  handOver,
   photos,
   choosingLanguage,
   landing,
