@@ -81,6 +81,7 @@ function Entry({ entry, setting }: { entry: AuditEntryShown; setting: HouseholdS
   const what = t(`actions.${entry.action}`, {
     member: entry.member === null ? t('former') : nameOf(entry.member),
     named: entry.named ?? '',
+    isNamed: entry.named === null ? 'no' : 'yes',
     role: entry.role === null ? '' : role(entry.role),
     chemicals: entry.chemicalsAllowed ? 'yes' : 'no',
     days: entry.days === null ? '' : dayRange(entry.days.from, entry.days.until, locale, t('joiner')),

@@ -43,8 +43,8 @@ export function dutyStripDays(today: CalendarDay, handOvers: readonly HandOver[]
   return { first, last: addDays(end, -1), days, segments, ticks: ticksOf(first, days, segments) };
 }
 
-/** A label of a tick takes this share of a phone's width, and no more is left at the right edge. */
-const labelShare = 0.2;
+/** A label of a tick has this share of a phone's width, also at the right edge. */
+const labelShare = 0.24;
 
 /** Where hand-overs begin and end first, then every week as far as there is room. */
 function ticksOf(first: CalendarDay, days: number, segments: readonly DutySegment[]): DutyStripDays['ticks'] {

@@ -22,8 +22,8 @@ export function OnDuty({ duty, members, setting }: Props) {
       </h2>
       <p className="mb-2.5 text-small text-ink-2">{t('note')}</p>
       <DutyStrip duty={duty} setting={setting} />
-      <p className="mt-3 text-body font-emphasis">{t('now', { names: words.names(duty.onDuty) })}</p>
-      {duty.handOvers.length === 0 ? <p className="text-small text-ink-2">{t('none')}</p> : null}
+      <p className="my-3 text-body font-emphasis">{t('now', { names: words.names(duty.onDuty) })}</p>
+      {duty.handOvers.length === 0 ? <p className="mb-3 text-small text-ink-2">{t('none')}</p> : null}
       <ul>
         {duty.handOvers.map((handOver) => (
           <HandOverRow key={handOver.id} handOver={handOver} setting={setting} />

@@ -2,7 +2,6 @@ import 'server-only';
 import { and, asc, eq, gte, isNull } from 'drizzle-orm';
 import type { DatabaseOrTransaction, Transaction } from '@/db/client';
 import { handOvers, memberships, people } from '@/db/schema';
-import type { CalendarDay } from '@/lib/calendar/household-day';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import { isMemberAt } from './memberships';
 
@@ -16,7 +15,7 @@ type NewRow = Omit<typeof handOvers.$inferInsert, 'householdId'> & { householdId
  */
 export async function listHandOvers(
   db: DatabaseOrTransaction,
-  { householdId, since, now }: { householdId: ProvenHouseholdId; since: CalendarDay; now: Date },
+  { householdId, since, now }: { householdId: ProvenHouseholdId; since: string; now: Date },
 ) {
   return db
     .select({

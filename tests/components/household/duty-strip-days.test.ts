@@ -53,8 +53,8 @@ describe('the days of the strip', () => {
     ] as const) {
       const { ticks } = dutyStripDays(today, [handOver(from, until)]);
       expect(ticks.find(({ day }) => day === from)).toMatchObject({ handOver: true });
-      expect(ticks.every(({ at }, index) => index === 0 || at - (ticks[index - 1]?.at ?? 0) >= 0.2)).toBe(true);
-      expect(ticks.every(({ at }) => at <= 0.8)).toBe(true);
+      expect(ticks.every(({ at }, index) => index === 0 || at - (ticks[index - 1]?.at ?? 0) >= 0.24)).toBe(true);
+      expect(ticks.every(({ at }) => at <= 0.76)).toBe(true);
     }
   });
 });
