@@ -1,2 +1,9 @@
 /** How a household writes days, and what whoever looks may do in it. */
-export type HouseholdSetting = { timeZone: string; locale: string; mayInvite: boolean; demo: boolean };
+export type HouseholdSetting = {
+  timeZone: string;
+  locale: string;
+  mayInvite: boolean;
+  mayHandOver: boolean;
+  mayReadAuditTrail: boolean;
+  demo: boolean;
+};

@@ -1,7 +1,9 @@
 import 'server-only';
-import { desc, eq } from 'drizzle-orm';
+import { and, desc, eq, lt, sql } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/sqlite-core';
 import type { DatabaseOrTransaction } from '@/db/client';
-import { auditTrail, people } from '@/db/schema';
+import { auditTrail, memberships, people } from '@/db/schema';
+import type { AuditAction } from '@/lib/schemas/audit-entry';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 
 export type AuditEntry = {
@@ -9,8 +11,7 @@ export type AuditEntry = {
   /** Null when the server itself did it. */
   personId: string | null;
   at: Date;
-  /** As the service is called: "save-pool". */
-  action: string;
+  action: AuditAction;
   subjectId?: string;
   detail?: Record<string, unknown>;
 };
@@ -20,19 +21,44 @@ export async function writeAudit(db: DatabaseOrTransaction, entry: AuditEntry): 
   await db.insert(auditTrail).values(entry);
 }
 
-/** Newest first. */
-export async function listAudit(db: DatabaseOrTransaction, householdId: ProvenHouseholdId, most = 200) {
+/**
+ * Newest first, with the names as they are now. Where the subject is a membership, whose it is.
+ *
+ * @param before only entries older than the one of this id, in digits
+ */
+export async function listAudit(
+  db: DatabaseOrTransaction,
+  householdId: ProvenHouseholdId,
+  { before, most = 200 }: { before?: string | undefined; most?: number } = {},
+) {
   return db
     .select({
+      id: auditTrail.id,
       at: auditTrail.at,
       action: auditTrail.action,
       subjectId: auditTrail.subjectId,
       detail: auditTrail.detail,
+      personId: auditTrail.personId,
       personName: people.name,
+      personDeletedAt: people.deletedAt,
+      memberName: members.name,
+      memberDeletedAt: members.deletedAt,
     })
     .from(auditTrail)
     .leftJoin(people, eq(people.id, auditTrail.personId))
-    .where(eq(auditTrail.householdId, householdId))
+    .leftJoin(
+      memberships,
+      and(eq(memberships.id, auditTrail.subjectId), eq(memberships.householdId, auditTrail.householdId)),
+    )
+    .leftJoin(members, eq(members.id, memberships.personId))
+    .where(
+      and(
+        eq(auditTrail.householdId, householdId),
+        before === undefined ? undefined : lt(auditTrail.id, sql`cast(${before} as integer)`),
+      ),
+    )
     .orderBy(desc(auditTrail.id))
     .limit(most);
 }
+
+const members = alias(people, 'members');

@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, asc, eq, gt, isNull, lte, ne, or } from 'drizzle-orm';
+import { and, asc, eq, gt, isNull, lte, ne, or, sql } from 'drizzle-orm';
 import type { DatabaseOrTransaction, Transaction } from '@/db/client';
 import { households, memberships, people, pools } from '@/db/schema';
 import type { ProvenHouseholdId, SystemScope } from '@/lib/schemas/scope';
@@ -44,7 +44,7 @@ export async function listValidMemberships(db: DatabaseOrTransaction, personId: 
 }
 
 /** Members of a household who are marked as handling chemicals and belong to it now; when they read the safety card. */
-export async function listChemicalHandlers(db: DatabaseOrTransaction, householdId: ProvenHouseholdId, now: Date) {
+export async function listMarkedHandlers(db: DatabaseOrTransaction, householdId: ProvenHouseholdId, now: Date) {
   return db
     .select({ membershipId: memberships.id, name: people.name, safetyCardReadAt: memberships.safetyCardReadAt })
     .from(memberships)
@@ -79,6 +79,21 @@ export async function markHandlesChemicals(
     .where(and(eq(memberships.householdId, householdId), eq(memberships.id, membershipId)));
 }
 
+/**
+ * Keeps when a member read the safety card. It marks them as handling chemicals where their own role and an owner's word
+ * allow that; who may only for the days of a hand-over is not marked, so that nothing of it outlasts them.
+ */
+export async function keepCardReading(
+  tx: Transaction,
+  { householdId, membershipId, at }: { householdId: ProvenHouseholdId; membershipId: string; at: Date },
+): Promise<void> {
+  const { chemicalsAllowed, role } = memberships;
+  await tx
+    .update(memberships)
+    .set({ safetyCardReadAt: at, handlesChemicals: sql`${chemicalsAllowed} and ${role} <> 'viewer'` })
+    .where(and(eq(memberships.householdId, householdId), eq(memberships.id, membershipId)));
+}
+
 /** Who belongs to a household now, in the order in which they came. */
 export async function listMembers(db: DatabaseOrTransaction, householdId: ProvenHouseholdId, now: Date) {
   return db
@@ -93,7 +108,7 @@ export async function listMembers(db: DatabaseOrTransaction, householdId: Proven
     })
     .from(memberships)
     .innerJoin(people, eq(people.id, memberships.personId))
-    .where(and(eq(memberships.householdId, householdId), isValid(now)))
+    .where(and(eq(memberships.householdId, householdId), isMemberAt(now)))
     .orderBy(asc(memberships.validFrom), asc(memberships.id));
 }
 
@@ -118,5 +133,6 @@ export async function endMembership(tx: Transaction, { householdId, id, at }: Me
 
 type MemberOf = { householdId: ProvenHouseholdId; id: string };
 
-const isValid = (now: Date) =>
+/** A condition: the membership holds at an instant. */
+export const isMemberAt = (now: Date) =>
   and(lte(memberships.validFrom, now), or(isNull(memberships.validUntil), gt(memberships.validUntil, now)));

@@ -1,5 +1,6 @@
 export { accountLinks } from './account-links';
 export { auditTrail } from './audit-trail';
+export { handOvers } from './hand-overs';
 export { houseNotes } from './house-notes';
 export { households } from './households';
 export { invitations } from './invitations';

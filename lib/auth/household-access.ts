@@ -6,6 +6,7 @@ import { type Language, localeIn } from '@/lib/schemas/languages';
 import type { ProvenHouseholdId } from '@/lib/schemas/scope';
 import type { Role } from '@/lib/schemas/week-sheet';
 import type { UnitSystem } from '@/lib/units/unit';
+import { findHandOverInForce } from './hand-over-in-force';
 
 /** Who is asking, about which household, and what they may do there; proven at this request. */
 export type HouseholdAccess = {
@@ -14,10 +15,11 @@ export type HouseholdAccess = {
   personId: string;
   personName: string;
   membershipId: string;
+  /** Of the membership; for the days of a hand-over, whoever only looks is a caretaker. */
   role: Role;
   /** An owner says that this is an adult who may handle chemicals. */
   chemicalsAllowed: boolean;
-  /** Marked as one who handles chemicals, with the safety card read within the season. */
+  /** Marked as one who handles chemicals, or handed that over for these days, with the safety card read within the season. */
   handlesChemicals: boolean;
   timeZone: string;
   unitSystem: UnitSystem;
@@ -53,22 +55,43 @@ export async function proveHousehold(
   const membership = memberships.find(({ household }) => householdId === null || household.id === householdId);
   if (!membership)
     throw new AppError('not-allowed', 'You do not belong to a household, or your time there is over. Ask its owner.');
-  const { household, safetyCardReadAt } = membership;
+  const { household } = membership;
+  const proven = household.id as ProvenHouseholdId;
+  const { timeZone } = household;
+  const handOver = await findHandOverInForce(db, { householdId: proven, timeZone, now });
   return {
-    householdId: household.id as ProvenHouseholdId,
+    householdId: proven,
     householdName: household.name,
     personId,
     personName: membership.personName,
     membershipId: membership.membershipId,
-    role: membership.role,
-    chemicalsAllowed: membership.chemicalsAllowed,
-    handlesChemicals: membership.handlesChemicals && safetyCardCounts(safetyCardReadAt, now),
-    timeZone: household.timeZone,
+    ...standingOf(membership, handOver?.membershipId === membership.membershipId ? handOver : undefined, now),
+    timeZone,
     unitSystem: household.unitSystem,
     language: membership.language,
     locale: localeIn(membership.language, household.locale),
     demo: household.demo,
     tourOpen: membership.tourClosedAt === null && !household.demo,
     poolCompleted: membership.poolCompletedAt !== null,
+  };
+}
+
+type Membership = Awaited<ReturnType<typeof listValidMemberships>>[number];
+
+/**
+ * What a member is at this instant: what the membership says, and beside it what the hand-over in force to them says. Nothing
+ * of a hand-over is written into the membership, so it ends by itself, on the minute.
+ */
+function standingOf(
+  { role, chemicalsAllowed, handlesChemicals, safetyCardReadAt }: Membership,
+  handOver: { chemicalsAllowed: boolean } | undefined,
+  now: Date,
+): Pick<HouseholdAccess, 'role' | 'chemicalsAllowed' | 'handlesChemicals'> {
+  const cardCounts = safetyCardCounts(safetyCardReadAt, now);
+  if (!handOver) return { role, chemicalsAllowed, handlesChemicals: handlesChemicals && cardCounts };
+  return {
+    role: role === 'viewer' ? 'caretaker' : role,
+    chemicalsAllowed: (chemicalsAllowed && role !== 'viewer') || handOver.chemicalsAllowed,
+    handlesChemicals: (handlesChemicals || handOver.chemicalsAllowed) && cardCounts,
   };
 }

@@ -14,6 +14,8 @@ const onlyCarers = 'You can look at this household, but not change it.';
 const rules = {
   look: { roles: everyone, otherwise: 'You cannot see this household.' },
   invite: { roles: owners, otherwise: 'Only an owner can invite, change or remove members.' },
+  'hand-over': { roles: owners, otherwise: 'Only an owner can hand the pool over or take it back.' },
+  'read-audit-trail': { roles: owners, otherwise: 'Only an owner can see who changed what.' },
   'change-household': { roles: owners, otherwise: onlyOwners },
   'close-household': { roles: owners, otherwise: 'Only an owner can close this household.' },
   'change-pool': { roles: owners, otherwise: onlyOwners },

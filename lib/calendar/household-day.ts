@@ -40,9 +40,22 @@ export function startOfEpochDay(epochDay: number, timeZone: string): number {
   return gap ?? earlier;
 }
 
+/**
+ * The time from the start of a day to the end of another, which may be the same: `from` belongs to it, `until` does not
+ * [ms]. Errors: those of {@link startOfDay}.
+ */
+export function stretchOfDays(
+  first: CalendarDay,
+  last: CalendarDay,
+  timeZone: string,
+): { from: number; until: number } {
+  return { from: startOfDay(first, timeZone), until: startOfDay(addDays(last, 1), timeZone) };
+}
+
 /** Hours between a day's start and the next day's: 24, or 23 and 25 where clocks change (23.5 and 24.5 on Lord Howe). */
 export function hoursInDay(day: CalendarDay, timeZone: string): number {
-  return (startOfDay(addDays(day, 1), timeZone) - startOfDay(day, timeZone)) / 3_600_000;
+  const { from, until } = stretchOfDays(day, day, timeZone);
+  return (until - from) / 3_600_000;
 }
 
 export function addDays(day: CalendarDay, days: number): CalendarDay {

@@ -423,4 +423,19 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
     'Confirma antes tu propia dirección, o crea un enlace y envíalo tú.',
   'So many mails have gone out today. Make a link, and send it yourself.':
     'Hoy ya han salido muchos correos. Crea un enlace y envíalo tú.',
+  'Only an owner can hand the pool over or take it back.':
+    'Solo un propietario puede dejar la piscina a otra persona o recuperarla.',
+  'Only an owner can see who changed what.': 'Solo un propietario puede ver quién cambió qué.',
+  'Choose who looks after it.': 'Elige quién la cuida.',
+  'The last day away comes before the first.': 'El último día fuera es anterior al primero.',
+  'A hand-over lasts {0} days at most. Write down a second one for the rest.':
+    'Un relevo dura {0} días como máximo. Anota otro para el resto.',
+  'The first day away is today or later.': 'El primer día fuera es hoy o más tarde.',
+  'Write down at most {0} days ahead.': 'Anota con {0} días de antelación como máximo.',
+  'These days overlap with another hand-over. Take that one back first.':
+    'Estos días coinciden con otro relevo. Retira antes el otro.',
+  'Only whoever is asked to look after the pool can agree to it.': 'Solo puede aceptar quien recibe la piscina.',
+  'This hand-over is over, was taken back, or is not of this household.':
+    'Este relevo ya terminó, se retiró o no es de este hogar.',
+  'Ask for what is older than an entry by its number.': 'Pide lo anterior a una anotación por su número.',
 };

@@ -49,7 +49,7 @@ export async function deleteAccount(visit: PersonVisit, { password, deletes }: A
             `You are the last owner of ${name}, and others belong to it. Make somebody an owner first, or close it.`,
           );
         if (fate === 'left') {
-          const entry = { personId, at: now, action: 'leave', subjectId: membershipId };
+          const entry = { personId, at: now, action: 'leave', subjectId: membershipId } as const;
           await writeAudit(tx, { householdId: id, ...entry });
         } else if (deletes.includes(id)) await deleteHousehold(tx, scope, id);
         else

@@ -62,7 +62,7 @@ export async function useInvitation(
   const membershipId = randomUUID();
   const membership = { id: membershipId, householdId, personId, role, chemicalsAllowed, validFrom: now };
   await insertMembership(tx, scope, membership);
-  const entry = { personId, at: now, action: 'join', subjectId: membershipId, detail: { role } };
+  const entry = { personId, at: now, action: 'join' as const, subjectId: membershipId, detail: { role } };
   const joined = householdOfSystem(scope, householdId);
   await writeAudit(tx, { householdId: joined, ...entry });
   return joined;

@@ -1,6 +1,6 @@
 import 'server-only';
 import { writeAudit } from '@/db/queries/audit-trail';
-import { markHandlesChemicals } from '@/db/queries/memberships';
+import { keepCardReading } from '@/db/queries/memberships';
 import { inWriteTransaction } from '@/db/write';
 import { assertMay } from '@/lib/auth/permissions';
 import { AppError } from '@/lib/errors';
@@ -14,7 +14,7 @@ export async function readSafetyCard({ db, access, now }: ServiceContext): Promi
     throw new AppError('not-allowed', 'An owner has to mark you as an adult who handles chemicals first.');
   const { householdId, membershipId, personId } = access;
   await inWriteTransaction(db, async (tx) => {
-    await markHandlesChemicals(tx, { householdId, membershipId, cardReadAt: now });
+    await keepCardReading(tx, { householdId, membershipId, at: now });
     await writeAudit(tx, { householdId, personId, at: now, action: 'read-safety-card', subjectId: membershipId });
   });
   return { done: true };

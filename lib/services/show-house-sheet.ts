@@ -1,11 +1,10 @@
 import 'server-only';
-import { listChemicalHandlers } from '@/db/queries/memberships';
-import { safetyCardCounts } from '@/lib/auth/household-access';
 import { assertMay } from '@/lib/auth/permissions';
 import { addDays } from '@/lib/calendar/household-day';
 import type { HouseSheet } from '@/lib/schemas/house-sheet';
 import { DAYS_OF_A_PLAN } from '@/lib/schemas/week-ahead';
 import type { ServiceContext } from './context';
+import { listChemicalHandlers } from './list-chemical-handlers';
 import { countingDoses } from './sheet-doses';
 import { showHouseNotes } from './show-house-notes';
 import { showWeek } from './show-week';
@@ -25,10 +24,7 @@ export async function showHouseSheet(context: ServiceContext, membershipId?: str
   const week = await showWeek(context);
   // A plan runs into the next calendar week.
   const next = await showWeek(context, { start: addDays(week.days[0]?.day ?? '', week.days.length) });
-  const marked = await listChemicalHandlers(db, householdId, now);
-  const handlers = marked
-    .filter(({ safetyCardReadAt }) => safetyCardCounts(safetyCardReadAt, now))
-    .map(({ membershipId: id, name }) => ({ membershipId: id, name }));
+  const handlers = await listChemicalHandlers(context);
   const handler = handlers.find((each) => each.membershipId === membershipId) ?? null;
   const ahead = [...week.doses, ...next.doses].filter(
     ({ at, planId, status }) => status === 'planned' && planId === week.plan?.id && Date.parse(at) > now.getTime(),

@@ -35,10 +35,15 @@ const writes = routePatterns
 const path = { productId: 'gran', readingId: crypto.randomUUID(), doseId: crypto.randomUUID(), day: '2026-07-05' };
 
 /**
- * Whoever belongs to a household may leave it (whom else they may remove is looked at by the service), and anybody with an
- * account may make one of their own.
+ * Whoever belongs to a household may leave it, and may say yes or no when they are asked to look after it (whom else they
+ * may remove, and whose hand-over it is, is looked at by the service); anybody with an account may make one of their own.
  */
-const ofEveryMember = ['DELETE /api/members/[id]', 'POST /api/households'];
+const ofEveryMember = [
+  'DELETE /api/members/[id]',
+  'DELETE /api/hand-overs/[id]',
+  'PUT /api/hand-overs/[id]/agreement',
+  'POST /api/households',
+];
 const forEveryMember = ({ method, pattern }: (typeof writes)[number]) => ofEveryMember.includes(`${method} ${pattern}`);
 
 describe('a write', () => {

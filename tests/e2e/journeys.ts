@@ -4,6 +4,7 @@ import { cardOffline } from './journeys/card-offline';
 import { cards } from './journeys/cards';
 import { clockChanges } from './journeys/clock-changes';
 import { firstWeek } from './journeys/first-week';
+import { handOver } from './journeys/hand-over';
 import { headers } from './journeys/headers';
 import { house } from './journeys/house';
 import { byKeyboard, escape } from './journeys/keyboard';
@@ -55,6 +56,7 @@ export const journeys: readonly Journey[] = [
   members,
   mail,
   leaving,
+  handOver,
   photos,
   choosingLanguage,
   landing,

@@ -1,0 +1,83 @@
+import { useTranslations } from 'next-intl';
+import { classNames } from '@/components/ui/class-names';
+import { dayAndMonth, dayHeading } from '@/lib/calendar/format';
+import type { HandOvers } from '@/lib/schemas/hand-over';
+import { type DutySegment, dutyStripDays } from './duty-strip-days';
+import type { HouseholdSetting } from './household-setting';
+import { useDutyWords } from './use-duty-words';
+
+type Room = { full: number; brief: number };
+/** From which share of the strip on a segment has room for all its words, or for a name; a narrower one has none. */
+const room: Record<'phone' | 'desk', Room> = { phone: { full: 0.5, brief: 0.2 }, desk: { full: 0.18, brief: 0.08 } };
+
+const percent = (share: number) => `${share * 100}%`;
+
+/** Some weeks on one line: who is on duty when. The words beside it say the same, so it is one picture to who listens. */
+export function DutyStrip({ duty, setting }: { duty: HandOvers; setting: HouseholdSetting }) {
+  const t = useTranslations('household.duty');
+  const words = useDutyWords(setting);
+  const { locale } = setting;
+  const { first, last, days, segments, ticks } = dutyStripDays(duty.today, duty.handOvers);
+  const usually = words.names(duty.usually);
+  const briefly = (segment: DutySegment) => (segment.kind === 'standIn' ? segment.handOver.name : usually);
+  const fully = (segment: DutySegment) => {
+    if (segment.kind !== 'standIn') return segment.kind === 'again' ? t('again', { names: usually }) : usually;
+    return t(segment.handOver.agreedAt === null ? 'asked' : 'alone', { name: segment.handOver.name });
+  };
+  const wordsFor = (segment: DutySegment, { full, brief }: Room) => {
+    const share = segment.days / days;
+    return share >= full ? fully(segment) : share >= brief ? briefly(segment) : null;
+  };
+  return (
+    <div role="img" aria-label={t('strip', { from: dayAndMonth(first, locale), until: dayAndMonth(last, locale) })}>
+      <div aria-hidden="true" className="relative h-6">
+        {ticks.map(({ day, at, handOver }) => (
+          <span
+            key={day}
+            className={classNames(
+              'absolute inset-y-0 max-w-[24%] truncate border-l pl-1.5 text-small',
+              handOver ? 'border-ink font-emphasis' : 'border-rule-2 text-ink-2',
+            )}
+            style={{ left: percent(at) }}
+          >
+            {handOver || day === first ? dayAndMonth(day, locale) : dayHeading(day, locale)}
+          </span>
+        ))}
+      </div>
+      <div aria-hidden="true" className="relative flex h-10 border-y-control border-ink">
+        {segments.map((segment, index) => (
+          <span
+            key={segment.day}
+            className={classNames(
+              'relative min-w-0 font-display text-name leading-9',
+              segment.kind === 'standIn' ? 'bg-paper-lift text-ink' : 'bg-ink text-on-ink',
+              segment.kind === 'standIn' && segment.handOver.agreedAt === null && 'bg-hatch-ink',
+            )}
+            style={{ width: percent(segment.days / days) }}
+          >
+            {(['phone', 'desk'] as const).map((screen) => (
+              <SegmentWords key={screen} screen={screen} standsIn={segment.kind === 'standIn'}>
+                {wordsFor(segment, room[screen])}
+              </SegmentWords>
+            ))}
+            {index === 0 ? null : (
+              <span className="absolute -bottom-1.5 -left-1.5 size-2.5 border-control border-ink bg-paper-lift" />
+            )}
+          </span>
+        ))}
+      </div>
+    </div>
+  );
+}
+
+type WordsProps = { screen: keyof typeof room; standsIn: boolean; children: React.ReactNode };
+
+/** On a ground of their own, for where the segment is hatched. */
+function SegmentWords({ screen, standsIn, children }: WordsProps) {
+  if (children === null) return null;
+  return (
+    <span className={classNames('truncate px-1.5', screen === 'phone' ? 'block md:hidden' : 'hidden md:block')}>
+      <span className={classNames('px-1', standsIn && 'bg-paper-lift')}>{children}</span>
+    </span>
+  );
+}
