@@ -16,6 +16,7 @@ import { looks } from './journeys/looks';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
 import { photos } from './journeys/photos';
+import { roleMatrix } from './journeys/role-matrix';
 import { scope } from './journeys/scope';
 import { members } from './journeys/members';
 import { paper } from './journeys/paper';
@@ -36,6 +37,7 @@ export const journeys: readonly Journey[] = [
   byKeyboard,
   badForms,
   badRequests,
+  roleMatrix,
   ...clockChanges,
   labelBoxes,
   measures,
