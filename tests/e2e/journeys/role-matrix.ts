@@ -5,7 +5,7 @@ import type { Server } from '../support/server';
 import { type Answer, answersOfPage, answersOfRoute, type Asker, askers, outsiders } from '../role-matrix/askers';
 import { type Manifest, readManifest, unmatched } from '../role-matrix/manifest';
 import { type ChangedRow, Rows } from '../role-matrix/rows';
-import { actionRows, type PageRow, pageRows, type RouteRow, routeRows } from '../role-matrix/table';
+import { actionRows, type PageRow, pageRows, type RouteRow, routeRows, takenIds } from '../role-matrix/table';
 import {
   type Cookies,
   idsOf,
@@ -23,7 +23,7 @@ const verbs = ['GET', 'POST', 'PUT', 'PATCH', 'DELETE'];
 /** Every page, route and action of the build, asked by everybody: the answer, and that a refusal wrote nothing. */
 export const roleMatrix: Journey = {
   name: 'role matrix',
-  seconds: 240,
+  seconds: 300,
   async run(stage) {
     const server = await stage.server({ name: 'role-matrix', clock: when });
     const manifest = readManifest();
@@ -34,6 +34,8 @@ export const roleMatrix: Journey = {
     try {
       for (const row of pageRows) await stage.part(`page ${row.page}`, () => askPage(scene, row));
       for (const row of routeRows) await stage.part(nameOf(row), () => askRoute(scene, row));
+      for (const row of takenIds)
+        await stage.part(`${row.call} with an id of others`, () => askWithTakenId(scene, row));
     } finally {
       rows.close();
     }
@@ -70,7 +72,7 @@ async function hasRows(stage: Stage, server: Server, { pages, routes, actions, s
   compare('page of the older router', staticPages, ['/500']);
   stage.equal(
     'one that is planted is named',
-    unmatched([...answered, 'GET /api/planted'], [...callsOf(routeRows), 'GET /api/gone']),
+    unmatched(['GET /api/health', 'GET /api/planted'], ['GET /api/health', 'GET /api/gone']),
     { withoutRow: ['GET /api/planted'], notInBuild: ['GET /api/gone'] },
   );
 }
@@ -132,9 +134,22 @@ async function askRoute(scene: Scene, row: RouteRow): Promise<void> {
   stage.none(nameOf(row), faults);
 }
 
+async function askWithTakenId(scene: Scene, row: (typeof takenIds)[number]): Promise<void> {
+  const { stage, world, rows } = scene;
+  const sent = await ask(scene, 'stranger', questionOf(row, 'stranger', world));
+  const faults = [...faultsOfStatus(sent, 409, 200), ...told(sent.text, world)];
+  const changed = (await rows.changed()).map(({ table }) => `changed ${table}`);
+  stage.none(`${row.call} with an id of others`, [...faults, ...changed]);
+  await rows.restore();
+}
+
 type Question = { method: string; path: string; body: unknown; bytes: Uint8Array<ArrayBuffer> | undefined };
 
-function questionOf({ call, id, query, send, bytes }: RouteRow, asker: Asker, world: World): Question {
+function questionOf(
+  { call, id, query, send, bytes }: Pick<RouteRow, 'call' | 'id' | 'query' | 'send' | 'bytes'>,
+  asker: Asker,
+  world: World,
+): Question {
   const [method = '', pattern = ''] = call.split(' ');
   const address = id === undefined ? pattern : pattern.replace(/\[[.\w]+\]/, id(world, asker));
   const path = query === undefined ? address : `${address}?${query(world, asker)}`;

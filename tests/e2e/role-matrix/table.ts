@@ -428,3 +428,24 @@ export const routeRows: readonly RouteRow[] = [
     changes: 'situations',
   },
 ];
+
+/**
+ * Ids are made on the device. Sent by a stranger for a thing of their own, one of the first household's is refused (409): it
+ * neither takes the thing over nor tells what it is. A route that takes an id of the device has a line here, too.
+ */
+export const takenIds: readonly Pick<RouteRow, 'call' | 'query' | 'send' | 'bytes'>[] = [
+  { call: 'POST /api/readings', send: ({ readings }) => fullTest(when, { id: readings.owner }) },
+  {
+    call: 'POST /api/photos',
+    query: ({ photos }) => `id=${photos.owner}&kind=equipment`,
+    bytes: ({ picture }) => new Uint8Array(Buffer.from(picture, 'base64')),
+  },
+  { call: 'POST /api/pool-events', send: ({ eventId }) => ({ id: eventId, kind: 'storm', happenedAt: when }) },
+  { call: 'POST /api/rounds', send: ({ roundId }) => ({ id: roundId, doneAt: when, exceptions: [] }) },
+  { call: 'POST /api/visits', send: ({ visitId }) => ({ id: visitId, visitedOn: '2026-07-02' }) },
+  { call: 'POST /api/situations', send: ({ situation: { id, situation } }) => ({ id, situation }) },
+  {
+    call: 'POST /api/invitations',
+    send: ({ invitation: { id } }) => ({ id, name: 'Nora', role: 'owner', chemicalsAllowed: true }),
+  },
+];

@@ -32,6 +32,8 @@ export type World = {
   stopDoseId: string;
   situation: { id: string; situation: Situation; step: string };
   eventId: string;
+  roundId: string;
+  visitId: string;
   productId: string;
   tryOutId: string;
   planId: string;
@@ -47,6 +49,7 @@ export const sentAsPicture = (bytes: Uint8Array<ArrayBuffer>) => ({ bytes, heade
 
 export type Cookies = Record<Asker, string>;
 
+const uuid = /[0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12}/g;
 const leavingOn = '2026-08-01';
 const partyOn = '2026-07-11';
 export const when = sundayEvening;
@@ -119,7 +122,6 @@ export async function makeWorld(server: Server): Promise<{ world: World; cookies
 
 /** The same with ids that nothing has: what is not there has to be answered like what belongs to others. */
 export function worldOfNothing(world: World): World {
-  const uuid = /[0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12}/g;
   const others = new Map<string, string>();
   const other = (id: string) => {
     const made = others.get(id) ?? randomUUID();
@@ -134,7 +136,7 @@ export function worldOfNothing(world: World): World {
 /** Every id of the first household that a refused answer, or a row written elsewhere, must not hold. */
 export function idsOf({ people: _people, picture: _picture, memberships, ...things }: World): string[] {
   const { stranger: _stranger, ...ofTheHousehold } = memberships;
-  return JSON.stringify({ things, ofTheHousehold }).match(/[0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12}/g) ?? [];
+  return [...new Set(JSON.stringify({ things, ofTheHousehold }).match(uuid))];
 }
 
 export const isCarer = (asker: Asker): asker is Carer => ['caretaker', 'dosing caretaker', 'owner'].includes(asker);
@@ -186,8 +188,9 @@ async function furnish(carers: Record<Carer, Person>) {
     if (added.status !== 200) throw new Error(`The photo was answered ${added.status}: ${added.text}`);
   }
   await owner.must('PUT', '/api/house-notes', { gate: `${secret} gate` });
-  await owner.must('POST', '/api/visits', { id: randomUUID(), visitedOn: '2026-07-01', note: secret });
-  await owner.must('POST', '/api/rounds', { id: randomUUID(), doneAt: when, exceptions: [] });
+  const [visitId, roundId] = [randomUUID(), randomUUID()];
+  await owner.must('POST', '/api/visits', { id: visitId, visitedOn: '2026-07-01', note: secret });
+  await owner.must('POST', '/api/rounds', { id: roundId, doneAt: when, exceptions: [] });
   const eventId = randomUUID();
   await owner.must('POST', '/api/pool-events', { id: eventId, kind: 'cover-off', happenedAt: when });
   const situationId = randomUUID();
@@ -203,7 +206,17 @@ async function furnish(carers: Record<Carer, Person>) {
   await owner.must('POST', '/api/try-outs', { id: tryOutId, planId, swimmers });
   const invitation = await invite(owner, { name: `Ida ${secret}`, role: 'viewer', chemicalsAllowed: false });
   const open = { id: situationId, situation, step };
-  return { readings, photos, eventId, situation: open, tryOutId, invitation, picture: picture.toString('base64') };
+  return {
+    readings,
+    photos,
+    eventId,
+    visitId,
+    roundId,
+    situation: open,
+    tryOutId,
+    invitation,
+    picture: picture.toString('base64'),
+  };
 }
 
 /** As if it had been for some time only: it was over a while ago. */
