@@ -19,6 +19,7 @@ import { mail } from './journeys/mail';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
 import { photos } from './journeys/photos';
+import { roleMatrix } from './journeys/role-matrix';
 import { scope } from './journeys/scope';
 import { members } from './journeys/members';
 import { paper } from './journeys/paper';
@@ -39,6 +40,7 @@ export const journeys: readonly Journey[] = [
   byKeyboard,
   badForms,
   badRequests,
+  roleMatrix,
   ...clockChanges,
   labelBoxes,
   measures,

@@ -13,9 +13,13 @@ export class Person {
     method: string,
     path: string,
     body?: unknown,
-    { headers = {}, text }: { headers?: Record<string, string>; text?: string } = {},
+    {
+      headers = {},
+      text,
+      bytes,
+    }: { headers?: Record<string, string>; text?: string; bytes?: Uint8Array<ArrayBuffer> } = {},
   ): Promise<Answer> {
-    const sent = text ?? (body === undefined ? undefined : JSON.stringify(body));
+    const sent = bytes ?? text ?? (body === undefined ? undefined : JSON.stringify(body));
     const response = await fetch(`${this.server.address}${path}`, {
       method,
       redirect: 'manual',
