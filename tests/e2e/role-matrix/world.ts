@@ -167,7 +167,7 @@ async function invite(
 ): Promise<{ id: string; token: string }> {
   const id = randomUUID();
   const { link } = await owner.must<SentInvitation>('POST', '/api/invitations', { id, ...invitation });
-  return { id, token: link.split('/').at(-1) ?? '' };
+  return { id, token: link?.split('/').at(-1) ?? '' };
 }
 
 /** Something of everything, in the first household. */
