@@ -6,9 +6,11 @@ import { type DutySegment, dutyStripDays } from './duty-strip-days';
 import type { HouseholdSetting } from './household-setting';
 import { useDutyWords } from './use-duty-words';
 
-type Room = { full: number; brief: number };
-/** From which share of the strip on a segment has room for all its words, or for a name; a narrower one has none. */
-const room: Record<'phone' | 'desk', Room> = { phone: { full: 0.5, brief: 0.2 }, desk: { full: 0.18, brief: 0.08 } };
+/** The narrowest strip of each screen [px], and what a letter and the room beside the words take of it. */
+const narrowest = { phone: 288, desk: 840 } as const;
+type Screen = keyof typeof narrowest;
+const letter = 9.5;
+const margins = 20;
 
 const percent = (share: number) => `${share * 100}%`;
 
@@ -19,15 +21,18 @@ export function DutyStrip({ duty, setting }: { duty: HandOvers; setting: Househo
   const { locale } = setting;
   const { first, last, days, segments, ticks } = dutyStripDays(duty.today, duty.handOvers);
   const usually = words.names(duty.usually);
-  const briefly = (segment: DutySegment) => (segment.kind === 'standIn' ? segment.handOver.name : usually);
-  const fully = (segment: DutySegment) => {
-    if (segment.kind !== 'standIn') return segment.kind === 'again' ? t('again', { names: usually }) : usually;
-    return t(segment.handOver.agreedAt === null ? 'asked' : 'alone', { name: segment.handOver.name });
+  const owners = words.names(duty.usually.filter(({ role }) => role === 'owner'));
+  /** All that a segment could say, the fullest first. */
+  const wordsFor = (segment: DutySegment): string[] => {
+    if (segment.kind === 'standIn') {
+      const { name, agreedAt } = segment.handOver;
+      return [t(agreedAt === null ? 'asked' : 'alone', { name }), name];
+    }
+    const again = segment.kind === 'again' ? [t('again', { names: usually })] : [];
+    return [...again, usually, owners];
   };
-  const wordsFor = (segment: DutySegment, { full, brief }: Room) => {
-    const share = segment.days / days;
-    return share >= full ? fully(segment) : share >= brief ? briefly(segment) : null;
-  };
+  const fitting = (segment: DutySegment, screen: Screen) =>
+    wordsFor(segment).find((text) => text.length * letter + margins <= (segment.days / days) * narrowest[screen]);
   return (
     <div role="img" aria-label={t('strip', { from: dayAndMonth(first, locale), until: dayAndMonth(last, locale) })}>
       <div aria-hidden="true" className="relative h-6">
@@ -57,7 +62,7 @@ export function DutyStrip({ duty, setting }: { duty: HandOvers; setting: Househo
           >
             {(['phone', 'desk'] as const).map((screen) => (
               <SegmentWords key={screen} screen={screen} standsIn={segment.kind === 'standIn'}>
-                {wordsFor(segment, room[screen])}
+                {fitting(segment, screen)}
               </SegmentWords>
             ))}
             {index === 0 ? null : (
@@ -70,13 +75,18 @@ export function DutyStrip({ duty, setting }: { duty: HandOvers; setting: Househo
   );
 }
 
-type WordsProps = { screen: keyof typeof room; standsIn: boolean; children: React.ReactNode };
+type WordsProps = { screen: Screen; standsIn: boolean; children: string | undefined };
 
 /** On a ground of their own, for where the segment is hatched. */
 function SegmentWords({ screen, standsIn, children }: WordsProps) {
-  if (children === null) return null;
+  if (children === undefined) return null;
   return (
-    <span className={classNames('truncate px-1.5', screen === 'phone' ? 'block md:hidden' : 'hidden md:block')}>
+    <span
+      className={classNames(
+        'overflow-hidden px-1.5 whitespace-nowrap',
+        screen === 'phone' ? 'block md:hidden' : 'hidden md:block',
+      )}
+    >
       <span className={classNames('px-1', standsIn && 'bg-paper-lift')}>{children}</span>
     </span>
   );

@@ -180,6 +180,23 @@ export const signedIn: readonly View[] = [
   { name: 'house-sheet', path: '/house/sheet', prepare: shows(words('house.sheet.doses.nobody')) },
   { name: 'household', path: '/household', prepare: shows(words('household.does.owner')) },
   {
+    name: 'household-on-duty',
+    path: '/household',
+    async prepare(page) {
+      await page.getByText(words('household.does.owner')).first().waitFor();
+      // It stays from one width to the next.
+      if (await page.getByText(words('household.duty.none')).isVisible()) {
+        await page.getByText(words('household.duty.open')).click();
+        await page.getByLabel(words('household.duty.from'), { exact: true }).fill('2026-07-12');
+        await page.getByLabel(words('household.duty.until'), { exact: true }).fill('2026-07-18');
+        await page.getByRole('button', { name: words('household.duty.ask'), exact: true }).click();
+      }
+      await page.getByRole('button', { name: words('household.duty.takeBack'), exact: true }).waitFor();
+      await page.getByRole('button', { name: words('household.audit.show'), exact: true }).click();
+      await page.locator('[aria-labelledby="audit-trail"] li').first().waitFor();
+    },
+  },
+  {
     name: 'rounds-exceptions',
     path: '/rounds',
     async prepare(page) {
