@@ -47,6 +47,15 @@ export async function findPasswordHash(db: DatabaseOrTransaction, personId: stri
   return person?.hash ?? null;
 }
 
+/** What a person's own account shows of them; null for an id that nobody has. */
+export async function findAccount(db: DatabaseOrTransaction, personId: string) {
+  const [person] = await db
+    .select({ name: people.name, email: people.email, passwordHash: people.passwordHash })
+    .from(people)
+    .where(eq(people.id, personId));
+  return person ?? null;
+}
+
 export async function setPasswordHash(
   db: DatabaseOrTransaction,
   personId: string,

@@ -3,6 +3,8 @@ export { houseNotes } from './house-notes';
 export { households } from './households';
 export { invitations } from './invitations';
 export { memberships } from './memberships';
+export { passkeyChallenges } from './passkey-challenges';
+export { passkeys } from './passkeys';
 export { people } from './people';
 export { doseEvents, planDoses } from './plan-doses';
 export { photos } from './photos';

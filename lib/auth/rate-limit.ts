@@ -11,6 +11,8 @@ const limits = {
   'sign-in-address': { most: 100, windowMilliseconds: 15 * minute },
   'sign-in-email': { most: 10, windowMilliseconds: 15 * minute },
   'password-person': { most: 10, windowMilliseconds: 15 * minute },
+  /** Asked for and answered: two each time. */
+  'passkey-address': { most: 200, windowMilliseconds: 15 * minute },
   'sign-up-address': { most: 60, windowMilliseconds: 60 * minute },
 } as const;
 

@@ -2,6 +2,7 @@ import 'server-only';
 import { database } from '@/db/client';
 import { prepareDatabase } from '@/db/migrate';
 import { deleteExpiredDemoCopies } from '@/db/queries/households';
+import { deleteExpiredPasskeyChallenges } from '@/db/queries/passkey-challenges';
 import { deleteExpiredRateLimits } from '@/db/queries/rate-limits';
 import { inWriteTransaction } from '@/db/write';
 import { sessionsOf } from '@/lib/auth/sessions';
@@ -20,6 +21,7 @@ export async function startServer(): Promise<void> {
   await sessionsOf(db, surroundings).deleteExpired();
   const scope = systemScope('clean-up');
   await deleteExpiredRateLimits(db, scope, now);
+  await deleteExpiredPasskeyChallenges(db, scope, now);
   await inWriteTransaction(db, (tx) => deleteExpiredDemoCopies(tx, scope, now));
   keepDemoFresh(db, wallClock);
 }
