@@ -9,9 +9,11 @@ import { Disclosure } from '@/components/ui/disclosure';
 import { RequestProblem } from '@/lib/client/fetch-json';
 import { changePassword, signOutElsewhere } from '@/lib/client/session';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
+import type { HouseholdSetting } from './household-setting';
+import { Passkeys } from './passkeys';
 
 /** What belongs to whoever is signed in and not to the household: the password, and where they are signed in. */
-export function Account({ shortestPassword }: { shortestPassword: number }) {
+export function Account({ setting, shortestPassword }: { setting: HouseholdSetting; shortestPassword: number }) {
   const t = useTranslations('household.account');
   const words = useProblemWords();
   const elsewhere = useMutation({ networkMode: 'always', mutationFn: signOutElsewhere });
@@ -35,6 +37,7 @@ export function Account({ shortestPassword }: { shortestPassword: number }) {
         {elsewhere.isSuccess ? t('elsewhereDone') : null}
         {elsewhere.error === null ? null : words(elsewhere.error)}
       </p>
+      <Passkeys setting={setting} />
     </section>
   );
 }

@@ -57,7 +57,7 @@ export function HouseholdScreen({ setting, shortestPassword }: Props) {
           {setting.mayInvite && !setting.demo ? <InviteForm /> : null}
           {setting.mayInvite ? null : <p className="text-small text-ink-2">{t('onlyOwners')}</p>}
           <OtherHouseholds />
-          {setting.demo ? null : <Account shortestPassword={shortestPassword} />}
+          {setting.demo ? null : <Account setting={setting} shortestPassword={shortestPassword} />}
           {data === undefined || setting.demo ? null : <Leaving members={data.members} />}
         </div>
       </div>

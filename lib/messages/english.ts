@@ -11,6 +11,7 @@ import howExamples from './en/how-examples.json';
 import invitation from './en/invitation.json';
 import learnt from './en/learnt.json';
 import navigation from './en/navigation.json';
+import passkeys from './en/passkeys.json';
 import photos from './en/photos.json';
 import pool from './en/pool.json';
 import privacy from './en/privacy.json';
@@ -42,6 +43,7 @@ export const english = {
   invitation,
   learnt,
   navigation,
+  passkeys,
   photos,
   pool,
   privacy,

@@ -11,6 +11,7 @@ import howExamples from './es/how-examples.json';
 import invitation from './es/invitation.json';
 import learnt from './es/learnt.json';
 import navigation from './es/navigation.json';
+import passkeys from './es/passkeys.json';
 import photos from './es/photos.json';
 import pool from './es/pool.json';
 import privacy from './es/privacy.json';
@@ -42,6 +43,7 @@ export const spanish: Catalogue = {
   invitation,
   learnt,
   navigation,
+  passkeys,
   photos,
   pool,
   privacy,

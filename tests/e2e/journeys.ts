@@ -15,6 +15,7 @@ import { lookRound } from './journeys/look-round';
 import { looks } from './journeys/looks';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
+import { passkeys } from './journeys/passkeys';
 import { photos } from './journeys/photos';
 import { scope } from './journeys/scope';
 import { members } from './journeys/members';
@@ -51,6 +52,7 @@ export const journeys: readonly Journey[] = [
   cardOffline,
   escape,
   members,
+  passkeys,
   photos,
   choosingLanguage,
   landing,

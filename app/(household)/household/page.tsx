@@ -15,7 +15,7 @@ export default async function HouseholdPage() {
   const { access } = await requireHousehold();
   const { timeZone, locale, demo } = access;
   return (
-    <ClientMessages namespaces={['household']} parts={{ start: ['signUp'] }}>
+    <ClientMessages namespaces={['household']} parts={{ start: ['signUp'], passkeys: ['account', 'problem'] }}>
       <HouseholdScreen
         setting={{ timeZone, locale, demo, mayInvite: may(access, 'invite') }}
         shortestPassword={shortestPassword}

@@ -12,6 +12,8 @@ export type ServerOptions = {
   clock: string;
   /** The address that people type, where it is not the one that is listened on. */
   origin?: string;
+  /** Opened as http://localhost and not by its number, which some things of a browser need. */
+  byName?: boolean;
   /** Starts without any database, and makes its demo household beside the first requests. */
   fresh?: boolean;
 };
@@ -31,7 +33,7 @@ export class Server {
     readonly options: ServerOptions,
     readonly port: number,
   ) {
-    this.address = `http://127.0.0.1:${port}`;
+    this.address = `http://${options.byName ? 'localhost' : '127.0.0.1'}:${port}`;
     this.databaseFile = databaseFileOf(options.name);
   }
 
@@ -91,7 +93,7 @@ export class Server {
           DATABASE_URL: `file:${this.databaseFile}`,
           TEST_CLOCK: clock,
           WADEWELL_SECRET: secret,
-          ...(this.options.origin === undefined ? {} : { APP_ORIGIN: this.options.origin }),
+          ...(this.origin === `http://127.0.0.1:${this.port}` ? {} : { APP_ORIGIN: this.origin }),
         },
         stdio: ['ignore', 'pipe', 'pipe'],
       },

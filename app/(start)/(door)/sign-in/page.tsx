@@ -2,8 +2,11 @@ import type { Metadata } from 'next';
 import { getTranslations } from 'next-intl/server';
 import { SignOutButton } from '@/components/navigation/sign-out-button';
 import { EntryPage } from '@/components/start/entry-page';
+import { PasskeySignIn } from '@/components/start/passkey-sign-in';
 import { SignInForm } from '@/components/start/sign-in-form';
 import { findHousehold, openPageVisit } from '@/lib/auth/page-gate';
+import { passkeyPlace } from '@/lib/auth/passkey-place';
+import { environment } from '@/lib/env';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('start.signIn');
@@ -22,7 +25,7 @@ export default async function SignInPage() {
     );
   return (
     <EntryPage title={t('title')} lead={t('lead')}>
-      <SignInForm />
+      <SignInForm beside={'rpId' in passkeyPlace(environment().origin) ? <PasskeySignIn /> : null} />
     </EntryPage>
   );
 }
