@@ -214,6 +214,12 @@ const homes = [
     ['lucia', '@lucia-auth', 'oslo', '@node-rs/argon2', '@zxcvbn-ts', '@simplewebauthn/server'],
     'Sessions and passwords live behind lib/auth.',
   ),
+  onlyIn(
+    'passkeys-in-the-browser-at-home',
+    libFolders('client'),
+    ['@simplewebauthn/browser'],
+    'The browser is asked for passkeys through lib/client, which fetches the package when somebody presses.',
+  ),
   onlyIn('log-at-home', '^lib/log\\.ts$', ['pino'], 'Log through lib/log, which leaves out what could name somebody.'),
   onlyIn(
     'next-at-home',

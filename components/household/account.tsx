@@ -10,9 +10,11 @@ import { RequestProblem } from '@/lib/client/fetch-json';
 import { changePassword } from '@/lib/client/session';
 import { useProblemWords } from '@/lib/messages/use-problem-words';
 import { AccountEmail } from './account-email';
+import type { HouseholdSetting } from './household-setting';
+import { Passkeys } from './passkeys';
 
-/** What belongs to whoever is signed in and not to the household: the password. */
-export function Account({ shortestPassword }: { shortestPassword: number }) {
+/** What belongs to whoever is signed in and not to the household: the password, and the other ways in. */
+export function Account({ setting, shortestPassword }: { setting: HouseholdSetting; shortestPassword: number }) {
   const t = useTranslations('household.account');
   return (
     <section aria-labelledby="account" className="grid gap-2">
@@ -23,6 +25,7 @@ export function Account({ shortestPassword }: { shortestPassword: number }) {
       <Disclosure summary={<span className="text-body">{t('change')}</span>}>
         <PasswordForm shortestPassword={shortestPassword} />
       </Disclosure>
+      <Passkeys setting={setting} />
     </section>
   );
 }

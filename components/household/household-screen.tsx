@@ -71,7 +71,7 @@ export function HouseholdScreen({ setting, shortestPassword, initialDuty }: Prop
           {setting.mayInvite && !setting.demo && data !== undefined ? <InviteForm mailFrom={data.mailFrom} /> : null}
           {setting.mayInvite ? null : <p className="text-small text-ink-2">{t('onlyOwners')}</p>}
           <OtherHouseholds />
-          {setting.demo ? null : <Account shortestPassword={shortestPassword} />}
+          {setting.demo ? null : <Account setting={setting} shortestPassword={shortestPassword} />}
           {setting.demo ? null : <Devices setting={setting} />}
           {setting.demo ? null : (
             <section aria-labelledby="leaving" className="grid gap-1">

@@ -13,7 +13,8 @@ import { useEntryForm } from './use-entry-form';
 
 const fields = ['email', 'password'] as const;
 
-export function SignInForm() {
+/** @param beside another way in, under the button */
+export function SignInForm({ beside }: { beside?: React.ReactNode }) {
   const t = useTranslations('start.signIn');
   const form = useTranslations('start.form');
   const { problems, failure, busy, forgive, submit } = useEntryForm(
@@ -38,6 +39,7 @@ export function SignInForm() {
       <Button type="submit" variant="primary" size="large" wide busy={busy ? t('busy') : undefined}>
         {t('submit')}
       </Button>
+      {beside}
       <p className="text-body">
         {t.rich('forgotten', {
           link: (words) => (

@@ -32,6 +32,7 @@ export async function findAccount(db: DatabaseOrTransaction, personId: string) {
       email: people.email,
       emailConfirmedAt: people.emailConfirmedAt,
       language: people.language,
+      passwordHash: people.passwordHash,
     })
     .from(people)
     .where(eq(people.id, personId));

@@ -6,6 +6,8 @@ export { households } from './households';
 export { invitations } from './invitations';
 export { memberships } from './memberships';
 export { outgoingMails } from './outgoing-mails';
+export { passkeyChallenges } from './passkey-challenges';
+export { passkeys } from './passkeys';
 export { people } from './people';
 export { doseEvents, planDoses } from './plan-doses';
 export { photos } from './photos';

@@ -13,6 +13,8 @@ const limits = {
   'password-person': { most: 10, windowMilliseconds: 15 * minute },
   /** A family has a few pools; a program would have thousands. */
   'new-household-person': { most: 20, windowMilliseconds: 60 * minute },
+  /** Asked for and answered: two each time. */
+  'passkey-address': { most: 200, windowMilliseconds: 15 * minute },
   'sign-up-address': { most: 60, windowMilliseconds: 60 * minute },
   'reset-address': { most: 30, windowMilliseconds: 60 * minute },
   'reset-email': { most: 5, windowMilliseconds: 60 * minute },

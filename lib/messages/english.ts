@@ -12,6 +12,7 @@ import invitation from './en/invitation.json';
 import learnt from './en/learnt.json';
 import mail from './en/mail.json';
 import navigation from './en/navigation.json';
+import passkeys from './en/passkeys.json';
 import photos from './en/photos.json';
 import pool from './en/pool.json';
 import privacy from './en/privacy.json';
@@ -44,6 +45,7 @@ export const english = {
   learnt,
   mail,
   navigation,
+  passkeys,
   photos,
   pool,
   privacy,

@@ -402,6 +402,21 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
     'Esta invitación ya se usó, se retiró o venció. Pide otro enlace.',
   'An owner has to mark you as an adult who handles chemicals first.':
     'Antes, un propietario tiene que indicar que eres una persona adulta que maneja productos químicos.',
+  'Write a name for the passkey.': 'Escribe un nombre para la llave de acceso.',
+  'Wadewell is opened by a number here, and passkeys need a name. Sign in with your password.':
+    'Aquí Wadewell se abre con un número, y las llaves de acceso necesitan un nombre. Entra con tu contraseña.',
+  'Passkeys need an address that begins with https. Sign in with your password.':
+    'Las llaves de acceso necesitan una dirección que empiece por https. Entra con tu contraseña.',
+  'You have {0} passkeys, which is as many as can be kept. Forget one, then add this one.':
+    'Tienes {0} llaves de acceso, que son todas las que se pueden guardar. Olvida una y luego añade esta.',
+  'A look round has no account, so it has no passkeys.':
+    'Una visita de muestra no tiene cuenta, así que no tiene llaves de acceso.',
+  'This passkey could not be checked, or it took too long. Begin again.':
+    'Esta llave de acceso no se pudo comprobar, o tardó demasiado. Empieza de nuevo.',
+  'This passkey is known already. Make another one.': 'Esta llave de acceso ya está guardada. Crea otra.',
+  'This passkey is not one of yours, or no longer.': 'Esta llave de acceso no es tuya, o ya no.',
+  'This passkey does not open a sheet here. Sign in with your e-mail address and your password.':
+    'Esta llave de acceso no abre ninguna hoja aquí. Entra con tu correo y tu contraseña.',
   'Write the password you have now.': 'Escribe la contraseña que tienes ahora.',
   'This is not the password you have now.': 'Esta no es la contraseña que tienes ahora.',
   'A look round has no account. Sign out, then open the link again.':

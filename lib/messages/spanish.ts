@@ -12,6 +12,7 @@ import invitation from './es/invitation.json';
 import learnt from './es/learnt.json';
 import mail from './es/mail.json';
 import navigation from './es/navigation.json';
+import passkeys from './es/passkeys.json';
 import photos from './es/photos.json';
 import pool from './es/pool.json';
 import privacy from './es/privacy.json';
@@ -44,6 +45,7 @@ export const spanish: Catalogue = {
   learnt,
   mail,
   navigation,
+  passkeys,
   photos,
   pool,
   privacy,

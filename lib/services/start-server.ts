@@ -4,6 +4,7 @@ import { prepareDatabase } from '@/db/migrate';
 import { deleteOldAccountLinks } from '@/db/queries/account-links';
 import { deleteExpiredDemoCopies } from '@/db/queries/households';
 import { deleteOldMails } from '@/db/queries/outgoing-mails';
+import { deleteExpiredPasskeyChallenges } from '@/db/queries/passkey-challenges';
 import { deleteExpiredRateLimits } from '@/db/queries/rate-limits';
 import { inWriteTransaction } from '@/db/write';
 import { sessionsOf } from '@/lib/auth/sessions';
@@ -24,6 +25,7 @@ export async function startServer(): Promise<void> {
   await sessionsOf(db, surroundings).deleteExpired();
   const scope = systemScope('clean-up');
   await deleteExpiredRateLimits(db, scope, now);
+  await deleteExpiredPasskeyChallenges(db, scope, now);
   await inWriteTransaction(db, (tx) => deleteExpiredDemoCopies(tx, scope, now));
   const monthAgo = new Date(now.getTime() - 30 * 24 * 3_600_000);
   await deleteOldMails(db, scope, monthAgo);

@@ -147,6 +147,16 @@ export const importPlants: { rule: string; wrong: Plant; right: Plant }[] = [
     right: plant('lib/auth/password.ts', '@node-rs/argon2'),
   },
   {
+    rule: 'sessions-at-home',
+    wrong: plant('lib/services/add-passkey.ts', '@simplewebauthn/server'),
+    right: plant('lib/auth/passkeys.ts', '@simplewebauthn/server'),
+  },
+  {
+    rule: 'passkeys-in-the-browser-at-home',
+    wrong: plant('components/start/passkey.tsx', '@simplewebauthn/browser'),
+    right: plant('lib/client/passkeys.ts', '@simplewebauthn/browser'),
+  },
+  {
     rule: 'log-at-home',
     wrong: plant('lib/services/keep-log.ts', 'pino'),
     right: plant('lib/log.ts', 'pino'),

@@ -18,6 +18,7 @@ import { looks } from './journeys/looks';
 import { mail } from './journeys/mail';
 import { measures } from './journeys/measures';
 import { measuring } from './journeys/measuring';
+import { passkeys } from './journeys/passkeys';
 import { photos } from './journeys/photos';
 import { roleMatrix } from './journeys/role-matrix';
 import { scope } from './journeys/scope';
@@ -59,6 +60,7 @@ export const journeys: readonly Journey[] = [
   mail,
   leaving,
   handOver,
+  passkeys,
   photos,
   choosingLanguage,
   landing,

@@ -13,6 +13,8 @@ const technical =
 const publicRoutes = [
   '/api/health',
   '/api/sign-in',
+  '/api/sign-in/passkey',
+  '/api/sign-in/passkey/options',
   '/api/sign-out',
   '/api/sign-up',
   '/api/look-round',

@@ -14,6 +14,8 @@ export type ServerOptions = {
   origin?: string;
   /** Further settings of its environment, such as MAIL. */
   variables?: Readonly<Record<string, string>>;
+  /** Opened as http://localhost and not by its number, which some things of a browser need. */
+  byName?: boolean;
   /** Starts without any database, and makes its demo household beside the first requests. */
   fresh?: boolean;
 };
@@ -33,7 +35,7 @@ export class Server {
     readonly options: ServerOptions,
     readonly port: number,
   ) {
-    this.address = `http://127.0.0.1:${port}`;
+    this.address = `http://${options.byName ? 'localhost' : '127.0.0.1'}:${port}`;
     this.databaseFile = databaseFileOf(options.name);
   }
 
@@ -94,7 +96,7 @@ export class Server {
           TEST_CLOCK: clock,
           WADEWELL_SECRET: secret,
           ...this.options.variables,
-          ...(this.options.origin === undefined ? {} : { APP_ORIGIN: this.options.origin }),
+          ...(this.origin === `http://127.0.0.1:${this.port}` ? {} : { APP_ORIGIN: this.origin }),
         },
         stdio: ['ignore', 'pipe', 'pipe'],
       },

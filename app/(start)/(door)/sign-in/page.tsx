@@ -6,8 +6,11 @@ import { SignOutButton } from '@/components/navigation/sign-out-button';
 import { EntryPage } from '@/components/start/entry-page';
 import { likelyUnits } from '@/components/start/likely-units';
 import { OwnHousehold } from '@/components/start/own-household';
+import { PasskeySignIn } from '@/components/start/passkey-sign-in';
 import { SignInForm } from '@/components/start/sign-in-form';
 import { findHousehold, openPageVisit } from '@/lib/auth/page-gate';
+import { passkeyPlace } from '@/lib/auth/passkey-place';
+import { environment } from '@/lib/env';
 import { ClientMessages } from '@/lib/messages/client-messages';
 
 export async function generateMetadata(): Promise<Metadata> {
@@ -33,7 +36,7 @@ export default async function SignInPage({ searchParams }: { searchParams: Promi
     );
   return (
     <EntryPage title={t('title')} lead={'changed' in (await searchParams) ? t('changed') : t('lead')}>
-      <SignInForm />
+      <SignInForm beside={'rpId' in passkeyPlace(environment().origin) ? <PasskeySignIn /> : null} />
     </EntryPage>
   );
 }
