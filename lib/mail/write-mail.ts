@@ -9,6 +9,7 @@ export type Letter =
   | { about: 'confirm' | 'change' | 'reset'; name: string; link: string }
   | { about: 'changes'; name: string; email: string }
   | { about: 'password'; name: string }
+  | { about: 'passkey'; name: string; passkey: string }
   | { about: 'invitation'; name: string; link: string; inviter: string; household: string; role: Role; day: string };
 
 export type WrittenMail = { subject: string; text: string; html: string };
@@ -61,6 +62,13 @@ function paperOf(letter: Letter, language: Language): Paper {
         before: [t('password.words')],
         action: null,
         after: [t('password.notYou')],
+      };
+    case 'passkey':
+      return {
+        subject: t('passkey.subject'),
+        before: [t('passkey.words', { passkey: letter.passkey })],
+        action: null,
+        after: [t('passkey.notYou')],
       };
     case 'invitation': {
       const { inviter, household, role, day, link } = letter;

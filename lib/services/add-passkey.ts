@@ -3,14 +3,15 @@ import { countPasskeys, insertPasskey, listPasskeys } from '@/db/queries/passkey
 import { findAccount } from '@/db/queries/people';
 import { inWriteTransaction } from '@/db/write';
 import { askForNewPasskey, ownPasskeyPlace, proveNewPasskey } from '@/lib/auth/passkeys';
-import { verifyPassword } from '@/lib/auth/passwords';
-import { countTry, forgetTries } from '@/lib/auth/rate-limit';
 import type { SignedIn } from '@/lib/auth/sessions';
 import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import type { NewPasskey, PasskeyCreation, PasskeyList, PasskeyWish } from '@/lib/schemas/passkey';
 import { MOST_PASSKEYS } from '@/lib/schemas/passkey-limits';
+import { confirmPassword } from './confirm-password';
+import { deliverSoon } from './deliver-mail';
 import { keepChallenge, takeChallenge } from './passkey-challenge';
+import { queueMail } from './queue-mail';
 import { showPasskeys } from './show-passkeys';
 
 type PersonVisit = Visit & { signedIn: SignedIn };
@@ -26,12 +27,7 @@ export async function askForPasskeyOf(visit: PersonVisit, { password }: PasskeyW
   // A visitor of the demo is gone after a day, and has no password that a passkey could stand for.
   if (!account?.email || account.passwordHash === null)
     throw new AppError('not-allowed', 'A look round has no account, so it has no passkeys.');
-  await countTry(visit, 'password-person', personId);
-  if (!(await verifyPassword(account.passwordHash, password))) {
-    const message = 'This is not the password you have now.';
-    throw new AppError('invalid-input', message, { problems: [{ path: 'password', message }] });
-  }
-  await forgetTries(visit, 'password-person', personId);
+  await confirmPassword(visit, { personId, password, path: 'password' });
   const known = await listPasskeys(db, personId);
   if (known.length >= MOST_PASSKEYS) throw new AppError('conflict', enough);
   const { name, email } = account;
@@ -54,6 +50,12 @@ export async function addPasskey(visit: PersonVisit, made: NewPasskey): Promise<
     const row = { ...proven, personId, name: made.name, createdAt: now };
     if (!(await insertPasskey(tx, row)))
       throw new AppError('conflict', 'This passkey is known already. Make another one.');
+    const account = await findAccount(tx, personId);
+    if (!account?.email) return;
+    const { name, email, language } = account;
+    const letter = { about: 'passkey', name, passkey: made.name } as const;
+    await queueMail(tx, { letter, email, language, now, about: { personId } });
   });
+  deliverSoon(db);
   return showPasskeys(visit);
 }

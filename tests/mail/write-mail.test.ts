@@ -9,6 +9,7 @@ const letters: Letter[] = [
   { about: 'reset', name: 'Ines', link },
   { about: 'changes', name: 'Ines', email: 'new@pool.example' },
   { about: 'password', name: 'Ines' },
+  { about: 'passkey', name: 'Ines', passkey: 'My telephone' },
   {
     ...{ about: 'invitation', name: 'Otto', link, inviter: 'Ines', household: 'The Larches' },
     ...{ role: 'viewer', day: '12 July 2026' },

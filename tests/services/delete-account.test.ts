@@ -292,7 +292,9 @@ describe('closing a household', () => {
       for (const table of tables) if (goesWithReached(table)) reached.add(table);
     }
     const left = tables.filter((table) => !reached.has(table)).map((table) => getTableConfig(table).name);
-    expect(left.sort()).toEqual(['account_links', 'people', 'rate_limits', 'sessions']);
+    expect(left.sort()).toEqual([
+      ...['account_links', 'passkey_challenges', 'passkeys', 'people', 'rate_limits', 'sessions'],
+    ]);
   });
 
   it('deletes it for everybody, with everything in it', async () => {

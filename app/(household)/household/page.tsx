@@ -19,10 +19,7 @@ export default async function HouseholdPage() {
   const duty = await forPage(showHandOvers(visit));
   const { timeZone, locale, demo } = access;
   return (
-    <ClientMessages
-      namespaces={['household']}
-      parts={{ start: ['form', 'signUp'], passkeys: ['account', 'problem'] }}
-    >
+    <ClientMessages namespaces={['household']} parts={{ start: ['form', 'signUp'], passkeys: ['account', 'problem'] }}>
       <HouseholdScreen
         setting={{
           ...{ timeZone, locale, demo, mayInvite: may(access, 'invite') },

@@ -31,9 +31,12 @@ function show(known: HandOvers, { you = 'odile', refusal }: { you?: 'odile' | 'b
   ];
   vi.stubGlobal('fetch', (address: string, init?: RequestInit) => {
     const method = init?.method ?? 'GET';
-    if (address === '/api/members') return Promise.resolve(Response.json({ members, invitations: [] }));
+    if (address === '/api/members')
+      return Promise.resolve(Response.json({ members, invitations: [], mailFrom: 'nowhere' }));
     if (address === '/api/households') return Promise.resolve(Response.json([]));
-    if (method === 'GET') return Promise.resolve(Response.json(known));
+    if (method === 'GET' && address === '/api/hand-overs') return Promise.resolve(Response.json(known));
+    // What else the page asks for is of no concern here.
+    if (method === 'GET') return Promise.resolve(new Response(null, { status: 503 }));
     sent.push({ address, method, body: init?.body === undefined ? undefined : JSON.parse(String(init.body)) });
     return Promise.resolve(refusal?.() ?? Response.json(known));
   });

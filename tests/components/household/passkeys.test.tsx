@@ -5,7 +5,10 @@ import { Passkeys } from '@/components/household/passkeys';
 import type { PasskeyCreation, PasskeyList } from '@/lib/schemas/passkey';
 import { renderWithWords } from '@/tests/support/with-words';
 
-const setting = { timeZone: 'America/New_York', locale: 'en-US', mayInvite: true, demo: false };
+const setting = {
+  ...{ timeZone: 'America/New_York', locale: 'en-US', demo: false },
+  ...{ mayInvite: true, mayHandOver: true, mayReadAuditTrail: true },
+};
 const phone = { id: 'cGhvbmU', name: 'Phone', createdAt: '2026-07-05T02:00:00Z', lastUsedAt: null };
 const asked: PasskeyCreation = {
   rp: { id: 'localhost', name: 'Wadewell' },

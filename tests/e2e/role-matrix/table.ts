@@ -18,10 +18,11 @@
  *
  * Each question starts from the same rows: whatever one has written is taken back before the next.
  */
-import { randomUUID } from 'node:crypto';
+import { createHmac, randomUUID } from 'node:crypto';
 import { fullTest } from '../support/households';
-import type { Answers, Asker, Group } from './askers';
-import { isCarer, isMember, password, secret, when, type World } from './world';
+import { serverSecret } from '../support/server';
+import type { Answer, Answers, Asker, Group, Member } from './askers';
+import { isCarer, isMember, password, secret, strangersWord, when, type World } from './world';
 
 type Ask<Value> = (world: World, asker: Asker) => Value;
 
@@ -64,12 +65,39 @@ const firstRunIsOver = {
   stranger: 'to /week',
 } as const;
 
+/** A link in a mail to the viewer, as it stands in the database once `before` has put it there. */
+const linkToken = 'a-link-of-the-role-matrix-and-of-nothing-00';
+const mailed = (page: 'confirm' | 'reset', purpose: string) => `insert into account_links
+  (token_digest, person_id, purpose, email, created_at, expires_at)
+  select '${createHmac('sha256', serverSecret).update(`${page} ${linkToken}`).digest('base64url')}', id, '${purpose}', email,
+    created_at, created_at + ${100 * 24 * 3_600_000} from people where name = 'Vera ${secret}'`;
+
+/** A passkey for each of them, called after their address. */
+const passkeysOfAll = `insert into passkeys (id, person_id, public_key, counter, transports, name, backed_up, created_at)
+  select replace(replace(email, '@', '_'), '.', '_'), id, x'00', 0, '[]', 'Telephone', 0, created_at from people
+  where email is not null`;
+const passkeyOf = (world: World, asker: Member) => world.people[asker].email.replaceAll(/[@.]/g, '_');
+
+const toMembers = <Value extends Answer>(answer: Value) => ({
+  ...{ viewer: answer, caretaker: answer, 'dosing caretaker': answer },
+  ...{ owner: answer, stranger: answer, 'expired member': answer },
+});
+/** A thing of the viewer alone. */
+const toTheViewerAlone = { ...toMembers(404), viewer: 'done' } as const;
+/** The server of these tests is opened by a number. */
+const noPasskeysHere = toMembers(403);
+
 export const pageRows: readonly PageRow[] = [
   { page: '/', for: 'anybody' },
   { page: '/sign-in', for: 'anybody' },
   { page: '/sign-up', for: 'anybody' },
   // Whoever holds the link is told which household it opens.
   { page: '/invitation/[token]', for: 'anybody', at: (world) => `/invitation/${world.invitation.token}`, tells: true },
+  { page: '/reset', for: 'anybody' },
+  { page: '/reset/[token]', for: 'anybody', at: () => `/reset/${linkToken}` },
+  { page: '/confirm/[token]', for: 'anybody', at: () => `/confirm/${linkToken}` },
+  // Only where mail stays on this machine.
+  { page: '/mailbox', for: 'anybody', status: 404 },
   { page: '/first-run', for: 'everyone in the household', except: firstRunIsOver },
   { page: '/first-run/[step]', for: 'everyone in the household', at: () => '/first-run/size', except: firstRunIsOver },
 
@@ -161,7 +189,100 @@ export const routeRows: readonly RouteRow[] = [
     send: () => ({ current: password, password: 'five other words in a row' }),
     changes: 'people',
   },
+  { call: 'GET /api/sessions', for: 'anybody signed in' },
   { call: 'DELETE /api/sessions', for: 'anybody signed in', changes: 'sessions' },
+  {
+    call: 'DELETE /api/sessions/[id]',
+    note: 'of oneself',
+    for: 'anybody signed in',
+    id: ({ devices }, asker) => devices[isMember(asker) ? asker : 'viewer'],
+    changes: 'sessions',
+  },
+  {
+    call: 'DELETE /api/sessions/[id]',
+    note: 'of the viewer',
+    for: 'anybody signed in',
+    id: ({ devices }) => devices.viewer,
+    changes: 'sessions',
+    except: toTheViewerAlone,
+  },
+  { call: 'GET /api/account', for: 'anybody signed in' },
+  {
+    call: 'PUT /api/account/email',
+    for: 'anybody signed in',
+    send: () => ({ current: password, email: 'new@pool.example' }),
+    changes: 'people',
+  },
+  // No mail leaves the server of these tests: journey 'mail' reads what leaves one that sends it.
+  { call: 'POST /api/account/confirmation', for: 'anybody signed in' },
+  {
+    call: 'POST /api/email-confirmations',
+    for: 'anybody',
+    send: () => ({ token: linkToken }),
+    before: mailed('confirm', 'confirm-email'),
+    changes: 'people',
+  },
+  {
+    call: 'POST /api/password-resets',
+    for: 'anybody',
+    send: (world, asker) => ({ email: emailOf(world, asker) }),
+    except: { ...toMembers(403), nobody: 403 },
+  },
+  {
+    call: 'PUT /api/password-resets',
+    for: 'anybody',
+    send: () => ({ token: linkToken, password: 'five other words in a row' }),
+    before: mailed('reset', 'reset-password'),
+    changes: 'people',
+  },
+  { call: 'GET /api/account/deletion', for: 'anybody signed in' },
+  {
+    call: 'DELETE /api/account',
+    for: 'anybody signed in',
+    send: () => ({ password, deletes: [] }),
+    changes: 'people',
+    // The last owner of others; and somebody who was not told that their household goes with them.
+    except: { owner: 409, stranger: 409 },
+  },
+  { call: 'GET /api/passkeys', for: 'anybody signed in' },
+  {
+    call: 'POST /api/passkeys/options',
+    for: 'anybody signed in',
+    send: () => ({ password }),
+    except: noPasskeysHere,
+  },
+  {
+    call: 'POST /api/passkeys',
+    for: 'anybody signed in',
+    send: () => ({
+      ...{ name: 'Telephone', id: 'aWQ', clientDataJSON: 'e30', attestationObject: 'oA', transports: [] },
+    }),
+    except: noPasskeysHere,
+  },
+  {
+    call: 'DELETE /api/passkeys/[id]',
+    note: 'of oneself',
+    for: 'anybody signed in',
+    id: (world, asker) => passkeyOf(world, isMember(asker) ? asker : 'viewer'),
+    before: passkeysOfAll,
+    changes: 'passkeys',
+  },
+  {
+    call: 'DELETE /api/passkeys/[id]',
+    note: 'of the viewer',
+    for: 'anybody signed in',
+    id: (world) => passkeyOf(world, 'viewer'),
+    before: passkeysOfAll,
+    changes: 'passkeys',
+    except: toTheViewerAlone,
+  },
+  { call: 'POST /api/sign-in/passkey/options', for: 'anybody', except: { ...noPasskeysHere, nobody: 403 } },
+  {
+    call: 'POST /api/sign-in/passkey',
+    for: 'anybody',
+    send: () => ({ ...{ id: 'aWQ', clientDataJSON: 'e30', authenticatorData: 'oA', signature: 'oA', userHandle: '' } }),
+    except: { ...noPasskeysHere, nobody: 403 },
+  },
   {
     call: 'POST /api/invitations/accept',
     for: 'anybody signed in',
@@ -179,6 +300,19 @@ export const routeRows: readonly RouteRow[] = [
 
   // The household and its people
   { call: 'GET /api/households', for: 'anybody signed in', except: { stranger: 'own' } },
+  {
+    call: 'POST /api/households',
+    for: 'anybody signed in',
+    send: () => ({ name: 'Fern pool', timeZone: 'America/New_York', unitSystem: 'metric', locale: 'en-US' }),
+    changes: 'households',
+  },
+  {
+    call: 'DELETE /api/households/current',
+    for: 'owners',
+    send: (_, asker) => ({ password, name: `${asker === 'stranger' ? strangersWord : secret} pool` }),
+    changes: 'households',
+  },
+  { call: 'GET /api/audit-trail', for: 'owners' },
   {
     call: 'PUT /api/households/chosen',
     for: 'everyone in the household',
@@ -240,6 +374,30 @@ export const routeRows: readonly RouteRow[] = [
     for: 'owners',
     id: ({ invitation }) => invitation.id,
     changes: 'invitations',
+  },
+  { call: 'GET /api/hand-overs', for: 'everyone in the household' },
+  {
+    call: 'POST /api/hand-overs',
+    for: 'owners',
+    send: ({ handOver }) => ({ ...handOver, id: randomUUID(), fromDay: '2026-10-01', untilDay: '2026-10-03' }),
+    inBody: true,
+    changes: 'hand_overs',
+  },
+  {
+    call: 'DELETE /api/hand-overs/[id]',
+    for: 'owners',
+    id: ({ handOver }) => handOver.id,
+    changes: 'hand_overs',
+    // It is they who are asked, and may decline.
+    except: { viewer: 'done' },
+  },
+  {
+    call: 'PUT /api/hand-overs/[id]/agreement',
+    for: 'everyone in the household',
+    id: ({ handOver }) => handOver.id,
+    send: () => ({ cardRead: false }),
+    changes: 'hand_overs',
+    except: { caretaker: 403, 'dosing caretaker': 403, owner: 403 },
   },
   {
     call: 'POST /api/safety-card',
@@ -447,5 +605,9 @@ export const takenIds: readonly Pick<RouteRow, 'call' | 'query' | 'send' | 'byte
   {
     call: 'POST /api/invitations',
     send: ({ invitation: { id } }) => ({ id, name: 'Nora', role: 'owner', chemicalsAllowed: true }),
+  },
+  {
+    call: 'POST /api/hand-overs',
+    send: ({ handOver, memberships }) => ({ ...handOver, memberId: memberships.stranger }),
   },
 ];

@@ -38,9 +38,13 @@ export type World = {
   tryOutId: string;
   planId: string;
   invitation: { id: string; token: string };
+  /** The viewer is asked to look after the pool. */
+  handOver: { id: string; memberId: string; fromDay: string; untilDay: string; chemicalsAllowed: boolean };
   /** Memberships; the stranger's in a household of their own. */
   memberships: Record<Member, string>;
   people: Record<Member, { email: string }>;
+  /** Where each is signed in, by what the list of devices calls it. */
+  devices: Record<Member, string>;
   picture: string;
 };
 
@@ -85,6 +89,11 @@ export async function makeWorld(server: Server): Promise<{ world: World; cookies
     stranger: memberOf(await stranger.person.must('GET', '/api/members'), 'Olga'),
   };
   await endByTime(server, memberships['expired member']);
+  const handOver = {
+    ...{ id: randomUUID(), memberId: memberships.viewer, chemicalsAllowed: false },
+    ...{ fromDay: '2026-09-01', untilDay: '2026-09-05' },
+  };
+  await owner.person.must('POST', '/api/hand-overs', handOver);
 
   const dose = await waitForADose(server, owner.person);
   // What is worked out when it is looked at, such as what a pool has taught, is worked out before anything is compared.
@@ -97,7 +106,7 @@ export async function makeWorld(server: Server): Promise<{ world: World; cookies
   const [product] = await owner.person.must<HouseholdProduct[]>('GET', '/api/shelf-products');
   const world = {
     ...things,
-    ...{ householdId: household?.id ?? '', productId: product?.id ?? '', planId, memberships },
+    ...{ householdId: household?.id ?? '', productId: product?.id ?? '', planId, memberships, handOver },
     ...{ dose: { id: dose.id, planVersion: dose.planVersion }, stopDoseId: dose.id },
     people: {
       viewer: { email: viewer.email },
@@ -106,6 +115,14 @@ export async function makeWorld(server: Server): Promise<{ world: World; cookies
       owner: { email: owner.email },
       stranger: { email: stranger.email },
       'expired member': { email: expired.email },
+    },
+    devices: {
+      viewer: await deviceOf(viewer.person),
+      caretaker: await deviceOf(caretaker.person),
+      'dosing caretaker': await deviceOf(dosing.person),
+      owner: await deviceOf(owner.person),
+      stranger: await deviceOf(stranger.person),
+      'expired member': await deviceOf(expired.person),
     },
   };
   const cookies = {
@@ -129,14 +146,31 @@ export function worldOfNothing(world: World): World {
     return made;
   };
   const made = JSON.parse(JSON.stringify(world).replace(uuid, other)) as World;
-  const { picture, people } = world;
-  return { ...made, picture, people, invitation: { ...made.invitation, token: randomBytes(32).toString('base64url') } };
+  const { picture, people, devices } = world;
+  return {
+    ...made,
+    picture,
+    people,
+    devices,
+    invitation: { ...made.invitation, token: randomBytes(32).toString('base64url') },
+  };
 }
 
 /** Every id of the first household that a refused answer, or a row written elsewhere, must not hold. */
-export function idsOf({ people: _people, picture: _picture, memberships, ...things }: World): string[] {
+export function idsOf({
+  people: _people,
+  picture: _picture,
+  devices: _devices,
+  memberships,
+  ...things
+}: World): string[] {
   const { stranger: _stranger, ...ofTheHousehold } = memberships;
   return [...new Set(JSON.stringify({ things, ofTheHousehold }).match(uuid))];
+}
+
+async function deviceOf(person: Person): Promise<string> {
+  const [device] = await person.must<{ id: string }[]>('GET', '/api/sessions');
+  return device?.id ?? '';
 }
 
 export const isCarer = (asker: Asker): asker is Carer => ['caretaker', 'dosing caretaker', 'owner'].includes(asker);

@@ -22,7 +22,7 @@ export type ServerOptions = {
 
 /** The wrong zone on purpose: a server that tells hours by its own machine is caught. */
 const machineZone = 'Asia/Kathmandu';
-const secret = 'a secret of the end-to-end tests and of nothing else';
+export const serverSecret = 'a secret of the end-to-end tests and of nothing else';
 
 /** A production server of the build under test, on a free port, with a database of its own. */
 export class Server {
@@ -94,7 +94,7 @@ export class Server {
           PORT: `${this.port}`,
           DATABASE_URL: `file:${this.databaseFile}`,
           TEST_CLOCK: clock,
-          WADEWELL_SECRET: secret,
+          WADEWELL_SECRET: serverSecret,
           ...this.options.variables,
           ...(this.origin === `http://127.0.0.1:${this.port}` ? {} : { APP_ORIGIN: this.origin }),
         },
