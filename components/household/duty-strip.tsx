@@ -12,6 +12,7 @@ type Screen = keyof typeof narrowest;
 const letter = 9.5;
 const margins = 20;
 
+const firstLetter = (name: string) => [...name][0] ?? '';
 const percent = (share: number) => `${share * 100}%`;
 
 /** Some weeks on one line: who is on duty when. The words beside it say the same, so it is one picture to who listens. */
@@ -26,10 +27,10 @@ export function DutyStrip({ duty, setting }: { duty: HandOvers; setting: Househo
   const wordsFor = (segment: DutySegment): string[] => {
     if (segment.kind === 'standIn') {
       const { name, agreedAt } = segment.handOver;
-      return [t(agreedAt === null ? 'asked' : 'alone', { name }), name];
+      return [t(agreedAt === null ? 'asked' : 'alone', { name }), name, firstLetter(name)];
     }
     const again = segment.kind === 'again' ? [t('again', { names: usually })] : [];
-    return [...again, usually, owners];
+    return [...again, usually, owners, duty.usually.map(({ name }) => firstLetter(name)).join(' ')];
   };
   const fitting = (segment: DutySegment, screen: Screen) =>
     wordsFor(segment).find((text) => text.length * letter + margins <= (segment.days / days) * narrowest[screen]);
@@ -45,7 +46,7 @@ export function DutyStrip({ duty, setting }: { duty: HandOvers; setting: Househo
             )}
             style={{ left: percent(at) }}
           >
-            {handOver || day === first ? dayAndMonth(day, locale) : dayHeading(day, locale)}
+            {handOver || day === first ? dayAndMonth(day, locale, 'short') : dayHeading(day, locale)}
           </span>
         ))}
       </div>

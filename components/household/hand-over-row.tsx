@@ -30,7 +30,7 @@ export function HandOverRow({ handOver, setting }: Props) {
         <p className="text-body">
           {when === null ? t('waiting', words.whoOf(handOver)) : t('agreed', { ...words.whoOf(handOver), when })}
         </p>
-        <p className="text-small text-ink-2">{t(role === 'owner' ? 'meansOwner' : 'means')}</p>
+        <p className="text-small text-ink-2">{t('means', { role })}</p>
         <p className="text-small text-ink-2">
           {t(`chemicals.${chemicalsAllowed ? (cardRead ? 'ready' : 'waits') : 'none'}`)}
         </p>

@@ -15,8 +15,8 @@ export function dayHeading(day: CalendarDay, locale: string): string {
 }
 
 /** '6 July', in American English 'July 6'. */
-export function dayAndMonth(day: CalendarDay, locale: string): string {
-  return formatted(day, locale, { day: 'numeric', month: 'long' });
+export function dayAndMonth(day: CalendarDay, locale: string, month: 'long' | 'short' = 'long'): string {
+  return formatted(day, locale, { day: 'numeric', month });
 }
 
 /** 'Sunday 12 July', in American English 'Sunday, July 12'. */
