@@ -3,6 +3,10 @@ import { type Letter, writeMail } from '@/lib/mail/write-mail';
 import { languages } from '@/lib/schemas/languages';
 
 const link = 'http://127.0.0.1:3000/confirm/abc';
+const invitation = {
+  ...({ about: 'invitation', name: 'Otto', link, inviter: 'Ines', household: 'The Larches' } as const),
+  ...({ role: 'viewer', day: '12 July 2026' } as const),
+};
 const letters: Letter[] = [
   { about: 'confirm', name: 'Ines', link },
   { about: 'change', name: 'Ines', link },
@@ -10,10 +14,7 @@ const letters: Letter[] = [
   { about: 'changes', name: 'Ines', email: 'new@pool.example' },
   { about: 'password', name: 'Ines' },
   { about: 'passkey', name: 'Ines', passkey: 'My telephone' },
-  {
-    ...{ about: 'invitation', name: 'Otto', link, inviter: 'Ines', household: 'The Larches' },
-    ...{ role: 'viewer', day: '12 July 2026' },
-  },
+  invitation,
 ];
 const plain = (html: string) =>
   html
@@ -49,8 +50,7 @@ describe.each(languages)('a mail in %s', (language) => {
 
   it('keeps what people call themselves as text', () => {
     const inviter = `<b onload="x">"Ines" & 'Otto'</b>`;
-    const invitation = { ...(letters[5] as Extract<Letter, { about: 'invitation' }>), inviter };
-    const { html, text } = writeMail(invitation, language);
+    const { html, text } = writeMail({ ...invitation, inviter }, language);
     expect(html).not.toContain('<b onload');
     expect(html).toContain('&lt;b onload=&quot;x&quot;&gt;');
     expect(text).toContain(inviter);
