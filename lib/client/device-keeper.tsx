@@ -11,7 +11,8 @@ export function DeviceKeeper({ owner }: { owner: DeviceOwner }) {
   const client = useQueryClient();
   useEffect(() => void settleDevice(owner), [owner]);
   useEffect(() => {
-    const forget = () => client.clear();
+    // What the page still shows is on the screen, and would be asked for again: it goes with the page.
+    const forget = () => client.removeQueries({ type: 'inactive' });
     let asked = false;
     const look = (event: Event) => {
       // Once for a page: what is on it says by itself that nothing can be fetched.

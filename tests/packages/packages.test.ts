@@ -40,7 +40,10 @@ describe('what reached the browser', () => {
   const sought = markers(root, [secret]);
 
   it.each([
-    ['a service', 'throw new A("wrong-sign-in","You do not belong to a household, or your time there is over. Ask its owner.")'],
+    [
+      'a service',
+      'throw new A("wrong-sign-in","You do not belong to a household, or your time there is over. Ask its owner.")',
+    ],
     ['a query', 'e.sql`INSERT INTO "people"`'],
     ['a table', 'let t=r("rate_limits",{key:n("key")})'],
     ['the database package', 'static [Symbol.for("drizzle:entityKind")]="SQLiteTable"'],
