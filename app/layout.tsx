@@ -6,9 +6,12 @@ import { headers } from 'next/headers';
 import { earlyFontsScript } from '@/components/ui/early-fonts';
 import { earlyPressesScript } from '@/components/ui/early-presses';
 import { UiProvider } from '@/components/ui/ui-provider';
+import { DeviceKeeper } from '@/lib/client/device-keeper';
 import { Providers } from '@/lib/client/providers';
 import { nonceOf } from '@/lib/api/headers';
+import { openPageVisit } from '@/lib/auth/page-gate';
 import { ClientMessages } from '@/lib/messages/client-messages';
+import { showDeviceOwner } from '@/lib/services/show-device-owner';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('common');
@@ -40,6 +43,7 @@ export default async function RootLayout({ children }: { children: React.ReactNo
   // Every page is made per request: a page made at build time would carry no nonce and its scripts would be refused.
   const nonce = nonceOf((await headers()).get('content-security-policy'));
   const language = await getLocale();
+  const owner = await showDeviceOwner(await openPageVisit());
   return (
     <html lang={language}>
       <head>
@@ -57,6 +61,7 @@ export default async function RootLayout({ children }: { children: React.ReactNo
       <body>
         <ClientMessages>
           <Providers>
+            <DeviceKeeper owner={owner} />
             <UiProvider>{children}</UiProvider>
           </Providers>
         </ClientMessages>

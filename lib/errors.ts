@@ -20,12 +20,19 @@ export type FieldProblem = { path: string; message: string };
 export class AppError extends Error {
   readonly code: ErrorCode;
   readonly problems: readonly FieldProblem[];
+  /** When another try makes sense, where that is known. */
+  readonly retryAfterSeconds: number | undefined;
 
-  constructor(code: ErrorCode, message: string, options?: ErrorOptions & { problems?: readonly FieldProblem[] }) {
+  constructor(
+    code: ErrorCode,
+    message: string,
+    options?: ErrorOptions & { problems?: readonly FieldProblem[]; retryAfterSeconds?: number },
+  ) {
     super(message, options);
     this.name = new.target.name;
     this.code = code;
     this.problems = options?.problems ?? [];
+    this.retryAfterSeconds = options?.retryAfterSeconds;
   }
 }
 

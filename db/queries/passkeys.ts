@@ -64,3 +64,8 @@ export async function deletePasskey(
     .returning({ id: passkeys.id });
   return gone.length > 0;
 }
+
+/** Every passkey of a person goes. */
+export async function deletePasskeysOf(tx: Transaction, personId: string): Promise<void> {
+  await tx.delete(passkeys).where(eq(passkeys.personId, personId));
+}

@@ -1,5 +1,5 @@
 import 'server-only';
-import { eq, lte, sql } from 'drizzle-orm';
+import { and, eq, gt, lte, sql } from 'drizzle-orm';
 import type { DatabaseOrTransaction } from '@/db/client';
 import { rateLimits } from '@/db/schema';
 import type { SystemScope } from '@/lib/schemas/scope';
@@ -28,6 +28,18 @@ export async function takePoint(
     .returning({ points: rateLimits.points, expiresAt: rateLimits.expiresAt });
   if (!row) throw new Error('A rate limit was neither written nor read.');
   return row;
+}
+
+/** How many points were taken in the window that runs, and when it ends. */
+export async function countedPoints(
+  db: DatabaseOrTransaction,
+  { key, now }: { key: string; now: Date },
+): Promise<{ points: number; expiresAt: Date }> {
+  const [row] = await db
+    .select({ points: rateLimits.points, expiresAt: rateLimits.expiresAt })
+    .from(rateLimits)
+    .where(and(eq(rateLimits.key, key), gt(rateLimits.expiresAt, now)));
+  return row ?? { points: 0, expiresAt: now };
 }
 
 export async function giveBackPoints(db: DatabaseOrTransaction, key: string): Promise<void> {

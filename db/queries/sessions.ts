@@ -12,6 +12,15 @@ export async function markSessionSeen(
   await db.update(sessions).set({ lastSeenAt: at }).where(eq(sessions.id, sessionId));
 }
 
+/** The household that a device looks at; null for none, and for a session that is over. */
+export async function sessionHousehold(db: DatabaseOrTransaction, sessionId: string): Promise<string | null> {
+  const [session] = await db
+    .select({ householdId: sessions.householdId })
+    .from(sessions)
+    .where(eq(sessions.id, sessionId));
+  return session?.householdId ?? null;
+}
+
 /** From now on this device looks at this household. */
 export async function chooseSessionHousehold(
   db: DatabaseOrTransaction,

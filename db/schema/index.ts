@@ -25,5 +25,6 @@ export { situationTicks, situations } from './situations';
 export { stopConfirmations } from './stop-confirmations';
 export { tabletsFound } from './tablets-found';
 export { tryOuts } from './try-outs';
+export { unprovenAccounts } from './unproven-accounts';
 export { visits } from './visits';
 export { weekDays } from './week-days';

@@ -62,7 +62,7 @@ export function problemReply(error: unknown, about: { method: string; path: stri
     const { code } = error;
     const message = answerIn(language, error.message);
     const problems = error.problems.map((problem) => ({ ...problem, message: answerIn(language, problem.message) }));
-    const wait = tryAgainAfter[code];
+    const wait = error.retryAfterSeconds === undefined ? tryAgainAfter[code] : `${error.retryAfterSeconds}`;
     return jsonReply({ error: { code, message, problems } }, statusOf[code], wait ? { 'retry-after': wait } : {});
   }
   const id = logFault(error, about);

@@ -62,7 +62,7 @@ export function householdRoute<Input extends z.ZodType, Params extends z.ZodType
 
 /** For members who send a file: `input` is read from the query, with the file as `bytes`, no more of them than `most`. */
 export function uploadRoute<Input extends z.ZodType, Params extends z.ZodType, Reply extends z.ZodType>(
-  route: RouteOf<HouseholdVisit, Input, Params, Reply> & { may: Permission; most: number },
+  route: RouteOf<HouseholdRequest, Input, Params, Reply> & { may: Permission; most: number },
 ): Handler {
   const receive = async (request: Request) => ({
     ...queryOf(request),
@@ -113,6 +113,8 @@ function answering<Context, Input extends z.ZodType, Params extends z.ZodType, R
       const input = checked(route.input, route.input && (await receive(request)));
       const reply = route.answer(await route.handle(context, input, params), request);
       for (const cookie of visit.cookies) reply.headers.append('set-cookie', cookie);
+      // Also where the page that asked is closed before it can tidy up. Cookies are not named: a language stays chosen.
+      if (visit.forgets) reply.headers.set('clear-site-data', '"cache", "storage"');
       return reply;
     } catch (error) {
       return problemReply(error, { method: request.method, path: new URL(request.url).pathname }, language);

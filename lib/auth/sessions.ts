@@ -57,6 +57,9 @@ export type Sessions = {
   deleteExpired(): Promise<void>;
 };
 
+/** So long somebody stays signed in who comes back; then they sign in again. Whoever stays away is out sooner [ms]. */
+const LONGEST_SESSION = 90 * 24 * 3_600_000;
+
 /** How exactly it is known when somebody was there: no session is written at each request. */
 const seenWithin = 3_600_000;
 
@@ -95,9 +98,10 @@ export function sessionsOf(
       if (token === null) return null;
       const { session, user } = await lucia.validateSession(digest(token));
       if (session === null) return null;
-      const { id, userId, householdId, fresh, lastSeenAt } = session;
+      const { id, userId, householdId, fresh, startedAt, lastSeenAt } = session;
+      const isOver = startedAt === null || now.getTime() - startedAt.getTime() >= LONGEST_SESSION;
       // Somebody may have signed in in the very moment in which the account was deleted on another device.
-      if (user.deletedAt !== null) {
+      if (isOver || user.deletedAt !== null) {
         await lucia.invalidateSession(id);
         return null;
       }

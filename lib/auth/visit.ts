@@ -1,13 +1,15 @@
 import 'server-only';
 import { createHmac } from 'node:crypto';
 import { type Database, database } from '@/db/client';
-import { environment, now as wallClock } from '@/lib/env';
+import { sessionHousehold } from '@/db/queries/sessions';
+import { environment, now as wallClock, type TrustedProxies } from '@/lib/env';
 import { AppError } from '@/lib/errors';
 import type { Language } from '@/lib/schemas/languages';
 import { type HouseholdAccess, proveHousehold } from './household-access';
 import { deviceOf } from './device';
 import { type ListedSession, type SignedIn, sessionsOf } from './sessions';
 import { languageCookieOf, visitLanguage } from './visit-language';
+import { countedAddress, visitorAddress } from './visitor-address';
 
 /** One request, as services that know no household see it. */
 export type Visit = {
@@ -21,6 +23,8 @@ export type Visit = {
   leaveAll(personId: string): Promise<void>;
   /** Signs out on every device but this one, which gets another session. Nothing for nobody. */
   leaveElsewhere(): Promise<void>;
+  /** Another session for whoever is signed in, in the household it looks at by now; the one before is over. */
+  renew(): Promise<void>;
   /** Signs out on this device. */
   leave(): Promise<void>;
   /** Every device on which whoever is signed in is so, this one included. */
@@ -33,7 +37,7 @@ export type Visit = {
   speak(language: Language): void;
   /** Names something that is counted, such as an e-mail or the address of the visitor, without giving it away. */
   keyOf(what: string, value: string): string;
-  /** Network address, as far as it can be known. */
+  /** Network address, as far as it can be known: the socket's, unless proxies in front are trusted. */
   address: string;
 };
 
@@ -43,14 +47,24 @@ export type HouseholdVisit = { db: Database; access: HouseholdAccess; now: Date 
 export type HouseholdRequest = HouseholdVisit & { visit: Visit };
 
 /** A visit with the cookies it wants to set, for whoever writes the reply. */
-export type OpenVisit = Visit & { readonly cookies: readonly string[] };
+export type OpenVisit = Visit & {
+  readonly cookies: readonly string[];
+  /** Whether the device is to forget what it keeps: whoever was signed in on it is so no longer. */
+  readonly forgets: boolean;
+};
 
-type Surroundings = { db: Database; now: Date; secure: boolean; secret: string };
+type Surroundings = {
+  db: Database;
+  now: Date;
+  secure: boolean;
+  secret: string;
+  trustedProxies?: TrustedProxies | null;
+};
 
 /** Looks at the headers of a request, once: who is asking, and from where. */
 export async function openVisit(
   headers: Headers,
-  { db, now, secure, secret }: Surroundings = surroundings(),
+  { db, now, secure, secret, trustedProxies = null }: Surroundings = surroundings(),
 ): Promise<OpenVisit> {
   const sessions = sessionsOf(db, { secure, secret, now });
   const found = await sessions.find(headers.get('cookie'));
@@ -59,12 +73,11 @@ export async function openVisit(
     db,
     now,
     cookies,
+    forgets: false,
     signedIn: found?.signedIn ?? null,
     language: found?.language ?? visitLanguage(headers),
     speak: (language: Language) => void cookies.push(languageCookieOf(language, { secure })),
-    // A proxy in front appends the address it saw. Without one this can be what the visitor claims, so nothing that
-    // matters relies on it alone: sign-in is also limited by e-mail.
-    address: headers.get('x-forwarded-for')?.split(',').at(-1)?.trim() ?? 'unknown',
+    address: countedAddress(visitorAddress(headers, trustedProxies)),
     keyOf: (what: string, value: string) =>
       `${what} ${createHmac('sha256', secret).update(`${what} ${value}`).digest('base64url')}`,
     async enter(personId: string, householdId: string | null) {
@@ -79,6 +92,11 @@ export async function openVisit(
       await sessions.endAll(personId);
       await visit.enter(personId, householdId);
     },
+    async renew() {
+      const before = visit.signedIn;
+      if (!before) return;
+      await visit.enter(before.personId, await sessionHousehold(db, before.sessionId));
+    },
     leaveAll: (personId: string) => sessions.endAll(personId),
     devices: async () => (visit.signedIn ? sessions.list(visit.signedIn.personId) : []),
     async leaveOn({ sessionId }: ListedSession) {
@@ -88,14 +106,15 @@ export async function openVisit(
     async leave() {
       cookies.splice(0, cookies.length, await sessions.end(visit.signedIn?.sessionId ?? null));
       visit.signedIn = null;
+      visit.forgets = true;
     },
   };
   return visit;
 }
 
 function surroundings(): Surroundings {
-  const { secure, secret } = environment();
-  return { db: database(), now: wallClock(), secure, secret };
+  const { secure, secret, trustedProxies } = environment();
+  return { db: database(), now: wallClock(), secure, secret, trustedProxies };
 }
 
 /** Error: `signed-out` when nobody is signed in. */

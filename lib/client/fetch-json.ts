@@ -26,6 +26,9 @@ export class RequestProblem extends Error {
   }
 }
 
+/** Told to this page when the server no longer knows somebody, or no longer lets them do something. */
+export const refused = 'wadewell-refused';
+
 export type JsonRequest = {
   method?: 'GET' | 'POST' | 'PUT' | 'PATCH' | 'DELETE';
   body?: unknown;
@@ -65,7 +68,12 @@ export async function fetchJson<Form>(
   });
 
   const answer: unknown = response.status === 204 ? undefined : await response.json().catch(() => undefined);
-  if (!response.ok) throw problemOf(answer, address, response.status);
+  if (!response.ok) {
+    const problem = problemOf(answer, address, response.status);
+    if (problem.code === 'signed-out' || problem.code === 'not-allowed')
+      globalThis.dispatchEvent?.(new CustomEvent(refused, { detail: problem.code }));
+    throw problem;
+  }
   const known = await parser;
   try {
     return known.parse(answer);

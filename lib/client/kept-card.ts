@@ -1,6 +1,3 @@
-/** What the service worker names its store. */
-const kept = 'wadewell-emergency-card';
-
 /** So long after a page has come: the card is fetched with every file it names, and the page's own first seconds come first [ms]. */
 const A_WHILE = 10_000;
 
@@ -14,9 +11,4 @@ export function keepEmergencyCard(): void {
     // The next page tries again.
     if (navigator.onLine) navigator.serviceWorker.register('/sw.js').catch(() => undefined);
   }, A_WHILE);
-}
-
-/** Forgets the card as the person saw it who signs out: names stand on it. It is kept anew for whoever comes next. */
-export async function forgetEmergencyCard(): Promise<void> {
-  if ('caches' in globalThis) await caches.delete(kept);
 }

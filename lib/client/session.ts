@@ -12,7 +12,7 @@ import type {
 import type { NewHousehold } from '@/lib/schemas/household';
 import type { LanguageChoice } from '@/lib/schemas/language-choice';
 import { fetchJson, type ReplyParser } from './fetch-json';
-import { forgetEmergencyCard } from './kept-card';
+import { forgetDevice } from './forget-device';
 
 /**
  * Where to go after signing in or up: an address of our own, never another site's. Checked by hand, because the schema
@@ -61,7 +61,7 @@ export function makeHousehold(household: NewHousehold): Promise<Entered> {
 /** Deletes the account of whoever is signed in; they are signed out by it everywhere. */
 export async function deleteAccount(deletion: AccountDeletion): Promise<void> {
   await fetchJson('/api/account', nothing, { method: 'DELETE', body: deletion });
-  await forgetEmergencyCard();
+  await forgetDevice();
 }
 
 /** Another password; every other device is signed out by it. */
@@ -101,7 +101,7 @@ export async function signOutElsewhere(): Promise<void> {
 
 export async function signOut(): Promise<void> {
   await fetchJson('/api/sign-out', nothing, { method: 'POST' });
-  await forgetEmergencyCard();
+  await forgetDevice();
 }
 
 /** Speaks another language to whoever is signed in, on all of their devices. */

@@ -6,7 +6,7 @@ import type { Role } from '@/lib/schemas/week-sheet';
 
 /** What a mail is about. A link is one that only whoever reads the mail may know. */
 export type Letter =
-  | { about: 'confirm' | 'change' | 'reset'; name: string; link: string }
+  | { about: 'confirm' | 'change' | 'reset' | 'taken'; name: string; link: string }
   | { about: 'changes'; name: string; email: string }
   | { about: 'password'; name: string }
   | { about: 'passkey'; name: string; passkey: string }
@@ -47,6 +47,13 @@ function paperOf(letter: Letter, language: Language): Paper {
         after: [t(`${about}.until`), t('notYou')],
       };
     }
+    case 'taken':
+      return {
+        subject: t('taken.subject'),
+        before: [t('taken.words')],
+        action: { label: t('taken.action'), link: letter.link },
+        after: [t('taken.forgotten'), t('notYou')],
+      };
     case 'changes': {
       const { email } = letter;
       return {

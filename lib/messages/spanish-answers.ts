@@ -242,6 +242,10 @@ export const spanishAnswers: Readonly<Record<string, string>> = {
     'Solo los miembros que manejan los productos químicos, y han leído la tarjeta de seguridad esta temporada, pueden marcar dosis.',
   'Too many tries in a short time. Wait a quarter of an hour, then try again.':
     'Demasiados intentos en poco tiempo. Espera un cuarto de hora y vuelve a intentarlo.',
+  'Too many tries in a short time. Wait an hour, then try again.':
+    'Demasiados intentos en poco tiempo. Espera una hora y vuelve a intentarlo.',
+  'That was too often for one day. Try again tomorrow.':
+    'Fueron demasiadas veces para un día. Vuelve a intentarlo mañana.',
   'You are signed out. Sign in, then try again.': 'Tu sesión está cerrada. Entra y vuelve a intentarlo.',
   'This address answers {0} only.': 'Esta dirección solo responde a {0}.',
   'Send JSON, with the content type application/json.': 'Envía JSON, con el tipo de contenido application/json.',

@@ -77,4 +77,4 @@ export const acceptedInvitationSchema = openedLinkSchema;
 /** What somebody is told who opens the link of an invitation. */
 export type OpenedInvitation =
   | { state: 'open'; householdName: string; invitedBy: string | null; name: string; role: (typeof roles)[number] }
-  | { state: 'used' | 'withdrawn' | 'expired' | 'unknown' };
+  | { state: 'used' | 'withdrawn' | 'expired' | 'unknown' | 'too-often' };

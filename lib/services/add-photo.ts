@@ -3,11 +3,21 @@ import { writeAudit } from '@/db/queries/audit-trail';
 import { countPhotos, findPhoto, hasSubject, insertPhoto } from '@/db/queries/photos';
 import { inWriteTransaction } from '@/db/write';
 import { assertMay } from '@/lib/auth/permissions';
+import { countTry } from '@/lib/auth/rate-limit';
+import type { HouseholdRequest } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import { encodePhoto } from '@/lib/photos/encode-photo';
 import { MOST_DEMO_PHOTOS, MOST_PHOTOS, type NewPhoto, type Photo } from '@/lib/schemas/photo';
 import type { ServiceContext } from './context';
 import { showPhotos } from './show-photos';
+
+/** Keeps a photo that was sent, as often as pictures may be: each of them is work. Error: `too-many-requests`. */
+export async function receivePhoto(context: HouseholdRequest, photo: NewPhoto): Promise<Photo[]> {
+  const { visit, access } = context;
+  await countTry(visit, 'upload-person', access.personId);
+  await countTry(visit, 'upload-address', visit.address);
+  return addPhoto(context, photo);
+}
 
 /** Keeps a photo, encoded anew. Sent twice it is there once. */
 export async function addPhoto(

@@ -36,7 +36,8 @@ export async function changeEmail(
     }
     const { name, language } = account;
     const letter = { about: 'changes', name, email } as const;
-    await queueMail(tx, { letter, email: account.email, language, now, about: { personId } });
+    // An address that was only given may be somebody else's, whom it does not concern.
+    if (account.proven) await queueMail(tx, { letter, email: account.email, language, now, about: { personId } });
     const mute = (await findPersonByEmail(tx, systemScope('mail'), email)) !== null;
     await askForConfirmation(tx, { personId, name, email, language }, { purpose: 'change-email', now, mute });
   });

@@ -1,13 +1,14 @@
 import 'server-only';
-import type { Database, Transaction } from '@/db/client';
+import type { Transaction } from '@/db/client';
 import { consumeAccountLink, findAccountLink, insertAccountLink } from '@/db/queries/account-links';
-import { findAccount, setEmail, setEmailConfirmed } from '@/db/queries/people';
+import { findAccount, findPersonByEmail, setEmail, setEmailConfirmed } from '@/db/queries/people';
 import { inWriteTransaction } from '@/db/write';
 import { linkDigest, linkTo, newLinkToken } from '@/lib/auth/link-token';
-import { countTry } from '@/lib/auth/rate-limit';
+import { countTry, mayTry } from '@/lib/auth/rate-limit';
 import type { SignedIn } from '@/lib/auth/sessions';
 import { systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
+import { environment } from '@/lib/env';
 import { AppError } from '@/lib/errors';
 import type { Done } from '@/lib/schemas/account';
 import type { OpenedAccountLink } from '@/lib/schemas/account-link';
@@ -22,7 +23,7 @@ type Addressee = { personId: string; name: string; email: string; language: Lang
 
 /**
  * Asks whether an address is whose it should be: a link goes there, and nothing changes before it was opened. A mute one
- * looks the same to whoever asked, and nothing is sent.
+ * looks the same to whoever asked, and nothing is sent. Whoever has the address already is told so instead.
  */
 export async function askForConfirmation(
   tx: Transaction,
@@ -35,6 +36,13 @@ export async function askForConfirmation(
   const tokenDigest = linkDigest('confirm', token);
   await insertAccountLink(tx, { tokenDigest, personId, purpose, email, createdAt: now, expiresAt });
   if (mute) return;
+  const holder = purpose === 'confirm-email' ? await findPersonByEmail(tx, systemScope('mail'), email) : null;
+  if (holder && holder.id !== personId) {
+    // In the name of the holder's account: what somebody else calls themselves has no business in this mail.
+    const letter = { about: 'taken', name: holder.name, link: `${environment().origin}/sign-in` } as const;
+    await queueMail(tx, { letter, email, language: holder.language, now, about: { personId } });
+    return;
+  }
   const about = purpose === 'confirm-email' ? 'confirm' : 'change';
   const letter = { about, name, link: linkTo('confirm', token) } as const;
   await queueMail(tx, { letter, email, language, now, about: { personId } });
@@ -55,15 +63,14 @@ export async function askAgain({ db, now, keyOf, signedIn }: Visit & { signedIn:
 }
 
 /** What a link to confirm leads to, for whoever holds it. Opening the page changes nothing: mail programs open links, too. */
-export function openConfirmation(context: { db: Database; now: Date }, token: string): Promise<OpenedAccountLink> {
-  return openLink(context, linkDigest('confirm', token));
+export function openConfirmation(visit: Visit, token: string): Promise<OpenedAccountLink> {
+  return openLink(visit, linkDigest('confirm', token));
 }
 
 /** What a link from a mail leads to. */
-export async function openLink(
-  { db, now }: { db: Database; now: Date },
-  tokenDigest: string,
-): Promise<OpenedAccountLink> {
+export async function openLink(visit: Visit, tokenDigest: string): Promise<OpenedAccountLink> {
+  const { db, now } = visit;
+  if (!(await mayTry(visit, 'link-address', visit.address))) return { state: 'too-often' };
   const link = await findAccountLink(db, systemScope('mail'), tokenDigest);
   if (!link) return { state: 'unknown' };
   if (link.usedAt) return { state: 'used' };
@@ -72,7 +79,9 @@ export async function openLink(
 }
 
 /** Somebody says that the address to which the link went is theirs. */
-export async function confirmEmail({ db, now }: Visit, { token }: { token: string }): Promise<Done> {
+export async function confirmEmail(visit: Visit, { token }: { token: string }): Promise<Done> {
+  const { db, now } = visit;
+  await countTry(visit, 'link-address', visit.address);
   await inWriteTransaction(db, async (tx) => {
     const link = await consumeAccountLink(tx, systemScope('mail'), {
       tokenDigest: linkDigest('confirm', token),
@@ -80,8 +89,11 @@ export async function confirmEmail({ db, now }: Visit, { token }: { token: strin
     });
     if (!link) throw new AppError('conflict', 'This link is used, over or not known. Ask for another mail.');
     const { personId, email, purpose } = link;
-    if (purpose === 'confirm-email') return setEmailConfirmed(tx, { personId, email, at: now });
-    if ((await setEmail(tx, { personId, email, confirmedAt: now })) === 'taken')
+    const outcome =
+      purpose === 'confirm-email'
+        ? await setEmailConfirmed(tx, { personId, email, at: now })
+        : await setEmail(tx, { personId, email, confirmedAt: now });
+    if (outcome === 'taken')
       throw new AppError('conflict', 'Another account has this address by now. Nothing was changed.');
   });
   return { done: true };

@@ -6,6 +6,8 @@ import { withdrawMails } from '@/db/queries/outgoing-mails';
 import { inWriteTransaction } from '@/db/write';
 import { linkDigest, linkTo, newLinkToken } from '@/lib/auth/link-token';
 import { assertMay } from '@/lib/auth/permissions';
+import { countTry } from '@/lib/auth/rate-limit';
+import type { HouseholdRequest } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
 import type { HouseholdPeople, NewInvitation, SentInvitation } from '@/lib/schemas/member';
 import type { ServiceContext } from './context';
@@ -16,6 +18,18 @@ import { showPeople } from './show-people';
 const OPEN_FOR = 7 * 24 * 3_600_000;
 /** A family is no more; a list of strangers would be. */
 const MOST_OPEN = 20;
+
+/** Asks somebody to join, so often a day and no more. Error: `too-many-requests`. */
+export async function sendInvitation(context: HouseholdRequest, invitation: NewInvitation): Promise<SentInvitation> {
+  await countTry(context.visit, 'invite-person', context.access.personId);
+  return invite(context, invitation);
+}
+
+/** Another link, counted like the first. Error: `too-many-requests`. */
+export async function sendInvitationAgain(context: HouseholdRequest, which: { id: string }): Promise<SentInvitation> {
+  await countTry(context.visit, 'invite-person', context.access.personId);
+  return inviteAgain(context, which);
+}
 
 /**
  * Asks somebody to join. Sent by mail, the link is known to whoever reads that mail alone; else it is told this once: of it

@@ -8,6 +8,7 @@ import { findPasswordHash } from '@/db/queries/people';
 import { chooseSessionHousehold } from '@/db/queries/sessions';
 import { inWriteTransaction } from '@/db/write';
 import { linkDigest } from '@/lib/auth/link-token';
+import { countTry, mayTry } from '@/lib/auth/rate-limit';
 import type { SignedIn } from '@/lib/auth/sessions';
 import { householdOfSystem, systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
@@ -18,6 +19,13 @@ import type { OpenedInvitation } from '@/lib/schemas/member';
 
 type PersonContext = { db: Database; now: Date; signedIn: SignedIn };
 
+/** What the link of an invitation leads to, for a page; an address that opens many is told so. */
+export async function seeInvitation(visit: Visit, token: string): Promise<OpenedInvitation> {
+  return (await mayTry(visit, 'invitation-address', visit.address))
+    ? openInvitation(visit, token)
+    : { state: 'too-often' };
+}
+
 /** What the link of an invitation leads to, for whoever holds it. */
 export async function openInvitation({ db, now }: Visit, token: string): Promise<OpenedInvitation> {
   const found = await findInvitation(db, systemScope('invitation'), linkDigest('invitation', token));
@@ -27,6 +35,17 @@ export async function openInvitation({ db, now }: Visit, token: string): Promise
   if (found.expiresAt.getTime() <= now.getTime()) return { state: 'expired' };
   const { householdName, invitedBy, name, role } = found;
   return { state: 'open', householdName, invitedBy, name, role };
+}
+
+/** Joins the household of an invitation by a session of its own: what may be done on this device has changed. */
+export async function acceptInvitation(
+  visit: Visit & { signedIn: SignedIn },
+  { token }: { token: string },
+): Promise<Entered> {
+  await countTry(visit, 'invitation-address', visit.address);
+  const joined = await joinHousehold(visit, { token });
+  await visit.renew();
+  return joined;
 }
 
 /** Joins the household of an invitation, and looks at it from now on. */

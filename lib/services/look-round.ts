@@ -6,6 +6,7 @@ import { countDemoCopies, deleteExpiredDemoCopies, insertHousehold } from '@/db/
 import { insertMembership, listValidMemberships } from '@/db/queries/memberships';
 import { insertPerson } from '@/db/queries/people';
 import { inWriteTransaction } from '@/db/write';
+import { countTry } from '@/lib/auth/rate-limit';
 import { householdOfSystem, systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
 import { AppError } from '@/lib/errors';
@@ -19,11 +20,13 @@ const copyLastsFor = 24 * 3_600_000;
 
 /**
  * Opens a private copy of the demo household on this device, without an account: writable, gone after 24 hours. Whoever
- * looks round already keeps their copy. Error: `too-many-requests` while 200 of them are in use.
+ * looks round already keeps their copy. Error: `too-many-requests` while 200 of them are in use, and for an address that
+ * opened many.
  */
 export async function lookRound(visit: Visit): Promise<Entered> {
   const next = '/week';
   if (await looksRoundAlready(visit)) return { next };
+  await countTry(visit, 'look-round-address', visit.address);
   const { db, now } = visit;
   const original = await seedDemo(db, now);
   const scope = systemScope('seed-demo');

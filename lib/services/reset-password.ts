@@ -1,7 +1,14 @@
 import 'server-only';
 import type { Database } from '@/db/client';
 import { consumeAccountLink, endAccountLinks, insertAccountLink } from '@/db/queries/account-links';
-import { findAccount, findPersonByEmail, setEmailConfirmed, setPasswordHash } from '@/db/queries/people';
+import { deletePasskeysOf } from '@/db/queries/passkeys';
+import {
+  findAccount,
+  findPersonByEmail,
+  findUnprovenByEmail,
+  setEmailConfirmed,
+  setPasswordHash,
+} from '@/db/queries/people';
 import { inWriteTransaction } from '@/db/write';
 import { linkDigest, linkTo, newLinkToken } from '@/lib/auth/link-token';
 import { hashPassword, isCommonPassword } from '@/lib/auth/passwords';
@@ -33,7 +40,8 @@ export async function requestReset(visit: Visit, { email }: ResetRequest): Promi
 
 /** The mail goes to the address of the account, not to what was typed: the two could differ in what only looks alike. */
 export async function sendResetLink({ db, now }: { db: Database; now: Date }, typed: string): Promise<void> {
-  const person = await findPersonByEmail(db, systemScope('mail'), typed);
+  const scope = systemScope('mail');
+  const person = (await findPersonByEmail(db, scope, typed)) ?? (await findUnprovenByEmail(db, scope, typed));
   if (!person?.email) return;
   const { id: personId, name, email, language } = person;
   const token = newLinkToken();
@@ -48,8 +56,8 @@ export async function sendResetLink({ db, now }: { db: Database; now: Date }, ty
 }
 
 /** What a link to another password leads to, for whoever holds it. */
-export function openReset(context: { db: Database; now: Date }, token: string): Promise<OpenedAccountLink> {
-  return openLink(context, linkDigest('reset', token));
+export function openReset(visit: Visit, token: string): Promise<OpenedAccountLink> {
+  return openLink(visit, linkDigest('reset', token));
 }
 
 /** Another password, for whoever reads the mail of the account; every device is signed out by it. */
@@ -68,6 +76,8 @@ export async function resetPassword(visit: Visit, { token, password }: PasswordR
     });
     if (!link) throw new AppError('conflict', 'This link is used, over or not known. Ask for another mail.');
     await setPasswordHash(tx, link.personId, passwordHash);
+    // Somebody else may have made this account with an address that is not theirs: no passkey of it lets them in again.
+    if ((await findAccount(tx, link.personId))?.proven === false) await deletePasskeysOf(tx, link.personId);
     await setEmailConfirmed(tx, { personId: link.personId, email: link.email, at: now });
     // Whoever took the account over may have asked for another address already.
     await endAccountLinks(tx, link.personId, ['change-email', 'reset-password']);

@@ -4,7 +4,7 @@ import { listKeptMails } from '@/db/queries/outgoing-mails';
 import { systemScope } from '@/lib/auth/system-scope';
 import type { Visit } from '@/lib/auth/visit';
 import { environment } from '@/lib/env';
-import { countTry } from '@/lib/auth/rate-limit';
+import { countTry, isUsedUp } from '@/lib/auth/rate-limit';
 
 export type KeptMail = { id: string; email: string; subject: string; text: string; html: string; createdAt: string };
 
@@ -23,9 +23,10 @@ export function announceMailbox(): void {
   if (hasMailbox()) process.stdout.write(`\nMail is kept at ${environment().origin}/mailbox?key=${mailboxKey()}\n`);
 }
 
-/** The mail of this machine for whoever has the key, the newest first; null for anybody else. Error: `too-many-requests`. */
+/** The mail of this machine for whoever has the key, the newest first; null for anybody else, and after too many tries. */
 export async function showMailbox(visit: Visit, key: string | undefined): Promise<KeptMail[] | null> {
   if (!hasMailbox() || key === undefined) return null;
+  if (await isUsedUp(visit, 'mailbox-address', visit.address)) return null;
   if (!isSame(key, mailboxKey())) {
     await countTry(visit, 'mailbox-address', visit.address);
     return null;

@@ -1,6 +1,6 @@
 import 'server-only';
 import { listValidMemberships } from '@/db/queries/memberships';
-import { findPersonByEmail } from '@/db/queries/people';
+import { findPersonByEmail, findUnprovenByEmail } from '@/db/queries/people';
 import { verifyPassword } from '@/lib/auth/passwords';
 import { countTry, forgetTries } from '@/lib/auth/rate-limit';
 import { systemScope } from '@/lib/auth/system-scope';
@@ -13,10 +13,12 @@ export async function signIn(visit: Visit, { email, password }: SignIn): Promise
   await countTry(visit, 'sign-in-address', visit.address);
   await countTry(visit, 'sign-in-email', email);
   const { db } = visit;
-  const person = await findPersonByEmail(db, systemScope('sign-in'), email);
-  const matches = await verifyPassword(person?.passwordHash ?? null, password);
-  if (!person || !matches)
-    throw new AppError('wrong-sign-in', 'This e-mail address and this password do not go together.');
+  const scope = systemScope('sign-in');
+  // Whoever has the address, and whoever only gave it: the same work for both, and where there is neither.
+  const candidates = [await findPersonByEmail(db, scope, email), await findUnprovenByEmail(db, scope, email)];
+  const matches = await Promise.all(candidates.map((each) => verifyPassword(each?.passwordHash ?? null, password)));
+  const person = candidates.find((_, at) => matches[at]);
+  if (!person) throw new AppError('wrong-sign-in', 'This e-mail address and this password do not go together.');
 
   await forgetTries(visit, 'sign-in-email', email);
   return enterAs(visit, person.id);

@@ -115,7 +115,8 @@ describe('signing in and out', () => {
     for (let tries = 0; tries < 10; tries += 1) expect((await signIn('slow@pool.example', 'wrong')).status).toBe(401);
     const refused = await signIn('slow@pool.example');
     expect(refused.status).toBe(429);
-    expect(refused.headers.get('retry-after')).toBe('900');
+    const wait = Number(refused.headers.get('retry-after'));
+    expect(wait > 800 && wait <= 900).toBe(true);
     expect((await signIn('lena@pool.example')).status).toBe(200);
   });
 });

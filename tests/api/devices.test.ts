@@ -74,8 +74,11 @@ describe('the list of devices', () => {
     await isIn(cookie);
     expect((await seen())?.getTime()).toBeGreaterThan(Date.now() - 60_000);
     // As one that began before this was kept.
-    await db.update(sessions).set({ lastSeenAt: null, startedAt: null, device: null }).where(mine);
-    expect(await devicesOf(cookie)).toMatchObject([{ device: null, startedAt: null, lastSeenAt: expect.any(String) }]);
+    await db.update(sessions).set({ lastSeenAt: null, device: null }).where(mine);
+    expect(await devicesOf(cookie)).toMatchObject([{ device: null, lastSeenAt: expect.any(String) }]);
+    // Without a beginning nobody knows how long it has run.
+    await db.update(sessions).set({ startedAt: null }).where(mine);
+    expect(await isIn(cookie)).toBe(false);
   });
 });
 

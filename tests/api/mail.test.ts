@@ -89,6 +89,55 @@ describe('an address', () => {
   });
 });
 
+describe('an address that somebody has', () => {
+  const other = 'heron over the mill';
+  const signUpAgain = async (email: string) => {
+    const pool = { householdName: 'Heron', timeZone: 'Europe/Madrid', unitSystem: 'metric', locale: 'en-US' };
+    const body = { name: 'Click http://elsewhere.example', email, password: other, ...pool };
+    return call('POST', '/api/sign-up', { body });
+  };
+
+  it('is told by mail alone, to whoever has it, without a word of whoever asked', async () => {
+    const as = await confirmed('has@pool.example');
+    const again = await signUpAgain('has@pool.example');
+    expect([again.status, await again.json()]).toEqual([200, { next: '/first-run' }]);
+    const { text } = await mailTo('has@pool.example', /You have an account/);
+    expect(text).toContain('Hello Ines,');
+    expect(text).toContain('/sign-in');
+    expect(text).not.toMatch(/elsewhere|\/confirm\//);
+    // Both passwords lead to the account that they belong to, and the first is untouched.
+    const entered = async (secret: string) => account(cookie(await signIn('has@pool.example', secret)));
+    expect(await entered(password)).toMatchObject({ email: 'has@pool.example', confirmed: true });
+    expect(await entered(other)).toMatchObject({ email: 'has@pool.example', confirmed: false });
+    expect(await account(as)).toMatchObject({ confirmed: true });
+  });
+
+  it('is nobody else’s to take: a forgotten password is replaced for whoever showed that it is theirs', async () => {
+    await confirmed('owns@pool.example');
+    await signUpAgain('owns@pool.example');
+    await call('POST', '/api/password-resets', { body: { email: 'owns@pool.example' } });
+    const { token } = await mailTo('owns@pool.example', /\/reset\//);
+    await call('PUT', '/api/password-resets', { body: { token, password: 'a third one for good measure' } });
+    expect((await signIn('owns@pool.example', 'a third one for good measure')).status).toBe(200);
+    const first = cookie(await signIn('owns@pool.example', 'a third one for good measure'));
+    expect(await account(first)).toMatchObject({ confirmed: true });
+  });
+
+  it('goes to the first of two who shows it; the second is told at the link', async () => {
+    const first = await signUp('both@pool.example');
+    const one = await mailTo('both@pool.example', /\/confirm\//);
+    const second = cookie(await signUpAgain('both@pool.example'));
+    await expect.poll(async () => (await mailTo('both@pool.example', /\/confirm\//)).token).not.toBe(one.token);
+    const two = await mailTo('both@pool.example', /\/confirm\//);
+    expect((await confirm(two.token)).status).toBe(200);
+    const late = await confirm(one.token);
+    expect(late.status).toBe(409);
+    expect(await late.json()).toMatchObject({ error: { message: expect.stringContaining('Another account') } });
+    expect(await account(second)).toMatchObject({ confirmed: true });
+    expect(await account(first)).toMatchObject({ confirmed: false });
+  });
+});
+
 describe('another address', () => {
   const change = (as: string, email: string, current = password) =>
     call('PUT', '/api/account/email', { cookie: as, body: { current, email } });
@@ -129,6 +178,9 @@ describe('another address', () => {
     await change(as, 'race@pool.example');
     const { token } = await mailTo('race@pool.example', /\/confirm\//);
     await signUp('race@pool.example');
+    const newest = async () => (await mailTo('race@pool.example', /\/confirm\//)).token;
+    await expect.poll(newest).not.toBe(token);
+    expect((await confirm(await newest())).status).toBe(200);
     const refused = await confirm(token);
     expect(refused.status).toBe(409);
     expect(await refused.json()).toMatchObject({ error: { message: expect.stringContaining('Another account') } });

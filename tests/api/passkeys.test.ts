@@ -7,6 +7,7 @@ import { userHandleOf } from '@/lib/auth/passkeys';
 import { systemScope } from '@/lib/auth/system-scope';
 import type { PasskeyCreation, PasskeyList, PasskeyRequest, PasskeySignIn } from '@/lib/schemas/passkey';
 import { call, cookieOf, serveFreshDatabase } from '@/tests/support/api';
+import { socketHeader, socketNote } from '@/lib/auth/visitor-address';
 import { SoftwareAuthenticator } from '@/tests/support/software-authenticator';
 
 const origin = 'http://localhost:3000';
@@ -285,7 +286,7 @@ describe('signing in with a passkey', () => {
   });
 
   it('is slowed down for an address that tries without end', async () => {
-    const headers = { 'x-forwarded-for': '203.0.113.9' };
+    const headers = { [socketHeader]: socketNote('203.0.113.9') };
     const statuses: number[] = [];
     for (let tried = 0; tried < 201; tried += 1)
       statuses.push((await call('POST', '/api/sign-in/passkey/options', { headers })).status);

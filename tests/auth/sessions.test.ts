@@ -49,6 +49,32 @@ describe('the cookie of a session', () => {
     expect(await sessionsOf(db, { ...settings, secret: `${secret}!` }).find(`wadewell=${token}`)).toBeNull();
   });
 
+  it('ends after ninety days, however often somebody comes back', async () => {
+    const db = freshDatabase();
+    const { personId } = await aHousehold(db);
+    const began = new Date('2026-07-05T12:00:00Z');
+    const at = (days: number) =>
+      sessionsOf(db, { ...over('http://127.0.0.1:3000'), now: new Date(began.getTime() + days * 24 * 3_600_000) });
+    const { cookie } = await at(0).start(personId, null);
+    for (const days of [1, 30, 60, 89.9]) expect(await at(days).find(cookieOf(cookie))).not.toBeNull();
+    expect(await at(90).find(cookieOf(cookie))).toBeNull();
+    expect(await at(1).find(cookieOf(cookie))).toBeNull();
+  });
+
+  it('ends after thirty days in which nobody came, and is prolonged for who comes in the second half of them', async () => {
+    const db = freshDatabase();
+    const { personId } = await aHousehold(db);
+    const kept = sessionsOf(db, over('http://127.0.0.1:3000'));
+    const { cookie } = await kept.start(personId, null);
+    const in_ = (days: number) => db.update(sessions).set({ expiresAt: Math.floor(Date.now() / 1000 + days * 86_400) });
+    await in_(14);
+    expect((await kept.find(cookieOf(cookie)))?.prolonged).toContain('wadewell=');
+    const [row] = await db.select().from(sessions);
+    expect(Math.round((row!.expiresAt - Date.now() / 1000) / 86_400)).toBe(30);
+    await in_(-0.01);
+    expect(await kept.find(cookieOf(cookie))).toBeNull();
+  });
+
   it('over plain http is not taken for one over https', async () => {
     const db = freshDatabase();
     const { personId } = await aHousehold(db);

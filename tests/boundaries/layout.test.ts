@@ -5,7 +5,19 @@ import { root } from './planted-tree';
 import { sourceFiles } from './source-files';
 
 const topLevel = [
-  ...['app', 'components', 'db', 'drizzle', 'lib', 'public', 'tests', 'README.md', 'DEVELOPERS.md', 'package.json'],
+  ...[
+    'app',
+    'components',
+    'db',
+    'docs',
+    'drizzle',
+    'lib',
+    'public',
+    'tests',
+    'README.md',
+    'DEVELOPERS.md',
+    'package.json',
+  ],
   ...['drizzle.config.ts', 'next.config.mjs', 'postcss.config.mjs', 'tailwind.config.ts'],
   // What the tools require.
   ...[

@@ -94,6 +94,7 @@ export function makeProject() {
     JSON.stringify({ unit: { statuses: ['passed', 'passed'] }, component: { statuses: ['passed'] } }),
   );
   write('tests/e2e/run.ts', "console.log('E2E 3 passed, 0 failed');");
+  write('tests/packages/browser-run.ts', "console.log('BROWSER 2 passed, 0 failed');");
   write('tests/bench/run.ts', "console.log('BENCH 2 passed, 0 failed');");
   write('scenario.json', 'a pool');
 

@@ -21,9 +21,9 @@ function closingLine({ out }: Finished): string {
 }
 
 describe('a test run', () => {
-  it('adds up what passed: five checks, three tests, two benchmarks, three runs in the browser', async () => {
+  it('adds up what passed: five checks, three tests, two files for browsers, two benchmarks, three runs in the browser', async () => {
     const run = await project.run(['test']);
-    expect(closingLine(run)).toBe('13 passed, 0 failed');
+    expect(closingLine(run)).toBe('15 passed, 0 failed');
     expect(run.code).toBe(0);
     expect(run.out).toContain('reference: a table of unit');
   });
@@ -38,7 +38,7 @@ describe('a test run', () => {
     project.write('break-the-build', '');
     project.write('vitest-results.json', JSON.stringify({ unit: { exit: 134 }, component: { statuses: ['passed'] } }));
     const run = await project.run(['test'], { env: { CHROMIUM_PATH: '/nowhere/chromium' } });
-    expect(closingLine(run)).toBe('7 passed, 3 failed');
+    expect(closingLine(run)).toBe('9 passed, 3 failed');
     expect(run.code).toBe(1);
     expect(run.out).toContain('The build did not succeed');
     expect(run.out).toContain(
@@ -49,7 +49,7 @@ describe('a test run', () => {
   it('counts every stage when nothing could be installed', async () => {
     project.write('packages.json', 'no json');
     const run = await project.run(['test']);
-    expect(closingLine(run)).toBe('0 passed, 9 failed');
+    expect(closingLine(run)).toBe('0 passed, 10 failed');
     expect(run.code).toBe(1);
   });
 
@@ -61,7 +61,7 @@ describe('a test run', () => {
     child.kill('SIGINT');
     const run = await ended;
     // All but lint had passed, which was cut off; benchmarks and browser never began.
-    expect(closingLine(run)).toBe('7 passed, 3 failed');
+    expect(closingLine(run)).toBe('9 passed, 3 failed');
     expect(run.code).toBe(130);
   });
 });

@@ -187,7 +187,7 @@ describe('a command that does not exist', () => {
     const { code, err } = await project.run(['strat']);
     expect(code).toBe(2);
     expect(err).toBe(
-      'There is no command "strat". There are: start, dev, build, test, verify, plan, bench, mutants, shots, audit.\n',
+      'There is no command "strat". There are: start, dev, build, test, verify, plan, bench, mutants, shots, audit, licences, audit:packages.\n',
     );
   });
 });

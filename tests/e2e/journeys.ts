@@ -14,6 +14,7 @@ import { lateCode } from './journeys/late-code';
 import { leaving } from './journeys/leaving';
 import { learning } from './journeys/learning';
 import { lookRound } from './journeys/look-round';
+import { limits } from './journeys/limits';
 import { looks } from './journeys/looks';
 import { mail } from './journeys/mail';
 import { measures } from './journeys/measures';
@@ -61,6 +62,7 @@ export const journeys: readonly Journey[] = [
   leaving,
   handOver,
   passkeys,
+  limits,
   photos,
   choosingLanguage,
   landing,

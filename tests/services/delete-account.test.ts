@@ -293,7 +293,7 @@ describe('closing a household', () => {
     }
     const left = tables.filter((table) => !reached.has(table)).map((table) => getTableConfig(table).name);
     expect(left.sort()).toEqual([
-      ...['account_links', 'passkey_challenges', 'passkeys', 'people', 'rate_limits', 'sessions'],
+      ...['account_links', 'passkey_challenges', 'passkeys', 'people', 'rate_limits', 'sessions', 'unproven_accounts'],
     ]);
   });
 

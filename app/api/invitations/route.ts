@@ -1,8 +1,13 @@
 import { methods } from '@/lib/api/methods';
 import { householdRoute } from '@/lib/api/routes';
 import { newInvitationSchema, sentInvitationSchema } from '@/lib/schemas/member';
-import { invite } from '@/lib/services/invite';
+import { sendInvitation } from '@/lib/services/invite';
 
 export const { GET, POST, PUT, PATCH, DELETE } = methods({
-  POST: householdRoute({ may: 'invite', input: newInvitationSchema, reply: sentInvitationSchema, handle: invite }),
+  POST: householdRoute({
+    may: 'invite',
+    input: newInvitationSchema,
+    reply: sentInvitationSchema,
+    handle: sendInvitation,
+  }),
 });

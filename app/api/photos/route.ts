@@ -1,7 +1,7 @@
 import { methods } from '@/lib/api/methods';
 import { householdRoute, uploadRoute } from '@/lib/api/routes';
 import { MOST_PHOTO_BYTES, newPhotoSchema, photosSchema } from '@/lib/schemas/photo';
-import { addPhoto } from '@/lib/services/add-photo';
+import { receivePhoto } from '@/lib/services/add-photo';
 import { showPhotos } from '@/lib/services/show-photos';
 
 export const { GET, POST, PUT, PATCH, DELETE } = methods({
@@ -11,6 +11,6 @@ export const { GET, POST, PUT, PATCH, DELETE } = methods({
     most: MOST_PHOTO_BYTES,
     input: newPhotoSchema,
     reply: photosSchema,
-    handle: addPhoto,
+    handle: receivePhoto,
   }),
 });

@@ -1,4 +1,4 @@
-import { readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { buildStamp } from './build-stamp.mjs';
 import { runStep } from './child.mjs';
@@ -24,8 +24,16 @@ export async function buildIfStale(folder, { force = false } = {}) {
     env: { ...process.env, NODE_ENV: 'production', NEXT_DIST_DIR: folder, NEXT_TELEMETRY_DISABLED: '1' },
     stdio: ['ignore', process.stderr, process.stderr],
   });
+  leaveOutSources(folder);
   // Next.js empties the folder before it builds, so a stamp stands only beside a build that was finished.
   writeFileSync(stamp, wanted);
+}
+
+/** Of each thread's first file the bundler also lays the source, which nothing fetches, among what browsers may. */
+function leaveOutSources(folder) {
+  const media = inRoot(folder, 'static', 'media');
+  if (!existsSync(media)) return;
+  for (const name of readdirSync(media)) if (name.endsWith('.ts')) rmSync(join(media, name));
 }
 
 const isBuilt = (folder) => readOrNothing(join(inRoot(folder), 'BUILD_ID')) !== undefined;

@@ -29,6 +29,9 @@ export const countEndToEnd = countSaid('E2E');
 /** The benchmarks do the same: one for each piece. */
 export const countBenchmarks = countSaid('BENCH');
 
+/** So does the look through what browsers fetch: one for each file. */
+export const countReachedBrowser = countSaid('BROWSER');
+
 /** Reads "WORD 3 passed, 1 failed". */
 function countSaid(word) {
   const summary = new RegExp(`^${word} (\\d+) passed, (\\d+) failed$`);

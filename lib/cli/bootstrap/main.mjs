@@ -10,7 +10,10 @@ import { Interruption, Refusal } from './refusal.mjs';
 import { dev, start } from './serve.mjs';
 import { test, verify } from './suite.mjs';
 
-const commands = { start, dev, build, test, verify, plan, bench, mutants, shots, audit };
+const commands = {
+  ...{ start, dev, build, test, verify, plan, bench, mutants, shots, audit, licences },
+  'audit:packages': auditPackages,
+};
 
 /** Runs one command; its exit code becomes ours. */
 export async function run(name, args) {
@@ -71,6 +74,18 @@ async function audit(args) {
   const CHROMIUM_PATH = await ensureChromium();
   await withLock('build', () => buildIfStale(testFolder));
   return runTypescript('tests/audit/run.ts', args, { env: { CHROMIUM_PATH, NEXT_DIST_DIR: testFolder } });
+}
+
+/** Known faults of the packages that production installs, where the registry answers. */
+async function auditPackages(args) {
+  await ensureDependencies();
+  return runTypescript('tests/packages/audit-run.ts', args);
+}
+
+/** Writes the list of licences anew. */
+async function licences(args) {
+  await ensureDependencies();
+  return runTypescript('tests/packages/licences-run.ts', args);
 }
 
 async function runTypescript(file, args, { cwd, env, node = [] } = {}) {

@@ -2,7 +2,7 @@ import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { nextProgram } from './build.mjs';
 import { roomOfTheEngine, typescriptEnvironment, typescriptLoader } from './child.mjs';
-import { countBenchmarks, countEndToEnd, countVitest, oneCheck } from './counting.mjs';
+import { countBenchmarks, countEndToEnd, countReachedBrowser, countVitest, oneCheck } from './counting.mjs';
 import { inRoot, testFolder, workFolder } from './place.mjs';
 
 /**
@@ -112,6 +112,15 @@ export const build = {
   programs: [[inRoot('lib/cli/bootstrap.mjs'), 'build']],
   env: { NEXT_DIST_DIR: testFolder },
   count: oneCheck,
+};
+
+/** Whether server code or a secret stands in a file that browsers fetch; one check for each file. */
+export const reachedBrowser = {
+  name: 'browser code',
+  minutes: 2,
+  programs: [[...typescriptLoader, inRoot('tests/packages/browser-run.ts')]],
+  env: { NEXT_DIST_DIR: testFolder, ...typescriptEnvironment },
+  count: countReachedBrowser,
 };
 
 /** Whether any piece of the engine has become slower than its committed ratio allows; one check for each piece. */

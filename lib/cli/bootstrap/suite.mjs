@@ -12,7 +12,7 @@ import * as stage from './stages.mjs';
 export function test() {
   return runSuite([
     [
-      [stage.build, stage.component, stage.lint],
+      [stage.build, stage.reachedBrowser, stage.component, stage.lint],
       // The types of the routes are written into the folder of the build, which is long done after the units.
       [stage.unit, stage.types, stage.formatting, stage.boundaries],
     ],

@@ -32,3 +32,16 @@ it('stays and says so when the server does not answer', async () => {
   expect(await screen.findByRole('alert')).toHaveTextContent('There is no connection to Wadewell.');
   expect(leaveFor).not.toHaveBeenCalled();
 });
+
+it('says once that something is not sent yet, and goes when it is pressed again', async () => {
+  localStorage.setItem('wadewell.unsent-ticks.ines', '[{"tick":1}]');
+  const answer = vi.fn<typeof fetch>(() => Promise.resolve(Response.json({ done: true })));
+  vi.stubGlobal('fetch', answer);
+  renderWithWords(<SignOutButton />);
+  await userEvent.click(screen.getByRole('button', { name: 'Sign out' }));
+  expect(await screen.findByRole('alert')).toHaveTextContent('has not been sent yet');
+  expect(answer).not.toHaveBeenCalled();
+  await userEvent.click(screen.getByRole('button', { name: 'Sign out' }));
+  await waitFor(() => expect(leaveFor).toHaveBeenCalledWith('/'));
+  expect(localStorage.getItem('wadewell.unsent-ticks.ines')).toBeNull();
+});

@@ -3,6 +3,7 @@ import { appendFileSync, copyFileSync, rmSync, writeFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { join } from 'node:path';
 import { buildFolder, inRoot, root, runFolder } from './place';
+import { serverSecret } from './server-secret';
 import { until } from './waiting';
 
 export type ServerOptions = {
@@ -22,7 +23,7 @@ export type ServerOptions = {
 
 /** The wrong zone on purpose: a server that tells hours by its own machine is caught. */
 const machineZone = 'Asia/Kathmandu';
-export const serverSecret = 'a secret of the end-to-end tests and of nothing else';
+export { serverSecret };
 
 /** A production server of the build under test, on a free port, with a database of its own. */
 export class Server {

@@ -5,7 +5,7 @@ import { InvitationForm } from '@/components/start/invitation-form';
 import { findHousehold, openPageVisit } from '@/lib/auth/page-gate';
 import { ClientMessages } from '@/lib/messages/client-messages';
 import { shortestPassword } from '@/lib/schemas/account';
-import { openInvitation } from '@/lib/services/join-household';
+import { seeInvitation } from '@/lib/services/join-household';
 
 export async function generateMetadata(): Promise<Metadata> {
   const t = await getTranslations('invitation');
@@ -17,7 +17,7 @@ export default async function InvitationPage({ params }: { params: Promise<{ tok
   const { token } = await params;
   const t = await getTranslations('invitation');
   const visit = await openPageVisit();
-  const opened = await openInvitation(visit, token);
+  const opened = await seeInvitation(visit, token);
   if (opened.state !== 'open')
     return (
       <EntryPage title={t(`over.${opened.state}`)} lead={t('overWords')}>
