@@ -9,14 +9,19 @@ const ranks: Record<Role, number> = { viewer: 0, caretaker: 1, owner: 2 };
 
 /**
  * Compares who uses this device now with who did: when it is somebody else, or a household or a role is gone, what was kept
- * for it is forgotten. Somebody who is only signed out finds again what they could not send.
+ * for it is forgotten. What somebody could not send is forgotten with it only when it is somebody else, or they belong nowhere
+ * any more: a dose that was given and is lost here would be given twice.
  */
 export async function settleDevice(now: DeviceOwner): Promise<void> {
   const before = keptOwner();
-  if (before !== null && hasLost(before, now)) await forgetDevice({ keepUnsent: now === null });
+  if (before !== null && hasLost(before, now)) await forgetDevice({ keepUnsent: mayStillSend(before, now) });
   // After somebody was signed out their name is kept as long as something of theirs waits.
   if (now !== null || before === null) keepOwner(now);
   else keepOwner(before);
+}
+
+function mayStillSend(before: NonNullable<DeviceOwner>, now: DeviceOwner): boolean {
+  return now === null || (now.personId === before.personId && now.households.length > 0);
 }
 
 function hasLost(before: NonNullable<DeviceOwner>, now: DeviceOwner): boolean {

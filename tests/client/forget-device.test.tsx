@@ -47,6 +47,7 @@ beforeEach(() => {
 afterEach(() => vi.unstubAllGlobals());
 
 const everything = [...unsent, ...ofTheHousehold, 'of another program'].toSorted();
+const whatWaits = [...unsent, 'of another program'].toSorted();
 
 it('forgets all that a person and a household left here, and nothing of another program', async () => {
   expect(somethingWaits()).toBe(true);
@@ -75,7 +76,7 @@ it.each<[string, DeviceOwner, string[]]>([
     ]),
     everything,
   ],
-  ['they were taken out of a household', owner([{ id: mill, role: 'caretaker' }]), ['of another program']],
+  ['they were taken out of one household of two', owner([{ id: mill, role: 'caretaker' }]), whatWaits],
   ['they belong nowhere', owner([]), ['of another program']],
   [
     'their role fell',
@@ -83,10 +84,10 @@ it.each<[string, DeviceOwner, string[]]>([
       { id: larches, role: 'caretaker' },
       { id: mill, role: 'caretaker' },
     ]),
-    ['of another program'],
+    whatWaits,
   ],
   ['somebody else uses the device', owner(both!.households as never, 'otto'), ['of another program']],
-  ['they were signed out', null, [...unsent, 'of another program'].toSorted()],
+  ['they were signed out', null, whatWaits],
 ])('when %s', async (_, now, left) => {
   await settleDevice(both);
   expect(kept()).toEqual(everything);
@@ -98,7 +99,7 @@ it('keeps what somebody could not send until they are back, and not for anybody 
   await settleDevice(both);
   await settleDevice(null);
   await settleDevice(both);
-  expect(kept()).toEqual([...unsent, 'of another program'].toSorted());
+  expect(kept()).toEqual(whatWaits);
   await settleDevice(null);
   await settleDevice(owner([{ id: larches, role: 'owner' }], 'otto'));
   expect(kept()).toEqual(['of another program']);
@@ -128,7 +129,7 @@ it('forgets, the memory of the page too, when the server no longer knows who is 
   vi.stubGlobal('fetch', answering(401, 'signed-out'));
   await expect(fetchJson('/api/week', { parse: (value) => value })).rejects.toMatchObject({ code: 'signed-out' });
   await waitFor(() => expect(client.getQueryData(['week'])).toBeUndefined());
-  expect(kept()).toEqual([...unsent, 'of another program'].toSorted());
+  expect(kept()).toEqual(whatWaits);
 });
 
 it.each([
